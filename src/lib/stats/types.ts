@@ -1,0 +1,251 @@
+/** Shot counts summed over shots: what most experiments publish. */
+export interface Histogram {
+  kind: 'histogram';
+  /** `[count, shots]`, counts ascending and distinct, shots ≥ 1 (zeros may be kept; they change nothing). */
+  counts: [number, number][];
+  /** A closing row such as "10+": `shots` shots had count ≥ `from`. `from` exceeds every listed count. */
+  lump: { from: number; shots: number } | null;
+}
+
+/** One count a shot in the order taken; `batches[i]` names the batch of shot i. */
+export interface ShotList {
+  kind: 'shots';
+  shots: number[] | Uint32Array;
+  batches: string[] | null;
+}
+
+export type CountData = Histogram | ShotList;
+
+export type Unit = 'defect' | 'pair';
+export type Geometry = 'sites' | 'open-bonds' | 'ring-bonds';
+
+/** What the person says about the experiment, and how hard to look. */
+export interface DiagnoseOptions {
+  /** Largest possible count N (sites, bonds or modes); null when unknown or unbounded. */
+  trials: number | null;
+  /** `pair`: counts are even, and n/2 out of N/2 is tested. */
+  unit: Unit;
+  /** Level of the answer, 0 < α < 1; 0.01 by default. */
+  alpha: number;
+  /** Excess of variance over the ceiling that would matter, as a fraction; 0.1 by default. */
+  tolerance: number;
+  /** Resampled histograms at most; 1999 by default. */
+  resamples: number;
+  /** Seed of every random draw, an integer 0 … 2^32 − 1. */
+  seed: number;
+  /** Probability that one site is misread; null when not stated. */
+  misread: number | null;
+  geometry: Geometry;
+  /** A law to compare with: one probability per trial; null for none. */
+  supplied: number[] | null;
+}
+
+/** A value with its 95 % interval; `low`/`high` null where the data set no limit. */
+export interface Interval {
+  value: number | null;
+  low: number | null;
+  high: number | null;
+}
+
+/** `trials` trials that share the probability `p`. */
+export interface Level {
+  p: number;
+  trials: number;
+}
+
+/** A Poisson-binomial law by its distinct probabilities, with a Poisson part when N is unknown. */
+export interface Law {
+  levels: Level[];
+  /** Mean γ of the Poisson part, G(z) = e^{γ(z−1)} Π(1−p+pz); 0 when N is known. */
+  poissonPart: number;
+}
+
+export type TestId =
+  'ceiling' | 'fit' | 'high-tail' | 'low-tail' | 'parity' | 'empty-shots' | 'batches' | 'order';
+export type FlagId =
+  'bunching' | 'bursts' | 'coarsening' | 'pairing' | 'dead-shots' | 'drift' | 'misreads' | 'regular';
+export type ReferenceId = 'equal-trials' | 'rare-events' | 'gaussian' | 'landau-zener' | 'supplied';
+export type Verdict = 'compatible' | 'ruled-out' | 'undecided';
+
+export interface Reference {
+  id: ReferenceId;
+  logLikelihood: number;
+  /** KL(p̂ ‖ law), nats a shot; null when the law gives an observed count no probability. */
+  divergence: number | null;
+  aic: number;
+  /** Name → value of what was fitted, e.g. `{ p: 0.3377 }`. */
+  parameters: Record<string, number>;
+}
+
+export interface DistributionPoint {
+  count: number;
+  density: number | null;
+  shots: number;
+  /** h_n / S with its exact (Clopper–Pearson) 95 % interval, and the fitted probability. */
+  observed: number;
+  low: number;
+  high: number;
+  fitted: number;
+  /** True for the closing "n or more" row. */
+  lump: boolean;
+}
+
+export interface RatePoint {
+  count: number;
+  density: number | null;
+  /** −ln(h_n/S)/scale; null for a count never seen. */
+  empirical: number | null;
+  low: number;
+  high: number | null;
+  /** −ln f_n/scale of the fitted law; null where the law gives no probability. */
+  fitted: number | null;
+  /** Large-deviation limit I(n/N) of the fitted law. */
+  limit: number | null;
+  /** Central-limit parabola of the fitted mean and variance. */
+  gaussian: number | null;
+}
+
+export interface TailPoint {
+  count: number;
+  side: 'high' | 'low';
+  /** Shots with a count ≥ (high) or ≤ (low) `count`. */
+  shots: number;
+  observed: number;
+  low: number;
+  high: number;
+  fitted: number;
+  /** Bounds: Chernoff of the fitted law, Chernoff from the mean alone, Hoeffding's extremal tail. */
+  chernoff: number;
+  meanChernoff: number;
+  hoeffding: number;
+}
+
+export interface Certificate {
+  p: number;
+  side: 'high' | 'low';
+  /** Most telling count. */
+  count: number;
+  /** How many counts were tried on both sides together. */
+  thresholds: number;
+  /** Largest tail probability any independent-trial law with that mean allows at `count`. */
+  bound: number;
+  /** Shots seen in that tail. */
+  shots: number;
+  /** Unfavourable end of the interval for the mean that was used. */
+  mean: number;
+}
+
+export interface TestResult {
+  id: TestId;
+  statistic: number;
+  p: number;
+  /** Holm over the tests that ran. */
+  pAdjusted: number;
+  /** Smallest p this test could have shown. */
+  smallestP: number;
+  source: 'exact' | 'resampled' | 'permuted' | 'limit';
+  /** Resampled or permuted histograms drawn; fewer than asked when the sequential rule ended early. */
+  resamples: number;
+  stoppedEarly: boolean;
+}
+
+export interface Flag {
+  id: FlagId;
+  grade: 'shown' | 'hinted';
+  tests: TestId[];
+  statement: string;
+  /** How big, in words and numbers. */
+  size: string;
+  otherCauses: string[];
+  next: string[];
+}
+
+/** Everything a page, PDF, API answer or script needs. Plain JSON: numbers are finite or null. */
+export interface Diagnosis {
+  format: 'severalty.diagnosis/1';
+  engine: { version: string; seed: number; resamples: number; alpha: number; tolerance: number };
+  data: {
+    /** sha256 of the canonical histogram. */
+    digest: string;
+    shots: number;
+    trials: number | null;
+    unit: Unit;
+    geometry: Geometry;
+    misread: number | null;
+    /** As given; for unit `pair` everything after `data` counts pairs, n/2. */
+    counts: [number, number][];
+    lump: { from: number; shots: number } | null;
+    /** True when shot order was known; number of batches, or null. */
+    ordered: boolean;
+    batches: number | null;
+  };
+  moments: {
+    mean: Interval;
+    variance: Interval;
+    third: Interval;
+    fourth: Interval;
+    fano: Interval;
+    ceiling: number;
+    /** Unbiased variance over ceiling. */
+    dispersion: Interval;
+    criticalTrials: number | null;
+    pairCovariance: number | null;
+  };
+  fit: {
+    logLikelihood: number;
+    levels: Level[];
+    poissonPart: number;
+    divergence: number;
+    floor: number;
+    divergenceCorrected: number | null;
+    divergenceInterval: Interval;
+    gSquared: number;
+    shotsToNotice: number | null;
+    /** True when found and floor agree: the fit is then the global best. */
+    certified: boolean;
+    how: string;
+    references: Reference[];
+    /** References left out, and why. */
+    omitted: { id: ReferenceId; reason: string }[];
+  };
+  distribution: DistributionPoint[];
+  rate: {
+    /** Largest rate S shots can show, ln(S)/scale. */
+    horizon: number;
+    /** Above this rate the data say nothing at 95 %. */
+    silence: number;
+    /** N, or 1 when N is unknown (rates are then in nats a shot). */
+    scale: number;
+    points: RatePoint[];
+  };
+  tails: { points: TailPoint[]; certificate: Certificate | null };
+  tests: TestResult[];
+  /** Tests that did not run, and why. */
+  notRun: { id: TestId; reason: string }[];
+  flags: Flag[];
+  answer: {
+    verdict: Verdict;
+    statement: string;
+    because: string[];
+    /** Smallest excess over the ceiling seen with 80 % power at 5 %, as a fraction of the ceiling. */
+    smallestExcess: number | null;
+    shotsToDecide: number | null;
+  };
+  cautions: string[];
+}
+
+/** Progress of one diagnosis: a share 0 … 1 and the step in hand. */
+export interface Progress {
+  share: number;
+  step: 'fit' | 'floor' | 'resampling' | 'shot order' | 'writing';
+}
+
+export type OnProgress = (progress: Progress) => void;
+
+/** Input that cannot be diagnosed. `reason` is plain words for the person who gave it. */
+export class BadInput extends Error {
+  constructor(readonly reason: string) {
+    super(reason);
+    this.name = 'BadInput';
+  }
+}
