@@ -1,7 +1,13 @@
+import { readdirSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vite';
 
-/** Bundles the command line tools for Node; packages in `dependencies` stay outside. */
+const folder = fileURLToPath(new URL('./src/cli/', import.meta.url));
+
+/**
+ * Bundles the command line tools for Node: every src/cli/NAME.ts becomes build-cli/NAME.js. Only the
+ * compiled database driver stays outside, so a command starts without reading node_modules.
+ */
 export default defineConfig({
   resolve: { alias: { $lib: fileURLToPath(new URL('./src/lib', import.meta.url)) } },
   build: {
@@ -11,14 +17,12 @@ export default defineConfig({
     copyPublicDir: false,
     target: 'node20',
     rollupOptions: {
-      input: {
-        start: 'src/cli/start.ts',
-        diagnose: 'src/cli/diagnose.ts',
-        seed: 'src/cli/seed.ts',
-        calibrate: 'src/cli/calibrate.ts',
-        bench: 'src/cli/bench.ts'
-      }
+      input: Object.fromEntries(
+        readdirSync(folder)
+          .filter((name) => name.endsWith('.ts'))
+          .map((name) => [name.slice(0, -3), `${folder}${name}`])
+      )
     }
   },
-  ssr: { noExternal: ['papaparse'], external: ['better-sqlite3'] }
+  ssr: { noExternal: true, external: ['better-sqlite3'] }
 });

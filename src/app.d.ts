@@ -1,9 +1,16 @@
+import type { Database } from '$lib/server/db/client';
+
 declare global {
   namespace App {
     interface Error {
       message: string;
+      /** Short name of what went wrong, for scripts. */
       code?: string;
+      /** Finds the entry in the log. */
       errorId?: string;
+    }
+    interface Locals {
+      db: Database;
     }
   }
 }

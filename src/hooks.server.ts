@@ -1,0 +1,15 @@
+import { building } from '$app/environment';
+import { database } from '$lib/server/application';
+import { reportError } from '$lib/server/handles/report-error';
+import { securityHeaders } from '$lib/server/handles/security-headers';
+import { withDatabase } from '$lib/server/handles/with-database';
+import type { ServerInit } from '@sveltejs/kit';
+import { sequence } from '@sveltejs/kit/hooks';
+
+export const init: ServerInit = () => {
+  if (!building) database();
+};
+
+export const handle = sequence(securityHeaders, withDatabase);
+
+export const handleError = reportError;

@@ -1,0 +1,23 @@
+import { databaseFile, openDatabase, type Database } from './db/client';
+import { migrateDatabase } from './db/migrate';
+import { readEnv } from './env';
+import { seedSamples } from './services/seed-samples';
+
+let open: Database | null = null;
+
+/**
+ * The database of this process: opened, migrated and given its samples at the first call, closed when the
+ * server shuts down. Called by `init` in hooks.server.ts, so trouble shows at start and not at a request.
+ */
+export function database(): Database {
+  if (open) return open;
+  const db = openDatabase(databaseFile(readEnv().SEVERALTY_DATA));
+  migrateDatabase(db);
+  seedSamples(db);
+  process.once('sveltekit:shutdown', () => {
+    db.$client.close();
+    open = null;
+  });
+  open = db;
+  return db;
+}

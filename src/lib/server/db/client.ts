@@ -1,0 +1,30 @@
+import Connection from 'better-sqlite3';
+import { drizzle, type BetterSQLite3Database } from 'drizzle-orm/better-sqlite3';
+import { mkdirSync } from 'node:fs';
+import { join } from 'node:path';
+import * as schema from './schema';
+
+export type Database = BetterSQLite3Database<typeof schema> & { $client: Connection.Database };
+
+/** Milliseconds a writer waits for another one (a second process, a backup) before SQLITE_BUSY. */
+const BUSY_TIMEOUT = 5_000;
+
+/** Path of the database file in a data folder, which is made when missing. */
+export function databaseFile(folder: string): string {
+  mkdirSync(folder, { recursive: true });
+  return join(folder, 'severalty.sqlite');
+}
+
+/**
+ * Opens a database without migrating it.
+ *
+ * @param file path, or ':memory:' for a database of its own that is gone when closed
+ */
+export function openDatabase(file: string): Database {
+  const connection = new Connection(file, { timeout: BUSY_TIMEOUT });
+  connection.pragma('journal_mode = WAL');
+  // With WAL, NORMAL can lose the last transactions at a power cut but never corrupts the file.
+  connection.pragma('synchronous = NORMAL');
+  connection.pragma('foreign_keys = ON');
+  return drizzle(connection, { schema });
+}
