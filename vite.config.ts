@@ -6,9 +6,36 @@ export default defineConfig({
   plugins: [tailwindcss(), sveltekit()],
   worker: { format: 'es' },
   test: {
-    include: ['tests/**/*.test.ts'],
-    // Two cores: browser tests start a server each, and statistics tests are long.
-    testTimeout: 60_000,
-    hookTimeout: 120_000
+    // Two cores, so two groups one after the other: the long statistics tests share both cores; a browser
+    // test has them to itself, since its browser, its server and its worker want more than one already.
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: 'statistics',
+          include: ['tests/unit/**/*.test.ts', 'tests/reference/**/*.test.ts'],
+          environment: 'node',
+          pool: 'forks',
+          maxWorkers: 2,
+          testTimeout: 60_000,
+          hookTimeout: 120_000,
+          sequence: { groupOrder: 0 }
+        }
+      },
+      {
+        extends: true,
+        test: {
+          name: 'browser',
+          include: ['tests/e2e/**/*.test.ts'],
+          environment: 'node',
+          globalSetup: ['tests/e2e/support/unpack-browser.ts'],
+          pool: 'forks',
+          maxWorkers: 1,
+          testTimeout: 60_000,
+          hookTimeout: 120_000,
+          sequence: { groupOrder: 1 }
+        }
+      }
+    ]
   }
 });
