@@ -1,0 +1,26 @@
+import { tailFrom } from './log-likelihood';
+import type { Workspace } from './workspace';
+
+/** Fills the workspace's ∂L/∂f and −∂²L/∂f² of each cell for the pmf it holds. */
+export function cellWeights(space: Workspace): void {
+  const { data, f, single, double } = space;
+  const { shots } = data;
+  const shift = data.first - space.first;
+  for (let i = 0; i < shots.length; i++) {
+    if (shots[i] === 0) continue;
+    const over = 1 / f[i + shift];
+    single[i] = shots[i] * over;
+    double[i] = single[i] * over;
+  }
+  space.lumpSingle = space.lumpDouble = space.emptySingle = space.emptyDouble = 0;
+  if (data.lump) {
+    const tail = tailFrom(space, data.lump.from);
+    space.lumpSingle = data.lump.shots / tail;
+    space.lumpDouble = space.lumpSingle / tail;
+  }
+  if (data.withoutEmpty && space.first === 0) {
+    // −S ln(1 − f_0) is convex in f_0, hence the sign of its second derivative.
+    space.emptySingle = data.total / (1 - f[0]);
+    space.emptyDouble = -space.emptySingle / (1 - f[0]);
+  }
+}

@@ -1,0 +1,152 @@
+import { symmetricEigen } from '../numerics/symmetric-eigen';
+import { logLikelihood } from './log-likelihood';
+import { slopes, type Slopes } from './slopes';
+import { copyLevels, type TrialLevels } from './trial-levels';
+import type { Workspace } from './workspace';
+
+const most = 60;
+/** Steps before a climb may be given up for falling short of its bar. */
+const patience = 1;
+
+/** Where a climb ended. */
+export interface Climb {
+  levels: TrialLevels;
+  value: number;
+  slopes: Slopes;
+  steps: number;
+}
+
+/** No angle moves further than this in a step: beyond, the quadratic picture of the likelihood is no guide. */
+const longest = 0.35;
+
+/**
+ * Newton's method on the levels with fixed multiplicities, in angles p = sin²φ, γ = ψ², with the exact
+ * Hessian and its eigenvalues taken by size, so that saddles repel (Dauphin et al. 2014).
+ *
+ * In angles the ends 0 and 1 are ordinary points: a level that wants to be there arrives quadratically
+ * and is absorbed; two levels that want to be one arrive likewise and are merged.
+ *
+ * @param enough stop when the step in hand promises less than this many nats
+ * @param bar give up once two steps have been made and twice the promise of the next does not reach this
+ */
+export function climb(space: Workspace, from: TrialLevels, enough: number, bar = -Infinity): Climb {
+  let levels = from;
+  let value = logLikelihood(space, levels);
+  let slope = slopes(space, levels);
+  let steps = 0;
+  for (; steps < most; steps++) {
+    const step = newtonStep(levels, slope);
+    if (!(step.promise > enough) || (steps >= patience && value + 2 * step.promise < bar)) break;
+    const moved = forward(space, levels, step.angles, value);
+    if (!moved) break;
+    const gain = moved.value - value;
+    ({ levels, value } = tidy(space, moved.levels, moved.value));
+    slope = slopes(space, levels);
+    if (gain < enough / 10) break;
+  }
+  return { levels, value, slopes: slope, steps };
+}
+
+/** The longest of step, step/3, step/9 … that gains; null when none does. */
+function forward(space: Workspace, levels: TrialLevels, angles: Float64Array, value: number) {
+  for (let share = 1, tries = 0; tries < 12; tries++, share /= 3) {
+    const trial = turned(levels, angles, share);
+    const there = logLikelihood(space, trial);
+    if (there > value) return { levels: trial, value: there };
+  }
+  return null;
+}
+
+function newtonStep(levels: TrialLevels, slope: Slopes): { angles: Float64Array; promise: number } {
+  const { size, gradient, hessian } = slope;
+  const count = levels.p.length;
+  const first = new Float64Array(size);
+  const second = new Float64Array(size);
+  for (let j = 0; j < size; j++) {
+    // p = sin²φ: dp/dφ = 2√(p(1−p)), d²p/dφ² = 2(1−2p); γ = ψ²: 2√γ and 2.
+    first[j] = j < count ? 2 * Math.sqrt(levels.p[j] * (1 - levels.p[j])) : 2 * Math.sqrt(levels.poissonPart);
+    second[j] = j < count ? 2 * (1 - 2 * levels.p[j]) : 2;
+  }
+  const g = gradient.map((value, j) => value * first[j]);
+  const h = new Float64Array(size * size);
+  for (let j = 0; j < size; j++) {
+    for (let k = 0; k < size; k++) h[j * size + k] = hessian[j * size + k] * first[j] * first[k];
+    h[j * size + j] += gradient[j] * second[j];
+  }
+  const { values, vectors } = symmetricEigen(h, size);
+  let stiffest = 0;
+  for (const value of values) stiffest = Math.max(stiffest, Math.abs(value));
+  const angles = new Float64Array(size);
+  let promise = 0;
+  for (let k = 0; k < size; k++) {
+    let along = 0;
+    for (let j = 0; j < size; j++) along += vectors[j * size + k] * g[j];
+    let length = along / Math.max(Math.abs(values[k]), 1e-9 * stiffest, 1e-300);
+    length = Math.max(-longest, Math.min(longest, length));
+    promise += along * length * (values[k] < 0 ? 0.5 : 1);
+    for (let j = 0; j < size; j++) angles[j] += vectors[j * size + k] * length;
+  }
+  return { angles, promise };
+}
+
+function turned(levels: TrialLevels, angles: Float64Array, share: number): TrialLevels {
+  const out = copyLevels(levels);
+  for (let j = 0; j < out.p.length; j++) {
+    out.p[j] = Math.sin(Math.asin(Math.sqrt(out.p[j])) + share * angles[j]) ** 2;
+  }
+  if (levels.poissonPart > 0) {
+    // A step across zero would bounce: half-way there instead.
+    const root = Math.sqrt(levels.poissonPart);
+    out.poissonPart = Math.max(root / 2, root + share * angles[out.p.length]) ** 2;
+  }
+  return out;
+}
+
+/** Absorbs levels that have come to 0 or 1 and merges levels that have met, where that costs nothing. */
+function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: TrialLevels; value: number } {
+  let best = { levels, value };
+  let tried = false;
+  const attempt = (trial: TrialLevels) => {
+    tried = true;
+    const there = logLikelihood(space, trial);
+    if (there < best.value - 1e-9) return false;
+    best = { levels: trial, value: there };
+    return true;
+  };
+  for (let j = levels.p.length - 1; j >= 0; j--) {
+    const { p, trials } = best.levels;
+    if (p[j] * trials[j] < 1e-3) attempt(absorbed(best.levels, j, 'zeros'));
+    else if ((1 - p[j]) * trials[j] < 1e-3) attempt(absorbed(best.levels, j, 'ones'));
+  }
+  for (let j = 0; j < best.levels.p.length; j++) {
+    for (let k = best.levels.p.length - 1; k > j; k--) {
+      if (near(best.levels.p[j], best.levels.p[k])) attempt(merged(best.levels, j, k));
+    }
+  }
+  // The workspace must hold the pmf of what is returned.
+  if (tried) logLikelihood(space, best.levels);
+  return best;
+}
+
+/** Angles within 0.02 of each other. */
+function near(p: number, q: number): boolean {
+  return Math.abs(p - q) < 0.05 && Math.abs(Math.asin(Math.sqrt(p)) - Math.asin(Math.sqrt(q))) < 0.02;
+}
+
+function absorbed(levels: TrialLevels, j: number, into: 'zeros' | 'ones'): TrialLevels {
+  const out = copyLevels(levels);
+  out[into] += out.trials[j];
+  out.p.splice(j, 1);
+  out.trials.splice(j, 1);
+  return out;
+}
+
+function merged(levels: TrialLevels, j: number, k: number): TrialLevels {
+  const out = copyLevels(levels);
+  const trials = out.trials[j] + out.trials[k];
+  out.p[j] = (out.p[j] * out.trials[j] + out.p[k] * out.trials[k]) / trials;
+  out.trials[j] = trials;
+  out.p.splice(k, 1);
+  out.trials.splice(k, 1);
+  return out;
+}

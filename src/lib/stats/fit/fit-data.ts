@@ -1,0 +1,30 @@
+import type { Histogram } from '../types';
+
+/** What the likelihood of a law is computed from. */
+export interface FitData {
+  trials: number | null;
+  /** Count of shots[0]. */
+  first: number;
+  /** Shots at counts first, first+1, … last seen; inner zeros kept. */
+  shots: Float64Array;
+  /** A closing row "from or more", or null. */
+  lump: { from: number; shots: number } | null;
+  /** All shots that enter, the lump included. */
+  total: number;
+  /** True: shots with count 0 were set aside and the law is conditioned on n ≥ 1. */
+  withoutEmpty: boolean;
+}
+
+/** A histogram as dense arrays from the first to the last count seen; `withoutEmpty` sets count 0 aside. */
+export function fitData(histogram: Histogram, trials: number | null, withoutEmpty = false): FitData {
+  const rows = histogram.counts.filter(([count, shots]) => shots > 0 && !(withoutEmpty && count === 0));
+  const first = rows.length > 0 ? rows[0][0] : (histogram.lump?.from ?? 0);
+  const last = rows.length > 0 ? rows[rows.length - 1][0] : first - 1;
+  const shots = new Float64Array(last - first + 1);
+  let total = histogram.lump?.shots ?? 0;
+  for (const [count, seen] of rows) {
+    shots[count - first] += seen;
+    total += seen;
+  }
+  return { trials, first, shots, lump: histogram.lump, total, withoutEmpty };
+}

@@ -1,0 +1,49 @@
+import { climb, type Climb } from './climb';
+import { moves } from './moves';
+import { transfers } from './transfers';
+import type { TrialLevels } from './trial-levels';
+import type { Workspace } from './workspace';
+
+/** How thorough a search is, in nats. */
+export interface Effort {
+  /** A climb ends when its next step promises less. */
+  enough: number;
+  /** Structural moves that promise or bring less are not made. */
+  worth: number;
+  /** Rounds of structural moves at most. */
+  rounds: number;
+  /** Whether trials are passed between levels when no other move pays. */
+  transfers: boolean;
+}
+
+/** Climbs from a start, then makes the structural moves that pay until none does. */
+export function search(space: Workspace, start: TrialLevels, effort: Effort): Climb {
+  let best = climb(space, start, effort.enough);
+  for (let round = 0; round < effort.rounds; round++) {
+    const next = improved(space, best, effort);
+    if (!next) break;
+    best = next;
+  }
+  return best;
+}
+
+function improved(space: Workspace, best: Climb, effort: Effort): Climb | null {
+  for (const move of moves(best.levels, best.slopes, effort.worth)) {
+    const found = bestOf(space, move.starts, effort, best.value);
+    if (found && found.value > best.value + effort.worth / 2) return found;
+  }
+  if (effort.transfers) {
+    const found = bestOf(space, transfers(best.levels), effort, best.value);
+    if (found && found.value > best.value + effort.worth) return found;
+  }
+  return null;
+}
+
+function bestOf(space: Workspace, starts: TrialLevels[], effort: Effort, bar: number): Climb | null {
+  let best: Climb | null = null;
+  for (const start of starts) {
+    const found = climb(space, start, effort.enough, Math.max(bar, best?.value ?? bar));
+    if (!best || found.value > best.value) best = found;
+  }
+  return best;
+}

@@ -1,0 +1,55 @@
+/**
+ * Eigenvalues and eigenvectors of a small symmetric matrix by cyclic Jacobi rotations.
+ *
+ * @param matrix size × size, row by row; not changed
+ * @returns values[k] with its vector in column k of `vectors` (row by row)
+ *
+ * Meant for at most a dozen rows, where it is as quick as anything and right to machine precision.
+ * Source: Golub & Van Loan, Matrix Computations, section 8.5 (from memory).
+ */
+export function symmetricEigen(
+  matrix: Float64Array,
+  size: number
+): { values: Float64Array; vectors: Float64Array } {
+  const a = matrix.slice();
+  const vectors = new Float64Array(size * size);
+  for (let i = 0; i < size; i++) vectors[i * size + i] = 1;
+  for (let sweep = 0; sweep < 30; sweep++) {
+    let off = 0;
+    let on = 0;
+    for (let i = 0; i < size; i++) {
+      on += a[i * size + i] ** 2;
+      for (let j = 0; j < i; j++) off += a[i * size + j] ** 2;
+    }
+    if (off <= 1e-28 * on) break;
+    for (let i = 0; i < size - 1; i++) for (let j = i + 1; j < size; j++) rotate(a, vectors, size, i, j);
+  }
+  const values = new Float64Array(size);
+  for (let i = 0; i < size; i++) values[i] = a[i * size + i];
+  return { values, vectors };
+}
+
+function rotate(a: Float64Array, vectors: Float64Array, size: number, i: number, j: number): void {
+  const between = a[i * size + j];
+  if (between === 0) return;
+  const ratio = (a[j * size + j] - a[i * size + i]) / (2 * between);
+  const tangent = Math.sign(ratio || 1) / (Math.abs(ratio) + Math.hypot(1, ratio));
+  const cosine = 1 / Math.hypot(1, tangent);
+  const sine = tangent * cosine;
+  for (let k = 0; k < size; k++) {
+    const x = a[k * size + i];
+    const y = a[k * size + j];
+    a[k * size + i] = cosine * x - sine * y;
+    a[k * size + j] = sine * x + cosine * y;
+  }
+  for (let k = 0; k < size; k++) {
+    const x = a[i * size + k];
+    const y = a[j * size + k];
+    a[i * size + k] = cosine * x - sine * y;
+    a[j * size + k] = sine * x + cosine * y;
+    const u = vectors[k * size + i];
+    const v = vectors[k * size + j];
+    vectors[k * size + i] = cosine * u - sine * v;
+    vectors[k * size + j] = sine * u + cosine * v;
+  }
+}
