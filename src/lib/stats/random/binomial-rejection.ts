@@ -1,5 +1,5 @@
+import { stirlingError } from '../numerics/stirling-error';
 import type { Generator } from './generator';
-import { stirlingRemainder } from './stirling-remainder';
 
 const HALF_LOG_TWO_PI = 0.9189385332046727;
 
@@ -52,8 +52,8 @@ function minusLog(n: number, p: number, mean: number, k: number): number {
     (n - k) * Math.log1p(-d / (n * (1 - p))) +
     HALF_LOG_TWO_PI +
     0.5 * Math.log(k * ((n - k) / n)) +
-    stirlingRemainder(k) +
-    stirlingRemainder(n - k) -
-    stirlingRemainder(n)
+    stirlingError(k) +
+    stirlingError(n - k) -
+    stirlingError(n)
   );
 }

@@ -1,5 +1,5 @@
+import { stirlingError } from '../numerics/stirling-error';
 import type { Generator } from './generator';
-import { stirlingRemainder } from './stirling-remainder';
 
 const HALF_LOG_TWO_PI = 0.9189385332046727;
 
@@ -59,5 +59,5 @@ function reject(generator: Generator, mean: number): number {
 function minusLog(mean: number, k: number): number {
   if (k === 0) return mean;
   const d = k - mean;
-  return k * Math.log1p(d / mean) - d + HALF_LOG_TWO_PI + 0.5 * Math.log(k) + stirlingRemainder(k);
+  return k * Math.log1p(d / mean) - d + HALF_LOG_TWO_PI + 0.5 * Math.log(k) + stirlingError(k);
 }
