@@ -1,28 +1,23 @@
 import { z } from 'zod';
 
-/** A whole number from text; an empty variable counts as not set. */
-const whole = (fallback: number, low: number, high: number) =>
-  z.preprocess(
-    (text) => (text === '' ? undefined : text),
-    z.coerce.number().int().min(low).max(high).default(fallback)
-  );
-
 const shape = z.object({
   /** Folder of the database; made when missing. */
   SEVERALTY_DATA: z.string().min(1).default('data'),
   /** 0: any free port. Not set: 4173, or the next free one. */
-  PORT: z.preprocess(
-    (text) => (text === '' ? undefined : text),
-    z.coerce.number().int().min(0).max(65535).optional()
-  ),
+  PORT: z.coerce.number().int().min(0).max(65535).optional(),
   /** Loopback by default: nobody else on the network sees the counts unless that is asked for. */
   HOST: z.string().min(1).default('127.0.0.1'),
   /** Address that people type, when a proxy stands in front. */
   ORIGIN: z.url({ protocol: /^https?$/ }).optional(),
   /** Bytes of a request body; adapter-node would take 512 kB. */
-  BODY_SIZE_LIMIT: whole(20_971_520, 1, 2 ** 31),
+  BODY_SIZE_LIMIT: z.coerce
+    .number()
+    .int()
+    .min(1)
+    .max(2 ** 31)
+    .default(20_971_520),
   /** Seconds that open connections get at shutdown; an open event stream would hold it for half a minute. */
-  SHUTDOWN_TIMEOUT: whole(3, 0, 600)
+  SHUTDOWN_TIMEOUT: z.coerce.number().int().min(0).max(600).default(3)
 });
 
 export type Env = z.infer<typeof shape>;
@@ -39,7 +34,9 @@ export class BadEnvironment extends Error {
  * @throws BadEnvironment naming each variable that does not fit
  */
 export function readEnv(source: Record<string, string | undefined> = process.env): Env {
-  const result = shape.safeParse(source);
+  // An empty variable counts as not set.
+  const given = Object.fromEntries(Object.entries(source).filter(([, text]) => text !== ''));
+  const result = shape.safeParse(given);
   if (result.success) return result.data;
   const lines = result.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`);
   throw new BadEnvironment(`These environment variables do not fit.\n${lines.join('\n')}`);
