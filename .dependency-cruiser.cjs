@@ -97,6 +97,9 @@ module.exports = {
     webpackConfig: { fileName: '.dependency-aliases.cjs' },
     tsPreCompilationDeps: true,
     doNotFollow: { path: 'node_modules' },
-    enhancedResolveOptions: { exportsFields: ['exports'], conditionNames: ['import', 'svelte', 'types', 'default'] }
+    enhancedResolveOptions: {
+      exportsFields: ['exports'],
+      conditionNames: ['import', 'svelte', 'types', 'default']
+    }
   }
 };

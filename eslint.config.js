@@ -4,7 +4,18 @@ import ts from 'typescript-eslint';
 import svelteConfig from './svelte.config.js';
 
 export default ts.config(
-  { ignores: ['.svelte-kit/', 'build/', 'build-cli/', 'node_modules/', 'fixtures/', 'drizzle/', 'data/', '**/*.cjs'] },
+  {
+    ignores: [
+      '.svelte-kit/',
+      'build/',
+      'build-cli/',
+      'node_modules/',
+      'fixtures/',
+      'drizzle/',
+      'data/',
+      '**/*.cjs'
+    ]
+  },
   ...ts.configs.recommended,
   ...svelte.configs.recommended,
   {
@@ -16,7 +27,7 @@ export default ts.config(
       eqeqeq: 'error'
     }
   },
-  { files: ['src/cli/**', 'tests/**'], rules: { 'no-console': 'off' } },
+  { files: ['src/cli/**', 'tests/**', '.ci/**'], rules: { 'no-console': 'off' } },
   {
     files: ['**/*.svelte', '**/*.svelte.ts'],
     languageOptions: { parserOptions: { parser: ts.parser, extraFileExtensions: ['.svelte'], svelteConfig } }

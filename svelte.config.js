@@ -6,6 +6,12 @@ export default {
   preprocess: vitePreprocess(),
   kit: {
     adapter: adapter(),
+    typescript: {
+      // Kit looks at .js, .ts and .svelte below src and tests; these are ours too.
+      config: (config) => {
+        config.include.push('../src/**/*.mjs', '../.ci/**/*.mjs', '../*.config.ts');
+      }
+    },
     csp: {
       mode: 'auto',
       directives: {

@@ -1,6 +1,8 @@
 /** Prints "N passed, N failed" from Vitest's JSON report; fails when there is no report or something failed. */
 import { readFileSync } from 'node:fs';
 
+/** @type {{ numPassedTests: number, numFailedTests: number, numPendingTests: number, numTodoTests: number,
+ *   testResults: { status: string, assertionResults: unknown[] }[] }} */
 let report;
 try {
   report = JSON.parse(readFileSync(process.argv[2], 'utf8'));
