@@ -1,0 +1,24 @@
+/**
+ * Zero of a concave function by Newton's method, for the ends of exact intervals.
+ *
+ * @param start where to begin
+ * @param f its value and derivative at x
+ * @returns the zero to about two units in the last place; NaN when f gives NaN
+ *
+ * On a concave function the step from any point lands where f ≤ 0, and all later steps move one way, so neither
+ * a bracket nor damping is needed. It ends once a step is below rounding or no longer shrinks.
+ */
+export function newtonOnTail(start: number, f: (x: number) => [value: number, derivative: number]): number {
+  let x = start;
+  let last = Infinity;
+  for (let count = 0; count < 100; count++) {
+    const [value, derivative] = f(x);
+    const step = value / derivative;
+    if (Number.isNaN(step)) return NaN;
+    x -= step;
+    const size = Math.abs(step);
+    if (size <= 2e-16 * Math.abs(x) || (count > 3 && size >= last && size < 1e-10 * Math.abs(x))) return x;
+    last = size;
+  }
+  return x;
+}
