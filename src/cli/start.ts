@@ -28,7 +28,7 @@ async function start(): Promise<void> {
   const server = createServer((request, response) => answer(request, response));
   const port = await listen(server, env.HOST, env.PORT);
   const address = env.ORIGIN ?? `http://${nameOf(env.HOST)}:${port}`;
-  stopCleanly(server, env.SHUTDOWN_TIMEOUT);
+  stopCleanly(server, env.SHUTDOWN_TIMEOUT, env.npm_lifecycle_event === 'start');
 
   process.env.ORIGIN = address;
   process.env.SEVERALTY_DATA = folder;

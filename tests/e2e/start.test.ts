@@ -50,6 +50,21 @@ describe('the start command', () => {
     expect(Date.now() - begin).toBeLessThan(5000);
   });
 
+  it('ends when npm, which started it, is told to stop', async () => {
+    const server = await startServer({}, ['npm', 'run', '--silent', '--ignore-scripts', 'start']);
+    await server.stop();
+    await expect
+      .poll(
+        () =>
+          fetch(server.address).then(
+            () => 'answers',
+            () => 'gone'
+          ),
+        { timeout: 5000 }
+      )
+      .toBe('gone');
+  });
+
   it('serves hashed files with the same protection as pages', async () => {
     const server = await startServer();
     const page = await (await fetch(server.address)).text();

@@ -17,7 +17,9 @@ const shape = z.object({
     .max(2 ** 31)
     .default(20_971_520),
   /** Seconds that open connections get at shutdown; an open event stream would hold it for half a minute. */
-  SHUTDOWN_TIMEOUT: z.coerce.number().int().min(0).max(600).default(3)
+  SHUTDOWN_TIMEOUT: z.coerce.number().int().min(0).max(600).default(3),
+  /** Set by npm: the script that it runs. */
+  npm_lifecycle_event: z.string().optional()
 });
 
 export type Env = z.infer<typeof shape>;

@@ -15,13 +15,21 @@ export interface RunningServer {
 /** Longest a start may take: migrating and loading take under a second, a busy machine ten times that. */
 const PATIENCE = 30_000;
 
-/** Starts what `npm start` starts, on a free port with a data folder of its own. */
-export async function startServer(env: Record<string, string> = {}): Promise<RunningServer> {
+/**
+ * Starts what `npm start` starts, on a free port with a data folder of its own.
+ *
+ * @param command the program and its arguments; the built start command unless a test is about another way in
+ */
+export async function startServer(
+  env: Record<string, string> = {},
+  [program, ...args] = [process.execPath, 'build-cli/start.js']
+): Promise<RunningServer> {
   const data = mkdtempSync(join(tmpdir(), 'severalty-'));
   const own = { ...process.env, PORT: '0', SEVERALTY_DATA: data, NODE_ENV: 'production', ...env };
   // Settings of the developer's own shell must not reach the tests.
-  for (const name of ['ORIGIN', 'HOST']) if (!(name in env)) delete (own as Record<string, unknown>)[name];
-  const child = spawn(process.execPath, ['build-cli/start.js'], {
+  for (const name of ['ORIGIN', 'HOST', 'npm_lifecycle_event'])
+    if (!(name in env)) delete (own as Record<string, unknown>)[name];
+  const child = spawn(program, args, {
     env: own,
     stdio: ['ignore', 'pipe', 'pipe']
   });
