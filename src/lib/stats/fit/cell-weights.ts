@@ -23,4 +23,19 @@ export function cellWeights(space: Workspace): void {
     space.emptySingle = data.total / (1 - f[0]);
     space.emptyDouble = -space.emptySingle / (1 - f[0]);
   }
+  bend(space);
+}
+
+/** Lays ∂L/∂f out over the window and two counts beyond, then differences it in place. */
+function bend(space: Workspace): void {
+  const { data, bent, single, length } = space;
+  bent.fill(0, 0, length + 2);
+  const shift = data.first - space.first;
+  for (let i = Math.max(0, -shift); i < single.length && i + shift < length + 2; i++)
+    bent[i + shift] = single[i];
+  if (data.lump) {
+    for (let k = Math.max(0, data.lump.from - space.first); k < length + 2; k++) bent[k] += space.lumpSingle;
+  }
+  if (space.emptySingle !== 0) bent[0] += space.emptySingle;
+  for (let k = 0; k < length; k++) bent[k] += bent[k + 2] - 2 * bent[k + 1];
 }

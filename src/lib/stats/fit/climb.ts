@@ -1,3 +1,4 @@
+import { solvePositive } from '../numerics/solve-positive';
 import { symmetricEigen } from '../numerics/symmetric-eigen';
 import { logLikelihood } from './log-likelihood';
 import { slopes, type Slopes } from './slopes';
@@ -12,7 +13,6 @@ const patience = 1;
 export interface Climb {
   levels: TrialLevels;
   value: number;
-  slopes: Slopes;
   steps: number;
 }
 
@@ -44,11 +44,11 @@ export function climb(space: Workspace, from: TrialLevels, enough: number, bar =
     slope = slopes(space, levels);
     if (gain < enough / 10) break;
   }
-  return { levels, value, slopes: slope, steps };
+  return { levels, value, steps };
 }
 
 /** The longest of step, step/3, step/9 … that gains; null when none does. */
-function forward(space: Workspace, levels: TrialLevels, angles: Float64Array, value: number) {
+function forward(space: Workspace, levels: TrialLevels, angles: number[], value: number) {
   for (let share = 1, tries = 0; tries < 12; tries++, share /= 3) {
     const trial = turned(levels, angles, share);
     const there = logLikelihood(space, trial);
@@ -57,39 +57,50 @@ function forward(space: Workspace, levels: TrialLevels, angles: Float64Array, va
   return null;
 }
 
-function newtonStep(levels: TrialLevels, slope: Slopes): { angles: Float64Array; promise: number } {
+function newtonStep(levels: TrialLevels, slope: Slopes): { angles: number[]; promise: number } {
   const { size, gradient, hessian } = slope;
   const count = levels.p.length;
-  const first = new Float64Array(size);
-  const second = new Float64Array(size);
+  const first = new Array<number>(size);
+  const second = new Array<number>(size);
   for (let j = 0; j < size; j++) {
     // p = sin²φ: dp/dφ = 2√(p(1−p)), d²p/dφ² = 2(1−2p); γ = ψ²: 2√γ and 2.
     first[j] = j < count ? 2 * Math.sqrt(levels.p[j] * (1 - levels.p[j])) : 2 * Math.sqrt(levels.poissonPart);
     second[j] = j < count ? 2 * (1 - 2 * levels.p[j]) : 2;
   }
   const g = gradient.map((value, j) => value * first[j]);
-  const h = new Float64Array(size * size);
+  const h = new Array<number>(size * size);
   for (let j = 0; j < size; j++) {
-    for (let k = 0; k < size; k++) h[j * size + k] = hessian[j * size + k] * first[j] * first[k];
-    h[j * size + j] += gradient[j] * second[j];
+    for (let k = 0; k < size; k++) h[j * size + k] = -hessian[j * size + k] * first[j] * first[k];
+    h[j * size + j] -= gradient[j] * second[j];
+  }
+  return steepest(h, g, size);
+}
+
+/** −H⁻¹g where H is negative definite and the step short; else along its eigenvectors, each kept short. */
+function steepest(h: number[], g: number[], size: number): { angles: number[]; promise: number } {
+  const newton = solvePositive(h, size, g);
+  if (newton && newton.every((angle) => Math.abs(angle) < longest)) {
+    let promise = 0;
+    for (let j = 0; j < size; j++) promise += 0.5 * newton[j] * g[j];
+    return { angles: newton, promise };
   }
   const { values, vectors } = symmetricEigen(h, size);
   let stiffest = 0;
   for (const value of values) stiffest = Math.max(stiffest, Math.abs(value));
-  const angles = new Float64Array(size);
+  const angles = new Array<number>(size).fill(0);
   let promise = 0;
   for (let k = 0; k < size; k++) {
     let along = 0;
     for (let j = 0; j < size; j++) along += vectors[j * size + k] * g[j];
     let length = along / Math.max(Math.abs(values[k]), 1e-9 * stiffest, 1e-300);
     length = Math.max(-longest, Math.min(longest, length));
-    promise += along * length * (values[k] < 0 ? 0.5 : 1);
+    promise += along * length * (values[k] > 0 ? 0.5 : 1);
     for (let j = 0; j < size; j++) angles[j] += vectors[j * size + k] * length;
   }
   return { angles, promise };
 }
 
-function turned(levels: TrialLevels, angles: Float64Array, share: number): TrialLevels {
+function turned(levels: TrialLevels, angles: number[], share: number): TrialLevels {
   const out = copyLevels(levels);
   for (let j = 0; j < out.p.length; j++) {
     out.p[j] = Math.sin(Math.asin(Math.sqrt(out.p[j])) + share * angles[j]) ** 2;
@@ -135,6 +146,7 @@ function near(p: number, q: number): boolean {
 
 function absorbed(levels: TrialLevels, j: number, into: 'zeros' | 'ones'): TrialLevels {
   const out = copyLevels(levels);
+  if (into === 'zeros' && out.poissonPart > 0) out.poissonPart += out.p[j] * out.trials[j];
   out[into] += out.trials[j];
   out.p.splice(j, 1);
   out.trials.splice(j, 1);

@@ -1,6 +1,9 @@
 import { solveSymmetric } from '../numerics/solve-symmetric';
-import type { Pull, Slopes } from './slopes';
+import { logLikelihood } from './log-likelihood';
+import { pulls, type Pull } from './pulls';
+import { slopes, type Slopes } from './slopes';
 import { copyLevels, type TrialLevels } from './trial-levels';
+import type { Workspace } from './workspace';
 
 /** A change of structure that the slopes promise to pay, and the levels to climb from. */
 export interface Move {
@@ -16,18 +19,21 @@ export interface Move {
  * point is a local maximum among all N probabilities, and no move of two trials improves it (the
  * likelihood is concave in the sum and the product of any pair).
  */
-export function moves(levels: TrialLevels, slope: Slopes, worth: number): Move[] {
+export function moves(space: Workspace, levels: TrialLevels, worth: number): Move[] {
   const out: Move[] = [];
+  logLikelihood(space, levels);
+  const slope = slopes(space, levels);
+  const wants = pulls(space, levels, slope);
   const add = (pull: Pull | null, make: (size: number) => TrialLevels[]) => {
     if (!pull || !(pull.slope > 0)) return;
     const weight = afterOthersFollow(pull, slope);
     const promise = pull.slope ** 2 / (2 * weight);
     if (promise > worth) out.push({ promise, starts: make(pull.slope / weight) });
   };
-  add(slope.leaveZero, (x) => leave(levels, x, 'zeros'));
-  add(slope.leaveOne, (x) => leave(levels, x, 'ones'));
-  slope.split.forEach((pull, j) => add(pull, (x) => split(levels, j, 2 * x)));
-  add(slope.poissonSplit, (x) => harden(levels, 2 * x));
+  add(wants.leaveZero, (x) => leave(levels, x, 'zeros'));
+  add(wants.leaveOne, (x) => leave(levels, x, 'ones'));
+  wants.split.forEach((pull, j) => add(pull, (x) => split(levels, j, 2 * x)));
+  add(wants.poissonSplit, (x) => harden(levels, 2 * x));
   return out.sort((a, b) => b.promise - a.promise);
 }
 

@@ -28,12 +28,13 @@ export function search(space: Workspace, start: TrialLevels, effort: Effort): Cl
 }
 
 function improved(space: Workspace, best: Climb, effort: Effort): Climb | null {
-  for (const move of moves(best.levels, best.slopes, effort.worth)) {
+  for (const move of moves(space, best.levels, effort.worth)) {
     const found = bestOf(space, move.starts, effort, best.value);
     if (found && found.value > best.value + effort.worth / 2) return found;
   }
-  if (effort.transfers) {
-    const found = bestOf(space, transfers(best.levels), effort, best.value);
+  if (!effort.transfers) return null;
+  for (let size = largestTransfer(best.levels); size >= 1; size = size >> 2) {
+    const found = bestOf(space, transfers(best.levels, size), effort, best.value);
     if (found && found.value > best.value + effort.worth) return found;
   }
   return null;
@@ -46,4 +47,10 @@ function bestOf(space: Workspace, starts: TrialLevels[], effort: Effort, bar: nu
     if (!best || found.value > best.value) best = found;
   }
   return best;
+}
+
+/** An eighth of the largest level, as a power of 4: large laws would otherwise crawl one trial at a time. */
+function largestTransfer(levels: TrialLevels): number {
+  const most = Math.max(levels.ones, ...levels.trials) / 8;
+  return most < 4 ? 1 : 4 ** Math.floor(Math.log(most) / Math.log(4));
 }

@@ -1,6 +1,5 @@
-import { binomialWindow } from '../laws/binomial-window';
 import { poissonWindow } from '../laws/poisson-window';
-import type { Window } from '../laws/window';
+import { binomialInto } from './binomial-into';
 import type { TrialLevels } from './trial-levels';
 import { reserve, type Workspace } from './workspace';
 
@@ -20,10 +19,16 @@ export function spreadLaw(space: Workspace, levels: TrialLevels, trim: number): 
     if (levels.trials[j] <= fewTrials) addTrials(space, levels.p[j], levels.trials[j]);
   }
   for (let j = 0; j < levels.p.length; j++) {
-    if (levels.trials[j] > fewTrials)
-      addWindow(space, binomialWindow(levels.trials[j], levels.p[j], trim, 1), trim);
+    if (levels.trials[j] <= fewTrials) continue;
+    const [first, length] = binomialInto(space, levels.trials[j], levels.p[j], trim);
+    addPart(space, first, length, trim);
   }
-  if (levels.poissonPart > 0) addWindow(space, poissonWindow(levels.poissonPart, trim, 1), trim);
+  if (levels.poissonPart > 0) {
+    const window = poissonWindow(levels.poissonPart, trim, 1);
+    reserve(space, window.values.length);
+    space.part.set(window.values);
+    addPart(space, window.first, window.values.length, trim);
+  }
 }
 
 function addTrials(space: Workspace, p: number, trials: number): void {
@@ -38,24 +43,21 @@ function addTrials(space: Workspace, p: number, trials: number): void {
   }
 }
 
-function addWindow(space: Workspace, window: Window, trim: number): void {
-  const { values } = window;
-  const length = space.length + values.length - 1;
+/** Convolves space.part (`count` values from `from`) into space.f. */
+function addPart(space: Workspace, from: number, count: number, trim: number): void {
+  const length = space.length + count - 1;
   reserve(space, length);
-  const { f, spare } = space;
-  const own = space.length;
-  spare.fill(0, 0, length);
-  if (own < values.length) {
-    for (let k = 0; k < own; k++) {
-      const weight = f[k];
-      for (let n = 0; n < values.length; n++) spare[n + k] += weight * values[n];
-    }
-  } else {
-    for (let k = 0; k < values.length; k++) {
-      const weight = values[k];
-      for (let n = 0; n < own; n++) spare[n + k] += weight * f[n];
-    }
+  const { f, spare, part } = space;
+  if (space.length === 1) {
+    const weight = f[0];
+    for (let n = 0; n < count; n++) f[n] = weight * part[n];
+    space.first += from;
+    space.length = count;
+    return;
   }
+  spare.fill(0, 0, length);
+  if (space.length < count) spread(f, space.length, part, count, spare);
+  else spread(part, count, f, space.length, spare);
   let largest = 0;
   for (let n = 0; n < length; n++) if (spare[n] > largest) largest = spare[n];
   const least = trim * largest;
@@ -64,6 +66,40 @@ function addWindow(space: Workspace, window: Window, trim: number): void {
   while (spare[start] <= least) start++;
   while (spare[end - 1] <= least) end--;
   f.set(spare.subarray(start, end));
-  space.first += window.first + start;
+  space.first += from + start;
   space.length = end - start;
+}
+
+/** sums[n + k] += short[k]·long[n]. Four weights a pass: each long value and each sum is then touched a quarter as often. */
+function spread(
+  short: Float64Array,
+  few: number,
+  long: Float64Array,
+  many: number,
+  sums: Float64Array
+): void {
+  let k = 0;
+  for (; k + 4 <= few; k += 4) {
+    const a = short[k];
+    const b = short[k + 1];
+    const c = short[k + 2];
+    const d = short[k + 3];
+    let one = 0;
+    let two = 0;
+    let three = 0;
+    for (let n = 0; n < many; n++) {
+      const here = long[n];
+      sums[n + k] += a * here + b * one + c * two + d * three;
+      three = two;
+      two = one;
+      one = here;
+    }
+    sums[many + k] += b * one + c * two + d * three;
+    sums[many + k + 1] += c * one + d * two;
+    sums[many + k + 2] += d * one;
+  }
+  for (; k < few; k++) {
+    const weight = short[k];
+    for (let n = 0; n < many; n++) sums[n + k] += weight * long[n];
+  }
 }

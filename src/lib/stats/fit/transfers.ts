@@ -1,23 +1,22 @@
 import { copyLevels, type TrialLevels } from './trial-levels';
 
 /**
- * Neighbours in the whole-number part of a law: trials pass between levels next to each other, the sure
- * and the impossible trials counting as levels. Multiplicities are integers, so these are the steps that no
- * slope shows. One trial passes each way, and as many as exchange the two multiplicities (where two
- * maxima lie close, they mostly differ so).
+ * Neighbours in the whole-number part of a law: `size` trials pass between levels next to each other, either
+ * way, the sure and the impossible trials counting as levels. Multiplicities are integers, so these are the
+ * steps that no slope shows. With size 1 come those that exchange two multiplicities: where two maxima lie
+ * close, they mostly differ so.
  */
-export function transfers(levels: TrialLevels): TrialLevels[] {
+export function transfers(levels: TrialLevels, size: number): TrialLevels[] {
   const order = levels.p.map((_, j) => j).sort((a, b) => levels.p[b] - levels.p[a]);
   // Pool −1 is "ones", pool J is "zeros".
   const pools = [...(levels.ones > 0 ? [-1] : []), ...order, ...(levels.zeros > 0 ? [levels.p.length] : [])];
   const out: TrialLevels[] = [];
   for (let i = 0; i + 1 < pools.length; i++) {
     const [a, b] = [pools[i], pools[i + 1]];
-    const sizes = new Set([1, -1]);
-    const inner = a >= 0 && b < levels.p.length;
-    if (inner) sizes.add(levels.trials[a] - levels.trials[b]);
-    for (const size of sizes) {
-      const next = size === 0 ? null : passed(levels, a, b, size);
+    const sizes = new Set([size, -size]);
+    if (size === 1 && a >= 0 && b < levels.p.length) sizes.add(levels.trials[a] - levels.trials[b]);
+    for (const passing of sizes) {
+      const next = passing === 0 ? null : passed(levels, a, b, passing);
       if (next) out.push(next);
     }
   }

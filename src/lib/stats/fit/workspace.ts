@@ -15,10 +15,15 @@ export interface Workspace {
   part: Float64Array;
   g: Float64Array;
   gg: Float64Array;
-  step: Float64Array;
+  /** Change of each cell with each level; see slopes. */
+  tangents: Float64Array[];
+  /** Change of each cell with a move; see pulls. */
+  change: Float64Array;
   /** ∂L/∂f and −∂²L/∂f² of single cells, by data.shots index. */
   single: Float64Array;
   double: Float64Array;
+  /** Second difference w_n − 2w_{n+1} + w_{n+2} of ∂L/∂f over the window: Σ w (u²g) = Σ bent·g. */
+  bent: Float64Array;
   lumpSingle: number;
   lumpDouble: number;
   emptySingle: number;
@@ -27,9 +32,10 @@ export interface Workspace {
 
 /** Buffers for a histogram; they grow when a law needs more room. */
 export function workspace(data: FitData): Workspace {
-  const out = { data, first: 0, length: 0 } as Workspace;
+  const out = { data, first: 0, length: 0, tangents: [] as Float64Array[] } as Workspace;
   out.single = new Float64Array(data.shots.length);
   out.double = new Float64Array(data.shots.length);
+  out.change = new Float64Array(data.shots.length + 2);
   reserve(out, 64);
   return out;
 }
@@ -42,8 +48,10 @@ export function reserve(space: Workspace, length: number): void {
   if (space.f) f.set(space.f.subarray(0, space.length));
   space.f = f;
   space.spare = new Float64Array(capacity);
-  space.part = new Float64Array(capacity);
+  const part = new Float64Array(capacity);
+  if (space.part) part.set(space.part);
+  space.part = part;
   space.g = new Float64Array(capacity);
   space.gg = new Float64Array(capacity);
-  space.step = new Float64Array(capacity);
+  space.bent = new Float64Array(capacity + 2);
 }

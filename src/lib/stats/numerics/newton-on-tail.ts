@@ -6,7 +6,8 @@
  * @returns the zero to about two units in the last place; NaN when f gives NaN
  *
  * On a concave function the step from any point lands where f ≤ 0, and all later steps move one way, so neither
- * a bracket nor damping is needed. It ends once a step is below rounding or no longer shrinks.
+ * a bracket nor damping is needed; only a start where f is all but flat would be thrown beyond the range of
+ * doubles. It ends once a step is below rounding or no longer shrinks.
  */
 export function newtonOnTail(start: number, f: (x: number) => [value: number, derivative: number]): number {
   let x = start;

@@ -2,9 +2,9 @@
  * Solves A x = b for a small symmetric positive semidefinite A (size × size, row by row) by Cholesky
  * factors. Directions in which A is nothing (pivot under 1e-12 of its diagonal) get x = 0.
  */
-export function solveSymmetric(matrix: Float64Array, size: number, right: Float64Array): Float64Array {
-  const lower = new Float64Array(size * size);
-  const x = new Float64Array(size);
+export function solveSymmetric(matrix: ArrayLike<number>, size: number, right: ArrayLike<number>): number[] {
+  const lower = new Array<number>(size * size).fill(0);
+  const x = new Array<number>(size).fill(0);
   for (let i = 0; i < size; i++) {
     for (let j = 0; j <= i; j++) {
       let sum = matrix[i * size + j];

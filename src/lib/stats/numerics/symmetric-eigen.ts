@@ -8,11 +8,11 @@
  * Source: Golub & Van Loan, Matrix Computations, section 8.5 (from memory).
  */
 export function symmetricEigen(
-  matrix: Float64Array,
+  matrix: ArrayLike<number>,
   size: number
-): { values: Float64Array; vectors: Float64Array } {
-  const a = matrix.slice();
-  const vectors = new Float64Array(size * size);
+): { values: number[]; vectors: number[] } {
+  const a = Array.from(matrix);
+  const vectors = new Array<number>(size * size).fill(0);
   for (let i = 0; i < size; i++) vectors[i * size + i] = 1;
   for (let sweep = 0; sweep < 30; sweep++) {
     let off = 0;
@@ -21,15 +21,15 @@ export function symmetricEigen(
       on += a[i * size + i] ** 2;
       for (let j = 0; j < i; j++) off += a[i * size + j] ** 2;
     }
-    if (off <= 1e-28 * on) break;
+    if (off <= 1e-24 * on) break;
     for (let i = 0; i < size - 1; i++) for (let j = i + 1; j < size; j++) rotate(a, vectors, size, i, j);
   }
-  const values = new Float64Array(size);
+  const values = new Array<number>(size).fill(0);
   for (let i = 0; i < size; i++) values[i] = a[i * size + i];
   return { values, vectors };
 }
 
-function rotate(a: Float64Array, vectors: Float64Array, size: number, i: number, j: number): void {
+function rotate(a: number[], vectors: number[], size: number, i: number, j: number): void {
   const between = a[i * size + j];
   if (between === 0) return;
   const ratio = (a[j * size + j] - a[i * size + i]) / (2 * between);

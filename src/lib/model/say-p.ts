@@ -1,0 +1,1 @@
+export { sayHowOften, sayP } from '$lib/stats/words/say-p';

@@ -1,0 +1,51 @@
+import { alike, starts } from './starts';
+import type { FitData } from './fit-data';
+import { sampleMoments } from './sample-moments';
+import { search, type Effort } from './search';
+import type { TrialLevels } from './trial-levels';
+import { workspace } from './workspace';
+
+/** The best law found, and how. */
+export interface BestLaw {
+  levels: TrialLevels;
+  /** Σ h_n ln f_n and its like for lumps and set-aside empty shots; nats. */
+  logLikelihood: number;
+  /** Starts searched, and how many of them ended within 0.01 nats of the best. */
+  starts: number;
+  agreeing: number;
+}
+
+/** From each start; then the two best of these to the end. */
+const first: Effort = { enough: 1e-5, worth: 1e-3, rounds: 60, transfers: false };
+const thorough: Effort = { enough: 1e-9, worth: 1e-5, rounds: 200, transfers: true };
+
+/**
+ * The Poisson-binomial law of greatest likelihood, from several spreads of its probabilities.
+ *
+ * The surface is not concave in the probabilities, so every start is searched to the end and the agreement
+ * is reported; the floor (see floorLaw) then says how far from the global best it can be at most.
+ *
+ * Equal trials are a local maximum whenever the variance is at or above the ceiling, but not always the
+ * global one: with a strong third moment a few uneven trials can do better. So the spread starts are
+ * searched there too when the variance is within 1 % of the ceiling.
+ */
+export function bestLaw(data: FitData): BestLaw {
+  const space = workspace(data);
+  const moments = sampleMoments(data);
+  const last = data.first + data.shots.length - 1;
+  const candidates = data.withoutEmpty ? conditioned(data, moments.mean) : starts(data.trials, moments, last);
+  const found = candidates.map((start) => search(space, start, first)).sort((a, b) => b.value - a.value);
+  // With hundreds of trials the likelihood is flat among the good starts, and the second crawls.
+  const polish = (data.trials ?? 0) > 100 ? 1 : 2;
+  const polished = found.slice(0, polish).map((one) => search(space, one.levels, thorough));
+  const best = polished.reduce((a, b) => (b.value > a.value ? b : a));
+  const agreeing = [...polished, ...found.slice(polish)].filter(
+    (one) => one.value > best.value - 0.01
+  ).length;
+  return { levels: best.levels, logLikelihood: best.value, starts: candidates.length, agreeing };
+}
+
+/** Starts for a law conditioned on n ≥ 1: the unconditioned mean is a fraction of the mean seen. */
+function conditioned(data: FitData, mean: number): TrialLevels[] {
+  return [1, 0.8, 0.5].map((share) => alike(data.trials, Math.min(mean * share, data.trials ?? Infinity)));
+}

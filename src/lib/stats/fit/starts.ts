@@ -1,0 +1,77 @@
+import type { SampleMoments } from './sample-moments';
+import type { TrialLevels } from './trial-levels';
+
+/** Above this many trials the two-level starts are left out: they cost most and have never won there. */
+const manyTrials = 100;
+
+/**
+ * Spreads of the probabilities to start a search from, widest apart in shape, all with the sample mean.
+ *
+ * @param trials N, or null
+ * @param moments sample mean, variance (1/S) and third central moment
+ * @param last largest count that must stay possible
+ *
+ * Optima sit at few levels with many trials at exactly 0 and 1, so the first start is the law of that form
+ * with the cumulants seen. Then all alike; then, for few trials, two levels with the variance seen and a
+ * tenth, a third, two thirds or most of the trials high. The search moves freely from there, so these only
+ * have to lie in different valleys.
+ */
+export function starts(trials: number | null, moments: SampleMoments, last: number): TrialLevels[] {
+  const { mean, variance } = moments;
+  const out = [alike(trials, mean)];
+  const pool = trials ?? Math.max(last + 8, Math.ceil(4 * mean));
+  const excess = mean * (1 - mean / pool) - variance;
+  if (!(excess > 0) || pool < 2) return out;
+  out.unshift(pools(trials, moments));
+  if (pool <= manyTrials)
+    for (const share of [0.1, 0.35, 0.65, 0.9]) out.push(twoLevels(trials, pool, mean, excess, share));
+  return out.map((levels) => withPoisson(levels, trials, mean));
+}
+
+/** A sure trials, M trials at p, the rest at 0: Mp(1−p) = κ2, κ3 = κ2(1−2p), A + Mp = κ1. */
+function pools(trials: number | null, { mean, variance, third }: SampleMoments): TrialLevels {
+  const most = trials ?? Infinity;
+  const p = Math.min(0.95, Math.max(0.05, (1 - third / variance) / 2));
+  const moving = Math.min(most, Math.max(1, Math.round(variance / (p * (1 - p)))));
+  const ones = Math.min(most - moving, Math.max(0, Math.round(mean - moving * p)));
+  return {
+    p: [clip((mean - ones) / moving)],
+    trials: [moving],
+    ones,
+    zeros: most - moving - ones,
+    poissonPart: 0
+  };
+}
+
+/** Two levels whose Σ(p − mean/N)² is the excess of the ceiling over the variance. */
+function twoLevels(
+  trials: number | null,
+  pool: number,
+  mean: number,
+  excess: number,
+  share: number
+): TrialLevels {
+  const high = Math.min(pool - 1, Math.max(1, Math.round(share * pool)));
+  const up = Math.sqrt((excess * (pool - high)) / (high * pool));
+  const down = Math.sqrt((excess * high) / ((pool - high) * pool));
+  const p = [clip(mean / pool + up), clip(mean / pool - down)];
+  return { p, trials: [high, pool - high], ones: 0, zeros: trials === null ? Infinity : 0, poissonPart: 0 };
+}
+
+/** Equal trials; a Poisson law when N is unknown. */
+export function alike(trials: number | null, mean: number): TrialLevels {
+  if (trials === null) return { p: [], trials: [], ones: 0, zeros: Infinity, poissonPart: mean };
+  if (mean <= 0) return { p: [], trials: [], ones: 0, zeros: trials, poissonPart: 0 };
+  if (mean >= trials) return { p: [], trials: [], ones: trials, zeros: 0, poissonPart: 0 };
+  return { p: [mean / trials], trials: [trials], ones: 0, zeros: 0, poissonPart: 0 };
+}
+
+/** With N unknown a Poisson part must be there to grow: it takes a tenth of the mean. */
+function withPoisson(levels: TrialLevels, trials: number | null, mean: number): TrialLevels {
+  if (trials !== null || levels.p.length === 0) return levels;
+  return { ...levels, p: levels.p.map((p) => 0.9 * p), poissonPart: 0.1 * mean };
+}
+
+function clip(p: number): number {
+  return Math.min(0.999, Math.max(0.001, p));
+}

@@ -1,0 +1,22 @@
+import type { FitData } from '../fit/fit-data';
+import { climb } from '../fit/climb';
+import { sampleMoments } from '../fit/sample-moments';
+import { alike } from '../fit/starts';
+import { workspace } from '../fit/workspace';
+
+/**
+ * Equal trials (binomial), or rare events (Poisson) when `trials` is null, fitted by likelihood.
+ *
+ * @returns log-likelihood in nats and the fitted value: p, or the Poisson mean. Without a lump that is the
+ *   sample mean; with one, the censored likelihood is climbed.
+ */
+export function equalTrials(
+  data: FitData,
+  trials: number | null
+): { logLikelihood: number; parameter: number } {
+  const space = workspace({ ...data, trials });
+  const found = climb(space, alike(trials, sampleMoments(data).mean), 1e-12);
+  const { p, ones, poissonPart } = found.levels;
+  const parameter = trials === null ? poissonPart : p.length > 0 ? p[0] : ones > 0 ? 1 : 0;
+  return { logLikelihood: found.value, parameter };
+}

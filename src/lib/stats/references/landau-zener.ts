@@ -1,0 +1,33 @@
+import type { FitData } from '../fit/fit-data';
+import { sampleMoments } from '../fit/sample-moments';
+import { lawMoments } from '../laws/law-moments';
+import { findRoot } from '../numerics/find-root';
+import { maximise } from '../numerics/maximise';
+import { landauZenerLaw } from './landau-zener-law';
+import { lawLogLikelihood } from './law-log-likelihood';
+
+/** Multiplications that one evaluation may cost; forty are needed, and the whole must stay well under a second. */
+const budget = 2e7;
+
+/**
+ * Best Landau–Zener law for N modes, by likelihood in its one parameter a.
+ *
+ * @returns null when N is unknown or the mean is 0 or N (then a has no finite best value), or when one
+ *   evaluation would cost over 2e7 multiplications.
+ * The search runs in ln a, a factor of two either way of the a that matches the mean.
+ */
+export function landauZener(data: FitData): { logLikelihood: number; a: number } | null {
+  const { mean } = sampleMoments(data);
+  const modes = data.trials;
+  if (modes === null || !(mean > 0) || !(mean < modes)) return null;
+  const width = 20 * Math.sqrt(mean) + 20;
+  if (Math.min(modes, 10 * mean + 100) * width > budget) return null;
+  const meanAt = (logA: number) => lawMoments(landauZenerLaw(modes, Math.exp(logA))).mean;
+  const low = Math.log(1e-9);
+  const high = 2 * Math.log(2 * modes) + 6;
+  if (!(meanAt(low) > mean && meanAt(high) < mean)) return null;
+  const centre = findRoot((logA) => meanAt(logA) - mean, low, high, 1e-9);
+  const score = (logA: number) => lawLogLikelihood(data, landauZenerLaw(modes, Math.exp(logA)));
+  const best = maximise(score, centre - 0.7, centre + 0.7, 1e-8);
+  return best.value > -Infinity ? { logLikelihood: best.value, a: Math.exp(best.at) } : null;
+}

@@ -1,0 +1,28 @@
+import type { FitData } from '../fit/fit-data';
+import { logPmf } from '../laws/log-pmf';
+import { lawWindow } from '../laws/law-window';
+import type { Law } from '../types';
+
+/**
+ * Σ h_n ln f_n of a histogram under a given law, a lump by its tail sum; nats. −Infinity when a count was
+ * seen that the law forbids.
+ *
+ * Counts beyond the trimmed window take the exact logarithm, however improbable they are.
+ */
+export function lawLogLikelihood(data: FitData, law: Law): number {
+  const { first, values } = lawWindow(law, 1e-25, 1);
+  let sum = 0;
+  for (let i = 0; i < data.shots.length; i++) {
+    const shots = data.shots[i];
+    if (shots === 0) continue;
+    const k = data.first + i - first;
+    const inside = k >= 0 && k < values.length && values[k] > 1e-18;
+    sum += shots * (inside ? Math.log(values[k]) : logPmf(law, data.first + i));
+  }
+  if (data.lump) {
+    let tail = 0;
+    for (let k = values.length - 1; k >= Math.max(0, data.lump.from - first); k--) tail += values[k];
+    sum += data.lump.shots * (tail > 0 ? Math.log(tail) : logPmf(law, data.lump.from));
+  }
+  return sum;
+}

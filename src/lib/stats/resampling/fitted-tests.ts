@@ -1,0 +1,73 @@
+import type { BestLaw } from '../fit/best-law';
+import type { FitData } from '../fit/fit-data';
+import { lawWindow } from '../laws/law-window';
+import { SequentialP } from '../multiple/sequential-p';
+import { generator } from '../random/generator';
+import { toLaw } from '../fit/trial-levels';
+import type { TestId, TestResult } from '../types';
+import { expectedEmpty } from './empty-excess';
+import type { Pace } from './pace';
+import { progress } from './progress';
+import { redraw } from './redraw';
+import { refitted } from './refitted';
+import { chooseStatistics, lowTailOfTheRest, type StatisticId } from './statistics';
+import { stream } from './streams';
+import { testResult } from './test-result';
+
+/** Tests against the fitted law, refitted to every resample, and what else those resamples told. */
+export interface FittedTests {
+  tests: Omit<TestResult, 'pAdjusted'>[];
+  notRun: { id: TestId; reason: string }[];
+  /** KL of each resample from its own refit, nats a shot: what the plug-in divergence shows when all is well. */
+  nullDivergences: number[];
+  /** p of the low tail with empty shots set aside; null when it was not asked. */
+  lowTailOfTheRest: number | null;
+  /** Empty shots that the law of the others expects; null when there are none of either. */
+  expectedEmpty: number | null;
+}
+
+/**
+ * Draws histograms from the fitted law, refits each, and recomputes every statistic;
+ * p = (1 + #{≥ observed})/(B + 1), ended early by the rule of Besag & Clifford 1991.
+ */
+export async function fittedTests(
+  data: FitData,
+  fit: BestLaw,
+  options: { resamples: number; seed: number },
+  pace: Pace
+): Promise<FittedTests> {
+  const window = lawWindow(toLaw(fit.levels), 1e-18, 1);
+  const observed = refitted(data, fit.levels, {
+    levels: fit.levels,
+    logLikelihood: fit.logLikelihood,
+    window
+  });
+  const { statistics, notRun } = chooseStatistics(observed);
+  const runs = [...statistics].map(([id, statistic]) => ({
+    id,
+    statistic,
+    value: statistic(observed),
+    sequence: new SequentialP(options.resamples)
+  }));
+  const source = redraw(window, data, data.total);
+  const nullDivergences: number[] = [];
+  for (let b = 0; runs.some(({ sequence }) => !sequence.done); b++) {
+    const drawn = refitted(source.draw(generator(options.seed, stream('fitted law', b))), fit.levels);
+    nullDivergences.push(drawn.divergence);
+    for (const { statistic, value, sequence } of runs) {
+      // Equal up to rounding counts as equal: a resample that repeats the data must count.
+      if (!sequence.done) sequence.push(statistic(drawn) >= value - 1e-9 * Math.max(1, Math.abs(value)));
+    }
+    await pace.breathe(Math.min(...runs.map(({ sequence }) => progress(sequence))));
+  }
+  const p = (id: StatisticId) => runs.find((run) => run.id === id)?.sequence.p ?? null;
+  return {
+    tests: runs
+      .filter((run) => run.id !== lowTailOfTheRest)
+      .map(({ id, value, sequence }) => testResult(id as TestId, value, sequence)),
+    notRun,
+    nullDivergences,
+    lowTailOfTheRest: p(lowTailOfTheRest),
+    expectedEmpty: expectedEmpty(observed)
+  };
+}

@@ -1,0 +1,17 @@
+import type { FitData } from '../fit/fit-data';
+
+/** The same histogram without its empty shots, and how many they were. */
+export function setEmptyAside(data: FitData): { rest: FitData; empty: number } {
+  if (data.first > 0 || data.shots.length === 0) return { rest: { ...data, withoutEmpty: true }, empty: 0 };
+  const empty = data.shots[0];
+  let start = 1;
+  while (start < data.shots.length && data.shots[start] === 0) start++;
+  const rest = {
+    ...data,
+    first: start,
+    shots: data.shots.subarray(start),
+    total: data.total - empty,
+    withoutEmpty: true
+  };
+  return { rest, empty };
+}

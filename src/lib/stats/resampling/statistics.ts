@@ -1,0 +1,95 @@
+import type { FitData } from '../fit/fit-data';
+import { lawMoments } from '../laws/law-moments';
+import type { Window } from '../laws/window';
+import type { TestId } from '../types';
+import { cells } from './cells';
+import { emptyExcess } from './empty-excess';
+import { parityExcess } from './parity-excess';
+import type { Refitted } from './refitted';
+import { tailExcess } from './tail-excess';
+
+/** A statistic of a histogram and its own best law; large values speak against independent trials. */
+export type Statistic = (histogram: Refitted) => number;
+
+/** The low tail of the shots with n ≥ 1: not a test of its own, but evidence for or against coarsening. */
+export const lowTailOfTheRest = 'low tail without empty shots';
+export type StatisticId = TestId | typeof lowTailOfTheRest;
+
+/** Statistics that this histogram allows, and the tests it does not, with the reason. */
+export interface ChosenStatistics {
+  statistics: Map<StatisticId, Statistic>;
+  notRun: { id: TestId; reason: string }[];
+}
+
+/** One line a test against the fitted law. Limits of the tails are fixed here, by the observed fit. */
+export function chooseStatistics(observed: Refitted): ChosenStatistics {
+  const { data, law } = observed;
+  const { mean, variance } = lawMoments(law);
+  const spread = Math.sqrt(variance);
+  const statistics: ChosenStatistics['statistics'] = new Map();
+  const notRun: ChosenStatistics['notRun'] = [];
+  const high = Math.floor(mean + spread) + 1;
+  const low = Math.ceil(mean - spread) - 1;
+  const use = (id: StatisticId, statistic: Statistic, reason: string | null) => {
+    if (reason === null) statistics.set(id, statistic);
+    else if (id !== lowTailOfTheRest) notRun.push({ id, reason });
+  };
+  const oneCount = spread > 0 ? null : 'Every shot had the same count.';
+  use('fit', ({ data: { total }, divergence }) => 2 * total * divergence, oneCount);
+  use(
+    'high-tail',
+    whole('high', high),
+    oneCount ?? (high <= (data.trials ?? Infinity) ? null : none('above'))
+  );
+  use('low-tail', whole('low', low), oneCount ?? (low >= 0 ? null : none('below')));
+  use(
+    'parity',
+    parityExcess,
+    oneCount ?? (data.lump ? 'The closing row lumps even and odd counts together.' : null)
+  );
+  use('empty-shots', emptyExcess, noEmpty(observed));
+  const rest = observed.rest();
+  use(lowTailOfTheRest, ofTheRest(low), rest && low >= rest.data.first ? null : 'nothing there');
+  return { statistics, notRun };
+}
+
+function none(side: string): string {
+  return `No possible count lies more than one standard deviation ${side} the mean.`;
+}
+
+function noEmpty(observed: Refitted): string | null {
+  const rest = observed.rest();
+  if (!rest) return 'No shot was empty, or every shot was.';
+  let different = rest.data.lump ? 1 : 0;
+  for (const shots of rest.data.shots) if (shots > 0) different++;
+  return different > 1 ? null : 'The other shots all had one count, which tells nothing about empty ones.';
+}
+
+function whole(side: 'high' | 'low', limit: number): Statistic {
+  return ({ data, fit }) => tail(data, fit.window, side, limit);
+}
+
+function ofTheRest(limit: number): Statistic {
+  return (histogram) => {
+    const rest = histogram.rest();
+    return rest ? tail(rest.data, rest.fit.window, 'low', limit) : 0;
+  };
+}
+
+function tail(data: FitData, window: Window, side: 'high' | 'low', limit: number): number {
+  const { law, below, above } = cells(data, window);
+  const { lump } = data;
+  if (!lump)
+    return tailExcess(data.shots, law, data.total, side === 'low' ? below : above, side, limit - data.first);
+  // A lump is one more cell, at its first count.
+  const shots = append(data.shots, lump.from - data.first, lump.shots);
+  const fitted = append(law, lump.from - data.first, above);
+  return tailExcess(shots, fitted, data.total, side === 'low' ? below : 0, side, limit - data.first);
+}
+
+function append(values: Float64Array, at: number, value: number): Float64Array {
+  const out = new Float64Array(Math.max(values.length, at + 1));
+  out.set(values);
+  out[at] += value;
+  return out;
+}

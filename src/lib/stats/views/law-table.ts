@@ -1,0 +1,65 @@
+import type { FitData } from '../fit/fit-data';
+import { lawMoments } from '../laws/law-moments';
+import { lawWindow } from '../laws/law-window';
+import { logPmf } from '../laws/log-pmf';
+import type { Law } from '../types';
+
+/** The fitted law over the counts a report shows. */
+export interface LawTable {
+  law: Law;
+  first: number;
+  /** f_n and ln f_n for first, first+1, …; ln f_n is exact where f_n underflows. */
+  f: number[];
+  logF: number[];
+  /** P(X ≥ n) and P(X ≤ n), for any n. */
+  upper(n: number): number;
+  lower(n: number): number;
+}
+
+/** Up to this N every count is shown; beyond, those seen and nine standard deviations of the law. */
+const fullTable = 60;
+
+/** Counts shown and the law there, with relative error under 1e-10 down to 1e-300. */
+export function lawTable(data: FitData, law: Law): LawTable {
+  const { mean, variance } = lawMoments(law);
+  const window = lawWindow(law);
+  const spread = Math.sqrt(variance);
+  const last = data.first + data.shots.length - 1;
+  const most = data.trials ?? Infinity;
+  const whole = most <= fullTable;
+  const first = whole ? 0 : Math.max(0, Math.min(data.first, Math.floor(mean - 9 * spread)) - 1);
+  const end = whole
+    ? most
+    : Math.min(most, Math.max(last, data.lump?.from ?? 0, Math.ceil(mean + 9 * spread)) + 1);
+  const f: number[] = [];
+  const logF: number[] = [];
+  for (let n = first; n <= end; n++) {
+    const k = n - window.first;
+    const value = k >= 0 && k < window.values.length ? window.values[k] / window.scale : 0;
+    f.push(value);
+    logF.push(value > 1e-300 ? Math.log(value) : logPmf(law, n));
+  }
+  const upward = cumulative(window.values, window.scale, true);
+  const downward = cumulative(window.values, window.scale, false);
+  return {
+    law,
+    first,
+    f,
+    logF,
+    upper: (n) => (n <= window.first ? 1 : (upward[n - window.first] ?? 0)),
+    lower: (n) =>
+      n < window.first ? 0 : Math.min(1, downward[Math.min(n - window.first, downward.length - 1)])
+  };
+}
+
+/** Tail sums, smallest terms first. */
+function cumulative(values: Float64Array, scale: number, fromTop: boolean): Float64Array {
+  const out = new Float64Array(values.length);
+  let sum = 0;
+  for (let i = 0; i < values.length; i++) {
+    const k = fromTop ? values.length - 1 - i : i;
+    sum += values[k];
+    out[k] = Math.min(1, sum / scale);
+  }
+  return out;
+}

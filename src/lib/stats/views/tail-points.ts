@@ -1,0 +1,51 @@
+import { logHoeffdingTail } from '../bounds/log-hoeffding-tail';
+import { logMeanChernoff } from '../bounds/log-mean-chernoff';
+import { lawMoments } from '../laws/law-moments';
+import { lawRate } from '../laws/law-rate';
+import { clopperPearson } from '../numerics/clopper-pearson';
+import type { DistributionPoint, TailPoint } from '../types';
+import type { LawTable } from './law-table';
+
+/**
+ * Both tails: share of shots at or beyond each count with its Clopper–Pearson interval, the fitted tail, and
+ * three bounds: Chernoff of the fitted law e^{−N I(n/N)}, Chernoff from the mean alone, and Hoeffding's
+ * extremal tail. Counts above the mean belong to the high side, below to the low side.
+ */
+export function tailPoints(
+  points: DistributionPoint[],
+  shots: number,
+  trials: number | null,
+  table: LawTable
+): TailPoint[] {
+  const { mean } = lawMoments(table.law);
+  const out: TailPoint[] = [];
+  let seen = 0;
+  for (const point of points) {
+    seen += point.shots;
+    // Nothing at or below a lump's first count can be told apart inside it.
+    if (point.count < mean && !point.lump) out.push(at(point.count, 'low', seen));
+  }
+  seen = 0;
+  const high: TailPoint[] = [];
+  for (const point of [...points].reverse()) {
+    seen += point.shots;
+    if (point.count > mean) high.push(at(point.count, 'high', seen));
+  }
+  return out.concat(high.reverse());
+
+  function at(count: number, side: 'high' | 'low', tail: number): TailPoint {
+    const { low, high: upper } = clopperPearson(tail, shots);
+    return {
+      count,
+      side,
+      shots: tail,
+      observed: tail / shots,
+      low,
+      high: upper,
+      fitted: side === 'high' ? table.upper(count) : table.lower(count),
+      chernoff: Math.exp(-lawRate(table.law, count)),
+      meanChernoff: Math.exp(logMeanChernoff(side, count, mean, trials)),
+      hoeffding: Math.exp(logHoeffdingTail(side, count, mean, trials))
+    };
+  }
+}
