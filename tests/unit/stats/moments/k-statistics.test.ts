@@ -34,8 +34,10 @@ describe('kStatistics', () => {
       [3, 4],
       [4, 1]
     ]) {
-      // prettier-ignore
-      const k = kStatistics([[0, 4 - ones], [1, ones]]); // prettier-ignore
+      const k = kStatistics([
+        [0, 4 - ones],
+        [1, ones]
+      ]);
       const weight = ways * p ** ones * q ** (4 - ones);
       [k.mean, k.variance!, k.third!, k.fourth!].forEach((value, i) => (sums[i] += weight * value));
     }

@@ -17,7 +17,13 @@ describe('poissonBinomialSample', () => {
     [law(0.1, 0.2, 0.2), [0.576, 0.352, 0.068, 0.004]],
     [law(0.1, 0.6, 0.7, 0.8), [0.0216, 0.1716, 0.4256, 0.3476, 0.0336]],
     [
-      { levels: [{ p: 0.1, trials: 1 }, { p: 0.2, trials: 2 }], poissonPart: 0 }, // prettier-ignore
+      {
+        levels: [
+          { p: 0.1, trials: 1 },
+          { p: 0.2, trials: 2 }
+        ],
+        poissonPart: 0
+      },
       [0.576, 0.352, 0.068, 0.004]
     ]
   ])('follows a law known by hand', (truth, pmf) => {
