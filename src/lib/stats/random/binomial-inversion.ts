@@ -2,7 +2,7 @@ import type { Generator } from './generator';
 
 /**
  * One draw from Bin(n, p) by inversion: walk up from 0, subtracting f_k from a uniform number. About n·p + 1
- * steps, so for n·p up to about 10.
+ * steps, so for n·p up to about 30 (where it still takes no longer than rejection).
  *
  * f_0 = exp(n·log1p(−p)), f_{k+1} = f_k (n − k)/(k + 1) · p/(1 − p).
  *
@@ -20,7 +20,7 @@ export function binomialInversion(generator: Generator, n: number, p: number, lo
   for (;;) {
     let left = generator.next();
     let probability = empty;
-    // P(X > 150) < 1e-100 for n·p ≤ 10: getting there means that rounding left a crumb of the uniform number.
+    // P(X > 150) < 1e-50 for n·p ≤ 30: getting there means that rounding left a crumb of the uniform number.
     const top = n < 150 ? n : 150;
     for (let k = 0; k <= top; k++) {
       if (left <= probability) return k;

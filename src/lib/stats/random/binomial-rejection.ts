@@ -8,7 +8,7 @@ const HALF_LOG_TWO_PI = 0.9189385332046727;
  * Constant time: about 1.15 to 1.5 tries, and most tries end at the squeeze without a logarithm.
  *
  * The acceptance test is written with the distance from the mean, d = k − n·p,
- * −ln f_k = k·log1p(d/np) + (n − k)·log1p(−d/nq) + ½ ln(2πk(n − k)/n) + Stirling remainders:
+ * −ln f_k = k·log1p(d/np) + (n − k)·log1p(−d/nq) + ½ ln(2πk(n − k)/n) + errors of Stirling's formula:
  * every term is about √n or smaller, so 1e-8 of the logarithm is kept at n = 2^53. The usual form with
  * (n + 1) ln((n − m + 1)/(n − k + 1)) loses all of it there.
  *
@@ -36,24 +36,46 @@ export function binomialRejection(generator: Generator, n: number, p: number): n
     if (edge >= 0.07 && v <= squeeze) return k;
     if (k < 0 || k > n) continue;
     const scale = (2.83 + 5.1 / b) * spread;
-    const height = Math.log((v * scale) / (a / (edge * edge) + b));
-    const mode = Math.floor((n + 1) * p);
-    if (height <= minusLog(n, p, mean, mode) - minusLog(n, p, mean, k)) return k;
+    const height = (v * scale) / (a / (edge * edge) + b);
+    if (aboveLaw(n, p, mean, k, height) <= 0) return k;
   }
 }
 
-/** −ln f_k of Bin(n, p). */
-function minusLog(n: number, p: number, mean: number, k: number): number {
-  if (k === 0) return -n * Math.log1p(-p);
-  if (k === n) return -n * Math.log(p);
+/** ln(height · f_m / f_k) of Bin(n, p), m its mode. */
+function aboveLaw(n: number, p: number, mean: number, k: number, height: number): number {
+  const mode = Math.floor((n + 1) * p);
+  const missed = n * (1 - p);
+  const below = k - mean;
+  const modeBelow = mode - mean;
+  const rest = n - k;
+  const modeRest = n - mode;
+  // Stirling's formula has no value at the two ends, where f_k is a plain power.
+  if (k === 0 || rest === 0) {
+    const logEnd = k === 0 ? n * Math.log1p(-p) : n * Math.log(p);
+    return Math.log(height) + logPmf(n, mean, missed, mode) - logEnd;
+  }
+  // One logarithm for the height and the two roots.
+  return (
+    Math.log(height * Math.sqrt((k / mode) * (rest / modeRest))) +
+    k * Math.log1p(below / mean) +
+    rest * Math.log1p(-below / missed) -
+    mode * Math.log1p(modeBelow / mean) -
+    modeRest * Math.log1p(-modeBelow / missed) +
+    (stirlingError(k) - stirlingError(mode)) +
+    (stirlingError(rest) - stirlingError(modeRest))
+  );
+}
+
+/** ln f_k for 0 < k < n. */
+function logPmf(n: number, mean: number, missed: number, k: number): number {
   const d = k - mean;
   return (
-    k * Math.log1p(d / mean) +
-    (n - k) * Math.log1p(-d / (n * (1 - p))) +
-    HALF_LOG_TWO_PI +
-    0.5 * Math.log(k * ((n - k) / n)) +
-    stirlingError(k) +
+    stirlingError(n) -
+    stirlingError(k) -
     stirlingError(n - k) -
-    stirlingError(n)
+    k * Math.log1p(d / mean) -
+    (n - k) * Math.log1p(-d / missed) -
+    HALF_LOG_TWO_PI -
+    0.5 * Math.log(k * ((n - k) / n))
   );
 }
