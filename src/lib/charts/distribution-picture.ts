@@ -1,0 +1,116 @@
+import type { Diagnosis, DistributionPoint } from '$lib/stats/types';
+import { scaleLinear } from 'd3-scale';
+import { bottomAxis, leftAxis } from './axis-marks';
+import { columnOf } from './column-of';
+import { countTicks } from './count-ticks';
+import { distributionWords } from './distribution-words';
+import { frameOf } from './frame-of';
+import { groupCounts } from './group-counts';
+import { linePath } from './line-path';
+import { observedMarks } from './observed-marks';
+import type { Mark, Picture, Point, Size } from './picture';
+import { residualMarks } from './residual-marks';
+import { shownSpan } from './shown-span';
+import { standing } from './standing';
+import { thinnedMarks, thinnedNote } from './thinned-marks';
+import { tickTexts } from './tick-texts';
+
+/** Room of one mark, picture units. */
+const LEAST = 5;
+
+/** Counts against the best independent-trial law, and below them how far each lies from it. */
+export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size): Picture {
+  const { shots, lump } = diagnosis.data;
+  // Half a tenth of an expected shot: the law's line may end where no shot is to be expected.
+  const [from, to] = shownSpan(
+    diagnosis.distribution,
+    (point) => point.shots > 0 || point.fitted * shots > 0.05
+  );
+  const points = diagnosis.distribution.filter((point) => point.count >= from && point.count <= to);
+  const highest = Math.max(
+    ...points.map((point) => Math.max(point.fitted, point.shots > 0 ? point.high : 0))
+  );
+
+  const mainHeight = Math.min(380, Math.max(210, width * 0.46));
+  const residualHeight = 104;
+  const left = text * 4.4;
+  const main = frameOf(width, mainHeight, { left, right: text, top: text * 2.2, bottom: 0 });
+  const below = { ...main, top: main.bottom + text * 3.4, bottom: main.bottom + text * 3.4 + residualHeight };
+  const height = below.bottom + text * 3.8;
+  const x = scaleLinear([from - 0.6, to + 0.6], [main.left, main.right]);
+  const y = scaleLinear([0, highest * 1.04 || 1], [main.bottom, main.top]);
+
+  const groups = groupCounts(points, x(1) - x(0), LEAST);
+  const together = groups[0].length;
+  const shares = y.ticks(5);
+  const texts = tickTexts(shares, 100, '\u2009%');
+  const marks: Mark[] = [
+    ...leftAxis(
+      main,
+      shares.map((value, i) => ({ at: y(value), text: texts[i] })),
+      'share of shots',
+      text
+    ),
+    { kind: 'path', role: 'axis', d: `M${main.left},${main.bottom}H${main.right}` },
+    ...drawnCounts(groups, x, y),
+    {
+      kind: 'path',
+      role: 'fitted',
+      d: linePath(
+        points.map((p): Point => [x(p.count), y(p.fitted)]),
+        main
+      )
+    },
+    ...residualMarks(groups, x, below, text),
+    ...bottomAxis(below, countTicks(x, text * 4, lump ? lump.from : null), countTitle(diagnosis), text)
+  ];
+  return {
+    width,
+    height,
+    marks,
+    legend: [
+      { role: 'observed', label: 'seen, with its 95 % interval' },
+      { role: 'fitted', label: 'best independent-trial law' },
+      ...legendOfStanding(points)
+    ],
+    readings: points.map((p) => ({ x: x(p.count), y: y(p.observed), words: distributionWords(p, shots) })),
+    notes: together > 1 ? [thinnedNote(together)] : []
+  };
+}
+
+const countTitle = ({ data }: Diagnosis): string =>
+  data.unit === 'pair' ? 'pairs of defects in one shot' : 'defects in one shot';
+
+function legendOfStanding(points: DistributionPoint[]): Picture['legend'] {
+  const has = (kind: 'more' | 'fewer') => points.some((point) => standing(point) === kind);
+  return [
+    ...(has('more') ? [{ role: 'observed-more' as const, label: 'seen more often than the law says' }] : []),
+    ...(has('fewer') ? [{ role: 'observed-fewer' as const, label: 'seen less often' }] : [])
+  ];
+}
+
+type Place = (value: number) => number;
+
+function drawnCounts(groups: DistributionPoint[][], x: Place, y: Place): Mark[] {
+  if (groups[0].length === 1) {
+    const seen = groups.flat().map((point) => ({
+      at: [x(point.count), y(point.observed)] as Point,
+      interval: { x: x(point.count), from: y(point.low), to: y(point.high) },
+      standing: standing(point)
+    }));
+    return observedMarks(seen, 6);
+  }
+  return thinnedMarks(
+    groups.map((group) =>
+      columnOf(
+        x((group[0].count + group[group.length - 1].count) / 2),
+        group.map((point) => ({
+          low: y(point.low),
+          high: y(point.high),
+          value: y(point.observed),
+          standing: standing(point)
+        }))
+      )
+    )
+  );
+}

@@ -1,0 +1,58 @@
+import { hatchEdge } from './hatch-edge';
+import { intervalPath } from './interval-path';
+import type { Mark, Role } from './picture';
+import { pointPath, type Shape } from './point-path';
+
+const POINTS: Partial<Record<Role, { shape: Shape; interval: Role }>> = {
+  observed: { shape: 'dot', interval: 'interval' },
+  'observed-more': { shape: 'up', interval: 'interval-more' },
+  'observed-fewer': { shape: 'down', interval: 'interval-fewer' },
+  'observed-unsure': { shape: 'diamond', interval: 'interval-unsure' }
+};
+
+export const SAMPLE = { width: 30, height: 16 };
+
+/** A small drawing of what a role looks like, its top left corner at `left`, `top`. */
+export function legendSample(role: Role, left = 0, top = 0): Mark[] {
+  const right = left + SAMPLE.width;
+  const middle = top + SAMPLE.height / 2;
+  const centre = left + SAMPLE.width / 2;
+  const point = POINTS[role];
+  if (point)
+    return [
+      {
+        kind: 'path',
+        role: point.interval,
+        d: intervalPath([{ x: centre, from: top + SAMPLE.height, to: top }])
+      },
+      {
+        kind: 'path',
+        role,
+        d: pointPath([[centre, middle]], point.shape, point.shape === 'dot' ? 6 : 9)
+      }
+    ];
+  if (role === 'unseen')
+    return [
+      {
+        kind: 'path',
+        role,
+        d: intervalPath([{ x: centre, from: top + SAMPLE.height, to: top, open: true }])
+      }
+    ];
+  if (role === 'shade') {
+    const rules = [2, 8, 14].map((y) => `M${left},${top + y}H${right}`).join('');
+    return [{ kind: 'path', role, d: rules }];
+  }
+  const line: Mark = { kind: 'path', role, d: `M${left},${middle}H${right}` };
+  if (role !== 'bound') return [line];
+  const frame = { left, right, top, bottom: top + SAMPLE.height };
+  const hatch = hatchEdge(
+    [
+      [left, middle],
+      [right, middle]
+    ],
+    'above',
+    frame
+  );
+  return [{ kind: 'path', role: 'hatch', d: hatch }, line];
+}

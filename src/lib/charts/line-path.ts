@@ -1,0 +1,12 @@
+import { line } from 'd3-shape';
+import { clipLine } from './clip-line';
+import type { Frame, Point } from './picture';
+
+const straight = line<Point>().digits(2);
+
+/** Path string of a broken line, cut to the frame; '' when nothing of it is inside. Null breaks the line. */
+export function linePath(points: (Point | null)[], frame: Frame): string {
+  return clipLine(points, frame)
+    .map((run) => straight(run) ?? '')
+    .join('');
+}

@@ -1,0 +1,97 @@
+/** The inks of app.css and of the downloads. */
+export type Ink = 'ink' | 'faint' | 'line' | 'hair' | 'oxide' | 'verdigris' | 'brass' | 'paper' | 'none';
+
+/** What a drawn thing stands for. One role looks the same in every chart; ink-of-role.ts says how. */
+export type Role =
+  | 'observed'
+  | 'observed-more'
+  | 'observed-fewer'
+  | 'observed-unsure'
+  | 'interval'
+  | 'interval-more'
+  | 'interval-fewer'
+  | 'interval-unsure'
+  | 'range'
+  | 'range-more'
+  | 'range-fewer'
+  | 'unseen'
+  | 'fitted'
+  | 'limit'
+  | 'gaussian'
+  | 'mean-bound'
+  | 'bound'
+  | 'hatch'
+  | 'horizon'
+  | 'shade'
+  | 'axis'
+  | 'grid'
+  | 'level';
+
+export interface PathMark {
+  kind: 'path';
+  role: Role;
+  d: string;
+}
+
+export interface TextMark {
+  kind: 'text';
+  x: number;
+  y: number;
+  text: string;
+  /** Small raised digits after the text, as in 10⁻³. */
+  raised?: string;
+  anchor: 'start' | 'middle' | 'end';
+  ink: Ink;
+  face: 'text' | 'number' | 'bold';
+  size: number;
+  /** Paper around the letters, where lines may pass behind them. */
+  halo?: boolean;
+}
+
+export type Mark = PathMark | TextMark;
+
+/** One thing that can be pointed at or walked to, and what it says. */
+export interface Reading {
+  x: number;
+  y: number;
+  words: string;
+}
+
+export interface LegendEntry {
+  role: Role;
+  label: string;
+}
+
+/** A chart as plain geometry: page, SVG, PNG and PDF draw the same marks. */
+export interface Picture {
+  width: number;
+  height: number;
+  marks: Mark[];
+  legend: LegendEntry[];
+  readings: Reading[];
+  /** What the drawing leaves out or gathers together, in words. */
+  notes: string[];
+}
+
+/** Rectangle inside the axes, in picture units. */
+export interface Frame {
+  left: number;
+  right: number;
+  top: number;
+  bottom: number;
+}
+
+export type Point = [number, number];
+
+/** Room a picture may take: its width and the height of its letters, picture units. */
+export interface Size {
+  width: number;
+  text: number;
+}
+
+/** One mark on an axis. */
+export interface Tick {
+  at: number;
+  text: string;
+  raised?: string;
+}

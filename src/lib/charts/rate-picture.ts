@@ -1,0 +1,107 @@
+import type { Diagnosis, RatePoint } from '$lib/stats/types';
+import { scaleLinear } from 'd3-scale';
+import { bottomAxis, leftAxis } from './axis-marks';
+import { frameOf } from './frame-of';
+import { groupCounts } from './group-counts';
+import { horizonMarks } from './horizon-marks';
+import { linePath } from './line-path';
+import type { Mark, Picture, Point, Size } from './picture';
+import { ratePoints } from './rate-points';
+import { rateWords } from './rate-words';
+import { shownSpan } from './shown-span';
+import { thinnedNote } from './thinned-marks';
+import { tickTexts } from './tick-texts';
+
+/** Rate function: seen rates with intervals, finite-N law, its limit, the Gaussian, and the shot horizon. */
+export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Picture {
+  const { rate, data } = diagnosis;
+  const top = highestRate(diagnosis);
+  const [from, to] = shownSpan(
+    rate.points,
+    (point) => point.empirical !== null || (point.fitted !== null && point.fitted <= top * 0.9)
+  );
+  const points = rate.points.filter((point) => point.count >= from && point.count <= to);
+  const height = Math.min(460, Math.max(280, width * 0.58));
+  const frame = frameOf(width, height, {
+    left: text * 4.4,
+    right: text,
+    top: text * 2.2,
+    bottom: text * 3.8
+  });
+  // Densities when N is known; a count n lies at n/N, so one scale serves both.
+  const perCount = data.trials === null ? 1 : 1 / (data.unit === 'pair' ? data.trials / 2 : data.trials);
+  const x = scaleLinear([(from - 0.6) * perCount, (to + 0.6) * perCount], [frame.left, frame.right]);
+  const y = scaleLinear([0, top], [frame.bottom, frame.top]);
+  const at = (point: RatePoint): number => x(point.count * perCount);
+  const curve = (pick: (point: RatePoint) => number | null): string =>
+    linePath(
+      points.map((point): Point | null => lifted(at(point), pick(point), y)),
+      frame
+    );
+
+  const groups = groupCounts(points, x(perCount) - x(0), 5);
+  const rates = y.ticks(5);
+  const xs = x.ticks(Math.max(2, Math.floor((frame.right - frame.left) / (text * 5))));
+  const whole = data.trials === null ? xs.filter(Number.isInteger) : xs;
+  const [rateTexts, xTexts] = [tickTexts(rates), tickTexts(whole)];
+  const marks: Mark[] = [
+    ...horizonMarks(diagnosis, points, at, y, frame, text),
+    ...leftAxis(
+      frame,
+      rates.map((v, i) => ({ at: y(v), text: rateTexts[i] })),
+      rateTitle(diagnosis),
+      text
+    ),
+    { kind: 'path', role: 'gaussian', d: curve((point) => point.gaussian) },
+    { kind: 'path', role: 'limit', d: curve((point) => point.limit) },
+    { kind: 'path', role: 'fitted', d: curve((point) => point.fitted) },
+    ...ratePoints(groups, at, y, frame),
+    ...bottomAxis(
+      frame,
+      whole.map((v, i) => ({ at: x(v), text: xTexts[i] })),
+      densityTitle(diagnosis),
+      text
+    )
+  ];
+  return {
+    width,
+    height,
+    marks,
+    legend: [
+      { role: 'observed', label: 'seen, with its 95 % interval' },
+      { role: 'unseen', label: 'never seen: lower limit only' },
+      { role: 'fitted', label: 'best law at this N' },
+      { role: 'limit', label: 'its large-deviation limit' },
+      { role: 'gaussian', label: 'Gaussian' },
+      { role: 'shade', label: 'beyond the shot horizon' }
+    ],
+    readings: points.map((point) => ({
+      x: at(point),
+      y: y(Math.min(top, point.empirical ?? point.low)),
+      words: rateWords(point, rate.scale)
+    })),
+    notes: groups[0].length > 1 ? [thinnedNote(groups[0].length)] : []
+  };
+}
+
+/** A little above the horizon; with so few shots that the horizon is at 0, whatever is there to draw. */
+function highestRate({ rate }: Diagnosis): number {
+  if (rate.horizon > 0) return rate.horizon * 1.4;
+  const drawn = rate.points.flatMap(({ empirical, low, fitted }) => [empirical ?? 0, low, fitted ?? 0]);
+  return Math.max(...drawn.filter(Number.isFinite), 1e-6) * 1.2;
+}
+
+const lifted = (x: number, value: number | null, y: (value: number) => number): Point | null =>
+  value === null ? null : [x, y(value)];
+
+const rateTitle = ({ rate, data }: Diagnosis): string =>
+  data.trials === null || rate.scale === 1 ? 'rate, nats a shot' : 'rate, nats a trial';
+
+const densityTitle = ({ data }: Diagnosis): string =>
+  data.trials === null
+    ? data.unit === 'pair'
+      ? 'pairs of defects in one shot'
+      : 'defects in one shot'
+    : data.unit === 'pair'
+      ? 'pairs a place, n/N'
+      : 'defect density, n/N';

@@ -1,0 +1,54 @@
+import type { DistributionPoint } from '$lib/stats/types';
+import { scaleLinear } from 'd3-scale';
+import { leftAxis } from './axis-marks';
+import { columnOf } from './column-of';
+import { observedMarks } from './observed-marks';
+import type { Frame, Mark, Point } from './picture';
+import { residualOf } from './residual-of';
+import { standing } from './standing';
+import { thinnedMarks } from './thinned-marks';
+import { tickTexts } from './tick-texts';
+
+/** The strip under the counts: distance of each from the law, with the band that an interval spans. */
+export function residualMarks(
+  groups: DistributionPoint[][],
+  x: (count: number) => number,
+  frame: Frame,
+  text: number
+): Mark[] {
+  const points = groups.flat();
+  const far = Math.max(1.6, ...points.map((point) => Math.abs(residualOf(point))));
+  const y = scaleLinear([-far, far], [frame.bottom - 4, frame.top + 4]);
+  const step = far > 4 ? Math.ceil(far / 2) : 1;
+  const values = far > 4 ? [-step, 0, step] : [-1, 0, 1];
+  const labels = tickTexts(values);
+  const axis = leftAxis(
+    frame,
+    values.map((value, i) => ({ at: y(value), text: labels[i] })),
+    'distance from the law, in half-intervals',
+    text
+  );
+  const band = [-1, 1].map((value) => `M${frame.left},${y(value).toFixed(2)}H${frame.right}`).join('');
+  const marks: Mark[] = [
+    ...axis,
+    { kind: 'path', role: 'level', d: band },
+    { kind: 'path', role: 'fitted', d: `M${frame.left},${y(0).toFixed(2)}H${frame.right}` }
+  ];
+  if (groups[0].length === 1) {
+    const dots = points.map((point) => {
+      const at: Point = [x(point.count), y(residualOf(point))];
+      return { at, interval: { x: at[0], from: y(0), to: at[1] }, standing: standing(point) };
+    });
+    return [...marks, ...observedMarks(dots, 5)];
+  }
+  const columns = groups.map((group) =>
+    columnOf(
+      x((group[0].count + group[group.length - 1].count) / 2),
+      group.map((point) => {
+        const value = y(residualOf(point));
+        return { low: value, high: value, value, standing: standing(point) };
+      })
+    )
+  );
+  return [...marks, ...thinnedMarks(columns)];
+}
