@@ -1,0 +1,193 @@
+import type { ReadOptions, ReadResult, Suggested } from '$lib/formats/types';
+import type { CountData, DiagnoseOptions, Diagnosis, Progress } from '$lib/stats/types';
+import { readAddress, writeAddress } from './address';
+import { CountsInput } from './counts-input.svelte';
+import { Reader } from './reader';
+import { readSettings, readTrials, type SettingProblems } from './read-settings';
+import { startRun, type Run } from './runner';
+import { freshSettings, type SettingName, type Settings } from './settings';
+import { textOfData } from './text-of-data';
+import { tooLarge } from './too-large';
+
+export interface Result {
+  diagnosis: Diagnosis;
+  data: CountData;
+  options: DiagnoseOptions;
+  /** Name of the file, example or dataset; null when pasted. */
+  name: string | null;
+  /** The part after # that reopens it; null when the counts are too many for an address. */
+  address: string | null;
+}
+
+export interface Running extends Progress {
+  /** performance.now() when it began. */
+  since: number;
+}
+
+const PAUSE = 250;
+
+/** All that the page knows: what was given, how it was read, what runs, and what came out. */
+export class Check {
+  readonly input = new CountsInput();
+  settings = $state<Settings>(freshSettings());
+  readOptions = $state.raw<ReadOptions>({});
+  read = $state.raw<ReadResult | null>(null);
+  dataset = $state(0);
+  settingProblems = $state.raw<SettingProblems>({});
+  /** Why the engine would not or could not answer. */
+  refusal = $state('');
+  running = $state.raw<Running | null>(null);
+  result = $state.raw<Result | null>(null);
+  /** The input has changed since the result was computed. */
+  stale = $state(false);
+
+  readonly #reader = new Reader();
+  #touched: Partial<Record<SettingName, true>> = {};
+  #run: Run | null = null;
+  #timer: ReturnType<typeof setTimeout> | undefined;
+
+  /** The counts changed: whatever was said about how to read the former ones no longer holds. */
+  countsChanged(fresh: boolean): void {
+    if (fresh) {
+      this.readOptions = {};
+      this.dataset = 0;
+    }
+    this.#changed(fresh ? 0 : PAUSE);
+  }
+
+  setReadOptions(options: ReadOptions): void {
+    this.readOptions = { ...this.readOptions, ...options };
+    this.#changed(0);
+  }
+
+  setSetting<Name extends SettingName>(name: Name, value: Settings[Name]): void {
+    this.settings[name] = value;
+    this.#touched[name] = true;
+    this.settingProblems = { ...this.settingProblems, [name]: undefined };
+    if (name === 'trials') this.#changed(PAUSE);
+    else this.stale = this.result !== null;
+  }
+
+  setDataset(index: number): void {
+    this.dataset = index;
+    this.#suggest();
+    this.stale = this.result !== null;
+  }
+
+  /** Counts of an example, with the settings that belong to them. */
+  takeExample(text: string, name: string, options: Partial<DiagnoseOptions>): void {
+    this.input.replace(text, name);
+    this.#touched = {};
+    this.settings = settingsWith(freshSettings(), options);
+    this.countsChanged(true);
+  }
+
+  /** Opens what an address carries and checks it at once. @returns whether there was anything to open */
+  async open(fragment: string): Promise<boolean> {
+    const address = readAddress(fragment);
+    if (!address) return false;
+    this.input.replace(textOfData(address.data), address.name);
+    this.settings = address.settings;
+    this.#touched = Object.fromEntries(Object.keys(address.settings).map((name) => [name, true]));
+    this.countsChanged(true);
+    await this.start();
+    return true;
+  }
+
+  /** Checks the counts. @returns the result, or null when something stood in the way or it was cancelled */
+  async start(): Promise<Result | null> {
+    this.cancel();
+    clearTimeout(this.#timer);
+    this.refusal = '';
+    await this.#readNow();
+    const settings = await readSettings($state.snapshot(this.settings));
+    this.settingProblems = settings.ok ? {} : settings.problems;
+    if (!this.read?.ok || !settings.ok) return null;
+    const { data, name } = this.read.datasets[this.dataset] ?? this.read.datasets[0];
+    const label = this.read.datasets.length > 1 ? name : this.input.name;
+    return this.#diagnose(data, settings.options, label);
+  }
+
+  async #diagnose(data: CountData, options: DiagnoseOptions, name: string | null): Promise<Result | null> {
+    const since = performance.now();
+    this.running = { share: 0, step: 'fit', since };
+    const run = startRun(data, options, (progress) => {
+      if (this.#run === run) this.running = { ...progress, since };
+    });
+    this.#run = run;
+    const outcome = await run.result;
+    if (this.#run !== run) return null;
+    this.#run = null;
+    this.running = null;
+    if (!outcome.ok) {
+      if (outcome.reason !== 'cancelled') this.refusal = outcome.message;
+      return null;
+    }
+    const address = writeAddress(data, options, name);
+    this.stale = false;
+    this.result = { diagnosis: outcome.diagnosis, data, options, name, address };
+    return this.result;
+  }
+
+  cancel(): void {
+    this.#run?.cancel();
+    this.#run = null;
+    this.running = null;
+  }
+
+  close(): void {
+    this.cancel();
+    clearTimeout(this.#timer);
+    this.#reader.close();
+  }
+
+  #changed(wait: number): void {
+    this.stale = this.result !== null;
+    this.refusal = '';
+    clearTimeout(this.#timer);
+    this.#timer = setTimeout(() => void this.#readNow(), wait);
+  }
+
+  async #readNow(): Promise<void> {
+    const { content, file, empty, name } = this.input;
+    if (empty) {
+      this.read = null;
+    } else if (content === null) {
+      this.read = tooLarge(file?.size ?? 0);
+    } else {
+      const trials = this.#touched.trials ? readTrials(this.settings.trials) : undefined;
+      const options: ReadOptions = { ...this.readOptions };
+      if (trials !== undefined) options.trials = trials;
+      if (name) options.name = name;
+      const result = await this.#reader.read(content, options);
+      if (result === 'failed')
+        this.refusal =
+          'The part that reads counts could not be loaded. Reload the page: an example or an address opens again.';
+      else if (result !== 'superseded') {
+        this.read = result;
+        this.#suggest();
+      }
+    }
+  }
+
+  /** Options that the file itself states fill the fields that nobody has touched. */
+  #suggest(): void {
+    if (!this.read?.ok) return;
+    if (this.dataset >= this.read.datasets.length) this.dataset = 0;
+    const suggested: Suggested = this.read.datasets[this.dataset].suggested;
+    const untouched = Object.fromEntries(
+      Object.entries(suggested).filter(([name]) => !this.#touched[name as SettingName])
+    );
+    this.settings = settingsWith(this.settings, untouched);
+  }
+}
+
+function settingsWith(settings: Settings, options: Partial<DiagnoseOptions>): Settings {
+  const { trials, misread, unit, geometry } = options;
+  const stated: Partial<Settings> = {};
+  if (trials !== undefined) stated.trials = trials === null ? 'unknown' : `${trials}`;
+  if (misread !== undefined) stated.misread = misread === null ? '' : `${misread}`;
+  if (unit) stated.unit = unit;
+  if (geometry) stated.geometry = geometry;
+  return { ...settings, ...stated };
+}

@@ -1,0 +1,66 @@
+import type { DiagnoseOptions } from '$lib/stats/types';
+import { readNumber } from './read-number';
+import type { SettingName, Settings } from './settings';
+
+export type SettingProblems = Partial<Record<SettingName, string>>;
+export type SettingsRead = { ok: true; options: DiagnoseOptions } | { ok: false; problems: SettingProblems };
+
+/** Trials as typed: null for unknown, undefined for what is neither a number nor "unknown". */
+export function readTrials(typed: string): number | null | undefined {
+  const word = typed.trim().toLowerCase();
+  if (word === '' || word === 'unknown') return null;
+  const value = readNumber(word);
+  return value !== null && Number.isInteger(value) && value >= 1 ? value : undefined;
+}
+
+type LawRead = { ok: true; probabilities: number[] } | { ok: false; problem: string };
+
+/** The supplied law has a reader of its own, which is fetched only when there is a law to read. */
+async function readLaw(typed: string): Promise<LawRead> {
+  if (typed.trim() === '') return { ok: true, probabilities: [] };
+  const { readProbabilities } = await import('$lib/formats/read-probabilities');
+  const result = readProbabilities(typed);
+  if (result.ok) return result;
+  const [{ line, message, fix }] = result.problems;
+  return { ok: false, problem: `${line === null ? '' : `Line ${line}: `}${message} ${fix}` };
+}
+
+/** Turns the fields into options, or says of each field what is wrong. Nothing typed is changed. */
+export async function readSettings(settings: Settings): Promise<SettingsRead> {
+  const problems: SettingProblems = {};
+  const number = (name: SettingName, fits: (value: number) => boolean, problem: string): number => {
+    const value = readNumber(settings[name]);
+    if (value !== null && fits(value)) return value;
+    problems[name] = problem;
+    return NaN;
+  };
+
+  const trials = readTrials(settings.trials);
+  if (trials === undefined) problems.trials = 'Write a whole number from 1 up, or “unknown”.';
+  const law = await readLaw(settings.supplied);
+  if (!law.ok) problems.supplied = law.problem;
+  const whole = Number.isInteger;
+  const options: DiagnoseOptions = {
+    trials: trials ?? null,
+    unit: settings.unit,
+    geometry: settings.geometry,
+    misread:
+      settings.misread.trim() === ''
+        ? null
+        : number(
+            'misread',
+            (x) => x >= 0 && x < 0.5,
+            'Write a probability from 0 to below 0.5, or leave it empty.'
+          ),
+    alpha: number('alpha', (x) => x > 0 && x < 1, 'Write a level between 0 and 1, such as 0.01.'),
+    tolerance: number('tolerance', (x) => x > 0, 'Write a fraction above 0, such as 0.1.'),
+    resamples: number('resamples', (x) => whole(x) && x >= 0, 'Write a whole number, such as 1999.'),
+    seed: number(
+      'seed',
+      (x) => whole(x) && x >= 0 && x < 2 ** 32,
+      'Write a whole number from 0 to 4 294 967 295.'
+    ),
+    supplied: law.ok && law.probabilities.length ? law.probabilities : null
+  };
+  return Object.keys(problems).length ? { ok: false, problems } : { ok: true, options };
+}

@@ -1,0 +1,29 @@
+import type { Geometry, Unit } from '$lib/stats/types';
+
+/** What stands in the fields beside the counts, as typed: a wrong entry stays where it is. */
+export interface Settings {
+  trials: string;
+  unit: Unit;
+  geometry: Geometry;
+  misread: string;
+  alpha: string;
+  tolerance: string;
+  resamples: string;
+  seed: string;
+  supplied: string;
+}
+
+export type SettingName = keyof Settings;
+
+/** The fields of a fresh page. */
+export const freshSettings = (): Settings => ({
+  trials: '',
+  unit: 'defect',
+  geometry: 'sites',
+  misread: '',
+  alpha: '0.01',
+  tolerance: '0.1',
+  resamples: '1999',
+  seed: '1',
+  supplied: ''
+});
