@@ -30,8 +30,10 @@ const thorough: Effort = { enough: 1e-9, worth: 1e-5, rounds: 200, transfers: tr
  * searched there too when the variance is within 1 % of the ceiling.
  */
 export function bestLaw(data: FitData): BestLaw {
-  const space = workspace(data);
   const moments = sampleMoments(data);
+  const only = oneCount(data, moments.variance, moments.mean);
+  if (only) return { levels: only, logLikelihood: 0, starts: 1, agreeing: 1 };
+  const space = workspace(data);
   const last = data.first + data.shots.length - 1;
   const candidates = data.withoutEmpty ? conditioned(data, moments.mean) : starts(data.trials, moments, last);
   const found = candidates.map((start) => search(space, start, first)).sort((a, b) => b.value - a.value);
@@ -43,6 +45,12 @@ export function bestLaw(data: FitData): BestLaw {
     (one) => one.value > best.value - 0.01
   ).length;
   return { levels: best.levels, logLikelihood: best.value, starts: candidates.length, agreeing };
+}
+
+/** Every shot had the same count: that many sure trials explain it with likelihood 1. */
+function oneCount(data: FitData, variance: number, mean: number): TrialLevels | null {
+  if (variance > 0 || data.lump) return null;
+  return { p: [], trials: [], ones: mean, zeros: (data.trials ?? Infinity) - mean, poissonPart: 0 };
 }
 
 /** Starts for a law conditioned on n ≥ 1: the unconditioned mean is a fraction of the mean seen. */

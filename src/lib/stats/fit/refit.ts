@@ -18,7 +18,7 @@ export interface Refit {
 /** Up to this many counts a refit comes within 1e-3 nats of the best of many starts, in about 0.5 ms. */
 const shortHistogram = 16;
 const short: Effort = { enough: 1e-5, worth: 5e-5, rounds: 60, transfers: true };
-/** Beyond, within about 0.01 nats (0.05 at the worst tenth), where G² varies by six and more between resamples. */
+/** Beyond, and with N unknown (a Poisson part and small trials are nearly alike), within about 0.01 nats (0.05 at the worst tenth), where G² varies by six and more between resamples. */
 const long: Effort = { enough: 1e-3, worth: 5e-3, rounds: 30, transfers: false };
 
 /**
@@ -29,7 +29,7 @@ const long: Effort = { enough: 1e-3, worth: 5e-3, rounds: 30, transfers: false }
  */
 export function refit(data: FitData, from: TrialLevels): Refit {
   const space = workspace(data);
-  const effort = data.shots.length > shortHistogram ? long : short;
+  const effort = data.shots.length > shortHistogram || data.trials === null ? long : short;
   let best = search(space, from, effort);
   // The law drawn from can forbid a count only by a trial at exactly 0 or 1; start afresh then.
   if (best.value === -Infinity) best = fresh(space, data, effort);

@@ -1,5 +1,5 @@
-import { poissonWindow } from '../laws/poisson-window';
 import { binomialInto } from './binomial-into';
+import { poissonInto } from './poisson-into';
 import type { TrialLevels } from './trial-levels';
 import { reserve, type Workspace } from './workspace';
 
@@ -24,10 +24,8 @@ export function spreadLaw(space: Workspace, levels: TrialLevels, trim: number): 
     addPart(space, first, length, trim);
   }
   if (levels.poissonPart > 0) {
-    const window = poissonWindow(levels.poissonPart, trim, 1);
-    reserve(space, window.values.length);
-    space.part.set(window.values);
-    addPart(space, window.first, window.values.length, trim);
+    const [first, length] = poissonInto(space, levels.poissonPart, trim);
+    addPart(space, first, length, trim);
   }
 }
 

@@ -4,6 +4,7 @@ const families = {
   'fitted law': 2,
   'without empty shots': 3,
   'shot order': 4,
+  batches: 6,
   intervals: 5
 } as const;
 

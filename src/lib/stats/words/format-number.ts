@@ -31,7 +31,9 @@ export function formatPercent(share: number | null, digits = 2): string {
 
 function power(size: number, digits: number): string {
   const [mantissa, exponent] = size.toExponential(digits - 1).split('e');
-  const raised = [...exponent.replace('+', '')].map((c) => (c === '-' ? '⁻' : superscripts[Number(c)])).join('');
+  const raised = [...exponent.replace('+', '')]
+    .map((c) => (c === '-' ? '⁻' : superscripts[Number(c)]))
+    .join('');
   return `${mantissa} × 10${raised}`;
 }
 

@@ -1,0 +1,58 @@
+import type { Evidence } from '../flags/evidence';
+import type { Verdict } from '../types';
+import { formatCount, formatNumber, formatPercent } from '../words/format-number';
+import { sayInterval } from '../words/say-interval';
+import { sayTest } from '../words/say-test';
+
+/** Reasons for the answer, the weightiest first, each a sentence with its number. */
+export function because(
+  verdict: Verdict,
+  evidence: Evidence,
+  excess: number | null,
+  needed: number | null
+): string[] {
+  const { options, moments, tests, certificate } = evidence;
+  const out: string[] = [];
+  if (certificate && certificate.p <= options.alpha) {
+    out.push(
+      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits give more than ${formatNumber(certificate.bound, 3)} a shot (p = ${formatNumber(certificate.p, 2)}).`
+    );
+  }
+  for (const test of tests) {
+    if (test.pAdjusted > options.alpha) continue;
+    out.push(
+      `${names[test.id]}: as extreme a value ${sayTest(test)}; adjusted for ${tests.length} tests p = ${formatNumber(test.pAdjusted, 2)}.`
+    );
+  }
+  const { dispersion } = moments;
+  if (dispersion.value !== null) {
+    out.push(
+      `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean.`
+    );
+  }
+  if (verdict !== 'ruled-out' && excess !== null) {
+    out.push(
+      `With this many shots an excess of ${formatPercent(excess)} over the ceiling is seen in four of five repeats.`
+    );
+  }
+  if (verdict === 'undecided' && needed !== null) {
+    out.push(
+      `If the variance stays where it is now, about ${formatCount(needed)} shots in all would decide.`
+    );
+  }
+  if (verdict === 'compatible') {
+    out.push('Compatible is not the same as independent: some interacting systems give exactly such counts.');
+  }
+  return out;
+}
+
+const names = {
+  ceiling: 'Variance ceiling',
+  fit: 'Fit of the best independent law',
+  'high-tail': 'High tail',
+  'low-tail': 'Low tail',
+  parity: 'Parity',
+  'empty-shots': 'Empty shots',
+  batches: 'Batches',
+  order: 'Order of shots'
+} as const;

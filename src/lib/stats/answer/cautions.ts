@@ -1,0 +1,53 @@
+import type { Evidence } from '../flags/evidence';
+import type { Histogram, TestResult } from '../types';
+import { formatCount, formatNumber, formatPercent } from '../words/format-number';
+
+/** What a reader must keep in mind: first what this histogram adds, then what always holds. */
+export function cautions(
+  { options, shots, trials, moments }: Evidence,
+  histogram: Histogram,
+  tests: TestResult[]
+): string[] {
+  const out: string[] = [];
+  if (histogram.lump) {
+    out.push(
+      `The last row lumps counts of ${formatCount(histogram.lump.from)} and more. They enter the likelihood as a tail; mean, variance and what follows from them count each such shot as ${formatCount(histogram.lump.from)} and are lower limits.`
+    );
+  }
+  if (trials === null) {
+    out.push(
+      'The number of trials was not given, so the ceiling is the Poisson one. A known number of trials makes every test sharper.'
+    );
+  }
+  if (options.geometry !== 'sites' && !options.misread) {
+    out.push(
+      'Kinks are read from neighbouring sites: one misread site toggles two bonds, and independent kinks then look bunched. No misread rate was stated, and none is corrected for.'
+    );
+  }
+  if (options.misread) {
+    out.push(
+      `A misread rate of ${formatPercent(options.misread)} was stated. It is written down, but the tests here are against laws without misreads.`
+    );
+  }
+  if (shots < 300 && moments.variance.value) {
+    out.push('With fewer than about 300 shots the third and fourth cumulants and the far tails say little.');
+  }
+  if (tests.some((test) => test.stoppedEarly)) {
+    out.push(
+      'Resampling of a clear case ended at 100 exceedances (Besag and Clifford 1991); the draws made stand with each test.'
+    );
+  }
+  if (tests.some((test) => test.source === 'resampled' && test.p <= test.smallestP)) {
+    const smallest = Math.max(...tests.map((test) => test.smallestP));
+    out.push(
+      `The smallest p that ${formatCount(options.resamples)} resamples can show is ${formatNumber(smallest, 2)}; the truth may be smaller.`
+    );
+  }
+  return out.concat(always);
+}
+
+const always = [
+  'Compatible with independent trials does not mean independent: free fermions and some exclusion gases give exactly such counts.',
+  'Shots are taken to be alike and independent of each other. Drift between shots breaks that and looks like bunching.',
+  'A statistical screen is not a physical proof in either direction. It does not replace calibration of the apparatus, nor a laboratory’s own safety rules and qualified staff where high voltage, lasers, cryogens or magnets are run on the strength of it. Do not use it to pass or fail hardware that people’s safety depends on.'
+];

@@ -1,0 +1,58 @@
+import type { Evidence } from '../flags/evidence';
+import type { Flag, Verdict } from '../types';
+import { formatCount, formatPercent } from '../words/format-number';
+import { sayHowOften } from '../words/say-p';
+
+/** The answer in one or two sentences, plain first. */
+export function statement(
+  verdict: Verdict,
+  evidence: Evidence,
+  flags: Flag[],
+  needed: number | null
+): string {
+  const shots = `${formatCount(evidence.shots)} ${evidence.shots === 1 ? 'shot' : 'shots'}`;
+  if (verdict === 'ruled-out')
+    return `Independent trials cannot explain these ${shots}: ${strongest(evidence)}`;
+  if (verdict === 'compatible') {
+    const regular = flags.some((flag) => flag.id === 'regular');
+    return (
+      `These ${shots} are compatible with independent trials, and an excess of variance of ${formatPercent(evidence.options.tolerance)} would have shown.` +
+      (regular
+        ? ' They are more regular than equal trials, which repulsion between defects would also give.'
+        : '')
+    );
+  }
+  if (evidence.moments.variance.value === null)
+    return 'One shot cannot tell: it has no spread to compare with anything.';
+  if (evidence.moments.mean.value === 0)
+    return `No defect was seen in ${shots}, so there is nothing to test.`;
+  if (evidence.moments.variance.value === 0)
+    return `Every one of these ${shots} had the same count, so there is no spread to test.`;
+  const more = needed ? ` About ${formatCount(needed)} shots in all would decide.` : '';
+  const hints = flags.filter((flag) => flag.grade === 'hinted' && flag.id !== 'regular');
+  const hint =
+    hints.length > 0
+      ? ` There is a hint of ${hints.map((flag) => flag.id.replace('-', ' ')).join(' and ')}.`
+      : '';
+  return `These ${shots} cannot tell: they neither rule out independent trials nor exclude an excess that matters.${hint}${more}`;
+}
+
+/** The strongest single piece of evidence, in words. */
+function strongest({ tests, certificate, options }: Evidence): string {
+  if (certificate && certificate.p <= options.alpha) {
+    return `a tail of the counts this heavy ${sayHowOften(certificate.p)} under any independent trials with this mean, whatever their probabilities.`;
+  }
+  const best = [...tests].sort((a, b) => a.pAdjusted - b.pAdjusted || a.p - b.p)[0];
+  return `${finding[best.id]} ${sayHowOften(best.p, best.smallestP)} if defects formed independently.`;
+}
+
+const finding = {
+  ceiling: 'counts this uneven',
+  fit: 'a mismatch this large with the best independent law',
+  'high-tail': 'this many shots with large counts',
+  'low-tail': 'this many shots with small counts',
+  parity: 'a preference this strong for one parity',
+  'empty-shots': 'this many empty shots',
+  batches: 'batches this different',
+  order: 'an order this regular'
+} as const;

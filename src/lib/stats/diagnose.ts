@@ -1,0 +1,116 @@
+import { answer } from './answer/answer';
+import { cautions } from './answer/cautions';
+import { certificate } from './bounds/certificate';
+import { ceilingTest } from './resampling/ceiling-test';
+import { criticalTrials } from './bounds/critical-trials';
+import { engineVersion } from './engine-version';
+import { bestLaw } from './fit/best-law';
+import { fitData } from './fit/fit-data';
+import { toLaw } from './fit/trial-levels';
+import { evidenceOf } from './flags/gather-evidence';
+import { raiseFlags } from './flags/raise-flags';
+import { fitReport } from './fit-report/fit-report';
+import { floorLaw } from './floor/floor-law';
+import { checkOptions } from './input/check-options';
+import { digest } from './input/digest';
+import { inUnits } from './input/in-units';
+import { toHistogram } from './input/to-histogram';
+import { momentReport } from './moments/moment-report';
+import { adjust } from './multiple/adjust';
+import { orderTests } from './order/order-tests';
+import { equalTrials } from './references/equal-trials';
+import { fittedTests } from './resampling/fitted-tests';
+import { pacer } from './resampling/pacer';
+import type { CountData, DiagnoseOptions, Diagnosis, OnProgress } from './types';
+import { distribution } from './views/distribution';
+import { lawTable } from './views/law-table';
+import { ratePoints } from './views/rate-points';
+import { tailPoints } from './views/tail-points';
+
+/**
+ * The main job: counts in, the diagnosis document out.
+ *
+ * Pure: the same data, options and engine version give the same document, in a page, a worker or a server.
+ *
+ * @param data histogram or shot list, counts in defects
+ * @param options see DiagnoseOptions; start from defaultOptions
+ * @param onProgress told a share and a step every 60 ms or so
+ * @param signal cancels: the promise then rejects with the signal's reason
+ * @throws BadInput, with a reason in words, for data or options that cannot be diagnosed
+ */
+export async function diagnose(
+  data: CountData,
+  options: DiagnoseOptions,
+  onProgress?: OnProgress,
+  signal?: AbortSignal
+): Promise<Diagnosis> {
+  checkOptions(options);
+  const given = toHistogram(data);
+  const { histogram, trials } = inUnits(given, options.trials, options.unit);
+  const pace = pacer(onProgress, signal);
+  await pace.step('fit', 0);
+  const counts = fitData(histogram, trials);
+  const best = bestLaw(counts);
+  const law = toLaw(best.levels);
+  await pace.step('floor', 0.04);
+  const floor = floorLaw(counts);
+  const drawing = { resamples: options.resamples, seed: options.seed };
+  const moments = momentReport(histogram, trials, drawing);
+  const proof = certificate({ counts: histogram.counts, lump: histogram.lump, shots: counts.total, trials });
+  const spread = moments.variance.value !== null && moments.variance.value > 0;
+  await pace.step('resampling', 0.08);
+  const equal = equalTrials(counts, trials);
+  const ceiling = spread
+    ? await ceilingTest(counts, equal.parameter, drawing, pace.within(0.08, 0.12))
+    : null;
+  const fitted = await fittedTests(counts, best, drawing, pace.within(0.12, 0.85));
+  await pace.step('shot order', 0.85);
+  const order = await orderTests(data, drawing, pace.within(0.85, 0.97));
+  await pace.step('writing', 0.97);
+  const tests = adjust([...(ceiling ? [ceiling] : []), ...fitted.tests, ...order.tests]);
+  const table = lawTable(counts, law);
+  const shown = distribution(histogram, counts.total, trials, table);
+  const evidence = evidenceOf({ options, counts, trials, moments, tests, certificate: proof, fitted, law });
+  const flags = raiseFlags(evidence);
+  return {
+    format: 'severalty.diagnosis/1',
+    engine: {
+      version: engineVersion,
+      seed: options.seed,
+      resamples: options.resamples,
+      alpha: options.alpha,
+      tolerance: options.tolerance
+    },
+    data: {
+      digest: digest(given),
+      shots: counts.total,
+      trials: options.trials,
+      unit: options.unit,
+      geometry: options.geometry,
+      misread: options.misread,
+      counts: given.counts,
+      lump: given.lump,
+      ordered: data.kind === 'shots',
+      batches: data.kind === 'shots' && data.batches ? new Set(data.batches).size : null
+    },
+    moments: {
+      ...moments,
+      criticalTrials: spread ? criticalTrials(moments.mean.value!, moments.variance.value!) : null
+    },
+    fit: fitReport({ counts, best, law, floor, fitted, supplied: options.supplied, alpha: options.alpha }),
+    distribution: shown,
+    rate: ratePoints(shown, counts.total, trials, table),
+    tails: { points: tailPoints(shown, counts.total, trials, table), certificate: proof },
+    tests,
+    notRun: [
+      ...(ceiling
+        ? []
+        : [{ id: 'ceiling' as const, reason: 'The counts have no spread to compare with the ceiling.' }]),
+      ...fitted.notRun,
+      ...order.notRun
+    ],
+    flags,
+    answer: answer(evidence, flags),
+    cautions: cautions(evidence, histogram, tests)
+  };
+}

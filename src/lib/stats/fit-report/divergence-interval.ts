@@ -1,0 +1,45 @@
+import type { FitData } from '../fit/fit-data';
+import type { Interval } from '../types';
+
+/** What the plug-in divergence is worth once its bias is known. */
+export interface CorrectedDivergence {
+  /** D minus its mean under resampling from the fitted law; can be below 0. */
+  corrected: number;
+  interval: Interval;
+}
+
+/**
+ * Divergence of the truth from the independent-trial laws, with its 95 % interval, nats a shot.
+ *
+ * The plug-in D is biased upward: its mean over resamples from the fitted law, where the truth is 0, is taken
+ * off. Its variance has two parts: Var(ln(p̂/f))/S, which rules when the truth is far (the refit moves D only
+ * in second order), and the variance over the resamples, which rules when it is near.
+ *
+ * @param law f at data.first …, and of the lump
+ * @param nullDivergences KL of each resample from its own refit
+ */
+export function divergenceInterval(
+  data: FitData,
+  law: Float64Array,
+  lumpLaw: number,
+  plugIn: number,
+  nullDivergences: number[]
+): CorrectedDivergence {
+  const draws = nullDivergences.length;
+  const bias = nullDivergences.reduce((sum, value) => sum + value, 0) / draws;
+  const noise = nullDivergences.reduce((sum, value) => sum + (value - bias) ** 2, 0) / Math.max(1, draws - 1);
+  let squares = 0;
+  const add = (shots: number, f: number) => {
+    if (shots > 0) squares += (shots / data.total) * (Math.log(shots / data.total / f) - plugIn) ** 2;
+  };
+  data.shots.forEach((shots, i) => add(shots, law[i]));
+  if (data.lump) add(data.lump.shots, lumpLaw);
+  const reach = 1.96 * Math.sqrt(squares / data.total + noise);
+  const corrected = plugIn - bias;
+  const interval = {
+    value: Math.max(0, corrected),
+    low: Math.max(0, corrected - reach),
+    high: Math.max(0, corrected + reach)
+  };
+  return { corrected, interval };
+}

@@ -1,0 +1,54 @@
+import type { BestLaw } from '../fit/best-law';
+import type { FitData } from '../fit/fit-data';
+import type { FloorLaw } from '../floor/floor-law';
+import { lawWindow } from '../laws/law-window';
+import { referenceLaws } from '../references/reference-laws';
+import { cells } from '../resampling/cells';
+import { divergence } from '../resampling/divergence';
+import type { FittedTests } from '../resampling/fitted-tests';
+import type { Diagnosis, Law } from '../types';
+import { divergenceInterval } from './divergence-interval';
+import { howFound } from './how-found';
+
+export interface FitReportInput {
+  counts: FitData;
+  best: BestLaw;
+  law: Law;
+  floor: FloorLaw;
+  fitted: FittedTests;
+  supplied: number[] | null;
+  alpha: number;
+}
+
+/** The `fit` part of the document. About ln(1/α)/D shots make a divergence of D noticeable at level α. */
+export function fitReport({
+  counts,
+  best,
+  law,
+  floor,
+  fitted,
+  supplied,
+  alpha
+}: FitReportInput): Diagnosis['fit'] {
+  const plugIn = divergence(counts, best.logLikelihood);
+  const laid = cells(counts, lawWindow(law, 1e-25, 1));
+  const corrected =
+    fitted.nullDivergences.length > 0
+      ? divergenceInterval(counts, laid.law, laid.above, plugIn, fitted.nullDivergences)
+      : null;
+  const noticed =
+    corrected && corrected.corrected > 0 ? Math.ceil(Math.log(1 / alpha) / corrected.corrected) : null;
+  return {
+    logLikelihood: best.logLikelihood,
+    levels: law.levels,
+    poissonPart: law.poissonPart,
+    divergence: plugIn,
+    floor: Math.min(floor.divergence, plugIn),
+    divergenceCorrected: corrected?.corrected ?? null,
+    divergenceInterval: corrected?.interval ?? { value: null, low: null, high: null },
+    gSquared: 2 * counts.total * plugIn,
+    shotsToNotice: noticed,
+    ...howFound(best, plugIn, floor.divergence),
+    ...referenceLaws(counts, supplied)
+  };
+}

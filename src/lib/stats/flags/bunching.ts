@@ -1,0 +1,44 @@
+import type { Flag } from '../types';
+import { formatNumber } from '../words/format-number';
+import { sayInterval } from '../words/say-interval';
+import { allEven, gradeOf, type Evidence } from './evidence';
+
+/**
+ * Bunching: the variance ceiling is broken, and not by one tail alone.
+ *
+ * Not raised when every count is even: counting pairs singly doubles the variance, and pairing says so.
+ */
+export function bunching(evidence: Evidence): Flag | null {
+  const grade = gradeOf(evidence, 'ceiling');
+  if (!grade || allEven(evidence)) return null;
+  const high = gradeOf(evidence, 'high-tail');
+  const low = gradeOf(evidence, 'low-tail');
+  const lowRan = evidence.tests.some((test) => test.id === 'low-tail');
+  if (high && lowRan && !low) return null;
+  if (low && !high) return null;
+  const { dispersion, pairCovariance } = evidence.moments;
+  const { trials } = evidence;
+  const correlation =
+    trials && trials > 1 && pairCovariance !== null
+      ? ` Pairs of trials then share a covariance of at least ${formatNumber(pairCovariance / (trials * (trials - 1)), 2)} on average.`
+      : '';
+  return {
+    id: 'bunching',
+    grade,
+    tests: ['ceiling', ...(high ? (['high-tail'] as const) : []), ...(low ? (['low-tail'] as const) : [])],
+    statement:
+      'Defects come together: the counts vary more from shot to shot than any independent trials with this mean can.',
+    size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials.${correlation}`,
+    otherCauses: [
+      'a rate that drifted or differed between runs that were pooled',
+      'read-out flips, when kinks are read from neighbouring sites: one misread site toggles two bonds',
+      'boundary sites that favour one phase, so that defects enter in pairs',
+      'dead shots mixed in, which lower the mean and widen the counts'
+    ],
+    next: [
+      'Give the shots in order, with their batches: drift would then show by itself.',
+      'Measure the misread rate of one site, and repeat the check with bonds as geometry.',
+      'Check each run alone; bunching by interaction stays, pooling goes.'
+    ]
+  };
+}

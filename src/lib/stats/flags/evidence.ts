@@ -1,0 +1,42 @@
+import type { Certificate, DiagnoseOptions, Diagnosis, TestId, TestResult } from '../types';
+
+/** All that flags and the answer are decided from. */
+export interface Evidence {
+  options: DiagnoseOptions;
+  shots: number;
+  trials: number | null;
+  moments: Omit<Diagnosis['moments'], 'criticalTrials'>;
+  tests: TestResult[];
+  certificate: Certificate | null;
+  /** p of the low tail with empty shots set aside; null when it was not asked. */
+  lowTailOfTheRest: number | null;
+  /** Empty shots seen, and expected by the law of the others (null when that says nothing). */
+  empty: { seen: number; expected: number | null };
+  /** Shots with an even count, and the share the fitted law expects; null with a lump. `oneCountAlone`: the preference goes when one count is left out. */
+  even: { seen: number; expected: number; oneCountAlone: boolean } | null;
+}
+
+export type Grade = 'shown' | 'hinted' | null;
+
+/** Adjusted p from which a flag is hinted at. */
+const hint = 0.05;
+
+/** Shown at the level of the answer, hinted at 5 %, after adjustment for all tests that ran. */
+export function gradeOf(evidence: Evidence, id: TestId): Grade {
+  const test = evidence.tests.find((one) => one.id === id);
+  if (!test) return null;
+  if (test.pAdjusted <= evidence.options.alpha) return 'shown';
+  return test.pAdjusted <= hint ? 'hinted' : null;
+}
+
+/** The stronger of two grades. */
+export function stronger(a: Grade, b: Grade): Grade {
+  return a === 'shown' || b === 'shown' ? 'shown' : (a ?? b);
+}
+
+/** True when every shot had an even count, as kinks on a ring do by construction. */
+export function allEven(evidence: Evidence): boolean {
+  return (
+    evidence.even !== null && evidence.even.seen === evidence.shots && evidence.moments.variance.value !== 0
+  );
+}

@@ -1,0 +1,40 @@
+import type { FitData } from '../fit/fit-data';
+import { evenShots } from './even-shots';
+import type { FittedTests } from '../resampling/fitted-tests';
+import type { Certificate, DiagnoseOptions, Law, TestResult } from '../types';
+import type { Evidence } from './evidence';
+
+export interface Gathered {
+  options: DiagnoseOptions;
+  counts: FitData;
+  trials: number | null;
+  moments: Evidence['moments'];
+  tests: TestResult[];
+  certificate: Certificate | null;
+  fitted: FittedTests;
+  law: Law;
+}
+
+/** What flags and the answer are decided from, out of the parts of a diagnosis. */
+export function evidenceOf({
+  options,
+  counts,
+  trials,
+  moments,
+  tests,
+  certificate,
+  fitted,
+  law
+}: Gathered): Evidence {
+  return {
+    options,
+    shots: counts.total,
+    trials,
+    moments,
+    tests,
+    certificate,
+    lowTailOfTheRest: fitted.lowTailOfTheRest,
+    empty: { seen: counts.first === 0 ? (counts.shots[0] ?? 0) : 0, expected: fitted.expectedEmpty },
+    even: counts.lump ? null : evenShots(counts, law)
+  };
+}

@@ -1,0 +1,27 @@
+import type { Flag } from '../types';
+import { formatPercent } from '../words/format-number';
+import { gradeOf, type Evidence } from './evidence';
+import { misreadNeeded } from './misread-needed';
+
+/**
+ * Misreads: kinks are read from neighbouring sites, the ceiling is broken, and a misread rate under 10 % would
+ * make independent kinks look so. Only ever a hint: the counts alone cannot tell flips from bunching.
+ */
+export function misreads(evidence: Evidence): Flag | null {
+  const { geometry, misread } = evidence.options;
+  const { mean, variance } = evidence.moments;
+  if (geometry !== 'open-bonds' || !gradeOf(evidence, 'ceiling') || !evidence.trials) return null;
+  const needed = misreadNeeded(mean.value!, variance.value!, evidence.trials);
+  if (needed === null || needed > 0.1) return null;
+  const stated = misread ? ` You stated ${formatPercent(misread)}.` : '';
+  return {
+    id: 'misreads',
+    grade: 'hinted',
+    tests: ['ceiling'],
+    statement:
+      'Misread sites alone could give this excess: each toggles two neighbouring bonds, so independent kinks look bunched.',
+    size: `Independent kinks with a misread rate of ${formatPercent(needed)} a site would have this mean and variance.${stated}`,
+    otherCauses: ['true bunching; the counts alone cannot tell the two apart'],
+    next: ['Measure the misread rate of a site on prepared states and compare it with the rate above.']
+  };
+}

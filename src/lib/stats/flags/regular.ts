@@ -1,0 +1,31 @@
+import type { Flag } from '../types';
+import { sayInterval } from '../words/say-interval';
+import type { Evidence } from './evidence';
+
+/**
+ * Regular: the variance lies well below the ceiling. Not a violation: shown when the whole 95 % interval of
+ * variance/ceiling is below 1 − 2·tolerance, hinted below 1 − tolerance.
+ */
+export function regular(evidence: Evidence): Flag | null {
+  const { dispersion } = evidence.moments;
+  const { tolerance } = evidence.options;
+  if (dispersion.high === null || !(dispersion.high < 1 - tolerance)) return null;
+  return {
+    id: 'regular',
+    grade: dispersion.high < 1 - 2 * tolerance ? 'shown' : 'hinted',
+    tests: [],
+    statement:
+      'A remark, not a violation: counts are more regular than equal independent trials would make them. Uneven probabilities give that, and so does repulsion between defects; the counts alone cannot tell which.',
+    size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials.`,
+    otherCauses: [
+      'probabilities that differ between trials, such as modes of different momentum',
+      'repulsion or exclusion between neighbouring defects',
+      'post-selection: dropping empty shots or large counts makes counts look regular',
+      'more trials claimed than can hold a defect'
+    ],
+    next: [
+      'Say whether any shots were dropped, and by what rule.',
+      'Measure correlations between sites: exclusion shows there even where the counts are compatible.'
+    ]
+  };
+}

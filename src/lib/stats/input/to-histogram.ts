@@ -1,0 +1,40 @@
+import { BadInput, type CountData, type Histogram } from '../types';
+
+/** Counts of a shot list summed, or a histogram put in order and checked; rows without shots are dropped. */
+export function toHistogram(data: CountData): Histogram {
+  const histogram = data.kind === 'shots' ? summed(data.shots) : data;
+  const counts = [...histogram.counts].filter(([, shots]) => shots !== 0).sort((a, b) => a[0] - b[0]);
+  const lump = histogram.lump && histogram.lump.shots > 0 ? histogram.lump : null;
+  let total = 0;
+  let before = -1;
+  for (const [count, shots] of lump ? [...counts, [lump.from, lump.shots]] : counts) {
+    if (!Number.isSafeInteger(count) || count < 0)
+      throw new BadInput(`A count must be a whole number from 0 up, not ${count}.`);
+    if (!Number.isSafeInteger(shots) || shots < 0) {
+      throw new BadInput(
+        `The number of shots must be a whole number from 0 up, not ${shots} (count ${count}).`
+      );
+    }
+    if (count <= before)
+      throw new BadInput(`The count ${count} stands twice, or inside the closing row "or more".`);
+    before = count;
+    total += shots;
+  }
+  if (!(total > 0)) throw new BadInput('There are no shots.');
+  if (total > Number.MAX_SAFE_INTEGER)
+    throw new BadInput('The shots sum to more than 2^53, beyond which they cannot be told apart.');
+  if (counts.length > mostCounts)
+    throw new BadInput(
+      `There are ${counts.length} different counts; at most ${mostCounts} can be diagnosed.`
+    );
+  return { kind: 'histogram', counts, lump };
+}
+
+/** A document of more rows than this is no longer read by anyone, and the laws would take minutes. */
+const mostCounts = 20_000;
+
+function summed(shots: number[] | Uint32Array): Histogram {
+  const seen = new Map<number, number>();
+  for (const count of shots) seen.set(count, (seen.get(count) ?? 0) + 1);
+  return { kind: 'histogram', counts: [...seen], lump: null };
+}
