@@ -1,0 +1,52 @@
+import type { Geometry, Unit } from '../../stats/types';
+import type { Suggested } from '../types';
+import type { JsonReader } from './json-reader';
+import { describe, type JsonNode, member } from './node';
+
+const units: Unit[] = ['defect', 'pair'];
+const geometries: Geometry[] = ['sites', 'open-bonds', 'ring-bonds'];
+
+/** Keys of an object that state options of the diagnosis. */
+export const suggestedKeys = ['trials', 'unit', 'geometry', 'misread'];
+
+/**
+ * Options that an object states beside its counts; a value that cannot be one is a problem, since
+ * dropping it would change the answer unseen.
+ */
+export function readSuggested(reader: JsonReader, root: JsonNode): Suggested {
+  const suggested: Suggested = {};
+  const trials = member(root, 'trials');
+  if (trials) {
+    const unknown =
+      (trials.kind === 'literal' && trials.value === null) ||
+      (trials.kind === 'string' && trials.value === 'unknown');
+    const read = unknown ? null : reader.whole(trials, 'trials');
+    if (unknown || read !== null) suggested.trials = read;
+  }
+  const unit = oneOf(reader, member(root, 'unit'), units);
+  if (unit) suggested.unit = unit;
+  const geometry = oneOf(reader, member(root, 'geometry'), geometries);
+  if (geometry) suggested.geometry = geometry;
+  const misread = member(root, 'misread');
+  if (misread?.kind === 'literal' && misread.value === null) suggested.misread = null;
+  else if (misread) {
+    const value = misread.kind === 'number' ? Number(misread.raw) : NaN;
+    if (value >= 0 && value <= 0.5) suggested.misread = value;
+    else
+      reader.problem(
+        misread.at,
+        `The misread probability is ${describe(misread)}.`,
+        'Give a number from 0 to 0.5, or leave it out.'
+      );
+  }
+  return suggested;
+}
+
+function oneOf<T extends string>(reader: JsonReader, node: JsonNode | null, allowed: T[]): T | null {
+  if (!node) return null;
+  const found = node.kind === 'string' ? allowed.find((value) => value === node.value) : undefined;
+  if (found === undefined) {
+    reader.problem(node.at, `This must be one of ${allowed.join(', ')}.`, 'Correct it, or leave it out.');
+  }
+  return found ?? null;
+}
