@@ -43,6 +43,13 @@ export function cautions(
       `The smallest p that ${formatCount(options.resamples)} resamples can show is ${formatNumber(smallest, 2)}; the truth may be smaller.`
     );
   }
+  const reachable =
+    Math.max(0, ...tests.filter((test) => test.resamples > 0).map((test) => test.smallestP)) * tests.length;
+  if (reachable > options.alpha) {
+    out.push(
+      `With ${formatCount(options.resamples)} resamples no test can reach the level of ${formatNumber(options.alpha, 2)} once adjusted for ${tests.length} tests; at least ${formatCount(Math.ceil(tests.length / options.alpha))} are needed.`
+    );
+  }
   return out.concat(always);
 }
 

@@ -15,13 +15,13 @@ export interface CorrectedDivergence {
  * off. Its variance has two parts: Var(ln(p̂/f))/S, which rules when the truth is far (the refit moves D only
  * in second order), and the variance over the resamples, which rules when it is near.
  *
- * @param law f at data.first …, and of the lump
+ * @param logLaw ln f at data.first …, and of the lump
  * @param nullDivergences KL of each resample from its own refit
  */
 export function divergenceInterval(
   data: FitData,
-  law: Float64Array,
-  lumpLaw: number,
+  logLaw: ArrayLike<number>,
+  logLump: number,
   plugIn: number,
   nullDivergences: number[]
 ): CorrectedDivergence {
@@ -29,11 +29,11 @@ export function divergenceInterval(
   const bias = nullDivergences.reduce((sum, value) => sum + value, 0) / draws;
   const noise = nullDivergences.reduce((sum, value) => sum + (value - bias) ** 2, 0) / Math.max(1, draws - 1);
   let squares = 0;
-  const add = (shots: number, f: number) => {
-    if (shots > 0) squares += (shots / data.total) * (Math.log(shots / data.total / f) - plugIn) ** 2;
+  const add = (shots: number, logF: number) => {
+    if (shots > 0) squares += (shots / data.total) * (Math.log(shots / data.total) - logF - plugIn) ** 2;
   };
-  data.shots.forEach((shots, i) => add(shots, law[i]));
-  if (data.lump) add(data.lump.shots, lumpLaw);
+  data.shots.forEach((shots, i) => add(shots, logLaw[i]));
+  if (data.lump) add(data.lump.shots, logLump);
   const reach = 1.96 * Math.sqrt(squares / data.total + noise);
   const corrected = plugIn - bias;
   const interval = {

@@ -1,6 +1,7 @@
 import type { BestLaw } from '../fit/best-law';
 import type { FitData } from '../fit/fit-data';
 import type { FloorLaw } from '../floor/floor-law';
+import { logPmf } from '../laws/log-pmf';
 import { lawWindow } from '../laws/law-window';
 import { referenceLaws } from '../references/reference-laws';
 import { cells } from '../resampling/cells';
@@ -32,9 +33,12 @@ export function fitReport({
 }: FitReportInput): Diagnosis['fit'] {
   const plugIn = divergence(counts, best.logLikelihood);
   const laid = cells(counts, lawWindow(law, 1e-25, 1));
+  const logLaw = Float64Array.from(laid.law, (f, i) =>
+    f > 1e-20 ? Math.log(f) : logPmf(law, counts.first + i)
+  );
   const corrected =
     fitted.nullDivergences.length > 0
-      ? divergenceInterval(counts, laid.law, laid.above, plugIn, fitted.nullDivergences)
+      ? divergenceInterval(counts, logLaw, Math.log(laid.above), plugIn, fitted.nullDivergences)
       : null;
   const noticed =
     corrected && corrected.corrected > 0 ? Math.ceil(Math.log(1 / alpha) / corrected.corrected) : null;

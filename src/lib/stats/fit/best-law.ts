@@ -1,8 +1,9 @@
 import { alike, starts } from './starts';
 import type { FitData } from './fit-data';
+import { lawLogLikelihood } from './law-log-likelihood';
 import { sampleMoments } from './sample-moments';
 import { search, type Effort } from './search';
-import type { TrialLevels } from './trial-levels';
+import { toLaw, type TrialLevels } from './trial-levels';
 import { workspace } from './workspace';
 
 /** The best law found, and how. */
@@ -41,6 +42,7 @@ export function bestLaw(data: FitData): BestLaw {
   const polish = (data.trials ?? 0) > 100 ? 1 : 2;
   const polished = found.slice(0, polish).map((one) => search(space, one.levels, thorough));
   const best = polished.reduce((a, b) => (b.value > a.value ? b : a));
+  if (best.value === -Infinity) return underflowing(data, moments.mean);
   const agreeing = [...polished, ...found.slice(polish)].filter(
     (one) => one.value > best.value - 0.01
   ).length;
@@ -51,6 +53,15 @@ export function bestLaw(data: FitData): BestLaw {
 function oneCount(data: FitData, variance: number, mean: number): TrialLevels | null {
   if (variance > 0 || data.lump) return null;
   return { p: [], trials: [], ones: mean, zeros: (data.trials ?? Infinity) - mean, poissonPart: 0 };
+}
+
+/**
+ * Counts so far from every start that its law underflows there (a variance hundreds of times the ceiling):
+ * equal trials are then the best law, and their likelihood still has a logarithm.
+ */
+function underflowing(data: FitData, mean: number): BestLaw {
+  const levels = alike(data.trials, mean);
+  return { levels, logLikelihood: lawLogLikelihood(data, toLaw(levels)), starts: 1, agreeing: 1 };
 }
 
 /** Starts for a law conditioned on n ≥ 1: the unconditioned mean is a fraction of the mean seen. */

@@ -19,8 +19,11 @@ export interface Effort {
 /** Climbs from a start, then makes the structural moves that pay until none does. */
 export function search(space: Workspace, start: TrialLevels, effort: Effort): Climb {
   let best = climb(space, start, effort.enough);
+  // A sum over 2^50 shots is rounded at about one nat: gains under that are no gains.
+  const noise = Number.isFinite(best.value) ? 1e-14 * Math.abs(best.value) : 0;
+  const sighted = { ...effort, enough: effort.enough + noise, worth: effort.worth + noise };
   for (let round = 0; round < effort.rounds; round++) {
-    const next = improved(space, best, effort);
+    const next = improved(space, best, sighted);
     if (!next) break;
     best = next;
   }

@@ -21,8 +21,10 @@ export type Grade = 'shown' | 'hinted' | null;
 /** Adjusted p from which a flag is hinted at. */
 const hint = 0.05;
 
-/** Shown at the level of the answer, hinted at 5 %, after adjustment for all tests that ran. */
+/** Shown at the level of the answer (a certificate shows its tail), hinted at 5 %, after adjustment for all tests that ran. */
 export function gradeOf(evidence: Evidence, id: TestId): Grade {
+  const { certificate, options } = evidence;
+  if (certificate && certificate.p <= options.alpha && id === `${certificate.side}-tail`) return 'shown';
   const test = evidence.tests.find((one) => one.id === id);
   if (!test) return null;
   if (test.pAdjusted <= evidence.options.alpha) return 'shown';

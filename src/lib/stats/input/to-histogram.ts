@@ -23,15 +23,17 @@ export function toHistogram(data: CountData): Histogram {
   if (!(total > 0)) throw new BadInput('There are no shots.');
   if (total > Number.MAX_SAFE_INTEGER)
     throw new BadInput('The shots sum to more than 2^53, beyond which they cannot be told apart.');
-  if (counts.length > mostCounts)
+  const first = counts.length > 0 ? counts[0][0] : lump!.from;
+  if (before - first > widest) {
     throw new BadInput(
-      `There are ${counts.length} different counts; at most ${mostCounts} can be diagnosed.`
+      `The counts reach from ${first} to ${before}; at most ${widest} neighbouring counts can be diagnosed.`
     );
+  }
   return { kind: 'histogram', counts, lump };
 }
 
-/** A document of more rows than this is no longer read by anyone, and the laws would take minutes. */
-const mostCounts = 20_000;
+/** A document of more rows than this is no longer read by anyone, and its laws would take minutes. */
+const widest = 20_000;
 
 function summed(shots: number[] | Uint32Array): Histogram {
   const seen = new Map<number, number>();

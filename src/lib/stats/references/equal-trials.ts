@@ -1,7 +1,9 @@
 import type { FitData } from '../fit/fit-data';
 import { climb } from '../fit/climb';
+import { lawLogLikelihood } from '../fit/law-log-likelihood';
 import { sampleMoments } from '../fit/sample-moments';
 import { alike } from '../fit/starts';
+import { toLaw } from '../fit/trial-levels';
 import { workspace } from '../fit/workspace';
 
 /**
@@ -17,6 +19,9 @@ export function equalTrials(
   const space = workspace({ ...data, trials });
   const found = climb(space, alike(trials, sampleMoments(data).mean), 1e-12);
   const { p, ones, poissonPart } = found.levels;
+  // Counts so far out that the law underflows there: then there is no slope to climb, but still a logarithm.
+  const value =
+    found.value > -Infinity ? found.value : lawLogLikelihood({ ...data, trials }, toLaw(found.levels));
   const parameter = trials === null ? poissonPart : p.length > 0 ? p[0] : ones > 0 ? 1 : 0;
-  return { logLikelihood: found.value, parameter };
+  return { logLikelihood: value, parameter };
 }

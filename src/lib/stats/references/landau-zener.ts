@@ -4,7 +4,7 @@ import { lawMoments } from '../laws/law-moments';
 import { findRoot } from '../numerics/find-root';
 import { maximise } from '../numerics/maximise';
 import { landauZenerLaw } from './landau-zener-law';
-import { lawLogLikelihood } from './law-log-likelihood';
+import { lawLogLikelihood } from '../fit/law-log-likelihood';
 
 /** Multiplications that one evaluation may cost; forty are needed, and the whole must stay well under a second. */
 const budget = 2e7;

@@ -4,7 +4,7 @@ import type { Reference, ReferenceId } from '../types';
 import { equalTrials } from './equal-trials';
 import { gaussian } from './gaussian';
 import { landauZener } from './landau-zener';
-import { lawLogLikelihood } from './law-log-likelihood';
+import { lawLogLikelihood } from '../fit/law-log-likelihood';
 
 /** References shown beside the best law, and those left out with the reason. */
 export interface ReferenceLaws {

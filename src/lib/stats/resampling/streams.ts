@@ -2,9 +2,8 @@
 const families = {
   'equal trials': 1,
   'fitted law': 2,
-  'without empty shots': 3,
-  'shot order': 4,
-  batches: 6,
+  'shot order': 3,
+  batches: 4,
   intervals: 5
 } as const;
 

@@ -28,10 +28,14 @@ export function tailExcess(
   for (let i = side === 'high' ? shots.length - 1 : 0; side === 'high' ? i >= from : i <= from; i += step) {
     seen += shots[i];
     expected += total * law[i];
-    if (seen > expected) largest = Math.max(largest, deviance(seen, Math.min(expected, total), total));
+    if (seen > expected)
+      largest = Math.max(largest, deviance(seen, Math.min(Math.max(expected, least), total), total));
   }
   return Math.sqrt(2 * largest);
 }
+
+/** An expectation that underflows to 0 would make one shot infinitely surprising. */
+const least = 1e-290;
 
 function deviance(seen: number, expected: number, total: number): number {
   const inside = seen * Math.log(seen / expected);

@@ -18,6 +18,8 @@ export interface LawTable {
 
 /** Up to this N every count is shown; beyond, those seen and nine standard deviations of the law. */
 const fullTable = 60;
+/** Rows shown beyond the counts seen, at most, on either side. */
+const margin = 500;
 
 /** Counts shown and the law there, with relative error under 1e-10 down to 1e-300. */
 export function lawTable(data: FitData, law: Law): LawTable {
@@ -27,10 +29,11 @@ export function lawTable(data: FitData, law: Law): LawTable {
   const last = data.first + data.shots.length - 1;
   const most = data.trials ?? Infinity;
   const whole = most <= fullTable;
-  const first = whole ? 0 : Math.max(0, Math.min(data.first, Math.floor(mean - 9 * spread)) - 1);
-  const end = whole
-    ? most
-    : Math.min(most, Math.max(last, data.lump?.from ?? 0, Math.ceil(mean + 9 * spread)) + 1);
+  const seen = Math.max(last, data.lump?.from ?? 0);
+  const lowest = Math.max(data.first - margin, Math.min(data.first, Math.floor(mean - 9 * spread)) - 1);
+  const highest = Math.min(seen + margin, Math.max(seen, Math.ceil(mean + 9 * spread)) + 1);
+  const first = whole ? 0 : Math.max(0, lowest);
+  const end = whole ? most : Math.min(most, highest);
   const f: number[] = [];
   const logF: number[] = [];
   for (let n = first; n <= end; n++) {

@@ -1,7 +1,7 @@
-import type { FitData } from '../fit/fit-data';
 import { logPmf } from '../laws/log-pmf';
 import { lawWindow } from '../laws/law-window';
 import type { Law } from '../types';
+import type { FitData } from './fit-data';
 
 /**
  * Σ h_n ln f_n of a histogram under a given law, a lump by its tail sum; nats. −Infinity when a count was
