@@ -6,7 +6,7 @@ import { tilt } from './tilt';
  * ln f_n of a Poisson-binomial law at one count, however improbable; −Infinity off the support.
  *
  * f_n = e^{Λ(θ) − θn} f̃_n with θ tilting the mean onto n: f̃_n is then a probability near its mode, and
- * nothing underflows. Relative error of f_n about 1e-16 times |ln f_n|.
+ * nothing underflows. Relative error of f_n about 1e-16 times |ln f_n|, |θn| or |θ(N−n)|, whichever is largest.
  */
 export function logPmf(law: Law, count: number): number {
   if (!Number.isInteger(count) || count < 0) return -Infinity;

@@ -13,8 +13,8 @@ export interface Tilt {
  * Λ'(θ) = count. Then f_count = e^{Λ(θ) − θ·count} f̃_count.
  *
  * @returns null where no tilt reaches the count: at or beyond the ends of the law's support. There
- *   Λ(θ) − θ·count has its infimum in the limit (see rateOf).
- * @remarks Newton from the tilt of an equal-trials law, kept within a bracket; Λ' is monotone.
+ *   Λ(θ) − θ·count has its infimum in the limit (see lawRate).
+ * @remarks Newton kept within a bracket; Λ' is monotone. Probabilities from 1e-300 up.
  */
 export function tilt(law: Law, count: number): Tilt | null {
   const sure = law.levels.reduce((sum, { p, trials }) => sum + (p >= 1 ? trials : 0), 0);
@@ -23,19 +23,24 @@ export function tilt(law: Law, count: number): Tilt | null {
   let low = -Infinity;
   let high = Infinity;
   let theta = 0;
-  for (let step = 0; step < 200; step++) {
+  // From far out the variance is nearly nothing and a Newton step endless: it is cut, at first at 2, then at twice
+  // the cut before, for probabilities of 1e-300 lie 690 away.
+  let cut = 2;
+  for (let step = 1; step <= 200; step++) {
     const [mean, variance] = tiltedMoments(law, theta);
     const gap = count - mean;
     if (Math.abs(gap) <= 1e-13 * Math.max(1, Math.abs(count))) break;
     if (gap > 0) low = theta;
     else high = theta;
-    // A Newton step is cut at 2: from far out the variance is nearly nothing.
-    let next = theta + Math.max(-2, Math.min(2, gap / variance));
-    if (!(next > low && next < high)) next = (low + high) / 2;
+    let next = theta + Math.max(-cut, Math.min(cut, gap / variance));
+    const bracketed = high - low < Infinity;
+    // Between trials of very different probability Λ' has plateaus, on which Newton creeps: after a dozen steps every third halves.
+    if (bracketed && ((step > 12 && step % 3 === 0) || !(next > low && next < high))) next = (low + high) / 2;
+    if (!bracketed) cut *= 2;
     if (next === theta) break;
     theta = next;
   }
-  return { theta, exponent: cumulantFunction(law, theta) - theta * count, law: tilted(law, theta) };
+  return { theta, exponent: exponent(law, theta, count), law: tilted(law, theta) };
 }
 
 function tiltedMoments(law: Law, theta: number): [number, number] {
@@ -63,14 +68,23 @@ function tilted(law: Law, theta: number): Law {
   };
 }
 
-/** Λ(θ) = γ(e^θ − 1) + Σ ln(1 + p(e^θ − 1)); log1p and expm1 keep the digits for small p and θ. */
-function cumulantFunction(law: Law, theta: number): number {
+/**
+ * Λ(θ) − θ·count, with Λ(θ) = γ(e^θ − 1) + Σ ln(1 + p(e^θ − 1)). A trial with p > ½ is counted from its sure side,
+ * ln(1 + p(e^θ − 1)) = θ + ln(1 + (1−p)(e^{−θ} − 1)): near p = 1 and θ ≪ 0 the first form is the logarithm of
+ * rounding. log1p and expm1 keep the digits for small p, 1−p and θ.
+ */
+function exponent(law: Law, theta: number, count: number): number {
   let sum = law.poissonPart * Math.expm1(theta);
+  let likely = 0;
   for (const { p, trials } of law.levels) {
-    if (p > 0)
-      sum +=
-        trials *
-        (theta > 30 ? theta + Math.log(p + (1 - p) * Math.exp(-theta)) : Math.log1p(p * Math.expm1(theta)));
+    if (p > 0.5) likely += trials;
+    sum += trials * (p > 0.5 ? logShift(1 - p, -theta) : logShift(p, theta));
   }
-  return sum;
+  return sum + theta * (likely - count);
+}
+
+/** ln(1 + p(e^θ − 1)) for p ≤ ½; beyond θ = 700 the exponential would overflow. */
+function logShift(p: number, theta: number): number {
+  if (p <= 0) return 0;
+  return theta > 700 ? theta + Math.log(p) : Math.log1p(p * Math.expm1(theta));
 }
