@@ -22,7 +22,7 @@ const PATIENCE = 30_000;
  */
 export async function startServer(
   env: Record<string, string> = {},
-  [program, ...args] = [process.execPath, 'build-cli/start.js']
+  [program, ...args]: string[] = [process.execPath, 'build-cli/start.js']
 ): Promise<RunningServer> {
   const data = mkdtempSync(join(tmpdir(), 'severalty-'));
   const own = { ...process.env, PORT: '0', SEVERALTY_DATA: data, NODE_ENV: 'production', ...env };
