@@ -31,7 +31,7 @@ export function ceilingPicture(diagnosis: Diagnosis, { width, text }: Size): Pic
     [x(1), frame.bottom],
     [x(1), frame.top]
   ];
-  const ticks = x.ticks(Math.max(3, Math.floor((frame.right - frame.left) / (text * 5))));
+  const ticks = x.ticks(Math.max(3, Math.floor((frame.right - frame.left) / (text * 8))));
   const texts = tickTexts(ticks);
   const marks: Mark[] = [
     { kind: 'path', role: 'hatch', d: hatchEdge(edge, 'above', frame) },

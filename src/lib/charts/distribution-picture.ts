@@ -6,6 +6,7 @@ import { countTicks } from './count-ticks';
 import { distributionWords } from './distribution-words';
 import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
+import { isShown } from './is-shown';
 import { linePath } from './line-path';
 import { observedMarks } from './observed-marks';
 import type { Mark, Picture, Point, Size } from './picture';
@@ -21,11 +22,7 @@ const LEAST = 5;
 /** Counts against the best independent-trial law, and below them how far each lies from it. */
 export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size): Picture {
   const { shots, lump } = diagnosis.data;
-  // Half a tenth of an expected shot: the law's line may end where no shot is to be expected.
-  const [from, to] = shownSpan(
-    diagnosis.distribution,
-    (point) => point.shots > 0 || point.fitted * shots > 0.05
-  );
+  const [from, to] = shownSpan(diagnosis.distribution, (point) => isShown(point, shots));
   const points = diagnosis.distribution.filter((point) => point.count >= from && point.count <= to);
   const highest = Math.max(
     ...points.map((point) => Math.max(point.fitted, point.shots > 0 ? point.high : 0))

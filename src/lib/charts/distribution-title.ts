@@ -1,11 +1,13 @@
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount } from '$lib/model/format-number';
+import { isShown } from './is-shown';
 import { standing } from './standing';
 
 /** The finding of the counts against the best law, as a title. */
-export function distributionTitle({ distribution }: Diagnosis): string {
-  const off = distribution.filter((point) => standing(point) !== 'within');
-  const all = distribution.length;
+export function distributionTitle({ distribution, data }: Diagnosis): string {
+  const shown = distribution.filter((point) => isShown(point, data.shots));
+  const off = shown.filter((point) => standing(point) !== 'within');
+  const all = shown.length;
   if (!off.length)
     return all === 1
       ? 'The best independent-trial law agrees with the one count seen'

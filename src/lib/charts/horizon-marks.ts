@@ -1,6 +1,7 @@
 import type { Diagnosis, RatePoint } from '$lib/stats/types';
 import { formatNumber } from '$lib/model/format-number';
 import type { Frame, Mark } from './picture';
+import { splitRaised } from './split-raised';
 import { ruledShade } from './ruled-shade';
 
 /** The shot horizon: its line, its name, and the ruled ground above it that these shots cannot show. */
@@ -18,8 +19,8 @@ export function horizonMarks(
   const middle = likely.length
     ? (Math.min(...likely) + Math.max(...likely)) / 2
     : (frame.left + frame.right) / 2;
-  const label = `shot horizon ${formatNumber(rate.horizon, 3)}`;
-  const half = label.length * text * 0.28;
+  const [{ text: label, raised }] = splitRaised(`shot horizon ${formatNumber(rate.horizon, 3)}`);
+  const half = (label.length + raised.length) * text * 0.28;
   const x = Math.min(frame.right - half, Math.max(frame.left + half, middle));
   return [
     { kind: 'path', role: 'shade', d: ruledShade(frame, frame.top, line) },
@@ -29,6 +30,7 @@ export function horizonMarks(
       x,
       y: line - text * 0.45,
       text: label,
+      ...(raised ? { raised } : {}),
       anchor: 'middle',
       ink: 'faint',
       face: 'text',

@@ -1,6 +1,7 @@
 import { hatchEdge } from './hatch-edge';
 import { intervalPath } from './interval-path';
 import type { Mark, Role } from './picture';
+import { ruledShade } from './ruled-shade';
 import { pointPath, type Shape } from './point-path';
 
 const POINTS: Partial<Record<Role, { shape: Shape; interval: Role }>> = {
@@ -40,8 +41,8 @@ export function legendSample(role: Role, left = 0, top = 0): Mark[] {
       }
     ];
   if (role === 'shade') {
-    const rules = [2, 8, 14].map((y) => `M${left},${top + y}H${right}`).join('');
-    return [{ kind: 'path', role, d: rules }];
+    const box = { left, right, top, bottom: top + SAMPLE.height };
+    return [{ kind: 'path', role, d: ruledShade(box, box.top, box.bottom) }];
   }
   const line: Mark = { kind: 'path', role, d: `M${left},${middle}H${right}` };
   if (role !== 'bound') return [line];

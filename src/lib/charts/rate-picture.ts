@@ -44,8 +44,9 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
   const xs = x.ticks(Math.max(2, Math.floor((frame.right - frame.left) / (text * 5))));
   const whole = data.trials === null ? xs.filter(Number.isInteger) : xs;
   const [rateTexts, xTexts] = [tickTexts(rates), tickTexts(whole)];
+  const horizon = horizonMarks(diagnosis, points, at, y, frame, text);
   const marks: Mark[] = [
-    ...horizonMarks(diagnosis, points, at, y, frame, text),
+    ...horizon.filter((mark) => mark.kind === 'path'),
     ...leftAxis(
       frame,
       rates.map((v, i) => ({ at: y(v), text: rateTexts[i] })),
@@ -56,6 +57,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
     { kind: 'path', role: 'limit', d: curve((point) => point.limit) },
     { kind: 'path', role: 'fitted', d: curve((point) => point.fitted) },
     ...ratePoints(groups, at, y, frame),
+    ...horizon.filter((mark) => mark.kind === 'text'),
     ...bottomAxis(
       frame,
       whole.map((v, i) => ({ at: x(v), text: xTexts[i] })),

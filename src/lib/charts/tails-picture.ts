@@ -91,9 +91,12 @@ function boundsOf(
   y: (p: number) => number,
   frame: Frame
 ): Mark[] {
-  const line = (pick: (point: TailPoint) => number): Point[] =>
+  const line = (pick: (point: TailPoint) => number): (Point | null)[] =>
     side.map((point) => [x(point.count), y(pick(point))]);
-  const edge = line((point) => point.hoeffding);
+  // Within one of the mean the bound is 1 and says nothing.
+  const edge = side.map((point): Point | null =>
+    point.hoeffding < 1 ? [x(point.count), y(point.hoeffding)] : null
+  );
   return [
     {
       kind: 'path',

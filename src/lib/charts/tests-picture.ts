@@ -39,7 +39,7 @@ export function testsPicture(
       d: tests.map((_, i) => `M${frame.left},${middle(i)}H${frame.right}`).join('')
     },
     { kind: 'path', role: 'level', d: `M${at(engine.alpha).toFixed(2)},${frame.top - 4}V${frame.bottom}` },
-    levelLabel(`level ${formatNumber(engine.alpha, 2)}`, at(engine.alpha), frame.right, text),
+    levelLabel(`level ${engine.alpha}`, at(engine.alpha), frame.right, text),
     ...tests.map(({ id }, i): Mark => ({
       kind: 'text',
       x: 0,
