@@ -1,0 +1,1 @@
+export { sayInterval } from '$lib/stats/words/say-interval';
