@@ -1,0 +1,88 @@
+import { readCounts } from '$lib/formats/read-counts';
+import { readProbabilities } from '$lib/formats/read-probabilities';
+import { sayReading } from '$lib/formats/say-reading';
+import type { Dataset } from '$lib/formats/types';
+import { documentText } from '$lib/model/document-text';
+import { plainText } from '$lib/model/plain-text/plain-text';
+import { defaultOptions } from '$lib/stats/default-options';
+import { diagnose } from '$lib/stats/diagnose';
+import { BadInput, type Diagnosis } from '$lib/stats/types';
+import { chooseDataset } from './choose-dataset';
+import { type ExitCode, exitCodes, Refusal } from './exit-codes';
+import { help } from './help';
+import { inputName } from './input-name';
+import { type Asked, parseOptions } from './parse-options';
+import { progressLine } from './progress-line';
+import { readInput } from './read-input';
+import { sayProblems } from './say-problems';
+
+/** Runs `diagnose` with its arguments, prints, and returns the exit code. */
+export async function runDiagnose(args: string[]): Promise<ExitCode> {
+  try {
+    const asked = parseOptions(args);
+    if (asked === 'help') {
+      process.stdout.write(help);
+      return exitCodes.done;
+    }
+    return await run(asked);
+  } catch (error) {
+    if (error instanceof Refusal) {
+      process.stderr.write(`${error.lines.join('\n')}\n`);
+      return exitCodes.badInput;
+    }
+    const said = error instanceof Error ? (error.stack ?? error.message) : String(error);
+    process.stderr.write(`Internal error, not your file's fault: please report it.\n${said}\n`);
+    return exitCodes.internalError;
+  }
+}
+
+async function run(asked: Asked): Promise<ExitCode> {
+  const result = readCounts(await readInput(asked.file), asked.read);
+  if (!result.ok) throw new Refusal(sayProblems(asked.file, result.problems, result.more));
+  const dataset = chooseDataset(asked.file, result.datasets, asked.dataset);
+  const supplied = asked.supplied === null ? null : await readSupplied(asked.supplied);
+  const diagnosis = await check(asked, dataset, supplied);
+  const about = [...sayReading(result.reading), ...result.notes, ...sayUsed(asked, dataset)];
+  if (asked.json) {
+    if (!asked.quiet)
+      process.stderr.write(about.map((line) => `${inputName(asked.file)}: ${line}\n`).join(''));
+    process.stdout.write(documentText(diagnosis));
+  } else {
+    const named = result.datasets.length > 1 ? [`Dataset: ${dataset.name}.`] : [];
+    process.stdout.write(plainText(diagnosis, asked.quiet ? named : [...named, ...about]));
+  }
+  return verdictCode(asked, diagnosis);
+}
+
+async function check(asked: Asked, dataset: Dataset, supplied: number[] | null): Promise<Diagnosis> {
+  const progress = progressLine();
+  try {
+    // What the person says wins over what the file states, and that over the defaults.
+    const options = { ...defaultOptions, ...dataset.suggested, ...asked.diagnose, supplied };
+    return await diagnose(dataset.data, options, progress.show);
+  } catch (error) {
+    if (error instanceof BadInput) throw new Refusal([`${inputName(asked.file)}: ${error.reason}`]);
+    throw error;
+  } finally {
+    progress.clear();
+  }
+}
+
+async function readSupplied(file: string): Promise<number[]> {
+  const result = readProbabilities(await readInput(file));
+  if (!result.ok) throw new Refusal(sayProblems(file, result.problems, result.more));
+  return result.probabilities;
+}
+
+/** Says which options the file settled, since nobody typed them. */
+function sayUsed(asked: Asked, dataset: Dataset): string[] {
+  const used = Object.entries(dataset.suggested).filter(([name]) => !Object.hasOwn(asked.diagnose, name));
+  return used.map(([name, value]) => `The file states ${name}: ${value ?? 'unknown'}.`);
+}
+
+function verdictCode({ failOn }: Asked, { answer }: Diagnosis): ExitCode {
+  const ruledOut = answer.verdict === 'ruled-out';
+  const failed =
+    failOn === 'ruled-out' ? ruledOut : failOn === 'undecided' && answer.verdict !== 'compatible';
+  return failed ? exitCodes.failOn : exitCodes.done;
+}

@@ -1,0 +1,30 @@
+import { type ChildProcess, spawn } from 'node:child_process';
+import { existsSync } from 'node:fs';
+
+const command = 'build-cli/diagnose.js';
+
+/** Fails with the reason when the command was not built. */
+export function needCommand(): void {
+  if (!existsSync(command)) throw new Error(`${command} is missing: npm test builds it first`);
+}
+
+export const start = (args: string[]): ChildProcess => spawn(process.execPath, [command, ...args]);
+
+export interface Ran {
+  code: number | null;
+  out: string;
+  errors: string;
+}
+
+/** Runs the built command to its end. */
+export function run(args: string[], input?: string | Uint8Array): Promise<Ran> {
+  return new Promise((resolve, reject) => {
+    const child = start(args);
+    const ran: Ran = { code: null, out: '', errors: '' };
+    child.stdout?.setEncoding('utf8').on('data', (text: string) => (ran.out += text));
+    child.stderr?.setEncoding('utf8').on('data', (text: string) => (ran.errors += text));
+    // The command stops reading at its limit; what is left to write then has nowhere to go.
+    child.stdin?.on('error', () => undefined).end(input);
+    child.on('error', reject).on('close', (code) => resolve({ ...ran, code }));
+  });
+}
