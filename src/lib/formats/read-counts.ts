@@ -3,6 +3,7 @@ import { defaultMaxBytes } from './limits';
 import { formats } from './registry';
 import { Source } from './source';
 import { decode } from './text/decode';
+import { tooLarge } from './too-large';
 import type { Encoding, Guess, Outcome, Problem, ReadOptions, ReadResult } from './types';
 
 /**
@@ -17,12 +18,7 @@ import type { Encoding, Guess, Outcome, Problem, ReadOptions, ReadResult } from 
 export function readCounts(input: Uint8Array | string, options: ReadOptions = {}): ReadResult {
   const limit = options.maxBytes ?? defaultMaxBytes;
   if (input.length > limit) {
-    return refuse(options, {
-      line: null,
-      column: null,
-      message: `The file has ${megabytes(input.length)} MB; the limit is ${megabytes(limit)} MB.`,
-      fix: 'Sum shots of equal count into a histogram: it holds all that is needed, except the order.'
-    });
+    return refuse(options, tooLarge(input.length, limit));
   }
   const typed = typeof input === 'string';
   const decoded = decode(typed ? new TextEncoder().encode(input) : input, typed ? 'utf-8' : options.encoding);
@@ -62,9 +58,4 @@ function refuse(options: ReadOptions, problem: Problem, encoding: Guess<Encoding
   source.reading.encoding = encoding;
   source.problems.add(() => problem);
   return finish(source, { datasets: [], notes: [] });
-}
-
-/** Megabytes with one decimal, rounded up so that a file just above the limit shows as above it. */
-function megabytes(bytes: number): string {
-  return String(Math.ceil(bytes / 104857.6) / 10);
 }

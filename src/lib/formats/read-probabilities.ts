@@ -5,6 +5,7 @@ import { quote } from './number/say-bad-number';
 import { ProblemList } from './problem-list';
 import { decode } from './text/decode';
 import { placeOf } from './text/place-of';
+import { tooLarge } from './too-large';
 import type { DecimalMark, Problem } from './types';
 
 /** Longest list: the largest number of trials that is diagnosed. */
@@ -43,10 +44,7 @@ export function readProbabilities(
   };
   const limit = options.maxBytes ?? defaultMaxBytes;
   if (input.length > limit) {
-    problems.whole(
-      `The file is above the limit of ${limit / 2 ** 20} MB.`,
-      'Give one probability for each trial.'
-    );
+    problems.add(() => tooLarge(input.length, limit));
     return finish([]);
   }
   const decoded = decode(typeof input === 'string' ? new TextEncoder().encode(input) : input);

@@ -59,6 +59,13 @@ describe('a table of counts', () => {
     ]);
   });
 
+  it('may run on past the trials with rows that no shot had', () => {
+    expect(histogram('0,3\n1,1\n2,0\n', { trials: 1 }).counts).toEqual([
+      [0, 3],
+      [1, 1]
+    ]);
+  });
+
   it.each(['10+,18', '≥10,18', '"10 or more",18', '10 or more,18', '>9,18'])(
     'reads the closing row %j',
     (row) => {

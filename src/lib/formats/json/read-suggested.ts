@@ -31,12 +31,12 @@ export function readSuggested(reader: JsonReader, root: JsonNode): Suggested {
   if (misread?.kind === 'literal' && misread.value === null) suggested.misread = null;
   else if (misread) {
     const value = misread.kind === 'number' ? Number(misread.raw) : NaN;
-    if (value >= 0 && value <= 0.5) suggested.misread = value;
+    if (value >= 0 && value < 0.5) suggested.misread = value;
     else
       reader.problem(
         misread.at,
         `The misread probability is ${describe(misread)}.`,
-        'Give a number from 0 to 0.5, or leave it out.'
+        'Give a number from 0 up to below 0.5, or leave it out.'
       );
   }
   return suggested;
