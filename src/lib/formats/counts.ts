@@ -7,6 +7,7 @@ import { decideMarks, MarkTally } from './table/decide-marks';
 import { columnsOf, type Group, groupRows } from './table/group-rows';
 import { totalWords } from './table/header-words';
 import { normaliseName } from './table/normalise-name';
+import { noteNumbered } from './table/note-numbered';
 import { NumberReader } from './table/number-reader';
 import { placeCell } from './table/place-cell';
 import type { Table } from './table/read-table';
@@ -33,7 +34,7 @@ export const counts: Format = {
       readGroup(source, table, group, columns, numbers, notes)
     );
     Object.assign(source.reading, tally.report(source.options));
-    return { datasets, notes: [...tally.notes(), ...notes] };
+    return { datasets, notes: [...noteNumbered(table), ...tally.notes(), ...notes] };
   }
 };
 

@@ -153,9 +153,9 @@ describe('a table of counts is refused', () => {
     ['count,0,1,2\nshots,5,6,7\n', {}, '1:null The table runs across'],
     ['447,132,42,21', {}, '1:null One line of 4 numbers can be read two ways'],
     ['density,relative frequency\n0.1,0.5\n0.2,0.5\n', {}, '2:null No column is known to be the count'],
-    ['count,relative frequency\n0,0.5\n1,0.5\n', {}, '2:null Column "relative frequency" holds shares'],
+    ['count,relative frequency\n0,0.5\n1,0.5\n', {}, '2:null The column "relative frequency" holds shares'],
     ['device,kinks,foo\nA,0,5\nA,1,7\n', {}, '2:null It cannot be told whether column "foo"'],
-    ['kinks,defects,shots\n0,1,5\n', {}, '2:null Both column "kinks" and column "defects" may be the count.'],
+    ['kinks,defects,shots\n0,1,5\n', {}, '2:null It cannot be told which is the count: column "kinks" or column "defects".'],
     [
       'count,shots\n0,1\n',
       { columns: [{ column: 'weight', role: 'count' as const }] },

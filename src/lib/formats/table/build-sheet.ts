@@ -92,6 +92,14 @@ export function buildSheet(raw: string, options: ReadOptions, problems: ProblemL
     problems.whole('There is a header and no row under it.', 'Add the counts.', firstLine);
     return built;
   }
+  if (built.header.value && built.header.from === 'guessed' && decideHeader(table.rows[0]).value) {
+    problems.whole(
+      'This line holds words only, like the one above it, which was taken for the names of the columns.',
+      'Put # in front of titles and units; give numbers under the names.',
+      table.lines[0]
+    );
+    return built;
+  }
   const kept = reportRagged(table, width, separator.value, clean.text, problems);
   built.sheet = { ...kept, names, width, turned: false };
   return built;
