@@ -39,7 +39,11 @@ module.exports = {
       name: 'stats-is-pure',
       severity: 'error',
       from: { path: room('stats') },
-      to: { dependencyTypes: ['npm', 'npm-dev', 'npm-no-pkg', 'npm-unknown', 'core'] }
+      // One package: sha256 for the digest of a histogram, since Web Crypto is missing on plain http.
+      to: {
+        pathNot: 'node_modules/@noble/hashes/',
+        dependencyTypes: ['npm', 'npm-dev', 'npm-no-pkg', 'npm-unknown', 'core']
+      }
     },
     only('model', 'stats'),
     only('formats', 'stats', 'model'),

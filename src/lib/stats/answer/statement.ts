@@ -1,4 +1,4 @@
-import type { Evidence } from '../flags/evidence';
+import { allEven, type Evidence } from '../flags/evidence';
 import type { Flag, Verdict } from '../types';
 import { formatCount, formatPercent } from '../words/format-number';
 import { sayHowOften } from '../words/say-p';
@@ -11,8 +11,9 @@ export function statement(
   needed: number | null
 ): string {
   const shots = `${formatCount(evidence.shots)} ${evidence.shots === 1 ? 'shot' : 'shots'}`;
-  if (verdict === 'ruled-out')
-    return `Independent trials cannot explain these ${shots}: ${strongest(evidence)}`;
+  if (verdict === 'ruled-out') {
+    return `Independent trials cannot explain these ${shots}: ${strongest(evidence)}${ordinaryCause(evidence, flags)}`;
+  }
   if (verdict === 'compatible') {
     const regular = flags.some((flag) => flag.id === 'regular');
     return (
@@ -35,6 +36,17 @@ export function statement(
       ? ` There is a hint of ${hints.map((flag) => flag.id.replace('-', ' ')).join(' and ')}.`
       : '';
   return `These ${shots} cannot tell: they neither rule out independent trials nor exclude an excess that matters.${hint}${more}`;
+}
+
+/** The ordinary cause that must be settled first, where the counts themselves point at one. */
+function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
+  const raised = (id: Flag['id']) => flags.some((flag) => flag.id === id);
+  if (allEven(evidence))
+    return ' But every count is even: on a ring that is so by construction, and pairs should be counted.';
+  if (raised('drift'))
+    return ' But the rate changed while the shots were taken, which alone makes counts look bunched.';
+  if (raised('misreads')) return ' But misread sites alone could give this.';
+  return '';
 }
 
 /** The strongest single piece of evidence, in words. */

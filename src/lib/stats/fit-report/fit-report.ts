@@ -40,8 +40,8 @@ export function fitReport({
     fitted.nullDivergences.length > 0
       ? divergenceInterval(counts, logLaw, Math.log(laid.above), plugIn, fitted.nullDivergences)
       : null;
-  const noticed =
-    corrected && corrected.corrected > 0 ? Math.ceil(Math.log(1 / alpha) / corrected.corrected) : null;
+  // Where the interval reaches 0 there may be no difference to notice, at any number of shots.
+  const noticed = corrected?.interval.low ? Math.ceil(Math.log(1 / alpha) / corrected.corrected) : null;
   return {
     logLikelihood: best.logLikelihood,
     levels: law.levels,

@@ -1,6 +1,6 @@
 import type { Flag } from '../types';
 import { sayInterval } from '../words/say-interval';
-import type { Evidence } from './evidence';
+import { allEven, type Evidence } from './evidence';
 
 /**
  * Regular: the variance lies well below the ceiling. Not a violation: shown when the whole 95 % interval of
@@ -9,7 +9,8 @@ import type { Evidence } from './evidence';
 export function regular(evidence: Evidence): Flag | null {
   const { dispersion } = evidence.moments;
   const { tolerance } = evidence.options;
-  if (dispersion.high === null || !(dispersion.high < 1 - tolerance)) return null;
+  // Counted singly, pairs are neither regular nor bunched: the unit is wrong.
+  if (dispersion.high === null || !(dispersion.high < 1 - tolerance) || allEven(evidence)) return null;
   return {
     id: 'regular',
     grade: dispersion.high < 1 - 2 * tolerance ? 'shown' : 'hinted',

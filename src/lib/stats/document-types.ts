@@ -1,0 +1,175 @@
+import type { Geometry, Interval, Level, Unit } from './types';
+
+export type TestId =
+  'ceiling' | 'fit' | 'high-tail' | 'low-tail' | 'parity' | 'empty-shots' | 'batches' | 'order';
+export type FlagId =
+  'bunching' | 'bursts' | 'coarsening' | 'pairing' | 'dead-shots' | 'drift' | 'misreads' | 'regular';
+export type ReferenceId = 'equal-trials' | 'rare-events' | 'gaussian' | 'landau-zener' | 'supplied';
+export type Verdict = 'compatible' | 'ruled-out' | 'undecided';
+
+export interface Reference {
+  id: ReferenceId;
+  logLikelihood: number;
+  /** KL(p̂ ‖ law), nats a shot; null when the law gives an observed count no probability. */
+  divergence: number | null;
+  aic: number;
+  /** Name → value of what was fitted, e.g. `{ p: 0.3377 }`. */
+  parameters: Record<string, number>;
+}
+
+export interface DistributionPoint {
+  count: number;
+  density: number | null;
+  shots: number;
+  /** h_n / S with its exact (Clopper–Pearson) 95 % interval, and the fitted probability. */
+  observed: number;
+  low: number;
+  high: number;
+  fitted: number;
+  /** True for the closing "n or more" row. */
+  lump: boolean;
+}
+
+export interface RatePoint {
+  count: number;
+  density: number | null;
+  /** −ln(h_n/S)/scale; null for a count never seen. */
+  empirical: number | null;
+  low: number;
+  high: number | null;
+  /** −ln f_n/scale of the fitted law; null where the law gives no probability. */
+  fitted: number | null;
+  /** Large-deviation limit I(n/N) of the fitted law. */
+  limit: number | null;
+  /** Central-limit parabola of the fitted mean and variance. */
+  gaussian: number | null;
+}
+
+export interface TailPoint {
+  count: number;
+  side: 'high' | 'low';
+  /** Shots with a count ≥ (high) or ≤ (low) `count`. */
+  shots: number;
+  observed: number;
+  low: number;
+  high: number;
+  fitted: number;
+  /** Bounds: Chernoff of the fitted law, Chernoff from the mean alone, Hoeffding's extremal tail. */
+  chernoff: number;
+  meanChernoff: number;
+  hoeffding: number;
+}
+
+export interface Certificate {
+  p: number;
+  side: 'high' | 'low';
+  /** Most telling count. */
+  count: number;
+  /** How many counts were tried on both sides together. */
+  thresholds: number;
+  /** Largest tail probability any independent-trial law with that mean allows at `count`. */
+  bound: number;
+  /** Shots seen in that tail. */
+  shots: number;
+  /** Unfavourable end of the interval for the mean that was used. */
+  mean: number;
+}
+
+export interface TestResult {
+  id: TestId;
+  statistic: number;
+  p: number;
+  /** Holm over the tests that ran. */
+  pAdjusted: number;
+  /** Smallest p this test could have shown. */
+  smallestP: number;
+  source: 'exact' | 'resampled' | 'permuted' | 'limit';
+  /** Resampled or permuted histograms drawn; fewer than asked when the sequential rule ended early. */
+  resamples: number;
+  stoppedEarly: boolean;
+}
+
+export interface Flag {
+  id: FlagId;
+  grade: 'shown' | 'hinted';
+  tests: TestId[];
+  statement: string;
+  /** How big, in words and numbers. */
+  size: string;
+  otherCauses: string[];
+  next: string[];
+}
+
+/** Everything a page, PDF, API answer or script needs. Plain JSON: numbers are finite or null. */
+export interface Diagnosis {
+  format: 'severalty.diagnosis/1';
+  engine: { version: string; seed: number; resamples: number; alpha: number; tolerance: number };
+  data: {
+    /** sha256 of the canonical histogram. */
+    digest: string;
+    shots: number;
+    trials: number | null;
+    unit: Unit;
+    geometry: Geometry;
+    misread: number | null;
+    /** As given; for unit `pair` everything after `data` counts pairs, n/2. */
+    counts: [number, number][];
+    lump: { from: number; shots: number } | null;
+    /** True when shot order was known; number of batches, or null. */
+    ordered: boolean;
+    batches: number | null;
+  };
+  moments: {
+    mean: Interval;
+    variance: Interval;
+    third: Interval;
+    fourth: Interval;
+    fano: Interval;
+    ceiling: number;
+    /** Unbiased variance over ceiling. */
+    dispersion: Interval;
+    criticalTrials: number | null;
+    pairCovariance: number | null;
+  };
+  fit: {
+    logLikelihood: number;
+    levels: Level[];
+    poissonPart: number;
+    divergence: number;
+    floor: number;
+    divergenceCorrected: number | null;
+    divergenceInterval: Interval;
+    gSquared: number;
+    shotsToNotice: number | null;
+    /** True when found and floor agree: the fit is then the global best. */
+    certified: boolean;
+    how: string;
+    references: Reference[];
+    /** References left out, and why. */
+    omitted: { id: ReferenceId; reason: string }[];
+  };
+  distribution: DistributionPoint[];
+  rate: {
+    /** Largest rate S shots can show, ln(S)/scale. */
+    horizon: number;
+    /** Above this rate the data say nothing at 95 %. */
+    silence: number;
+    /** N, or 1 when N is unknown (rates are then in nats a shot). */
+    scale: number;
+    points: RatePoint[];
+  };
+  tails: { points: TailPoint[]; certificate: Certificate | null };
+  tests: TestResult[];
+  /** Tests that did not run, and why. */
+  notRun: { id: TestId; reason: string }[];
+  flags: Flag[];
+  answer: {
+    verdict: Verdict;
+    statement: string;
+    because: string[];
+    /** Smallest excess over the ceiling seen with 80 % power at 5 %, as a fraction of the ceiling. */
+    smallestExcess: number | null;
+    shotsToDecide: number | null;
+  };
+  cautions: string[];
+}
