@@ -155,7 +155,11 @@ describe('a table of counts is refused', () => {
     ['density,relative frequency\n0.1,0.5\n0.2,0.5\n', {}, '2:null No column is known to be the count'],
     ['count,relative frequency\n0,0.5\n1,0.5\n', {}, '2:null The column "relative frequency" holds shares'],
     ['device,kinks,foo\nA,0,5\nA,1,7\n', {}, '2:null It cannot be told whether column "foo"'],
-    ['kinks,defects,shots\n0,1,5\n', {}, '2:null It cannot be told which is the count: column "kinks" or column "defects".'],
+    [
+      'kinks,defects,shots\n0,1,5\n',
+      {},
+      '2:null It cannot be told which is the count: column "kinks" or column "defects".'
+    ],
     [
       'count,shots\n0,1\n',
       { columns: [{ column: 'weight', role: 'count' as const }] },
