@@ -64,6 +64,7 @@ export function ceilingPicture(diagnosis: Diagnosis, { width, text }: Size): Pic
       { role: look.point, label: 'variance over ceiling, with its 95 % interval' },
       { role: 'bound', label: 'no independent trials beyond this edge' }
     ],
+    order: 'across',
     readings: value === null ? [] : [{ x: x(value), y, words: ceilingWords(diagnosis) }],
     notes: []
   };

@@ -31,7 +31,7 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
   const mainHeight = Math.min(380, Math.max(210, width * 0.46));
   const residualHeight = 104;
   const left = text * 4.4;
-  const main = frameOf(width, mainHeight, { left, right: text, top: text * 2.2, bottom: 0 });
+  const main = frameOf(width, mainHeight, { left, right: text * 1.8, top: text * 2.2, bottom: 0 });
   const below = { ...main, top: main.bottom + text * 3.4, bottom: main.bottom + text * 3.4 + residualHeight };
   const height = below.bottom + text * 3.8;
   const x = scaleLinear([from - 0.6, to + 0.6], [main.left, main.right]);
@@ -70,6 +70,7 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
       { role: 'fitted', label: 'best independent-trial law' },
       ...legendOfStanding(points)
     ],
+    order: 'across',
     readings: points.map((p) => ({ x: x(p.count), y: y(p.observed), words: distributionWords(p, shots) })),
     notes: together > 1 ? [thinnedNote(together)] : []
   };

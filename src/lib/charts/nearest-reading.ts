@@ -1,11 +1,16 @@
-import type { Reading } from './picture';
+import type { Picture } from './picture';
 
-/** Index of the reading that a pointer at x, y means: nearest across, and height decides only between near ones. */
-export function nearestReading(readings: Reading[], x: number, y: number): number {
+/** Index of the reading that a pointer at x, y means: nearest along their order; the other way only decides ties. */
+export function nearestReading(
+  { readings, order }: Pick<Picture, 'readings' | 'order'>,
+  x: number,
+  y: number
+): number {
+  const [across, down] = order === 'across' ? [1, 0.001] : [0.001, 1];
   let best = -1;
   let least = Infinity;
   readings.forEach((reading, i) => {
-    const distance = (reading.x - x) ** 2 + 0.02 * (reading.y - y) ** 2;
+    const distance = across * (reading.x - x) ** 2 + down * (reading.y - y) ** 2;
     if (distance < least) {
       least = distance;
       best = i;

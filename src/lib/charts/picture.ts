@@ -69,6 +69,8 @@ export interface Picture {
   marks: Mark[];
   legend: LegendEntry[];
   readings: Reading[];
+  /** Which way the readings follow one another: by their count, or line under line. */
+  order: 'across' | 'down';
   /** What the drawing leaves out or gathers together, in words. */
   notes: string[];
 }

@@ -24,7 +24,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
   const height = Math.min(460, Math.max(280, width * 0.58));
   const frame = frameOf(width, height, {
     left: text * 4.4,
-    right: text,
+    right: text * 1.8,
     top: text * 2.2,
     bottom: text * 3.8
   });
@@ -77,6 +77,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
       { role: 'gaussian', label: 'Gaussian' },
       { role: 'shade', label: 'beyond the shot horizon' }
     ],
+    order: 'across',
     readings: points.map((point) => ({
       x: at(point),
       y: y(Math.min(top, point.empirical ?? point.low)),

@@ -25,7 +25,7 @@ export function residualMarks(
   const axis = leftAxis(
     frame,
     values.map((value, i) => ({ at: y(value), text: labels[i] })),
-    'distance from the law, in half-intervals',
+    'off the law, in half-intervals',
     text
   );
   const band = [-1, 1].map((value) => `M${frame.left},${y(value).toFixed(2)}H${frame.right}`).join('');

@@ -26,7 +26,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
   const height = Math.min(460, Math.max(280, width * 0.58));
   const frame = frameOf(width, height, {
     left: text * 4.4,
-    right: text,
+    right: text * 1.8,
     top: text * 2.2,
     bottom: text * 3.8
   });
@@ -45,7 +45,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
     ...bottomAxis(
       frame,
       countTicks(x, text * 4, null),
-      `${unit === 'pair' ? 'pairs' : 'defects'} in one shot, at most (left) or at least (right)`,
+      `n ${unit === 'pair' ? 'pairs' : 'defects'} or fewer; n or more`,
       text
     )
   ];
@@ -60,6 +60,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
       { role: 'mean-bound', label: 'Chernoff bound from the mean alone' },
       { role: 'bound', label: 'Hoeffding: no independent trials above this edge' }
     ],
+    order: 'across',
     readings: points.map((point) => ({
       x: x(point.count),
       y: Math.min(frame.bottom, floor(point.observed)),

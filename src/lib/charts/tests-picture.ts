@@ -16,7 +16,7 @@ export function testsPicture(
 ): Picture {
   const { tests, engine } = diagnosis;
   const row = text * 2.1;
-  const longest = Math.max(...tests.map(({ id }) => names[id].length));
+  const longest = Math.max(0, ...tests.map(({ id }) => names[id].length));
   const frame = frameOf(width, text * 2.6 + row * tests.length + text * 3.6, {
     left: Math.min(width * 0.45, longest * text * 0.54 + text),
     right: text,
@@ -67,6 +67,7 @@ export function testsPicture(
       { role: 'interval', label: 'from p of the test by itself' },
       { role: 'horizon', label: 'smallest p it could show' }
     ],
+    order: 'down',
     readings: tests.map((test, i) => ({ x: at(test.pAdjusted), y: middle(i), words: wordsOf(test, names) })),
     notes: []
   };

@@ -6,6 +6,7 @@ import { Reader } from './reader';
 import { readSettings, readTrials, type SettingProblems } from './read-settings';
 import { startRun, type Run } from './runner';
 import { freshSettings, type SettingName, type Settings } from './settings';
+import { settingsWith } from './settings-with';
 import { textOfData } from './text-of-data';
 import { tooLarge } from './too-large';
 
@@ -180,14 +181,4 @@ export class Check {
     );
     this.settings = settingsWith(this.settings, untouched);
   }
-}
-
-function settingsWith(settings: Settings, options: Partial<DiagnoseOptions>): Settings {
-  const { trials, misread, unit, geometry } = options;
-  const stated: Partial<Settings> = {};
-  if (trials !== undefined) stated.trials = trials === null ? 'unknown' : `${trials}`;
-  if (misread !== undefined) stated.misread = misread === null ? '' : `${misread}`;
-  if (unit) stated.unit = unit;
-  if (geometry) stated.geometry = geometry;
-  return { ...settings, ...stated };
 }

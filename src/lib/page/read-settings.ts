@@ -10,7 +10,7 @@ export function readTrials(typed: string): number | null | undefined {
   const word = typed.trim().toLowerCase();
   if (word === '' || word === 'unknown') return null;
   const value = readNumber(word);
-  return value !== null && Number.isInteger(value) && value >= 1 ? value : undefined;
+  return value !== null && Number.isInteger(value) && value >= 1 && value <= 1e9 ? value : undefined;
 }
 
 type LawRead = { ok: true; probabilities: number[] } | { ok: false; problem: string };
@@ -36,7 +36,7 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
   };
 
   const trials = readTrials(settings.trials);
-  if (trials === undefined) problems.trials = 'Write a whole number from 1 up, or “unknown”.';
+  if (trials === undefined) problems.trials = 'Write a whole number from 1 to 1 000 000 000, or “unknown”.';
   const law = await readLaw(settings.supplied);
   if (!law.ok) problems.supplied = law.problem;
   const whole = Number.isInteger;
@@ -52,9 +52,17 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
             (x) => x >= 0 && x < 0.5,
             'Write a probability from 0 to below 0.5, or leave it empty.'
           ),
-    alpha: number('alpha', (x) => x > 0 && x < 1, 'Write a level between 0 and 1, such as 0.01.'),
-    tolerance: number('tolerance', (x) => x > 0, 'Write a fraction above 0, such as 0.1.'),
-    resamples: number('resamples', (x) => whole(x) && x >= 0, 'Write a whole number, such as 1999.'),
+    alpha: number('alpha', (x) => x > 0 && x < 0.5, 'Write a level between 0 and 0.5, such as 0.01.'),
+    tolerance: number(
+      'tolerance',
+      (x) => x > 0 && x <= 10,
+      'Write a fraction above 0 and up to 10, such as 0.1.'
+    ),
+    resamples: number(
+      'resamples',
+      (x) => whole(x) && x >= 19 && x <= 1e6,
+      'Write a whole number from 19 to 1 000 000, such as 1999.'
+    ),
     seed: number(
       'seed',
       (x) => whole(x) && x >= 0 && x < 2 ** 32,

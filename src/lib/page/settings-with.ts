@@ -1,0 +1,13 @@
+import type { DiagnoseOptions } from '$lib/stats/types';
+import type { Settings } from './settings';
+
+/** The settings with what an example or a file states put in its fields. */
+export function settingsWith(settings: Settings, options: Partial<DiagnoseOptions>): Settings {
+  const { trials, misread, unit, geometry } = options;
+  const stated: Partial<Settings> = {};
+  if (trials !== undefined) stated.trials = trials === null ? 'unknown' : `${trials}`;
+  if (misread !== undefined) stated.misread = misread === null ? '' : `${misread}`;
+  if (unit) stated.unit = unit;
+  if (geometry) stated.geometry = geometry;
+  return { ...settings, ...stated };
+}

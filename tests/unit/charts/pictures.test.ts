@@ -1,0 +1,219 @@
+import { ceilingPicture } from '$lib/charts/ceiling-picture';
+import { distributionPicture } from '$lib/charts/distribution-picture';
+import type { Picture, Size, TextMark } from '$lib/charts/picture';
+import { ratePicture } from '$lib/charts/rate-picture';
+import { sheetOf } from '$lib/charts/sheet-of';
+import { sheetToSvg } from '$lib/charts/sheet-to-svg';
+import { tailsPicture } from '$lib/charts/tails-picture';
+import { testsPicture } from '$lib/charts/tests-picture';
+import { TESTS } from '$lib/model/labels';
+import type { Diagnosis } from '$lib/stats/types';
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { anyDiagnosis, WELDON } from './any-diagnosis';
+
+type Draw = (diagnosis: Diagnosis, size: Size) => Picture;
+const DRAWS: [string, Draw][] = [
+  ['counts', distributionPicture],
+  ['rate', ratePicture],
+  ['tails', tailsPicture],
+  ['ceiling', ceilingPicture],
+  ['tests', (diagnosis, size) => testsPicture(diagnosis, size, TESTS)]
+];
+
+/** All x and y of a path of M, L, H, V, v, A and Z: what d3 and these charts write. */
+function coordinates(d: string): { x: number[]; y: number[] } {
+  const x: number[] = [];
+  const y: number[] = [];
+  for (const [, command, list] of d.matchAll(/([MLHVAvZ])([^MLHVAvZ]*)/g)) {
+    const numbers = list.split(/[ ,]/).filter(Boolean).map(Number);
+    if (command === 'v') continue;
+    if (command === 'H') x.push(numbers[0]);
+    else if (command === 'V') y.push(numbers[0]);
+    else if (command !== 'Z') {
+      x.push(numbers[numbers.length - 2]);
+      y.push(numbers[numbers.length - 1]);
+    }
+  }
+  return { x, y };
+}
+
+/** About where a text begins and ends: the faces run to about 0.5 and 0.6 of their size a letter. */
+function extent({ x, anchor, text, raised = '', size, face }: TextMark): [number, number] {
+  const length = (text.length + 0.75 * raised.length) * size * (face === 'number' ? 0.6 : 0.5);
+  const start = anchor === 'start' ? x : anchor === 'end' ? x - length : x - length / 2;
+  return [start, start + length];
+}
+
+/** What is wrong with a picture: numbers that are none, or marks outside it. A point may reach 7 units over. */
+function faults({ width, height, marks, readings }: Picture): string[] {
+  const list: string[] = [];
+  const look = (what: string, value: number, limit: number) => {
+    if (!Number.isFinite(value)) list.push(`${what} is ${value}`);
+    else if (value < -7 || value > limit + 7) list.push(`${what} at ${value} of ${limit}`);
+  };
+  for (const mark of marks) {
+    if (mark.kind === 'text') {
+      look(`x of “${mark.text}”`, mark.x, width);
+      look(`y of “${mark.text}”`, mark.y, height);
+      if (/NaN|undefined|null|Infinity/.test(mark.text)) list.push(`text “${mark.text}”`);
+      const [start, end] = extent(mark);
+      if (start < -1 || end > width + 1) list.push(`“${mark.text}” from ${start} to ${end} of ${width}`);
+      continue;
+    }
+    if (/NaN|Infinity|undefined|null/.test(mark.d)) list.push(`${mark.role}: ${mark.d.slice(0, 80)}`);
+    const { x, y } = coordinates(mark.d);
+    for (const value of x) look(`${mark.role} x`, value, width);
+    for (const value of y) look(`${mark.role} y`, value, height);
+  }
+  for (const { x, y, words } of readings) {
+    look('reading x', x, width);
+    look('reading y', y, height);
+    if (/NaN|undefined|null|Infinity/.test(words)) list.push(words);
+  }
+  return [...new Set(list)];
+}
+
+const faultsOf = (diagnosis: Diagnosis, width: number): string[] =>
+  DRAWS.flatMap(([name, draw]) =>
+    faults(draw(diagnosis, { width, text: 13 })).map((fault) => `${name}: ${fault}`)
+  );
+
+const CASES: [string, () => Promise<Diagnosis>][] = [
+  ['Weldon’s dice', () => anyDiagnosis(WELDON, { trials: 12 })],
+  ['a closing lump', () => anyDiagnosis(WELDON.slice(0, 10), { trials: 12 }, { from: 10, shots: 18 })],
+  [
+    'N unknown',
+    () =>
+      anyDiagnosis([
+        [0, 447],
+        [1, 132],
+        [2, 42],
+        [3, 21],
+        [4, 3],
+        [5, 2]
+      ])
+  ],
+  ['one shot', () => anyDiagnosis([[3, 1]], { trials: 12 })],
+  ['one count', () => anyDiagnosis([[3, 700]], { trials: 12 })],
+  ['only empty shots', () => anyDiagnosis([[0, 40]], { trials: 5 })],
+  ['every trial in every shot', () => anyDiagnosis([[5, 40]], { trials: 5 })],
+  [
+    'one trial',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 30],
+          [1, 70]
+        ],
+        { trials: 1 }
+      )
+  ],
+  [
+    'pairs',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 300],
+          [2, 420],
+          [4, 210],
+          [6, 61],
+          [8, 9]
+        ],
+        { trials: 40, unit: 'pair' }
+      )
+  ],
+  [
+    '2^40 shots',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 2 ** 38],
+          [1, 2 ** 39],
+          [2, 2 ** 38]
+        ],
+        { trials: 2 }
+      )
+  ],
+  [
+    'far counts',
+    () =>
+      anyDiagnosis(
+        [
+          [2, 50],
+          [900, 1]
+        ],
+        { trials: 1000 }
+      )
+  ]
+];
+
+describe('every chart', () => {
+  it.each(CASES)('of %s is finite and inside its frame, narrow and wide', async (_name, make) => {
+    const diagnosis = await make();
+    for (const width of [260, 342, 760, 1400]) expect(faultsOf(diagnosis, width)).toEqual([]);
+  });
+
+  it('of any counts is finite and inside its frame', async () => {
+    const histogram = fc.uniqueArray(
+      fc.tuple(fc.integer({ min: 0, max: 60 }), fc.integer({ min: 1, max: 5000 })),
+      {
+        minLength: 1,
+        maxLength: 12,
+        selector: ([count]) => count
+      }
+    );
+    await fc.assert(
+      fc.asyncProperty(
+        histogram,
+        fc.option(fc.integer({ min: 60, max: 400 })),
+        fc.integer({ min: 260, max: 1600 }),
+        async (rows, trials, width) => {
+          const counts = [...rows].sort((a, b) => a[0] - b[0]);
+          expect(faultsOf(await anyDiagnosis(counts, { trials, resamples: 19 }), width)).toEqual([]);
+        }
+      ),
+      { numRuns: 40, seed: 20 }
+    );
+  });
+
+  it('of 10 000 counts gathers them, says so, and keeps every reading', async () => {
+    const base = await anyDiagnosis(WELDON, { trials: 12 });
+    const many: Diagnosis = {
+      ...base,
+      data: { ...base.data, shots: 3e8, trials: 20_000 },
+      distribution: Array.from({ length: 10_000 }, (_, count) => {
+        const observed = Math.exp(-(((count - 5000) / 900) ** 2) / 2) / 2256;
+        return {
+          count,
+          density: count / 20_000,
+          shots: 1 + Math.round(observed * 3e8),
+          observed,
+          low: observed * 0.98,
+          high: observed * 1.02 + 1e-9,
+          fitted: observed,
+          lump: false
+        };
+      })
+    };
+    const picture = distributionPicture(many, { width: 760, text: 13 });
+    expect(faults(picture)).toEqual([]);
+    expect(picture.readings).toHaveLength(10_000);
+    expect(picture.notes.join()).toMatch(/covers \d+ neighbouring counts/);
+    const letters = picture.marks.reduce((sum, mark) => sum + (mark.kind === 'path' ? mark.d.length : 0), 0);
+    expect(letters).toBeLessThan(300_000);
+  });
+
+  it('becomes a file that names no style and closes what it opens', async () => {
+    const diagnosis = await anyDiagnosis(WELDON, { trials: 12 });
+    for (const [name, draw] of DRAWS) {
+      const svg = sheetToSvg(
+        sheetOf(draw(diagnosis, { width: 720, text: 13 }), `A <title> & "more" of ${name}`, 'source'),
+        'a & b'
+      );
+      expect(svg).toContain('a &amp; b');
+      expect(svg).not.toMatch(/style=|<title> &(?!amp)|var\(/);
+      expect(svg.match(/<text /g)?.length).toBe(svg.match(/<\/text>/g)?.length);
+    }
+  });
+});
