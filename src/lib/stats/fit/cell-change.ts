@@ -8,27 +8,36 @@ import type { Workspace } from './workspace';
 export function cellChange(space: Workspace, f: Float64Array, power: 1 | 2 | -1, out: Float64Array): void {
   const { data, length } = space;
   const cells = data.shots.length;
-  out.fill(0);
   const shift = data.first - space.first;
   // Cells outside the window were never seen (their likelihood would be 0), so they are left at 0.
-  const from = Math.max(0, -shift);
-  const to = Math.min(cells, length - shift);
-  let k = from + shift;
-  let before = k > 0 ? f[k - 1] : 0;
-  let earlier = k > 1 ? f[k - 2] : 0;
-  for (let i = from; i < to; i++, k++) {
-    const here = f[k];
-    if (power === 1) out[i] = before - here;
-    else if (power === 2) out[i] = earlier - 2 * before + here;
-    else out[i] = (k + 1 < length ? f[k + 1] : 0) - here;
-    earlier = before;
-    before = here;
+  const from = Math.min(cells, Math.max(0, -shift));
+  const to = Math.max(from, Math.min(cells, length - shift));
+  for (let i = 0; i < from; i++) out[i] = 0;
+  for (let i = to; i < cells + 2; i++) out[i] = 0;
+  if (power === -1) {
+    for (let i = from; i < to; i++) out[i] = at(f, i + shift + 1, length) - f[i + shift];
+  } else {
+    let before = at(f, from + shift - 1, length);
+    let earlier = at(f, from + shift - 2, length);
+    for (let i = from; i < to; i++) {
+      const here = f[i + shift];
+      out[i] = power === 1 ? before - here : earlier - 2 * before + here;
+      earlier = before;
+      before = here;
+    }
   }
-  const at = (n: number) => (n >= 0 && n < length ? f[n] : 0);
   // Sums from a count on telescope: Σ_{k≥c} (uf)_k = f_{c−1}, Σ (u²f)_k = f_{c−2} − f_{c−1}.
   if (data.lump) {
     const c = data.lump.from - space.first;
-    out[cells] = power === 1 ? at(c - 1) : power === 2 ? at(c - 2) - at(c - 1) : -at(c);
+    if (power === 1) out[cells] = at(f, c - 1, length);
+    else if (power === 2) out[cells] = at(f, c - 2, length) - at(f, c - 1, length);
+    else out[cells] = -at(f, c, length);
   }
-  if (space.emptySingle !== 0) out[cells + 1] = power === -1 ? at(1) - f[0] : power === 1 ? -f[0] : f[0];
+  if (space.emptySingle !== 0) {
+    out[cells + 1] = power === -1 ? at(f, 1, length) - f[0] : power === 1 ? -f[0] : f[0];
+  }
+}
+
+function at(f: Float64Array, n: number, length: number): number {
+  return n >= 0 && n < length ? f[n] : 0;
 }

@@ -41,8 +41,11 @@ export function climb(space: Workspace, from: TrialLevels, enough: number, bar =
     if (!moved) break;
     const gain = moved.value - value;
     ({ levels, value } = tidy(space, moved.levels, moved.value));
+    if (gain < enough / 10) {
+      steps++;
+      break;
+    }
     slope = slopes(space, levels);
-    if (gain < enough / 10) break;
   }
   return { levels, value, steps };
 }
@@ -67,7 +70,8 @@ function newtonStep(levels: TrialLevels, slope: Slopes): { angles: number[]; pro
     first[j] = j < count ? 2 * Math.sqrt(levels.p[j] * (1 - levels.p[j])) : 2 * Math.sqrt(levels.poissonPart);
     second[j] = j < count ? 2 * (1 - 2 * levels.p[j]) : 2;
   }
-  const g = gradient.map((value, j) => value * first[j]);
+  const g = new Array<number>(size);
+  for (let j = 0; j < size; j++) g[j] = gradient[j] * first[j];
   const h = new Array<number>(size * size);
   for (let j = 0; j < size; j++) {
     for (let k = 0; k < size; k++) h[j * size + k] = -hessian[j * size + k] * first[j] * first[k];
@@ -79,7 +83,7 @@ function newtonStep(levels: TrialLevels, slope: Slopes): { angles: number[]; pro
 /** −H⁻¹g where H is negative definite and the step short; else along its eigenvectors, each kept short. */
 function steepest(h: number[], g: number[], size: number): { angles: number[]; promise: number } {
   const newton = solvePositive(h, size, g);
-  if (newton && newton.every((angle) => Math.abs(angle) < longest)) {
+  if (newton && short(newton)) {
     let promise = 0;
     for (let j = 0; j < size; j++) promise += 0.5 * newton[j] * g[j];
     return { angles: newton, promise };
@@ -100,10 +104,18 @@ function steepest(h: number[], g: number[], size: number): { angles: number[]; p
   return { angles, promise };
 }
 
+function short(angles: number[]): boolean {
+  for (const angle of angles) if (!(Math.abs(angle) < longest)) return false;
+  return true;
+}
+
 function turned(levels: TrialLevels, angles: number[], share: number): TrialLevels {
   const out = copyLevels(levels);
   for (let j = 0; j < out.p.length; j++) {
-    out.p[j] = Math.sin(Math.asin(Math.sqrt(out.p[j])) + share * angles[j]) ** 2;
+    // sin(φ + δ) = √p cos δ + √(1−p) sin δ
+    const angle = share * angles[j];
+    const root = Math.sqrt(out.p[j]) * Math.cos(angle) + Math.sqrt(1 - out.p[j]) * Math.sin(angle);
+    out.p[j] = root * root;
   }
   if (levels.poissonPart > 0) {
     // A step across zero would bounce: half-way there instead.

@@ -1,5 +1,6 @@
 import { logPmf } from '../laws/log-pmf';
 import { lawWindow } from '../laws/law-window';
+import type { Window } from '../laws/window';
 import type { Law } from '../types';
 import type { FitData } from './fit-data';
 
@@ -7,17 +8,25 @@ import type { FitData } from './fit-data';
  * Σ h_n ln f_n of a histogram under a given law, a lump by its tail sum; nats. −Infinity when a count was
  * seen that the law forbids.
  *
- * Counts beyond the trimmed window take the exact logarithm, however improbable they are.
+ * A count beyond the trimmed window is looked up in the whole one, which reaches down to 1e-300, and takes the
+ * exact logarithm beyond that: each of those costs as much as the window, and a narrow law under broad counts
+ * has hundreds.
  */
 export function lawLogLikelihood(data: FitData, law: Law): number {
   const { first, values } = lawWindow(law, 1e-25, 1);
+  let whole: Window | null = null;
+  const outside = (count: number): number => {
+    whole ??= lawWindow(law);
+    const value = whole.values[count - whole.first] ?? 0;
+    return value > 1e-290 * whole.scale ? Math.log(value / whole.scale) : logPmf(law, count);
+  };
   let sum = 0;
   for (let i = 0; i < data.shots.length; i++) {
     const shots = data.shots[i];
     if (shots === 0) continue;
     const k = data.first + i - first;
     const inside = k >= 0 && k < values.length && values[k] > 1e-18;
-    sum += shots * (inside ? Math.log(values[k]) : logPmf(law, data.first + i));
+    sum += shots * (inside ? Math.log(values[k]) : outside(data.first + i));
   }
   if (data.lump) {
     let tail = 0;

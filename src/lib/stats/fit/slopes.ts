@@ -1,7 +1,7 @@
 import { cellChange } from './cell-change';
 import { information, weigh } from './cell-sums';
 import { cellWeights } from './cell-weights';
-import { removeTrial } from './remove-trial';
+import { levelRemoval, type RemovalSums } from './level-removal';
 import type { TrialLevels } from './trial-levels';
 import type { Workspace } from './workspace';
 
@@ -35,18 +35,14 @@ export function slopes(space: Workspace, levels: TrialLevels): Slopes {
   const fisher = new Array<number>(size * size).fill(0);
   const bend = new Array<number>(size).fill(0);
   const doubled = new Array<number>(size).fill(0);
+  const sums: RemovalSums = { single: 0, double: 0 };
   const tangents = tangentBuffers(space, size);
   for (let j = 0; j < count; j++) {
-    const p = levels.p[j];
-    removeTrial(space.f, space.length, p, space.g);
-    const tangent = tangents[j];
-    cellChange(space, space.g, 1, tangent);
-    gradient[j] = levels.trials[j] * weigh(space, tangent);
-    bend[j] = bentSum(space, space.g);
-    if (levels.trials[j] > 1) {
-      removeTrial(space.g, space.length, p, space.gg);
-      doubled[j] = bentSum(space, space.gg);
-    }
+    levelRemoval(space, levels.p[j], levels.trials[j] > 1, sums);
+    bend[j] = sums.single;
+    doubled[j] = sums.double;
+    cellChange(space, space.g, 1, tangents[j]);
+    gradient[j] = levels.trials[j] * weigh(space, tangents[j]);
   }
   if (size > count) {
     cellChange(space, space.f, 1, tangents[count]);

@@ -11,9 +11,9 @@ export interface TrialLevels {
   poissonPart: number;
 }
 
-/** A copy that can be changed. */
-export function copyLevels(levels: TrialLevels): TrialLevels {
-  return { ...levels, p: levels.p.slice(), trials: levels.trials.slice() };
+/** A copy that can be changed. Field by field: as a spread this was a twelfth of the time of a refit. */
+export function copyLevels({ p, trials, ones, zeros, poissonPart }: TrialLevels): TrialLevels {
+  return { p: p.slice(), trials: trials.slice(), ones, zeros, poissonPart };
 }
 
 /** The same law as it stands in the document: levels from high to low, the zeros last. */

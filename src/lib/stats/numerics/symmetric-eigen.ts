@@ -33,8 +33,8 @@ function rotate(a: number[], vectors: number[], size: number, i: number, j: numb
   const between = a[i * size + j];
   if (between === 0) return;
   const ratio = (a[j * size + j] - a[i * size + i]) / (2 * between);
-  const tangent = Math.sign(ratio || 1) / (Math.abs(ratio) + Math.hypot(1, ratio));
-  const cosine = 1 / Math.hypot(1, tangent);
+  const tangent = Math.sign(ratio || 1) / (Math.abs(ratio) + Math.sqrt(1 + ratio * ratio));
+  const cosine = 1 / Math.sqrt(1 + tangent * tangent);
   const sine = tangent * cosine;
   for (let k = 0; k < size; k++) {
     const x = a[k * size + i];
