@@ -22,27 +22,19 @@ export function clopperPearson(k: number, n: number, level = 0.95): { low: numbe
   const tail = (1 - level) / 2;
   const logTail = Math.log(tail);
   const z = -normalQuantile(tail);
-  const low =
-    k === 0
-      ? 0
-      : Math.exp(
-          newtonOnTail(Math.log(score(k - 0.5, n, -z)), (u) => {
-            const p = Math.min(Math.exp(u), 1 - Number.EPSILON / 2);
-            const value = logBinomialTail('high', k, n, p);
-            return [value - logTail, k * Math.exp(logBinomialPmf(k, n, p) - value)];
-          })
-        );
+  const inside = (p: number) => Math.min(p, 1 - Number.EPSILON / 2);
+  const fromHits = (p: number): [number, number] => {
+    const value = logBinomialTail('high', k, n, inside(p));
+    return [value - logTail, k * Math.exp(logBinomialPmf(k, n, inside(p)) - value)];
+  };
+  const low = k === 0 ? 0 : inside(newtonOnTail(score(k - 0.5, n, -z), fromHits, 'log'));
   // w = −ln(1 − p), so that a limit near 0 keeps its digits.
-  const high =
-    k === n
-      ? 1
-      : -Math.expm1(
-          -newtonOnTail(-Math.log1p(-score(k + 0.5, n, z)), (w) => {
-            const p = Math.min(-Math.expm1(-w), 1 - Number.EPSILON / 2);
-            const value = logBinomialTail('low', k, n, p);
-            return [value - logTail, (k - n) * Math.exp(logBinomialPmf(k, n, p) - value)];
-          })
-        );
+  const fromMisses = (w: number): [number, number] => {
+    const p = inside(-Math.expm1(-w));
+    const value = logBinomialTail('low', k, n, p);
+    return [value - logTail, (k - n) * Math.exp(logBinomialPmf(k, n, p) - value)];
+  };
+  const high = k === n ? 1 : -Math.expm1(-newtonOnTail(-Math.log1p(-score(k + 0.5, n, z)), fromMisses));
   return { low, high };
 }
 

@@ -29,6 +29,6 @@ export function deviancePart(x: number, mean: number, difference = x - mean): nu
     return sum;
   }
   const ratio = x / mean;
-  const logRatio = ratio < 1e300 ? Math.log(ratio) : Math.log(x) - Math.log(mean);
+  const logRatio = ratio > 1e-300 && ratio < 1e300 ? Math.log(ratio) : Math.log(x) - Math.log(mean);
   return x * logRatio - difference;
 }

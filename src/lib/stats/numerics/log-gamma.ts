@@ -17,6 +17,6 @@ export function logGamma(x: number): number {
   let product = 1;
   let raised = x;
   while (raised < 16) product *= raised++;
-  const stirling = (raised - 0.5) * Math.log(raised) - raised + halfLogTwoPi + stirlingError(raised - 1);
+  const stirling = (raised - 0.5) * Math.log(raised) - raised + halfLogTwoPi + stirlingError(raised);
   return stirling - Math.log(product);
 }

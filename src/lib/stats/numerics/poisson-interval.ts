@@ -18,20 +18,16 @@ export function poissonInterval(k: number, level = 0.95): { low: number; high: n
   const tail = (1 - level) / 2;
   const logTail = Math.log(tail);
   const z = -normalQuantile(tail);
-  const low =
-    k === 0
-      ? 0
-      : Math.exp(
-          newtonOnTail(Math.log(score(k - 0.5, -z)), (u) => {
-            const mean = Math.exp(u);
-            const value = logPoissonTail('high', k, mean);
-            return [value - logTail, k * Math.exp(logPoissonPmf(k, mean) - value)];
-          })
-        );
-  const high = newtonOnTail(score(k + 0.5, z), (mean) => {
+  const fromAbove = (mean: number): [number, number] => {
+    const value = logPoissonTail('high', k, mean);
+    return [value - logTail, k * Math.exp(logPoissonPmf(k, mean) - value)];
+  };
+  const fromBelow = (mean: number): [number, number] => {
     const value = logPoissonTail('low', k, mean);
     return [value - logTail, -Math.exp(logPoissonPmf(k, mean) - value)];
-  });
+  };
+  const low = k === 0 ? 0 : newtonOnTail(score(k - 0.5, -z), fromAbove, 'log');
+  const high = newtonOnTail(score(k + 0.5, z), fromBelow);
   return { low, high };
 }
 
