@@ -1,10 +1,12 @@
+import { carried } from './carried';
+import type { Climb } from './climb';
 import { alike, starts } from './starts';
 import type { FitData } from './fit-data';
 import { lawLogLikelihood } from './law-log-likelihood';
 import { sampleMoments } from './sample-moments';
 import { search, type Effort } from './search';
 import { toLaw, type TrialLevels } from './trial-levels';
-import { workspace } from './workspace';
+import { workspace, type Workspace } from './workspace';
 
 /** The best law found, and how. */
 export interface BestLaw {
@@ -15,6 +17,9 @@ export interface BestLaw {
   starts: number;
   agreeing: number;
 }
+
+/** Up to this many trials, or counts, single trials of the best law are tried far from where they are. */
+const few = 100;
 
 /** From each start; then the two best of these to the end. */
 const first: Effort = { enough: 1e-5, worth: 1e-3, rounds: 60, transfers: false };
@@ -27,8 +32,7 @@ const thorough: Effort = { enough: 1e-9, worth: 1e-5, rounds: 200, transfers: tr
  * is reported; the floor (see floorLaw) then says how far from the global best it can be at most.
  *
  * Equal trials are a local maximum whenever the variance is at or above the ceiling, but not always the
- * global one: with a strong third moment a few uneven trials can do better. So the spread starts are
- * searched there too when the variance is within 1 % of the ceiling.
+ * global one: with a strong third moment a few uneven trials can do better (see starts).
  */
 export function bestLaw(data: FitData): BestLaw {
   const moments = sampleMoments(data);
@@ -41,12 +45,26 @@ export function bestLaw(data: FitData): BestLaw {
   // With hundreds of trials the likelihood is flat among the good starts, and the second crawls.
   const polish = (data.trials ?? 0) > 100 ? 1 : 2;
   const polished = found.slice(0, polish).map((one) => search(space, one.levels, thorough));
-  const best = polished.reduce((a, b) => (b.value > a.value ? b : a));
-  if (best.value === -Infinity) return underflowing(data, moments.mean);
+  const top = polished.reduce((a, b) => (b.value > a.value ? b : a));
+  if (top.value === -Infinity) return underflowing(data, moments.mean);
+  const best = (data.trials ?? last) <= few ? throughValleys(space, top) : top;
   const agreeing = [...polished, ...found.slice(polish)].filter(
     (one) => one.value > best.value - 0.01
   ).length;
   return { levels: best.levels, logLikelihood: best.value, starts: candidates.length, agreeing };
+}
+
+/** Carries single trials far away and searches from there, until nothing better is met. */
+function throughValleys(space: Workspace, from: Climb): Climb {
+  let best = from;
+  for (let round = 0; round < 10; round++) {
+    const next = carried(best.levels)
+      .map((levels) => search(space, levels, first))
+      .reduce((a, b) => (b.value > a.value ? b : a), best);
+    if (!(next.value > best.value + first.worth)) break;
+    best = search(space, next.levels, thorough);
+  }
+  return best;
 }
 
 /** Every shot had the same count: that many sure trials explain it with likelihood 1. */

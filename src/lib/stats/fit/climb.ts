@@ -141,6 +141,8 @@ function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: T
     if (p[j] * trials[j] < 1e-3) attempt(absorbed(best.levels, j, 'zeros'));
     else if ((1 - p[j]) * trials[j] < 1e-3) attempt(absorbed(best.levels, j, 'ones'));
   }
+  // Quadratic arrival stops at about 1e-11, which a report should not show as a Poisson part.
+  if (levels.poissonPart > 0 && levels.poissonPart < 1e-3) attempt({ ...best.levels, poissonPart: 0 });
   for (let j = 0; j < best.levels.p.length; j++) {
     for (let k = best.levels.p.length - 1; k > j; k--) {
       if (near(best.levels.p[j], best.levels.p[k])) attempt(merged(best.levels, j, k));
