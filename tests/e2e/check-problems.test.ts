@@ -109,7 +109,7 @@ describe('what goes wrong', () => {
     );
     await fill(page, wide.join('\n'), '600');
     await page.getByText('How hard to look').click();
-    await page.getByLabel('Resampled histograms').fill('20000');
+    await page.getByLabel('Resampled histograms').fill('100000');
     await check(page);
     await page.getByText(/left$/).waitFor({ timeout: 30_000 });
     expect(Number(await page.locator('progress').getAttribute('value'))).toBeGreaterThan(0);
