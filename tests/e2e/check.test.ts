@@ -138,7 +138,7 @@ describe('a check', () => {
     await expect.poll(() => figure.locator('[aria-live]').textContent()).toMatch(/^Count 1[12]/);
 
     await figure.locator('summary').click();
-    expect(await figure.getByRole('row').count()).toBeGreaterThanOrEqual(13);
+    await expect.poll(() => figure.getByRole('row').count()).toBeGreaterThanOrEqual(13);
     const csv = await saved(page, () => figure.getByRole('button', { name: /^Save as CSV/ }).click());
     expect(csv.text.split('\r\n')[5]).toMatch(/^4,6114,0\.2324/);
     const svg = await saved(page, () => figure.getByRole('button', { name: /^Save as SVG/ }).click());
