@@ -23,7 +23,12 @@ export function toHistogram(data: CountData): Histogram {
   if (!(total > 0)) throw new BadInput('There are no shots.');
   if (total > Number.MAX_SAFE_INTEGER)
     throw new BadInput('The shots sum to more than 2^53, beyond which they cannot be told apart.');
-  const first = counts.length > 0 ? counts[0][0] : lump!.from;
+  if (counts.length === 0) {
+    throw new BadInput(
+      `Every shot is in the closing row "${lump!.from} or more": nothing is left to compare.`
+    );
+  }
+  const first = counts[0][0];
   if (before - first > widest) {
     throw new BadInput(
       `The counts reach from ${first} to ${before}; at most ${widest} neighbouring counts can be diagnosed.`
