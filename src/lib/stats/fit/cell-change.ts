@@ -34,7 +34,8 @@ export function cellChange(space: Workspace, f: Float64Array, power: 1 | 2 | -1,
     else out[cells] = -at(f, c, length);
   }
   if (space.emptySingle !== 0) {
-    out[cells + 1] = power === -1 ? at(f, 1, length) - f[0] : power === 1 ? -f[0] : f[0];
+    const none = at(f, -space.first, length);
+    out[cells + 1] = power === -1 ? at(f, 1 - space.first, length) - none : power === 1 ? -none : none;
   }
 }
 

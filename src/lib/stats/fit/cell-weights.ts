@@ -18,10 +18,12 @@ export function cellWeights(space: Workspace): void {
     space.lumpSingle = data.lump.shots / tail;
     space.lumpDouble = space.lumpSingle / tail;
   }
-  if (data.withoutEmpty && space.first === 0) {
+  // With one sure trial no shot is empty, but some are once it leaves.
+  if (data.withoutEmpty && space.first <= 1) {
     // −S ln(1 − f_0) is convex in f_0, hence the sign of its second derivative.
-    space.emptySingle = data.total / (1 - f[0]);
-    space.emptyDouble = -space.emptySingle / (1 - f[0]);
+    const some = space.first === 0 ? 1 - f[0] : 1;
+    space.emptySingle = data.total / some;
+    space.emptyDouble = -space.emptySingle / some;
   }
   bend(space);
 }
@@ -36,6 +38,6 @@ function bend(space: Workspace): void {
   if (data.lump) {
     for (let k = Math.max(0, data.lump.from - space.first); k < length + 2; k++) bent[k] += space.lumpSingle;
   }
-  if (space.emptySingle !== 0) bent[0] += space.emptySingle;
+  if (space.first === 0) bent[0] += space.emptySingle;
   for (let k = 0; k < length; k++) bent[k] += bent[k + 2] - 2 * bent[k + 1];
 }
