@@ -22,13 +22,11 @@ const histogram = fc
 const shots = fc
   .array(fc.tuple(fc.nat(3), fc.constantFrom('a', 'b c', 'x*2', 'ä,&=#')), { minLength: 1, maxLength: 60 })
   .chain((rows) =>
-    fc
-      .boolean()
-      .map((named): CountData => ({
-        kind: 'shots',
-        shots: rows.map(([n]) => n),
-        batches: named ? rows.map(([, b]) => b) : null
-      }))
+    fc.boolean().map((named): CountData => ({
+      kind: 'shots',
+      shots: rows.map(([n]) => n),
+      batches: named ? rows.map(([, b]) => b) : null
+    }))
   );
 const options: fc.Arbitrary<DiagnoseOptions> = fc.record({
   trials: fc.option(fc.integer({ min: 201, max: 1e6 })),
