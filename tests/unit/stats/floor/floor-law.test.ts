@@ -2,7 +2,6 @@ import { bestLaw } from '$lib/stats/fit/best-law';
 import { fitData } from '$lib/stats/fit/fit-data';
 import { floorLaw } from '$lib/stats/floor/floor-law';
 import { lawWindow } from '$lib/stats/laws/law-window';
-import { logChoose } from '$lib/stats/numerics/log-choose';
 import { divergence } from '$lib/stats/resampling/divergence';
 import * as fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
