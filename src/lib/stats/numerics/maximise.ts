@@ -32,7 +32,7 @@ export function maximise(
   let stepBefore = 0;
   for (let count = 0; count < 500; count++) {
     const middle = (left + right) / 2;
-    const least = tolerance / 3 + 1e-9 * Math.abs(best) * 1e-2;
+    const least = tolerance / 3 + 1e-11 * Math.abs(best);
     if (Math.abs(best - middle) <= 2 * least - (right - left) / 2) break;
     let trial = NaN;
     if (Math.abs(stepBefore) > least) {
