@@ -55,11 +55,11 @@ export async function diagnose(
   await pace.step('floor', 0.04);
   const floor = floorLaw(counts);
   const drawing = { resamples: options.resamples, seed: options.seed };
-  const moments = momentReport(histogram, trials, drawing);
+  const equal = equalTrials(counts, trials);
+  const moments = momentReport(histogram, trials, equal.parameter, drawing);
   const proof = certificate({ counts: histogram.counts, lump: histogram.lump, shots: counts.total, trials });
   const spread = moments.variance.value !== null && moments.variance.value > 0;
   await pace.step('resampling', 0.08);
-  const equal = equalTrials(counts, trials);
   const ceiling = spread
     ? await ceilingTest(counts, equal.parameter, drawing, pace.within(0.08, 0.12))
     : null;
@@ -70,7 +70,17 @@ export async function diagnose(
   const tests = adjust([...(ceiling ? [ceiling] : []), ...fitted.tests, ...order.tests]);
   const table = lawTable(counts, law);
   const shown = distribution(histogram, counts.total, trials, table);
-  const evidence = evidenceOf({ options, counts, trials, moments, tests, certificate: proof, fitted, law });
+  const evidence = evidenceOf({
+    options,
+    counts,
+    trials,
+    moments,
+    tests,
+    certificate: proof,
+    fitted,
+    law,
+    neighbours: order.neighbours
+  });
   const flags = raiseFlags(evidence);
   return {
     format: 'severalty.diagnosis/1',
@@ -95,7 +105,8 @@ export async function diagnose(
     },
     moments: {
       ...moments,
-      criticalTrials: spread ? criticalTrials(moments.mean.value!, moments.variance.value!) : null
+      criticalTrials:
+        spread && !histogram.lump ? criticalTrials(moments.mean.value!, moments.variance.value!) : null
     },
     fit: fitReport({ counts, best, law, floor, fitted, supplied: options.supplied, alpha: options.alpha }),
     distribution: shown,

@@ -1,4 +1,5 @@
-import { formatCount, formatNumber } from '$lib/model/format-number';
+import { sayInterval } from '$lib/model/say-interval';
+import { formatCount } from '$lib/model/format-number';
 import type { Diagnosis } from '$lib/stats/types';
 
 /** How big the departure is: what each flag says of its size, and the distance from the best law. */
@@ -8,8 +9,9 @@ export function howBig({ fit, flags }: Diagnosis): string[] {
     fit.shotsToNotice === null
       ? ''
       : ` About ${formatCount(fit.shotsToNotice)} shots make such a distance noticeable.`;
+  const distance = { ...fit.divergenceInterval, value: fit.divergenceInterval.value ?? fit.divergence };
   return [
     ...sizes,
-    `The best independent-trial law lies ${formatNumber(fit.divergence, 3)} nats a shot from these counts.${notice}`
+    `The best independent-trial law lies ${sayInterval(distance, 2)} nats a shot from these counts, chance taken off.${notice}`
   ];
 }

@@ -15,13 +15,13 @@ export function because(
   const out: string[] = [];
   if (certificate && certificate.p <= options.alpha) {
     out.push(
-      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits give more than ${formatNumber(certificate.bound, 3)} a shot (p = ${formatNumber(certificate.p, 2)}).`
+      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits give more than ${formatNumber(certificate.bound, 3)} a shot (p at most ${formatNumber(certificate.p, 2)}).`
     );
   }
   for (const test of tests) {
     if (test.pAdjusted > options.alpha) continue;
     out.push(
-      `${names[test.id]}: as extreme a value ${sayTest(test)}; adjusted for ${tests.length} tests p = ${formatNumber(test.pAdjusted, 2)}.`
+      `${names[test.id]}: as extreme a value ${sayTest(test)}; adjusted for ${tests.length} tests p ${test.p <= test.smallestP ? '≤' : '='} ${formatNumber(test.pAdjusted, 2)}.`
     );
   }
   const { dispersion } = moments;
@@ -32,7 +32,7 @@ export function because(
   }
   if (verdict !== 'ruled-out' && excess !== null) {
     out.push(
-      `With this many shots an excess of ${formatPercent(excess)} over the ceiling is seen in four of five repeats.`
+      `With this many shots an excess of ${formatPercent(excess)} over the ceiling is seen in four of five repeats, by the variance alone at a level of 5\u202f%.`
     );
   }
   if (verdict === 'undecided' && needed !== null) {

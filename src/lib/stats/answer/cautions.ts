@@ -1,6 +1,7 @@
 import type { Evidence } from '../flags/evidence';
 import type { Histogram, TestResult } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
+import { resamplesNeeded } from './unreachable';
 
 /** What a reader must keep in mind: first what this histogram adds, then what always holds. */
 export function cautions(
@@ -11,7 +12,7 @@ export function cautions(
   const out: string[] = [];
   if (histogram.lump) {
     out.push(
-      `The last row lumps counts of ${formatCount(histogram.lump.from)} and more. They enter the likelihood as a tail; mean, variance and what follows from them count each such shot as ${formatCount(histogram.lump.from)} and are lower limits.`
+      `The last row lumps counts of ${formatCount(histogram.lump.from)} and more. They enter the likelihood as a tail; mean, variance and what follows from them count each such shot as ${formatCount(histogram.lump.from)} and are lower limits. The ceiling is then that of equal trials lumped in the same way.`
     );
   }
   if (trials === null) {
@@ -43,11 +44,12 @@ export function cautions(
       `The smallest p that ${formatCount(options.resamples)} resamples can show is ${formatNumber(smallest, 2)}; the truth may be smaller.`
     );
   }
-  const reachable =
-    Math.max(0, ...tests.filter((test) => test.resamples > 0).map((test) => test.smallestP)) * tests.length;
-  if (reachable > options.alpha) {
+  const short = tests.filter((test) => test.resamples > 0 && test.smallestP * tests.length > options.alpha);
+  if (short.length > 0) {
+    const which =
+      short.length === tests.length ? 'no test can' : `${short.length} of the ${tests.length} tests cannot`;
     out.push(
-      `With ${formatCount(options.resamples)} resamples no test can reach the level of ${formatNumber(options.alpha, 2)} once adjusted for ${tests.length} tests; at least ${formatCount(Math.ceil(tests.length / options.alpha))} are needed.`
+      `With the resamples drawn, ${which} reach the level of ${formatNumber(options.alpha, 2)} once adjusted for ${tests.length} tests; that takes at least ${formatCount(resamplesNeeded({ tests, options }))}.`
     );
   }
   return out.concat(always);

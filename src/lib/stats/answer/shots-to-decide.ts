@@ -1,6 +1,6 @@
 import { normalQuantile } from '../numerics/normal-quantile';
 import type { Interval } from '../types';
-import { shotsForExcess, varianceShape } from './smallest-excess';
+import { varianceShape } from './smallest-excess';
 
 /** Shots in all that would decide, if the truth is what the data suggest; null when nothing suggests it. */
 export interface Deciding {
@@ -10,36 +10,34 @@ export interface Deciding {
   dispersion: Interval;
   tolerance: number;
   alpha: number;
+  /** Tests among which α is shared. */
+  tests: number;
 }
 
 /** Quantile of a one-sided normal test at 80 % power. */
 const power = 0.842;
 
 /**
- * Shots that would turn "undecided" into an answer.
+ * Shots that would turn "undecided" into an answer in four of five repeats, if the variance stays where it is.
  *
- * - Variance at or below the ceiling: as many as see an excess of the tolerance.
- * - Between ceiling and tolerance: as many as bring the upper limit under the tolerance.
- * - Above the tolerance: as many as show the excess at level α.
+ * - Compatible: as many as bring the upper 95 % limit under 1 + tolerance, (1.96 + 0.842)² · shape/(tolerance − excess)²,
+ *   a variance at or below the ceiling counting as at it.
+ * - Ruled out: as many as show the excess at α shared among all tests (Holm), (z(α/m) + 0.842)² · shape/excess².
+ *
+ * The nearer of the two. `shape` is S times the relative variance of a sample variance (see varianceShape).
  */
-export function shotsToDecide({
-  mean,
-  trials,
-  shots,
-  dispersion,
-  tolerance,
-  alpha
-}: Deciding): number | null {
+export function shotsToDecide(deciding: Deciding): number | null {
+  const { mean, trials, shots, dispersion, tolerance, alpha, tests } = deciding;
   const shape = varianceShape(mean, trials);
-  const least = shotsForExcess(mean, trials, tolerance);
-  if (shape === null || least === null || dispersion.value === null) return null;
-  const excess = dispersion.value - 1;
-  const needed =
-    excess >= tolerance
-      ? shape * ((-normalQuantile(alpha) + power) / excess) ** 2
-      : excess > 0
-        ? Math.max(least, shape * ((1.96 + power) / (tolerance - excess)) ** 2)
-        : least;
+  if (shape === null || dispersion.value === null) return null;
+  const excess = Math.max(0, dispersion.value - 1);
+  const room = tolerance - excess;
+  const compatible = room > 0 ? shape * ((1.96 + power) / room) ** 2 : Infinity;
+  const ruledOut = excess > 0 ? shape * ((power - normalQuantile(alpha / tests)) / excess) ** 2 : Infinity;
+  const needed = Math.max(fewest, Math.ceil(Math.min(compatible, ruledOut)));
   // Already more than that and still undecided: the estimate was lucky, and twice as many is the honest reply.
-  return Math.ceil(needed) > shots ? Math.ceil(needed) : 2 * shots;
+  return needed > shots ? needed : 2 * shots;
 }
+
+/** See answer: fewer are never called compatible. */
+const fewest = 50;

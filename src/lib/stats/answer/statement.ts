@@ -1,7 +1,8 @@
 import { allEven, type Evidence } from '../flags/evidence';
 import type { Flag, Verdict } from '../types';
-import { formatCount, formatPercent } from '../words/format-number';
+import { formatCount, formatNumber } from '../words/format-number';
 import { sayHowOften } from '../words/say-p';
+import { resamplesNeeded, unreachable } from './unreachable';
 
 /** The answer in one or two sentences, plain first. */
 export function statement(
@@ -17,7 +18,7 @@ export function statement(
   if (verdict === 'compatible') {
     const regular = flags.some((flag) => flag.id === 'regular');
     return (
-      `These ${shots} are compatible with independent trials, and an excess of variance of ${formatPercent(evidence.options.tolerance)} would have shown.` +
+      `These ${shots} are compatible with independent trials: with 95\u202f% confidence their variance is below ${formatNumber(1 + evidence.options.tolerance, 3)} times the ceiling.` +
       (regular
         ? ' They are more regular than equal trials, which repulsion between defects would also give.'
         : '')
@@ -29,6 +30,10 @@ export function statement(
     return `No defect was seen in ${shots}, so there is nothing to test.`;
   if (evidence.moments.variance.value === 0)
     return `Every one of these ${shots} had the same count, so there is no spread to test.`;
+  const blind = unreachable(evidence);
+  if (blind.length > 0) {
+    return `These ${shots} cannot be judged with ${formatCount(evidence.options.resamples)} resamples: ${blind.length === 1 ? 'one test is' : `${formatCount(blind.length)} tests are`} as extreme as so few can show. Use at least ${formatCount(resamplesNeeded(evidence))}.`;
+  }
   const more = needed ? ` About ${formatCount(needed)} shots in all would decide.` : '';
   const hints = flags.filter((flag) => flag.grade === 'hinted' && flag.id !== 'regular');
   const hint =
@@ -43,7 +48,11 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   const raised = (id: Flag['id']) => flags.some((flag) => flag.id === id);
   if (allEven(evidence))
     return ' But every count is even: on a ring that is so by construction, and pairs should be counted.';
-  if (raised('drift'))
+  if (
+    raised('drift') &&
+    evidence.neighbours !== 'alternating' &&
+    (evidence.moments.dispersion.value ?? 0) > 1
+  )
     return ' But the rate changed while the shots were taken, which alone makes counts look bunched.';
   if (raised('misreads')) return ' But misread sites alone could give this.';
   return '';
@@ -52,11 +61,16 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
 /** The strongest single piece of evidence, in words. */
 function strongest({ tests, certificate, options }: Evidence): string {
   if (certificate && certificate.p <= options.alpha) {
-    return `a tail of the counts this heavy ${sayHowOften(certificate.p)} under any independent trials with this mean, whatever their probabilities.`;
+    return `a tail of the counts this heavy ${sayHowOften(certificate.p, certificateFloor)} under any independent trials with this mean, whatever their probabilities.`;
   }
   const best = [...tests].sort((a, b) => a.pAdjusted - b.pAdjusted || a.p - b.p)[0];
-  return `${finding[best.id]} ${sayHowOften(best.p, best.smallestP)} if defects formed independently.`;
+  // The adjusted p, which the verdict rests on: one of several tests would look extreme more often than each does.
+  const allowed = tests.length > 1 ? `, all ${formatCount(tests.length)} tests allowed for` : '';
+  return `${finding[best.id]} ${sayHowOften(best.pAdjusted, best.p <= best.smallestP ? best.pAdjusted : 0)} if ${best.id === 'batches' || best.id === 'order' ? 'all shots were alike' : 'defects formed independently'}${allowed}.`;
 }
+
+/** A certificate's p is an upper bound that never goes below its own β = 1e-6, nor much above it in clear cases. */
+const certificateFloor = 1.01e-6;
 
 const finding = {
   ceiling: 'counts this uneven',
@@ -66,5 +80,5 @@ const finding = {
   parity: 'a preference this strong for one parity',
   'empty-shots': 'this many empty shots',
   batches: 'batches this different',
-  order: 'an order this regular'
+  order: 'an order this far from chance'
 } as const;

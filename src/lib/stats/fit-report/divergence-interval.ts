@@ -39,7 +39,8 @@ export function divergenceInterval(
   const interval = {
     value: Math.max(0, corrected),
     low: Math.max(0, corrected - reach),
-    high: Math.max(0, corrected + reach)
+    // An over-smooth histogram has a corrected value far below 0; what its shots could hide is still this much.
+    high: Math.max(1.96 * Math.sqrt(noise), corrected + reach)
   };
   return { corrected, interval };
 }

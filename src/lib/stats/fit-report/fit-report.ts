@@ -52,7 +52,7 @@ export function fitReport({
     divergenceInterval: corrected?.interval ?? { value: null, low: null, high: null },
     gSquared: 2 * counts.total * plugIn,
     shotsToNotice: noticed,
-    ...howFound(best, plugIn, floor.divergence),
+    ...howFound(best, plugIn, floor.divergence, counts.total),
     ...referenceLaws(counts, supplied)
   };
 }

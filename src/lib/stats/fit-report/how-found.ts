@@ -1,16 +1,17 @@
 import type { BestLaw } from '../fit/best-law';
 import { formatNumber } from '../words/format-number';
 
-/** Found and floor agree when no more than this separates them, nats a shot. */
-const agree = 1e-6;
+/** Found and floor agree when no more than this separates their log-likelihoods, nats in all. */
+const agree = 0.01;
 
 /** Whether the floor certifies the law as the global best, and in words how it was reached. */
 export function howFound(
   best: BestLaw,
   divergence: number,
-  floor: number
+  floor: number,
+  shots: number
 ): { certified: boolean; how: string } {
-  const certified = divergence - floor <= agree;
+  const certified = (divergence - floor) * shots <= agree;
   const starts =
     best.starts === 1
       ? 'From equal trials, the only start that the variance suggests'

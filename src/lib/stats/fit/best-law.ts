@@ -22,8 +22,8 @@ export interface BestLaw {
 const few = 100;
 
 /** From each start; then the two best of these to the end. */
-const first: Effort = { enough: 1e-5, worth: 1e-3, rounds: 60, transfers: false };
-const thorough: Effort = { enough: 1e-9, worth: 1e-5, rounds: 200, transfers: true };
+const first: Effort = { enough: 1e-5, worth: 1e-3, rounds: 60, transfers: 0 };
+const thorough: Effort = { enough: 1e-9, worth: 1e-5, rounds: 200, transfers: 4 ** 9 };
 
 /**
  * The Poisson-binomial law of greatest likelihood, from several spreads of its probabilities.
@@ -67,10 +67,11 @@ function throughValleys(space: Workspace, from: Climb): Climb {
   return best;
 }
 
-/** Every shot had the same count: that many sure trials explain it with likelihood 1. */
+/** Every shot had the same count, or lies in the lump: that many sure trials explain it with likelihood 1. */
 function oneCount(data: FitData, variance: number, mean: number): TrialLevels | null {
-  if (variance > 0 || data.lump) return null;
-  return { p: [], trials: [], ones: mean, zeros: (data.trials ?? Infinity) - mean, poissonPart: 0 };
+  if (data.lump ? data.shots.length > 0 : variance > 0) return null;
+  const ones = data.lump ? data.lump.from : mean;
+  return { p: [], trials: [], ones, zeros: (data.trials ?? Infinity) - ones, poissonPart: 0 };
 }
 
 /**

@@ -112,9 +112,11 @@ function short(angles: number[]): boolean {
 function turned(levels: TrialLevels, angles: number[], share: number): TrialLevels {
   const out = copyLevels(levels);
   for (let j = 0; j < out.p.length; j++) {
-    // sin(φ + δ) = √p cos δ + √(1−p) sin δ
-    const angle = share * angles[j];
-    const root = Math.sqrt(out.p[j]) * Math.cos(angle) + Math.sqrt(1 - out.p[j]) * Math.sin(angle);
+    // sin(φ + δ) = √p cos δ + √(1−p) sin δ, with cos and sin of 2 arctan(δ/2), which is δ to third order: browsers and
+    // Node differ in the last digit of Math.sin, and the document must not.
+    const half = (share * angles[j]) / 2;
+    const root =
+      (Math.sqrt(out.p[j]) * (1 - half * half) + Math.sqrt(1 - out.p[j]) * 2 * half) / (1 + half * half);
     out.p[j] = root * root;
   }
   if (levels.poissonPart > 0) {
@@ -153,9 +155,9 @@ function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: T
   return best;
 }
 
-/** Angles within 0.02 of each other. */
+/** Angles within 0.02 of each other, by the sine of their difference. */
 function near(p: number, q: number): boolean {
-  return Math.abs(p - q) < 0.05 && Math.abs(Math.asin(Math.sqrt(p)) - Math.asin(Math.sqrt(q))) < 0.02;
+  return Math.abs(p - q) < 0.05 && Math.abs(Math.sqrt(p * (1 - q)) - Math.sqrt(q * (1 - p))) < 0.02;
 }
 
 function absorbed(levels: TrialLevels, j: number, into: 'zeros' | 'ones'): TrialLevels {

@@ -17,9 +17,9 @@ export interface Refit {
 
 /** Up to this many counts a refit comes within 1e-3 nats of the best of many starts, in about 0.5 ms. */
 const shortHistogram = 16;
-const short: Effort = { enough: 1e-5, worth: 5e-5, rounds: 60, transfers: true };
+const short: Effort = { enough: 1e-5, worth: 5e-5, rounds: 60, transfers: 4 };
 /** Beyond, and with N unknown (a Poisson part and small trials are nearly alike), within about 0.01 nats (0.05 at the worst tenth), where G² varies by six and more between resamples. */
-const long: Effort = { enough: 1e-3, worth: 5e-3, rounds: 30, transfers: false };
+const long: Effort = { enough: 1e-3, worth: 5e-3, rounds: 30, transfers: 0 };
 
 /**
  * The best law of a resampled histogram, starting from the law it was drawn from.

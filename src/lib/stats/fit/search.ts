@@ -12,8 +12,8 @@ export interface Effort {
   worth: number;
   /** Rounds of structural moves at most. */
   rounds: number;
-  /** Whether trials are passed between levels when no other move pays. */
-  transfers: boolean;
+  /** Most trials passed between levels at a time when no other move pays; 0 for none. */
+  transfers: number;
 }
 
 /** Climbs from a start, then makes the structural moves that pay until none does. */
@@ -35,8 +35,7 @@ function improved(space: Workspace, best: Climb, effort: Effort): Climb | null {
     const found = bestOf(space, move.starts, effort, best.value);
     if (found && found.value > best.value + effort.worth / 2) return found;
   }
-  if (!effort.transfers) return null;
-  for (let size = largestTransfer(best.levels); size >= 1; size = size >> 2) {
+  for (let size = Math.min(effort.transfers, largestTransfer(best.levels)); size >= 1; size = size >> 2) {
     const found = bestOf(space, transfers(best.levels, size), effort, best.value);
     if (found && found.value > best.value + effort.worth) return found;
   }

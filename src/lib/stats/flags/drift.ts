@@ -8,6 +8,7 @@ export function drift(evidence: Evidence): Flag | null {
   if (!grade) return null;
   const tests = (['batches', 'order'] as const).filter((id) => gradeOf(evidence, id));
   const first = evidence.tests.find((test) => test.id === tests[0])!;
+  const alternating = tests[0] === 'order' && evidence.neighbours === 'alternating';
   return {
     id: 'drift',
     grade,
@@ -15,8 +16,10 @@ export function drift(evidence: Evidence): Flag | null {
     statement:
       tests[0] === 'batches'
         ? 'The rate differed between batches, so the shots are not alike.'
-        : 'Neighbouring shots resemble each other: the rate changed while the shots were taken.',
-    size: `${tests[0] === 'batches' ? 'Batches this uneven' : 'An order this regular'} ${sayTest(first)} if every shot were alike.`,
+        : alternating
+          ? 'Neighbouring shots differ more than chance would have it: one shot leans against the one before.'
+          : 'Neighbouring shots resemble each other: the rate changed while the shots were taken.',
+    size: `${tests[0] === 'batches' ? 'Batches this uneven' : 'An order this far from chance'} ${sayTest(first)} if every shot were alike.`,
     otherCauses: [
       'temperature',
       'laser or drive power',

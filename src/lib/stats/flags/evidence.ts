@@ -10,6 +10,8 @@ export interface Evidence {
   certificate: Certificate | null;
   /** p of the low tail with empty shots set aside; null when it was not asked. */
   lowTailOfTheRest: number | null;
+  /** How neighbouring shots relate, from the number of runs; null without order. */
+  neighbours: 'alike' | 'alternating' | null;
   /** Empty shots seen, and expected by the law of the others (null when that says nothing). */
   empty: { seen: number; expected: number | null };
   /** Shots with an even count, and the share the fitted law expects; null with a lump. `oneCountAlone`: the preference goes when one count is left out. */

@@ -13,6 +13,7 @@ export interface Gathered {
   certificate: Certificate | null;
   fitted: FittedTests;
   law: Law;
+  neighbours: Evidence['neighbours'];
 }
 
 /** What flags and the answer are decided from, out of the parts of a diagnosis. */
@@ -24,7 +25,8 @@ export function evidenceOf({
   tests,
   certificate,
   fitted,
-  law
+  law,
+  neighbours
 }: Gathered): Evidence {
   return {
     options,
@@ -33,6 +35,7 @@ export function evidenceOf({
     moments,
     tests,
     certificate,
+    neighbours,
     lowTailOfTheRest: fitted.lowTailOfTheRest,
     empty: { seen: counts.first === 0 ? (counts.shots[0] ?? 0) : 0, expected: fitted.expectedEmpty },
     even: counts.lump ? null : evenShots(counts, law)

@@ -13,6 +13,8 @@ export function misreads(evidence: Evidence): Flag | null {
   if (geometry !== 'open-bonds' || !gradeOf(evidence, 'ceiling') || !evidence.trials) return null;
   const needed = misreadNeeded(mean.value!, variance.value!, evidence.trials);
   if (needed === null || needed > 0.1) return null;
+  // A stated rate that falls well short of what is needed speaks against this explanation.
+  if (misread !== null && misread < 0.8 * needed) return null;
   const stated = misread ? ` You stated ${formatPercent(misread)}.` : '';
   return {
     id: 'misreads',

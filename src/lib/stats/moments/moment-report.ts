@@ -1,19 +1,34 @@
 import { stream } from '../resampling/streams';
 import type { Diagnosis, Histogram } from '../types';
-import { momentIntervals } from './moment-intervals';
+import { lumpedCeiling } from './lumped-ceiling';
+import { momentIntervals, type MomentIntervals } from './moment-intervals';
 
 /**
  * Moments of the document, without the critical N. A lump counts as its first count, so that mean and variance
- * are then lower limits (the document's cautions say so).
+ * are then lower limits, and the ceiling is the variance of equal trials lumped in the same way: against the plain
+ * ceiling any lumped histogram would look regular (the document's cautions say so).
+ *
+ * @param equal probability of the equal trials, or their mean when N is unknown
  */
 export function momentReport(
   histogram: Histogram,
   trials: number | null,
+  equal: number,
   options: { resamples: number; seed: number }
 ): Omit<Diagnosis['moments'], 'criticalTrials'> {
   const { lump } = histogram;
   const counts = lump ? [...histogram.counts, [lump.from, lump.shots] as [number, number]] : histogram.counts;
   const found = momentIntervals(counts, trials, { ...options, stream: stream('intervals', 0) });
+  if (lump) lowerCeiling(found, lumpedCeiling(trials, equal, lump.from));
   const variance = found.variance.value;
   return { ...found, pairCovariance: variance === null ? null : variance - found.ceiling };
+}
+
+/** Replaces the ceiling, and variance/ceiling with it. */
+function lowerCeiling(found: MomentIntervals, lumped: number): void {
+  const factor = found.ceiling / lumped;
+  const scaled = (value: number | null) => (value === null ? null : value * factor);
+  const { value, low, high } = found.dispersion;
+  found.ceiling = lumped;
+  found.dispersion = { value: scaled(value), low: scaled(low), high: scaled(high) };
 }

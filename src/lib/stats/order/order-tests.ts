@@ -9,6 +9,8 @@ import { orderTest } from './order-test';
 export interface OrderTests {
   tests: Omit<TestResult, 'pAdjusted'>[];
   notRun: { id: TestId; reason: string }[];
+  /** Fewer runs than chance gives: neighbouring shots are alike. More: they alternate. null without order. */
+  neighbours: 'alike' | 'alternating' | null;
 }
 
 /** Batches and order of a shot list; a histogram keeps neither. */
@@ -17,7 +19,7 @@ export async function orderTests(
   options: { resamples: number; seed: number },
   pace: Pace
 ): Promise<OrderTests> {
-  const out: OrderTests = { tests: [], notRun: [] };
+  const out: OrderTests = { tests: [], notRun: [], neighbours: null };
   const take = (id: TestId, outcome: OrderOutcome<object>) => {
     if (!outcome.ok) {
       out.notRun.push({ id, reason: outcome.reason });
@@ -38,6 +40,8 @@ export async function orderTests(
     ? await batchesTest(shots, batches, { ...options, stream: stream('batches', 0) }, half(0))
     : none('No batches were given.');
   take('batches', grouped);
-  take('order', await orderTest(shots, { ...options, stream: stream('shot order', 0) }, half(0.5)));
+  const order = await orderTest(shots, { ...options, stream: stream('shot order', 0) }, half(0.5));
+  take('order', order);
+  if (order.ok) out.neighbours = order.runs <= order.runsExpected ? 'alike' : 'alternating';
   return out;
 }

@@ -20,17 +20,21 @@ describe('smallestExcess', () => {
 });
 
 describe('shotsToDecide', () => {
-  const base = { mean: 3, trials: 12, shots: 100, tolerance: 0.1, alpha: 0.01 };
+  const base = { mean: 3, trials: 12, shots: 100, tolerance: 0.1, alpha: 0.01, tests: 6 };
   const dispersion = (value: number) => ({ value, low: null, high: null });
 
-  it('asks for the tolerance where the variance is at or under the ceiling', () => {
-    expect(shotsToDecide({ ...base, dispersion: dispersion(0.9) })).toBe(shotsForExcess(3, 12, 0.1));
+  it('at or under the ceiling: as many as bring the upper limit under the tolerance, by hand', () => {
+    // Bin(12, ¼): shape 2 − 0.0555556; (1.96 + 0.842)² · 1.9444444/0.01 = 1526.6.
+    expect(shotsToDecide({ ...base, dispersion: dispersion(0.9) })).toBe(1527);
   });
 
-  it('asks for more the nearer the excess is to the tolerance, from either side', () => {
+  it('above the ceiling: the nearer of the two answers', () => {
     const at = (value: number) => shotsToDecide({ ...base, dispersion: dispersion(value) })!;
     expect(at(1.05)).toBeGreaterThan(at(1.01));
     expect(at(1.12)).toBeGreaterThan(at(1.3));
+    // Ruling out at 0.01/6 takes (0.842 + 2.935)²/0.098² · 1.944 = 2889 shots; bringing it under 1.1 would take 3.8 million.
+    expect(at(1.098)).toBeGreaterThan(2800);
+    expect(at(1.098)).toBeLessThan(3000);
   });
 
   it('never asks for fewer than there are', () => {
