@@ -51,7 +51,7 @@ describe('the address of a result', () => {
     await page.getByLabel('Resampled histograms').fill('199');
     await check(page);
     await answerOf(page);
-    expect(page.url()).toMatch(/#shots=0,2,4,1,3,.*&trials=9&resamples=199&seed=77$/);
+    expect(page.url()).toMatch(/#shots=0,2,4,1,3,.*&trials=9&resamples=199&seed=77&sum=60$/);
     const { text } = await savedDocument(page);
     await page.reload();
     await answerOf(page);
@@ -91,11 +91,35 @@ describe('the address of a result', () => {
     await page.close();
   });
 
-  it('that was cut or spoilt opens the empty form', async () => {
+  it('that cannot be read says so, names the part, and leaves no earlier result', async () => {
     const { page, complaints } = await openCheck(browser, `${server.address}/#counts=0:185,1:11x`);
-    await page.getByRole('button', { name: 'Check this histogram', exact: true }).waitFor();
+    await page.getByText('This address could not be read: “counts=1:11x”').waitFor();
     expect(await page.getByLabel('The counts', { exact: true }).inputValue()).toBe('');
+    await page.evaluate((hash) => (location.hash = hash), WELDON_ADDRESS);
+    await answerOf(page);
+    for (const [hash, part] of [
+      ['counts=garbage', 'counts=garbage'],
+      ['counts=0:10,5:3&trials=2&sum=13', 'trials'],
+      ['counts=0:10,1:3&alpha=7&sum=13', 'alpha']
+    ]) {
+      await page.evaluate((text) => (location.hash = text), hash);
+      await expect.poll(() => page.locator('#address-problem').textContent()).toContain(part);
+      expect(await page.locator('#answer-heading').count()).toBe(0);
+      await page.getByRole('button', { name: 'Check this histogram', exact: true }).waitFor();
+    }
     expect(complaints).toEqual([]);
+    await page.close();
+  });
+
+  it('without its number of shots fills the form and waits', async () => {
+    const byHand = WELDON_ADDRESS.replace(/&sum=.*/, '');
+    const { page } = await openCheck(browser, `${server.address}/#${byHand}`);
+    await page.getByText('written by hand or cut off').waitFor();
+    expect(await page.getByLabel('Trials in a shot').inputValue()).toBe('12');
+    expect(await page.locator('#answer-heading').count()).toBe(0);
+    await check(page);
+    await answerOf(page);
+    expect(page.url()).toBe(`${server.address}/#${WELDON_ADDRESS}`);
     await page.close();
   });
 });

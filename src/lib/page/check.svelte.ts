@@ -1,7 +1,9 @@
 import type { ReadOptions, ReadResult, Suggested } from '$lib/formats/types';
 import type { CountData, DiagnoseOptions, Diagnosis, Progress } from '$lib/stats/types';
-import { readAddress, writeAddress } from './address';
+import { writeAddress } from './address';
+import { addressWords } from './address-words';
 import { CountsInput } from './counts-input.svelte';
+import { readAddress } from './read-address';
 import { Reader } from './reader';
 import { readSettings, readTrials, type SettingProblems } from './read-settings';
 import { startRun, type Run } from './runner';
@@ -37,6 +39,8 @@ export class Check {
   settingProblems = $state.raw<SettingProblems>({});
   /** Why the engine would not or could not answer. */
   refusal = $state('');
+  /** What is wrong with the address that was opened, or what it leaves to the person. */
+  addressProblem = $state('');
   running = $state.raw<Running | null>(null);
   result = $state.raw<Result | null>(null);
   /** The input has changed since the result was computed. */
@@ -45,13 +49,22 @@ export class Check {
   readonly #reader = new Reader();
   #touched: Partial<Record<SettingName, true>> = {};
   #run: Run | null = null;
+  #turn = 0;
   #timer: ReturnType<typeof setTimeout> | undefined;
+
+  /** Begins something slow that brings counts. @returns a function: is it still the newest? */
+  turn(): () => boolean {
+    const mine = ++this.#turn;
+    return () => mine === this.#turn;
+  }
 
   /** The counts changed: whatever was said about how to read the former ones no longer holds. */
   countsChanged(fresh: boolean): void {
+    this.#turn++;
     if (fresh) {
       this.readOptions = {};
       this.dataset = 0;
+      this.#settle({});
     }
     this.#changed(fresh ? 0 : PAUSE);
   }
@@ -63,6 +76,7 @@ export class Check {
 
   setSetting<Name extends SettingName>(name: Name, value: Settings[Name]): void {
     this.settings[name] = value;
+    this.addressProblem = '';
     this.#touched[name] = true;
     this.settingProblems = { ...this.settingProblems, [name]: undefined };
     if (name === 'trials') this.#changed(PAUSE);
@@ -75,23 +89,41 @@ export class Check {
     this.stale = this.result !== null;
   }
 
-  /** Counts of an example, with the settings that belong to them. */
+  /** Counts of an example, with what belongs to them of the experiment; how hard to look stays as it is set. */
   takeExample(text: string, name: string, options: Partial<DiagnoseOptions>): void {
-    this.input.replace(text, name);
-    this.#touched = {};
-    this.settings = settingsWith(freshSettings(), options);
+    const { trials, unit, geometry, misread } = settingsWith(freshSettings(), options);
+    this.input.replace(text, name, { trials, unit, geometry, misread });
+    for (const setting of ['trials', 'unit', 'geometry', 'misread'] as const) delete this.#touched[setting];
     this.countsChanged(true);
   }
 
-  /** Opens what an address carries and checks it at once. @returns whether there was anything to open */
+  /** Leaves the result and whatever is on its way to one. */
+  leave(): void {
+    this.#turn++;
+    this.cancel();
+    this.result = null;
+    this.stale = false;
+    this.refusal = '';
+    this.addressProblem = '';
+  }
+
+  /** Opens what an address carries, and checks it when it is whole. @returns false when something newer took over */
   async open(fragment: string): Promise<boolean> {
-    const address = readAddress(fragment);
-    if (!address) return false;
-    this.input.replace(textOfData(address.data), address.name);
-    this.settings = address.settings;
-    this.#touched = Object.fromEntries(Object.keys(address.settings).map((name) => [name, true]));
+    this.leave();
+    const read = readAddress(fragment);
+    if (!read.ok) {
+      this.addressProblem = read.problem;
+      return true;
+    }
+    const { data, settings, name, whole } = read.address;
+    this.#touched = {};
+    this.input.replace(textOfData(data), name, settings);
     this.countsChanged(true);
-    await this.start();
+    const wanted = this.turn();
+    if (whole) await this.start();
+    else await this.#ready();
+    if (!wanted()) return false;
+    this.addressProblem = addressWords(this.read, this.settingProblems, this.refusal, whole);
     return true;
   }
 
@@ -100,13 +132,20 @@ export class Check {
     this.cancel();
     clearTimeout(this.#timer);
     this.refusal = '';
+    this.addressProblem = '';
+    const options = await this.#ready();
+    if (!this.read?.ok || !options) return null;
+    const { data, name } = this.read.datasets[this.dataset] ?? this.read.datasets[0];
+    const label = this.read.datasets.length > 1 ? name : this.input.name;
+    return this.#diagnose(data, options, label);
+  }
+
+  /** Reads counts and fields. @returns the options, or null when a field is wrong */
+  async #ready(): Promise<DiagnoseOptions | null> {
     await this.#readNow();
     const settings = await readSettings($state.snapshot(this.settings));
     this.settingProblems = settings.ok ? {} : settings.problems;
-    if (!this.read?.ok || !settings.ok) return null;
-    const { data, name } = this.read.datasets[this.dataset] ?? this.read.datasets[0];
-    const label = this.read.datasets.length > 1 ? name : this.input.name;
-    return this.#diagnose(data, settings.options, label);
+    return settings.ok ? settings.options : null;
   }
 
   async #diagnose(data: CountData, options: DiagnoseOptions, name: string | null): Promise<Result | null> {
@@ -145,6 +184,7 @@ export class Check {
   #changed(wait: number): void {
     this.stale = this.result !== null;
     this.refusal = '';
+    this.addressProblem = '';
     clearTimeout(this.#timer);
     this.#timer = setTimeout(() => void this.#readNow(), wait);
   }
@@ -156,7 +196,8 @@ export class Check {
     } else if (content === null) {
       this.read = tooLarge(file?.size ?? 0);
     } else {
-      const trials = this.#touched.trials ? readTrials(this.settings.trials) : undefined;
+      const known = this.#touched.trials || this.input.origin?.settings.trials !== undefined;
+      const trials = known ? readTrials(this.settings.trials) : undefined;
       const options: ReadOptions = { ...this.readOptions };
       if (trials !== undefined) options.trials = trials;
       if (name) options.name = name;
@@ -175,10 +216,13 @@ export class Check {
   #suggest(): void {
     if (!this.read?.ok) return;
     if (this.dataset >= this.read.datasets.length) this.dataset = 0;
-    const suggested: Suggested = this.read.datasets[this.dataset].suggested;
-    const untouched = Object.fromEntries(
-      Object.entries(suggested).filter(([name]) => !this.#touched[name as SettingName])
-    );
-    this.settings = settingsWith(this.settings, untouched);
+    this.#settle(this.read.datasets[this.dataset].suggested);
+  }
+
+  /** Fields that nobody has touched: as the counts state them, as they came with the counts, or as on a fresh page. */
+  #settle(suggested: Suggested): void {
+    const settings = settingsWith({ ...freshSettings(), ...this.input.origin?.settings }, suggested);
+    const touched = Object.keys(this.#touched).map((name) => [name, this.settings[name as SettingName]]);
+    this.settings = { ...settings, ...Object.fromEntries(touched) };
   }
 }

@@ -6,7 +6,7 @@ export const WELDON =
   '0,185\n1,1149\n2,3265\n3,5475\n4,6114\n5,5194\n6,3067\n7,1331\n8,403\n9,105\n10,14\n11,4';
 /** The same counts as the address carries them. */
 export const WELDON_ADDRESS =
-  'counts=0:185,1:1149,2:3265,3:5475,4:6114,5:5194,6:3067,7:1331,8:403,9:105,10:14,11:4&trials=12';
+  'counts=0:185,1:1149,2:3265,3:5475,4:6114,5:5194,6:3067,7:1331,8:403,9:105,10:14,11:4&trials=12&sum=26306';
 
 /** Longest a small diagnosis may take here: it needs under a second, a busy machine many times that. */
 const PATIENCE = 40_000;
