@@ -150,12 +150,24 @@ export function parseOptions(args: string[]): Asked | 'help' {
 
 function parse(args: string[]) {
   try {
-    return parseArgs({ args, options, allowPositionals: true, strict: true });
+    return parseArgs({ args: joined(args), options, allowPositionals: true, strict: true });
   } catch (error) {
     // Node's own sentence names the option; its hint about "--" would only confuse.
     const reason = error instanceof Error ? error.message.split(/\. (?=To |Did )|\n/)[0] : String(error);
     throw new Refusal([`${reason.replace(/\.$/, '')}. --help lists the options.`]);
   }
+}
+
+/** "--seed -1" as "--seed=-1": parseArgs would take the number for another option, and call it ambiguous. */
+function joined(args: string[]): string[] {
+  const out: string[] = [];
+  for (const arg of args) {
+    const before = out[out.length - 1];
+    if (/^-[\d.]/.test(arg) && before?.startsWith('--') && before !== '--' && !before.includes('=')) {
+      out[out.length - 1] = `${before}=${arg}`;
+    } else out.push(arg);
+  }
+  return out;
 }
 
 /** Only the entries that have a value, so that spreading them over others changes nothing else. */

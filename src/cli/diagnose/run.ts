@@ -6,6 +6,7 @@ import { documentText } from '$lib/model/document-text';
 import { plainText } from '$lib/model/plain-text/plain-text';
 import { defaultOptions } from '$lib/stats/default-options';
 import { diagnose } from '$lib/stats/diagnose';
+import { checkOptions } from '$lib/stats/input/check-options';
 import { BadInput, type Diagnosis } from '$lib/stats/types';
 import { chooseDataset } from './choose-dataset';
 import { type ExitCode, exitCodes, Refusal } from './exit-codes';
@@ -37,6 +38,7 @@ export async function runDiagnose(args: string[]): Promise<ExitCode> {
 }
 
 async function run(asked: Asked): Promise<ExitCode> {
+  refuseOptions(asked);
   const result = readCounts(await readInput(asked.file), asked.read);
   if (!result.ok) throw new Refusal(sayProblems(asked.file, result.problems, result.more));
   const dataset = chooseDataset(asked.file, result.datasets, asked.dataset);
@@ -52,6 +54,15 @@ async function run(asked: Asked): Promise<ExitCode> {
     process.stdout.write(plainText(diagnosis, asked.quiet ? named : [...named, ...about]));
   }
   return verdictCode(asked, diagnosis);
+}
+
+/** Options that no file could make right are refused before one is read, and without its name. */
+function refuseOptions(asked: Asked): void {
+  try {
+    checkOptions({ ...defaultOptions, ...asked.diagnose });
+  } catch (error) {
+    throw error instanceof BadInput ? new Refusal([error.reason]) : error;
+  }
 }
 
 async function check(asked: Asked, dataset: Dataset, supplied: number[] | null): Promise<Diagnosis> {

@@ -34,6 +34,9 @@ describe('exit codes', () => {
       '--trials takes a whole number, or unknown, not "many".'
     ],
     [['fixtures/weldon-dice.csv', '--trials', '12.5'], 'trials'],
+    [['fixtures/weldon-dice.csv', '--trials', '-3'], 'The number of trials must be a whole number'],
+    [['fixtures/weldon-dice.csv', '--trials', '0'], 'The number of trials must be a whole number'],
+    [['fixtures/weldon-dice.csv', '--seed', '-1'], 'The seed must be'],
     [
       ['fixtures/weldon-dice.csv', '--trials', '9'],
       'fixtures/weldon-dice.csv:14:1: The count 10 is above the 9 trials given.'
