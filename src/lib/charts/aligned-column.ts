@@ -1,22 +1,14 @@
-import { formatCount } from '$lib/model/format-number';
+import { formatCount, formatNumber } from '$lib/model/format-number';
 import type { ColumnKind } from './table';
 
 function numberText(value: number, digits: number): string {
   if (value === 0) return '0';
   const size = Math.abs(value);
   const sign = value < 0 ? '\u2212' : '';
-  if (size >= 1e-4 && size < 1e7) {
-    const text = size >= 10 ** digits ? String(Math.round(size)) : size.toPrecision(digits);
-    const [head, part] = text.split('.');
-    return `${sign}${head.replace(/\B(?=(\d{3})+$)/g, '\u2009')}${part ? `.${part}` : ''}`;
-  }
-  return (
-    sign +
-    size
-      .toExponential(digits - 1)
-      .replace('e-', 'e\u2212')
-      .replace('e+', 'e')
-  );
+  if (size < 1e-4 || size >= 1e7) return formatNumber(value, digits);
+  const text = size >= 10 ** digits ? String(Math.round(size)) : size.toPrecision(digits);
+  const [head, part] = text.split('.');
+  return `${sign}${head.replace(/\B(?=(\d{3})+$)/g, '\u2009')}${part ? `.${part}` : ''}`;
 }
 
 /**

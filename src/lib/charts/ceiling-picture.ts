@@ -15,16 +15,32 @@ const LOOK: Record<ReturnType<typeof ceilingStanding>, { point: Role; interval: 
   unsure: { point: 'observed-unsure', interval: 'interval-unsure', shape: 'diamond' }
 };
 
+/** Room between the ceiling and a label beside it, picture units. */
+const GAP = 4;
+
 /** Variance over the ceiling on one line, with the edge that independent trials cannot cross. */
 export function ceilingPicture(diagnosis: Diagnosis, { width, text }: Size): Picture {
   const { value, low, high } = diagnosis.moments.dispersion;
   const tolerance = 1 + diagnosis.engine.tolerance;
   const height = text * 10;
-  const frame = frameOf(width, height, { left: text, right: text, top: text * 3, bottom: text * 3.8 });
+  const frame = frameOf(width, height, {
+    left: text * 1.9,
+    right: text * 1.9,
+    top: text * 3,
+    bottom: text * 3.8
+  });
   const far = Math.max(tolerance, value ?? 0, Math.min(high ?? 0, 3 * Math.max(tolerance, value ?? 0)));
   const near = Math.min(1 - 2 * diagnosis.engine.tolerance, value ?? 1, low ?? 1);
   const room = (far - near) * 0.08;
-  const x = scaleLinear([Math.max(0, near - room), far + room], [frame.left, frame.right]);
+  const share = tickTexts([0, diagnosis.engine.tolerance], 100, '\u2009%')[1];
+  const wordings = [`excess that matters, ${share}`, `that matters, ${share}`, `matters, ${share}`];
+  // The shortest wording always fits between the ceiling and the edge of the picture: a wide interval to the
+  // left would otherwise press the ceiling against the right edge.
+  const needed = 2 * halfOf(wordings[2]) + 2 * GAP - (width - frame.right);
+  const part = Math.min(0.6, Math.max(0, needed / (frame.right - frame.left)));
+  const start = Math.max(0, near - room);
+  const end = Math.max(far + room, (1 - part * start) / (1 - part));
+  const x = scaleLinear([start, end], [frame.left, frame.right]);
   const y = (frame.top + frame.bottom) / 2;
   const look = LOOK[ceilingStanding(diagnosis)];
   const edge: Point[] = [
@@ -38,11 +54,7 @@ export function ceilingPicture(diagnosis: Diagnosis, { width, text }: Size): Pic
     { kind: 'path', role: 'bound', d: `M${x(1).toFixed(2)},${frame.bottom}V${frame.top}` },
     { kind: 'path', role: 'level', d: `M${x(tolerance).toFixed(2)},${frame.bottom}V${frame.top}` },
     caption('ceiling', x(1), 1.1),
-    caption(
-      `excess that matters, ${tickTexts([0, diagnosis.engine.tolerance], 100, '\u2009%')[1]}`,
-      x(tolerance),
-      2.4
-    ),
+    caption(matters(width - x(1) - GAP), x(tolerance), 2.4, x(1) + GAP),
     ...bottomAxis(
       frame,
       ticks.map((v, i) => ({ at: x(v), text: texts[i] })),
@@ -69,10 +81,19 @@ export function ceilingPicture(diagnosis: Diagnosis, { width, text }: Size): Pic
     notes: []
   };
 
-  /** Over its line, and moved in where it would run off the picture. */
-  function caption(label: string, at: number, line: number): Mark {
-    const half = label.length * text * 0.27;
-    const middle = Math.min(width - half, Math.max(half, at));
+  /** The longest wording of the excess that matters that fits to the right of the ceiling. */
+  function matters(room: number): string {
+    return wordings.find((words) => 2 * halfOf(words) <= room) ?? wordings[2];
+  }
+
+  function halfOf(label: string): number {
+    return label.length * text * 0.27;
+  }
+
+  /** Over its line, right of `from`, and moved in where it would run off the picture. */
+  function caption(label: string, at: number, line: number, from = 0): Mark {
+    const half = halfOf(label);
+    const middle = Math.min(width - half, Math.max(from + half, at));
     return {
       kind: 'text',
       x: middle,

@@ -36,6 +36,7 @@ const LOOKS: Record<Role, Look> = {
   bound: line('ink', 1.25),
   hatch: line('faint', 1),
   horizon: line('ink', 1),
+  smallest: line('ink', 1),
   shade: line('hair', 1),
   axis: line('ink', 1),
   grid: line('hair', 1),

@@ -44,6 +44,8 @@ export function legendSample(role: Role, left = 0, top = 0): Mark[] {
     const box = { left, right, top, bottom: top + SAMPLE.height };
     return [{ kind: 'path', role, d: ruledShade(box, box.top, box.bottom) }];
   }
+  // Upright and of the height that the tests chart draws it.
+  if (role === 'smallest') return [{ kind: 'path', role, d: `M${centre},${middle - 6}V${middle + 6}` }];
   const line: Mark = { kind: 'path', role, d: `M${left},${middle}H${right}` };
   if (role !== 'bound') return [line];
   const frame = { left, right, top, bottom: top + SAMPLE.height };

@@ -22,6 +22,7 @@ export type Role =
   | 'bound'
   | 'hatch'
   | 'horizon'
+  | 'smallest'
   | 'shade'
   | 'axis'
   | 'grid'

@@ -4,6 +4,7 @@ import { bottomAxis, leftAxis } from './axis-marks';
 import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
 import { horizonMarks } from './horizon-marks';
+import { legendOfStanding } from './legend-of-standing';
 import { linePath } from './line-path';
 import type { Mark, Picture, Point, Size } from './picture';
 import { ratePoints } from './rate-points';
@@ -71,6 +72,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
     marks,
     legend: [
       { role: 'observed', label: 'seen, with its 95 % interval' },
+      ...legendOfStanding(marks, 'seen'),
       { role: 'unseen', label: 'never seen: lower limit only' },
       { role: 'fitted', label: 'best law at this N' },
       { role: 'limit', label: 'its large-deviation limit' },

@@ -5,6 +5,7 @@ import { countTicks } from './count-ticks';
 import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
 import { hatchEdge } from './hatch-edge';
+import { legendOfStanding } from './legend-of-standing';
 import { linePath } from './line-path';
 import type { Frame, Mark, Picture, Point, Size } from './picture';
 import { powerTick } from './power-tick';
@@ -55,6 +56,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
     marks,
     legend: [
       { role: 'observed', label: 'seen in the tail, with its 95 % interval' },
+      ...legendOfStanding(marks, 'tail seen'),
       { role: 'fitted', label: 'best law' },
       { role: 'limit', label: 'Chernoff bound of the best law' },
       { role: 'mean-bound', label: 'Chernoff bound from the mean alone' },

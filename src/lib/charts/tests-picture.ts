@@ -19,7 +19,8 @@ export function testsPicture(
   const longest = Math.max(0, ...tests.map(({ id }) => names[id].length));
   const frame = frameOf(width, text * 2.6 + row * tests.length + text * 3.6, {
     left: Math.min(width * 0.45, longest * text * 0.54 + text),
-    right: text,
+    // Half of the last label, such as 0.001 or 10 with a raised number.
+    right: text * 1.9,
     top: text * 2.6,
     bottom: text * 3.6
   });
@@ -65,7 +66,7 @@ export function testsPicture(
     legend: [
       { role: 'observed', label: 'p, all tests allowed for' },
       { role: 'interval', label: 'from p of the test by itself' },
-      { role: 'horizon', label: 'smallest p it could show' }
+      { role: 'smallest', label: 'smallest p it could show' }
     ],
     order: 'down',
     readings: tests.map((test, i) => ({ x: at(test.pAdjusted), y: middle(i), words: wordsOf(test, names) })),
@@ -78,7 +79,7 @@ function testMarks(test: TestResult, alpha: number, at: (p: number) => number, y
   const [from, to, limit] = [at(test.p), at(test.pAdjusted), at(test.smallestP)].map((v) => v.toFixed(2));
   return [
     { kind: 'path', role: shown ? 'interval-more' : 'interval', d: `M${from},${y}H${to}` },
-    { kind: 'path', role: 'horizon', d: `M${limit},${y - 6}V${y + 6}` },
+    { kind: 'path', role: 'smallest', d: `M${limit},${y - 6}V${y + 6}` },
     {
       kind: 'path',
       role: shown ? 'observed-more' : 'observed',

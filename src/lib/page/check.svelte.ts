@@ -136,7 +136,8 @@ export class Check {
     const options = await this.#ready();
     if (!this.read?.ok || !options) return null;
     const { data, name } = this.read.datasets[this.dataset] ?? this.read.datasets[0];
-    const label = this.read.datasets.length > 1 ? name : this.input.name;
+    const whole = this.input.name;
+    const label = this.read.datasets.length > 1 ? (whole ? `${name} of ${whole}` : name) : whole;
     return this.#diagnose(data, options, label);
   }
 

@@ -36,7 +36,7 @@ describe('numbers on axes and in tables', () => {
     expect(after(texts[0])).toBeGreaterThan(2);
     expect(texts[1].trim()).toBe('\u22120.2500');
     expect(texts[3].trim()).toBe('–');
-    expect(texts[5].trim()).toBe('2.500e\u22129');
+    expect(texts[5].trim()).toBe('2.500 × 10⁻⁹');
   });
   it('shares are said in per cent, and once in so many when they are small', () => {
     expect(sayShare(0.1234)).toBe('12.3\u202f%');
