@@ -31,7 +31,19 @@ export function lawLogLikelihood(data: FitData, law: Law): number {
   if (data.lump) {
     let tail = 0;
     for (let k = values.length - 1; k >= Math.max(0, data.lump.from - first); k--) tail += values[k];
-    sum += data.lump.shots * (tail > 0 ? Math.log(tail) : logPmf(law, data.lump.from));
+    sum += data.lump.shots * (tail > 1e-12 ? Math.log(tail) : farTail(outside, data.lump.from));
   }
   return sum;
+}
+
+/** ln P(X ≥ from) far above the mean, where probabilities fall from count to count. */
+function farTail(logPmfAt: (count: number) => number, from: number): number {
+  const nearest = logPmfAt(from);
+  if (nearest === -Infinity) return nearest;
+  let sum = 1;
+  for (let n = from + 1, term = 1; term > 1e-16 * sum; n++) {
+    term = Math.exp(logPmfAt(n) - nearest);
+    sum += term;
+  }
+  return nearest + Math.log(sum);
 }

@@ -37,13 +37,14 @@ export function starts(trials: number | null, moments: SampleMoments, last: numb
     for (const share of [0.1, 0.35, 0.5, 0.65, 0.9])
       out.push(twoLevels(trials, pool, mean, part * ceiling, share));
   }
-  return out.map((levels) => withPoisson(levels, trials, mean));
+  return out.map((levels) => withPoisson(levels, trials));
 }
 
 /** A sure trials, M trials at p, the rest at 0: Mp(1−p) = κ2, κ3 = κ2(1−2p), A + Mp = κ1. */
 function pools(trials: number | null, { mean, variance, third }: SampleMoments): TrialLevels {
   const most = trials ?? Infinity;
-  const p = Math.min(0.95, Math.max(0.05, (1 - third / variance) / 2));
+  // One count alone, or a lump alone, has no variance.
+  const p = variance > 0 ? Math.min(0.95, Math.max(0.05, (1 - third / variance) / 2)) : 0.5;
   const moving = Math.min(most, Math.max(1, Math.round(variance / (p * (1 - p)))));
   const ones = Math.min(most - moving, Math.max(0, Math.round(mean - moving * p)));
   return {
@@ -78,10 +79,11 @@ export function alike(trials: number | null, mean: number): TrialLevels {
   return { p: [mean / trials], trials: [trials], ones: 0, zeros: 0, poissonPart: 0 };
 }
 
-/** With N unknown a Poisson part must be there to grow: it takes a tenth of the mean. */
-function withPoisson(levels: TrialLevels, trials: number | null, mean: number): TrialLevels {
+/** With N unknown a Poisson part must be there to grow: it takes a tenth of what the levels have. */
+function withPoisson(levels: TrialLevels, trials: number | null): TrialLevels {
   if (trials !== null || levels.p.length === 0) return levels;
-  return { ...levels, p: levels.p.map((p) => 0.9 * p), poissonPart: 0.1 * mean };
+  const sum = levels.p.reduce((total, p, j) => total + p * levels.trials[j], 0);
+  return { ...levels, p: levels.p.map((p) => 0.9 * p), poissonPart: 0.1 * sum };
 }
 
 function clip(p: number): number {
