@@ -1,96 +1,111 @@
+import { newtonViolation } from '$lib/stats/bounds/newton-violation';
 import { bestLaw } from '$lib/stats/fit/best-law';
-import { fitData } from '$lib/stats/fit/fit-data';
 import { floorLaw } from '$lib/stats/floor/floor-law';
-import { lawWindow } from '$lib/stats/laws/law-window';
-import { divergence } from '$lib/stats/resampling/divergence';
-import * as fc from 'fast-check';
+import { saturated } from '$lib/stats/resampling/divergence';
+import fc from 'fast-check';
+import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
+import { dataOf, plainPmf } from '../fit/plain';
 
-function data(shots: number[], trials: number | null) {
-  return fitData({ kind: 'histogram', counts: shots.map((h, n) => [n, h]), lump: null }, trials);
-}
+/** fixtures/reference/floor.py: the same problem by SciPy, in another form. */
+const { cases } = JSON.parse(
+  readFileSync(new URL('../../../../fixtures/reference/floor.json', import.meta.url), 'utf8')
+) as { cases: { shots: number[]; trials: number | null; divergence: number }[] };
 
-/**
- * On three counts with N = 2 there is one inequality, f_1² ≥ 4 f_0 f_2. Where the data obey it the floor is 0; else the
- * maximum lies on its edge, and the edge is the binomials, whose best has the sample mean.
- */
-function closedForm([a, b, c]: number[]): number {
-  if (b * b >= 4 * a * c) return 0;
-  const total = a + b + c;
-  const p = (b + 2 * c) / (2 * total);
-  const law = [(1 - p) ** 2, 2 * p * (1 - p), p * p];
-  return [a, b, c].reduce((sum, h, n) => sum + (h / total) * Math.log(h / total / law[n]), 0);
-}
+const anyShots = fc.array(fc.oneof(fc.nat(5), fc.nat(2000)), { minLength: 2, maxLength: 12 });
+const seen = (shots: number[]) => shots.filter((h) => h > 0).length;
 
 describe('floorLaw', () => {
-  it('is 0.000215 for Weldon’s dice (recomputed with SciPy for the counting science)', () => {
-    const weldon = [185, 1149, 3265, 5475, 6114, 5194, 3067, 1331, 403, 105, 14, 4];
-    expect(floorLaw(data(weldon, 12)).divergence).toBeCloseTo(0.000215, 6);
+  it('agrees with a general-purpose solver to 1e-8 nats', () => {
+    expect(cases.length).toBeGreaterThan(30);
+    for (const { shots, trials, divergence } of cases) {
+      const floor = floorLaw(dataOf({ shots, trials }));
+      expect(Math.abs(floor.divergence - divergence), `${shots} of ${trials}`).toBeLessThan(1e-8);
+    }
   });
 
-  it('is nothing for a histogram that obeys Newton’s inequalities', () => {
-    const { values } = lawWindow(
-      {
-        levels: [
-          { p: 0.3, trials: 4 },
-          { p: 0.7, trials: 3 }
-        ],
-        poissonPart: 0
-      },
-      0,
-      1
-    );
-    const found = floorLaw(
-      data(
-        [...values].map((p) => p * 1e6),
-        7
-      )
-    );
-    expect(found.divergence).toBeLessThan(1e-12);
+  it('gives Weldon’s dice 0.000215', () => {
+    const shots = [185, 1149, 3265, 5475, 6114, 5194, 3067, 1331, 403, 105, 14, 4, 0];
+    expect(floorLaw(dataOf({ shots, trials: 12 })).divergence).toBeCloseTo(0.000215, 6);
   });
 
-  it('refuses (1, 4, 6)/11 as log-concave but not under Newton’s inequalities', () => {
-    const shots = [1, 4, 6];
-    const found = floorLaw(data(shots, 2)).divergence;
-    expect(found).toBeGreaterThan(1e-4);
-    expect(found).toBeCloseTo(closedForm(shots), 10);
-  });
-
-  it('agrees with the closed form on three counts, whatever they are', () => {
+  it('never lies above the best law found: no independent trials come closer', () => {
     fc.assert(
-      fc.property(
-        fc.tuple(
-          fc.integer({ min: 1, max: 90 }),
-          fc.integer({ min: 1, max: 90 }),
-          fc.integer({ min: 1, max: 90 })
-        ),
-        (shots) => {
-          expect(Math.abs(floorLaw(data(shots, 2)).divergence - closedForm(shots))).toBeLessThan(1e-9);
-        }
-      ),
-      { numRuns: 300, seed: 3 }
-    );
-  });
-
-  it('lies at or below the best law, with a concave ℓ that sums to 1', () => {
-    const rows = fc
-      .array(fc.nat(60), { minLength: 3, maxLength: 9 })
-      .filter((h) => h.filter((x) => x > 0).length > 1);
-    fc.assert(
-      fc.property(rows, fc.constantFrom(null, 12), (shots, trials) => {
-        const counts = data(shots, trials);
-        const floor = floorLaw(counts);
-        const best = divergence(counts, bestLaw(counts).logLikelihood);
-        expect(floor.divergence).toBeLessThanOrEqual(best + 1e-9);
-        const f = floor.logProbabilities.map(Math.exp);
-        expect(f.reduce((sum, p) => sum + p, 0)).toBeCloseTo(1, 9);
-        for (let i = 1; i + 1 < f.length; i++) {
-          const n = counts.first + i;
-          const room = trials === null ? 1 + 1 / n : (1 + 1 / n) * (1 + 1 / (trials - n));
-          expect(f[i] ** 2).toBeGreaterThanOrEqual(f[i - 1] * f[i + 1] * room * (1 - 1e-7));
-        }
+      fc.property(anyShots, fc.option(fc.nat(8)), (shots, more) => {
+        fc.pre(seen(shots) > 1);
+        const trials = more === null ? null : shots.length - 1 + more;
+        const data = dataOf({ shots, trials });
+        const best = (saturated(data) - bestLaw(data).logLikelihood) / data.total;
+        const floor = floorLaw(data).divergence;
+        expect(floor).toBeGreaterThanOrEqual(0);
+        expect(floor).toBeLessThan(best + 1e-9);
       }),
-      { numRuns: 60, seed: 11 }
+      { numRuns: 60 }
     );
+  });
+
+  it('never lies above the best law found with a lump', () => {
+    fc.assert(
+      fc.property(anyShots, fc.integer({ min: 1, max: 400 }), fc.nat(3), (shots, many, gap) => {
+        fc.pre(seen(shots) > 0);
+        const from = shots.length + gap;
+        const data = dataOf({ shots, trials: from + 2, lump: { from, shots: many } });
+        const best = (saturated(data) - bestLaw(data).logLikelihood) / data.total;
+        expect(floorLaw(data).divergence).toBeLessThan(best + 1e-9);
+      }),
+      { numRuns: 40 }
+    );
+  });
+
+  it('returns a law: it sums to 1, obeys Newton’s inequalities, and has the divergence stated', () => {
+    fc.assert(
+      fc.property(anyShots, fc.option(fc.nat(8)), (shots, more) => {
+        fc.pre(seen(shots) > 1);
+        const trials = more === null ? null : shots.length - 1 + more;
+        const data = dataOf({ shots, trials });
+        const { logProbabilities, divergence } = floorLaw(data);
+        const f = Array.from(logProbabilities, Math.exp);
+        expect(f.reduce((a, b) => a + b, 0)).toBeCloseTo(1, 12);
+        const pmf = [...new Array<number>(data.first).fill(0), ...f];
+        expect(newtonViolation(pmf, trials)?.excess ?? 0).toBeLessThan(1e-9);
+        let kl = 0;
+        data.shots.forEach((h, i) => {
+          if (h > 0) kl += (h / data.total) * (Math.log(h / data.total) - logProbabilities[i]);
+        });
+        expect(Math.abs(kl - divergence)).toBeLessThan(1e-12);
+      }),
+      { numRuns: 100 }
+    );
+  });
+
+  it('is 0 for counts that obey Newton’s inequalities themselves', () => {
+    // Exact proportions of a Poisson-binomial law: probabilities are multiples of 1e-5.
+    const shots = plainPmf([0.1, 0.2, 0.5, 0.5, 0.9]).map((f) => Math.round(f * 1e5));
+    expect(newtonViolation(shots, 5)!.excess).toBeLessThan(0);
+    expect(floorLaw(dataOf({ shots, trials: 5 })).divergence).toBeLessThan(1e-9);
+    expect(floorLaw(dataOf({ shots: [36, 48, 16], trials: 2 })).divergence).toBeLessThan(1e-9);
+  });
+
+  it('is the binomial law where two trials break the inequality: (1, 4, 6)/11', () => {
+    // f1² ≥ 4 f0 f2 is met with equality on the binomial laws, and p = 16/22 has the mean of the data.
+    const p = 16 / 22;
+    const f = [(1 - p) ** 2, 2 * p * (1 - p), p * p];
+    const want = [1, 4, 6].reduce((sum, h, n) => sum + (h / 11) * Math.log(h / 11 / f[n]), 0);
+    expect(floorLaw(dataOf({ shots: [1, 4, 6], trials: 2 })).divergence).toBeCloseTo(want, 9);
+  });
+
+  it('has nothing to say of one count, or of a lump alone', () => {
+    expect(floorLaw(dataOf({ shots: [0, 0, 9], trials: 4 })).divergence).toBe(0);
+    expect(floorLaw(dataOf({ shots: [], trials: 4, lump: { from: 2, shots: 9 } })).divergence).toBe(0);
+  });
+
+  it('reaches the global floor on broad counts as well', () => {
+    // 400 counts, twice binomial: the slack says how near the end is.
+    const half = (p: number) => plainPmf(new Array<number>(400).fill(p));
+    const [a, b] = [half(0.3), half(0.36)];
+    const shots = a.map((f, n) => Math.round(20_000 * (f + b[n])));
+    const floor = floorLaw(dataOf({ shots, trials: 400 }));
+    expect(floor.slack).toBeLessThan(1e-7);
+    expect(floor.divergence).toBeGreaterThan(0.01);
   });
 });
