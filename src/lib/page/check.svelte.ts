@@ -1,31 +1,19 @@
 import type { ReadOptions, ReadResult, Suggested } from '$lib/formats/types';
-import type { CountData, DiagnoseOptions, Diagnosis, Progress } from '$lib/stats/types';
+import type { CountData, DiagnoseOptions } from '$lib/stats/types';
 import { writeAddress } from './address';
 import { addressWords } from './address-words';
 import { CountsInput } from './counts-input.svelte';
 import { readAddress } from './read-address';
 import { Reader } from './reader';
 import { readSettings, readTrials, type SettingProblems } from './read-settings';
+import type { Result, Running } from './result-types';
 import { startRun, type Run } from './runner';
 import { freshSettings, type SettingName, type Settings } from './settings';
 import { settingsWith } from './settings-with';
 import { textOfData } from './text-of-data';
 import { tooLarge } from './too-large';
 
-export interface Result {
-  diagnosis: Diagnosis;
-  data: CountData;
-  options: DiagnoseOptions;
-  /** Name of the file, example or dataset; null when pasted. */
-  name: string | null;
-  /** The part after # that reopens it; null when the counts are too many for an address. */
-  address: string | null;
-}
-
-export interface Running extends Progress {
-  /** performance.now() when it began. */
-  since: number;
-}
+export type { Result, Running };
 
 const PAUSE = 250;
 
