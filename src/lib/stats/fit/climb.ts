@@ -130,11 +130,11 @@ function turned(levels: TrialLevels, angles: number[], share: number): TrialLeve
 /** Absorbs levels that have come to 0 or 1 and merges levels that have met, where that costs nothing. */
 function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: TrialLevels; value: number } {
   let best = { levels, value };
-  let tried = false;
+  let stale = false;
   const attempt = (trial: TrialLevels) => {
-    tried = true;
     const there = logLikelihood(space, trial);
-    if (there < best.value - 1e-9) return false;
+    stale = there < best.value - 1e-9;
+    if (stale) return false;
     best = { levels: trial, value: there };
     return true;
   };
@@ -151,7 +151,7 @@ function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: T
     }
   }
   // The workspace must hold the pmf of what is returned.
-  if (tried) logLikelihood(space, best.levels);
+  if (stale) logLikelihood(space, best.levels);
   return best;
 }
 
