@@ -1,4 +1,4 @@
-import type { Generator } from '../random/generator';
+import { chainCount } from './chain-count';
 import type { DemoFile } from './demo-file';
 import { tally } from './tally';
 
@@ -26,19 +26,8 @@ export const firmwareVersions: DemoFile = {
     'device,firmware,count,shots',
     ...VERSIONS.flatMap(([version, correlation], index) => {
       const random = stream(index);
-      const shots = Array.from({ length: 4000 }, () => chainCount(random, correlation));
+      const shots = Array.from({ length: 4000 }, () => chainCount(random, SITES, P, correlation));
       return tally(shots).map(([count, number]) => `Marram,${version},${count},${number}`);
     })
   ]
 };
-
-/** Defects along a two-state Markov chain that keeps the probability P at every site. */
-function chainCount(random: Generator, correlation: number): number {
-  let defect = random.next() < P;
-  let count = defect ? 1 : 0;
-  for (let site = 1; site < SITES; site++) {
-    defect = random.next() < P * (1 - correlation) + (defect ? correlation : 0);
-    if (defect) count++;
-  }
-  return count;
-}
