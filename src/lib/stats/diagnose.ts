@@ -60,9 +60,11 @@ export async function diagnose(
   const proof = certificate({ counts: histogram.counts, lump: histogram.lump, shots: counts.total, trials });
   const spread = moments.variance.value !== null && moments.variance.value > 0;
   await pace.step('resampling', 0.08);
-  const ceiling = spread
-    ? await ceilingTest(counts, equal.parameter, drawing, pace.within(0.08, 0.12))
-    : null;
+  // One trial has the variance of its ceiling whatever the data: only rounding and S/(S − 1) would be tested.
+  const ceiling =
+    spread && trials !== 1
+      ? await ceilingTest(counts, equal.parameter, drawing, pace.within(0.08, 0.12))
+      : null;
   const fitted = await fittedTests(counts, best, drawing, pace.within(0.12, 0.85));
   await pace.step('shot order', 0.85);
   const order = await orderTests(data, drawing, pace.within(0.85, 0.97));
@@ -116,7 +118,14 @@ export async function diagnose(
     notRun: [
       ...(ceiling
         ? []
-        : [{ id: 'ceiling' as const, reason: 'The counts have no spread to compare with the ceiling.' }]),
+        : [
+            {
+              id: 'ceiling' as const,
+              reason: spread
+                ? 'One trial cannot exceed its own ceiling.'
+                : 'The counts have no spread to compare with the ceiling.'
+            }
+          ]),
       ...fitted.notRun,
       ...order.notRun
     ],
