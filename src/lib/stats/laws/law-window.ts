@@ -15,14 +15,24 @@ import { deepScale, type Window } from './window';
  * much as its last join, where adding trials one at a time would cost N times the width.
  */
 export function lawWindow(law: Law, trim = 0, scale = deepScale): Window {
-  const parts = law.levels
-    .filter((level) => level.trials > 0 && level.p > 0)
-    .map((level) => binomialWindow(level.trials, level.p, trim, scale));
-  if (law.poissonPart > 0) parts.push(poissonWindow(law.poissonPart, trim, scale));
-  if (parts.length === 0) return { first: 0, values: Float64Array.of(scale), scale };
+  const parts: Window[] = [];
+  let shift = 0;
+  const add = (part: Window) => {
+    // One count alone, such as sure trials, only shifts.
+    if (part.values.length === 1) shift += part.first;
+    else parts.push(part);
+  };
+  for (const { p, trials } of law.levels) {
+    // Its window would be one count, 0; thousands of such levels are common among Landau–Zener modes.
+    const never = p <= 0 || trials * p < 0.5 * trim;
+    if (trials > 0 && !never) add(binomialWindow(trials, p, trim, scale));
+  }
+  if (law.poissonPart > 0) add(poissonWindow(law.poissonPart, trim, scale));
+  if (parts.length === 0) return { first: shift, values: Float64Array.of(scale), scale };
   // Narrow parts first, so that equals meet equals.
   parts.sort((f, g) => f.values.length - g.values.length);
-  return join(parts, 0, parts.length, trim);
+  const joined = join(parts, 0, parts.length, trim);
+  return { ...joined, first: joined.first + shift };
 }
 
 function join(parts: Window[], from: number, to: number, trim: number): Window {

@@ -6,15 +6,15 @@ import type { Law } from '../types';
  *
  * @param modes N, the number of modes and the largest count
  * @param a dimensionless quench time ≥ 0
- * Modes under 1e-30 are written as impossible. Source: Landau 1932, Zener 1932; Dziarmaga 2005, Phys. Rev.
- * Lett. 95:245701.
+ * Modes under 1e-290 are written as impossible; were it 1e-30, one shot far out would rule the law out. Source:
+ * Landau 1932, Zener 1932; Dziarmaga 2005, Phys. Rev. Lett. 95:245701.
  */
 export function landauZenerLaw(modes: number, a: number): Law {
   const levels: Law['levels'] = [];
   let left = modes;
   for (let j = 1; j <= modes; j++) {
     const p = Math.exp(-a * (((2 * j - 1) * Math.PI) / (2 * modes)) ** 2);
-    if (p < 1e-30) break;
+    if (p < 1e-290) break;
     levels.push({ p, trials: 1 });
     left--;
   }

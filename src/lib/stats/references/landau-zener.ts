@@ -9,12 +9,16 @@ import { lawLogLikelihood } from '../fit/law-log-likelihood';
 /** Multiplications that one evaluation may cost; forty are needed, and the whole must stay well under a second. */
 const budget = 2e7;
 
+/** Half the width of the search in ln a: a factor of two. */
+const reach = 0.7;
+
 /**
  * Best Landau–Zener law for N modes, by likelihood in its one parameter a.
  *
  * @returns null when N is unknown or the mean is 0 or N (then a has no finite best value), or when one
  *   evaluation would cost over 2e7 multiplications.
- * The search runs in ln a, a factor of two either way of the a that matches the mean.
+ * The search runs in ln a, a factor of two either way of the a that matches the mean, and on from there where shots
+ * far out pull it to the edge.
  */
 export function landauZener(data: FitData): { logLikelihood: number; a: number } | null {
   const { mean } = sampleMoments(data);
@@ -28,6 +32,13 @@ export function landauZener(data: FitData): { logLikelihood: number; a: number }
   if (!(meanAt(low) > mean && meanAt(high) < mean)) return null;
   const centre = findRoot((logA) => meanAt(logA) - mean, low, high, 1e-9);
   const score = (logA: number) => lawLogLikelihood(data, landauZenerLaw(modes, Math.exp(logA)));
-  const best = maximise(score, centre - 0.7, centre + 0.7, 1e-8);
+  let best = maximise(score, centre - reach, centre + reach, 1e-8);
+  for (const step of [-reach, reach]) {
+    for (let edge = centre + step; Math.abs(best.at - edge) < 1e-6; edge += step) {
+      const next = maximise(score, Math.min(edge, edge + step), Math.max(edge, edge + step), 1e-8);
+      if (!(next.value > best.value) || Math.abs(edge - centre) > 4) break;
+      best = next;
+    }
+  }
   return best.value > -Infinity ? { logLikelihood: best.value, a: Math.exp(best.at) } : null;
 }
