@@ -1,7 +1,6 @@
 import { ceilingPicture } from '$lib/charts/ceiling-picture';
 import { distributionPicture } from '$lib/charts/distribution-picture';
-import { legendSample } from '$lib/charts/legend-sample';
-import type { Picture, Role, Size, TextMark } from '$lib/charts/picture';
+import type { Picture, Size } from '$lib/charts/picture';
 import { ratePicture } from '$lib/charts/rate-picture';
 import { sheetOf } from '$lib/charts/sheet-of';
 import { sheetToSvg } from '$lib/charts/sheet-to-svg';
@@ -12,6 +11,7 @@ import type { Diagnosis } from '$lib/stats/types';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { anyDiagnosis, WELDON } from './any-diagnosis';
+import { coordinates, extent } from './measure';
 
 type Draw = (diagnosis: Diagnosis, size: Size) => Picture;
 const DRAWS: [string, Draw][] = [
@@ -21,30 +21,6 @@ const DRAWS: [string, Draw][] = [
   ['ceiling', ceilingPicture],
   ['tests', (diagnosis, size) => testsPicture(diagnosis, size, TESTS)]
 ];
-
-/** All x and y of a path of M, L, H, V, v, A and Z: what d3 and these charts write. */
-function coordinates(d: string): { x: number[]; y: number[] } {
-  const x: number[] = [];
-  const y: number[] = [];
-  for (const [, command, list] of d.matchAll(/([MLHVAvZ])([^MLHVAvZ]*)/g)) {
-    const numbers = list.split(/[ ,]/).filter(Boolean).map(Number);
-    if (command === 'v') continue;
-    if (command === 'H') x.push(numbers[0]);
-    else if (command === 'V') y.push(numbers[0]);
-    else if (command !== 'Z') {
-      x.push(numbers[numbers.length - 2]);
-      y.push(numbers[numbers.length - 1]);
-    }
-  }
-  return { x, y };
-}
-
-/** About where a text begins and ends: the faces run to about 0.5 and 0.6 of their size a letter. */
-function extent({ x, anchor, text, raised = '', size, face }: TextMark): [number, number] {
-  const length = (text.length + 0.75 * raised.length) * size * (face === 'number' ? 0.6 : 0.5);
-  const start = anchor === 'start' ? x : anchor === 'end' ? x - length : x - length / 2;
-  return [start, start + length];
-}
 
 /** What is wrong with a picture: numbers that are none, or marks outside it. A point may reach 7 units over. */
 function faults({ width, height, marks, readings }: Picture): string[] {
@@ -148,56 +124,6 @@ const CASES: [string, () => Promise<Diagnosis>][] = [
       )
   ]
 ];
-
-describe('what a legend and a label say', () => {
-  const drawn = ({ marks }: Picture, role: Role) =>
-    marks.some((mark) => mark.kind === 'path' && mark.role === role && mark.d !== '');
-  it('the triangles of the rates and tails are in the legend when they are drawn', async () => {
-    // Far wider than the law of 12 trials: some counts too often, some too seldom.
-    const wide: [number, number][] = [
-      [0, 400],
-      [3, 100],
-      [6, 900],
-      [9, 100],
-      [12, 400]
-    ];
-    for (const diagnosis of [await anyDiagnosis(wide, { trials: 12 }), await anyDiagnosis([[3, 700]])])
-      for (const draw of [ratePicture, tailsPicture]) {
-        const picture = draw(diagnosis, { width: 760, text: 13 });
-        for (const role of ['observed-more', 'observed-fewer'] as const)
-          expect(picture.legend.some((entry) => entry.role === role)).toBe(drawn(picture, role));
-      }
-    expect(
-      drawn(ratePicture(await anyDiagnosis(wide, { trials: 12 }), { width: 760, text: 13 }), 'observed-more')
-    ).toBe(true);
-  });
-  it('the smallest p is an upright tick in chart and legend', () => {
-    expect(legendSample('smallest')).toEqual([{ kind: 'path', role: 'smallest', d: 'M15,2V14' }]);
-  });
-  it('the excess that matters is named right of the ceiling, narrow and wide', async () => {
-    const diagnosis = await anyDiagnosis(WELDON, { trials: 12 });
-    for (const width of [342, 760]) {
-      const { marks } = ceilingPicture(diagnosis, { width, text: 13 });
-      const label = marks.find((mark): mark is TextMark => mark.kind === 'text' && /matters/.test(mark.text));
-      const bound = marks.find((mark) => mark.kind === 'path' && mark.role === 'bound');
-      if (!label || bound?.kind !== 'path') throw new Error('nothing to compare');
-      expect(extent(label)[0]).toBeGreaterThan(coordinates(bound.d).x[0]);
-    }
-  });
-  it('the last label of the tests chart has its room at 342 units', async () => {
-    for (const alpha of [0.01, 1e-6]) {
-      const { marks, width } = testsPicture(
-        await anyDiagnosis(WELDON, { trials: 12, alpha }),
-        { width: 342, text: 13 },
-        TESTS
-      );
-      const ends = marks.flatMap((mark) =>
-        mark.kind === 'text' && mark.face === 'number' ? [extent(mark)[1]] : []
-      );
-      expect(Math.max(...ends)).toBeLessThanOrEqual(width - 2);
-    }
-  });
-});
 
 describe('every chart', () => {
   it.each(CASES)('of %s is finite and inside its frame, narrow and wide', async (_name, make) => {
