@@ -8,7 +8,7 @@ import { startServer, type RunningServer } from './support/start-server';
 
 let server: RunningServer;
 let browser: Browser;
-const ACCIDENTS = 'counts=0:447,1:132,2:42,3:21,4:3,5:2';
+const ACCIDENTS = 'counts=0:447,1:132,2:42,3:21,4:3,5:2&sum=647';
 
 beforeAll(async () => {
   [server, browser] = await Promise.all([startServer(), openBrowser()]);
