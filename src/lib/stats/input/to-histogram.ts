@@ -4,7 +4,7 @@ import { BadInput, type CountData, type Histogram } from '../types';
 export function toHistogram(data: CountData): Histogram {
   const histogram = data.kind === 'shots' ? summed(data.shots) : data;
   const counts = [...histogram.counts].filter(([, shots]) => shots !== 0).sort((a, b) => a[0] - b[0]);
-  const lump = histogram.lump && histogram.lump.shots > 0 ? histogram.lump : null;
+  const lump = histogram.lump && histogram.lump.shots !== 0 ? histogram.lump : null;
   let total = 0;
   let before = -1;
   for (const [count, shots] of lump ? [...counts, [lump.from, lump.shots]] : counts) {

@@ -1,40 +1,63 @@
 import { formatCount, formatNumber, formatPercent } from '$lib/stats/words/format-number';
-import { sayHowOften, sayP } from '$lib/stats/words/say-p';
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 
+const thin = '\u202f';
+
+/** The number a person would read. */
+function read(text: string): number {
+  const digits = '⁰¹²³⁴⁵⁶⁷⁸⁹';
+  const [mantissa, power] = text.replaceAll(thin, '').replace('−', '-').split(' × 10');
+  const exponent = (power ?? '').replace('⁻', '-').replace(/[⁰¹²³⁴⁵⁶⁷⁸⁹]/g, (c) => String(digits.indexOf(c)));
+  return Number(mantissa) * 10 ** Number(exponent || 0);
+}
+
 describe('formatNumber', () => {
-  it.each<[number | null, number, string]>([
-    [0.3376986, 4, '0.3377'],
-    [-12345.678, 7, '\u221212\u202f345.68'],
-    [1999, 4, '1\u202f999'],
-    [0.0000234, 3, '2.34 × 10⁻⁵'],
-    [6.02e23, 3, '6.02 × 10²³'],
+  it.each([
     [0, 4, '0'],
-    [null, 4, '–'],
-    [NaN, 4, '–']
-  ])('%s with %i digits is %s', (value, digits, text) => {
-    expect(formatNumber(value, digits)).toBe(text);
+    [-0, 4, '0'],
+    [4.052383, 4, '4.052'],
+    [0.3376986, 7, '0.3376986'],
+    [-1.5, 2, '−1.5'],
+    [26306, 4, `26${thin}306`],
+    [1234567.8, 4, `1${thin}234${thin}568`],
+    [0.0001, 2, '0.00010'],
+    [0.00002512, 3, '2.51 × 10⁻⁵'],
+    [-2.5e-17, 2, '−2.5 × 10⁻¹⁷'],
+    [3.2e11, 2, '3.2 × 10¹¹'],
+    [100, 2, '100'],
+    [1000, 4, `1${thin}000`],
+    [NaN, 4, '–'],
+    [Infinity, 4, '–'],
+    [null, 4, '–']
+  ])('writes %s with %s digits as %s', (value, digits, want) => {
+    expect(formatNumber(value, digits)).toBe(want);
   });
 
-  it('groups whole numbers and writes shares as per cent', () => {
-    expect(formatCount(26306)).toBe('26\u202f306');
-    expect(formatPercent(0.0234)).toBe('2.3\u202f%');
+  it('can be read back to its digits', () => {
+    fc.assert(
+      fc.property(
+        fc.double({ min: -1e15, max: 1e15, noNaN: true }),
+        fc.double({ min: -30, max: 15, noNaN: true }),
+        fc.integer({ min: 2, max: 9 }),
+        (sign, exponent, digits) => {
+          const value = Math.sign(sign || 1) * 10 ** exponent;
+          const error = Math.abs(read(formatNumber(value, digits)) - value);
+          expect(error).toBeLessThanOrEqual(0.5000001 * 10 ** (1 - digits) * Math.abs(value));
+        }
+      )
+    );
   });
 });
 
-describe('sayP', () => {
-  it('puts the plain words first and the number second', () => {
-    expect(sayP(0.0003, 0.0001, 9999)).toBe(
-      'would turn up once in 3\u202f300 repeats of the experiment (p = 0.00030, 9\u202f999 resamples)'
-    );
-  });
-
-  it('says at most where the p-value is the smallest that could be shown', () => {
-    expect(sayP(0.0005, 0.0005, 1999)).toMatch(/at most once in 2\u202f000 .*p ≤ 0\.00050/);
-  });
-
-  it('counts in a hundred when common', () => {
-    expect(sayHowOften(0.36)).toBe('would turn up in 36 of 100 repeats of the experiment');
-    expect(sayHowOften(1)).toMatch(/practically every/);
+describe('formatCount and formatPercent', () => {
+  it('group thousands and put a thin space before the sign', () => {
+    expect(formatCount(1999)).toBe(`1${thin}999`);
+    expect(formatCount(2 ** 40)).toBe(`1${thin}099${thin}511${thin}627${thin}776`);
+    expect(formatCount(-3.4)).toBe('−3');
+    expect(formatCount(null)).toBe('–');
+    expect(formatPercent(0.1)).toBe(`10${thin}%`);
+    expect(formatPercent(0.2391, 3)).toBe(`23.9${thin}%`);
+    expect(formatPercent(NaN)).toBe('–');
   });
 });
