@@ -1,5 +1,5 @@
 import type { Evidence } from '../flags/evidence';
-import type { Verdict } from '../types';
+import type { TestResult, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
 import { sayTest } from '../words/say-test';
@@ -18,10 +18,11 @@ export function because(
       `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits give more than ${formatNumber(certificate.bound, 3)} a shot (p at most ${formatNumber(certificate.p, 2)}).`
     );
   }
-  for (const test of tests) {
-    if (test.pAdjusted > options.alpha) continue;
+  for (const alike of alikeTests(tests.filter((test) => test.pAdjusted <= options.alpha))) {
+    const [test] = alike;
+    const value = alike.length === 1 ? 'as extreme a value' : 'values as extreme as these, each by itself,';
     out.push(
-      `${names[test.id]}: as extreme a value ${sayTest(test)}; adjusted for ${tests.length} tests p ${test.p <= test.smallestP ? '≤' : '='} ${formatNumber(test.pAdjusted, 2)}.`
+      `${alike.map((one) => names[one.id]).join(', ')}: ${value} ${sayTest(test)}; adjusted for ${tests.length} tests p ${test.p <= test.smallestP ? '≤' : '='} ${formatNumber(test.pAdjusted, 2)}.`
     );
   }
   const { dispersion } = moments;
@@ -44,6 +45,16 @@ export function because(
     out.push('Compatible is not the same as independent: some interacting systems give exactly such counts.');
   }
   return out;
+}
+
+/** Tests that say the same are told in one sentence. */
+function alikeTests(tests: TestResult[]): TestResult[][] {
+  const groups = new Map<string, TestResult[]>();
+  for (const test of tests) {
+    const key = `${test.p} ${test.pAdjusted} ${test.resamples}`;
+    groups.set(key, [...(groups.get(key) ?? []), test]);
+  }
+  return [...groups.values()];
 }
 
 const names = {
