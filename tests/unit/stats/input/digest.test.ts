@@ -3,7 +3,7 @@ import { digest } from '$lib/stats/input/digest';
 import { describe, expect, it } from 'vitest';
 
 describe('digest', () => {
-  it('is the sha256 of the canonical text, as any other tool gives it', () => {
+  it('is the sha256 of the canonical text, in the words of another tool', () => {
     const histogram = {
       kind: 'histogram' as const,
       counts: [
