@@ -33,8 +33,8 @@ function bend(space: Workspace): void {
   const { data, bent, single, length } = space;
   bent.fill(0, 0, length + 2);
   const shift = data.first - space.first;
-  for (let i = Math.max(0, -shift); i < single.length && i + shift < length + 2; i++)
-    bent[i + shift] = single[i];
+  const cells = data.shots.length;
+  for (let i = Math.max(0, -shift); i < cells && i + shift < length + 2; i++) bent[i + shift] = single[i];
   if (data.lump) {
     for (let k = Math.max(0, data.lump.from - space.first); k < length + 2; k++) bent[k] += space.lumpSingle;
   }

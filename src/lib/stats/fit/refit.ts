@@ -26,9 +26,10 @@ const long: Effort = { enough: 1e-3, worth: 5e-3, rounds: 30, transfers: 0 };
  *
  * A start at a fitted law with equal levels is a symmetric saddle: Newton steps alone stay on it, up to 6
  * nats short, which biases p-values. The search asks every level whether it wants to split, so it leaves.
+ *
+ * @param space buffers to work in; the window that comes back is a view of them
  */
-export function refit(data: FitData, from: TrialLevels): Refit {
-  const space = workspace(data);
+export function refit(data: FitData, from: TrialLevels, space = workspace(data)): Refit {
   const effort = data.shots.length > shortHistogram || data.trials === null ? long : short;
   let best = search(space, from, effort);
   // The law drawn from can forbid a count only by a trial at exactly 0 or 1; start afresh then.

@@ -67,7 +67,7 @@ export function slopes(space: Workspace, levels: TrialLevels): Slopes {
 
 /** One buffer a level, kept in the workspace: arrays of this size are what the garbage collector dreads. */
 function tangentBuffers(space: Workspace, size: number): Float64Array[] {
-  while (space.tangents.length < size) space.tangents.push(new Float64Array(space.data.shots.length + 2));
+  while (space.tangents.length < size) space.tangents.push(new Float64Array(space.change.length));
   return space.tangents;
 }
 

@@ -9,7 +9,7 @@ import { expectedEmpty } from './empty-excess';
 import type { Pace } from './pace';
 import { progress } from './progress';
 import { redraw } from './redraw';
-import { refitted } from './refitted';
+import { refitted, type Buffers } from './refitted';
 import { chooseStatistics, lowTailOfTheRest, type StatisticId } from './statistics';
 import { stream } from './streams';
 import { testResult } from './test-result';
@@ -51,8 +51,10 @@ export async function fittedTests(
   }));
   const source = redraw(window, data, data.total);
   const nullDivergences: number[] = [];
+  const buffers: Buffers = {};
   for (let b = 0; runs.some(({ sequence }) => !sequence.done); b++) {
-    const drawn = refitted(source.draw(generator(options.seed, stream('fitted law', b))), fit.levels);
+    const resample = source.draw(generator(options.seed, stream('fitted law', b)));
+    const drawn = refitted(resample, fit.levels, undefined, buffers);
     nullDivergences.push(drawn.divergence);
     for (const { statistic, value, sequence } of runs) {
       // Equal up to rounding counts as equal: a resample that repeats the data must count.

@@ -1,6 +1,7 @@
 import type { FitData } from '../fit/fit-data';
 import { refit, type Refit } from '../fit/refit';
 import { toLaw, type TrialLevels } from '../fit/trial-levels';
+import { workspace, type Workspace } from '../fit/workspace';
 import type { Law } from '../types';
 import { divergence } from './divergence';
 import { setEmptyAside } from './set-empty-aside';
@@ -16,9 +17,15 @@ export interface Refitted {
   rest(): { data: FitData; fit: Refit } | null;
 }
 
-/** Fits a histogram from the levels of another's law; see refit. */
-export function refitted(data: FitData, from: TrialLevels, known?: Refit): Refitted {
-  const fit = known ?? refit(data, from);
+/** Buffers that the refits of one resample leave to those of the next, whose pmf then overwrites theirs. */
+export interface Buffers {
+  whole?: Workspace;
+  rest?: Workspace;
+}
+
+/** Fits a histogram from the levels of another's law; see refit. With `buffers` it holds until their next use. */
+export function refitted(data: FitData, from: TrialLevels, known?: Refit, buffers: Buffers = {}): Refitted {
+  const fit = known ?? refit(data, from, (buffers.whole = workspace(data, buffers.whole)));
   let rest: { data: FitData; fit: Refit } | null | undefined;
   return {
     data,
@@ -31,7 +38,10 @@ export function refitted(data: FitData, from: TrialLevels, known?: Refit): Refit
         // Starting where the whole histogram's law is, the rest can only be fitted better, never worse.
         rest =
           aside.empty > 0 && aside.rest.total > 0
-            ? { data: aside.rest, fit: refit(aside.rest, fit.levels) }
+            ? {
+                data: aside.rest,
+                fit: refit(aside.rest, fit.levels, (buffers.rest = workspace(aside.rest, buffers.rest)))
+              }
             : null;
       }
       return rest;
