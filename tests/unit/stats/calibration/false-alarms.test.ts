@@ -12,17 +12,17 @@ import { highest, lowest } from './binomial-limits';
  * nominal 5 %, the whole answer at most its α, intervals at least nearly their 95 %.
  */
 const cells: [truth: string, shots: number, repeats: number][] = [
-  ['equal-12', 300, 60],
-  ['equal-64', 300, 60],
-  ['spread-20', 300, 60],
-  ['sparse-64', 300, 60],
-  ['landau-zener-20', 300, 60],
-  ['equal-unknown', 300, 60],
-  ['sparse-unknown', 300, 60],
-  ['equal-20', 3000, 60],
-  ['spread-64', 3000, 60],
-  ['sparse-20', 3000, 60],
-  ['spread-20', 30_000, 60]
+  ['equal-12', 300, 50],
+  ['equal-64', 300, 50],
+  ['spread-20', 300, 50],
+  ['sparse-64', 300, 50],
+  ['landau-zener-20', 300, 50],
+  ['equal-unknown', 300, 50],
+  ['sparse-unknown', 300, 50],
+  ['equal-20', 3000, 50],
+  ['spread-64', 3000, 50],
+  ['sparse-20', 3000, 50],
+  ['spread-20', 30_000, 50]
 ];
 const resampled = ['ceiling', 'fit', 'high-tail', 'low-tail', 'parity', 'empty-shots'] as const;
 
