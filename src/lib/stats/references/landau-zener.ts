@@ -27,7 +27,7 @@ export function landauZener(data: FitData): { logLikelihood: number; a: number }
   const width = 20 * Math.sqrt(mean) + 20;
   if (Math.min(modes, 10 * mean + 100) * width > budget) return null;
   const meanAt = (logA: number) => lawMoments(landauZenerLaw(modes, Math.exp(logA))).mean;
-  const low = Math.log(1e-9);
+  const low = Math.log(slowEnough(modes, mean));
   const high = 2 * Math.log(2 * modes) + 6;
   if (!(meanAt(low) > mean && meanAt(high) < mean)) return null;
   const centre = findRoot((logA) => meanAt(logA) - mean, low, high, 1e-9);
@@ -41,4 +41,14 @@ export function landauZener(data: FitData): { logLikelihood: number; a: number }
     }
   }
   return best.value > -Infinity ? { logLikelihood: best.value, a: Math.exp(best.at) } : null;
+}
+
+/**
+ * An a whose law has more than the mean wanted, but not so small that a billion modes would have to be written out.
+ * With k continuous the mean is N·erf(π√a)/(2√(πa)), and over N(1 − aπ²/3); the first mode alone is exp(−aπ²/4N²).
+ */
+function slowEnough(modes: number, mean: number): number {
+  if (mean < 0.3) return 0.4 * modes ** 2;
+  const rough = (modes / mean) ** 2 / (4 * Math.PI);
+  return rough > 0.2 ? rough / 10 : 0.1 * (1 - mean / modes);
 }

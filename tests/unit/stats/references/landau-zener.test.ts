@@ -1,6 +1,7 @@
 import { lawLogLikelihood } from '$lib/stats/fit/law-log-likelihood';
 import { landauZener } from '$lib/stats/references/landau-zener';
 import { landauZenerLaw } from '$lib/stats/references/landau-zener-law';
+import { lawMoments } from '$lib/stats/laws/law-moments';
 import { describe, expect, it } from 'vitest';
 import { dataOf } from '../fit/plain';
 import { dataOfCase, referenceCases, relative } from './reference-cases';
@@ -35,6 +36,31 @@ describe('landauZener', () => {
     }
     const data = dataOf({ shots: f.map((value) => Math.round(4e5 * value)), trials: 20 });
     expect(landauZener(data)!.a).toBeCloseTo(3, 3);
+  });
+
+  it.each([
+    [1, 0.02],
+    [1, 0.97],
+    [7, 0.001],
+    [7, 0.4],
+    [7, 6.99],
+    [64, 32],
+    [64, 63.9],
+    [1e6, 0.01],
+    [1e6, 12],
+    [1e9, 5.9],
+    [1e9, 300]
+  ])('finds the law of N = %d with a mean of %d', (trials, mean) => {
+    // Mean of 1000 shots at the two counts beside it.
+    const low = Math.floor(mean);
+    const above = Math.round(1000 * (mean - low));
+    const found = landauZener(
+      dataOf({ shots: [...Array<number>(low).fill(0), 1000 - above, above], trials })
+    )!;
+    expect(found.a).toBeGreaterThan(0);
+    const moments = lawMoments(landauZenerLaw(trials, found.a));
+    // By likelihood, not by the mean: these counts are far narrower than the law.
+    expect(Math.abs(moments.mean - mean)).toBeLessThan(0.05 * mean + 0.05);
   });
 
   it('is null where no best quench time is finite, or N is unknown', () => {
