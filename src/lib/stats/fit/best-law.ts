@@ -23,6 +23,7 @@ const few = 100;
 
 /** From each start; then the two best of these to the end. */
 const first: Effort = { enough: 1e-5, worth: 1e-3, rounds: 60, transfers: 0 };
+const brief: Effort = { ...first, rounds: 3 };
 const thorough: Effort = { enough: 1e-9, worth: 1e-5, rounds: 200, transfers: 4 ** 9 };
 
 /**
@@ -40,11 +41,22 @@ export function bestLaw(data: FitData): BestLaw {
   if (only) return { levels: only, logLikelihood: 0, starts: 1, agreeing: 1 };
   const space = workspace(data);
   const last = data.first + data.shots.length - 1;
-  const candidates = data.withoutEmpty ? conditioned(data, moments.mean) : starts(data.trials, moments, last);
-  const found = candidates.map((start) => search(space, start, first)).sort((a, b) => b.value - a.value);
+  const candidates = data.withoutEmpty
+    ? conditioned(data, moments.mean)
+    : starts(data.trials, moments, { first: data.first, last: data.lump?.from ?? last });
+  let effort = first;
+  const found = candidates
+    .map((start) => {
+      const one = search(space, start, effort);
+      // Even a law of the data's own cumulants underflows at a count seen: far from every law, and hours to crawl.
+      if (one.value === -Infinity) effort = brief;
+      return one;
+    })
+    .sort((a, b) => b.value - a.value);
   // With hundreds of trials the likelihood is flat among the good starts, and the second crawls.
   const polish = (data.trials ?? 0) > 100 ? 1 : 2;
-  const polished = found.slice(0, polish).map((one) => search(space, one.levels, thorough));
+  const end = effort === brief ? brief : thorough;
+  const polished = found.slice(0, polish).map((one) => search(space, one.levels, end));
   const top = polished.reduce((a, b) => (b.value > a.value ? b : a));
   if (top.value === -Infinity) return underflowing(data, moments.mean);
   const best = (data.trials ?? last) <= few ? throughValleys(space, top) : top;

@@ -12,25 +12,31 @@ const manyTrials = 100;
  */
 const lopsided = [0.12, 0.35];
 
+/** Smallest and largest count seen. */
+export interface CountRange {
+  first: number;
+  last: number;
+}
+
 /**
  * Spreads of the probabilities to start a search from, widest apart in shape, all with the sample mean.
  *
  * @param trials N, or null
  * @param moments sample mean, variance (1/S) and third central moment
- * @param last largest count that must stay possible
+ * @param seen smallest and largest count that must stay possible: a start that forbids one leads nowhere
  *
  * Optima sit at few levels with many trials at exactly 0 and 1, so the first start is the law of that form
  * with the cumulants seen. Then all alike; then, for few trials, two levels with the variance seen (or, when that
  * is too large, with less than the ceiling) and a tenth, a third, half, two thirds or most of the trials high. The search
  * moves freely from there, so these only have to lie in different valleys.
  */
-export function starts(trials: number | null, moments: SampleMoments, last: number): TrialLevels[] {
+export function starts(trials: number | null, moments: SampleMoments, seen: CountRange): TrialLevels[] {
   const { mean, variance } = moments;
   const out = [alike(trials, mean)];
-  const pool = trials ?? Math.max(last + 8, Math.ceil(4 * mean));
+  const pool = trials ?? Math.max(seen.last + 8, Math.ceil(4 * mean));
   const ceiling = mean * (1 - mean / pool);
   if (!(ceiling > 0) || pool < 2) return out;
-  if (variance < ceiling) out.unshift(pools(trials, moments));
+  if (variance < ceiling) out.unshift(pools(trials, moments, seen));
   const below = 1 - variance / ceiling;
   const parts = below > lopsided[0] ? [below] : lopsided;
   for (const part of pool <= manyTrials ? parts : []) {
@@ -40,13 +46,21 @@ export function starts(trials: number | null, moments: SampleMoments, last: numb
   return out.map((levels) => withPoisson(levels, trials));
 }
 
-/** A sure trials, M trials at p, the rest at 0: Mp(1−p) = κ2, κ3 = κ2(1−2p), A + Mp = κ1. */
-function pools(trials: number | null, { mean, variance, third }: SampleMoments): TrialLevels {
+/**
+ * A sure trials, M trials at p, the rest at 0: Mp(1−p) = κ2, κ3 = κ2(1−2p), A + Mp = κ1; with fewer sure and more
+ * moving trials where a count seen would otherwise be impossible.
+ */
+function pools(
+  trials: number | null,
+  { mean, variance, third }: SampleMoments,
+  { first, last }: CountRange
+): TrialLevels {
   const most = trials ?? Infinity;
   // One count alone, or a lump alone, has no variance.
   const p = variance > 0 ? Math.min(0.95, Math.max(0.05, (1 - third / variance) / 2)) : 0.5;
-  const moving = Math.min(most, Math.max(1, Math.round(variance / (p * (1 - p)))));
-  const ones = Math.min(most - moving, Math.max(0, Math.round(mean - moving * p)));
+  const spread = Math.min(most, Math.max(1, Math.round(variance / (p * (1 - p)))));
+  const ones = Math.min(most - spread, first, Math.max(0, Math.round(mean - spread * p)));
+  const moving = Math.max(spread, last - ones);
   return {
     p: [clip((mean - ones) / moving)],
     trials: [moving],

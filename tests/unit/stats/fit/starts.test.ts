@@ -24,10 +24,16 @@ describe('starts', () => {
         (shots, more) => {
           fc.pre(shots.some((h) => h > 0));
           const trials = more === null ? null : shots.length + more;
-          const moments = sampleMoments(dataOf({ shots, trials }));
-          const found = starts(trials, moments, shots.length - 1);
+          const data = dataOf({ shots, trials });
+          const moments = sampleMoments(data);
+          const range = { first: data.first, last: data.first + data.shots.length - 1 };
+          const found = starts(trials, moments, range);
           expect(found).toContainEqual(alike(trials, moments.mean));
           for (const levels of found) {
+            // No count seen is impossible.
+            const possible = levels.ones + levels.trials.reduce((a, b) => a + b, 0);
+            expect(levels.ones).toBeLessThanOrEqual(range.first);
+            if (levels.poissonPart === 0) expect(possible).toBeGreaterThanOrEqual(range.last);
             const total = levels.trials.reduce((a, b) => a + b, 0) + levels.ones + levels.zeros;
             expect(total).toBe(trials ?? Infinity);
             expect(levels.trials.every((m) => Number.isInteger(m) && m > 0)).toBe(true);
@@ -44,7 +50,9 @@ describe('starts', () => {
 
   it('tries two levels below the ceiling, above it too, but not with hundreds of trials', () => {
     const two = (trials: number, variance: number) =>
-      starts(trials, { mean: 4, variance, third: 1 }, 9).filter(({ p }) => p.length === 2);
+      starts(trials, { mean: 4, variance, third: 1 }, { first: 0, last: 9 }).filter(
+        ({ p }) => p.length === 2
+      );
     expect(two(12, 1.5)).toHaveLength(5);
     expect(two(12, 3)).toHaveLength(10);
     expect(two(400, 1.5)).toHaveLength(0);
@@ -57,7 +65,7 @@ describe('starts', () => {
 
   it('begins with the law of sure and alike trials that has the three moments seen', () => {
     // 2 sure, 6 at 0.4, 4 impossible: variance 1.44, third 1.44·0.2.
-    const [first] = starts(12, { mean: 4.4, variance: 1.44, third: 0.288 }, 8);
+    const [first] = starts(12, { mean: 4.4, variance: 1.44, third: 0.288 }, { first: 2, last: 8 });
     expect(first).toMatchObject({ trials: [6], ones: 2, zeros: 4 });
     expect(first.p[0]).toBeCloseTo(0.4, 9);
   });
