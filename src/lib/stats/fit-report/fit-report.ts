@@ -36,9 +36,11 @@ export function fitReport({
   const logLaw = Float64Array.from(laid.law, (f, i) =>
     f > 1e-20 ? Math.log(f) : logPmf(law, counts.first + i)
   );
+  // The first count of a lump so far out is nearly all of it.
+  const logLump = laid.above > 1e-20 || !counts.lump ? Math.log(laid.above) : logPmf(law, counts.lump.from);
   const corrected =
     fitted.nullDivergences.length > 0
-      ? divergenceInterval(counts, logLaw, Math.log(laid.above), plugIn, fitted.nullDivergences)
+      ? divergenceInterval(counts, logLaw, logLump, plugIn, fitted.nullDivergences)
       : null;
   // Where the interval reaches 0 there may be no difference to notice, at any number of shots.
   const noticed = corrected?.interval.low ? Math.ceil(Math.log(1 / alpha) / corrected.corrected) : null;

@@ -11,7 +11,8 @@ export function symmetricEigen(
   matrix: ArrayLike<number>,
   size: number
 ): { values: number[]; vectors: number[] } {
-  const a = Array.from(matrix);
+  const a = new Array<number>(size * size);
+  for (let i = 0; i < size * size; i++) a[i] = matrix[i];
   const vectors = new Array<number>(size * size).fill(0);
   for (let i = 0; i < size; i++) vectors[i * size + i] = 1;
   for (let sweep = 0; sweep < 30; sweep++) {
@@ -29,27 +30,30 @@ export function symmetricEigen(
   return { values, vectors };
 }
 
+/** Both triangles of `a` are kept, so that its rows can be read either way. */
 function rotate(a: number[], vectors: number[], size: number, i: number, j: number): void {
   const between = a[i * size + j];
   if (between === 0) return;
-  const ratio = (a[j * size + j] - a[i * size + i]) / (2 * between);
+  const first = a[i * size + i];
+  const second = a[j * size + j];
+  const ratio = (second - first) / (2 * between);
   const tangent = Math.sign(ratio || 1) / (Math.abs(ratio) + Math.sqrt(1 + ratio * ratio));
   const cosine = 1 / Math.sqrt(1 + tangent * tangent);
   const sine = tangent * cosine;
   for (let k = 0; k < size; k++) {
-    const x = a[k * size + i];
-    const y = a[k * size + j];
-    a[k * size + i] = cosine * x - sine * y;
-    a[k * size + j] = sine * x + cosine * y;
+    const at = k * size;
+    if (k !== i && k !== j) {
+      const x = a[at + i];
+      const y = a[at + j];
+      a[at + i] = a[i * size + k] = cosine * x - sine * y;
+      a[at + j] = a[j * size + k] = sine * x + cosine * y;
+    }
+    const u = vectors[at + i];
+    const v = vectors[at + j];
+    vectors[at + i] = cosine * u - sine * v;
+    vectors[at + j] = sine * u + cosine * v;
   }
-  for (let k = 0; k < size; k++) {
-    const x = a[i * size + k];
-    const y = a[j * size + k];
-    a[i * size + k] = cosine * x - sine * y;
-    a[j * size + k] = sine * x + cosine * y;
-    const u = vectors[k * size + i];
-    const v = vectors[k * size + j];
-    vectors[k * size + i] = cosine * u - sine * v;
-    vectors[k * size + j] = sine * u + cosine * v;
-  }
+  a[i * size + i] = first - tangent * between;
+  a[j * size + j] = second + tangent * between;
+  a[i * size + j] = a[j * size + i] = 0;
 }

@@ -4,12 +4,20 @@ import type { Window } from '../laws/window';
 import type { TestId } from '../types';
 import { cells } from './cells';
 import { emptyExcess } from './empty-excess';
-import { parityExcess } from './parity-excess';
+import { mostParityExcess, parityExcess } from './parity-excess';
 import type { Refitted } from './refitted';
 import { tailExcess } from './tail-excess';
 
 /** A statistic of a histogram and its own best law; large values speak against independent trials. */
-export type Statistic = (histogram: Refitted) => number;
+export interface Statistic {
+  of(histogram: Refitted): number;
+  /**
+   * A value that `of` cannot exceed under any law whose G² for this histogram is at most `gSquared`. For nearly
+   * all it is √G²: merging cells never adds to a deviance (the data-processing inequality), and a root of the
+   * deviance of a tail, or of the likelihood that free empty shots gain, is one part of the whole.
+   */
+  most(drawn: FitData, gSquared: number): number;
+}
 
 /** The low tail of the shots with n ≥ 1: not a test of its own, but evidence for or against coarsening. */
 export const lowTailOfTheRest = 'low tail without empty shots';
@@ -35,7 +43,8 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
     else if (id !== lowTailOfTheRest) notRun.push({ id, reason });
   };
   const oneCount = spread > 0 ? null : 'Every shot had the same count.';
-  use('fit', ({ data: { total }, divergence }) => 2 * total * divergence, oneCount);
+  const gSquared = ({ data: { total }, divergence }: Refitted) => 2 * total * divergence;
+  use('fit', { of: gSquared, most: (_, most) => most }, oneCount);
   use(
     'high-tail',
     whole('high', high),
@@ -44,10 +53,10 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
   use('low-tail', whole('low', low), oneCount ?? (low >= 0 ? null : none('below')));
   use(
     'parity',
-    parityExcess,
+    { of: parityExcess, most: mostParityExcess },
     oneCount ?? (data.lump ? 'The closing row lumps even and odd counts together.' : null)
   );
-  use('empty-shots', emptyExcess, noEmpty(observed));
+  use('empty-shots', { of: emptyExcess, most: root }, noEmpty(observed));
   const rest = observed.rest();
   use(lowTailOfTheRest, ofTheRest(low), rest && low >= rest.data.first ? null : 'nothing there');
   return { statistics, notRun };
@@ -65,15 +74,18 @@ function noEmpty(observed: Refitted): string | null {
   return different > 1 ? null : 'The other shots all had one count, which tells nothing about empty ones.';
 }
 
+const root = (_: FitData, gSquared: number) => Math.sqrt(gSquared);
+
 function whole(side: 'high' | 'low', limit: number): Statistic {
-  return ({ data, fit }) => tail(data, fit.window, side, limit);
+  return { of: ({ data, fit }) => tail(data, fit.window, side, limit), most: root };
 }
 
 function ofTheRest(limit: number): Statistic {
-  return (histogram) => {
+  const of = (histogram: Refitted) => {
     const rest = histogram.rest();
     return rest ? tail(rest.data, rest.fit.window, 'low', limit) : 0;
   };
+  return { of, most: root };
 }
 
 function tail(data: FitData, window: Window, side: 'high' | 'low', limit: number): number {

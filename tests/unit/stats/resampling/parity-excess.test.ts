@@ -1,5 +1,5 @@
 import { bestLaw } from '$lib/stats/fit/best-law';
-import { parityExcess } from '$lib/stats/resampling/parity-excess';
+import { mostParityExcess, parityExcess } from '$lib/stats/resampling/parity-excess';
 import { refitted } from '$lib/stats/resampling/refitted';
 import { describe, expect, it } from 'vitest';
 import { dataOf, levelsOf } from '../fit/plain';
@@ -27,5 +27,22 @@ describe('parityExcess', () => {
   it('is 0 when the law leaves no choice', () => {
     const data = dataOf({ shots: [0, 0, 7], trials: 5 });
     expect(parityExcess(refitted(data, bestLaw(data).levels))).toBe(0);
+  });
+
+  it('stays under its bound for any law that is near enough', () => {
+    for (const [even, p, shots] of [
+      [60, 0.5, 100],
+      [30, 0.4, 100],
+      [9_300, 0.92, 10_000]
+    ]) {
+      const data = dataOf({ shots: [even, shots - even], trials: 1 });
+      const q = even / shots;
+      // G² of the two cells; a law with more cells can only have more.
+      const gSquared = 2 * shots * (q * Math.log(q / p) + (1 - q) * Math.log((1 - q) / (1 - p)));
+      const z = Math.abs(even - shots * p) / Math.sqrt(shots * p * (1 - p));
+      expect(z).toBeLessThanOrEqual(mostParityExcess(data, gSquared));
+      expect(mostParityExcess(data, gSquared)).toBeLessThan(3 * z);
+    }
+    expect(mostParityExcess(dataOf({ shots: [9, 1], trials: 1 }), 30)).toBe(Infinity);
   });
 });

@@ -1,4 +1,8 @@
 import { bestLaw } from '$lib/stats/fit/best-law';
+import { lawWindow } from '$lib/stats/laws/law-window';
+import { generator } from '$lib/stats/random/generator';
+import { largestGSquared } from '$lib/stats/resampling/largest-g-squared';
+import { redraw } from '$lib/stats/resampling/redraw';
 import { refitted } from '$lib/stats/resampling/refitted';
 import { chooseStatistics, lowTailOfTheRest } from '$lib/stats/resampling/statistics';
 import { describe, expect, it } from 'vitest';
@@ -53,16 +57,43 @@ describe('chooseStatistics', () => {
     const { of, statistics } = chosen({ shots: [30, 40, 30], trials: 2 });
     // Best law is binomial with p = ½: G² = 2[60 ln(30/25) + 40 ln(40/50)].
     const want = 2 * (60 * Math.log(30 / 25) + 40 * Math.log(40 / 50));
-    expect(statistics.get('fit')!(of)).toBeCloseTo(want, 6);
+    expect(statistics.get('fit')!.of(of)).toBeCloseTo(want, 6);
   });
 
   it('takes a lump into the tails', () => {
     const plain = chosen({ shots: [30, 60, 40, 12, 3, 1, 2], trials: 9 });
     const lumped = chosen({ shots: [30, 60, 40, 12], trials: 9, lump: { from: 4, shots: 6 } });
     for (const { of, statistics } of [plain, lumped]) {
-      const value = statistics.get('high-tail')!(of);
+      const value = statistics.get('high-tail')!.of(of);
       expect(value).toBeGreaterThanOrEqual(0);
       expect(value).toBeLessThan(4);
     }
+  });
+
+  it('never gives a resample more than the law it was drawn from allows', () => {
+    const problems: Problem[] = [
+      { shots: [3, 20, 50, 60, 40, 18, 6, 1], trials: 12 },
+      { shots: [30, 60, 40, 12], trials: 9, lump: { from: 4, shots: 6 } },
+      { shots: [400, 90, 30, 9, 4, 2, 1], trials: null },
+      { shots: [0, 0, 4, 30, 80, 30, 4], trials: 64 }
+    ];
+    let close = 0;
+    for (const problem of problems) {
+      const { of, statistics } = chosen(problem);
+      const window = lawWindow(of.law, 1e-18, 1);
+      const source = redraw(window, of.data, of.data.total);
+      for (let b = 0; b < 60; b++) {
+        const drawn = source.draw(generator(3, b));
+        const most = largestGSquared(drawn, window);
+        const again = refitted(drawn, of.fit.levels);
+        for (const [id, statistic] of statistics) {
+          const value = statistic.of(again);
+          expect(value, id).toBeLessThanOrEqual(statistic.most(drawn, most));
+          if (value > 0.8 * statistic.most(drawn, most)) close++;
+        }
+      }
+    }
+    // The bound is not idle: G² of few cells often comes near it.
+    expect(close).toBeGreaterThan(20);
   });
 });

@@ -1,0 +1,20 @@
+import type { FitData } from '../fit/fit-data';
+import type { Window } from '../laws/window';
+import { cells } from './cells';
+import { divergence } from './divergence';
+
+/**
+ * G² of a resample from the law it was drawn from, 2Σ h ln(h/(S f)): no refit of it can leave more, since the
+ * search for one starts at that law. Enlarged by what sums over S shots may be rounded.
+ *
+ * @param window the law drawn from, trimmed where nothing is drawn
+ */
+export function largestGSquared(resample: FitData, window: Window): number {
+  const { law, above } = cells(resample, window);
+  let logLikelihood = resample.lump ? resample.lump.shots * Math.log(above) : 0;
+  for (let i = 0; i < law.length; i++) {
+    if (resample.shots[i] > 0) logLikelihood += resample.shots[i] * Math.log(law[i]);
+  }
+  const gSquared = 2 * resample.total * divergence(resample, logLikelihood);
+  return gSquared * (1 + 1e-9) + 1e-6 + 1e-12 * resample.total;
+}
