@@ -54,12 +54,16 @@ module.exports = {
     only('server/project-folder'),
     only('server/log'),
     only('server/db', 'server/env', 'server/project-folder'),
-    only('server/auth', 'server/db', 'server/env', 'server/log'),
+    only('server/auth', 'server/db', 'server/env', 'server/log', 'model'),
+    only('server/mail', 'server/db', 'server/env', 'server/log'),
+    only('server/jobs', 'server/db', 'server/env', 'server/log', 'server/project-folder', 'stats', 'model'),
     only('server/access', 'model'),
     only('server/pdf', 'charts', 'model', 'stats'),
     only(
       'server/services',
       'server/db',
+      'server/env',
+      'server/auth',
       'server/access',
       'server/mail',
       'server/pdf',
@@ -79,7 +83,7 @@ module.exports = {
         pathNot: [
           '^src/(routes|params)/',
           '^src/app\\.css$',
-          ...['page', 'model', 'charts', 'ui', 'server/services', 'server/access'].map(room)
+          ...['page', 'model', 'charts', 'ui', 'server/services', 'server/auth', 'server/access'].map(room)
         ]
       }
     },

@@ -9,6 +9,7 @@ export default ts.config(
       '.svelte-kit/',
       'build/',
       'build-cli/',
+      'build-worker/',
       'node_modules/',
       'fixtures/',
       'drizzle/',
@@ -24,7 +25,9 @@ export default ts.config(
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
       'no-console': 'error',
-      eqeqeq: 'error'
+      eqeqeq: 'error',
+      // The application always lives at the root of its address, and team addresses are put together.
+      'svelte/no-navigation-without-resolve': 'off'
     }
   },
   { files: ['src/cli/**', 'tests/**', '.ci/**'], rules: { 'no-console': 'off' } },

@@ -1,3 +1,4 @@
+import type { Person } from '$lib/server/auth/person';
 import type { Database } from '$lib/server/db/client';
 
 declare global {
@@ -11,6 +12,8 @@ declare global {
     }
     interface Locals {
       db: Database;
+      /** Who is signed in; null for visitors. */
+      person: Person | null;
     }
   }
 }

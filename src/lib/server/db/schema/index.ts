@@ -1,1 +1,16 @@
-export { sample } from './sample';
+export * from './person';
+export * from './identity';
+export * from './team';
+export * from './membership';
+export * from './invitation';
+export * from './mailed-token';
+export * from './original-file';
+export * from './dataset';
+export * from './report';
+export * from './link';
+export * from './link-visit';
+export * from './remark';
+export * from './job';
+export * from './event';
+export * from './outbox-message';
+export * from './sample';
