@@ -8,7 +8,7 @@ export interface SourceFile {
 }
 
 const TEXT = /\.(ts|mjs|cjs|js|svelte|css|html|json|py|R|md|sh)$|(^|\/)run$/;
-const GENERATED = /^(node_modules|build|build-cli|\.svelte-kit|\.git|data|coverage)$/;
+const GENERATED = /^(node_modules|build|build-cli|build-worker|\.svelte-kit|\.git|data|coverage)$/;
 
 /**
  * Every text file that people write, in name order: the folders named, or the whole project.
