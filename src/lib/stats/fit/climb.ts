@@ -9,6 +9,10 @@ const most = 60;
 /** Steps before a climb may be given up for falling short of its bar. */
 const patience = 1;
 
+/** Whether a log-likelihood is as much as anyone needs to know: a search may end there, short of the maximum. */
+export type Settled = (value: number) => boolean;
+export const neverSettled: Settled = () => false;
+
 /** Where a climb ended. */
 export interface Climb {
   levels: TrialLevels;
@@ -28,8 +32,15 @@ const longest = 0.35;
  *
  * @param enough stop when the step in hand promises less than this many nats
  * @param bar give up once two steps have been made and twice the promise of the next does not reach this
+ * @param settled ends the climb where it says so
  */
-export function climb(space: Workspace, from: TrialLevels, enough: number, bar = -Infinity): Climb {
+export function climb(
+  space: Workspace,
+  from: TrialLevels,
+  enough: number,
+  bar = -Infinity,
+  settled = neverSettled
+): Climb {
   let levels = from;
   let value = logLikelihood(space, levels);
   let slope = slopes(space, levels);
@@ -41,7 +52,7 @@ export function climb(space: Workspace, from: TrialLevels, enough: number, bar =
     if (!moved) break;
     const gain = moved.value - value;
     ({ levels, value } = tidy(space, moved.levels, moved.value));
-    if (gain < enough / 10) {
+    if (gain < enough / 10 || settled(value)) {
       steps++;
       break;
     }

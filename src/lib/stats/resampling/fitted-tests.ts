@@ -1,18 +1,12 @@
 import type { BestLaw } from '../fit/best-law';
 import type { FitData } from '../fit/fit-data';
-import { lawWindow } from '../laws/law-window';
 import { SequentialP } from '../multiple/sequential-p';
-import { generator } from '../random/generator';
-import { toLaw } from '../fit/trial-levels';
 import type { TestId, TestResult } from '../types';
 import { expectedEmpty } from './empty-excess';
+import { fittedDraws } from './fitted-draws';
 import type { Pace } from './pace';
 import { progress } from './progress';
-import { largestGSquared } from './largest-g-squared';
-import { redraw } from './redraw';
-import { refitted, type Buffers, type Refitted } from './refitted';
-import { chooseStatistics, lowTailOfTheRest, type StatisticId } from './statistics';
-import { stream } from './streams';
+import { lowTailOfTheRest, type StatisticId } from './statistics';
 import { testResult } from './test-result';
 
 /** Tests against the fitted law, refitted to every resample, and what else those resamples told. */
@@ -27,15 +21,9 @@ export interface FittedTests {
   expectedEmpty: number | null;
 }
 
-/** Their mean is then known to a seventeenth of their standard deviation, and later draws need no refit for it. */
-const divergencesKept = 299;
-
 /**
- * Draws histograms from the fitted law, refits each, and recomputes every statistic;
+ * Draws histograms from the fitted law, refits each, and recomputes every statistic (see fittedDraws);
  * p = (1 + #{≥ observed})/(B + 1), ended early by the rule of Besag & Clifford 1991.
- *
- * A draw that no refit could bring near the observed value is counted without one: see Statistic.most. Where the
- * data are clear, that is nearly every draw; the answers are the same.
  */
 export async function fittedTests(
   data: FitData,
@@ -43,33 +31,16 @@ export async function fittedTests(
   options: { resamples: number; seed: number },
   pace: Pace
 ): Promise<FittedTests> {
-  const window = lawWindow(toLaw(fit.levels), 1e-18, 1);
-  const observed = refitted(data, fit.levels, {
-    levels: fit.levels,
-    logLikelihood: fit.logLikelihood,
-    window
+  const { levels, logLikelihood } = fit;
+  const draws = fittedDraws({ data, levels, logLikelihood, seed: options.seed });
+  const runs = draws.questions.map(({ id, value }, i) => {
+    return { id, value, bit: 1 << i, sequence: new SequentialP(options.resamples) };
   });
-  const { statistics, notRun } = chooseStatistics(observed);
-  const runs = [...statistics].map(([id, statistic]) => {
-    const value = statistic.of(observed);
-    // Equal up to rounding counts as equal: a resample that repeats the data must count.
-    const bar = value - 1e-9 * Math.max(1, Math.abs(value));
-    return { id, statistic, value, bar, sequence: new SequentialP(options.resamples) };
-  });
-  const source = redraw(window, data, data.total);
   const nullDivergences: number[] = [];
-  const buffers: Buffers = {};
-  for (let b = 0; runs.some(({ sequence }) => !sequence.done); b++) {
-    const resample = source.draw(generator(options.seed, stream('fitted law', b)));
-    const most = largestGSquared(resample, window);
-    let drawn: Refitted | null = null;
-    const refit = () => (drawn ??= refitted(resample, fit.levels, undefined, buffers));
-    if (b < divergencesKept) nullDivergences.push(refit().divergence);
-    for (const { statistic, bar, sequence } of runs) {
-      if (sequence.done) continue;
-      const near = statistic.most(resample, most) >= bar;
-      sequence.push(near && statistic.of(refit()) >= bar);
-    }
+  for (let b = 0, wanted = unfinished(runs); wanted !== 0; b++, wanted = unfinished(runs)) {
+    const { exceeds, divergence } = draws.draw(b, wanted);
+    if (divergence !== null) nullDivergences.push(divergence);
+    for (const { bit, sequence } of runs) sequence.push((exceeds & bit) !== 0);
     await pace.breathe(Math.min(...runs.map(({ sequence }) => progress(sequence))));
   }
   const p = (id: StatisticId) => runs.find((run) => run.id === id)?.sequence.p ?? null;
@@ -77,9 +48,14 @@ export async function fittedTests(
     tests: runs
       .filter((run) => run.id !== lowTailOfTheRest)
       .map(({ id, value, sequence }) => testResult(id as TestId, value, sequence)),
-    notRun,
+    notRun: draws.notRun,
     nullDivergences,
     lowTailOfTheRest: p(lowTailOfTheRest),
-    expectedEmpty: expectedEmpty(observed)
+    expectedEmpty: expectedEmpty(draws.observed)
   };
+}
+
+/** Bits of the tests that want more draws. */
+function unfinished(runs: { bit: number; sequence: SequentialP }[]): number {
+  return runs.reduce((bits, { bit, sequence }) => (sequence.done ? bits : bits | bit), 0);
 }

@@ -1,7 +1,8 @@
 import type { FitData } from '../fit/fit-data';
 import type { Window } from '../laws/window';
 import { cells } from './cells';
-import { divergence } from './divergence';
+import { saturated } from './divergence';
+import { gSquaredLeft } from './g-squared-left';
 
 /**
  * G² of a resample from the law it was drawn from, 2Σ h ln(h/(S f)): no refit of it can leave more, since the
@@ -15,6 +16,5 @@ export function largestGSquared(resample: FitData, window: Window): number {
   for (let i = 0; i < law.length; i++) {
     if (resample.shots[i] > 0) logLikelihood += resample.shots[i] * Math.log(law[i]);
   }
-  const gSquared = 2 * resample.total * divergence(resample, logLikelihood);
-  return gSquared * (1 + 1e-9) + 1e-6 + 1e-12 * resample.total;
+  return gSquaredLeft(saturated(resample), logLikelihood, resample.total);
 }

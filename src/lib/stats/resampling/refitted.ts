@@ -1,3 +1,4 @@
+import type { Settled } from '../fit/climb';
 import type { FitData } from '../fit/fit-data';
 import { refit, type Refit } from '../fit/refit';
 import { toLaw, type TrialLevels } from '../fit/trial-levels';
@@ -23,9 +24,18 @@ export interface Buffers {
   rest?: Workspace;
 }
 
-/** Fits a histogram from the levels of another's law; see refit. With `buffers` it holds until their next use. */
-export function refitted(data: FitData, from: TrialLevels, known?: Refit, buffers: Buffers = {}): Refitted {
-  const fit = known ?? refit(data, from, (buffers.whole = workspace(data, buffers.whole)));
+/**
+ * Fits a histogram from the levels of another's law; see refit, also for `settled`, which concerns the whole
+ * histogram alone. With `buffers` it holds until their next use.
+ */
+export function refitted(
+  data: FitData,
+  from: TrialLevels,
+  known?: Refit,
+  buffers: Buffers = {},
+  settled?: Settled
+): Refitted {
+  const fit = known ?? refit(data, from, (buffers.whole = workspace(data, buffers.whole)), settled);
   let rest: { data: FitData; fit: Refit } | null | undefined;
   return {
     data,

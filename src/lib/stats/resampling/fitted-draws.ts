@@ -1,0 +1,95 @@
+import type { FitData } from '../fit/fit-data';
+import { toLaw, type TrialLevels } from '../fit/trial-levels';
+import { lawWindow } from '../laws/law-window';
+import { generator } from '../random/generator';
+import type { TestId } from '../types';
+import { saturated } from './divergence';
+import { gSquaredLeft } from './g-squared-left';
+import { largestGSquared } from './largest-g-squared';
+import { redraw } from './redraw';
+import { refitted, type Buffers, type Refitted } from './refitted';
+import { chooseStatistics, type Statistic, type StatisticId } from './statistics';
+import { stream } from './streams';
+
+/** All that the draws of the fitted tests depend on; plain, so that it can be sent to another thread. */
+export interface FittedJob {
+  data: FitData;
+  levels: TrialLevels;
+  logLikelihood: number;
+  seed: number;
+}
+
+/** What one resample says. */
+export interface DrawAnswer {
+  /** Bit i: the statistic of question i is at least the observed one. */
+  exceeds: number;
+  /** KL of the resample from its own refit, nats a shot; of the first few resamples alone. */
+  divergence: number | null;
+}
+
+/** A statistic, its observed value, and the least value that counts as being as large. */
+export interface Question {
+  id: StatisticId;
+  statistic: Statistic;
+  value: number;
+  bar: number;
+}
+
+export interface FittedDraws {
+  observed: Refitted;
+  questions: Question[];
+  notRun: { id: TestId; reason: string }[];
+  /** Resample b, whose answer depends on the job and b alone; only the questions whose bit is set in `wanted` are asked. */
+  draw(b: number, wanted: number): DrawAnswer;
+}
+
+/** Their mean is then known to a seventeenth of their standard deviation, and later draws need no refit for it. */
+const divergencesKept = 299;
+
+/**
+ * Histograms drawn from the fitted law, each refitted, and whether their statistics reach those observed.
+ *
+ * A draw that no refit could bring near an observed value is answered without one (see Statistic.most), and a refit
+ * ends once it has come so close that no statistic asked for can still reach its own. The answers are the same.
+ */
+export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): FittedDraws {
+  const window = lawWindow(toLaw(levels), 1e-18, 1);
+  const observed = refitted(data, levels, { levels, logLikelihood, window });
+  const { statistics, notRun } = chooseStatistics(observed);
+  const questions = [...statistics].map(([id, statistic]) => {
+    const value = statistic.of(observed);
+    // Equal up to rounding counts as equal: a resample that repeats the data must count.
+    return { id, statistic, value, bar: value - 1e-9 * Math.max(1, Math.abs(value)) };
+  });
+  const inReach = (wanted: number, resample: FitData, gSquared: number) => {
+    let open = 0;
+    for (let i = 0; i < questions.length; i++) {
+      const { statistic, bar } = questions[i];
+      if (wanted & (1 << i) && statistic.most(resample, gSquared) >= bar) open |= 1 << i;
+    }
+    return open;
+  };
+  const source = redraw(window, data, data.total);
+  const buffers: Buffers = {};
+  return {
+    observed,
+    questions,
+    notRun,
+    draw(b, wanted) {
+      const resample = source.draw(generator(seed, stream('fitted law', b)));
+      const keep = b < divergencesKept;
+      const near = inReach(wanted, resample, largestGSquared(resample, window));
+      if (near === 0 && !keep) return { exceeds: 0, divergence: null };
+      const itself = saturated(resample);
+      const open = (value: number) => inReach(near, resample, gSquaredLeft(itself, value, resample.total));
+      const settled = keep ? undefined : (value: number) => open(value) === 0;
+      const drawn = refitted(resample, levels, undefined, buffers, settled);
+      const left = open(drawn.fit.logLikelihood);
+      let exceeds = 0;
+      for (let i = 0; i < questions.length; i++) {
+        if (left & (1 << i) && questions[i].statistic.of(drawn) >= questions[i].bar) exceeds |= 1 << i;
+      }
+      return { exceeds, divergence: keep ? drawn.divergence : null };
+    }
+  };
+}
