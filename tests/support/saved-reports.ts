@@ -67,5 +67,6 @@ export async function makeReport(
   more: Partial<DiagnoseOptions> = {},
   now?: number
 ): Promise<{ id: string; number: number }> {
+  const made = await diagnoseInvented(more);
   return db.transaction((tx) => saveReport(tx, { createdBy: null, ...place, ...made }, now));
 }
