@@ -54,7 +54,7 @@ module.exports = {
     only('server/project-folder'),
     only('server/log'),
     only('server/db', 'server/env', 'server/project-folder'),
-    only('server/auth', 'server/db', 'server/env', 'server/log', 'model'),
+    only('server/auth', 'server/db', 'server/env', 'server/log', 'server/services/events', 'model'),
     only('server/mail', 'server/db', 'server/env', 'server/log'),
     only('server/jobs', 'server/db', 'server/env', 'server/log', 'server/project-folder', 'stats', 'model'),
     only('server/access', 'model'),

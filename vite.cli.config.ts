@@ -5,8 +5,8 @@ import { defineConfig } from 'vite';
 const folder = fileURLToPath(new URL('./src/cli/', import.meta.url));
 
 /**
- * Bundles the command line tools for Node: every src/cli/NAME.ts becomes build-cli/NAME.js. Only the
- * compiled database driver stays outside, so a command starts without reading node_modules.
+ * Bundles the command line tools for Node: every src/cli/NAME.ts becomes build-cli/NAME.js. Only what is
+ * compiled (the database driver, argon2) stays outside, so a command starts without reading node_modules.
  */
 export default defineConfig({
   resolve: { alias: { $lib: fileURLToPath(new URL('./src/lib', import.meta.url)) } },
@@ -24,5 +24,5 @@ export default defineConfig({
       )
     }
   },
-  ssr: { noExternal: true, external: ['better-sqlite3'] }
+  ssr: { noExternal: true, external: ['better-sqlite3', '@node-rs/argon2'] }
 });

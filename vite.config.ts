@@ -1,9 +1,17 @@
 import { sveltekit } from '@sveltejs/kit/vite';
 import tailwindcss from '@tailwindcss/vite';
+import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
   plugins: [tailwindcss(), sveltekit()],
+  resolve: {
+    alias: {
+      'sveltekit-superforms/adapters': fileURLToPath(
+        new URL('./src/lib/model/superforms-adapters.ts', import.meta.url)
+      )
+    }
+  },
   worker: { format: 'es' },
   test: {
     // Two cores, so two groups one after the other: the long statistics tests share both cores; a browser

@@ -3,6 +3,7 @@ import { database } from '$lib/server/application';
 import { reportError } from '$lib/server/handles/report-error';
 import { securityHeaders } from '$lib/server/handles/security-headers';
 import { withDatabase } from '$lib/server/handles/with-database';
+import { withPerson } from '$lib/server/handles/with-person';
 import type { ServerInit } from '@sveltejs/kit';
 import { sequence } from '@sveltejs/kit/hooks';
 
@@ -10,6 +11,6 @@ export const init: ServerInit = () => {
   if (!building) database();
 };
 
-export const handle = sequence(securityHeaders, withDatabase);
+export const handle = sequence(securityHeaders, withDatabase, withPerson);
 
 export const handleError = reportError;

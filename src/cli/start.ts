@@ -31,6 +31,8 @@ async function start(): Promise<void> {
   stopCleanly(server, env.SHUTDOWN_TIMEOUT, env.npm_lifecycle_event === 'start');
 
   process.env.ORIGIN = address;
+  // Auth.js would take the Host header for its own address, and that is the client's to write.
+  process.env.AUTH_URL = address;
   process.env.SEVERALTY_DATA = folder;
   process.env.BODY_SIZE_LIMIT = String(env.BODY_SIZE_LIMIT);
   const built = pathToFileURL(join(projectFolder(), 'build', 'handler.js')).href;

@@ -23,7 +23,7 @@ describe('the start command', () => {
     expect(sample.text).toMatch(/^# Invented data/);
     expect(await server.stop()).toBe(0);
     // SQLite removes its write-ahead log when the last connection closes.
-    expect(readdirSync(data)).toEqual(['severalty.sqlite']);
+    expect(readdirSync(data)).toEqual(['auth-secret', 'severalty.sqlite']);
     rmSync(data, { recursive: true });
   });
 

@@ -6,6 +6,8 @@ import { join } from 'node:path';
 export interface RunningServer {
   /** http://localhost:PORT, without a closing slash. */
   address: string;
+  /** Its data folder, for tests that put people and teams into the database. */
+  data: string;
   /** What it has written so far, both outputs together. */
   output(): string;
   /** Ends it as a person would (SIGTERM) and removes its data. Gives the exit code. */
@@ -27,7 +29,15 @@ export async function startServer(
   const data = mkdtempSync(join(tmpdir(), 'severalty-'));
   const own = { ...process.env, PORT: '0', SEVERALTY_DATA: data, NODE_ENV: 'production', ...env };
   // Settings of the developer's own shell must not reach the tests.
-  for (const name of ['ORIGIN', 'HOST', 'npm_lifecycle_event'])
+  for (const name of [
+    'ORIGIN',
+    'HOST',
+    'AUTH_SECRET',
+    'SMTP_URL',
+    'OIDC_ISSUER',
+    'ADDRESS_HEADER',
+    'npm_lifecycle_event'
+  ])
     if (!(name in env)) delete (own as Record<string, unknown>)[name];
   const child = spawn(program, args, {
     env: own,
@@ -58,6 +68,7 @@ export async function startServer(
   });
   return {
     address,
+    data: own.SEVERALTY_DATA,
     output: () => output,
     async stop() {
       child.kill('SIGTERM');
