@@ -43,5 +43,8 @@ function shift(levels: TrialLevels, total: number): void {
 /** Levels that ran empty taken out. */
 function without(levels: TrialLevels): TrialLevels {
   const kept = levels.p.map((_, j) => j).filter((j) => levels.trials[j] > 0);
-  return { ...levels, p: kept.map((j) => levels.p[j]), trials: kept.map((j) => levels.trials[j]) };
+  const out = copyLevels(levels);
+  out.p = kept.map((j) => levels.p[j]);
+  out.trials = kept.map((j) => levels.trials[j]);
+  return out;
 }

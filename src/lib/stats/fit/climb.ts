@@ -1,17 +1,14 @@
-import { solvePositive } from '../numerics/solve-positive';
-import { symmetricEigen } from '../numerics/symmetric-eigen';
 import { logLikelihood } from './log-likelihood';
-import { slopes, type Slopes } from './slopes';
+import { newtonStep } from './newton-step';
+import { slopes } from './slopes';
 import { copyLevels, type TrialLevels } from './trial-levels';
 import type { Workspace } from './workspace';
 
 const most = 60;
+/** Levels and a Poisson part with a smaller sum of probabilities are tried without. */
+const little = 1e-3;
 /** Steps before a climb may be given up for falling short of its bar. */
 const patience = 1;
-
-/** Whether a log-likelihood is as much as anyone needs to know: a search may end there, short of the maximum. */
-export type Settled = (value: number) => boolean;
-export const neverSettled: Settled = () => false;
 
 /** Where a climb ended. */
 export interface Climb {
@@ -20,49 +17,54 @@ export interface Climb {
   steps: number;
 }
 
-/** No angle moves further than this in a step: beyond, the quadratic picture of the likelihood is no guide. */
-const longest = 0.35;
-
 /**
- * Newton's method on the levels with fixed multiplicities, in angles p = sin²φ, γ = ψ², with the exact
- * Hessian and its eigenvalues taken by size, so that saddles repel (Dauphin et al. 2014).
+ * Newton's method on the levels with fixed multiplicities, in angles p = sin²φ, γ = ψ², with the exact Hessian; see
+ * newtonStep.
  *
  * In angles the ends 0 and 1 are ordinary points: a level that wants to be there arrives quadratically
  * and is absorbed; two levels that want to be one arrive likewise and are merged.
  *
  * @param enough stop when the step in hand promises less than this many nats
  * @param bar give up once two steps have been made and twice the promise of the next does not reach this
- * @param settled ends the climb where it says so
+ * @param settled log-likelihood that is enough: the climb ends once it is there, short of the maximum
  */
 export function climb(
   space: Workspace,
   from: TrialLevels,
   enough: number,
   bar = -Infinity,
-  settled = neverSettled
+  settled = Infinity
 ): Climb {
   let levels = from;
   let value = logLikelihood(space, levels);
-  let slope = slopes(space, levels);
+  let buffers = slopes(space, levels);
   let steps = 0;
   for (; steps < most; steps++) {
-    const step = newtonStep(levels, slope);
-    if (!(step.promise > enough) || (steps >= patience && value + 2 * step.promise < bar)) break;
-    const moved = forward(space, levels, step.angles, value);
+    const promise = newtonStep(levels, buffers);
+    if (!(promise > enough) || (steps >= patience && value + 2 * promise < bar)) break;
+    const moved = forward(space, levels, buffers.angles, value);
     if (!moved) break;
     const gain = moved.value - value;
-    ({ levels, value } = tidy(space, moved.levels, moved.value));
-    if (gain < enough / 10 || settled(value)) {
+    const { levels: next, value: there } = tidy(space, moved);
+    levels = next;
+    value = there;
+    if (gain < enough / 10 || value >= settled) {
       steps++;
       break;
     }
-    slope = slopes(space, levels);
+    buffers = slopes(space, levels);
   }
   return { levels, value, steps };
 }
 
+/** A law and its log-likelihood. */
+interface Place {
+  levels: TrialLevels;
+  value: number;
+}
+
 /** The longest of step, step/3, step/9 … that gains; null when none does. */
-function forward(space: Workspace, levels: TrialLevels, angles: number[], value: number) {
+function forward(space: Workspace, levels: TrialLevels, angles: Float64Array, value: number): Place | null {
   for (let share = 1, tries = 0; tries < 12; tries++, share /= 3) {
     const trial = turned(levels, angles, share);
     const there = logLikelihood(space, trial);
@@ -71,56 +73,7 @@ function forward(space: Workspace, levels: TrialLevels, angles: number[], value:
   return null;
 }
 
-function newtonStep(levels: TrialLevels, slope: Slopes): { angles: number[]; promise: number } {
-  const { size, gradient, hessian } = slope;
-  const count = levels.p.length;
-  const first = new Array<number>(size);
-  const second = new Array<number>(size);
-  for (let j = 0; j < size; j++) {
-    // p = sin²φ: dp/dφ = 2√(p(1−p)), d²p/dφ² = 2(1−2p); γ = ψ²: 2√γ and 2.
-    first[j] = j < count ? 2 * Math.sqrt(levels.p[j] * (1 - levels.p[j])) : 2 * Math.sqrt(levels.poissonPart);
-    second[j] = j < count ? 2 * (1 - 2 * levels.p[j]) : 2;
-  }
-  const g = new Array<number>(size);
-  for (let j = 0; j < size; j++) g[j] = gradient[j] * first[j];
-  const h = new Array<number>(size * size);
-  for (let j = 0; j < size; j++) {
-    for (let k = 0; k < size; k++) h[j * size + k] = -hessian[j * size + k] * first[j] * first[k];
-    h[j * size + j] -= gradient[j] * second[j];
-  }
-  return steepest(h, g, size);
-}
-
-/** −H⁻¹g where H is negative definite and the step short; else along its eigenvectors, each kept short. */
-function steepest(h: number[], g: number[], size: number): { angles: number[]; promise: number } {
-  const newton = solvePositive(h, size, g);
-  if (newton && short(newton)) {
-    let promise = 0;
-    for (let j = 0; j < size; j++) promise += 0.5 * newton[j] * g[j];
-    return { angles: newton, promise };
-  }
-  const { values, vectors } = symmetricEigen(h, size);
-  let stiffest = 0;
-  for (const value of values) stiffest = Math.max(stiffest, Math.abs(value));
-  const angles = new Array<number>(size).fill(0);
-  let promise = 0;
-  for (let k = 0; k < size; k++) {
-    let along = 0;
-    for (let j = 0; j < size; j++) along += vectors[j * size + k] * g[j];
-    let length = along / Math.max(Math.abs(values[k]), 1e-9 * stiffest, 1e-300);
-    length = Math.max(-longest, Math.min(longest, length));
-    promise += along * length * (values[k] > 0 ? 0.5 : 1);
-    for (let j = 0; j < size; j++) angles[j] += vectors[j * size + k] * length;
-  }
-  return { angles, promise };
-}
-
-function short(angles: number[]): boolean {
-  for (const angle of angles) if (!(Math.abs(angle) < longest)) return false;
-  return true;
-}
-
-function turned(levels: TrialLevels, angles: number[], share: number): TrialLevels {
+function turned(levels: TrialLevels, angles: Float64Array, share: number): TrialLevels {
   const out = copyLevels(levels);
   for (let j = 0; j < out.p.length; j++) {
     // sin(φ + δ) = √p cos δ + √(1−p) sin δ, with cos and sin of 2 arctan(δ/2), which is δ to third order: browsers and
@@ -139,7 +92,21 @@ function turned(levels: TrialLevels, angles: number[], share: number): TrialLeve
 }
 
 /** Absorbs levels that have come to 0 or 1 and merges levels that have met, where that costs nothing. */
-function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: TrialLevels; value: number } {
+function tidy(space: Workspace, moved: Place): Place {
+  return isTidy(moved.levels) ? moved : tidied(space, moved);
+}
+
+/** No level is near an end or another: as after nearly every step. */
+function isTidy({ p, trials, poissonPart }: TrialLevels): boolean {
+  if (poissonPart > 0 && poissonPart < little) return false;
+  for (let j = 0; j < p.length; j++) {
+    if (p[j] * trials[j] < little || (1 - p[j]) * trials[j] < little) return false;
+    for (let k = 0; k < j; k++) if (near(p[k], p[j])) return false;
+  }
+  return true;
+}
+
+function tidied(space: Workspace, { levels, value }: Place): Place {
   let best = { levels, value };
   let stale = false;
   const attempt = (trial: TrialLevels) => {
@@ -151,11 +118,11 @@ function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: T
   };
   for (let j = levels.p.length - 1; j >= 0; j--) {
     const { p, trials } = best.levels;
-    if (p[j] * trials[j] < 1e-3) attempt(absorbed(best.levels, j, 'zeros'));
-    else if ((1 - p[j]) * trials[j] < 1e-3) attempt(absorbed(best.levels, j, 'ones'));
+    if (p[j] * trials[j] < little) attempt(absorbed(best.levels, j, 'zeros'));
+    else if ((1 - p[j]) * trials[j] < little) attempt(absorbed(best.levels, j, 'ones'));
   }
   // Quadratic arrival stops at about 1e-11, which a report should not show as a Poisson part.
-  if (levels.poissonPart > 0 && levels.poissonPart < 1e-3) attempt({ ...best.levels, poissonPart: 0 });
+  if (levels.poissonPart > 0 && levels.poissonPart < little) attempt(withoutPoisson(best.levels));
   for (let j = 0; j < best.levels.p.length; j++) {
     for (let k = best.levels.p.length - 1; k > j; k--) {
       if (near(best.levels.p[j], best.levels.p[k])) attempt(merged(best.levels, j, k));
@@ -169,6 +136,12 @@ function tidy(space: Workspace, levels: TrialLevels, value: number): { levels: T
 /** Angles within 0.02 of each other, by the sine of their difference. */
 function near(p: number, q: number): boolean {
   return Math.abs(p - q) < 0.05 && Math.abs(Math.sqrt(p * (1 - q)) - Math.sqrt(q * (1 - p))) < 0.02;
+}
+
+function withoutPoisson(levels: TrialLevels): TrialLevels {
+  const out = copyLevels(levels);
+  out.poissonPart = 0;
+  return out;
 }
 
 function absorbed(levels: TrialLevels, j: number, into: 'zeros' | 'ones'): TrialLevels {

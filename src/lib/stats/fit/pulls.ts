@@ -36,7 +36,7 @@ export function pulls(space: Workspace, levels: TrialLevels, slope: Slopes): Pul
     const sign = power === 2 ? -1 : 1;
     const touch: number[] = [];
     for (let j = 0; j < slope.size; j++) {
-      touch.push(sign * information(space, change, slope.tangents[j]) * (levels.trials[j] ?? 1));
+      touch.push(sign * information(space, change, space.tangents[j]) * (levels.trials[j] ?? 1));
     }
     return { slope: sign * weigh(space, change), weight: information(space, change, change), touch };
   };

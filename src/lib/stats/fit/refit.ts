@@ -1,5 +1,5 @@
 import type { Window } from '../laws/window';
-import type { Climb, Settled } from './climb';
+import type { Climb } from './climb';
 import type { FitData } from './fit-data';
 import { logLikelihood } from './log-likelihood';
 import { sampleMoments } from './sample-moments';
@@ -36,7 +36,7 @@ const rough: Effort = { enough: 5e-3, worth: 3e-2, rounds: 30, transfers: 0 };
  * @param space buffers to work in; the window that comes back is a view of them
  * @param settled a log-likelihood at which the search may end short of the best law
  */
-export function refit(data: FitData, from: TrialLevels, space = workspace(data), settled?: Settled): Refit {
+export function refit(data: FitData, from: TrialLevels, space = workspace(data), settled = Infinity): Refit {
   const effort = effortFor(data);
   let best = search(space, from, effort, settled);
   // The law drawn from can forbid a count only by a trial at exactly 0 or 1; start afresh then.

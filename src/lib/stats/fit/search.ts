@@ -1,4 +1,4 @@
-import { climb, neverSettled, type Climb, type Settled } from './climb';
+import { climb, type Climb } from './climb';
 import { moves } from './moves';
 import { transfers } from './transfers';
 import type { TrialLevels } from './trial-levels';
@@ -16,18 +16,13 @@ export interface Effort {
   transfers: number;
 }
 
-/** Climbs from a start, then makes the structural moves that pay until none does, or the value is settled. */
-export function search(
-  space: Workspace,
-  start: TrialLevels,
-  effort: Effort,
-  settled: Settled = neverSettled
-): Climb {
+/** Climbs from a start, then makes the structural moves that pay until none does, or the value is `settled`. */
+export function search(space: Workspace, start: TrialLevels, effort: Effort, settled = Infinity): Climb {
   let best = climb(space, start, effort.enough, -Infinity, settled);
   // A sum over 2^50 shots is rounded at about one nat: gains under that are no gains.
   const noise = Number.isFinite(best.value) ? 1e-14 * Math.abs(best.value) : 0;
   const sighted = { ...effort, enough: effort.enough + noise, worth: effort.worth + noise };
-  for (let round = 0; round < effort.rounds && !settled(best.value); round++) {
+  for (let round = 0; round < effort.rounds && !(best.value >= settled); round++) {
     const next = improved(space, best, sighted, settled);
     if (!next) break;
     best = next;
@@ -35,7 +30,7 @@ export function search(
   return best;
 }
 
-function improved(space: Workspace, best: Climb, effort: Effort, settled: Settled): Climb | null {
+function improved(space: Workspace, best: Climb, effort: Effort, settled: number): Climb | null {
   for (const move of moves(space, best.levels, effort.worth)) {
     const found = bestOf(space, move.starts, effort, best.value, settled);
     if (found && found.value > best.value + effort.worth / 2) return found;
@@ -52,13 +47,13 @@ function bestOf(
   starts: TrialLevels[],
   effort: Effort,
   bar: number,
-  settled: Settled
+  settled: number
 ): Climb | null {
   let best: Climb | null = null;
   for (const start of starts) {
     const found = climb(space, start, effort.enough, Math.max(bar, best?.value ?? bar), settled);
     if (!best || found.value > best.value) best = found;
-    if (settled(found.value)) break;
+    if (found.value >= settled) break;
   }
   return best;
 }

@@ -1,21 +1,19 @@
-import { cellChange } from './cell-change';
-import { information, weigh } from './cell-sums';
+import { information } from './cell-sums';
 import { cellWeights } from './cell-weights';
-import { levelRemoval, type RemovalSums } from './level-removal';
+import { levelRemoval } from './level-removal';
+import { stepBuffers, type StepBuffers } from './step-buffers';
 import type { TrialLevels } from './trial-levels';
 import type { Workspace } from './workspace';
 
-/** First and second derivatives of the log-likelihood in the levels. */
+/** First and second derivatives of the log-likelihood in the levels, in buffers that the next call overwrites. */
 export interface Slopes {
   /** ∂L/∂p_j of each level (all its trials moved together), then ∂L/∂γ when there is a Poisson part. */
-  gradient: number[];
+  gradient: Float64Array;
   /** Second derivatives, row by row, in the same order. */
-  hessian: number[];
+  hessian: Float64Array;
   /** Fisher-like part: −Σ ∂²L/∂f² ∂f/∂p_j ∂f/∂p_k, positive semidefinite. */
-  fisher: number[];
+  fisher: Float64Array;
   size: number;
-  /** Change of each cell with p_j of one trial, with γ last; in buffers that the next call overwrites. */
-  tangents: Float64Array[];
 }
 
 /**
@@ -24,29 +22,25 @@ export interface Slopes {
  * f_{n−1} − f_n and f^{(−j)} is the pmf without one trial of level j. For p_j ≠ p_k partial fractions give
  * f^{(−j−k)} = (p_j f^{(−j)} − p_k f^{(−k)})/(p_j − p_k), so only J single and J double removals are made.
  *
- * Needs the pmf of `levels` in the workspace.
+ * Needs the pmf of `levels` in the workspace; leaves the change of each cell with p_j of one trial, γ last, in
+ * space.tangents.
  */
-export function slopes(space: Workspace, levels: TrialLevels): Slopes {
+export function slopes(space: Workspace, levels: TrialLevels): Slopes & StepBuffers {
   cellWeights(space);
   const count = levels.p.length;
   const size = count + (levels.poissonPart > 0 ? 1 : 0);
-  const gradient = new Array<number>(size).fill(0);
-  const hessian = new Array<number>(size * size).fill(0);
-  const fisher = new Array<number>(size * size).fill(0);
-  const bend = new Array<number>(size).fill(0);
-  const doubled = new Array<number>(size).fill(0);
-  const sums: RemovalSums = { single: 0, double: 0 };
-  const tangents = tangentBuffers(space, size);
+  const buffers = stepBuffers(space.sized, size);
+  const { gradient, hessian, fisher, bend, doubled } = buffers;
+  const { sums, tangents } = space;
+  if (tangents.length < size) moreTangents(space, size);
   for (let j = 0; j < count; j++) {
     levelRemoval(space, levels.p[j], levels.trials[j] > 1, sums);
     bend[j] = sums.single;
     doubled[j] = sums.double;
-    cellChange(space, space.g, 1, tangents[j]);
-    gradient[j] = levels.trials[j] * weigh(space, tangents[j]);
+    gradient[j] = levels.trials[j] * tangent(space, space.g, tangents[j]);
   }
   if (size > count) {
-    cellChange(space, space.f, 1, tangents[count]);
-    gradient[count] = weigh(space, tangents[count]);
+    gradient[count] = tangent(space, space.f, tangents[count]);
     bend[count] = bentSum(space, space.f);
   }
   for (let j = 0; j < size; j++) {
@@ -62,13 +56,44 @@ export function slopes(space: Workspace, levels: TrialLevels): Slopes {
       hessian[j * size + k] = hessian[k * size + j] = second - shared;
     }
   }
-  return { gradient, hessian, fisher, size, tangents };
+  return buffers;
 }
 
-/** One buffer a level, kept in the workspace: arrays of this size are what the garbage collector dreads. */
-function tangentBuffers(space: Workspace, size: number): Float64Array[] {
+function moreTangents(space: Workspace, size: number): void {
   while (space.tangents.length < size) space.tangents.push(new Float64Array(space.change.length));
-  return space.tangents;
+}
+
+/** The change of each cell with one trial, cellChange with power 1, and what it adds to L, in one pass. */
+function tangent(space: Workspace, f: Float64Array, out: Float64Array): number {
+  const { data, single, length } = space;
+  const cells = data.shots.length;
+  const shift = data.first - space.first;
+  const from = Math.min(cells, Math.max(0, -shift));
+  const to = Math.max(from, Math.min(cells, length - shift));
+  for (let i = 0; i < from; i++) out[i] = 0;
+  for (let i = to; i < cells + 2; i++) out[i] = 0;
+  let sum = 0;
+  let before = at(f, from + shift - 1, length);
+  for (let i = from; i < to; i++) {
+    const here = f[i + shift];
+    const change = before - here;
+    out[i] = change;
+    sum += single[i] * change;
+    before = here;
+  }
+  if (data.lump) {
+    out[cells] = at(f, data.lump.from - space.first - 1, length);
+    sum += space.lumpSingle * out[cells];
+  }
+  if (space.emptySingle !== 0) {
+    out[cells + 1] = -at(f, -space.first, length);
+    sum += space.emptySingle * out[cells + 1];
+  }
+  return sum;
+}
+
+function at(f: Float64Array, n: number, length: number): number {
+  return n >= 0 && n < length ? f[n] : 0;
 }
 
 /** Σ w u² f^{(−j−k)} for p ≠ q; levels nearer than 1e-5 are merged long before. */

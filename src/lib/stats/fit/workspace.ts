@@ -1,4 +1,5 @@
 import type { FitData } from './fit-data';
+import type { StepBuffers } from './step-buffers';
 
 /**
  * Buffers of one fit, made once and used again by every step: a refit of a short histogram takes about
@@ -28,7 +29,15 @@ export interface Workspace {
   lumpDouble: number;
   emptySingle: number;
   emptyDouble: number;
+  /** Σ bent·g and Σ bent·gg of the last removal; see levelRemoval. */
+  sums: { single: number; double: number };
+  /** For each number of levels that has come up; see stepBuffers. */
+  sized: StepBuffers[];
 }
+
+/** As many counts, and levels, fit at first. */
+const capacity = 64;
+const usualLevels = 10;
 
 /**
  * Buffers for a histogram; they grow when a law needs more room.
@@ -45,28 +54,44 @@ export function workspace(data: FitData, again?: Workspace): Workspace {
     again.double.fill(0, 0, cells);
     return again;
   }
-  const out = { data, first: 0, length: 0, tangents: [] as Float64Array[] } as Workspace;
   // Room for the next resample, which may reach a few counts further.
   const room = cells + 8;
-  out.single = new Float64Array(room);
-  out.double = new Float64Array(room);
-  out.change = new Float64Array(room + 2);
-  reserve(out, 64);
-  return out;
+  // All fields at once, and fractions from the start: the engine compiles anew for each shape that it meets.
+  return {
+    data,
+    f: new Float64Array(capacity),
+    first: 0,
+    length: 0,
+    spare: new Float64Array(capacity),
+    part: new Float64Array(capacity),
+    g: new Float64Array(capacity),
+    gg: new Float64Array(capacity),
+    tangents: Array.from({ length: usualLevels }, () => new Float64Array(room + 2)),
+    change: new Float64Array(room + 2),
+    single: new Float64Array(room),
+    double: new Float64Array(room),
+    bent: new Float64Array(capacity + 2),
+    lumpSingle: NaN,
+    lumpDouble: NaN,
+    emptySingle: NaN,
+    emptyDouble: NaN,
+    sums: { single: NaN, double: NaN },
+    sized: []
+  };
 }
 
 /** Makes room for windows of `length` counts; f is kept. */
 export function reserve(space: Workspace, length: number): void {
-  if (space.f && space.f.length >= length) return;
-  const capacity = Math.max(64, Math.ceil(length * 1.5));
-  const f = new Float64Array(capacity);
-  if (space.f) f.set(space.f.subarray(0, space.length));
+  if (space.f.length >= length) return;
+  const room = Math.ceil(length * 1.5);
+  const f = new Float64Array(room);
+  f.set(space.f.subarray(0, space.length));
   space.f = f;
-  space.spare = new Float64Array(capacity);
-  const part = new Float64Array(capacity);
-  if (space.part) part.set(space.part);
+  space.spare = new Float64Array(room);
+  const part = new Float64Array(room);
+  part.set(space.part);
   space.part = part;
-  space.g = new Float64Array(capacity);
-  space.gg = new Float64Array(capacity);
-  space.bent = new Float64Array(capacity + 2);
+  space.g = new Float64Array(room);
+  space.gg = new Float64Array(room);
+  space.bent = new Float64Array(room + 2);
 }

@@ -1,14 +1,17 @@
 /**
- * Solves A x = b for a small symmetric positive definite A (size × size, row by row) by Cholesky factors;
- * null when A is not positive definite.
+ * Solves A x = b for a small symmetric positive definite A (size × size, row by row) by Cholesky factors.
+ *
+ * @param x receives the solution
+ * @param lower room for the factor, size × size
+ * @returns false when A is not positive definite; `x` then holds nothing
  */
 export function solvePositive(
-  matrix: ArrayLike<number>,
+  matrix: Float64Array,
   size: number,
-  right: ArrayLike<number>
-): number[] | null {
-  const lower = new Array<number>(size * size).fill(0);
-  const x = new Array<number>(size).fill(0);
+  right: Float64Array,
+  x: Float64Array,
+  lower: Float64Array
+): boolean {
   for (let i = 0; i < size; i++) {
     let solved = right[i];
     for (let j = 0; j <= i; j++) {
@@ -16,7 +19,7 @@ export function solvePositive(
       for (let k = 0; k < j; k++) sum -= lower[i * size + k] * lower[j * size + k];
       if (i > j) lower[i * size + j] = sum / lower[j * size + j];
       else if (sum > 1e-11 * matrix[i * size + i]) lower[i * size + i] = Math.sqrt(sum);
-      else return null;
+      else return false;
     }
     for (let k = 0; k < i; k++) solved -= lower[i * size + k] * x[k];
     x[i] = solved / lower[i * size + i];
@@ -26,5 +29,5 @@ export function solvePositive(
     for (let k = i + 1; k < size; k++) sum -= lower[k * size + i] * x[k];
     x[i] = sum / lower[i * size + i];
   }
-  return x;
+  return true;
 }

@@ -16,12 +16,12 @@ export function equalTrials(
   data: FitData,
   trials: number | null
 ): { logLikelihood: number; parameter: number } {
-  const space = workspace({ ...data, trials });
+  const same = data.trials === trials ? data : { ...data, trials };
+  const space = workspace(same);
   const found = climb(space, alike(trials, sampleMoments(data).mean), 1e-12);
   const { p, ones, poissonPart } = found.levels;
   // Counts so far out that the law underflows there: then there is no slope to climb, but still a logarithm.
-  const value =
-    found.value > -Infinity ? found.value : lawLogLikelihood({ ...data, trials }, toLaw(found.levels));
+  const value = found.value > -Infinity ? found.value : lawLogLikelihood(same, toLaw(found.levels));
   const parameter = trials === null ? poissonPart : p.length > 0 ? p[0] : ones > 0 ? 1 : 0;
   return { logLikelihood: value, parameter };
 }

@@ -9,6 +9,7 @@ import { largestGSquared } from './largest-g-squared';
 import { redraw } from './redraw';
 import { refitted, type Buffers, type Refitted } from './refitted';
 import { chooseStatistics, type Statistic, type StatisticId } from './statistics';
+import { settledAt } from './settled-at';
 import { stream } from './streams';
 
 /** All that the draws of the fitted tests depend on; plain, so that it can be sent to another thread. */
@@ -49,7 +50,7 @@ const divergencesKept = 299;
 /**
  * Histograms drawn from the fitted law, each refitted, and whether their statistics reach those observed.
  *
- * A draw that no refit could bring near an observed value is answered without one (see Statistic.most), and a refit
+ * A draw that no refit could bring near an observed value is answered without one (see Statistic.needs), and a refit
  * ends once it has come so close that no statistic asked for can still reach its own. The answers are the same.
  */
 export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): FittedDraws {
@@ -61,14 +62,7 @@ export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): F
     // Equal up to rounding counts as equal: a resample that repeats the data must count.
     return { id, statistic, value, bar: value - 1e-9 * Math.max(1, Math.abs(value)) };
   });
-  const inReach = (wanted: number, resample: FitData, gSquared: number) => {
-    let open = 0;
-    for (let i = 0; i < questions.length; i++) {
-      const { statistic, bar } = questions[i];
-      if (wanted & (1 << i) && statistic.most(resample, gSquared) >= bar) open |= 1 << i;
-    }
-    return open;
-  };
+  const needed = new Float64Array(questions.length);
   const source = redraw(window, data, data.total);
   const buffers: Buffers = {};
   return {
@@ -78,16 +72,22 @@ export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): F
     draw(b, wanted) {
       const resample = source.draw(generator(seed, stream('fitted law', b)));
       const keep = b < divergencesKept;
-      const near = inReach(wanted, resample, largestGSquared(resample, window));
-      if (near === 0 && !keep) return { exceeds: 0, divergence: null };
+      const most = largestGSquared(resample, window);
+      let least = Infinity;
+      for (let i = 0; i < questions.length; i++) {
+        const { statistic, bar } = questions[i];
+        needed[i] = wanted & (1 << i) ? statistic.needs(resample, bar) : Infinity;
+        if (needed[i] <= most) least = Math.min(least, needed[i]);
+      }
+      if (least === Infinity && !keep) return { exceeds: 0, divergence: null };
       const itself = saturated(resample);
-      const open = (value: number) => inReach(near, resample, gSquaredLeft(itself, value, resample.total));
-      const settled = keep ? undefined : (value: number) => open(value) === 0;
+      const settled = keep ? Infinity : settledAt(itself, least, resample.total);
       const drawn = refitted(resample, levels, undefined, buffers, settled);
-      const left = open(drawn.fit.logLikelihood);
+      const left = gSquaredLeft(itself, drawn.fit.logLikelihood, resample.total);
       let exceeds = 0;
       for (let i = 0; i < questions.length; i++) {
-        if (left & (1 << i) && questions[i].statistic.of(drawn) >= questions[i].bar) exceeds |= 1 << i;
+        const { statistic, bar } = questions[i];
+        if (needed[i] <= left && statistic.of(drawn) >= bar) exceeds |= 1 << i;
       }
       return { exceeds, divergence: keep ? drawn.divergence : null };
     }

@@ -11,16 +11,19 @@ export function parityExcess({ data, law }: Refitted): number {
 }
 
 /**
- * Largest parityExcess under any law whose G² for these counts is at most `gSquared`: with q the share of even shots,
- * 2S·KL(q‖p) ≤ G² and KL ≥ 2(q − p)² (Pinsker), so |q − p| ≤ √(G²/4S) =: d, and z² ≤ S·d²/(p(1 − p)) at the worst such p.
+ * G² that a law must leave of these counts for parityExcess to reach `z`: with q the share of even shots and p their
+ * probability, G² ≥ 2S·KL(q‖p) ≥ 4S(q − p)² (Pinsker), and z² = S(q − p)²/(p(1 − p)) is reached at the least distance
+ * d = |q − p| on the side where p(1 − p) is smaller, (S + z²)d² + z²|1 − 2q|d = z²q(1 − q); there G² ≥ 4S·d².
  */
-export function mostParityExcess(data: FitData, gSquared: number): number {
-  const q = evenShots(data) / data.total;
-  const d = Math.sqrt(gSquared / (4 * data.total));
-  const low = q - d;
-  const high = q + d;
-  if (low <= 0 || high >= 1) return Infinity;
-  return d * Math.sqrt(data.total / Math.min(low * (1 - low), high * (1 - high)));
+export function parityNeeds(data: FitData, z: number): number {
+  if (!(z > 0)) return 0;
+  const { total } = data;
+  const q = evenShots(data) / total;
+  const square = z * z;
+  const lean = square * Math.abs(1 - 2 * q);
+  const d =
+    (Math.sqrt(lean * lean + 4 * (total + square) * square * q * (1 - q)) - lean) / (2 * (total + square));
+  return 4 * total * d * d;
 }
 
 function evenShots(data: FitData): number {

@@ -1,4 +1,3 @@
-import type { Settled } from '../fit/climb';
 import type { FitData } from '../fit/fit-data';
 import { refit, type Refit } from '../fit/refit';
 import { toLaw, type TrialLevels } from '../fit/trial-levels';
@@ -33,7 +32,7 @@ export function refitted(
   from: TrialLevels,
   known?: Refit,
   buffers: Buffers = {},
-  settled?: Settled
+  settled = Infinity
 ): Refitted {
   const fit = known ?? refit(data, from, (buffers.whole = workspace(data, buffers.whole)), settled);
   let rest: { data: FitData; fit: Refit } | null | undefined;

@@ -6,11 +6,14 @@ export function setEmptyAside(data: FitData): { rest: FitData; empty: number } {
   const empty = data.shots[0];
   let start = 1;
   while (start < data.shots.length && data.shots[start] === 0) start++;
-  const rest = {
-    ...data,
+  // Field by field, in the order of fitData, and rounded to a small integer: another shape would have the whole fit
+  // compiled once more.
+  const rest: FitData = {
+    trials: data.trials,
     first: start,
     shots: data.shots.subarray(start),
-    total: data.total - empty,
+    lump: data.lump,
+    total: Math.round(data.total - empty),
     withoutEmpty: true
   };
   return { rest, empty };

@@ -4,7 +4,7 @@ import type { Window } from '../laws/window';
 import type { TestId } from '../types';
 import { cells } from './cells';
 import { emptyExcess } from './empty-excess';
-import { mostParityExcess, parityExcess } from './parity-excess';
+import { parityExcess, parityNeeds } from './parity-excess';
 import type { Refitted } from './refitted';
 import { tailExcess } from './tail-excess';
 
@@ -12,11 +12,11 @@ import { tailExcess } from './tail-excess';
 export interface Statistic {
   of(histogram: Refitted): number;
   /**
-   * A value that `of` cannot exceed under any law whose G² for this histogram is at most `gSquared`. For nearly
-   * all it is √G²: merging cells never adds to a deviance (the data-processing inequality), and a root of the
-   * deviance of a tail, or of the likelihood that free empty shots gain, is one part of the whole.
+   * G² that a law must leave of this histogram for `of` to reach `bar`; the law may leave more and `of` still not reach
+   * it. For nearly all it is bar²: merging cells never adds to a deviance (the data-processing inequality), and a root
+   * of the deviance of a tail, or of the likelihood that free empty shots gain, is one part of the whole.
    */
-  most(drawn: FitData, gSquared: number): number;
+  needs(drawn: FitData, bar: number): number;
 }
 
 /** The low tail of the shots with n ≥ 1: not a test of its own, but evidence for or against coarsening. */
@@ -44,7 +44,7 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
   };
   const oneCount = spread > 0 ? null : 'Every shot had the same count.';
   const gSquared = ({ data: { total }, divergence }: Refitted) => 2 * total * divergence;
-  use('fit', { of: gSquared, most: (_, most) => most }, oneCount);
+  use('fit', { of: gSquared, needs: (_, bar) => bar }, oneCount);
   use(
     'high-tail',
     whole('high', high),
@@ -53,10 +53,10 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
   use('low-tail', whole('low', low), oneCount ?? (low >= 0 ? null : none('below')));
   use(
     'parity',
-    { of: parityExcess, most: mostParityExcess },
+    { of: parityExcess, needs: parityNeeds },
     oneCount ?? (data.lump ? 'The closing row lumps even and odd counts together.' : null)
   );
-  use('empty-shots', { of: emptyExcess, most: root }, noEmpty(observed));
+  use('empty-shots', { of: emptyExcess, needs: square }, noEmpty(observed));
   const rest = observed.rest();
   use(lowTailOfTheRest, ofTheRest(low), rest && low >= rest.data.first ? null : 'nothing there');
   return { statistics, notRun };
@@ -74,10 +74,10 @@ function noEmpty(observed: Refitted): string | null {
   return different > 1 ? null : 'The other shots all had one count, which tells nothing about empty ones.';
 }
 
-const root = (_: FitData, gSquared: number) => Math.sqrt(gSquared);
+const square = (_: FitData, bar: number) => (bar > 0 ? bar * bar : 0);
 
 function whole(side: 'high' | 'low', limit: number): Statistic {
-  return { of: ({ data, fit }) => tail(data, fit.window, side, limit), most: root };
+  return { of: ({ data, fit }) => tail(data, fit.window, side, limit), needs: square };
 }
 
 function ofTheRest(limit: number): Statistic {
@@ -85,7 +85,7 @@ function ofTheRest(limit: number): Statistic {
     const rest = histogram.rest();
     return rest ? tail(rest.data, rest.fit.window, 'low', limit) : 0;
   };
-  return { of, most: root };
+  return { of, needs: square };
 }
 
 function tail(data: FitData, window: Window, side: 'high' | 'low', limit: number): number {

@@ -88,8 +88,8 @@ describe('chooseStatistics', () => {
         const again = refitted(drawn, of.fit.levels);
         for (const [id, statistic] of statistics) {
           const value = statistic.of(again);
-          expect(value, id).toBeLessThanOrEqual(statistic.most(drawn, most));
-          if (value > 0.8 * statistic.most(drawn, most)) close++;
+          expect(statistic.needs(drawn, value), id).toBeLessThanOrEqual(most);
+          if (statistic.needs(drawn, value) > 0.64 * most) close++;
         }
       }
     }
