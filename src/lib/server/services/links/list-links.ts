@@ -1,0 +1,49 @@
+import { linkState } from '$lib/model/link/link-state';
+import type { TeamLink } from '$lib/model/link/team-link';
+import { and, desc, eq, sql } from 'drizzle-orm';
+import type { Database } from '../../db/client';
+import { link, linkVisit } from '../../db/schema';
+import type { Actor } from '../access/actor';
+import { linkableReport } from './linkable-report';
+
+export type ListedLinks = { ok: true; links: TeamLink[] } | { ok: false; reason: 'unknown' | 'not-allowed' };
+
+/** Links of a report, the newest first, with how they stand and how often they were opened. */
+export function listLinks(db: Database, actor: Actor, reportId: string, now = Date.now()): ListedLinks {
+  const found = linkableReport(db, actor, reportId);
+  if (!found.ok) return found;
+  const of = (outcome: 'opened' | 'refused') =>
+    sql<number>`count(case when ${linkVisit.outcome} = ${outcome} then 1 end)`;
+  const rows = db
+    .select({
+      id: link.id,
+      label: link.label,
+      audience: link.audience,
+      people: link.people,
+      shows: link.shows,
+      blind: link.blind,
+      hidesReferees: link.hidesReferees,
+      allowsRemarks: link.allowsRemarks,
+      visitLimit: link.visitLimit,
+      expiresAt: link.expiresAt,
+      revokedAt: link.revokedAt,
+      createdAt: link.createdAt,
+      visits: of('opened'),
+      refused: of('refused'),
+      lastVisitAt: sql<number | null>`max(case when ${linkVisit.outcome} = 'opened' then ${linkVisit.at} end)`
+    })
+    .from(link)
+    .leftJoin(linkVisit, eq(linkVisit.linkId, link.id))
+    .where(and(eq(link.reportId, reportId), eq(link.teamId, actor.teamId)))
+    .groupBy(link.id)
+    .orderBy(desc(link.createdAt), desc(link.id))
+    .all();
+  return {
+    ok: true,
+    links: rows.map((row) => ({
+      ...row,
+      people: JSON.parse(row.people) as string[],
+      state: linkState(row, row.visits, now)
+    }))
+  };
+}
