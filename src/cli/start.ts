@@ -1,7 +1,7 @@
 import { databaseFile, openDatabase } from '$lib/server/db/client';
 import { migrateDatabase } from '$lib/server/db/migrate';
 import { readEnv } from '$lib/server/env';
-import { SECURITY_HEADERS } from '$lib/server/handles/security-headers';
+import { SECURITY_HEADERS, STRICT_TRANSPORT } from '$lib/server/handles/security-headers';
 import { projectFolder } from '$lib/server/project-folder';
 import { seedSamples } from '$lib/server/services/seed-samples';
 import { createServer, type RequestListener } from 'node:http';
@@ -37,8 +37,11 @@ async function start(): Promise<void> {
   process.env.BODY_SIZE_LIMIT = String(env.BODY_SIZE_LIMIT);
   const built = pathToFileURL(join(projectFolder(), 'build', 'handler.js')).href;
   const { handler } = (await import(/* @vite-ignore */ built)) as { handler: RequestListener };
+  const headers = address.startsWith('https:')
+    ? { ...SECURITY_HEADERS, ...STRICT_TRANSPORT }
+    : SECURITY_HEADERS;
   answer = (request, response) => {
-    for (const [name, value] of Object.entries(SECURITY_HEADERS)) response.setHeader(name, value);
+    for (const [name, value] of Object.entries(headers)) response.setHeader(name, value);
     handler(request, response);
   };
 
