@@ -56,8 +56,29 @@ export const dataset = sqliteTable(
     deletedBy: text('deleted_by').references(() => person.id, { onDelete: 'set null' })
   },
   (table) => [
-    index('dataset_by_team').on(table.teamId, table.deletedAt, table.createdAt),
-    index('dataset_by_device').on(table.teamId, table.device, table.firmware),
+    // Holds every column that the team's table filters, searches or sorts by: counts lie in the middle of a row, and a
+    // row with a long shot list would be walked through page by page to reach what stands behind them.
+    index('dataset_for_list').on(
+      table.teamId,
+      table.deletedAt,
+      table.createdAt,
+      table.id,
+      table.name,
+      table.device,
+      table.firmware,
+      table.quenchTime,
+      table.quenchUnit,
+      table.geometry,
+      table.unit,
+      table.trials,
+      table.shots,
+      table.mean,
+      table.largest,
+      table.measuredOn,
+      table.createdBy,
+      table.notes
+    ),
+    index('dataset_by_device').on(table.teamId, table.deletedAt, table.device, table.firmware),
     index('dataset_by_digest').on(table.teamId, table.digest),
     index('dataset_by_file').on(table.fileId)
   ]

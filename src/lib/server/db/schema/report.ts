@@ -33,6 +33,8 @@ export const report = sqliteTable(
   },
   (table) => [
     index('report_by_dataset').on(table.datasetId, table.number),
+    // The last verdict of a dataset without opening a report, whose document lies before it in the row.
+    index('report_last').on(table.datasetId, table.deletedAt, table.number, table.verdict),
     index('report_by_team').on(table.teamId, table.deletedAt, table.createdAt)
   ]
 );
