@@ -1,6 +1,6 @@
-import { sayInterval } from '$lib/model/say-interval';
-import { formatCount } from '$lib/model/format-number';
 import type { Diagnosis } from '$lib/stats/types';
+import { formatCount } from '../format-number';
+import { sayInterval } from '../say-interval';
 
 /** How big the departure is: what each flag says of its size, and the distance from the best law. */
 export function howBig({ fit, flags }: Diagnosis): string[] {

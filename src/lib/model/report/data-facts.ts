@@ -1,0 +1,25 @@
+import type { Diagnosis } from '$lib/stats/types';
+import { formatCount, formatNumber } from '../format-number';
+import { GEOMETRIES } from '../labels';
+
+/** What was given, as pairs of what and value. */
+export function dataFacts({ data }: Diagnosis, name: string | null): [string, string][] {
+  const seen = data.counts.filter(([, shots]) => shots > 0);
+  const largest = data.lump?.from ?? seen.at(-1)?.[0] ?? 0;
+  return [
+    ...(name ? [['Name', name] as [string, string]] : []),
+    ['Shots', formatCount(data.shots)],
+    ['Trials in a shot, N', data.trials === null ? 'unknown' : formatCount(data.trials)],
+    [
+      'Counts seen',
+      `${formatCount(seen[0]?.[0] ?? largest)} to ${formatCount(largest)}${data.lump ? ' or more' : ''}`
+    ],
+    ['Unit', data.unit === 'pair' ? 'pairs of defects: n/2 out of N/2 is tested' : 'single defects'],
+    ['Counted on', GEOMETRIES[data.geometry]],
+    ['Chance to misread a site', data.misread === null ? 'not stated' : formatNumber(data.misread, 3)],
+    [
+      'Order of the shots',
+      data.ordered ? `known${data.batches ? `, ${formatCount(data.batches)} batches` : ''}` : 'not known'
+    ]
+  ];
+}
