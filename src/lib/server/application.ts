@@ -1,6 +1,7 @@
 import { databaseFile, openDatabase, type Database } from './db/client';
 import { migrateDatabase } from './db/migrate';
 import { readEnv } from './env';
+import { purgeAside } from './services/aside/purge';
 import { seedSamples } from './services/seed-samples';
 
 let open: Database | null = null;
@@ -14,7 +15,11 @@ export function database(): Database {
   const db = openDatabase(databaseFile(readEnv().SEVERALTY_DATA));
   migrateDatabase(db);
   seedSamples(db);
+  purgeAside(db);
+  // A server runs for months; unref, so that it is not what keeps the process alive.
+  const daily = setInterval(() => purgeAside(db), 24 * 60 * 60 * 1000).unref();
   process.once('sveltekit:shutdown', () => {
+    clearInterval(daily);
     db.$client.close();
     open = null;
   });

@@ -1,0 +1,63 @@
+import { and, desc, eq, isNotNull, isNull, sql } from 'drizzle-orm';
+import type { Database } from '../../db/client';
+import { dataset, person, report } from '../../db/schema';
+import type { Actor } from '../access/actor';
+import { mayWhere } from '../access/may-where';
+import { daysLeft } from './kept-aside';
+
+export interface AsideThing {
+  id: string;
+  kind: 'dataset' | 'report';
+  name: string;
+  deletedAt: number;
+  /** Who put it aside; null when that person is gone. */
+  by: string | null;
+  daysLeft: number;
+  /** Whether the actor may bring it back. */
+  mayRestore: boolean;
+}
+
+/**
+ * What was put aside and can still be brought back, latest first. A report that went with its dataset comes back with
+ * it, and is not listed by itself.
+ */
+export function listAside(db: Database, actor: Actor, now = Date.now()): AsideThing[] {
+  const may = (table: typeof dataset | typeof report) =>
+    sql<number>`${mayWhere(actor, 'restore', table.teamId, table.createdBy)}`.mapWith(Boolean);
+  const datasets = db
+    .select({
+      id: dataset.id,
+      name: dataset.name,
+      deletedAt: dataset.deletedAt,
+      by: person.name,
+      mayRestore: may(dataset)
+    })
+    .from(dataset)
+    .leftJoin(person, eq(person.id, dataset.deletedBy))
+    .where(and(mayWhere(actor, 'see', dataset.teamId), isNotNull(dataset.deletedAt)))
+    .orderBy(desc(dataset.deletedAt))
+    .all();
+  const reports = db
+    .select({
+      id: report.id,
+      name: sql<string>`'Report ' || ${report.number} || ' of ' || ${dataset.name}`,
+      deletedAt: report.deletedAt,
+      by: person.name,
+      mayRestore: may(report)
+    })
+    .from(report)
+    .innerJoin(dataset, eq(dataset.id, report.datasetId))
+    .leftJoin(person, eq(person.id, report.deletedBy))
+    .where(and(mayWhere(actor, 'see', report.teamId), isNotNull(report.deletedAt), isNull(dataset.deletedAt)))
+    .orderBy(desc(report.deletedAt))
+    .all();
+  return [
+    ...datasets.map((row) => ({ ...row, kind: 'dataset' as const })),
+    ...reports.map((row) => ({ ...row, kind: 'report' as const }))
+  ]
+    .flatMap(({ deletedAt, ...row }) =>
+      deletedAt === null ? [] : [{ ...row, deletedAt, daysLeft: daysLeft(deletedAt, now) }]
+    )
+    .filter((row) => row.daysLeft > 0)
+    .sort((a, b) => b.deletedAt - a.deletedAt);
+}

@@ -1,0 +1,51 @@
+import { and, lte, sql } from 'drizzle-orm';
+import type { Database } from '../../db/client';
+import { dataset, originalFile, report } from '../../db/schema';
+import { recordEvent } from '../events/record-event';
+import { KEPT_ASIDE } from './kept-aside';
+
+/** How long a file waits whose upload was never finished: a day. */
+const UNFINISHED = 24 * 60 * 60 * 1000;
+
+/**
+ * Removes for good what was put aside 30 days ago: datasets with all their reports, reports by themselves, and then
+ * files from which no dataset is left. Called at start and once a day.
+ *
+ * @returns how many of each went
+ */
+export function purgeAside(
+  db: Database,
+  now = Date.now()
+): { datasets: number; reports: number; files: number } {
+  return db.transaction(
+    (tx) => {
+      const old = now - KEPT_ASIDE;
+      const reports = tx
+        .delete(report)
+        .where(lte(report.deletedAt, old))
+        .returning({ id: report.id, teamId: report.teamId })
+        .all();
+      const datasets = tx
+        .delete(dataset)
+        .where(lte(dataset.deletedAt, old))
+        .returning({ id: dataset.id, teamId: dataset.teamId, name: dataset.name })
+        .all();
+      // A file comes before its datasets, while a person looks at what was read in it.
+      const files = tx
+        .delete(originalFile)
+        .where(
+          and(
+            lte(originalFile.createdAt, now - UNFINISHED),
+            sql`not exists (select 1 from dataset d where d.file_id = ${originalFile.id})`
+          )
+        )
+        .run().changes;
+      for (const { id, teamId } of reports)
+        recordEvent(tx, { action: 'report.purge', teamId, thing: id }, now);
+      for (const { id, teamId, name } of datasets)
+        recordEvent(tx, { action: 'dataset.purge', teamId, thing: id, detail: { name } }, now);
+      return { datasets: datasets.length, reports: reports.length, files };
+    },
+    { behavior: 'immediate' }
+  );
+}
