@@ -1,0 +1,65 @@
+import { and, eq } from 'drizzle-orm';
+import { recogniseConditions } from '../../../formats/conditions/recognise-conditions';
+import type { Reading } from '../../../formats/types';
+import type { FileProblem, Preview, PreviewDataset } from '../../../model/team/datasets/preview';
+import type { ReadingChoices } from '../../../model/team/datasets/reading-choices';
+import { BadInput } from '../../../stats/types';
+import type { Database } from '../../db/client';
+import { originalFile } from '../../db/schema';
+import type { Actor } from '../access/actor';
+import { mayWhere } from '../access/may-where';
+import { countFacts } from './count-facts';
+import { readFile } from './read-file';
+import { savedBefore } from './saved-before';
+
+export type PreviewOfFile = { ok: true; preview: Preview<Reading> } | { ok: false; reason: 'unknown' };
+
+/** What a stored file would become: its datasets with the conditions its columns state, or its problems by line. */
+export function previewFile(
+  db: Database,
+  actor: Actor,
+  fileId: string,
+  choices: ReadingChoices
+): PreviewOfFile {
+  const found = db
+    .select()
+    .from(originalFile)
+    .where(and(eq(originalFile.id, fileId), mayWhere(actor, 'upload', originalFile.teamId)))
+    .get();
+  if (!found) return { ok: false, reason: 'unknown' };
+  const { id, name, size, sha256, bytes } = found;
+  const file = { id, name, size, sha256 };
+  const read = readFile(bytes, name, choices);
+  const { reading } = read;
+  if (!read.ok) {
+    const { problems, more } = read;
+    return { ok: true, preview: { file, choices, reading, notes: [], datasets: [], problems, more } };
+  }
+  const problems: FileProblem[] = [];
+  const datasets = read.datasets.flatMap((dataset, index): PreviewDataset[] => {
+    try {
+      const { kind, shots, mean, smallest, largest, open, batches, digest } = countFacts(dataset.data);
+      const facts = { kind, shots, mean, smallest, largest, open, batches };
+      const { conditions, said } = recogniseConditions(dataset);
+      const before = savedBefore(db, actor, id, read.datasets.length > 1 ? dataset.name : null, digest);
+      return [{ index, ...facts, conditions, recognised: said, ...before }];
+    } catch (error) {
+      if (!(error instanceof BadInput)) throw error;
+      const message = read.datasets.length > 1 ? `${dataset.name}: ${error.reason}` : error.reason;
+      problems.push({ line: null, column: null, message, fix: 'Correct the file, or how it is read.' });
+      return [];
+    }
+  });
+  return {
+    ok: true,
+    preview: {
+      file,
+      choices,
+      reading,
+      notes: read.notes,
+      datasets,
+      problems: problems.slice(0, 20),
+      more: Math.max(0, problems.length - 20)
+    }
+  };
+}
