@@ -43,13 +43,13 @@ export function differentCounts({ data }: Pick<Diagnosis, 'data'>): number {
  * fit does; not the numbers themselves.
  */
 export function withoutCounts(diagnosis: Diagnosis): Summary {
-  const { counts: _counts, lump: _lump, digest: _digest, ...data } = diagnosis.data;
+  const { shots, trials, unit, geometry, misread, ordered, batches } = diagnosis.data;
   const { mean, variance, third, fourth, fano, dispersion } = diagnosis.moments;
   const wide = differentCounts(diagnosis) >= LEAST_FOR_LAW;
   return {
     format: 'severalty.summary/1',
     engine: diagnosis.engine,
-    data,
+    data: { shots, trials, unit, geometry, misread, ordered, batches },
     moments: {
       mean: roundedInterval(mean),
       variance: roundedInterval(variance),
@@ -67,12 +67,17 @@ export function withoutCounts(diagnosis: Diagnosis): Summary {
           }
         : null
     },
-    tests: diagnosis.tests.map(({ statistic: _statistic, ...test }) => test),
+    tests: diagnosis.tests.map(withoutStatistic),
     notRun: diagnosis.notRun,
     flags: diagnosis.flags.map(withoutNumbersOfShots),
     answer: { ...diagnosis.answer, because: reasons(diagnosis) },
     cautions: diagnosis.cautions.filter((caution) => !diagnosis.data.lump || !/lumps counts/.test(caution))
   };
+}
+
+function withoutStatistic(test: TestResult): Omit<TestResult, 'statistic'> {
+  const { id, p, pAdjusted, smallestP, source, resamples, stoppedEarly } = test;
+  return { id, p, pAdjusted, smallestP, source, resamples, stoppedEarly };
 }
 
 /** Flags about one count, or one half of them, give the shots with it; their words stay, their size goes. */

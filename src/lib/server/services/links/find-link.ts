@@ -1,13 +1,23 @@
-import { eq, getTableColumns, sql } from 'drizzle-orm';
+import { eq, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { dataset, link, linkVisit, person, report, team } from '../../db/schema';
 
 /** The link of a token's hash with its report and how often it was opened; undefined when there is none. */
 export function findLink(db: Pick<Database, 'select'>, tokenHash: string) {
-  const { tokenHash: _hash, label: _label, ...columns } = getTableColumns(link);
   return db
     .select({
-      ...columns,
+      id: link.id,
+      teamId: link.teamId,
+      reportId: link.reportId,
+      audience: link.audience,
+      people: link.people,
+      shows: link.shows,
+      blind: link.blind,
+      hidesReferees: link.hidesReferees,
+      allowsRemarks: link.allowsRemarks,
+      visitLimit: link.visitLimit,
+      expiresAt: link.expiresAt,
+      revokedAt: link.revokedAt,
       visits: sql<number>`(select count(*) from ${linkVisit}
         where ${linkVisit.linkId} = ${link.id} and ${linkVisit.outcome} = 'opened')`,
       /** The report or its dataset was put aside. */
