@@ -1,0 +1,71 @@
+import type { Diagnosis, Interval } from '$lib/stats/types';
+
+type Cell = string | number | null;
+
+/**
+ * Every number of a diagnosis document as a CSV file, one a line: `part,item,count,value,low,high`. Numbers are
+ * written in full, as in the JSON, so that both files hold the same values; a value that is not there is left empty.
+ * Lines end in CR LF, as RFC 4180 has it.
+ */
+export function documentCsv(document: Diagnosis): string {
+  const { data, engine, answer, moments, fit, tests, flags } = document;
+  const lines: Cell[][] = [['part', 'item', 'count', 'value', 'low', 'high']];
+  const one = (part: string, item: string, value: Cell, count: number | null = null): void => {
+    lines.push([part, item, count, value, null, null]);
+  };
+  const ranged = (
+    part: string,
+    item: string,
+    { value, low, high }: Interval,
+    count: number | null = null
+  ) => {
+    lines.push([part, item, count, value, low, high]);
+  };
+  one('document', 'format', document.format);
+  for (const key of ['version', 'seed', 'resamples', 'alpha', 'tolerance'] as const)
+    one('engine', key, engine[key]);
+  for (const key of ['digest', 'shots', 'trials', 'unit', 'geometry', 'misread', 'batches'] as const)
+    one('data', key, data[key]);
+  for (const key of ['verdict', 'smallestExcess', 'shotsToDecide'] as const) one('answer', key, answer[key]);
+  for (const key of ['mean', 'variance', 'third', 'fourth', 'fano', 'dispersion'] as const)
+    ranged('moments', key, moments[key]);
+  for (const key of ['ceiling', 'criticalTrials', 'pairCovariance'] as const)
+    one('moments', key, moments[key]);
+  for (const key of [
+    'logLikelihood',
+    'divergence',
+    'floor',
+    'gSquared',
+    'poissonPart',
+    'shotsToNotice'
+  ] as const)
+    one('fit', key, fit[key]);
+  ranged('fit', 'divergenceCorrected', fit.divergenceInterval);
+  for (const { p, trials } of fit.levels) one('fit', `level of ${trials} trials`, p);
+  for (const test of tests)
+    for (const key of ['statistic', 'p', 'pAdjusted', 'smallestP', 'resamples'] as const)
+      one(`test ${test.id}`, key, test[key]);
+  for (const flag of flags) one('flag', flag.id, flag.grade);
+  for (const point of document.distribution) {
+    one('distribution', 'shots', point.shots, point.count);
+    ranged('distribution', 'observed', { ...point, value: point.observed }, point.count);
+    one('distribution', 'fitted', point.fitted, point.count);
+  }
+  for (const point of document.rate.points) {
+    ranged('rate', 'empirical', { ...point, value: point.empirical }, point.count);
+    for (const key of ['fitted', 'limit', 'gaussian'] as const) one('rate', key, point[key], point.count);
+  }
+  for (const point of document.tails.points) {
+    ranged(`${point.side} tail`, 'observed', { ...point, value: point.observed }, point.count);
+    for (const key of ['fitted', 'chernoff', 'meanChernoff', 'hoeffding'] as const)
+      one(`${point.side} tail`, key, point[key], point.count);
+  }
+  return lines.map((line) => `${line.map(cellText).join(',')}\r\n`).join('');
+}
+
+/** The engine's version is the one text that an imported document chooses freely: it must not become a formula. */
+function cellText(cell: Cell): string {
+  if (typeof cell !== 'string') return cell === null ? '' : String(cell);
+  const plain = /^\s*[=+\-@]/.test(cell) ? `'${cell}` : cell;
+  return /[",\r\n]/.test(plain) ? `"${plain.replaceAll('"', '""')}"` : plain;
+}
