@@ -14,7 +14,7 @@ export type StoredFile =
 
 /**
  * Keeps a file byte for byte, once per team: the same bytes again give the file that is there. It has no datasets yet;
- * purgeAside drops it after a day when none were saved from it.
+ * purgeAside (services/aside) drops it after a day when none were saved from it.
  */
 export function storeFile(
   db: Database,

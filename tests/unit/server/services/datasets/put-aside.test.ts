@@ -1,12 +1,9 @@
-import { dataset, event, originalFile, report } from '$lib/server/db/schema';
-import { purgeAside } from '$lib/server/services/datasets/purge-aside';
 import { putAside } from '$lib/server/services/datasets/put-aside';
 import { restoreDataset } from '$lib/server/services/datasets/restore-dataset';
 import { describe, expect, it } from 'vitest';
-import { makeDataset, makeReport } from '../../../../support/datasets';
-import { setting, store } from './support';
+import { makeDataset } from '../../../../support/datasets';
+import { setting } from './support';
 
-const DAY = 86_400_000;
 const unknown = { ok: false, reason: 'unknown' };
 
 describe('putAside and restoreDataset', () => {
@@ -23,52 +20,6 @@ describe('putAside and restoreDataset', () => {
     expect(restoreDataset(db, lead, own)).toEqual(unknown);
     expect(putAside(db, lead, leads).ok).toBe(true);
     expect(restoreDataset(db, experimenter, leads)).toEqual(unknown);
-    db.$client.close();
-  });
-});
-
-describe('purgeAside', () => {
-  it('removes for good after 30 days, with reports and files that nothing is left of', () => {
-    const { db, lead } = setting();
-    const now = 100 * DAY;
-    const old = makeDataset(db, lead, { name: 'old', deletedAt: now - 30 * DAY - 1 });
-    const young = makeDataset(db, lead, { name: 'young', deletedAt: now - 30 * DAY + 1 });
-    const kept = makeDataset(db, lead, { name: 'kept' });
-    for (const id of [old, young]) makeReport(db, lead, id);
-    makeReport(db, lead, kept, { deletedAt: now - 31 * DAY });
-    expect(purgeAside(db, now)).toEqual({ datasets: 1, reports: 1, files: 1 });
-    expect(
-      db
-        .select()
-        .from(dataset)
-        .all()
-        .map(({ name }) => name)
-    ).toEqual(['young', 'kept']);
-    expect(
-      db
-        .select()
-        .from(report)
-        .all()
-        .map(({ datasetId }) => datasetId)
-    ).toEqual([young]);
-    expect(db.select().from(originalFile).all()).toHaveLength(2);
-    expect(
-      db
-        .select()
-        .from(event)
-        .all()
-        .map(({ action }) => action)
-    ).toEqual(['dataset.purge', 'report.purge']);
-    expect(purgeAside(db, now)).toEqual({ datasets: 0, reports: 0, files: 0 });
-    expect(db.$client.pragma('foreign_key_check')).toEqual([]);
-    db.$client.close();
-  });
-
-  it('keeps a file of an upload under way for a day', () => {
-    const { db, lead } = setting();
-    store(db, lead, '0,1\n1,2\n');
-    expect(purgeAside(db).files).toBe(0);
-    expect(purgeAside(db, Date.now() + DAY + 1000).files).toBe(1);
     db.$client.close();
   });
 });
