@@ -2,8 +2,10 @@ import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { parseArgs } from 'node:util';
+import { isMainThread } from 'node:worker_threads';
 import { benchDiagnoses, benchPmf, benchRefits } from './bench/sections';
 import { diagnosisChild } from './bench/time-diagnosis';
+import { serveDraws } from './shared/second-thread';
 
 const usage = `npm run bench -- [--only refits,diagnoses,pmf] [--peers DIR [--python PROGRAM]]
   --peers DIR   a scratch copy of the folder with fit_scipy.py, fit.R and pmf.R: timed in the same run
@@ -18,13 +20,17 @@ const { values } = parseArgs({
     peers: { type: 'string' },
     python: { type: 'string', default: 'python3' },
     child: { type: 'string' },
+    alone: { type: 'boolean' },
     help: { type: 'boolean' }
   }
 });
 const only = values.only?.split(',') ?? sections;
 const peers = values.peers ? { folder: values.peers, python: values.python } : null;
-if (values.child) {
-  await diagnosisChild(values.child);
+const script = fileURLToPath(import.meta.url);
+if (!isMainThread) {
+  serveDraws();
+} else if (values.child) {
+  await diagnosisChild(values.child, values.alone ? null : script);
 } else if (values.help || only.some((name) => !sections.includes(name))) {
   console.error(usage);
   process.exit(2);
@@ -33,6 +39,6 @@ if (values.child) {
   process.exit(2);
 } else {
   if (only.includes('refits')) benchRefits(peers);
-  if (only.includes('diagnoses')) benchDiagnoses(fileURLToPath(import.meta.url));
+  if (only.includes('diagnoses')) benchDiagnoses(script);
   if (only.includes('pmf')) benchPmf(peers);
 }

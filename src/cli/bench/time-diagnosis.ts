@@ -3,6 +3,7 @@ import { defaultOptions } from '$lib/stats/default-options';
 import { diagnose } from '$lib/stats/diagnose';
 import { bestLaw } from '$lib/stats/fit/best-law';
 import { fitData } from '$lib/stats/fit/fit-data';
+import { secondThread } from '../shared/second-thread';
 import { cpuSeconds } from './cpu';
 import { diagnosisCases } from './diagnosis-case';
 
@@ -20,8 +21,12 @@ export interface DiagnosisTimes {
   verdict: string;
 }
 
-/** What the child does: one fit, one diagnosis, and a line of JSON. */
-export async function diagnosisChild(id: string): Promise<void> {
+/**
+ * What the child does: one fit, one diagnosis, and a line of JSON.
+ *
+ * @param script what a second thread runs; null for one thread alone
+ */
+export async function diagnosisChild(id: string, script: string | null): Promise<void> {
   const { trials, histogram } = diagnosisCases.find((one) => one.id === id)!;
   const counts = histogram();
   const start = cpuSeconds();
@@ -29,7 +34,9 @@ export async function diagnosisChild(id: string): Promise<void> {
   const fitSeconds = cpuSeconds() - start;
   const from = performance.now();
   const fromCpu = cpuSeconds();
-  const { tests, answer } = await diagnose(counts, { ...defaultOptions, trials });
+  const helper = script === null ? undefined : secondThread(script);
+  const options = { ...defaultOptions, trials };
+  const { tests, answer } = await diagnose(counts, options, undefined, undefined, helper);
   const times: DiagnosisTimes = {
     cpuSeconds: cpuSeconds() - fromCpu,
     seconds: (performance.now() - from) / 1000,
@@ -38,6 +45,7 @@ export async function diagnosisChild(id: string): Promise<void> {
     draws: Math.max(...tests.map((test) => test.resamples)),
     verdict: answer.verdict
   };
+  helper?.end();
   process.stdout.write(JSON.stringify(times));
 }
 

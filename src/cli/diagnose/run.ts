@@ -8,6 +8,7 @@ import { defaultOptions } from '$lib/stats/default-options';
 import { diagnose } from '$lib/stats/diagnose';
 import { checkOptions } from '$lib/stats/input/check-options';
 import { BadInput, type Diagnosis } from '$lib/stats/types';
+import { secondThread } from '../shared/second-thread';
 import { chooseDataset } from './choose-dataset';
 import { type ExitCode, exitCodes, Refusal } from './exit-codes';
 import { help } from './help';
@@ -17,15 +18,19 @@ import { progressLine } from './progress-line';
 import { readInput } from './read-input';
 import { sayProblems } from './say-problems';
 
-/** Runs `diagnose` with its arguments, prints, and returns the exit code. */
-export async function runDiagnose(args: string[]): Promise<ExitCode> {
+/**
+ * Runs `diagnose` with its arguments, prints, and returns the exit code.
+ *
+ * @param script what a second thread runs; see secondThread
+ */
+export async function runDiagnose(args: string[], script: string): Promise<ExitCode> {
   try {
     const asked = parseOptions(args);
     if (asked === 'help') {
       process.stdout.write(help);
       return exitCodes.done;
     }
-    return await run(asked);
+    return await run(asked, script);
   } catch (error) {
     if (error instanceof Refusal) {
       process.stderr.write(`${error.lines.join('\n')}\n`);
@@ -37,13 +42,13 @@ export async function runDiagnose(args: string[]): Promise<ExitCode> {
   }
 }
 
-async function run(asked: Asked): Promise<ExitCode> {
+async function run(asked: Asked, script: string): Promise<ExitCode> {
   refuseOptions(asked);
   const result = readCounts(await readInput(asked.file), asked.read);
   if (!result.ok) throw new Refusal(sayProblems(asked.file, result.problems, result.more));
   const dataset = chooseDataset(asked.file, result.datasets, asked.dataset);
   const supplied = asked.supplied === null ? null : await readSupplied(asked.supplied);
-  const diagnosis = await check(asked, dataset, supplied);
+  const diagnosis = await check(asked, dataset, supplied, script);
   const about = [...sayReading(result.reading), ...result.notes, ...sayUsed(asked, dataset)];
   if (asked.json) {
     if (!asked.quiet)
@@ -65,16 +70,23 @@ function refuseOptions(asked: Asked): void {
   }
 }
 
-async function check(asked: Asked, dataset: Dataset, supplied: number[] | null): Promise<Diagnosis> {
+async function check(
+  asked: Asked,
+  dataset: Dataset,
+  supplied: number[] | null,
+  script: string
+): Promise<Diagnosis> {
   const progress = progressLine();
+  const helper = secondThread(script);
   try {
     // What the person says wins over what the file states, and that over the defaults.
     const options = { ...defaultOptions, ...dataset.suggested, ...asked.diagnose, supplied };
-    return await diagnose(dataset.data, options, progress.show);
+    return await diagnose(dataset.data, options, progress.show, undefined, helper);
   } catch (error) {
     if (error instanceof BadInput) throw new Refusal([`${inputName(asked.file)}: ${error.reason}`]);
     throw error;
   } finally {
+    helper?.end();
     progress.clear();
   }
 }

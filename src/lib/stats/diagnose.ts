@@ -19,6 +19,7 @@ import { momentReport } from './moments/moment-report';
 import { adjust } from './multiple/adjust';
 import { orderTests } from './order/order-tests';
 import { equalTrials } from './references/equal-trials';
+import type { DrawHelper } from './resampling/draw-helper';
 import { fittedTests } from './resampling/fitted-tests';
 import { pacer } from './resampling/pacer';
 import type { CountData, DiagnoseOptions, Diagnosis, OnProgress } from './types';
@@ -36,13 +37,15 @@ import { tailPoints } from './views/tail-points';
  * @param options see DiagnoseOptions; start from defaultOptions
  * @param onProgress told a share and a step every 60 ms or so
  * @param signal cancels: the promise then rejects with the signal's reason
+ * @param helper asked for some of the draws where they take long, as a rule a second thread; ended by who gave it
  * @throws BadInput, with a reason in words, for data or options that cannot be diagnosed
  */
 export async function diagnose(
   data: CountData,
   options: DiagnoseOptions,
   onProgress?: OnProgress,
-  signal?: AbortSignal
+  signal?: AbortSignal,
+  helper?: DrawHelper
 ): Promise<Diagnosis> {
   checkOptions(options);
   const given = toHistogram(data);
@@ -65,7 +68,7 @@ export async function diagnose(
     spread && trials !== 1
       ? await ceilingTest(counts, equal.parameter, drawing, pace.within(0.08, 0.12))
       : null;
-  const fitted = await fittedTests(counts, best, drawing, pace.within(0.12, 0.85));
+  const fitted = await fittedTests(counts, best, drawing, pace.within(0.12, 0.85), helper);
   await pace.step('shot order', 0.85);
   const order = await orderTests(data, drawing, pace.within(0.85, 0.97));
   await pace.step('writing', 0.97);

@@ -2,10 +2,12 @@ import type { BestLaw } from '../fit/best-law';
 import type { FitData } from '../fit/fit-data';
 import { SequentialP } from '../multiple/sequential-p';
 import type { TestId, TestResult } from '../types';
+import type { DrawHelper } from './draw-helper';
 import { expectedEmpty } from './empty-excess';
 import { fittedDraws } from './fitted-draws';
 import type { Pace } from './pace';
 import { progress } from './progress';
+import { SharedDraws } from './shared-draws';
 import { lowTailOfTheRest, type StatisticId } from './statistics';
 import { testResult } from './test-result';
 
@@ -24,24 +26,32 @@ export interface FittedTests {
 /**
  * Draws histograms from the fitted law, refits each, and recomputes every statistic (see fittedDraws);
  * p = (1 + #{≥ observed})/(B + 1), ended early by the rule of Besag & Clifford 1991.
+ *
+ * @param helper makes some of the draws elsewhere; the answers are the same with and without
  */
 export async function fittedTests(
   data: FitData,
   fit: BestLaw,
   options: { resamples: number; seed: number },
-  pace: Pace
+  pace: Pace,
+  helper?: DrawHelper
 ): Promise<FittedTests> {
   const { levels, logLikelihood } = fit;
-  const draws = fittedDraws({ data, levels, logLikelihood, seed: options.seed });
+  const job = { data, levels, logLikelihood, seed: options.seed };
+  const draws = fittedDraws(job);
+  const shared = new SharedDraws(draws, job, options.resamples, helper);
   const runs = draws.questions.map(({ id, value }, i) => {
     return { id, value, bit: 1 << i, sequence: new SequentialP(options.resamples) };
   });
   const nullDivergences: number[] = [];
+  let share = 0;
+  const breathe = () => pace.breathe(share);
   for (let b = 0, wanted = unfinished(runs); wanted !== 0; b++, wanted = unfinished(runs)) {
-    const { exceeds, divergence } = draws.draw(b, wanted);
+    const { exceeds, divergence } = await shared.answer(b, wanted, share, breathe);
     if (divergence !== null) nullDivergences.push(divergence);
     for (const { bit, sequence } of runs) sequence.push((exceeds & bit) !== 0);
-    await pace.breathe(Math.min(...runs.map(({ sequence }) => progress(sequence))));
+    share = Math.min(...runs.map(({ sequence }) => progress(sequence)));
+    await breathe();
   }
   const p = (id: StatisticId) => runs.find((run) => run.id === id)?.sequence.p ?? null;
   return {
