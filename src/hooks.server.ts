@@ -1,5 +1,6 @@
 import { building } from '$app/environment';
 import { database } from '$lib/server/application';
+import { issuerFormAction } from '$lib/server/handles/issuer-form-action';
 import { reportError } from '$lib/server/handles/report-error';
 import { securityHeaders } from '$lib/server/handles/security-headers';
 import { withDatabase } from '$lib/server/handles/with-database';
@@ -11,6 +12,6 @@ export const init: ServerInit = () => {
   if (!building) database();
 };
 
-export const handle = sequence(securityHeaders, withDatabase, withPerson);
+export const handle = sequence(securityHeaders, issuerFormAction, withDatabase, withPerson);
 
 export const handleError = reportError;

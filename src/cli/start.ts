@@ -1,6 +1,6 @@
 import { databaseFile, openDatabase } from '$lib/server/db/client';
 import { migrateDatabase } from '$lib/server/db/migrate';
-import { readEnv } from '$lib/server/env';
+import { isLocal, readEnv } from '$lib/server/env';
 import { SECURITY_HEADERS, STRICT_TRANSPORT } from '$lib/server/handles/security-headers';
 import { projectFolder } from '$lib/server/project-folder';
 import { seedSamples } from '$lib/server/services/seed-samples';
@@ -51,8 +51,17 @@ Severalty is ready at ${address}
 Open that address in a browser. Take an example beside the form, or drop a histogram of your own on it:
 the counts are worked on in the browser and sent nowhere. The application keeps its data in
 ${folder}
+${mailLine(address)}
 Press Ctrl+C to stop.
 `);
+}
+
+/** Where mail goes: the one thing that nobody would guess. */
+function mailLine(address: string): string {
+  const env = readEnv();
+  if (env.SMTP_URL) return `Mail goes out through ${new URL(env.SMTP_URL).host}.`;
+  if (isLocal(env)) return `Mail is not sent but shown at ${address}/outbox, to this machine alone.`;
+  return 'No mail can be sent: SMTP_URL is not set. Mailed links and invitations do not work.';
 }
 
 /** What to type into a browser for an address that is listened on. */

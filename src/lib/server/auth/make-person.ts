@@ -1,7 +1,5 @@
 import type { Database } from '../db/client';
-import { newId } from '../db/new-id';
-import { person } from '../db/schema';
-import { normalEmail } from './normal-email';
+import { insertPerson } from './insert-person';
 import { hashPassword } from './password-hash';
 import type { Person } from './person';
 
@@ -21,11 +19,6 @@ export async function makePerson(
   now = Date.now()
 ): Promise<{ ok: true; person: Person } | { ok: false; reason: 'taken' }> {
   const passwordHash = password === undefined ? null : await hashPassword(password);
-  const made = { id: newId(), email: normalEmail(email), name };
-  const { changes } = db
-    .insert(person)
-    .values({ ...made, passwordHash, emailVerifiedAt: verified ? now : null, createdAt: now })
-    .onConflictDoNothing({ target: person.email })
-    .run();
-  return changes === 1 ? { ok: true, person: made } : { ok: false, reason: 'taken' };
+  const made = insertPerson(db, { email, name, passwordHash, verified }, now);
+  return made ? { ok: true, person: made } : { ok: false, reason: 'taken' };
 }

@@ -19,11 +19,24 @@ export const SECURITY_HEADERS = {
  */
 export const STRICT_TRANSPORT = { 'strict-transport-security': 'max-age=31536000' } as const;
 
+/**
+ * Of pages that a link opens, whose addresses are secrets: never told to anybody, kept by no cache, found by no search.
+ * Posts from there go by `fetch`, whose Origin is not null under `no-referrer`; see src/routes/link.
+ */
+export const LINK_HEADERS = {
+  'referrer-policy': 'no-referrer',
+  'x-robots-tag': 'noindex, nofollow, noarchive',
+  'cache-control': 'no-store'
+} as const;
+
 /** Adds the headers to what Kit answers. Files under /_app are served before Kit: the start command adds them there. */
 export const securityHeaders: Handle = async ({ event, resolve }) => {
   const response = await resolve(event);
-  const headers =
-    event.url.protocol === 'https:' ? { ...SECURITY_HEADERS, ...STRICT_TRANSPORT } : SECURITY_HEADERS;
+  const headers = {
+    ...SECURITY_HEADERS,
+    ...(event.url.protocol === 'https:' ? STRICT_TRANSPORT : {}),
+    ...(event.url.pathname.startsWith('/link/') ? LINK_HEADERS : {})
+  };
   for (const [name, value] of Object.entries(headers)) response.headers.set(name, value);
   return response;
 };

@@ -3,14 +3,14 @@ import { authJs } from '../auth/auth-js';
 import type { Person } from '../auth/person';
 import { sessionCookie } from '../auth/session-cookie';
 
-/** The addresses of Auth.js that are used; its other ones (a session as JSON, its own pages) do not exist here. */
-const ITS_OWN = /^\/auth\/callback\/oidc$/;
+/** The one address of Auth.js that is used; its others (a session as JSON, pages of its own) do not exist here. */
+const CALLBACK = /^\/auth\/callback\/oidc$/;
 
-/** Puts who is signed in into `locals.person`, asking Auth.js once a request, and lets it answer its own addresses. */
+/** Puts who is signed in into `locals.person`, asking Auth.js once a request, and lets it answer the issuer's visitors. */
 export const withPerson: Handle = ({ event, resolve }) => {
   event.locals.person = null;
   const { pathname } = event.url;
-  if (/^\/auth(\/|$)/.test(pathname) && !(ITS_OWN.test(pathname) && event.request.method === 'GET'))
+  if (/^\/auth(\/|$)/.test(pathname) && !(CALLBACK.test(pathname) && event.request.method === 'GET'))
     return resolve(event);
   return authJs.handle({
     event,
@@ -21,7 +21,11 @@ export const withPerson: Handle = ({ event, resolve }) => {
         const session = await event.locals.auth();
         event.locals.person = (session?.user as Person | undefined) ?? null;
       }
-      return resolve(event);
+      const response = await resolve(event);
+      // What somebody signed in sees is not for caches, nor for the back button after they left.
+      if (event.locals.person && !response.headers.has('cache-control'))
+        response.headers.set('cache-control', 'private, no-store');
+      return response;
     }
   });
 };
