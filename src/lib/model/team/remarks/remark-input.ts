@@ -1,0 +1,50 @@
+import { z } from 'zod';
+import { REMARK_SECTIONS } from './sections';
+
+/** Longest remark, in characters: a page of text. */
+export const REMARK_LENGTH = 4000;
+/** Longest name a remark is signed with. */
+export const NAME_LENGTH = 80;
+
+/** Controls but line end and tab, and marks that turn the direction of writing: they make a text read as another. */
+const hidden = /[^\P{Cc}\n\t]|[\u2028\u2029\u202a-\u202e\u2066-\u2069]/gu;
+
+const plain = (text: string): string => text.replace(/\r\n?/g, '\n').replace(hidden, '').trim();
+
+/** What a remark says: plain text, line ends kept. */
+export const remarkBody = z
+  .string()
+  .transform(plain)
+  .pipe(
+    z
+      .string()
+      .min(1, 'Write the remark first.')
+      .max(
+        REMARK_LENGTH,
+        `A remark has at most ${REMARK_LENGTH} characters: cut it, or answer it with the rest.`
+      )
+  );
+
+/** A new remark: the first of a thread about a section, or an answer in a thread. */
+export const remarkInputSchema = z.object({
+  section: z.enum(REMARK_SECTIONS, { error: 'Choose the section that the remark is about.' }),
+  /** First remark of the thread that is answered; none for a new thread. */
+  threadId: z
+    .string()
+    .max(40)
+    .nullish()
+    .transform((id) => id || null),
+  body: remarkBody
+});
+
+export type RemarkInput = z.infer<typeof remarkInputSchema>;
+
+/** Name that a stranger signs a remark with; empty for none. */
+export const signatureSchema = z
+  .string()
+  .default('')
+  .transform((text) => plain(text).replace(/\s+/g, ' '))
+  .pipe(z.string().max(NAME_LENGTH, `A name has at most ${NAME_LENGTH} characters.`));
+
+/** Settling a thread, or opening it again. */
+export const settleSchema = z.object({ settled: z.boolean() });

@@ -1,0 +1,46 @@
+import { REMARK_LENGTH, remarkInputSchema, signatureSchema } from '$lib/model/team/remarks/remark-input';
+import { sectionOfPart } from '$lib/model/team/remarks/sections';
+import { describe, expect, it } from 'vitest';
+
+const bodyOf = (body: string) => remarkInputSchema.safeParse({ section: 'law', threadId: '', body });
+
+describe('remarkInputSchema', () => {
+  it('keeps line ends and tabs, and takes every other control sign out', () => {
+    const hostile = '  a\r\nb\tc\u0000\u001b[31m\u202Ed\r \n';
+    expect(bodyOf(hostile)).toMatchObject({
+      success: true,
+      data: { section: 'law', threadId: null, body: 'a\nb\tc[31md' }
+    });
+  });
+
+  it('leaves what looks like markup as the text it is', () => {
+    expect(bodyOf('<b onclick="x">n < 3 & m</b>').data?.body).toBe('<b onclick="x">n < 3 & m</b>');
+  });
+
+  it('refuses nothing said, too much said, and sections that are none', () => {
+    for (const empty of ['', ' \n\t ', '\u202E'])
+      expect(bodyOf(empty).error?.issues[0].message).toBe('Write the remark first.');
+    expect(bodyOf('x'.repeat(REMARK_LENGTH)).success).toBe(true);
+    expect(bodyOf('x'.repeat(REMARK_LENGTH + 1)).error?.issues[0].message).toContain('at most 4000');
+    expect(remarkInputSchema.safeParse({ section: 'elsewhere', body: 'x' }).success).toBe(false);
+  });
+});
+
+describe('signatureSchema', () => {
+  it('is one line of at most 80 characters', () => {
+    expect(signatureSchema.parse(' R.\n Invented ')).toBe('R. Invented');
+    expect(signatureSchema.parse(undefined)).toBe('');
+    expect(signatureSchema.safeParse('x'.repeat(81)).success).toBe(false);
+  });
+});
+
+describe('sectionOfPart', () => {
+  it('knows the parts of the result page', () => {
+    expect(['answer', 'counts-and-law', 'provenance', 'links'].map(sectionOfPart)).toEqual([
+      'answer',
+      'law',
+      'provenance',
+      null
+    ]);
+  });
+});
