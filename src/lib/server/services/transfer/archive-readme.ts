@@ -1,0 +1,21 @@
+import type { Manifest } from '$lib/model/team/transfer/archive-schema';
+
+/** What an archive holds, for people who open it without this program. */
+export function archiveReadme({ team, madeAt, leftOut }: Omit<Manifest, 'files'>): Uint8Array {
+  const aside = leftOut.datasets + leftOut.reports;
+  return new TextEncoder().encode(
+    `Everything that the team "${team.name}" had in Severalty on ${madeAt}.
+
+manifest.json     format severalty.team/1: size and sha256 of every other file
+team.json         members, and who saved each dataset and made each report
+datasets/N.json   counts and conditions of one dataset, format severalty.dataset/1
+datasets/N.csv    the same as a table
+originals/SHA256  the uploaded files byte for byte, each named by its sha256
+reports.json      for each report: its dataset, options, conditions then, remarks and links
+reports/N.json    the diagnosis documents byte for byte
+events.json       who did what when
+
+Links are told without their tokens: importing opens none of them again.
+${aside === 0 ? '' : `\n${leftOut.datasets} datasets and ${leftOut.reports} reports had been put aside, or went with a dataset put aside, and are left out.\n`}`
+  );
+}
