@@ -60,10 +60,15 @@ describe('a bad archive is refused whole', () => {
   it.each(['../../etc/passwd', '/etc/passwd', 'datasets/../x.json', 'originals/x', '__proto__', 'a\\b'])(
     'the name %s',
     (name) => {
-      const bytes = zipSync({
+      // The library cannot write __proto__ itself, so the name is written over another one.
+      const plain = zipSync({
         'manifest.json': new Uint8Array(),
-        [name]: new Uint8Array(1)
+        [name.replaceAll('_', '-')]: new Uint8Array(1)
       });
+      const bytes = Buffer.from(
+        Buffer.from(plain).toString('latin1').replaceAll('--proto--', '__proto__'),
+        'latin1'
+      );
       expect(refusalOf(bytes).reason).toBe('not-an-archive');
     }
   );
