@@ -2,7 +2,7 @@ import type { Diagnosis } from '$lib/stats/types';
 import type { Table } from './table';
 
 /** The distinct probabilities of the best law; no rows when it has none. */
-export const levelsTable = ({ fit }: Diagnosis): Table => ({
+export const levelsTable = ({ fit }: { fit: Pick<Diagnosis['fit'], 'levels' | 'poissonPart'> }): Table => ({
   columns: [
     { title: 'part', kind: 'text' },
     { title: 'how many', kind: 'whole' },

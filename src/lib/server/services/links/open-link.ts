@@ -41,7 +41,7 @@ export function openLink(
   token: string,
   person: { id: string } | null,
   now = Date.now(),
-  visit: string | null = null
+  visit?: string
 ): OpenLink {
   if (!SHAPE.test(token)) return { ok: false, reason: 'unknown' };
   const hash = hashToken(token);
@@ -51,7 +51,7 @@ export function openLink(
       if (!found) return { ok: false, reason: 'unknown' };
       const reason = refusal();
       if (reason === null) {
-        const kept = visit !== null && lasts(visit) ? visit : null;
+        const kept = visit !== undefined && lasts(visit) ? visit : null;
         if (kept !== null || linkState(found, found.visits, now) === 'open') {
           const opened = kept ?? noteVisit(tx, found.id, person?.id ?? null, 'opened', now);
           const { id, teamId, reportId, allowsRemarks, hidesReferees, blind, shows } = found;
