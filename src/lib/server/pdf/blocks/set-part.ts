@@ -1,0 +1,53 @@
+import type { Flow } from '../page/flow';
+import { PAGE } from '../page/geometry';
+import { rule } from '../page/rule';
+import { tag } from '../page/tags';
+import { STYLES } from '../type/styles';
+import type { Block, Part, Row } from './blocks';
+import { leastHeight, setBlock } from './set-block';
+import { setLines } from './set-lines';
+import { setNotes } from './set-notes';
+
+const GAP = 9;
+
+/** One part of the report under its own rule, with an entry in the outline. */
+export function setPart(flow: Flow, part: Part, look: { rule: boolean }): void {
+  const section = tag(flow.doc, flow.root, 'Sect');
+  flow.skip(17);
+  flow.need(STYLES.section.leading + 16 + leastHeight(flow, part.rows[0]?.blocks ?? []));
+  if (look.rule) {
+    rule(flow.doc, PAGE.left, flow.y, PAGE.whole, 'line');
+    flow.y += 8;
+  }
+  // From the left edge: pdfkit counts `left` from the right.
+  const place = { top: flow.y - 12, left: PAGE.width };
+  flow.doc.outline.addItem(part.title, place as { expanded?: boolean });
+  if (look.rule) {
+    const spans = [{ text: part.title, style: STYLES.section }];
+    setLines(flow, tag(flow.doc, section, 'H2'), 'H2', spans, PAGE.left, PAGE.main);
+    flow.y += 5;
+  }
+  part.rows.forEach((row, i) => {
+    if (i > 0) flow.skip(GAP + 3);
+    setRow(flow, row, section);
+  });
+}
+
+function setRow(flow: Flow, { blocks, notes }: Row, section: PDFKit.PDFStructureElement): void {
+  // The notes are drawn first, since they may run beside several pages' worth of blocks, but are read out after them.
+  flow.need(leastHeight(flow, blocks));
+  const main = tag(flow.doc, section, 'Div');
+  if (notes?.length) setNotes(flow, notes, tag(flow.doc, section, 'Div'));
+  blocks.forEach((block: Block, i) => {
+    if (i > 0 && !isTight(blocks[i - 1], block)) flow.skip(GAP);
+    if (i > 0) flow.need(leastHeight(flow, blocks.slice(i)));
+    setBlock(flow, block, main);
+  });
+}
+
+/** Headings and leads stand close to what they lead. */
+function isTight(before: Block, block: Block): boolean {
+  if (before.kind === 'heading' || before.kind === 'space' || block.kind === 'space') return true;
+  if (before.kind === 'masthead' || before.kind === 'verdict') return true;
+  return before.kind === 'paragraph' && (before.look === 'strong' || block.kind === 'paragraph');
+}

@@ -1,0 +1,63 @@
+import type { Diagnosis } from '$lib/stats/types';
+import type { Formula, Part } from '../blocks/blocks';
+import { NOTES } from './notes';
+
+const FORMULAS: Formula[] = [
+  {
+    name: 'Independent trials',
+    formula: 'G(z) = ∏_k (1 − p_k + p_k z)',
+    alt: 'G of z equals the product over k of 1 minus p k plus p k times z',
+    words:
+      'A count is a sum of independent trials when its generating function has this form, with any probabilities. With N unknown a Poisson part stands beside them.'
+  },
+  {
+    name: 'Ceiling',
+    formula: 'κ_2 ≤ μ(1 − μ/N)',
+    alt: 'kappa 2 is at most mu times 1 minus mu over N',
+    words: 'The variance of any such count, with mean μ. N unknown: at most μ.'
+  },
+  {
+    name: 'Rate',
+    formula: 'Î(n/N) = −(1/N) ln(h_n/S)',
+    alt: 'I hat of n over N equals minus 1 over N times the logarithm of h n over S',
+    words: 'Seen rate of count n, in nats; its interval is the exact one of the share, carried through.'
+  },
+  {
+    name: 'Limit',
+    formula: 'I(ρ) = sup_θ [θρ − (1/N) ∑_k ln(1 + p_k(e^θ − 1))]',
+    alt: 'I of rho equals the supremum over theta of theta rho minus 1 over N times the sum over k of the logarithm of 1 plus p k times e to the theta minus 1',
+    words: 'Large-deviation limit of the law, and the exponent of its Chernoff bound.'
+  },
+  {
+    name: 'Tails',
+    formula: 'P(X ≥ c) ≤ P(B ≥ c),  B ∼ Bin(N, μ/N)',
+    alt: 'The probability of X at least c is at most that of B at least c, with B binomial with N trials and mean mu',
+    words: 'Hoeffding, for c at least one above the mean; likewise below.'
+  },
+  {
+    name: 'Distance',
+    formula: 'D = ∑_n (h_n/S) ln((h_n/S)/f_n),  G^2 = 2SD',
+    alt: 'D equals the sum over n of h n over S times the logarithm of h n over S over f n; G squared equals 2 S D',
+    words: 'Divergence of the counts from the law f, in nats a shot.'
+  }
+];
+
+const SOURCES =
+  'Chernoff 1952. Clopper and Pearson 1934. Hoeffding 1956, Ann. Math. Stat. 27:713. Holm 1979. Berger and Boos 1994. Efron and Tibshirani 1993. Pitman 1997, J. Combin. Theory A 77:279. Hong 2013, Comput. Stat. Data Anal. 59:41. Ljung and Box 1978.';
+
+/** How it was done: formulas and their sources. */
+export const methodPart = (): Part => ({
+  title: 'Method',
+  rows: [
+    {
+      blocks: [{ kind: 'formulas', formulas: FORMULAS }],
+      notes: [{ title: 'Sources', paragraphs: [SOURCES] }, NOTES.notIndependent]
+    }
+  ]
+});
+
+/** What this report must not be used for. */
+export const cautionsPart = ({ cautions }: Diagnosis): Part => ({
+  title: 'Cautions',
+  rows: [{ blocks: [{ kind: 'list', items: cautions }] }]
+});

@@ -1,0 +1,33 @@
+import { engineFacts } from '$lib/model/report/engine-facts';
+import type { Block, Part } from '../blocks/blocks';
+import type { ReportInput } from '../report-input';
+import { NOTES } from './notes';
+import { sayWhen } from './say-when';
+
+/** Everything needed to get the same result again, and who made it unless the report is blind. */
+export function provenancePart({ document, documentSha256, provenance }: ReportInput): Part {
+  const { madeBy, madeAt, team, link } = provenance;
+  const [counts, ...engine] = engineFacts(document);
+  const who: [string, string | null][] = [
+    ['Made by', madeBy],
+    ['Team', team],
+    ['Made', madeAt === null ? null : sayWhen(madeAt)]
+  ];
+  const facts: [string, string][] = [
+    counts,
+    ['Document', `sha256:${documentSha256.replace(/^sha256:/, '')}`],
+    ...engine,
+    ...who.flatMap(([what, value]) => (value ? [[what, value] as [string, string]] : []))
+  ];
+  const address: Block[] =
+    link === null
+      ? []
+      : [
+          { kind: 'paragraph', text: 'This report can be read at', look: 'strong' },
+          { kind: 'link', address: link }
+        ];
+  return {
+    title: 'Where this result comes from',
+    rows: [{ blocks: [{ kind: 'facts', facts }, ...address], notes: [NOTES.again] }]
+  };
+}
