@@ -1,0 +1,35 @@
+import type { LinkOptions } from '$lib/model/link/link-options';
+
+type Said = Pick<
+  LinkOptions,
+  'audience' | 'people' | 'shows' | 'blind' | 'hidesReferees' | 'allowsRemarks' | 'expiresAt' | 'visitLimit'
+>;
+
+/** A day and time as people read them, UTC: the same for everybody who reads the page. */
+export const sayTime = (at: number): string =>
+  `${new Date(at).toISOString().slice(0, 16).replace('T', ' ')} UTC`;
+
+/** What a link does, a sentence a line: who may open it, what it shows, and until when. */
+export function sayLink(link: Said): string[] {
+  const who = {
+    anyone: 'Opens for anyone who has the address.',
+    named: `Opens for ${link.people.join(', ')}, who sign in with that address.`,
+    team: 'Opens for members of the team.'
+  }[link.audience];
+  const shows =
+    link.shows === 'report'
+      ? 'Shows the report without its counts, so nobody can recompute it.'
+      : 'Shows the report and its counts, so it can be recomputed.';
+  return [
+    who,
+    `${shows} ${link.blind ? 'Hides team, people, device and firmware.' : 'Names the team, the device and who made it.'}`,
+    link.allowsRemarks
+      ? `Takes remarks${link.hidesReferees ? ', signed “A referee”' : ''}.`
+      : `Takes no remarks${link.hidesReferees ? ', and names nobody who opened it' : ''}.`,
+    `${link.expiresAt === null ? 'Stays open until you close it' : `Closes on ${sayTime(link.expiresAt)}`}${
+      link.visitLimit === null
+        ? ''
+        : `, or after ${link.visitLimit} ${link.visitLimit === 1 ? 'visit' : 'visits'}`
+    }.`
+  ];
+}

@@ -1,0 +1,23 @@
+import { LEAST_TO_HIDE } from '$lib/model/link/summary';
+import { problem } from '../../../../../../problem';
+
+type Reason = 'unknown' | 'not-allowed' | 'past' | 'too-few-counts';
+
+const REFUSALS: Record<Reason, { status: number; code: string; title: string; detail?: string }> = {
+  unknown: { status: 404, code: 'not-found', title: 'There is nothing at this address.' },
+  'not-allowed': {
+    status: 403,
+    code: 'not-allowed',
+    title: 'Links are made and closed by leads, and by those who made the report.'
+  },
+  past: { status: 422, code: 'past', title: 'The link would have expired already: choose a later day.' },
+  'too-few-counts': {
+    status: 422,
+    code: 'too-few-counts',
+    title: `These counts cannot be kept back: with fewer than ${LEAST_TO_HIDE} different counts, mean, variance and number of shots give them away.`,
+    detail: 'Make a link that shows report and counts, or none.'
+  }
+};
+
+/** Problem details for what the services of links refuse. */
+export const linkRefusal = (reason: Reason): Response => problem(REFUSALS[reason]);
