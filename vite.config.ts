@@ -2,9 +2,10 @@ import { sveltekit } from '@sveltejs/kit/vite';
 import tailwindcss from '@tailwindcss/vite';
 import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
+import { jobWorker } from './vite.worker.config.ts';
 
 export default defineConfig({
-  plugins: [tailwindcss(), sveltekit()],
+  plugins: [tailwindcss(), jobWorker(), sveltekit()],
   resolve: {
     alias: {
       'sveltekit-superforms/adapters': fileURLToPath(

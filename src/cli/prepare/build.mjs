@@ -6,20 +6,29 @@ import { run } from './run.mjs';
 const CONFIGS = ['package.json', 'package-lock.json', 'tsconfig.json'];
 
 /**
- * What is built: the folder, the proof that a build ended, the sources it depends on, and Vite's arguments.
+ * What is built: the folder, the proofs that a build ended, the sources it depends on, and Vite's arguments.
  * The stamp lies in the built folder, so removing the folder removes the stamp.
  */
 export const TARGETS = {
   app: {
     folder: 'build',
-    proof: 'build/handler.js',
-    sources: ['src', 'static', 'svelte.config.js', 'vite.config.ts', 'tailwind.config.ts', ...CONFIGS],
+    // The threads of the server are built with it, beside it: adapter-node empties its own folder.
+    proofs: ['build/handler.js', 'build-worker/worker.js'],
+    sources: [
+      'src',
+      'static',
+      'svelte.config.js',
+      'vite.config.ts',
+      'vite.worker.config.ts',
+      'tailwind.config.ts',
+      ...CONFIGS
+    ],
     leaveOut: (/** @type {string} */ path) => path === 'src/cli',
     args: ['build', '--logLevel', 'warn']
   },
   cli: {
     folder: 'build-cli',
-    proof: 'build-cli/start.js',
+    proofs: ['build-cli/start.js'],
     sources: ['src/cli', 'src/lib', 'vite.cli.config.ts', ...CONFIGS],
     leaveOut: (/** @type {string} */ path) => path.endsWith('.svelte') || path.startsWith('src/cli/prepare'),
     args: ['build', '--config', 'vite.cli.config.ts', '--logLevel', 'warn']
@@ -30,9 +39,9 @@ export const TARGETS = {
 
 /** @param {string} root @param {Target} target @returns {boolean} whether the built folder is older than its sources */
 export function buildNeeded(root, target) {
-  const { folder, proof } = TARGETS[target];
+  const { folder, proofs } = TARGETS[target];
   const stamp = join(root, folder, '.stamp');
-  if (!existsSync(stamp) || !existsSync(join(root, proof))) return true;
+  if (!existsSync(stamp) || !proofs.every((proof) => existsSync(join(root, proof)))) return true;
   return readFileSync(stamp, 'utf8') !== sourcesOf(root, target);
 }
 

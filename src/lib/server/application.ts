@@ -1,14 +1,16 @@
 import { databaseFile, openDatabase, type Database } from './db/client';
 import { migrateDatabase } from './db/migrate';
 import { readEnv } from './env';
+import { startRunner, stopRunner } from './jobs/runner';
 import { purgeAside } from './services/aside/purge';
+import { saveReport } from './services/reports/save-report';
 import { seedSamples } from './services/seed-samples';
 
 let open: Database | null = null;
 
 /**
  * The database of this process: opened, migrated and given its samples at the first call, closed when the
- * server shuts down. Called by `init` in hooks.server.ts, so trouble shows at start and not at a request.
+ * server shuts down. With it start the threads that run diagnoses. Called by `init` in hooks.server.ts, so trouble shows at start and not at a request.
  */
 export function database(): Database {
   if (open) return open;
@@ -18,8 +20,10 @@ export function database(): Database {
   purgeAside(db);
   // A server runs for months; unref, so that it is not what keeps the process alive.
   const daily = setInterval(() => purgeAside(db), 24 * 60 * 60 * 1000).unref();
+  startRunner(db, saveReport);
   process.once('sveltekit:shutdown', () => {
     clearInterval(daily);
+    void stopRunner();
     db.$client.close();
     open = null;
   });
