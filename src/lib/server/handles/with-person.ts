@@ -7,12 +7,12 @@ import { sessionCookie } from '../auth/session-cookie';
 const CALLBACK = /^\/auth\/callback\/oidc$/;
 
 /** Puts who is signed in into `locals.person`, asking Auth.js once a request, and lets it answer the issuer's visitors. */
-export const withPerson: Handle = ({ event, resolve }) => {
+export const withPerson: Handle = async ({ event, resolve }) => {
   event.locals.person = null;
   const { pathname } = event.url;
   if (/^\/auth(\/|$)/.test(pathname) && !(CALLBACK.test(pathname) && event.request.method === 'GET'))
     return resolve(event);
-  return authJs.handle({
+  const answer = await authJs.handle({
     event,
     resolve: async (event) => {
       // Visitors without a session cost nothing.
@@ -28,4 +28,6 @@ export const withPerson: Handle = ({ event, resolve }) => {
       return response;
     }
   });
+  // Auth.js refuses with Response.redirect, whose headers nobody may add to; the security headers are yet to come.
+  return CALLBACK.test(pathname) ? new Response(answer.body, answer) : answer;
 };
