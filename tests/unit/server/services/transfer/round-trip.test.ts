@@ -31,7 +31,20 @@ async function fullTeam() {
     { kind: 'shots', shots: [2, 0, 1], batches: ['a', '=b', 'a,c'] },
     { name: 'Shots' }
   );
-  makeTrueDataset(db, lead, { ...inventedCounts, lump: { from: 3, shots: 4 } }, { name: 'Lump', part: 'x' });
+  makeTrueDataset(
+    db,
+    lead,
+    {
+      kind: 'histogram',
+      counts: [
+        [0, 30],
+        [1, 50],
+        [2, 20]
+      ],
+      lump: { from: 3, shots: 4 }
+    },
+    { name: 'Lump', part: 'x' }
+  );
   makeTrueDataset(db, lead, inventedCounts, { name: 'Gone', deletedAt: 5 });
   const { id: reportId } = await makeReport(db, {
     teamId: team.id,
