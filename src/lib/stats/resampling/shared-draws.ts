@@ -1,8 +1,14 @@
 import type { DrawHelper } from './draw-helper';
-import type { DrawAnswer, FittedDraws, FittedJob } from './fitted-draws';
+import { divergencesKept, type DrawAnswer, type FittedDraws, type FittedJob } from './fitted-draws';
 
-/** Milliseconds of drawing before a helper is asked, and that must be left: a thread takes 40 to start, and starts cold. */
-const worthIt = 100;
+/**
+ * Milliseconds that must be left for help to be worth it: a thread takes 40 to start, and its code starts cold. How much
+ * is left shows once the first draws, which are refitted whole, are over and `trial` have passed with others; where the
+ * first draws alone take `long`, later ones are taken to cost a quarter of them.
+ */
+const worthIt = 200;
+const trial = 20;
+const long = 250;
 /** Milliseconds that a range is meant to take, and ranges lent at a time: together longer than between two turns. */
 const rangeTime = 25;
 const mostLent = 3;
@@ -26,6 +32,8 @@ export class SharedDraws {
   private made = 0;
   private readonly start = Date.now();
   private turned = this.start;
+  /** The first draw that is not refitted whole, and when it came. */
+  private later: { from: number; since: number } | null = null;
 
   /** @param end number of draws at most */
   constructor(
@@ -74,17 +82,29 @@ export class SharedDraws {
 
   private lend(wanted: number, share: number): void {
     if (!this.helper || this.lent >= mostLent || this.next >= this.end) return;
+    this.helping ||= this.left(share) >= worthIt;
+    if (!this.helping) return;
     const passed = Date.now() - this.start;
-    if (!this.helping) {
-      this.helping = passed >= worthIt && passed * (1 - share) >= worthIt * share;
-      if (!this.helping) return;
-    }
     while (this.helper && this.lent < mostLent && this.next < this.end) {
       const usual = Math.round((rangeTime * this.made) / passed);
       const size = Math.max(1, Math.min(usual, Math.ceil((this.end - this.next) / 6)));
       this.send(this.helper, this.next, this.next + size, wanted);
       this.next += size;
     }
+  }
+
+  /** Milliseconds that the rest will take alone; 0 while nobody knows. */
+  private left(share: number): number {
+    const now = Date.now();
+    // So many draws are left at the present share; fewer than to the end where a test is about to stop.
+    const draws = share > 0 ? (this.next * (1 - share)) / share : 0;
+    if (this.next < divergencesKept) {
+      const passed = now - this.start;
+      return passed >= long ? ((passed / this.next) * draws) / 4 : 0;
+    }
+    this.later ??= { from: this.next, since: now };
+    const passed = now - this.later.since;
+    return passed >= trial ? (passed / (this.next - this.later.from)) * draws : 0;
   }
 
   private send(helper: DrawHelper, from: number, to: number, wanted: number): void {

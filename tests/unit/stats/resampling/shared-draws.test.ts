@@ -41,11 +41,11 @@ const inOrder: CountData = {
 };
 
 describe('a diagnosis with a helper', () => {
-  // The clock of the engine runs ten times as fast, so that help is worth it in a short test.
+  // The clock of the engine runs thirty times as fast, so that help is worth it in a short test.
   const start = Date.now();
   beforeEach(() => {
     const real = Date.now.bind(Date);
-    vi.spyOn(Date, 'now').mockImplementation(() => start + 10 * (real() - start));
+    vi.spyOn(Date, 'now').mockImplementation(() => start + 30 * (real() - start));
   });
   afterEach(() => vi.restoreAllMocks());
 
@@ -59,7 +59,7 @@ describe('a diagnosis with a helper', () => {
     const alone = JSON.stringify(await diagnose(data, options));
     const together = JSON.stringify(await diagnose(data, options, undefined, undefined, helper));
     expect(together).toBe(alone);
-    if (data === doubtful) expect(asked.length).toBeGreaterThan(100);
+    expect(asked.length).toBeGreaterThan(data === doubtful ? 100 : 0);
     // Nothing is lent twice.
     expect(new Set(asked).size).toBe(asked.length);
   });
@@ -102,14 +102,32 @@ describe('SharedDraws', () => {
   const { levels, logLikelihood } = bestLaw(data);
   const job: FittedJob = { data, levels, logLikelihood, seed: 9 };
 
-  it('asks no helper before it has been drawing for a while', async () => {
-    const spy = vi.fn<DrawHelper['answers']>(() => Promise.reject(new Error('not yet')));
-    const shared = new SharedDraws(fittedDraws(job), job, 40, { answers: spy });
-    const breathe = () => Promise.resolve();
-    const frozen = Date.now();
-    vi.spyOn(Date, 'now').mockReturnValue(frozen + 90);
-    for (let b = 0; b < 40; b++) await shared.answer(b, 1, b / 40, breathe);
-    expect(spy).not.toHaveBeenCalled();
+  const all = 2 ** fittedDraws(job).questions.length - 1;
+  const breathe = () => Promise.resolve();
+
+  /** Draws `count` of `end` draws, each of which takes so many milliseconds of a clock that nothing else moves. */
+  async function drawn(count: number, end: number, milliseconds: (b: number) => number): Promise<number> {
+    let now = 1e12;
+    vi.spyOn(Date, 'now').mockImplementation(() => now);
+    const spy = vi.fn<DrawHelper['answers']>(() => new Promise(() => undefined));
+    const shared = new SharedDraws(fittedDraws(job), job, end, { answers: spy });
+    for (let b = 0; b < count && spy.mock.calls.length === 0; b++) {
+      await shared.answer(b, all, b / end, breathe);
+      now += milliseconds(b);
+    }
     vi.restoreAllMocks();
+    return spy.mock.calls[0]?.[1].from ?? -1;
+  }
+
+  it('asks no helper where the rest takes less than a thread needs to start', async () => {
+    // 200 ms for the first 299, and 85 for all others.
+    expect(await drawn(1999, 1999, (b) => (b < 299 ? 0.67 : 0.05))).toBe(-1);
+  });
+
+  it('asks once it has seen how long the later draws take, or at once where the first take long', async () => {
+    const middle = await drawn(1999, 1999, () => 0.5);
+    expect(middle).toBeGreaterThan(299);
+    expect(middle).toBeLessThan(400);
+    expect(await drawn(1999, 1999, () => 5)).toBeLessThan(60);
   });
 });
