@@ -39,7 +39,7 @@ export function differentCounts({ data }: Pick<Diagnosis, 'data'>): number {
  * Gone: counts, closing row and their digest (short histograms can be guessed and hashed), the seen shares and their
  * intervals in distribution, rate and tails (an exact interval gives its count back), statistics of tests,
  * likelihoods and G² (whole sums of counts at sixteen digits), and the sentences that name numbers of shots. What
- * stays of numbers has three digits. The law and the mean tell roughly how often each count came, as any published
+ * stays of numbers has three digits. The law and the mean tell roughly how often each count came, as every published
  * fit does; not the numbers themselves.
  */
 export function withoutCounts(diagnosis: Diagnosis): Summary {

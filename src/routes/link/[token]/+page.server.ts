@@ -1,8 +1,48 @@
+import type { RemarkAuthor } from '$lib/server/services/remarks/remark-author';
+import { remarksOf } from '$lib/server/services/remarks/remarks-of';
+import type { RequestEvent } from '@sveltejs/kit';
 import { askLink } from '../../ask-link';
-import type { PageServerLoad } from './$types';
+import { remarkAction, settleAction } from '../../remark-actions';
+import type { Actions, PageServerLoad } from './$types';
 
 /** What the link shows, and nothing else: all of it stands in the page's source. */
 export const load: PageServerLoad = (event) => {
-  const { view } = askLink(event, 'see');
-  return { view };
+  const { view, link } = askLink(event, 'see');
+  const { db, person } = event.locals;
+  const viewer = person?.id ?? null;
+  return {
+    view,
+    remarks: link.allowsRemarks
+      ? {
+          threads: remarksOf(db, { reportId: link.reportId, via: { linkId: link.id }, viewer }),
+          /** How this reader's remarks are signed: null when that is for them to say. */
+          as: link.hidesReferees ? 'A referee' : (person?.name ?? null)
+        }
+      : null
+  };
+};
+
+type Event = RequestEvent<{ token: string }>;
+
+function placeOf(event: Event, form: FormData) {
+  const { link } = askLink(event, 'remark');
+  const { db, person } = event.locals;
+  const given = form.get('signedAs');
+  const signedAs = person?.name ?? (typeof given === 'string' ? given.replace(/\s+/g, ' ').slice(0, 80) : '');
+  const author: RemarkAuthor = { kind: 'referee', linkId: link.id, personId: person?.id ?? null, signedAs };
+  const address = `${event.url.origin}/team/${link.teamSlug}/reports/${link.reportId}`;
+  return { db, author, reportId: link.reportId, address };
+}
+
+export const actions: Actions = {
+  remark: async (event) => {
+    askLink(event, 'remark');
+    const form = await event.request.formData();
+    return remarkAction(placeOf(event, form), form);
+  },
+  settle: async (event) => {
+    askLink(event, 'remark');
+    const form = await event.request.formData();
+    return settleAction(placeOf(event, form), form);
+  }
 };

@@ -23,6 +23,7 @@ export function findLink(db: Pick<Database, 'select'>, tokenHash: string) {
       /** The report or its dataset was put aside. */
       gone: sql<number>`(${report.deletedAt} is not null or ${dataset.deletedAt} is not null)`,
       team: team.name,
+      teamSlug: team.slug,
       madeBy: person.name,
       counts: dataset.counts,
       number: report.number,

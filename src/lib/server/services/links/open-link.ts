@@ -15,7 +15,7 @@ export type LinkRefusal =
 /** What routes and services of remarks need of an open link; it never goes to the page. */
 export type OpenedLink = Pick<
   FoundLink,
-  'id' | 'teamId' | 'reportId' | 'allowsRemarks' | 'hidesReferees' | 'blind' | 'shows'
+  'id' | 'teamId' | 'teamSlug' | 'reportId' | 'allowsRemarks' | 'hidesReferees' | 'blind' | 'shows'
 >;
 
 export type OpenLink =
@@ -54,8 +54,8 @@ export function openLink(
         const kept = visit !== undefined && lasts(visit) ? visit : null;
         if (kept !== null || linkState(found, found.visits, now) === 'open') {
           const opened = kept ?? noteVisit(tx, found.id, person?.id ?? null, 'opened', now);
-          const { id, teamId, reportId, allowsRemarks, hidesReferees, blind, shows } = found;
-          const link = { id, teamId, reportId, allowsRemarks, hidesReferees, blind, shows };
+          const { id, teamId, teamSlug, reportId, allowsRemarks, hidesReferees, blind, shows } = found;
+          const link = { id, teamId, teamSlug, reportId, allowsRemarks, hidesReferees, blind, shows };
           return { ok: true, link, view: shownByLink(found, sharedThing(found)), visit: opened };
         }
       }
