@@ -1,4 +1,4 @@
-import type { CountData, Verdict } from '../../../stats/types';
+import type { Histogram, Verdict } from '../../../stats/types';
 import type { Conditions } from './conditions';
 
 /** A dataset as its own page shows it. Times are milliseconds since 1970. */
@@ -7,7 +7,10 @@ export interface OneDataset {
   conditions: Conditions;
   /** Grows with every edit. */
   version: number;
-  counts: CountData;
+  kind: 'histogram' | 'shots';
+  /** The counts, those of a shot list summed: its order is in the files. */
+  histogram: Histogram;
+  batches: number | null;
   /** Which dataset of a file that holds several. */
   part: string | null;
   digest: string;

@@ -1,5 +1,6 @@
 import { and, desc, eq, isNull } from 'drizzle-orm';
 import type { OneDataset } from '../../../model/team/datasets/one-dataset';
+import { toHistogram } from '../../../stats/input/to-histogram';
 import type { CountData } from '../../../stats/types';
 import type { Database } from '../../db/client';
 import { dataset, job, originalFile, person, report } from '../../db/schema';
@@ -34,6 +35,7 @@ export function datasetById(
     .get();
   if (!found) return { ok: false, reason: 'unknown' };
   const { row, by, file } = found;
+  const counts = JSON.parse(row.counts) as CountData;
   const reports = db
     .select({
       id: report.id,
@@ -60,7 +62,9 @@ export function datasetById(
       id,
       conditions: conditionsOf(row),
       version: row.version,
-      counts: JSON.parse(row.counts) as CountData,
+      kind: row.kind,
+      histogram: toHistogram(counts),
+      batches: counts.kind === 'shots' && counts.batches ? new Set(counts.batches).size : null,
       part: row.part,
       digest: row.digest,
       shots: row.shots,
