@@ -7,7 +7,9 @@ describe('readEnv', () => {
       SEVERALTY_DATA: 'data',
       HOST: '127.0.0.1',
       BODY_SIZE_LIMIT: 20_971_520,
-      SHUTDOWN_TIMEOUT: 3
+      SHUTDOWN_TIMEOUT: 3,
+      MAIL_FROM: 'Severalty <severalty@localhost>',
+      OIDC_NAME: 'your institution'
     });
   });
 
