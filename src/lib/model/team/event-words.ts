@@ -37,6 +37,11 @@ const SENTENCES: Record<string, Words> = {
     say: ({ who, detail }) =>
       `${who} imported an archive of “${detail.team}”: ${many(detail.datasets, 'dataset')}, ${many(detail.reports, 'report')}`
   },
+  'member.add': {
+    label: 'member added',
+    say: ({ who, thing, detail }) =>
+      `${who} added ${thing} to the team${detail.role ? ` as ${role(detail.role)}` : ''}`
+  },
   'member.role': {
     label: 'role changed',
     say: ({ who, thing, detail }) =>
@@ -98,7 +103,7 @@ const SENTENCES: Record<string, Words> = {
     label: 'report removed for good',
     say: () => 'A report was removed for good, 30 days after it was put aside'
   },
-  'remark.make': { label: 'remark', say: ({ who, thing }) => `${who} remarked on ${thing}` },
+  'remark.add': { label: 'remark', say: ({ who, thing }) => `${who} remarked on ${thing}` },
   'remark.settle': {
     label: 'remark settled',
     say: ({ who, thing }) => `${who} settled a remark on ${thing}`
@@ -109,7 +114,6 @@ const SENTENCES: Record<string, Words> = {
   },
   'link.make': { label: 'link made', say: ({ who, thing }) => `${who} made ${thing}` },
   'link.revoke': { label: 'link revoked', say: ({ who, thing }) => `${who} revoked ${thing}` },
-  'link.open': { label: 'link opened', say: ({ who, thing }) => `${who} opened ${thing}` },
   'job.queue': { label: 'diagnosis asked for', say: ({ who, thing }) => `${who} asked for ${thing}` },
   'job.cancel': { label: 'diagnosis cancelled', say: ({ who, thing }) => `${who} cancelled ${thing}` },
   'job.fail': { label: 'diagnosis failed', say: ({ thing }) => `${capital(thing)} failed` }

@@ -1,4 +1,4 @@
-import { and, desc, eq, isNotNull, isNull, lt, or, type SQL } from 'drizzle-orm';
+import { and, desc, eq, isNotNull, isNull, like, lt, or, type SQL } from 'drizzle-orm';
 import { eventWords } from '$lib/model/team/event-words';
 import type { Database } from '../../db/client';
 import { event, link, person } from '../../db/schema';
@@ -67,11 +67,11 @@ export function listEvents(
   const events = rows.slice(0, most).map(({ id, at, action, thing, detail: text, ...by }) => {
     const detail =
       text === null ? {} : (JSON.parse(text) as Record<string, string | number | boolean | null>);
-    const who = nameOf(by);
+    const who = nameOf(action, by);
     const words = eventWords({
       action,
       who,
-      thing: thingName(db, actor.teamId, { action, thing, detail }),
+      thing: thingName(db, actor.teamId, { action, thing, detail, linkId: by.linkId }),
       detail
     });
     return { id, at, action, words };
@@ -79,20 +79,31 @@ export function listEvents(
   return { events, next: rows.length > most ? events[events.length - 1].id : null };
 }
 
+/** Links are made and revoked by members, who are named; everything else with a link came through it. */
+const cameByLink = (action: string) => !action.startsWith('link.');
+
 /** A link that is gone cannot say any more whether it hid its referees, so it is taken to have. */
-function nameOf(by: {
-  name: string | null;
-  personId: string | null;
-  linkId: string | null;
-  hidden: boolean | null;
-}): string | null {
-  if (by.linkId !== null && by.hidden !== false) return 'A referee';
+function nameOf(
+  action: string,
+  by: {
+    name: string | null;
+    personId: string | null;
+    linkId: string | null;
+    hidden: boolean | null;
+  }
+): string | null {
+  const byLink = cameByLink(action) && by.linkId !== null;
+  if (byLink && by.hidden !== false) return 'A referee';
   if (by.name !== null) return by.name;
-  if (by.linkId !== null) return 'Somebody with a link';
+  if (byLink) return 'Somebody with a link';
   return by.personId === null ? null : 'Somebody who is gone';
 }
 
 /** Events whose person the team may know; see nameOf. */
 export function namable(): SQL | undefined {
-  return or(isNull(event.linkId), and(isNotNull(link.id), eq(link.hidesReferees, false)));
+  return or(
+    like(event.action, 'link.%'),
+    isNull(event.linkId),
+    and(isNotNull(link.id), eq(link.hidesReferees, false))
+  );
 }

@@ -1,12 +1,19 @@
 import { eq, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, job, link, person, remark, report } from '../../db/schema';
+import { dataset, job, link, person, report } from '../../db/schema';
+
+interface NamedBy {
+  action: string;
+  thing: string | null;
+  linkId: string | null;
+  detail: Record<string, unknown>;
+}
 
 /** What the thing of an event is called now; for what is gone, the name its event kept; null when nothing is known. */
 export function thingName(
   db: Database,
   teamId: string,
-  { action, thing, detail }: { action: string; thing: string | null; detail: Record<string, unknown> }
+  { action, thing, linkId, detail }: NamedBy
 ): string | null {
   if (thing === null) return null;
   const kept = typeof detail.name === 'string' ? detail.name : null;
@@ -16,14 +23,12 @@ export function thingName(
     case 'report':
       return reportName(db, teamId, thing);
     case 'link': {
-      const found = db.select().from(link).where(eq(link.id, thing)).get();
-      if (!found || found.teamId !== teamId) return null;
-      return `the link “${found.label}” to ${reportName(db, teamId, found.reportId) ?? 'a report'}`;
+      const name = reportName(db, teamId, thing) ?? 'a report';
+      const found = linkId === null ? undefined : db.select().from(link).where(eq(link.id, linkId)).get();
+      return found?.teamId === teamId ? `the link “${found.label}” to ${name}` : `a link to ${name}`;
     }
-    case 'remark': {
-      const found = db.select({ reportId: remark.reportId }).from(remark).where(eq(remark.id, thing)).get();
-      return reportName(db, teamId, found?.reportId ?? thing);
-    }
+    case 'remark':
+      return reportName(db, teamId, thing);
     case 'job': {
       const found = db
         .select({ datasetId: job.datasetId, teamId: job.teamId })

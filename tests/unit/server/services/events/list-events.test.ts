@@ -108,15 +108,19 @@ describe('listEvents', () => {
           createdAt: 1
         })
         .run();
-    const opened = { action: 'link.open', teamId: team.id, personId: referee.id };
-    recordEvent(db, { ...opened, linkId: ids.hiding, thing: ids.hiding });
+    const said = { action: 'remark.add', teamId: team.id, personId: referee.id, thing: reportId };
+    recordEvent(db, { ...said, linkId: ids.hiding });
     expect(eventFilters(db, lead).people).toEqual([]);
     expect(listEvents(db, lead, { personId: referee.id }).events).toEqual([]);
-    expect(listEvents(db, lead).events[0].words).toBe(
-      'A referee opened the link “round 2” to report 1 of “Invented chain”'
+    expect(listEvents(db, lead).events[0].words).toBe('A referee remarked on report 1 of “Invented chain”');
+    recordEvent(db, { ...said, linkId: ids.open });
+    expect(listEvents(db, lead).events[0].words).toMatch(/^Rea Feree remarked/);
+    // Members who make and revoke such links are named all the same.
+    const revoked = { action: 'link.revoke', teamId: team.id, personId: lead.personId };
+    recordEvent(db, { ...revoked, linkId: ids.hiding, thing: reportId });
+    expect(listEvents(db, lead, { personId: lead.personId }).events[0].words).toBe(
+      'Ada Invented revoked the link “round 2” to report 1 of “Invented chain”'
     );
-    recordEvent(db, { ...opened, linkId: ids.open, thing: ids.open });
-    expect(listEvents(db, lead).events[0].words).toMatch(/^Rea Feree opened/);
     // A link that is gone cannot say any more whether it hid them.
     db.delete(link).run();
     expect(JSON.stringify([listEvents(db, lead), eventFilters(db, lead)])).not.toMatch(/Rea Feree/);
