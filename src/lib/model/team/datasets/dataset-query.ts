@@ -74,7 +74,8 @@ export function writeDatasetQuery(query: Partial<DatasetQuery>): string {
   const fresh: Record<string, unknown> = freshQuery();
   const search = new URLSearchParams();
   for (const [name, value] of Object.entries(query)) {
-    if (value !== undefined && value !== null && value !== fresh[name]) search.set(name, String(value));
+    if (value !== undefined && value !== null && String(value) !== String(fresh[name]))
+      search.set(name, String(value));
   }
   // The unit says nothing without a time beside it.
   if (!search.has('quenchFrom') && !search.has('quenchTo')) search.delete('quenchUnit');

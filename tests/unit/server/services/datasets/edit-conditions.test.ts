@@ -4,6 +4,7 @@ import { dataset, event, person } from '$lib/server/db/schema';
 import { bulkEdit } from '$lib/server/services/datasets/bulk-edit';
 import { datasetById } from '$lib/server/services/datasets/dataset-by-id';
 import { editConditions } from '$lib/server/services/datasets/edit-conditions';
+import { namesOfDatasets } from '$lib/server/services/datasets/names-of-datasets';
 import { describe, expect, it } from 'vitest';
 import { makeDataset } from '../../../../support/datasets';
 import { setting } from './support';
@@ -114,6 +115,21 @@ describe('bulkEdit', () => {
         .all()
         .map(({ device }) => device)
     ).toEqual([null, null, null]);
+    db.$client.close();
+  });
+});
+
+describe('namesOfDatasets', () => {
+  it('names those that may be edited, and none of another team', () => {
+    const { db, lead, observer, stranger } = setting();
+    const [b, a] = [makeDataset(db, lead, { name: 'b' }), makeDataset(db, lead, { name: 'a' })];
+    const [theirs, aside] = [makeDataset(db, stranger), makeDataset(db, lead, { deletedAt: 1 })];
+    const names = [
+      { id: a, name: 'a' },
+      { id: b, name: 'b' }
+    ];
+    expect(namesOfDatasets(db, lead, [b, a, theirs, aside])).toEqual(names);
+    expect(namesOfDatasets(db, observer, [a, b])).toEqual([]);
     db.$client.close();
   });
 });
