@@ -3,10 +3,13 @@ import { migrateDatabase } from '$lib/server/db/migrate';
 import { isLocal, readEnv } from '$lib/server/env';
 import { SECURITY_HEADERS, STRICT_TRANSPORT } from '$lib/server/handles/security-headers';
 import { projectFolder } from '$lib/server/project-folder';
+import { demoPeopleOf } from '$lib/server/services/demo-team/demo-people-of';
+import { seedDemoTeam } from '$lib/server/services/demo-team/seed-demo-team';
 import { seedSamples } from '$lib/server/services/seed-samples';
 import { createServer, type RequestListener } from 'node:http';
 import { join, resolve } from 'node:path';
 import { pathToFileURL } from 'node:url';
+import { demoWords } from './start/demo-words';
 import { listen } from './start/listen';
 import { stopCleanly } from './start/stop-cleanly';
 
@@ -19,6 +22,9 @@ async function start(): Promise<void> {
   const db = openDatabase(databaseFile(folder));
   migrateDatabase(db);
   seedSamples(db);
+  const demo = isLocal(env) && env.SEVERALTY_DEMO === 'yes';
+  if (demo) await seedDemoTeam(db);
+  const demoPeople = demo ? demoPeopleOf(db) : [];
   db.$client.close();
 
   // Listening comes first: the server must know its own address (ORIGIN) before it is loaded, and a port
@@ -52,7 +58,7 @@ Open that address in a browser. Take an example beside the form, or drop a histo
 the counts are worked on in the browser and sent nowhere. The application keeps its data in
 ${folder}
 ${mailLine(address)}
-Press Ctrl+C to stop.
+${demoWords(address, demoPeople)}Press Ctrl+C to stop.
 `);
 }
 

@@ -35,6 +35,8 @@ const shape = z.object({
   OIDC_NAME: z.string().max(60).default('your institution'),
   /** Header that a proxy puts the client's address in; adapter-node reads it. Not set: the peer's own address. */
   ADDRESS_HEADER: z.string().optional(),
+  /** Whether an empty database gets an invented team; in local mode only, see isLocal. */
+  SEVERALTY_DEMO: z.enum(['yes', 'no']).default('yes'),
   /** Set by npm: the script that it runs. */
   npm_lifecycle_event: z.string().optional()
 });

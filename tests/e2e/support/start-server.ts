@@ -27,7 +27,14 @@ export async function startServer(
   [program, ...args]: string[] = [process.execPath, 'build-cli/start.js']
 ): Promise<RunningServer> {
   const data = mkdtempSync(join(tmpdir(), 'severalty-'));
-  const own = { ...process.env, PORT: '0', SEVERALTY_DATA: data, NODE_ENV: 'production', ...env };
+  const own = {
+    ...process.env,
+    PORT: '0',
+    SEVERALTY_DATA: data,
+    NODE_ENV: 'production',
+    SEVERALTY_DEMO: 'no',
+    ...env
+  };
   // Settings of the developer's own shell must not reach the tests.
   for (const name of [
     'ORIGIN',
