@@ -101,7 +101,7 @@ export function makeRunner(db: Database, saveReport: SaveReport, settings: Runne
       } catch (error) {
         const why = error instanceof Error ? error.message : String(error);
         log('error', 'the end of a job was not written', { job: id, why });
-        const passing = /^SQLITE_(BUSY|LOCKED|FULL|IOERR)/.test((error as { code?: string }).code ?? '');
+        const passing = isPassing(error);
         // Else, given up by this process, it waits for the next look (see below).
         if (end.kind === 'failed' && !passing) return;
         if (!passing || second >= PATIENCE)
@@ -155,6 +155,13 @@ export function makeRunner(db: Database, saveReport: SaveReport, settings: Runne
       await pool.destroy();
     }
   };
+}
+
+/** Locked or full: that passes. Drizzle wraps some of the driver's errors. */
+function isPassing(error: unknown): boolean {
+  if (!(error instanceof Error)) return false;
+  const { code = '' } = error as { code?: string };
+  return /^SQLITE_(BUSY|LOCKED|FULL|IOERR)/.test(code) || isPassing(error.cause);
 }
 
 /** The database may be locked or full for a while: that is told, and tried again at the next look. */

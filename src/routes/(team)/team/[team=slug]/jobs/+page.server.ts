@@ -1,0 +1,30 @@
+import { readJobQuery } from '$lib/model/team/jobs/job-query';
+import { enqueueJobs } from '$lib/server/services/jobs/enqueue-jobs';
+import { listJobs } from '$lib/server/services/jobs/list-jobs';
+import { error, fail, redirect } from '@sveltejs/kit';
+import { askTeam } from '../../../../ask';
+import { acting } from '../datasets/answers';
+import { readRequest } from './read-request';
+import { refusalOf } from './refusals';
+import type { Actions, PageServerLoad } from './$types';
+
+export const load: PageServerLoad = (event) => {
+  const { actor } = askTeam(event, 'see');
+  return { list: listJobs(event.locals.db, actor, readJobQuery(event.url.searchParams)) };
+};
+
+export const actions: Actions = {
+  default: async (event) => {
+    const { team, actor } = askTeam(event, 'diagnose');
+    const read = await readRequest(event.request);
+    if (!read.ok) return fail(read.problem.status, { message: read.problem.title });
+    const { dataset, ...hardness } = read.asked;
+    return acting({}, () => {
+      const result = enqueueJobs(event.locals.db, actor, dataset, hardness);
+      if (result.ok) redirect(303, `/team/${team.slug}/jobs`);
+      const { status, title, code } = refusalOf(result);
+      if (status === 404) error(404, { message: 'There is no page at this address.', code });
+      return fail(status, { message: title });
+    });
+  }
+};
