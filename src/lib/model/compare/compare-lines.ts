@@ -2,13 +2,21 @@ import type { ComparedPart, ComparedValue } from './compared';
 
 export type NamedValue = readonly [name: string, first: ComparedValue, second: ComparedValue];
 
+/** Numbers that agree to this share of their size are told apart by rounding alone. */
+const ROUNDING = 1e-6;
+
 /** A part from the values of both results: a line has changed when its values are not exactly the same. */
 export function compareLines(id: ComparedPart['id'], title: string, values: NamedValue[]): ComparedPart {
-  const lines = values.map(([name, first, second]) => ({
-    name,
-    first,
-    second,
-    changed: JSON.stringify(first) !== JSON.stringify(second)
-  }));
-  return { id, title, lines, changes: lines.filter((line) => line.changed).length };
+  const lines = values.map(([name, first, second]) => {
+    const changed = JSON.stringify(first) !== JSON.stringify(second);
+    return { name, first, second, changed, slight: changed && close(first, second) };
+  });
+  return { id, title, lines, changes: lines.filter((line) => line.changed && !line.slight).length };
+}
+
+function close(first: ComparedValue, second: ComparedValue): boolean {
+  if (typeof first === 'number' && typeof second === 'number')
+    return Math.abs(first - second) <= ROUNDING * Math.max(Math.abs(first), Math.abs(second));
+  if (typeof first !== 'object' || typeof second !== 'object' || !first || !second) return first === second;
+  return (['value', 'low', 'high'] as const).every((key) => close(first[key], second[key]));
 }

@@ -13,7 +13,10 @@ export interface ComparedLine {
   name: string;
   first: ComparedValue;
   second: ComparedValue;
+  /** The values differ in some digit. */
   changed: boolean;
+  /** They differ by no more than rounding does: every number agrees to six digits. */
+  slight: boolean;
 }
 
 /** Lines that belong together, such as the options. */
@@ -21,7 +24,7 @@ export interface ComparedPart {
   id: 'options' | 'engine' | 'data' | 'answer' | 'tests' | 'moments' | 'fit' | 'flags';
   title: string;
   lines: ComparedLine[];
-  /** How many of the lines changed. */
+  /** How many of the lines changed by more than rounding. */
   changes: number;
 }
 

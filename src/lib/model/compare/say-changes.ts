@@ -8,7 +8,9 @@ const list = (names: string[]): string =>
 export function sayChanges(first: Comparable, second: Comparable, parts: ComparedPart[]): string[] {
   const [before, after] = [first.document, second.document];
   const changed = (id: ComparedPart['id']): string[] =>
-    parts.find((part) => part.id === id)?.lines.flatMap((line) => (line.changed ? [line.name] : [])) ?? [];
+    parts
+      .find((part) => part.id === id)
+      ?.lines.flatMap((line) => (line.changed && !line.slight ? [line.name] : [])) ?? [];
   const sentences: string[] = [];
   sentences.push(
     before.answer.verdict === after.answer.verdict
@@ -27,6 +29,7 @@ export function sayChanges(first: Comparable, second: Comparable, parts: Compare
   if (options.length === 1 && options[0] === 'Seed' && !versions)
     sentences.push('Only the random draws differ: how far the p-values moved is how far chance moves them.');
   const results = parts.filter(({ id }) => !['options', 'engine', 'data'].includes(id));
-  if (results.every(({ changes }) => changes === 0)) sentences.push('No number of the result changed.');
+  if (results.every(({ changes }) => changes === 0))
+    sentences.push('No number of the result changed by more than rounding.');
   return sentences;
 }

@@ -17,7 +17,7 @@ describe('compareResults', () => {
     const comparison = compareResults(one, one);
     expect(comparison.changes).toBe(0);
     expect(comparison.parts.every((p) => p.lines.every((line) => !line.changed))).toBe(true);
-    expect(comparison.summary).toContain('No number of the result changed.');
+    expect(comparison.summary).toContain('No number of the result changed by more than rounding.');
   });
 
   it('names the option that differs, and the numbers that follow from it', async () => {
@@ -73,7 +73,8 @@ describe('compareResults', () => {
       name: 'Drift',
       first: 'not raised',
       second: 'hinted at',
-      changed: true
+      changed: true,
+      slight: false
     });
   });
 
@@ -82,5 +83,16 @@ describe('compareResults', () => {
     const other = structuredClone(one);
     other.document.data.digest = `sha256:${'0'.repeat(64)}`;
     expect(compareResults(one, other).summary.join(' ')).toContain('different counts');
+  });
+
+  it('tells rounding from change', async () => {
+    const one = await diagnoseInvented();
+    const other = structuredClone(one);
+    other.document.fit.logLikelihood *= 1 + 1e-12;
+    other.document.moments.ceiling *= 1 + 1e-4;
+    const line = (id: string, name: string) => part(one, other, id).lines.find((l) => l.name === name);
+    expect(line('fit', 'Log-likelihood')).toMatchObject({ changed: true, slight: true });
+    expect(line('moments', 'Ceiling of the variance')).toMatchObject({ changed: true, slight: false });
+    expect(compareResults(one, other).changes).toBe(1);
   });
 });
