@@ -1,5 +1,4 @@
-import { legendSample, SAMPLE } from '$lib/charts/legend-sample';
-import type { LegendEntry, Picture } from '$lib/charts/picture';
+import type { Picture } from '$lib/charts/picture';
 import type { Flow } from '../page/flow';
 import { PAGE } from '../page/geometry';
 import { tagged, type Element } from '../page/tags';
@@ -8,48 +7,76 @@ import type { Pen } from '../type/pen';
 import { STYLES } from '../type/styles';
 import type { Block } from './blocks';
 import { drawMarks } from './draw-marks';
+import { drawLegend, legendBelow, legendBeside, type Legend } from './legend-layout';
 import { setHeading } from './set-heading';
 import { setParagraph } from './set-paragraph';
 
 type Figure = Block & { kind: 'figure' };
 
-/** Points for a unit of a chart: its letters of 13 units come to 8 points. */
-const SCALE = 0.62;
-const SAMPLE_SCALE = 0.66;
-const LEGEND_ROW = 12.5;
 const TITLE_GAP = 5;
+const LEGEND_GAP = 5;
 
-/** Widths and scales to try, the roomiest first; the others only where a chart has to share a page. */
-const SIZES = [
-  { width: PAGE.main / SCALE, scale: SCALE },
-  { width: 470, scale: SCALE },
-  { width: 400, scale: SCALE },
-  { width: 400, scale: 0.56 },
-  { width: 400, scale: 0.5 }
+/** How large to draw: width in a chart's own units, points for each of them, and where its legend goes. */
+interface Sizing {
+  width: number;
+  scale: number;
+  beside: boolean;
+}
+
+/** Letters of 13 units come to 8 points. */
+const SCALE = 0.62;
+const WHOLE: Sizing = { width: PAGE.main / SCALE, scale: SCALE, beside: false };
+
+/** What to try where a chart has to share a page, the roomiest first. */
+const SMALLER: Sizing[] = [
+  { width: 470, scale: SCALE, beside: false },
+  { width: 400, scale: SCALE, beside: true },
+  { width: 420, scale: 0.57, beside: true },
+  { width: 440, scale: 0.53, beside: true },
+  { width: 450, scale: 0.5, beside: true }
 ];
 
 interface Fitted {
   picture: Picture;
   scale: number;
+  legend: Legend;
+  /** Where the legend stands, from the corner of the drawing. */
+  legendAt: [x: number, y: number];
+  /** Drawing and legend together. */
+  bodyHeight: number;
+  /** With the title. */
   height: number;
 }
 
-function fitted({ title, draw, fit }: Figure, pen: Pen, room: number): Fitted {
+function sized({ title, draw }: Figure, { width, scale, beside }: Sizing, pen: Pen): Fitted {
+  const picture = draw({ width, text: 13 });
+  const [drawnWidth, drawnHeight] = [picture.width * scale, picture.height * scale];
+  const column = drawnWidth + 10;
+  const legend = beside
+    ? legendBeside(picture.legend, PAGE.main - column, pen)
+    : legendBelow(picture.legend, PAGE.main, pen);
+  const bodyHeight = beside
+    ? Math.max(drawnHeight, legend.height + 12)
+    : drawnHeight + LEGEND_GAP + legend.height;
   const titleLines = breakLines([{ text: title, style: STYLES.heading }], PAGE.main, pen).length;
-  const sized = ({ width, scale }: (typeof SIZES)[number]): Fitted => {
-    const picture = draw({ width, text: 13 });
-    const rows = legendRows(picture.legend, pen).length;
-    const height =
-      titleLines * STYLES.heading.leading + TITLE_GAP + picture.height * scale + 4 + rows * LEGEND_ROW + 2;
-    return { picture, scale, height };
+  return {
+    picture,
+    scale,
+    legend,
+    legendAt: beside ? [column, 12] : [0, drawnHeight + LEGEND_GAP],
+    bodyHeight,
+    height: titleLines * STYLES.heading.leading + TITLE_GAP + bodyHeight + 2
   };
-  const first = sized(SIZES[0]);
-  if (!fit || first.height <= room) return first;
-  for (const size of SIZES.slice(1)) {
-    const smaller = sized(size);
+}
+
+function fitted(figure: Figure, pen: Pen, room: number): Fitted {
+  const whole = sized(figure, WHOLE, pen);
+  if (!figure.fit || whole.height <= room) return whole;
+  for (const sizing of SMALLER) {
+    const smaller = sized(figure, sizing, pen);
     if (smaller.height <= room) return smaller;
   }
-  return first;
+  return whole;
 }
 
 /** Height of a figure without its notes, as it would be set in the room that is left. */
@@ -58,49 +85,20 @@ export const figureHeight = (flow: Flow, figure: Figure): number =>
 
 /** A chart: its finding as the heading, the drawing, its legend, and what it gathers together in words. */
 export function setFigure(flow: Flow, figure: Figure, parent: Element): void {
-  const { picture, scale } = fitted(figure, flow.pen, flow.room);
+  const { picture, scale, legend, legendAt, bodyHeight } = fitted(figure, flow.pen, flow.room);
   setHeading(flow, { kind: 'heading', text: figure.title }, parent);
   flow.y += TITLE_GAP;
   const top = flow.y;
-  const rows = legendRows(picture.legend, flow.pen);
-  const bottom = top + picture.height * scale + 4 + rows.length * LEGEND_ROW;
   const labels = picture.legend.map(({ label }) => label).join('; ');
   const draw = (): void => {
     drawMarks(flow.pen, picture.marks, PAGE.left, top, scale);
-    rows.forEach((row, i) => drawLegend(flow.pen, row, top + picture.height * scale + 4 + i * LEGEND_ROW));
+    drawLegend(legend, PAGE.left + legendAt[0], top + legendAt[1], flow.pen);
   };
   tagged(flow, parent, 'Figure', draw, {
     alt: `${figure.what}. ${figure.title}. Marks: ${labels}.`,
-    bbox: [PAGE.left, top, PAGE.left + PAGE.main, bottom]
+    bbox: [PAGE.left, top, PAGE.left + PAGE.main, top + bodyHeight]
   });
-  flow.y = bottom + 2;
+  flow.y = top + bodyHeight + 2;
   for (const note of picture.notes)
     setParagraph(flow, { kind: 'paragraph', text: note, look: 'smallFaint' }, parent);
-}
-
-interface Placed extends LegendEntry {
-  x: number;
-}
-
-/** Legend entries one after the other, on as many lines as they need. */
-function legendRows(entries: LegendEntry[], pen: Pen): Placed[][] {
-  const rows: Placed[][] = [[]];
-  let x = 0;
-  for (const entry of entries) {
-    const needed = SAMPLE.width * SAMPLE_SCALE + 5 + pen.width(entry.label, STYLES.small);
-    if (x > 0 && x + needed > PAGE.main) {
-      rows.push([]);
-      x = 0;
-    }
-    rows[rows.length - 1].push({ ...entry, x });
-    x += needed + 13;
-  }
-  return rows;
-}
-
-function drawLegend(pen: Pen, row: Placed[], y: number): void {
-  for (const { role, label, x } of row) {
-    drawMarks(pen, legendSample(role), PAGE.left + x, y, SAMPLE_SCALE);
-    pen.place(label, PAGE.left + x + SAMPLE.width * SAMPLE_SCALE + 5, y + 8, STYLES.small);
-  }
 }

@@ -13,7 +13,8 @@ const GAP = 9;
 /** One part of the report under its own rule, with an entry in the outline. */
 export function setPart(flow: Flow, part: Part, look: { rule: boolean }): void {
   const section = tag(flow.doc, flow.root, 'Sect');
-  flow.skip(17);
+  flow.clearMargin();
+  flow.skip(15);
   flow.need(STYLES.section.leading + 16 + leastHeight(flow, part.rows[0]?.blocks ?? []));
   if (look.rule) {
     rule(flow.doc, PAGE.left, flow.y, PAGE.whole, 'line');
@@ -39,15 +40,19 @@ function setRow(flow: Flow, { blocks, notes }: Row, section: PDFKit.PDFStructure
   const main = tag(flow.doc, section, 'Div');
   if (notes?.length) setNotes(flow, notes, tag(flow.doc, section, 'Div'));
   blocks.forEach((block: Block, i) => {
-    if (i > 0 && !isTight(blocks[i - 1], block)) flow.skip(GAP);
-    if (i > 0) flow.need(leastHeight(flow, blocks.slice(i)));
+    if (i > 0) {
+      flow.skip(gapBetween(blocks[i - 1], block));
+      flow.need(leastHeight(flow, blocks.slice(i)));
+    }
     setBlock(flow, block, main);
   });
 }
 
-/** Headings and leads stand close to what they lead. */
-function isTight(before: Block, block: Block): boolean {
-  if (before.kind === 'heading' || before.kind === 'space' || block.kind === 'space') return true;
-  if (before.kind === 'masthead' || before.kind === 'verdict') return true;
-  return before.kind === 'paragraph' && (before.look === 'strong' || block.kind === 'paragraph');
+/** Points between two blocks: headings and leads stand close to what they lead, remarks to what they are on. */
+function gapBetween(before: Block, block: Block): number {
+  if (['heading', 'space', 'masthead', 'verdict'].includes(before.kind) || block.kind === 'space') return 0;
+  if (block.kind === 'paragraph' && block.look === 'smallFaint') return 1;
+  if (before.kind !== 'paragraph') return GAP;
+  if (before.look === 'strong') return 0;
+  return block.kind === 'paragraph' ? 3 : GAP;
 }

@@ -3,11 +3,11 @@ export const PAGE = {
   width: 595.28,
   height: 841.89,
   left: 51,
-  top: 50,
+  top: 46,
   /** Last line that text may reach. */
-  bottom: 780,
+  bottom: 784,
   /** Baseline of the page number. */
-  foot: 806,
+  foot: 808,
   main: 348,
   note: 396 + 27,
   noteWidth: 132,

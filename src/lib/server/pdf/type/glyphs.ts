@@ -9,8 +9,9 @@ export interface Stretch {
   text: string;
 }
 
-// Raised digits come from one font: the latin subset has three of them, in another height.
-const FROM_SYMBOLS = /[\u00b9\u00b2\u00b3\u2070-\u209f]/;
+// Raised digits come from one font: the latin subset has three of them, in another height. So do thin spaces: those
+// of the number face are as wide as its digits.
+const FROM_SYMBOLS = /[\u00b9\u00b2\u00b3\u2009\u202f\u2070-\u209f]/;
 
 /**
  * Parts a text by the fonts that draw it: the face asked for, then the symbols, then the last resort. A letter and

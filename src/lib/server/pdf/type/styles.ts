@@ -23,6 +23,8 @@ const style = (face: Face, size: number, leading: number, ink: Ink = 'ink'): Sty
 export const STYLES = {
   body: style('text', 9.4, 13),
   strong: style('bold', 9.4, 13),
+  term: style('text', 9, 12),
+  termName: style('bold', 9, 12),
   faint: style('text', 9.4, 13, 'faint'),
   small: style('text', 8, 11),
   smallFaint: style('text', 8, 11, 'faint'),
@@ -30,7 +32,7 @@ export const STYLES = {
   noteTitle: style('bold', 7.9, 10.8),
   wordmark: style('bold', 9.4, 13),
   verdict: style('bold', 10.5, 14),
-  answer: style('bold', 14.5, 18.2),
+  answer: style('bold', 14.2, 17.6),
   section: style('bold', 13, 17),
   heading: style('bold', 10.4, 13.6),
   cell: style('text', 8.2, 11),
