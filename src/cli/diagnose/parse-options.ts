@@ -12,6 +12,8 @@ export interface Asked {
   supplied: string | null;
   dataset: string | null;
   json: boolean;
+  /** Where to write the report as a PDF; null for nowhere. */
+  pdf: string | null;
   quiet: boolean;
   failOn: 'ruled-out' | 'undecided' | null;
 }
@@ -44,6 +46,7 @@ const options = {
   dataset: text,
   json: flag,
   text: flag,
+  pdf: text,
   quiet: flag,
   'fail-on': text,
   help: flag
@@ -143,6 +146,7 @@ export function parseOptions(args: string[]): Asked | 'help' {
     supplied: values.supplied ?? null,
     dataset: values.dataset ?? null,
     json: values.json ?? false,
+    pdf: values.pdf ?? null,
     quiet: values.quiet ?? false,
     failOn: one('fail-on', { 'ruled-out': 'ruled-out', undecided: 'undecided' } as const) ?? null
   };

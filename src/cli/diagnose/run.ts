@@ -17,6 +17,7 @@ import { type Asked, parseOptions } from './parse-options';
 import { progressLine } from './progress-line';
 import { readInput } from './read-input';
 import { sayProblems } from './say-problems';
+import { refusePdf, writePdf } from './write-pdf';
 
 /**
  * Runs `diagnose` with its arguments, prints, and returns the exit code.
@@ -44,18 +45,21 @@ export async function runDiagnose(args: string[], script: string): Promise<ExitC
 
 async function run(asked: Asked, script: string): Promise<ExitCode> {
   refuseOptions(asked);
+  if (asked.pdf !== null) await refusePdf(asked.pdf, asked.file);
   const result = readCounts(await readInput(asked.file), asked.read);
   if (!result.ok) throw new Refusal(sayProblems(asked.file, result.problems, result.more));
   const dataset = chooseDataset(asked.file, result.datasets, asked.dataset);
   const supplied = asked.supplied === null ? null : await readSupplied(asked.supplied);
   const diagnosis = await check(asked, dataset, supplied, script);
+  const several = result.datasets.length > 1 ? dataset.name : null;
+  if (asked.pdf !== null) await writePdf(asked.pdf, diagnosis, asked.file, several);
   const about = [...sayReading(result.reading), ...result.notes, ...sayUsed(asked, dataset)];
   if (asked.json) {
     if (!asked.quiet)
       process.stderr.write(about.map((line) => `${inputName(asked.file)}: ${line}\n`).join(''));
     process.stdout.write(documentText(diagnosis));
   } else {
-    const named = result.datasets.length > 1 ? [`Dataset: ${dataset.name}.`] : [];
+    const named = several === null ? [] : [`Dataset: ${several}.`];
     process.stdout.write(plainText(diagnosis, asked.quiet ? named : [...named, ...about]));
   }
   return verdictCode(asked, diagnosis);
