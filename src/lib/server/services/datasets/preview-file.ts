@@ -36,19 +36,30 @@ export function previewFile(
     return { ok: true, preview: { file, choices, reading, notes: [], datasets: [], problems, more } };
   }
   const problems: FileProblem[] = [];
-  const datasets = read.datasets.flatMap((dataset, index): PreviewDataset[] => {
+  const several = read.datasets.length > 1;
+  const facts = read.datasets.map(({ data, name: part }) => {
     try {
-      const { kind, shots, mean, smallest, largest, open, batches, digest } = countFacts(dataset.data);
-      const facts = { kind, shots, mean, smallest, largest, open, batches };
-      const { conditions, said } = recogniseConditions(dataset);
-      const before = savedBefore(db, actor, id, read.datasets.length > 1 ? dataset.name : null, digest);
-      return [{ index, ...facts, conditions, recognised: said, ...before }];
+      return countFacts(data);
     } catch (error) {
       if (!(error instanceof BadInput)) throw error;
-      const message = read.datasets.length > 1 ? `${dataset.name}: ${error.reason}` : error.reason;
+      const message = several ? `${part}: ${error.reason}` : error.reason;
       problems.push({ line: null, column: null, message, fix: 'Correct the file, or how it is read.' });
-      return [];
+      return null;
     }
+  });
+  const before = savedBefore(
+    db,
+    actor,
+    facts.flatMap((one) => one?.digest ?? [])
+  );
+  const datasets = read.datasets.flatMap((dataset, index): PreviewDataset[] => {
+    const one = facts[index];
+    if (!one) return [];
+    const { kind, shots, mean, smallest, largest, open, batches, digest } = one;
+    const shown = { kind, shots, mean, smallest, largest, open, batches };
+    const { conditions, said } = recogniseConditions(dataset);
+    const there = before(digest, id, several ? dataset.name : null);
+    return [{ index, ...shown, conditions, recognised: said, ...there }];
   });
   return {
     ok: true,

@@ -40,8 +40,13 @@ export function saveDatasets(
       if (!mayInTeam(tx, actor, 'upload')) return { ok: false, reason: 'not-allowed' };
       const already: NamedDataset[] = [];
       const troubles: SaveTrouble[] = [];
+      const there = savedBefore(
+        tx,
+        actor,
+        read.parts.map(({ facts }) => facts.digest)
+      );
       for (const { fileId, index, part, again, facts, conditions } of read.parts) {
-        const before = savedBefore(tx, actor, fileId, part, facts.digest).already;
+        const before = there(facts.digest, fileId, part).already;
         if (before.length === 0) continue;
         if (!again) already.push(...before);
         else if (before.some(({ name }) => name === conditions.name))

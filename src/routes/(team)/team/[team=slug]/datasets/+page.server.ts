@@ -48,10 +48,10 @@ export const actions: Actions = {
 
   /** Brings back what was just put aside. */
   restore: async (event) => {
-    const { team, actor } = askTeam(event, 'see');
+    // Whether there is anything at all this person may bring back; whose it is the service asks of the row.
+    const { team, actor } = askTeam(event, 'restore', { createdBy: event.locals.person?.id });
     const id = String((await event.request.formData()).get('dataset') ?? '');
     return acting({}, () => {
-      // Whose it is decides: the service asks it of the row itself.
       const back = restoreDataset(event.locals.db, actor, id);
       if (!back.ok)
         return fail(404, { message: 'That dataset is not put aside, or not yours to bring back.' });
