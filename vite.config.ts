@@ -2,10 +2,11 @@ import { sveltekit } from '@sveltejs/kit/vite';
 import tailwindcss from '@tailwindcss/vite';
 import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
+import { devIssuer } from './vite.issuer.config.ts';
 import { jobWorker } from './vite.worker.config.ts';
 
 export default defineConfig({
-  plugins: [tailwindcss(), jobWorker(), sveltekit()],
+  plugins: [tailwindcss(), jobWorker(), devIssuer(), sveltekit()],
   resolve: {
     alias: {
       'sveltekit-superforms/adapters': fileURLToPath(
