@@ -8,7 +8,8 @@ export function devIssuer(): Plugin {
   return {
     name: 'severalty-dev-issuer',
     apply: 'serve',
-    async configureServer(server) {
+    async configureServer() {
+      // Once a process: Vite restarts its server when a setting changes, the new one before the old one ends.
       if (process.env.VITEST || process.env.OIDC_ISSUER) return;
       const { OAuth2Server } = await import('oauth2-mock-server');
       const issuer = new OAuth2Server();
@@ -31,7 +32,6 @@ export function devIssuer(): Plugin {
         OIDC_CLIENT_SECRET: 'not a secret',
         OIDC_NAME: 'Invented Institute'
       });
-      server.httpServer?.once('close', () => void issuer.stop());
     }
   };
 }
