@@ -48,7 +48,18 @@ interface Fitted {
   height: number;
 }
 
-function sized({ title, draw }: Figure, { width, scale, beside }: Sizing, pen: Pen): Fitted {
+/** Drawings already made: a figure is measured several times before it is set. */
+const made = new WeakMap<Figure, Map<Sizing, Fitted>>();
+
+function sized(figure: Figure, sizing: Sizing, pen: Pen): Fitted {
+  const known = made.get(figure) ?? new Map<Sizing, Fitted>();
+  made.set(figure, known);
+  const fitted = known.get(sizing) ?? drawn(figure, sizing, pen);
+  known.set(sizing, fitted);
+  return fitted;
+}
+
+function drawn({ title, draw }: Figure, { width, scale, beside }: Sizing, pen: Pen): Fitted {
   const picture = draw({ width, text: 13 });
   const [drawnWidth, drawnHeight] = [picture.width * scale, picture.height * scale];
   const column = drawnWidth + 10;

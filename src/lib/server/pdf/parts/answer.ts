@@ -32,7 +32,7 @@ export function answerPart({ document, provenance }: ReportInput): Part {
             terms: [
               { term: 'How sure', words: document.answer.because },
               { term: 'How big', words: howBig(document) }
-            ]
+            ].filter(({ words }) => words.length > 0)
           },
           {
             kind: 'figure',

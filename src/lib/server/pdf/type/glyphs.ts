@@ -18,6 +18,7 @@ const FROM_SYMBOLS = /[\u00b9\u00b2\u00b3\u2009\u202f\u2070-\u209f]/;
  * the marks on it stay together. What none can draw is written out as ⟨U+1FAE8⟩.
  */
 export function stretchesOf(text: string, face: FontName, has: HasGlyph): Stretch[] {
+  if (/^[ -~]*$/.test(text)) return text === '' ? [] : [{ font: face, text }];
   const stretches: Stretch[] = [];
   const put = (font: FontName, part: string): void => {
     const last = stretches.at(-1);

@@ -1,4 +1,5 @@
-const RIGHT = /[\p{sc=Hebrew}\p{sc=Arabic}\p{sc=Syriac}\p{sc=Thaana}\p{sc=Nko}]/u;
+import { levelsOf, RIGHT } from './bidi-levels';
+
 const MIRRORED: Record<string, string> = {
   '(': ')',
   ')': '(',
@@ -45,35 +46,6 @@ export function visualOrder(line: string, fromRight: boolean): string[] {
     }
   }
   return runs.flatMap((run) => (run.level === 1 ? turned(run.signs) : [run.signs.join('')]));
-}
-
-/** 0 for what runs to the right in a line that does, 1 for what runs to the left, 2 for numbers and latin in that. */
-function levelsOf(signs: string[], base: number): number[] {
-  const kinds = signs.map((sign, i) => {
-    if (RIGHT.test(sign)) return 'right';
-    if (/\p{Nd}/u.test(sign)) return 'number';
-    if (/\p{L}/u.test(sign)) return 'left';
-    const within =
-      /[.,:/\u202f\u00a0]/.test(sign) && [signs[i - 1], signs[i + 1]].every((s) => /\p{Nd}/u.test(s ?? ''));
-    return within ? 'number' : 'between';
-  });
-  let strong = base === 1 ? 'right' : 'left';
-  const resolved = kinds.map((kind) => {
-    if (kind === 'left' || kind === 'right') strong = kind;
-    // A number after latin letters belongs to them.
-    return kind === 'number' && strong === 'left' ? 'left' : kind;
-  });
-  const side = (kind: string | undefined): 'left' | 'right' =>
-    kind === undefined ? (base === 1 ? 'right' : 'left') : kind === 'left' ? 'left' : 'right';
-  return resolved.map((kind, i) => {
-    if (kind === 'right') return 1;
-    if (kind === 'left') return base === 1 ? 2 : 0;
-    if (kind === 'number') return 2;
-    const before = side(resolved.slice(0, i).findLast((k) => k !== 'between'));
-    const after = side(resolved.slice(i + 1).find((k) => k !== 'between'));
-    if (before !== after) return base;
-    return before === 'right' ? 1 : base === 1 ? 2 : 0;
-  });
 }
 
 /** Pieces of a run to the left, last first; what stands between the words is turned sign by sign. */
