@@ -29,7 +29,7 @@ export function recogniseConditions(dataset: Dataset, name = dataset.name): Reco
     const put = stated && !taken.has(stated) ? place(conditions, stated, cell, column) : false;
     if (stated && put) {
       taken.add(stated);
-      said.push(`“${column}” is the ${CONDITION_LABELS[stated].toLowerCase()}.`);
+      said.push(`“${column}” is read as “${CONDITION_LABELS[stated]}”.`);
     } else {
       notes.push(`${column}: ${cell}`);
       said.push(`“${column}” fits no condition and is kept in the notes.`);

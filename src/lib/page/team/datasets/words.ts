@@ -12,8 +12,14 @@ const day = new Intl.DateTimeFormat('en-GB', {
 export const sayDay = (at: string | number | null): string => (at === null ? '–' : day.format(new Date(at)));
 
 /** "2.5 µs"; a dash when it is not stated. */
-export const sayTime = (time: number | null, unit: string | null): string =>
-  time === null ? '–' : `${formatNumber(time)}${unit ? `\u202f${unit}` : ''}`;
+export function sayTime(time: number | null, unit: string | null): string {
+  if (time === null) return '–';
+  // A time is known as it was typed: closing zeros would claim digits that nobody wrote.
+  const number = formatNumber(time, 6)
+    .replace(/(\.\d*?)0+$/, '$1')
+    .replace(/\.$/, '');
+  return unit ? `${number}\u202f${unit}` : number;
+}
 
 /** Conditions in one line, as far as they are stated. */
 export function sayConditions(conditions: Conditions): string {

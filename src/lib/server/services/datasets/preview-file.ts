@@ -9,6 +9,7 @@ import { originalFile } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { countFacts } from './count-facts';
+import { namesOfParts } from './names-of-parts';
 import { readFile } from './read-file';
 import { savedBefore } from './saved-before';
 
@@ -47,6 +48,7 @@ export function previewFile(
       return null;
     }
   });
+  const names = namesOfParts(read.datasets);
   const before = savedBefore(
     db,
     actor,
@@ -57,7 +59,7 @@ export function previewFile(
     if (!one) return [];
     const { kind, shots, mean, smallest, largest, open, batches, digest } = one;
     const shown = { kind, shots, mean, smallest, largest, open, batches };
-    const { conditions, said } = recogniseConditions(dataset);
+    const { conditions, said } = recogniseConditions(dataset, names[index]);
     const there = before(digest, id, several ? dataset.name : null);
     return [{ index, ...shown, conditions, recognised: said, ...there }];
   });

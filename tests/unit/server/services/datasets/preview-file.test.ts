@@ -20,6 +20,8 @@ describe('previewFile', () => {
     expect(preview.problems).toEqual([]);
     expect(preview.datasets).toHaveLength(4);
     expect(preview.datasets[3].conditions).toMatchObject({
+      // The column of notes is the same on all of them.
+      name: 'device Marram, firmware ebb 3.2, quench_time_us 5, date 2026-03-11',
       device: 'Marram',
       firmware: 'ebb 3.2',
       quenchTime: 5,

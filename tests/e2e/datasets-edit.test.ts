@@ -1,0 +1,105 @@
+import type { Browser } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { makeDataset } from '../support/datasets';
+import { openBrowser } from './support/open-browser';
+import { withDatabaseOf } from './support/seed-people';
+import { startServer, type RunningServer } from './support/start-server';
+import { teamOf, visitor } from './support/team-setting';
+
+let server: RunningServer;
+let browser: Browser;
+
+beforeAll(async () => {
+  [server, browser] = await Promise.all([startServer(), openBrowser()]);
+});
+
+afterAll(async () => {
+  await browser?.close();
+  await server?.stop();
+});
+
+async function withOne(slug: string) {
+  const { people, root } = await teamOf(server, slug, ['lead', 'experimenter', 'observer']);
+  const id = await withDatabaseOf(server, (db) => {
+    const team = db.query.team.findFirst({ where: (row, { eq }) => eq(row.slug, slug) }).sync();
+    return makeDataset(
+      db,
+      { personId: people[0].id, teamId: team?.id ?? '', role: 'lead' },
+      { name: 'the one' }
+    );
+  });
+  return { people, root, at: `${root}/datasets/${id}` };
+}
+
+describe('editing conditions', () => {
+  it.each([true, false])(
+    'the second of two editors is told, and loses nothing typed (JavaScript: %s)',
+    async (javaScriptEnabled) => {
+      const { people, at } = await withOne(`two-editors-${javaScriptEnabled ? 'script' : 'plain'}`);
+      const first = await visitor(browser, server, people[0]);
+      const second = await visitor(browser, server, people[1], { javaScriptEnabled });
+      for (const { page } of [first, second]) await page.goto(`${at}?edit`, { waitUntil: 'networkidle' });
+      await first.page.getByLabel('Device').fill('Kelp');
+      await first.page.getByLabel('Firmware version').fill('ebb 3.1');
+      await first.page.getByRole('button', { name: 'Save these conditions' }).click();
+      await first.page.getByText('The conditions are saved.').waitFor();
+      await second.page.getByLabel('Device').fill('Marram');
+      await second.page.getByLabel('Notes').fill('written by the second');
+      await second.page.getByRole('button', { name: 'Save these conditions' }).click();
+      const told = second.page.locator('#stale');
+      await told.waitFor();
+      const words = ((await told.textContent()) ?? '').replace(/\s+/g, ' ');
+      expect(words).toContain('Invented lead saved other conditions');
+      expect(words).toContain('Device: “nothing” became “Kelp”. You typed something else');
+      expect(words).toContain('Firmware version: “nothing” became “ebb 3.1”. This is taken');
+      expect(await second.page.getByLabel('Device').inputValue()).toBe('Marram');
+      expect(await second.page.getByLabel('Notes').inputValue()).toBe('written by the second');
+      expect(await second.page.getByLabel('Firmware version').inputValue()).toBe('ebb 3.1');
+      await second.page.getByRole('button', { name: 'Save these conditions' }).click();
+      await second.page.getByText('The conditions are saved.').waitFor();
+      const list = await second.page.locator('dl').textContent();
+      for (const text of ['Marram', 'ebb 3.1', 'written by the second']) expect(list).toContain(text);
+      expect(first.complaints).toEqual([]);
+      expect(second.complaints.filter((line) => !line.includes('409'))).toEqual([]);
+      for (const { page } of [first, second]) await page.context().close();
+    }
+  );
+
+  it('a wrong field is named and kept; an observer sees no form and is refused', async () => {
+    const { people, at } = await withOne('wrong-field');
+    const editor = await visitor(browser, server, people[1]);
+    await editor.page.goto(`${at}?edit`, { waitUntil: 'networkidle' });
+    await editor.page.getByLabel('Quench time', { exact: true }).fill('fast');
+    await editor.page.getByRole('button', { name: 'Save these conditions' }).click();
+    await editor.page.getByText('Write a time as a number').waitFor();
+    expect(await editor.page.getByLabel('Quench time', { exact: true }).inputValue()).toBe('fast');
+    const observer = await visitor(browser, server, people[2]);
+    await observer.page.goto(at, { waitUntil: 'networkidle' });
+    expect(await observer.page.getByRole('button', { name: /Save|aside|Diagnose/ }).count()).toBe(0);
+    for (const action of ['edit', 'aside']) {
+      const answer = await observer.page.request.post(`${at}?/${action}`, {
+        headers: { origin: server.address, accept: 'text/html' },
+        form: { confirm: 'the one' }
+      });
+      expect(answer.status(), action).toBe(403);
+    }
+    for (const { page } of [editor, observer]) await page.context().close();
+  });
+
+  it('is put aside after its name was typed, and brought back', async () => {
+    const { people, root, at } = await withOne('aside');
+    const { page, complaints } = await visitor(browser, server, people[0]);
+    await page.goto(at, { waitUntil: 'networkidle' });
+    await page.getByText('Put this dataset aside').click();
+    await page.getByRole('button', { name: 'Put “the one” aside' }).click();
+    await page.getByText('Type the name of the dataset, “the one”').waitFor();
+    await page.getByLabel(/type its name/).fill('the one');
+    await page.getByRole('button', { name: 'Put “the one” aside' }).click();
+    await page.waitForURL(`${root}/datasets?aside=*`);
+    await page.getByRole('button', { name: 'Bring it back' }).click();
+    await page.waitForURL(at);
+    await page.getByText('Edit the conditions').waitFor();
+    expect(complaints.filter((line) => !line.includes('400'))).toEqual([]);
+    await page.context().close();
+  });
+});
