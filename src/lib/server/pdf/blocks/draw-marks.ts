@@ -2,6 +2,7 @@ import { inkOfRole } from '$lib/charts/ink-of-role';
 import type { Mark, TextMark } from '$lib/charts/picture';
 import type { Pen } from '../type/pen';
 import { colourOf, type Style } from '../type/styles';
+import { straighten } from './straighten';
 
 /** Draws the marks of a chart as vectors, its corner at `x`, `y`, `scale` points for each of its units. */
 export function drawMarks(pen: Pen, marks: Mark[], x: number, y: number, scale = 1): void {
@@ -16,7 +17,7 @@ export function drawMarks(pen: Pen, marks: Mark[], x: number, y: number, scale =
 }
 
 function drawPath(doc: PDFKit.PDFDocument, d: string, look: ReturnType<typeof inkOfRole>): void {
-  doc.path(d);
+  doc.path(straighten(d));
   if (look.stroke === 'none') {
     doc.fill(colourOf(look.fill));
     return;
