@@ -6,7 +6,7 @@ import { longTable } from './support/long-table';
 import { openBrowser } from './support/open-browser';
 import { withDatabaseOf } from './support/seed-people';
 import { startServer, type RunningServer } from './support/start-server';
-import { teamOf, visitor } from './support/team-setting';
+import { complaintsBut, teamOf, visitor } from './support/team-setting';
 
 let server: RunningServer;
 let browser: Browser;
@@ -61,7 +61,7 @@ describe('the table of datasets', () => {
     await page.reload({ waitUntil: 'networkidle' });
     await page.getByText('1 to 5 of 5, out of 60').waitFor();
     await page.goBack({ waitUntil: 'networkidle' });
-    expect(complaints).toEqual([]);
+    expect(complaintsBut(complaints)).toEqual([]);
     await page.context().close();
   });
 
@@ -93,7 +93,7 @@ describe('the table of datasets', () => {
     await page.getByText('2 datasets have the new conditions.').waitFor();
     await page.goto(`${root}/datasets?firmware=ebb+4.0`, { waitUntil: 'networkidle' });
     await page.getByText('1 to 2 of 2, out of 60').waitFor();
-    expect(complaints).toEqual([]);
+    expect(complaintsBut(complaints)).toEqual([]);
     await page.context().close();
   });
 
@@ -104,7 +104,7 @@ describe('the table of datasets', () => {
     await page.getByText('There are no datasets in this team yet.').waitFor();
     await page.getByRole('button', { name: 'Weldon’s dice', exact: true }).click();
     await page.getByRole('heading', { name: 'Weldon’s dice' }).waitFor();
-    expect(complaints).toEqual([]);
+    expect(complaintsBut(complaints)).toEqual([]);
     await page.context().close();
   });
 

@@ -41,3 +41,15 @@ export async function teamOf(
   );
   return { people, root: `${server.address}/team/${slug}` };
 }
+
+/**
+ * What is left of a page's complaints without its own refusals of a status (which the browser writes to the console),
+ * and without data requests of navigations: Chromium tells those as given up although the page got all it needed.
+ */
+export function complaintsBut(complaints: string[], status?: number): string[] {
+  return complaints.filter(
+    (line) =>
+      !/__data\.json\S* net::ERR_ABORTED/.test(line) &&
+      !(status && line.includes(`responded with a status of ${status}`))
+  );
+}
