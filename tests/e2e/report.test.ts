@@ -5,7 +5,7 @@ import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { saved } from './support/check-page';
 import { openBrowser } from './support/open-browser';
-import { pageOf as open, reportsSetting, type ReportsSetting } from './support/reports-setting';
+import { pageOf as open, real, reportsSetting, type ReportsSetting } from './support/reports-setting';
 import { withDatabaseOf, type SeededPerson } from './support/seed-people';
 import { startServer, type RunningServer } from './support/start-server';
 
@@ -46,7 +46,7 @@ describe('one report', () => {
     expect(await provenance.textContent()).toContain(createHash('sha256').update(file.text).digest('hex'));
     const csv = await saved(page, () => page.getByRole('link', { name: 'Save its numbers as CSV' }).click());
     expect(csv.text).toContain(`answer,verdict,,${row!.verdict},,`);
-    expect(complaints).toEqual([]);
+    expect(real(complaints)).toEqual([]);
     await context.close();
   });
 
@@ -96,7 +96,7 @@ describe('one report', () => {
     await makers.page.getByRole('button', { name: 'Bring it back' }).click();
     await makers.page.locator('#answer-heading').waitFor();
     expect(makers.page.url()).toContain(reports[2]);
-    expect(makers.complaints).toEqual([]);
+    expect(real(makers.complaints)).toEqual([]);
     await makers.context.close();
   });
 

@@ -50,3 +50,7 @@ export async function pageOf(
   await signIn(page, server.address, email, password);
   return { page, complaints, context };
 }
+
+/** What of the complaints is real: Kit ends a data request of its own once it has what it wants of it. */
+export const real = (complaints: string[]): string[] =>
+  complaints.filter((line) => !/__data\.json\S* net::ERR_ABORTED/.test(line));

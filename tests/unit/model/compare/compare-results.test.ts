@@ -90,9 +90,14 @@ describe('compareResults', () => {
     const other = structuredClone(one);
     other.document.fit.logLikelihood *= 1 + 1e-12;
     other.document.moments.ceiling *= 1 + 1e-4;
+    [one.document.fit.floor, other.document.fit.floor] = [3e-17, 5e-17];
+    [one.document.tests[0].p, other.document.tests[0].p] = [3e-17, 5e-17];
     const line = (id: string, name: string) => part(one, other, id).lines.find((l) => l.name === name);
     expect(line('fit', 'Log-likelihood')).toMatchObject({ changed: true, slight: true });
     expect(line('moments', 'Ceiling of the variance')).toMatchObject({ changed: true, slight: false });
-    expect(compareResults(one, other).changes).toBe(1);
+    expect(line('fit', 'Floor of any law')).toMatchObject({ slight: true });
+    // A tiny p is not nothing.
+    expect(part(one, other, 'tests').changes).toBe(1);
+    expect(compareResults(one, other).changes).toBe(2);
   });
 });

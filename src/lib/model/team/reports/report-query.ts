@@ -44,6 +44,6 @@ export function writeReportQuery(query: Partial<ReportQuery>): string {
   const fresh: Record<string, unknown> = reportQuerySchema.parse({});
   const search = new URLSearchParams();
   for (const [name, value] of Object.entries(query))
-    if (value !== undefined && value !== fresh[name]) search.set(name, String(value));
+    if (value !== undefined && String(value) !== String(fresh[name])) search.set(name, String(value));
   return search.toString();
 }

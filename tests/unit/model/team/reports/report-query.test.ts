@@ -1,4 +1,4 @@
-import { readReportQuery, writeReportQuery } from '$lib/model/team/reports/report-query';
+import { readReportQuery, writeReportQuery, type ReportQuery } from '$lib/model/team/reports/report-query';
 import { describe, expect, it } from 'vitest';
 
 describe('the query of the table of reports', () => {
@@ -17,5 +17,7 @@ describe('the query of the table of reports', () => {
 
   it('writes nothing for a fresh table', () => {
     expect(writeReportQuery(readReportQuery(new URLSearchParams()))).toBe('');
+    // As a form gives it: every part is a text.
+    expect(writeReportQuery({ size: '50', verdict: '' } as unknown as ReportQuery)).toBe('');
   });
 });
