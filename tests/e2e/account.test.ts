@@ -3,6 +3,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { audit, openAuditPage } from './support/axe';
 import { complaintsOf } from './support/complaints';
 import { openBrowser } from './support/open-browser';
+import { screenshots } from './support/screenshots';
 import { seedPerson, seedTeam } from './support/seed-people';
 import { signIn } from './support/sign-in';
 import { startServer, type RunningServer } from './support/start-server';
@@ -124,5 +125,9 @@ describe('both pages', () => {
     expect(await audit(page)).toEqual([]);
     expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(320);
     await page.context().close();
+    await screenshots(browser, server.address, path.slice(1), async (picture) => {
+      await signIn(picture, server.address, email, password);
+      await picture.goto(server.address + path, { waitUntil: 'networkidle' });
+    });
   });
 });
