@@ -9,7 +9,8 @@ describe('readEnv', () => {
       BODY_SIZE_LIMIT: 20_971_520,
       SHUTDOWN_TIMEOUT: 3,
       MAIL_FROM: 'Severalty <severalty@localhost>',
-      OIDC_NAME: 'your institution'
+      OIDC_NAME: 'your institution',
+      SEVERALTY_DEMO: 'yes'
     });
   });
 
