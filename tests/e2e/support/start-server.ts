@@ -12,6 +12,8 @@ export interface RunningServer {
   output(): string;
   /** Ends it as a person would (SIGTERM) and removes its data. Gives the exit code. */
   stop(): Promise<number | null>;
+  /** Ends it as a failure of power would (SIGKILL), and leaves its data. */
+  kill(): Promise<void>;
 }
 
 /** Longest a start may take: migrating and loading take under a second, a busy machine ten times that. */
@@ -82,6 +84,12 @@ export async function startServer(
       const code = await ended;
       rmSync(data, { recursive: true, force: true });
       return code;
+    },
+    async kill() {
+      child.kill('SIGKILL');
+      await ended;
+      // Where the test keeps the data, the folder made here was never used.
+      if (own.SEVERALTY_DATA !== data) rmSync(data, { recursive: true, force: true });
     }
   };
 }

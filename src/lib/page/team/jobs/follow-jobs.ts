@@ -46,11 +46,14 @@ function listen(client: QueryClient, slug: string): () => void {
   let lists: ReturnType<typeof setTimeout> | undefined;
   let wait = FIRST_WAIT;
 
+  let fetched = 0;
   const refetch = () => {
+    const late = Math.max(0, fetched + BETWEEN_LISTS - Date.now());
     lists ??= setTimeout(() => {
       lists = undefined;
+      fetched = Date.now();
       void client.invalidateQueries({ queryKey: jobKeys.all(slug) });
-    }, BETWEEN_LISTS);
+    }, late);
   };
   const take = ({ data }: MessageEvent<string>) => {
     const job = JSON.parse(data) as JobRow;

@@ -1,4 +1,6 @@
+import { readJobQuery } from '$lib/model/team/jobs/job-query';
 import { enqueueJobs } from '$lib/server/services/jobs/enqueue-jobs';
+import { listJobs } from '$lib/server/services/jobs/list-jobs';
 import { json } from '@sveltejs/kit';
 import { askTeamJson } from '../../../../ask-json';
 import { problem } from '../../../../problem';
@@ -6,6 +8,14 @@ import { answering } from '../datasets/answers';
 import { readRequest } from './read-request';
 import { refusalOf } from './refusals';
 import type { RequestHandler } from './$types';
+
+/** One page of the team's jobs as JSON (JobList), by the query of the page's own address; HTML is the page. */
+export const GET: RequestHandler = (event) => {
+  const asked = askTeamJson(event, 'see');
+  if (!asked.ok) return asked.response;
+  const list = listJobs(event.locals.db, asked.actor, readJobQuery(event.url.searchParams));
+  return json(list, { headers: { 'cache-control': 'no-store' } });
+};
 
 /**
  * Asks for diagnoses: {dataset: [ids], resamples?, alpha?, seed?, tolerance?} as JSON or as a form gives 202 and
