@@ -81,8 +81,9 @@ async function knock(address: string, method: string, body: BodyInit | null, typ
   return { status: response.status, text: await response.text() };
 }
 
-const bodies = () => [
-  { type: 'application/json', body: '{}' },
+/** Kit itself refuses JSON to a form action, before any code of ours: those get a form alone. */
+const bodies = ({ action }: Door) => [
+  ...(action === null ? [{ type: 'application/json', body: '{}' }] : []),
   { type: undefined, body: new URLSearchParams({ id: foreign.dataset, dataset: foreign.dataset }) }
 ];
 
@@ -90,7 +91,7 @@ describe("another team's ids", () => {
   it('are tried on every door', () => expect(doors.length).toBeGreaterThan(30));
 
   it.each(doors)('$method $route $action is not there for a stranger', async (door) => {
-    for (const { type, body } of bodies()) {
+    for (const { type, body } of bodies(door)) {
       const { status, text } = await knock(addressOf(door, 'lagoon'), door.method, body, type);
       expect(status).toBe(404);
       expect(text).not.toContain(SECRET);
@@ -100,7 +101,7 @@ describe("another team's ids", () => {
   it.each(doors.filter(({ route }) => /\[(id|link|thread)\]/.test(route)))(
     '$method $route $action knows them in no other team',
     async (door) => {
-      for (const { type, body } of bodies()) {
+      for (const { type, body } of bodies(door)) {
         const { status, text } = await knock(addressOf(door, 'own-team'), door.method, body, type);
         // What is asked for may be malformed as well; but never 403, which would say that it is there.
         expect([404, ...(door.method === 'GET' ? [] : [400, 415, 422])]).toContain(status);
