@@ -24,13 +24,14 @@ writeFileSync('node_modules/.package-lock.json', readFileSync('package-lock.json
 `;
 const VITE = `
 import { appendFileSync, mkdirSync, writeFileSync } from 'node:fs';
-const [folder, file] = process.argv.includes('--config') ? ['build-cli', 'start.js'] : ['build', 'handler.js'];
-appendFileSync('log', 'vite ' + folder + '\\n');
+const files = process.argv.includes('--config') ? ['build-cli/start.js'] : ['build/handler.js', 'build-worker/worker.js'];
+const folders = files.map((file) => file.slice(0, file.indexOf('/')));
+appendFileSync('log', 'vite ' + folders[0] + '\\n');
 console.log('vite talks');
 await new Promise((resolve) => setTimeout(resolve, 200));
 if (process.env.FAKE_VITE) { console.error(process.env.FAKE_VITE); process.exit(1); }
-mkdirSync(folder, { recursive: true });
-writeFileSync(folder + '/' + file, '');
+for (const folder of folders) mkdirSync(folder, { recursive: true });
+for (const file of files) writeFileSync(file, '');
 `;
 const SYNC = `
 import { appendFileSync, mkdirSync, writeFileSync } from 'node:fs';
