@@ -2,11 +2,11 @@ import type { DrawHelper } from './draw-helper';
 import { divergencesKept, type DrawAnswer, type FittedDraws, type FittedJob } from './fitted-draws';
 
 /**
- * Milliseconds that must be left for help to be worth it: a thread takes 40 to start, and its code starts cold. How much
- * is left shows once the first draws, which are refitted whole, are over and `trial` have passed with others; where the
- * first draws alone take `long`, later ones are taken to cost a quarter of them.
+ * Milliseconds that must be left for help to be worth it: a thread takes 40 to start, and 400 to run its code
+ * warm. How much is left shows once the first draws, which are refitted whole, are over and `trial` have passed with
+ * others; where the first draws alone take `long`, later ones are taken to cost a quarter of them.
  */
-const worthIt = 200;
+const worthIt = 600;
 const trial = 20;
 const long = 250;
 /** Milliseconds that a range is meant to take, and ranges lent at a time: together longer than between two turns. */
