@@ -14,6 +14,8 @@ declare global {
       db: Database;
       /** Who is signed in; null for visitors. */
       person: Person | null;
+      /** Set by handleError: the database could not be written. */
+      storageTrouble?: 'busy' | 'full';
     }
   }
 }

@@ -3,6 +3,7 @@ import { database } from '$lib/server/application';
 import { issuerFormAction } from '$lib/server/handles/issuer-form-action';
 import { reportError } from '$lib/server/handles/report-error';
 import { securityHeaders } from '$lib/server/handles/security-headers';
+import { storageTroubleStatus } from '$lib/server/handles/storage-trouble-status';
 import { withDatabase } from '$lib/server/handles/with-database';
 import { withPerson } from '$lib/server/handles/with-person';
 import type { ServerInit } from '@sveltejs/kit';
@@ -12,6 +13,12 @@ export const init: ServerInit = () => {
   if (!building) database();
 };
 
-export const handle = sequence(securityHeaders, issuerFormAction, withDatabase, withPerson);
+export const handle = sequence(
+  securityHeaders,
+  storageTroubleStatus,
+  issuerFormAction,
+  withDatabase,
+  withPerson
+);
 
 export const handleError = reportError;

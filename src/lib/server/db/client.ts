@@ -1,6 +1,6 @@
 import Connection from 'better-sqlite3';
 import { drizzle, type BetterSQLite3Database } from 'drizzle-orm/better-sqlite3';
-import { mkdirSync } from 'node:fs';
+import { closeSync, mkdirSync, openSync } from 'node:fs';
 import { join } from 'node:path';
 import * as schema from './schema';
 
@@ -9,10 +9,13 @@ export type Database = BetterSQLite3Database<typeof schema> & { $client: Connect
 /** Milliseconds a writer waits for another one (a second process, a backup) before SQLITE_BUSY. */
 const BUSY_TIMEOUT = 5_000;
 
-/** Path of the database file in a data folder, which is made when missing. */
+/** Path of the database file in a data folder; both are made when missing, for their owner's eyes alone. */
 export function databaseFile(folder: string): string {
-  mkdirSync(folder, { recursive: true });
-  return join(folder, 'severalty.sqlite');
+  mkdirSync(folder, { recursive: true, mode: 0o700 });
+  const file = join(folder, 'severalty.sqlite');
+  // SQLite gives its write-ahead log the permissions of the database.
+  closeSync(openSync(file, 'a', 0o600));
+  return file;
 }
 
 /**

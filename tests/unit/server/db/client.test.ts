@@ -1,4 +1,4 @@
-import { mkdtempSync, rmSync } from 'node:fs';
+import { mkdtempSync, rmSync, statSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { expect, it } from 'vitest';
@@ -13,6 +13,10 @@ it('opens with a write-ahead log, foreign keys on and patience for another write
   expect(pragma('busy_timeout')).toBe(5000);
   // 1 is NORMAL.
   expect(pragma('synchronous')).toBe(1);
+  // Password hashes and counts are for the owner's eyes, the log beside the database included.
+  const file = databaseFile(join(folder, 'made', 'on', 'the', 'way'));
+  db.$client.exec('create table written (x)');
+  for (const name of [file, `${file}-wal`]) expect(statSync(name).mode & 0o777).toBe(0o600);
   db.$client.close();
   rmSync(folder, { recursive: true, force: true });
 });

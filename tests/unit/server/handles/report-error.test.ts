@@ -3,6 +3,7 @@ import { afterEach, describe, expect, it, vi } from 'vitest';
 import { reportError } from '$lib/server/handles/report-error';
 
 const event = {
+  locals: {},
   request: new Request('http://localhost/?counts=0,185', { method: 'POST' }),
   route: { id: '/samples/[slug]' },
   url: new URL('http://localhost/?counts=0,185')
@@ -31,6 +32,21 @@ describe('reportError', () => {
     const written = captureLog();
     await reportError({ error: 'thrown text', event, status: 500, message: 'Internal Error' });
     expect(written.join('')).not.toContain('185');
+  });
+
+  it('tells of a locked database in words, leaves its stack out of the log, and marks the request for a 503', async () => {
+    const written = captureLog();
+    const locked = Object.assign(new Error('database is locked'), { code: 'SQLITE_BUSY' });
+    const told = await reportError({
+      error: new Error('query', { cause: locked }),
+      event,
+      status: 500,
+      message: ''
+    });
+    expect(told).toMatchObject({ code: 'database-busy', message: expect.stringMatching(/try again/) });
+    expect(event.locals.storageTrouble).toBe('busy');
+    expect(written).toHaveLength(1);
+    expect(written[0]).not.toContain('stack');
   });
 
   it('does not log an address that leads nowhere', async () => {
