@@ -4,6 +4,7 @@ import { connect, createServer, type AddressInfo, type Server } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { sessionOf } from './support/session-of';
 import { startServer } from './support/start-server';
 
 describe('the start command', () => {
@@ -25,6 +26,22 @@ describe('the start command', () => {
     // SQLite removes its write-ahead log when the last connection closes.
     expect(readdirSync(data)).toEqual(['auth-secret', 'severalty.sqlite']);
     rmSync(data, { recursive: true });
+  });
+
+  it('makes an invented team on this machine, and prints how to sign in as each role', async () => {
+    const server = await startServer({ SEVERALTY_DEMO: 'yes' });
+    await expect.poll(() => server.output()).toMatch(/each with the password/);
+    const [, password] = /password "([^"]+)"/.exec(server.output())!;
+    const people = [...server.output().matchAll(/^ {2}(lead|experimenter|observer) +(\S+@\S+)$/gm)];
+    expect(people.map(([, role]) => role)).toEqual(['lead', 'experimenter', 'observer']);
+    for (const [, role, email] of people) {
+      const cookie = await sessionOf(server.address, email, password);
+      const status = async (path: string) =>
+        (await fetch(`${server.address}/team/wrackline-bay/${path}`, { headers: { cookie } })).status;
+      expect(await status('datasets')).toBe(200);
+      expect(await status('members')).toBe(role === 'lead' ? 200 : 403);
+    }
+    await server.stop();
   });
 
   it('answers an unknown sample with 404 and a reason', async () => {
