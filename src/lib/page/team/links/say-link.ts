@@ -1,13 +1,10 @@
 import type { LinkOptions } from '$lib/model/link/link-options';
+import { sayUntil } from '$lib/model/say-until';
 
 type Said = Pick<
   LinkOptions,
   'audience' | 'people' | 'shows' | 'blind' | 'hidesReferees' | 'allowsRemarks' | 'expiresAt' | 'visitLimit'
 >;
-
-/** A day and time as people read them, UTC: the same for everybody who reads the page. */
-export const sayTime = (at: number): string =>
-  `${new Date(at).toISOString().slice(0, 16).replace('T', ' ')} UTC`;
 
 /** What a link does, a sentence a line: who may open it, what it shows, and until when. */
 export function sayLink(link: Said): string[] {
@@ -26,7 +23,7 @@ export function sayLink(link: Said): string[] {
     link.allowsRemarks
       ? `Takes remarks${link.hidesReferees ? ', signed “A referee”' : ''}.`
       : `Takes no remarks${link.hidesReferees ? ', and names nobody who opened it' : ''}.`,
-    `${link.expiresAt === null ? 'Stays open until you close it' : `Closes on ${sayTime(link.expiresAt)}`}${
+    `${link.expiresAt === null ? 'Stays open until you close it' : `Open ${sayUntil(link.expiresAt)}`}${
       link.visitLimit === null
         ? ''
         : `, or after ${link.visitLimit} ${link.visitLimit === 1 ? 'visit' : 'visits'}`

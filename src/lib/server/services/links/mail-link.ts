@@ -1,3 +1,4 @@
+import { sayUntil } from '$lib/model/say-until';
 import type { Database } from '../../db/client';
 import { sendMail, type SendMail, type Message } from '../../mail/send-mail';
 
@@ -47,7 +48,7 @@ function textOf({ address, blind, team, from, allowsRemarks, expiresAt, visitLim
     'It opens for you alone: sign in with the address that this message came to. You need no account for that; a link to sign in is mailed to you.',
     `There you can recompute the report in your own browser, check quantities claimed in a manuscript against it${allowsRemarks ? ', and remark on it' : ''}.`
   ];
-  if (expiresAt !== null) lines.push(`It closes on ${new Date(expiresAt).toISOString().slice(0, 10)} (UTC).`);
+  if (expiresAt !== null) lines.push(`It is open ${sayUntil(expiresAt)}.`);
   if (visitLimit !== null)
     lines.push(`It may be opened ${visitLimit === 1 ? 'once' : `${visitLimit} times`} in all.`);
   lines.push('', 'If you expected no such message, leave it unanswered.');

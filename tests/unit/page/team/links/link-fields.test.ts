@@ -50,7 +50,7 @@ describe('the form of a new link', () => {
       'Opens for anyone who has the address.',
       'Shows the report without its counts, so nobody can recompute it. Hides team, people, device and firmware.',
       'Takes remarks, signed “A referee”.',
-      'Closes on 2031-02-04 00:00 UTC, or after 1 visit.'
+      'Open until 3 Feb 2031, end of day UTC, or after 1 visit.'
     ]);
   });
 });

@@ -131,7 +131,7 @@ describe('mail to named people', () => {
     for (const { to, text } of sent) {
       expect(letter.people.filter((other) => other !== to && text.includes(other))).toEqual([]);
       expect(text).toContain(letter.address);
-      expect(text).toMatch(/closes on 2031-05-06[\s\S]*3 times in all/);
+      expect(text).toMatch(/open until 6 May 2031, 12:00 UTC\.[\s\S]*3 times in all/);
     }
   });
 
