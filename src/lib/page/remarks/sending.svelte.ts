@@ -1,5 +1,6 @@
 import { applyAction } from '$app/forms';
 import type { SubmitFunction } from '@sveltejs/kit';
+import { NO_ANSWER } from '../team/datasets/fetch-json';
 
 /** State of one small form that posts to an action of its page, and stays in place whatever comes back. */
 export class Sending {
@@ -20,9 +21,10 @@ export class Sending {
       return async ({ result, update }) => {
         this.busy = false;
         if (result.type === 'error') {
-          this.trouble =
-            (result.error as { message?: string } | undefined)?.message ??
-            'The server did not answer. Your text is still here; try again.';
+          // What the server refuses comes as a plain object; an Error is the browser's own, in words of its own.
+          const { error } = result as { error: unknown };
+          const told = error instanceof Error ? undefined : (error as { message?: string } | undefined);
+          this.trouble = told?.message ?? NO_ANSWER;
         } else if (result.type === 'success') {
           await update({ reset: true, invalidateAll: taken === undefined });
           await taken?.();

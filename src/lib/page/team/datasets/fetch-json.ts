@@ -11,7 +11,8 @@ export class Refused extends Error {
   }
 }
 
-const NO_ANSWER = 'The server did not answer. Nothing is lost; try again when the network is back.';
+/** Said where no answer came at all. */
+export const NO_ANSWER = 'The server did not answer. Nothing is lost; try again when the network is back.';
 
 /**
  * Asks a JSON route of ours.
