@@ -3,6 +3,7 @@ import { and, desc, eq } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { link, linkVisit, person } from '../../db/schema';
 import type { Actor } from '../access/actor';
+import { dayOf } from './day-of';
 import { linkableReport } from './linkable-report';
 
 /** Lines of the log that one answer holds. */
@@ -37,5 +38,3 @@ export function linkVisits(db: Database, actor: Actor, reportId: string, linkId:
     visits: entry.hides ? rows.map((row) => ({ ...row, at: dayOf(row.at), who: null })) : rows
   };
 }
-
-const dayOf = (at: number): number => Math.floor(at / 86_400_000) * 86_400_000;

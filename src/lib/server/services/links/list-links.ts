@@ -4,11 +4,15 @@ import { and, desc, eq, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { link, linkVisit } from '../../db/schema';
 import type { Actor } from '../access/actor';
+import { dayOf } from './day-of';
 import { linkableReport } from './linkable-report';
 
 export type ListedLinks = { ok: true; links: TeamLink[] } | { ok: false; reason: 'unknown' | 'not-allowed' };
 
-/** Links of a report, the newest first, with how they stand and how often they were opened. */
+/**
+ * Links of a report, the newest first, with how they stand and how often they were opened; when last, to the day alone
+ * where the link hides its referees, as in its log.
+ */
 export function listLinks(db: Database, actor: Actor, reportId: string, now = Date.now()): ListedLinks {
   const found = linkableReport(db, actor, reportId);
   if (!found.ok) return found;
@@ -43,6 +47,7 @@ export function listLinks(db: Database, actor: Actor, reportId: string, now = Da
     links: rows.map((row) => ({
       ...row,
       people: JSON.parse(row.people) as string[],
+      lastVisitAt: row.hidesReferees && row.lastVisitAt !== null ? dayOf(row.lastVisitAt) : row.lastVisitAt,
       state: linkState(row, row.visits, now)
     }))
   };

@@ -102,6 +102,18 @@ describe('making and revoking links', () => {
     expect(events).toHaveLength(4);
   });
 
+  it('lists the last visit to the day where the link hides its referees', () => {
+    const day = 86_400_000;
+    const hiding = linked(db, there.lead, there.reportId, { hidesReferees: true }, 2000);
+    const telling = linked(db, there.lead, there.reportId, {}, 2001);
+    for (const { token } of [hiding, telling]) openLink(db, token, null, 3 * day + 5678);
+    const listed = listLinks(db, there.lead, there.reportId, 4 * day);
+    expect(listed.ok && listed.links.map(({ id, lastVisitAt }) => [id, lastVisitAt])).toEqual([
+      [telling.id, 3 * day + 5678],
+      [hiding.id, 3 * day]
+    ]);
+  });
+
   it('is over for a report that was put aside', () => {
     db.update(report).set({ deletedAt: 1 }).where(eq(report.id, there.reportId)).run();
     expect(makeLink(db, there.lead, there.reportId, plainLink)).toEqual({ ok: false, reason: 'unknown' });
