@@ -1,11 +1,14 @@
 import { can } from '$lib/server/access/can';
+import { storageTrouble } from '$lib/server/services/datasets/storage-trouble';
 import { openLink, type LinkRefusal, type OpenLink } from '$lib/server/services/links/open-link';
 import { error, type RequestEvent } from '@sveltejs/kit';
 import { problem } from './problem';
 
-type Event = Pick<RequestEvent, 'locals' | 'cookies' | 'url'> & { params: Partial<Record<string, string>> };
+type Event = Pick<RequestEvent, 'locals' | 'cookies' | 'url' | 'request'> & {
+  params: Partial<Record<string, string>>;
+};
 type Opened = Extract<OpenLink, { ok: true }>;
-type Refusal = LinkRefusal | 'not-allowed';
+type Refusal = LinkRefusal | 'not-allowed' | 'busy' | 'full';
 
 /** What a link may be asked for. */
 export type LinkAction = 'see' | 'remark';
@@ -18,6 +21,14 @@ const WORDS: Record<Refusal, { status: number; message: string }> = {
   'not-allowed': { status: 403, message: 'This link does not allow that.' },
   expired: { status: 410, message: 'This link has expired.' },
   revoked: { status: 410, message: 'This link was closed.' },
+  busy: {
+    status: 503,
+    message: 'The database is busy, so the link cannot be opened now. Try again in a moment.'
+  },
+  full: {
+    status: 507,
+    message: 'The disk of the server is full, so the link cannot be opened. Tell who runs it.'
+  },
   'used-up': { status: 410, message: 'This link was opened as often as it allows.' }
 };
 
@@ -43,18 +54,35 @@ export function askLinkJson(event: Event, action: LinkAction): Opened | { ok: fa
 
 function ask(event: Event, action: LinkAction): Opened | { ok: false; reason: Refusal } {
   const token = event.params.token ?? '';
-  const opened = openLink(event.locals.db, token, event.locals.person, Date.now(), event.cookies.get(VISIT));
+  const opened = open(event, token);
   if (!opened.ok) return opened;
   // One path a link, so that visits of two links in one browser do not take each other's place.
-  event.cookies.set(VISIT, opened.visit, {
-    path: `/link/${token}`,
-    httpOnly: true,
-    sameSite: 'lax',
-    secure: event.url.protocol === 'https:',
-    maxAge: 3600
-  });
+  if (opened.visit !== null)
+    event.cookies.set(VISIT, opened.visit, {
+      path: `/link/${token}`,
+      httpOnly: true,
+      sameSite: 'lax',
+      secure: event.url.protocol === 'https:',
+      maxAge: 3600
+    });
   const { reportId, allowsRemarks } = opened.link;
   if (!can({ kind: 'referee', reportId, allowsRemarks }, action, { reportId }))
     return { ok: false, reason: 'not-allowed' };
   return opened;
+}
+
+/** Opens the link. A visit that cannot be counted is not let in: the limit of visits would not hold. */
+function open(
+  { locals, cookies, request }: Event,
+  token: string
+): OpenLink | { ok: false; reason: 'busy' | 'full' } {
+  // A HEAD is shown nothing; mail programs send them to look whether a link is alive.
+  const counts = request.method !== 'HEAD';
+  try {
+    return openLink(locals.db, token, locals.person, Date.now(), cookies.get(VISIT), counts);
+  } catch (error) {
+    const trouble = storageTrouble(error);
+    if (!trouble) throw error;
+    return { ok: false, reason: trouble };
+  }
 }

@@ -19,8 +19,8 @@ export type OpenedLink = Pick<
 >;
 
 export type OpenLink =
-  /** `visit` is for the browser to keep: shown again within the hour, it is the same visit. */
-  { ok: true; link: OpenedLink; view: LinkView; visit: string } | { ok: false; reason: LinkRefusal };
+  /** `visit` is for the browser to keep: shown again within the hour, it is the same visit. Null: none was counted. */
+  { ok: true; link: OpenedLink; view: LinkView; visit: string | null } | { ok: false; reason: LinkRefusal };
 
 /** A visit lasts an hour, milliseconds: reading a report takes that, and reloading it is no second visit. */
 export const VISIT_LASTS = 3_600_000;
@@ -35,13 +35,15 @@ const SHAPE = /^[A-Za-z0-9_-]{43}$/;
  *
  * @param person who is signed in; null for strangers
  * @param visit what an earlier answer gave this browser to keep
+ * @param counts false for a request that is shown nothing: it is no visit and stands in no log
  */
 export function openLink(
   db: Database,
   token: string,
   person: { id: string } | null,
   now = Date.now(),
-  visit?: string
+  visit?: string | null,
+  counts = true
 ): OpenLink {
   if (!SHAPE.test(token)) return { ok: false, reason: 'unknown' };
   const hash = hashToken(token);
@@ -51,16 +53,20 @@ export function openLink(
       if (!found) return { ok: false, reason: 'unknown' };
       const reason = refusal();
       if (reason === null) {
-        const kept = visit !== undefined && lasts(visit) ? visit : null;
+        const kept = visit && lasts(visit) ? visit : null;
         if (kept !== null || linkState(found, found.visits, now) === 'open') {
-          const opened = kept ?? noteVisit(tx, found.id, person?.id ?? null, 'opened', now);
+          const opened = kept ?? note(found.id, 'opened');
           const { id, teamId, teamSlug, reportId, allowsRemarks, hidesReferees, blind, shows } = found;
           const link = { id, teamId, teamSlug, reportId, allowsRemarks, hidesReferees, blind, shows };
           return { ok: true, link, view: shownByLink(found, sharedThing(found)), visit: opened };
         }
       }
-      noteVisit(tx, found.id, person?.id ?? null, 'refused', now);
+      note(found.id, 'refused');
       return { ok: false, reason: reason ?? 'used-up' };
+
+      function note(linkId: string, outcome: 'opened' | 'refused'): string | null {
+        return counts ? noteVisit(tx, linkId, person?.id ?? null, outcome, now) : null;
+      }
 
       /** Why the link is closed to this person, visits aside. */
       function refusal(): Exclude<LinkRefusal, 'unknown' | 'used-up'> | null {
@@ -80,6 +86,6 @@ export function openLink(
         return tx.select({ id: linkVisit.id }).from(linkVisit).where(mine).get() !== undefined;
       }
     },
-    { behavior: 'immediate' }
+    { behavior: counts ? 'immediate' : 'deferred' }
   );
 }

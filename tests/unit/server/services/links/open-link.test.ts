@@ -100,6 +100,17 @@ describe('visits', () => {
     expect(reason(openLink(db, token, null, 3002, refused.id))).toBe('used-up');
   });
 
+  it('are not counted of a request that is shown nothing, nor are its refusals', () => {
+    const { id, token } = link({ visitLimit: 1 });
+    const looked = openLink(db, token, null, 3000, undefined, false);
+    expect(looked).toMatchObject({ ok: true, visit: null });
+    expect(reason(openLink(db, token, null, 3001))).toBe('opened');
+    expect(reason(openLink(db, token, null, 3002, undefined, false))).toBe('used-up');
+    expect(linkVisits(db, there.lead, there.reportId, id)).toMatchObject({
+      visits: [{ at: 3001, outcome: 'opened' }]
+    });
+  });
+
   it('do not outlive a revocation', () => {
     const { id, token } = link();
     const first = openLink(db, token, null, 3000);
