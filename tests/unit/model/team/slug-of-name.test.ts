@@ -7,6 +7,9 @@ describe('slugOfName', () => {
   it.each([
     ['Bay-side chain laboratory', 'bay-side-chain-laboratory'],
     ['  Ångström & Söhne, Straße 3 ', 'angstrom-sohne-strasse-3'],
+    ['Ærø Ñandú team', 'aero-nandu-team'],
+    ['Œuvre Łódź Đà Þór ẞ', 'oeuvre-lodz-da-thor-ss'],
+    ['A\u030angstro\u0308m ǿ', 'angstrom-o'],
     ['量子', ''],
     ['X', ''],
     ['a'.repeat(39) + ' and more', 'a'.repeat(39)]
