@@ -33,6 +33,7 @@ export const CONDITION_HELP: Record<ConditionName, string> = {
   trialsWhy: 'Where the number comes from: a referee will ask.',
   misread: 'From calibration, such as 0.01. Empty when not known.',
   postSelection: 'Which shots were left out, and by what rule. Empty when all were kept.',
-  measuredOn: 'Year-month-day.',
+  // A date field shows in what order it wants the parts.
+  measuredOn: '',
   notes: 'Whatever else should be known.'
 };
