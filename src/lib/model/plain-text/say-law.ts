@@ -18,7 +18,7 @@ export function sayLaw({ fit }: Diagnosis): string {
   const notice =
     fit.shotsToNotice === null
       ? ''
-      : ` About ${formatCount(fit.shotsToNotice)} shots make the difference noticeable.`;
+      : ` About ${formatCount(fit.shotsToNotice)} ${fit.shotsToNotice === 1 ? 'shot makes' : 'shots make'} the difference noticeable.`;
   const lines = [
     'Best independent-trial law',
     wrap(`${named.join(', ')}.`, '  '),

@@ -8,7 +8,7 @@ export function howBig({ fit, flags }: Diagnosis): string[] {
   const notice =
     fit.shotsToNotice === null
       ? ''
-      : ` About ${formatCount(fit.shotsToNotice)} shots make such a distance noticeable.`;
+      : ` About ${formatCount(fit.shotsToNotice)} ${fit.shotsToNotice === 1 ? 'shot makes' : 'shots make'} such a distance noticeable.`;
   const distance = { ...fit.divergenceInterval, value: fit.divergenceInterval.value ?? fit.divergence };
   return [
     ...sizes,
