@@ -16,9 +16,18 @@ export interface RemarkPlace {
 
 export type Answered<Given> = ({ ok: true } & Given) | { ok: false; problem: Problem };
 
-const PROBLEMS: Record<'unknown' | 'not-allowed' | 'settled' | 'full' | 'busy' | 'disk-full', Problem> = {
+const PROBLEMS: Record<
+  'unknown' | 'not-allowed' | 'name' | 'settled' | 'full' | 'busy' | 'disk-full',
+  Problem
+> = {
   unknown: { status: 404, code: 'not-found', title: 'There is no such report or thread any more.' },
   'not-allowed': { status: 403, code: 'not-allowed', title: 'You may not remark on this report.' },
+  name: {
+    status: 400,
+    code: 'name',
+    title:
+      'This cannot be signed with that name. Sign with another of at most 80 characters; if you are signed in, the name of your account counts.'
+  },
   settled: {
     status: 409,
     code: 'settled',

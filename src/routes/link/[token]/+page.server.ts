@@ -28,7 +28,7 @@ function placeOf(event: Event, form: FormData) {
   const { link } = askLink(event, 'remark');
   const { db, person } = event.locals;
   const given = form.get('signedAs');
-  const signedAs = person?.name ?? (typeof given === 'string' ? given.replace(/\s+/g, ' ').slice(0, 80) : '');
+  const signedAs = person?.name ?? (typeof given === 'string' ? given : '');
   const author: RemarkAuthor = { kind: 'referee', linkId: link.id, personId: person?.id ?? null, signedAs };
   const address = `${event.url.origin}/team/${link.teamSlug}/reports/${link.reportId}`;
   return { db, author, reportId: link.reportId, address };

@@ -39,11 +39,26 @@ export const remarkInputSchema = z.object({
 
 export type RemarkInput = z.infer<typeof remarkInputSchema>;
 
+/**
+ * Whatever a name shows nothing of: controls, marks of direction, spaces without width, letters without ink. With them
+ * two names that look the same would differ, and one could be turned to read as another.
+ */
+const unseen = /[\p{Cc}\p{Cf}\p{Cs}\p{Co}\p{Default_Ignorable_Code_Point}\u2800]/gu;
+
+/** A name on one line, with nothing unseen in it. */
+export const cleanName = (name: string): string =>
+  name
+    .normalize('NFC')
+    .replace(/[^\S\ufeff]+/g, ' ')
+    .replace(unseen, '')
+    .replace(/ +/g, ' ')
+    .trim();
+
 /** Name that a stranger signs a remark with; empty for none. */
 export const signatureSchema = z
   .string()
   .default('')
-  .transform((text) => plain(text).replace(/\s+/g, ' '))
+  .transform(cleanName)
   .pipe(z.string().max(NAME_LENGTH, `A name has at most ${NAME_LENGTH} characters.`));
 
 /** Settling a thread, or opening it again. */

@@ -8,7 +8,10 @@ export interface RemarkView {
   by: string;
   /** Whether it came from the team or through a link. */
   from: 'team' | 'link';
+  /** Whether the name was typed by somebody not signed in: it proves nothing. */
+  typed: boolean;
   mine: boolean;
+  /** To the day, for the team, where the link hides referees. */
   createdAt: number;
 }
 

@@ -16,7 +16,7 @@ export type AddRemark =
   /** `again`: it was there already, sent twice; nobody is to be mailed. */
   | { ok: true; id: string; threadId: string; again: boolean }
   /** `unknown`: no such report, thread or link for this author. `settled`: the thread is to be opened first. */
-  | { ok: false; reason: 'unknown' | 'not-allowed' | 'settled' | 'full' };
+  | { ok: false; reason: 'unknown' | 'not-allowed' | 'name' | 'settled' | 'full' };
 
 /**
  * Adds a remark to a report: the first of a new thread, or an answer. An answer belongs to the section of its thread,
@@ -56,7 +56,7 @@ export function addRemark(
           thing: reportId,
           detail: { section }
         },
-        now
+        signature.shownAt
       );
       return { ok: true, id, threadId: threadId ?? id, again: false };
     },

@@ -1,8 +1,11 @@
+import { cleanName, signatureSchema } from '$lib/model/team/remarks/remark-input';
 import { and, eq, isNull } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { dataset, link, person, report } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
+import { dayOf } from '../links/day-of';
+import { isNameTaken } from './is-name-taken';
 
 /** Who remarks: a member of the team, or somebody who came by a link that the caller has opened for them. */
 export type RemarkAuthor =
@@ -21,10 +24,14 @@ export interface Signature {
   shownPersonId: string | null;
   linkId: string | null;
   signedAs: string;
+  /** When the events say it was: the day alone where the link hides referees. */
+  shownAt: number;
 }
 
 export type SignRemark =
-  { ok: true; signature: Signature } | { ok: false; reason: 'unknown' | 'not-allowed' };
+  | { ok: true; signature: Signature }
+  /** `name`: the signature would be read as the team's, or is too long. */
+  | { ok: false; reason: 'unknown' | 'not-allowed' | 'name' };
 
 /**
  * Whether an author may remark on a report now, and how the remark will be signed. A name that the link hides never
@@ -50,7 +57,14 @@ export function signRemark(
     const { personId, teamId } = actor;
     return {
       ok: true,
-      signature: { teamId, personId, shownPersonId: personId, linkId: null, signedAs: found.name }
+      signature: {
+        teamId,
+        personId,
+        shownPersonId: personId,
+        linkId: null,
+        signedAs: cleanName(found.name),
+        shownAt: now
+      }
     };
   }
   const { linkId, personId, signedAs } = author;
@@ -59,6 +73,7 @@ export function signRemark(
       teamId: link.teamId,
       allows: link.allowsRemarks,
       hides: link.hidesReferees,
+      blind: link.blind,
       revokedAt: link.revokedAt,
       expiresAt: link.expiresAt
     })
@@ -70,14 +85,19 @@ export function signRemark(
   const over = found && (found.revokedAt !== null || (found.expiresAt !== null && found.expiresAt <= now));
   if (!found || over) return { ok: false, reason: 'unknown' };
   if (!found.allows) return { ok: false, reason: 'not-allowed' };
+  const { teamId, hides, blind } = found;
+  const read = signatureSchema.safeParse(hides ? '' : signedAs);
+  if (!read.success || isNameTaken(db, { name: read.data, teamId, personId, blind }))
+    return { ok: false, reason: 'name' };
   return {
     ok: true,
     signature: {
-      teamId: found.teamId,
+      teamId,
       personId,
-      shownPersonId: found.hides ? null : personId,
+      shownPersonId: hides ? null : personId,
       linkId,
-      signedAs: found.hides ? A_REFEREE : signedAs.trim() || A_REFEREE
+      signedAs: read.data || A_REFEREE,
+      shownAt: hides ? dayOf(now) : now
     }
   };
 }

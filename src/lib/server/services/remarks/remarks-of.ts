@@ -6,7 +6,9 @@ import type { Database } from '../../db/client';
 import { link, membership, person, remark, report } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
+import { dayOf } from '../links/day-of';
 import { A_REFEREE } from './remark-author';
+import { THE_TEAM } from './the-team';
 
 /**
  * Whose remarks are asked for. By link only threads begun through that same link come back, with the team's answers
@@ -17,12 +19,9 @@ export type RemarksOf =
   | { reportId: string; via: 'team'; actor: Actor }
   | { reportId: string; via: { linkId: string }; viewer?: string | null };
 
-/** How a member's name stands for readers of a blind link. */
-const THE_TEAM = 'The team';
-
 /**
  * The threads of a report, oldest first, with names as the reader may know them: readers by a blind link get "The team"
- * for every member, and the team gets "A referee" where the link hides referees.
+ * for every member, and the team gets "A referee" and the day alone where the link hides referees.
  */
 export function remarksOf(db: Database, asked: RemarksOf): ThreadView[] {
   const linkId = asked.via === 'team' ? null : asked.via.linkId;
@@ -44,8 +43,9 @@ export function remarksOf(db: Database, asked: RemarksOf): ThreadView[] {
       body: row.body,
       by,
       from,
+      typed: from === 'link' && row.personId === null && by !== A_REFEREE,
       mine: viewer !== null && row.personId === viewer,
-      createdAt: row.createdAt
+      createdAt: row.hides && linkId === null ? dayOf(row.createdAt) : row.createdAt
     };
   };
   const settler = (row: Row): string => {
@@ -54,11 +54,14 @@ export function remarksOf(db: Database, asked: RemarksOf): ThreadView[] {
     if (row.settledBy !== null && !row.hides && !blind) return row.settledBy;
     return row.linkId === null ? 'Somebody who has left' : A_REFEREE;
   };
+  // Settled by nobody who was noted: by a referee whom the link hides.
+  const settledAt = (row: Row, at: number): number =>
+    row.hides && row.settledBy === null && linkId === null ? dayOf(at) : at;
   return roots.map((root) => ({
     id: root.id,
     section: root.section as RemarkSection,
     remarks: rows.filter((row) => row.id === root.id || row.threadId === root.id).map(view),
-    settled: root.settledAt === null ? null : { at: root.settledAt, by: settler(root) },
+    settled: root.settledAt === null ? null : { at: settledAt(root, root.settledAt), by: settler(root) },
     link:
       linkId === null && root.label !== null
         ? { label: root.label, blind: root.blind ?? false, hidesReferees: root.hides ?? false }

@@ -7,7 +7,7 @@ import { threadFor } from './thread-for';
 
 export type SettleThread =
   /** `changed`: false when somebody had done the same before. */
-  { ok: true; changed: boolean } | { ok: false; reason: 'unknown' | 'not-allowed' };
+  { ok: true; changed: boolean } | { ok: false; reason: 'unknown' | 'not-allowed' | 'name' };
 
 /** Settles a thread, or opens it again: whoever may remark in it may do either. The first to settle is kept. */
 export function settleThread(
@@ -20,7 +20,7 @@ export function settleThread(
     (tx): SettleThread => {
       const signed = signRemark(tx, author, reportId, now);
       if (!signed.ok) return signed;
-      const { teamId, shownPersonId, linkId } = signed.signature;
+      const { teamId, shownPersonId, linkId, shownAt } = signed.signature;
       const thread = threadFor(tx, reportId, threadId, linkId);
       if (!thread) return { ok: false, reason: 'unknown' };
       if ((thread.settledAt !== null) === settled) return { ok: true, changed: false };
@@ -39,7 +39,7 @@ export function settleThread(
           thing: reportId,
           detail: { section: thread.section }
         },
-        now
+        shownAt
       );
       return { ok: true, changed: true };
     },

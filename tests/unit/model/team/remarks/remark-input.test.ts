@@ -1,3 +1,4 @@
+import { nameKey } from '$lib/model/team/remarks/name-key';
 import { REMARK_LENGTH, remarkInputSchema, signatureSchema } from '$lib/model/team/remarks/remark-input';
 import { sectionOfPart } from '$lib/model/team/remarks/sections';
 import { describe, expect, it } from 'vitest';
@@ -31,6 +32,42 @@ describe('signatureSchema', () => {
     expect(signatureSchema.parse(' R.\n Invented ')).toBe('R. Invented');
     expect(signatureSchema.parse(undefined)).toBe('');
     expect(signatureSchema.safeParse('x'.repeat(81)).success).toBe(false);
+  });
+});
+
+describe('what a name cannot carry', () => {
+  // Code points by the Unicode Character Database (general categories Cc, Cf; Default_Ignorable_Code_Point).
+  it.each([
+    ['right-to-left override', '\u202e'],
+    ['right-to-left mark', '\u200f'],
+    ['isolate', '\u2067'],
+    ['zero-width space', '\u200b'],
+    ['zero-width joiner', '\u200d'],
+    ['word joiner', '\u2060'],
+    ['byte order mark', '\ufeff'],
+    ['soft hyphen', '\u00ad'],
+    ['Hangul filler', '\u3164'],
+    ['tag letter', '\u{e0041}'],
+    ['escape', '\u001b'],
+    ['next line', '\u0085']
+  ])('a %s', (_, mark) => {
+    expect(signatureSchema.parse(`${mark}A${mark}da${mark} ${mark} Invented${mark}`)).toBe('Ada Invented');
+    expect(signatureSchema.parse(mark)).toBe('');
+  });
+
+  it('leaves letters of any script as they are', () => {
+    for (const name of ['Zoë Müller', '王小明', 'Δημήτρης', 'نور', 'O’Neil-Ng, Jr.'])
+      expect(signatureSchema.parse(name)).toBe(name);
+  });
+});
+
+describe('nameKey', () => {
+  it('leaves case, accents, spaces and punctuation aside, and nothing else', () => {
+    for (const name of ['the  TEAM', 'Thé Téam.', 'T h e-t e a m', 'ＴＨＥ team'])
+      expect(nameKey(name)).toBe(nameKey('The team'));
+    expect(nameKey('Straße')).toBe(nameKey('STRASSE'));
+    expect(nameKey('The teams')).not.toBe(nameKey('The team'));
+    expect(nameKey(' — ')).toBe('');
   });
 });
 

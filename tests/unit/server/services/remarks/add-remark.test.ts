@@ -1,5 +1,5 @@
 import { newId } from '$lib/server/db/new-id';
-import { event, link, membership, remark, report } from '$lib/server/db/schema';
+import { event, link, membership, remark, report, team } from '$lib/server/db/schema';
 import { addRemark } from '$lib/server/services/remarks/add-remark';
 import { settleThread } from '$lib/server/services/remarks/settle-thread';
 import { eq } from 'drizzle-orm';
@@ -85,6 +85,47 @@ describe('addRemark by a link', () => {
       ['R. Stranger', id],
       ['A referee', id]
     ]);
+  });
+
+  it.each(['The team', 'the  TEÀM', 'The\u200b team', 'ada invented', '\u202eAda Invented', 'Team-name'])(
+    'is not signed %j, which would be read as the team’s',
+    async (name) => {
+      const { db, team: ours, makeLink, referee, say } = await remarkSetting();
+      db.update(team).set({ name: 'Team Name' }).where(eq(team.id, ours.id)).run();
+      const id = makeLink();
+      expect(addRemark(db, referee(id, name), say('x'))).toEqual({ ok: false, reason: 'name' });
+      expect(db.select().from(remark).all()).toEqual([]);
+    }
+  );
+
+  it('is not signed so by an account either, unless it is the member’s own', async () => {
+    const { db, maker, makeLink, makePerson, referee, say, reportId } = await remarkSetting();
+    const id = makeLink();
+    const namesake = referee(id, 'Ada Invented', makePerson('Ada Invented').id);
+    expect(addRemark(db, namesake, say('x'))).toEqual({ ok: false, reason: 'name' });
+    const first = given(addRemark(db, referee(id, 'Ada Invented', maker.personId), say('x')));
+    const settle = (author: typeof namesake) =>
+      settleThread(db, author, { reportId, threadId: first.id, settled: true });
+    expect(settle(namesake)).toEqual({ ok: false, reason: 'name' });
+    expect(settle(referee(id)).ok).toBe(true);
+  });
+
+  it('gives away nobody of a blind link: names it never shows are refused no more than others', async () => {
+    const { db, makeLink, referee, say } = await remarkSetting();
+    const blind = makeLink({ blind: true });
+    expect(addRemark(db, referee(blind, 'Ada Invented'), say('x')).ok).toBe(true);
+    expect(addRemark(db, referee(blind, 'Bo Elsewhere'), say('x')).ok).toBe(true);
+    expect(addRemark(db, referee(blind, 'the team'), say('x'))).toEqual({ ok: false, reason: 'name' });
+  });
+
+  it('is kept with a clean name, and events of a hidden referee tell the day alone', async () => {
+    const { db, makeLink, referee, say } = await remarkSetting();
+    const now = 86_400_000 * 3 + 5678;
+    given(addRemark(db, referee(makeLink(), 'R.\u202e\n Stranger\u200b'), say('one'), now));
+    given(addRemark(db, referee(makeLink({ hidesReferees: true })), say('two'), now));
+    expect(db.select().from(remark).get()!.signedAs).toBe('R. Stranger');
+    const told = db.select().from(event).where(eq(event.action, 'remark.add')).all();
+    expect(told.map(({ at }) => at)).toEqual([now, 86_400_000 * 3]);
   });
 
   it('keeps no name and tells the events no person where the link hides referees', async () => {

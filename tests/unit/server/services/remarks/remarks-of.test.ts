@@ -48,7 +48,7 @@ describe('remarksOf, for the team', () => {
     const threads = remarksOf(db, { reportId, via: 'team', actor: maker });
     expect(threads[0]).toMatchObject({
       link: { label: 'round 2', blind: true, hidesReferees: true },
-      settled: { at: 9, by: 'A referee' },
+      settled: { at: 0, by: 'A referee' },
       remarks: [{ by: 'A referee', from: 'link', mine: false }]
     });
     expect(threads[1].remarks[0].by).toBe('Rolf Referee');
@@ -57,6 +57,40 @@ describe('remarksOf, for the team', () => {
     expect(JSON.stringify(remarksOf(db, { reportId, via: 'team', actor: maker }))).not.toContain('Ruth');
     db.delete(link).where(eq(link.id, hiding)).run();
     expect(JSON.stringify(remarksOf(db, { reportId, via: 'team', actor: maker }))).not.toContain('Ruth');
+  });
+
+  it('tells of hidden referees the day alone, and of others when it was', async () => {
+    const { db, maker, makeLink, member, referee, say, reportId } = await remarkSetting();
+    const day = 86_400_000;
+    const hiding = makeLink({ hidesReferees: true });
+    const { threadId } = given(addRemark(db, referee(hiding), say('x'), 3 * day + 5678));
+    given(addRemark(db, member(maker), say('y', threadId), 3 * day + 6000));
+    settleThread(db, referee(hiding), { reportId, threadId, settled: true }, 4 * day + 17);
+    given(addRemark(db, referee(makeLink()), say('z'), 5 * day + 23));
+    const team = remarksOf(db, { reportId, via: 'team', actor: maker });
+    expect(team.map(({ remarks }) => remarks.map(({ createdAt }) => createdAt))).toEqual([
+      [3 * day, 3 * day + 6000],
+      [5 * day + 23]
+    ]);
+    expect(team[0].settled).toEqual({ at: 4 * day, by: 'A referee' });
+    const own = remarksOf(db, { reportId, via: { linkId: hiding } });
+    expect(own[0].remarks[0].createdAt).toBe(3 * day + 5678);
+  });
+
+  it('says which names were typed by nobody known', async () => {
+    const { db, maker, makeLink, makePerson, member, referee, say, reportId } = await remarkSetting();
+    const id = makeLink();
+    given(addRemark(db, member(maker), say('ours')));
+    given(addRemark(db, referee(id, 'Rolf'), say('typed')));
+    given(addRemark(db, referee(id), say('unsigned')));
+    given(addRemark(db, referee(id, 'Ruth', makePerson('Ruth').id), say('signed in')));
+    const seen = remarksOf(db, { reportId, via: 'team', actor: maker }).map(({ remarks: [first] }) => first);
+    expect(seen.map(({ from, typed }) => [from, typed])).toEqual([
+      ['team', false],
+      ['link', true],
+      ['link', false],
+      ['link', false]
+    ]);
   });
 
   it('keeps the signature of somebody who is gone', async () => {
