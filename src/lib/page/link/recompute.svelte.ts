@@ -18,6 +18,8 @@ export interface Recomputable {
 export type Recomputed =
   | { kind: 'same'; sha256: string }
   | { kind: 'differs'; sha256: string; differences: Difference[] }
+  /** The document is not the one that was stored: it was changed on the way, and nothing was computed. */
+  | { kind: 'changed'; received: string }
   | { kind: 'failed'; message: string };
 
 /** Version of the engine that this page carries. */
@@ -32,9 +34,15 @@ export class Recompute {
   outcome = $state.raw<Recomputed | null>(null);
   #run: Run | null = null;
 
-  async start({ document, options, counts }: Recomputable): Promise<void> {
+  async start({ document, sha256: stored, options, counts }: Recomputable): Promise<void> {
     this.cancel();
     this.outcome = null;
+    // What the page was given may differ from what the server keeps; then a match would be one with another report.
+    const received = sha256Of(document);
+    if (received !== stored) {
+      this.outcome = { kind: 'changed', received };
+      return;
+    }
     const since = performance.now();
     this.running = { share: 0, step: 'fit', since };
     const run = startRun(counts, options, (progress) => {
