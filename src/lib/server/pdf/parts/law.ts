@@ -2,6 +2,7 @@ import { distributionTable } from '$lib/charts/distribution-table';
 import { isShown } from '$lib/charts/is-shown';
 import { levelsTable } from '$lib/charts/levels-table';
 import { referencesTable } from '$lib/charts/references-table';
+import { poissonIsApart } from '$lib/model/report/poisson-is-apart';
 import { sayDistance } from '$lib/model/report/say-distance';
 import { sayOmitted } from '$lib/model/report/say-omitted';
 import type { Diagnosis } from '$lib/stats/types';
@@ -40,7 +41,12 @@ export function lawPart(document: Diagnosis): Part {
           },
           ...noteBlock(sayOmitted(document))
         ],
-        notes: [NOTES.bestLaw, NOTES.nats, { title: 'How the fit was reached', paragraphs: [fit.how] }]
+        notes: [
+          NOTES.bestLaw,
+          NOTES.nats,
+          ...(poissonIsApart(document) ? [NOTES.poisson] : []),
+          { title: 'How the fit was reached', paragraphs: [fit.how] }
+        ]
       },
       {
         blocks: [

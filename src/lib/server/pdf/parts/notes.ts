@@ -32,6 +32,12 @@ export const NOTES = {
       'The Kullback–Leibler divergence of the counts from the law. Chance alone gives some; what is left once that is taken off, and its interval, say how far the law really is. ln(1/α) divided by that is about how many shots show it at level α.'
     ]
   },
+  poisson: {
+    title: 'The Poisson law',
+    paragraphs: [
+      'A Poisson law has no largest count. With N known it is not one of the laws compared, which all end at N: it may lie closer to the counts than any of them, and stands there for reference.'
+    ]
+  },
   rate: {
     title: 'Rate',
     paragraphs: [
