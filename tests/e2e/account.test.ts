@@ -48,7 +48,7 @@ describe('the account page', () => {
     const complaints = complaintsOf(page);
     await page.goto(`${server.address}/account`, { waitUntil: 'networkidle' });
     const change = async (old: string, wanted: string) => {
-      await page.getByLabel('Password until now').fill(old);
+      await page.getByLabel('Present password').fill(old);
       await page.getByLabel('New password').fill(wanted);
       await page.getByRole('button', { name: 'Change the password' }).click();
     };
