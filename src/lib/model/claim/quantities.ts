@@ -2,7 +2,7 @@ import { carefulThird, LEAST_SHOTS } from '$lib/stats/claim/careful-third';
 import { pLimits } from '$lib/stats/claim/p-limits';
 import { thirdOverMean } from '$lib/stats/claim/third-over-mean';
 import type { Diagnosis, Interval, TestResult } from '$lib/stats/types';
-import type { Summary } from '../link/summary';
+import type { Summary, SummaryTest } from '../link/summary';
 import { TESTS } from '../labels';
 
 /** Something that a manuscript may claim, with what the report says of it. */
@@ -14,6 +14,10 @@ export interface Quantity {
   isP: boolean;
   /** Cannot be below 0. */
   positive: boolean;
+  /** A whole number claimed of it is meant exactly: "a Fano factor of 1" is not 1 ± 0.5. */
+  wholeIsExact: boolean;
+  /** The last row lumps counts, and what the interval says is a lower limit or less. */
+  lumped: boolean;
   /** What to know of this interval; empty when it is the document's own. */
   note: string;
 }
@@ -24,51 +28,80 @@ const NONE: Interval = { value: null, low: null, high: null };
 export function quantitiesOf(report: Diagnosis | Summary): Quantity[] {
   const { moments, fit, data } = report;
   const { shots } = data;
+  const lumped = 'lumped' in data ? data.lumped : data.lump !== null;
   const third = moments.third === null ? NONE : carefulThird(moments.third, shots);
   const ratio = thirdOverMean({ ...moments, third }, shots);
-  const thirdNote =
-    moments.third === null
-      ? 'The third cumulant is kept back with the counts.'
-      : shots < LEAST_SHOTS
-        ? `Fewer than ${LEAST_SHOTS} shots carry no third cumulant that a claim could be held to.`
-        : 'The interval is the report’s, widened by 1 + 8/√S: a third cumulant errs more often than its interval says.';
-  const tests: Pick<TestResult, 'id' | 'p' | 'source' | 'resamples' | 'stoppedEarly'>[] = report.tests;
-  const plain = (id: string, label: string, interval: Interval, note = '', positive = true): Quantity => ({
+  const thirdNote = noteOfThird(moments.third, shots);
+  const ofMoment = (
+    id: string,
+    label: string,
+    interval: Interval,
+    more: Partial<Quantity> = {}
+  ): Quantity => ({
+    ...PLAIN,
     id,
     label,
-    interval,
-    isP: false,
-    positive,
-    note
+    ...more,
+    interval: lumped ? lumpedLimits(id, interval) : interval,
+    lumped,
+    note: lumped ? `${LUMP_NOTE} ${more.note ?? ''}`.trim() : (more.note ?? '')
   });
   return [
-    plain('mean', 'mean, κ₁', moments.mean),
-    plain('variance', 'variance, κ₂', moments.variance),
-    plain('third', 'third cumulant, κ₃', third, thirdNote, false),
-    plain('fano', 'κ₂/κ₁, Fano factor', moments.fano),
-    plain(
-      'third-over-mean',
-      'κ₃/κ₁',
-      ratio,
-      `${thirdNote} The ratio’s interval follows from those of κ₁ and κ₃ by the delta method, with Cov(κ₁, κ₃) = κ₄/S.`,
-      false
-    ),
-    plain(
-      'divergence',
-      'divergence from the best law, nats a shot',
-      fit.divergenceInterval,
-      'Chance is taken off. A divergence claimed without that is larger by what chance alone gives.'
-    ),
-    ...tests.map((test) => ({
-      id: `p-${test.id}`,
-      label: `p of the test “${TESTS[test.id]}”`,
-      interval: pLimits(test),
-      isP: true,
-      positive: true,
-      note:
-        test.source === 'exact' || test.source === 'limit'
-          ? 'By itself, before other tests are allowed for.'
-          : 'By itself, before other tests are allowed for. The interval is what other resamples could make of it.'
-    }))
+    ofMoment('mean', 'mean, κ₁', moments.mean),
+    ofMoment('variance', 'variance, κ₂', moments.variance),
+    ofMoment('third', 'third cumulant, κ₃', third, { note: thirdNote, positive: false }),
+    ofMoment('fano', 'κ₂/κ₁, Fano factor', moments.fano, { wholeIsExact: true }),
+    ofMoment('third-over-mean', 'κ₃/κ₁', ratio, {
+      note: `${thirdNote} The ratio’s interval follows from those of κ₁ and κ₃ by the delta method, with Cov(κ₁, κ₃) = κ₄/S.`,
+      positive: false,
+      wholeIsExact: true
+    }),
+    {
+      ...PLAIN,
+      id: 'divergence',
+      label: 'divergence from the best law, nats a shot',
+      interval: fit.divergenceInterval ?? NONE,
+      wholeIsExact: true,
+      note: fit.divergenceInterval
+        ? 'Chance is taken off. A divergence claimed without that is larger by what chance alone gives.'
+        : 'The divergence is kept back with the counts.'
+    },
+    ...report.tests.map((test) => ofTest(test))
   ];
+}
+
+const PLAIN = { isP: false, positive: true, wholeIsExact: false, lumped: false };
+
+const LUMP_NOTE =
+  'The last row lumps counts and is counted at the least it can be, so this cannot settle a claim, but for a mean below its lower limit.';
+
+/**
+ * A mean of lumped counts is no larger than the true one, so its lower limit holds and a claim below it is wrong. Of
+ * the others neither limit is used: a ratio of two lower limits may err to either side.
+ */
+const lumpedLimits = (id: string, { value, low }: Interval): Interval => ({
+  value,
+  low: id === 'mean' ? low : null,
+  high: null
+});
+
+function noteOfThird(third: Interval | null, shots: number): string {
+  if (third === null) return 'The third cumulant is kept back with the counts.';
+  return shots < LEAST_SHOTS
+    ? `Fewer than ${LEAST_SHOTS} shots carry no third cumulant that a claim could be held to.`
+    : 'The interval is the report’s, widened by 1 + 8/√S: a third cumulant errs more often than its interval says.';
+}
+
+function ofTest(test: TestResult | SummaryTest): Quantity {
+  const exact = test.source === 'exact' || test.source === 'limit';
+  const itself = 'By itself, before other tests are allowed for.';
+  return {
+    ...PLAIN,
+    id: `p-${test.id}`,
+    label: `p of the test “${TESTS[test.id]}”`,
+    interval: 'limits' in test ? test.limits : pLimits(test),
+    isP: true,
+    wholeIsExact: true,
+    note: exact ? itself : `${itself} The interval is what other resamples could make of it.`
+  };
 }

@@ -1,96 +1,88 @@
+import { pLimits } from '$lib/stats/claim/p-limits';
 import type { Diagnosis, Flag, Interval, TestResult } from '$lib/stats/types';
-import { formatNumber } from '../format-number';
-import { rounded, roundedInterval } from './rounded';
+import { differentCounts, LEAST_SHOTS_FOR_LAW, LEAST_TO_HIDE } from './hides-counts';
+import { rounded, roundedAll, roundedOutward } from './rounded';
+import { summaryWords } from './summary-words';
 
-/**
- * Fewer different counts than this, and a mean, a variance and a number of shots would leave next to nothing to guess:
- * a link cannot hide such counts, and is not made.
- */
-export const LEAST_TO_HIDE = 6;
+export { LEAST_TO_HIDE } from './hides-counts';
 
-/** Third and fourth cumulant and the best law are kept back below this many different counts, for the same reason. */
-export const LEAST_FOR_LAW = 8;
+/** Significant digits of a p-value: a third one tells histograms apart. */
+const DIGITS_OF_P = 2;
 
-type Kept = 'answer' | 'cautions' | 'engine' | 'notRun';
+/** A test by its p, with what its resamples leave open; statistic, draws and smallest p are kept back. */
+export interface SummaryTest extends Pick<TestResult, 'id' | 'p' | 'pAdjusted' | 'source'> {
+  limits: Interval;
+}
 
-/** A diagnosis without its counts, and without the numbers from which they could be worked out. */
-export interface Summary extends Pick<Diagnosis, Kept> {
+/** A diagnosis without its counts, and without the numbers that tell most about them. */
+export interface Summary extends Pick<Diagnosis, 'answer' | 'cautions' | 'notRun'> {
   format: 'severalty.summary/1';
-  data: Omit<Diagnosis['data'], 'counts' | 'lump' | 'digest'>;
+  engine: Omit<Diagnosis['engine'], 'seed' | 'resamples'>;
+  data: Omit<Diagnosis['data'], 'counts' | 'lump' | 'digest'> & {
+    /** True when the last row lumps counts: the moments are lower limits then. */
+    lumped: boolean;
+  };
   moments: Record<'mean' | 'variance' | 'fano' | 'dispersion', Interval> & {
     third: Interval | null;
     fourth: Interval | null;
   };
-  fit: Pick<Diagnosis['fit'], 'divergenceInterval'> & {
+  fit: {
+    divergenceInterval: Interval | null;
     law: Pick<Diagnosis['fit'], 'levels' | 'poissonPart'> | null;
   };
-  tests: Omit<TestResult, 'statistic'>[];
+  tests: SummaryTest[];
   flags: Flag[];
 }
 
-/** How many different counts were seen, the closing row "or more" being one. */
-export function differentCounts({ data }: Pick<Diagnosis, 'data'>): number {
-  return data.counts.filter(([, shots]) => shots > 0).length + (data.lump ? 1 : 0);
-}
-
 /**
- * What a link shows that keeps the counts back.
+ * What a link shows that does not show the counts.
  *
  * Gone: counts, closing row and their digest (short histograms can be guessed and hashed), the seen shares and their
  * intervals in distribution, rate and tails (an exact interval gives its count back), statistics of tests,
- * likelihoods and G² (whole sums of counts at sixteen digits), and the sentences that name numbers of shots. What
- * stays of numbers has three digits. The law and the mean tell roughly how often each count came, as every published
- * fit does; not the numbers themselves.
+ * likelihoods and G² (whole sums of counts at sixteen digits), seed and resamples, and the sentences that name numbers
+ * of shots. Every number has three digits, a p two, an interval those that its width carries; what was set before
+ * anything was counted, and the number of shots, are told as they are. Third and fourth cumulant, divergence and law
+ * wait for many shots.
+ *
+ * This does not make the counts secret. Who guesses them, or tries all that fit mean and variance, can diagnose the
+ * guess and check it against what is left; the defaults of seed and resamples are no secret either. Large data leave
+ * many histograms that fit, small data few, and where the line runs is not proven: hidesCounts refuses the clear cases.
  */
 export function withoutCounts(diagnosis: Diagnosis): Summary {
-  const { shots, trials, unit, geometry, misread, ordered, batches } = diagnosis.data;
+  const { shots, trials, unit, geometry, misread, ordered, batches, lump } = diagnosis.data;
+  const { version, alpha, tolerance } = diagnosis.engine;
   const { mean, variance, third, fourth, fano, dispersion } = diagnosis.moments;
-  const wide = differentCounts(diagnosis) >= LEAST_FOR_LAW;
+  const { levels, poissonPart, divergenceInterval } = diagnosis.fit;
+  const many = shots >= LEAST_SHOTS_FOR_LAW && differentCounts(diagnosis) >= LEAST_TO_HIDE;
+  const { answer, flags, cautions } = summaryWords(diagnosis);
+  const measured = roundedAll({
+    moments: { mean, variance, fano, dispersion, third: many ? third : null, fourth: many ? fourth : null },
+    fit: {
+      divergenceInterval: many ? divergenceInterval : null,
+      law: many ? { levels: levels.map(({ p, trials }) => ({ p, trials })), poissonPart } : null
+    },
+    flags,
+    answer
+  });
   return {
     format: 'severalty.summary/1',
-    engine: diagnosis.engine,
-    data: { shots, trials, unit, geometry, misread, ordered, batches },
-    moments: {
-      mean: roundedInterval(mean),
-      variance: roundedInterval(variance),
-      fano: roundedInterval(fano),
-      dispersion: roundedInterval(dispersion),
-      third: wide ? roundedInterval(third) : null,
-      fourth: wide ? roundedInterval(fourth) : null
-    },
-    fit: {
-      divergenceInterval: roundedInterval(diagnosis.fit.divergenceInterval),
-      law: wide
-        ? {
-            levels: diagnosis.fit.levels.map(({ p, trials }) => ({ p: rounded(p), trials })),
-            poissonPart: rounded(diagnosis.fit.poissonPart)
-          }
-        : null
-    },
-    tests: diagnosis.tests.map(withoutStatistic),
+    engine: { version, alpha, tolerance },
+    data: { shots, trials, unit, geometry, misread, ordered, batches, lumped: lump !== null },
+    ...measured,
+    tests: diagnosis.tests.map(ofTest),
     notRun: diagnosis.notRun,
-    flags: diagnosis.flags.map(withoutNumbersOfShots),
-    answer: { ...diagnosis.answer, because: reasons(diagnosis) },
-    cautions: diagnosis.cautions.filter((caution) => !diagnosis.data.lump || !/lumps counts/.test(caution))
+    cautions
   };
 }
 
-function withoutStatistic(test: TestResult): Omit<TestResult, 'statistic'> {
-  const { id, p, pAdjusted, smallestP, source, resamples, stoppedEarly } = test;
-  return { id, p, pAdjusted, smallestP, source, resamples, stoppedEarly };
-}
-
-/** Flags about one count, or one half of them, give the shots with it; their words stay, their size goes. */
-function withoutNumbersOfShots(flag: Flag): Flag {
-  const size = flag.id === 'dead-shots' || flag.id === 'pairing' ? '' : flag.size;
-  return { ...flag, size };
-}
-
-/** Reasons of the answer; the certificate's names the shots in a tail, so only its p is told. */
-function reasons({ answer, tails }: Diagnosis): string[] {
-  return answer.because.map((reason) =>
-    reason.startsWith('Exact certificate') && tails.certificate
-      ? `Exact certificate, without fit or simulation, of a tail heavier than independent trials allow (p at most ${formatNumber(tails.certificate.p, 2)}).`
-      : reason
-  );
+function ofTest(test: TestResult): SummaryTest {
+  const { id, p, pAdjusted, source } = test;
+  const { value, low, high } = roundedOutward(pLimits(test), DIGITS_OF_P);
+  return {
+    id,
+    p: rounded(p, DIGITS_OF_P),
+    pAdjusted: rounded(pAdjusted, DIGITS_OF_P),
+    source,
+    limits: { value, low, high: high === null ? null : Math.min(1, high) }
+  };
 }

