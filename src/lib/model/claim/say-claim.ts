@@ -3,26 +3,34 @@ import { formatNumber } from '../format-number';
 import { sayInterval } from '../say-interval';
 import { sayHowOften } from '../say-p';
 import type { Quantity } from './quantities';
-import type { Claimed } from './read-claimed';
 
-/** The finding about one claim in a sentence or two, words first. `judged` is null for "less than". */
+/**
+ * The finding about one claim in a sentence or two, words first.
+ *
+ * @param judged null for "less than"
+ * @param claim the claimed value
+ * @param digit unit it was rounded to when no uncertainty was stated; 0 for one stated, or meant exactly
+ */
 export function sayClaim(
   quantity: Quantity,
   verdict: ClaimVerdict,
   judged: JudgedClaim | null,
-  claimed: Claimed,
+  claim: number,
+  digit: number,
   level: number
 ): string {
   const { interval } = quantity;
   if (interval.value === null) return 'The report gives no value to compare with.';
   const ours = `The report has ${sayInterval(interval, 4)}`;
   if (!judged) {
-    const than = `less than ${formatNumber(claimed.value, 3)}`;
+    const than = `less than ${formatNumber(claim, 3)}`;
     if (verdict === 'agrees') return `${ours}, which is ${than}.`;
     if (verdict === 'disagrees') return `${ours}, which is not ${than}.`;
     return `${ours}: with these resamples it may or may not be ${than}.`;
   }
-  const same = rounds(interval.value, claimed) ? ' To the digits given it is the same number.' : '';
+  const same = rounds(interval.value, claim, digit) ? ' To the digits given it is the same number.' : '';
+  if (quantity.lumped && verdict === 'cannot-tell')
+    return `${ours}. The last row lumps counts, counted at the least they can be, so this cannot settle the claim.${same}`;
   if (judged.distance === null) return `${ours}. On the side of the claim nothing limits it.${same}`;
   const far = `The claim lies ${formatNumber(Math.abs(judged.distance), 2)} times both uncertainties together ${
     judged.distance >= 0 ? 'above' : 'below'
@@ -46,6 +54,5 @@ export function sayClaim(
 const sayOften = (p: number): string => (p < 1e-12 ? 'would practically never turn up' : sayHowOften(p));
 
 /** Whether the report's value, rounded as the claim is, gives the claim: half a unit of its last digit either way. */
-function rounds(value: number, { value: claim, lastDigit }: Claimed): boolean {
-  return Math.abs(value - claim) <= 0.5000001 * lastDigit;
-}
+const rounds = (value: number, claim: number, digit: number): boolean =>
+  digit > 0 && Math.abs(value - claim) <= 0.5000001 * digit;

@@ -36,6 +36,7 @@ describe('checkClaim', () => {
 
   it('disagrees with a mean that is far off, unless its uncertainty is as large', () => {
     expect(verdict('mean', '3.0')).toBe('disagrees');
+    expect(verdict('mean', '3.1(3)')).toBe('agrees');
     expect(verdict('mean', '3.1', '0.3')).toBe('agrees');
     // ±0.3 at 95 % is half of ±0.3 at one σ: 0.49 away is 3.1 σ.
     expect(verdict('mean', '3.1', '0.3', 'ninety-five')).toBe('disagrees');
@@ -70,7 +71,8 @@ describe('checkClaim', () => {
     ['p-fit', '1.2', '', /^value cannot be above 1/],
     ['mean', '< 3', '', /^value “less than”/],
     ['mean', '3', 'some', /^uncertainty is not a number/],
-    ['mean', '3', '-1', /^uncertainty is not a number/]
+    ['mean', '3', '-1', /^uncertainty is not a number/],
+    ['mean', '3.0(2)', '0.2', /^uncertainty stands in brackets/]
   ])('%s %s ± %s is refused in words', (id, value, uncertainty, problem) =>
     expect(verdict(id, value, uncertainty)).toMatch(problem)
   );
@@ -84,6 +86,15 @@ describe('checkClaim', () => {
       verdict: 'cannot-tell'
     });
     expect(third.note).toMatch(/kept back/);
+  });
+
+  it('says that a comma was read as a decimal one', () => {
+    const checked = check('mean', '1,234', '1,000');
+    expect(checked.ok && checked.sentence).toMatch(
+      /The claim was read as 1\.234\. The uncertainty was read as 1\.000\.$/
+    );
+    const clear = check('mean', '2,61');
+    expect(clear.ok && clear.sentence).not.toMatch(/read as/);
   });
 
   it('says every finding without undefined or NaN', () => {
