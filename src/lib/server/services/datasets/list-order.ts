@@ -25,7 +25,11 @@ const columns: Record<Sort, SQL> = {
 /** Columns that never are null: asking would keep the index of the table's usual order from being used. */
 const always: Sort[] = ['name', 'geometry', 'unit', 'shots', 'mean', 'largest', 'created', 'reports'];
 
-/** Order of the table: what is not stated comes last either way, and equal lines keep one order over all pages. */
+/**
+ * Order of the table: what is not stated comes last either way, and equal lines keep one order over all pages. Datasets
+ * saved together have one time: they stay as they stood in the file, which is the order of their row numbers. Every
+ * index ends in the row number, and a VACUUM may number anew but keeps the order.
+ */
 export function listOrder({ sort, order }: DatasetQuery): SQL[] {
   const direction = sql.raw(order === 'up' ? 'asc' : 'desc');
   const column = columns[sort];
@@ -33,6 +37,6 @@ export function listOrder({ sort, order }: DatasetQuery): SQL[] {
     ...(always.includes(sort) ? [] : [sql`${column} is null`]),
     sql`${column} ${direction}`,
     ...(sort === 'created' ? [] : [sql`${dataset.createdAt} desc`]),
-    sql`${dataset.id} ${direction}`
+    sql`${dataset}.rowid`
   ];
 }

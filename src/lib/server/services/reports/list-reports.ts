@@ -71,7 +71,7 @@ const columns: Record<ReportSort, SQL> = {
   by: sql`(select ${person.name} from ${person} where ${person.id} = ${report.createdBy}) collate nocase`
 };
 
-/** What is not stated comes last either way, and equal lines keep one order over all pages. */
+/** What is not stated comes last either way; of equal lines the one saved last comes first, over all pages. */
 function order({ sort, order }: ReportQuery): SQL[] {
   const direction = sql.raw(order === 'up' ? 'asc' : 'desc');
   const column = columns[sort];
@@ -79,7 +79,7 @@ function order({ sort, order }: ReportQuery): SQL[] {
     ...(sort === 'device' || sort === 'by' ? [sql`${column} is null`] : []),
     sql`${column} ${direction}`,
     ...(sort === 'made' ? [] : [sql`${report.createdAt} desc`]),
-    sql`${report.id}`
+    sql`${report}.rowid ${sort === 'made' ? direction : sql.raw('desc')}`
   ];
 }
 

@@ -50,7 +50,7 @@ function waiting(db: Database, actor: Actor): TeamHome['waiting'] {
     .select({ id: dataset.id, name: dataset.name, shots: dataset.shots, createdAt: dataset.createdAt })
     .from(dataset)
     .where(where)
-    .orderBy(desc(dataset.createdAt), desc(dataset.id))
+    .orderBy(desc(dataset.createdAt), sql`${dataset}.rowid`)
     .limit(LINES)
     .all();
   return { total, newest };

@@ -44,6 +44,20 @@ describe('listReports', () => {
     });
   });
 
+  it('puts the one saved last first where times are equal, whatever the ids', async () => {
+    const { db, ours, observer, tern } = await setting();
+    const ids: string[] = [];
+    for (let i = 0; i < 6; i++)
+      ids.push((await makeReport(db, { teamId: ours.id, datasetId: tern }, {}, 9)).id);
+    const listed = (search: string) =>
+      listReports(db, observer, ask(search))
+        .rows.map(({ id }) => id)
+        .filter((id) => ids.includes(id));
+    expect(listed('')).toEqual([...ids].reverse());
+    expect(listed('order=up')).toEqual(ids);
+    expect(listed('sort=device')).toEqual([...ids].reverse());
+  });
+
   it('finds by words, verdict, device and dataset; nothing of another team by any of them', async () => {
     const { db, observer, tern, foreign, made } = await setting();
     const found = (search: string) => listReports(db, observer, ask(search)).rows.map(({ id }) => id);
