@@ -29,7 +29,13 @@ const isTyped = (target: HTMLElement): boolean =>
 class Keys {
   shown = $state(false);
   singles = $state(true);
-  list = $state.raw<Shortcut[]>([]);
+  /** Those of the page alone; the page takes them away when it is left. */
+  own = $state.raw<Shortcut[]>([]);
+  /** Those of every page, set by the layout. */
+  everywhere = $state.raw<Shortcut[]>([]);
+  list = $derived([...this.own, ...this.everywhere]);
+  /** Whether the page had a chart to walk when the list was opened. */
+  charts = $state(false);
 
   start(): void {
     try {
@@ -37,6 +43,12 @@ class Keys {
     } catch {
       // Storage can be switched off; single keys then start switched on.
     }
+  }
+
+  /** Shows the list. A chart is known by the role it has for a screen reader. */
+  show(): void {
+    this.charts = document.querySelector('main [role=application][aria-roledescription=chart]') !== null;
+    this.shown = true;
   }
 
   setSingles(on: boolean): void {
