@@ -75,7 +75,10 @@ export const actions: Actions = {
     // Asked again with whose it is: an observer, or an experimenter with another's, is refused in words.
     askTeam(event, 'delete', { createdBy });
     if (typed !== conditions.name)
-      return fail(400, { aside: `Type the name of the dataset, “${conditions.name}”, to put it aside.` });
+      return fail(400, {
+        aside: `Type the name of the dataset, “${conditions.name}”, to put it aside.`,
+        typed
+      });
     return acting({}, () => {
       const done = putAside(db, actor, event.params.id);
       if (!done.ok) error(404, NOT_HERE);
