@@ -2,6 +2,7 @@ import { remarkInputSchema, settleSchema } from '$lib/model/team/remarks/remark-
 import { addRemark } from '$lib/server/services/remarks/add-remark';
 import { mailRemark } from '$lib/server/services/remarks/mail-remark';
 import type { RemarkAuthor } from '$lib/server/services/remarks/remark-author';
+import { giveBackRemark, spendRemark, type LinkReader } from '$lib/server/services/remarks/spend-remark';
 import { settleThread } from '$lib/server/services/remarks/settle-thread';
 import { storageTrouble } from '$lib/server/services/datasets/storage-trouble';
 import type { Problem } from './problem';
@@ -12,12 +13,14 @@ export interface RemarkPlace {
   author: RemarkAuthor;
   reportId: string;
   address: string;
+  /** Who of a link's readers it is; absent for members. */
+  from?: LinkReader;
 }
 
 export type Answered<Given> = ({ ok: true } & Given) | { ok: false; problem: Problem };
 
 const PROBLEMS: Record<
-  'unknown' | 'not-allowed' | 'name' | 'settled' | 'full' | 'busy' | 'disk-full',
+  'unknown' | 'not-allowed' | 'name' | 'settled' | 'full' | 'wait' | 'busy' | 'disk-full',
   Problem
 > = {
   unknown: { status: 404, code: 'not-found', title: 'There is no such report or thread any more.' },
@@ -34,6 +37,11 @@ const PROBLEMS: Record<
     title: 'This thread was settled meanwhile. Open it again to answer; your text is still here.'
   },
   full: { status: 409, code: 'full', title: 'This report takes no more remarks.' },
+  wait: {
+    status: 429,
+    code: 'wait',
+    title: 'These are many remarks for one hour. Your text is still here; send it later.'
+  },
   busy: {
     status: 503,
     code: 'busy',
@@ -48,7 +56,7 @@ const PROBLEMS: Record<
 
 /** Reads a remark from what was sent, keeps it and mails about it; or says what is wrong with it. */
 export async function takeRemark(
-  { db, author, reportId, address }: RemarkPlace,
+  { db, author, reportId, address, from }: RemarkPlace,
   sent: unknown
 ): Promise<Answered<{ id: string; threadId: string; again: boolean; missed: number }>> {
   const read = remarkInputSchema.safeParse(sent);
@@ -56,7 +64,10 @@ export async function takeRemark(
     const [{ message }] = read.error.issues;
     return { ok: false, problem: { status: 400, code: 'bad-input', title: message } };
   }
+  const spent = from ? await spendRemark(from) : { ok: true as const };
+  if (!spent.ok) return { ok: false, problem: PROBLEMS[spent.reason] };
   const added = writing(() => addRemark(db, author, { ...read.data, reportId }));
+  if (from && (!added.ok || added.again)) await giveBackRemark(from);
   if (!added.ok) return { ok: false, problem: PROBLEMS[added.reason] };
   const missed = added.again ? 0 : await mailRemark(db, added.id, address);
   return { ...added, missed };

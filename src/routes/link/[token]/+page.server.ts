@@ -25,13 +25,14 @@ export const load: PageServerLoad = (event) => {
 type Event = RequestEvent<{ token: string }>;
 
 function placeOf(event: Event, form: FormData) {
-  const { link } = askLink(event, 'remark');
+  const { link, visit } = askLink(event, 'remark');
   const { db, person } = event.locals;
   const given = form.get('signedAs');
   const signedAs = person?.name ?? (typeof given === 'string' ? given : '');
   const author: RemarkAuthor = { kind: 'referee', linkId: link.id, personId: person?.id ?? null, signedAs };
   const address = `${event.url.origin}/team/${link.teamSlug}/reports/${link.reportId}`;
-  return { db, author, reportId: link.reportId, address };
+  const from = { linkId: link.id, reader: person?.id ?? visit ?? '' };
+  return { db, author, reportId: link.reportId, address, from };
 }
 
 export const actions: Actions = {

@@ -34,14 +34,21 @@ function letter(remark: ToldRemark, reader: Reader, address: string): Omit<Messa
     const of = `report ${remark.number} of ${remark.dataset}`;
     return {
       subject: `New remark on ${of}`,
-      text: `${remark.signedAs} remarked on ${about}, in ${of}:\n\n${said}\n\n${address}#remarks-${remark.section}\n`
+      text:
+        (remark.fromTeam
+          ? `${remark.signedAs} remarked on ${about}, in ${of}:`
+          : `“${remark.signedAs}”, a reader of the link “${remark.label}”, remarked on ${about}, in ${of}:`) +
+        `\n\n${said}\n\n${address}#remarks-${remark.section}\n` +
+        (remark.fromTeam
+          ? ''
+          : '\nFurther remarks by this link within the hour are not mailed; the page has them.\n')
     };
   }
   const who = remark.fromTeam
     ? reader.blind
       ? 'The team'
       : `${remark.signedAs} of ${remark.team}`
-    : remark.signedAs;
+    : `“${remark.signedAs}”, a reader of the link like you,`;
   return {
     subject: 'An answer to your remark',
     text:

@@ -1,6 +1,7 @@
-import { and, eq, isNull, ne, or, sql } from 'drizzle-orm';
+import { and, asc, eq, isNull, ne, or, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { dataset, link, membership, person, remark, report, team } from '../../db/schema';
+import { isDue } from './is-due';
 
 /** A remark as the mail about it needs it. */
 export interface ToldRemark {
@@ -8,6 +9,8 @@ export interface ToldRemark {
   body: string;
   signedAs: string;
   fromTeam: boolean;
+  /** Label of the link it came by, for members; null for the team's own. */
+  label: string | null;
   number: number;
   dataset: string;
   team: string;
@@ -23,6 +26,9 @@ export interface Reader {
 /**
  * Whom a new remark concerns: the maker of the report while a member, and the earlier authors of the thread, members
  * while they are, others while their link is open. Each once, never the author, nobody who is disabled.
+ *
+ * Of remarks by a link the maker hears once an hour, and the authors of a thread once an hour about it: whoever has an
+ * open link must not fill their mail.
  */
 export function readersOf(
   db: Database,
@@ -42,16 +48,19 @@ export function readersOf(
       signedAs: remark.signedAs,
       number: report.number,
       dataset: dataset.name,
-      team: team.name
+      team: team.name,
+      label: link.label
     })
     .from(remark)
     .innerJoin(report, eq(report.id, remark.reportId))
     .innerJoin(dataset, eq(dataset.id, report.datasetId))
     .innerJoin(team, eq(team.id, report.teamId))
+    .leftJoin(link, eq(link.id, remark.linkId))
     .where(eq(remark.id, remarkId))
     .get();
   if (!found) return undefined;
-  const { teamId, madeBy, personId, threadId } = found;
+  const { teamId, madeBy, personId, threadId, linkId } = found;
+  const due = (within?: string): boolean => linkId === null || isDue(momentsOf(db, linkId, remarkId, within));
 
   const readers = new Map<string, Reader>();
   const add = (id: string | null, reader: Reader | undefined): void => {
@@ -67,11 +76,23 @@ export function readersOf(
       .get();
     return row && { email: row.email, member: true, blind: false };
   };
-  add(madeBy, asMember(madeBy));
-  if (threadId !== null)
+  if (due()) add(madeBy, asMember(madeBy));
+  if (threadId !== null && due(threadId))
     for (const author of authorsOf(db, threadId, remarkId, now))
-      add(author.personId, asMember(author.personId) ?? author.reader);
+      if (author.personId !== madeBy || linkId === null)
+        add(author.personId, asMember(author.personId) ?? author.reader);
   return { remark: { ...found, fromTeam: found.linkId === null }, readers: [...readers.values()] };
+}
+
+/** When remarks came by a link, up to one of them; in one thread, its answers alone: the first had nobody to tell. */
+function momentsOf(db: Database, linkId: string, upTo: string, threadId?: string): number[] {
+  const rows = db
+    .select({ id: remark.id, at: remark.createdAt })
+    .from(remark)
+    .where(and(eq(remark.linkId, linkId), threadId === undefined ? undefined : eq(remark.threadId, threadId)))
+    .orderBy(asc(remark.createdAt), asc(sql`${remark}.rowid`))
+    .all();
+  return rows.slice(0, rows.findIndex(({ id }) => id === upTo) + 1).map(({ at }) => at);
 }
 
 /** Earlier authors of a thread; `reader` is set for those whose remark came through a link that is still open. */

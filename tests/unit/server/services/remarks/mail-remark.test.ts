@@ -69,6 +69,55 @@ describe('mailRemark', () => {
     expect((await mailed(answer.id)).sent).toEqual([]);
   });
 
+  it('tells of a reader of a link that it is one, whatever the name', async () => {
+    const { db, makeLink, makePerson, referee, say, mailed } = await setting();
+    const id = makeLink({ label: 'round 2' });
+    const first = given(addRemark(db, referee(id, 'Ruth', makePerson('Ruth').id), say('x'), 1));
+    expect((await mailed(first.id)).sent[0].text).toContain(
+      '“Ruth”, a reader of the link “round 2”, remarked on'
+    );
+    const second = given(addRemark(db, referee(id, 'Ada of Team'), say('y', first.threadId), 2));
+    const { sent } = await mailed(second.id);
+    expect(sent.map(({ text }) => text.split('\n')[0])).toEqual([
+      '“Ada of Team”, a reader of the link like you, answered your remark on the best law of a report:'
+    ]);
+  });
+
+  it('tells the maker of remarks by one link once an hour, and of the team’s own each time', async () => {
+    const { db, maker, observer, makeLink, member, referee, say, emailOf, mailed } = await setting();
+    const hour = 3_600_000;
+    const [one, two] = [makeLink(), makeLink()];
+    const tells = async (author: ReturnType<typeof member>, body: string, at: number) => {
+      const { sent } = await mailed(given(addRemark(db, author, say(body), at)).id);
+      return sent.some(({ to }) => to === emailOf(maker.personId));
+    };
+    expect(await tells(referee(one), 'a', 1000)).toBe(true);
+    expect(await tells(referee(one), 'b', 1001)).toBe(false);
+    expect(await tells(referee(two), 'c', 1002)).toBe(true);
+    expect(await tells(member(observer), 'd', 1003)).toBe(true);
+    // A steady stream is one mail an hour, not none.
+    expect(await tells(referee(one), 'e', 1000 + hour - 1)).toBe(false);
+    expect(await tells(referee(one), 'f', 1000 + hour)).toBe(true);
+    expect(await tells(referee(one), 'g', 1001 + hour)).toBe(false);
+  });
+
+  it('tells the maker no oftener for having answered in the thread, and other authors of it once an hour', async () => {
+    const { db, maker, observer, makeLink, member, referee, say, emailOf, mailed } = await setting();
+    const id = makeLink();
+    const told = async (author: ReturnType<typeof member>, body: string, at: number, thread?: string) => {
+      const made = given(addRemark(db, author, say(body, thread), at));
+      return { ...made, to: (await mailed(made.id)).sent.map(({ to }) => to) };
+    };
+    const { threadId } = await told(referee(id), 'a', 1);
+    await told(member(maker), 'b', 2, threadId);
+    await told(member(observer), 'c', 3, threadId);
+    expect((await told(referee(id), 'd', 4, threadId)).to).toEqual([emailOf(observer.personId)]);
+    expect((await told(referee(id), 'd again', 5, threadId)).to).toEqual([]);
+    expect((await told(referee(id), 'e', 3_600_004, threadId)).to).toEqual(
+      [maker, observer].map(({ personId }) => emailOf(personId))
+    );
+  });
+
   it('names the team to the referee of an open link', async () => {
     const { db, team, maker, makeLink, makePerson, member, referee, say, mailed } = await setting();
     const ruth = makePerson('Ruth Referee');
