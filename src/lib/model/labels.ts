@@ -51,6 +51,6 @@ export const GEOMETRIES: Record<Geometry, string> = {
 };
 
 export const UNITS: Record<Unit, string> = {
-  defect: 'defects',
+  defect: 'single defects',
   pair: 'pairs of defects'
 };

@@ -113,7 +113,7 @@ const SENTENCES: Record<string, Words> = {
     say: ({ who, thing }) => `${who} reopened a remark on ${thing}`
   },
   'link.make': { label: 'link made', say: ({ who, thing }) => `${who} made ${thing}` },
-  'link.revoke': { label: 'link revoked', say: ({ who, thing }) => `${who} revoked ${thing}` },
+  'link.revoke': { label: 'link closed', say: ({ who, thing }) => `${who} closed ${thing}` },
   'job.queue': { label: 'diagnosis asked for', say: ({ who, thing }) => `${who} asked for ${thing}` },
   'job.cancel': { label: 'diagnosis cancelled', say: ({ who, thing }) => `${who} cancelled ${thing}` },
   'job.fail': { label: 'diagnosis failed', say: ({ thing }) => `${capital(thing)} failed` }

@@ -119,7 +119,7 @@ describe('listEvents', () => {
     const revoked = { action: 'link.revoke', teamId: team.id, personId: lead.personId };
     recordEvent(db, { ...revoked, linkId: ids.hiding, thing: reportId });
     expect(listEvents(db, lead, { personId: lead.personId }).events[0].words).toBe(
-      'Ada Invented revoked the link “round 2” to report 1 of “Invented chain”'
+      'Ada Invented closed the link “round 2” to report 1 of “Invented chain”'
     );
     // A link that is gone cannot say any more whether it hid them.
     db.delete(link).run();
