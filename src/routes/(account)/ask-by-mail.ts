@@ -3,6 +3,7 @@ import { clientOf } from '$lib/server/auth/client-of';
 import { ownPath } from '$lib/server/auth/own-path';
 import { mailLink } from '$lib/server/services/accounts/mail-link';
 import type { Purpose } from '$lib/server/services/accounts/mailed-purposes';
+import { addressInvited } from '$lib/server/services/invitations/address-invited';
 import { outboxIsOpen } from '$lib/server/services/accounts/outbox';
 import { waysIn } from '$lib/server/services/accounts/ways-in';
 import type { RequestEvent } from '@sveltejs/kit';
@@ -12,12 +13,12 @@ import { MAIL_REFUSALS, waitFor } from './refusals';
 
 /** For the two pages that mail a link: one form, an address. */
 export async function showAskByMail(event: RequestEvent) {
-  const form = await superValidate({ email: event.locals.person?.email ?? '' }, zod4(emailForm), {
-    errors: false
-  });
+  const then = ownPath(event.url.searchParams.get('then'));
+  const email = event.locals.person?.email ?? addressInvited(event.locals.db, then);
+  const form = await superValidate({ email }, zod4(emailForm), { errors: false });
   return {
     form,
-    then: ownPath(event.url.searchParams.get('then')),
+    then,
     mail: waysIn().mail,
     outbox: outboxIsOpen(clientOf(event))
   };

@@ -2,6 +2,7 @@ import { signInForm } from '$lib/model/account/sign-in';
 import { beginSession } from '$lib/server/auth/begin-session';
 import { clientOf } from '$lib/server/auth/client-of';
 import { ownPath } from '$lib/server/auth/own-path';
+import { addressInvited } from '$lib/server/services/invitations/address-invited';
 import { checkPassword } from '$lib/server/services/accounts/check-password';
 import { waysIn } from '$lib/server/services/accounts/ways-in';
 import { redirect } from '@sveltejs/kit';
@@ -18,7 +19,9 @@ export const load: PageServerLoad = async ({ locals, url }) => {
   const reason = url.searchParams.has('error') ? 'failed' : (url.searchParams.get('problem') ?? '');
   if (locals.person) redirect(303, reason ? `/account?problem=${encodeURIComponent(reason)}` : then);
   return {
-    form: await superValidate(zod4(signInForm)),
+    form: await superValidate({ email: addressInvited(locals.db, then) }, zod4(signInForm), {
+      errors: false
+    }),
     ways: waysIn(),
     then,
     problem: ISSUER_REFUSALS[reason] ?? null
