@@ -4,6 +4,7 @@ import { listJobs } from '$lib/server/services/jobs/list-jobs';
 import { error, fail, redirect } from '@sveltejs/kit';
 import { askTeam } from '../../../../ask';
 import { acting } from '../datasets/answers';
+import { backToList } from '../datasets/back-to-list';
 import { readRequest } from './read-request';
 import { refusalOf } from './refusals';
 import type { Actions, PageServerLoad } from './$types';
@@ -16,7 +17,13 @@ export const load: PageServerLoad = (event) => {
 export const actions: Actions = {
   default: async (event) => {
     const { team, actor } = askTeam(event, 'diagnose');
+    const sent = event.request.clone();
     const read = await readRequest(event.request);
+    if (!read.ok && read.problem.code === 'bad-input') {
+      const form = await sent.formData();
+      // Nothing was marked in the table.
+      if (form.has('list') && !form.has('dataset')) redirect(303, backToList(team.slug, form.get('list')));
+    }
     if (!read.ok) return fail(read.problem.status, { message: read.problem.title });
     const { dataset, ...hardness } = read.asked;
     return acting({}, () => {

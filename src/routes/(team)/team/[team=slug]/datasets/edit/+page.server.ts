@@ -6,11 +6,14 @@ import { namesOfDatasets } from '$lib/server/services/datasets/names-of-datasets
 import { error, fail, redirect } from '@sveltejs/kit';
 import { askTeam } from '../../../../../ask';
 import { acting } from '../answers';
+import { backToList } from '../back-to-list';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = (event) => {
-  const { actor } = askTeam(event, 'edit');
+  const { team, actor } = askTeam(event, 'edit');
   const ids = [...new Set(event.url.searchParams.getAll('dataset'))];
+  const list = event.url.searchParams.get('list');
+  if (ids.length === 0 && list !== null) redirect(303, backToList(team.slug, list));
   if (ids.length > MOST_IN_BULK)
     error(400, { message: `Choose at most ${MOST_IN_BULK} datasets at once.`, code: 'too-many' });
   const datasets = namesOfDatasets(event.locals.db, actor, ids);
