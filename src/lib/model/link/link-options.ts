@@ -38,7 +38,7 @@ export const linkOptionsSchema = z
     /** Milliseconds since 1970; null for a link that stays open until it is revoked. */
     expiresAt: z.int().positive().nullable().default(null),
     visitLimit: z
-      .int()
+      .int({ error: 'The number of visits must be a whole number.' })
       .min(1, { error: 'At least one visit must be allowed.' })
       .max(100_000, { error: 'Leave the limit out when so many visits are allowed.' })
       .nullable()

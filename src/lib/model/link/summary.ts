@@ -4,8 +4,6 @@ import { differentCounts, LEAST_SHOTS_FOR_LAW, LEAST_TO_HIDE } from './hides-cou
 import { rounded, roundedAll, roundedOutward } from './rounded';
 import { summaryWords } from './summary-words';
 
-export { LEAST_TO_HIDE } from './hides-counts';
-
 /** Significant digits of a p-value: a third one tells histograms apart. */
 const DIGITS_OF_P = 2;
 

@@ -15,7 +15,7 @@ export function sayLink(link: Said): string[] {
   }[link.audience];
   const shows =
     link.shows === 'report'
-      ? 'Shows the report without its counts, so nobody can recompute it.'
+      ? 'Shows the report without its counts: whoever guesses them can check the guess, but not recompute the report.'
       : 'Shows the report and its counts, so it can be recomputed.';
   return [
     who,

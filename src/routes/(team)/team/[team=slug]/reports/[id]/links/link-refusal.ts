@@ -1,4 +1,4 @@
-import { LEAST_TO_HIDE } from '$lib/model/link/summary';
+import { TOO_FEW_TO_HIDE } from '$lib/model/link/hides-counts';
 import { problem } from '../../../../../../problem';
 
 type Reason = 'unknown' | 'not-allowed' | 'past' | 'too-few-counts';
@@ -14,7 +14,7 @@ const REFUSALS: Record<Reason, { status: number; code: string; title: string; de
   'too-few-counts': {
     status: 422,
     code: 'too-few-counts',
-    title: `These counts cannot be kept back: with fewer than ${LEAST_TO_HIDE} different counts, mean, variance and number of shots give them away.`,
+    title: TOO_FEW_TO_HIDE,
     detail: 'Make a link that shows report and counts, or none.'
   }
 };
