@@ -15,8 +15,10 @@ export function complaintsOf(page: Page): string[] {
   page.on('pageerror', (error) => list.push(`uncaught: ${error.message}`));
   page.on('requestfailed', (request) => {
     const why = request.failure()?.errorText ?? '';
-    // Kit gives up its own load of a page's data when the next step overtakes it; nothing failed then.
-    if (why === 'net::ERR_ABORTED' && new URL(request.url()).pathname.endsWith('/__data.json')) return;
+    // Kit gives up its own load of a page's data when the next step overtakes it, and a page that is left ends its
+    // stream of events: nothing failed then.
+    if (why === 'net::ERR_ABORTED' && /\/(__data\.json|jobs\/stream)$/.test(new URL(request.url()).pathname))
+      return;
     list.push(`failed: ${request.url()} ${why}`);
   });
   page.on('request', (request) => {
