@@ -2,6 +2,7 @@ import { and, asc, eq, isNull, sql } from 'drizzle-orm';
 import type { ReportsFile } from '$lib/model/team/transfer/archive-schema';
 import type { Database } from '../../db/client';
 import { dataset, link, linkVisit, person, remark, report } from '../../db/schema';
+import { dayOf } from '../links/day-of';
 import { numbered, type NumberedEntries } from './dataset-entries';
 import { asText, firstMakers } from './first-makers';
 
@@ -92,7 +93,7 @@ function linksOf(db: Database, reportId: string) {
   return { list, places: new Map(rows.map(({ id }, i) => [id, i])) };
 }
 
-/** First remarks stand before their answers. Who came by a link that hides its referees is not named. */
+/** First remarks stand before their answers. Who came by a link that hides its referees is not named, nor told to the minute. */
 function remarksOf(db: Database, reportId: string, links: Map<string, number>) {
   const rows = db
     .select({ row: remark, hidden: link.hidesReferees })
@@ -106,7 +107,7 @@ function remarksOf(db: Database, reportId: string, links: Map<string, number>) {
     section: row.section,
     body: row.body,
     signedAs: hidden ? 'A referee' : row.signedAs,
-    at: when(row.createdAt),
+    at: when(hidden ? dayOf(row.createdAt) : row.createdAt),
     thread: row.threadId === null ? null : (places.get(row.threadId) ?? null),
     link: row.linkId === null ? null : (links.get(row.linkId) ?? null),
     settledAt: whenOrNull(row.settledAt)
