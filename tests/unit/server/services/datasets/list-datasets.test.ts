@@ -117,18 +117,21 @@ describe('listDatasets', () => {
     db.$client.close();
   });
 
-  it.each(['up', 'down'] as const)('keeps datasets saved together in the order of their file: %s', (order) => {
-    const { db, lead } = setting();
-    const names = Array.from({ length: 12 }, (_, i) => `run ${i + 1}`);
-    for (const name of names) makeDataset(db, lead, { name, createdAt: 7 });
-    makeDataset(db, lead, { name: 'later', createdAt: 8 });
-    const listed = (sort: DatasetQuery['sort']) =>
-      listDatasets(db, lead, { ...freshQuery(), sort, order }).rows.map(({ name }) => name);
-    expect(listed('created')).toEqual(order === 'down' ? ['later', ...names] : [...names, 'later']);
-    // Equal in what is sorted by: newest first, and of one time the order of the file.
-    expect(listed('shots')).toEqual(['later', ...names]);
-    db.$client.close();
-  });
+  it.each(['up', 'down'] as const)(
+    'keeps datasets saved together in the order of their file: %s',
+    (order) => {
+      const { db, lead } = setting();
+      const names = Array.from({ length: 12 }, (_, i) => `run ${i + 1}`);
+      for (const name of names) makeDataset(db, lead, { name, createdAt: 7 });
+      makeDataset(db, lead, { name: 'later', createdAt: 8 });
+      const listed = (sort: DatasetQuery['sort']) =>
+        listDatasets(db, lead, { ...freshQuery(), sort, order }).rows.map(({ name }) => name);
+      expect(listed('created')).toEqual(order === 'down' ? ['later', ...names] : [...names, 'later']);
+      // Equal in what is sorted by: newest first, and of one time the order of the file.
+      expect(listed('shots')).toEqual(['later', ...names]);
+      db.$client.close();
+    }
+  );
 
   it('shows nothing to people of another team', () => {
     const { db, lead, stranger, names } = filled();
