@@ -15,7 +15,7 @@ import { testResult } from './test-result';
 export interface FittedTests {
   tests: Omit<TestResult, 'pAdjusted'>[];
   notRun: { id: TestId; reason: string }[];
-  /** KL of the first 299 resamples from their own refits, nats a shot: what the plug-in divergence shows when all is well. */
+  /** KL of the first 149 resamples from their own refits, nats a shot: what the plug-in divergence shows when all is well. */
   nullDivergences: number[];
   /** p of the low tail with empty shots set aside; null when it was not asked. */
   lowTailOfTheRest: number | null;

@@ -4,10 +4,11 @@ import { divergencesKept, type DrawAnswer, type FittedDraws, type FittedJob } fr
 /**
  * Milliseconds that must be left for help to be worth it: a thread takes 40 to start, and 400 to run its code
  * warm. How much is left shows once the first draws, which are refitted whole, are over and `trial` have passed with
- * others; where the first draws alone take `long`, later ones are taken to cost a quarter of them.
+ * others (while the code is cold they look two to three times as long); where the first draws alone take `long`, later
+ * ones are taken to cost a quarter of them.
  */
 const worthIt = 600;
-const trial = 20;
+const trial = 60;
 const long = 250;
 /** Milliseconds that a range is meant to take, and ranges lent at a time: together longer than between two turns. */
 const rangeTime = 25;

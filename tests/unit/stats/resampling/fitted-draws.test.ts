@@ -3,7 +3,7 @@ import { refit } from '$lib/stats/fit/refit';
 import { toLaw } from '$lib/stats/fit/trial-levels';
 import { lawWindow } from '$lib/stats/laws/law-window';
 import { generator } from '$lib/stats/random/generator';
-import { fittedDraws } from '$lib/stats/resampling/fitted-draws';
+import { divergencesKept, fittedDraws } from '$lib/stats/resampling/fitted-draws';
 import { redraw } from '$lib/stats/resampling/redraw';
 import { refitted } from '$lib/stats/resampling/refitted';
 import { stream } from '$lib/stats/resampling/streams';
@@ -22,8 +22,8 @@ describe.each(problems)('fittedDraws of $name', ({ problem }) => {
   const draws = fittedDraws({ data, levels, logLikelihood, seed: 4 });
   const source = redraw(lawWindow(toLaw(levels), 1e-18, 1), data, data.total);
   const all = 2 ** draws.questions.length - 1;
-  // From 299 on no divergence is kept, so that refits are left out or ended early.
-  const later = Array.from({ length: 150 }, (_, i) => 299 + i);
+  // From `divergencesKept` on no divergence is kept, so that refits are left out or ended early.
+  const later = Array.from({ length: 150 }, (_, i) => divergencesKept + i);
 
   it('answers as whole refits do, though most of them end early or are left out', () => {
     const reached = new Set<string>();
@@ -51,10 +51,10 @@ describe.each(problems)('fittedDraws of $name', ({ problem }) => {
     });
   });
 
-  it('keeps the divergence of the first 299 from whole refits', () => {
-    const resample = source.draw(generator(4, stream('fitted law', 298)));
-    expect(draws.draw(298, 0).divergence).toBe(refitted(resample, levels).divergence);
-    expect(draws.draw(299, all).divergence).toBeNull();
+  it('keeps the divergence of the first draws from whole refits', () => {
+    const resample = source.draw(generator(4, stream('fitted law', divergencesKept - 1)));
+    expect(draws.draw(divergencesKept - 1, 0).divergence).toBe(refitted(resample, levels).divergence);
+    expect(draws.draw(divergencesKept, all).divergence).toBeNull();
   });
 
   it('rests on refits that stop as soon as they are told that all is settled', () => {

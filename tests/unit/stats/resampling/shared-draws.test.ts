@@ -2,7 +2,7 @@ import { diagnose } from '$lib/stats/diagnose';
 import { defaultOptions } from '$lib/stats/default-options';
 import { bestLaw } from '$lib/stats/fit/best-law';
 import type { DrawHelper } from '$lib/stats/resampling/draw-helper';
-import { fittedDraws, type FittedJob } from '$lib/stats/resampling/fitted-draws';
+import { divergencesKept, fittedDraws, type FittedJob } from '$lib/stats/resampling/fitted-draws';
 import { rangeAnswerer } from '$lib/stats/resampling/range-answerer';
 import { SharedDraws } from '$lib/stats/resampling/shared-draws';
 import type { CountData } from '$lib/stats/types';
@@ -120,14 +120,14 @@ describe('SharedDraws', () => {
   }
 
   it('asks no helper where the rest takes less than a thread needs to start', async () => {
-    // 200 ms for the first 299, and 85 for all others.
-    expect(await drawn(1999, 1999, (b) => (b < 299 ? 0.67 : 0.05))).toBe(-1);
+    // 100 ms for those that are refitted whole, and 90 for all others.
+    expect(await drawn(1999, 1999, (b) => (b < divergencesKept ? 0.67 : 0.05))).toBe(-1);
   });
 
   it('asks once it has seen how long the later draws take, or at once where the first take long', async () => {
     const middle = await drawn(1999, 1999, () => 0.5);
-    expect(middle).toBeGreaterThan(299);
-    expect(middle).toBeLessThan(400);
+    expect(middle).toBeGreaterThan(divergencesKept);
+    expect(middle).toBeLessThan(divergencesKept + 150);
     expect(await drawn(1999, 1999, () => 5)).toBeLessThan(60);
   });
 });
