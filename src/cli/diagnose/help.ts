@@ -36,7 +36,10 @@ How to read the file; whatever is left out is guessed, and the guess is shown
 What to print
   --text                   the answer in words (default)
   --json                   the diagnosis document, and nothing else
+  --csv                    every number of it as a table, and nothing else
   --pdf FILE               also writes the report, for print
+  --bundle FILE            also writes everything as a zip, with a README that
+                           says how to compute it again
   --quiet                  no remarks on standard error
   --fail-on ruled-out | undecided
                            end with code 3 on that answer (undecided: or ruled out)

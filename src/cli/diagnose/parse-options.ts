@@ -11,9 +11,11 @@ export interface Asked {
   read: ReadOptions;
   supplied: string | null;
   dataset: string | null;
-  json: boolean;
+  print: 'text' | 'json' | 'csv';
   /** Where to write the report as a PDF; null for nowhere. */
   pdf: string | null;
+  /** Where to write everything as a zip; null for nowhere. */
+  bundle: string | null;
   quiet: boolean;
   failOn: 'ruled-out' | 'undecided' | null;
 }
@@ -45,8 +47,10 @@ const options = {
   'ignore-column': several,
   dataset: text,
   json: flag,
+  csv: flag,
   text: flag,
   pdf: text,
+  bundle: text,
   quiet: flag,
   'fail-on': text,
   help: flag
@@ -76,7 +80,9 @@ export function parseOptions(args: string[]): Asked | 'help' {
       'Usage: npm run --silent diagnose -- FILE [options]; --help lists the options.'
     ]);
   }
-  if (values.json && values.text) throw new Refusal(['Both --json and --text are asked for; give one.']);
+  const printed = (['json', 'csv', 'text'] as const).filter((name) => values[name]);
+  if (printed.length > 1)
+    throw new Refusal([`Both --${printed[0]} and --${printed[1]} are asked for; give one.`]);
   const one = <T>(name: keyof typeof options, allowed: Record<string, T>): T | undefined => {
     const value = values[name];
     if (typeof value !== 'string') return undefined;
@@ -145,8 +151,9 @@ export function parseOptions(args: string[]): Asked | 'help' {
     read: given(read),
     supplied: values.supplied ?? null,
     dataset: values.dataset ?? null,
-    json: values.json ?? false,
+    print: printed[0] ?? 'text',
     pdf: values.pdf ?? null,
+    bundle: values.bundle ?? null,
     quiet: values.quiet ?? false,
     failOn: one('fail-on', { 'ruled-out': 'ruled-out', undecided: 'undecided' } as const) ?? null
   };

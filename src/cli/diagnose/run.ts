@@ -2,6 +2,7 @@ import { readCounts } from '$lib/formats/read-counts';
 import { readProbabilities } from '$lib/formats/read-probabilities';
 import { sayReading } from '$lib/formats/say-reading';
 import type { Dataset } from '$lib/formats/types';
+import { documentCsv } from '$lib/model/document-csv';
 import { documentText } from '$lib/model/document-text';
 import { plainText } from '$lib/model/plain-text/plain-text';
 import { defaultOptions } from '$lib/stats/default-options';
@@ -17,7 +18,7 @@ import { type Asked, parseOptions } from './parse-options';
 import { progressLine } from './progress-line';
 import { readInput } from './read-input';
 import { sayProblems } from './say-problems';
-import { refusePdf, writePdf } from './write-pdf';
+import { type Output, refuseOutput, writeOutput } from './write-output';
 
 /**
  * Runs `diagnose` with its arguments, prints, and returns the exit code.
@@ -45,25 +46,36 @@ export async function runDiagnose(args: string[], script: string): Promise<ExitC
 
 async function run(asked: Asked, script: string): Promise<ExitCode> {
   refuseOptions(asked);
-  if (asked.pdf !== null) await refusePdf(asked.pdf, asked.file);
-  const result = readCounts(await readInput(asked.file), asked.read);
+  const outputs = outputsOf(asked);
+  for (const output of outputs) await refuseOutput(output, asked.file);
+  const bytes = await readInput(asked.file);
+  const result = readCounts(bytes, asked.read);
   if (!result.ok) throw new Refusal(sayProblems(asked.file, result.problems, result.more));
   const dataset = chooseDataset(asked.file, result.datasets, asked.dataset);
   const supplied = asked.supplied === null ? null : await readSupplied(asked.supplied);
   const diagnosis = await check(asked, dataset, supplied, script);
   const several = result.datasets.length > 1 ? dataset.name : null;
-  if (asked.pdf !== null) await writePdf(asked.pdf, diagnosis, asked.file, several);
+  if (outputs.length > 0) {
+    const { makeFiles } = await import('./make-files');
+    const made = await makeFiles({ diagnosis, dataset, supplied, file: asked.file, bytes, several }, outputs);
+    for (const [output, content] of made) await writeOutput(output, content);
+  }
   const about = [...sayReading(result.reading), ...result.notes, ...sayUsed(asked, dataset)];
-  if (asked.json) {
-    if (!asked.quiet)
-      process.stderr.write(about.map((line) => `${inputName(asked.file)}: ${line}\n`).join(''));
-    process.stdout.write(documentText(diagnosis));
-  } else {
+  if (asked.print === 'text') {
     const named = several === null ? [] : [`Dataset: ${several}.`];
     process.stdout.write(plainText(diagnosis, asked.quiet ? named : [...named, ...about]));
+  } else {
+    if (!asked.quiet)
+      process.stderr.write(about.map((line) => `${inputName(asked.file)}: ${line}\n`).join(''));
+    process.stdout.write(asked.print === 'json' ? documentText(diagnosis) : documentCsv(diagnosis));
   }
   return verdictCode(asked, diagnosis);
 }
+
+const outputsOf = ({ pdf, bundle }: Asked): Output[] => [
+  ...(pdf === null ? [] : [{ option: '--pdf' as const, path: pdf }]),
+  ...(bundle === null ? [] : [{ option: '--bundle' as const, path: bundle }])
+];
 
 /** Options that no file could make right are refused before one is read, and without its name. */
 function refuseOptions(asked: Asked): void {

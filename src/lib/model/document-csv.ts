@@ -1,6 +1,5 @@
 import type { Diagnosis, Interval } from '$lib/stats/types';
-
-type Cell = string | number | null;
+import { csvTable, type CsvValue } from './exports/csv-table';
 
 /**
  * Every number of a diagnosis document as a CSV file, one a line: `part,item,count,value,low,high`. Numbers are
@@ -9,8 +8,8 @@ type Cell = string | number | null;
  */
 export function documentCsv(document: Diagnosis): string {
   const { data, engine, answer, moments, fit, tests, flags } = document;
-  const lines: Cell[][] = [['part', 'item', 'count', 'value', 'low', 'high']];
-  const one = (part: string, item: string, value: Cell, count: number | null = null): void => {
+  const lines: CsvValue[][] = [['part', 'item', 'count', 'value', 'low', 'high']];
+  const one = (part: string, item: string, value: CsvValue, count: number | null = null): void => {
     lines.push([part, item, count, value, null, null]);
   };
   const ranged = (
@@ -42,6 +41,11 @@ export function documentCsv(document: Diagnosis): string {
     one('fit', key, fit[key]);
   ranged('fit', 'divergenceCorrected', fit.divergenceInterval);
   for (const { p, trials } of fit.levels) one('fit', `level of ${trials} trials`, p);
+  for (const { id, logLikelihood, divergence, aic } of fit.references) {
+    one(`law ${id}`, 'logLikelihood', logLikelihood);
+    one(`law ${id}`, 'divergence', divergence);
+    one(`law ${id}`, 'aic', aic);
+  }
   for (const test of tests)
     for (const key of ['statistic', 'p', 'pAdjusted', 'smallestP', 'resamples'] as const)
       one(`test ${test.id}`, key, test[key]);
@@ -51,21 +55,19 @@ export function documentCsv(document: Diagnosis): string {
     ranged('distribution', 'observed', { ...point, value: point.observed }, point.count);
     one('distribution', 'fitted', point.fitted, point.count);
   }
+  for (const key of ['horizon', 'silence', 'scale'] as const) one('rate', key, document.rate[key]);
   for (const point of document.rate.points) {
     ranged('rate', 'empirical', { ...point, value: point.empirical }, point.count);
     for (const key of ['fitted', 'limit', 'gaussian'] as const) one('rate', key, point[key], point.count);
   }
+  const { certificate } = document.tails;
+  if (certificate)
+    for (const key of ['p', 'side', 'thresholds', 'bound', 'shots', 'mean'] as const)
+      one('certificate', key, certificate[key], certificate.count);
   for (const point of document.tails.points) {
     ranged(`${point.side} tail`, 'observed', { ...point, value: point.observed }, point.count);
     for (const key of ['fitted', 'chernoff', 'meanChernoff', 'hoeffding'] as const)
       one(`${point.side} tail`, key, point[key], point.count);
   }
-  return lines.map((line) => `${line.map(cellText).join(',')}\r\n`).join('');
-}
-
-/** The engine's version is the one text that an imported document chooses freely: it must not become a formula. */
-function cellText(cell: Cell): string {
-  if (typeof cell !== 'string') return cell === null ? '' : String(cell);
-  const plain = /^\s*[=+\-@]/.test(cell) ? `'${cell}` : cell;
-  return /[",\r\n]/.test(plain) ? `"${plain.replaceAll('"', '""')}"` : plain;
+  return csvTable(lines);
 }

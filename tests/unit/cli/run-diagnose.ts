@@ -1,5 +1,6 @@
 import { type ChildProcess, spawn } from 'node:child_process';
 import { existsSync } from 'node:fs';
+import { resolve as absolute } from 'node:path';
 
 const command = 'build-cli/diagnose.js';
 
@@ -8,7 +9,9 @@ export function needCommand(): void {
   if (!existsSync(command)) throw new Error(`${command} is missing: npm test builds it first`);
 }
 
-export const start = (args: string[]): ChildProcess => spawn(process.execPath, [command, ...args]);
+/** @param folder where it is run; the project's own unless given */
+export const start = (args: string[], folder?: string): ChildProcess =>
+  spawn(process.execPath, [absolute(command), ...args], { cwd: folder });
 
 export interface Ran {
   code: number | null;
@@ -17,9 +20,9 @@ export interface Ran {
 }
 
 /** Runs the built command to its end. */
-export function run(args: string[], input?: string | Uint8Array): Promise<Ran> {
+export function run(args: string[], input?: string | Uint8Array, folder?: string): Promise<Ran> {
   return new Promise((resolve, reject) => {
-    const child = start(args);
+    const child = start(args, folder);
     const ran: Ran = { code: null, out: '', errors: '' };
     child.stdout?.setEncoding('utf8').on('data', (text: string) => (ran.out += text));
     child.stderr?.setEncoding('utf8').on('data', (text: string) => (ran.errors += text));

@@ -1,5 +1,5 @@
 import { readCounts } from '$lib/formats/read-counts';
-import { csvCell } from '$lib/server/services/datasets/csv-cell';
+import { csvCell } from '$lib/model/exports/csv-cell';
 import { csvOfDataset } from '$lib/server/services/datasets/csv-of-dataset';
 import { originalOfDataset } from '$lib/server/services/datasets/original-of-dataset';
 import { safeFileName } from '$lib/server/services/datasets/safe-file-name';
