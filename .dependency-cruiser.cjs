@@ -48,8 +48,16 @@ module.exports = {
     only('model', 'stats'),
     only('formats', 'stats', 'model'),
     only('charts', 'stats', 'model'),
+    only('pdf', 'stats', 'model', 'charts'),
+    {
+      name: 'pdf-runs-anywhere',
+      severity: 'error',
+      from: { path: room('pdf') },
+      // The same code writes a report in a browser.
+      to: { dependencyTypes: ['core'] }
+    },
     only('ui'),
-    only('page', 'stats', 'formats', 'model', 'charts', 'ui'),
+    only('page', 'stats', 'formats', 'model', 'charts', 'ui', 'pdf'),
     only('server/env'),
     only('server/project-folder'),
     only('server/log'),
@@ -58,7 +66,7 @@ module.exports = {
     only('server/mail', 'server/db', 'server/env', 'server/log'),
     only('server/jobs', 'server/db', 'server/env', 'server/log', 'server/project-folder', 'stats', 'model'),
     only('server/access', 'model'),
-    only('server/pdf', 'charts', 'model', 'stats'),
+    only('server/pdf', 'pdf'),
     only(
       'server/services',
       'server/db',

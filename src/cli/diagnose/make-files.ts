@@ -5,7 +5,7 @@ import { documentText } from '$lib/model/document-text';
 import { bundleFiles } from '$lib/model/exports/bundle-files';
 import { fileSha256 } from '$lib/model/exports/file-sha256';
 import { zipBundle } from '$lib/model/exports/zip-bundle';
-import { reportPdf } from '$lib/server/pdf/report-pdf';
+import { writeReport } from '$lib/server/pdf/write-report';
 import { safeFileName } from '$lib/server/services/datasets/safe-file-name';
 import type { Diagnosis } from '$lib/stats/types';
 import type { Output } from './write-output';
@@ -29,7 +29,7 @@ export interface Done {
 export async function makeFiles(done: Done, outputs: Output[]): Promise<[Output, Uint8Array][]> {
   const { diagnosis, file, several } = done;
   const name = several ?? (file === '-' ? null : basename(file));
-  const pdf = await reportPdf({
+  const pdf = await writeReport({
     document: diagnosis,
     documentSha256: fileSha256(new TextEncoder().encode(documentText(diagnosis))),
     provenance: { madeBy: null, madeAt: null, team: null, dataset: name, conditions: null, link: null }

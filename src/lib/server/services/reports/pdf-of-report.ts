@@ -31,8 +31,8 @@ export async function pdfOfReport(
     .where(and(eq(team.id, actor.teamId), mayWhere(actor, 'see', team.id)))
     .get();
   // Its fonts are a megabyte, which a server that prints nothing need not hold.
-  const { reportPdf } = await import('../../pdf/report-pdf');
-  const bytes = await reportPdf({
+  const { writeReport } = await import('../../pdf/write-report');
+  const bytes = await writeReport({
     document: document.diagnosis,
     documentSha256: report.sha256,
     provenance: {
@@ -44,9 +44,5 @@ export async function pdfOfReport(
       link: address
     }
   });
-  return {
-    ok: true,
-    bytes: new Uint8Array(bytes),
-    name: `${report.conditions.name}, report ${report.number}`
-  };
+  return { ok: true, bytes, name: `${report.conditions.name}, report ${report.number}` };
 }

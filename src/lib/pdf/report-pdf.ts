@@ -2,6 +2,7 @@ import PDFDocument from 'pdfkit';
 import { setPart } from './blocks/set-part';
 import { Flow } from './page/flow';
 import { escapeMetadata, infoOf } from './page/metadata';
+import { joined, packStreams } from './page/pack-streams';
 import { pageFeet } from './page/page-feet';
 import { answerPart } from './parts/answer';
 import { cumulantsPart } from './parts/cumulants';
@@ -15,7 +16,7 @@ import { tailsPart } from './parts/tails';
 import { testsPart } from './parts/tests';
 import type { ReportInput } from './report-input';
 import { cleanText } from './type/clean-text';
-import { anyFont, fonts, type FontName } from './type/fonts';
+import { ALWAYS, type FontSource } from './type/fonts';
 import { Pen } from './type/pen';
 
 /**
@@ -24,12 +25,14 @@ import { Pen } from './type/pen';
  *
  * The same input gives the same bytes: no clock is read, and without a time of its own the file is dated 1970.
  *
+ * @param fonts where the font files come from: another place on the server than in the browser
  * @param options.compress false leaves the pages readable as text, for tests; true by default
  */
 export async function reportPdf(
   input: ReportInput,
+  fonts: FontSource,
   options: { compress?: boolean } = {}
-): Promise<Uint8Array> {
+): Promise<Uint8Array<ArrayBuffer>> {
   const { document, provenance } = input;
   const asked = {
     size: 'A4',
@@ -49,10 +52,11 @@ export async function reportPdf(
   // pdfkit knows the subset PDF/UA, its types do not yet.
   const doc = new PDFDocument(asked as PDFKit.PDFDocumentOptions);
   escapeMetadata(doc);
+  packStreams(doc);
   const written = gathered(doc);
   const pen = new Pen(doc);
-  for (const [name, file] of Object.entries(fonts())) pen.addFont(name as FontName, file);
-  if (needsAnyFont(input, pen)) pen.addFont('any', await anyFont());
+  for (const name of ALWAYS) pen.addFont(name, await fonts(name));
+  if (needsAnyFont(input, pen)) pen.addFont('any', await fonts('any'));
 
   const root = doc.struct('Document');
   doc.addStructure(root);
@@ -95,11 +99,11 @@ function needsAnyFont({ provenance, document }: ReportInput, pen: Pen): boolean 
   });
 }
 
-function gathered(doc: PDFKit.PDFDocument): Promise<Uint8Array> {
+function gathered(doc: PDFKit.PDFDocument): Promise<Uint8Array<ArrayBuffer>> {
   return new Promise((done, failed) => {
     const parts: Uint8Array[] = [];
     doc.on('data', (part: Uint8Array) => parts.push(part));
-    doc.on('end', () => done(new Uint8Array(Buffer.concat(parts))));
+    doc.on('end', () => done(joined(parts)));
     doc.on('error', failed);
   });
 }

@@ -1,5 +1,5 @@
-import type { FontName } from '$lib/server/pdf/type/fonts';
-import { stretchesOf, type HasGlyph } from '$lib/server/pdf/type/glyphs';
+import type { FontName } from '$lib/pdf/type/fonts';
+import { stretchesOf, type HasGlyph } from '$lib/pdf/type/glyphs';
 import { describe, expect, it } from 'vitest';
 
 const LETTERS: Partial<Record<FontName, RegExp>> = {

@@ -1,4 +1,4 @@
-import { straighten } from '$lib/server/pdf/blocks/straighten';
+import { straighten } from '$lib/pdf/blocks/straighten';
 import { describe, expect, it } from 'vitest';
 
 const path = (points: number[][]): string => `M${points.map(([x, y]) => `${x},${y}`).join('L')}`;

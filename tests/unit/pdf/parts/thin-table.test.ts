@@ -1,4 +1,4 @@
-import { thinTable } from '$lib/server/pdf/parts/thin-table';
+import { thinTable } from '$lib/pdf/parts/thin-table';
 import { describe, expect, it } from 'vitest';
 
 const table = (rows: number) => ({

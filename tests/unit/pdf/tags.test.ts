@@ -1,6 +1,7 @@
-import { reportPdf } from '$lib/server/pdf/report-pdf';
+import { reportPdf } from '$lib/pdf/report-pdf';
+import { serverFonts } from '$lib/server/pdf/fonts';
 import { beforeAll, describe, expect, it } from 'vitest';
-import { anyDiagnosis, WELDON } from '../../charts/any-diagnosis';
+import { anyDiagnosis, WELDON } from '../charts/any-diagnosis';
 import { BLIND } from './documents';
 import { readPdf, type ReadPdf } from './read-pdf';
 
@@ -22,7 +23,7 @@ describe('tags', () => {
       documentSha256: 'ab'.repeat(32),
       provenance: { ...BLIND, link: 'https://a.example/b' }
     };
-    pdf = readPdf(await reportPdf(input, { compress: false }));
+    pdf = readPdf(await reportPdf(input, serverFonts, { compress: false }));
     objects = [...pdf.objects.values()];
   });
   const elements = (type: string) => objects.filter((object) => new RegExp(`/S /${type}\\n`).test(object));

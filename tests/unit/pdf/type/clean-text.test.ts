@@ -1,4 +1,4 @@
-import { cleanText } from '$lib/server/pdf/type/clean-text';
+import { cleanText } from '$lib/pdf/type/clean-text';
 import { describe, expect, it } from 'vitest';
 
 describe('cleanText', () => {

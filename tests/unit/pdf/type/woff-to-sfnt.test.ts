@@ -1,4 +1,4 @@
-import { woffToSfnt } from '$lib/server/pdf/type/woff-to-sfnt';
+import { woffToSfnt } from '$lib/pdf/type/woff-to-sfnt';
 import { readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { describe, expect, it } from 'vitest';
@@ -11,7 +11,7 @@ describe('woffToSfnt', () => {
     '@fontsource/atkinson-hyperlegible/files/atkinson-hyperlegible-latin-400-normal.woff',
     '@fontsource/dejavu-sans/files/dejavu-sans-latin-400-normal.woff'
   ])('unpacks every table of %s whole', (path) => {
-    const font = woffToSfnt(file(path));
+    const font = Buffer.from(woffToSfnt(file(path)));
     expect(font.readUInt32BE(0)).toBe(0x00010000);
     const count = font.readUInt16BE(4);
     const tags: string[] = [];

@@ -1,8 +1,8 @@
-import type { Provenance } from '$lib/server/pdf/report-input';
+import type { Provenance } from '$lib/pdf/report-input';
 import type { Diagnosis } from '$lib/stats/types';
 import { diagnose } from '$lib/stats/diagnose';
 import { defaultOptions } from '$lib/stats/default-options';
-import { anyDiagnosis, WELDON } from '../../charts/any-diagnosis';
+import { anyDiagnosis, WELDON } from '../charts/any-diagnosis';
 
 export const BLIND: Provenance = {
   madeBy: null,

@@ -19,7 +19,7 @@ export class Pen {
   constructor(readonly doc: PDFKit.PDFDocument) {}
 
   /** Makes a font known. */
-  addFont(name: FontName, file: Buffer): void {
+  addFont(name: FontName, file: Uint8Array): void {
     this.doc.registerFont(name, file);
     this.fonts.add(name);
   }

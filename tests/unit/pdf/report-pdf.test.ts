@@ -21,7 +21,8 @@ import { sayTests } from '$lib/model/plain-text/say-tests';
 import { howBig } from '$lib/model/report/how-big';
 import { whatElse } from '$lib/model/report/what-else';
 import { sayHowOften } from '$lib/model/say-p';
-import { reportPdf } from '$lib/server/pdf/report-pdf';
+import { reportPdf } from '$lib/pdf/report-pdf';
+import { serverFonts } from '$lib/server/pdf/fonts';
 import type { Diagnosis } from '$lib/stats/types';
 import { createHash } from 'node:crypto';
 import { beforeAll, describe, expect, it } from 'vitest';
@@ -62,8 +63,8 @@ describe.each(DOCUMENTS)('report of %s', (name, make) => {
   let pdf: ReadPdf;
   beforeAll(async () => {
     document = await make();
-    bytes = await reportPdf(inputOf(document));
-    plain = await reportPdf(inputOf(document), { compress: false });
+    bytes = await reportPdf(inputOf(document), serverFonts);
+    plain = await reportPdf(inputOf(document), serverFonts, { compress: false });
     pdf = readPdf(plain);
   });
 
@@ -71,7 +72,7 @@ describe.each(DOCUMENTS)('report of %s', (name, make) => {
     const seconds: number[] = [];
     for (let i = 0; i < 2; i++) {
       const before = process.cpuUsage();
-      const again = await reportPdf(inputOf(document));
+      const again = await reportPdf(inputOf(document), serverFonts);
       const { user, system } = process.cpuUsage(before);
       seconds.push((user + system) / 1e6);
       expect(Buffer.compare(bytes, again)).toBe(0);

@@ -1,5 +1,5 @@
-import { formulaSpans } from '$lib/server/pdf/type/formula-spans';
-import { STYLES } from '$lib/server/pdf/type/styles';
+import { formulaSpans } from '$lib/pdf/type/formula-spans';
+import { STYLES } from '$lib/pdf/type/styles';
 import { describe, expect, it } from 'vitest';
 
 describe('formulaSpans', () => {

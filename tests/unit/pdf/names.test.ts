@@ -1,8 +1,9 @@
-import type { Provenance } from '$lib/server/pdf/report-input';
-import { reportPdf } from '$lib/server/pdf/report-pdf';
+import type { Provenance } from '$lib/pdf/report-input';
+import { reportPdf } from '$lib/pdf/report-pdf';
+import { serverFonts } from '$lib/server/pdf/fonts';
 import type { Diagnosis } from '$lib/stats/types';
 import { beforeAll, describe, expect, it } from 'vitest';
-import { anyDiagnosis, WELDON } from '../../charts/any-diagnosis';
+import { anyDiagnosis, WELDON } from '../charts/any-diagnosis';
 import { BLIND } from './documents';
 import { readPdf } from './read-pdf';
 
@@ -13,7 +14,10 @@ describe('names and notes', () => {
   });
   const make = async (provenance: Partial<Provenance>) => {
     const input = { document, documentSha256: 'ab'.repeat(32), provenance: { ...BLIND, ...provenance } };
-    return { read: readPdf(await reportPdf(input, { compress: false })), bytes: await reportPdf(input) };
+    return {
+      read: readPdf(await reportPdf(input, serverFonts, { compress: false })),
+      bytes: await reportPdf(input, serverFonts)
+    };
   };
 
   it('in any script are there, sign by sign', async () => {

@@ -1,4 +1,4 @@
-import { readsFromRight, visualOrder } from '$lib/server/pdf/type/visual-order';
+import { readsFromRight, visualOrder } from '$lib/pdf/type/visual-order';
 import { describe, expect, it } from 'vitest';
 
 /** Pieces as they stand on paper: those of Hebrew are turned by the font's layout, here by hand. */
