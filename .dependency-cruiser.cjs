@@ -75,6 +75,7 @@ module.exports = {
       'server/access',
       'server/mail',
       'server/pdf',
+      'pdf',
       'server/jobs',
       'server/project-folder',
       'server/log',

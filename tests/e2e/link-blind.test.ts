@@ -1,6 +1,7 @@
 import { revokeLink } from '$lib/server/services/links/revoke-link';
 import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { readPdf } from '../unit/pdf/read-pdf';
 import { complaintsOf } from './support/complaints';
 import { openBrowser } from './support/open-browser';
 import { seedPerson, withDatabaseOf } from './support/seed-people';
@@ -22,6 +23,18 @@ afterAll(async () => {
   await server?.stop();
 });
 
+/** Everything in a PDF that a reader could find, and the headers it comes with. */
+async function pdfTextOf(address: string): Promise<string> {
+  const answer = await fetch(address);
+  expect(answer.headers.get('content-type')).toBe('application/pdf');
+  expect(answer.headers.get('content-disposition')).toContain('filename="severalty-report.pdf"');
+  const { marked, objects } = readPdf(new Uint8Array(await answer.arrayBuffer()));
+  const text = marked.map(({ text }) => text).join('\n');
+  expect(text).toMatch(/independent trials/);
+  const info = [...objects.values()].filter((object) => /\/Producer|xpacket/.test(object));
+  return [text, JSON.stringify([...answer.headers]), ...info].join('\n').replaceAll('\0', '');
+}
+
 describe('a blind link', () => {
   it.each(['report-and-counts', 'report'] as const)(
     'opened by a stranger shows the %s, and no name, id or slug of the team anywhere',
@@ -32,12 +45,16 @@ describe('a blind link', () => {
       await page.goto(server.address + path, { waitUntil: 'networkidle' });
       expect(await page.locator('#answer-heading').textContent()).toMatch(/\S/);
       expect(await page.title()).toBe('A report · Severalty');
+      expect(await page.getByRole('link', { name: /^Save (the report|what is shown) as PDF$/ }).count()).toBe(
+        1
+      );
       const given = [
         await page.content(),
         await (await fetch(`${server.address}${path}`)).text(),
         await (await fetch(`${server.address}${path}/__data.json`)).text(),
         await (await fetch(`${server.address}${path}/report.json`)).text(),
-        JSON.stringify([...(await fetch(`${server.address}${path}/report.json`)).headers])
+        JSON.stringify([...(await fetch(`${server.address}${path}/report.json`)).headers]),
+        await pdfTextOf(`${server.address}${path}/report.pdf`)
       ];
       expect(given[2]).toContain('severalty-report');
       for (const text of given)
@@ -51,7 +68,13 @@ describe('a blind link', () => {
 
   it('says to nobody where its reader came from, is kept by no cache and found by no search', async () => {
     const { path } = await seedLink(server, there, { blind: true });
-    for (const address of [path, `${path}/report.json`, `${path}/__data.json`, '/link/unknown']) {
+    for (const address of [
+      path,
+      `${path}/report.json`,
+      `${path}/report.pdf`,
+      `${path}/__data.json`,
+      '/link/unknown'
+    ]) {
       const { headers } = await fetch(server.address + address);
       expect(headers.get('referrer-policy')).toBe('no-referrer');
       expect(headers.get('x-robots-tag')).toMatch(/noindex/);

@@ -1,3 +1,5 @@
+import { inflateSync } from 'node:zlib';
+
 /** One marked stretch of a page: its tag, and its text with a blank for each line end. */
 export interface Marked {
   page: number;
@@ -24,8 +26,8 @@ const reference = (text: string, key: string): number =>
   Number(text.match(new RegExp(`/${key} (\\d+) 0 R`))?.[1]);
 
 /**
- * Reads the text of a PDF that was written without compression. Written for these tests: it knows what pdfkit
- * writes (one xref table, fonts with ToUnicode, hexadecimal strings), and nothing else.
+ * Reads the text of a PDF. Written for these tests: it knows what pdfkit writes (one xref table, fonts with ToUnicode,
+ * hexadecimal strings), and nothing else.
  */
 export function readPdf(bytes: Uint8Array): ReadPdf {
   const file = Buffer.from(bytes).toString('latin1');
@@ -35,7 +37,7 @@ export function readPdf(bytes: Uint8Array): ReadPdf {
   const objects = new Map<number, string>();
   offsets.forEach((offset, i) => {
     const end = ends[ends.indexOf(offset) + 1];
-    objects.set(i + 1, file.slice(offset, end).replace(/^\d+ 0 obj\n/, ''));
+    objects.set(i + 1, unpacked(file.slice(offset, end).replace(/^\d+ 0 obj\n/, '')));
   });
   const kids = [...objects.values()].find((text) => /\/Type \/Pages\b/.test(text)) ?? '';
   const order = [...(kids.match(/\/Kids \[([^\]]*)\]/)?.[1] ?? '').matchAll(/(\d+) 0 R/g)].map(([, id]) =>
@@ -51,6 +53,15 @@ export function readPdf(bytes: Uint8Array): ReadPdf {
     text: plainSpaces(readOut(objects, order, marked)),
     unmarked
   };
+}
+
+/** An object with its stream as text, whether it was packed or not. */
+function unpacked(object: string): string {
+  const start = object.indexOf('stream\n') + 7;
+  if (start < 7 || !object.slice(0, start).includes('/Filter /FlateDecode')) return object;
+  const length = Number(object.match(/\/Length (\d+)/)?.[1]);
+  const stream = Buffer.from(object.slice(start, start + length), 'latin1');
+  return `${object.slice(0, start)}${inflateSync(stream).toString('latin1')}\nendstream`;
 }
 
 function readPage(

@@ -9,7 +9,10 @@ const UNFLAGGED: Record<Verdict, string> = {
 };
 
 /** One cause a line: the flag it belongs to, null when no flag has other causes, and what else it could be. */
-export function whatElse({ answer, flags }: Diagnosis): { flag: string | null; words: string }[] {
+export function whatElse({
+  answer,
+  flags
+}: Pick<Diagnosis, 'answer' | 'flags'>): { flag: string | null; words: string }[] {
   const lines = flags
     .filter((flag) => flag.otherCauses.length > 0)
     .map((flag) => ({

@@ -15,7 +15,7 @@ export type Block =
   | { kind: 'formulas'; formulas: Formula[] }
   | { kind: 'link'; address: string }
   | { kind: 'masthead'; name: string | null; line: string }
-  | { kind: 'verdict'; document: Diagnosis }
+  | { kind: 'verdict'; document: Pick<Diagnosis, 'answer'> }
   | { kind: 'space'; height: number };
 
 export interface Formula {

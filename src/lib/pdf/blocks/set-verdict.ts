@@ -34,7 +34,7 @@ const SIGNS: Record<Verdict, Mark[]> = {
 const SCALE = 0.62;
 
 /** The answer: its mark and name, and the statement as the title of the report. */
-export function setVerdict(flow: Flow, { answer }: Diagnosis, parent: Element): void {
+export function setVerdict(flow: Flow, { answer }: Pick<Diagnosis, 'answer'>, parent: Element): void {
   const { verdict } = answer;
   const style = { ...STYLES.verdict, ink: INKS[verdict] };
   adorn(flow.doc, () => drawMarks(flow.pen, SIGNS[verdict], PAGE.left, flow.y, SCALE));

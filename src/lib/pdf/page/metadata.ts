@@ -5,15 +5,16 @@ import { cleanText } from '../type/clean-text';
 
 /** Title, subject and dates of the file. Without a time of its own the file has the oldest date there is. */
 export function infoOf(
-  document: Diagnosis,
-  { dataset, madeBy, madeAt }: Provenance
+  { answer, engine }: Pick<Diagnosis, 'answer'> & { engine: Pick<Diagnosis['engine'], 'version'> },
+  { dataset, madeBy, madeAt }: Provenance,
+  more: string
 ): Record<string, string | Date> {
   const date = madeAt ?? new Date(0);
   const name = dataset ? `: ${cleanText(dataset)}` : '';
   return {
     Title: `Severalty report${name}`,
-    Subject: `${VERDICTS[document.answer.verdict]}. Counts ${document.data.digest}`,
-    Creator: `Severalty ${document.engine.version}`,
+    Subject: `${VERDICTS[answer.verdict]}.${more}`,
+    Creator: `Severalty ${engine.version}`,
     Producer: 'pdfkit 0.20.2',
     CreationDate: date,
     ModDate: date,

@@ -4,7 +4,7 @@ import type { Diagnosis, Flag } from '$lib/stats/types';
 import type { Block, MarginNote, Part, Row } from '../blocks/blocks';
 
 /** What the counts point to, what else could cause it, and what would tell them apart. */
-export function flagsPart({ flags, answer }: Diagnosis): Part {
+export function flagsPart({ flags, answer }: Pick<Diagnosis, 'flags' | 'answer'>): Part {
   const none: Row = { blocks: [{ kind: 'paragraph', text: sayNoFlags(answer.verdict) }] };
   return { title: 'What the counts point to', rows: flags.length === 0 ? [none] : flags.map(flagRow) };
 }

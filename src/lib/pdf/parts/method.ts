@@ -57,7 +57,7 @@ export const methodPart = (): Part => ({
 });
 
 /** What this report must not be used for. */
-export const cautionsPart = ({ cautions }: Diagnosis): Part => ({
+export const cautionsPart = ({ cautions }: Pick<Diagnosis, 'cautions'>): Part => ({
   title: 'Cautions',
   rows: [{ blocks: [{ kind: 'list', items: cautions }] }]
 });

@@ -92,6 +92,12 @@ export const NOTES = {
       'The same counts, options, seed and engine give the same document, byte for byte, on the page and on the command line; the same document gives this file, byte for byte.'
     ]
   },
+  withoutCounts: {
+    title: 'Without the counts',
+    paragraphs: [
+      'This report does not show the counts, nor shares of shots with their intervals, the charts drawn from them, sums such as likelihoods, seed and resamples, and sentences that name numbers of shots. Other numbers are rounded: p-values to two digits, intervals outward. That does not make the counts secret: who guesses them can check the guess against what is left.'
+    ]
+  },
   notIndependent: {
     title: 'Compatible, not independent',
     paragraphs: [

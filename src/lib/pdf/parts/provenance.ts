@@ -2,22 +2,17 @@ import { engineFacts } from '$lib/model/report/engine-facts';
 import type { Block, Part } from '../blocks/blocks';
 import type { ReportInput } from '../report-input';
 import { NOTES } from './notes';
-import { sayWhen } from './say-when';
+import { whoFacts } from './who';
 
 /** Everything needed to get the same result again, and who made it unless the report is blind. */
 export function provenancePart({ document, documentSha256, provenance }: ReportInput): Part {
-  const { madeBy, madeAt, team, link } = provenance;
+  const { link } = provenance;
   const [counts, ...engine] = engineFacts(document);
-  const who: [string, string | null][] = [
-    ['Made by', madeBy],
-    ['Team', team],
-    ['Made', madeAt === null ? null : sayWhen(madeAt)]
-  ];
   const facts: [string, string][] = [
     counts,
     ['Document', `sha256:${documentSha256.replace(/^sha256:/, '')}`],
     ...engine,
-    ...who.flatMap(([what, value]) => (value ? [[what, value] as [string, string]] : []))
+    ...whoFacts(provenance)
   ];
   const address: Block[] =
     link === null

@@ -1,0 +1,16 @@
+import { formatCount, formatNumber } from '../format-number';
+import { GEOMETRIES } from '../labels';
+import type { Summary } from './summary';
+
+/** What was given, as pairs of what and value, where the counts are kept back. */
+export const summaryFacts = ({ data }: Summary): [string, string][] => [
+  ['Shots', formatCount(data.shots)],
+  ['Trials in a shot, N', data.trials === null ? 'unknown' : formatCount(data.trials)],
+  ['Unit', data.unit === 'pair' ? 'pairs of defects: n/2 out of N/2 is tested' : 'single defects'],
+  ['Counted on', GEOMETRIES[data.geometry]],
+  ['Chance to misread a site', data.misread === null ? 'not stated' : formatNumber(data.misread, 3)],
+  ['Order of the shots', data.ordered ? 'known' : 'not known'],
+  ...(data.lumped
+    ? ([['Last row', 'lumps counts: mean and variance are lower limits']] as [string, string][])
+    : [])
+];
