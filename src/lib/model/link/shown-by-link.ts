@@ -1,6 +1,7 @@
 import type { FrozenConditions } from '$lib/model/team/frozen-conditions';
 import type { CountData, DiagnoseOptions, Diagnosis } from '$lib/stats/types';
 import type { Shows } from './link-options';
+import { olderDocument } from '../older-document';
 import { namelessBatches } from './nameless-batches';
 import { neutralUnit } from './neutral-unit';
 import { withoutCounts, type Summary } from './summary';
@@ -107,7 +108,10 @@ export function shownByLink(
             options: thing.options,
             counts: link.blind ? namelessBatches(thing.counts) : thing.counts
           }
-        : { kind: 'without-counts', summary: withoutCounts(JSON.parse(thing.document) as Diagnosis) }
+        : {
+            kind: 'without-counts',
+            summary: withoutCounts(olderDocument(JSON.parse(thing.document)) as Diagnosis)
+          }
   };
 }
 

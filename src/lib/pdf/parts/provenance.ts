@@ -1,4 +1,5 @@
 import { engineFacts } from '$lib/model/report/engine-facts';
+import { sayEngine } from '$lib/model/report/say-engine';
 import type { Block, Part } from '../blocks/blocks';
 import type { ReportInput } from '../report-input';
 import { NOTES } from './notes';
@@ -14,6 +15,8 @@ export function provenancePart({ document, documentSha256, provenance }: ReportI
     ...engine,
     ...whoFacts(provenance)
   ];
+  const engineNote = sayEngine(document.engine.version);
+  const other: Block[] = engineNote === '' ? [] : [{ kind: 'paragraph', text: engineNote }];
   const address: Block[] =
     link === null
       ? []
@@ -23,6 +26,6 @@ export function provenancePart({ document, documentSha256, provenance }: ReportI
         ];
   return {
     title: 'Where this result comes from',
-    rows: [{ blocks: [{ kind: 'facts', facts }, ...address], notes: [NOTES.again] }]
+    rows: [{ blocks: [{ kind: 'facts', facts }, ...other, ...address], notes: [NOTES.again] }]
   };
 }
