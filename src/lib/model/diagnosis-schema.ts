@@ -85,6 +85,16 @@ const fit = z.strictObject({
   omitted: z.array(z.strictObject({ id: referenceId, reason: z.string() }))
 });
 
+const misread = z.strictObject({
+  applied: z.boolean(),
+  rate: orNull,
+  ceiling: orNull,
+  rawCeiling: number,
+  rawDispersion: orNull,
+  neededRate: interval,
+  kinks: z.array(level).nullable()
+});
+
 const distributionPoint = z.strictObject({
   count: whole,
   density: orNull,
@@ -163,6 +173,7 @@ export const diagnosisSchema = z.strictObject({
   }),
   data,
   moments,
+  nuisances: z.strictObject({ misread }).optional(),
   fit,
   distribution: z.array(distributionPoint),
   rate: z.strictObject({ horizon: number, silence: number, scale: number, points: z.array(ratePoint) }),

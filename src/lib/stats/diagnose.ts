@@ -1,24 +1,23 @@
 import { answer } from './answer/answer';
 import { cautions } from './answer/cautions';
-import { certificate } from './bounds/certificate';
-import { ceilingTest } from './resampling/ceiling-test';
 import { criticalTrials } from './bounds/critical-trials';
 import { engineVersion } from './engine-version';
-import { bestLaw } from './fit/best-law';
 import { fitData } from './fit/fit-data';
-import { toLaw } from './fit/trial-levels';
 import { evidenceOf } from './flags/gather-evidence';
 import { raiseFlags } from './flags/raise-flags';
-import { fitReport } from './fit-report/fit-report';
-import { floorLaw } from './floor/floor-law';
 import { checkOptions } from './input/check-options';
 import { digest } from './input/digest';
 import { inUnits } from './input/in-units';
 import { toHistogram } from './input/to-histogram';
 import { momentReport } from './moments/moment-report';
 import { adjust } from './multiple/adjust';
+import { independentNull } from './nulls/independent-null';
+import { misreadApplies } from './nulls/misread-applies';
+import { misreadNull } from './nulls/misread-null';
+import { misreadReport } from './nulls/misread-report';
 import { orderTests } from './order/order-tests';
 import { equalTrials } from './references/equal-trials';
+import { varianceTest } from './resampling/ceiling-test';
 import type { DrawHelper } from './resampling/draw-helper';
 import { fittedTests } from './resampling/fitted-tests';
 import { pacer } from './resampling/pacer';
@@ -53,38 +52,46 @@ export async function diagnose(
   const pace = pacer(onProgress, signal);
   await pace.step('fit', 0);
   const counts = fitData(histogram, trials);
-  const best = bestLaw(counts);
-  const law = toLaw(best.levels);
-  await pace.step('floor', 0.04);
-  const floor = floorLaw(counts);
   const drawing = { resamples: options.resamples, seed: options.seed };
-  const equal = equalTrials(counts, trials);
-  const moments = momentReport(histogram, trials, equal.parameter, drawing);
-  const proof = certificate({ counts: histogram.counts, lump: histogram.lump, shots: counts.total, trials });
+  const equal = equalTrials(counts, trials).parameter;
+  const misread = misreadApplies(options, counts);
+  const tested = misread.applies
+    ? misreadNull(counts, histogram, misread.rate, options)
+    : await independentNull(counts, histogram, equal, options, () => pace.step('floor', 0.04));
+  const { law, certificate } = tested;
+  const moments = momentReport(histogram, trials, equal, drawing, tested.ceiling);
   const spread = moments.variance.value !== null && moments.variance.value > 0;
   await pace.step('resampling', 0.08);
   // One trial has the variance of its ceiling whatever the data: only rounding and S/(S − 1) would be tested.
   const ceiling =
     spread && trials !== 1
-      ? await ceilingTest(counts, equal.parameter, drawing, pace.within(0.08, 0.12))
+      ? await varianceTest(
+          counts,
+          tested.mostDispersed.window,
+          tested.mostDispersed.ceiling,
+          drawing,
+          pace.within(0.08, 0.12)
+        )
       : null;
-  const fitted = await fittedTests(counts, best, drawing, pace.within(0.12, 0.85), helper);
+  const fitted = await fittedTests(counts, tested, drawing, pace.within(0.12, 0.85), helper);
   await pace.step('shot order', 0.85);
   const order = await orderTests(data, drawing, pace.within(0.85, 0.97));
   await pace.step('writing', 0.97);
   const tests = adjust([...(ceiling ? [ceiling] : []), ...fitted.tests, ...order.tests]);
   const table = lawTable(counts, law);
   const shown = distribution(histogram, counts.total, trials, table);
+  const nuisances = misreadReport(options, histogram, moments, equal, law);
   const evidence = evidenceOf({
     options,
     counts,
     trials,
     moments,
     tests,
-    certificate: proof,
+    certificate,
     fitted,
     law,
-    neighbours: order.neighbours
+    neighbours: order.neighbours,
+    misread
   });
   const flags = raiseFlags(evidence);
   return {
@@ -111,12 +118,15 @@ export async function diagnose(
     moments: {
       ...moments,
       criticalTrials:
-        spread && !histogram.lump ? criticalTrials(moments.mean.value!, moments.variance.value!) : null
+        spread && !histogram.lump && !misread.applies
+          ? criticalTrials(moments.mean.value!, moments.variance.value!)
+          : null
     },
-    fit: fitReport({ counts, best, law, floor, fitted, supplied: options.supplied, alpha: options.alpha }),
+    ...(nuisances ? { nuisances } : {}),
+    fit: tested.report(fitted),
     distribution: shown,
     rate: ratePoints(shown, counts.total, trials, table),
-    tails: { points: tailPoints(shown, counts.total, trials, table), certificate: proof },
+    tails: { points: tailPoints(shown, counts.total, table, tested.bounds), certificate },
     tests,
     notRun: [
       ...(ceiling

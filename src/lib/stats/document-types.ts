@@ -100,6 +100,22 @@ export interface Flag {
   next: string[];
 }
 
+/** What misread sites do to counts of kinks on an open chain, where one misread site toggles two bonds. */
+export interface MisreadPart {
+  /** True: a rate was stated, and every test, bound and flag allows for it; moments.ceiling is then this ceiling. */
+  applied: boolean;
+  rate: number | null;
+  /** Largest variance that independent kinks have as read; null when not applied. */
+  ceiling: number | null;
+  /** The ceiling without misreads, and variance over it. */
+  rawCeiling: number;
+  rawDispersion: number | null;
+  /** Rate that would explain the variance by itself; limits from those of the variance. 0: none is needed; null: none would do. */
+  neededRate: Interval;
+  /** Fitted kink probabilities in the order of the bonds; null when not applied. */
+  kinks: Level[] | null;
+}
+
 /** Everything a page, PDF, API answer or script needs. Plain JSON: numbers are finite or null. */
 export interface Diagnosis {
   format: 'severalty.diagnosis/1';
@@ -131,6 +147,8 @@ export interface Diagnosis {
     criticalTrials: number | null;
     pairCovariance: number | null;
   };
+  /** For kinks on an open chain of known length; left out otherwise. */
+  nuisances?: { misread: MisreadPart };
   fit: {
     logLikelihood: number;
     levels: Level[];

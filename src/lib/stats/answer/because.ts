@@ -11,11 +11,12 @@ export function because(
   excess: number | null,
   needed: number | null
 ): string[] {
-  const { options, moments, tests, certificate } = evidence;
+  const { options, moments, tests, certificate, trials } = evidence;
+  const misread = evidence.misread?.applies ? evidence.misread : null;
   const out: string[] = [];
   if (certificate && certificate.p <= options.alpha) {
     out.push(
-      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits give more than ${formatNumber(certificate.bound, 3)} a shot (p at most ${formatNumber(certificate.p, 2)}).`
+      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits${misread ? ', however misread at the rate stated,' : ''} give more than ${formatNumber(certificate.bound, 3)} a shot (p at most ${formatNumber(certificate.p, 2)}).`
     );
   }
   for (const alike of alikeTests(tests.filter((test) => test.pAdjusted <= options.alpha))) {
@@ -28,8 +29,13 @@ export function because(
   const { dispersion } = moments;
   if (dispersion.value !== null) {
     out.push(
-      `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean.`
+      `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean${misread ? `, read with ${formatPercent(misread.rate)} of the sites misread` : ''}.`
     );
+    const mean = moments.mean.value!;
+    const raw = misread && trials ? moments.variance.value! / (mean * (1 - mean / trials)) : NaN;
+    if (Number.isFinite(raw)) {
+      out.push(`Without misreads it would be ${formatNumber(raw, 3)} times the ceiling.`);
+    }
   }
   if (verdict !== 'ruled-out' && excess !== null) {
     out.push(

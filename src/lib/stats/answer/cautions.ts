@@ -5,7 +5,7 @@ import { resamplesNeeded } from './unreachable';
 
 /** What a reader must keep in mind: first what this histogram adds, then what always holds. */
 export function cautions(
-  { options, shots, trials, moments }: Evidence,
+  { options, shots, trials, moments, misread }: Evidence,
   histogram: Histogram,
   tests: TestResult[]
 ): string[] {
@@ -25,10 +25,12 @@ export function cautions(
       'Kinks are read from neighbouring sites: one misread site toggles two bonds, and independent kinks then look bunched. No misread rate was stated, and none is corrected for.'
     );
   }
-  if (options.misread) {
+  if (misread?.applies) {
     out.push(
-      `A misread rate of ${formatPercent(options.misread)} was stated. It is written down, but the tests here are against laws without misreads.`
+      `A misread rate of ${formatPercent(misread.rate)} a site was stated, and every test, bound and flag here allows for exactly that rate, the same at every site and independent of the others. An error of the rate itself is not allowed for: compare the rate needed with the limits of the calibration.`
     );
+  } else if (misread?.reason) {
+    out.push(misread.reason);
   }
   if (shots < 300 && moments.variance.value) {
     out.push('With fewer than about 300 shots the third and fourth cumulants and the far tails say little.');

@@ -1,6 +1,6 @@
 import { allEven, type Evidence } from '../flags/evidence';
 import type { Flag, Verdict } from '../types';
-import { formatCount, formatNumber } from '../words/format-number';
+import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayHowOften } from '../words/say-p';
 import { resamplesNeeded, unreachable } from './unreachable';
 
@@ -18,7 +18,7 @@ export function statement(
   if (verdict === 'compatible') {
     const regular = flags.some((flag) => flag.id === 'regular');
     return (
-      `These ${shots} are compatible with independent trials: with 95\u202f% confidence their variance is below ${formatNumber(1 + evidence.options.tolerance, 3)} times the ceiling.` +
+      `These ${shots} are compatible with independent trials: with 95\u202f% confidence their variance is below ${formatNumber(1 + evidence.options.tolerance, 3)} times the ceiling${evidence.misread?.applies ? `, with ${formatPercent(evidence.misread.rate)} of the sites misread` : ''}.` +
       (regular
         ? ' They are more regular than equal trials, which repulsion between defects would also give.'
         : '')

@@ -17,7 +17,7 @@ export function bunching(evidence: Evidence): Flag | null {
   if (high && lowRan && !low) return null;
   if (low && !high) return null;
   const { dispersion, pairCovariance } = evidence.moments;
-  const { trials } = evidence;
+  const { trials, misread } = evidence;
   const correlation =
     trials && trials > 1 && pairCovariance !== null
       ? ` Pairs of trials then share a covariance of at least ${formatNumber(pairCovariance / (trials * (trials - 1)), 2)} on average.`
@@ -27,17 +27,22 @@ export function bunching(evidence: Evidence): Flag | null {
     grade,
     tests: ['ceiling', ...(high ? (['high-tail'] as const) : []), ...(low ? (['low-tail'] as const) : [])],
     statement:
-      'Defects come together: the counts vary more from shot to shot than any independent trials with this mean can.',
-    size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials.${correlation}`,
+      'Defects come together: the counts vary more from shot to shot than any independent trials with this mean can' +
+      (misread?.applies ? ', read with the misread rate that was stated.' : '.'),
+    size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials${misread?.applies ? ' as they are read' : ''}.${correlation}`,
     otherCauses: [
       'a rate that drifted or differed between runs that were pooled',
-      'read-out flips, when kinks are read from neighbouring sites: one misread site toggles two bonds',
+      misread?.applies
+        ? 'more misread sites than stated, or misreads that come together'
+        : 'read-out flips, when kinks are read from neighbouring sites: one misread site toggles two bonds',
       'boundary sites that favour one phase, so that defects enter in pairs',
       'dead shots mixed in, which lower the mean and widen the counts'
     ],
     next: [
       'Give the shots in order, with their batches: drift would then show by itself.',
-      'Measure the misread rate of one site, and repeat the check with bonds as geometry.',
+      misread?.applies
+        ? 'Measure the misread rate of single sites again, with its error.'
+        : 'Measure the misread rate of one site, and repeat the check with bonds as geometry.',
       'Check each run alone; bunching by interaction stays, pooling goes.'
     ]
   };

@@ -1,8 +1,6 @@
 import type { FitData } from '../fit/fit-data';
-import { lawWindow } from '../laws/law-window';
 import { cells } from '../resampling/cells';
-import { evenProbability } from '../resampling/even-probability';
-import type { Law } from '../types';
+import { familyEven, familyWindow, type FittedLaw } from '../resampling/fitted-law';
 import type { Evidence } from './evidence';
 
 /**
@@ -11,9 +9,9 @@ import type { Evidence } from './evidence';
  * Any gross misfit prefers a parity a little, through the one count where it is largest (zeros, mostly). Pairing
  * shows at all counts: with the most telling one left out, more than two standard deviations remain.
  */
-export function evenShots(data: FitData, law: Law): NonNullable<Evidence['even']> {
-  const expected = evenProbability(law);
-  const { law: f } = cells(data, lawWindow(law, 1e-18, 1));
+export function evenShots(data: FitData, law: FittedLaw): NonNullable<Evidence['even']> {
+  const expected = familyEven(law);
+  const { law: f } = cells(data, familyWindow(law, 1e-18, 1));
   let seen = 0;
   let excess = 0;
   const parts = Array.from(data.shots, (shots, i) => {

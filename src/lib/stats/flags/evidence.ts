@@ -1,3 +1,4 @@
+import type { MisreadUse } from '../nulls/misread-applies';
 import type { Certificate, DiagnoseOptions, Diagnosis, TestId, TestResult } from '../types';
 
 /** All that flags and the answer are decided from. */
@@ -5,7 +6,10 @@ export interface Evidence {
   options: DiagnoseOptions;
   shots: number;
   trials: number | null;
+  /** With misreads allowed for, ceiling and dispersion are those of kinks as read. */
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>;
+  /** Whether every test allows for misread sites; left out, none was stated. */
+  misread?: MisreadUse;
   tests: TestResult[];
   certificate: Certificate | null;
   /** p of the low tail with empty shots set aside; null when it was not asked. */

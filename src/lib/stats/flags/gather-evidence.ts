@@ -1,7 +1,9 @@
 import type { FitData } from '../fit/fit-data';
 import { evenShots } from './even-shots';
 import type { FittedTests } from '../resampling/fitted-tests';
-import type { Certificate, DiagnoseOptions, Law, TestResult } from '../types';
+import type { MisreadUse } from '../nulls/misread-applies';
+import type { FittedLaw } from '../resampling/fitted-law';
+import type { Certificate, DiagnoseOptions, TestResult } from '../types';
 import type { Evidence } from './evidence';
 
 export interface Gathered {
@@ -12,8 +14,9 @@ export interface Gathered {
   tests: TestResult[];
   certificate: Certificate | null;
   fitted: FittedTests;
-  law: Law;
+  law: FittedLaw;
   neighbours: Evidence['neighbours'];
+  misread: MisreadUse;
 }
 
 /** What flags and the answer are decided from, out of the parts of a diagnosis. */
@@ -26,7 +29,8 @@ export function evidenceOf({
   certificate,
   fitted,
   law,
-  neighbours
+  neighbours,
+  misread
 }: Gathered): Evidence {
   return {
     options,
@@ -36,6 +40,7 @@ export function evidenceOf({
     tests,
     certificate,
     neighbours,
+    misread,
     lowTailOfTheRest: fitted.lowTailOfTheRest,
     empty: { seen: counts.first === 0 ? (counts.shots[0] ?? 0) : 0, expected: fitted.expectedEmpty },
     even: counts.lump ? null : evenShots(counts, law)

@@ -21,7 +21,8 @@ export function misreads(evidence: Evidence): Flag | null {
     grade: 'hinted',
     tests: ['ceiling'],
     statement:
-      'Misread sites alone could give this excess: each toggles two neighbouring bonds, so independent kinks look bunched.',
+      (evidence.misread?.applies ? 'More misread sites than stated' : 'Misread sites alone') +
+      ' could give this excess: each toggles two neighbouring bonds, so independent kinks look bunched.',
     size: `Independent kinks with a misread rate of ${formatPercent(needed)} a site would have this mean and variance.${stated}`,
     otherCauses: ['true bunching; the counts alone cannot tell the two apart'],
     next: ['Measure the misread rate of a site on prepared states and compare it with the rate above.']

@@ -9,26 +9,29 @@ import { momentIntervals, type MomentIntervals } from './moment-intervals';
  * ceiling any lumped histogram would look regular (the document's cautions say so).
  *
  * @param equal probability of the equal trials, or their mean when N is unknown
+ * @param ceiling another ceiling than that of independent trials, or null
  */
 export function momentReport(
   histogram: Histogram,
   trials: number | null,
   equal: number,
-  options: { resamples: number; seed: number }
+  options: { resamples: number; seed: number },
+  ceiling: number | null = null
 ): Omit<Diagnosis['moments'], 'criticalTrials'> {
   const { lump } = histogram;
   const counts = lump ? [...histogram.counts, [lump.from, lump.shots] as [number, number]] : histogram.counts;
   const found = momentIntervals(counts, trials, { ...options, stream: stream('intervals', 0) });
-  if (lump) lowerCeiling(found, lumpedCeiling(trials, equal, lump.from));
+  const other = ceiling ?? (lump ? lumpedCeiling(trials, equal, lump.from) : null);
+  if (other !== null) replaceCeiling(found, other);
   const variance = found.variance.value;
   return { ...found, pairCovariance: variance === null ? null : variance - found.ceiling };
 }
 
 /** Replaces the ceiling, and variance/ceiling with it. */
-function lowerCeiling(found: MomentIntervals, lumped: number): void {
-  const factor = found.ceiling / lumped;
+function replaceCeiling(found: MomentIntervals, other: number): void {
+  const factor = found.ceiling / other;
   const scaled = (value: number | null) => (value === null ? null : value * factor);
   const { value, low, high } = found.dispersion;
-  found.ceiling = lumped;
+  found.ceiling = other;
   found.dispersion = { value: scaled(value), low: scaled(low), high: scaled(high) };
 }

@@ -2,6 +2,7 @@ import type { FitData } from '../fit/fit-data';
 import { sampleMoments } from '../fit/sample-moments';
 import { binomialWindow } from '../laws/binomial-window';
 import { poissonWindow } from '../laws/poisson-window';
+import type { Window } from '../laws/window';
 import { SequentialP } from '../multiple/sequential-p';
 import { generator } from '../random/generator';
 import type { TestResult } from '../types';
@@ -25,22 +26,49 @@ export async function ceilingTest(
   options: { resamples: number; seed: number },
   pace: Pace
 ): Promise<Omit<TestResult, 'pAdjusted'>> {
-  const window = data.trials === null ? poissonWindow(p, 1e-18, 1) : binomialWindow(data.trials, p, 1e-18, 1);
+  const { window, ceiling } = equalWindow(data.trials, p);
+  return varianceTest(data, window, ceiling, options, pace);
+}
+
+/** Equal trials at `p` (Poisson of that mean when N is unknown), and the ceiling they reach, as a function of the mean. */
+export function equalWindow(
+  trials: number | null,
+  p: number
+): { window: Window; ceiling: (mean: number) => number } {
+  return {
+    window: trials === null ? poissonWindow(p, 1e-18, 1) : binomialWindow(trials, p, 1e-18, 1),
+    ceiling: (mean) => mean * (1 - (trials === null ? 0 : mean / trials))
+  };
+}
+
+/**
+ * The same for another ceiling: s² − ceiling(μ̂) against histograms drawn from a law.
+ *
+ * @param window the most dispersed law of the null at the observed mean
+ * @param ceiling largest variance at a mean
+ */
+export async function varianceTest(
+  data: FitData,
+  window: Window,
+  ceiling: (mean: number) => number,
+  options: { resamples: number; seed: number },
+  pace: Pace
+): Promise<Omit<TestResult, 'pAdjusted'>> {
   const source = redraw(window, data, data.total);
-  const statistic = excess(data);
+  const statistic = excess(data, ceiling);
   // Equal up to rounding counts as equal: S·ε of the sum of squares.
   const slack = 1e-12 * Math.max(1, Math.abs(statistic));
   const sequence = new SequentialP(options.resamples);
   for (let b = 0; !sequence.done; b++) {
     const drawn = source.draw(generator(options.seed, stream('equal trials', b)));
-    sequence.push(excess(drawn) >= statistic - slack);
+    sequence.push(excess(drawn, ceiling) >= statistic - slack);
     await pace.breathe(progress(sequence));
   }
   return testResult('ceiling', statistic, sequence);
 }
 
-function excess(data: FitData): number {
+function excess(data: FitData, ceiling: (mean: number) => number): number {
   const { mean, variance } = sampleMoments(data);
   const unbiased = (variance * data.total) / (data.total - 1);
-  return unbiased - mean * (1 - (data.trials === null ? 0 : mean / data.trials));
+  return unbiased - ceiling(mean);
 }

@@ -1,13 +1,12 @@
 import type { FitData } from '../fit/fit-data';
-import { toLaw, type TrialLevels } from '../fit/trial-levels';
-import { lawWindow } from '../laws/law-window';
 import { generator } from '../random/generator';
 import type { TestId } from '../types';
 import { saturated } from './divergence';
+import { asLaw, familyWindow, type Buffers, type FittedLevels } from './fitted-law';
 import { gSquaredLeft } from './g-squared-left';
 import { largestGSquared } from './largest-g-squared';
 import { redraw } from './redraw';
-import { refitted, type Buffers, type Refitted } from './refitted';
+import { refitted, type Refitted } from './refitted';
 import { chooseStatistics, type Statistic, type StatisticId } from './statistics';
 import { settledAt } from './settled-at';
 import { stream } from './streams';
@@ -15,7 +14,7 @@ import { stream } from './streams';
 /** All that the draws of the fitted tests depend on; plain, so that it can be sent to another thread. */
 export interface FittedJob {
   data: FitData;
-  levels: TrialLevels;
+  levels: FittedLevels;
   logLikelihood: number;
   seed: number;
 }
@@ -54,7 +53,7 @@ export const divergencesKept = 149;
  * ends once it has come so close that no statistic asked for can still reach its own. The answers are the same.
  */
 export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): FittedDraws {
-  const window = lawWindow(toLaw(levels), 1e-18, 1);
+  const window = familyWindow(asLaw(levels), 1e-18, 1);
   const observed = refitted(data, levels, { levels, logLikelihood, window });
   const { statistics, notRun } = chooseStatistics(observed);
   const questions = [...statistics].map(([id, statistic]) => {

@@ -1,10 +1,10 @@
-import type { BestLaw } from '../fit/best-law';
 import type { FitData } from '../fit/fit-data';
 import { SequentialP } from '../multiple/sequential-p';
 import type { TestId, TestResult } from '../types';
 import type { DrawHelper } from './draw-helper';
 import { expectedEmpty } from './empty-excess';
 import { fittedDraws } from './fitted-draws';
+import type { FittedLevels } from './fitted-law';
 import type { Pace } from './pace';
 import { progress } from './progress';
 import { SharedDraws } from './shared-draws';
@@ -31,7 +31,7 @@ export interface FittedTests {
  */
 export async function fittedTests(
   data: FitData,
-  fit: BestLaw,
+  fit: { levels: FittedLevels; logLikelihood: number },
   options: { resamples: number; seed: number },
   pace: Pace,
   helper?: DrawHelper

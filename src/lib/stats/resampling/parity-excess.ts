@@ -1,11 +1,11 @@
-import { evenProbability } from './even-probability';
 import type { FitData } from '../fit/fit-data';
+import { familyEven } from './fitted-law';
 import type { Refitted } from './refitted';
 
 /** |shots with even count − S·P(even)| in its own standard deviations; 0 when the law leaves no choice. */
 export function parityExcess({ data, law }: Refitted): number {
   const even = evenShots(data);
-  const p = evenProbability(law);
+  const p = familyEven(law);
   const spread = Math.sqrt(data.total * p * (1 - p));
   return spread > 0 ? Math.abs(even - data.total * p) / spread : 0;
 }

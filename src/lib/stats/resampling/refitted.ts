@@ -1,26 +1,26 @@
 import type { FitData } from '../fit/fit-data';
-import { refit, type Refit } from '../fit/refit';
-import { toLaw, type TrialLevels } from '../fit/trial-levels';
-import { workspace, type Workspace } from '../fit/workspace';
-import type { Law } from '../types';
 import { divergence } from './divergence';
+import {
+  asLaw,
+  familyRefit,
+  type Buffers,
+  type FamilyRefit,
+  type FittedLaw,
+  type FittedLevels
+} from './fitted-law';
 import { setEmptyAside } from './set-empty-aside';
+
+export type { Buffers };
 
 /** A histogram with its own best law, and, when asked for, the best law of its shots with n ≥ 1. */
 export interface Refitted {
   data: FitData;
-  fit: Refit;
-  law: Law;
+  fit: FamilyRefit;
+  law: FittedLaw;
   /** KL of the histogram from its law, nats a shot. */
   divergence: number;
   /** Without empty shots; null when there are none, or nothing else. Fitted once, at first use. */
-  rest(): { data: FitData; fit: Refit } | null;
-}
-
-/** Buffers that the refits of one resample leave to those of the next, whose pmf then overwrites theirs. */
-export interface Buffers {
-  whole?: Workspace;
-  rest?: Workspace;
+  rest(): { data: FitData; fit: FamilyRefit } | null;
 }
 
 /**
@@ -29,17 +29,17 @@ export interface Buffers {
  */
 export function refitted(
   data: FitData,
-  from: TrialLevels,
-  known?: Refit,
+  from: FittedLevels,
+  known?: FamilyRefit,
   buffers: Buffers = {},
   settled = Infinity
 ): Refitted {
-  const fit = known ?? refit(data, from, (buffers.whole = workspace(data, buffers.whole)), settled);
-  let rest: { data: FitData; fit: Refit } | null | undefined;
+  const fit = known ?? familyRefit(data, from, buffers, 'whole', settled);
+  let rest: { data: FitData; fit: FamilyRefit } | null | undefined;
   return {
     data,
     fit,
-    law: toLaw(fit.levels),
+    law: asLaw(fit.levels),
     divergence: divergence(data, fit.logLikelihood),
     rest() {
       if (rest === undefined) {
@@ -49,7 +49,7 @@ export function refitted(
           aside.empty > 0 && aside.rest.total > 0
             ? {
                 data: aside.rest,
-                fit: refit(aside.rest, fit.levels, (buffers.rest = workspace(aside.rest, buffers.rest)))
+                fit: familyRefit(aside.rest, fit.levels, buffers, 'rest')
               }
             : null;
       }

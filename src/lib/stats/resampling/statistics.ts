@@ -1,9 +1,9 @@
 import type { FitData } from '../fit/fit-data';
-import { lawMoments } from '../laws/law-moments';
 import type { Window } from '../laws/window';
 import type { TestId } from '../types';
 import { cells } from './cells';
 import { emptyExcess } from './empty-excess';
+import { familyMoments } from './fitted-law';
 import { parityExcess, parityNeeds } from './parity-excess';
 import type { Refitted } from './refitted';
 import { tailExcess } from './tail-excess';
@@ -32,7 +32,7 @@ export interface ChosenStatistics {
 /** One line a test against the fitted law. Limits of the tails are fixed here, by the observed fit. */
 export function chooseStatistics(observed: Refitted): ChosenStatistics {
   const { data, law } = observed;
-  const { mean, variance } = lawMoments(law);
+  const { mean, variance } = familyMoments(law);
   const spread = Math.sqrt(variance);
   const statistics: ChosenStatistics['statistics'] = new Map();
   const notRun: ChosenStatistics['notRun'] = [];

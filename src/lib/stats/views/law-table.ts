@@ -1,12 +1,16 @@
 import type { FitData } from '../fit/fit-data';
-import { lawMoments } from '../laws/law-moments';
-import { lawWindow } from '../laws/law-window';
+import { lawRate } from '../laws/law-rate';
 import { logPmf } from '../laws/log-pmf';
-import type { Law } from '../types';
+import type { Window } from '../laws/window';
+import { chainBlocks } from '../misread/chain-blocks';
+import { chainRate } from '../misread/chain-rate';
+import { isReadChain } from '../misread/read-chain';
+import { familyMoments, familyWindow, type FittedLaw } from '../resampling/fitted-law';
 
 /** The fitted law over the counts a report shows. */
 export interface LawTable {
-  law: Law;
+  mean: number;
+  variance: number;
   first: number;
   /** f_n and ln f_n for first, first+1, …; ln f_n is exact where f_n underflows. */
   f: number[];
@@ -14,6 +18,8 @@ export interface LawTable {
   /** P(X ≥ n) and P(X ≤ n), for any n. */
   upper(n: number): number;
   lower(n: number): number;
+  /** Large-deviation rate sup_θ [θn − Λ(θ)], nats a shot. */
+  rate(n: number): number;
 }
 
 /** Up to this N every count is shown; beyond, those seen and nine standard deviations of the law. */
@@ -22,9 +28,9 @@ const fullTable = 60;
 const margin = 500;
 
 /** Counts shown and the law there, with relative error under 1e-10 down to 1e-300. */
-export function lawTable(data: FitData, law: Law): LawTable {
-  const { mean, variance } = lawMoments(law);
-  const window = lawWindow(law);
+export function lawTable(data: FitData, law: FittedLaw): LawTable {
+  const { mean, variance } = familyMoments(law);
+  const window = familyWindow(law);
   const spread = Math.sqrt(variance);
   const last = data.first + data.shots.length - 1;
   const most = data.trials ?? Infinity;
@@ -40,19 +46,28 @@ export function lawTable(data: FitData, law: Law): LawTable {
     const k = n - window.first;
     const value = k >= 0 && k < window.values.length ? window.values[k] / window.scale : 0;
     f.push(value);
-    logF.push(value > 1e-300 ? Math.log(value) : logPmf(law, n));
+    logF.push(value > 1e-300 ? Math.log(value) : far(law, window, n));
   }
   const upward = cumulative(window.values, window.scale, true);
   const downward = cumulative(window.values, window.scale, false);
   return {
-    law,
+    mean,
+    variance,
     first,
     f,
     logF,
     upper: (n) => (n <= window.first ? 1 : (upward[n - window.first] ?? 0)),
     lower: (n) =>
-      n < window.first ? 0 : Math.min(1, downward[Math.min(n - window.first, downward.length - 1)])
+      n < window.first ? 0 : Math.min(1, downward[Math.min(n - window.first, downward.length - 1)]),
+    rate: (n) => (isReadChain(law) ? chainRate(chainBlocks(law), law.rate, n) : lawRate(law, n))
   };
+}
+
+/** ln f_n where f_n is too small for a double. Of a chain as far as its window goes, to 1e-590. */
+function far(law: FittedLaw, window: Window, n: number): number {
+  if (!isReadChain(law)) return logPmf(law, n);
+  const value = window.values[n - window.first] ?? 0;
+  return value > 0 ? Math.log(value) - Math.log(window.scale) : -Infinity;
 }
 
 /** Tail sums, smallest terms first. */

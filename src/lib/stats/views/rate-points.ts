@@ -1,5 +1,3 @@
-import { lawMoments } from '../laws/law-moments';
-import { lawRate } from '../laws/law-rate';
 import type { Diagnosis, DistributionPoint } from '../types';
 import type { LawTable } from './law-table';
 
@@ -17,7 +15,7 @@ export function ratePoints(
   table: LawTable
 ): Diagnosis['rate'] {
   const scale = trials ?? 1;
-  const { mean, variance } = lawMoments(table.law);
+  const { mean, variance } = table;
   const rateOf = (probability: number) => (probability > 0 ? positive(-Math.log(probability) / scale) : null);
   return {
     horizon: Math.log(shots) / scale,
@@ -33,7 +31,7 @@ export function ratePoints(
         low: rateOf(point.high)!,
         high: rateOf(point.low),
         fitted: finite(-table.logF[point.count - table.first] / scale),
-        limit: finite(lawRate(table.law, point.count) / scale),
+        limit: finite(table.rate(point.count) / scale),
         gaussian: variance > 0 ? (point.count - mean) ** 2 / (2 * variance * scale) : null
       }))
   };

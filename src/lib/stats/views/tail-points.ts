@@ -1,23 +1,20 @@
-import { logHoeffdingTail } from '../bounds/log-hoeffding-tail';
-import { logMeanChernoff } from '../bounds/log-mean-chernoff';
-import { lawMoments } from '../laws/law-moments';
-import { lawRate } from '../laws/law-rate';
 import { clopperPearson } from '../numerics/clopper-pearson';
+import type { TailBounds } from '../nulls/null-law';
 import type { DistributionPoint, TailPoint } from '../types';
 import type { LawTable } from './law-table';
 
 /**
  * Both tails: share of shots at or beyond each count with its Clopper–Pearson interval, the fitted tail, and
  * three bounds: Chernoff of the fitted law e^{−N I(n/N)}, Chernoff from the mean alone, and Hoeffding's
- * extremal tail. Counts above the mean belong to the high side, below to the low side.
+ * extremal tail (with misreads, what follows from these for kinks as read). Counts above the mean belong to the high side, below to the low side.
  */
 export function tailPoints(
   points: DistributionPoint[],
   shots: number,
-  trials: number | null,
-  table: LawTable
+  table: LawTable,
+  bounds: TailBounds
 ): TailPoint[] {
-  const { mean } = lawMoments(table.law);
+  const { mean } = table;
   const out: TailPoint[] = [];
   let seen = 0;
   for (const point of points) {
@@ -43,9 +40,9 @@ export function tailPoints(
       low,
       high: upper,
       fitted: side === 'high' ? table.upper(count) : table.lower(count),
-      chernoff: Math.exp(-lawRate(table.law, count)),
-      meanChernoff: Math.exp(logMeanChernoff(side, count, mean, trials)),
-      hoeffding: Math.exp(logHoeffdingTail(side, count, mean, trials))
+      chernoff: Math.exp(-table.rate(count)),
+      meanChernoff: Math.exp(bounds.meanChernoff(side, count)),
+      hoeffding: Math.exp(bounds.hoeffding(side, count))
     };
   }
 }

@@ -30,9 +30,14 @@ describe('cautions', () => {
       /No misread rate was stated/
     ],
     [
-      'a stated misread rate',
-      { over: { options: { ...defaultOptions, misread: 0.01 } } },
-      /1\.0\u202f% was stated/
+      'a misread rate that is allowed for',
+      { over: { misread: { applies: true, rate: 0.01 } } },
+      /1\.0\u202f% a site was stated, and every test/
+    ],
+    [
+      'a misread rate that is not',
+      { over: { misread: { applies: false, reason: 'It is written down, but not allowed for.' } } },
+      /not allowed for/
     ],
     ['few shots', { over: { shots: 299 } }, /fewer than about 300 shots/]
   ])('name %s', (_name, made, want) => {

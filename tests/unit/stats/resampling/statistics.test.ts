@@ -1,6 +1,6 @@
 import { bestLaw } from '$lib/stats/fit/best-law';
-import { lawWindow } from '$lib/stats/laws/law-window';
 import { generator } from '$lib/stats/random/generator';
+import { familyWindow } from '$lib/stats/resampling/fitted-law';
 import { largestGSquared } from '$lib/stats/resampling/largest-g-squared';
 import { redraw } from '$lib/stats/resampling/redraw';
 import { refitted } from '$lib/stats/resampling/refitted';
@@ -80,7 +80,7 @@ describe('chooseStatistics', () => {
     let close = 0;
     for (const problem of problems) {
       const { of, statistics } = chosen(problem);
-      const window = lawWindow(of.law, 1e-18, 1);
+      const window = familyWindow(of.law, 1e-18, 1);
       const source = redraw(window, of.data, of.data.total);
       for (let b = 0; b < 60; b++) {
         const drawn = source.draw(generator(3, b));

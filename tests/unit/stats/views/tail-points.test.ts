@@ -2,6 +2,7 @@ import { fitData } from '$lib/stats/fit/fit-data';
 import type { Histogram, Law } from '$lib/stats/types';
 import { distribution } from '$lib/stats/views/distribution';
 import { lawTable } from '$lib/stats/views/law-table';
+import { meanBounds } from '$lib/stats/nulls/mean-bounds';
 import { tailPoints } from '$lib/stats/views/tail-points';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
@@ -11,7 +12,12 @@ function tails(counts: [number, number][], trials: number | null, law: Law, lump
   const histogram = { kind: 'histogram' as const, counts, lump };
   const data = fitData(histogram, trials);
   const table = lawTable(data, law);
-  return tailPoints(distribution(histogram, data.total, trials, table), data.total, trials, table);
+  return tailPoints(
+    distribution(histogram, data.total, trials, table),
+    data.total,
+    table,
+    meanBounds(table.mean, trials)
+  );
 }
 
 describe('tailPoints', () => {

@@ -1,0 +1,47 @@
+import { certificate } from '../bounds/certificate';
+import { bestLaw } from '../fit/best-law';
+import type { FitData } from '../fit/fit-data';
+import { toLaw } from '../fit/trial-levels';
+import { fitReport } from '../fit-report/fit-report';
+import { floorLaw } from '../floor/floor-law';
+import { lawMoments } from '../laws/law-moments';
+import { equalWindow } from '../resampling/ceiling-test';
+import type { DiagnoseOptions, Histogram } from '../types';
+import { meanBounds } from './mean-bounds';
+import type { NullLaw } from './null-law';
+
+/**
+ * Independent trials: the best law, its floor, the exact certificate, Hoeffding's and Chernoff's bounds.
+ *
+ * @param equal probability of the equal trials, or their mean when N is unknown
+ * @param onFloor called between fit and floor, which both take their time
+ */
+export async function independentNull(
+  counts: FitData,
+  histogram: Histogram,
+  equal: number,
+  options: DiagnoseOptions,
+  onFloor: () => Promise<void>
+): Promise<NullLaw> {
+  const { trials } = counts;
+  const best = bestLaw(counts);
+  const law = toLaw(best.levels);
+  await onFloor();
+  const floor = floorLaw(counts);
+  return {
+    levels: best.levels,
+    law,
+    logLikelihood: best.logLikelihood,
+    ceiling: null,
+    mostDispersed: equalWindow(trials, equal),
+    certificate: certificate({
+      counts: histogram.counts,
+      lump: histogram.lump,
+      shots: counts.total,
+      trials
+    }),
+    bounds: meanBounds(lawMoments(law).mean, trials),
+    report: (fitted) =>
+      fitReport({ counts, best, law, floor, fitted, supplied: options.supplied, alpha: options.alpha })
+  };
+}
