@@ -1,0 +1,54 @@
+/** What LaTeX reads as a command, or sets as another sign; the right-hand sides need no package. */
+const SPECIALS: Record<string, string> = {
+  '\\': '\\textbackslash{}',
+  // BibTeX counts braces without minding a backslash before them, so \{ would upset an entry.
+  '{': '\\textbraceleft{}',
+  '}': '\\textbraceright{}',
+  '#': '\\#',
+  $: '\\$',
+  '%': '\\%',
+  '&': '\\&',
+  _: '\\_',
+  '~': '\\textasciitilde{}',
+  '^': '\\textasciicircum{}',
+  // In the classic encoding these three come out as ¡, ¿ and a dash.
+  '<': '\\textless{}',
+  '>': '\\textgreater{}',
+  '|': '\\textbar{}',
+  // Two of these in a row would join into another sign, and after ? or ! turn it over.
+  '`': '\\`{}',
+  '"': "''",
+  '\u2013': '--',
+  '\u2014': '---',
+  '\u2018': '`',
+  '\u2019': "'",
+  '\u201c': '``',
+  '\u201d': "''",
+  '\u00a0': '~',
+  '\u202f': '\\,',
+  '\u2009': '\\,',
+  '\u2212': '$-$',
+  '×': '$\\times$',
+  '≤': '$\\le$',
+  '≥': '$\\ge$',
+  '…': '\\dots{}'
+};
+
+const RAISED = '⁰¹²³⁴⁵⁶⁷⁸⁹⁻';
+const LEVEL = '0123456789-';
+
+/**
+ * Text that LaTeX sets as it stands: every special sign escaped, typographic signs in LaTeX's own spelling, letters of
+ * any script left as they are. Needs nothing beyond a standard class; scripts other than Latin want an engine that
+ * knows them.
+ *
+ * @param typed true for what people typed: signs that LaTeX would join are then kept apart ("--", "''")
+ */
+export function escapeLatex(text: string, typed = true): string {
+  const apart = (run: string) => (run.length > 1 ? [...run].join('{}') : run);
+  return text.replace(/-{2,}|'{2,}|,{2,}|[⁰¹²³⁴⁵⁶⁷⁸⁹⁻]+|[\s\S]/gu, (part) => {
+    if (RAISED.includes(part[0])) return `$^{${[...part].map((c) => LEVEL[RAISED.indexOf(c)]).join('')}}$`;
+    if (part.length > 1 && /^[-',]/.test(part)) return typed ? apart(part) : part;
+    return SPECIALS[part] ?? part;
+  });
+}

@@ -1,0 +1,79 @@
+import { GEOMETRIES } from '../../labels';
+import type { Provenance } from '../provenance';
+import type { Quotable } from '../quotable';
+import { code, equation, joined, nameOf, text, words, type Words } from '../span';
+import { asGiven } from '../numbers/as-given';
+import { counted, givenPercent, whole } from './say-number';
+import { testedTrials } from './units';
+
+/** Program, counts, trials, unit and read-out, a sentence each. */
+export function sayGiven(quotable: Quotable, provenance: Provenance): Words[] {
+  const { data, engine } = quotable;
+  return [
+    words`Whether the counts can be sums of independent trials was tested with Severalty, engine ${engine.version}.`,
+    words`The data${named(provenance)} are the counts of ${counted(data.shots, 'shot')}${trials(quotable)}.`,
+    ...(data.digest
+      ? [words`The sha256 of the histogram is ${code(data.digest.replace(/^sha256:/, ''))}.`]
+      : []),
+    ...lump(quotable),
+    ...order(quotable),
+    ...readOut(quotable)
+  ];
+}
+
+function named({ name, device, firmware }: Provenance): Words {
+  const of = [
+    name === null ? '' : words` “${nameOf(name)}”`,
+    device === null ? '' : words` from ${nameOf(device)}`,
+    firmware === null ? '' : words` with firmware ${nameOf(firmware)}`
+  ];
+  const all = joined(of);
+  return all.length > 0 ? words`,${all},` : [];
+}
+
+function trials(quotable: Quotable): Words {
+  const { data } = quotable;
+  const on = data.geometry === 'sites' ? '' : `, counted on ${GEOMETRIES[data.geometry]}`;
+  const tested = testedTrials(quotable);
+  if (tested === null)
+    return words`${on}; the number of trials in a shot was taken as unknown${data.unit === 'pair' ? ', and defects were counted in pairs' : ''}`;
+  const given = words`${on}, each of ${equation('N', '=', asGiven(data.trials!))} trials`;
+  return data.unit === 'pair'
+    ? words`${given}; defects come in pairs, so the number of pairs out of ${whole(tested)} was tested`
+    : given;
+}
+
+function lump({ data }: Quotable): Words[] {
+  if (!data.lump) return [];
+  const { from } = data.lump;
+  if (from === null)
+    return [
+      [
+        text(
+          'The largest counts were given as one row; mean and variance take its first count and are lower limits.'
+        )
+      ]
+    ];
+  return [
+    words`Counts of ${whole(from)} and more were given as one row: they enter the likelihood as a tail, and mean and variance take each such shot as ${whole(from)} and are lower limits.`
+  ];
+}
+
+function order({ data }: Quotable): Words[] {
+  if (!data.ordered) return [];
+  return [
+    data.batches === null
+      ? [text('The order of the shots was known.')]
+      : words`The order of the shots was known, in ${counted(data.batches, 'batch', 'batches')}.`
+  ];
+}
+
+function readOut({ data }: Quotable): Words[] {
+  if (data.misread)
+    return [
+      words`A chance of ${givenPercent(data.misread)} to misread a site was stated; the tests are against laws without misreads.`
+    ];
+  return data.geometry === 'sites'
+    ? []
+    : [[text('No chance to misread a site was stated, and none is corrected for.')]];
+}

@@ -1,0 +1,36 @@
+import { roundToDigits } from '../numbers/round-to-digits';
+import type { Quotable } from '../quotable';
+import { math, number, words, type Words } from '../span';
+import { sayRounded } from './say-number';
+import { thing } from './units';
+
+/** Mean, variance, variance over ceiling and divergence, each rounded to its uncertainty. */
+export function sayMoments(quotable: Quotable): Words[] {
+  const { data, fit, moments } = quotable;
+  const { mean, variance, dispersion } = moments;
+  const what = `${thing(quotable)}s`;
+  const out: Words[] = [];
+  if (variance.value === null || variance.value === 0) {
+    if (mean.value !== null && mean.value > 0)
+      out.push(words`The mean is ${sayRounded(mean)} ${what} a shot.`);
+  } else {
+    const over =
+      dispersion.value === null
+        ? []
+        : words`, which is ${sayRounded(dispersion)} times the ceiling of ${data.lump ? 'equal trials lumped in the same way' : 'independent trials with this mean'}`;
+    out.push(
+      words`The mean is ${sayRounded(mean)} ${what} a shot and the variance ${sayRounded(variance)}${over}${data.lump ? '; mean and variance are lower limits, since the largest counts were lumped' : ''}.`
+    );
+  }
+  if (fit.divergence && variance.value !== null && variance.value > 0) {
+    const hasInterval = fit.divergence.high !== null;
+    const found =
+      fit.gSquared === null
+        ? []
+        : words`${hasInterval ? '; as found, ' : '; '}${math('G²')} is ${number(roundToDigits(fit.gSquared, 4))}`;
+    out.push(
+      words`The best independent-trial law lies ${sayRounded(fit.divergence, 'D')} nats a shot from the counts${hasInterval ? ', chance taken off' : ''}${found}.`
+    );
+  }
+  return out;
+}
