@@ -15,7 +15,6 @@ const SPECIALS: Record<string, string> = {
   '<': '\\textless{}',
   '>': '\\textgreater{}',
   '|': '\\textbar{}',
-  // Two of these in a row would join into another sign, and after ? or ! turn it over.
   '`': '\\`{}',
   '"': "''",
   '\u2013': '--',
@@ -46,9 +45,11 @@ const LEVEL = '0123456789-';
  */
 export function escapeLatex(text: string, typed = true): string {
   const apart = (run: string) => (run.length > 1 ? [...run].join('{}') : run);
-  return text.replace(/-{2,}|'{2,}|,{2,}|[⁰¹²³⁴⁵⁶⁷⁸⁹⁻]+|[\s\S]/gu, (part) => {
+  const escaped = text.replace(/-{2,}|'{2,}|,{2,}|[⁰¹²³⁴⁵⁶⁷⁸⁹⁻]+|[\s\S]/gu, (part) => {
     if (RAISED.includes(part[0])) return `$^{${[...part].map((c) => LEVEL[RAISED.indexOf(c)]).join('')}}$`;
     if (part.length > 1 && /^[-',]/.test(part)) return typed ? apart(part) : part;
     return SPECIALS[part] ?? part;
   });
+  // ?` and !` would be set as ¿ and ¡.
+  return escaped.replace(/([?!])`/g, '$1{}`');
 }

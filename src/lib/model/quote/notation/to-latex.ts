@@ -26,9 +26,9 @@ function latexSpan(span: Span): string {
   }
 }
 
-/** Long words for machines may break after every sixteenth sign, without a hyphen, which would look like a part. */
+/** Long words for machines may break after every eighth sign, without a hyphen, which would look like a part. */
 export const latexCode = (text: string): string =>
-  `\\texttt{${(text.match(/.{1,16}/gsu) ?? []).map((part) => escapeLatex(part)).join('\\allowbreak{}')}}`;
+  `\\texttt{${(text.match(/.{1,8}/gsu) ?? []).map((part) => escapeLatex(part)).join('\\allowbreak{}')}}`;
 
 function latexNumber({ negative, digits, power }: QuotedNumber): string {
   const times = power === null ? '' : ` \\times 10^{${power}}`;

@@ -33,7 +33,9 @@ const atTheEnd = ({ tests, engine }: Quotable): number =>
 function trials(quotable: Quotable): Words {
   const tested = testedTrials(quotable);
   if (tested === null) return [text('with an unknown number of trials')];
+  const many = tested === 1 ? '' : 's';
+  const each = quotable.data.shots === 1 ? '' : ' each';
   return quotable.data.unit === 'pair'
-    ? words`of ${equation('N/2', '=', asGiven(tested))} possible pairs each`
-    : words`of ${equation('N', '=', asGiven(tested))} trials each`;
+    ? words`of ${equation('N/2', '=', asGiven(tested))} possible pair${many}${each}`
+    : words`of ${equation('N', '=', asGiven(tested))} trial${many}${each}`;
 }

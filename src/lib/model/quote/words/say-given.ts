@@ -37,7 +37,7 @@ function trials(quotable: Quotable): Words {
   const tested = testedTrials(quotable);
   if (tested === null)
     return words`${on}; the number of trials in a shot was taken as unknown${data.unit === 'pair' ? ', and defects were counted in pairs' : ''}`;
-  const given = words`${on}, each of ${equation('N', '=', asGiven(data.trials!))} trials`;
+  const given = words`${on}, ${data.shots === 1 ? '' : 'each '}of ${equation('N', '=', asGiven(data.trials!))} trial${data.trials === 1 ? '' : 's'}`;
   return data.unit === 'pair'
     ? words`${given}; defects come in pairs, so the number of pairs out of ${whole(tested)} was tested`
     : given;

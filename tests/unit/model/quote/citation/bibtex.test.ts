@@ -90,4 +90,4 @@ describe('a BibTeX entry', () => {
   });
 });
 
-const broken = (hex: string) => `\\texttt{${hex.match(/.{16}/g)!.join('\\allowbreak{}')}}`;
+const broken = (hex: string) => `\\texttt{${hex.match(/.{8}/g)!.join('\\allowbreak{}')}}`;
