@@ -111,7 +111,7 @@ describe('the words of every fixture', () => {
   });
 
   it('hold no number that is not the document’s', () => {
-    const always = [95, 5, 100, 50, 1, 2, 10, 1e-6, 1934, 1936, 1956, 1978, 1979, 1991, 1993, 1994, 1997];
+    const always = [95, 5, 100, 50, 1, 2, 10, 1934, 1936, 1956, 1978, 1979, 1991, 1993, 1994, 1997];
     for (const { name, document } of documents) {
       const { resamples, tolerance } = document.engine;
       const { smallestExcess } = document.answer;

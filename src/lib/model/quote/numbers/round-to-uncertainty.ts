@@ -21,9 +21,10 @@ const DIGITS_HELD = 15;
  *
  * The usual rule of two digits for an expanded uncertainty, JCGM 100:2008 (GUM) 7.2.6, which knows no asymmetric
  * ones. An asymmetric interval has half of its whole width for this, and its shorter side where the other is more
- * than ten times as long (24.5 in 5 … 25 000 would else be 0); with one limit alone, its distance from the value. Without limits, or with limits
- * equal to the value, the value keeps four digits. All three share one power of ten, that of the value (of the
- * farther limit when the value rounds to 0), from 1e9 on and under 1e-4.
+ * than ten times as long (24.5 in 5 … 25 000 would else be 0); with one limit alone, or the value at the other, its
+ * distance from the value. Without limits, or with limits equal to the value, the value keeps four digits. All three
+ * share one power of ten, that of the value (of the farther limit when the value rounds to 0), from 1e9 on and under
+ * 1e-4.
  *
  * A value closer to 0 than half a step is printed as 0 without a sign: the digits cannot carry it.
  *
@@ -56,7 +57,9 @@ const SHORTEST = 1e-4;
 function halfWidth(value: number, low: number | null, high: number | null): number {
   if (low !== null && high !== null) {
     const [shorter, longer] = [value - low, high - value].sort((a, b) => a - b);
-    const lopsided = shorter > 0 && longer > LOPSIDED * shorter;
+    // A value at the very end of its interval has one side alone.
+    if (shorter <= 0) return longer;
+    const lopsided = longer > LOPSIDED * shorter;
     return lopsided ? Math.max(shorter, SHORTEST * longer) : (high - low) / 2;
   }
   if (high !== null) return high - value;

@@ -45,7 +45,7 @@ describe('rounding to the uncertainty', () => {
       [2.2e-5, 0.4e-5, 9.6e-5],
       ['2.2 × 10⁻⁵', '0.4 × 10⁻⁵', '9.6 × 10⁻⁵']
     ],
-    ['small, and the value 0', [0, 0, 1.26e-5], ['0', '0', '1.26 × 10⁻⁵']],
+    ['small, and the value 0', [0, 0, 1.26e-5], ['0', '0', '1.3 × 10⁻⁵']],
     ['large', [2.5e12, 2.4e12, 2.6e12], ['2.50 × 10¹²', '2.40 × 10¹²', '2.60 × 10¹²']],
     [
       'digits that a double does not hold',
@@ -67,6 +67,7 @@ describe('rounding to the uncertainty', () => {
 function deciding({ value, low, high }: Interval): number {
   const down = value! - low!;
   const up = high! - value!;
+  if (down === 0 || up === 0) return high! - low!;
   if (down > 0 && up > 10 * down) return Math.max(down, up / 10_000);
   if (up > 0 && down > 10 * up) return Math.max(up, down / 10_000);
   return (high! - low!) / 2;
