@@ -1,6 +1,7 @@
 import { building } from '$app/environment';
 import { database } from '$lib/server/application';
 import { issuerFormAction } from '$lib/server/handles/issuer-form-action';
+import { preloadFonts } from '$lib/server/handles/preload-fonts';
 import { reportError } from '$lib/server/handles/report-error';
 import { securityHeaders } from '$lib/server/handles/security-headers';
 import { storageTroubleStatus } from '$lib/server/handles/storage-trouble-status';
@@ -18,7 +19,8 @@ export const handle = sequence(
   storageTroubleStatus,
   issuerFormAction,
   withDatabase,
-  withPerson
+  withPerson,
+  preloadFonts
 );
 
 export const handleError = reportError;
