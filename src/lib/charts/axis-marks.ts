@@ -32,12 +32,22 @@ export function bottomAxis(frame: Frame, ticks: Tick[], title: string, size: num
   ];
 }
 
-/** Axis at the left of the frame: ticks, labels, hairlines across, and its title level above the frame. */
-export function leftAxis(frame: Frame, ticks: Tick[], title: string, size: number): Mark[] {
+/**
+ * Axis at the left of the frame: ticks, labels, hairlines across, and its title level above the frame.
+ * @param exponent power of ten that was taken out of the labels (scaled-texts.ts), told in the title
+ */
+export function leftAxis(frame: Frame, ticks: Tick[], title: string, size: number, exponent = 0): Mark[] {
+  const at = { x: 0, y: frame.top - size * 0.9 };
+  const named: Mark = exponent
+    ? {
+        ...caption(`${title}, in 10`, at.x, at.y, 'start', size),
+        raised: String(exponent).replace('-', '\u2212')
+      }
+    : caption(title, at.x, at.y, 'start', size);
   const across = ticks.map(({ at }) => `M${frame.left},${at.toFixed(2)}H${frame.right}`).join('');
   return [
     { kind: 'path', role: 'grid', d: across },
     ...ticks.map((tick) => label(tick, { x: frame.left - 8, y: tick.at + size * 0.35, anchor: 'end' }, size)),
-    ...(title ? [caption(title, 0, frame.top - size * 0.9, 'start', size)] : [])
+    ...(title ? [named] : [])
   ];
 }

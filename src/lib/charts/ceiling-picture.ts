@@ -71,13 +71,14 @@ export function ceilingPicture(diagnosis: Diagnosis, { width, text }: Size): Pic
   return {
     width,
     height,
+    build: 'lines',
     marks,
     legend: [
       { role: look.point, label: 'variance over ceiling, with its 95 % interval' },
       { role: 'bound', label: 'no independent trials beyond this edge' }
     ],
     order: 'across',
-    readings: value === null ? [] : [{ x: x(value), y, words: ceilingWords(diagnosis) }],
+    readings: value === null ? [] : [{ x: x(value), y, words: () => ceilingWords(diagnosis) }],
     notes: []
   };
 

@@ -1,18 +1,16 @@
 import type { ScaleLinear } from 'd3-scale';
 import type { Tick } from './picture';
+import { roomyTicks } from './roomy-ticks';
 import { tickTexts } from './tick-texts';
 
 /**
  * Ticks of an axis of counts, at whole counts only; the lump's tick reads "10+".
- * @param room picture units that one label needs
+ * @param text height of the letters, picture units
  */
-export function countTicks(scale: ScaleLinear<number, number>, room: number, lump: number | null): Tick[] {
-  const [left, right] = scale.range();
-  const most = Math.max(2, Math.floor((right - left) / room));
-  const values = scale.ticks(most).filter(Number.isInteger);
-  const near = lump === null ? values : values.filter((v) => Math.abs(scale(v) - scale(lump)) >= room);
-  const texts = tickTexts(near);
-  const ticks = near.map((value, i) => ({ at: scale(value), text: texts[i] }));
-  if (lump !== null) ticks.push({ at: scale(lump), text: `${tickTexts([lump])[0]}+` });
-  return ticks;
+export function countTicks(scale: ScaleLinear<number, number>, text: number, lump: number | null): Tick[] {
+  const last = lump === null ? null : { at: scale(lump), text: `${tickTexts([lump])[0]}+` };
+  const ticks = roomyTicks(scale, text, Number.isInteger);
+  if (last === null) return ticks;
+  const room = (tick: Tick) => (tick.text.length + last.text.length) * 0.3 * text + 0.7 * text;
+  return [...ticks.filter((tick) => Math.abs(tick.at - last.at) >= room(tick)), last];
 }

@@ -59,11 +59,12 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
       )
     },
     ...residualMarks(groups, x, below, text),
-    ...bottomAxis(below, countTicks(x, text * 4, lump ? lump.from : null), countTitle(diagnosis), text)
+    ...bottomAxis(below, countTicks(x, text, lump ? lump.from : null), countTitle(diagnosis), text)
   ];
   return {
     width,
     height,
+    build: 'field-and-strip',
     marks,
     legend: [
       { role: 'observed', label: 'seen, with its 95 % interval' },
@@ -71,7 +72,11 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
       ...legendOfStanding(points)
     ],
     order: 'across',
-    readings: points.map((p) => ({ x: x(p.count), y: y(p.observed), words: distributionWords(p, shots) })),
+    readings: points.map((p) => ({
+      x: x(p.count),
+      y: y(p.observed),
+      words: () => distributionWords(p, shots)
+    })),
     notes: together > 1 ? [thinnedNote(together)] : []
   };
 }

@@ -30,6 +30,9 @@ const LOOKS: Record<Role, Look> = {
   'range-fewer': line('verdigris', 3),
   unseen: line('faint', 1),
   fitted: line('ink', 1.75),
+  // The fitted law where it is a point and not a line.
+  law: { stroke: 'ink', fill: 'paper', width: 1.75, dash: [] },
+  corner: line('faint', 1.5),
   limit: line('ink', 1.5, [7, 4]),
   gaussian: line('faint', 1),
   'mean-bound': line('faint', 1.25, [2, 3]),

@@ -1,3 +1,4 @@
+import { crossPath } from './cross-path';
 import { hatchEdge } from './hatch-edge';
 import { intervalPath } from './interval-path';
 import type { Mark, Role } from './picture';
@@ -44,6 +45,8 @@ export function legendSample(role: Role, left = 0, top = 0): Mark[] {
     const box = { left, right, top, bottom: top + SAMPLE.height };
     return [{ kind: 'path', role, d: ruledShade(box, box.top, box.bottom) }];
   }
+  if (role === 'law') return [{ kind: 'path', role, d: pointPath([[centre, middle]], 'dot', 8) }];
+  if (role === 'corner') return [{ kind: 'path', role, d: crossPath(centre, middle) }];
   // Upright and of the height that the tests chart draws it.
   if (role === 'smallest') return [{ kind: 'path', role, d: `M${centre},${middle - 6}V${middle + 6}` }];
   const line: Mark = { kind: 'path', role, d: `M${left},${middle}H${right}` };

@@ -16,6 +16,8 @@ export type Role =
   | 'range-fewer'
   | 'unseen'
   | 'fitted'
+  | 'law'
+  | 'corner'
   | 'limit'
   | 'gaussian'
   | 'mean-bound'
@@ -55,7 +57,8 @@ export type Mark = PathMark | TextMark;
 export interface Reading {
   x: number;
   y: number;
-  words: string;
+  /** Made when it is asked for: of 10 000 counts a person hears a few. */
+  words: () => string;
 }
 
 export interface LegendEntry {
@@ -63,10 +66,14 @@ export interface LegendEntry {
   label: string;
 }
 
+/** How the height of a picture follows from its width and letters: the page keeps that room free (Drawing.svelte). */
+export type Build = 'field' | 'field-and-strip' | 'lines';
+
 /** A chart as plain geometry: page, SVG, PNG and PDF draw the same marks. */
 export interface Picture {
   width: number;
   height: number;
+  build: Build;
   marks: Mark[];
   legend: LegendEntry[];
   readings: Reading[];

@@ -1,6 +1,7 @@
 import type { Diagnosis, RatePoint } from '$lib/stats/types';
 import { scaleLinear } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
+import { countTicks } from './count-ticks';
 import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
 import { horizonMarks } from './horizon-marks';
@@ -9,9 +10,10 @@ import { linePath } from './line-path';
 import type { Mark, Picture, Point, Size } from './picture';
 import { ratePoints } from './rate-points';
 import { rateWords } from './rate-words';
+import { roomyTicks } from './roomy-ticks';
+import { scaledTexts } from './scaled-texts';
 import { shownSpan } from './shown-span';
 import { thinnedNote } from './thinned-marks';
-import { tickTexts } from './tick-texts';
 
 /** Rate function: seen rates with intervals, finite-N law, its limit, the Gaussian, and the shot horizon. */
 export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Picture {
@@ -42,17 +44,16 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
 
   const groups = groupCounts(points, x(perCount) - x(0), 5);
   const rates = y.ticks(5);
-  const xs = x.ticks(Math.max(2, Math.floor((frame.right - frame.left) / (text * 5))));
-  const whole = data.trials === null ? xs.filter(Number.isInteger) : xs;
-  const [rateTexts, xTexts] = [tickTexts(rates), tickTexts(whole)];
+  const { texts, exponent } = scaledTexts(rates);
   const horizon = horizonMarks(diagnosis, points, at, y, frame, text);
   const marks: Mark[] = [
     ...horizon.filter((mark) => mark.kind === 'path'),
     ...leftAxis(
       frame,
-      rates.map((v, i) => ({ at: y(v), text: rateTexts[i] })),
+      rates.map((v, i) => ({ at: y(v), text: texts[i] })),
       rateTitle(diagnosis),
-      text
+      text,
+      exponent
     ),
     { kind: 'path', role: 'gaussian', d: curve((point) => point.gaussian) },
     { kind: 'path', role: 'limit', d: curve((point) => point.limit) },
@@ -61,7 +62,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
     ...horizon.filter((mark) => mark.kind === 'text'),
     ...bottomAxis(
       frame,
-      whole.map((v, i) => ({ at: x(v), text: xTexts[i] })),
+      data.trials === null ? countTicks(x, text, null) : roomyTicks(x, text),
       densityTitle(diagnosis),
       text
     )
@@ -69,6 +70,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
   return {
     width,
     height,
+    build: 'field',
     marks,
     legend: [
       { role: 'observed', label: 'seen, with its 95 % interval' },
@@ -83,7 +85,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
     readings: points.map((point) => ({
       x: at(point),
       y: y(Math.min(top, point.empirical ?? point.low)),
-      words: rateWords(point, rate.scale)
+      words: () => rateWords(point, rate.scale)
     })),
     notes: groups[0].length > 1 ? [thinnedNote(groups[0].length)] : []
   };

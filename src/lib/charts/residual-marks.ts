@@ -7,7 +7,7 @@ import type { Frame, Mark, Point } from './picture';
 import { residualOf } from './residual-of';
 import { standing } from './standing';
 import { thinnedMarks } from './thinned-marks';
-import { tickTexts } from './tick-texts';
+import { residualTicks } from './residual-ticks';
 
 /** The strip under the counts: distance of each from the law, with the band that an interval spans. */
 export function residualMarks(
@@ -19,12 +19,9 @@ export function residualMarks(
   const points = groups.flat();
   const far = Math.max(1.6, ...points.map((point) => Math.abs(residualOf(point))));
   const y = scaleLinear([-far, far], [frame.bottom - 4, frame.top + 4]);
-  const step = far > 4 ? Math.ceil(far / 2) : 1;
-  const values = far > 4 ? [-step, 0, step] : [-1, 0, 1];
-  const labels = tickTexts(values);
   const axis = leftAxis(
     frame,
-    values.map((value, i) => ({ at: y(value), text: labels[i] })),
+    residualTicks(far).map(({ at, ...label }) => ({ at: y(at), ...label })),
     'off the law, in half-intervals',
     text
   );

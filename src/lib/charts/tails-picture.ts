@@ -45,7 +45,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
     ...groups.flatMap((side) => tailPoints(side, x, floor, frame)),
     ...bottomAxis(
       frame,
-      countTicks(x, text * 4, null),
+      countTicks(x, text, null),
       `n ${unit === 'pair' ? 'pairs' : 'defects'} or fewer; n or more`,
       text
     )
@@ -53,6 +53,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
   return {
     width,
     height,
+    build: 'field',
     marks,
     legend: [
       { role: 'observed', label: 'seen in the tail, with its 95 % interval' },
@@ -66,7 +67,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
     readings: points.map((point) => ({
       x: x(point.count),
       y: Math.min(frame.bottom, floor(point.observed)),
-      words: tailWords(point, shots)
+      words: () => tailWords(point, shots)
     })),
     notes: together > 1 ? [thinnedNote(together)] : []
   };

@@ -1,57 +1,70 @@
-import type { Diagnosis, TestId, TestResult } from '$lib/stats/types';
+import type { Diagnosis, TestId } from '$lib/stats/types';
 import { scaleLog } from 'd3-scale';
 import { bottomAxis } from './axis-marks';
-import { formatNumber } from '$lib/model/format-number';
+import { flagRows, testRows, type ForestRow } from './forest-rows';
 import { frameOf } from './frame-of';
-import { sayHowOften } from '$lib/model/say-p';
-import type { Mark, Picture, Size, Tick } from './picture';
-import { pointPath } from './point-path';
+import type { LegendEntry, Mark, Picture, Role, Size, TextMark, Tick } from './picture';
+import { pointPath, type Shape } from './point-path';
 import { powerTick } from './power-tick';
 
-/** Tests as lines of a scale: how surprising each is by itself, and when all are allowed for. */
+const LOOKS: Record<ForestRow['kind'], { point: Role; interval: Role; shape: Shape; size: number }> = {
+  within: { point: 'observed', interval: 'interval', shape: 'dot', size: 7 },
+  more: { point: 'observed-more', interval: 'interval-more', shape: 'up', size: 10 },
+  fewer: { point: 'observed-fewer', interval: 'interval-fewer', shape: 'down', size: 10 },
+  unsure: { point: 'observed-unsure', interval: 'interval-unsure', shape: 'diamond', size: 10 }
+};
+
+/** Tests and the flags they raise as lines of one scale: how surprising each is alone, and when all are allowed for. */
 export function testsPicture(
   diagnosis: Diagnosis,
   { width, text }: Size,
   names: Record<TestId, string>
 ): Picture {
-  const { tests, engine } = diagnosis;
+  const { alpha } = diagnosis.engine;
+  const [tests, flags] = [testRows(diagnosis, names), flagRows(diagnosis, names)];
+  const rows = [...tests, ...flags];
   const row = text * 2.1;
-  const longest = Math.max(0, ...tests.map(({ id }) => names[id].length));
-  const frame = frameOf(width, text * 2.6 + row * tests.length + text * 3.6, {
-    left: Math.min(width * 0.45, longest * text * 0.54 + text),
-    // Half of the last label, such as 0.001 or 10 with a raised number.
-    right: text * 1.9,
-    top: text * 2.6,
-    bottom: text * 3.6
-  });
+  const apart = flags.length ? row : 0;
+  const longest = Math.max(0, ...rows.map(({ label }) => label.length));
+  const top = text * 2.6;
+  const frame = {
+    ...frameOf(width, 0, {
+      left: Math.min(width * 0.5, longest * text * 0.54 + text),
+      // Half of the last label, such as 0.001 or 10 with a raised number.
+      right: text * 1.9,
+      top,
+      bottom: 0
+    }),
+    bottom: top + Math.max(row * rows.length + apart, 40)
+  };
   const least = Math.min(
-    engine.alpha,
-    ...tests.flatMap(({ p, smallestP }) => [p, smallestP].filter((v) => v > 0))
+    alpha,
+    ...rows.flatMap(({ at, from, smallest }) => [at, from, smallest].filter((v) => v !== null && v > 0))
   );
   const deepest = Math.max(-300, Math.floor(Math.log10(least) - 0.05));
   const x = scaleLog([1, 10 ** deepest], [frame.left + 4, frame.right]);
   const at = (p: number): number => Math.min(frame.right, x(Math.max(p, 10 ** deepest)));
-  const middle = (i: number): number => frame.top + row * (i + 0.5);
+  const middle = (i: number): number => top + row * (i + 0.5) + (i < tests.length ? 0 : apart);
+  const label = (words: string, y: number, ink: TextMark['ink'], x = 0): Mark => {
+    const place = { x, y: y + text * 0.35, anchor: 'start' } as const;
+    return { kind: 'text', ...place, text: words, ink, face: 'text', size: text };
+  };
 
+  const lines = rows.map((_, i) => `M${frame.left},${middle(i).toFixed(2)}H${frame.right}`).join('');
   const marks: Mark[] = [
-    {
-      kind: 'path',
-      role: 'grid',
-      d: tests.map((_, i) => `M${frame.left},${middle(i)}H${frame.right}`).join('')
-    },
-    { kind: 'path', role: 'level', d: `M${at(engine.alpha).toFixed(2)},${frame.top - 4}V${frame.bottom}` },
-    levelLabel(`level ${engine.alpha}`, at(engine.alpha), frame.right, text),
-    ...tests.map(({ id }, i): Mark => ({
-      kind: 'text',
-      x: 0,
-      y: middle(i) + text * 0.35,
-      text: names[id],
-      anchor: 'start',
-      ink: 'ink',
-      face: 'text',
-      size: text
-    })),
-    ...tests.flatMap((test, i) => testMarks(test, engine.alpha, at, middle(i))),
+    { kind: 'path', role: 'grid', d: lines },
+    { kind: 'path', role: 'level', d: `M${at(alpha).toFixed(2)},${top - 4}V${frame.bottom}` },
+    levelLabel(`level ${alpha}`, at(alpha), frame.right, text),
+    ...rows.map((one, i) => label(one.label, middle(i), 'ink')),
+    ...(flags.length ? [label('what they point to', middle(tests.length) - row, 'faint')] : []),
+    ...rows.flatMap((one, i): Mark[] =>
+      one.at === null
+        ? [
+            ...rowMarks(one, () => frame.left + 8, middle(i)),
+            label(one.instead, middle(i), 'faint', frame.left + 20)
+          ]
+        : rowMarks(one, at, middle(i))
+    ),
     ...bottomAxis(
       frame,
       decades(deepest, x, frame.right - frame.left, text),
@@ -62,45 +75,50 @@ export function testsPicture(
   return {
     width,
     height: frame.bottom + text * 3.6,
+    build: 'lines',
     marks,
-    legend: [
-      { role: 'observed', label: 'p, all tests allowed for' },
-      { role: 'interval', label: 'from p of the test by itself' },
-      { role: 'smallest', label: 'smallest p it could show' }
-    ],
+    legend: legendOf(rows),
     order: 'down',
-    readings: tests.map((test, i) => ({ x: at(test.pAdjusted), y: middle(i), words: wordsOf(test, names) })),
+    readings: rows.map((one, i) => ({
+      x: one.at === null ? frame.left + 8 : at(one.at),
+      y: middle(i),
+      words: one.words
+    })),
     notes: []
   };
 }
 
-function testMarks(test: TestResult, alpha: number, at: (p: number) => number, y: number): Mark[] {
-  const shown = test.pAdjusted <= alpha;
-  const [from, to, limit] = [at(test.p), at(test.pAdjusted), at(test.smallestP)].map((v) => v.toFixed(2));
+function rowMarks(row: ForestRow, at: (p: number) => number, y: number): Mark[] {
+  const look = LOOKS[row.kind];
+  const [from, to] = [at(row.from ?? 1), at(row.at ?? 1)];
+  const marks: Mark[] = [{ kind: 'path', role: look.point, d: pointPath([[to, y]], look.shape, look.size) }];
+  if (row.smallest !== null)
+    marks.unshift({ kind: 'path', role: 'smallest', d: `M${at(row.smallest).toFixed(2)},${y - 6}V${y + 6}` });
+  if (from !== to)
+    marks.unshift({ kind: 'path', role: look.interval, d: `M${from.toFixed(2)},${y}H${to.toFixed(2)}` });
+  return marks;
+}
+
+function legendOf(rows: ForestRow[]): LegendEntry[] {
+  const labels: [ForestRow['kind'], string][] = [
+    ['more', 'speaks against independent trials'],
+    ['unsure', 'hinted at: cannot tell yet'],
+    ['fewer', 'more regular: a remark'],
+    ['within', 'p, all tests allowed for']
+  ];
   return [
-    { kind: 'path', role: shown ? 'interval-more' : 'interval', d: `M${from},${y}H${to}` },
-    { kind: 'path', role: 'smallest', d: `M${limit},${y - 6}V${y + 6}` },
-    {
-      kind: 'path',
-      role: shown ? 'observed-more' : 'observed',
-      d: pointPath([[at(test.pAdjusted), y]], shown ? 'up' : 'dot', shown ? 10 : 7)
-    }
+    ...labels
+      .filter(([kind]) => rows.some((row) => row.kind === kind))
+      .map(([kind, label]) => ({ role: LOOKS[kind].point, label })),
+    { role: 'interval', label: 'from p of the test by itself; of a flag, over its tests' },
+    { role: 'smallest', label: 'smallest p it could show' }
   ];
 }
 
 function levelLabel(label: string, at: number, right: number, text: number): Mark {
   const half = label.length * text * 0.27;
-  const x = Math.min(right - half, at);
-  return {
-    kind: 'text',
-    x,
-    y: text * 1.4,
-    text: label,
-    anchor: 'middle',
-    ink: 'faint',
-    face: 'text',
-    size: text
-  };
+  const place = { x: Math.min(right - half, at), y: text * 1.4 } as const;
+  return { kind: 'text', ...place, text: label, anchor: 'middle', ink: 'faint', face: 'text', size: text };
 }
 
 function decades(deepest: number, x: (p: number) => number, room: number, text: number): Tick[] {
@@ -110,7 +128,3 @@ function decades(deepest: number, x: (p: number) => number, room: number, text: 
     ticks.push({ at: x(10 ** exponent), ...powerTick(exponent) });
   return ticks;
 }
-
-const wordsOf = (test: TestResult, names: Record<TestId, string>): string =>
-  `${names[test.id]}: by itself such a result ${sayHowOften(test.p, test.smallestP)} if defects formed independently ` +
-  `(p = ${formatNumber(test.p, 2)}); with all tests allowed for, p = ${formatNumber(test.pAdjusted, 2)}.`;

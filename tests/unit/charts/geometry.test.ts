@@ -104,9 +104,9 @@ describe('points and intervals', () => {
   });
   it('the nearest reading is nearest across; height decides between neighbours', () => {
     const readings = [
-      { x: 0, y: 0, words: '' },
-      { x: 10, y: 90, words: '' },
-      { x: 10, y: 0, words: '' }
+      { x: 0, y: 0, words: () => '' },
+      { x: 10, y: 90, words: () => '' },
+      { x: 10, y: 0, words: () => '' }
     ];
     expect(nearestReading({ readings, order: 'across' }, 9, 80)).toBe(1);
     expect(nearestReading({ readings, order: 'across' }, 9, 5)).toBe(2);

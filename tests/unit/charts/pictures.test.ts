@@ -1,7 +1,9 @@
 import { ceilingPicture } from '$lib/charts/ceiling-picture';
 import { distributionPicture } from '$lib/charts/distribution-picture';
-import type { Picture, Size } from '$lib/charts/picture';
+import { cumulantsPlace } from '$lib/charts/cumulants-place';
+import type { Picture, Size, TextMark } from '$lib/charts/picture';
 import { ratePicture } from '$lib/charts/rate-picture';
+import { regionPicture } from '$lib/charts/region-picture';
 import { sheetOf } from '$lib/charts/sheet-of';
 import { sheetToSvg } from '$lib/charts/sheet-to-svg';
 import { tailsPicture } from '$lib/charts/tails-picture';
@@ -11,6 +13,7 @@ import type { Diagnosis } from '$lib/stats/types';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { anyDiagnosis, WELDON } from './any-diagnosis';
+import { CASES } from './cases';
 import { coordinates, extent } from './measure';
 
 type Draw = (diagnosis: Diagnosis, size: Size) => Picture;
@@ -19,8 +22,22 @@ const DRAWS: [string, Draw][] = [
   ['rate', ratePicture],
   ['tails', tailsPicture],
   ['ceiling', ceilingPicture],
+  [
+    'region',
+    (diagnosis, size) => {
+      const place = cumulantsPlace(diagnosis);
+      return 'reason' in place ? ceilingPicture(diagnosis, size) : regionPicture(place, size);
+    }
+  ],
   ['tests', (diagnosis, size) => testsPicture(diagnosis, size, TESTS)]
 ];
+
+/** Whether two labels touch: letters reach about 0.7 of their size above the line, and next to nothing below. */
+function overlap(one: TextMark, other: TextMark): boolean {
+  const [a, b] = [extent(one), extent(other)];
+  if (a[1] <= b[0] || b[1] <= a[0]) return false;
+  return one.y - 0.7 * one.size < other.y && other.y - 0.7 * other.size < one.y;
+}
 
 /** What is wrong with a picture: numbers that are none, or marks outside it. A point may reach 7 units over. */
 function faults({ width, height, marks, readings }: Picture): string[] {
@@ -43,10 +60,15 @@ function faults({ width, height, marks, readings }: Picture): string[] {
     for (const value of x) look(`${mark.role} x`, value, width);
     for (const value of y) look(`${mark.role} y`, value, height);
   }
+  const texts = marks.filter((mark) => mark.kind === 'text');
+  texts.forEach((one, i) => {
+    for (const other of texts.slice(i + 1))
+      if (overlap(one, other)) list.push(`“${one.text}” over “${other.text}”`);
+  });
   for (const { x, y, words } of readings) {
     look('reading x', x, width);
     look('reading y', y, height);
-    if (/NaN|undefined|null|Infinity/.test(words)) list.push(words);
+    if (/NaN|undefined|null|Infinity/.test(words())) list.push(words());
   }
   return [...new Set(list)];
 }
@@ -55,75 +77,6 @@ const faultsOf = (diagnosis: Diagnosis, width: number): string[] =>
   DRAWS.flatMap(([name, draw]) =>
     faults(draw(diagnosis, { width, text: 13 })).map((fault) => `${name}: ${fault}`)
   );
-
-const CASES: [string, () => Promise<Diagnosis>][] = [
-  ['Weldon’s dice', () => anyDiagnosis(WELDON, { trials: 12 })],
-  ['a closing lump', () => anyDiagnosis(WELDON.slice(0, 10), { trials: 12 }, { from: 10, shots: 18 })],
-  [
-    'N unknown',
-    () =>
-      anyDiagnosis([
-        [0, 447],
-        [1, 132],
-        [2, 42],
-        [3, 21],
-        [4, 3],
-        [5, 2]
-      ])
-  ],
-  ['one shot', () => anyDiagnosis([[3, 1]], { trials: 12 })],
-  ['one count', () => anyDiagnosis([[3, 700]], { trials: 12 })],
-  ['only empty shots', () => anyDiagnosis([[0, 40]], { trials: 5 })],
-  ['every trial in every shot', () => anyDiagnosis([[5, 40]], { trials: 5 })],
-  [
-    'one trial',
-    () =>
-      anyDiagnosis(
-        [
-          [0, 30],
-          [1, 70]
-        ],
-        { trials: 1 }
-      )
-  ],
-  [
-    'pairs',
-    () =>
-      anyDiagnosis(
-        [
-          [0, 300],
-          [2, 420],
-          [4, 210],
-          [6, 61],
-          [8, 9]
-        ],
-        { trials: 40, unit: 'pair' }
-      )
-  ],
-  [
-    '2^40 shots',
-    () =>
-      anyDiagnosis(
-        [
-          [0, 2 ** 38],
-          [1, 2 ** 39],
-          [2, 2 ** 38]
-        ],
-        { trials: 2 }
-      )
-  ],
-  [
-    'far counts',
-    () =>
-      anyDiagnosis(
-        [
-          [2, 50],
-          [900, 1]
-        ],
-        { trials: 1000 }
-      )
-  ]
-];
 
 describe('every chart', () => {
   it.each(CASES)('of %s is finite and inside its frame, narrow and wide', async (_name, make) => {

@@ -1,11 +1,14 @@
 import { alignedColumn } from '$lib/charts/aligned-column';
 import { powerTick } from '$lib/charts/power-tick';
+import { residualTicks } from '$lib/charts/residual-ticks';
+import { roomyTicks } from '$lib/charts/roomy-ticks';
 import { sayShare } from '$lib/charts/say-share';
-import { spacedTicks } from '$lib/charts/spaced-ticks';
+import { scaledTexts } from '$lib/charts/scaled-texts';
 import { splitRaised } from '$lib/charts/split-raised';
 import { tableToCsv } from '$lib/charts/table-to-csv';
 import { tickTexts } from '$lib/charts/tick-texts';
 import { wrapped } from '$lib/charts/wrapped';
+import { scaleLinear } from 'd3-scale';
 import { describe, expect, it } from 'vitest';
 
 describe('numbers on axes and in tables', () => {
@@ -56,8 +59,26 @@ describe('numbers on axes and in tables', () => {
     expect(wrapped('one two three', 7)).toEqual(['one two', 'three']);
     expect(wrapped('unbreakable x', 4)).toEqual(['unbreakable', 'x']);
   });
-  it('ticks that would touch give way', () => {
-    expect(spacedTicks([0, 1, 2, 3], (v) => v * 10, 15)).toEqual([0, 2]);
+  it('ticks that would touch give way, in round steps', () => {
+    const texts = (domain: [number, number], width: number) =>
+      roomyTicks(scaleLinear(domain, [0, width]), 13).map(({ text }) => text);
+    expect(texts([0, 4], 260)).toEqual(['0', '1', '2', '3', '4']);
+    expect(texts([0, 999_996], 180)).toEqual(['0', '500\u2009000']);
+    expect(texts([0, 1e6], 180)).toEqual(['0', '500\u2009000']);
+  });
+  it('labels too long for their margin leave a power of ten to the title', () => {
+    expect(scaledTexts([0, 0.00005, 0.0001])).toEqual({ texts: ['0.0', '0.5', '1.0'], exponent: -4 });
+    expect(scaledTexts([0, 100_000, 200_000])).toEqual({ texts: ['0', '1', '2'], exponent: 5 });
+    expect(scaledTexts([0, 0.5, 1])).toEqual({ texts: ['0.0', '0.5', '1.0'], exponent: 0 });
+  });
+  it('residuals have a round step to either side, as a power where they are large', () => {
+    expect(residualTicks(1.6).map(({ text }) => text)).toEqual(['\u22121', '0', '1']);
+    expect(residualTicks(97).map(({ at }) => at)).toEqual([-50, 0, 50]);
+    expect(residualTicks(2.3e6)).toEqual([
+      { at: -2e6, text: '\u22122×10', raised: '6' },
+      { at: 0, text: '0' },
+      { at: 2e6, text: '2×10', raised: '6' }
+    ]);
   });
 });
 

@@ -1,0 +1,123 @@
+import type { Diagnosis } from '$lib/stats/types';
+import { anyDiagnosis, WELDON } from './any-diagnosis';
+
+/** Counts that are hard to draw, by name. */
+export const CASES: [string, () => Promise<Diagnosis>][] = [
+  ['Weldon’s dice', () => anyDiagnosis(WELDON, { trials: 12 })],
+  ['a closing lump', () => anyDiagnosis(WELDON.slice(0, 10), { trials: 12 }, { from: 10, shots: 18 })],
+  [
+    'N unknown',
+    () =>
+      anyDiagnosis([
+        [0, 447],
+        [1, 132],
+        [2, 42],
+        [3, 21],
+        [4, 3],
+        [5, 2]
+      ])
+  ],
+  ['one shot', () => anyDiagnosis([[3, 1]], { trials: 12 })],
+  ['one count', () => anyDiagnosis([[3, 700]], { trials: 12 })],
+  ['only empty shots', () => anyDiagnosis([[0, 40]], { trials: 5 })],
+  ['every trial in every shot', () => anyDiagnosis([[5, 40]], { trials: 5 })],
+  [
+    'one trial',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 30],
+          [1, 70]
+        ],
+        { trials: 1 }
+      )
+  ],
+  [
+    'pairs',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 300],
+          [2, 420],
+          [4, 210],
+          [6, 61],
+          [8, 9]
+        ],
+        { trials: 40, unit: 'pair' }
+      )
+  ],
+  [
+    '2^40 shots',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 2 ** 38],
+          [1, 2 ** 39],
+          [2, 2 ** 38]
+        ],
+        { trials: 2 }
+      )
+  ],
+  [
+    'N = 2',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 30],
+          [1, 50],
+          [2, 20]
+        ],
+        { trials: 2 }
+      )
+  ],
+  [
+    'residuals in the hundred thousands',
+    () =>
+      anyDiagnosis(
+        [
+          [0, 2 ** 38],
+          [1, 2 ** 36],
+          [2, 2 ** 39]
+        ],
+        { trials: 2 }
+      )
+  ],
+  [
+    'N = 2000',
+    () =>
+      anyDiagnosis(
+        [
+          [900, 30],
+          [1000, 50],
+          [1100, 20]
+        ],
+        { trials: 2000 }
+      )
+  ],
+  ['counts to a million', async () => stretched(await anyDiagnosis(WELDON, { trials: 12 }), 83_333)],
+  [
+    'far counts',
+    () =>
+      anyDiagnosis(
+        [
+          [2, 50],
+          [900, 1]
+        ],
+        { trials: 1000 }
+      )
+  ]
+];
+
+/** The same document with every count and N so many times as large: labels are long, and nothing else is odd. */
+function stretched(document: Diagnosis, times: number): Diagnosis {
+  const { data, distribution, rate, tails } = document;
+  const wide = <T extends { count: number }>(points: T[]) =>
+    points.map((point) => ({ ...point, count: point.count * times }));
+  return {
+    ...document,
+    data: { ...data, trials: data.trials && data.trials * times },
+    distribution: wide(distribution),
+    rate: { ...rate, points: wide(rate.points) },
+    tails: { ...tails, points: wide(tails.points) }
+  };
+}
