@@ -3,11 +3,14 @@ import { sourceLine } from '$lib/model/report/source-line';
 import type { Diagnosis } from '$lib/stats/types';
 import { ceilingPicture } from './ceiling-picture';
 import { ceilingTitle } from './ceiling-title';
+import { cumulantsPlace } from './cumulants-place';
+import { cumulantsTitle } from './cumulants-title';
 import { distributionPicture } from './distribution-picture';
 import { distributionTitle } from './distribution-title';
 import type { Picture, Size } from './picture';
 import { ratePicture } from './rate-picture';
 import { rateTitle } from './rate-title';
+import { regionPicture } from './region-picture';
 import { sheetOf } from './sheet-of';
 import { sheetToSvg } from './sheet-to-svg';
 import { tailsPicture } from './tails-picture';
@@ -30,6 +33,9 @@ export function chartFiles(diagnosis: Diagnosis, name: string | null): Record<st
     ['tails-and-bounds', tailsTitle(diagnosis), (size) => tailsPicture(diagnosis, size)],
     ['ceiling', ceilingTitle(diagnosis), (size) => ceilingPicture(diagnosis, size)]
   ];
+  const place = cumulantsPlace(diagnosis);
+  if (!('reason' in place))
+    made.push(['cumulants-region', cumulantsTitle(place), (size) => regionPicture(place, size)]);
   if (diagnosis.tests.length > 0)
     made.push(['tests', testsTitle(diagnosis), (size) => testsPicture(diagnosis, size, TESTS)]);
   const source = sourceLine(diagnosis, name);

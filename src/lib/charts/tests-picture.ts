@@ -39,7 +39,7 @@ export function testsPicture(
   };
   const least = Math.min(
     alpha,
-    ...rows.flatMap(({ at, from, smallest }) => [at, from, smallest].filter((v) => v !== null && v > 0))
+    ...rows.flatMap(({ at, from, smallest }) => [at, from, smallest].map((v) => v || 1))
   );
   const deepest = Math.max(-300, Math.floor(Math.log10(least) - 0.05));
   const x = scaleLog([1, 10 ** deepest], [frame.left + 4, frame.right]);

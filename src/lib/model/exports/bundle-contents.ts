@@ -13,6 +13,7 @@ const CHARTS: Record<string, string> = {
   'rate-function': 'the rate function and the shot horizon',
   'tails-and-bounds': 'both tails and the bounds on them',
   ceiling: 'variance and ceiling',
+  'cumulants-region': 'where the cumulants lie, and where those of independent trials can',
   tests: 'the tests'
 };
 

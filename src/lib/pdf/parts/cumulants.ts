@@ -1,11 +1,14 @@
 import { ceilingPicture } from '$lib/charts/ceiling-picture';
 import { ceilingTable } from '$lib/charts/ceiling-table';
 import { ceilingTitle } from '$lib/charts/ceiling-title';
+import { cumulantsPlace } from '$lib/charts/cumulants-place';
 import { cumulantsTable } from '$lib/charts/cumulants-table';
+import { cumulantsTitle } from '$lib/charts/cumulants-title';
+import { regionPicture } from '$lib/charts/region-picture';
 import { formatNumber } from '$lib/model/format-number';
 import { sayCriticalTrials } from '$lib/model/report/say-critical-trials';
 import type { Diagnosis } from '$lib/stats/types';
-import type { MarginNote, Part } from '../blocks/blocks';
+import type { Block, MarginNote, Part } from '../blocks/blocks';
 import { NOTES } from './notes';
 
 /** Cumulants, and the variance against the ceiling that independent trials cannot cross. */
@@ -34,6 +37,7 @@ export function cumulantsPart(document: Diagnosis): Part {
             draw: (size) => ceilingPicture(document, size)
           },
           { kind: 'paragraph', text: sayCriticalTrials(document) },
+          regionBlock(document),
           { kind: 'table', caption: 'Cumulants, with 95 % intervals', table: cumulantsTable(document) },
           {
             kind: 'table',
@@ -45,4 +49,17 @@ export function cumulantsPart(document: Diagnosis): Part {
       }
     ]
   };
+}
+
+/** The counts in the plane of cumulants, or why they have no place in it. */
+function regionBlock(document: Diagnosis): Block {
+  const place = cumulantsPlace(document);
+  return 'reason' in place
+    ? { kind: 'paragraph', text: place.reason }
+    : {
+        kind: 'figure',
+        what: 'Chart of the cumulants that independent trials can reach',
+        title: cumulantsTitle(place),
+        draw: (size) => regionPicture(place, size)
+      };
 }
