@@ -2,6 +2,7 @@ import { digest } from '$lib/stats/input/digest';
 import { toHistogram } from '$lib/stats/input/to-histogram';
 import type { CountData, Histogram } from '$lib/stats/types';
 import { documentCsv } from '../document-csv';
+import { bundleFile } from './bundle-file';
 import type { BundleFile, BundleInput } from './bundle-input';
 import { countsCsv } from './counts-csv';
 import { distributionCsv } from './distribution-csv';
@@ -23,11 +24,7 @@ export function bundleContents(input: BundleInput): BundleFile[] {
   const shots = shotList(input);
   const files: BundleFile[] = [];
   const add = (path: string, what: string, content: string | Uint8Array) =>
-    files.push({
-      path,
-      what,
-      bytes: typeof content === 'string' ? new TextEncoder().encode(content) : content
-    });
+    files.push(bundleFile(path, what, content));
   add(
     'document.json',
     'the report itself, byte for byte as it is kept; everything else follows from it',

@@ -1,7 +1,6 @@
 import { bundleContents, shotList } from './bundle-contents';
 import { bundleReadme } from './bundle-readme';
 import type { BundleInput } from './bundle-input';
-import { fileSha256 } from './file-sha256';
 import { withSums } from './with-sums';
 
 /** A bundle: the folder that everything lies in, and its files by their path in it. */
@@ -16,8 +15,8 @@ export interface Bundle {
  * side do not mix, and names nobody.
  */
 export function bundleFiles(input: BundleInput): Bundle {
-  const folder = `severalty-${fileSha256(new TextEncoder().encode(input.documentText)).slice(0, 12)}`;
   const contents = bundleContents(input);
+  const folder = `severalty-${contents[0].sha256.slice(0, 12)}`;
   const readme = bundleReadme(input, contents, { folder, hasShots: shotList(input) !== null });
   return { folder, files: withSums(readme, contents) };
 }

@@ -26,4 +26,5 @@ export interface BundleFile {
   path: string;
   what: string;
   bytes: Uint8Array;
+  sha256: string;
 }

@@ -2,6 +2,7 @@ import { VERDICTS } from '../labels';
 import { wrap } from '../plain-text/wrap';
 import type { BundleFile, BundleInput } from './bundle-input';
 import { listFiles } from './list-files';
+import { onOneLine } from './on-one-line';
 import { recomputeCommand } from './recompute-command';
 
 /**
@@ -43,9 +44,6 @@ export function bundleReadme(
     bullets(document.cautions)
   ].join('\n\n')}\n`;
 }
-
-/** Names are typed freely: none may begin a line of its own, or turn the direction of writing. */
-const onOneLine = (text: string): string => text.replace(/[\p{Cc}\p{Cf}\s]+/gu, ' ');
 
 const titled = (title: string): string => `${title}\n${'-'.repeat(title.length)}`;
 

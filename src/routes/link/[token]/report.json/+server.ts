@@ -1,4 +1,6 @@
+import { summaryText } from '$lib/model/link/summary-text';
 import { askLinkJson } from '../../../ask-link';
+import { linkFile } from '../link-file';
 import type { RequestHandler } from './$types';
 
 /** The document byte for byte as it is stored, or what is left of it where the link keeps the counts back. */
@@ -6,11 +8,6 @@ export const GET: RequestHandler = (event) => {
   const asked = askLinkJson(event, 'see');
   if (!asked.ok) return asked.response;
   const { content, fileName } = asked.view;
-  const text = content.kind === 'whole' ? content.document : `${JSON.stringify(content.summary, null, 2)}\n`;
-  return new Response(text, {
-    headers: {
-      'content-type': 'application/json',
-      'content-disposition': `attachment; filename="severalty-report.json"; filename*=UTF-8''${encodeURIComponent(fileName)}.json`
-    }
-  });
+  const text = content.kind === 'whole' ? content.document : summaryText(content.summary);
+  return linkFile(text, `${fileName}.json`, 'application/json');
 };
