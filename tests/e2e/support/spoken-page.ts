@@ -1,0 +1,31 @@
+import type { Page } from 'playwright-core';
+
+/** One thing as a screen reader is told of it. */
+export interface Spoken {
+  role: string;
+  name: string;
+  /** Level of a heading. */
+  level: number | null;
+}
+
+/** What the browser tells a screen reader of the page, in reading order, without what it passes over. */
+export async function spokenPage(page: Page): Promise<Spoken[]> {
+  const session = await page.context().newCDPSession(page);
+  const { nodes } = await session.send('Accessibility.getFullAXTree');
+  await session.detach();
+  const byId = new Map(nodes.map((node) => [node.nodeId, node]));
+  const spoken: Spoken[] = [];
+  const walk = (id: string): void => {
+    const node = byId.get(id);
+    if (!node) return;
+    if (!node.ignored)
+      spoken.push({
+        role: String(node.role?.value ?? ''),
+        name: String(node.name?.value ?? '').trim(),
+        level: Number(node.properties?.find(({ name }) => name === 'level')?.value.value) || null
+      });
+    for (const child of node.childIds ?? []) walk(child);
+  };
+  if (nodes.length) walk(nodes[0].nodeId);
+  return spoken;
+}
