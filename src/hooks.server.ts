@@ -1,5 +1,6 @@
 import { building } from '$app/environment';
 import { database } from '$lib/server/application';
+import { apiProblems } from '$lib/server/handles/api-problems';
 import { issuerFormAction } from '$lib/server/handles/issuer-form-action';
 import { preloadFonts } from '$lib/server/handles/preload-fonts';
 import { reportError } from '$lib/server/handles/report-error';
@@ -16,6 +17,7 @@ export const init: ServerInit = () => {
 
 export const handle = sequence(
   securityHeaders,
+  apiProblems,
   storageTroubleStatus,
   issuerFormAction,
   withDatabase,

@@ -20,6 +20,18 @@ describe('route modules', () => {
     expect([...text.matchAll(asks)].length).toBeGreaterThanOrEqual(doors);
   });
 
+  it('of the API ask for a token, just once for each thing, and nothing that a cookie would answer', () => {
+    const api = modules.filter(({ path }) => path.startsWith('src/routes/api/v1/'));
+    expect(api.length).toBeGreaterThan(10);
+    for (const { path, text } of api) {
+      const asked = [...text.matchAll(asks)].map(([, name]) => name);
+      const doors = [...text.matchAll(exported)];
+      const wanted = path.includes('/openapi.json/') ? 'openToAll' : 'askToken';
+      expect(asked, path).toEqual(doors.map(() => wanted));
+      expect(text, path).not.toMatch(/locals\.person|cookies/);
+    }
+  });
+
   it('of a team never say that they are open to all', () => {
     for (const { path, text } of modules) {
       if (path.includes('/team/')) expect(text, path).not.toMatch(/openToAll\(/);

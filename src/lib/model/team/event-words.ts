@@ -20,6 +20,9 @@ interface Words {
 const role = (value: unknown) => ROLE_WORDS[value as Role]?.article ?? String(value);
 const many = (n: unknown, one: string) => `${String(n)} ${one}${n === 1 ? '' : 's'}`;
 
+/** A script acts for who made its token: both are told. */
+const byScript = (detail: EventFacts['detail']) => (detail.script ? ` by the script “${detail.script}”` : '');
+
 /** Every action that is recorded, one line each. */
 const SENTENCES: Record<string, Words> = {
   'team.make': { label: 'team made', say: ({ who }) => `${who} made the team` },
@@ -68,7 +71,19 @@ const SENTENCES: Record<string, Words> = {
     label: 'invitation accepted',
     say: ({ who, detail }) => `${who} accepted an invitation and is now ${role(detail.role)}`
   },
-  'dataset.upload': { label: 'dataset saved', say: ({ who, thing }) => `${who} saved ${thing}` },
+  'token.make': {
+    label: 'token made',
+    say: ({ who, detail }) =>
+      `${who} made the token “${detail.name}” for scripts, as ${role(detail.role)}, for ${many(detail.days, 'day')}: ${detail.scopes}`
+  },
+  'token.revoke': {
+    label: 'token revoked',
+    say: ({ who, detail }) => `${who} revoked the token “${detail.name}”`
+  },
+  'dataset.upload': {
+    label: 'dataset saved',
+    say: ({ who, thing, detail }) => `${who} saved ${thing}${byScript(detail)}`
+  },
   'dataset.edit': {
     label: 'conditions changed',
     say: ({ who, thing }) => `${who} changed the conditions of ${thing}`
@@ -114,7 +129,10 @@ const SENTENCES: Record<string, Words> = {
   },
   'link.make': { label: 'link made', say: ({ who, thing }) => `${who} made ${thing}` },
   'link.revoke': { label: 'link closed', say: ({ who, thing }) => `${who} closed ${thing}` },
-  'job.queue': { label: 'diagnosis asked for', say: ({ who, thing }) => `${who} asked for ${thing}` },
+  'job.queue': {
+    label: 'diagnosis asked for',
+    say: ({ who, thing, detail }) => `${who} asked for ${thing}${byScript(detail)}`
+  },
   'job.cancel': { label: 'diagnosis cancelled', say: ({ who, thing }) => `${who} cancelled ${thing}` },
   'job.fail': { label: 'diagnosis failed', say: ({ thing }) => `${capital(thing)} failed` }
 };

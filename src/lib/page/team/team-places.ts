@@ -12,6 +12,7 @@ export const places: Place[] = [
   { path: 'reports', label: 'Reports', leadOnly: false },
   { path: 'jobs', label: 'Jobs', leadOnly: false },
   { path: 'aside', label: 'Put aside', leadOnly: false },
+  { path: 'scripts', label: 'Scripts', leadOnly: false },
   { path: 'members', label: 'Members', leadOnly: true },
   { path: 'events', label: 'Events', leadOnly: true },
   { path: 'settings', label: 'Settings', leadOnly: true }

@@ -19,6 +19,8 @@ export const ACTIONS = {
   /** Make and revoke links to a report. */
   link: { lead: 'yes', experimenter: 'own', observer: 'no' },
   remark: { lead: 'yes', experimenter: 'yes', observer: 'yes' },
+  /** Make and revoke tokens of scripts, each at most of the own role. */
+  script: { lead: 'yes', experimenter: 'own', observer: 'own' },
   /** Members, invitations, settings, events, export and import. */
   manage: { lead: 'yes', experimenter: 'no', observer: 'no' }
 } as const satisfies Record<string, Record<Role, Grant>>;

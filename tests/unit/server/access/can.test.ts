@@ -13,6 +13,7 @@ const table: [Action, string, string, string][] = [
   ['restore', 'yes', 'own', 'no'],
   ['link', 'yes', 'own', 'no'],
   ['remark', 'yes', 'yes', 'yes'],
+  ['script', 'yes', 'own', 'own'],
   ['manage', 'yes', 'no', 'no']
 ];
 

@@ -14,3 +14,5 @@ export * from './job';
 export * from './event';
 export * from './outbox-message';
 export * from './sample';
+export * from './api-token';
+export * from './idempotent-answer';

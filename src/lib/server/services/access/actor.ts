@@ -5,4 +5,6 @@ export interface Actor {
   personId: string;
   teamId: string;
   role: Role;
+  /** The token of a script that acts for them; nothing may be done that its own role does not allow. */
+  token?: { id: string; name: string; role: Role };
 }

@@ -5,6 +5,7 @@ import type { Database } from '../../db/client';
 import { newId } from '../../db/new-id';
 import { dataset } from '../../db/schema';
 import type { Actor } from '../access/actor';
+import { scriptOf } from '../access/script-of';
 import { recordEvent } from '../events/record-event';
 import { mayInTeam } from './may-in-team';
 import { partsToSave, type PartToSave } from './parts-to-save';
@@ -88,6 +89,7 @@ function insert(tx: Pick<Database, 'insert'>, actor: Actor, part: PartToSave, no
     })
     .run();
   const happening = { teamId: actor.teamId, personId: actor.personId, thing: id };
-  recordEvent(tx, { ...happening, action: 'dataset.upload', detail: { name: conditions.name } }, now);
+  const detail = { name: conditions.name, ...scriptOf(actor) };
+  recordEvent(tx, { ...happening, action: 'dataset.upload', detail }, now);
   return { id, name: conditions.name };
 }

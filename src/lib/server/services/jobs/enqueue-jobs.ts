@@ -10,6 +10,7 @@ import { wakeRunner } from '../../jobs/current-runner';
 import { tellJobChange } from '../../jobs/job-changes';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
+import { scriptOf } from '../access/script-of';
 import { recordEvent } from '../events/record-event';
 
 export type Enqueued =
@@ -91,7 +92,7 @@ export function enqueueJobs(
             teamId: by.teamId,
             personId: by.createdBy,
             thing: id,
-            detail: { dataset: datasetId }
+            detail: { dataset: datasetId, ...scriptOf(actor) }
           },
           now
         );

@@ -1,0 +1,56 @@
+import { hardnessSchema } from '../../team/jobs/job-request';
+import type { Operation } from '../operation';
+import { jobSchema } from '../shapes/job';
+
+export const DIAGNOSIS_OPERATIONS: Operation[] = [
+  {
+    id: 'askForDiagnosis',
+    method: 'post',
+    path: '/datasets/{id}/jobs',
+    part: 'Diagnoses',
+    summary: 'Ask for a diagnosis',
+    about:
+      'Trials, unit, geometry and misread rate come from the conditions of the dataset. The same diagnosis that still waits or runs is given instead of a second one.',
+    scope: 'diagnose',
+    idOf: 'dataset',
+    once: true,
+    bodyIsOptional: true,
+    bodies: [
+      {
+        type: 'application/json',
+        schema: hardnessSchema,
+        about: 'How hard to look, where it differs from what is usual.',
+        example: { resamples: 1999, seed: 1, alpha: 0.01, tolerance: 0.1 }
+      }
+    ],
+    answer: {
+      status: 202,
+      about: 'Queued; ask for the job until it has ended',
+      content: { type: 'application/json', schema: jobSchema, about: 'The job' },
+      location: true
+    },
+    refusals: {
+      400: 'The body is not JSON, or did not arrive whole.',
+      409: 'The first request with this key is still being answered.',
+      413: 'More than the server takes.',
+      415: 'Not application/json.',
+      422: 'An option does not fit; or the Idempotency-Key came with another request before.'
+    }
+  },
+  {
+    id: 'readJob',
+    method: 'get',
+    path: '/jobs/{id}',
+    part: 'Diagnoses',
+    summary: 'See how a diagnosis goes',
+    about:
+      'Once “status” is done, “report” has the id of the report. Until it ends, Retry-After says when to ask again.',
+    scope: 'read',
+    idOf: 'job',
+    answer: {
+      status: 200,
+      about: 'The job',
+      content: { type: 'application/json', schema: jobSchema, about: 'A job' }
+    }
+  }
+];
