@@ -5,6 +5,7 @@ import { dataPart } from './parts/data';
 import { flagsPart } from './parts/flags';
 import { lawPart } from './parts/law';
 import { cautionsPart, methodPart } from './parts/method';
+import { nuisancesPart } from './parts/nuisances';
 import { provenancePart } from './parts/provenance';
 import { ratePart } from './parts/rate';
 import { tailsPart } from './parts/tails';
@@ -36,6 +37,7 @@ export function reportPdf(
         cumulantsPart(document),
         testsPart(document),
         flagsPart(document),
+        nuisancesPart(input),
         methodPart(),
         provenancePart(input),
         cautionsPart(document)

@@ -19,6 +19,7 @@ import { sayData } from '$lib/model/plain-text/say-data';
 import { sayFlags } from '$lib/model/plain-text/say-flags';
 import { sayTests } from '$lib/model/plain-text/say-tests';
 import { howBig } from '$lib/model/report/how-big';
+import { sayNuisances } from '$lib/model/report/say-nuisances';
 import { whatElse } from '$lib/model/report/what-else';
 import { sayHowOften } from '$lib/model/say-p';
 import { reportPdf } from '$lib/pdf/report-pdf';
@@ -110,6 +111,7 @@ describe.each(DOCUMENTS)('report of %s', (name, make) => {
     const tests = document.tests.map(({ p, smallestP }) => sayHowOften(p, smallestP));
     const notRun = document.notRun.map(({ id, reason }) => `${TESTS[id]}: ${reason}`);
     for (const words of [
+      ...sayNuisances(document, null).flat(),
       ...titles,
       ...flags,
       ...tests,

@@ -50,6 +50,7 @@ describe('tags', () => {
       'Cumulants and the ceiling',
       'Tests',
       'What the counts point to',
+      'What can look like interaction',
       'Method',
       'Where this result comes from',
       'Cautions'
@@ -94,7 +95,7 @@ describe('tags', () => {
       .filter((object) => /\/Dest \[/.test(object))
       .map((object) => textOf(object, 'Title'));
     expect(titles[0]).toBe('The answer');
-    expect(titles).toHaveLength(11);
+    expect(titles).toHaveLength(12);
     expect(objects.filter((object) => /\/XYZ (?!0 )/.test(object))).toEqual([]);
   });
 
