@@ -1,0 +1,78 @@
+import type { Terms } from './term';
+
+/** What was measured. */
+export const DATA = {
+  shot: {
+    name: 'shot',
+    words: [
+      'One repeat of the experiment, from preparation to read-out, which gives one count.',
+      'Shots are taken to be alike and independent of each other; when they are not, the counts look bunched.'
+    ],
+    formula: ['S = sum_n h_n'],
+    source: ''
+  },
+  count: {
+    name: 'count',
+    words: [
+      'The number n of defects seen in one shot.',
+      'A histogram keeps how many shots h had each count, and forgets which places held the defects.'
+    ],
+    formula: ['n = sum_{k=1}^N x_k', 'x_k "is 0 or 1"'],
+    source: ''
+  },
+  trials: {
+    name: 'trials, N',
+    words: [
+      'The places of one shot, such as sites, bonds or modes, each of which holds one defect or none.',
+      'N is the largest count possible and needs a reason from the apparatus, since the ceiling rests on it.'
+    ],
+    formula: ['0 ≤ n ≤ N'],
+    source: '',
+    printed: true
+  },
+  density: {
+    name: 'density',
+    words: [
+      'The count divided by the number of trials.',
+      'It lets experiments of different size share one axis.'
+    ],
+    formula: ['ρ = n/N'],
+    source: ''
+  },
+  pair: {
+    name: 'unit: pair',
+    words: [
+      'On a ring the kinks come two by two, so every count is even and the pair is the thing that can be independent.',
+      'Half of the count is then tested against half of the trials.'
+    ],
+    formula: ['n → n/2', 'N → N/2'],
+    source: ''
+  },
+  geometry: {
+    name: 'geometry',
+    words: [
+      'Whether defects are counted on sites, on the bonds of an open chain, or on the bonds of a ring.',
+      'It decides what one misread site does: one count on sites, two neighbouring bonds on a chain or ring.'
+    ],
+    formula: ['"kink on bond" k: s_k ≠ s_{k+1}'],
+    source: ''
+  },
+  'misread-rate': {
+    name: 'misread rate, ε',
+    words: [
+      'The probability that one site is read wrongly.',
+      'On bonds a wrong site toggles both of its neighbours, so independent kinks look bunched.'
+    ],
+    formula: ['p → p + 2ε(1−ε)(1−2p)'],
+    source: ''
+  },
+  lump: {
+    name: 'lump',
+    words: [
+      'A closing row such as “10 or more”, in which a printed table puts its rarest counts together.',
+      'Its likelihood is the whole tail from there, and no count beyond its edge is invented.'
+    ],
+    formula: ['P(X ≥ c) = sum_{n≥c} f_n'],
+    source: ''
+  }
+} satisfies Terms;

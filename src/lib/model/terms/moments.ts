@@ -1,0 +1,66 @@
+import type { Terms } from './term';
+
+/** Mean, variance and the numbers made of them. */
+export const MOMENTS = {
+  cumulants: {
+    name: 'cumulants, κ₁ to κ₄',
+    words: [
+      'Mean, variance and the two next measures of shape; they add up over independent trials.',
+      'The third tells the tilt of the counts and the fourth their tails, and both need many shots.'
+    ],
+    formula: [
+      'κ_1 = sum_k p_k',
+      'κ_2 = sum_k p_k(1−p_k)',
+      'κ_3 = sum_k p_k(1−p_k)(1−2p_k)',
+      'κ_4 = sum_k q_k(1−6q_k)',
+      'q_k = p_k(1−p_k)'
+    ],
+    source: ''
+  },
+  fano: {
+    name: 'Fano factor',
+    words: [
+      'Variance over mean, 1 for rare events.',
+      'A value above 1 rules out independent trials whatever N is; a value below 1 means little until N is known.'
+    ],
+    formula: ['F = κ_2/κ_1'],
+    source: 'Fano 1947'
+  },
+  ceiling: {
+    name: 'ceiling',
+    words: [
+      'The largest variance that independent trials with this mean can have, which equal trials reach.',
+      'With N unknown it is the mean itself.'
+    ],
+    formula: ['κ_2 ≤ μ(1 − μ/N)'],
+    source: '',
+    printed: true
+  },
+  dispersion: {
+    name: 'variance over ceiling',
+    words: [
+      'The variance of the counts in units of its ceiling.',
+      'Above 1 nothing independent gives it; below 1 the trials differ or the defects keep apart, and the variance cannot tell which.'
+    ],
+    formula: ['frac{s^2}{μ(1 − μ/N)}'],
+    source: ''
+  },
+  'critical-trials': {
+    name: 'critical trials',
+    words: [
+      'The number of trials at which the ceiling equals the variance that was seen.',
+      'With fewer trials the counts are over the ceiling; a variance above the mean is over it with any number.'
+    ],
+    formula: ['N^∗ = frac{μ^2}{μ − s^2}'],
+    source: ''
+  },
+  'pair-covariance': {
+    name: 'pair covariance',
+    words: [
+      'Variance minus ceiling, which is the least that the covariances of all pairs of trials must add up to.',
+      'Divided by N(N − 1) it is a lower limit for the mean covariance of two places.'
+    ],
+    formula: ['sum_{j≠k} "Cov"(x_j, x_k) ≥ s^2 − μ(1 − μ/N)'],
+    source: ''
+  }
+} satisfies Terms;

@@ -1,0 +1,25 @@
+import { ANSWERS } from './answers';
+import { DATA } from './data';
+import { DISTANCE } from './distance';
+import { FLAG_TERMS } from './flags';
+import { LAWS } from './laws';
+import { MOMENTS } from './moments';
+import { RATES } from './rates';
+import type { Term } from './term';
+import { TEST_TERMS } from './tests';
+
+const ALL = {
+  ...DATA,
+  ...ANSWERS,
+  ...LAWS,
+  ...DISTANCE,
+  ...RATES,
+  ...MOMENTS,
+  ...TEST_TERMS,
+  ...FLAG_TERMS
+};
+
+export type TermId = keyof typeof ALL;
+
+/** Every word of the report that has a note, by its id. */
+export const TERMS: Readonly<Record<TermId, Term>> = ALL;
