@@ -1,13 +1,19 @@
 import { DEMO_FILES } from '$lib/stats/demo/demo-files';
+import { GUIDE_CASES } from '$lib/stats/demo/guide-cases';
 import { writeDemo } from '$lib/stats/demo/write-demo';
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { guideDocument } from './demo/guide-document';
 
-/** `npm run demo`: writes the invented data of fixtures/demo anew. A test holds the files to the generator. */
-const folder = join('fixtures', 'demo');
-mkdirSync(folder, { recursive: true });
-for (const demo of DEMO_FILES) {
-  const text = writeDemo(demo);
-  writeFileSync(join(folder, `${demo.slug}.csv`), text);
-  console.log(`${folder}/${demo.slug}.csv  ${text.length} bytes`);
+/**
+ * `npm run demo`: writes the invented data of fixtures/demo anew, and the documents that the guide shows of some of
+ * them. Tests hold both to the generator and the engine.
+ */
+function write(folder: string, name: string, text: string): void {
+  mkdirSync(folder, { recursive: true });
+  writeFileSync(join(folder, name), text);
+  console.log(`${folder}/${name}  ${text.length} bytes`);
 }
+
+for (const demo of DEMO_FILES) write(join('fixtures', 'demo'), `${demo.slug}.csv`, writeDemo(demo));
+for (const demo of GUIDE_CASES) write(join('fixtures', 'guide'), `${demo.slug}.json`, await guideDocument(demo));
