@@ -16,4 +16,5 @@ function write(folder: string, name: string, text: string): void {
 }
 
 for (const demo of DEMO_FILES) write(join('fixtures', 'demo'), `${demo.slug}.csv`, writeDemo(demo));
-for (const demo of GUIDE_CASES) write(join('fixtures', 'guide'), `${demo.slug}.json`, await guideDocument(demo));
+for (const demo of GUIDE_CASES)
+  write(join('fixtures', 'guide'), `${demo.slug}.json`, await guideDocument(demo));
