@@ -14,7 +14,9 @@ describe('the documents of the guide', () => {
   );
 
   it('are all there, and no others', () => {
-    expect(readdirSync('fixtures/guide').sort()).toEqual(GUIDE_CASES.map(({ slug }) => `${slug}.json`).sort());
+    expect(readdirSync('fixtures/guide').sort()).toEqual(
+      GUIDE_CASES.map(({ slug }) => `${slug}.json`).sort()
+    );
   });
 
   // The guide's words lean on these outcomes; an engine that changes one of them changes the lesson.
