@@ -1,0 +1,120 @@
+import { newToken } from '$lib/server/auth/new-token';
+import { newId } from '$lib/server/db/new-id';
+import { dataset, invitation, job, mailedToken, person, report, team } from '$lib/server/db/schema';
+import { DEMO_PEOPLE, DEMO_TEAM } from '$lib/server/services/demo-team/demo-people';
+import { makeLink } from '$lib/server/services/links/make-link';
+import { saveReport } from '$lib/server/services/reports/save-report';
+import { asc, eq, inArray } from 'drizzle-orm';
+import { diagnoseNine, plainLink } from '../../support/links';
+import { withDatabaseOf } from './seed-people';
+import type { RunningServer } from './start-server';
+
+const DAY = 86_400_000;
+
+/** Waits until every diagnosis that the invented team begins with has ended. */
+export async function demoIsReady(server: RunningServer, patience: number): Promise<void> {
+  const late = Date.now() + patience;
+  for (;;) {
+    const [left, all] = await withDatabaseOf(server, (db) => [
+      db
+        .select({ id: job.id })
+        .from(job)
+        .where(inArray(job.status, ['queued', 'running']))
+        .all().length,
+      db.select({ id: job.id }).from(job).all().length
+    ]);
+    if (all > 0 && left === 0) return;
+    if (Date.now() > late)
+      throw new Error(`${left} of ${all} diagnoses of the invented team are still open.`);
+    await new Promise((resolve) => setTimeout(resolve, 500));
+  }
+}
+
+/**
+ * An address for every page of the application, by its folder in src/routes, on a server with the invented team; some
+ * have two. What a page needs is made: a link, an invitation, a mailed token.
+ */
+export async function demoAddresses(server: RunningServer): Promise<Record<string, string[]>> {
+  const { document, options } = await diagnoseNine();
+  return withDatabaseOf(server, (db) => {
+    const now = Date.now();
+    const ours = db.select().from(team).where(eq(team.slug, DEMO_TEAM.slug)).get()!;
+    const lead = db.select().from(person).where(eq(person.email, DEMO_PEOPLE[0].email)).get()!;
+    const reports = db
+      .select({ id: report.id, datasetId: report.datasetId, name: dataset.name })
+      .from(report)
+      .innerJoin(dataset, eq(dataset.id, report.datasetId))
+      .where(eq(report.teamId, ours.id))
+      .orderBy(asc(dataset.name))
+      .all();
+    const bunched = reports.find(({ name }) => /bunch/i.test(name)) ?? reports[0];
+    const { datasetId } = bunched;
+    const second = db.transaction((tx) =>
+      saveReport(tx, { teamId: ours.id, datasetId, createdBy: lead.id, document, options })
+    );
+    const actor = { personId: lead.id, teamId: ours.id, role: 'lead' as const };
+    const shared = (more: Partial<typeof plainLink>) => {
+      const made = makeLink(db, actor, bunched.id, { ...plainLink, ...more }, now);
+      if (!made.ok) throw new Error(made.reason);
+      return `/link/${made.token}`;
+    };
+    const invited = newToken();
+    db.insert(invitation)
+      .values({
+        id: newId(),
+        teamId: ours.id,
+        email: 'new@wrackline.example',
+        role: 'observer',
+        tokenHash: invited.hash,
+        invitedBy: lead.id,
+        createdAt: now,
+        expiresAt: now + DAY
+      })
+      .run();
+    const mailed = (purpose: 'sign-in' | 'password') => {
+      const { token, hash } = newToken();
+      db.insert(mailedToken)
+        .values({
+          id: newId(),
+          tokenHash: hash,
+          purpose,
+          email: lead.email,
+          createdAt: now,
+          expiresAt: now + DAY
+        })
+        .run();
+      return token;
+    };
+    const root = `/team/${DEMO_TEAM.slug}`;
+    return {
+      '': [
+        '/',
+        '/#counts=0:185,1:1149,2:3265,3:5475,4:6114,5:5194,6:3067,7:1331,8:403,9:105,10:14,11:4&trials=12&sum=26306'
+      ],
+      '/(account)/teams': ['/teams'],
+      '/(account)/account': ['/account'],
+      '/(account)/sign-in': ['/sign-in'],
+      '/(account)/sign-in/by-mail': ['/sign-in/by-mail'],
+      '/(account)/sign-in/mailed': [`/sign-in/mailed?token=${mailed('sign-in')}`, '/sign-in/mailed?token=no'],
+      '/(account)/password': ['/password'],
+      '/(account)/password/new': [`/password/new?token=${mailed('password')}`, '/password/new?token=no'],
+      '/(account)/outbox': ['/outbox'],
+      '/(team)/team/[team=slug]': [root],
+      '/(team)/team/[team=slug]/jobs': [`${root}/jobs`],
+      '/(team)/team/[team=slug]/events': [`${root}/events`],
+      '/(team)/team/[team=slug]/datasets': [`${root}/datasets`, `${root}/datasets?q=nothing-is-called-so`],
+      '/(team)/team/[team=slug]/datasets/new': [`${root}/datasets/new`],
+      '/(team)/team/[team=slug]/datasets/edit': [`${root}/datasets/edit?dataset=${bunched.datasetId}`],
+      '/(team)/team/[team=slug]/datasets/[id]': [`${root}/datasets/${bunched.datasetId}`],
+      '/(team)/team/[team=slug]/reports': [`${root}/reports`],
+      '/(team)/team/[team=slug]/reports/[id]': [`${root}/reports/${bunched.id}`],
+      '/(team)/team/[team=slug]/reports/compare': [`${root}/reports/compare?a=${bunched.id}&b=${second.id}`],
+      '/(team)/team/[team=slug]/settings': [`${root}/settings`],
+      '/(team)/team/[team=slug]/members': [`${root}/members`],
+      '/(team)/team/[team=slug]/leave': [`${root}/leave`],
+      '/(team)/team/[team=slug]/aside': [`${root}/aside`],
+      '/invitation/[token]': [`/invitation/${invited.token}`, '/invitation/no'],
+      '/link/[token]': [shared({ allowsRemarks: true }), shared({ blind: true, shows: 'report' })]
+    };
+  });
+}
