@@ -18,7 +18,12 @@ type Document = {
 
 /** Moments are the one format in use; held to what the page promises, ISO 8601 in UTC. */
 const MOMENT = /^\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{3}Z$/;
-const ajv = new Ajv2020({ strict: true, allowUnionTypes: true, allErrors: true, formats: { 'date-time': MOMENT } });
+const ajv = new Ajv2020({
+  strict: true,
+  allowUnionTypes: true,
+  allErrors: true,
+  formats: { 'date-time': MOMENT }
+});
 
 let server: RunningServer;
 let token: string;

@@ -69,6 +69,7 @@ export const PLAIN_TITLES: ReadonlySet<string> = new Set([
   'quantity',
   'test',
   'statistic',
+  'size',
   'trials',
   'Name',
   'Engine'
