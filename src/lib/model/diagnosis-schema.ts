@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import type { Diagnosis } from '$lib/stats/types';
+import { explanationsSchema } from './explanations-schema';
 
 /*
  * The diagnosis document as a schema, for documents that come from outside: a stored file, an
@@ -188,13 +189,14 @@ export const diagnosisSchema = z.strictObject({
     smallestExcess: orNull,
     shotsToDecide: orNull
   }),
-  cautions: z.array(z.string())
+  cautions: z.array(z.string()),
+  explanations: explanationsSchema.optional()
 });
 
 type Same<A, B> = (<T>() => T extends A ? 1 : 2) extends <T>() => T extends B ? 1 : 2 ? true : false;
 /** Each field must have the same type in the schema and in `Diagnosis`; a name here is a mismatch. */
 type Mismatch = {
-  [Key in keyof Diagnosis | keyof z.infer<typeof diagnosisSchema>]: Same<
+  [Key in keyof Diagnosis | keyof z.infer<typeof diagnosisSchema>]-?: Same<
     z.infer<typeof diagnosisSchema>[Key],
     Diagnosis[Key]
   > extends true

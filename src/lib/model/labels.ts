@@ -1,3 +1,4 @@
+export { explanationNames as EXPLANATIONS } from '$lib/stats/explanations/explanation-names';
 import type { FlagId, Geometry, ReferenceId, TestId, TestResult, Unit, Verdict } from '$lib/stats/types';
 
 /** Names of the parts of a diagnosis, the same on the page, in print and at the command line. */

@@ -2,6 +2,7 @@ import { answer } from './answer/answer';
 import { cautions } from './answer/cautions';
 import { criticalTrials } from './bounds/critical-trials';
 import { engineVersion } from './engine-version';
+import { explainRuledOut } from './explanations/explain-ruled-out';
 import { fitData } from './fit/fit-data';
 import { evidenceOf } from './flags/gather-evidence';
 import { raiseFlags } from './flags/raise-flags';
@@ -73,10 +74,9 @@ export async function diagnose(
           pace.within(0.08, 0.12)
         )
       : null;
-  const fitted = await fittedTests(counts, tested, drawing, pace.within(0.12, 0.85), helper);
-  await pace.step('shot order', 0.85);
-  const order = await orderTests(data, drawing, pace.within(0.85, 0.97));
-  await pace.step('writing', 0.97);
+  const fitted = await fittedTests(counts, tested, drawing, pace.within(0.12, 0.8), helper);
+  await pace.step('shot order', 0.8);
+  const order = await orderTests(data, drawing, pace.within(0.8, 0.9));
   const tests = adjust([...(ceiling ? [ceiling] : []), ...fitted.tests, ...order.tests]);
   const table = lawTable(counts, law);
   const shown = distribution(histogram, counts.total, trials, table);
@@ -94,6 +94,13 @@ export async function diagnose(
     misread
   });
   const flags = raiseFlags(evidence);
+  const said = answer(evidence, flags);
+  let explanations: Diagnosis['explanations'];
+  if (said.verdict === 'ruled-out') {
+    await pace.step('explanations', 0.9);
+    explanations = await explainRuledOut({ counts, options, moments, tested, tests }, pace.within(0.9, 0.99));
+  }
+  await pace.step('writing', 0.99);
   return {
     format: 'severalty.diagnosis/1',
     engine: {
@@ -143,7 +150,8 @@ export async function diagnose(
       ...order.notRun
     ],
     flags,
-    answer: answer(evidence, flags),
-    cautions: cautions(evidence, histogram, tests)
+    answer: said,
+    cautions: cautions(evidence, histogram, tests),
+    ...(explanations && { explanations })
   };
 }

@@ -1,3 +1,4 @@
+import type { Explanations } from './explanations/types';
 import type { Geometry, Interval, Level, Unit } from './types';
 
 export type TestId =
@@ -190,4 +191,6 @@ export interface Diagnosis {
     shotsToDecide: number | null;
   };
   cautions: string[];
+  /** What else it could be; only where independent trials are ruled out, and not in documents before engine 0.2. */
+  explanations?: Explanations;
 }

@@ -63,7 +63,7 @@ export interface Law {
 /** Progress of one diagnosis: a share 0 … 1 and the step in hand. */
 export interface Progress {
   share: number;
-  step: 'fit' | 'floor' | 'resampling' | 'shot order' | 'writing';
+  step: 'fit' | 'floor' | 'resampling' | 'shot order' | 'explanations' | 'writing';
 }
 
 export type OnProgress = (progress: Progress) => void;

@@ -1,4 +1,5 @@
 import { ceilingPicture } from '$lib/charts/ceiling-picture';
+import { explanationsPicture } from '$lib/charts/explanations-picture';
 import { distributionPicture } from '$lib/charts/distribution-picture';
 import { cumulantsPlace } from '$lib/charts/cumulants-place';
 import type { Picture, Size, TextMark } from '$lib/charts/picture';
@@ -9,12 +10,23 @@ import { sheetToSvg } from '$lib/charts/sheet-to-svg';
 import { tailsPicture } from '$lib/charts/tails-picture';
 import { testsPicture } from '$lib/charts/tests-picture';
 import { TESTS } from '$lib/model/labels';
+import type { Explanations } from '$lib/stats/explanations/types';
 import type { Diagnosis } from '$lib/stats/types';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { anyDiagnosis, WELDON } from './any-diagnosis';
 import { CASES } from './cases';
 import { coordinates, extent } from './measure';
+
+const nothing: Explanations = {
+  ranked: [],
+  tied: [],
+  tieWithin: 2,
+  separate: [],
+  notRun: [],
+  pairs: null,
+  statement: ''
+};
 
 type Draw = (diagnosis: Diagnosis, size: Size) => Picture;
 const DRAWS: [string, Draw][] = [
@@ -29,7 +41,9 @@ const DRAWS: [string, Draw][] = [
       return 'reason' in place ? ceilingPicture(diagnosis, size) : regionPicture(place, size);
     }
   ],
-  ['tests', (diagnosis, size) => testsPicture(diagnosis, size, TESTS)]
+  ['tests', (diagnosis, size) => testsPicture(diagnosis, size, TESTS)],
+  // Only results that rule independent trials out have these; the others draw an empty list.
+  ['explanations', ({ explanations }, size) => explanationsPicture(explanations ?? nothing, size)]
 ];
 
 /** Whether two labels touch: letters reach about 0.7 of their size above the line, and next to nothing below. */

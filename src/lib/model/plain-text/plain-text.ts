@@ -2,6 +2,7 @@ import type { Diagnosis } from '$lib/stats/types';
 import { VERDICTS } from '../labels';
 import { sayCounts } from './say-counts';
 import { sayData } from './say-data';
+import { sayExplanations } from './say-explanations';
 import { sayFlags } from './say-flags';
 import { sayLaw } from './say-law';
 import { sayTests } from './say-tests';
@@ -20,6 +21,7 @@ export function plainText(diagnosis: Diagnosis, about: string[] = []): string {
     `${VERDICTS[answer.verdict]}\n\n${wrap(answer.statement)}\n${answer.because.map((reason) => wrap(reason, '  – ')).join('\n')}`,
     sayData(diagnosis, about),
     sayFlags(diagnosis.flags),
+    ...(diagnosis.explanations ? [sayExplanations(diagnosis.explanations)] : []),
     sayTests(diagnosis),
     sayLaw(diagnosis),
     sayCounts(diagnosis),

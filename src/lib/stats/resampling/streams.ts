@@ -4,7 +4,8 @@ const families = {
   'fitted law': 2,
   'shot order': 3,
   batches: 4,
-  intervals: 5
+  intervals: 5,
+  explanations: 6
 } as const;
 
 /**

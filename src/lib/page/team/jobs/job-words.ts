@@ -14,6 +14,7 @@ const STEPS: Record<NonNullable<JobRow['step']>, string> = {
   floor: 'looking for a law that no fit can beat',
   resampling: 'drawing histograms from the law and fitting each again',
   'shot order': 'shuffling the order of the shots',
+  explanations: 'fitting what else it could be',
   writing: 'writing the result'
 };
 

@@ -1,0 +1,43 @@
+import type { Explanations } from '$lib/stats/explanations/types';
+import { formatCount, formatNumber } from '../format-number';
+import { EXPLANATIONS } from '../labels';
+import { sayWeight } from '../report/say-weight';
+import { sayOwnNumber } from '../report/say-own-number';
+import { alignTable } from './align-table';
+import { wrap } from './wrap';
+
+/** What else it could be: the finding, the list, what each of the first would mean, and what would tell them apart. */
+export function sayExplanations(explanations: Explanations): string {
+  const { ranked, tied, separate, notRun, pairs, statement } = explanations;
+  const lines = ['What else it could be', wrap(statement, '  ')];
+  if (pairs) lines.push(wrap(pairs.statement, '  '));
+  lines.push(
+    alignTable([
+      { title: 'explanation', numeric: false, cells: ranked.map(({ id }) => EXPLANATIONS[id]) },
+      { title: 'AIC behind', numeric: true, cells: ranked.map(({ behind }) => formatNumber(behind, 3)) },
+      { title: 'weight', numeric: true, cells: ranked.map(({ weight }) => sayWeight(weight)) },
+      {
+        title: 'p of its fit',
+        numeric: true,
+        cells: ranked.map(({ goodness }) => formatNumber(goodness?.p ?? null, 2))
+      },
+      { title: 'its number', numeric: false, cells: ranked.map((one) => sayOwnNumber(one)) }
+    ])
+  );
+  for (const one of ranked.filter(({ id }) => tied.includes(id)))
+    lines.push(wrap(`${EXPLANATIONS[one.id]}: ${one.meaning}`, '  – '));
+  for (const { between, measurement, shots } of separate) {
+    const enough = shots === null ? '' : ` By the counts alone: about ${formatCount(shots)} shots in all.`;
+    lines.push(
+      wrap(`To tell ${between.map((id) => EXPLANATIONS[id]).join(' from ')}: ${measurement}${enough}`, '  – ')
+    );
+  }
+  if (notRun.length > 0)
+    lines.push(
+      wrap(
+        `Not told: ${notRun.map(({ id, reason }) => `${EXPLANATIONS[id]} (${reason.replace(/\.$/, '')})`).join('; ')}.`,
+        '  '
+      )
+    );
+  return lines.join('\n');
+}

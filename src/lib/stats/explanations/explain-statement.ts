@@ -1,0 +1,42 @@
+import { formatPercent } from '../words/format-number';
+import { sayP } from '../words/say-p';
+import { explanationNames } from './explanation-names';
+import type { Explanation, ExplanationId } from './types';
+
+const joined = (ids: ExplanationId[]): string => {
+  const names = ids.map((id) => explanationNames[id]);
+  return names.length < 2 ? names.join('') : `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`;
+};
+
+const capital = (words: string): string => `${words[0].toUpperCase()}${words.slice(1)}`;
+
+/**
+ * The finding in a sentence or three: which explanation leads, which cannot be told from it, and whether it fits at all.
+ *
+ * @param ranked best first
+ * @param alpha level under which the leading one is said not to fit either
+ */
+export function explainStatement(ranked: Explanation[], tied: ExplanationId[], alpha: number): string {
+  const [first] = ranked;
+  if (!first) return 'No explanation could be fitted to these counts.';
+  const independent = (id: ExplanationId) => id === 'equal-trials' || id === 'best-independent';
+  const stories = ranked.filter(({ id }) => !independent(id));
+  if (stories.length === 0) return 'No story could be fitted to these counts; only independent trials were.';
+  if (tied.some(independent)) {
+    const worse = independent(first.id)
+      ? 'None of the stories describes the counts better than independent trials do'
+      : `The first story, ${explanationNames[first.id]}, describes the counts no better than independent trials could`;
+    return `${worse}: if these are ruled out, it is by something that the list does not know, such as the order of the shots.`;
+  }
+  const others = tied.filter((id) => id !== first.id);
+  const lead =
+    others.length === 0
+      ? `Of the stories told here the counts are described best by ${explanationNames[first.id]}, with ${first.weight > 0.999 ? 'practically all' : formatPercent(first.weight)} of the weight.`
+      : `${capital(joined(tied))} describe the counts about equally well: these shots cannot tell them apart.`;
+  const { goodness } = first;
+  if (!goodness) return lead;
+  if (goodness.p <= Math.max(alpha, goodness.smallestP))
+    return `${lead} But it does not fit either: counts so far from ${others.length ? 'the first of them' : 'it'} ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. Something else is at work, or more than one of them.`;
+  const how = goodness.p > 0.05 ? 'It fits' : 'It fits badly';
+  return `${lead} ${how}: counts so far from ${others.length ? 'the first of them' : 'it'} ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. That the counts fit a story does not say that it happened.`;
+}

@@ -1,0 +1,80 @@
+import type { FitData } from '../fit/fit-data';
+import { sampleMoments } from '../fit/sample-moments';
+import type { Pace } from '../resampling/pace';
+import type { DiagnoseOptions, Diagnosis } from '../types';
+import { explainStatement } from './explain-statement';
+import { independentLaws, type Independent } from './independent-laws';
+import { pairLimit } from './pair-limit';
+import { rank } from './rank';
+import { separate } from './separate';
+import { shotsToSeparate, type FittedStory } from './shots-to-separate';
+import { stories } from './stories';
+import type { Seen } from './story';
+import { tellStory, type Unranked } from './tell-story';
+import type { ExplanationId, Explanations } from './types';
+
+/** AIC differences under this do not tell two explanations apart (Burnham & Anderson 2002, section 2.6 (m)). */
+const tieWithin = 2;
+
+/**
+ * What else the counts could be: every story fitted by likelihood, ranked by AIC beside independent trials.
+ *
+ * @param data the histogram in the unit tested; its `trials` are in that unit too
+ * @param moments of the document, for the limit on correlations
+ */
+export async function explanationsOf(
+  data: FitData,
+  options: DiagnoseOptions,
+  moments: Pick<Diagnosis['moments'], 'ceiling' | 'dispersion'>,
+  independent: Independent,
+  pace: Pace
+): Promise<Explanations> {
+  const { mean, variance } = sampleMoments(data);
+  const { trials, lump } = data;
+  const last = Math.max(lump?.from ?? 0, data.first + data.shots.length - 1);
+  const seen: Seen = { mean, variance, last, empty: data.first === 0 ? data.shots[0] / data.total : 0 };
+  const told: Unranked[] = independentLaws(data, independent);
+  const fitted = new Map<ExplanationId, FittedStory>();
+  const notRun: Explanations['notRun'] = [];
+  const allEven = data.shots.every((shots, i) => shots === 0 || (data.first + i) % 2 === 0);
+  const setting = {
+    trials,
+    unit: options.unit,
+    geometry: options.geometry,
+    last,
+    lump: lump !== null,
+    allEven
+  };
+  const flat = mean === 0 || mean === trials || variance === 0;
+  for (const [index, story] of stories.entries()) {
+    const refused = flat ? 'The counts have no spread to explain.' : story.refuses(setting);
+    const part = { breathe: (share: number) => pace.breathe((index + share) / stories.length) };
+    const one = refused ? null : await tellStory(story, index, data, seen, options, part);
+    if (one) {
+      told.push(one.told);
+      fitted.set(story.id, one.fitted);
+    } else {
+      notRun.push({
+        id: story.id,
+        reason: refused ?? 'It gives practically no probability to a count that was seen.'
+      });
+    }
+  }
+  const ranked = rank(told);
+  const tied = ranked.filter(({ behind }) => behind < tieWithin).map(({ id }) => id);
+  return {
+    ranked,
+    tied,
+    tieWithin,
+    separate: tied.flatMap((a, i) =>
+      tied.slice(i + 1).map((b) => {
+        const [first, second] = [fitted.get(a), fitted.get(b)];
+        const shots = first && second && !lump ? shotsToSeparate(data, first, second) : null;
+        return { between: [a, b] as [typeof a, typeof b], measurement: separate(a, b), shots };
+      })
+    ),
+    notRun,
+    pairs: lump ? null : pairLimit(trials, moments.ceiling, moments.dispersion),
+    statement: explainStatement(ranked, tied, options.alpha)
+  };
+}

@@ -1,0 +1,39 @@
+import { describe, expect, it } from 'vitest';
+import { fitStory } from '$lib/stats/explanations/fit-story';
+import { shotsToSeparate, type FittedStory } from '$lib/stats/explanations/shots-to-separate';
+import type { StoryId } from '$lib/stats/explanations/types';
+import type { FitData } from '$lib/stats/fit/fit-data';
+import { generator } from '$lib/stats/random/generator';
+import { counted, dense, drawn, modelOf, ranking, storyOf } from './setting';
+
+function fitted(id: StoryId, data: FitData): FittedStory {
+  const story = storyOf(id);
+  const model = modelOf(story, data);
+  return { model, fit: fitStory(model, data)!, over: (counts) => modelOf(story, counts) };
+}
+
+describe('shotsToSeparate', () => {
+  it('says how many shots make the truth lead by AIC 2 in about four of five repeats', () => {
+    const law = dense(storyOf('two-settings').window(0.2, [0.35], 24, 24), 24);
+    // As many shots of exactly that law as a double holds well.
+    const ideal = counted(
+      law.map((f) => Math.round(f * 1e12)),
+      24
+    );
+    const shots = shotsToSeparate(ideal, fitted('two-settings', ideal), fitted('common-cause', ideal))!;
+    let apart = 0;
+    for (let r = 0; r < 100; r++) {
+      const ranks = ranking(drawn(generator(21, r), law, shots, 24), 'sites');
+      const place = (id: StoryId) => ranks.find((one) => one.id === id)!.behind;
+      if (place('common-cause') - place('two-settings') > 2) apart++;
+    }
+    // The rule is for close laws: 80 ± 4 (binomial), and 12 for what it leaves out.
+    expect(apart).toBeGreaterThan(64);
+    expect(apart).toBeLessThan(96);
+  });
+
+  it('is null where the rival can copy the law', () => {
+    const data = counted([500, 300, 150, 40, 10], 2e5);
+    expect(shotsToSeparate(data, fitted('common-cause', data), fitted('common-cause', data))).toBeNull();
+  });
+});
