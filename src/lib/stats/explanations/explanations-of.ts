@@ -10,11 +10,16 @@ import { separate } from './separate';
 import { shotsToSeparate, type FittedStory } from './shots-to-separate';
 import { stories } from './stories';
 import type { Seen } from './story';
-import { tellStory, type Unranked } from './tell-story';
+import { fitStory } from './fit-story';
+import { storyModel } from './story-model';
+import { tellStory, type Attempt, type Unranked } from './tell-story';
 import type { ExplanationId, Explanations } from './types';
 
 /** AIC differences under this do not tell two explanations apart (Burnham & Anderson 2002, section 2.6 (m)). */
 const tieWithin = 2;
+
+/** Counts in a law beyond which a list of stories would take over ten seconds. */
+const widest = 10_000;
 
 /**
  * What else the counts could be: every story fitted by likelihood, ranked by AIC beside independent trials.
@@ -45,20 +50,35 @@ export async function explanationsOf(
     lump: lump !== null,
     allEven
   };
+  // Windows reach 52 standard deviations either way.
+  const width = Math.min(trials ?? Infinity, 104 * Math.sqrt(Math.max(mean, variance)) + last - data.first);
   const flat = mean === 0 || mean === trials || variance === 0;
+  const attempts: Attempt[] = [];
   for (const [index, story] of stories.entries()) {
-    const refused = flat ? 'The counts have no spread to explain.' : story.refuses(setting);
-    const part = { breathe: (share: number) => pace.breathe((index + share) / stories.length) };
-    const one = refused ? null : await tellStory(story, index, data, seen, options, part);
-    if (one) {
-      told.push(one.told);
-      fitted.set(story.id, one.fitted);
-    } else {
+    const refused = flat
+      ? 'The counts have no spread to explain.'
+      : width > widest
+        ? 'Counts so widely spread would take too long.'
+        : story.refuses(setting);
+    const ranges = story.own(trials, seen);
+    const over = (counts: FitData) => storyModel(story, counts, seen, ranges);
+    const fit = refused ? null : fitStory(over(data), data);
+    if (fit) attempts.push({ story, index, over, fit });
+    else
       notRun.push({
         id: story.id,
         reason: refused ?? 'It gives practically no probability to a count that was seen.'
       });
-    }
+    await pace.breathe((0.2 * (index + 1)) / stories.length);
+  }
+  const leading = Math.max(...attempts.map(({ fit }) => fit.logLikelihood));
+  for (const [place, attempt] of attempts.entries()) {
+    const part = {
+      breathe: (share: number) => pace.breathe(0.2 + (0.8 * (place + share)) / attempts.length)
+    };
+    const one = await tellStory(attempt, data, seen, options, leading, part);
+    told.push(one.told);
+    fitted.set(attempt.story.id, one.fitted);
   }
   const ranked = rank(told);
   const tied = ranked.filter(({ behind }) => behind < tieWithin).map(({ id }) => id);

@@ -28,7 +28,7 @@ export function profileInterval(
     const at = (from: number[]) => {
       const start = from.slice();
       start[own] = value;
-      return scoreFit(model, data, start, [own], 1e-5);
+      return scoreFit(model, data, start, [own], 1e-4);
     };
     let found = at(warm);
     if (found.logLikelihood === -Infinity) found = at(fit.x);
@@ -44,16 +44,17 @@ export function profileInterval(
     let inside = best;
     for (let reach = 2 * unit; ; reach *= 1.7) {
       const outside = sign > 0 ? Math.min(bound, best + reach) : Math.max(bound, best - reach);
-      if (outside === inside) return { at: bound, bound: true };
+      if (!(outside !== inside)) return { at: bound, bound: true };
       const deep = depth(outside);
       if (deep > 0) {
         const root = findRoot(
           (value) => (value === best ? -drop : depth(value)),
           inside,
           outside,
-          1e-5 * unit
+          1e-4 * unit
         );
-        return { at: root, bound: false };
+        // A search that found another hill in between leaves no change of sign: the wider end is the safe one.
+        return { at: Number.isNaN(root) ? outside : root, bound: false };
       }
       if (outside === bound) return { at: bound, bound: true };
       inside = outside;

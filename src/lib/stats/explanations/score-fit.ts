@@ -33,7 +33,7 @@ export function scoreFit(
   let x = start.map((value, j) => Math.min(model.high[j], Math.max(model.low[j], value)));
   let value = windowLogLikelihood(data, model.window(x));
   let errors = x.map(() => Infinity);
-  for (let round = 0; round < 80 && value > -Infinity; round++) {
+  for (let round = 0; round < 50 && value > -Infinity; round++) {
     const { gradient, information } = scoring(model, data, x);
     const free = x.map((at, j) => {
       if (held.includes(j) || !(information[j * x.length + j] > 0)) return false;

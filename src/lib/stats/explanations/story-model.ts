@@ -19,6 +19,9 @@ export interface StoryModel {
 /** Log-odds beyond which a probability is 0 or 1 for any count of shots that fits a double. */
 const far = 45;
 
+/** Mean, in units of the largest count, beyond which no search goes: a step astray would build laws of any width. */
+const manyfold = 20;
+
 /** @param ranges bounds of the own parameters; they belong to the histogram that was observed, not to a resample */
 export function storyModel(story: Story, data: FitData, seen: Seen, ranges: Range[]): StoryModel {
   const { trials } = data;
@@ -32,7 +35,7 @@ export function storyModel(story: Story, data: FitData, seen: Seen, ranges: Rang
   };
   return {
     low: [trials === null ? -700 : -far * 15, ...ranges.map((one) => one.low)],
-    high: [trials === null ? 700 : far, ...ranges.map((one) => one.high)],
+    high: [trials === null ? Math.log(manyfold * (seen.last + 1)) : far, ...ranges.map((one) => one.high)],
     starts: story.starts(seen, trials).map((own) => {
       const inside = own.map((value, j) => Math.min(ranges[j].high, Math.max(ranges[j].low, value)));
       return [inward(story.base(seen.mean, inside, trials)), ...inside];

@@ -3,13 +3,23 @@ import { saturated } from '../resampling/divergence';
 import type { Pace } from '../resampling/pace';
 import { stream } from '../resampling/streams';
 import { formatNumber, formatPercent } from '../words/format-number';
-import { fitStory } from './fit-story';
+import { curvatureInterval } from './curvature-interval';
 import { goodness } from './goodness';
 import { profileInterval } from './profile-interval';
 import type { Seen, Story } from './story';
-import { storyModel } from './story-model';
+import type { StoryModel } from './story-model';
+import type { ScoreFit } from './score-fit';
 import type { FittedStory } from './shots-to-separate';
 import type { Explanation } from './types';
+
+/** A story that was fitted; its place in the registry gives it random streams of its own. */
+export interface Attempt {
+  story: Story;
+  index: number;
+  /** The story laid over other counts. */
+  over: (data: FitData) => StoryModel;
+  fit: ScoreFit;
+}
 
 /** An explanation before it is ranked among the others. */
 export type Unranked = Omit<Explanation, 'behind' | 'weight'>;
@@ -17,44 +27,48 @@ export type Unranked = Omit<Explanation, 'behind' | 'weight'>;
 /** Histograms drawn for the goodness of fit of one story. */
 const draws = 199;
 
+/** Nats behind the best story beyond which goodness of fit is not asked and the interval is the curvature's. */
+const hopeless = 50;
+
 /** Resamples of one story are fewer than this, so that the streams of stories keep apart. */
 const room = 4096;
 
 /**
  * Fits one story and says how well it fits: parameters, profile interval, AIC, goodness by resampling, words.
  *
- * @param index place of the story in the registry; its random streams follow from it
- * @returns null when the story gives some count no probability, wherever its search starts
+ * @param attempt the story where it fits best
+ * @param leading greatest log-likelihood among the stories
  */
 export async function tellStory(
-  story: Story,
-  index: number,
+  { story, index, over, fit }: Attempt,
   data: FitData,
   seen: Seen,
   options: { resamples: number; seed: number },
+  leading: number,
   pace: Pace
-): Promise<{ told: Unranked; fitted: FittedStory } | null> {
+): Promise<{ told: Unranked; fitted: FittedStory }> {
   const { trials } = data;
   const ranges = story.own(trials, seen);
-  const over = (counts: FitData) => storyModel(story, counts, seen, ranges);
   const model = over(data);
-  const fit = fitStory(model, data);
-  if (!fit) return null;
   await pace.breathe(0.1);
-  const interval = profileInterval(model, data, fit);
+  const out = leading - fit.logLikelihood > hopeless;
+  const interval = out ? curvatureInterval(model, fit) : profileInterval(model, data, fit);
   await pace.breathe(0.2);
-  const fits = await goodness(
-    data,
-    fit,
-    model.whole(fit.x),
-    over,
-    {
-      most: Math.min(draws, options.resamples),
-      seed: options.seed,
-      streamOf: (b) => stream('explanations', index * room + b)
-    },
-    { breathe: (share) => pace.breathe(0.2 + 0.8 * share) }
-  );
+  // A story so far behind is out whatever its own fit; to refit its resamples would take most of the time.
+  const fits = out
+    ? null
+    : await goodness(
+        data,
+        fit,
+        model.whole(fit.x),
+        over,
+        {
+          most: Math.min(draws, options.resamples),
+          seed: options.seed,
+          streamOf: (b) => stream('explanations', index * room + b)
+        },
+        { breathe: (share) => pace.breathe(0.2 + 0.8 * share) }
+      );
   const own = fit.x.slice(1);
   const base = model.base(fit.x);
   const say = (write: (value: number) => string) =>

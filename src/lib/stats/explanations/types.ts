@@ -19,7 +19,10 @@ export interface Explanation {
   weight: number;
   /** Probability of one trial before the story sets in, or the mean count when N is unknown; null for uneven trials. */
   base: number | null;
-  /** The story's own number with its profile-likelihood 95 % interval; null for independent trials. */
+  /**
+   * The story's own number with its profile-likelihood 95 % interval (from the curvature alone for stories over 50 nats
+   * behind); null for independent trials.
+   */
   parameter: {
     symbol: string;
     value: number;
