@@ -9,7 +9,8 @@ import type { Unranked } from './tell-story';
 export interface Independent {
   /** p of equal trials, or their mean when N is unknown, and their log-likelihood. */
   equal: { parameter: number; logLikelihood: number };
-  best: { levels: TrialLevels; logLikelihood: number };
+  /** null when the diagnosis tested something else. */
+  best: { levels: TrialLevels; logLikelihood: number } | null;
   /** Outcome of the test of the fit as a whole, which is the best law's goodness; null when it did not run. */
   fitTest: Pick<TestResult, 'p' | 'smallestP' | 'resamples'> | null;
 }
@@ -41,9 +42,8 @@ export function independentLaws(data: FitData, { equal, best, fitTest }: Indepen
     goodness: id === 'best-independent' || same ? goodness : null,
     meaning
   });
-  const { p, poissonPart } = best.levels;
-  const parameters = Math.max(1, p.length + (poissonPart > 0 ? 1 : 0));
-  const same = parameters === 1 && best.logLikelihood - equal.logLikelihood < 0.01;
+  const parameters = best ? Math.max(1, best.levels.p.length + (best.levels.poissonPart > 0 ? 1 : 0)) : 1;
+  const same = best !== null && parameters === 1 && best.logLikelihood - equal.logLikelihood < 0.01;
   const found: Unranked[] = [];
   if (Number.isFinite(equal.logLikelihood)) {
     const rate = formatNumber(equal.parameter, 3);
@@ -59,7 +59,7 @@ export function independentLaws(data: FitData, { equal, best, fitTest }: Indepen
       )
     );
   }
-  if (!same && Number.isFinite(best.logLikelihood)) {
+  if (best && !same && Number.isFinite(best.logLikelihood)) {
     found.push(
       entry(
         'best-independent',

@@ -33,11 +33,15 @@ export function logWalk(start: number, up: (n: number) => number, last: number, 
   const logs = [...below.reverse(), 0, ...above];
   let sum = 0;
   for (const value of logs) sum += Math.exp(value - largest);
-  // Inside the exponential, which would underflow 300 decades earlier if the scale came after it.
-  const lift = Math.log(deepScale / sum) - largest;
+  // Far down the scale goes into the exponential, which would underflow 300 decades earlier without it; near the
+  // top it must not, since an exponent of 667 costs three digits.
+  const factor = deepScale / sum;
+  const lift = Math.log(factor) - largest;
+  const at = (value: number) =>
+    value > largest - 600 ? Math.exp(value - largest) * factor : Math.exp(value + lift);
   return {
     first: start - below.length,
-    values: Float64Array.from(logs, (value) => Math.exp(value + lift)),
+    values: Float64Array.from(logs, at),
     scale: deepScale
   };
 }

@@ -1,0 +1,34 @@
+import type { FitData } from '../fit/fit-data';
+import type { NullLaw } from '../nulls/null-law';
+import { equalTrials } from '../references/equal-trials';
+import type { Pace } from '../resampling/pace';
+import type { DiagnoseOptions, Diagnosis, TestResult } from '../types';
+import { explanationsOf } from './explanations-of';
+import type { Explanations } from './types';
+
+/** What a diagnosis has in hand when its answer is "ruled out". */
+export interface RuledOut {
+  counts: FitData;
+  options: DiagnoseOptions;
+  moments: Pick<Diagnosis['moments'], 'ceiling' | 'dispersion'>;
+  tested: Pick<NullLaw, 'levels' | 'logLikelihood' | 'ceiling'>;
+  tests: TestResult[];
+}
+
+/**
+ * Explanations within a diagnosis. Where it tested kinks as they are read, its law and its ceiling are not those of
+ * plain independent trials: then only equal trials stand beside the stories, and there is no limit for pairs.
+ */
+export function explainRuledOut(
+  { counts, options, moments, tested, tests }: RuledOut,
+  pace: Pace
+): Promise<Explanations> {
+  const { levels, logLikelihood } = tested;
+  const independent = {
+    equal: equalTrials(counts, counts.trials),
+    best: 'rate' in levels ? null : { levels, logLikelihood },
+    fitTest: ('rate' in levels ? undefined : tests.find(({ id }) => id === 'fit')) ?? null
+  };
+  const plain = tested.ceiling === null ? moments.dispersion : { value: null, low: null, high: null };
+  return explanationsOf(counts, options, { ...moments, dispersion: plain }, independent, pace);
+}
