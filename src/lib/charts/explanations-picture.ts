@@ -61,7 +61,8 @@ export function explanationsPicture(explanations: Explanations, { width, text }:
       { role: 'limit', label: `AIC ${tieWithin} behind` }
     ],
     order: 'down',
-    readings: ranked.map((one, i) => ({ x: x(one.behind), y: middle(i), words: wordsOf(one) })),
+    build: 'lines',
+    readings: ranked.map((one, i) => ({ x: x(one.behind), y: middle(i), words: () => wordsOf(one) })),
     notes: []
   };
 }
