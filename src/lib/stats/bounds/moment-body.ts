@@ -32,17 +32,18 @@ export function momentBody(
   const { mean, variance, third } = cumulants;
   const s2 = mean - variance;
   const base = mean - 3 * s2;
-  const inner = trials === null ? s2 : s2 - over(variance * variance, trials - mean);
   const scale = Math.abs(mean) + Math.abs(variance) + Math.abs(third);
+  const blur = 1e-12 * scale;
+  const inner = trials === null ? s2 : s2 - over(variance * variance, trials - mean, blur);
   const condition = (id: MomentCondition['id'], value: number, limit: number, slack: number) => ({
     id,
     value,
     limit,
     slack,
-    holds: slack >= -1e-12 * scale
+    holds: slack >= -blur
   });
   const top = ceiling(mean, trials);
-  const floor = base + 2 * over(s2 * s2, mean);
+  const floor = base + 2 * over(s2 * s2, mean, blur);
   const roof = base + 2 * inner;
   return [
     condition('variance-ceiling', variance, top, top - variance),
@@ -51,8 +52,10 @@ export function momentBody(
   ];
 }
 
-/** x²/y as the limit of a determinant: 0/0 asks for nothing, a negative y cannot be met. */
-function over(square: number, y: number): number {
+/** x²/y as the limit of a determinant: 0/0, up to rounding, asks for nothing, a negative y cannot be met. */
+function over(square: number, y: number, blur: number): number {
+  // All trials sure but for 6e-16 of one: the mean is then rounded to N, while the variance is not yet 0.
+  if (Math.abs(y) <= blur && square <= blur * blur) return 0;
   if (y < 0) return Infinity;
   return square === 0 ? 0 : square / y;
 }

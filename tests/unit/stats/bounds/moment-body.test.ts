@@ -28,6 +28,13 @@ describe('momentBody', () => {
     );
   });
 
+  it('holds where rounding takes the mean to N before the variance to 0', () => {
+    const levels = [1, 0.9999999999999994, 1, 1, 1].map((p) => ({ p, trials: 1 }));
+    const moments = lawMoments({ levels, poissonPart: 0 });
+    expect([moments.mean, moments.variance > 0]).toEqual([5, true]);
+    expect(momentBody(5, moments).every(({ holds }) => holds)).toBe(true);
+  });
+
   it('agrees in sign with the determinants', () => {
     const trials = 12;
     fc.assert(
