@@ -20,10 +20,14 @@ export function sayExplanations(explanations: Explanations): string {
         title: 'p of its fit',
         numeric: true,
         cells: ranked.map(({ goodness }) => formatNumber(goodness?.p ?? null, 2))
-      },
-      { title: 'its number', numeric: false, cells: ranked.map((one) => sayOwnNumber(one)) }
+      }
     ])
   );
+  // As a column they would be wider than a terminal.
+  for (const one of ranked) {
+    const number = sayOwnNumber(one);
+    if (number) lines.push(wrap(`${EXPLANATIONS[one.id]}: ${number}`, '    '));
+  }
   for (const one of ranked.filter(({ id }) => tied.includes(id)))
     lines.push(wrap(`${EXPLANATIONS[one.id]}: ${one.meaning}`, '  – '));
   for (const { between, measurement, shots } of separate) {
