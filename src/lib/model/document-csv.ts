@@ -30,6 +30,14 @@ export function documentCsv(document: Diagnosis): string {
     ranged('moments', key, moments[key]);
   for (const key of ['ceiling', 'criticalTrials', 'pairCovariance'] as const)
     one('moments', key, moments[key]);
+  if (document.nuisances) {
+    const { misread } = document.nuisances;
+    one('misreads', 'applied', misread.applied ? 'yes' : 'no');
+    for (const key of ['rate', 'ceiling', 'rawCeiling', 'rawDispersion'] as const)
+      one('misreads', key, misread[key]);
+    ranged('misreads', 'neededRate', misread.neededRate);
+    for (const { p, trials } of misread.kinks ?? []) one('misreads', `kinks of the next ${trials} bonds`, p);
+  }
   for (const key of [
     'logLikelihood',
     'divergence',

@@ -3,6 +3,7 @@ import { infoOf } from './page/metadata';
 import { conditionFacts, notesBlocks } from './parts/conditions';
 import { flagsPart } from './parts/flags';
 import { cautionsPart, methodPart } from './parts/method';
+import { summaryNuisancesPart } from './parts/nuisances';
 import { summaryAnswerPart } from './parts/summary-answer';
 import { summaryCumulantsPart, summaryLawPart, summaryTestsPart } from './parts/summary-numbers';
 import { summaryProvenancePart } from './parts/summary-provenance';
@@ -44,6 +45,7 @@ export function summaryPdf(
         summaryCumulantsPart(summary),
         summaryTestsPart(summary),
         flagsPart(summary),
+        summaryNuisancesPart(summary, provenance),
         methodPart(),
         summaryProvenancePart(summary, provenance),
         cautionsPart(summary)

@@ -2,6 +2,7 @@ import type { Provenance } from '$lib/pdf/report-input';
 import type { Diagnosis } from '$lib/stats/types';
 import { diagnose } from '$lib/stats/diagnose';
 import { defaultOptions } from '$lib/stats/default-options';
+import { readKinks } from '../stats/misread/read-kinks';
 import { anyDiagnosis, WELDON } from '../charts/any-diagnosis';
 
 export const BLIND: Provenance = {
@@ -56,5 +57,16 @@ export const DOCUMENTS: [name: string, make: () => Promise<Diagnosis>][] = [
   ['one shot', () => anyDiagnosis([[3, 1]], { trials: 12 })],
   ['all alike', () => anyDiagnosis([[0, 500]], { trials: null })],
   ['2 000 trials', () => anyDiagnosis(WIDE, { trials: 2000 })],
-  ['shots in order', inOrder]
+  ['shots in order', inOrder],
+  [
+    'kinks as read',
+    () =>
+      diagnose(readKinks(6, 60, 0.05, 0.02, 3000), {
+        ...defaultOptions,
+        trials: 60,
+        geometry: 'open-bonds',
+        misread: 0.02,
+        resamples: 19
+      })
+  ]
 ];

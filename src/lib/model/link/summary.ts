@@ -1,5 +1,5 @@
 import { pLimits } from '$lib/stats/claim/p-limits';
-import type { Diagnosis, Flag, Interval, TestResult } from '$lib/stats/types';
+import type { Diagnosis, Flag, Interval, MisreadPart, TestResult } from '$lib/stats/types';
 import { differentCounts, LEAST_SHOTS_FOR_LAW, LEAST_TO_HIDE } from './hides-counts';
 import { rounded, roundedAll, roundedOutward } from './rounded';
 import { summaryWords } from './summary-words';
@@ -28,6 +28,8 @@ export interface Summary extends Pick<Diagnosis, 'answer' | 'cautions' | 'notRun
     divergenceInterval: Interval | null;
     law: Pick<Diagnosis['fit'], 'levels' | 'poissonPart'> | null;
   };
+  /** Whether misreads were allowed for, and the rate that would explain the variance; the ceilings are left out. */
+  nuisances?: { misread: Pick<MisreadPart, 'applied' | 'neededRate'> };
   tests: SummaryTest[];
   flags: Flag[];
 }
@@ -67,11 +69,17 @@ export function withoutCounts(diagnosis: Diagnosis): Summary {
     engine: { version, alpha, tolerance },
     data: { shots, trials, unit, geometry, misread, ordered, batches, lumped: lump !== null },
     ...measured,
+    ...(diagnosis.nuisances ? { nuisances: ofMisreads(diagnosis.nuisances.misread) } : {}),
     tests: diagnosis.tests.map(ofTest),
     notRun: diagnosis.notRun,
     cautions
   };
 }
+
+/** Two digits of the rate, as of a p: mean and variance, which it is made of, are told with as many as they carry. */
+const ofMisreads = ({ applied, neededRate }: MisreadPart): Summary['nuisances'] => ({
+  misread: { applied, neededRate: roundedOutward(neededRate, DIGITS_OF_P) }
+});
 
 function ofTest(test: TestResult): SummaryTest {
   const { id, p, pAdjusted, source } = test;

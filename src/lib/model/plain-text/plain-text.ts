@@ -3,6 +3,7 @@ import { VERDICTS } from '../labels';
 import { sayCounts } from './say-counts';
 import { sayData } from './say-data';
 import { sayExplanations } from './say-explanations';
+import { NUISANCES_TITLE, sayNuisances } from '../report/say-nuisances';
 import { sayFlags } from './say-flags';
 import { sayLaw } from './say-law';
 import { sayTests } from './say-tests';
@@ -22,6 +23,7 @@ export function plainText(diagnosis: Diagnosis, about: string[] = []): string {
     sayData(diagnosis, about),
     sayFlags(diagnosis.flags),
     ...(diagnosis.explanations ? [sayExplanations(diagnosis.explanations)] : []),
+    nuisances(diagnosis),
     sayTests(diagnosis),
     sayLaw(diagnosis),
     sayCounts(diagnosis),
@@ -29,3 +31,9 @@ export function plainText(diagnosis: Diagnosis, about: string[] = []): string {
   ];
   return `${parts.join('\n\n')}\n`;
 }
+
+const nuisances = (diagnosis: Diagnosis): string =>
+  [
+    NUISANCES_TITLE,
+    ...sayNuisances(diagnosis, null).map(([what, known]) => wrap(`${what}. ${known}`, '  ', '    '))
+  ].join('\n');

@@ -6,10 +6,15 @@ import type { Quotable } from './quotable';
  * resamples nor certificate. Nothing is told that the summary does not tell.
  */
 export function quotableOfSummary(summary: Summary): Quotable {
-  const { answer, data, moments, fit, tests, notRun, flags, engine } = summary;
+  const { answer, data, moments, nuisances, fit, tests, notRun, flags, engine } = summary;
   return {
     answer,
-    data: { ...data, digest: null, lump: data.lumped ? { from: null } : null },
+    data: {
+      ...data,
+      digest: null,
+      misreadApplied: nuisances?.misread.applied ?? false,
+      lump: data.lumped ? { from: null } : null
+    },
     moments,
     fit: { divergence: fit.divergenceInterval, gSquared: null, certified: null, found: null, floor: null },
     tests: tests.map(({ id, p, pAdjusted, source, limits }) => ({

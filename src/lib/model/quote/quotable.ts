@@ -18,6 +18,8 @@ export interface Quotable {
     'shots' | 'trials' | 'unit' | 'geometry' | 'misread' | 'ordered' | 'batches'
   > & {
     digest: string | null;
+    /** True where a stated misread rate was allowed for in every test. */
+    misreadApplied: boolean;
     /** The closing row; its first count is null where it is kept back. */
     lump: { from: number | null } | null;
   };
@@ -41,11 +43,15 @@ export interface Quotable {
 
 /** What there is to quote of a whole document. */
 export function quotableOf(diagnosis: Diagnosis): Quotable {
-  const { answer, data, moments, fit, tests, notRun, tails, flags, engine } = diagnosis;
+  const { answer, data, moments, nuisances, fit, tests, notRun, tails, flags, engine } = diagnosis;
   const { divergenceInterval, divergence, gSquared, certified, floor } = fit;
   return {
     answer,
-    data: { ...data, lump: data.lump && { from: data.lump.from } },
+    data: {
+      ...data,
+      misreadApplied: nuisances?.misread.applied ?? false,
+      lump: data.lump && { from: data.lump.from }
+    },
     moments,
     fit: {
       divergence:

@@ -66,6 +66,15 @@ export const DATA = {
     formula: ['p → p + 2ε(1−ε)(1−2p)'],
     source: ''
   },
+  'needed-rate': {
+    name: 'misread rate needed',
+    words: [
+      'The misread rate of a site at which equal independent kinks would have the mean and variance that were seen.',
+      'Hold it against the calibration: a rate that was measured to be smaller leaves an excess which misreads do not explain.'
+    ],
+    formula: ['s^2 = "Var"(X; ε)', '"E"(X; ε) = μ'],
+    source: ''
+  },
   lump: {
     name: 'lump',
     words: [

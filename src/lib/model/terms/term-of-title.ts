@@ -56,7 +56,15 @@ const TITLES: Record<string, TermId> = {
   Seed: 'seed',
   'Resampled histograms': 'resample',
   'Level of the answer': 'alpha',
-  'Excess that matters': 'tolerance'
+  'Excess that matters': 'tolerance',
+  'Misread sites': 'misread-rate',
+  'Ceiling as read': 'ceiling',
+  'Misread rate needed': 'needed-rate',
+  'Kinks along the chain': 'levels',
+  Drift: 'test-order',
+  Pairs: 'pair',
+  'Lumped counts': 'lump',
+  'N too small': 'critical-trials'
 };
 
 /** Titles that say all there is to say. */
@@ -72,7 +80,8 @@ export const PLAIN_TITLES: ReadonlySet<string> = new Set([
   'size',
   'trials',
   'Name',
-  'Engine'
+  'Engine',
+  'Post-selection'
 ]);
 
 /** The term that a title of a report is about; null for one that has no note. */

@@ -1,3 +1,4 @@
+import { METHOD_SOURCES } from '$lib/model/report/method-sources';
 import type { Diagnosis } from '$lib/stats/types';
 import type { Formula, Part } from '../blocks/blocks';
 import { NOTES } from './notes';
@@ -42,16 +43,16 @@ const FORMULAS: Formula[] = [
   }
 ];
 
-const SOURCES =
-  'Chernoff 1952. Clopper and Pearson 1934. Hoeffding 1956, Ann. Math. Stat. 27:713. Holm 1979. Berger and Boos 1994. Efron and Tibshirani 1993. Pitman 1997, J. Combin. Theory A 77:279. Hong 2013, Comput. Stat. Data Anal. 59:41. Ljung and Box 1978.';
-
 /** How it was done: formulas and their sources. */
 export const methodPart = (): Part => ({
   title: 'Method',
   rows: [
     {
       blocks: [{ kind: 'formulas', formulas: FORMULAS }],
-      notes: [{ title: 'Sources', paragraphs: [SOURCES] }, NOTES.notIndependent]
+      notes: [
+        { title: 'Sources', paragraphs: METHOD_SOURCES.map(([what, sources]) => `${what}. ${sources}`) },
+        NOTES.notIndependent
+      ]
     }
   ]
 });

@@ -10,6 +10,7 @@ import { testsTable } from '$lib/charts/tests-table';
 import { FLAGS, TESTS } from '$lib/model/labels';
 import { dataFacts } from '$lib/model/report/data-facts';
 import { engineFacts } from '$lib/model/report/engine-facts';
+import { sayNuisances } from '$lib/model/report/say-nuisances';
 import { PLAIN_TITLES, termOfTitle } from '$lib/model/terms/term-of-title';
 import { CHILDREN, type MathNode } from '$lib/model/terms/math-node';
 import { readFormula } from '$lib/model/terms/read-formula';
@@ -89,7 +90,8 @@ describe('every term that a report uses', () => {
       ...inWords.flatMap(({ rows }) => rows.map((row) => String(row[0]))),
       ...Object.values(TESTS),
       ...dataFacts(diagnosis, 'a name').map(([what]) => what),
-      ...engineFacts(diagnosis).map(([what]) => what)
+      ...engineFacts(diagnosis).map(([what]) => what),
+      ...sayNuisances(diagnosis, null).map(([what]) => what)
     ];
     expect(titles.filter((title) => !termOfTitle(title) && !PLAIN_TITLES.has(title))).toEqual([]);
     expect(titles.filter((title) => termOfTitle(title) && PLAIN_TITLES.has(title))).toEqual([]);

@@ -69,10 +69,19 @@ function order({ data }: Quotable): Words[] {
 }
 
 function readOut({ data }: Quotable): Words[] {
-  if (data.misread)
-    return [
-      words`A chance of ${givenPercent(data.misread)} to misread a site was stated; the tests are against laws without misreads.`
-    ];
+  if (data.misread) {
+    const stated = words`A chance of ${givenPercent(data.misread)} to misread a site was stated`;
+    if (data.misreadApplied)
+      return [
+        words`${stated}, the same at every site and independent of the others; law, ceiling, bounds and tests are of independent kinks read with it.`
+      ];
+    // Misread one by one, sites still give a sum of independent trials.
+    if (data.geometry === 'sites')
+      return [
+        words`${stated}; misread one by one, sites still give counts that are sums of independent trials.`
+      ];
+    return [words`${stated}; the tests are against laws without misreads.`];
+  }
   return data.geometry === 'sites'
     ? []
     : [[text('No chance to misread a site was stated, and none is corrected for.')]];

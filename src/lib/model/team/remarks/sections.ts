@@ -8,6 +8,7 @@ export const REMARK_SECTIONS = [
   'cumulants',
   'tests',
   'flags',
+  'nuisances',
   'method',
   'provenance'
 ] as const;
@@ -23,6 +24,7 @@ export const SECTION_NAMES: Record<RemarkSection, string> = {
   cumulants: 'the cumulants',
   tests: 'the tests',
   flags: 'what the counts point to',
+  nuisances: 'what can look like interaction',
   method: 'the method',
   provenance: 'where the report comes from'
 };
