@@ -11,6 +11,7 @@ import { join, resolve } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { demoWords } from './start/demo-words';
 import { listen } from './start/listen';
+import { refuseForm } from './start/refuse-form';
 import { stopCleanly } from './start/stop-cleanly';
 
 /** `npm start`: makes the database ready, serves the built application, and says where. */
@@ -48,7 +49,7 @@ async function start(): Promise<void> {
     : SECURITY_HEADERS;
   answer = (request, response) => {
     for (const [name, value] of Object.entries(headers)) response.setHeader(name, value);
-    handler(request, response);
+    if (!refuseForm(request, response)) handler(request, response);
   };
 
   console.log(`

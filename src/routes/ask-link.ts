@@ -1,6 +1,7 @@
 import { can } from '$lib/server/access/can';
 import { storageTrouble } from '$lib/server/services/datasets/storage-trouble';
 import { openLink, type LinkRefusal, type OpenLink } from '$lib/server/services/links/open-link';
+import { spendFile } from '$lib/server/services/links/spend-file';
 import { error, type RequestEvent } from '@sveltejs/kit';
 import { problem } from './problem';
 
@@ -50,6 +51,16 @@ export function askLinkJson(event: Event, action: LinkAction): Opened | { ok: fa
   const { status, message } = WORDS[asked.reason];
   const code = asked.reason === 'unknown' ? 'not-found' : asked.reason;
   return { ok: false, response: problem({ status, code, title: message }) };
+}
+
+/** askLinkJson for a PDF or a zip, which take the server half a second each: so many a minute, then 429. */
+export async function askLinkFile(event: Event): Promise<Opened | { ok: false; response: Response }> {
+  const spent = await spendFile(event.params.token ?? '');
+  if (spent.ok) return askLinkJson(event, 'see');
+  const title = `Too many files were made through this link. Wait ${spent.seconds} s and ask again.`;
+  const response = problem({ status: 429, code: 'too-many-requests', title });
+  response.headers.set('retry-after', String(spent.seconds));
+  return { ok: false, response };
 }
 
 function ask(event: Event, action: LinkAction): Opened | { ok: false; reason: Refusal } {

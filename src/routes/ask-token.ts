@@ -21,13 +21,15 @@ const REALM = 'Bearer realm="severalty"';
  * never a cookie. A token that is malformed, unknown, expired, revoked or of somebody who left is refused in one and
  * the same way; a scope or role that does not reach is told, since it is the script's own. Asked before any id is looked
  * up, so an id of another team is 404 for everybody.
+ *
+ * @param cost as how many requests it counts
  */
-export async function askToken(event: Event, scope: Scope): Promise<AskedToken> {
+export async function askToken(event: Event, scope: Scope, cost = 1): Promise<AskedToken> {
   const header = event.request.headers.get('authorization');
   const text = /^Bearer +(\S+)$/i.exec(header ?? '')?.[1];
   const opened = text ? openToken(event.locals.db, text) : ({ ok: false } as const);
   const limit = opened.ok ? 'token' : 'unknown';
-  const spent = await spendRequest(limit, opened.ok ? opened.actor.token.id : clientOf(event));
+  const spent = await spendRequest(limit, opened.ok ? opened.actor.token.id : clientOf(event), cost);
   const fields = limitHeaders(limit, spent);
   const refuse = (why: Problem, more: Record<string, string> = {}): AskedToken => {
     const response = problem(why);

@@ -5,7 +5,7 @@ import type { Actor } from '$lib/server/services/access/actor';
 import { and, eq } from 'drizzle-orm';
 import { request } from 'node:http';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { ask, CSV_TYPE, JSON_TYPE, seedToken } from './support/api';
+import { ask, CSV_TYPE, JSON_TYPE, REPORT_FILES, seedToken } from './support/api';
 import { seedPerson, seedTeam, withDatabaseOf, type SeededPerson } from './support/seed-people';
 import { seedReports } from './support/seed-reports';
 import { sessionOf } from './support/session-of';
@@ -100,7 +100,7 @@ describe('who may ask', () => {
       `/datasets/${dataset}`,
       `/datasets/${dataset}/counts.csv`,
       `/jobs/${job}`,
-      ...['', '/document.json', '/numbers.csv', '/report.pdf'].map((file) => `/reports/${report}${file}`)
+      ...REPORT_FILES.map((file) => `/reports/${report}${file}`)
     ];
     for (const path of paths) {
       const response = await ask(server, token, path);

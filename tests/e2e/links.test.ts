@@ -1,5 +1,6 @@
 import { membership } from '$lib/server/db/schema';
 import type { TeamLink } from '$lib/model/link/team-link';
+import { LINK_FILES } from '$lib/server/services/links/spend-file';
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { plainLink } from '../support/links';
@@ -81,6 +82,38 @@ describe('links of a report, by their JSON routes', () => {
     expect(await as('observer')).toEqual([403, 403, 403, 403]);
     expect(await as('stranger')).toEqual([404, 404, 404, 404]);
     expect((await fetch(root)).status).toBe(401);
+  });
+});
+
+describe('the PDF and the zip of a link', () => {
+  it('are made so many times a minute, then refused until later; the page stays, and no visit is used up', async () => {
+    const { path, id } = await seedLink(server, there, { shows: 'report' });
+    const get = (file: string) => fetch(`${server.address}${path}/${file}`);
+    const visits = async () => {
+      const { links } = (await (await page.request.get(root)).json()) as { links: TeamLink[] };
+      return links.find((link) => link.id === id)?.visits;
+    };
+    for (let made = 0; made < LINK_FILES.quota; made++)
+      expect((await get(made % 2 ? 'bundle.zip' : 'report.pdf')).status, `file ${made}`).toBe(200);
+    const before = await visits();
+    for (const file of ['report.pdf', 'bundle.zip']) {
+      const refused = await get(file);
+      expect(refused.status).toBe(429);
+      expect(refused.headers.get('content-type')).toBe('application/problem+json');
+      const seconds = Number(refused.headers.get('retry-after'));
+      expect(seconds).toBeGreaterThanOrEqual(1);
+      expect(seconds).toBeLessThanOrEqual(LINK_FILES.window);
+      const told = (await refused.json()) as { code: string; title: string };
+      expect([told.code, told.title]).toEqual([
+        'too-many-requests',
+        `Too many files were made through this link. Wait ${seconds} s and ask again.`
+      ]);
+    }
+    expect(await visits()).toBe(before);
+    expect((await get('report.json')).status).toBe(200);
+    expect((await fetch(server.address + path)).status).toBe(200);
+    const other = await seedLink(server, there, { shows: 'report' });
+    expect((await fetch(`${server.address}${other.path}/report.pdf`)).status).toBe(200);
   });
 });
 

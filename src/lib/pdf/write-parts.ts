@@ -71,13 +71,20 @@ export async function writeParts(
   setPart(flow, answer, { rule: false });
   // The answer has its page to itself.
   if (flow.pageNumber === 1) flow.newPage();
-  for (const part of parts) setPart(flow, part, { rule: true });
+  for (const part of parts) {
+    await others();
+    setPart(flow, part, { rule: true });
+  }
   flow.finish();
   root.end();
   pageFeet(pen, foot);
+  await others();
   doc.end();
   return written;
 }
+
+/** Lets whatever else waits have its turn: a PDF takes half a second, in which a server would answer nobody. */
+const others = (): Promise<void> => new Promise((go) => setTimeout(go, 0));
 
 /** Whether something said has signs that neither the text nor the symbol font draws. */
 function needsAnyFont(said: unknown, pen: Pen): boolean {

@@ -1,3 +1,4 @@
+import { OPERATIONS } from '$lib/model/api/operations';
 import type { TokenForm } from '$lib/model/api/token-form';
 import type { Actor } from '$lib/server/services/access/actor';
 import { makeToken } from '$lib/server/services/tokens/make-token';
@@ -41,3 +42,8 @@ export function ask(
 
 export const JSON_TYPE = { 'content-type': 'application/json' };
 export const CSV_TYPE = { 'content-type': 'text/csv' };
+
+/** What can be asked for below the address of a report: '' for the report itself, and its files. */
+export const REPORT_FILES = OPERATIONS.map(({ path }) => /^\/reports\/\{id\}(.*)$/.exec(path)?.[1]).filter(
+  (file) => file !== undefined
+);

@@ -91,6 +91,9 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
         '/',
         '/#counts=0:185,1:1149,2:3265,3:5475,4:6114,5:5194,6:3067,7:1331,8:403,9:105,10:14,11:4&trials=12&sum=26306'
       ],
+      '/guide': ['/guide'],
+      '/guide/terms': ['/guide/terms'],
+      '/api': ['/api'],
       '/(account)/teams': ['/teams'],
       '/(account)/account': ['/account'],
       '/(account)/sign-in': ['/sign-in'],
@@ -110,6 +113,7 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       '/(team)/team/[team=slug]/reports/[id]': [`${root}/reports/${bunched.id}`],
       '/(team)/team/[team=slug]/reports/compare': [`${root}/reports/compare?a=${bunched.id}&b=${second.id}`],
       '/(team)/team/[team=slug]/settings': [`${root}/settings`],
+      '/(team)/team/[team=slug]/scripts': [`${root}/scripts`],
       '/(team)/team/[team=slug]/members': [`${root}/members`],
       '/(team)/team/[team=slug]/leave': [`${root}/leave`],
       '/(team)/team/[team=slug]/aside': [`${root}/aside`],

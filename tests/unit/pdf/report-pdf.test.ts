@@ -83,6 +83,15 @@ describe.each(DOCUMENTS)('report of %s', (name, make) => {
     expect(Math.min(...seconds)).toBeLessThan(1);
   });
 
+  it('lets others have their turn while it is made', async () => {
+    let turns = 0;
+    const counting = setInterval(() => turns++, 0);
+    await reportPdf(inputOf(document), serverFonts);
+    clearInterval(counting);
+    // One after each part but the answer.
+    expect(turns).toBeGreaterThanOrEqual(8);
+  });
+
   it('answers on the first page: verdict, statement, how sure, how big, what else, and the counts', () => {
     const first = pdf.marked.filter(({ page }) => page === 0);
     const text = plainSpaces(first.map((marked) => marked.text).join(' '));

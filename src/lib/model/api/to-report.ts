@@ -37,6 +37,13 @@ export function toReport(report: Saved, statement: string | null, at: string): A
     sha256: report.sha256,
     conditions: report.conditions,
     options: { trials, unit, geometry, misread, alpha, tolerance, resamples, seed },
-    files: { document: `${at}/document.json`, numbers: `${at}/numbers.csv`, pdf: `${at}/report.pdf` }
+    files: {
+      document: `${at}/document.json`,
+      numbers: `${at}/numbers.csv`,
+      distribution: `${at}/distribution.csv`,
+      tails: `${at}/tails.csv`,
+      pdf: `${at}/report.pdf`,
+      bundle: `${at}/bundle.zip`
+    }
   };
 }

@@ -8,6 +8,9 @@ export const REQUEST_LIMITS = {
   unknown: { quota: 60, window: 60 }
 } as const;
 
+/** Requests that a PDF or a zip counts as: it takes half a second of one core, a JSON answer a few milliseconds. */
+export const FILE_COST = 10;
+
 export type RequestLimit = keyof typeof REQUEST_LIMITS;
 
 export interface SpentRequest {
@@ -18,19 +21,19 @@ export interface SpentRequest {
   seconds: number;
 }
 
-/** The counts live in memory, as those of signing in do: a restart forgets them. */
+/** The counts live in memory, as those of signing in do: a restart forgets them. `cost` is as how many requests one counts. */
 export function makeRequestLimits(limits: Record<RequestLimit, { quota: number; window: number }>) {
   const make = (name: RequestLimit) =>
     new RateLimiterMemory({ keyPrefix: name, points: limits[name].quota, duration: limits[name].window });
   const limiters = { token: make('token'), unknown: make('unknown') };
-  return async (limit: RequestLimit, key: string): Promise<SpentRequest> => {
+  return async (limit: RequestLimit, key: string, cost = 1): Promise<SpentRequest> => {
     const spent = (res: RateLimiterRes, ok: boolean): SpentRequest => ({
       ok,
       left: Math.max(0, res.remainingPoints),
       seconds: Math.max(1, Math.ceil(res.msBeforeNext / 1000))
     });
     try {
-      return spent(await limiters[limit].consume(key), true);
+      return spent(await limiters[limit].consume(key, cost), true);
     } catch (refused) {
       if (!(refused instanceof RateLimiterRes)) throw refused;
       return spent(refused, false);

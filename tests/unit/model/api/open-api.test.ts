@@ -14,7 +14,7 @@ const doors = sourceFiles(['src/routes/api/v1']).flatMap(({ path, text }) => {
   const parts = text.split(/^export const /m).slice(1);
   return parts.map((part) => {
     const method = /^\w+/.exec(part)?.[0].toLowerCase();
-    const scope = /askToken\(event, '(\w+)'\)/.exec(part)?.[1];
+    const scope = /askToken\(event, '(\w+)'[,)]/.exec(part)?.[1];
     return `${method} ${folder.replace(/\[(\w+)\]/g, '{$1}')} ${scope}`;
   });
 });

@@ -15,6 +15,14 @@ describe('the limit on requests', () => {
     expect(await spend('unknown', 'a')).toMatchObject({ ok: true, left: 1 });
   });
 
+  it('counts some requests as several', async () => {
+    const ten = { quota: 10, window: 60 };
+    const spend = makeRequestLimits({ token: ten, unknown: ten });
+    expect(await spend('token', 'a', 7)).toMatchObject({ ok: true, left: 3 });
+    expect(await spend('token', 'a')).toMatchObject({ ok: true, left: 2 });
+    expect(await spend('token', 'a', 7)).toMatchObject({ ok: false, left: 0 });
+  });
+
   // Field syntax: the examples of draft-ietf-httpapi-ratelimit-headers, sections 3 and 4, written down from memory.
   it('is told in the fields of the draft', () => {
     const { quota, window } = REQUEST_LIMITS.token;

@@ -66,9 +66,48 @@ export const REPORT_OPERATIONS: Operation[] = [
   },
   {
     ...one,
+    id: 'readDistribution',
+    path: '/reports/{id}/distribution.csv',
+    summary: 'Take the distribution as CSV',
+    answer: {
+      status: 200,
+      about: 'One count a line: shots, share with its interval, best law; RFC 4180',
+      content: { type: 'text/csv', schema: null, about: 'CSV' }
+    },
+    refusals: damaged
+  },
+  {
+    ...one,
+    id: 'readTails',
+    path: '/reports/{id}/tails.csv',
+    summary: 'Take both tails as CSV',
+    answer: {
+      status: 200,
+      about: 'One tail a line: shots, share with its interval, best law, bounds; RFC 4180',
+      content: { type: 'text/csv', schema: null, about: 'CSV' }
+    },
+    refusals: damaged
+  },
+  {
+    ...one,
+    id: 'readBundle',
+    path: '/reports/{id}/bundle.zip',
+    summary: 'Take everything in one file',
+    about:
+      'The document, its tables, charts, the report for print, the counts, and how to compute it again. Counts as ten requests.',
+    answer: {
+      status: 200,
+      about: 'A zip with checksums of what is in it; the same report gives the same bytes',
+      content: { type: 'application/zip', schema: null, about: 'Zip' }
+    },
+    refusals: damaged
+  },
+  {
+    ...one,
     id: 'readPdf',
     path: '/reports/{id}/report.pdf',
     summary: 'Take the report for print',
+    about: 'Counts as ten requests.',
     answer: {
       status: 200,
       about: 'A tagged PDF; the same report gives the same bytes',

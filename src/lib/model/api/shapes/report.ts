@@ -38,7 +38,14 @@ export const reportSchema = z.object({
     seed: z.int()
   }),
   files: z
-    .object({ document: z.string(), numbers: z.string(), pdf: z.string() })
+    .object({
+      document: z.string(),
+      numbers: z.string(),
+      distribution: z.string(),
+      tails: z.string(),
+      pdf: z.string(),
+      bundle: z.string()
+    })
     .describe('Addresses, from the root of the server')
 });
 export type ApiReport = z.infer<typeof reportSchema>;

@@ -1,11 +1,11 @@
 import { pdfOfLink } from '$lib/server/services/links/pdf-of-link';
-import { askLinkJson } from '../../../ask-link';
+import { askLinkFile } from '../../../ask-link';
 import { problem } from '../../../problem';
 import type { RequestHandler } from './$types';
 
 /** What the link shows, for print. */
 export const GET: RequestHandler = async (event) => {
-  const asked = askLinkJson(event, 'see');
+  const asked = await askLinkFile(event);
   if (!asked.ok) return asked.response;
   const made = await pdfOfLink(asked.view);
   if (!made.ok)

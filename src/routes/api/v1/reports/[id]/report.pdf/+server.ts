@@ -1,3 +1,4 @@
+import { FILE_COST } from '$lib/server/auth/request-limits';
 import { pdfOfReport } from '$lib/server/services/reports/pdf-of-report';
 import { attachment } from '../../../../../(team)/team/[team=slug]/datasets/attachment';
 import { askToken } from '../../../../../ask-token';
@@ -7,7 +8,7 @@ import type { RequestHandler } from './$types';
 
 /** A report for print. */
 export const GET: RequestHandler = async (event) => {
-  const asked = await askToken(event, 'read');
+  const asked = await askToken(event, 'read', FILE_COST);
   if (!asked.ok) return asked.response;
   // Where people read it: the same bytes as the page gives.
   const address = `${event.url.origin}/team/${asked.team.slug}/reports/${event.params.id}`;
