@@ -47,7 +47,7 @@ function otherCauses({ flags }: Quotable): Words {
     ];
   return [
     text(
-      `This does not tell the cause. Apart from interaction between defects it could be ${[...new Set(causes)].join('; ')}.`
+      `This does not tell the cause. It could be interaction between defects, or one of these: ${[...new Set(causes)].join('; ')}.`
     )
   ];
 }

@@ -2,6 +2,7 @@ import type { Quotable } from '../quotable';
 import { SOURCES_BY_YEAR } from '../sources';
 import { math, text, words, type Words } from '../span';
 import { counted } from './say-number';
+import { sayMisread } from './say-misread';
 import { testedTrials } from './units';
 
 /** What the divergence is; nothing where it is kept back. */
@@ -31,6 +32,8 @@ export function sayScatter(quotable: Quotable): Words[] {
 }
 
 function ceiling(quotable: Quotable): Words {
+  if (quotable.data.misreadApplied)
+    return words`The variance was compared with its ceiling, the largest that independent kinks with this mean can have${sayMisread(quotable)}${quotable.data.lump ? ' and lumped in the same way' : ''}.`;
   if (quotable.data.lump)
     return [
       text(

@@ -2,6 +2,7 @@ import { roundToDigits } from '../numbers/round-to-digits';
 import type { Quotable, QuotableTest } from '../quotable';
 import { number, words, type Words } from '../span';
 import { sayHowOften } from '../../say-p';
+import { sayMisread } from './say-misread';
 import { counted, sayPValue, whole } from './say-number';
 import { thing } from './units';
 
@@ -18,7 +19,7 @@ export function sayEvidence(quotable: Quotable): Words[] {
 function certified(quotable: Quotable): Words {
   const { certificate, data } = quotable;
   const { p, side, count, bound, shots } = certificate!;
-  return words`With a mean within its limits no independent trials, whatever their probabilities, give a shot ${whole(count)}${side === 'high' ? ' or more' : count === 0 ? '' : ' or fewer'} ${thing(quotable)}s with a chance above ${number(roundToDigits(bound, 2))}, and ${whole(shots)} of ${whole(data.shots)} shots have them: so heavy a tail ${often(p, true)} (exact certificate, ${sayPValue(p, true)}).`;
+  return words`With a mean within its limits no independent trials, whatever their probabilities${sayMisread(quotable)}, give a shot ${whole(count)}${side === 'high' ? ' or more' : count === 0 ? '' : ' or fewer'} ${thing(quotable)}s with a chance above ${number(roundToDigits(bound, 2))}, and ${whole(shots)} of ${whole(data.shots)} shots have them: so heavy a tail ${often(p, true)} (exact certificate, ${sayPValue(p, true)}).`;
 }
 
 /** How often, from p as it is printed: "in 19 of 100" beside "p = 0.18" would look like a mistake. */

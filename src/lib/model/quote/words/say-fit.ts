@@ -2,10 +2,15 @@ import { roundToDigits } from '../numbers/round-to-digits';
 import type { Quotable } from '../quotable';
 import { SOURCES_BY_YEAR } from '../sources';
 import { math, number, text, words, type Words } from '../span';
+import { sayMisread } from './say-misread';
 import { testedTrials } from './units';
 
 /** Which law was fitted. */
 export function sayFit(quotable: Quotable): Words[] {
+  if (quotable.data.misreadApplied)
+    return [
+      words`The law of independent kinks along an open chain of ${math('N')} bonds${sayMisread(quotable)}, was fitted by maximum likelihood; up to three kink probabilities were searched, and not every order of the bonds, so a nearer law may exist.`
+    ];
   if (testedTrials(quotable) === null)
     return [
       [

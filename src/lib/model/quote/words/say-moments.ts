@@ -2,6 +2,7 @@ import { roundToDigits } from '../numbers/round-to-digits';
 import type { Quotable } from '../quotable';
 import { math, number, words, type Words } from '../span';
 import { sayRounded } from './say-number';
+import { sayMisread } from './say-misread';
 import { thing } from './units';
 
 /** Mean, variance, variance over ceiling and divergence, each rounded to its uncertainty. */
@@ -17,7 +18,7 @@ export function sayMoments(quotable: Quotable): Words[] {
     const over =
       dispersion.value === null
         ? []
-        : words`, which is ${sayRounded(dispersion)} times the ceiling of ${data.lump ? 'equal trials lumped in the same way' : 'independent trials with this mean'}`;
+        : words`, which is ${sayRounded(dispersion)} times the ceiling of ${data.lump ? 'equal trials lumped in the same way' : 'independent trials with this mean'}${sayMisread(quotable)}`;
     out.push(
       words`The mean is ${sayRounded(mean)} ${what} a shot and the variance ${sayRounded(variance)}${over}${data.lump ? '; mean and variance are lower limits, since the largest counts were lumped' : ''}.`
     );
@@ -29,7 +30,7 @@ export function sayMoments(quotable: Quotable): Words[] {
         ? []
         : words`${hasInterval ? '; as found, ' : '; '}${math('G²')} is ${number(roundToDigits(fit.gSquared, 4))}`;
     out.push(
-      words`The best independent-trial law lies ${sayRounded(fit.divergence, 'D')} nats a shot from the counts${hasInterval ? ', chance taken off' : ''}${found}.`
+      words`${data.misreadApplied ? 'The best law found of independent kinks so read' : 'The best independent-trial law'} lies ${sayRounded(fit.divergence, 'D')} nats a shot from the counts${hasInterval ? ', chance taken off' : ''}${found}.`
     );
   }
   return out;

@@ -29,7 +29,7 @@ export function sayTestsRun(quotable: Quotable): Words[] {
 const SMALL = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight'];
 const capital = (value: number): string => SMALL[value] ?? String(value);
 
-function origins({ tests, engine }: Quotable): Words[] {
+function origins({ data, tests, engine }: Quotable): Words[] {
   const of = (source: TestResult['source']) => tests.filter((test) => test.source === source);
   const drawn = of('resampled');
   const [permuted, limits] = [of('permuted'), of('limit')];
@@ -37,7 +37,11 @@ function origins({ tests, engine }: Quotable): Words[] {
   const fitted = drawn.some(({ id }) => id !== 'ceiling');
   const ways = [
     ...(fitted ? ['histograms drawn from the fitted law, each fitted anew'] : []),
-    ...(ceiling ? [`${fitted ? 'for the variance, ' : ''}histograms drawn from equal trials`] : []),
+    ...(ceiling
+      ? [
+          `${fitted ? 'for the variance, ' : ''}histograms drawn from ${data.misreadApplied ? 'the most dispersed of these laws' : 'equal trials'}`
+        ]
+      : []),
     ...(permuted.length > 0
       ? [`${drawn.length > 0 ? `for ${namesOf(permuted)}, ` : ''}permutations of the shots`]
       : [])
