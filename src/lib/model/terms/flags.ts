@@ -24,7 +24,7 @@ const EACH = {
   'flag-coarsening': {
     name: 'coarsening',
     words: [
-      'Only the low tail is heavy with the empty shots set aside: defects met and vanished in pairs.',
+      'Only the low tail is heavy with the empty shots set aside, as when defects meet and vanish in pairs.',
       'Dead shots, post-selection and slow drift look the same.'
     ],
     formula: ['A + A → 0'],

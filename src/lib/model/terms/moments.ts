@@ -21,7 +21,7 @@ export const MOMENTS = {
     name: 'Fano factor',
     words: [
       'Variance over mean, 1 for rare events.',
-      'A value above 1 rules out independent trials whatever N is; a value below 1 means little until N is known.'
+      'Further above 1 than chance explains, no independent trials give it whatever N is; a value below 1 means little until N is known.'
     ],
     formula: ['F = κ_2/κ_1'],
     source: 'Fano 1947'
@@ -40,7 +40,7 @@ export const MOMENTS = {
     name: 'variance over ceiling',
     words: [
       'The variance of the counts in units of its ceiling.',
-      'Above 1 nothing independent gives it; below 1 the trials differ or the defects keep apart, and the variance cannot tell which.'
+      'Further above 1 than chance explains, nothing independent gives it; below 1 the trials differ or the defects keep apart, and the variance cannot tell which.'
     ],
     formula: ['frac{s^2}{μ(1 − μ/N)}'],
     source: ''
