@@ -27,7 +27,7 @@ export function cautions(
   }
   if (misread?.applies) {
     out.push(
-      `A misread rate of ${formatPercent(misread.rate)} a site was stated, and every test, bound and flag here allows for exactly that rate, the same at every site and independent of the others. An error of the rate itself is not allowed for: compare the rate needed with the limits of the calibration.`
+      `A misread rate of ${formatPercent(misread.rate)} a site was stated, and every test, bound and flag here allows for exactly that rate, the same at every site and independent of the others. An error of the rate itself is not allowed for: compare the rate needed with the limits of the calibration. The best law is searched among few orders of the bonds, so independent kinks that are all but sure on some bonds and excluded on others may look like a misfit; ceiling and certificate do not depend on it.`
     );
   } else if (misread?.reason) {
     out.push(misread.reason);

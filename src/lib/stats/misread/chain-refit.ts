@@ -48,12 +48,12 @@ export function chainRefit(
   const lengths = (bonds > long ? [0.25, 0.7] : shares).map((share) =>
     Math.min(bonds - 1, Math.max(1, Math.round(share * bonds)))
   );
-  const values = lengths.map((many) => attempt(twoLevels(bonds, many, false, moments, rate)));
+  const values = lengths.map((many) => attempt(twoLevels(bonds, many, 1, moments, rate)));
   const top = values.indexOf(Math.max(...values));
   if (bonds <= long && values[top] > -Infinity) {
     for (const stride of [bonds / 8, -bonds / 8]) {
       const many = lengths[top] + Math.round(stride);
-      attempt(twoLevels(bonds, many, false, moments, rate));
+      attempt(twoLevels(bonds, many, 1, moments, rate));
     }
   }
   return asRefit(best, rate);

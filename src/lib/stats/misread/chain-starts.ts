@@ -8,16 +8,13 @@ export function evenChain(bonds: number, mean: number, rate: number): Chain {
   return { p: [Math.min(1, Math.max(0, p))], runs: [{ level: 0, trials: bonds }] };
 }
 
-/** Stretches into which bonds of the rarer level are at most set apart. */
-const mostApart = 12;
-
 /**
- * Runs of two levels, `many` bonds of the first: in one stretch each, or with the rarer level in stretches spread evenly
- * along the chain.
+ * Runs of two levels, `many` bonds of the first: in one stretch each, or with the rarer level in `apart` stretches (as
+ * many as it has bonds, at most) spread evenly along the chain.
  */
-export function twoLevelRuns(bonds: number, many: number, apart: boolean): Chain['runs'] {
+export function twoLevelRuns(bonds: number, many: number, apart: number): Chain['runs'] {
   const few = bonds - many;
-  const stretches = apart ? Math.min(many, few, mostApart) : 1;
+  const stretches = Math.min(many, few, apart);
   if (stretches === 1) {
     return [
       { level: 0, trials: many },
@@ -46,7 +43,7 @@ export function twoLevelRuns(bonds: number, many: number, apart: boolean): Chain
 export function twoLevels(
   bonds: number,
   many: number,
-  apart: boolean,
+  apart: number,
   moments: { mean: number; variance: number },
   rate: number
 ): Chain | null {
