@@ -13,6 +13,6 @@ export function certificateWords({ tails, data }: Diagnosis): string {
     `${formatCount(certificate.count)} or ${side}. Independent trials with a mean of ` +
     `${formatNumber(certificate.mean, 4)}, the unfavourable end of its interval, give at most ` +
     `${sayShare(certificate.bound)} a shot. With all ${formatCount(certificate.thresholds)} counts tried allowed for, so ` +
-    `heavy a tail ${sayHowOften(certificate.p)} (exact certificate, p = ${formatNumber(certificate.p, 2)}).`
+    `heavy a tail ${sayHowOften(certificate.p, certificate.p)} (exact certificate, p ≤ ${formatNumber(certificate.p, 2)}).`
   );
 }

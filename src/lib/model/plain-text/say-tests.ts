@@ -19,7 +19,7 @@ export function sayTests(diagnosis: Diagnosis): string {
     const side = certificate.side === 'high' ? 'more' : 'fewer';
     lines.push(
       wrap(
-        `exact certificate, without fit or simulation: ${formatCount(certificate.shots)} of ${formatCount(data.shots)} shots had ${formatCount(certificate.count)} or ${side}, where independent trials give at most ${formatNumber(certificate.bound, 2)} a shot; with the ${formatCount(certificate.thresholds)} counts tried allowed for, it ${sayHowOften(certificate.p)} (p = ${formatNumber(certificate.p, 2)}).`,
+        `exact certificate, without fit or simulation: ${formatCount(certificate.shots)} of ${formatCount(data.shots)} shots had ${formatCount(certificate.count)} or ${side}, where independent trials give at most ${formatNumber(certificate.bound, 2)} a shot; with the ${formatCount(certificate.thresholds)} counts tried allowed for, it ${sayHowOften(certificate.p, certificate.p)} (p ≤ ${formatNumber(certificate.p, 2)}, an upper bound).`,
         '  – '
       )
     );

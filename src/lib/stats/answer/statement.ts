@@ -55,6 +55,15 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   )
     return ' But the rate changed while the shots were taken, which alone makes counts look bunched.';
   if (raised('misreads')) return ' But misread sites alone could give this.';
+  const { options, misread, moments } = evidence;
+  // A misread on sites that are counted themselves leaves the trials independent.
+  if (
+    options.misread &&
+    options.geometry !== 'sites' &&
+    !misread?.applies &&
+    (moments.dispersion.value ?? 0) > 1
+  )
+    return ' But the stated misread rate could not be allowed for, and misread sites alone could give this.';
   return '';
 }
 

@@ -19,7 +19,7 @@ export interface RuledOut {
  * Explanations within a diagnosis. Where it tested kinks as they are read, its law and its ceiling are not those of
  * plain independent trials: then only equal trials stand beside the stories, and there is no limit for pairs.
  */
-export function explainRuledOut(
+export async function explainRuledOut(
   { counts, options, moments, tested, tests }: RuledOut,
   pace: Pace
 ): Promise<Explanations> {
@@ -30,5 +30,8 @@ export function explainRuledOut(
     fitTest: ('rate' in levels ? undefined : tests.find(({ id }) => id === 'fit')) ?? null
   };
   const plain = tested.ceiling === null ? moments.dispersion : { value: null, low: null, high: null };
-  return explanationsOf(counts, options, { ...moments, dispersion: plain }, independent, pace);
+  const found = await explanationsOf(counts, options, { ...moments, dispersion: plain }, independent, pace);
+  if (!('rate' in levels)) return found;
+  const statement = `${found.statement} The stories are told of the counts as read: the misread rate that the tests allow for is in none of them.`;
+  return { ...found, statement };
 }

@@ -35,8 +35,9 @@ export function explainStatement(ranked: Explanation[], tied: ExplanationId[], a
       : `${capital(joined(tied))} describe the counts about equally well: these shots cannot tell them apart.`;
   const { goodness } = first;
   if (!goodness) return lead;
+  const it = others.length > 0 ? 'the first of them' : 'it';
   if (goodness.p <= Math.max(alpha, goodness.smallestP))
-    return `${lead} But it does not fit either: counts so far from ${others.length ? 'the first of them' : 'it'} ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. Something else is at work, or more than one of them.`;
-  const how = goodness.p > 0.05 ? 'It fits' : 'It fits badly';
-  return `${lead} ${how}: counts so far from ${others.length ? 'the first of them' : 'it'} ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. That the counts fit a story does not say that it happened.`;
+    return `${lead} But ${it} does not fit either: counts so far from it ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. Something else is at work, or more than one of them.`;
+  const how = goodness.p > 0.05 ? 'fits' : 'fits badly';
+  return `${lead} ${capital(it)} ${how}: counts so far from it ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. That the counts fit a story does not say that it happened.`;
 }

@@ -14,8 +14,8 @@ export function sayP(p: number, smallestP: number, resamples: number): string {
 /** "would turn up once in 3 400 repeats of the experiment", or "in 36 of 100 repeats" when common. */
 export function sayHowOften(p: number, smallestP = 0): string {
   if (p >= 0.995) return 'would turn up in practically every repeat of the experiment';
-  if (p > 0.1) return `would turn up in ${Math.round(100 * p)} of 100 repeats of the experiment`;
   const atMost = p <= smallestP ? 'at most ' : '';
+  if (p > 0.1) return `would turn up in ${atMost}${Math.round(100 * p)} of 100 repeats of the experiment`;
   return `would turn up ${atMost}once in ${rounded(1 / p)} repeats of the experiment`;
 }
 
