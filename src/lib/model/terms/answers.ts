@@ -44,7 +44,11 @@ export const ANSWERS = {
       'About how many shots in all would turn undecided into one of the other answers, if the variance stays where it is.',
       'The interval of the variance narrows with the square root of the shots.'
     ],
-    formula: ['frac{s^2}{"ceiling"} ± 1.96 sqrt{(2 + κ_4/κ_2^2)/S}'],
+    formula: [
+      'S = (2 + κ_4/κ_2^2) frac{2.80^2}{(τ − x)^2}',
+      '"or, if fewer, with" frac{(z_{α/m} + 0.84)^2}{x^2}',
+      'x = s^2/"ceiling" − 1'
+    ],
     source: ''
   },
   seed: {
@@ -63,6 +67,15 @@ export const ANSWERS = {
       'Two results with the same digest are about the same counts, whatever file they came in.'
     ],
     formula: ['"sha256"(n_1:h_1, n_2:h_2, …)'],
+    source: ''
+  },
+  quote: {
+    name: 'words to quote',
+    words: [
+      'The result, a methods paragraph and a citation, all written from the one document of this report.',
+      'The citation carries the sha256 of that document, so a reader who has the file can see that it is the same.'
+    ],
+    formula: ['"sha256"("document")'],
     source: ''
   }
 } satisfies Terms;

@@ -45,7 +45,7 @@ export const DATA = {
       'On a ring the kinks come two by two, so every count is even and the pair is the thing that can be independent.',
       'Half of the count is then tested against half of the trials.'
     ],
-    formula: ['n → n/2', 'N → N/2'],
+    formula: ['n/2 "pairs of" N/2'],
     source: ''
   },
   geometry: {
@@ -61,9 +61,9 @@ export const DATA = {
     name: 'misread rate, ε',
     words: [
       'The probability that one site is read wrongly.',
-      'On bonds a wrong site toggles both of its neighbours, so independent kinks look bunched.'
+      'On a chain or ring a wrong site toggles the two bonds beside it, so independent kinks look bunched.'
     ],
-    formula: ['p → p + 2ε(1−ε)(1−2p)'],
+    formula: ['p_{"read"} = p + 2ε(1−ε)(1−2p)'],
     source: ''
   },
   'needed-rate': {

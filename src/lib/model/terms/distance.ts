@@ -9,6 +9,7 @@ export const DISTANCE = {
       'It is never below 0, and chance alone keeps it above 0 even when the law is true.'
     ],
     formula: ['D = sum_n hat{p}_n ln frac{hat{p}_n}{f_n}', 'hat{p}_n = h_n/S'],
+    // Ann. Math. Stat. 22:79 (m).
     source: 'Kullback and Leibler 1951',
     printed: true
   },
@@ -18,7 +19,7 @@ export const DISTANCE = {
       'The divergence less the mean that counts drawn from the best law have after a fit of their own.',
       'What is left, with its interval, says how far the law really is; an interval that holds 0 says that it may not be far at all.'
     ],
-    formula: ['D_c = D − "mean of" D^∗'],
+    formula: ['D_c = D − "mean of" D_{"resampled"}'],
     source: 'Efron and Tibshirani 1993'
   },
   'g-squared': {

@@ -18,7 +18,7 @@ const EACH = {
       'Only the high tail is heavy: now and then a shot has far too many defects.',
       'Cosmic rays, spurious resets and other rare events do that.'
     ],
-    formula: ['T_n > S F_n', 'n "far above" μ'],
+    formula: ['T_n > S F_n', 'F_n = P(X ≥ n)', 'n "far above" μ'],
     source: ''
   },
   'flag-coarsening': {
@@ -27,7 +27,7 @@ const EACH = {
       'Only the low tail is heavy with the empty shots set aside, as when defects meet and vanish in pairs.',
       'Dead shots, post-selection and slow drift look the same.'
     ],
-    formula: ['A + A → 0'],
+    formula: ['n "becomes" n − 2'],
     source: ''
   },
   'flag-pairing': {
@@ -54,7 +54,7 @@ const EACH = {
       'Batches differ, or the order of the shots matters.',
       'A probability that moves between shots widens the counts exactly as bunching does.'
     ],
-    formula: ['1 + frac{(N−1) "Var"(p)}{p(1−p)}'],
+    formula: ['frac{κ_2}{"ceiling"} = 1 + frac{(N−1) "Var"(p)}{p(1−p)}'],
     source: ''
   },
   'flag-misreads': {
@@ -63,7 +63,7 @@ const EACH = {
       'A misread rate under 10 % a site would by itself give this mean and variance.',
       'It is never more than a hint, since the counts cannot tell misread sites from defects that come together.'
     ],
-    formula: ['p → p + 2ε(1−ε)(1−2p)'],
+    formula: ['p_{"read"} = p + 2ε(1−ε)(1−2p)'],
     source: ''
   },
   'flag-regular': {

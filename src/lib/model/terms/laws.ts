@@ -73,6 +73,7 @@ export const LAWS = {
       'It ranks laws by what they cost and what they explain: a smaller one is better, and differences under about 2 say little.'
     ],
     formula: ['"AIC" = 2k − 2L'],
+    // IEEE Trans. Autom. Control 19:716 (m).
     source: 'Akaike 1974'
   },
   floor: {

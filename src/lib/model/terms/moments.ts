@@ -24,6 +24,7 @@ export const MOMENTS = {
       'Further above 1 than chance explains, no independent trials give it whatever N is; a value below 1 means little until N is known.'
     ],
     formula: ['F = κ_2/κ_1'],
+    // Phys. Rev. 72:26 (m).
     source: 'Fano 1947'
   },
   ceiling: {
@@ -51,7 +52,7 @@ export const MOMENTS = {
       'The number of trials at which the ceiling equals the variance that was seen.',
       'With fewer trials the counts are over the ceiling; a variance above the mean is over it with any number.'
     ],
-    formula: ['N^∗ = frac{μ^2}{μ − s^2}'],
+    formula: ['N_{"crit"} = frac{μ^2}{μ − s^2}'],
     source: ''
   },
   'pair-covariance': {
@@ -61,6 +62,43 @@ export const MOMENTS = {
       'Divided by N(N − 1) it is a lower limit for the mean covariance of two places.'
     ],
     formula: ['sum_{j≠k} "Cov"(x_j, x_k) ≥ s^2 − μ(1 − μ/N)'],
+    source: ''
+  },
+  'cumulant-region': {
+    name: 'region of cumulants',
+    words: [
+      'The variance and the third cumulant, each over the mean, that independent trials of this mean can have.',
+      'A point outside it speaks against them only as far as its intervals stay outside too.'
+    ],
+    formula: [
+      'frac{κ_3}{κ_1} ≥ F(2F − 1)',
+      'frac{κ_3}{κ_1} ≤ F − 2F^2 frac{ρ}{1−ρ}',
+      'F = κ_2/κ_1,  ρ = μ/N'
+    ],
+    source: ''
+  },
+  'misread-ceiling': {
+    name: 'ceiling of kinks as read',
+    words: [
+      'The largest variance that independent kinks of this mean can have once their sites are misread at the stated rate.',
+      'It takes the place of the plain ceiling, so a variance over it is more than those misreads give.'
+    ],
+    formula: [
+      'frac{1}{4}[N − min sum_{j,k} A_{jk} m_j m_k]',
+      'A_{jj} = u^4',
+      'A_{j,j+1} = A_{j+1,j} = −u^2(1−u^2)',
+      'm_k = 1 − 2p_k,  u = 1 − 2ε',
+      'sum_k m_k = (N − 2μ)/u^2'
+    ],
+    source: ''
+  },
+  'needed-rate': {
+    name: 'needed misread rate',
+    words: [
+      'The misread rate of a site at which equal independent kinks would have the mean and the variance that were seen.',
+      'Hold it against calibration: a measured rate below its interval is too small to explain the excess.'
+    ],
+    formula: ['N(p + 2ε(1−ε)(1−2p)) = hat{μ}', '"and the variance as read" = s^2'],
     source: ''
   }
 } satisfies Terms;

@@ -33,9 +33,9 @@ export const RATES = {
     name: 'shot horizon',
     words: [
       'The rate of a count seen once, the largest rate that S shots can show at all.',
-      'Beyond the second line the data say nothing at 95 %, so no one should read there.'
+      'A count that was never seen has at least the second rate, at 95 %, and nothing more can be read of it.'
     ],
-    formula: ['frac{ln S}{N}', '"silent above" −frac{1}{N} ln(1 − 0.05^{1/S})'],
+    formula: ['frac{ln S}{N}', '"never seen:" ≥ −frac{1}{N} ln(1 − 0.05^{1/S})'],
     source: ''
   },
   tail: {
@@ -78,7 +78,7 @@ export const RATES = {
   certificate: {
     name: 'certificate',
     words: [
-      'An exact p-value from one tail: it uses Hoeffding’s bound at the unfavourable end of an interval for the mean, and allows for all m counts tried.',
+      'An exact p-value from the most telling tail: it uses Hoeffding’s bound at the unfavourable end of an interval for the mean, and allows for all m counts tried.',
       'It rests on no fit and no simulation, only on shots that are alike and independent of each other.'
     ],
     formula: ['p_n = P("Bin"(S, B_n) ≥ T_n)', 'p = min(1, m p_{"least"} + β)', 'β = 10^{−6}'],

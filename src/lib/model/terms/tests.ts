@@ -30,7 +30,7 @@ const EACH = {
     formula: [
       'max_{n>μ+σ} sqrt{2 S d_n}',
       'd_n = t ln frac{t}{F_n} + (1−t) ln frac{1−t}{1−F_n}',
-      't = T_n/S'
+      't = T_n/S,  F_n = P(X ≥ n)'
     ],
     source: 'Efron and Tibshirani 1993'
   },
@@ -40,7 +40,7 @@ const EACH = {
       'Do more shots than the best law explains have few defects?',
       'It works as the test of the high tail does, from one σ below the mean downward.'
     ],
-    formula: ['max_{n<μ−σ} sqrt{2 S d_n}'],
+    formula: ['max_{n<μ−σ} sqrt{2 S d_n}', 'F_n = P(X ≤ n)'],
     source: 'Efron and Tibshirani 1993'
   },
   'test-parity': {
@@ -98,7 +98,7 @@ export const TEST_TERMS = {
       'The p-values raised together, since several tests give several chances to cry wolf.',
       'The answer uses the raised ones: all tests together then give a false alarm at most as often as the level says.'
     ],
-    formula: ['p_{(i)} → max_{j≤i} (m−j+1)p_{(j)}', '"and at most" 1'],
+    formula: ['p_{(i)}^{"all"} = max_{j≤i} (m−j+1)p_{(j)}', '"and at most" 1'],
     source: 'Holm 1979',
     printed: true
   },
