@@ -23,8 +23,8 @@ export const ANSWERS = {
   tolerance: {
     name: 'tolerance, τ',
     words: [
-      'The excess of the variance over its ceiling that would matter to you, 10 % unless you change it.',
-      'Compatible means that an excess this large is excluded with 95 % confidence.'
+      'The excess of the variance over its ceiling that would matter to you, 10 % unless you change it.',
+      'Compatible means that an excess this large is excluded with 95 % confidence.'
     ],
     formula: ['frac{s^2}{μ(1−μ/N)} = 1 + τ'],
     source: ''
@@ -32,7 +32,7 @@ export const ANSWERS = {
   'smallest-excess': {
     name: 'smallest excess',
     words: [
-      'The excess over the ceiling that these shots would show in four of five repeats, by the variance alone at a level of 5 %.',
+      'The excess over the ceiling that these shots would show in four of five repeats, by the variance alone at a level of 5 %.',
       'A smaller one may be there and stay unseen.'
     ],
     formula: ['2.49 sqrt{(2 + κ_4/κ_2^2)/S}'],

@@ -43,7 +43,7 @@ export const DISTANCE = {
   'half-interval': {
     name: 'half-interval',
     words: [
-      'How far the law lies from the share that was seen, in units of the 95 % interval on that side.',
+      'How far the law lies from the share that was seen, in units of the 95 % interval on that side.',
       'Within −1 and 1 the interval holds the law; about one count in twenty misses by chance alone.'
     ],
     formula: [
@@ -53,9 +53,9 @@ export const DISTANCE = {
     source: ''
   },
   interval: {
-    name: '95 % interval',
+    name: '95 % interval',
     words: [
-      'The values that the data do not speak against at 5 %, 2.5 % on each side: exact for shares of shots, from resamples for moments.',
+      'The values that the data do not speak against at 5 %, 2.5 % on each side: exact for shares of shots, from resamples for moments.',
       'In at least 95 of 100 repeats of the experiment the interval of a share holds the true one.'
     ],
     formula: ['P("Bin"(S, p_{"low"}) ≥ h) = 0.025', 'P("Bin"(S, p_{"high"}) ≤ h) = 0.025'],

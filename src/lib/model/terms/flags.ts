@@ -60,7 +60,7 @@ const EACH = {
   'flag-misreads': {
     name: 'misreads',
     words: [
-      'A misread rate under 10 % a site would by itself give this mean and variance.',
+      'A misread rate under 10 % a site would by itself give this mean and variance.',
       'It is never more than a hint, since the counts cannot tell misread sites from defects that come together.'
     ],
     formula: ['p_{"read"} = p + 2ε(1−ε)(1−2p)'],

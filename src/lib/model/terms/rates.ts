@@ -33,7 +33,7 @@ export const RATES = {
     name: 'shot horizon',
     words: [
       'The rate of a count seen once, the largest rate that S shots can show at all.',
-      'A count that was never seen has at least the second rate, at 95 %, and nothing more can be read of it.'
+      'A count that was never seen has at least the second rate, at 95 %, and nothing more can be read of it.'
     ],
     formula: ['frac{ln S}{N}', '"never seen:" ≥ −frac{1}{N} ln(1 − 0.05^{1/S})'],
     source: ''
