@@ -19,7 +19,7 @@ export function sayMisreads(view: MisreadsView): string {
   const effect =
     geometry === 'sites'
       ? 'On sites that are read one by one, independent misreads keep counts a sum of independent trials.'
-      : 'On bonds one misread site toggles two neighbours, so that independent defects can look bunched.';
+      : 'On bonds one misread site toggles the two bonds beside it, so that independent defects can look bunched.';
   return `Counted on: ${GEOMETRIES[geometry]}. ${chance} ${effect}${sayFlagged(view, 'misreads')}`;
 }
 

@@ -72,7 +72,7 @@ export const DATA = {
       'The misread rate of a site at which equal independent kinks would have the mean and variance that were seen.',
       'Hold it against the calibration: a rate that was measured to be smaller leaves an excess which misreads do not explain.'
     ],
-    formula: ['s^2 = "Var"(X; ε)', '"E"(X; ε) = μ'],
+    formula: ['N(p + 2ε(1−ε)(1−2p)) = hat{μ}', '"variance as read" = s^2'],
     source: ''
   },
   lump: {

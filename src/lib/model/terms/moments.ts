@@ -91,14 +91,5 @@ export const MOMENTS = {
       'sum_k m_k = (N − 2μ)/u^2'
     ],
     source: ''
-  },
-  'needed-rate': {
-    name: 'needed misread rate',
-    words: [
-      'The misread rate of a site at which equal independent kinks would have the mean and the variance that were seen.',
-      'Hold it against calibration: a measured rate below its interval is too small to explain the excess.'
-    ],
-    formula: ['N(p + 2ε(1−ε)(1−2p)) = hat{μ}', '"and the variance as read" = s^2'],
-    source: ''
   }
 } satisfies Terms;
