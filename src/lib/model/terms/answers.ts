@@ -8,7 +8,7 @@ export const ANSWERS = {
       'Ruled out, when the certificate or a raised p-value reaches the level; compatible, when none does and an excess that matters would have shown; undecided otherwise.',
       'Compatible is not independent, and ruled out does not say by what.'
     ],
-    formula: ['"ruled out:" p ≤ α', '"compatible:" "upper limit of" frac{s^2}{"ceiling"} < 1 + τ'],
+    formula: ['"ruled out:" p ≤ α', '"compatible:" r_{"high"} < 1 + τ', 'r = s^2/"ceiling"'],
     source: ''
   },
   alpha: {

@@ -18,7 +18,7 @@ export const LAWS = {
       'Of all independent-trial laws the one under which these counts are most likely.',
       'Its mean is the mean of the counts, and the floor beside it says how much closer any other could come.'
     ],
-    formula: ['f = "the law with the largest" sum_n h_n ln f_n'],
+    formula: ['f "maximises" sum_n h_n ln f_n'],
     source: 'Pitman 1997; Hong 2013'
   },
   levels: {

@@ -108,7 +108,7 @@ export const TEST_TERMS = {
       'A histogram of as many shots drawn from the fitted law, fitted anew and measured like the real one.',
       'The share of resamples at least as extreme gives the p-value.'
     ],
-    formula: ['p = frac{1 + "number at least as extreme"}{B + 1}'],
+    formula: ['p = frac{1 + x}{B + 1}', 'x "at least as extreme"'],
     source: 'Efron and Tibshirani 1993'
   },
   permutation: {
@@ -117,7 +117,7 @@ export const TEST_TERMS = {
       'The same shots in shuffled order, measured again.',
       'It assumes nothing about the law of the counts; for long lists the limit of shuffling stands in.'
     ],
-    formula: ['p = frac{1 + "number at least as extreme"}{B + 1}'],
+    formula: ['p = frac{1 + x}{B + 1}', 'x "at least as extreme"'],
     source: 'Efron and Tibshirani 1993'
   },
   'smallest-p': {
