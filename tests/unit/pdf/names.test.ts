@@ -32,6 +32,18 @@ describe('names and notes', () => {
     expect(bytes.length).toBeLessThan(300_000);
   });
 
+  it('are told where they bear on what counts look like, whatever they hold', async () => {
+    const trialsWhy = 'सभी ६० बंध <img src=x onerror=alert(1)>';
+    const postSelection = '🧊 <script>alert(2)</script> \u202eabc';
+    const { read } = await make({ conditions: { trialsWhy, postSelection } });
+    expect(read.text).toContain('<img src=x onerror=alert(1)>');
+    expect(read.text).toContain('<script>alert(2)</script> abc');
+    expect(read.text).not.toMatch(/[\u202a-\u202e\u2066-\u2069\ufffd]/);
+    // The letters of the script, sign by sign; how they join is a plain form.
+    for (const sign of 'सभीबंध६०') expect(read.text).toContain(sign);
+    expect(read.unmarked).toEqual([]);
+  });
+
   it('that no font has are spelled out', async () => {
     const { read } = await make({ dataset: 'cell \u{1fae8}' });
     expect(read.text).toContain('cell ⟨U+1FAE8⟩');

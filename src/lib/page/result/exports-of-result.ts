@@ -10,7 +10,7 @@ export function exportsOfResult(result: Result): ExportFile[] {
   return [
     {
       ...EXPORTS.bundle,
-      what: `${EXPORTS.bundle.what} Made by this browser; the report for print is not in it.`,
+      what: `${EXPORTS.bundle.what} The report for print is in it. Made by this browser.`,
       save: async () => (await import('./save-bundle')).saveBundle(result)
     },
     {
