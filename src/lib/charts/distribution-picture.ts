@@ -1,5 +1,4 @@
 import type { Diagnosis, DistributionPoint } from '$lib/stats/types';
-import { scaleLinear } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { columnOf } from './column-of';
 import { countTicks } from './count-ticks';
@@ -11,6 +10,7 @@ import { linePath } from './line-path';
 import { observedMarks } from './observed-marks';
 import type { Mark, Picture, Point, Size } from './picture';
 import { residualMarks } from './residual-marks';
+import { scaleLinear } from './scale-linear';
 import { shownSpan } from './shown-span';
 import { standing } from './standing';
 import { thinnedMarks, thinnedNote } from './thinned-marks';

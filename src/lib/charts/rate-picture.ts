@@ -1,5 +1,4 @@
 import type { Diagnosis, RatePoint } from '$lib/stats/types';
-import { scaleLinear } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { countTicks } from './count-ticks';
 import { frameOf } from './frame-of';
@@ -11,6 +10,7 @@ import type { Mark, Picture, Point, Size } from './picture';
 import { ratePoints } from './rate-points';
 import { rateWords } from './rate-words';
 import { roomyTicks } from './roomy-ticks';
+import { scaleLinear } from './scale-linear';
 import { scaledTexts } from './scaled-texts';
 import { shownSpan } from './shown-span';
 import { thinnedNote } from './thinned-marks';

@@ -1,10 +1,6 @@
 import { z } from 'zod';
+import { NAME_LENGTH, REMARK_LENGTH } from './lengths';
 import { REMARK_SECTIONS } from './sections';
-
-/** Longest remark, in characters: a page of text. */
-export const REMARK_LENGTH = 4000;
-/** Longest name a remark is signed with. */
-export const NAME_LENGTH = 80;
 
 /** Controls but line end and tab, and marks that turn the direction of writing: they make a text read as another. */
 const hidden = /[^\P{Cc}\n\t]|[\u2028\u2029\u202a-\u202e\u2066-\u2069]/gu;

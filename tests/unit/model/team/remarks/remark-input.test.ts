@@ -1,5 +1,6 @@
 import { nameKey } from '$lib/model/team/remarks/name-key';
-import { REMARK_LENGTH, remarkInputSchema, signatureSchema } from '$lib/model/team/remarks/remark-input';
+import { REMARK_LENGTH } from '$lib/model/team/remarks/lengths';
+import { remarkInputSchema, signatureSchema } from '$lib/model/team/remarks/remark-input';
 import { sectionOfPart } from '$lib/model/team/remarks/sections';
 import { describe, expect, it } from 'vitest';
 
