@@ -1,7 +1,10 @@
 import { scaleLinear } from './scale-linear';
 
 /** Straight near 0 and logarithmic far out: places by log(1 + |value|) with the sign of the value. */
-export function scaleSymlog([from, to]: [number, number], range: [number, number]): (value: number) => number {
+export function scaleSymlog(
+  [from, to]: [number, number],
+  range: [number, number]
+): (value: number) => number {
   const place = scaleLinear([bent(from), bent(to)], range);
   return (value) => place(bent(value));
 }

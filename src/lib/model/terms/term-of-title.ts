@@ -59,7 +59,7 @@ const TITLES: Record<string, TermId> = {
   'Level of the answer': 'alpha',
   'Excess that matters': 'tolerance',
   'Misread sites': 'misread-rate',
-  'Ceiling as read': 'ceiling',
+  'Ceiling as read': 'misread-ceiling',
   'Misread rate needed': 'needed-rate',
   'Kinks along the chain': 'levels',
   Drift: 'test-order',
