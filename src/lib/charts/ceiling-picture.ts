@@ -1,11 +1,11 @@
 import type { Diagnosis } from '$lib/stats/types';
+import { scaleLinear } from 'd3-scale';
 import { bottomAxis } from './axis-marks';
 import { ceilingStanding, ceilingWords } from './ceiling-words';
 import { frameOf } from './frame-of';
 import { hatchEdge } from './hatch-edge';
 import type { Mark, Picture, Point, Role, Size } from './picture';
 import { pointPath, type Shape } from './point-path';
-import { scaleLinear } from './scale-linear';
 import { tickTexts } from './tick-texts';
 
 const LOOK: Record<ReturnType<typeof ceilingStanding>, { point: Role; interval: Role; shape: Shape }> = {

@@ -1,4 +1,4 @@
-import type { LinearScale } from './scale-linear';
+import type { ScaleLinear } from 'd3-scale';
 import type { Tick } from './picture';
 import { roomyTicks } from './roomy-ticks';
 import { tickTexts } from './tick-texts';
@@ -7,7 +7,7 @@ import { tickTexts } from './tick-texts';
  * Ticks of an axis of counts, at whole counts only; the lump's tick reads "10+".
  * @param text height of the letters, picture units
  */
-export function countTicks(scale: LinearScale, text: number, lump: number | null): Tick[] {
+export function countTicks(scale: ScaleLinear<number, number>, text: number, lump: number | null): Tick[] {
   const last = lump === null ? null : { at: scale(lump), text: `${tickTexts([lump])[0]}+` };
   const ticks = roomyTicks(scale, text, Number.isInteger);
   if (last === null) return ticks;

@@ -1,4 +1,5 @@
 import type { Diagnosis, DistributionPoint } from '$lib/stats/types';
+import { scaleLinear } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { columnOf } from './column-of';
 import { countTicks } from './count-ticks';
@@ -10,7 +11,6 @@ import { linePath } from './line-path';
 import { observedMarks } from './observed-marks';
 import type { Mark, Picture, Point, Size } from './picture';
 import { residualMarks } from './residual-marks';
-import { scaleLinear } from './scale-linear';
 import { shownSpan } from './shown-span';
 import { standing } from './standing';
 import { thinnedMarks, thinnedNote } from './thinned-marks';

@@ -3,7 +3,7 @@ import { EXPLANATIONS } from '$lib/model/labels';
 import { sayOwnNumber } from '$lib/model/report/say-own-number';
 import { sayWeight } from '$lib/model/report/say-weight';
 import type { Explanation, Explanations } from '$lib/stats/explanations/types';
-import { scaleSymlog } from './scale-symlog';
+import { scaleSymlog } from 'd3-scale';
 import { bottomAxis } from './axis-marks';
 import { frameOf } from './frame-of';
 import type { Mark, Picture, Size, Tick } from './picture';
@@ -21,7 +21,7 @@ export function explanationsPicture(explanations: Explanations, { width, text }:
     bottom: text * 3.6
   });
   const furthest = Math.max(10, ...ranked.map(({ behind }) => behind));
-  const x = scaleSymlog([0, furthest], [frame.left + 8, frame.right]);
+  const x = scaleSymlog([0, furthest], [frame.left + 8, frame.right]).constant(1);
   const middle = (i: number): number => frame.top + row * (i + 0.5);
   const tie = x(tieWithin);
   const marks: Mark[] = [

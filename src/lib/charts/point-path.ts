@@ -1,7 +1,10 @@
+import { symbol, symbolCircle, symbolDiamond, symbolTriangle } from 'd3-shape';
 import type { Point } from './picture';
 
 /** Shapes carry the meaning that the inks carry: up = more, down = fewer, diamond = cannot tell. */
 export type Shape = 'dot' | 'up' | 'down' | 'diamond';
+
+const DRAWN = { dot: symbolCircle, up: symbolTriangle, down: symbolTriangle, diamond: symbolDiamond };
 
 /**
  * Path string of points of one shape.
@@ -9,49 +12,21 @@ export type Shape = 'dot' | 'up' | 'down' | 'diamond';
  */
 export function pointPath(points: Point[], shape: Shape = 'dot', size = 6): string {
   const area = shape === 'dot' ? (Math.PI / 4) * size * size : 0.62 * size * size;
-  const draw = shape === 'dot' ? circle(area) : polygon(CORNERS[shape](area));
-  return points.map(([x, y]) => draw(x, y)).join('');
+  const unit = symbol(DRAWN[shape], area).digits(3)() ?? '';
+  return points.map(([x, y]) => moved(unit, x, y, shape === 'down')).join('');
 }
 
-type Draw = (x: number, y: number) => string;
-
-/** Corners about the middle, so that the shape has the area. */
-const CORNERS: Record<Exclude<Shape, 'dot'>, (area: number) => Point[]> = {
-  up: (area) => triangle(area, 1),
-  down: (area) => triangle(area, -1),
-  diamond(area) {
-    const [wide, high] = [Math.sqrt(area / (2 * Math.sqrt(3))), Math.sqrt((area * Math.sqrt(3)) / 2)];
-    return [
-      [0, -high],
-      [wide, 0],
-      [0, high],
-      [-wide, 0]
-    ];
-  }
-};
-
-/** Of equal sides; its middle is the centre of mass. */
-function triangle(area: number, sign: 1 | -1): Point[] {
-  const inner = Math.sqrt(area / (3 * Math.sqrt(3)));
-  return [
-    [0, -2 * inner * sign],
-    [Math.sqrt(3) * inner, inner * sign],
-    [-Math.sqrt(3) * inner, inner * sign]
-  ];
+/** d3 draws a symbol about 0,0. Only absolute commands occur in it but the circle's arc, whose radii stay. */
+function moved(path: string, x: number, y: number, turned: boolean): string {
+  const sign = turned ? -1 : 1;
+  return path.replace(/([MLA])([^MLAZ]*)/g, (_whole, command: string, list: string) => {
+    const numbers = list.split(/[ ,]/).map(Number);
+    const end = numbers.length - 2;
+    const placed = numbers.map((value, i) =>
+      i === end ? round(x + value) : i === end + 1 ? round(y + sign * value) : value
+    );
+    return command + placed.join(',');
+  });
 }
-
-const polygon = (corners: Point[]): Draw => {
-  return (x, y) =>
-    `${corners.map(([dx, dy], i) => `${i ? 'L' : 'M'}${round(x + dx)},${round(y + dy)}`).join('')}Z`;
-};
-
-const circle = (area: number): Draw => {
-  const radius = Math.round(Math.sqrt(area / Math.PI) * 1000) / 1000;
-  return (x, y) => {
-    const [left, right] = [round(x - radius), round(x + radius)];
-    const arc = `A${radius},${radius},0,1,1,`;
-    return `M${right},${round(y)}${arc}${left},${round(y)}${arc}${right},${round(y)}`;
-  };
-};
 
 const round = (value: number): number => Math.round(value * 100) / 100;

@@ -1,4 +1,5 @@
 import type { Diagnosis, RatePoint } from '$lib/stats/types';
+import { scaleLinear } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { countTicks } from './count-ticks';
 import { frameOf } from './frame-of';
@@ -10,7 +11,6 @@ import type { Mark, Picture, Point, Size } from './picture';
 import { ratePoints } from './rate-points';
 import { rateWords } from './rate-words';
 import { roomyTicks } from './roomy-ticks';
-import { scaleLinear } from './scale-linear';
 import { scaledTexts } from './scaled-texts';
 import { shownSpan } from './shown-span';
 import { thinnedNote } from './thinned-marks';

@@ -1,3 +1,4 @@
+import { scaleLinear } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { crossPath } from './cross-path';
 import type { CumulantsPlace } from './cumulants-place';
@@ -11,7 +12,6 @@ import { regionEdges } from './region-edges';
 import { regionSpan } from './region-span';
 import { lawWords, regionWords } from './region-words';
 import { roomyTicks } from './roomy-ticks';
-import { scaleLinear } from './scale-linear';
 import { scaledTexts } from './scaled-texts';
 
 const LOOK: Record<CumulantsPlace['standing'], { point: Role; interval: Role; shape: Shape }> = {

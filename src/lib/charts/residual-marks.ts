@@ -1,10 +1,10 @@
 import type { DistributionPoint } from '$lib/stats/types';
+import { scaleLinear } from 'd3-scale';
 import { leftAxis } from './axis-marks';
 import { columnOf } from './column-of';
 import { observedMarks } from './observed-marks';
 import type { Frame, Mark, Point } from './picture';
 import { residualOf } from './residual-of';
-import { scaleLinear } from './scale-linear';
 import { standing } from './standing';
 import { thinnedMarks } from './thinned-marks';
 import { residualTicks } from './residual-ticks';

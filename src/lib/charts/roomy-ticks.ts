@@ -1,4 +1,4 @@
-import type { LinearScale } from './scale-linear';
+import type { ScaleLinear } from 'd3-scale';
 import type { Tick } from './picture';
 import { tickTexts } from './tick-texts';
 
@@ -10,7 +10,7 @@ import { tickTexts } from './tick-texts';
  * @param fits which values may be marked at all
  */
 export function roomyTicks(
-  scale: LinearScale,
+  scale: ScaleLinear<number, number>,
   text: number,
   fits: (value: number) => boolean = () => true
 ): Tick[] {

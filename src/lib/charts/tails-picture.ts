@@ -1,4 +1,5 @@
 import type { Diagnosis, TailPoint } from '$lib/stats/types';
+import { scaleLinear, scaleLog } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { countTicks } from './count-ticks';
 import { frameOf } from './frame-of';
@@ -8,8 +9,6 @@ import { legendOfStanding } from './legend-of-standing';
 import { linePath } from './line-path';
 import type { Frame, Mark, Picture, Point, Size } from './picture';
 import { powerTick } from './power-tick';
-import { scaleLinear } from './scale-linear';
-import { scaleLog } from './scale-log';
 import { shownSpan } from './shown-span';
 import { tailPoints } from './tail-points';
 import { tailWords } from './tail-words';

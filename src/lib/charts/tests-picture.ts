@@ -1,11 +1,11 @@
 import type { Diagnosis, TestId } from '$lib/stats/types';
+import { scaleLog } from 'd3-scale';
 import { bottomAxis } from './axis-marks';
 import { flagRows, testRows, type ForestRow } from './forest-rows';
 import { frameOf } from './frame-of';
 import type { LegendEntry, Mark, Picture, Role, Size, TextMark, Tick } from './picture';
 import { pointPath, type Shape } from './point-path';
 import { powerTick } from './power-tick';
-import { scaleLog } from './scale-log';
 
 const LOOKS: Record<ForestRow['kind'], { point: Role; interval: Role; shape: Shape; size: number }> = {
   within: { point: 'observed', interval: 'interval', shape: 'dot', size: 7 },

@@ -8,7 +8,7 @@ import { splitRaised } from '$lib/charts/split-raised';
 import { tableToCsv } from '$lib/charts/table-to-csv';
 import { tickTexts } from '$lib/charts/tick-texts';
 import { wrapped } from '$lib/charts/wrapped';
-import { scaleLinear } from '$lib/charts/scale-linear';
+import { scaleLinear } from 'd3-scale';
 import { describe, expect, it } from 'vitest';
 
 describe('numbers on axes and in tables', () => {
