@@ -5,6 +5,7 @@ import { parseArgs } from 'node:util';
 import { isMainThread } from 'node:worker_threads';
 import { benchDiagnoses, benchPmf, benchRefits } from './bench/sections';
 import { diagnosisChild } from './bench/time-diagnosis';
+import { compileLater } from './shared/compile-later';
 import { serveDraws } from './shared/second-thread';
 
 const usage = `npm run bench -- [--only refits,diagnoses,pmf] [--peers DIR [--python PROGRAM]]
@@ -27,6 +28,7 @@ const { values } = parseArgs({
 const only = values.only?.split(',') ?? sections;
 const peers = values.peers ? { folder: values.peers, python: values.python } : null;
 const script = fileURLToPath(import.meta.url);
+if (isMainThread) compileLater();
 if (!isMainThread) {
   serveDraws();
 } else if (values.child) {

@@ -1,10 +1,13 @@
 import { fileURLToPath } from 'node:url';
 import { isMainThread } from 'node:worker_threads';
+import { compileLater } from './shared/compile-later';
 import { serveDraws } from './shared/second-thread';
 
 /** `npm run diagnose`; also the script of its second thread, which needs no more than the engine. */
-if (isMainThread) await main();
-else serveDraws();
+if (isMainThread) {
+  compileLater();
+  await main();
+} else serveDraws();
 
 async function main(): Promise<void> {
   // A reader that stops early (head, a closed pager) is no error of ours.

@@ -58,9 +58,12 @@ export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): F
   const { statistics, notRun } = chooseStatistics(observed);
   const questions = [...statistics].map(([id, statistic]) => {
     const value = statistic.of(observed);
-    // Equal up to rounding counts as equal: a resample that repeats the data must count.
-    return { id, statistic, value, bar: value - 1e-9 * Math.max(1, Math.abs(value)) };
+    return { id, statistic, value, bar: barOf(value, statistic.root) };
   });
+  // A root that is 0 in the data is reached by every draw.
+  const certain = questions.reduce((bits, { statistic, bar }, i) => {
+    return statistic.root && bar === 0 ? bits | (1 << i) : bits;
+  }, 0);
   const needed = new Float64Array(questions.length);
   const source = redraw(window, data, data.total);
   const buffers: Buffers = {};
@@ -75,15 +78,15 @@ export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): F
       let least = Infinity;
       for (let i = 0; i < questions.length; i++) {
         const { statistic, bar } = questions[i];
-        needed[i] = wanted & (1 << i) ? statistic.needs(resample, bar) : Infinity;
+        needed[i] = wanted & ~certain & (1 << i) ? statistic.needs(resample, bar) : Infinity;
         if (needed[i] <= most) least = Math.min(least, needed[i]);
       }
-      if (least === Infinity && !keep) return { exceeds: 0, divergence: null };
+      let exceeds = wanted & certain;
+      if (least === Infinity && !keep) return { exceeds, divergence: null };
       const itself = saturated(resample);
       const settled = keep ? Infinity : settledAt(itself, least, resample.total);
       const drawn = refitted(resample, levels, undefined, buffers, settled);
       const left = gSquaredLeft(itself, drawn.fit.logLikelihood, resample.total);
-      let exceeds = 0;
       for (let i = 0; i < questions.length; i++) {
         const { statistic, bar } = questions[i];
         if (needed[i] <= left && statistic.of(drawn) >= bar) exceeds |= 1 << i;
@@ -91,4 +94,11 @@ export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): F
       return { exceeds, divergence: keep ? drawn.divergence : null };
     }
   };
+}
+
+/** The least value that counts as equal to the observed one up to rounding: a resample that repeats the data must count. */
+function barOf(value: number, root: boolean): number {
+  const kept = root ? value * value : value;
+  const bar = kept - 1e-9 * Math.max(1, Math.abs(kept));
+  return root ? Math.sqrt(Math.max(0, bar)) : bar;
 }

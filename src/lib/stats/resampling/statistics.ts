@@ -17,6 +17,8 @@ export interface Statistic {
    * of the deviance of a tail, or of the likelihood that free empty shots gain, is one part of the whole.
    */
   needs(drawn: FitData, bar: number): number;
+  /** Whether it is the root of a deviance: never below 0, and blurred by the root of what the deviance is blurred by. */
+  root: boolean;
 }
 
 /** The low tail of the shots with n ≥ 1: not a test of its own, but evidence for or against coarsening. */
@@ -44,7 +46,7 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
   };
   const oneCount = spread > 0 ? null : 'Every shot had the same count.';
   const gSquared = ({ data: { total }, divergence }: Refitted) => 2 * total * divergence;
-  use('fit', { of: gSquared, needs: (_, bar) => bar }, oneCount);
+  use('fit', { of: gSquared, needs: (_, bar) => bar, root: false }, oneCount);
   use(
     'high-tail',
     whole('high', high),
@@ -53,10 +55,10 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
   use('low-tail', whole('low', low), oneCount ?? (low >= 0 ? null : none('below')));
   use(
     'parity',
-    { of: parityExcess, needs: parityNeeds },
+    { of: parityExcess, needs: parityNeeds, root: false },
     oneCount ?? (data.lump ? 'The closing row lumps even and odd counts together.' : null)
   );
-  use('empty-shots', { of: emptyExcess, needs: square }, noEmpty(observed));
+  use('empty-shots', { of: emptyExcess, needs: square, root: true }, noEmpty(observed));
   const rest = observed.rest();
   use(lowTailOfTheRest, ofTheRest(low), rest && low >= rest.data.first ? null : 'nothing there');
   return { statistics, notRun };
@@ -77,7 +79,7 @@ function noEmpty(observed: Refitted): string | null {
 const square = (_: FitData, bar: number) => (bar > 0 ? bar * bar : 0);
 
 function whole(side: 'high' | 'low', limit: number): Statistic {
-  return { of: ({ data, fit }) => tail(data, fit.window, side, limit), needs: square };
+  return { of: ({ data, fit }) => tail(data, fit.window, side, limit), needs: square, root: true };
 }
 
 function ofTheRest(limit: number): Statistic {
@@ -85,7 +87,7 @@ function ofTheRest(limit: number): Statistic {
     const rest = histogram.rest();
     return rest ? tail(rest.data, rest.fit.window, 'low', limit) : 0;
   };
-  return { of, needs: square };
+  return { of, needs: square, root: true };
 }
 
 function tail(data: FitData, window: Window, side: 'high' | 'low', limit: number): number {
