@@ -20,7 +20,7 @@ export function sayData({ data, moments, engine }: Diagnosis, about: string[]): 
     ? `counts up to "${formatCount(data.lump.from)} or more"`
     : `largest count ${formatCount(last ?? null)}`;
   const misread =
-    data.misread === null ? '' : `; a site is misread with probability ${formatNumber(data.misread)}`;
+    data.misread === null ? '' : `; a site is misread with probability ${formatNumber(data.misread, 3)}`;
   const per = data.unit === 'pair' ? ' (in pairs)' : '';
   return [
     'Data',

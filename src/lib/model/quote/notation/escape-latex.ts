@@ -44,12 +44,19 @@ const LEVEL = '0123456789-';
  * @param typed true for what people typed: signs that LaTeX would join are then kept apart ("--", "''")
  */
 export function escapeLatex(text: string, typed = true): string {
-  const apart = (run: string) => (run.length > 1 ? [...run].join('{}') : run);
-  const escaped = text.replace(/-{2,}|'{2,}|,{2,}|[⁰¹²³⁴⁵⁶⁷⁸⁹⁻]+|[\s\S]/gu, (part) => {
-    if (RAISED.includes(part[0])) return `$^{${[...part].map((c) => LEVEL[RAISED.indexOf(c)]).join('')}}$`;
-    if (part.length > 1 && /^[-',]/.test(part)) return typed ? apart(part) : part;
-    return SPECIALS[part] ?? part;
-  });
+  let escaped = '';
+  for (const part of text.match(/-{2,}|'{2,}|,{2,}|[⁰¹²³⁴⁵⁶⁷⁸⁹⁻]+|[\s\S]/gu) ?? []) {
+    const set = escapedPart(part, typed);
+    // A typed dash beside a hyphen would be set as a longer dash, a closing quote beside another as a double one.
+    const joins = typed && /[-'`]$/.test(escaped) && escaped.at(-1) === set[0];
+    escaped += joins ? `{}${set}` : set;
+  }
   // ?` and !` would be set as ¿ and ¡.
   return escaped.replace(/([?!])`/g, '$1{}`');
+}
+
+function escapedPart(part: string, typed: boolean): string {
+  if (RAISED.includes(part[0])) return `$^{${[...part].map((c) => LEVEL[RAISED.indexOf(c)]).join('')}}$`;
+  if (part.length > 1 && /^[-',]/.test(part)) return typed ? [...part].join('{}') : part;
+  return SPECIALS[part] ?? part;
 }

@@ -13,7 +13,7 @@ const nasty = fc
   .array(
     fc.oneof(
       fc.constantFrom(
-        ...'\\{}$&#%_^~<>|"\'`‘“-,!?*[]()=@:./+\n\r\t \u2028\u202e',
+        ...'\\{}$&#%_^~<>|"\'`‘“’–—-,!?*[]()=@:./+\n\r\t \u2028\u202e',
         '\\input',
         '\\n',
         '--',
@@ -38,6 +38,7 @@ describe('LaTeX', () => {
     ['<a|b>', '\\textless{}a\\textbar{}b\\textgreater{}'],
     ['say "x" ?`', "say ''x'' ?\\`{}"],
     ["a--b ---c ''d ,,e", "a-{}-b -{}-{}-c '{}'d ,{},e"],
+    ["a–-b -–c —--d ’'e", "a--{}-b -{}--c ---{}-{}-d '{}'e"],
     ['Übergänge, Ωμέγα, 量子, кинки', 'Übergänge, Ωμέγα, 量子, кинки'],
     ['3.5 × 10⁻⁷ at 95\u202f%', '3.5 $\\times$ 10$^{-7}$ at 95\\,\\%']
   ])('sets %s as it stands', (text, expected) => expect(escapeLatex(text)).toBe(expected));
@@ -45,14 +46,16 @@ describe('LaTeX', () => {
   it('leaves no sign of its own that was typed, in any text', () => {
     // What the escapes are made of; taken out, no special sign may be left, and braces and dollars pair.
     const ours =
-      /\\(textbackslash|textbraceleft|textbraceright|textasciitilde|textasciicircum|textless|textgreater|textbar|dots)\{\}|\\[#$%&_,]|\\`\{\}|\$(-|\\times|\\le|\\ge|\^\{[-\d]+\})\$|(?<=[-',?!])\{\}|~/g;
+      /\\(textbackslash|textbraceleft|textbraceright|textasciitilde|textasciicircum|textless|textgreater|textbar|dots)\{\}|\\[#$%&_,]|\\`\{\}|\$(-|\\times|\\le|\\ge|\^\{[-\d]+\})\$|(?<=[-'`,?!])\{\}|~/g;
     fc.assert(
       fc.property(nasty, (text) => {
         const latex = inNotation([nameOf(text)], 'latex');
         const typed = oneLine(text).replaceAll('\u00a0', '').includes('~');
         expect(latex.replace(ours, '')).not.toMatch(/[\\{}$&#%_^~]/);
         if (typed) expect(latex).toContain('\\textasciitilde{}');
-        expect(latex).not.toMatch(/[\n\r]|--(?!$)[^-]*-\{\}|[?!]`/);
+        expect(latex).not.toMatch(/[\n\r]|[?!]`/);
+        if (!/[–—]/.test(text)) expect(latex).not.toMatch(/--/);
+        expect(latex).not.toMatch(/-{4}/);
       }),
       { numRuns: 3000 }
     );
