@@ -138,9 +138,21 @@ describe('the report page of the team', () => {
         [
           ...document.querySelectorAll<HTMLElement | SVGElement>(
             'a[href], button, input, select, textarea, summary, [tabindex="0"]'
+          ),
+          // Chromium stops at what scrolls and has nothing in it to stop at, or its end could not be read by keyboard.
+          ...[...document.querySelectorAll<HTMLElement>('body *:not([tabindex])')].filter(
+            (one) =>
+              ['auto', 'scroll'].includes(getComputedStyle(one).overflowX) &&
+              one.scrollWidth > one.clientWidth &&
+              !one.querySelector('a[href], button, summary, [tabindex="0"]')
           )
         ]
-          .filter((one) => !one.matches(':disabled') && one.tabIndex >= 0 && one.checkVisibility())
+          .filter(
+            (one) =>
+              !one.matches(':disabled') &&
+              (one.tabIndex >= 0 || !one.matches('[tabindex]')) &&
+              one.checkVisibility()
+          )
           // Of a group of radio buttons the keyboard stops at one.
           .filter((one) => !(one instanceof HTMLInputElement && one.type === 'radio' && !one.checked)).length
     );
