@@ -27,11 +27,12 @@ async function start(folder: string): Promise<RunningServer> {
   return server;
 }
 
-/** A server with ten jobs in its queue. */
-async function tenJobs() {
+/** A server with ten jobs in its queue, and as many more on its data folder as asked for, which were there before. */
+async function tenJobs(more = 0) {
   const folder = mkdtempSync(join(tmpdir(), 'severalty-jobs-'));
   folders.push(folder);
   const server = await start(folder);
+  for (let i = 0; i < more; i++) await start(folder);
   const person = await seedPerson(server);
   const team = await seedTeam(server, 'killed', [[person, 'experimenter']]);
   const datasets = await seedDice(
@@ -83,8 +84,7 @@ it('a server killed twice during ten jobs ends every one of them once', async ()
 }, 120_000);
 
 it('two servers on one data folder share ten jobs, and run none twice', async () => {
-  const { folder, look } = await tenJobs();
-  await start(folder);
+  const { look } = await tenJobs(1);
   const last = await until(look, (all) => number(all, 'done') === JOBS, 60_000);
   expectAllDoneOnce(last);
   expect(last.jobs.map(({ attempts }) => attempts)).toEqual(Array(JOBS).fill(1));
