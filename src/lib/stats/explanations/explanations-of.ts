@@ -20,6 +20,8 @@ const tieWithin = 2;
 
 /** Counts in a law beyond which a list of stories would take over ten seconds. */
 const widest = 10_000;
+/** With more trials a story far off its best would spread over all of them: a fit at N = 1e9 did not end in minutes. */
+const mostTrials = 100_000;
 
 /**
  * What else the counts could be: every story fitted by likelihood, ranked by AIC beside independent trials.
@@ -57,8 +59,8 @@ export async function explanationsOf(
   for (const [index, story] of stories.entries()) {
     const refused = flat
       ? 'The counts have no spread to explain.'
-      : width > widest
-        ? 'Counts so widely spread would take too long.'
+      : width > widest || (trials ?? 0) > mostTrials
+        ? 'Counts so widely spread, or with so many trials, would take too long.'
         : story.refuses(setting);
     const ranges = story.own(trials, seen);
     const over = (counts: FitData) => storyModel(story, counts, seen, ranges);
