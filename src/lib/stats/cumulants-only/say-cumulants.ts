@@ -1,0 +1,34 @@
+import type { CumulantsVerdict } from './judge-cumulants';
+import type { Condition } from './condition';
+import { formatNumber } from '../words/format-number';
+import { sayHowOften } from '../words/say-p';
+
+const NAMES = ['mean', 'variance', 'third cumulant', 'fourth cumulant'];
+
+/** "the variance is above its ceiling". */
+export const sayBroken = ({ order, side }: Condition): string =>
+  `the ${NAMES[order - 1]} is ${side === 'floor' ? 'below its floor' : 'above its ceiling'}`;
+
+/** The answer in one or two sentences, plain first. */
+export function sayCumulants(judged: CumulantsVerdict): string {
+  const { verdict, conditions, broken, nearest, p } = judged;
+  if (verdict === 'impossible') {
+    const worst = broken.reduce((a, b) => (b.slack / b.error < a.slack / a.error ? b : a));
+    return (
+      `No counts at all have these cumulants, independent or not: ${sayBroken(worst)} for any counts, by ${formatNumber(-worst.slack / worst.error, 2)} of its errors. ` +
+      'Look for a misprint, a standard deviation where a variance belongs, or a fourth central moment where a cumulant belongs.'
+    );
+  }
+  const first = conditions.find(({ standing }) => standing === 'broken');
+  if (verdict === 'ruled-out') {
+    const how = first ? `: ${sayBroken(first)}` : '';
+    return `No independent trials have these cumulants${how}. Errors that took some that do so far away ${sayHowOften(p)}, at the most.`;
+  }
+  const where =
+    nearest.distance === 0
+      ? 'Some independent trials can have these cumulants'
+      : `These cumulants lie outside what independent trials can have, by ${formatNumber(nearest.distance, 2)} of their errors: chance does that`;
+  return verdict === 'compatible'
+    ? `${where}, and the variance is known well enough that an excess of 10\u202f% over its ceiling would show.`
+    : `${where}. But the variance is not known well enough to exclude an excess of 10\u202f% over its ceiling.`;
+}
