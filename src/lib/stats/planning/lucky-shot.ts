@@ -12,33 +12,38 @@ export interface LuckyShot {
   chernoff: number;
   /** Shots until the first one, on average, 1/P; null when the law forbids it. */
   shotsUntil: number | null;
-  /** Share of the shots seen with at most as many, with its exact 95 % interval; null when a lump hides it. */
+  /** Share of the shots seen with at most as many, with its exact 95 % interval; null when a lump hides it
+   *  or no histogram is given. */
   observed: { shots: number; share: number; low: number; high: number } | null;
 }
 
 /**
  * Odds that a shot has at most `most` defects: exactly under a law, by Chernoff's bound, and as seen.
  *
- * @param law as a rule the best law of the histogram
+ * @param law as a rule the best law of the histogram; without one, equal trials of a mean, which no independent trials
+ *   of that mean pass for most ≤ mean − 1 (Hoeffding 1956)
  * @param most a whole number ≥ 0
  * The sum of the pmf is one of positive terms, smallest first: relative error about 1e-13 down to 1e-300.
  * Source of the bound: Chernoff 1952.
  */
-export function luckyShot(law: Law, histogram: Histogram, most: number): LuckyShot {
+export function luckyShot(law: Law, histogram: Histogram | null, most: number): LuckyShot {
   const { first, values, scale } = lawWindow(law);
   let exact = 0;
   for (let k = 0; k < values.length && first + k <= most; k++) exact += values[k] / scale;
   exact = Math.min(1, exact);
   const { mean } = lawMoments(law);
   const chernoff = most >= mean ? 1 : Math.exp(-lawRate(law, most));
-  const rows = histogram.counts.filter(([count]) => count <= most);
-  const shots = rows.reduce((sum, [, seen]) => sum + seen, 0);
-  const total = histogram.counts.reduce((sum, [, seen]) => sum + seen, histogram.lump?.shots ?? 0);
-  const hidden = histogram.lump !== null && most >= histogram.lump.from;
   return {
     exact,
     chernoff,
     shotsUntil: exact > 0 ? 1 / exact : null,
-    observed: hidden || total === 0 ? null : { shots, share: shots / total, ...clopperPearson(shots, total) }
+    observed: histogram && shareSeen(histogram, most)
   };
+}
+
+function shareSeen({ counts, lump }: Histogram, most: number): LuckyShot['observed'] {
+  const shots = counts.reduce((sum, [count, seen]) => sum + (count <= most ? seen : 0), 0);
+  const total = counts.reduce((sum, [, seen]) => sum + seen, lump?.shots ?? 0);
+  if (total === 0 || (lump !== null && most >= lump.from)) return null;
+  return { shots, share: shots / total, ...clopperPearson(shots, total) };
 }

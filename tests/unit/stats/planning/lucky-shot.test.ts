@@ -46,4 +46,31 @@ describe('luckyShot', () => {
     expect(luckyShot(law, lumped, 1).observed).toBeNull();
     expect(luckyShot(law, lumped, 0).observed!.share).toBe(0.5);
   });
+
+  it('without a histogram, of equal trials: no independent trials of that mean pass it below mean − 1', () => {
+    const mean = 4;
+    const equal = luckyShot({ levels: [{ p: mean / 10, trials: 10 }], poissonPart: 0 }, null, 2);
+    expect(equal.observed).toBeNull();
+    // Bin(10, 0.4), P(X ≤ 2) = 0.1673 (binomial tables).
+    expect(equal.exact).toBeCloseTo(0.1673, 4);
+    for (const spread of [0.1, 0.2, 0.4]) {
+      const levels = [
+        { p: 0.4 - spread, trials: 5 },
+        { p: 0.4 + spread, trials: 5 }
+      ];
+      expect(luckyShot({ levels, poissonPart: 0 }, null, 2).exact).toBeLessThan(equal.exact);
+    }
+  });
+
+  it('holds far out: 1000 trials of 0.5, none at all', () => {
+    const { exact, chernoff, shotsUntil } = luckyShot(
+      { levels: [{ p: 0.5, trials: 1000 }], poissonPart: 0 },
+      null,
+      0
+    );
+    // 2^−1000, which doubles hold exactly.
+    expect(exact / 2 ** -1000).toBeCloseTo(1, 10);
+    expect(chernoff / 2 ** -1000).toBeCloseTo(1, 9);
+    expect(shotsUntil! / 2 ** 1000).toBeCloseTo(1, 10);
+  });
 });
