@@ -1,5 +1,6 @@
 import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { audit } from './support/axe';
 import { openBrowser } from './support/open-browser';
 import { seedLink, seedSharedReport, type SharedReport } from './support/shared-report';
 import { signIn } from './support/sign-in';
@@ -60,10 +61,7 @@ describe.each(['team', 'link'] as const)('the report page of the %s', (who) => {
     expect((await shifts()).sum).toBeLessThan(0.01);
     await context.close();
   });
-});
 
-describe('the report page of the team', () => {
-  const who = 'team';
   it('is read out in a sceptic’s order, each control under a name of its own', async () => {
     const { page, context } = await pageOfLead();
     await page.goto(server.address + paths[who], { waitUntil: 'networkidle' });
@@ -102,7 +100,9 @@ describe('the report page of the team', () => {
     }
     const controls = spoken.filter(({ role }) => CONTROLS.includes(role));
     expect(controls.filter(({ name }) => name === '')).toEqual([]);
-    const pressed = controls.filter(({ role }) => role !== 'link').map(({ role, name }) => `${role} ${name}`);
+    const pressed = controls
+      .filter(({ role }) => role !== 'link')
+      .map(({ role, name, group }) => `${role} ${name}, ${group}`);
     expect(pressed.length).toBeGreaterThan(20);
     expect(pressed.filter((name, i) => pressed.indexOf(name) !== i)).toEqual([]);
     await context.close();
@@ -157,6 +157,16 @@ describe('the report page of the team', () => {
           .filter((one) => !(one instanceof HTMLInputElement && one.type === 'radio' && !one.checked)).length
     );
     expect(stops.length).toBe(reachable);
+    await context.close();
+  });
+
+  it.each(['light', 'dark'] as const)('has nothing for axe with its tables open, %s', async (colorScheme) => {
+    const { page, context } = await pageOfLead({ colorScheme, bypassCSP: true });
+    await page.goto(server.address + paths[who], { waitUntil: 'networkidle' });
+    const tables = await page.locator('figure summary').all();
+    expect(tables.length).toBeGreaterThan(5);
+    for (const table of tables) await table.click();
+    expect(await audit(page)).toEqual([]);
     await context.close();
   });
 });

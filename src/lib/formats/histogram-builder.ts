@@ -40,7 +40,7 @@ export class HistogramBuilder {
       // A table may run on past N; a row that no shot had says nothing against the trials.
       if (shots === 0) return;
       return refuse(() => ({
-        message: `The count ${count} is above the ${trials} trials ${why}.`,
+        message: `The count ${count} is above the ${trials} ${trials === 1 ? 'trial' : 'trials'} ${why}.`,
         fix: 'Correct the count, or the number of trials.'
       }));
     }

@@ -6,6 +6,8 @@ export interface Spoken {
   name: string;
   /** Level of a heading. */
   level: number | null;
+  /** Name of the group it stands in, such as a fieldset's legend: told before the thing itself. */
+  group: string;
 }
 
 /** What the browser tells a screen reader of the page, in reading order, without what it passes over. */
@@ -15,17 +17,20 @@ export async function spokenPage(page: Page): Promise<Spoken[]> {
   await session.detach();
   const byId = new Map(nodes.map((node) => [node.nodeId, node]));
   const spoken: Spoken[] = [];
-  const walk = (id: string): void => {
+  const walk = (id: string, group: string): void => {
     const node = byId.get(id);
     if (!node) return;
+    const role = String(node.role?.value ?? '');
+    const name = String(node.name?.value ?? '').trim();
     if (!node.ignored)
       spoken.push({
-        role: String(node.role?.value ?? ''),
-        name: String(node.name?.value ?? '').trim(),
+        role,
+        name,
+        group,
         level: Number(node.properties?.find(({ name }) => name === 'level')?.value.value) || null
       });
-    for (const child of node.childIds ?? []) walk(child);
+    for (const child of node.childIds ?? []) walk(child, role === 'group' && name ? name : group);
   };
-  if (nodes.length) walk(nodes[0].nodeId);
+  if (nodes.length) walk(nodes[0].nodeId, '');
   return spoken;
 }

@@ -20,7 +20,7 @@ export function readShotList(
     if (trials !== null && count > trials) {
       reader.problem(
         item.at,
-        `The count ${count} is above the ${trials} trials ${why}.`,
+        `The count ${count} is above the ${trials} ${trials === 1 ? 'trial' : 'trials'} ${why}.`,
         'Correct the count, or the number of trials.'
       );
     } else if (count > maxCount) {

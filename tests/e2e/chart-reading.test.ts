@@ -1,0 +1,47 @@
+import type { Browser } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { openBrowser } from './support/open-browser';
+import { seedLink, seedSharedReport } from './support/shared-report';
+import { startServer, type RunningServer } from './support/start-server';
+
+let server: RunningServer;
+let browser: Browser;
+
+beforeAll(async () => {
+  [server, browser] = await Promise.all([startServer(), openBrowser()]);
+});
+
+afterAll(async () => {
+  await browser?.close();
+  await server?.stop();
+});
+
+describe('a chart', () => {
+  it('keeps what a finger touched, walks to its ends by keys, and forgets it on Escape', async () => {
+    const { path } = await seedLink(server, await seedSharedReport(server));
+    const page = await browser.newPage({ hasTouch: true, viewport: { width: 390, height: 800 } });
+    await page.goto(server.address + path, { waitUntil: 'networkidle' });
+    const figure = page.locator('figure', { has: page.locator('#distribution-title') });
+    const said = figure.locator('[aria-live]');
+    const chart = figure.getByRole('application');
+    await chart.scrollIntoViewIfNeeded();
+    const box = (await chart.boundingBox())!;
+    await page.touchscreen.tap(box.x + box.width - 6, box.y + 60);
+    await expect.poll(() => said.textContent()).toMatch(/^Count 10:/);
+    await page.waitForTimeout(200);
+    expect(await said.textContent()).toMatch(/^Count 10:/);
+    await chart.focus();
+    for (const [key, words] of [
+      ['Home', /^Count 0:/],
+      ['ArrowRight', /^Count 1:/],
+      ['PageUp', /^Count 10:/],
+      ['ArrowLeft', /^Count 9:/],
+      ['Escape', /^$/],
+      ['End', /^Count 10:/]
+    ] as const) {
+      await page.keyboard.press(key);
+      await expect.poll(() => said.textContent(), key).toMatch(words);
+    }
+    await page.close();
+  });
+});
