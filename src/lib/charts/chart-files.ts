@@ -7,6 +7,8 @@ import { cumulantsPlace } from './cumulants-place';
 import { cumulantsTitle } from './cumulants-title';
 import { distributionPicture } from './distribution-picture';
 import { distributionTitle } from './distribution-title';
+import { explanationsPicture } from './explanations-picture';
+import { explanationsTitle } from './explanations-title';
 import type { Picture, Size } from './picture';
 import { ratePicture } from './rate-picture';
 import { rateTitle } from './rate-title';
@@ -38,6 +40,13 @@ export function chartFiles(diagnosis: Diagnosis, name: string | null): Record<st
     made.push(['cumulants-region', cumulantsTitle(place), (size) => regionPicture(place, size)]);
   if (diagnosis.tests.length > 0)
     made.push(['tests', testsTitle(diagnosis), (size) => testsPicture(diagnosis, size, TESTS)]);
+  const { explanations } = diagnosis;
+  if (explanations)
+    made.push([
+      'explanations',
+      explanationsTitle(explanations),
+      (size) => explanationsPicture(explanations, size)
+    ]);
   const source = sourceLine(diagnosis, name);
   return Object.fromEntries(
     made.map(([file, title, draw]) => [

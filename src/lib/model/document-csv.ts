@@ -1,4 +1,5 @@
 import type { Diagnosis, Interval } from '$lib/stats/types';
+import { explanationLines } from './exports/explanation-lines';
 import { csvTable, type CsvValue } from './exports/csv-table';
 
 /**
@@ -58,6 +59,7 @@ export function documentCsv(document: Diagnosis): string {
     for (const key of ['statistic', 'p', 'pAdjusted', 'smallestP', 'resamples'] as const)
       one(`test ${test.id}`, key, test[key]);
   for (const flag of flags) one('flag', flag.id, flag.grade);
+  lines.push(...explanationLines(document.explanations));
   for (const point of document.distribution) {
     one('distribution', 'shots', point.shots, point.count);
     ranged('distribution', 'observed', { ...point, value: point.observed }, point.count);

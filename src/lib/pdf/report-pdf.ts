@@ -2,6 +2,7 @@ import { infoOf } from './page/metadata';
 import { answerPart } from './parts/answer';
 import { cumulantsPart } from './parts/cumulants';
 import { dataPart } from './parts/data';
+import { explanationsParts } from './parts/explanations';
 import { flagsPart } from './parts/flags';
 import { lawPart } from './parts/law';
 import { cautionsPart, methodPart } from './parts/method';
@@ -37,6 +38,7 @@ export function reportPdf(
         cumulantsPart(document),
         testsPart(document),
         flagsPart(document),
+        ...explanationsParts(document.explanations),
         nuisancesPart(input),
         methodPart(),
         provenancePart(input),

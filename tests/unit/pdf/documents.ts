@@ -49,6 +49,7 @@ export const DOCUMENTS: [name: string, make: () => Promise<Diagnosis>][] = [
   ['dice', () => anyDiagnosis(WELDON, { trials: 12 })],
   ['a lump', () => anyDiagnosis(WELDON.slice(0, 10), { trials: 12 }, { from: 10, shots: 18 })],
   ['accidents, trials unknown', () => anyDiagnosis(ACCIDENTS, { trials: null })],
+  ['accidents, judged', () => anyDiagnosis(ACCIDENTS, { trials: null, resamples: 999 })],
   ['many flags', () => anyDiagnosis(WILD, { trials: 60 })],
   [
     'pairs on a ring',

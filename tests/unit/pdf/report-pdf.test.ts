@@ -5,6 +5,7 @@ import { certificateWords } from '$lib/charts/certificate-words';
 import { cumulantsTable } from '$lib/charts/cumulants-table';
 import { distributionTable } from '$lib/charts/distribution-table';
 import { distributionTitle } from '$lib/charts/distribution-title';
+import { explanationsTitle } from '$lib/charts/explanations-title';
 import { levelsTable } from '$lib/charts/levels-table';
 import { rateTable } from '$lib/charts/rate-table';
 import { rateTitle } from '$lib/charts/rate-title';
@@ -14,12 +15,14 @@ import { tailsTable } from '$lib/charts/tails-table';
 import { tailsTitle } from '$lib/charts/tails-title';
 import { testsTitle } from '$lib/charts/tests-title';
 import { documentText } from '$lib/model/document-text';
-import { FLAGS, TESTS, VERDICTS } from '$lib/model/labels';
+import { EXPLANATIONS, FLAGS, TESTS, VERDICTS } from '$lib/model/labels';
 import { sayData } from '$lib/model/plain-text/say-data';
 import { sayFlags } from '$lib/model/plain-text/say-flags';
 import { sayTests } from '$lib/model/plain-text/say-tests';
 import { howBig } from '$lib/model/report/how-big';
 import { sayNuisances } from '$lib/model/report/say-nuisances';
+import { sayOwnNumber } from '$lib/model/report/say-own-number';
+import { sayShotsInAll } from '$lib/model/report/say-shots-in-all';
 import { whatElse } from '$lib/model/report/what-else';
 import { sayHowOften } from '$lib/model/say-p';
 import { reportPdf } from '$lib/pdf/report-pdf';
@@ -36,6 +39,21 @@ const inputOf = (document: Diagnosis) => ({
   documentSha256: sha256(documentText(document)),
   provenance: BLIND
 });
+
+/** Everything that is said of explanations, in words; nothing where none were told. */
+const explained = ({ explanations }: Diagnosis): string[] => {
+  if (!explanations) return [];
+  const { ranked, tied, separate, notRun, pairs, statement } = explanations;
+  return [
+    statement,
+    pairs?.statement ?? '',
+    explanationsTitle(explanations),
+    ...ranked.flatMap((one) => [EXPLANATIONS[one.id], sayOwnNumber(one)]),
+    ...ranked.filter(({ id }) => tied.includes(id)).map(({ meaning }) => meaning),
+    ...separate.flatMap(({ measurement, shots }) => [measurement, sayShotsInAll(shots)]),
+    ...notRun.map(({ reason }) => reason)
+  ];
+};
 
 /** Rows of a table as they are printed. */
 const printed = (table: Table): string[] => {
@@ -125,6 +143,7 @@ describe.each(DOCUMENTS)('report of %s', (name, make) => {
       ...flags,
       ...tests,
       ...notRun,
+      ...explained(document),
       ...document.cautions,
       certificateWords(document)
     ])

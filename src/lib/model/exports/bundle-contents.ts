@@ -15,7 +15,8 @@ const CHARTS: Record<string, string> = {
   'tails-and-bounds': 'both tails and the bounds on them',
   ceiling: 'variance and ceiling',
   'cumulants-region': 'where the cumulants lie, and where those of independent trials can',
-  tests: 'the tests'
+  tests: 'the tests',
+  explanations: 'what else it could be, best first'
 };
 
 /** The files of a bundle that hold the report itself, in the order in which a reader wants them. */

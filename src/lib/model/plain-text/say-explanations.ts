@@ -1,8 +1,9 @@
 import type { Explanations } from '$lib/stats/explanations/types';
-import { formatCount, formatNumber } from '../format-number';
+import { formatNumber } from '../format-number';
 import { EXPLANATIONS } from '../labels';
 import { sayWeight } from '../report/say-weight';
 import { sayOwnNumber } from '../report/say-own-number';
+import { sayShotsInAll } from '../report/say-shots-in-all';
 import { alignTable } from './align-table';
 import { wrap } from './wrap';
 
@@ -31,10 +32,8 @@ export function sayExplanations(explanations: Explanations): string {
   for (const one of ranked.filter(({ id }) => tied.includes(id)))
     lines.push(wrap(`${EXPLANATIONS[one.id]}: ${one.meaning}`, '  – '));
   for (const { between, measurement, shots } of separate) {
-    const enough = shots === null ? '' : ` By the counts alone: about ${formatCount(shots)} shots in all.`;
-    lines.push(
-      wrap(`To tell ${between.map((id) => EXPLANATIONS[id]).join(' from ')}: ${measurement}${enough}`, '  – ')
-    );
+    const told = `To tell ${between.map((id) => EXPLANATIONS[id]).join(' from ')}: ${measurement}`;
+    lines.push(wrap(`${told} ${sayShotsInAll(shots)}`.trim(), '  – '));
   }
   if (notRun.length > 0)
     lines.push(

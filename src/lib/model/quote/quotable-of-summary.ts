@@ -31,6 +31,7 @@ export function quotableOfSummary(summary: Summary): Quotable {
     notRun,
     certificate: null,
     flags,
+    explanations: null,
     engine: { ...engine, seed: null, resamples: null }
   };
 }

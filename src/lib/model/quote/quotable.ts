@@ -1,3 +1,4 @@
+import type { Explanations } from '$lib/stats/explanations/types';
 import type { Diagnosis, Interval, TestResult } from '$lib/stats/types';
 
 /** A test; what its resamples were is missing where a link keeps the counts back. */
@@ -38,12 +39,15 @@ export interface Quotable {
   notRun: Diagnosis['notRun'];
   certificate: Diagnosis['tails']['certificate'];
   flags: Diagnosis['flags'];
+  /** Null where no story was told, or where it is kept back. */
+  explanations: Explanations | null;
   engine: Omit<Diagnosis['engine'], 'seed' | 'resamples'> & { seed: number | null; resamples: number | null };
 }
 
 /** What there is to quote of a whole document. */
 export function quotableOf(diagnosis: Diagnosis): Quotable {
-  const { answer, data, moments, nuisances, fit, tests, notRun, tails, flags, engine } = diagnosis;
+  const { answer, data, moments, nuisances, fit, tests, notRun, tails, flags, explanations, engine } =
+    diagnosis;
   const { divergenceInterval, divergence, gSquared, certified, floor } = fit;
   return {
     answer,
@@ -74,6 +78,7 @@ export function quotableOf(diagnosis: Diagnosis): Quotable {
     notRun,
     certificate: tails.certificate,
     flags,
+    explanations: explanations ?? null,
     engine
   };
 }

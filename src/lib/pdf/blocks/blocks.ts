@@ -3,6 +3,9 @@ import type { Table } from '$lib/charts/table';
 import type { Diagnosis } from '$lib/stats/types';
 import type { Span } from '../type/break-lines';
 
+/** Significant digits of the numbers of a table: the same everywhere, or a column each. */
+export type Digits = number | number[];
+
 /** What a report is made of, before it is set on pages. */
 export type Block =
   | { kind: 'heading'; text: string; sign?: 'more' | 'fewer'; after?: string }
@@ -10,7 +13,7 @@ export type Block =
   | { kind: 'list'; items: string[] }
   | { kind: 'terms'; terms: { term: string; words: (string | Span[])[] }[] }
   | { kind: 'facts'; facts: [string, string][] }
-  | { kind: 'table'; caption: string; table: Table; digits?: number; under?: (string | null)[] }
+  | { kind: 'table'; caption: string; table: Table; digits?: Digits; under?: (string | null)[] }
   | { kind: 'figure'; title: string; what: string; draw: (size: Size) => Picture; fit?: boolean }
   | { kind: 'formulas'; formulas: Formula[] }
   | { kind: 'link'; address: string }

@@ -3,6 +3,7 @@ import type { Table } from '$lib/charts/table';
 import { PAGE } from '../page/geometry';
 import { breakLines, type Line } from '../type/break-lines';
 import type { Pen } from '../type/pen';
+import type { Digits } from './blocks';
 import { STYLES, type Style } from '../type/styles';
 
 export interface TableColumn {
@@ -25,7 +26,7 @@ export interface TableLayout {
 const GAP = { least: 9, most: 26 };
 
 /** Widths of the columns of a table: as narrow as their cells and the longest word of their heading. */
-export function tableLayout(table: Table, digits: number | undefined, pen: Pen): TableLayout {
+export function tableLayout(table: Table, digits: Digits | undefined, pen: Pen): TableLayout {
   for (const scale of [1, 0.92, 0.84, 0.76]) {
     const layout = attempt(table, digits, scale, pen);
     if (layout.width <= PAGE.whole || scale === 0.76) return layout;
@@ -33,7 +34,7 @@ export function tableLayout(table: Table, digits: number | undefined, pen: Pen):
   return attempt(table, digits, 0.7, pen);
 }
 
-function attempt(table: Table, digits: number | undefined, scale: number, pen: Pen): TableLayout {
+function attempt(table: Table, digits: Digits | undefined, scale: number, pen: Pen): TableLayout {
   const scaled = (style: Style): Style => ({ ...style, size: style.size * scale });
   const [cell, amount, cellHead] = [STYLES.cell, STYLES.amount, STYLES.cellHead].map(scaled);
   const columns = table.columns.map(({ title, kind }, i) => {
@@ -42,7 +43,7 @@ function attempt(table: Table, digits: number | undefined, scale: number, pen: P
     const cells = alignedColumn(
       table.rows.map((row) => row[i]),
       kind,
-      digits
+      Array.isArray(digits) ? digits[i] : digits
     );
     const longest = Math.max(...title.split(' ').map((word) => pen.width(word, cellHead)));
     const whole = title.split(' ').length > 2 ? longest : pen.width(title, cellHead);

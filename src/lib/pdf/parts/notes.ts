@@ -80,6 +80,30 @@ export const NOTES = {
       'Each test may cry wolf, so their p-values are raised together (Holm 1979). The answer uses the raised ones.'
     ]
   },
+  compared: (tieWithin: number): MarginNote => ({
+    title: 'How they are compared',
+    paragraphs: [
+      `Each story is fitted by likelihood. AIC takes 2 off for every number that was fitted, the mean among them. Two that lie less than ${tieWithin} apart cannot be told from each other. The weight is exp(−behind/2), as a share of the list: it says nothing of stories that are not in it.`
+    ]
+  }),
+  ownNumber: {
+    title: 'The interval of a number',
+    paragraphs: [
+      'The values at which the likelihood, fitted anew in everything else, lies at most 1.92 under its maximum.'
+    ]
+  },
+  ownFit: {
+    title: 'p of its fit',
+    paragraphs: [
+      'Histograms drawn from the story and fitted again: how often they lie as far from it as these counts. A story may lead the list and still not fit. A dash: not asked, since it lies too far behind.'
+    ]
+  },
+  independentListed: {
+    title: 'Independent trials in the list',
+    paragraphs: [
+      'They stand in it for comparison. The best law counts one number for each probability between 0 and 1, which favours it.'
+    ]
+  },
   origin: {
     title: 'Where a p-value comes from',
     paragraphs: [
@@ -104,4 +128,4 @@ export const NOTES = {
       'A pass is never a proof. Free fermions and particles that exclude their neighbours on an open line give counts that are exactly a sum of independent trials.'
     ]
   }
-} satisfies Record<string, MarginNote>;
+} satisfies Record<string, MarginNote | ((tieWithin: number) => MarginNote)>;

@@ -1,4 +1,5 @@
 import { withoutCounts } from '$lib/model/link/summary';
+import { EXPLANATIONS } from '$lib/model/labels';
 import { inNotation, NOTATIONS } from '$lib/model/quote/notation/notation';
 import { NO_PROVENANCE } from '$lib/model/quote/provenance';
 import { quoteOf } from '$lib/model/quote/quote-of';
@@ -110,6 +111,39 @@ describe('the words of every fixture', () => {
     }
   });
 
+  it('tell which story leads where independence is ruled out, with its number, and which lie with it', () => {
+    const seen = { tied: 0, alone: 0, unfit: 0 };
+    for (const { name, document } of documents) {
+      const { result } = plain(document);
+      const { explanations } = document;
+      const found = /Of the explanations fitted, the nearest to the counts by AIC is (.*?)\. (?=[A-Z])/.exec(
+        result
+      );
+      if (!explanations) {
+        expect(found, name).toBeNull();
+        continue;
+      }
+      const [first, ...others] = explanations.ranked;
+      const near = others.filter(({ id }) => explanations.tied.includes(id));
+      const [lead, tie = ''] = found![1].split('; less than 2 behind, ');
+      expect(lead.startsWith(EXPLANATIONS[first.id]), name).toBe(true);
+      const { symbol, value, low, high } = first.parameter!;
+      expectInterval(lead, symbol.length === 1 ? `${symbol} = ` : `${symbol} `, { value, low, high });
+      expect(tie === '', name).toBe(near.length === 0);
+      for (const { id } of others)
+        expect(tie.includes(EXPLANATIONS[id])).toBe(near.some((one) => one.id === id));
+      const [, sign, p] = new RegExp(`and p ([=≤]) (${NUMBER}) for its own fit`).exec(lead)!;
+      expect(isRounded(p, first.goodness!.p)).toBe(true);
+      const unfit = first.goodness!.p <= Math.max(document.engine.alpha, first.goodness!.smallestP);
+      expect(sign).toBe(first.goodness!.p <= first.goodness!.smallestP ? '≤' : '=');
+      expect(lead.endsWith('; yet it does not fit them either')).toBe(unfit);
+      seen.tied += Number(near.length > 0);
+      seen.alone += Number(near.length === 0);
+      seen.unfit += Number(unfit);
+    }
+    for (const [what, times] of Object.entries(seen)) expect(times, what).toBeGreaterThan(0);
+  });
+
   it('hold no number that is not the document’s', () => {
     const always = [95, 5, 100, 50, 1, 2, 10, 1934, 1936, 1956, 1978, 1979, 1991, 1993, 1994, 1997];
     for (const { name, document } of documents) {
@@ -185,7 +219,7 @@ describe('the words of every fixture', () => {
   it('are the same words in every notation', () => {
     // Symbols, numbers and marks taken off, each notation leaves the same letters.
     const bare = (text: string) =>
-      text.replace(/\\(emph|texttt|allowbreak|times|mu|alpha|le)\b|[^A-Za-z]/g, '');
+      text.replace(/\\(emph|texttt|allowbreak|times|mu|alpha|rho|theta|varepsilon|le)\b|[^A-Za-z]/g, '');
     for (const { document } of documents) {
       const quote = quoteOf(document, NO_PROVENANCE);
       for (const words of [quote.result, quote.methods])

@@ -77,6 +77,9 @@ export const textOf = (html: string): string =>
       )
       .replace(/<[^>]*>/g, '')
       .replaceAll('&nbsp;', ' ')
+      .replaceAll('&lt;', '<')
+      .replaceAll('&gt;', '>')
+      .replaceAll('&amp;', '&')
   );
 
 /** Rows of all tables of a page, a cell a text. */

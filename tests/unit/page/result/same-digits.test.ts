@@ -10,6 +10,7 @@ import { distributionCsv } from '$lib/model/exports/distribution-csv';
 import { tailsCsv } from '$lib/model/exports/tails-csv';
 import { TESTS } from '$lib/model/labels';
 import { plainText } from '$lib/model/plain-text/plain-text';
+import { sayNuisances } from '$lib/model/report/say-nuisances';
 import Parts from '$lib/page/result/Parts.svelte';
 import { reportPdf } from '$lib/pdf/report-pdf';
 import { serverFonts } from '$lib/server/pdf/fonts';
@@ -25,6 +26,7 @@ import { BLIND } from '../../pdf/documents';
 import { plainSpaces, readPdf } from '../../pdf/read-pdf';
 import { rowsOfPage, rowsOfPdf, tablesOf, textOf, wrongs } from './printed-tables';
 import { NUMBER, printed, unlike } from './same-digits';
+import { explanationsOfPdf, wrongExplanations } from './told-explanations';
 
 /** All three verdicts, pairs, a lump, trials unknown, shots in order. */
 const CASES: [file: string, verdict: Diagnosis['answer']['verdict'], options: Partial<DiagnoseOptions>][] = [
@@ -33,7 +35,9 @@ const CASES: [file: string, verdict: Diagnosis['answer']['verdict'], options: Pa
   ['greenwood-yule.csv', 'ruled-out', {}],
   ['horse-kicks.csv', 'undecided', {}],
   ['demo/ring-kinks.csv', 'compatible', { trials: 40, unit: 'pair', geometry: 'ring-bonds' }],
-  ['demo/forty-shots.csv', 'undecided', { trials: 64 }]
+  ['demo/forty-shots.csv', 'undecided', { trials: 64 }],
+  // As if the dice were bonds: for the numbers of misreads alone.
+  ['weldon-dice.csv', 'compatible', { trials: 12, geometry: 'open-bonds', misread: 0.001, resamples: 99 }]
 ];
 
 /** Significant digits that tables have, and p-values. */
@@ -116,6 +120,48 @@ describe.each(CASES)('numbers of %s, %s', (file, verdict, options) => {
       render(ChartTable, { props: { table: testsTable(d, TESTS), caption: '' } }).body
     ).filter(([name]) => d.tests.some(({ id }) => TESTS[id] === name));
     d.tests.forEach((test, i) => expect(unlike(statistic[i][1], test.statistic, DIGITS)).toBe(''));
+  });
+
+  it('in the explanations are those of the document on page, in the PDF and in the CSV file', () => {
+    const ranked = d.explanations?.ranked ?? [];
+    expect(ranked.length > 0).toBe(verdict === 'ruled-out');
+    const rows = rowsOfPage(html);
+    const at = rows.findIndex(([first, second]) => first === 'explanation' && second === 'AIC behind');
+    expect(at >= 0).toBe(ranked.length > 0);
+    const shown = at < 0 ? [] : rows.slice(at + 1, at + 1 + ranked.length);
+    expect(wrongExplanations(shown, ranked)).toEqual([]);
+    expect(wrongExplanations(explanationsOfPdf(pdf.cells, ranked), ranked)).toEqual([]);
+    const lines = Papa.parse<string[]>(documentCsv(d), { skipEmptyLines: true }).data;
+    for (const { id, behind, weight, goodness, parameter } of ranked) {
+      const value = (item: string) =>
+        lines.find(([part, name]) => part === `explanation ${id}` && name === item)?.slice(3) ?? [];
+      expect([value('behind')[0], value('weight')[0]].map(Number)).toEqual([behind, weight]);
+      expect(value('fit p')[0]).toBe(goodness === null ? '' : String(goodness.p));
+      if (parameter)
+        expect(value(parameter.symbol).map(Number)).toEqual([parameter.value, parameter.low, parameter.high]);
+    }
+    for (const words of [d.explanations?.statement, d.explanations?.pairs?.statement])
+      if (words) for (const text of [textOf(html), pdf.text]) expect(text).toContain(plainSpaces(words));
+  });
+
+  it('of misreads are those of the document on page, in the PDF and in the CSV file', () => {
+    const misread = d.nuisances?.misread;
+    expect(misread !== undefined).toBe((options.misread ?? 0) > 0);
+    const lines = Papa.parse<string[]>(documentCsv(d), { skipEmptyLines: true }).data;
+    const told = (item: string) =>
+      lines.find(([part, name]) => part === 'misreads' && name === item)?.slice(3);
+    expect(told('ceiling') !== undefined).toBe(misread !== undefined);
+    if (!misread) return;
+    for (const key of ['rate', 'ceiling', 'rawCeiling', 'rawDispersion'] as const)
+      expect(told(key)?.[0]).toBe(misread[key] === null ? '' : String(misread[key]));
+    for (const [what, sentence] of sayNuisances(d, null))
+      for (const text of [textOf(html), pdf.text])
+        for (const words of [what, sentence]) expect(text).toContain(plainSpaces(words));
+    expect(
+      sayNuisances(d, null)
+        .map(([, sentence]) => sentence)
+        .join(' ')
+    ).toMatch(/ceiling/);
   });
 
   it('in the CSV files are those of the document in full', () => {

@@ -39,6 +39,9 @@ const SIGNS: Record<string, string> = {
   μ: '\\mu ',
   α: '\\alpha ',
   β: '\\beta ',
+  ρ: '\\rho ',
+  θ: '\\theta ',
+  ε: '\\varepsilon ',
   '−': '-',
   '≤': '\\le',
   '²': '^2'

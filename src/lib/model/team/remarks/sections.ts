@@ -8,6 +8,7 @@ export const REMARK_SECTIONS = [
   'cumulants',
   'tests',
   'flags',
+  'explanations',
   'nuisances',
   'method',
   'provenance'
@@ -24,6 +25,7 @@ export const SECTION_NAMES: Record<RemarkSection, string> = {
   cumulants: 'the cumulants',
   tests: 'the tests',
   flags: 'what the counts point to',
+  explanations: 'what else it could be',
   nuisances: 'what can look like interaction',
   method: 'the method',
   provenance: 'where the report comes from'

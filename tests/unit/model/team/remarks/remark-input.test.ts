@@ -74,9 +74,10 @@ describe('nameKey', () => {
 
 describe('sectionOfPart', () => {
   it('knows the parts of the result page', () => {
-    expect(['answer', 'counts-and-law', 'provenance', 'links'].map(sectionOfPart)).toEqual([
+    expect(['answer', 'counts-and-law', 'explanations', 'provenance', 'links'].map(sectionOfPart)).toEqual([
       'answer',
       'law',
+      'explanations',
       'provenance',
       null
     ]);

@@ -1,0 +1,36 @@
+import type { Explanations } from '$lib/stats/explanations/types';
+import type { CsvValue } from './csv-table';
+
+/**
+ * The explanations of a document as lines `part,item,count,value,low,high` of the table of all numbers; none where no
+ * story was told. The order is the document's, best first.
+ */
+export function explanationLines(explanations: Explanations | undefined): CsvValue[][] {
+  if (!explanations) return [];
+  const { ranked, tied, tieWithin, separate, pairs } = explanations;
+  const lines: CsvValue[][] = [];
+  const one = (part: string, item: string, value: CsvValue, low: CsvValue = null, high: CsvValue = null) =>
+    lines.push([part, item, null, value, low, high]);
+  for (const story of ranked) {
+    const part = `explanation ${story.id}`;
+    for (const key of ['logLikelihood', 'parameters', 'aic', 'behind', 'weight', 'base', 'gSquared'] as const)
+      one(part, key, story[key]);
+    const { parameter, second, goodness } = story;
+    if (parameter) {
+      one(part, parameter.symbol, parameter.value, parameter.low, parameter.high);
+      one(part, 'atBound', parameter.atBound);
+    }
+    if (second) one(part, second.symbol, second.value);
+    for (const key of ['p', 'smallestP', 'resamples'] as const)
+      one(part, `fit ${key}`, goodness?.[key] ?? null);
+    one(part, 'tied', tied.includes(story.id) ? 'yes' : 'no');
+  }
+  one('explanations', 'tieWithin', tieWithin);
+  for (const { between, shots } of separate)
+    one('explanations', `shots to separate ${between[0]} and ${between[1]}`, shots);
+  if (pairs) {
+    one('pairs', 'covariance', pairs.covariance);
+    one('pairs', 'correlation', pairs.correlation, pairs.correlationLow);
+  }
+  return lines;
+}
