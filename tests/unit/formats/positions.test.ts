@@ -27,7 +27,7 @@ describe('numbers of shots by position', () => {
       '3:1 "1.5" is not a whole number.'
     ]);
     expect(problems('447\n1\n2\n', { ...told, trials: 1 })).toEqual([
-      '3:1 The count 2 is above the 1 trials given.'
+      '3:1 The count 2 is above the 1 trial given.'
     ]);
     expect(problems('0\n0\n', told)[0]).toContain('no shots');
     expect(problems('1,2\n3,4\n', told)[0]).toContain('2 columns');
