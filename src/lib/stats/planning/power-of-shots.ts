@@ -3,27 +3,36 @@ import { normalQuantile } from '../numerics/normal-quantile';
 import type { DispersionSpread } from './dispersion-spread';
 
 /**
- * Chance that the ceiling test with S shots sees a dispersion of this spread.
+ * Chance that the ceiling test with S shots sees an effect.
  *
- * The dispersion of S shots is taken as a multiple of χ² with the degrees of freedom that its spread asks for, and its
- * cube root as normal: (D/r)^{1/3} ~ N(1 − v/9, v/9), v = shape/S. With many shots that is the plain normal formula;
- * with a hundred it also has the lean of a variance.
+ * Variance over ceiling is taken as a shifted gamma variable of the mean, variance and third cumulant that its spread
+ * asks for, and that as the cube of a normal one: Z = (2/γ)[(1 + γz/6 − γ²/36)³ − 1]. With many shots it is the plain
+ * normal formula; with a hundred, and at low means, the lean decides.
  *
- * @param trials N, or null: under independence the shape is that of equal trials, 2(1 − 1/N)
+ * @param none spread under equal trials of the same mean, @param some under the effect
  * @param alpha level of the one-sided test, 0 < α < 0.5
  * Source: Wilson & Hilferty 1931, PNAS 17:684 (m), for the cube root.
  */
 export function powerOfShots(
-  { ratio, shape }: DispersionSpread,
-  trials: number | null,
+  none: DispersionSpread,
+  some: DispersionSpread,
   shots: number,
   alpha: number
 ): number {
-  const none = nullShape(trials) / shots / 9;
-  const some = shape / shots / 9;
-  const cut = 1 - none - normalQuantile(alpha) * Math.sqrt(none);
-  return normalCdf((1 - some - cut / Math.cbrt(ratio)) / Math.sqrt(some));
+  const lean = leanOf(none, shots);
+  const z = -normalQuantile(alpha);
+  const atCut = Math.abs(lean) < tiny ? z : (2 / lean) * ((1 + (lean * z) / 6 - (lean * lean) / 36) ** 3 - 1);
+  const cut = none.ratio + none.bias / shots + atCut * Math.sqrt(none.spread / shots);
+  const from = (cut - some.ratio - some.bias / shots) / Math.sqrt(some.spread / shots);
+  const other = leanOf(some, shots);
+  const score =
+    Math.abs(other) < tiny ? from : (6 / other) * (Math.cbrt((other * from) / 2 + 1) - 1) + other / 6;
+  return normalCdf(-score);
 }
 
-/** S times the relative variance of variance over ceiling for equal trials. */
-export const nullShape = (trials: number | null): number => 2 * (1 - (trials === null ? 0 : 1 / trials));
+/** Skewness of the ratio of `shots` shots. */
+const leanOf = ({ lean, spread }: DispersionSpread, shots: number): number =>
+  lean / Math.sqrt(spread ** 3 * shots);
+
+/** Below this the cube loses its digits, and is the normal law. */
+const tiny = 1e-6;

@@ -1,12 +1,11 @@
 import { ceiling } from '../bounds/ceiling';
-import { binomialWindow } from '../laws/binomial-window';
-import { poissonWindow } from '../laws/poisson-window';
 import type { Window } from '../laws/window';
 import { clopperPearson } from '../numerics/clopper-pearson';
 import { generator, type Generator } from '../random/generator';
 import { histogramSampler } from '../random/histogram-sampler';
 import type { Effect } from './effect';
 import { effectWindow } from './effect-window';
+import { equalCounts } from './equal-counts';
 
 /** A plan tried out on invented shots. */
 export interface SimulatedPower {
@@ -44,10 +43,8 @@ export function simulatePower(
   const window = effectWindow(effect);
   if (!window) return null;
   const { mean, trials } = effect;
-  const alike =
-    trials === null ? poissonWindow(mean, 1e-18, 1) : binomialWindow(trials, mean / trials, 1e-18, 1);
   const all = repeats.without + repeats.with;
-  const under = experiments(alike, trials, shots);
+  const under = experiments(equalCounts(mean, trials), trials, shots);
   const random = generator(seed, 1);
   const drawn = new Float64Array(repeats.without);
   for (let r = 0; r < drawn.length; r++) {

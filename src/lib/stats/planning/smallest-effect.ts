@@ -1,9 +1,9 @@
 import { dispersionSpread } from './dispersion-spread';
 import type { Effect, Sharpness } from './effect';
 import { effectWindow } from './effect-window';
+import { equalCounts } from './equal-counts';
 import { largestEffect } from './largest-effect';
 import { powerOfShots } from './power-of-shots';
-import { windowCumulants } from './window-cumulants';
 
 /**
  * Smallest size of an effect that `shots` shots see with this power: the inverse of `shotsToSee`, to 1e-4 of itself.
@@ -16,14 +16,15 @@ export function smallestEffect(
   { alpha, power }: Sharpness
 ): number | null {
   if (!(alpha > 0 && alpha < 0.5 && power > alpha && power < 1 && shots >= 2)) return null;
+  const { mean, trials } = planned;
+  const largest = largestEffect(planned);
+  if (!(largest > 0 && mean > 0 && mean < (trials ?? Infinity))) return null;
+  const none = dispersionSpread(equalCounts(mean, trials), trials);
   const seen = (size: number): boolean => {
     const window = effectWindow({ ...planned, size });
     if (!window) return false;
-    const spread = dispersionSpread(windowCumulants(window), planned.trials);
-    return powerOfShots(spread, planned.trials, shots, alpha) >= power;
+    return powerOfShots(none, dispersionSpread(window, trials), shots, alpha) >= power;
   };
-  const largest = largestEffect(planned);
-  if (!(largest > 0)) return null;
   // From the top of its range an effect may be so wild that it scatters out of sight: the smallest is looked for upward.
   let high = 1e-9 * largest;
   while (high < largest && !seen(high)) high *= 2;

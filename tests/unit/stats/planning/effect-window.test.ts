@@ -4,7 +4,7 @@ import { betaBinomial } from '$lib/stats/calibration/violations/common-cause';
 import { dispersionSpread } from '$lib/stats/planning/dispersion-spread';
 import type { Effect } from '$lib/stats/planning/effect';
 import { effectWindow } from '$lib/stats/planning/effect-window';
-import { windowCumulants } from '$lib/stats/planning/window-cumulants';
+import { equalCounts } from '$lib/stats/planning/equal-counts';
 import { generator } from '$lib/stats/random/generator';
 
 const pmf = (effect: Effect): number[] => {
@@ -80,20 +80,16 @@ describe('effectWindow', () => {
 });
 
 describe('dispersionSpread', () => {
-  it('of equal trials is 2(1 − 1/N), of a Poisson law 2, by their cumulants', () => {
-    // Bin(10, 0.3): 3, 2.1, 0.84, −0.546.
-    const binomial = dispersionSpread({ mean: 3, variance: 2.1, third: 0.84, fourth: -0.546 }, 10);
-    expect(binomial.ratio).toBeCloseTo(1, 14);
-    expect(binomial.shape).toBeCloseTo(1.8, 12);
-    const poisson = dispersionSpread({ mean: 0.7, variance: 0.7, third: 0.7, fourth: 0.7 }, null);
-    expect(poisson).toEqual({ ratio: 1, shape: expect.closeTo(2, 12) as number });
-  });
-});
-
-describe('windowCumulants', () => {
-  it('of four equal cells', () => {
-    // 0 … 3: mean 1.5, variance 1.25, μ4 = (2·1.5⁴ + 2·0.5⁴)/4 = 2.5625, κ4 = 2.5625 − 3·1.5625.
-    const cumulants = windowCumulants({ first: 0, values: Float64Array.of(1, 1, 1, 1), scale: 4 });
-    expect(cumulants).toEqual({ mean: 1.5, variance: 1.25, third: 0, fourth: -2.125 });
+  it('of equal trials is 2(1 − 1/N), of a Poisson law 2 with the lean 8 + 4/μ', () => {
+    const binomial = dispersionSpread(equalCounts(3, 10), 10);
+    expect(binomial.ratio).toBeCloseTo(1, 12);
+    expect(binomial.spread).toBeCloseTo(1.8, 10);
+    for (const mean of [0.1, 0.7, 5]) {
+      const poisson = dispersionSpread(equalCounts(mean, null), null);
+      expect(poisson.spread).toBeCloseTo(2, 10);
+      // E C₂³/μ³ of the second Charlier polynomial (n − μ)² − n, by hand: 8 + 4/μ.
+      expect(poisson.lean).toBeCloseTo(8 + 4 / mean, 8);
+      expect(poisson.bias).toBeCloseTo(0, 10);
+    }
   });
 });

@@ -7,14 +7,15 @@ import { smallestEffect } from '$lib/stats/planning/smallest-effect';
 const usual = { alpha: 0.05, power: 0.8 };
 const GRID: [Effect['kind'], size: number, mean: number, trials: number | null][] = [
   ['excess', 0.1, 4, null],
-  ['excess', 0.5, 4, null],
+  ['excess', 0.4, 4, null],
   ['excess', 0.05, 0.5, null],
   ['excess', 0.12, 4.8, 32],
-  ['excess', 0.5, 0.3, 20],
+  ['excess', 0.2, 0.5, 20],
+  ['excess', 0.08, 0.2, 20],
   ['pairs', 0.004, 9.6, 64],
-  ['pairs', 0.05, 2, 12],
+  ['pairs', 0.03, 2, 12],
   ['neighbours', 0.05, 4.8, 48],
-  ['neighbours', 0.3, 10, 100],
+  ['neighbours', 0.15, 10, 100],
   ['neighbours', 0.1, 1, 20],
   ['misread', 0.01, 4, 50],
   ['misread', 0.002, 5, 100],
@@ -73,8 +74,9 @@ describe('shotsToSee', () => {
       '%s of %d, mean %d of %d, is seen so often on simulated shots',
       (kind, size, mean, trials) => {
         const effect = { kind, size, mean, trials };
-        const { shots } = shotsToSee(effect, { alpha, power })!;
-        const tried = simulatePower(effect, shots!, alpha, { without: 5000, with: 1500 }, 8)!;
+        const { shots, rough } = shotsToSee(effect, { alpha, power })!;
+        const tried = simulatePower(effect, shots!, alpha, { without: 8000, with: 1500 }, 8)!;
+        expect(rough).toBe(false);
         // Five points, and what the 1500 experiments themselves leave open (sd 1.3 points at most).
         expect(Math.abs(tried.share - power), `${shots} shots: ${tried.share}`).toBeLessThan(0.05);
       }
