@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import type { Diagnosis } from '$lib/stats/types';
 import { explanationsSchema } from './explanations-schema';
+import { nuisancesSchema } from './nuisances-schema';
 
 /*
  * The diagnosis document as a schema, for documents that come from outside: a stored file, an
@@ -86,16 +87,6 @@ const fit = z.strictObject({
   omitted: z.array(z.strictObject({ id: referenceId, reason: z.string() }))
 });
 
-const misread = z.strictObject({
-  applied: z.boolean(),
-  rate: orNull,
-  ceiling: orNull,
-  rawCeiling: number,
-  rawDispersion: orNull,
-  neededRate: interval,
-  kinks: z.array(level).nullable()
-});
-
 const distributionPoint = z.strictObject({
   count: whole,
   density: orNull,
@@ -174,7 +165,7 @@ export const diagnosisSchema = z.strictObject({
   }),
   data,
   moments,
-  nuisances: z.strictObject({ misread }).optional(),
+  nuisances: nuisancesSchema.optional(),
   fit,
   distribution: z.array(distributionPoint),
   rate: z.strictObject({ horizon: number, silence: number, scale: number, points: z.array(ratePoint) }),

@@ -1,5 +1,6 @@
 import type { Diagnosis, Interval } from '$lib/stats/types';
 import { explanationLines } from './exports/explanation-lines';
+import type { DriftPart } from '$lib/stats/drift/types';
 import { csvTable, type CsvValue } from './exports/csv-table';
 
 /**
@@ -10,15 +11,10 @@ import { csvTable, type CsvValue } from './exports/csv-table';
 export function documentCsv(document: Diagnosis): string {
   const { data, engine, answer, moments, fit, tests, flags } = document;
   const lines: CsvValue[][] = [['part', 'item', 'count', 'value', 'low', 'high']];
-  const one = (part: string, item: string, value: CsvValue, count: number | null = null): void => {
+  const one: One = (part, item, value, count = null) => {
     lines.push([part, item, count, value, null, null]);
   };
-  const ranged = (
-    part: string,
-    item: string,
-    { value, low, high }: Interval,
-    count: number | null = null
-  ) => {
+  const ranged: Ranged = (part, item, { value, low, high }, count = null) => {
     lines.push([part, item, count, value, low, high]);
   };
   one('document', 'format', document.format);
@@ -31,14 +27,15 @@ export function documentCsv(document: Diagnosis): string {
     ranged('moments', key, moments[key]);
   for (const key of ['ceiling', 'criticalTrials', 'pairCovariance'] as const)
     one('moments', key, moments[key]);
-  if (document.nuisances) {
-    const { misread } = document.nuisances;
+  const { misread, drift } = document.nuisances ?? {};
+  if (misread) {
     one('misreads', 'applied', misread.applied ? 'yes' : 'no');
     for (const key of ['rate', 'ceiling', 'rawCeiling', 'rawDispersion'] as const)
       one('misreads', key, misread[key]);
     ranged('misreads', 'neededRate', misread.neededRate);
     for (const { p, trials } of misread.kinks ?? []) one('misreads', `kinks of the next ${trials} bonds`, p);
   }
+  if (drift) driftLines(drift, one, ranged);
   for (const key of [
     'logLikelihood',
     'divergence',
@@ -80,4 +77,29 @@ export function documentCsv(document: Diagnosis): string {
       one(`${point.side} tail`, key, point[key], point.count);
   }
   return csvTable(lines);
+}
+
+type One = (part: string, item: string, value: CsvValue, count?: number | null) => void;
+type Ranged = (part: string, item: string, interval: Interval, count?: number | null) => void;
+
+/** Shots and batches are told in `item`: `count` is for counts of defects. */
+function driftLines({ means, change, split }: DriftPart, one: One, ranged: Ranged): void {
+  for (const { from, to, mean, low, high } of means)
+    ranged('mean over time', `shots ${from + 1} to ${to}, with three-sigma limits`, {
+      value: mean,
+      low,
+      high
+    });
+  if (change)
+    for (const key of ['shot', 'before', 'after', 'p', 'smallestP'] as const)
+      one('change of the mean', key, change[key]);
+  if (!split) return;
+  one('batches', 'verdict within', split.verdict);
+  for (const key of ['dispersion', 'excessWithin', 'meansVariance'] as const)
+    ranged('batches', key, split[key]);
+  for (const key of ['excess', 'excessBetween', 'p', 'pTogether', 'smallestP', 'tested'] as const)
+    one('batches', key, split[key]);
+  for (const line of split.each)
+    for (const key of ['shots', 'mean', 'dispersion', 'p'] as const)
+      one(`batch ${line.batch}`, key, line[key]);
 }

@@ -1,6 +1,7 @@
 import { answer } from './answer/answer';
 import { cautions } from './answer/cautions';
 import { criticalTrials } from './bounds/critical-trials';
+import { driftReport } from './drift/drift-report';
 import { engineVersion } from './engine-version';
 import { explainRuledOut } from './explanations/explain-ruled-out';
 import { fitData } from './fit/fit-data';
@@ -76,11 +77,21 @@ export async function diagnose(
       : null;
   const fitted = await fittedTests(counts, tested, drawing, pace.within(0.12, 0.8), helper);
   await pace.step('shot order', 0.8);
-  const order = await orderTests(data, drawing, pace.within(0.8, 0.9));
+  const order = await orderTests(data, drawing, pace.within(0.8, 0.88));
   const tests = adjust([...(ceiling ? [ceiling] : []), ...fitted.tests, ...order.tests]);
   const table = lawTable(counts, law);
   const shown = distribution(histogram, counts.total, trials, table);
-  const nuisances = misreadReport(options, histogram, moments, equal, law);
+  const drift = await driftReport(
+    data,
+    trials,
+    moments,
+    tested,
+    options,
+    tests.some(({ id, p }) => id === 'ceiling' && p <= options.alpha),
+    pace.within(0.88, 0.9)
+  );
+  const read = misreadReport(options, histogram, moments, equal, law);
+  const nuisances = { ...(read && { misread: read }), ...(drift && { drift }) };
   const evidence = evidenceOf({
     options,
     counts,
@@ -91,7 +102,8 @@ export async function diagnose(
     fitted,
     law,
     neighbours: order.neighbours,
-    misread
+    misread,
+    drift
   });
   const flags = raiseFlags(evidence);
   const said = answer(evidence, flags);
@@ -129,7 +141,7 @@ export async function diagnose(
           ? criticalTrials(moments.mean.value!, moments.variance.value!)
           : null
     },
-    ...(nuisances ? { nuisances } : {}),
+    ...(Object.keys(nuisances).length > 0 && { nuisances }),
     fit: tested.report(fitted),
     distribution: shown,
     rate: ratePoints(shown, counts.total, trials, table),

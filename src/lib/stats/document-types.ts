@@ -1,3 +1,4 @@
+import type { DriftPart } from './drift/types';
 import type { Explanations } from './explanations/types';
 import type { Geometry, Interval, Level, Unit } from './types';
 
@@ -148,8 +149,13 @@ export interface Diagnosis {
     criticalTrials: number | null;
     pairCovariance: number | null;
   };
-  /** For kinks on an open chain of known length; left out otherwise. */
-  nuisances?: { misread: MisreadPart };
+  /** What can look like interaction; each part is there only where it has something to say. */
+  nuisances?: {
+    /** For kinks on an open chain of known length. */
+    misread?: MisreadPart;
+    /** For shot lists, since engine 0.5. */
+    drift?: DriftPart;
+  };
   fit: {
     logLikelihood: number;
     levels: Level[];

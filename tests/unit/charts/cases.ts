@@ -1,4 +1,6 @@
 import type { Diagnosis } from '$lib/stats/types';
+import { defaultOptions } from '$lib/stats/default-options';
+import { diagnose } from '$lib/stats/diagnose';
 import { anyDiagnosis, WELDON } from './any-diagnosis';
 
 /** Counts that are hard to draw, by name. */
@@ -17,6 +19,12 @@ export const CASES: [string, () => Promise<Diagnosis>][] = [
         [5, 2]
       ])
   ],
+  [
+    'shots whose mean jumps',
+    () => ofShots(Array.from({ length: 203 }, (_, i) => (i % 3) + (i < 90 ? 0 : 6)))
+  ],
+  ['ten shots', () => ofShots([0, 1, 2, 1, 0, 1, 900, 1, 0, 1])],
+  ['shots all alike', () => ofShots(new Array<number>(60).fill(3))],
   ['one shot', () => anyDiagnosis([[3, 1]], { trials: 12 })],
   ['one count', () => anyDiagnosis([[3, 700]], { trials: 12 })],
   ['only empty shots', () => anyDiagnosis([[0, 40]], { trials: 5 })],
@@ -121,3 +129,10 @@ function stretched(document: Diagnosis, times: number): Diagnosis {
     tails: { ...tails, points: wide(tails.points) }
   };
 }
+
+/** A shot list in batches of ten. */
+const ofShots = (shots: number[]): Promise<Diagnosis> =>
+  diagnose(
+    { kind: 'shots', shots, batches: shots.map((_, i) => `run ${Math.floor(i / 10)}`) },
+    { ...defaultOptions, resamples: 19 }
+  );

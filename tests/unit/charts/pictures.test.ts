@@ -1,4 +1,5 @@
 import { ceilingPicture } from '$lib/charts/ceiling-picture';
+import { driftPicture } from '$lib/charts/drift-picture';
 import { explanationsPicture } from '$lib/charts/explanations-picture';
 import { distributionPicture } from '$lib/charts/distribution-picture';
 import { cumulantsPlace } from '$lib/charts/cumulants-place';
@@ -10,6 +11,7 @@ import { sheetToSvg } from '$lib/charts/sheet-to-svg';
 import { tailsPicture } from '$lib/charts/tails-picture';
 import { testsPicture } from '$lib/charts/tests-picture';
 import { TESTS } from '$lib/model/labels';
+import type { DriftPart } from '$lib/stats/drift/types';
 import type { Explanations } from '$lib/stats/explanations/types';
 import type { Diagnosis } from '$lib/stats/types';
 import fc from 'fast-check';
@@ -28,6 +30,8 @@ const nothing: Explanations = {
   statement: ''
 };
 
+const noOrder: DriftPart = { means: [], change: null, split: null, statement: '' };
+
 type Draw = (diagnosis: Diagnosis, size: Size) => Picture;
 const DRAWS: [string, Draw][] = [
   ['counts', distributionPicture],
@@ -42,6 +46,8 @@ const DRAWS: [string, Draw][] = [
     }
   ],
   ['tests', (diagnosis, size) => testsPicture(diagnosis, size, TESTS)],
+  // Only shot lists have these.
+  ['means', ({ nuisances }, size) => driftPicture(nuisances?.drift ?? noOrder, size)],
   // Only results that rule independent trials out have these; the others draw an empty list.
   ['explanations', ({ explanations }, size) => explanationsPicture(explanations ?? nothing, size)]
 ];

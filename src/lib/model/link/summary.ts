@@ -69,7 +69,7 @@ export function withoutCounts(diagnosis: Diagnosis): Summary {
     engine: { version, alpha, tolerance },
     data: { shots, trials, unit, geometry, misread, ordered, batches, lumped: lump !== null },
     ...measured,
-    ...(diagnosis.nuisances ? { nuisances: ofMisreads(diagnosis.nuisances.misread) } : {}),
+    ...(diagnosis.nuisances?.misread ? { nuisances: ofMisreads(diagnosis.nuisances.misread) } : {}),
     tests: diagnosis.tests.map(ofTest),
     notRun: diagnosis.notRun,
     cautions

@@ -53,7 +53,7 @@ export function quotableOf(diagnosis: Diagnosis): Quotable {
     answer,
     data: {
       ...data,
-      misreadApplied: nuisances?.misread.applied ?? false,
+      misreadApplied: nuisances?.misread?.applied ?? false,
       lump: data.lump && { from: data.lump.from }
     },
     moments,

@@ -18,6 +18,6 @@ export const METHOD_SOURCES: readonly [string, string][] = [
   ],
   [
     'Order of the shots',
-    'Pitman 1938, Biometrika 29:322. Ljung and Box 1978, Biometrika 65:297. Wald and Wolfowitz 1940, Ann. Math. Statist. 11:147. Tippett 1931.'
+    'Pitman 1938, Biometrika 29:322. Ljung and Box 1978, Biometrika 65:297. Wald and Wolfowitz 1940, Ann. Math. Statist. 11:147. Tippett 1931. Within batches: Haldane 1937, Biometrika 29:133. Change of the mean: Hinkley 1970, Biometrika 57:1; James, James and Siegmund 1987, Biometrika 74:71, for long lists. Limits of the mean: Shewhart 1931.'
   ]
 ];

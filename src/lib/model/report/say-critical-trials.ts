@@ -7,7 +7,7 @@ export function sayCriticalTrials({ moments, data, nuisances }: Diagnosis): stri
     const here = data.trials === null ? '' : `; here N is ${formatCount(data.trials)}`;
     return `The variance fits under the ceiling when N is at least ${formatNumber(moments.criticalTrials, 3)}${here}.`;
   }
-  if (nuisances?.misread.applied)
+  if (nuisances?.misread?.applied)
     return 'Misreads are allowed for, and the ceiling with them depends on N and on the rate: no least N is given.';
   if (data.lump !== null) return 'The last row lumps counts, so that no least N can be given.';
   if (moments.variance.value === null) return 'One shot has no variance, so that no least N can be given.';

@@ -6,7 +6,7 @@ import { sayFlagged } from './say-flagged';
 /** What the words on misreads are made of: a document, or what a link without counts leaves of it. */
 export interface MisreadsView extends Pick<Diagnosis, 'flags'> {
   data: Pick<Diagnosis['data'], 'geometry' | 'misread'>;
-  nuisances?: { misread: { applied: boolean; neededRate: Interval } };
+  nuisances?: { misread?: { applied: boolean; neededRate: Interval } };
 }
 
 /** What was stated of misread sites, whether the report allows for it, and what they do to counts. */
@@ -24,7 +24,7 @@ export function sayMisreads(view: MisreadsView): string {
 }
 
 function allowed({ data, nuisances }: MisreadsView): string {
-  if (nuisances?.misread.applied) return ', and every test, bound and flag allows for it';
+  if (nuisances?.misread?.applied) return ', and every test, bound and flag allows for it';
   return data.misread && data.geometry !== 'sites'
     ? '; it is not allowed for, and the tests are against laws without misreads'
     : '';
@@ -32,7 +32,7 @@ function allowed({ data, nuisances }: MisreadsView): string {
 
 /** The misread rate that would explain the variance by itself, to hold against the calibration; null where none is told. */
 export function sayNeededRate({ nuisances }: MisreadsView): string | null {
-  if (!nuisances) return null;
+  if (!nuisances?.misread) return null;
   const { value, low, high } = nuisances.misread.neededRate;
   const calibration = 'To compare with your calibration';
   const from = low === null ? '' : ` The lower limit of the variance asks for ${rateOf(low)}`;
@@ -51,8 +51,9 @@ const rateOf = (rate: number): string => (rate === 0 ? 'none' : formatPercent(ra
 
 /** The two ceilings side by side; null unless misreads are allowed for. */
 export function sayTwoCeilings({ nuisances, moments }: Diagnosis): string | null {
-  if (!nuisances?.misread.applied) return null;
-  const { ceiling, rawCeiling, rawDispersion } = nuisances.misread;
+  const misread = nuisances?.misread;
+  if (!misread?.applied) return null;
+  const { ceiling, rawCeiling, rawDispersion } = misread;
   const times = (over: number | null) => (over === null ? '–' : formatNumber(over));
   return `With misreads ${formatNumber(ceiling)}, without ${formatNumber(rawCeiling)}. The variance is ${times(moments.dispersion.value)} times the first and ${times(rawDispersion)} times the second; the report judges it by the first.`;
 }
@@ -62,7 +63,7 @@ const MOST = 6;
 
 /** Fitted probabilities along the chain before any misread; null unless misreads are allowed for. */
 export function sayKinks({ nuisances }: Diagnosis): string | null {
-  const kinks = nuisances?.misread.kinks;
+  const kinks = nuisances?.misread?.kinks;
   if (!kinks || kinks.length === 0) return null;
   let bond = 0;
   const stretches = kinks.map(({ p, trials }) => {

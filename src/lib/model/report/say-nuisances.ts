@@ -1,9 +1,8 @@
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount } from '../format-number';
-import { TESTS } from '../labels';
-import { sayP } from '../say-p';
 import { asTyped } from './as-typed';
 import { sayCriticalTrials } from './say-critical-trials';
+import { sayChange, sayDrift, sayWithin } from './say-drift';
 import { sayFlagged } from './say-flagged';
 import { sayKinks, sayMisreads, sayNeededRate, sayTwoCeilings } from './say-misreads';
 
@@ -27,7 +26,9 @@ export const sayNuisances = (document: Diagnosis, stated: Stated | null): [strin
     ['Ceiling as read', sayTwoCeilings(document)],
     ['Misread rate needed', sayNeededRate(document)],
     ['Kinks along the chain', sayKinks(document)],
-    ['Drift', drift(document)],
+    ['Drift', sayDrift(document)],
+    ['Within batches', sayWithin(document.nuisances?.drift)],
+    ['Change of the mean', sayChange(document.nuisances?.drift)],
     ['Pairs', sayPairs(document)],
     ['Post-selection', sayPostSelection(stated)],
     [
@@ -42,16 +43,6 @@ export const sayNuisances = (document: Diagnosis, stated: Stated | null): [strin
 /** The rows that have something to tell. */
 export const told = (rows: [string, string | null][]): [string, string][] =>
   rows.filter((row): row is [string, string] => row[1] !== null);
-
-function drift(document: Diagnosis): string {
-  if (!document.data.ordered)
-    return 'The order of the shots is not known: a probability that drifts between shots widens the counts, and cannot be told from bunching here.';
-  const ran = document.tests.filter(({ id }) => id === 'batches' || id === 'order');
-  const said = ran.map(
-    (test) => `${TESTS[test.id]}: a result as extreme ${sayP(test.p, test.smallestP, test.resamples)}.`
-  );
-  return `The order of the shots is known. ${said.length > 0 ? said.join(' ') : 'No test of it could run.'}${sayFlagged(document, 'drift')}`;
-}
 
 export function sayPairs(
   view: Pick<Diagnosis, 'flags'> & { data: Pick<Diagnosis['data'], 'unit' | 'geometry'> }

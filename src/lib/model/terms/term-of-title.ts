@@ -63,6 +63,11 @@ const TITLES: Record<string, TermId> = {
   'Misread rate needed': 'needed-rate',
   'Kinks along the chain': 'levels',
   Drift: 'test-order',
+  'Within batches': 'within-batches',
+  'Change of the mean': 'change-of-mean',
+  batch: 'within-batches',
+  'lower limit': 'running-mean',
+  'upper limit': 'running-mean',
   Pairs: 'pair',
   'Lumped counts': 'lump',
   'N too small': 'critical-trials'
@@ -82,7 +87,10 @@ export const PLAIN_TITLES: ReadonlySet<string> = new Set([
   'trials',
   'Name',
   'Engine',
-  'Post-selection'
+  'Post-selection',
+  'first shot',
+  'last shot',
+  'mean'
 ]);
 
 /** The term that a title of a report is about; null for one that has no note. */

@@ -83,6 +83,37 @@ const EACH = {
 
 /** How a p-value comes about. */
 export const TEST_TERMS = {
+  'within-batches': {
+    name: 'within batches',
+    words: [
+      'The scatter of the shots about the mean of their own batch, summed over all batches and set against what equal trials with the total of each batch give.',
+      'A rate that differs from batch to batch leaves no trace in it, so an excess that is still there is not drift between batches.'
+    ],
+    formula: [
+      'sum_b sum_{i∈b} (n_i − n_b)^2',
+      '"mean" sum_b frac{(S_b−1) T_b (M_b−T_b)}{S_b (M_b−1)}',
+      'M_b = S_b N'
+    ],
+    source: 'Haldane 1937'
+  },
+  'change-of-mean': {
+    name: 'change of the mean',
+    words: [
+      'The shot at which cutting the list in two gives the means that differ most, for their errors.',
+      'Shuffled shots show how well chance supports a change, the search over all places allowed for.'
+    ],
+    formula: ['max_k frac{k(S−k)}{S s^2} (m_1 − m_2)^2'],
+    source: 'Hinkley 1970'
+  },
+  'running-mean': {
+    name: 'mean over time',
+    words: [
+      'Means of stretches of shots in the order taken, with limits of three standard errors about the mean of all shots.',
+      'The errors come from differences of neighbouring shots, which drift hardly widens.'
+    ],
+    formula: ['m ± frac{3 d}{sqrt{k}}', 'd^2 = sum_i frac{(n_{i+1}−n_i)^2}{2(S−1)}'],
+    source: 'Shewhart 1931'
+  },
   'p-value': {
     name: 'p',
     words: [

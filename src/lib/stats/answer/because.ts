@@ -37,6 +37,7 @@ export function because(
       out.push(`Without misreads it would be ${formatNumber(raw, 3)} times the ceiling.`);
     }
   }
+  if (evidence.drift?.split) out.push(evidence.drift.statement);
   if (verdict !== 'ruled-out' && excess !== null) {
     out.push(
       `With this many shots an excess of ${formatPercent(excess)} over the ceiling is seen in four of five repeats, by the variance alone at a level of 5\u202f%.`

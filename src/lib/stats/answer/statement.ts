@@ -53,7 +53,7 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
     evidence.neighbours !== 'alternating' &&
     (evidence.moments.dispersion.value ?? 0) > 1
   )
-    return ' But the rate changed while the shots were taken, which alone makes counts look bunched.';
+    return driftAlone(evidence);
   if (raised('misreads')) return ' But misread sites alone could give this.';
   const { options, misread, moments } = evidence;
   // A misread on sites that are counted themselves leaves the trials independent.
@@ -65,6 +65,15 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   )
     return ' But the stated misread rate could not be allowed for, and misread sites alone could give this.';
   return '';
+}
+
+/** Whether the excess is still there within batches, where there are any. */
+function driftAlone({ drift }: Evidence): string {
+  if (drift?.split?.verdict === 'compatible')
+    return ' But the rate changed while the shots were taken: within batches the counts are compatible with independent trials, and the excess lies between batches.';
+  if (drift?.split?.verdict === 'excess')
+    return ' The rate also changed while the shots were taken, but the excess survives when batches are tested one by one and pooled.';
+  return ' But the rate changed while the shots were taken, which alone makes counts look bunched.';
 }
 
 /** The strongest single piece of evidence, in words. */

@@ -7,6 +7,11 @@ export interface BatchParts {
   within: number;
   /** Variance of the batches' true means, estimated: (MS_between − within)/n₀; below 0 by chance. */
   between: number;
+  /** Sums of the third and fourth powers of the distances from each batch's own mean. */
+  third: number;
+  fourth: number;
+  /** n₀, the size of a batch that counts for `between`. */
+  size: number;
   /** Unbiased variance of all shots, S − 1 in the denominator. */
   total: number;
   /** F = MS_between/within, with its degrees of freedom. */
@@ -44,9 +49,13 @@ export function batchParts(shots: ArrayLike<number>, names: ArrayLike<string>): 
   const mean = sum / length;
   const squares = new Float64Array(number);
   let all = 0;
+  let third = 0;
+  let fourth = 0;
   for (let i = 0; i < length; i++) {
     const own = shots[i] - sums[of[i]] / sizes[of[i]];
     squares[of[i]] += own * own;
+    third += own * own * own;
+    fourth += own * own * own * own;
     all += (shots[i] - mean) ** 2;
   }
   const inside = squares.reduce((a, b) => a + b, 0);
@@ -58,6 +67,7 @@ export function batchParts(shots: ArrayLike<number>, names: ArrayLike<string>): 
   }
   const within = inside / (length - number);
   const meanSquare = across / (number - 1);
+  const size = (length - sizesSquared / length) / (number - 1);
   return {
     batches: label.map((name, b) => ({
       name,
@@ -66,7 +76,10 @@ export function batchParts(shots: ArrayLike<number>, names: ArrayLike<string>): 
       variance: sizes[b] > 1 ? squares[b] / (sizes[b] - 1) : null
     })),
     within,
-    between: ((meanSquare - within) * (number - 1)) / (length - sizesSquared / length),
+    between: (meanSquare - within) / size,
+    third,
+    fourth,
+    size,
     total: all / (length - 1),
     ratio: { value: meanSquare / within, between: number - 1, within: length - number }
   };

@@ -1,6 +1,12 @@
 import { permute } from '../order/permute';
-import type { OrderOptions, OrderResult } from '../order/order-outcome';
+import {
+  LONGEST_PERMUTED,
+  SMALLEST_LIMIT_P,
+  type OrderOptions,
+  type OrderResult
+} from '../order/order-outcome';
 import { unbroken, type Pace } from '../resampling/pace';
+import { changeLimit } from './change-limit';
 
 /** The most supported single change of the mean, and how often chance supports one as well. */
 export interface ChangePoint extends OrderResult {
@@ -16,7 +22,8 @@ const margin = 5;
 /**
  * Most supported change point of the mean: the cut k that maximises the likelihood ratio of two means against one for
  * counts of a common variance, k(S − k)/S·(mean_before − mean_after)² over the variance, at least five shots from either
- * end. p by permuting the shots, the scan repeated on each: the search over all cuts is allowed for.
+ * end. p by permuting the shots, the scan repeated on each: the search over all cuts is allowed for. Above 20 000 shots
+ * by the limit law, where a single shot no longer decides (see changeLimit).
  *
  * @returns null for fewer than 20 shots, or shots all alike
  * Source: Hinkley 1970, Biometrika 57:1 (m); p by permutation.
@@ -37,12 +44,22 @@ export async function changePoint(
   if (length < 20 || square === 0) return null;
   const { at, score } = scan(values);
   const bar = score * (1 - 1e-11);
-  const result = await permute(values, (order) => scan(order).score >= bar, options, pace);
+  const statistic = (score * length) / square;
+  const result: Omit<OrderResult, 'statistic'> =
+    length > LONGEST_PERMUTED
+      ? {
+          p: Math.max(SMALLEST_LIMIT_P, changeLimit(statistic, margin / length)),
+          smallestP: SMALLEST_LIMIT_P,
+          resamples: 0,
+          stoppedEarly: false,
+          source: 'limit'
+        }
+      : await permute(values, (order) => scan(order).score >= bar, options, pace);
   let sum = 0;
   for (let i = 0; i < at; i++) sum += values[i];
   return {
     ...result,
-    statistic: (score * length) / square,
+    statistic,
     at,
     before: mean + sum / at,
     after: mean - sum / (length - at)

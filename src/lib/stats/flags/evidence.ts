@@ -1,3 +1,4 @@
+import type { DriftPart } from '../drift/types';
 import type { MisreadUse } from '../nulls/misread-applies';
 import type { Certificate, DiagnoseOptions, Diagnosis, TestId, TestResult } from '../types';
 
@@ -10,6 +11,8 @@ export interface Evidence {
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>;
   /** Whether every test allows for misread sites; left out, none was stated. */
   misread?: MisreadUse;
+  /** What order and batches say of the excess; left out for histograms. */
+  drift?: DriftPart;
   tests: TestResult[];
   certificate: Certificate | null;
   /** p of the low tail with empty shots set aside; null when it was not asked. */

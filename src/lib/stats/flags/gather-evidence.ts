@@ -1,3 +1,4 @@
+import type { DriftPart } from '../drift/types';
 import type { FitData } from '../fit/fit-data';
 import { evenShots } from './even-shots';
 import type { FittedTests } from '../resampling/fitted-tests';
@@ -17,6 +18,7 @@ export interface Gathered {
   law: FittedLaw;
   neighbours: Evidence['neighbours'];
   misread: MisreadUse;
+  drift: DriftPart | undefined;
 }
 
 /** What flags and the answer are decided from, out of the parts of a diagnosis. */
@@ -30,7 +32,8 @@ export function evidenceOf({
   fitted,
   law,
   neighbours,
-  misread
+  misread,
+  drift
 }: Gathered): Evidence {
   return {
     options,
@@ -41,6 +44,7 @@ export function evidenceOf({
     certificate,
     neighbours,
     misread,
+    ...(drift && { drift }),
     lowTailOfTheRest: fitted.lowTailOfTheRest,
     empty: { seen: counts.first === 0 ? (counts.shots[0] ?? 0) : 0, expected: fitted.expectedEmpty },
     even: counts.lump ? null : evenShots(counts, law)

@@ -4,10 +4,10 @@ import { neededRate } from '../misread/needed-rate';
 import { isReadChain } from '../misread/read-chain';
 import { lumpedCeiling } from '../moments/lumped-ceiling';
 import type { FittedLaw } from '../resampling/fitted-law';
-import type { DiagnoseOptions, Diagnosis, Histogram } from '../types';
+import type { DiagnoseOptions, Diagnosis, Histogram, MisreadPart } from '../types';
 
 /**
- * The `nuisances` of the document: for kinks on the bonds of an open chain of known length, what misreads would need to
+ * The `nuisances.misread` of the document: for kinks on the bonds of an open chain of known length, what misreads would need to
  * be and, when a rate was stated and allowed for, the two ceilings side by side. undefined for other experiments.
  *
  * @param equal probability of equal trials of that mean
@@ -18,7 +18,7 @@ export function misreadReport(
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>,
   equal: number,
   law: FittedLaw
-): Diagnosis['nuisances'] {
+): MisreadPart | undefined {
   const { trials, geometry, unit, misread } = options;
   if (geometry !== 'open-bonds' || unit !== 'defect' || trials === null || trials < 2) return undefined;
   const mean = moments.mean.value!;
@@ -26,15 +26,13 @@ export function misreadReport(
   const variance = moments.variance.value;
   const applied = isReadChain(law);
   return {
-    misread: {
-      applied,
-      rate: misread,
-      ceiling: applied ? moments.ceiling : null,
-      rawCeiling,
-      rawDispersion: variance === null || !(rawCeiling > 0) ? null : variance / rawCeiling,
-      // A lump hides how far its counts reach.
-      neededRate: lump ? { value: null, low: null, high: null } : neededRate(mean, moments.variance, trials),
-      kinks: applied ? chainBlocks(law) : null
-    }
+    applied,
+    rate: misread,
+    ceiling: applied ? moments.ceiling : null,
+    rawCeiling,
+    rawDispersion: variance === null || !(rawCeiling > 0) ? null : variance / rawCeiling,
+    // A lump hides how far its counts reach.
+    neededRate: lump ? { value: null, low: null, high: null } : neededRate(mean, moments.variance, trials),
+    kinks: applied ? chainBlocks(law) : null
   };
 }

@@ -5,7 +5,9 @@ const families = {
   'shot order': 3,
   batches: 4,
   intervals: 5,
-  explanations: 6
+  explanations: 6,
+  'within batches': 7,
+  'change of the mean': 8
 } as const;
 
 /**

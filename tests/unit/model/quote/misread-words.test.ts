@@ -30,7 +30,7 @@ const said = (document: Parameters<typeof quoteOf>[0]): string => {
 describe('what is quoted where a misread rate was stated', () => {
   it('names the misreads wherever the tests allow for them, and no law without them', async () => {
     const document = await made({ geometry: 'open-bonds', misread: 0.02 });
-    expect(document.nuisances?.misread.applied).toBe(true);
+    expect(document.nuisances?.misread?.applied).toBe(true);
     for (const text of [said(document), said(withoutCounts(document))]) {
       expect(text).toContain('law, ceiling, bounds and tests are of independent kinks read with it');
       expect(text).toContain(

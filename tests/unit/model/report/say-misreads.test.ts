@@ -41,7 +41,7 @@ describe('a misread rate that is allowed for', () => {
   });
 
   it('tells the needed rate to hold against the calibration, near the rate of the simulation', () => {
-    const { value, low, high } = applied.nuisances!.misread.neededRate;
+    const { value, low, high } = applied.nuisances!.misread!.neededRate;
     expect(low!).toBeLessThan(0.02);
     expect(high!).toBeGreaterThan(0.015);
     expect(rows(applied).get('Misread rate needed')).toContain(
@@ -67,17 +67,17 @@ describe('a misread rate that is allowed for', () => {
 
   it('lists every bond once', () => {
     const said = rows(applied).get('Kinks along the chain')!;
-    const bonds = applied.nuisances!.misread.kinks!.reduce((sum, { trials }) => sum + trials, 0);
+    const bonds = applied.nuisances!.misread!.kinks!.reduce((sum, { trials }) => sum + trials, 0);
     expect(bonds).toBe(60);
     expect(said).toMatch(/[Bb]onds? 1\b/);
-    if (applied.nuisances!.misread.kinks!.length <= 6) expect(said).toMatch(/to 60: |bond 60: /);
+    if (applied.nuisances!.misread!.kinks!.length <= 6) expect(said).toMatch(/to 60: |bond 60: /);
   });
 
   it('is in the text of the command line and in the table of numbers', () => {
     const text = flat(plainText(applied));
     for (const [what, known] of rows(applied)) expect(text).toContain(`${what}. ${known}`);
     const csv = documentCsv(applied);
-    const { rawCeiling, neededRate } = applied.nuisances!.misread;
+    const { rawCeiling, neededRate } = applied.nuisances!.misread!;
     expect(csv).toContain(`misreads,rawCeiling,,${rawCeiling},,\r\n`);
     expect(csv).toContain(
       `misreads,neededRate,,${neededRate.value},${neededRate.low},${neededRate.high}\r\n`
@@ -91,7 +91,7 @@ describe('a misread rate that is allowed for', () => {
     const text = JSON.stringify(told);
     expect(text).toContain('every test, bound and flag allows for it');
     expect(text).not.toContain(formatNumber(applied.moments.ceiling));
-    expect(JSON.stringify(summary)).not.toContain(String(applied.nuisances!.misread.rawCeiling));
+    expect(JSON.stringify(summary)).not.toContain(String(applied.nuisances!.misread!.rawCeiling));
     expect(toPlain(quoteOf(summary, NO_PROVENANCE).methods)).toContain('independent kinks read with it');
   });
 

@@ -1,8 +1,11 @@
 import { batchParts } from '$lib/stats/drift/batch-parts';
 import { changePoint } from '$lib/stats/drift/change-point';
-import { excessWithin } from '$lib/stats/drift/excess-within';
+import { changeLimit } from '$lib/stats/drift/change-limit';
 import { runningMean } from '$lib/stats/drift/running-mean';
+import { equalSquaresLaw } from '$lib/stats/drift/squares-law';
+import { withinBatches } from '$lib/stats/drift/within-batches';
 import { binomialSample } from '$lib/stats/random/binomial-sample';
+import { shuffle } from '$lib/stats/random/shuffle';
 import { generator } from '$lib/stats/random/generator';
 import { describe, expect, it } from 'vitest';
 
@@ -40,7 +43,7 @@ describe('batchParts', () => {
     const found = batchParts(shots, names)!;
     // τ = N·sd = 1, with the standard error of 200 batches of a uniform rate, about 0.08.
     expect(Math.abs(found.between - 1)).toBeLessThan(0.3);
-    const within = excessWithin(found, 100);
+    const within = withinBatches(found, equalSquaresLaw(100), 0.8, { resamples: 99, seed: 1 }).dispersion;
     expect(within.low!).toBeLessThan(1);
     expect(within.high!).toBeGreaterThan(0.99);
     // The published case: variance/ceiling = 1 + (N − 1)·Var(p)/(p(1 − p)) = 1.11 over all shots.
@@ -97,5 +100,35 @@ describe('changePoint', () => {
     expect(called).toBeGreaterThan(0);
     expect(await changePoint([1, 2, 3], { resamples: 19, seed: 1 })).toBeNull();
     expect(await changePoint(new Array<number>(30).fill(2), { resamples: 19, seed: 1 })).toBeNull();
+  });
+
+  it('for long lists takes the limit law, which permutations of 3000 shots bear out', async () => {
+    // p of scores by 1999 permutations against the formula: at scores 6, 9, 12, with its margin of 5 in 3000.
+    const { shots } = shotsOf(11, [0.1], 3000);
+    const mean = shots.reduce((a, b) => a + b, 0) / shots.length;
+    const values = Float64Array.from(shots, (n) => n - mean);
+    const square = values.reduce((sum, d) => sum + d * d, 0);
+    const scores: number[] = [];
+    for (let b = 0; b < 1999; b++) {
+      shuffle(generator(12, b), values);
+      let sum = 0;
+      let most = 0;
+      for (let k = 1; k <= 2995; k++) {
+        sum += values[k - 1];
+        if (k >= 5) most = Math.max(most, (sum * sum * 3000) / (k * (3000 - k)));
+      }
+      scores.push((most * 3000) / square);
+    }
+    for (const score of [9, 12]) {
+      const seen = scores.filter((one) => one >= score).length / scores.length;
+      // The formula runs high for large chances: 0.107 for 0.09 or so, and close for small ones.
+      expect(changeLimit(score, 5 / 3000)).toBeGreaterThan(seen - 3 * Math.sqrt(seen / 1999));
+      expect(changeLimit(score, 5 / 3000)).toBeLessThan(1.5 * seen + 3 * Math.sqrt(seen / 1999));
+    }
+    const long = shotsOf(13, [0.1, 0.103], 12_000).shots;
+    const found = (await changePoint(long, { resamples: 99, seed: 1 }))!;
+    expect(found.source).toBe('limit');
+    expect(found.p).toBeLessThan(1e-6);
+    expect(Math.abs(found.at - 12_000)).toBeLessThan(2000);
   });
 });

@@ -20,7 +20,7 @@ describe('independent kinks p = 0.05 on 100 bonds, 1 % of the sites misread, 20 
     const found = await diagnose(data, { ...chain, misread: 0.01 });
     expect(found.answer.verdict).toBe('compatible');
     expect(found.flags).toEqual([]);
-    const { misread } = found.nuisances!;
+    const misread = found.nuisances!.misread!;
     expect(misread.applied).toBe(true);
     const mean = found.moments.mean.value!;
     expect(misread.rawCeiling).toBeCloseTo(mean * (1 - mean / 100), 10);
@@ -67,7 +67,7 @@ describe('a rate that cannot be allowed for', () => {
     const small = readKinks(4, 100, 0.05, 0.01, 400);
     const found = await diagnose(small, { ...chain, resamples: 19, ...over });
     expect(found.cautions.join('\n')).toMatch(why);
-    expect(found.nuisances?.misread.applied ?? false).toBe(false);
+    expect(found.nuisances?.misread?.applied ?? false).toBe(false);
     expect(found.moments.ceiling).toBeCloseTo(
       found.moments.mean.value! * (1 - ('trials' in over ? 0 : found.moments.mean.value! / 100)),
       9

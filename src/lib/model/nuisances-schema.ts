@@ -1,0 +1,67 @@
+import { z } from 'zod';
+
+/* What can look like interaction, in a diagnosis document; diagnosis-schema.ts holds it to the type. */
+const number = z.number();
+const orNull = number.nullable();
+const whole = z.int().nonnegative();
+const share = number.min(0).max(1);
+const interval = z.strictObject({ value: orNull, low: orNull, high: orNull });
+const level = z.strictObject({ p: share, trials: whole });
+
+const misread = z.strictObject({
+  applied: z.boolean(),
+  rate: orNull,
+  ceiling: orNull,
+  rawCeiling: number,
+  rawDispersion: orNull,
+  neededRate: interval,
+  kinks: z.array(level).nullable()
+});
+
+const batchLine = z.strictObject({
+  batch: whole,
+  shots: whole,
+  mean: number,
+  dispersion: orNull,
+  p: share.nullable()
+});
+
+const split = z.strictObject({
+  batches: whole,
+  dispersion: interval,
+  excessWithin: interval,
+  excessBetween: number,
+  excess: number,
+  meansVariance: interval,
+  p: share.nullable(),
+  smallestP: share,
+  source: z.enum(['resampled', 'limit']),
+  resamples: whole,
+  tested: whole,
+  worst: batchLine.nullable(),
+  pTogether: share.nullable(),
+  verdict: z.enum(['compatible', 'excess', 'undecided']),
+  each: z.array(batchLine)
+});
+
+const drift = z.strictObject({
+  means: z.array(
+    z.strictObject({ from: whole, to: whole, mean: number, low: number, high: number, outside: z.boolean() })
+  ),
+  change: z
+    .strictObject({
+      shot: whole,
+      before: number,
+      after: number,
+      p: share,
+      smallestP: share,
+      source: z.enum(['permuted', 'limit']),
+      resamples: whole
+    })
+    .nullable(),
+  split: split.nullable(),
+  statement: z.string()
+});
+
+/** Each part is there only where it has something to say. */
+export const nuisancesSchema = z.strictObject({ misread: misread.optional(), drift: drift.optional() });

@@ -1,0 +1,28 @@
+import { sayHowOften } from '../words/say-p';
+import { sayInterval } from '../words/say-interval';
+import type { BatchSplit } from './types';
+
+/**
+ * What is left of an excess when batches are tested one by one and pooled, in a sentence.
+ *
+ * @param excessShown whether the variance of all shots together breaks the ceiling
+ */
+export function driftStatement(split: BatchSplit, excessShown: boolean): string {
+  const { dispersion, pTogether, smallestP, verdict } = split;
+  if (dispersion.value === null || pTogether === null)
+    return 'Within batches there are too few defects to test them.';
+  const measured = `Tested batch by batch and pooled, the variance is ${sayInterval(dispersion, 3)} times the ceiling:`;
+  if (verdict === 'compatible')
+    return excessShown
+      ? `${measured} within batches the counts are compatible with independent trials; the excess lies between batches.`
+      : `${measured} within batches too the counts keep the ceiling.`;
+  if (verdict === 'excess') {
+    const often = sayHowOften(pTogether, smallestP);
+    return excessShown
+      ? `${measured} the excess survives within batches. One as large ${often} if only the rate differed from batch to batch.`
+      : `${measured} within batches there is an excess, which all shots together do not show. One as large ${often} if trials were independent.`;
+  }
+  return excessShown
+    ? `${measured} within batches the counts neither rule out independent trials nor exclude an excess that matters, so how much of the excess is drift stays open.`
+    : `${measured} within batches the counts neither rule out independent trials nor exclude an excess that matters.`;
+}
