@@ -1,4 +1,4 @@
-import { woffToSfnt } from './woff-to-sfnt';
+import { woffToSfnt, type Unpack } from './woff-to-sfnt';
 
 /** The faces that text is set in. */
 export type Face = 'text' | 'bold' | 'italic' | 'number';
@@ -19,12 +19,12 @@ export const ALWAYS = ['text', 'bold', 'italic', 'number', 'symbols'] as const s
 export type FontSource = (name: FontName) => Promise<Uint8Array>;
 
 /** A source that reads each WOFF file once and keeps what it unpacked. A file that could not be read is tried again. */
-export function fontSource(read: (name: FontName) => Promise<Uint8Array>): FontSource {
+export function fontSource(read: (name: FontName) => Promise<Uint8Array>, unpack?: Unpack): FontSource {
   const kept = new Map<FontName, Promise<Uint8Array>>();
   return (name) => {
     const known = kept.get(name);
     if (known) return known;
-    const font = read(name).then(woffToSfnt);
+    const font = read(name).then((woff) => woffToSfnt(woff, unpack));
     kept.set(name, font);
     font.catch(() => kept.delete(name));
     return font;

@@ -1,6 +1,7 @@
 import { woffToSfnt } from '$lib/pdf/type/woff-to-sfnt';
 import { readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
+import { inflateSync } from 'node:zlib';
 import { describe, expect, it } from 'vitest';
 
 const file = (path: string): Buffer => readFileSync(createRequire(import.meta.url).resolve(path));
@@ -28,6 +29,12 @@ describe('woffToSfnt', () => {
       tags.push(tag);
     }
     for (const tag of ['cmap', 'glyf', 'head', 'hmtx', 'loca', 'maxp']) expect(tags).toContain(tag);
+  });
+
+  it('gives the same bytes by Node’s own zlib', () => {
+    const woff = file('@fontsource/dejavu-sans/files/dejavu-sans-latin-400-normal.woff');
+    const own = woffToSfnt(woff, (packed) => inflateSync(packed));
+    expect(Buffer.compare(own, woffToSfnt(woff))).toBe(0);
   });
 
   it('refuses anything else', () => {

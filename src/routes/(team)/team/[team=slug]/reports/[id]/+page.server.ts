@@ -2,6 +2,7 @@ import { can } from '$lib/server/access/can';
 import { putReportAside } from '$lib/server/services/reports/put-report-aside';
 import { readReport } from '$lib/server/services/reports/read-report';
 import { reportsOfDataset } from '$lib/server/services/reports/reports-of-dataset';
+import { warmPdf } from '$lib/server/services/reports/warm-pdf';
 import { remarksOf } from '$lib/server/services/remarks/remarks-of';
 import { error, redirect, type RequestEvent } from '@sveltejs/kit';
 import { askTeam } from '../../../../../ask';
@@ -16,6 +17,7 @@ export const load: PageServerLoad = (event) => {
   const read = readReport(db, actor, event.params.id);
   if (!read.ok) return gone();
   const { text, ...report } = read.report;
+  warmPdf(report, read.document);
   const may = (action: 'delete' | 'link' | 'remark') =>
     can({ kind: 'member', ...actor }, action, { createdBy: report.createdBy });
   return {
