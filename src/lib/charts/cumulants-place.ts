@@ -10,8 +10,8 @@ export interface CumulantsPlace {
   share: number;
   fano: Interval & { value: number };
   third: Interval & { value: number };
-  /** The best law's point. */
-  law: { fano: number; third: number };
+  /** The best law's point, or that of another law, which then has a name. */
+  law: { fano: number; third: number; name?: string };
   /** Whether independent trials reach the point itself or, failing that, its intervals. */
   standing: 'inside' | 'near' | 'outside' | 'more';
 }

@@ -66,14 +66,18 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
     marks,
     legend: [
       { role: point, label: 'seen, with its 95 % intervals' },
-      { role: 'law', label: 'best law' },
+      { role: 'law', label: place.law.name ?? 'best law' },
       { role: 'bound', label: 'no independent trials of this mean beyond this edge' },
       { role: 'corner', label: 'laws to compare with' }
     ],
     order: 'across',
     readings: [
       { x: seen[0], y: seen[1], words: () => regionWords(place) },
-      { x: law[0], y: law[1], words: () => lawWords('Best law', place.law.fano, place.law.third) },
+      {
+        x: law[0],
+        y: law[1],
+        words: () => lawWords(sentenceCase(place.law.name ?? 'best law'), place.law.fano, place.law.third)
+      },
       ...named.map(({ name, at }) => ({
         x: x(at[0]),
         y: y(at[1]),
@@ -83,6 +87,8 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
     notes: []
   };
 }
+
+const sentenceCase = (text: string): string => text[0].toUpperCase() + text.slice(1);
 
 type Place = (value: number) => number;
 

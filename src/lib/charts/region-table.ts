@@ -18,7 +18,7 @@ export function regionTable(place: CumulantsPlace): Table {
     ],
     rows: [
       ['seen, 95 % interval', fano.value, fano.low, fano.high, third.value, third.low, third.high],
-      ['best law', law.fano, null, null, law.third, null, null],
+      [law.name ?? 'best law', law.fano, null, null, law.third, null, null],
       ...namedLaws(place.share).map(({ name, at }) => [name, at[0], null, null, at[1], null, null]),
       ...regionEdges(place.share, 20).map(([ratio, low, high]) => [
         'region',

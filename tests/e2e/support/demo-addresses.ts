@@ -91,6 +91,11 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
         '/',
         '/#counts=0:185,1:1149,2:3265,3:5475,4:6114,5:5194,6:3067,7:1331,8:403,9:105,10:14,11:4&trials=12&sum=26306'
       ],
+      '/cumulants': [
+        '/cumulants',
+        '/cumulants#mean=4&mean-error=0.05&variance=4.9&variance-error=0.1&third=7&third-error=0.6&trials=64'
+      ],
+      '/plan': ['/plan', '/plan#find=misread&mean=4&trials=50&size=0.01&shots=5000&most=0'],
       '/guide': ['/guide'],
       '/guide/terms': ['/guide/terms'],
       '/api': ['/api'],

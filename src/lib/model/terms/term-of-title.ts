@@ -90,7 +90,15 @@ export const PLAIN_TITLES: ReadonlySet<string> = new Set([
   'Post-selection',
   'first shot',
   'last shot',
-  'mean'
+  'mean',
+  'inequality',
+  'bound',
+  'printed',
+  'error',
+  'nearest',
+  'inside by, in errors',
+  'off by, in errors',
+  'standing'
 ]);
 
 /** The term that a title of a report is about; null for one that has no note. */

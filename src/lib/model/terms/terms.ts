@@ -4,6 +4,7 @@ import { DISTANCE } from './distance';
 import { FLAG_TERMS } from './flags';
 import { LAWS } from './laws';
 import { MOMENTS } from './moments';
+import { PLANNING } from './planning';
 import { RATES } from './rates';
 import type { Term } from './term';
 import { TEST_TERMS } from './tests';
@@ -16,7 +17,8 @@ const ALL = {
   ...RATES,
   ...MOMENTS,
   ...TEST_TERMS,
-  ...FLAG_TERMS
+  ...FLAG_TERMS,
+  ...PLANNING
 };
 
 export type TermId = keyof typeof ALL;

@@ -5,6 +5,9 @@ import { sayHowOften } from '../words/say-p';
 
 const NAMES = ['mean', 'variance', 'third cumulant', 'fourth cumulant'];
 
+/** Nobody's errors are normal so far out that a smaller chance could be told. */
+const surest = 1e-9;
+
 /** "the variance is above its ceiling". */
 export const sayBroken = ({ order, side }: Condition): string =>
   `the ${NAMES[order - 1]} is ${side === 'floor' ? 'below its floor' : 'above its ceiling'}`;
@@ -22,7 +25,7 @@ export function sayCumulants(judged: CumulantsVerdict): string {
   const first = conditions.find(({ standing }) => standing === 'broken');
   if (verdict === 'ruled-out') {
     const how = first ? `: ${sayBroken(first)}` : '';
-    return `No independent trials have these cumulants${how}. Errors that took some that do so far away ${sayHowOften(p)}, at the most.`;
+    return `No independent trials have these cumulants${how}. If some did, errors so large ${sayHowOften(Math.max(p, surest), 1)}.`;
   }
   const where =
     nearest.distance === 0

@@ -1,3 +1,6 @@
+import { conditionsTable } from '$lib/charts/conditions-table';
+import { nearestTable } from '$lib/charts/nearest-table';
+import { judgeCumulants } from '$lib/stats/cumulants-only/judge-cumulants';
 import { ceilingTable } from '$lib/charts/ceiling-table';
 import { cumulantsTable } from '$lib/charts/cumulants-table';
 import { distributionTable } from '$lib/charts/distribution-table';
@@ -14,6 +17,7 @@ import { sayNuisances } from '$lib/model/report/say-nuisances';
 import { PLAIN_TITLES, termOfTitle } from '$lib/model/terms/term-of-title';
 import { CHILDREN, type MathNode } from '$lib/model/terms/math-node';
 import { readFormula } from '$lib/model/terms/read-formula';
+import { PLANNING } from '$lib/model/terms/planning';
 import { TERMS, type TermId } from '$lib/model/terms/terms';
 import { defaultOptions } from '$lib/stats/default-options';
 import { diagnose } from '$lib/stats/diagnose';
@@ -22,6 +26,8 @@ import { sourceFiles } from '../../../support/source-files';
 
 const entries = Object.entries(TERMS);
 const SECTIONS = sourceFiles(['src/lib/page/result']);
+/** Pages that have margins of their own. */
+const APART = sourceFiles(['src/lib/page/cumulants', 'src/lib/page/plan']);
 
 describe('each term', () => {
   it.each(entries)('%s: two sentences', (_, { words }) => {
@@ -78,8 +84,13 @@ describe('every term that a report uses', () => {
       ceilingTable(diagnosis),
       levelsTable(diagnosis)
     ];
+    const measured = { value: 3, error: 0.1 };
+    const printed = { trials: null, mean: measured, variance: measured, third: measured, fourth: measured };
+    const judged = judgeCumulants(printed);
+    inWords.push(nearestTable(printed, judged));
     const all = [
       ...inWords,
+      conditionsTable(judged.conditions),
       distributionTable(diagnosis),
       rateTable(diagnosis),
       tailsTable(diagnosis),
@@ -98,11 +109,13 @@ describe('every term that a report uses', () => {
   });
 
   it('stands in one part of the report and no more', () => {
-    const placed = SECTIONS.flatMap(({ text }) =>
-      [...text.matchAll(/<Terms\s+of=\{([\s\S]*?)\}\s*(?:guide|\/>)/g)].flatMap(([, list]) =>
-        [...list.matchAll(/'([a-z-]+)'/g)].map(([, id]) => id)
-      )
-    );
+    const termsOf = (files: typeof SECTIONS) =>
+      files.flatMap(({ text }) =>
+        [...text.matchAll(/<Terms\s+of=\{([\s\S]*?)\}\s*(?:guide|\/>)/g)].flatMap(([, list]) =>
+          [...list.matchAll(/'([a-z-]+)'/g)].map(([, id]) => id)
+        )
+      );
+    const placed = termsOf(SECTIONS);
     // The tests' part lists the tests' own terms in its script, and each test by its id.
     const ofTests = /const TESTS_HERE = \[([\s\S]*?)\];/.exec(
       SECTIONS.find(({ path }) => path.endsWith('TestsSection.svelte'))?.text ?? ''
@@ -111,6 +124,8 @@ describe('every term that a report uses', () => {
     const byId = (id: string) => /^(test|flag)-/.test(id);
     // 'flag' is written once, in the two-way choice of the first flag.
     const wanted = (Object.keys(TERMS) as TermId[]).filter((id) => !byId(id)).sort();
+    // A term of a page of its own need not stand in the report.
+    placed.push(...Object.keys(PLANNING).filter((id) => termsOf(APART).includes(id)));
     expect(placed.sort()).toEqual(wanted);
   });
 });

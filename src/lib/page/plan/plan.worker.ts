@@ -1,0 +1,36 @@
+import { shotsToSee } from '$lib/stats/planning/shots-to-see';
+import { simulatePower } from '$lib/stats/planning/simulate-power';
+import { smallestEffect } from '$lib/stats/planning/smallest-effect';
+import type { Planned, TaskAnswer, TaskRequest, Tasks } from './messages';
+import { oddsOf } from './odds-of';
+import type { PlanRequest } from './read-plan';
+
+const say = (answer: TaskAnswer): void => self.postMessage(answer);
+
+/** Experiments drawn for one check: the cut is then known to a fiftieth of its tail, the power to a point or two. */
+const REPEATS = { without: 20_000, with: 4000 };
+const SEED = 20_817;
+
+/** One question a worker; the page ends the worker to cancel it. */
+self.onmessage = ({ data }: MessageEvent<TaskRequest>) => {
+  try {
+    say({ kind: 'done', result: resultOf(data) });
+  } catch (error) {
+    say({ kind: 'failed', message: error instanceof Error ? error.message : String(error) });
+  }
+};
+
+function resultOf(task: TaskRequest): Tasks[keyof Tasks]['result'] {
+  if (task.kind === 'plan') return planned(task.asked);
+  if (task.kind === 'odds') return oddsOf(task.asked);
+  const { effect, shots, alpha } = task.asked;
+  return simulatePower(effect, shots, alpha, REPEATS, SEED, (share) => say({ kind: 'progress', share }));
+}
+
+function planned({ size, shots, alpha, power, ...effect }: PlanRequest): Planned {
+  const sharpness = { alpha, power };
+  return {
+    ...(size === null ? {} : { needed: shotsToSee({ ...effect, size }, sharpness) }),
+    ...(shots === null ? {} : { smallest: smallestEffect(effect, shots, sharpness) })
+  };
+}
