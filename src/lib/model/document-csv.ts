@@ -27,7 +27,7 @@ export function documentCsv(document: Diagnosis): string {
     ranged('moments', key, moments[key]);
   for (const key of ['ceiling', 'criticalTrials', 'pairCovariance'] as const)
     one('moments', key, moments[key]);
-  const { misread, drift } = document.nuisances ?? {};
+  const { misread, drift, pairs } = document.nuisances ?? {};
   if (misread) {
     one('misreads', 'applied', misread.applied ? 'yes' : 'no');
     for (const key of ['rate', 'ceiling', 'rawCeiling', 'rawDispersion'] as const)
@@ -36,6 +36,13 @@ export function documentCsv(document: Diagnosis): string {
     for (const { p, trials } of misread.kinks ?? []) one('misreads', `kinks of the next ${trials} bonds`, p);
   }
   if (drift) driftLines(drift, one, ranged);
+  if (pairs) {
+    one('pairs', 'proposed', pairs.proposed ? 'yes' : 'no');
+    one('pairs', 'logChance', pairs.logChance);
+    if (pairs.odd)
+      for (const key of ['share', 'faultyShots', 'faultyBonds'] as const)
+        ranged('odd counts', key, pairs.odd[key]);
+  }
   for (const key of [
     'logLikelihood',
     'divergence',

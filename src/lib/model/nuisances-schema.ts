@@ -63,5 +63,18 @@ const drift = z.strictObject({
   statement: z.string()
 });
 
+const pairs = z.strictObject({
+  proposed: z.boolean(),
+  logChance: orNull,
+  odd: z
+    .strictObject({ shots: whole, share: interval, faultyShots: interval, faultyBonds: interval })
+    .nullable(),
+  statement: z.string()
+});
+
 /** Each part is there only where it has something to say. */
-export const nuisancesSchema = z.strictObject({ misread: misread.optional(), drift: drift.optional() });
+export const nuisancesSchema = z.strictObject({
+  misread: misread.optional(),
+  drift: drift.optional(),
+  pairs: pairs.optional()
+});

@@ -18,6 +18,7 @@ import { misreadApplies } from './nulls/misread-applies';
 import { misreadNull } from './nulls/misread-null';
 import { misreadReport } from './nulls/misread-report';
 import { orderTests } from './order/order-tests';
+import { pairsReport } from './pairs/pairs-report';
 import { equalTrials } from './references/equal-trials';
 import { varianceTest } from './resampling/ceiling-test';
 import type { DrawHelper } from './resampling/draw-helper';
@@ -91,7 +92,6 @@ export async function diagnose(
     pace.within(0.88, 0.9)
   );
   const read = misreadReport(options, histogram, moments, equal, law);
-  const nuisances = { ...(read && { misread: read }), ...(drift && { drift }) };
   const evidence = evidenceOf({
     options,
     counts,
@@ -105,6 +105,8 @@ export async function diagnose(
     misread,
     drift
   });
+  const pairs = pairsReport(given, counts.total, options, evidence.even);
+  const nuisances = { ...(read && { misread: read }), ...(drift && { drift }), ...(pairs && { pairs }) };
   const flags = raiseFlags(evidence);
   const said = answer(evidence, flags);
   let explanations: Diagnosis['explanations'];

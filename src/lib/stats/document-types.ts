@@ -1,5 +1,6 @@
 import type { DriftPart } from './drift/types';
 import type { Explanations } from './explanations/types';
+import type { PairsPart } from './pairs/types';
 import type { Geometry, Interval, Level, Unit } from './types';
 
 export type TestId =
@@ -155,6 +156,8 @@ export interface Diagnosis {
     misread?: MisreadPart;
     /** For shot lists, since engine 0.5. */
     drift?: DriftPart;
+    /** For single defects on a ring, or with even counts only, since engine 0.5. */
+    pairs?: PairsPart;
   };
   fit: {
     logLikelihood: number;

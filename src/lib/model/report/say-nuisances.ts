@@ -30,6 +30,7 @@ export const sayNuisances = (document: Diagnosis, stated: Stated | null): [strin
     ['Within batches', sayWithin(document.nuisances?.drift)],
     ['Change of the mean', sayChange(document.nuisances?.drift)],
     ['Pairs', sayPairs(document)],
+    ['Odd counts', document.nuisances?.pairs?.statement ?? null],
     ['Post-selection', sayPostSelection(stated)],
     [
       'Lumped counts',

@@ -69,6 +69,7 @@ const TITLES: Record<string, TermId> = {
   'lower limit': 'running-mean',
   'upper limit': 'running-mean',
   Pairs: 'pair',
+  'Odd counts': 'pair',
   'Lumped counts': 'lump',
   'N too small': 'critical-trials'
 };
