@@ -1,5 +1,6 @@
 import { parseArgs } from 'node:util';
 import type { ReadOptions, Role } from '$lib/formats/types';
+import { readKept } from '$lib/model/read-kept';
 import type { DiagnoseOptions } from '$lib/stats/types';
 import { Refusal } from './exit-codes';
 
@@ -28,6 +29,7 @@ const options = {
   unit: text,
   geometry: text,
   misread: text,
+  kept: text,
   supplied: text,
   alpha: text,
   tolerance: text,
@@ -113,6 +115,7 @@ export function parseOptions(args: string[]): Asked | 'help' {
       'ring-bonds': 'ring-bonds'
     } as const),
     misread: orUnknown('misread', 'a probability'),
+    kept: keptOf(values.kept),
     alpha: number('alpha', 'a number such as 0.01'),
     tolerance: number('tolerance', 'a number such as 0.1'),
     resamples: number('resamples', 'a whole number'),
@@ -157,6 +160,14 @@ export function parseOptions(args: string[]): Asked | 'help' {
     quiet: values.quiet ?? false,
     failOn: one('fail-on', { 'ruled-out': 'ruled-out', undecided: 'undecided' } as const) ?? null
   };
+}
+
+/** "1-4", or "1-" where nothing was cut above. */
+function keptOf(typed: string | undefined): DiagnoseOptions['kept'] | undefined {
+  if (typed === undefined) return undefined;
+  const kept = readKept(typed);
+  if (kept) return kept;
+  throw new Refusal([`--kept takes the smallest and the largest count kept, as 0-4 or 1-, not "${typed}".`]);
 }
 
 function parse(args: string[]) {

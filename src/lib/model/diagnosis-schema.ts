@@ -47,6 +47,7 @@ const data = z.strictObject({
   misread: orNull,
   counts: z.array(z.tuple([whole, whole])),
   lump: lump.nullable(),
+  kept: z.strictObject({ from: whole, to: whole.nullable() }).optional(),
   ordered: z.boolean(),
   batches: whole.nullable()
 });

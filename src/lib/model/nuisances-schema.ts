@@ -72,9 +72,22 @@ const pairs = z.strictObject({
   statement: z.string()
 });
 
+const emptyAside = z.strictObject({
+  shots: whole,
+  mean: number,
+  ceiling: number,
+  dispersion: interval,
+  p: share,
+  smallestP: share,
+  resamples: whole,
+  verdict: z.enum(['compatible', 'excess', 'undecided']),
+  statement: z.string()
+});
+
 /** Each part is there only where it has something to say. */
 export const nuisancesSchema = z.strictObject({
   misread: misread.optional(),
   drift: drift.optional(),
-  pairs: pairs.optional()
+  pairs: pairs.optional(),
+  emptyAside: emptyAside.optional()
 });

@@ -79,9 +79,10 @@ export class Check {
 
   /** Counts of an example, with what belongs to them of the experiment; how hard to look stays as it is set. */
   takeExample(text: string, name: string, options: Partial<DiagnoseOptions>): void {
-    const { trials, unit, geometry, misread } = settingsWith(freshSettings(), options);
-    this.input.replace(text, name, { trials, unit, geometry, misread });
-    for (const setting of ['trials', 'unit', 'geometry', 'misread'] as const) delete this.#touched[setting];
+    const { trials, unit, geometry, misread, kept } = settingsWith(freshSettings(), options);
+    this.input.replace(text, name, { trials, unit, geometry, misread, kept });
+    for (const setting of ['trials', 'unit', 'geometry', 'misread', 'kept'] as const)
+      delete this.#touched[setting];
     this.countsChanged(true);
   }
 

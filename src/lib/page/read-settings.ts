@@ -1,3 +1,4 @@
+import { readKept } from '$lib/model/read-kept';
 import type { DiagnoseOptions } from '$lib/stats/types';
 import { readNumber } from './read-number';
 import type { SettingName, Settings } from './settings';
@@ -37,6 +38,10 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
 
   const trials = readTrials(settings.trials);
   if (trials === undefined) problems.trials = 'Write a whole number from 1 to 1 000 000 000, or “unknown”.';
+  const kept = settings.kept.trim() === '' ? null : readKept(settings.kept);
+  if (kept === null && settings.kept.trim() !== '')
+    problems.kept =
+      'Write the smallest and the largest count kept, such as 0-4, or 1- where only empty shots were dropped.';
   const law = await readLaw(settings.supplied);
   if (!law.ok) problems.supplied = law.problem;
   const whole = Number.isInteger;
@@ -52,6 +57,7 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
             (x) => x >= 0 && x < 0.5,
             'Write a probability from 0 to below 0.5, or leave it empty.'
           ),
+    ...(kept && { kept }),
     alpha: number('alpha', (x) => x > 0 && x < 0.5, 'Write a level between 0 and 0.5, such as 0.01.'),
     tolerance: number(
       'tolerance',

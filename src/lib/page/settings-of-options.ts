@@ -1,3 +1,4 @@
+import { writeKept } from '$lib/model/read-kept';
 import type { DiagnoseOptions } from '$lib/stats/types';
 import { freshSettings, type Settings } from './settings';
 
@@ -9,6 +10,7 @@ export function settingsOfOptions(options: Partial<DiagnoseOptions>): Settings {
   if (options.unit) settings.unit = options.unit;
   if (options.geometry) settings.geometry = options.geometry;
   if (typeof options.misread === 'number') settings.misread = `${options.misread}`;
+  if (options.kept) settings.kept = writeKept(options.kept);
   if (options.alpha !== undefined) settings.alpha = `${options.alpha}`;
   if (options.tolerance !== undefined) settings.tolerance = `${options.tolerance}`;
   if (options.resamples !== undefined) settings.resamples = `${options.resamples}`;

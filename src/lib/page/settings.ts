@@ -6,6 +6,8 @@ export interface Settings {
   unit: Unit;
   geometry: Geometry;
   misread: string;
+  /** Counts kept, as 0-4 or 1-; empty where no shot was dropped. */
+  kept: string;
   alpha: string;
   tolerance: string;
   resamples: string;
@@ -21,6 +23,7 @@ export const freshSettings = (): Settings => ({
   unit: 'defect',
   geometry: 'sites',
   misread: '',
+  kept: '',
   alpha: '0.01',
   tolerance: '0.1',
   resamples: '1999',

@@ -14,6 +14,8 @@ import { toHistogram } from './input/to-histogram';
 import { momentReport } from './moments/moment-report';
 import { adjust } from './multiple/adjust';
 import { independentNull } from './nulls/independent-null';
+import { keptCounts } from './nulls/kept-counts';
+import { keptNull } from './nulls/kept-null';
 import { misreadApplies } from './nulls/misread-applies';
 import { misreadNull } from './nulls/misread-null';
 import { misreadReport } from './nulls/misread-report';
@@ -24,6 +26,7 @@ import { varianceTest } from './resampling/ceiling-test';
 import type { DrawHelper } from './resampling/draw-helper';
 import { fittedTests } from './resampling/fitted-tests';
 import { pacer } from './resampling/pacer';
+import { emptyAside } from './truncation/empty-aside';
 import type { CountData, DiagnoseOptions, Diagnosis, OnProgress } from './types';
 import { distribution } from './views/distribution';
 import { lawTable } from './views/law-table';
@@ -58,9 +61,12 @@ export async function diagnose(
   const drawing = { resamples: options.resamples, seed: options.seed };
   const equal = equalTrials(counts, trials).parameter;
   const misread = misreadApplies(options, counts);
-  const tested = misread.applies
-    ? misreadNull(counts, histogram, misread.rate, options)
-    : await independentNull(counts, histogram, equal, options, () => pace.step('floor', 0.04));
+  const kept = keptCounts(options, histogram, counts, misread);
+  const tested = kept
+    ? keptNull(counts, kept, options)
+    : misread.applies
+      ? misreadNull(counts, histogram, misread.rate, options)
+      : await independentNull(counts, histogram, equal, options, () => pace.step('floor', 0.04));
   const { law, certificate } = tested;
   const moments = momentReport(histogram, trials, equal, drawing, tested.ceiling);
   const spread = moments.variance.value !== null && moments.variance.value > 0;
@@ -106,11 +112,21 @@ export async function diagnose(
     drift
   });
   const pairs = pairsReport(given, counts.total, options, evidence.even);
-  const nuisances = { ...(read && { misread: read }), ...(drift && { drift }), ...(pairs && { pairs }) };
   const flags = raiseFlags(evidence);
+  const aside =
+    !kept && !misread.applies && flags.some(({ id }) => id === 'dead-shots')
+      ? await emptyAside(counts, options, pace.within(0.9, 0.9))
+      : null;
+  const nuisances = {
+    ...(read && { misread: read }),
+    ...(drift && { drift }),
+    ...(pairs && { pairs }),
+    ...(aside && { emptyAside: aside })
+  };
   const said = answer(evidence, flags);
   let explanations: Diagnosis['explanations'];
-  if (said.verdict === 'ruled-out') {
+  // The stories know nothing of a cut.
+  if (said.verdict === 'ruled-out' && !kept) {
     await pace.step('explanations', 0.9);
     explanations = await explainRuledOut({ counts, options, moments, tested, tests }, pace.within(0.9, 0.99));
   }
@@ -133,13 +149,14 @@ export async function diagnose(
       misread: options.misread,
       counts: given.counts,
       lump: given.lump,
+      ...(options.kept && { kept: options.kept }),
       ordered: data.kind === 'shots',
       batches: data.kind === 'shots' && data.batches ? new Set(data.batches).size : null
     },
     moments: {
       ...moments,
       criticalTrials:
-        spread && !histogram.lump && !misread.applies
+        spread && !histogram.lump && !misread.applies && !kept
           ? criticalTrials(moments.mean.value!, moments.variance.value!)
           : null
     },

@@ -1,5 +1,6 @@
 import type { DriftPart } from './drift/types';
 import type { Explanations } from './explanations/types';
+import type { EmptyAside } from './truncation/empty-aside';
 import type { PairsPart } from './pairs/types';
 import type { Geometry, Interval, Level, Unit } from './types';
 
@@ -134,6 +135,8 @@ export interface Diagnosis {
     /** As given; for unit `pair` everything after `data` counts pairs, n/2. */
     counts: [number, number][];
     lump: { from: number; shots: number } | null;
+    /** Counts that were kept, where a cut was declared; since engine 0.5. */
+    kept?: { from: number; to: number | null };
     /** True when shot order was known; number of batches, or null. */
     ordered: boolean;
     batches: number | null;
@@ -158,6 +161,8 @@ export interface Diagnosis {
     drift?: DriftPart;
     /** For single defects on a ring, or with even counts only, since engine 0.5. */
     pairs?: PairsPart;
+    /** Where there are too many empty shots, since engine 0.5. */
+    emptyAside?: EmptyAside;
   };
   fit: {
     logLikelihood: number;

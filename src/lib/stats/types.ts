@@ -36,6 +36,8 @@ export interface DiagnoseOptions {
   /** Probability that one site is misread; null when not stated. */
   misread: number | null;
   geometry: Geometry;
+  /** Counts that were kept, both ends included (`to` null: nothing was cut above); null or left out: no shot was dropped. */
+  kept?: { from: number; to: number | null } | null;
   /** A law to compare with: one probability per trial; null for none. */
   supplied: number[] | null;
 }

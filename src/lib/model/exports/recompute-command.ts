@@ -1,5 +1,7 @@
 import type { Diagnosis } from '$lib/stats/types';
 
+import { writeKept } from '../read-kept';
+
 /** The files that a recomputation reads. */
 export interface RecomputedFrom {
   /** Path of the counts, as the command is to name it. */
@@ -23,6 +25,7 @@ export function recomputeCommand(
     ['unit', data.unit],
     ['geometry', data.geometry],
     ['misread', data.misread ?? 'unknown'],
+    ...(data.kept ? [['kept', writeKept(data.kept)] as [string, string]] : []),
     ['alpha', engine.alpha],
     ['tolerance', engine.tolerance],
     ['resamples', engine.resamples],

@@ -1,3 +1,4 @@
+import { sayKept } from '$lib/stats/words/say-kept';
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount, formatNumber } from '../format-number';
 import { GEOMETRIES, UNITS } from '../labels';
@@ -20,7 +21,8 @@ export function sayData({ data, moments, engine }: Diagnosis, about: string[]): 
     ? `counts up to "${formatCount(data.lump.from)} or more"`
     : `largest count ${formatCount(last ?? null)}`;
   const misread =
-    data.misread === null ? '' : `; a site is misread with probability ${formatNumber(data.misread, 3)}`;
+    (data.kept ? `; only ${sayKept(data.kept)} were kept` : '') +
+    (data.misread === null ? '' : `; a site is misread with probability ${formatNumber(data.misread, 3)}`);
   const per = data.unit === 'pair' ? ' (in pairs)' : '';
   return [
     'Data',

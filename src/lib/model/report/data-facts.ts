@@ -1,3 +1,4 @@
+import { sayKept } from '$lib/stats/words/say-kept';
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount, formatNumber } from '../format-number';
 import { GEOMETRIES } from '../labels';
@@ -16,6 +17,7 @@ export function dataFacts({ data }: Diagnosis, name: string | null): [string, st
     ],
     ['Unit', data.unit === 'pair' ? 'pairs of defects: n/2 out of N/2 is tested' : 'single defects'],
     ['Counted on', GEOMETRIES[data.geometry]],
+    ...(data.kept ? [['Counts kept', sayKept(data.kept)] as [string, string]] : []),
     ['Chance to misread a site', data.misread === null ? 'not stated' : formatNumber(data.misread, 3)],
     [
       'Order of the shots',

@@ -1,3 +1,4 @@
+import { sayKept } from '$lib/stats/words/say-kept';
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount } from '../format-number';
 import { asTyped } from './as-typed';
@@ -30,8 +31,9 @@ export const sayNuisances = (document: Diagnosis, stated: Stated | null): [strin
     ['Within batches', sayWithin(document.nuisances?.drift)],
     ['Change of the mean', sayChange(document.nuisances?.drift)],
     ['Pairs', sayPairs(document)],
+    ['Without empty shots', document.nuisances?.emptyAside?.statement ?? null],
     ['Odd counts', document.nuisances?.pairs?.statement ?? null],
-    ['Post-selection', sayPostSelection(stated)],
+    ['Post-selection', sayCut(document) ?? sayPostSelection(stated)],
     [
       'Lumped counts',
       document.data.lump === null
@@ -52,6 +54,13 @@ export function sayPairs(
   if (unit === 'pair') return 'Counts are even by construction: n/2 out of N/2 is tested.';
   const ring = geometry === 'ring-bonds' ? ' On a ring every count is even: give the unit as pairs.' : '';
   return `Single defects are tested.${ring}${sayFlagged(view, 'pairing')}`;
+}
+
+/** Where the counts kept are stated to the engine, what it makes of them. */
+function sayCut({ data }: Diagnosis): string | null {
+  return data.kept
+    ? `Only ${sayKept(data.kept)} were kept. Laws, ceiling and tests are of counts cut so, and the cut by itself no longer makes them look regular.`
+    : null;
 }
 
 export function sayPostSelection(stated: Stated | null): string {

@@ -57,6 +57,15 @@ export const DATA = {
     formula: ['"kink on bond" k: s_k ≠ s_{k+1}'],
     source: ''
   },
+  kept: {
+    name: 'counts kept',
+    words: [
+      'The range outside which shots were dropped before they were counted, as whoever did it states.',
+      'Dropping shots makes counts look regular, so the laws, the ceiling and the tests are then those of counts cut in the same way.'
+    ],
+    formula: ['frac{f_n}{f_a + … + f_b}', 'a ≤ n ≤ b'],
+    source: ''
+  },
   'misread-rate': {
     name: 'misread rate, ε',
     words: [

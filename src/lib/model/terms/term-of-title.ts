@@ -51,6 +51,7 @@ const TITLES: Record<string, TermId> = {
   'Counts seen': 'count',
   Unit: 'pair',
   'Counted on': 'geometry',
+  'Counts kept': 'kept',
   'Chance to misread a site': 'misread-rate',
   'Order of the shots': 'test-order',
   Counts: 'digest',
@@ -70,6 +71,7 @@ const TITLES: Record<string, TermId> = {
   'upper limit': 'running-mean',
   Pairs: 'pair',
   'Odd counts': 'pair',
+  'Without empty shots': 'kept',
   'Lumped counts': 'lump',
   'N too small': 'critical-trials'
 };

@@ -2,6 +2,7 @@ import type { Evidence } from '../flags/evidence';
 import type { TestResult, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
+import { sayKept } from '../words/say-kept';
 import { sayTest } from '../words/say-test';
 
 /** Reasons for the answer, the weightiest first, each a sentence with its number. */
@@ -29,7 +30,7 @@ export function because(
   const { dispersion } = moments;
   if (dispersion.value !== null) {
     out.push(
-      `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean${misread ? `, read with ${formatPercent(misread.rate)} of the sites misread` : ''}.`
+      `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean${options.kept ? `, of which only ${sayKept(options.kept)} were kept` : ''}${misread ? `, read with ${formatPercent(misread.rate)} of the sites misread` : ''}.`
     );
     const mean = moments.mean.value!;
     const raw = misread && trials ? moments.variance.value! / (mean * (1 - mean / trials)) : NaN;

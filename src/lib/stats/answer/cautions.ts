@@ -1,6 +1,7 @@
 import type { Evidence } from '../flags/evidence';
 import type { Histogram, TestResult } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
+import { sayKept } from '../words/say-kept';
 import { resamplesNeeded } from './unreachable';
 
 /** What a reader must keep in mind: first what this histogram adds, then what always holds. */
@@ -13,6 +14,11 @@ export function cautions(
   if (histogram.lump) {
     out.push(
       `The last row lumps counts of ${formatCount(histogram.lump.from)} and more. They enter the likelihood as a tail; mean, variance and what follows from them count each such shot as ${formatCount(histogram.lump.from)} and are lower limits. The ceiling is then that of equal trials lumped in the same way.`
+    );
+  }
+  if (options.kept) {
+    out.push(
+      `Only ${sayKept(options.kept)} were kept, as stated, and every test, the ceiling and every law here is of counts that were cut so. How many shots were dropped is not used. There is no certificate, the bounds of the tails are weaker, and no other stories are told. A cut through the bulk of the counts leaves little to test.`
     );
   }
   if (trials === null) {

@@ -17,7 +17,7 @@ export function regular(evidence: Evidence): Flag | null {
     tests: [],
     statement:
       'A remark, not a violation: counts are more regular than equal independent trials would make them. Uneven probabilities give that, and so does repulsion between defects; the counts alone cannot tell which.',
-    size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials${evidence.misread?.applies ? ' as they are read' : ''}.`,
+    size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials${evidence.misread?.applies ? ' as they are read' : ''}${evidence.options.kept ? ', cut as stated' : ''}.`,
     otherCauses: [
       'probabilities that differ between trials, such as modes of different momentum',
       'repulsion or exclusion between neighbouring defects',

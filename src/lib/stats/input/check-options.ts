@@ -27,6 +27,23 @@ export function checkOptions(options: DiagnoseOptions): void {
     misread === null || (misread >= 0 && misread < 0.5),
     'The misread rate must be at least 0 and below 0.5.'
   );
+  if (options.kept) {
+    const { from, to } = options.kept;
+    const whole = (n: number) => Number.isSafeInteger(n) && n >= 0;
+    need(
+      whole(from) && (to === null || whole(to)),
+      'The counts kept are whole numbers from 0 up: the smallest, and the largest or nothing.'
+    );
+    need(to === null || to >= from, `No count lies from ${from} to ${to}: that cut leaves nothing.`);
+    need(
+      to === null || to > from,
+      `A cut that keeps only the count ${from} leaves nothing to test: every shot is then the same.`
+    );
+    need(
+      trials === null || from < trials,
+      `Of ${trials} trials, a cut from ${from} up leaves at most one count: nothing to test.`
+    );
+  }
   need(['defect', 'pair'].includes(options.unit), 'The unit is either defect or pair.');
   need(
     ['sites', 'open-bonds', 'ring-bonds'].includes(options.geometry),

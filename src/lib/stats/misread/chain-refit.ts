@@ -4,6 +4,7 @@ import type { Refit } from '../fit/refit';
 import type { Window } from '../laws/window';
 import { chainClimb, type ChainClimb, type ChainProblem } from './chain-climb';
 import { mostLevels } from './chain-fit';
+import type { Kept } from './chain-score';
 import { chainSpace, type Chain, type ChainSpace } from './chain-space';
 import { evenChain, twoLevels } from './chain-starts';
 import { readWindow, type ReadChain } from './read-chain';
@@ -34,7 +35,8 @@ export function chainRefit(
 ): ChainRefit {
   const bonds = data.trials!;
   const { rate } = from;
-  const kept = data.withoutEmpty ? { from: 1, to: Infinity } : null;
+  const cut = from.kept ?? null;
+  const kept = data.withoutEmpty ? { from: Math.max(1, cut?.from ?? 1), to: cut?.to ?? Infinity } : cut;
   const problem: ChainProblem = { space, data, rate, kept };
   let best = chainClimb(problem, { p: from.p, runs: from.runs }, enough, settled);
   const attempt = (start: Chain | null): number => {
@@ -56,12 +58,12 @@ export function chainRefit(
       attempt(twoLevels(bonds, many, 1, moments, rate));
     }
   }
-  return asRefit(best, rate);
+  return asRefit(best, rate, cut);
 }
 
 /** A climb's chain with its pmf. */
-export function asRefit({ chain, value }: ChainClimb, rate: number): ChainRefit {
-  const levels = { ...chain, rate };
+export function asRefit({ chain, value }: ChainClimb, rate: number, kept: Kept | null = null): ChainRefit {
+  const levels = { ...chain, rate, ...(kept && { kept }) };
   const window: Window = readWindow(levels, 1e-20, 1);
   return { levels, logLikelihood: value, window };
 }

@@ -1,6 +1,9 @@
 import type { Level } from '../types';
 import { chainBlocks } from './chain-blocks';
+import { truncatedWindow } from '../truncation/truncated-window';
+import { windowMoments } from '../truncation/window-moments';
 import { chainMoments } from './chain-moments';
+import type { Kept } from './chain-score';
 import type { Chain } from './chain-space';
 import { chainWindow } from './chain-window';
 import type { Window } from '../laws/window';
@@ -9,6 +12,8 @@ import type { Window } from '../laws/window';
 export interface ReadChain extends Chain {
   /** ε of one site. */
   rate: number;
+  /** Only these counts were kept: the law is conditioned on them. Left out: no shot was dropped. */
+  kept?: Kept;
 }
 
 /** Whether a law is one of misread kinks. */
@@ -18,19 +23,25 @@ export function isReadChain(law: object): law is ReadChain {
 
 /** Its pmf; see chainWindow. */
 export function readWindow(chain: ReadChain, trim = 0, scale?: number): Window {
-  return chainWindow(chainBlocks(chain), chain.rate, trim, scale);
+  const whole = chainWindow(chainBlocks(chain), chain.rate, chain.kept ? 0 : trim, scale);
+  return chain.kept ? truncatedWindow(whole, chain.kept) : whole;
 }
 
 /** Its mean and variance. */
 export function readMoments(chain: ReadChain): { mean: number; variance: number } {
-  return chainMoments(chainBlocks(chain), chain.rate);
+  return chain.kept ? windowMoments(readWindow(chain)) : chainMoments(chainBlocks(chain), chain.rate);
 }
 
 /**
  * P(X even) = ½(1 + u² Π(1 − 2p)^n): a flip inside the chain toggles two bonds and keeps the parity, one at either end
  * does not.
  */
-export function readEven({ p, runs, rate }: ReadChain): number {
+export function readEven(chain: ReadChain): number {
+  const { p, runs, rate } = chain;
+  if (chain.kept) {
+    const { first, values, scale } = readWindow(chain);
+    return values.reduce((sum, f, i) => ((first + i) % 2 === 0 ? sum + f / scale : sum), 0);
+  }
   let product = 1 - 4 * rate * (1 - rate);
   for (const { level, trials } of runs) product *= (1 - 2 * p[level]) ** trials;
   return (1 + product) / 2;

@@ -24,7 +24,7 @@ export function misreadReport(
   const mean = moments.mean.value!;
   const rawCeiling = lump ? lumpedCeiling(trials, equal, lump.from) : ceiling(mean, trials);
   const variance = moments.variance.value;
-  const applied = isReadChain(law);
+  const applied = isReadChain(law) && !law.kept;
   return {
     applied,
     rate: misread,
@@ -33,6 +33,6 @@ export function misreadReport(
     rawDispersion: variance === null || !(rawCeiling > 0) ? null : variance / rawCeiling,
     // A lump hides how far its counts reach.
     neededRate: lump ? { value: null, low: null, high: null } : neededRate(mean, moments.variance, trials),
-    kinks: applied ? chainBlocks(law) : null
+    kinks: applied && isReadChain(law) ? chainBlocks(law) : null
   };
 }

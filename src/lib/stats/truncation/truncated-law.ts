@@ -1,6 +1,7 @@
 import { deepScale, type Window } from '../laws/window';
 import { lawWindow } from '../laws/law-window';
 import type { Law } from '../types';
+import { truncatedWindow } from './truncated-window';
 
 /** Counts that were kept; `to` is Infinity when nothing was cut above. */
 export interface KeptCounts {
@@ -16,15 +17,7 @@ export interface KeptCounts {
  */
 export function truncatedLaw(law: Law, { from, to }: KeptCounts, scale = deepScale): Window | null {
   const whole = lawWindow(law, 0, deepScale);
-  const start = Math.max(0, from - whole.first);
-  const end = Math.min(whole.values.length - 1, to - whole.first);
-  if (end < start) return null;
-  const values = whole.values.slice(start, end + 1);
-  // Smallest terms first: both ends fall off from the mode.
-  const total = Float64Array.from(values)
-    .sort()
-    .reduce((sum, f) => sum + f, 0);
-  if (!(total > 0)) return null;
-  for (let i = 0; i < values.length; i++) values[i] = (values[i] / total) * scale;
-  return { first: whole.first + start, values, scale };
+  if (to < whole.first || from >= whole.first + whole.values.length) return null;
+  const window = truncatedWindow(whole, { from, to }, scale);
+  return window.values.some((f) => f > 0) ? window : null;
 }

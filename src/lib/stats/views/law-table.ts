@@ -4,7 +4,7 @@ import { logPmf } from '../laws/log-pmf';
 import type { Window } from '../laws/window';
 import { chainBlocks } from '../misread/chain-blocks';
 import { chainRate } from '../misread/chain-rate';
-import { isReadChain } from '../misread/read-chain';
+import { isReadChain, type ReadChain } from '../misread/read-chain';
 import { familyMoments, familyWindow, type FittedLaw } from '../resampling/fitted-law';
 
 /** The fitted law over the counts a report shows. */
@@ -59,8 +59,26 @@ export function lawTable(data: FitData, law: FittedLaw): LawTable {
     upper: (n) => (n <= window.first ? 1 : (upward[n - window.first] ?? 0)),
     lower: (n) =>
       n < window.first ? 0 : Math.min(1, downward[Math.min(n - window.first, downward.length - 1)]),
-    rate: (n) => (isReadChain(law) ? chainRate(chainBlocks(law), law.rate, n) : lawRate(law, n))
+    rate: (n) => (isReadChain(law) ? readRate(law, n, mean) : lawRate(law, n))
   };
+}
+
+/**
+ * Rate of a chain; cut to the counts kept, I(n) + ln P(kept), which keeps Chernoff's bound one: P(X ≥ n | kept) ≤
+ * P(X ≥ n)/P(kept). Between the mean before the cut and after it nothing is known, and the rate is 0.
+ */
+function readRate(law: ReadChain, n: number, mean: number): number {
+  const { kept, ...before } = law;
+  const rate = chainRate(chainBlocks(law), law.rate, n);
+  if (!kept) return rate;
+  const whole = familyMoments(before).mean;
+  if (n < kept.from || n > kept.to) return Infinity;
+  if ((n - mean) * (n - whole) < 0) return 0;
+  const { first, values, scale } = familyWindow(before);
+  let share = 0;
+  for (let i = 0; i < values.length; i++)
+    if (first + i >= kept.from && first + i <= kept.to) share += values[i] / scale;
+  return Math.max(0, rate + Math.log(share));
 }
 
 /** ln f_n where f_n is too small for a double. Of a chain as far as its window goes, to 1e-590. */

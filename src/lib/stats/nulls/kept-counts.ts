@@ -1,0 +1,38 @@
+import type { FitData } from '../fit/fit-data';
+import type { KeptCounts } from '../truncation/truncated-law';
+import { BadInput, type DiagnoseOptions, type Histogram } from '../types';
+import { sayKept } from '../words/say-kept';
+import { mostBonds, type MisreadUse } from './misread-applies';
+
+/**
+ * The counts kept, in the unit tested, when a cut was declared; null when none was.
+ *
+ * @throws BadInput, in words, where the cut and the counts do not go together or the cut cannot be allowed for
+ */
+export function keptCounts(
+  { kept, unit }: Pick<DiagnoseOptions, 'kept' | 'unit'>,
+  { lump }: Histogram,
+  { first, shots, trials }: FitData,
+  misread: MisreadUse
+): KeptCounts | null {
+  if (!kept) return null;
+  const per = unit === 'pair' ? 2 : 1;
+  const from = Math.ceil(kept.from / per);
+  const to = kept.to === null ? Infinity : Math.floor(kept.to / per);
+  const refuse = (reason: string): never => {
+    throw new BadInput(reason);
+  };
+  if (trials === null) return refuse('A cut can be allowed for only where the number of trials is known.');
+  if (trials > mostBonds) return refuse(`A cut can be allowed for only up to ${mostBonds} trials.`);
+  if (lump) return refuse('A closing row "or more" and a cut of the counts cannot both be allowed for.');
+  if (misread.applies)
+    return refuse('A misread rate and a cut of the counts cannot both be allowed for: give one of them.');
+  const last = first + shots.length - 1;
+  if (first < from || last > to)
+    return refuse(
+      `A count of ${(first < from ? first : last) * per} was seen, but only ${sayKept(kept)} are said to be kept.`
+    );
+  if (Math.min(to, trials) - from < 1)
+    return refuse('That cut leaves one count only: nothing is left to test.');
+  return { from, to };
+}
