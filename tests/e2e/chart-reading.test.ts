@@ -40,7 +40,7 @@ describe('a chart', () => {
       ['End', /^Count 10:/]
     ] as const) {
       await page.keyboard.press(key);
-      await expect.poll(() => said.textContent(), key).toMatch(words);
+      await expect.poll(() => said.textContent()).toMatch(words);
     }
     await page.close();
   });
