@@ -1,0 +1,7 @@
+import { packDocument, unpackDocument, type PackedDocument } from '$lib/model/packed-document';
+import type { Transport } from '@sveltejs/kit';
+
+/** How a long document travels from server to page; short ones go as they are. */
+export const transport: Transport = {
+  LongDocument: { encode: packDocument, decode: (packed: PackedDocument) => unpackDocument(packed) }
+};
