@@ -4,6 +4,8 @@ import { explanationsPicture } from '$lib/charts/explanations-picture';
 import { distributionPicture } from '$lib/charts/distribution-picture';
 import { cumulantsPlace } from '$lib/charts/cumulants-place';
 import type { Picture, Size, TextMark } from '$lib/charts/picture';
+import { powerPicture } from '$lib/charts/power-picture';
+import { publishedPlace } from '$lib/charts/published-place';
 import { ratePicture } from '$lib/charts/rate-picture';
 import { regionPicture } from '$lib/charts/region-picture';
 import { sheetOf } from '$lib/charts/sheet-of';
@@ -13,6 +15,8 @@ import { testsPicture } from '$lib/charts/tests-picture';
 import { TESTS } from '$lib/model/labels';
 import type { DriftPart } from '$lib/stats/drift/types';
 import type { Explanations } from '$lib/stats/explanations/types';
+import { judgeCumulants } from '$lib/stats/cumulants-only/judge-cumulants';
+import { powerCurve } from '$lib/stats/planning/power-curve';
 import type { Diagnosis } from '$lib/stats/types';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
@@ -102,6 +106,33 @@ describe('every chart', () => {
   it.each(CASES)('of %s is finite and inside its frame, narrow and wide', async (_name, make) => {
     const diagnosis = await make();
     for (const width of [260, 342, 760, 1400]) expect(faultsOf(diagnosis, width)).toEqual([]);
+  });
+
+  it.each([21, 383, 30_000, 2e9, 8e14])('of a plan of %d shots is finite and inside its frame', (shots) => {
+    const curve = powerCurve({ kind: 'excess', size: 0.1, mean: 4, trials: null }, 0.05, 2.5 * shots);
+    const plan = { curve, shots, power: 0.8, asked: 0.8 };
+    for (const width of [260, 342, 760, 1400])
+      expect(faults(powerPicture(plan, { width, text: 13 })), `${width}`).toEqual([]);
+  });
+
+  it.each([
+    ['inside', 3.5, 3, 64],
+    ['near', 4.1, 4, null],
+    ['far over', 60, 900, 8],
+    ['far under', 0.4, -30, null]
+  ])('of printed cumulants %s is finite and inside its frame', (_name, variance, third, trials) => {
+    const measured = (value: number) => ({ value, error: 0.05 + Math.abs(value) / 20 });
+    const printed = {
+      trials,
+      mean: measured(4),
+      variance: measured(variance),
+      third: measured(third),
+      fourth: null
+    };
+    const verdict = { ...judgeCumulants(printed), verdict: 'ruled-out' as const };
+    const place = publishedPlace(printed, verdict)!;
+    for (const width of [260, 342, 760, 1400])
+      expect(faults(regionPicture(place, { width, text: 13 })), `${width}`).toEqual([]);
   });
 
   it('of any counts is finite and inside its frame', async () => {

@@ -7,6 +7,8 @@ import type { OddsRequest, PlanRequest } from './read-plan';
 /** What the planner found; a part that was not asked for is undefined. */
 export interface Planned {
   needed?: ShotsToSee | null;
+  /** Power by shots, to twice and a half of those needed. */
+  curve?: [shots: number, power: number][];
   /** Size that the given shots see; null when they see none. */
   smallest?: number | null;
 }

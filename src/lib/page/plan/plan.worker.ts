@@ -1,3 +1,4 @@
+import { powerCurve } from '$lib/stats/planning/power-curve';
 import { shotsToSee } from '$lib/stats/planning/shots-to-see';
 import { simulatePower } from '$lib/stats/planning/simulate-power';
 import { smallestEffect } from '$lib/stats/planning/smallest-effect';
@@ -29,8 +30,11 @@ function resultOf(task: TaskRequest): Tasks[keyof Tasks]['result'] {
 
 function planned({ size, shots, alpha, power, ...effect }: PlanRequest): Planned {
   const sharpness = { alpha, power };
-  return {
-    ...(size === null ? {} : { needed: shotsToSee({ ...effect, size }, sharpness) }),
-    ...(shots === null ? {} : { smallest: smallestEffect(effect, shots, sharpness) })
-  };
+  const found: Planned = {};
+  if (size !== null) {
+    found.needed = shotsToSee({ ...effect, size }, sharpness);
+    if (found.needed?.shots) found.curve = powerCurve({ ...effect, size }, alpha, 2.5 * found.needed.shots);
+  }
+  if (shots !== null) found.smallest = smallestEffect(effect, shots, sharpness);
+  return found;
 }

@@ -30,7 +30,7 @@ export function sayPlan(
         ? `${formatCount(shots)} shots show no ${EFFECTS[kind].short} of any size that can be in ${inHundred(power)} experiments.`
         : `${formatCount(shots)} shots show ${name(kind)} of ${formatNumber(smallest, 3)} or more in ${inHundred(power)} experiments, ${level}.`
     );
-  return said;
+  return said.length > 0 ? said : ['An effect of this size cannot be on counts of this mean.'];
 }
 
 const name = (kind: PlanRequest['kind']): string =>

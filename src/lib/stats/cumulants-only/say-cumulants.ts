@@ -14,7 +14,16 @@ export const sayBroken = ({ order, side }: Condition): string =>
 
 /** The answer in one or two sentences, plain first. */
 export function sayCumulants(judged: CumulantsVerdict): string {
-  const { verdict, conditions, broken, nearest, p } = judged;
+  return said(judged) + sayMisprint(judged);
+}
+
+/** What no counts have as printed, though within the errors some do. */
+function sayMisprint({ verdict, broken }: CumulantsVerdict): string {
+  if (verdict === 'impossible' || broken.length === 0) return '';
+  return ` As printed no counts at all have them: ${sayBroken(broken[0])} for any counts, though by less than three of its errors.`;
+}
+
+function said({ verdict, conditions, broken, nearest, p }: CumulantsVerdict): string {
   if (verdict === 'impossible') {
     const worst = broken.reduce((a, b) => (b.slack / b.error < a.slack / a.error ? b : a));
     return (

@@ -70,6 +70,12 @@ describe('judgeCumulants', () => {
     const judged = judgeCumulants(printed(null, [3, 0.01], [1, 0.01], [0, 0.05], [-5, 0.1]));
     expect(judged.verdict).toBe('impossible');
     expect(sayCumulants(judged)).toMatch(/No counts at all/);
+    // As far out, but with errors that leave room.
+    const near = judgeCumulants(printed(10, [3.5, 0.2], [0.2, 0.1]));
+    expect(near.verdict).not.toBe('impossible');
+    expect(sayCumulants(near)).toMatch(
+      /As printed no counts at all have them: the variance is below its floor/
+    );
     // Whole counts of mean 3.5 scatter by 0.25 at least.
     expect(judgeCumulants(printed(10, [3.5, 0.001], [0.1, 0.001])).verdict).toBe('impossible');
   });

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Effect } from '$lib/stats/planning/effect';
+import { powerCurve } from '$lib/stats/planning/power-curve';
 import { shotsToSee } from '$lib/stats/planning/shots-to-see';
 import { simulatePower } from '$lib/stats/planning/simulate-power';
 import { smallestEffect } from '$lib/stats/planning/smallest-effect';
@@ -81,6 +82,18 @@ describe('shotsToSee', () => {
         expect(Math.abs(tried.share - power), `${shots} shots: ${tried.share}`).toBeLessThan(0.05);
       }
     );
+  });
+});
+
+describe('powerCurve', () => {
+  it('rises to the power asked for at the shots that are needed', () => {
+    const effect: Effect = { kind: 'excess', size: 0.1, mean: 4, trials: 50 };
+    const { shots, power } = shotsToSee(effect, usual)!;
+    const curve = powerCurve(effect, usual.alpha, shots!, 40);
+    expect(curve[0][0]).toBe(20);
+    expect(curve[40]).toEqual([shots, power]);
+    for (let i = 1; i <= 40; i++) expect(curve[i][1]).toBeGreaterThan(curve[i - 1][1]);
+    expect(powerCurve({ ...effect, size: 60 }, usual.alpha, 1000)).toEqual([]);
   });
 });
 
