@@ -18,7 +18,7 @@ export function sayPlan(
 ): string[] {
   const level = `at a level of ${plain(alpha)}`;
   const said: string[] = [];
-  if (needed)
+  if (needed && size !== null)
     said.push(
       needed.shots === null
         ? `No number of shots shows ${name(kind)} of ${plain(size)}.`
