@@ -27,7 +27,7 @@ export function documentCsv(document: Diagnosis): string {
     ranged('moments', key, moments[key]);
   for (const key of ['ceiling', 'criticalTrials', 'pairCovariance'] as const)
     one('moments', key, moments[key]);
-  const { misread, drift, pairs, emptyAside } = document.nuisances ?? {};
+  const { misread, drift, pairs, emptyAside, trials } = document.nuisances ?? {};
   if (misread) {
     one('misreads', 'applied', misread.applied ? 'yes' : 'no');
     for (const key of ['rate', 'ceiling', 'rawCeiling', 'rawDispersion'] as const)
@@ -36,6 +36,10 @@ export function documentCsv(document: Diagnosis): string {
     for (const { p, trials } of misread.kinks ?? []) one('misreads', `kinks of the next ${trials} bonds`, p);
   }
   if (drift) driftLines(drift, one, ranged);
+  for (const { trials: n, ceiling, dispersion } of trials?.points ?? []) {
+    one(`N ${n ?? 'unknown'}`, 'ceiling', ceiling);
+    ranged(`N ${n ?? 'unknown'}`, 'dispersion', dispersion);
+  }
   if (emptyAside) {
     ranged('without empty shots', 'dispersion', emptyAside.dispersion);
     for (const key of ['shots', 'mean', 'ceiling', 'p', 'smallestP', 'verdict'] as const)

@@ -84,10 +84,24 @@ const emptyAside = z.strictObject({
   statement: z.string()
 });
 
+const trials = z.strictObject({
+  points: z.array(
+    z.strictObject({
+      trials: whole.nullable(),
+      ceiling: number,
+      dispersion: interval,
+      standing: z.enum(['over', 'within', 'unsure'])
+    })
+  ),
+  critical: orNull,
+  statement: z.string()
+});
+
 /** Each part is there only where it has something to say. */
 export const nuisancesSchema = z.strictObject({
   misread: misread.optional(),
   drift: drift.optional(),
   pairs: pairs.optional(),
-  emptyAside: emptyAside.optional()
+  emptyAside: emptyAside.optional(),
+  trials: trials.optional()
 });

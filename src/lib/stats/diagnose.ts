@@ -27,6 +27,7 @@ import type { DrawHelper } from './resampling/draw-helper';
 import { fittedTests } from './resampling/fitted-tests';
 import { pacer } from './resampling/pacer';
 import { emptyAside } from './truncation/empty-aside';
+import { trialsReport } from './sensitivity/trials-report';
 import type { CountData, DiagnoseOptions, Diagnosis, OnProgress } from './types';
 import { distribution } from './views/distribution';
 import { lawTable } from './views/law-table';
@@ -117,11 +118,17 @@ export async function diagnose(
     !kept && !misread.applies && flags.some(({ id }) => id === 'dead-shots')
       ? await emptyAside(counts, options, pace.within(0.9, 0.9))
       : null;
+  // A lump hides the variance; other nulls have ceilings of their own.
+  const run =
+    histogram.lump || misread.applies || kept
+      ? undefined
+      : trialsReport(moments, counts.first + counts.shots.length - 1, trials, options.tolerance);
   const nuisances = {
     ...(read && { misread: read }),
     ...(drift && { drift }),
     ...(pairs && { pairs }),
-    ...(aside && { emptyAside: aside })
+    ...(aside && { emptyAside: aside }),
+    ...(run && { trials: run })
   };
   const said = answer(evidence, flags);
   let explanations: Diagnosis['explanations'];

@@ -1,5 +1,6 @@
 import type { DriftPart } from './drift/types';
 import type { Explanations } from './explanations/types';
+import type { TrialsPart } from './sensitivity/types';
 import type { EmptyAside } from './truncation/empty-aside';
 import type { PairsPart } from './pairs/types';
 import type { Geometry, Interval, Level, Unit } from './types';
@@ -163,6 +164,8 @@ export interface Diagnosis {
     pairs?: PairsPart;
     /** Where there are too many empty shots, since engine 0.5. */
     emptyAside?: EmptyAside;
+    /** How the variance stands as N runs, for plain independent trials; since engine 0.5. */
+    trials?: TrialsPart;
   };
   fit: {
     logLikelihood: number;

@@ -12,7 +12,9 @@ import { sheetOf } from '$lib/charts/sheet-of';
 import { sheetToSvg } from '$lib/charts/sheet-to-svg';
 import { tailsPicture } from '$lib/charts/tails-picture';
 import { testsPicture } from '$lib/charts/tests-picture';
+import { trialsPicture } from '$lib/charts/trials-picture';
 import { TESTS } from '$lib/model/labels';
+import type { TrialsPart } from '$lib/stats/sensitivity/types';
 import type { DriftPart } from '$lib/stats/drift/types';
 import type { Explanations } from '$lib/stats/explanations/types';
 import { judgeCumulants } from '$lib/stats/cumulants-only/judge-cumulants';
@@ -36,6 +38,8 @@ const nothing: Explanations = {
 
 const noOrder: DriftPart = { means: [], change: null, split: null, statement: '' };
 
+const noTrials: TrialsPart = { points: [], critical: null, statement: '' };
+
 type Draw = (diagnosis: Diagnosis, size: Size) => Picture;
 const DRAWS: [string, Draw][] = [
   ['counts', distributionPicture],
@@ -52,6 +56,8 @@ const DRAWS: [string, Draw][] = [
   ['tests', (diagnosis, size) => testsPicture(diagnosis, size, TESTS)],
   // Only shot lists have these.
   ['means', ({ nuisances }, size) => driftPicture(nuisances?.drift ?? noOrder, size)],
+  // Counts with a spread have these.
+  ['as N runs', ({ nuisances }, size) => trialsPicture(nuisances?.trials ?? noTrials, size)],
   // Only results that rule independent trials out have these; the others draw an empty list.
   ['explanations', ({ explanations }, size) => explanationsPicture(explanations ?? nothing, size)]
 ];

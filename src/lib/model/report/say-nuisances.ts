@@ -40,7 +40,8 @@ export const sayNuisances = (document: Diagnosis, stated: Stated | null): [strin
         ? 'No row lumps counts.'
         : `The last row holds all counts of ${formatCount(document.data.lump.from)} and more; its likelihood is the sum of the law over them, and the ceiling is that of equal trials lumped in the same way.`
     ],
-    ['N too small', trials(document, stated)]
+    ['N too small', trials(document, stated)],
+    ['As N runs', document.nuisances?.trials?.statement ?? null]
   ]);
 
 /** The rows that have something to tell. */

@@ -73,7 +73,9 @@ const TITLES: Record<string, TermId> = {
   'Odd counts': 'pair',
   'Without empty shots': 'kept',
   'Lumped counts': 'lump',
-  'N too small': 'critical-trials'
+  'N too small': 'critical-trials',
+  'As N runs': 'critical-trials',
+  N: 'trials'
 };
 
 /** Titles that say all there is to say. */

@@ -1,6 +1,9 @@
 import { driftPicture } from '$lib/charts/drift-picture';
 import { batchesTable } from '$lib/charts/drift-table';
 import { driftTitle } from '$lib/charts/drift-title';
+import { trialsPicture } from '$lib/charts/trials-picture';
+import { trialsTitle } from '$lib/charts/trials-title';
+import type { TrialsPart } from '$lib/stats/sensitivity/types';
 import type { DriftPart } from '$lib/stats/drift/types';
 import { NUISANCES_TITLE, sayNuisances } from '$lib/model/report/say-nuisances';
 import type { Summary } from '$lib/model/link/summary';
@@ -15,7 +18,8 @@ export const nuisancesPart = ({ document, provenance }: ReportInput): Part => ({
     {
       blocks: [
         { kind: 'facts', facts: sayNuisances(document, provenance.conditions) },
-        ...driftBlocks(document.nuisances?.drift)
+        ...driftBlocks(document.nuisances?.drift),
+        ...trialsBlocks(document.nuisances?.trials)
       ]
     }
   ]
@@ -26,6 +30,19 @@ export const summaryNuisancesPart = (summary: Summary, { conditions }: Provenanc
   title: NUISANCES_TITLE,
   rows: [{ blocks: [{ kind: 'facts', facts: summaryNuisances(summary, conditions) }] }]
 });
+
+/** Variance over ceiling as N runs. */
+const trialsBlocks = (trials: TrialsPart | undefined): Block[] =>
+  trials
+    ? [
+        {
+          kind: 'figure',
+          what: 'Chart of the variance over its ceiling as N runs',
+          title: trialsTitle(trials),
+          draw: (size) => trialsPicture(trials, size)
+        }
+      ]
+    : [];
 
 /** Means over time, and the batches one by one where they fit on a page. */
 function driftBlocks(drift: DriftPart | undefined): Block[] {

@@ -23,7 +23,8 @@ export function pairsReport(
   const { unit, geometry, trials } = options;
   if (unit === 'pair') return undefined;
   const all = even !== null && even.seen === shots && counts.some(([n]) => n > 0);
-  const logChance = even === null ? null : shots * Math.log(even.expected);
+  // A law that gives no even count has no logarithm to tell.
+  const logChance = even === null || !(even.expected > 0) ? null : shots * Math.log(even.expected);
   const telling = all && logChance !== null && logChance <= bySingles;
   const ring = geometry === 'ring-bonds';
   if (!telling && !ring) return undefined;

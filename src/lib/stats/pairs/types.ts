@@ -9,7 +9,7 @@ export interface OddShots extends OddCounts {
 export interface PairsPart {
   /** Every count is even, too often for single defects, and N can be halved: count pairs. */
   proposed: boolean;
-  /** ln of the chance that the best law of single defects gives only even counts; null where a lump hides them. */
+  /** ln of the chance that the best law of single defects gives only even counts; null where a lump hides them, or it gives none. */
   logChance: number | null;
   /** On a ring of known length: faults of the reading, from the odd counts. */
   odd: OddShots | null;

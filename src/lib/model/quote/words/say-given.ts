@@ -17,6 +17,7 @@ export function sayGiven(quotable: Quotable, provenance: Provenance): Words[] {
       : []),
     ...lump(quotable),
     ...order(quotable),
+    ...cut(quotable),
     ...readOut(quotable)
   ];
 }
@@ -65,6 +66,19 @@ function order({ data }: Quotable): Words[] {
     data.batches === null
       ? [text('The order of the shots was known.')]
       : words`The order of the shots was known, in ${counted(data.batches, 'batch', 'batches')}.`
+  ];
+}
+
+/** A cut changes every law and the ceiling, so it is told with what was given. */
+function cut({ data }: Quotable): Words[] {
+  const { kept } = data;
+  if (!kept) return [];
+  const range =
+    kept.to === null
+      ? words`counts of ${whole(kept.from)} and more`
+      : words`counts from ${whole(kept.from)} to ${whole(kept.to)}`;
+  return [
+    words`Only ${range} were kept, the other shots having been dropped; the best law, the ceiling and the tests are of independent trials so cut, and no certificate is given.`
   ];
 }
 
