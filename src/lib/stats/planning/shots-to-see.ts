@@ -18,9 +18,9 @@ export interface ShotsToSee {
   /** Power with that many shots: more than asked where even the fewest are enough. */
   power: number;
   /**
-   * The plan lies where the formula is rough: under 50 shots, or shots · mean² under 50. On a grid of 1350 plans the
-   * simulated power was up to 18 points off there, and within 5 points elsewhere (one of 5.2, no
-   * more than the simulation itself is off).
+   * The plan lies where the formula is rough: under 50 shots, or shots · mean² under 50. On a grid of 1350 plans for
+   * an excess the simulated power was up to 19 points off there, and within 5 points elsewhere (one of 5.2, no more
+   * than the simulation itself is off).
    */
   rough: boolean;
 }

@@ -3,9 +3,10 @@ import { EXPLANATIONS } from '$lib/model/labels';
 import { inNotation, NOTATIONS } from '$lib/model/quote/notation/notation';
 import { NO_PROVENANCE } from '$lib/model/quote/provenance';
 import { quoteOf } from '$lib/model/quote/quote-of';
-import type { Diagnosis, Interval } from '$lib/stats/types';
+import type { Diagnosis } from '$lib/stats/types';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { quotedDocuments, type QuotedDocument } from '../../../support/quoted-documents';
+import { expectInterval, isRounded, NUMBER, numbersOf, read } from './printed-numbers';
 
 let documents: QuotedDocument[];
 
@@ -17,47 +18,6 @@ const plain = (document: Parameters<typeof quoteOf>[0]) => {
   const { result, methods } = quoteOf(document, NO_PROVENANCE);
   return { result: inNotation(result, 'plain'), methods: inNotation(methods, 'plain') };
 };
-
-const NUMBER = String.raw`\u2212?\d[\d\u202f]*(?:\.\d+)?(?: × 10[⁻⁰¹²³⁴⁵⁶⁷⁸⁹]+)?`;
-
-/** A printed number read back, and the size of its last digit. */
-function read(printed: string): { value: number; unit: number } {
-  const [mantissa, power] = printed.replaceAll('\u202f', '').replace('\u2212', '-').split(' × 10');
-  const exponent = Number([...(power ?? '⁰')].map((c) => '0123456789-'['⁰¹²³⁴⁵⁶⁷⁸⁹⁻'.indexOf(c)]).join(''));
-  return {
-    value: Number(`${mantissa}e${exponent}`),
-    unit: Number(`1e${exponent - (mantissa.split('.')[1]?.length ?? 0)}`)
-  };
-}
-
-/** Whether a printed number is this one rounded; whole numbers that end in zeros may be rounded to those. */
-function isRounded(printed: string, value: number): boolean {
-  const { value: shown, unit } = read(printed);
-  const zeros = /^\u2212?[1-9][\d\u202f]*$/.test(printed)
-    ? (printed.replaceAll('\u202f', '').match(/0+$/)?.[0].length ?? 0)
-    : 0;
-  return Math.abs(shown - value) <= unit * 10 ** zeros * 0.5 * (1 + 1e-9) + Math.abs(value) * 4e-16;
-}
-
-function numbersOf(value: unknown): number[] {
-  if (typeof value === 'number') return [value];
-  if (typeof value !== 'object' || value === null) return [];
-  return Object.values(value).flatMap(numbersOf);
-}
-
-/** `after` is followed by a value and its limits, and they are those of the document. */
-function expectInterval(text: string, after: string, { value, low, high }: Interval): void {
-  const found = new RegExp(
-    `${after}(${NUMBER}) \\((?:95\u202f% interval (${NUMBER}) to (${NUMBER})|no interval)`
-  ).exec(text);
-  expect(found, `${after} in: ${text}`).not.toBeNull();
-  const [, ...printed] = found!;
-  expect(isRounded(printed[0], value!), `${printed[0]} for ${value}`).toBe(true);
-  if (low !== null && high !== null) {
-    expect(isRounded(printed[1], low), `${printed[1]} for ${low}`).toBe(true);
-    expect(isRounded(printed[2], high), `${printed[2]} for ${high}`).toBe(true);
-  } else expect(printed[1]).toBeUndefined();
-}
 
 describe('the words of every fixture', () => {
   it('come in all three answers', () => {
