@@ -1,10 +1,10 @@
-import { gzipSync } from 'node:zlib';
 import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { audit, openAuditPage } from './support/axe';
 import { complaintsOf } from './support/complaints';
 import { openBrowser } from './support/open-browser';
 import { startServer, type RunningServer } from './support/start-server';
+import { watchScripts, watchShifts } from './support/watch-page';
 
 let server: RunningServer;
 let browser: Browser;
@@ -56,18 +56,26 @@ describe('the first page', () => {
 
   it('loads less than 90 kB of JavaScript before anyone does anything', async () => {
     const page = await browser.newPage();
-    const scripts: Promise<[string, number]>[] = [];
-    page.on('response', (response) => {
-      // Counted as sent by a server that compresses. The worker's files come when a histogram is checked.
-      if (/javascript/.test(response.headers()['content-type'] ?? ''))
-        scripts.push(response.body().then((body) => [response.url(), gzipSync(body).length]));
-    });
+    // The worker's files come when a histogram is checked.
+    const scripts = watchScripts(page);
     await page.goto(server.address, { waitUntil: 'networkidle' });
-    const loaded = await Promise.all(scripts);
-    expect(loaded.length).toBeGreaterThan(0);
-    expect(loaded.filter(([url]) => /worker/i.test(url))).toEqual([]);
-    const bytes = loaded.reduce((sum, [, size]) => sum + size, 0);
+    const { files, bytes } = await scripts();
+    expect(files.length).toBeGreaterThan(0);
+    expect(files.filter((url) => /worker/i.test(url))).toEqual([]);
     expect(bytes).toBeLessThan(90_000);
+    await page.close();
+  });
+
+  it.each([390, 1280])('does not move while a histogram is checked, %i px wide', async (width) => {
+    const page = await browser.newPage({ viewport: { width, height: 900 } });
+    const shifts = await watchShifts(page);
+    await page.goto(server.address, { waitUntil: 'networkidle' });
+    await page.locator('#counts').fill('0 120\n1 300\n2 310\n3 170\n4 70\n5 20\n6 5');
+    await page.getByRole('button', { name: 'Check this histogram' }).click();
+    await page.locator('#answer-heading').waitFor();
+    await page.waitForTimeout(500);
+    const { sum, what } = await shifts();
+    expect(sum, what.join('\n')).toBeLessThan(0.1);
     await page.close();
   });
 

@@ -35,7 +35,7 @@ const unfold = (page: Page): Promise<void> =>
 /** Formulas that are wider than their column. */
 const wideFormulas = (page: Page): Promise<(string | null)[]> =>
   page
-    .locator('.formula')
+    .locator('.term-formula')
     .evaluateAll((all) => all.filter((f) => f.scrollWidth > f.clientWidth + 1).map((f) => f.textContent));
 
 describe('the guide', () => {
@@ -138,7 +138,7 @@ describe('the notes of a result', () => {
     });
     await answerOf(page);
     await unfold(page);
-    expect(await page.locator('.formula').count()).toBeGreaterThan(40);
+    expect(await page.locator('.term-formula').count()).toBeGreaterThan(40);
     expect(await wideFormulas(page)).toEqual([]);
     expect(await layoutFaults(page)).toEqual([]);
     expect(complaints).toEqual([]);

@@ -1,3 +1,4 @@
+import { gzipSync } from 'node:zlib';
 import type { Page } from 'playwright-core';
 
 /** Kept on the page by `watchShifts`. */
@@ -36,4 +37,17 @@ export async function watchShifts(page: Page): Promise<() => Promise<{ sum: numb
       const { shifts } = (window as unknown as { watched: Watched }).watched;
       return { sum: shifts.reduce((sum, { value }) => sum + value, 0), what: shifts.map(({ what }) => what) };
     });
+}
+
+/** Bytes of JavaScript that a page asks for from now on, as a server that compresses would send them. */
+export function watchScripts(page: Page): () => Promise<{ files: string[]; bytes: number }> {
+  const scripts: Promise<[string, number]>[] = [];
+  page.on('response', (response) => {
+    if (/javascript/.test(response.headers()['content-type'] ?? ''))
+      scripts.push(response.body().then((body) => [response.url(), gzipSync(body).length]));
+  });
+  return async () => {
+    const loaded = await Promise.all(scripts);
+    return { files: loaded.map(([url]) => url), bytes: loaded.reduce((sum, [, size]) => sum + size, 0) };
+  };
 }

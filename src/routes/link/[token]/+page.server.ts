@@ -1,3 +1,4 @@
+import { quoteOfLink } from '$lib/model/link/quote-of-link';
 import type { RemarkAuthor } from '$lib/server/services/remarks/remark-author';
 import { remarksOf } from '$lib/server/services/remarks/remarks-of';
 import type { RequestEvent } from '@sveltejs/kit';
@@ -12,6 +13,7 @@ export const load: PageServerLoad = (event) => {
   const viewer = person?.id ?? null;
   return {
     view,
+    quote: quoteOfLink(view, event.url.origin + event.url.pathname),
     remarks: link.allowsRemarks
       ? {
           threads: remarksOf(db, { reportId: link.reportId, via: { linkId: link.id }, viewer }),

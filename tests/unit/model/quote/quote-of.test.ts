@@ -1,6 +1,7 @@
 import { withoutCounts } from '$lib/model/link/summary';
 import { EXPLANATIONS } from '$lib/model/labels';
-import { inNotation, NOTATIONS } from '$lib/model/quote/notation/notation';
+import { inNotation } from '$lib/model/quote/notation/notation';
+import { NOTATIONS } from '$lib/model/quote/notation/notations';
 import { NO_PROVENANCE } from '$lib/model/quote/provenance';
 import { quoteOf } from '$lib/model/quote/quote-of';
 import type { Diagnosis } from '$lib/stats/types';

@@ -1,16 +1,8 @@
 import type { Words } from '../span';
+import type { Notation } from './notations';
 import { toLatex } from './to-latex';
 import { toMarkdown } from './to-markdown';
 import { toPlain } from './to-plain';
-
-export const NOTATIONS = ['plain', 'latex', 'markdown'] as const;
-export type Notation = (typeof NOTATIONS)[number];
-
-export const NOTATION_NAMES: Record<Notation, string> = {
-  plain: 'plain text',
-  latex: 'LaTeX',
-  markdown: 'Markdown'
-};
 
 const WRITERS: Record<Notation, (words: Words) => string> = {
   plain: toPlain,

@@ -1,4 +1,7 @@
+import { printedQuote } from '$lib/model/quote/printed-quote';
+import type { ReadDocument } from '$lib/model/read-document';
 import { can } from '$lib/server/access/can';
+import type { SavedReport } from '$lib/server/services/reports/find-report';
 import { putReportAside } from '$lib/server/services/reports/put-report-aside';
 import { readReport } from '$lib/server/services/reports/read-report';
 import { reportsOfDataset } from '$lib/server/services/reports/reports-of-dataset';
@@ -12,7 +15,7 @@ import type { Actions, PageServerLoad } from './$types';
 const gone = (): never => error(404, { message: 'There is no page at this address.', code: 'not-found' });
 
 export const load: PageServerLoad = (event) => {
-  const { actor } = askTeam(event, 'see');
+  const { actor, team } = askTeam(event, 'see');
   const { db } = event.locals;
   const read = readReport(db, actor, event.params.id);
   if (!read.ok) return gone();
@@ -22,12 +25,23 @@ export const load: PageServerLoad = (event) => {
     can({ kind: 'member', ...actor }, action, { createdBy: report.createdBy });
   return {
     report: { ...report, bytes: Buffer.byteLength(text) },
-    document: read.document,
+    document: withQuote(read.document, report, team.name),
     threads: remarksOf(db, { reportId: report.id, via: 'team', actor }),
     others: reportsOfDataset(db, actor, report.datasetId).filter(({ id }) => id !== report.id),
     may: { aside: may('delete'), link: may('link'), remark: may('remark') }
   };
 };
+
+type Frozen = Omit<SavedReport, 'text'>;
+
+/** A document that can be read, with the words to quote of it. */
+function withQuote(document: ReadDocument, report: Frozen, team: string) {
+  if (!document.ok) return document;
+  const { name, device, firmware } = report.conditions;
+  const { number, createdAt: madeAt, sha256 } = report;
+  const from = { name, device, firmware, team, number, madeAt, sha256, url: null };
+  return { ...document, quote: printedQuote(document.diagnosis, from) };
+}
 
 type Event = RequestEvent<{ team: string; id: string }>;
 

@@ -1,0 +1,63 @@
+import { flushSync, hydrate, mount, unmount, type Component } from 'svelte';
+import { asksOfPart } from './asks-of-part';
+
+/** What makes a part live: at once where it is at hand, or loaded. */
+export interface Maker<Props extends Record<string, unknown>> {
+  atHand: () => Component<Props> | null;
+  load: () => Promise<Component<Props>>;
+}
+
+/**
+ * Makes a part of a page live in its place. What the server drew stands until the reader comes within half a window of
+ * it, points at it or focuses it; what was asked of it meanwhile is done then. An empty place is filled at once.
+ *
+ * A part that does not load stays as it was drawn, and is tried again when it is next asked.
+ *
+ * @returns what takes it away again
+ */
+export function waken<Props extends Record<string, unknown>>(
+  place: HTMLElement,
+  { atHand, load }: Maker<Props>,
+  props: Props
+): () => void {
+  const drawn = place.childElementCount > 0;
+  let made: Record<string, unknown> | null = null;
+  let loading = false;
+  let gone = false;
+
+  const asks = asksOfPart(place, start);
+  const near = new IntersectionObserver((seen) => seen.some((one) => one.isIntersecting) && start(), {
+    rootMargin: '50% 0px'
+  });
+
+  function make(Part: Component<Props>): void {
+    if (gone || made) return;
+    near.disconnect();
+    // In an empty place nothing was asked, and this may run while the page around it is being made.
+    if (!drawn) return void (made = mount(Part, { target: place, props }));
+    const open = [...place.querySelectorAll('details')].map((fold) => fold.open);
+    made = hydrate(Part, { target: place, props });
+    flushSync();
+    // What binds a fold begins with it closed: one that the reader opened meanwhile stays open.
+    place.querySelectorAll('details').forEach((fold, i) => open[i] && (fold.open = true));
+    asks.answer();
+  }
+
+  function start(): void {
+    if (loading || made) return;
+    loading = true;
+    load().then(make, () => (loading = false));
+  }
+
+  const known = atHand();
+  if (drawn) near.observe(place);
+  else if (known) make(known);
+  else start();
+
+  return () => {
+    gone = true;
+    near.disconnect();
+    asks.stop();
+    if (made) void unmount(made);
+  };
+}

@@ -1,0 +1,62 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { Browser } from 'playwright-core';
+import { loadavg } from 'node:os';
+import { interactiveTime, type InteractiveTime } from '../e2e/support/interactive-time';
+import { openBrowser } from '../e2e/support/open-browser';
+import { seedLink, seedSharedReport, type SharedReport } from '../e2e/support/shared-report';
+import { signIn } from '../e2e/support/sign-in';
+import { startServer, type RunningServer } from '../e2e/support/start-server';
+
+// Measures and prints; it holds no time, since a busy machine would fail it. `npm run bench:pages`.
+let server: RunningServer;
+let browser: Browser;
+let there: SharedReport;
+let link: string;
+
+beforeAll(async () => {
+  [server, browser] = await Promise.all([startServer(), openBrowser()]);
+  there = await seedSharedReport(server);
+  link = (await seedLink(server, there)).path;
+});
+
+afterAll(async () => {
+  await browser?.close();
+  await server?.stop();
+});
+
+const RUNS = 7;
+const SLOWER = 4;
+
+const median = (values: number[]): number => [...values].sort((a, b) => a - b)[values.length >> 1];
+
+describe('interactive time', () => {
+  it.each(['team', 'link'] as const)('of the report page of the %s', async (who) => {
+    const runs: InteractiveTime[] = [];
+    for (let i = 0; i < RUNS; i++) {
+      const context = await browser.newContext({ viewport: { width: 1280, height: 900 } });
+      if (who === 'team') {
+        const page = await context.newPage();
+        await signIn(page, server.address, there.lead.email, there.lead.password);
+        await page.close();
+      }
+      const path = who === 'team' ? `/team/${there.team.slug}/reports/${there.reportId}` : link;
+      runs.push(await interactiveTime(context, server.address + path, SLOWER));
+      await context.close();
+    }
+    const told = (what: keyof InteractiveTime): string => {
+      const values = runs.map((run) => run[what]);
+      return `${median(values).toFixed(0)} ms (${Math.min(...values).toFixed(0)} to ${Math.max(...values).toFixed(0)})`;
+    };
+    console.log(
+      [
+        `Report page of the ${who}, processor slowed ${SLOWER} times, median of ${RUNS} (least to most):`,
+        `  a chart answers a key  ${told('answers')}`,
+        `  first screen drawn     ${told('drawn')}`,
+        `  blocked until then     ${told('blocking')}`,
+        `  load of this machine   ${loadavg()[0].toFixed(1)}`
+      ].join('\n')
+    );
+    expect(runs).toHaveLength(RUNS);
+    expect(runs.every(({ answers }) => answers > 0)).toBe(true);
+  });
+});
