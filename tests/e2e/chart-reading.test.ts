@@ -43,7 +43,7 @@ describe('a chart', () => {
       ['End', atLast]
     ] as const) {
       await page.keyboard.press(key);
-      await expect.poll(() => said.textContent()).toMatch(words);
+      await expect.poll(() => said.textContent(), { message: key }).toMatch(words);
     }
     await page.close();
   });

@@ -51,6 +51,8 @@ describe('interactive time', () => {
       [
         `Report page of the ${who}, processor slowed ${SLOWER} times, median of ${RUNS} (least to most):`,
         `  a chart answers a key  ${told('answers')}`,
+        `  nothing long to do     ${told('quiet')}`,
+        `  things moved by        ${Math.max(...runs.map(({ shift }) => shift)).toFixed(4)} at most`,
         `  first screen drawn     ${told('drawn')}`,
         `  blocked until then     ${told('blocking')}`,
         `  load of this machine   ${loadavg()[0].toFixed(1)}`

@@ -6,6 +6,10 @@ export interface InteractiveTime {
   answers: number;
   /** Largest thing of the first screen drawn (Largest Contentful Paint). */
   drawn: number;
+  /** End of the last task of more than 50 ms before half a second without one; the first drawing where there is none. */
+  quiet: number;
+  /** How far things moved meanwhile (cumulative layout shift). */
+  shift: number;
   /** What tasks took beyond 50 ms each, from the first drawing until the chart answers (total blocking time). */
   blocking: number;
 }
@@ -14,6 +18,7 @@ interface Noted {
   answers: number;
   drawn: number;
   first: number;
+  shift: number;
   tasks: { start: number; duration: number }[];
 }
 
@@ -32,12 +37,13 @@ export async function interactiveTime(
   await tools.send('Network.setCacheDisabled', { cacheDisabled: true });
   await tools.send('Emulation.setCPUThrottlingRate', { rate: slower });
   await page.addInitScript(() => {
-    const noted: Noted = { answers: 0, drawn: 0, first: 0, tasks: [] };
+    const noted: Noted = { answers: 0, drawn: 0, first: 0, shift: 0, tasks: [] };
     Object.assign(window, { noted });
     const watch = (type: string, note: (entry: PerformanceEntry) => void): void =>
       new PerformanceObserver((list) => list.getEntries().forEach(note)).observe({ type, buffered: true });
     watch('longtask', ({ startTime, duration }) => noted.tasks.push({ start: startTime, duration }));
     watch('largest-contentful-paint', ({ startTime }) => (noted.drawn = startTime));
+    watch('layout-shift', (entry) => (noted.shift += (entry as PerformanceEntry & { value: number }).value));
     watch('paint', ({ name, startTime }) => {
       if (name === 'first-contentful-paint') noted.first = startTime;
     });
@@ -58,12 +64,15 @@ export async function interactiveTime(
   });
   await page.goto(address, { waitUntil: 'load' });
   await page.waitForFunction(() => (window as unknown as { noted: Noted }).noted.answers > 0);
-  // The last long task is told a moment after it ended.
-  await page.waitForTimeout(300);
+  // Half a second of quiet, slowed as everything here is, and the last long task is told a moment after it ended.
+  await page.waitForTimeout(1500);
   const noted = await page.evaluate(() => (window as unknown as { noted: Noted }).noted);
   await page.close();
   const blocking = noted.tasks
     .filter(({ start }) => start >= noted.first && start <= noted.answers)
     .reduce((sum, { duration }) => sum + Math.max(0, duration - 50), 0);
-  return { answers: noted.answers, drawn: noted.drawn, blocking };
+  let quiet = noted.first;
+  for (const { start, duration } of noted.tasks)
+    if (start - quiet < 500) quiet = Math.max(quiet, start + duration);
+  return { answers: noted.answers, drawn: noted.drawn, quiet, shift: noted.shift, blocking };
 }

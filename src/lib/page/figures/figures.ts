@@ -49,15 +49,15 @@ const kind =
     ...{ id, title: title(of), draw: (size) => picture(of, size), table: table(of) }
   });
 
-/** The figures of a report by kind; null where the document has nothing to draw. */
-export const FIGURES: Record<FigureKind, (of: Diagnosis) => Figure | null> = {
+/** The figures of a report by kind; undefined where the document has nothing to draw. */
+export const FIGURES: Record<FigureKind, (of: Diagnosis) => Figure | undefined> = {
   distribution: kind('distribution', distributionTitle, distributionPicture, distributionTable),
   rate: kind('rate-function', rateTitle, ratePicture, rateTable),
   tails: kind('tails-and-bounds', tailsTitle, tailsPicture, tailsTable),
   ceiling: kind('ceiling', ceilingTitle, ceilingPicture, ceilingTable),
   region: (of) => {
     const place = cumulantsPlace(of);
-    if ('reason' in place) return null;
+    if ('reason' in place) return undefined;
     const draw = (size: Size): Picture => regionPicture(place, size);
     return { id: 'cumulants-region', title: cumulantsTitle(place), draw, table: regionTable(place) };
   },
@@ -74,11 +74,15 @@ export const FIGURES: Record<FigureKind, (of: Diagnosis) => Figure | null> = {
       draw: (size) => explanationsPicture(of, size),
       table: explanationsTable(of)
     },
-  drift: ({ nuisances: { drift: of } }) =>
-    of && {
-      id: 'drift',
-      title: driftTitle(of),
-      draw: (size) => driftPicture(of, size),
-      table: driftTable(of)
-    }
+  drift: ({ nuisances }) => {
+    const of = nuisances?.drift;
+    return (
+      of && {
+        id: 'drift',
+        title: driftTitle(of),
+        draw: (size) => driftPicture(of, size),
+        table: driftTable(of)
+      }
+    );
+  }
 };

@@ -10,6 +10,9 @@ import { distributionCsv } from '$lib/model/exports/distribution-csv';
 import { tailsCsv } from '$lib/model/exports/tails-csv';
 import { TESTS } from '$lib/model/labels';
 import { plainText } from '$lib/model/plain-text/plain-text';
+import { documentSha256 } from '$lib/model/quote/document-sha256';
+import { printedQuote } from '$lib/model/quote/printed-quote';
+import { NO_PROVENANCE } from '$lib/model/quote/provenance';
 import { sayNuisances } from '$lib/model/report/say-nuisances';
 import Parts from '$lib/page/result/Parts.svelte';
 import { reportPdf } from '$lib/pdf/report-pdf';
@@ -55,7 +58,8 @@ describe.each(CASES)('numbers of %s, %s', (file, verdict, options) => {
     const made = await diagnose(read.datasets[0].data, { ...defaultOptions, resamples: 499, ...options });
     d = JSON.parse(documentText(made)) as Diagnosis;
     const provenance = createRawSnippet(() => ({ render: () => '<p></p>' }));
-    html = render(Parts, { props: { diagnosis: d, name: null, provenance } }).body;
+    const quote = printedQuote(d, { ...NO_PROVENANCE, sha256: documentSha256(d) });
+    html = render(Parts, { props: { diagnosis: d, name: null, quote, quoteAddress: '', provenance } }).body;
     words = textOf(html);
     const bytes = await reportPdf(
       { document: d, documentSha256: 'ab'.repeat(32), provenance: BLIND },
