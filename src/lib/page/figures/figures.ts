@@ -25,6 +25,9 @@ import { tailsTitle } from '$lib/charts/tails-title';
 import { testsPicture } from '$lib/charts/tests-picture';
 import { testsTable } from '$lib/charts/tests-table';
 import { testsTitle } from '$lib/charts/tests-title';
+import { trialsPicture } from '$lib/charts/trials-picture';
+import { trialsTable } from '$lib/charts/trials-table';
+import { trialsTitle } from '$lib/charts/trials-title';
 import { TESTS } from '$lib/model/labels';
 import type { Diagnosis } from '$lib/stats/types';
 import type { FigureKind } from './figure-kind';
@@ -82,6 +85,17 @@ export const FIGURES: Record<FigureKind, (of: Diagnosis) => Figure | undefined> 
         title: driftTitle(of),
         draw: (size) => driftPicture(of, size),
         table: driftTable(of)
+      }
+    );
+  },
+  trials: ({ nuisances }) => {
+    const of = nuisances?.trials;
+    return (
+      of && {
+        id: 'as-n-runs',
+        title: trialsTitle(of),
+        draw: (size) => trialsPicture(of, size),
+        table: trialsTable(of)
       }
     );
   }
