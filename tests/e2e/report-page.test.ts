@@ -54,7 +54,7 @@ describe.each(['team', 'link'] as const)('the report page of the %s', (who) => {
     await page.goto(server.address + paths[who], { waitUntil: 'networkidle' });
     // Charts are made live as one comes near: nothing may grow then, in view or below it.
     const figures = await page.locator('figure').all();
-    expect(figures).toHaveLength(6);
+    expect(figures).toHaveLength(7);
     for (const figure of figures) {
       await figure.scrollIntoViewIfNeeded();
       await figure.locator('svg.drawn').waitFor();
@@ -106,7 +106,7 @@ describe.each(['team', 'link'] as const)('the report page of the %s', (who) => {
     expect(new Set(navigations).size).toBe(navigations.length);
 
     const figures = spoken.filter(({ role }) => role === 'figure').map(({ name }) => name);
-    expect(figures).toHaveLength(6);
+    expect(figures).toHaveLength(7);
     for (const name of figures) {
       expect(name.split(' ').length).toBeGreaterThan(4);
       expect(spoken.filter((one) => one.role === 'application' && one.name === name)).toHaveLength(1);

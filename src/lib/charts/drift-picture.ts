@@ -74,7 +74,7 @@ export function driftPicture({ means, change }: DriftPart, { width, text }: Size
   return {
     width,
     height,
-    build: 'field',
+    build: 'low-field',
     marks,
     legend: [
       { role: 'observed', label: 'mean of a stretch of shots' },

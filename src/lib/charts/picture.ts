@@ -67,7 +67,7 @@ export interface LegendEntry {
 }
 
 /** How the height of a picture follows from its width and letters: the page keeps that room free (Drawing.svelte). */
-export type Build = 'field' | 'field-and-strip' | 'lines';
+export type Build = 'field' | 'low-field' | 'field-and-strip' | 'lines';
 
 /** A chart as plain geometry: page, SVG, PNG and PDF draw the same marks. */
 export interface Picture {

@@ -113,7 +113,7 @@ export function trialsPicture({ points, critical }: TrialsPart, { width, text }:
   return {
     width,
     height,
-    build: 'field',
+    build: 'low-field',
     marks,
     legend: [
       ...standings.map((standing) => ({ role: LOOK[standing].point, label: LOOK[standing].label })),
