@@ -6,6 +6,8 @@ export default {
   preprocess: vitePreprocess(),
   kit: {
     adapter: adapter(),
+    // A report has fourteen small sheets, and a browser asks for six things at a time: they come with the page instead.
+    inlineStyleThreshold: 6000,
     typescript: {
       // Kit looks at .js, .ts and .svelte below src and tests; these are ours too.
       config: (config) => {

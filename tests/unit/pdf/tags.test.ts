@@ -62,7 +62,7 @@ describe('tags', () => {
 
   it('describe every chart and formula', () => {
     const charts = elements('Figure').map((object) => textOf(object, 'Alt'));
-    expect(charts).toHaveLength(6);
+    expect(charts).toHaveLength(7);
     for (const alt of charts) expect(alt).toMatch(/^Chart of .+\. .+\. Marks: .+\.$/);
     expect(charts[0]).toContain('The best independent-trial law agrees with');
     const formulas = elements('Formula').map((object) => textOf(object, 'Alt'));
