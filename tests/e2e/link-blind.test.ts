@@ -59,7 +59,12 @@ describe('a blind link', () => {
       expect(given[2]).toContain('severalty-report');
       for (const text of given)
         for (const secret of secretsOf(there)) expect(text.includes(secret), secret).toBe(false);
-      if (shows === 'report') for (const text of given) expect(text).not.toMatch(/\b(409|611|523|347|163)\b/);
+      const counts = /\b(409|611|523|347|163)\b/;
+      // The numbers of references in the page's data grow with it: only what they stand for can be a count.
+      given[2] = valuesOf(given[2]);
+      expect(given[2]).toContain('severalty-report');
+      if (shows === 'report') for (const text of given) expect(text).not.toMatch(counts);
+      else expect(given[2]).toMatch(counts);
       expect(complaints).toEqual([]);
       expect(server.output()).not.toContain(token);
       await page.close();
@@ -162,3 +167,9 @@ describe('a blind link', () => {
     }
   });
 });
+
+/** Every text and number that a page's data holds: in Kit's flat form, what is no list and no object. */
+function valuesOf(data: string): string {
+  const { nodes } = JSON.parse(data) as { nodes: ({ data?: unknown[] } | null)[] };
+  return JSON.stringify(nodes.flatMap((node) => node?.data ?? []).filter((one) => typeof one !== 'object'));
+}
