@@ -16,6 +16,7 @@ import { adjust } from './multiple/adjust';
 import { independentNull } from './nulls/independent-null';
 import { keptCounts } from './nulls/kept-counts';
 import { keptNull } from './nulls/kept-null';
+import { meanFixesVariance } from './nulls/mean-fixes-variance';
 import { misreadApplies } from './nulls/misread-applies';
 import { misreadNull } from './nulls/misread-null';
 import { misreadReport } from './nulls/misread-report';
@@ -72,9 +73,10 @@ export async function diagnose(
   const moments = momentReport(histogram, trials, equal, drawing, tested.ceiling);
   const spread = moments.variance.value !== null && moments.variance.value > 0;
   await pace.step('resampling', 0.08);
-  // One trial has the variance of its ceiling whatever the data: only rounding and S/(S − 1) would be tested.
+  // The variance is then that of its ceiling whatever the data: only rounding and S/(S − 1) would be tested.
+  const fixed = meanFixesVariance(trials, kept);
   const ceiling =
-    spread && trials !== 1
+    spread && !fixed
       ? await varianceTest(
           counts,
           tested.mostDispersed.window,
@@ -110,7 +112,8 @@ export async function diagnose(
     law,
     neighbours: order.neighbours,
     misread,
-    drift
+    drift,
+    fixed
   });
   const pairs = pairsReport(given, counts.total, options, evidence.even);
   const flags = raiseFlags(evidence);
@@ -180,7 +183,9 @@ export async function diagnose(
             {
               id: 'ceiling' as const,
               reason: spread
-                ? 'One trial cannot exceed its own ceiling.'
+                ? trials === 1
+                  ? 'One trial cannot exceed its own ceiling.'
+                  : 'With two counts kept the mean fixes the variance: no excess could show.'
                 : 'The counts have no spread to compare with the ceiling.'
             }
           ]),

@@ -27,8 +27,9 @@ const blind = 0.5;
 export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
   const { options, moments, shots, trials } = evidence;
   const mean = moments.mean.value!;
-  // One trial cannot exceed its own ceiling with any number of shots, and counts without spread have none to compare.
-  const testable = trials !== 1 && moments.variance.value !== null && moments.variance.value > 0;
+  // Two counts cannot exceed their own ceiling with any number of shots, and counts without spread have none to compare.
+  const testable =
+    !(evidence.fixed ?? trials === 1) && moments.variance.value !== null && moments.variance.value > 0;
   const seen = testable ? smallestExcess(mean, trials, shots) : null;
   // N trials can exceed the ceiling N-fold at most, and an eye for twice the ceiling is none.
   const excess = seen !== null && seen <= Math.min(2, (trials ?? Infinity) - 1) ? seen : null;

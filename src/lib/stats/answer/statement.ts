@@ -20,7 +20,9 @@ export function statement(
     return (
       `These ${shots} are compatible with independent trials: with 95\u202f% confidence their variance is below ${formatNumber(1 + evidence.options.tolerance, 3)} times the ceiling${evidence.misread?.applies ? `, with ${formatPercent(evidence.misread.rate)} of the sites misread` : ''}.` +
       (regular
-        ? ' They are more regular than equal trials, which repulsion between defects would also give.'
+        ? evidence.trials === null
+          ? ' They vary less than rare events of this mean would: a limited number of sites gives that by itself, and repulsion between defects would too.'
+          : ' They are more regular than equal trials, which repulsion between defects would also give.'
         : '')
     );
   }
@@ -68,7 +70,10 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
 }
 
 /** Whether the excess is still there within batches, where there are any. */
-function driftAlone({ drift }: Evidence): string {
+function driftAlone({ drift, tests, options }: Evidence): string {
+  const shown = tests.some(({ id, p }) => id === 'ceiling' && p <= options.alpha);
+  if (drift?.split?.verdict === 'compatible' && !shown)
+    return ' But the rate changed while the shots were taken: within batches the counts are compatible with independent trials.';
   if (drift?.split?.verdict === 'compatible')
     return ' But the rate changed while the shots were taken: within batches the counts are compatible with independent trials, and the excess lies between batches.';
   if (drift?.split?.verdict === 'excess')

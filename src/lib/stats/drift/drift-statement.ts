@@ -8,7 +8,7 @@ import type { BatchSplit } from './types';
  * @param excessShown whether the variance of all shots together breaks the ceiling
  */
 export function driftStatement(split: BatchSplit, excessShown: boolean): string {
-  const { dispersion, pTogether, smallestP, verdict } = split;
+  const { dispersion, p, pTogether, smallestP, tested, verdict, worst } = split;
   if (dispersion.value === null || pTogether === null)
     return 'Within batches there are too few defects to test them.';
   const measured = `Tested batch by batch and pooled, the variance is ${sayInterval(dispersion, 3)} times the ceiling:`;
@@ -18,6 +18,15 @@ export function driftStatement(split: BatchSplit, excessShown: boolean): string 
       : `${measured} within batches too the counts keep the ceiling.`;
   if (verdict === 'excess') {
     const often = sayHowOften(pTogether, smallestP);
+    // One batch may carry it alone, and then the pooled variance beside it is no excess.
+    if (
+      worst !== null &&
+      worst.p !== null &&
+      (p === null || tested * worst.p < p / 10) &&
+      dispersion.low !== null &&
+      dispersion.low <= 1
+    )
+      return `${measured} that is no excess, but batch ${worst.batch} of ${split.batches} has one by itself. One as large in any of them ${often} if trials were independent.`;
     return excessShown
       ? `${measured} the excess survives within batches. One as large ${often} if only the rate differed from batch to batch.`
       : `${measured} within batches there is an excess, which all shots together do not show. One as large ${often} if trials were independent.`;

@@ -7,6 +7,8 @@ export interface Evidence {
   options: DiagnoseOptions;
   shots: number;
   trials: number | null;
+  /** Two counts only: their mean says what their variance is (meanFixesVariance). */
+  fixed?: boolean;
   /** With misreads allowed for, ceiling and dispersion are those of kinks as read. */
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>;
   /** Whether every test allows for misread sites; left out, none was stated. */

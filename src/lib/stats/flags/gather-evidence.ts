@@ -19,6 +19,7 @@ export interface Gathered {
   neighbours: Evidence['neighbours'];
   misread: MisreadUse;
   drift: DriftPart | undefined;
+  fixed: boolean;
 }
 
 /** What flags and the answer are decided from, out of the parts of a diagnosis. */
@@ -33,7 +34,8 @@ export function evidenceOf({
   law,
   neighbours,
   misread,
-  drift
+  drift,
+  fixed
 }: Gathered): Evidence {
   return {
     options,
@@ -44,6 +46,7 @@ export function evidenceOf({
     certificate,
     neighbours,
     misread,
+    fixed,
     ...(drift && { drift }),
     lowTailOfTheRest: fitted.lowTailOfTheRest,
     empty: { seen: counts.first === 0 ? (counts.shots[0] ?? 0) : 0, expected: fitted.expectedEmpty },

@@ -1,6 +1,7 @@
 import { certificate } from '../bounds/certificate';
 import { bestLaw } from '../fit/best-law';
 import type { FitData } from '../fit/fit-data';
+import { sampleMoments } from '../fit/sample-moments';
 import { toLaw } from '../fit/trial-levels';
 import { fitReport } from '../fit-report/fit-report';
 import { floorLaw } from '../floor/floor-law';
@@ -40,7 +41,8 @@ export async function independentNull(
       shots: counts.total,
       trials
     }),
-    bounds: meanBounds(lawMoments(law).mean, trials),
+    // The law's mean is that of the counts but for the rounding of the fit, up to 3e-5 of a far bound.
+    bounds: meanBounds(counts.lump ? lawMoments(law).mean : sampleMoments(counts).mean, trials),
     report: (fitted) =>
       fitReport({ counts, best, law, floor, fitted, supplied: options.supplied, alpha: options.alpha })
   };

@@ -73,7 +73,8 @@ export async function emptyAside(
         : 'undecided';
   const measured = `With the empty shots set aside and the rest tested as counts of 1 and more, the variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials so cut:`;
   const end = {
-    compatible: 'the rest keeps it, so the empty shots are all that stands against independent trials there.',
+    compatible:
+      'the rest keeps it, so their variance does not speak against independent trials; their shape was not tested by itself.',
     excess: `the excess is there without them too. One as large ${sayHowOften(test.p, test.smallestP)} under independent trials so cut.`,
     undecided: 'the rest neither breaks it nor excludes an excess that matters.'
   };
