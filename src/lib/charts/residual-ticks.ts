@@ -11,7 +11,7 @@ import { tickTexts } from './tick-texts';
  */
 export function residualTicks(far: number): Tick[] {
   const power = 10 ** Math.floor(Math.log10(Math.max(1, far)) + 1e-12);
-  const step = far <= 4 ? 1 : power * ([5, 2, 1].find((times) => times * power <= 0.95 * far) ?? 0.5);
+  const step = far <= 3 ? 1 : power * ([5, 2, 1].find((times) => times * power <= 0.95 * far) ?? 0.5);
   if (step < 10_000) {
     const texts = tickTexts([-step, 0, step]);
     return [-step, 0, step].map((at, i) => ({ at, text: texts[i] }));

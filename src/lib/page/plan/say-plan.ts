@@ -36,11 +36,16 @@ export function sayPlan(
 const name = (kind: PlanRequest['kind']): string =>
   `${kind === 'excess' ? 'an' : 'a'} ${EFFECTS[kind].short}`;
 
+/** A probability, or that it is too small to be told apart from none. */
+export const sayOdd = (p: number): string => (p >= 1e-307 ? formatNumber(p, 4) : 'under 10⁻³⁰⁷');
+
 /** The odds of a lucky shot, plain first. */
 export function sayOdds(most: number, { lucky, fitted }: Odds): string {
   const few = most === 0 ? 'no defect' : `at most ${formatCount(most)} ${most === 1 ? 'defect' : 'defects'}`;
   const law = fitted ? 'the best independent-trial law of these counts' : 'equal trials of this mean';
   if (lucky.shotsUntil === null) return `Under ${law} a shot with ${few} does not come.`;
+  if (lucky.shotsUntil === Infinity)
+    return `A shot with ${few} comes less than once in 10³⁰⁷ shots, under ${law}.`;
   if (lucky.exact > 0.5) return `Under ${law} most shots have ${few}: ${inHundred(lucky.exact)}.`;
   return `A shot with ${few} comes once in ${formatNumber(lucky.shotsUntil, 3)} shots, under ${law}.`;
 }

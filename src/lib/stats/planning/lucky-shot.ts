@@ -4,13 +4,16 @@ import { lawWindow } from '../laws/law-window';
 import { clopperPearson } from '../numerics/clopper-pearson';
 import type { Histogram, Law } from '../types';
 
+/** Smaller probabilities lose their digits, and their inverse its place. */
+const least = 1e-307;
+
 /** Odds of a shot with few defects. */
 export interface LuckyShot {
   /** P(X ≤ most) under the law. */
   exact: number;
   /** Chernoff's bound on it, exp(−rate); 1 from the mean up. */
   chernoff: number;
-  /** Shots until the first one, on average, 1/P; null when the law forbids it. */
+  /** Shots until the first one, on average, 1/P; Infinity from 1e307 on, null when the law forbids it. */
   shotsUntil: number | null;
   /** Share of the shots seen with at most as many, with its exact 95 % interval; null when a lump hides it
    *  or no histogram is given. */
@@ -32,11 +35,11 @@ export function luckyShot(law: Law, histogram: Histogram | null, most: number): 
   for (let k = 0; k < values.length && first + k <= most; k++) exact += values[k] / scale;
   exact = Math.min(1, exact);
   const { mean } = lawMoments(law);
-  const chernoff = most >= mean ? 1 : Math.exp(-lawRate(law, most));
+  const rate = most >= mean ? 0 : lawRate(law, most);
   return {
     exact,
-    chernoff,
-    shotsUntil: exact > 0 ? 1 / exact : null,
+    chernoff: Math.exp(-rate),
+    shotsUntil: exact >= least ? 1 / exact : rate < Infinity ? Infinity : null,
     observed: histogram && shareSeen(histogram, most)
   };
 }
