@@ -46,7 +46,7 @@ describe('words to quote', () => {
     await page.getByRole('radio', { name: 'plain text' }).focus();
     await page.keyboard.press('ArrowRight');
     // What was said was said of the other notation.
-    expect(await methods.getByRole('status').textContent()).toBe('');
+    await expect.poll(() => methods.getByRole('status').textContent()).toBe('');
     expect(await wordsOf(page, 'Result')).toContain('$26\\,306$ shots of $N = 12$ trials');
     await block(page, 'Result').getByRole('button', { name: 'Copy the result in LaTeX' }).press('Space');
     await expect.poll(copied).toBe(await wordsOf(page, 'Result'));
