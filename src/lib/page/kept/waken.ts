@@ -7,20 +7,28 @@ export interface Maker<Props extends Record<string, unknown>> {
   load: () => Promise<Component<Props>>;
 }
 
+/** A part that will be live, and can be made so before the reader comes near. */
+export interface Waking {
+  start: () => void;
+  /** Takes it away again. */
+  stop: () => void;
+}
+
 /**
  * Makes a part of a page live in its place. What the server drew stands until the reader comes within half a window of
  * it, points at it or focuses it; what was asked of it meanwhile is done then. An empty place is filled at once.
  *
  * A part that does not load stays as it was drawn, and is tried again when it is next asked.
  *
- * @returns what takes it away again
+ * @param context what components around the part have set, for those in it
  */
 export function waken<Props extends Record<string, unknown>>(
   place: HTMLElement,
   { atHand, load }: Maker<Props>,
-  props: Props
-): () => void {
-  const drawn = place.childElementCount > 0;
+  props: Props,
+  context?: Map<unknown, unknown>
+): Waking {
+  const drawn = place.firstChild !== null;
   let made: Record<string, unknown> | null = null;
   let loading = false;
   let gone = false;
@@ -34,9 +42,9 @@ export function waken<Props extends Record<string, unknown>>(
     if (gone || made) return;
     near.disconnect();
     // In an empty place nothing was asked, and this may run while the page around it is being made.
-    if (!drawn) return void (made = mount(Part, { target: place, props }));
+    if (!drawn) return void (made = mount(Part, { target: place, props, context }));
     const open = [...place.querySelectorAll('details')].map((fold) => fold.open);
-    made = hydrate(Part, { target: place, props });
+    made = hydrate(Part, { target: place, props, context });
     flushSync();
     // What binds a fold begins with it closed: one that the reader opened meanwhile stays open.
     place.querySelectorAll('details').forEach((fold, i) => open[i] && (fold.open = true));
@@ -54,10 +62,13 @@ export function waken<Props extends Record<string, unknown>>(
   else if (known) make(known);
   else start();
 
-  return () => {
-    gone = true;
-    near.disconnect();
-    asks.stop();
-    if (made) void unmount(made);
+  return {
+    start,
+    stop: () => {
+      gone = true;
+      near.disconnect();
+      asks.stop();
+      if (made) void unmount(made);
+    }
   };
 }

@@ -22,10 +22,18 @@ export function openTerm(id: TermId, from: HTMLElement): boolean {
 }
 
 /** Closes a note and gives the focus back to what opened it, or to its own name. */
-export function closeTerm(fold: HTMLDetailsElement): void {
+function closeTerm(fold: HTMLDetailsElement): void {
   fold.open = false;
   const from = openers.get(fold);
   openers.delete(fold);
   const back = from?.isConnected ? from : fold.querySelector('summary');
   back?.focus();
+}
+
+/** For Escape pressed on the name of an open note of Terms. */
+export function closeTermOnEscape(event: KeyboardEvent): void {
+  const fold = (event.target as Element).closest('.terms-place summary')?.closest('details');
+  if (event.key !== 'Escape' || !fold?.open) return;
+  event.stopPropagation();
+  closeTerm(fold);
 }
