@@ -2,11 +2,12 @@ import { sveltekit } from '@sveltejs/kit/vite';
 import tailwindcss from '@tailwindcss/vite';
 import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
+import { fewerFiles } from './vite.chunks.config.ts';
 import { devIssuer } from './vite.issuer.config.ts';
 import { jobWorker } from './vite.worker.config.ts';
 
 export default defineConfig({
-  plugins: [tailwindcss(), jobWorker(), devIssuer(), sveltekit()],
+  plugins: [tailwindcss(), jobWorker(), devIssuer(), sveltekit(), fewerFiles()],
   resolve: {
     alias: {
       'sveltekit-superforms/adapters': fileURLToPath(
