@@ -75,9 +75,9 @@ describe('words to quote', () => {
     await page.goto(server.address + path, { waitUntil: 'networkidle' });
     const citation = block(page, 'Citation, for BibTeX');
     await citation.getByRole('button', { name: 'Copy the citation' }).click();
-    expect(await citation.getByRole('status').textContent()).toMatch(
-      /would not let it be copied: it is selected/
-    );
+    await expect
+      .poll(() => citation.getByRole('status').textContent())
+      .toMatch(/would not let it be copied: it is selected/);
     expect(await page.evaluate(() => String(getSelection()).trim())).toBe(
       await wordsOf(page, 'Citation, for BibTeX')
     );

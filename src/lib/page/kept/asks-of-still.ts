@@ -1,5 +1,6 @@
 import type { TermId } from '$lib/model/terms/terms';
 import { closeTermOnEscape, openTerm } from '../terms/open-term';
+import { unfoldNotes } from '../terms/unfold-notes';
 
 /**
  * Answers what a page without components of its own is asked: words that open their notes, Escape that closes them, and
@@ -22,5 +23,10 @@ export function asksOfStill(place: HTMLElement): () => void {
     { signal }
   );
   place.addEventListener('keydown', closeTermOnEscape, { signal });
+  // Of a fold that was just opened; the event does not rise.
+  place.addEventListener('toggle', ({ target }) => unfoldNotes((target as Element).parentElement!), {
+    signal,
+    capture: true
+  });
   return () => stopping.abort();
 }

@@ -1,10 +1,11 @@
 import type { TermId } from '$lib/model/terms/terms';
+import { unfoldNotes } from './unfold-notes';
 
 /** Where the focus goes back to when a note that was opened from elsewhere is closed. */
 const openers = new WeakMap<HTMLDetailsElement, HTMLElement>();
 
 const foldOf = (id: TermId): HTMLDetailsElement | null =>
-  document.getElementById(`term-${id}`)?.closest('details') ?? null;
+  document.querySelector(`details[data-note="${id}"]`);
 
 /**
  * Opens the note of a term on this page and puts the focus on its name.
@@ -13,6 +14,7 @@ const foldOf = (id: TermId): HTMLDetailsElement | null =>
 export function openTerm(id: TermId, from: HTMLElement): boolean {
   const fold = foldOf(id);
   if (!fold) return false;
+  unfoldNotes(fold.parentElement!);
   fold.open = true;
   openers.set(fold, from);
   const name = fold.querySelector('summary');
