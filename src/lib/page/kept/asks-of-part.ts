@@ -1,8 +1,8 @@
 const WALKS = /^(Arrow|Page|Home$|End$)/;
 
 /**
- * Keeps what is asked of a part before it is live: keys that walk a chart, touches, and buttons. The rest the browser
- * does by itself. The first sign of being wanted calls `wanted`; `answer` repeats the asks once the part is live.
+ * Keeps what is asked of a part before it is live: keys that walk a chart, touches, buttons and choices. The rest the
+ * browser does by itself. The first sign of being wanted calls `wanted`; `answer` repeats the asks once the part is live.
  */
 export function asksOfPart(place: HTMLElement, wanted: () => void): { answer: () => void; stop: () => void } {
   const asked: (() => void)[] = [];
@@ -41,6 +41,21 @@ export function asksOfPart(place: HTMLElement, wanted: () => void): { answer: ()
       wanted();
       const button = (event.target as Element).closest('button');
       if (button) asked.push(() => button.click());
+    },
+    { signal }
+  );
+
+  place.addEventListener(
+    'change',
+    (event) => {
+      wanted();
+      const on = event.target;
+      if (!(on instanceof HTMLInputElement) || !['radio', 'checkbox'].includes(on.type)) return;
+      const { checked } = on;
+      asked.push(() => {
+        on.checked = checked;
+        on.dispatchEvent(new Event('change', { bubbles: true }));
+      });
     },
     { signal }
   );
