@@ -9,7 +9,12 @@ const folder = fileURLToPath(new URL('./src/cli/', import.meta.url));
  * compiled (the database driver, argon2) stays outside, so a command starts without reading node_modules.
  */
 export default defineConfig({
-  resolve: { alias: { $lib: fileURLToPath(new URL('./src/lib', import.meta.url)) } },
+  resolve: {
+    alias: {
+      $lib: fileURLToPath(new URL('./src/lib', import.meta.url)),
+      'brotli/decompress.js': fileURLToPath(new URL('./src/lib/pdf/type/no-woff2.ts', import.meta.url))
+    }
+  },
   build: {
     ssr: true,
     outDir: 'build-cli',

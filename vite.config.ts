@@ -12,7 +12,8 @@ export default defineConfig({
     alias: {
       'sveltekit-superforms/adapters': fileURLToPath(
         new URL('./src/lib/model/superforms-adapters.ts', import.meta.url)
-      )
+      ),
+      'brotli/decompress.js': fileURLToPath(new URL('./src/lib/pdf/type/no-woff2.ts', import.meta.url))
     }
   },
   worker: { format: 'es' },

@@ -42,18 +42,18 @@ export function breakLines(spans: Span[], width: number, pen: Pen): Line[] {
       lines.push(line);
       line = { pieces: [], width: 0 };
     }
-    append(line, word, pen);
+    append(line, word);
   }
   lines.push(line);
   return lines;
 }
 
-function append(line: Line, word: Word, pen: Pen): void {
+function append(line: Line, word: Word): void {
   const last = line.pieces.at(-1);
   const space = last ? word.space : 0;
   if (last && last.style === word.style) {
     last.text += `${space > 0 ? ' ' : ''}${word.text}`;
-    line.width = last.x + pen.width(last.text, last.style);
+    line.width += space + word.width;
   } else {
     // The space between two styles goes with the earlier one, so that copied text keeps it.
     if (last && space > 0) last.text += ' ';

@@ -1,13 +1,16 @@
 import type { HasGlyph } from './glyphs';
 import { stretchesOf } from './glyphs';
 import type { FontName } from './fonts';
+import { layoutByPairs, type LaysWords } from './layout-by-pairs';
 import { colourOf, type Style } from './styles';
 import { visualOrder } from './visual-order';
 
 /** What pdfkit keeps from its types: the font in hand and its character map. */
 interface FontInHand {
-  _font: { font: { hasGlyphForCodePoint(codePoint: number): boolean } };
+  _font: LaysWords & { font: { hasGlyphForCodePoint(codePoint: number): boolean } };
 }
+
+const FACES: FontName[] = ['text', 'bold', 'italic', 'number'];
 
 /** Sets text with pdfkit: finds a font for every sign, measures, and places on a line. */
 export class Pen {
@@ -21,6 +24,8 @@ export class Pen {
   /** Makes a font known. */
   addFont(name: FontName, file: Uint8Array): void {
     this.doc.registerFont(name, file);
+    if (FACES.includes(name))
+      layoutByPairs((this.doc.font(name) as unknown as FontInHand)._font, name !== 'number');
     this.fonts.add(name);
   }
 
