@@ -44,7 +44,11 @@ function readCounting(fields: PlanFields, problems: PlanProblems): { mean: numbe
 export function readPlan(fields: PlanFields): Read<PlanRequest> {
   const problems: PlanProblems = {};
   const kind = fields.find;
-  if (!isKind(kind)) return { ok: false, problems: { find: 'Choose what to find.' } };
+  if (!isKind(kind))
+    return {
+      ok: false,
+      problems: { find: `There is no effect called “${kind}” here. Choose what to find.` }
+    };
   const { mean, trials } = readCounting(fields, problems);
   const chain = kind === 'neighbours' || kind === 'misread';
   if (!problems.trials) {

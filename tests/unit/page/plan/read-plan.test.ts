@@ -22,6 +22,7 @@ describe('readPlan', () => {
   });
 
   it.each([
+    [{ find: 'zzz' }, 'find', /no effect called “zzz”/],
     [{ mean: '50' }, 'mean', /below N = 50/],
     [{ mean: '0' }, 'mean', /above 0/],
     [{ mean: '' }, 'mean', /mean count/],
