@@ -9,6 +9,7 @@ The experiment
   --unit defect | pair     pair: counts are even, and pairs are tested
   --geometry sites | open-bonds | ring-bonds
   --misread P              probability that one site is misread
+  --misread-uncertainty U  standard uncertainty of P, from its calibration
   --kept FROM-TO           only counts from FROM to TO were kept, the rest dropped;
                            1- where only empty shots were
   --supplied FILE          probabilities of a law to compare with

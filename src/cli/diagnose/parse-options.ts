@@ -29,6 +29,7 @@ const options = {
   unit: text,
   geometry: text,
   misread: text,
+  'misread-uncertainty': text,
   kept: text,
   supplied: text,
   alpha: text,
@@ -115,6 +116,7 @@ export function parseOptions(args: string[]): Asked | 'help' {
       'ring-bonds': 'ring-bonds'
     } as const),
     misread: orUnknown('misread', 'a probability'),
+    misreadUncertainty: number('misread-uncertainty', 'a standard uncertainty such as 0.001'),
     kept: keptOf(values.kept),
     alpha: number('alpha', 'a number such as 0.01'),
     tolerance: number('tolerance', 'a number such as 0.1'),

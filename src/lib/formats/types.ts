@@ -78,6 +78,7 @@ export interface Suggested {
   unit?: Unit;
   geometry?: Geometry;
   misread?: number | null;
+  misreadUncertainty?: number | null;
 }
 
 export interface Dataset {

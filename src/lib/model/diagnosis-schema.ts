@@ -45,6 +45,7 @@ const data = z.strictObject({
   unit: z.enum(['defect', 'pair']),
   geometry: z.enum(['sites', 'open-bonds', 'ring-bonds']),
   misread: orNull,
+  misreadUncertainty: number.optional(),
   counts: z.array(z.tuple([whole, whole])),
   lump: lump.nullable(),
   kept: z.strictObject({ from: whole, to: whole.nullable() }).optional(),

@@ -22,6 +22,7 @@ export function documentCsv(document: Diagnosis): string {
     one('engine', key, engine[key]);
   for (const key of ['digest', 'shots', 'trials', 'unit', 'geometry', 'misread', 'batches'] as const)
     one('data', key, data[key]);
+  if (data.misreadUncertainty) one('data', 'misreadUncertainty', data.misreadUncertainty);
   for (const key of ['verdict', 'smallestExcess', 'shotsToDecide'] as const) one('answer', key, answer[key]);
   for (const key of ['mean', 'variance', 'third', 'fourth', 'fano', 'dispersion'] as const)
     ranged('moments', key, moments[key]);
@@ -33,6 +34,12 @@ export function documentCsv(document: Diagnosis): string {
     for (const key of ['rate', 'ceiling', 'rawCeiling', 'rawDispersion'] as const)
       one('misreads', key, misread[key]);
     ranged('misreads', 'neededRate', misread.neededRate);
+    if (misread.largestRate !== undefined) one('misreads', 'largestRate', misread.largestRate);
+    for (const { rate, ceiling, dispersion, verdict } of misread.spread?.rates ?? []) {
+      one(`misread rate ${rate}`, 'verdict', verdict);
+      one(`misread rate ${rate}`, 'ceiling', ceiling);
+      ranged(`misread rate ${rate}`, 'dispersion', dispersion);
+    }
     for (const { p, trials } of misread.kinks ?? []) one('misreads', `kinks of the next ${trials} bonds`, p);
   }
   if (drift) driftLines(drift, one, ranged);

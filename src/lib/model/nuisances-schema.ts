@@ -8,6 +8,19 @@ const share = number.min(0).max(1);
 const interval = z.strictObject({ value: orNull, low: orNull, high: orNull });
 const level = z.strictObject({ p: share, trials: whole });
 
+const verdict = z.enum(['compatible', 'ruled-out', 'undecided']);
+
+const spread = z.strictObject({
+  uncertainty: number,
+  miss: share,
+  low: share,
+  high: share,
+  cutByCounts: z.boolean(),
+  rates: z.array(z.strictObject({ rate: share, ceiling: number, dispersion: interval, verdict })),
+  changes: z.array(z.strictObject({ above: share, below: share, from: verdict, to: verdict })),
+  statement: z.string()
+});
+
 const misread = z.strictObject({
   applied: z.boolean(),
   rate: orNull,
@@ -15,6 +28,8 @@ const misread = z.strictObject({
   rawCeiling: number,
   rawDispersion: orNull,
   neededRate: interval,
+  largestRate: share.optional(),
+  spread: spread.optional(),
   kinks: z.array(level).nullable()
 });
 

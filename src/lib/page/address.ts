@@ -13,6 +13,7 @@ export const OPTION_NAMES = [
   'unit',
   'geometry',
   'misread',
+  'misreadUncertainty',
   'kept',
   'alpha',
   'tolerance',

@@ -79,10 +79,13 @@ export class Check {
 
   /** Counts of an example, with what belongs to them of the experiment; how hard to look stays as it is set. */
   takeExample(text: string, name: string, options: Partial<DiagnoseOptions>): void {
-    const { trials, unit, geometry, misread, kept } = settingsWith(freshSettings(), options);
-    this.input.replace(text, name, { trials, unit, geometry, misread, kept });
-    for (const setting of ['trials', 'unit', 'geometry', 'misread', 'kept'] as const)
-      delete this.#touched[setting];
+    const { trials, unit, geometry, misread, misreadUncertainty, kept } = settingsWith(
+      freshSettings(),
+      options
+    );
+    const stated = { trials, unit, geometry, misread, misreadUncertainty, kept };
+    this.input.replace(text, name, stated);
+    for (const setting of Object.keys(stated) as (keyof typeof stated)[]) delete this.#touched[setting];
     this.countsChanged(true);
   }
 

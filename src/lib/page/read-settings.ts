@@ -45,6 +45,16 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
   const law = await readLaw(settings.supplied);
   if (!law.ok) problems.supplied = law.problem;
   const whole = Number.isInteger;
+  const unsure =
+    settings.misreadUncertainty.trim() === ''
+      ? null
+      : number(
+          'misreadUncertainty',
+          (x) => x >= 0 && x < 0.5,
+          'Write a standard uncertainty from 0 to below 0.5, such as 0.001, or leave it empty.'
+        );
+  if (unsure !== null && settings.misread.trim() === '')
+    problems.misreadUncertainty = 'Write the chance to misread a site as well, or leave this empty.';
   const options: DiagnoseOptions = {
     trials: trials ?? null,
     unit: settings.unit,
@@ -55,8 +65,9 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
         : number(
             'misread',
             (x) => x >= 0 && x < 0.5,
-            'Write a probability from 0 to below 0.5, or leave it empty.'
+            'Write a probability from 0 to below 0.5, or leave it empty: at 0.5 the reading says nothing.'
           ),
+    ...(unsure !== null && { misreadUncertainty: unsure }),
     ...(kept && { kept }),
     alpha: number('alpha', (x) => x > 0 && x < 0.5, 'Write a level between 0 and 0.5, such as 0.01.'),
     tolerance: number(

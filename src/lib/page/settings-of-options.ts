@@ -10,6 +10,7 @@ export function settingsOfOptions(options: Partial<DiagnoseOptions>): Settings {
   if (options.unit) settings.unit = options.unit;
   if (options.geometry) settings.geometry = options.geometry;
   if (typeof options.misread === 'number') settings.misread = `${options.misread}`;
+  if (options.misreadUncertainty) settings.misreadUncertainty = `${options.misreadUncertainty}`;
   if (options.kept) settings.kept = writeKept(options.kept);
   if (options.alpha !== undefined) settings.alpha = `${options.alpha}`;
   if (options.tolerance !== undefined) settings.tolerance = `${options.tolerance}`;

@@ -6,6 +6,8 @@ export interface Settings {
   unit: Unit;
   geometry: Geometry;
   misread: string;
+  /** Standard uncertainty of that chance; empty where it is taken as exact. */
+  misreadUncertainty: string;
   /** Counts kept, as 0-4 or 1-; empty where no shot was dropped. */
   kept: string;
   alpha: string;
@@ -23,6 +25,7 @@ export const freshSettings = (): Settings => ({
   unit: 'defect',
   geometry: 'sites',
   misread: '',
+  misreadUncertainty: '',
   kept: '',
   alpha: '0.01',
   tolerance: '0.1',

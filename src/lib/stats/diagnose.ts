@@ -22,6 +22,7 @@ import { misreadNull } from './nulls/misread-null';
 import { misreadReport } from './nulls/misread-report';
 import { orderTests } from './order/order-tests';
 import { pairsReport } from './pairs/pairs-report';
+import { rateSpread } from './rate-interval/rate-spread';
 import { equalTrials } from './references/equal-trials';
 import { varianceTest } from './resampling/ceiling-test';
 import type { DrawHelper } from './resampling/draw-helper';
@@ -69,7 +70,7 @@ export async function diagnose(
     : misread.applies
       ? misreadNull(counts, histogram, misread.rate, options)
       : await independentNull(counts, histogram, equal, options, () => pace.step('floor', 0.04));
-  const { law, certificate } = tested;
+  const { law } = tested;
   const moments = momentReport(histogram, trials, equal, drawing, tested.ceiling);
   const spread = moments.variance.value !== null && moments.variance.value > 0;
   await pace.step('resampling', 0.08);
@@ -85,10 +86,16 @@ export async function diagnose(
           pace.within(0.08, 0.12)
         )
       : null;
-  const fitted = await fittedTests(counts, tested, drawing, pace.within(0.12, 0.8), helper);
+  const unsure = misread.applies ? misread.limits : undefined;
+  const fitted = await fittedTests(counts, tested, drawing, pace.within(0.12, unsure ? 0.3 : 0.8), helper);
   await pace.step('shot order', 0.8);
   const order = await orderTests(data, drawing, pace.within(0.8, 0.88));
-  const tests = adjust([...(ceiling ? [ceiling] : []), ...fitted.tests, ...order.tests]);
+  const atStated = [...(ceiling ? [ceiling] : []), ...fitted.tests];
+  const known = { counts, histogram, options, moments, tested, tests: atStated, order: order.tests };
+  const over =
+    unsure && ceiling ? await rateSpread({ ...known, limits: unsure }, pace.within(0.3, 0.8)) : undefined;
+  const certificate = over ? over.certificate : tested.certificate;
+  const tests = adjust([...(over?.tests ?? atStated), ...order.tests]);
   const table = lawTable(counts, law);
   const shown = distribution(histogram, counts.total, trials, table);
   const drift = await driftReport(
@@ -100,7 +107,7 @@ export async function diagnose(
     tests.some(({ id, p }) => id === 'ceiling' && p <= options.alpha),
     pace.within(0.88, 0.9)
   );
-  const read = misreadReport(options, histogram, moments, equal, law);
+  const read = misreadReport(options, histogram, moments, equal, law, counts.total, over?.spread);
   const evidence = evidenceOf({
     options,
     counts,
@@ -112,6 +119,7 @@ export async function diagnose(
     law,
     neighbours: order.neighbours,
     misread,
+    rates: over?.spread,
     drift,
     fixed
   });
@@ -157,6 +165,7 @@ export async function diagnose(
       unit: options.unit,
       geometry: options.geometry,
       misread: options.misread,
+      ...(options.misreadUncertainty && { misreadUncertainty: options.misreadUncertainty }),
       counts: given.counts,
       lump: given.lump,
       ...(options.kept && { kept: options.kept }),

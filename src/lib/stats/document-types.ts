@@ -3,6 +3,7 @@ import type { Explanations } from './explanations/types';
 import type { TrialsPart } from './sensitivity/types';
 import type { EmptyAside } from './truncation/empty-aside';
 import type { PairsPart } from './pairs/types';
+import type { RateSpread } from './rate-interval/types';
 import type { Geometry, Interval, Level, Unit } from './types';
 
 export type TestId =
@@ -117,6 +118,10 @@ export interface MisreadPart {
   rawDispersion: number | null;
   /** Rate that would explain the variance by itself; limits from those of the variance. 0: none is needed; null: none would do. */
   neededRate: Interval;
+  /** Largest rate that the mean count allows, five standard errors allowed for; since engine 0.6. */
+  largestRate?: number;
+  /** The answer over the interval of a rate with an uncertainty; since engine 0.6. */
+  spread?: RateSpread;
   /** Fitted kink probabilities in the order of the bonds; null when not applied. */
   kinks: Level[] | null;
 }
@@ -133,6 +138,8 @@ export interface Diagnosis {
     unit: Unit;
     geometry: Geometry;
     misread: number | null;
+    /** Standard uncertainty of that rate, where one was stated; since engine 0.6. */
+    misreadUncertainty?: number;
     /** As given; for unit `pair` everything after `data` counts pairs, n/2. */
     counts: [number, number][];
     lump: { from: number; shots: number } | null;

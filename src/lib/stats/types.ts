@@ -35,6 +35,8 @@ export interface DiagnoseOptions {
   seed: number;
   /** Probability that one site is misread; null when not stated. */
   misread: number | null;
+  /** Standard uncertainty of that rate; null or left out: taken as exact. */
+  misreadUncertainty?: number | null;
   geometry: Geometry;
   /** Counts that were kept, both ends included (`to` null: nothing was cut above); null or left out: no shot was dropped. */
   kept?: { from: number; to: number | null } | null;

@@ -94,6 +94,8 @@ describe('options', () => {
       'ring-bonds',
       '--misread',
       '0.01',
+      '--misread-uncertainty',
+      '0.002',
       '--alpha',
       '0.05',
       '--tolerance',
@@ -104,7 +106,13 @@ describe('options', () => {
       '7'
     );
     expect(made.engine).toMatchObject({ alpha: 0.05, tolerance: 0.2, resamples: 49, seed: 7 });
-    expect(made.data).toMatchObject({ trials: 40, unit: 'pair', geometry: 'ring-bonds', misread: 0.01 });
+    expect(made.data).toMatchObject({
+      trials: 40,
+      unit: 'pair',
+      geometry: 'ring-bonds',
+      misread: 0.01,
+      misreadUncertainty: 0.002
+    });
   });
 
   it('the file’s own trials are used, unless others are given', async () => {

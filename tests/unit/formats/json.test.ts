@@ -34,12 +34,18 @@ describe('JSON', () => {
 
   it('hands on what the file states about the experiment', () => {
     const [set] = datasets(
-      '{"name": "Kelp", "trials": 12, "unit": "pair", "geometry": "ring-bonds", "misread": 0.01, "conditions": {"tau": 5}, "counts": {"2": 3}}'
+      '{"name": "Kelp", "trials": 12, "unit": "pair", "geometry": "ring-bonds", "misread": 0.01, "misreadUncertainty": 0.002, "conditions": {"tau": 5}, "counts": {"2": 3}}'
     );
     expect(set).toMatchObject({
       name: 'Kelp',
       conditions: { tau: '5' },
-      suggested: { trials: 12, unit: 'pair', geometry: 'ring-bonds', misread: 0.01 }
+      suggested: {
+        trials: 12,
+        unit: 'pair',
+        geometry: 'ring-bonds',
+        misread: 0.01,
+        misreadUncertainty: 0.002
+      }
     });
     expect(datasets('{"trials": null, "counts": {"2": 3}}')[0].suggested).toEqual({ trials: null });
   });

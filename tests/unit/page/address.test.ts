@@ -30,7 +30,7 @@ const shots = fc
       batches: named ? rows.map(([, b]) => b) : null
     }))
   );
-const options: fc.Arbitrary<DiagnoseOptions> = fc.record({
+const plain: fc.Arbitrary<DiagnoseOptions> = fc.record({
   trials: fc.option(fc.integer({ min: 201, max: 1e6 })),
   unit: fc.constantFrom<Unit>('defect', 'pair'),
   geometry: fc.constantFrom<Geometry>('sites', 'open-bonds', 'ring-bonds'),
@@ -41,6 +41,12 @@ const options: fc.Arbitrary<DiagnoseOptions> = fc.record({
   misread: fc.option(fc.constantFrom(0.01, 0.002)),
   supplied: fc.option(fc.array(fc.constantFrom(0.1, 0.25, 1e-7), { minLength: 1, maxLength: 9 }))
 });
+// An uncertainty is of a rate that was stated.
+const options = fc
+  .tuple(plain, fc.option(fc.constantFrom(0.001, 0.0002)))
+  .map(([chosen, unsure]) =>
+    chosen.misread === null || unsure === null ? chosen : { ...chosen, misreadUncertainty: unsure }
+  );
 
 describe('the address', () => {
   it('gives back the same counts, options and name', async () => {

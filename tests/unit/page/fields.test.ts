@@ -55,6 +55,23 @@ describe('what is typed into the fields', () => {
   });
 });
 
+describe('the uncertainty of the misread chance', () => {
+  it('goes to the engine with the chance, and is refused without it or beyond reach', async () => {
+    const stated = { ...freshSettings(), misread: '0.01', misreadUncertainty: '0.001' };
+    const read = await readSettings(stated);
+    expect(read.ok && read.options).toMatchObject({ misread: 0.01, misreadUncertainty: 0.001 });
+    for (const [changed, field, words] of [
+      [{ misread: '' }, 'misreadUncertainty', /chance to misread a site as well/],
+      [{ misreadUncertainty: '0.5' }, 'misreadUncertainty', /below 0\.5/],
+      [{ misread: '0.5' }, 'misread', /at 0\.5 the reading says nothing/]
+    ] as const) {
+      const refused = await readSettings({ ...stated, ...changed });
+      expect(refused.ok).toBe(false);
+      if (!refused.ok) expect(refused.problems[field]).toMatch(words);
+    }
+  });
+});
+
 describe('counts as text', () => {
   it.each<[string, CountData]>([
     [

@@ -6,8 +6,13 @@ import { describe, type JsonNode, member } from './node';
 const units: Unit[] = ['defect', 'pair'];
 const geometries: Geometry[] = ['sites', 'open-bonds', 'ring-bonds'];
 
+const rates = [
+  ['misread', 'misread probability'],
+  ['misreadUncertainty', 'uncertainty of the misread probability']
+] as const;
+
 /** Keys of an object that state options of the diagnosis. */
-export const suggestedKeys = ['trials', 'unit', 'geometry', 'misread'];
+export const suggestedKeys = ['trials', 'unit', 'geometry', 'misread', 'misreadUncertainty'];
 
 /**
  * Options that an object states beside its counts; a value that cannot be one is a problem, since
@@ -27,17 +32,20 @@ export function readSuggested(reader: JsonReader, root: JsonNode): Suggested {
   if (unit) suggested.unit = unit;
   const geometry = oneOf(reader, member(root, 'geometry'), geometries);
   if (geometry) suggested.geometry = geometry;
-  const misread = member(root, 'misread');
-  if (misread?.kind === 'literal' && misread.value === null) suggested.misread = null;
-  else if (misread) {
-    const value = misread.kind === 'number' ? Number(misread.raw) : NaN;
-    if (value >= 0 && value < 0.5) suggested.misread = value;
-    else
-      reader.problem(
-        misread.at,
-        `The misread probability is ${describe(misread)}.`,
-        'Give a number from 0 up to below 0.5, or leave it out.'
-      );
+  for (const [key, name] of rates) {
+    const given = member(root, key);
+    if (!given) continue;
+    if (given.kind === 'literal' && given.value === null) suggested[key] = null;
+    else {
+      const value = given.kind === 'number' ? Number(given.raw) : NaN;
+      if (value >= 0 && value < 0.5) suggested[key] = value;
+      else
+        reader.problem(
+          given.at,
+          `The ${name} is ${describe(given)}.`,
+          'Give a number from 0 up to below 0.5, or leave it out.'
+        );
+    }
   }
   return suggested;
 }

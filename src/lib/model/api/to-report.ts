@@ -36,7 +36,17 @@ export function toReport(report: Saved, statement: string | null, at: string): A
     statement,
     sha256: report.sha256,
     conditions: report.conditions,
-    options: { trials, unit, geometry, misread, alpha, tolerance, resamples, seed },
+    options: {
+      trials,
+      unit,
+      geometry,
+      misread,
+      misreadUncertainty: report.options.misreadUncertainty ?? null,
+      alpha,
+      tolerance,
+      resamples,
+      seed
+    },
     files: {
       document: `${at}/document.json`,
       numbers: `${at}/numbers.csv`,

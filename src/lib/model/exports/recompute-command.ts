@@ -25,6 +25,9 @@ export function recomputeCommand(
     ['unit', data.unit],
     ['geometry', data.geometry],
     ['misread', data.misread ?? 'unknown'],
+    ...(data.misreadUncertainty
+      ? [['misread-uncertainty', data.misreadUncertainty] as [string, number]]
+      : []),
     ...(data.kept ? [['kept', writeKept(data.kept)] as [string, string]] : []),
     ['alpha', engine.alpha],
     ['tolerance', engine.tolerance],

@@ -1,6 +1,7 @@
 import { sayKept } from '$lib/stats/words/say-kept';
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount, formatNumber } from '../format-number';
+import { sayStatedRate } from '../report/data-facts';
 import { GEOMETRIES, UNITS } from '../labels';
 import { sayInterval } from '../say-interval';
 import { wrap } from './wrap';
@@ -22,7 +23,7 @@ export function sayData({ data, moments, engine }: Diagnosis, about: string[]): 
     : `largest count ${formatCount(last ?? null)}`;
   const misread =
     (data.kept ? `; only ${sayKept(data.kept)} were kept` : '') +
-    (data.misread === null ? '' : `; a site is misread with probability ${formatNumber(data.misread, 3)}`);
+    (data.misread === null ? '' : `; a site is misread with probability ${sayStatedRate(data)}`);
   const per = data.unit === 'pair' ? ' (in pairs)' : '';
   return [
     'Data',

@@ -16,7 +16,15 @@ export interface Quotable {
   answer: Pick<Diagnosis['answer'], 'verdict' | 'smallestExcess' | 'shotsToDecide'>;
   data: Pick<
     Diagnosis['data'],
-    'shots' | 'trials' | 'unit' | 'geometry' | 'misread' | 'kept' | 'ordered' | 'batches'
+    | 'shots'
+    | 'trials'
+    | 'unit'
+    | 'geometry'
+    | 'misread'
+    | 'misreadUncertainty'
+    | 'kept'
+    | 'ordered'
+    | 'batches'
   > & {
     digest: string | null;
     /** True where a stated misread rate was allowed for in every test. */

@@ -3,6 +3,12 @@ import type { Diagnosis } from '$lib/stats/types';
 import { formatCount, formatNumber } from '../format-number';
 import { GEOMETRIES } from '../labels';
 
+/** "0.0100, standard uncertainty 0.0010". */
+export const sayStatedRate = ({ misread, misreadUncertainty }: Diagnosis['data']): string =>
+  misread === null
+    ? 'not stated'
+    : `${formatNumber(misread, 3)}${misreadUncertainty ? `, standard uncertainty ${formatNumber(misreadUncertainty, 2)}` : ''}`;
+
 /** What was given, as pairs of what and value. */
 export function dataFacts({ data }: Diagnosis, name: string | null): [string, string][] {
   const seen = data.counts.filter(([, shots]) => shots > 0);
@@ -18,7 +24,7 @@ export function dataFacts({ data }: Diagnosis, name: string | null): [string, st
     ['Unit', data.unit === 'pair' ? 'pairs of defects: n/2 out of N/2 is tested' : 'single defects'],
     ['Counted on', GEOMETRIES[data.geometry]],
     ...(data.kept ? [['Counts kept', sayKept(data.kept)] as [string, string]] : []),
-    ['Chance to misread a site', data.misread === null ? 'not stated' : formatNumber(data.misread, 3)],
+    ['Chance to misread a site', sayStatedRate(data)],
     [
       'Order of the shots',
       data.ordered ? `known${data.batches ? `, ${formatCount(data.batches)} batches` : ''}` : 'not known'

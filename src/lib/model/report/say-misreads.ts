@@ -1,3 +1,4 @@
+import { sayRate } from '$lib/stats/words/say-rate';
 import type { Diagnosis, Interval } from '$lib/stats/types';
 import { formatNumber, formatPercent } from '../format-number';
 import { GEOMETRIES } from '../labels';
@@ -5,17 +6,20 @@ import { sayFlagged } from './say-flagged';
 
 /** What the words on misreads are made of: a document, or what a link without counts leaves of it. */
 export interface MisreadsView extends Pick<Diagnosis, 'flags'> {
-  data: Pick<Diagnosis['data'], 'geometry' | 'misread'>;
+  data: Pick<Diagnosis['data'], 'geometry' | 'misread' | 'misreadUncertainty'>;
   nuisances?: { misread?: { applied: boolean; neededRate: Interval } };
 }
 
 /** What was stated of misread sites, whether the report allows for it, and what they do to counts. */
 export function sayMisreads(view: MisreadsView): string {
   const { misread, geometry } = view.data;
+  const unsure = view.data.misreadUncertainty
+    ? `, with a standard uncertainty of ${formatPercent(view.data.misreadUncertainty)}`
+    : '';
   const chance =
     misread === null
       ? 'The chance to misread a site is not stated, and none is allowed for.'
-      : `The chance to misread a site is stated as ${formatPercent(misread, 3)}${allowed(view)}.`;
+      : `The chance to misread a site is stated as ${sayRate(misread)}${unsure}${allowed(view)}.`;
   const effect =
     geometry === 'sites'
       ? 'On sites that are read one by one, independent misreads keep counts a sum of independent trials.'
@@ -45,6 +49,18 @@ export function sayNeededRate({ nuisances }: MisreadsView): string | null {
       ? 'no limits can be given'
       : `95\u202f%: ${low === null ? 'no lower limit' : rateOf(low)} to ${high === null ? 'more than misreads can give' : rateOf(high)}, from the limits of the variance`;
   return `${calibration}: ${rateOf(value)} of the sites would by themselves give this variance (${limits}). A rate below the lower limit is too small to explain the excess.`;
+}
+
+/** The answer over the interval of a rate with an uncertainty; null where none was stated. */
+export const sayRateSpread = ({ nuisances }: Diagnosis): string | null =>
+  nuisances?.misread?.spread?.statement ?? null;
+
+/** The largest rate that the counts allow; null where they allow any, and in documents before engine 0.6. */
+export function sayLargestRate({ nuisances }: Diagnosis): string | null {
+  const largest = nuisances?.misread?.largestRate;
+  return largest === undefined || largest >= 0.5
+    ? null
+    : `At most ${formatPercent(largest, 3)} of the sites can have been misread: a larger rate would by itself show more kinks, or hide more, than were read, five standard errors allowed for.`;
 }
 
 const rateOf = (rate: number): string => (rate === 0 ? 'none' : formatPercent(rate));

@@ -5,7 +5,14 @@ import { asTyped } from './as-typed';
 import { sayCriticalTrials } from './say-critical-trials';
 import { sayChange, sayDrift, sayWithin } from './say-drift';
 import { sayFlagged } from './say-flagged';
-import { sayKinks, sayMisreads, sayNeededRate, sayTwoCeilings } from './say-misreads';
+import {
+  sayKinks,
+  sayLargestRate,
+  sayMisreads,
+  sayNeededRate,
+  sayRateSpread,
+  sayTwoCeilings
+} from './say-misreads';
 
 /** Title of that part of a report. */
 export const NUISANCES_TITLE = 'What can look like interaction';
@@ -26,6 +33,8 @@ export const sayNuisances = (document: Diagnosis, stated: Stated | null): [strin
     ['Misread sites', sayMisreads(document)],
     ['Ceiling as read', sayTwoCeilings(document)],
     ['Misread rate needed', sayNeededRate(document)],
+    ['Largest misread rate', sayLargestRate(document)],
+    ['Over the rate’s uncertainty', sayRateSpread(document)],
     ['Kinks along the chain', sayKinks(document)],
     ['Drift', sayDrift(document)],
     ['Within batches', sayWithin(document.nuisances?.drift)],

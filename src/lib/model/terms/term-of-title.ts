@@ -62,6 +62,8 @@ const TITLES: Record<string, TermId> = {
   'Misread sites': 'misread-rate',
   'Ceiling as read': 'misread-ceiling',
   'Misread rate needed': 'needed-rate',
+  'Largest misread rate': 'misread-rate',
+  'Over the rate’s uncertainty': 'misread-rate',
   'Kinks along the chain': 'levels',
   Drift: 'test-order',
   'Within batches': 'within-batches',

@@ -1,19 +1,11 @@
 import type { Evidence } from '../flags/evidence';
 import type { Diagnosis, Flag, Verdict } from '../types';
 import { because } from './because';
+import { decide } from './decide';
 import { shotsToDecide } from './shots-to-decide';
 import { smallestExcess } from './smallest-excess';
 import { statement } from './statement';
 import { unreachable } from './unreachable';
-
-/** Fewer shots than this are never called compatible: the rule below fails for tiny N. */
-const fewest = 50;
-
-/**
- * With fewer shots than see the ceiling exceeded by half, nothing was tested that a reader would care about,
- * however low the variance happens to be. For counts of ordinary shape that is about fifty shots.
- */
-const blind = 0.5;
 
 /**
  * One of three answers.
@@ -23,6 +15,8 @@ const blind = 0.5;
  *   variance/ceiling is below 1 + tolerance, an excess of one half would have been seen, there are at least 50 shots,
  *   and no test is as extreme as its resamples can show;
  * - undecided: otherwise, with the number of shots that would decide.
+ *
+ * A misread rate known with an uncertainty: compatible only where it is so at every rate tried.
  */
 export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
   const { options, moments, shots, trials } = evidence;
@@ -33,7 +27,7 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
   const seen = testable ? smallestExcess(mean, trials, shots) : null;
   // N trials can exceed the ceiling N-fold at most, and an eye for twice the ceiling is none.
   const excess = seen !== null && seen <= Math.min(2, (trials ?? Infinity) - 1) ? seen : null;
-  const verdict = decide(evidence, excess);
+  const verdict = overRates(evidence, decide(evidence, excess));
   const deciding = {
     mean,
     trials,
@@ -44,7 +38,7 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
     tests: Math.max(1, evidence.tests.length)
   };
   const needed =
-    verdict === 'undecided' && testable && unreachable(evidence).length === 0
+    verdict === 'undecided' && testable && unreachable(evidence).length === 0 && !ratesDiffer(evidence)
       ? shotsToDecide(deciding)
       : null;
   return {
@@ -56,11 +50,11 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
   };
 }
 
-function decide({ certificate, tests, moments, options, shots }: Evidence, excess: number | null): Verdict {
-  if (certificate && certificate.p <= options.alpha) return 'ruled-out';
-  if (tests.some((test) => test.pAdjusted <= options.alpha)) return 'ruled-out';
-  if (unreachable({ tests, options }).length > 0) return 'undecided';
-  const { high } = moments.dispersion;
-  const sighted = shots >= fewest && excess !== null && excess <= blind;
-  return sighted && high !== null && high < 1 + options.tolerance ? 'compatible' : 'undecided';
+/** Whether the misread rate is what leaves the answer open: more shots would not settle that. */
+const ratesDiffer = ({ rates }: Evidence): boolean =>
+  rates !== undefined && rates.rates.some(({ verdict }) => verdict === 'ruled-out');
+
+function overRates({ rates }: Evidence, verdict: Verdict): Verdict {
+  if (!rates || verdict === 'ruled-out') return verdict;
+  return rates.rates.every((one) => one.verdict === 'compatible') ? verdict : 'undecided';
 }

@@ -3,6 +3,7 @@ import type { TestResult, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
 import { sayKept } from '../words/say-kept';
+import { sayRate } from '../words/say-rate';
 import { sayTest } from '../words/say-test';
 
 /** Reasons for the answer, the weightiest first, each a sentence with its number. */
@@ -17,7 +18,7 @@ export function because(
   const out: string[] = [];
   if (certificate && certificate.p <= options.alpha) {
     out.push(
-      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits${misread ? ', however misread at the rate stated,' : ''} give more than ${formatNumber(certificate.bound, 3)} a shot (p at most ${formatNumber(certificate.p, 2)}).`
+      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits${misread ? `, however misread at the ${evidence.rates ? 'rates within the interval' : 'rate stated'},` : ''} give more than ${formatNumber(certificate.bound, 3)} a shot (p at most ${formatNumber(certificate.p, 2)}).`
     );
   }
   for (const alike of alikeTests(tests.filter((test) => test.pAdjusted <= options.alpha))) {
@@ -30,7 +31,7 @@ export function because(
   const { dispersion } = moments;
   if (dispersion.value !== null) {
     out.push(
-      `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean${options.kept ? `, of which only ${sayKept(options.kept)} were kept` : ''}${misread ? `, read with ${formatPercent(misread.rate)} of the sites misread` : ''}.`
+      `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean${options.kept ? `, of which only ${sayKept(options.kept)} were kept` : ''}${misread ? `, read with ${sayRate(misread.rate)} of the sites misread` : ''}.`
     );
     const mean = moments.mean.value!;
     const raw = misread && trials ? moments.variance.value! / (mean * (1 - mean / trials)) : NaN;
@@ -38,6 +39,7 @@ export function because(
       out.push(`Without misreads it would be ${formatNumber(raw, 3)} times the ceiling.`);
     }
   }
+  if (evidence.rates) out.push(evidence.rates.statement);
   if (evidence.drift?.split) out.push(evidence.drift.statement);
   if (verdict !== 'ruled-out' && excess !== null) {
     out.push(

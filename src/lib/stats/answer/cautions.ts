@@ -2,11 +2,12 @@ import type { Evidence } from '../flags/evidence';
 import type { Histogram, TestResult } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayKept } from '../words/say-kept';
+import { sayRate } from '../words/say-rate';
 import { resamplesNeeded } from './unreachable';
 
 /** What a reader must keep in mind: first what this histogram adds, then what always holds. */
 export function cautions(
-  { options, shots, trials, moments, misread }: Evidence,
+  { options, shots, trials, moments, misread, rates }: Evidence,
   histogram: Histogram,
   tests: TestResult[]
 ): string[] {
@@ -32,8 +33,11 @@ export function cautions(
     );
   }
   if (misread?.applies) {
+    const known = rates
+      ? `every p and the certificate here are the worst over the interval of that rate (${formatPercent(rates.low, 3)} to ${formatPercent(rates.high, 3)}), plus the chance that it lies outside; its error is taken to be normal, and the rate the same at every site and independent of the others. The law, the bounds of the tails and the split by batches are those at ${sayRate(misread.rate)}.`
+      : `every test, bound and flag here allows for exactly that rate, the same at every site and independent of the others. An error of the rate itself is not allowed for: state its uncertainty, or compare the rate needed with the limits of the calibration.`;
     out.push(
-      `A misread rate of ${formatPercent(misread.rate)} a site was stated, and every test, bound and flag here allows for exactly that rate, the same at every site and independent of the others. An error of the rate itself is not allowed for: compare the rate needed with the limits of the calibration. The best law is searched among few orders of the bonds, so independent kinks that are all but sure on some bonds and excluded on others may look like a misfit; ceiling and certificate do not depend on it.`
+      `A misread rate of ${sayRate(options.misread ?? misread.rate)} a site was stated, and ${known} The best law is searched among few orders of the bonds, so independent kinks that are all but sure on some bonds and excluded on others may look like a misfit; ceiling and certificate do not depend on it.`
     );
   } else if (misread?.reason) {
     out.push(misread.reason);

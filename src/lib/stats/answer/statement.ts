@@ -1,6 +1,8 @@
 import { allEven, type Evidence } from '../flags/evidence';
+import { sayStretches } from '../rate-interval/say-rates';
 import type { Flag, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
+import { sayRate } from '../words/say-rate';
 import { sayHowOften } from '../words/say-p';
 import { resamplesNeeded, unreachable } from './unreachable';
 
@@ -18,7 +20,7 @@ export function statement(
   if (verdict === 'compatible') {
     const regular = flags.some((flag) => flag.id === 'regular');
     return (
-      `These ${shots} are compatible with independent trials: with 95\u202f% confidence their variance is below ${formatNumber(1 + evidence.options.tolerance, 3)} times the ceiling${evidence.misread?.applies ? `, with ${formatPercent(evidence.misread.rate)} of the sites misread` : ''}.` +
+      `These ${shots} are compatible with independent trials: with 95\u202f% confidence their variance is below ${formatNumber(1 + evidence.options.tolerance, 3)} times the ceiling${evidence.misread?.applies ? `, with ${sayRate(evidence.misread.rate)} of the sites misread${evidence.rates ? ', and at every rate within its uncertainty' : ''}` : ''}.` +
       (regular
         ? evidence.trials === null
           ? ' They vary less than rare events of this mean would: a limited number of sites gives that by itself, and repulsion between defects would too.'
@@ -36,6 +38,10 @@ export function statement(
   if (blind.length > 0) {
     return `These ${shots} cannot be judged with ${formatCount(evidence.options.resamples)} resamples: ${blind.length === 1 ? 'one test is' : `${formatCount(blind.length)} tests are`} as extreme as so few can show. Use at least ${formatCount(resamplesNeeded(evidence))}.`;
   }
+  if (evidence.rates && evidence.rates.changes.length > 0)
+    return `These ${shots} cannot tell, because the misread rate is not known well enough. ${sayStretches(evidence.rates)} With its uncertainty it may be ${formatPercent(evidence.rates.low, 3)} to ${formatPercent(evidence.rates.high, 3)}: measure it better.`;
+  if (evidence.rates?.rates.every((one) => one.verdict === 'ruled-out'))
+    return `These ${shots} cannot tell: at each misread rate tried, from ${formatPercent(evidence.rates.low, 3)} to ${formatPercent(evidence.rates.high, 3)}, some test rules independent trials out, but no test does so at all of them. Measure the misread rate better.`;
   const more = needed ? ` About ${formatCount(needed)} shots in all would decide.` : '';
   const hints = flags.filter((flag) => flag.grade === 'hinted' && flag.id !== 'regular');
   const hint =

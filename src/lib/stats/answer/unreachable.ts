@@ -11,7 +11,11 @@ export function unreachable({ tests, options }: Pick<Evidence, 'tests' | 'option
   );
 }
 
-/** Resamples with which the smallest p, times the number of tests, reaches α. */
-export function resamplesNeeded({ tests, options }: Pick<Evidence, 'tests' | 'options'>): number {
-  return Math.ceil(tests.length / options.alpha);
+/** Resamples with which the smallest p, times the number of tests, reaches α; β of a misread rate is part of each p. */
+export function resamplesNeeded({
+  tests,
+  options,
+  rates
+}: Pick<Evidence, 'tests' | 'options' | 'rates'>): number {
+  return Math.ceil(tests.length / (options.alpha - tests.length * (rates?.miss ?? 0)));
 }

@@ -1,5 +1,6 @@
 import type { DriftPart } from '../drift/types';
 import type { MisreadUse } from '../nulls/misread-applies';
+import type { RateSpread } from '../rate-interval/types';
 import type { Certificate, DiagnoseOptions, Diagnosis, TestId, TestResult } from '../types';
 
 /** All that flags and the answer are decided from. */
@@ -13,6 +14,8 @@ export interface Evidence {
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>;
   /** Whether every test allows for misread sites; left out, none was stated. */
   misread?: MisreadUse;
+  /** Where the misread rate has an uncertainty: tests and certificate are then the worst over it. */
+  rates?: RateSpread;
   /** What order and batches say of the excess; left out for histograms. */
   drift?: DriftPart;
   tests: TestResult[];

@@ -3,6 +3,7 @@ import type { FitData } from '../fit/fit-data';
 import { evenShots } from './even-shots';
 import type { FittedTests } from '../resampling/fitted-tests';
 import type { MisreadUse } from '../nulls/misread-applies';
+import type { RateSpread } from '../rate-interval/types';
 import type { FittedLaw } from '../resampling/fitted-law';
 import type { Certificate, DiagnoseOptions, TestResult } from '../types';
 import type { Evidence } from './evidence';
@@ -18,6 +19,7 @@ export interface Gathered {
   law: FittedLaw;
   neighbours: Evidence['neighbours'];
   misread: MisreadUse;
+  rates: RateSpread | undefined;
   drift: DriftPart | undefined;
   fixed: boolean;
 }
@@ -34,6 +36,7 @@ export function evidenceOf({
   law,
   neighbours,
   misread,
+  rates,
   drift,
   fixed
 }: Gathered): Evidence {
@@ -47,6 +50,7 @@ export function evidenceOf({
     neighbours,
     misread,
     fixed,
+    ...(rates && { rates }),
     ...(drift && { drift }),
     lowTailOfTheRest: fitted.lowTailOfTheRest,
     empty: { seen: counts.first === 0 ? (counts.shots[0] ?? 0) : 0, expected: fitted.expectedEmpty },

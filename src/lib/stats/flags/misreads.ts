@@ -1,5 +1,6 @@
 import type { Flag } from '../types';
 import { formatPercent } from '../words/format-number';
+import { sayRate } from '../words/say-rate';
 import { gradeOf, type Evidence } from './evidence';
 import { misreadNeeded } from './misread-needed';
 
@@ -15,7 +16,7 @@ export function misreads(evidence: Evidence): Flag | null {
   if (needed === null || needed > 0.1) return null;
   // A stated rate that falls well short of what is needed speaks against this explanation.
   if (misread !== null && misread < 0.8 * needed) return null;
-  const stated = misread ? ` You stated ${formatPercent(misread)}.` : '';
+  const stated = misread ? ` You stated ${sayRate(misread)}.` : '';
   return {
     id: 'misreads',
     grade: 'hinted',

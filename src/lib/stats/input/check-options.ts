@@ -25,7 +25,16 @@ export function checkOptions(options: DiagnoseOptions): void {
   );
   need(
     misread === null || (misread >= 0 && misread < 0.5),
-    'The misread rate must be at least 0 and below 0.5.'
+    'The misread rate must be at least 0 and below 0.5: at one half the reading says nothing.'
+  );
+  const unsure = options.misreadUncertainty ?? null;
+  need(
+    unsure === null || (unsure >= 0 && unsure < 0.5),
+    'The uncertainty of the misread rate must be at least 0 and below 0.5.'
+  );
+  need(
+    unsure === null || misread !== null,
+    'An uncertainty of the misread rate was given without the rate: give both.'
   );
   if (options.kept) {
     const { from, to } = options.kept;

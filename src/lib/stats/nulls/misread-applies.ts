@@ -1,33 +1,52 @@
 import type { FitData } from '../fit/fit-data';
 import { sampleMoments } from '../fit/sample-moments';
-import { chainMoments } from '../misread/chain-moments';
+import { largestRate, misreadsAlone } from '../misread/largest-rate';
+import { rateLimits, type RateLimits } from '../rate-interval/rate-limits';
 import type { DiagnoseOptions } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
+import { sayRate } from '../words/say-rate';
 
 /** (1 − 2ε)² = 2/3: beyond, the variance is no longer concave in the kinks, and its ceiling only bounded. */
-export const largestRate = 0.0917;
+export const mostRate = 0.0917;
 /** More bonds than this would take minutes to refit. */
 export const mostBonds = 1000;
 
-/** The rate allowed for, or why none is. */
-export type MisreadUse = { applies: true; rate: number } | { applies: false; reason: string | null };
+/** The rate allowed for, its limits where it has an uncertainty, or why none is allowed for. */
+export type MisreadUse =
+  { applies: true; rate: number; limits?: RateLimits } | { applies: false; reason: string | null };
 
 /**
  * Whether a stated misread rate can be allowed for in every test: kinks on the bonds of an open chain of known length,
  * and a rate that the mean count does not refute. Otherwise the reason, as a sentence for the cautions; null when no rate
- * was stated.
+ * was stated. A rate that no trials can have is told whatever the geometry, with the largest that the counts allow.
  */
 export function misreadApplies(options: DiagnoseOptions, counts: FitData): MisreadUse {
   const { misread, geometry, unit, trials } = options;
   if (!misread) return { applies: false, reason: null };
-  const stated = `A misread rate of ${formatPercent(misread)} was stated.`;
+  const uncertainty = options.misreadUncertainty ?? 0;
+  const known = uncertainty > 0 ? `, give or take ${sayRate(uncertainty)},` : '';
+  const stated = `A misread rate of ${sayRate(misread)}${known} was stated.`;
   const no = (why: string) => ({ applies: false as const, reason: `${stated} ${why}` });
+  const without = 'so the tests here are against laws without misreads.';
+  // A lump hides how large the mean is.
+  const mean = sampleMoments(counts).mean * (unit === 'pair' ? 2 : 1);
+  const largest = trials === null || counts.lump ? 0.5 : largestRate(mean, trials, counts.total, geometry);
+  const limits = rateLimits(misread, uncertainty, largest, options.alpha);
+  if (limits === null) {
+    const alone = misreadsAlone(misread, trials!, geometry).mean;
+    const things = geometry === 'sites' ? 'defects' : 'kinks';
+    const seen =
+      mean > trials! / 2
+        ? `misreads would hide ${formatNumber(alone, 3)} of ${formatCount(trials)} ${things} a shot at the least, and ${formatNumber(trials! - mean, 3)} are missing`
+        : `misreads alone would show ${formatNumber(alone, 3)} ${things} a shot, and ${formatNumber(mean, 3)} were read`;
+    const why = `It cannot be right: ${seen}. These counts allow ${formatPercent(largest, 3)} at most.`;
+    return no(geometry === 'sites' ? why : `${why} It is not allowed for, ${without}`);
+  }
   if (geometry === 'sites') {
     return no(
       'Sites misread one by one leave their count a sum of independent trials, so the tests hold as they stand.'
     );
   }
-  const without = 'so the tests here are against laws without misreads.';
   if (geometry === 'ring-bonds' || unit === 'pair') {
     return no(`For kinks on a ring, or counted in pairs, it is written down but not allowed for, ${without}`);
   }
@@ -35,17 +54,11 @@ export function misreadApplies(options: DiagnoseOptions, counts: FitData): Misre
   if (trials < 2 || trials > mostBonds) {
     return no(`It is allowed for on chains of 2 to ${formatCount(mostBonds)} bonds, ${without}`);
   }
-  if (misread > largestRate) {
-    return no(`Above ${formatPercent(largestRate, 3)} it is written down but not allowed for, ${without}`);
-  }
-  const { mean } = sampleMoments(counts);
-  const toggled = trials * 2 * misread * (1 - misread);
-  // Kinks only add to what misreads alone show (or, mirrored, to what they hide), so five standard errors below that refute the rate.
-  const alone = chainMoments([{ p: 0, trials }], misread);
-  if (Math.min(mean, trials - mean) < toggled - 5 * Math.sqrt(alone.variance / counts.total)) {
+  if (limits.high > mostRate) {
+    const reach = uncertainty > 0 ? ` With its uncertainty it may be ${formatPercent(limits.high, 3)}.` : '';
     return no(
-      `It cannot be right: misreads alone would show ${formatNumber(toggled, 3)} kinks a shot, and ${formatNumber(mean, 3)} were read. It is not allowed for, ${without}`
+      `Above ${formatPercent(mostRate, 3)} it is written down but not allowed for, ${without}${reach}`
     );
   }
-  return { applies: true, rate: misread };
+  return uncertainty > 0 ? { applies: true, rate: limits.rate, limits } : { applies: true, rate: misread };
 }

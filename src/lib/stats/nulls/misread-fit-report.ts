@@ -6,7 +6,7 @@ import { cells } from '../resampling/cells';
 import { divergence } from '../resampling/divergence';
 import type { FittedTests } from '../resampling/fitted-tests';
 import type { DiagnoseOptions, Diagnosis } from '../types';
-import { formatPercent } from '../words/format-number';
+import { sayRate } from '../words/say-rate';
 
 /**
  * The `fit` part of the document for kinks read with misread sites. No floor is known for these laws beyond that no
@@ -45,7 +45,7 @@ export function misreadFitReport(
     gSquared: 2 * counts.total * plugIn,
     shotsToNotice: noticed,
     certified: false,
-    how: `Independent kinks of up to three probabilities along an open chain, read with ${formatPercent(chain.rate)} of the sites misread: equal bonds, two levels in stretches of many lengths, and halves of these, each by scoring. Other orders of the bonds were not searched, and no floor is known. The levels are those of the true kinks; the laws beside it are of counts without misreads.`,
+    how: `Independent kinks of up to three probabilities along an open chain, read with ${sayRate(chain.rate)} of the sites misread: equal bonds, two levels in stretches of many lengths, and halves of these, each by scoring. Other orders of the bonds were not searched, and no floor is known. The levels are those of the true kinks; the laws beside it are of counts without misreads.`,
     ...referenceLaws(counts, options.supplied)
   };
 }

@@ -2,7 +2,9 @@ import { ceiling } from '../bounds/ceiling';
 import { chainBlocks } from '../misread/chain-blocks';
 import { neededRate } from '../misread/needed-rate';
 import { isReadChain } from '../misread/read-chain';
+import { largestRate } from '../misread/largest-rate';
 import { lumpedCeiling } from '../moments/lumped-ceiling';
+import type { RateSpread } from '../rate-interval/types';
 import type { FittedLaw } from '../resampling/fitted-law';
 import type { DiagnoseOptions, Diagnosis, Histogram, MisreadPart } from '../types';
 
@@ -17,7 +19,9 @@ export function misreadReport(
   { lump }: Histogram,
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>,
   equal: number,
-  law: FittedLaw
+  law: FittedLaw,
+  shots: number,
+  spread?: RateSpread
 ): MisreadPart | undefined {
   const { trials, geometry, unit, misread } = options;
   if (geometry !== 'open-bonds' || unit !== 'defect' || trials === null || trials < 2) return undefined;
@@ -33,6 +37,8 @@ export function misreadReport(
     rawDispersion: variance === null || !(rawCeiling > 0) ? null : variance / rawCeiling,
     // A lump hides how far its counts reach.
     neededRate: lump ? { value: null, low: null, high: null } : neededRate(mean, moments.variance, trials),
+    ...(lump ? {} : { largestRate: largestRate(mean, trials, shots, geometry) }),
+    ...(spread && { spread }),
     kinks: applied && isReadChain(law) ? chainBlocks(law) : null
   };
 }

@@ -57,7 +57,7 @@ describe('a rate that cannot be allowed for', () => {
     ['sites', { geometry: 'sites', misread: 0.01 }, /hold as they stand/],
     ['a ring', { geometry: 'ring-bonds', misread: 0.01 }, /not allowed for/],
     ['no number of bonds', { trials: null, misread: 0.01 }, /Without the number of bonds/],
-    ['a rate beyond reach', { misread: 0.2 }, /Above 9\.17/],
+    ['a rate far beyond what the mean allows', { misread: 0.2 }, /These counts allow 3\.\d\d\u202f% at most/],
     [
       'a rate that the mean refutes',
       { misread: 0.08 },

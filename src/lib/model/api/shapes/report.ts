@@ -32,6 +32,9 @@ export const reportSchema = z.object({
     unit: z.enum(['defect', 'pair']),
     geometry: z.enum(['sites', 'open-bonds', 'ring-bonds']),
     misread: orNull,
+    misreadUncertainty: orNull.describe(
+      'Standard uncertainty of the misread rate; null where it was taken as exact'
+    ),
     alpha: z.number(),
     tolerance: z.number(),
     resamples: z.int(),

@@ -87,7 +87,12 @@ function readOut({ data }: Quotable): Words[] {
     const stated = words`A chance of ${givenPercent(data.misread)} to misread a site was stated`;
     if (data.misreadApplied)
       return [
-        words`${stated}, the same at every site and independent of the others; law, ceiling, bounds and tests are of independent kinks read with it.`
+        words`${stated}, the same at every site and independent of the others; law, ceiling, bounds and tests are of independent kinks read with it.`,
+        ...(data.misreadUncertainty
+          ? [
+              words`Its standard uncertainty is ${givenPercent(data.misreadUncertainty)}; every p is the largest over the interval that leaves, plus the chance that the rate lies outside (Berger and Boos 1994).`
+            ]
+          : [])
       ];
     // Misread one by one, sites still give a sum of independent trials.
     if (data.geometry === 'sites')

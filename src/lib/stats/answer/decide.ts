@@ -1,0 +1,30 @@
+import type { Evidence } from '../flags/evidence';
+import type { Verdict } from '../types';
+import { unreachable } from './unreachable';
+
+/** Fewer shots than this are never called compatible: the rule below fails for tiny N. */
+const fewest = 50;
+
+/**
+ * With fewer shots than see the ceiling exceeded by half, nothing was tested that a reader would care about,
+ * however low the variance happens to be. For counts of ordinary shape that is about fifty shots.
+ */
+const blind = 0.5;
+
+/** What the verdict is decided from. */
+export type Decided = Pick<Evidence, 'certificate' | 'tests' | 'options' | 'shots'> & {
+  moments: Pick<Evidence['moments'], 'dispersion'>;
+};
+
+/** See answer. @param excess smallest excess that would have been seen; null for none */
+export function decide(
+  { certificate, tests, moments, options, shots }: Decided,
+  excess: number | null
+): Verdict {
+  if (certificate && certificate.p <= options.alpha) return 'ruled-out';
+  if (tests.some((test) => test.pAdjusted <= options.alpha)) return 'ruled-out';
+  if (unreachable({ tests, options }).length > 0) return 'undecided';
+  const { high } = moments.dispersion;
+  const sighted = shots >= fewest && excess !== null && excess <= blind;
+  return sighted && high !== null && high < 1 + options.tolerance ? 'compatible' : 'undecided';
+}
