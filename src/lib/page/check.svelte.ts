@@ -3,6 +3,7 @@ import type { CountData, DiagnoseOptions } from '$lib/stats/types';
 import { writeAddress } from './address';
 import { addressWords } from './address-words';
 import { CountsInput } from './counts-input.svelte';
+import { experimentSettings } from './experiment-settings';
 import { readAddress } from './read-address';
 import { Reader } from './reader';
 import { readSettings, readTrials, type SettingProblems } from './read-settings';
@@ -79,13 +80,9 @@ export class Check {
 
   /** Counts of an example, with what belongs to them of the experiment; how hard to look stays as it is set. */
   takeExample(text: string, name: string, options: Partial<DiagnoseOptions>): void {
-    const { trials, unit, geometry, misread, misreadUncertainty, kept } = settingsWith(
-      freshSettings(),
-      options
-    );
-    const stated = { trials, unit, geometry, misread, misreadUncertainty, kept };
+    const stated = experimentSettings(settingsWith(freshSettings(), options));
     this.input.replace(text, name, stated);
-    for (const setting of Object.keys(stated) as (keyof typeof stated)[]) delete this.#touched[setting];
+    for (const setting of Object.keys(stated) as SettingName[]) delete this.#touched[setting];
     this.countsChanged(true);
   }
 
