@@ -1,4 +1,5 @@
 import { parseArgs } from 'node:util';
+import { nuisances } from '$lib/stats/calibration/nuisances';
 import { truths } from '$lib/stats/calibration/truths';
 import { violations } from '$lib/stats/calibration/violations';
 
@@ -8,19 +9,22 @@ export const usage = `npm run calibrate -- [options]
   --shots A,B         numbers of shots (300,3000,30000; violations: the first two)
   --truth A,B         only truths whose name begins so; "none" for none
   --violation A,B     only violations whose name begins so; "none" for none
+  --nuisance A,B      nuisances whose name begins so, without and with twice the smallest excess; "all" (none)
   --resamples N       resamples of each diagnosis (399)
   --full N            resamples the answer at 0.01 is decided with (1999)
   --seed N            seed of everything (1)
   --threads N         threads to work in (2)
   --json FILE         write all shares as JSON
 Truths: ${truths.map(({ id }) => id).join(', ')}
-Violations: ${violations.map(({ id }) => id).join(', ')}`;
+Violations: ${violations.map(({ id }) => id).join(', ')}
+Nuisances: ${nuisances.map(({ id }) => id).join(', ')}`;
 
 export interface CalibrateArguments {
   repeats(shots: number): number;
   shots: number[];
   truths: string[];
   violations: string[];
+  nuisances: string[];
   resamples: number;
   full: number;
   seed: number;
@@ -41,6 +45,7 @@ export function readArguments(
         shots: { type: 'string' },
         truth: { type: 'string' },
         violation: { type: 'string' },
+        nuisance: { type: 'string' },
         resamples: { type: 'string' },
         full: { type: 'string' },
         seed: { type: 'string' },
@@ -59,6 +64,7 @@ export function readArguments(
         shots: (values.shots ?? usual).split(',').map((text) => whole('shots', text)),
         truths: chosen('truth', values.truth, truths),
         violations: chosen('violation', values.violation, violations),
+        nuisances: chosen('nuisance', values.nuisance ?? 'none', nuisances),
         resamples: whole('resamples', values.resamples ?? '399'),
         full: whole('full', values.full ?? '1999'),
         seed: whole('seed', values.seed ?? '1'),
@@ -80,7 +86,7 @@ function whole(name: string, text: string): number {
 
 function chosen(name: string, asked: string | undefined, all: { id: string }[]): string[] {
   const ids = all.map(({ id }) => id);
-  if (asked === undefined) return ids;
+  if (asked === undefined || asked === 'all') return ids;
   if (asked === 'none') return [];
   return asked.split(',').flatMap((start) => {
     const found = ids.filter((id) => id.startsWith(start));

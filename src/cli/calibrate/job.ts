@@ -1,6 +1,12 @@
 import type { Outcome } from '$lib/stats/calibration/outcome';
 import { repeat, type RepeatOptions } from '$lib/stats/calibration/repeat';
-import { truthSetting, violationSetting, type Setting } from '$lib/stats/calibration/setting';
+import { nuisances } from '$lib/stats/calibration/nuisances';
+import {
+  nuisanceSetting,
+  truthSetting,
+  violationSetting,
+  type Setting
+} from '$lib/stats/calibration/setting';
 import { truths } from '$lib/stats/calibration/truths';
 import { violations } from '$lib/stats/calibration/violations';
 
@@ -8,7 +14,7 @@ import { violations } from '$lib/stats/calibration/violations';
 export interface Job {
   /** Which row of the result the outcomes belong to. */
   row: number;
-  /** A truth when `strength` is null, else a violation. */
+  /** A truth when `strength` is null, else a violation or a nuisance. */
   id: string;
   strength: number | null;
   shots: number;
@@ -26,6 +32,8 @@ export async function runJob({ id, strength, shots, from, to, options }: Job): P
 }
 
 function settingOf(id: string, strength: number | null): Setting {
+  const nuisance = nuisances.find((one) => one.id === id);
+  if (nuisance) return nuisanceSetting(nuisance, strength ?? 0);
   return strength === null
     ? truthSetting(truths.find((truth) => truth.id === id)!)
     : violationSetting(

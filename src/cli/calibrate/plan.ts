@@ -24,6 +24,13 @@ export function plan(asked: CalibrateArguments): { rows: Row[]; jobs: Job[] } {
         rows.push({ id, strength, shots, repeats: Math.ceil(asked.repeats(shots) / 3) });
     }
   }
+  for (const id of asked.nuisances) {
+    for (const shots of asked.shots) {
+      const repeats = asked.repeats(shots);
+      rows.push({ id, strength: null, shots, repeats });
+      rows.push({ id, strength: 2, shots, repeats: Math.ceil(repeats / 3) });
+    }
+  }
   const { resamples, full, seed } = asked;
   const options = { resamples, full: Math.max(full, resamples), alpha: 0.01, seed };
   const jobs = rows.flatMap((row, index) =>

@@ -12,7 +12,9 @@ const tests: [name: PName, head: string][] = [
   ['empty-shots', 'empty'],
   ['batches', 'batches'],
   ['order', 'order'],
-  ['certificate', 'cert.']
+  ['certificate', 'cert.'],
+  ['within-batches', 'within'],
+  ['empty-aside', 'not empty']
 ];
 
 /** Shares in per cent, one line a setting; "!" where the exact interval of a false alarm lies above the limit. */

@@ -1,4 +1,4 @@
-import type { Evidence } from '../flags/evidence';
+import { oddOnRing, type Evidence } from '../flags/evidence';
 import type { Histogram, TestResult } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayKept } from '../words/say-kept';
@@ -6,11 +6,9 @@ import { sayRate } from '../words/say-rate';
 import { resamplesNeeded } from './unreachable';
 
 /** What a reader must keep in mind: first what this histogram adds, then what always holds. */
-export function cautions(
-  { options, shots, trials, moments, misread, rates }: Evidence,
-  histogram: Histogram,
-  tests: TestResult[]
-): string[] {
+export function cautions(evidence: Evidence, histogram: Histogram, tests: TestResult[]): string[] {
+  const { options, shots, trials, moments, misread, rates } = evidence;
+  const odd = oddOnRing(evidence);
   const out: string[] = [];
   if (histogram.lump) {
     out.push(
@@ -30,6 +28,11 @@ export function cautions(
   if (options.geometry !== 'sites' && !options.misread) {
     out.push(
       'Kinks are read from neighbouring sites: one misread site toggles two bonds, and independent kinks then look bunched. No misread rate was stated, and none is corrected for.'
+    );
+  }
+  if (odd > 0) {
+    out.push(
+      `Round a ring kinks come in pairs, so ${odd === 1 ? 'the shot with an odd count was' : `the ${formatCount(odd)} shots with an odd count were`} read or written wrongly, and as many with an even count may have been. They enter every test and bound here as they stand: the answer is of counts so read, not of the ring.`
     );
   }
   if (misread?.applies) {
@@ -61,7 +64,7 @@ export function cautions(
     const which =
       short.length === tests.length ? 'no test can' : `${short.length} of the ${tests.length} tests cannot`;
     out.push(
-      `With the resamples drawn, ${which} reach the level of ${formatNumber(options.alpha, 2)} once adjusted for ${tests.length} tests; that takes at least ${formatCount(resamplesNeeded({ tests, options }))}.`
+      `With the resamples drawn, ${which} reach the level of ${formatNumber(options.alpha, 2)} once adjusted for ${tests.length} tests; that takes at least ${formatCount(resamplesNeeded({ tests, options, rates }))}.`
     );
   }
   return out.concat(always);

@@ -1,4 +1,4 @@
-import { allEven, type Evidence } from '../flags/evidence';
+import { allEven, oddOnRing, type Evidence } from '../flags/evidence';
 import { sayStretches } from '../rate-interval/say-rates';
 import type { Flag, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
@@ -25,6 +25,9 @@ export function statement(
         ? evidence.trials === null
           ? ' They vary less than rare events of this mean would: a limited number of sites gives that by itself, and repulsion between defects would too.'
           : ' They are more regular than equal trials, which repulsion between defects would also give.'
+        : '') +
+      (oddOnRing(evidence) > 0
+        ? ` But no ring gives an odd count, and ${formatCount(oddOnRing(evidence))} of these are odd: they were read or written wrongly, and the answer takes them as they stand.`
         : '')
     );
   }

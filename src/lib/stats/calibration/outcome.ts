@@ -1,7 +1,8 @@
 import type { Cumulants } from '../laws/law-moments';
 import type { Diagnosis, Interval, TestId, Verdict } from '../types';
 
-export type PName = TestId | 'certificate';
+/** Tests, the certificate, and what stands beside them: shots within their batches, and shots that are not empty. */
+export type PName = TestId | 'certificate' | 'within-batches' | 'empty-aside';
 export const COVERED = ['mean', 'variance', 'third', 'fourth', 'dispersion'] as const;
 
 /** What one diagnosis said, as far as calibration asks. */
@@ -19,10 +20,13 @@ export interface Outcome {
 
 /** Reduces a diagnosis to its outcome. `cumulants` are those of the law the shots came from, or null. */
 export function outcomeOf(diagnosis: Diagnosis, cumulants: Cumulants | null): Outcome {
-  const { tests, tails, moments, flags, answer } = diagnosis;
+  const { tests, tails, moments, flags, answer, nuisances } = diagnosis;
   const p: Outcome['p'] = {};
   for (const test of tests) p[test.id] = test.p;
   if (tails.certificate) p.certificate = tails.certificate.p;
+  const within = nuisances?.drift?.split?.pTogether ?? null;
+  if (within !== null) p['within-batches'] = within;
+  if (nuisances?.emptyAside) p['empty-aside'] = nuisances.emptyAside.p;
   const adjusted = tests.map((test) => test.pAdjusted);
   return {
     p,

@@ -33,7 +33,13 @@ export async function repeat(
   // Two seeds from one mix: the engine's resamples cannot echo the shots.
   const [drawSeed, engineSeed] = mixSeed(nameSeed(`${setting.id} ${shots}`), seed * 2 ** 20 + index);
   const data = setting.draw(generator(drawSeed >>> 0, 0), shots);
-  const options = { ...defaultOptions, trials: setting.trials, alpha, seed: engineSeed >>> 0 };
+  const options = {
+    ...defaultOptions,
+    ...setting.options,
+    trials: setting.trials,
+    alpha,
+    seed: engineSeed >>> 0
+  };
   const first = await diagnose(data, { ...options, resamples });
   if (resamples >= full || !open(first, full)) return outcomeOf(first, setting.cumulants);
   const second = outcomeOf(await diagnose(data, { ...options, resamples: full }), setting.cumulants);

@@ -28,7 +28,9 @@ const NAMES: PName[] = [
   'empty-shots',
   'batches',
   'order',
-  'certificate'
+  'certificate',
+  'within-batches',
+  'empty-aside'
 ];
 
 /** Shares over the repeats of one setting, each with its exact interval. */

@@ -50,6 +50,10 @@ export function stronger(a: Grade, b: Grade): Grade {
   return a === 'shown' || b === 'shown' ? 'shown' : (a ?? b);
 }
 
+/** Shots with an odd count where kinks are counted singly round a ring, which gives none; 0 elsewhere and with a lump. */
+export const oddOnRing = ({ options, even, shots }: Pick<Evidence, 'options' | 'even' | 'shots'>): number =>
+  options.geometry === 'ring-bonds' && options.unit === 'defect' && even ? shots - even.seen : 0;
+
 /** True when every shot had an even count, as kinks on a ring do by construction. */
 export function allEven(evidence: Evidence): boolean {
   return (

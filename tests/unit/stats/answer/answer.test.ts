@@ -1,4 +1,5 @@
 import { answer } from '$lib/stats/answer/answer';
+import { changesOf } from '$lib/stats/rate-interval/changes-of';
 import { raiseFlags } from '$lib/stats/flags/raise-flags';
 import type { Evidence } from '$lib/stats/flags/evidence';
 import { describe, expect, it } from 'vitest';
@@ -153,5 +154,58 @@ describe('the words', () => {
     const same = { ...empty, moments: { ...empty.moments, mean: interval(4) } };
     expect(answer(same, []).statement).toMatch(/had the same count/);
     for (const of of [one, empty, same]) expect(answer(of, []).verdict).toBe('undecided');
+  });
+});
+
+describe('odd counts on a ring', () => {
+  const on = (seen: number, geometry: 'ring-bonds' | 'sites') =>
+    judge({
+      over: { options: { ...options, geometry }, even: { seen, expected: 0.5, oneCountAlone: false } }
+    }).statement;
+
+  it('leave a reservation in the answer, with their number; even ones and other geometries none', () => {
+    expect(on(1500, 'ring-bonds')).toMatch(/no ring gives an odd count, and 1\u202f?500 of these are odd/);
+    expect(on(3000, 'ring-bonds')).not.toContain('odd');
+    expect(on(1500, 'sites')).not.toContain('odd');
+  });
+});
+
+describe('a misread rate with an uncertainty', () => {
+  const at = (rate: number, verdict: 'ruled-out' | 'compatible' | 'undecided') => ({
+    rate,
+    verdict,
+    ceiling: 4.2,
+    dispersion: interval(1)
+  });
+  const over = (rates: ReturnType<typeof at>[]) => ({
+    over: {
+      misread: { applies: true as const, rate: 0.01 },
+      rates: {
+        uncertainty: 0.001,
+        miss: 1e-4,
+        low: rates[0].rate,
+        high: rates[rates.length - 1].rate,
+        cutByCounts: false,
+        rates,
+        changes: changesOf(rates),
+        statement: 'Rates.'
+      }
+    }
+  });
+
+  it('is compatible only where it is so at every rate', () => {
+    expect(judge(over([at(0.006, 'compatible'), at(0.014, 'compatible')]))).toMatchObject({
+      verdict: 'compatible'
+    });
+    const changes = judge(over([at(0.006, 'ruled-out'), at(0.014, 'compatible')]));
+    expect(changes).toMatchObject({ verdict: 'undecided', shotsToDecide: null });
+    expect(changes.statement).toMatch(/not known well enough.*0\.600.% independent trials are ruled out/);
+    expect(changes.because).toContain('Rates.');
+  });
+
+  it('cannot tell where each rate is ruled out by another test', () => {
+    const found = judge(over([at(0.006, 'ruled-out'), at(0.014, 'ruled-out')]));
+    expect(found.verdict).toBe('undecided');
+    expect(found.statement).toContain('no test does so at all of them');
   });
 });

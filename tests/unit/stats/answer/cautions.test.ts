@@ -39,6 +39,16 @@ describe('cautions', () => {
       { over: { misread: { applies: false, reason: 'It is written down, but not allowed for.' } } },
       /not allowed for/
     ],
+    [
+      'odd counts on a ring',
+      {
+        over: {
+          options: { ...defaultOptions, geometry: 'ring-bonds' },
+          even: { seen: 2990, expected: 0.5, oneCountAlone: false }
+        }
+      },
+      /the 10 shots with an odd count were read or written wrongly/
+    ],
     ['few shots', { over: { shots: 299 } }, /fewer than about 300 shots/]
   ])('name %s', (_name, made, want) => {
     expect(all(made)).toMatch(want);
