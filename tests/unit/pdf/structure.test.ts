@@ -110,6 +110,21 @@ describe.each(DOCUMENTS)('the structure of the report of %s', (_name, make) => {
     }
   });
 
+  it('has notes in the margin on the page of what they are about', () => {
+    const pageOf = (mark: string) => pagesOf(pdf).findIndex(([id]) => id === Number(mark.split(' ')[0]));
+    const rows = nodes
+      .filter(({ type, kids }) => type === 'Sect' && kids.some((kid) => kid.type === 'Div'))
+      .flatMap(({ kids }) => kids.map((kid, i) => [kid, kids[i + 1]]))
+      // The notes of a row are the only ones to hold sections of their own.
+      .filter(([, notes]) => notes?.type === 'Div' && notes.kids.every(({ type }) => type === 'Sect'));
+    expect(rows.length).toBeGreaterThan(6);
+    for (const [row, notes] of rows) {
+      const [first] = inOrder(row).flatMap(({ marks }) => marks);
+      const stand = inOrder(notes).flatMap(({ marks }) => marks.map(pageOf));
+      expect([...new Set(stand)]).toEqual([pageOf(first)]);
+    }
+  });
+
   it('has tables of rows of equal length, whose heads say what they head (7.5)', () => {
     const tables = nodes.filter(({ type }) => type === 'Table');
     expect(tables.length).toBeGreaterThan(2);

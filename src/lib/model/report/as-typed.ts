@@ -4,3 +4,9 @@
  */
 export const asTyped = (text: string): string =>
   `“\u2068${text.replace(/[\u202a-\u202e\u2066-\u2069]/g, '').trim()}\u2069”`;
+
+/** The same where the sentence ends with it: no second stop after one that was typed. */
+export function endAsTyped(text: string): string {
+  const quoted = asTyped(text);
+  return /[.!?…。！？؟।]["'”’»)\]]*\u2069”$/u.test(quoted) ? quoted : `${quoted}.`;
+}

@@ -1,7 +1,7 @@
 import { sayKept } from '$lib/stats/words/say-kept';
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount } from '../format-number';
-import { asTyped } from './as-typed';
+import { endAsTyped } from './as-typed';
 import { sayCriticalTrials } from './say-critical-trials';
 import { sayChange, sayDrift, sayWithin } from './say-drift';
 import { sayFlagged } from './say-flagged';
@@ -77,7 +77,7 @@ export function sayPostSelection(stated: Stated | null): string {
   const effect = 'Dropping empty shots or large counts makes counts look more regular than they were.';
   if (stated?.postSelection === undefined) return `Whether shots were dropped is not told here. ${effect}`;
   if (!stated.postSelection) return `None is stated. ${effect}`;
-  return `Stated: ${asTyped(stated.postSelection)}. ${effect}`;
+  return `Stated: ${endAsTyped(stated.postSelection)} ${effect}`;
 }
 
 function trials(document: Diagnosis, stated: Stated | null): string {
@@ -86,7 +86,7 @@ function trials(document: Diagnosis, stated: Stated | null): string {
     stated?.trialsWhy === undefined
       ? ''
       : stated.trialsWhy
-        ? ` Stated reason: ${asTyped(stated.trialsWhy)}.`
+        ? ` Stated reason: ${endAsTyped(stated.trialsWhy)}`
         : ' No reason for this N is stated.';
   const given = trials === null ? 'N is unknown; no limit is assumed.' : `N is ${formatCount(trials)}.${why}`;
   return `${given} ${sayCriticalTrials(document)}`;

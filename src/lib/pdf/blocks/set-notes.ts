@@ -1,4 +1,4 @@
-import type { Flow } from '../page/flow';
+import { NOTE_GAP, type Flow } from '../page/flow';
 import { PAGE } from '../page/geometry';
 import { mark, tag, type Element } from '../page/tags';
 import { breakLines, type Line } from '../type/break-lines';
@@ -10,6 +10,12 @@ import { baseline, placeLine } from './set-lines';
 
 const INDENT = 8;
 
+interface SetNote {
+  title: Line[];
+  paragraphs: SetParagraph[];
+  height: number;
+}
+
 interface SetParagraph {
   lines: Line[];
   indent: number;
@@ -19,11 +25,8 @@ interface SetParagraph {
 /** Sets notes in the margin, level with the cursor; `parent` is where they are read out. */
 export function setNotes(flow: Flow, notes: MarginNote[], parent: Element): void {
   for (const note of notes) {
-    const title = breakLines([{ text: note.title, style: STYLES.noteTitle }], PAGE.noteWidth, flow.pen);
-    const paragraphs = paragraphsOf(note, flow.pen);
-    const lines = title.length + paragraphs.reduce((sum, { lines }) => sum + lines.length, 0);
+    const { title, paragraphs, height } = laidOut(note, flow.pen);
     const leading = STYLES.note.leading;
-    const height = lines * leading + (paragraphs.length - 1) * 2;
     // Made here, so that it is read out in its place also when it is drawn on the next page.
     const element = tag(flow.doc, parent, 'Sect');
     flow.putInMargin({
@@ -53,6 +56,19 @@ export function setNotes(flow: Flow, notes: MarginNote[], parent: Element): void
       }
     });
   }
+}
+
+/** How high notes stand in the margin one below the other, in points; 0 without any. */
+export function notesHeight(notes: MarginNote[], pen: Pen): number {
+  const heights = notes.map((note) => laidOut(note, pen).height);
+  return heights.reduce((sum, height) => sum + height, 0) + Math.max(0, notes.length - 1) * NOTE_GAP;
+}
+
+function laidOut(note: MarginNote, pen: Pen): SetNote {
+  const title = breakLines([{ text: note.title, style: STYLES.noteTitle }], PAGE.noteWidth, pen);
+  const paragraphs = paragraphsOf(note, pen);
+  const lines = title.length + paragraphs.reduce((sum, { lines }) => sum + lines.length, 0);
+  return { title, paragraphs, height: lines * STYLES.note.leading + (paragraphs.length - 1) * 2 };
 }
 
 function paragraphsOf({ paragraphs = [], items = [] }: MarginNote, pen: Pen): SetParagraph[] {

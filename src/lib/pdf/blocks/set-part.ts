@@ -6,7 +6,7 @@ import { STYLES } from '../type/styles';
 import type { Block, Part, Row } from './blocks';
 import { leastHeight, setBlock } from './set-block';
 import { setLines } from './set-lines';
-import { setNotes } from './set-notes';
+import { notesHeight, setNotes } from './set-notes';
 
 const GAP = 9;
 
@@ -15,7 +15,7 @@ export function setPart(flow: Flow, part: Part, look: { rule: boolean }): void {
   const section = tag(flow.doc, flow.root, 'Sect');
   flow.clearMargin();
   flow.skip(15);
-  flow.need(STYLES.section.leading + 16 + leastHeight(flow, part.rows[0]?.blocks ?? []));
+  flow.need(STYLES.section.leading + 16 + leastRow(flow, part.rows[0]));
   if (look.rule) {
     rule(flow.doc, PAGE.left, flow.y, PAGE.whole, 'line');
     flow.y += 8;
@@ -35,8 +35,10 @@ export function setPart(flow: Flow, part: Part, look: { rule: boolean }): void {
 }
 
 function setRow(flow: Flow, { blocks, notes }: Row, section: PDFKit.PDFStructureElement): void {
+  // Notes of the row before may reach further down than its blocks: these would stand beside what they are not about.
+  if (notes?.length) flow.clearMargin();
   // The notes are drawn first, since they may run beside several pages' worth of blocks, but are read out after them.
-  flow.need(leastHeight(flow, blocks));
+  flow.need(leastRow(flow, { blocks, notes }));
   const main = tag(flow.doc, section, 'Div');
   if (notes?.length) setNotes(flow, notes, tag(flow.doc, section, 'Div'));
   blocks.forEach((block: Block, i) => {
@@ -47,6 +49,10 @@ function setRow(flow: Flow, { blocks, notes }: Row, section: PDFKit.PDFStructure
     setBlock(flow, block, main);
   });
 }
+
+/** Room that a row needs: its first blocks, and its notes, which no page may part from what they are about. */
+const leastRow = (flow: Flow, row: Row | undefined): number =>
+  Math.max(leastHeight(flow, row?.blocks ?? []), notesHeight(row?.notes ?? [], flow.pen));
 
 /** Points between two blocks: headings and leads stand close to what they lead, remarks to what they are on. */
 function gapBetween(before: Block, block: Block): number {

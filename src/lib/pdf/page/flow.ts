@@ -8,6 +8,9 @@ export interface MarginPiece {
   draw: (x: number, y: number) => void;
 }
 
+/** Points between two notes in the margin. */
+export const NOTE_GAP = 9;
+
 /** Where the next thing goes: a cursor down the main column and one down the margin, over as many pages as it takes. */
 export class Flow {
   y: number = PAGE.top;
@@ -70,7 +73,7 @@ export class Flow {
       return;
     }
     piece.draw(PAGE.note, y);
-    this.marginY = y + piece.height + 9;
+    this.marginY = y + piece.height + NOTE_GAP;
   }
 
   /** Moves the cursor below the notes, for something that is as wide as both columns. */
