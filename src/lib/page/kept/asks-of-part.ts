@@ -1,10 +1,17 @@
 const WALKS = /^(Arrow|Page|Home$|End$)/;
 
+interface Asks {
+  answer: () => void;
+  /** For a part that could not be made live: what was asked is not done much later. */
+  forget: () => void;
+  stop: () => void;
+}
+
 /**
- * Keeps what is asked of a part before it is live: keys that walk a chart, touches, buttons and choices. The rest the
- * browser does by itself. The first sign of being wanted calls `wanted`; `answer` repeats the asks once the part is live.
+ * Keeps what is asked of a part before it is live: keys that walk a chart, touches, buttons and forms. The rest the
+ * browser does by itself, and `keepTyped` sees to what stands in fields. The first sign of being wanted calls `wanted`; `answer` repeats the asks once the part is live.
  */
-export function asksOfPart(place: HTMLElement, wanted: () => void): { answer: () => void; stop: () => void } {
+export function asksOfPart(place: HTMLElement, wanted: () => void): Asks {
   const asked: (() => void)[] = [];
   const stopping = new AbortController();
   const { signal } = stopping;
@@ -40,31 +47,31 @@ export function asksOfPart(place: HTMLElement, wanted: () => void): { answer: ()
     (event) => {
       wanted();
       const button = (event.target as Element).closest('button');
-      if (button) asked.push(() => button.click());
+      if (button && !(button.form && button.type === 'submit')) asked.push(() => button.click());
     },
     { signal }
   );
 
+  // A form that posts is sent by the browser itself; one without an address is its script's alone.
   place.addEventListener(
-    'change',
+    'submit',
     (event) => {
       wanted();
-      const on = event.target;
-      if (!(on instanceof HTMLInputElement) || !['radio', 'checkbox'].includes(on.type)) return;
-      const { checked } = on;
-      asked.push(() => {
-        on.checked = checked;
-        on.dispatchEvent(new Event('change', { bubbles: true }));
-      });
+      const form = event.target as HTMLFormElement;
+      if (form.method === 'post') return;
+      event.preventDefault();
+      asked.push(() => form.requestSubmit());
     },
     { signal }
   );
+  place.addEventListener('change', wanted, { signal });
 
   return {
     answer: () => {
       stopping.abort();
       for (const ask of asked) ask();
     },
+    forget: () => void asked.splice(0),
     stop: () => stopping.abort()
   };
 }

@@ -1,5 +1,7 @@
 import { flushSync, hydrate, mount, unmount, type Component } from 'svelte';
 import { asksOfPart } from './asks-of-part';
+import { keepTyped } from './keep-typed';
+import { sayNotLoaded } from './say-not-loaded';
 
 /** What makes a part live: at once where it is at hand, or loaded. */
 export interface Maker<Props extends Record<string, unknown>> {
@@ -18,7 +20,8 @@ export interface Waking {
  * Makes a part of a page live in its place. What the server drew stands until the reader comes within half a window of
  * it, points at it or focuses it; what was asked of it meanwhile is done then. An empty place is filled at once.
  *
- * A part that does not load stays as it was drawn, and is tried again when it is next asked.
+ * A part that does not load stays as it was drawn, and says so when it is asked something. It is tried again then, but
+ * browsers remember a script that they could not fetch, so that often only loading the page again helps.
  *
  * @param context what components around the part have set, for those in it
  */
@@ -33,7 +36,12 @@ export function waken<Props extends Record<string, unknown>>(
   let loading = false;
   let gone = false;
 
-  const asks = asksOfPart(place, start);
+  let wanted = false;
+
+  const asks = asksOfPart(place, () => {
+    wanted = true;
+    start();
+  });
   const near = new IntersectionObserver((seen) => seen.some((one) => one.isIntersecting) && start(), {
     rootMargin: '50% 0px'
   });
@@ -43,18 +51,23 @@ export function waken<Props extends Record<string, unknown>>(
     near.disconnect();
     // In an empty place nothing was asked, and this may run while the page around it is being made.
     if (!drawn) return void (made = mount(Part, { target: place, props, context }));
-    const open = [...place.querySelectorAll('details')].map((fold) => fold.open);
+    const putBack = keepTyped(place);
     made = hydrate(Part, { target: place, props, context });
     flushSync();
-    // What binds a fold begins with it closed: one that the reader opened meanwhile stays open.
-    place.querySelectorAll('details').forEach((fold, i) => open[i] && (fold.open = true));
+    putBack();
     asks.answer();
   }
 
   function start(): void {
     if (loading || made) return;
     loading = true;
-    load().then(make, () => (loading = false));
+    load().then(make, failed);
+  }
+
+  function failed(): void {
+    loading = false;
+    asks.forget();
+    if (drawn && wanted) sayNotLoaded(place);
   }
 
   const known = atHand();
