@@ -10,6 +10,7 @@ import { layoutFaults } from './support/layout-faults';
 import { openBrowser } from './support/open-browser';
 import { signIn } from './support/sign-in';
 import { startServer, type RunningServer } from './support/start-server';
+import { unrolled } from './support/unrolled';
 
 const WIDTHS = [390, 1280, 1920];
 const SCHEMES = ['light', 'dark'] as const;
@@ -58,6 +59,7 @@ describe('every page, with the invented team in it', () => {
         if (address.includes('#counts'))
           await visitor.locator('#answer-heading').waitFor({ timeout: DIAGNOSED });
         await visitor.waitForFunction(() => !document.querySelector('progress'));
+        await unrolled(visitor);
         const found: string[] = [];
         for (const width of WIDTHS) {
           await visitor.setViewportSize({ width, height: 900 });
