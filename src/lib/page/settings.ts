@@ -19,6 +19,9 @@ export interface Settings {
 
 export type SettingName = keyof Settings;
 
+/** Settings that are typed, not chosen. */
+export type TypedName = Exclude<SettingName, 'unit' | 'geometry'>;
+
 /** The fields of a fresh page. */
 export const freshSettings = (): Settings => ({
   trials: '',
