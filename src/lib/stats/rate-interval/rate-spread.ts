@@ -45,7 +45,8 @@ const spare = 1.5;
  * The answer where a misread rate is known with an uncertainty (Berger and Boos): every p is the largest over an interval
  * that holds the rate but for the chance β, plus β. The largest is taken over both ends of the interval, the rate stated
  * and the rate that fits best within; the ceiling test grows with the rate, and the tests of the fit are at their largest
- * near the last. tests/unit/stats/rate-interval holds that against a fine grid, and the false alarms against repeats.
+ * near the last. A test holds the best rate against a grid; that no p peaks between the four is not proved, and the false
+ * alarms are held by repeats (`npm run calibrate -- --nuisance all`).
  */
 export async function rateSpread(stated: Stated, pace: Pace): Promise<OverRates> {
   const { counts, histogram, options, limits, moments, order } = stated;
