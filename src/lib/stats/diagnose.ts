@@ -93,7 +93,9 @@ export async function diagnose(
   const atStated = [...(ceiling ? [ceiling] : []), ...fitted.tests];
   const known = { counts, histogram, options, moments, tested, tests: atStated, order: order.tests };
   const over =
-    unsure && ceiling ? await rateSpread({ ...known, limits: unsure }, pace.within(0.3, 0.8)) : undefined;
+    unsure && ceiling
+      ? await rateSpread({ ...known, limits: unsure }, pace.within(0.3, 0.8), helper)
+      : undefined;
   const certificate = over ? over.certificate : tested.certificate;
   const tests = adjust([...(over?.tests ?? atStated), ...order.tests]);
   const table = lawTable(counts, law);

@@ -1,6 +1,7 @@
 import type { FitData } from '../fit/fit-data';
 import { misreadNull } from '../nulls/misread-null';
 import { varianceTest } from '../resampling/ceiling-test';
+import type { DrawHelper } from '../resampling/draw-helper';
 import { fittedTests } from '../resampling/fitted-tests';
 import type { Pace } from '../resampling/pace';
 import type { Certificate, DiagnoseOptions, Histogram, TestResult } from '../types';
@@ -20,6 +21,7 @@ export interface AtRate {
  * The ceiling test, the tests of the fit and the certificate at one misread rate.
  *
  * @param enough asked once the ceiling test is known: true ends there, where that alone settles the answer
+ * @param helper makes some of the draws elsewhere; see fittedTests
  */
 export async function atRate(
   counts: FitData,
@@ -27,7 +29,8 @@ export async function atRate(
   rate: number,
   options: DiagnoseOptions,
   pace: Pace,
-  enough: (ceiling: BareTest) => boolean = () => false
+  enough: (ceiling: BareTest) => boolean = () => false,
+  helper?: DrawHelper
 ): Promise<AtRate> {
   const tested = misreadNull(counts, histogram, rate, options);
   const drawing = { resamples: options.resamples, seed: options.seed };
@@ -35,7 +38,7 @@ export async function atRate(
   const variance = await varianceTest(counts, window, ceiling, drawing, partOf(pace, 0, 0.2));
   const rest = enough(variance)
     ? []
-    : (await fittedTests(counts, tested, drawing, partOf(pace, 0.2, 1))).tests;
+    : (await fittedTests(counts, tested, drawing, partOf(pace, 0.2, 1), helper)).tests;
   return { rate, ceiling: tested.ceiling!, tests: [variance, ...rest], certificate: tested.certificate };
 }
 

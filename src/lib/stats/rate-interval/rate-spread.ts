@@ -3,6 +3,7 @@ import { smallestExcess } from '../answer/smallest-excess';
 import type { FitData } from '../fit/fit-data';
 import { adjust } from '../multiple/adjust';
 import type { NullLaw } from '../nulls/null-law';
+import type { DrawHelper } from '../resampling/draw-helper';
 import type { Pace } from '../resampling/pace';
 import type { Certificate, DiagnoseOptions, Diagnosis, Histogram, Interval } from '../types';
 import { atRate, partOf, type AtRate, type BareTest } from './at-rate';
@@ -47,8 +48,10 @@ const spare = 1.5;
  * and the rate that fits best within; the ceiling test grows with the rate, and the tests of the fit are at their largest
  * near the last. A test holds the best rate against a grid; that no p peaks between the four is not proved, and the false
  * alarms are held by repeats (`npm run calibrate -- --nuisance all`).
+ *
+ * @param helper makes some of the draws elsewhere; the answers are the same with and without
  */
-export async function rateSpread(stated: Stated, pace: Pace): Promise<OverRates> {
+export async function rateSpread(stated: Stated, pace: Pace, helper?: DrawHelper): Promise<OverRates> {
   const { counts, histogram, options, limits, moments, order } = stated;
   const { rate, low, high, miss } = limits;
   const excess = smallestExcess(moments.mean.value!, counts.trials, counts.total);
@@ -81,7 +84,9 @@ export async function rateSpread(stated: Stated, pace: Pace): Promise<OverRates>
   };
   const tried = [known];
   for (const [i, one] of others.entries())
-    tried.push(await atRate(counts, histogram, one, fewer, partOf(pace, i / 6, (i + 1) / 6)));
+    tried.push(
+      await atRate(counts, histogram, one, fewer, partOf(pace, i / 6, (i + 1) / 6), undefined, helper)
+    );
   const tests = worstTests(stated.tests, tried, miss);
   const certificate = worstCertificate(
     tried.map((one) => one.certificate),
@@ -101,7 +106,8 @@ export async function rateSpread(stated: Stated, pace: Pace): Promise<OverRates>
       middle,
       fewer,
       partOf(pace, from, from + 1 / (2 * mostSought)),
-      settles
+      settles,
+      helper
     );
     rates.push(settledOr(at, verdictOf, settles));
     rates.sort((a, b) => a.rate - b.rate);

@@ -13,8 +13,8 @@ export interface DrawRange {
  */
 export interface DrawHelper {
   /**
-   * Answers of a range of draws, in order, as rangeAnswerer gives them. The job is the same object at every call, and
-   * plain. A helper that rejects is asked no more, and one that never answers is not waited for.
+   * Answers of a range of draws, in order, as rangeAnswerer gives them. The job is plain, and the same object until
+   * another law is drawn from (a diagnosis at several misread rates). A helper that rejects is asked no more, and one that never answers is not waited for.
    */
   answers(job: FittedJob, range: DrawRange): Promise<DrawAnswer[]>;
 }

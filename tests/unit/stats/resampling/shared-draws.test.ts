@@ -1,6 +1,7 @@
 import { diagnose } from '$lib/stats/diagnose';
 import { defaultOptions } from '$lib/stats/default-options';
 import { bestLaw } from '$lib/stats/fit/best-law';
+import { isReadChain } from '$lib/stats/misread/read-chain';
 import type { DrawHelper } from '$lib/stats/resampling/draw-helper';
 import { divergencesKept, fittedDraws, type FittedJob } from '$lib/stats/resampling/fitted-draws';
 import { rangeAnswerer } from '$lib/stats/resampling/range-answerer';
@@ -62,6 +63,30 @@ describe('a diagnosis with a helper', () => {
     expect(asked.length).toBeGreaterThan(data === doubtful ? 100 : 0);
     // Nothing is lent twice.
     expect(new Set(asked).size).toBe(asked.length);
+  });
+
+  it('at every rate of an uncertain misread rate, and is the same to the byte', async () => {
+    const options = {
+      ...defaultOptions,
+      trials: 12,
+      resamples: 499,
+      geometry: 'open-bonds' as const,
+      misread: 0.01,
+      misreadUncertainty: 0.002
+    };
+    const { helper } = faithful();
+    const rates = new Set<number>();
+    const spied: DrawHelper = {
+      answers: (job, range) => {
+        if (isReadChain(job.levels)) rates.add(job.levels.rate);
+        return helper.answers(job, range);
+      }
+    };
+    const alone = await diagnose(doubtful, options);
+    const together = await diagnose(doubtful, options, undefined, undefined, spied);
+    expect(JSON.stringify(together)).toBe(JSON.stringify(alone));
+    const { low, high } = alone.nuisances!.misread!.spread!;
+    expect([...rates]).toEqual(expect.arrayContaining([0.01, low, high]));
   });
 
   it.each([
