@@ -2,6 +2,7 @@ import type { Evidence } from '../flags/evidence';
 import type { Diagnosis, Flag, Verdict } from '../types';
 import { because } from './because';
 import { decide } from './decide';
+import { restsOnSearch } from './rests-on-search';
 import { shotsToDecide } from './shots-to-decide';
 import { smallestExcess } from './smallest-excess';
 import { statement } from './statement';
@@ -14,7 +15,8 @@ import { unreachable } from './unreachable';
  * - compatible: neither, and the data could have shown an excess that matters: the upper 95 % limit of
  *   variance/ceiling is below 1 + tolerance, an excess of one half would have been seen, there are at least 50 shots,
  *   and no test is as extreme as its resamples can show;
- * - undecided: otherwise, with the number of shots that would decide.
+ * - undecided: otherwise, with the number of shots that would decide. Also where only a law that may not be the best
+ *   speaks against independent trials (see restsOnSearch).
  *
  * A misread rate known with an uncertainty: compatible only where it is so at every rate tried.
  */
@@ -37,10 +39,8 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
     alpha: options.alpha,
     tests: Math.max(1, evidence.tests.length)
   };
-  const needed =
-    verdict === 'undecided' && testable && unreachable(evidence).length === 0 && !ratesDiffer(evidence)
-      ? shotsToDecide(deciding)
-      : null;
+  const open = unreachable(evidence).length === 0 && !ratesDiffer(evidence) && !restsOnSearch(evidence);
+  const needed = verdict === 'undecided' && testable && open ? shotsToDecide(deciding) : null;
   return {
     verdict,
     statement: statement(verdict, evidence, flags, needed),

@@ -40,7 +40,7 @@ export function cautions(evidence: Evidence, histogram: Histogram, tests: TestRe
       ? `every p and the certificate here are the worst over the interval of that rate (${formatPercent(rates.low, 3)} to ${formatPercent(rates.high, 3)}), plus the chance that it lies outside; its error is taken to be normal, and the rate the same at every site and independent of the others. The law, the bounds of the tails and the split by batches are those at ${sayRate(misread.rate)}.`
       : `every test, bound and flag here allows for exactly that rate, the same at every site and independent of the others. An error of the rate itself is not allowed for: state its uncertainty, or compare the rate needed with the limits of the calibration.`;
     out.push(
-      `A misread rate of ${sayRate(options.misread ?? misread.rate)} a site was stated, and ${known} The best law is searched among few orders of the bonds, so independent kinks that are all but sure on some bonds and excluded on others may look like a misfit; ceiling and certificate do not depend on it.`
+      `A misread rate of ${sayRate(options.misread ?? misread.rate)} a site was stated, and ${known} The best law is searched among few orders of the bonds, so independent kinks that are all but sure on some bonds and excluded on others may look like a misfit: where nothing else speaks against independent trials and the variance lies below its ceiling, the answer is that it cannot tell. Ceiling and certificate do not depend on that law.`
     );
   } else if (misread?.reason) {
     out.push(misread.reason);

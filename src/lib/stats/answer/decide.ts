@@ -1,5 +1,6 @@
 import type { Evidence } from '../flags/evidence';
 import type { Verdict } from '../types';
+import { restsOnSearch } from './rests-on-search';
 import { unreachable } from './unreachable';
 
 /** Fewer shots than this are never called compatible: the rule below fails for tiny N. */
@@ -12,15 +13,14 @@ const fewest = 50;
 const blind = 0.5;
 
 /** What the verdict is decided from. */
-export type Decided = Pick<Evidence, 'certificate' | 'tests' | 'options' | 'shots'> & {
+export type Decided = Pick<Evidence, 'certificate' | 'tests' | 'options' | 'shots' | 'misread'> & {
   moments: Pick<Evidence['moments'], 'dispersion'>;
 };
 
 /** See answer. @param excess smallest excess that would have been seen; null for none */
-export function decide(
-  { certificate, tests, moments, options, shots }: Decided,
-  excess: number | null
-): Verdict {
+export function decide(decided: Decided, excess: number | null): Verdict {
+  const { certificate, tests, moments, options, shots } = decided;
+  if (restsOnSearch(decided)) return 'undecided';
   if (certificate && certificate.p <= options.alpha) return 'ruled-out';
   if (tests.some((test) => test.pAdjusted <= options.alpha)) return 'ruled-out';
   if (unreachable({ tests, options }).length > 0) return 'undecided';

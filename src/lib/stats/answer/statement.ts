@@ -4,6 +4,7 @@ import type { Flag, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayRate } from '../words/say-rate';
 import { sayHowOften } from '../words/say-p';
+import { restsOnSearch } from './rests-on-search';
 import { resamplesNeeded, unreachable } from './unreachable';
 
 /** The answer in one or two sentences, plain first. */
@@ -37,6 +38,8 @@ export function statement(
     return `No defect was seen in ${shots}, so there is nothing to test.`;
   if (evidence.moments.variance.value === 0)
     return `Every one of these ${shots} had the same count, so there is no spread to test.`;
+  if (restsOnSearch(evidence))
+    return `These ${shots} cannot tell: they misfit the best law found, but their variance lies below the ceiling, where bonds that are sure or excluded in an order that was not searched can give such counts without any interaction.`;
   const blind = unreachable(evidence);
   if (blind.length > 0) {
     return `These ${shots} cannot be judged with ${formatCount(evidence.options.resamples)} resamples: ${blind.length === 1 ? 'one test is' : `${formatCount(blind.length)} tests are`} as extreme as so few can show. Use at least ${formatCount(resamplesNeeded(evidence))}.`;

@@ -28,7 +28,8 @@ const mostToOrder = 200;
  * How far that reaches (best law of the family from the truth, nats a shot, ε = 0.01): 3e-10 for p rising steadily from
  * 0 to 0.3, 5e-8 for p anywhere between 0 and 0.2, 4e-6 for 0.02 and 0.2 alternating, all with 100 bonds.
  * It falls short where bonds are sure or excluded in an order of their own: with p all 0 or 1 at random along 30 bonds and
- * ε = 0.03 a G² of 89 was left at 5000 shots. Such kinks, though independent, look like a misfit.
+ * ε = 0.03 a G² of 89 was left at 5000 shots. Such kinks, though independent, look like a misfit, and
+ * the answer then is that it cannot tell (restsOnSearch).
  *
  * @param data trials = N bonds; `kept` sets counts aside that lie outside it (conditioned law), null for none
  * @param enough nats to which the last climb is made

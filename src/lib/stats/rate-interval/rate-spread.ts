@@ -64,6 +64,7 @@ export async function rateSpread(stated: Stated, pace: Pace, helper?: DrawHelper
         tests: adjust([...worstTests(at.tests, [], miss), ...order]),
         moments: { dispersion },
         options,
+        misread: { applies: true, rate: at.rate },
         shots: counts.total
       },
       excess
