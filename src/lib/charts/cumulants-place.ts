@@ -20,10 +20,9 @@ export interface CumulantsPlace {
 export function cumulantsPlace(diagnosis: Diagnosis): CumulantsPlace | { reason: string } {
   const { moments, data, fit } = diagnosis;
   const { mean, variance, fano } = moments;
-  if (data.lump)
+  if (data.lump || data.below)
     return {
-      reason:
-        'A closing row lumps counts, so the cumulants are lower limits: no place among those of independent trials can be told.'
+      reason: `${data.lump ? 'A closing' : 'An opening'} row lumps counts, so the cumulants are no more than limits: no place among those of independent trials can be told.`
     };
   if (!mean.value || variance.value === null || fano.value === null || moments.third.value === null)
     return {

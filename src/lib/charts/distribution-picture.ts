@@ -8,6 +8,7 @@ import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
 import { isShown } from './is-shown';
 import { linePath } from './line-path';
+import { lumpMarks, lumpSpan } from './lump-marks';
 import { observedMarks } from './observed-marks';
 import type { Mark, Picture, Point, Size } from './picture';
 import { residualMarks } from './residual-marks';
@@ -21,9 +22,13 @@ const LEAST = 5;
 
 /** Counts against the best independent-trial law, and below them how far each lies from it. */
 export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size): Picture {
-  const { shots, lump } = diagnosis.data;
+  const { shots } = diagnosis.data;
   const [from, to] = shownSpan(diagnosis.distribution, (point) => isShown(point, shots));
   const points = diagnosis.distribution.filter((point) => point.count >= from && point.count <= to);
+  const lumps = points.filter(({ lump }) => lump);
+  const opening = lumps.find(({ below }) => below);
+  const closing = lumps.find(({ below }) => !below);
+  const singles = points.filter(({ lump }) => !lump);
   const highest = Math.max(
     ...points.map((point) => Math.max(point.fitted, point.shots > 0 ? point.high : 0))
   );
@@ -34,11 +39,14 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
   const main = frameOf(width, mainHeight, { left, right: text * 1.8, top: text * 2.2, bottom: 0 });
   const below = { ...main, top: main.bottom + text * 3.4, bottom: main.bottom + text * 3.4 + residualHeight };
   const height = below.bottom + text * 3.8;
-  const x = scaleLinear([from - 0.6, to + 0.6], [main.left, main.right]);
+  const x = scaleLinear(
+    [(opening ? lumpSpan(opening)[0] : from) - 0.6, (closing ? lumpSpan(closing)[1] : to) + 0.6],
+    [main.left, main.right]
+  );
   const y = scaleLinear([0, highest * 1.04 || 1], [main.bottom, main.top]);
 
-  const groups = groupCounts(points, x(1) - x(0), LEAST);
-  const together = groups[0].length;
+  const groups = groupCounts(singles, x(1) - x(0), LEAST);
+  const together = groups[0]?.length ?? 1;
   const shares = y.ticks(5);
   const texts = tickTexts(shares, 100, '\u2009%');
   const marks: Mark[] = [
@@ -50,16 +58,22 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
     ),
     { kind: 'path', role: 'axis', d: `M${main.left},${main.bottom}H${main.right}` },
     ...drawnCounts(groups, x, y),
+    ...lumpMarks(lumps, x, y),
     {
       kind: 'path',
       role: 'fitted',
       d: linePath(
-        points.map((p): Point => [x(p.count), y(p.fitted)]),
+        singles.map((p): Point => [x(p.count), y(p.fitted)]),
         main
       )
     },
-    ...residualMarks(groups, x, below, text),
-    ...bottomAxis(below, countTicks(x, text, lump ? lump.from : null), countTitle(diagnosis), text)
+    ...residualMarks([...groups, ...(together === 1 ? lumps.map((lump) => [lump]) : [])], x, below, text),
+    ...bottomAxis(
+      below,
+      countTicks(x, text, { from: closing?.count ?? null, to: opening?.count ?? null }),
+      countTitle(diagnosis),
+      text
+    )
   ];
   return {
     width,
@@ -68,6 +82,9 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
     marks,
     legend: [
       { role: 'observed', label: 'seen, with its 95 % interval' },
+      ...(lumps.length > 0
+        ? [{ role: 'range' as const, label: 'a row that lumps counts: bar, interval and law of all of them' }]
+        : []),
       { role: 'fitted', label: 'best independent-trial law' },
       ...legendOfStanding(points)
     ],
@@ -95,6 +112,7 @@ function legendOfStanding(points: DistributionPoint[]): Picture['legend'] {
 type Place = (value: number) => number;
 
 function drawnCounts(groups: DistributionPoint[][], x: Place, y: Place): Mark[] {
+  if (groups.length === 0) return [];
   if (groups[0].length === 1) {
     const seen = groups.flat().map((point) => ({
       at: [x(point.count), y(point.observed)] as Point,

@@ -12,7 +12,7 @@ export const distributionTable = ({ distribution }: Diagnosis): Table => ({
     { title: 'best law', kind: 'number' }
   ],
   rows: distribution.map((point) => [
-    point.lump ? `${point.count}+` : point.count,
+    point.below ? `0–${point.count}` : point.lump ? `${point.count}+` : point.count,
     point.shots,
     point.observed,
     point.low,

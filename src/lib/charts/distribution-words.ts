@@ -11,7 +11,8 @@ const VERDICT = {
 
 /** One count read out in words. */
 export function distributionWords(point: DistributionPoint, shots: number): string {
-  const name = point.lump ? `Count ${formatCount(point.count)} or more` : `Count ${formatCount(point.count)}`;
+  const lumped = point.below ? ' or fewer' : point.lump ? ' or more' : '';
+  const name = `Count ${formatCount(point.count)}${lumped}`;
   const seen =
     point.shots === 0
       ? 'never seen'

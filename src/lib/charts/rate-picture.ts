@@ -62,7 +62,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
     ...horizon.filter((mark) => mark.kind === 'text'),
     ...bottomAxis(
       frame,
-      data.trials === null ? countTicks(x, text, null) : roomyTicks(x, text),
+      data.trials === null ? countTicks(x, text) : roomyTicks(x, text),
       densityTitle(diagnosis),
       text
     )

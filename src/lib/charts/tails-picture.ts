@@ -45,7 +45,7 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
     ...groups.flatMap((side) => tailPoints(side, x, floor, frame)),
     ...bottomAxis(
       frame,
-      countTicks(x, text, null),
+      countTicks(x, text),
       `n ${unit === 'pair' ? 'pairs' : 'defects'} or fewer; n or more`,
       text
     )

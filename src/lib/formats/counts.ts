@@ -1,6 +1,7 @@
 import type { Format } from './format';
 import { HistogramBuilder } from './histogram-builder';
 import { readLump } from './number/read-lump';
+import { readOpening } from './number/read-opening';
 import { readWholeNumber } from './number/read-whole-number';
 import type { Source } from './source';
 import { decideMarks, MarkTally } from './table/decide-marks';
@@ -59,12 +60,13 @@ function readGroup(
     const place = () => placeCell(table, row, columns.count);
     const plain = readWholeNumber(cell, numbers.style).ok;
     const lump = plain ? null : readLump(cell, numbers.style);
-    const isTotal = !plain && lump === null && totalWords.has(normaliseName(cell));
-    const count = lump ?? (isTotal ? 0 : numbers.read(row, columns.count, 'counts'));
+    const below = plain || lump !== null ? null : readOpening(cell, numbers.style);
+    const isTotal = !plain && lump === null && below === null && totalWords.has(normaliseName(cell));
+    const count = lump ?? below ?? (isTotal ? 0 : numbers.read(row, columns.count, 'counts'));
     const shots = numbers.read(row, columns.shots, 'numbers of shots');
     if (count === null || shots === null) continue;
     if (isTotal) total = { row, shots };
-    else builder.add(count, shots, lump !== null, place);
+    else builder.add(count, shots, lump !== null ? 'lump' : below !== null ? 'below' : 'one', place);
   }
   const clean = source.problems.kept.length === problemsBefore;
   if (total && clean) checkTotal(source, table, total, builder.shots, columns, notes);
@@ -75,6 +77,7 @@ function readGroup(
     clean
   );
   source.reading.lump ??= builder.lumped;
+  if (builder.opened) source.reading.below ??= builder.opened;
   return { name: group.name, conditions: group.conditions, data, suggested: group.suggested };
 }
 

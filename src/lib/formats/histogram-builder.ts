@@ -6,6 +6,9 @@ import type { Problem } from './types';
 /** Where an entry stands; asked for only when there is something to say about it. */
 export type Place = () => { line: number | null; column: number | null };
 
+/** A row for one count, for all counts from it on, or for all counts up to it. */
+export type RowKind = 'one' | 'lump' | 'below';
+
 interface Entry {
   count: number;
   shots: number;
@@ -22,6 +25,7 @@ function placed(entry: Entry, here: Place): string {
 export class HistogramBuilder {
   private readonly entries = new Map<number, Entry>();
   private lump: Entry | null = null;
+  private below: Entry | null = null;
   private sum = 0;
 
   constructor(
@@ -30,8 +34,8 @@ export class HistogramBuilder {
     private readonly limit: { trials: number | null; why: string }
   ) {}
 
-  /** Adds "`count`: `shots`", or "`count` or more: `shots`" when `lump` is set. */
-  add(count: number, shots: number, lump: boolean, place: Place): void {
+  /** Adds "`count`: `shots`", "`count` or more: `shots`" or "`count` or fewer: `shots`". */
+  add(count: number, shots: number, kind: RowKind, place: Place): void {
     // The words are built only for problems that are kept: finding a place costs a pass over the text.
     const refuse = (say: () => { message: string; fix: string }) =>
       this.problems.add(() => ({ ...place(), ...say() }));
@@ -56,17 +60,18 @@ export class HistogramBuilder {
         fix: 'Check the numbers of shots.'
       }));
     }
-    const before = lump ? this.lump : this.entries.get(count);
+    const before = kind === 'one' ? this.entries.get(count) : this[kind];
     if (before) {
       return refuse(() => ({
-        message: lump
-          ? `A second row lumps all larger counts; the first is on ${placed(before, place)}.`
-          : `The count ${count} is given twice: here and on ${placed(before, place)}.`,
+        message:
+          kind !== 'one'
+            ? `A second row lumps all ${kind === 'lump' ? 'larger' : 'smaller'} counts; the first is on ${placed(before, place)}.`
+            : `The count ${count} is given twice: here and on ${placed(before, place)}.`,
         fix: 'Keep one row for each count. If these are different devices or settings, name the column that tells them apart.'
       }));
     }
     this.sum += shots;
-    if (lump) this.lump = { count, shots, place };
+    if (kind !== 'one') this[kind] = { count, shots, place };
     else this.entries.set(count, { count, shots, place });
   }
 
@@ -80,6 +85,11 @@ export class HistogramBuilder {
     return this.lump ? { from: this.lump.count, line: this.lump.place().line ?? 1 } : null;
   }
 
+  /** The opening row's largest count and line. */
+  get opened(): { to: number; line: number } | null {
+    return this.below ? { to: this.below.count, line: this.below.place().line ?? 1 } : null;
+  }
+
   /**
    * The histogram, counts ascending; rows of no shots are kept, they change nothing.
    *
@@ -87,7 +97,7 @@ export class HistogramBuilder {
    * @param complete false when rows were refused: "no shots" would then only confuse.
    */
   finish(where: string, line: Problem['line'], complete: boolean): Histogram {
-    const { lump } = this;
+    const { lump, below } = this;
     const counts = [...this.entries.values()].sort((a, b) => a.count - b.count);
     const above = lump && counts.find(({ count }) => count >= lump.count);
     if (lump && above) {
@@ -95,6 +105,21 @@ export class HistogramBuilder {
         ...lump.place(),
         message: `This row lumps all counts from ${lump.count}, but ${above.count} has a row of its own on line ${above.place().line}.`,
         fix: 'The lump must begin above every other count.'
+      }));
+    }
+    const under = below && counts.find(({ count }) => count <= below.count);
+    if (below && under) {
+      this.problems.add(() => ({
+        ...below.place(),
+        message: `This row lumps all counts up to ${below.count}, but ${under.count} has a row of its own on line ${under.place().line}.`,
+        fix: 'The lump must end below every other count.'
+      }));
+    }
+    if (below && lump && lump.count <= below.count) {
+      this.problems.add(() => ({
+        ...lump.place(),
+        message: `This row lumps all counts from ${lump.count}, but the row on ${placed(below, lump.place)} those up to ${below.count}: they overlap.`,
+        fix: 'Correct one of the two rows, so that each count belongs to one of them.'
       }));
     }
     if (this.sum === 0 && complete) {
@@ -107,7 +132,8 @@ export class HistogramBuilder {
     return {
       kind: 'histogram',
       counts: counts.map(({ count, shots }) => [count, shots]),
-      lump: lump && lump.shots > 0 ? { from: lump.count, shots: lump.shots } : null
+      lump: lump && lump.shots > 0 ? { from: lump.count, shots: lump.shots } : null,
+      ...(below && below.shots > 0 && { below: { to: below.count, shots: below.shots } })
     };
   }
 }

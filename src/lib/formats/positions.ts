@@ -28,7 +28,7 @@ export const positions: Format = {
     const builder = new HistogramBuilder(source.problems, trialsLimit(source.options, {}));
     for (const row of table.sheet.rows.keys()) {
       const shots = numbers.read(row, column, 'numbers of shots');
-      if (shots !== null) builder.add(row, shots, false, () => placeCell(table, row, column));
+      if (shots !== null) builder.add(row, shots, 'one', () => placeCell(table, row, column));
     }
     const data = builder.finish('', table.sheet.lines[0] ?? null, !source.problems.any);
     Object.assign(source.reading, tally.report(source.options));

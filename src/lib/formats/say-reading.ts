@@ -23,7 +23,7 @@ const roles: Record<Role, string> = {
  * holds and why, and everything else that was guessed and is not the usual.
  */
 export function sayReading(reading: Reading): string[] {
-  const { format, separator, header, columns, encoding, decimal, thousands, lump } = reading;
+  const { format, separator, header, columns, encoding, decimal, thousands, lump, below } = reading;
   const sentences: string[] = [];
   if (format) {
     const between =
@@ -32,6 +32,7 @@ export function sayReading(reading: Reading): string[] {
     sentences.push(`Read as ${forms[format.value]}${between}${names} (${format.why}).`);
   }
   for (const column of columns) sentences.push(sayColumn(column));
+  if (below) sentences.push(`Line ${below.line} is read as "${below.to} or fewer".`);
   if (lump) sentences.push(`Line ${lump.line} is read as "${lump.from} or more".`);
   if (decimal && decimal.value === ',') sentences.push('Commas are read as decimal marks.');
   if (thousands && thousands.value !== 'none') {

@@ -57,6 +57,8 @@ export interface Reading {
   thousands: Guess<ThousandsMark | 'space' | 'apostrophe'> | null;
   /** Closing row such as "10+", and its line. */
   lump: { from: number; line: number } | null;
+  /** Opening row such as "0-2", and its line; left out when there is none. */
+  below?: { to: number; line: number };
   rows: number;
   blankLines: number;
   commentLines: number;

@@ -48,6 +48,7 @@ const data = z.strictObject({
   misreadUncertainty: number.optional(),
   counts: z.array(z.tuple([whole, whole])),
   lump: lump.nullable(),
+  below: z.strictObject({ to: whole, shots: whole }).optional(),
   kept: z.strictObject({ from: whole, to: whole.nullable() }).optional(),
   ordered: z.boolean(),
   batches: whole.nullable()
@@ -97,7 +98,8 @@ const distributionPoint = z.strictObject({
   low: share,
   high: share,
   fitted: number,
-  lump: z.boolean()
+  lump: z.boolean(),
+  below: z.literal(true).optional()
 });
 
 const ratePoint = z.strictObject({

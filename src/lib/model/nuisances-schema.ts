@@ -118,5 +118,11 @@ export const nuisancesSchema = z.strictObject({
   drift: drift.optional(),
   pairs: pairs.optional(),
   emptyAside: emptyAside.optional(),
-  trials: trials.optional()
+  trials: trials.optional(),
+  lumped: z
+    .strictObject({
+      mean: z.strictObject({ low: number, high: orNull }),
+      variance: z.strictObject({ low: orNull, high: orNull })
+    })
+    .optional()
 });

@@ -38,7 +38,7 @@ function runs(values: string[]): string {
 export const shotsOf = (data: CountData): number =>
   data.kind === 'shots'
     ? data.shots.length
-    : data.counts.reduce((sum, [, shots]) => sum + shots, data.lump?.shots ?? 0);
+    : data.counts.reduce((sum, [, shots]) => sum + shots, (data.lump?.shots ?? 0) + (data.below?.shots ?? 0));
 
 function dataPart(data: CountData): string {
   if (data.kind === 'shots') {
@@ -46,6 +46,7 @@ function dataPart(data: CountData): string {
     return data.batches ? `${shots}&batches=${runs(data.batches)}` : shots;
   }
   const rows = data.counts.map(([count, shots]) => `${count}:${shots}`);
+  if (data.below) rows.unshift(`0-${data.below.to}:${data.below.shots}`);
   if (data.lump) rows.push(`${data.lump.from}+:${data.lump.shots}`);
   return `counts=${rows.join(',')}`;
 }

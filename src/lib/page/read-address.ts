@@ -1,4 +1,4 @@
-import type { CountData } from '$lib/stats/types';
+import type { CountData, Histogram } from '$lib/stats/types';
 import { MOST, OPTION_NAMES, shotsOf } from './address';
 import { freshSettings, type Settings } from './settings';
 
@@ -117,16 +117,18 @@ function dataOf(parts: Map<string, string>): CountData {
 
 function histogramOf(text: string): CountData {
   const counts: [number, number][] = [];
-  let lump: { from: number; shots: number } | null = null;
+  let lump: Histogram['lump'] = null;
+  let below: Histogram['below'] = null;
   for (const word of text.split(',')) {
     const part = `counts=${word}`;
-    const row = /^(\d+)(\+?):(\d+)$/.exec(word);
-    if (!row || lump) throw unreadable(part);
-    const [count, shots] = [whole(row[1], part), whole(row[3], part)];
-    if (row[2]) lump = { from: count, shots };
+    const row = /^(0-)?(\d+)(\+?):(\d+)$/.exec(word);
+    if (!row || lump || (row[1] && (row[3] || below || counts.length > 0))) throw unreadable(part);
+    const [count, shots] = [whole(row[2], part), whole(row[4], part)];
+    if (row[1]) below = { to: count, shots };
+    else if (row[3]) lump = { from: count, shots };
     else counts.push([count, shots]);
   }
-  return { kind: 'histogram', counts, lump };
+  return { kind: 'histogram', counts, lump, ...(below && { below }) };
 }
 
 function settingsOf(parts: Map<string, string>): Settings {

@@ -8,6 +8,8 @@ export interface DataSummary {
   largest: number;
   /** True when the largest is a closing row such as "10+". */
   open: boolean;
+  /** True when the smallest ends an opening row such as "0-2". */
+  opening: boolean;
   batches: number | null;
 }
 
@@ -27,17 +29,20 @@ export function summaryOfData(data: CountData): DataSummary {
       smallest,
       largest,
       open: false,
+      opening: false,
       batches
     };
   }
   const seen = data.counts.filter(([, shots]) => shots > 0);
-  const shots = seen.reduce((sum, row) => sum + row[1], data.lump?.shots ?? 0);
+  const { lump, below = null } = data;
+  const shots = seen.reduce((sum, row) => sum + row[1], (lump?.shots ?? 0) + (below?.shots ?? 0));
   return {
     shots,
-    distinct: seen.length + (data.lump ? 1 : 0),
-    smallest: seen[0]?.[0] ?? data.lump?.from ?? 0,
-    largest: data.lump?.from ?? seen[seen.length - 1]?.[0] ?? 0,
-    open: data.lump !== null,
+    distinct: seen.length + (lump ? 1 : 0) + (below ? 1 : 0),
+    smallest: below?.to ?? seen[0]?.[0] ?? lump?.from ?? 0,
+    largest: lump?.from ?? seen[seen.length - 1]?.[0] ?? below?.to ?? 0,
+    open: lump !== null,
+    opening: below !== null,
     batches: null
   };
 }

@@ -4,6 +4,7 @@ import type { CountData } from '$lib/stats/types';
 export function textOfData(data: CountData): string {
   if (data.kind === 'histogram') {
     const rows = data.counts.map(([count, shots]) => `${count},${shots}`);
+    if (data.below) rows.unshift(`0-${data.below.to},${data.below.shots}`);
     if (data.lump) rows.push(`${data.lump.from}+,${data.lump.shots}`);
     return ['count,frequency', ...rows].join('\n');
   }

@@ -11,6 +11,7 @@ import { checkOptions } from './input/check-options';
 import { digest } from './input/digest';
 import { inUnits } from './input/in-units';
 import { toHistogram } from './input/to-histogram';
+import { lumpedLimits } from './moments/lumped-limits';
 import { momentReport } from './moments/moment-report';
 import { adjust } from './multiple/adjust';
 import { independentNull } from './nulls/independent-null';
@@ -61,6 +62,7 @@ export async function diagnose(
   const pace = pacer(onProgress, signal);
   await pace.step('fit', 0);
   const counts = fitData(histogram, trials);
+  const lumped = histogram.lump !== null || Boolean(histogram.below);
   const drawing = { resamples: options.resamples, seed: options.seed };
   const equal = equalTrials(counts, trials).parameter;
   const misread = misreadApplies(options, counts);
@@ -133,7 +135,7 @@ export async function diagnose(
       : null;
   // A lump hides the variance; other nulls have ceilings of their own.
   const run =
-    histogram.lump || misread.applies || kept
+    lumped || misread.applies || kept
       ? undefined
       : trialsReport(moments, counts.first + counts.shots.length - 1, trials, options.tolerance);
   const nuisances = {
@@ -141,7 +143,8 @@ export async function diagnose(
     ...(drift && { drift }),
     ...(pairs && { pairs }),
     ...(aside && { emptyAside: aside }),
-    ...(run && { trials: run })
+    ...(run && { trials: run }),
+    ...(lumped && { lumped: lumpedLimits(histogram, trials) })
   };
   const said = answer(evidence, flags);
   let explanations: Diagnosis['explanations'];
@@ -170,6 +173,7 @@ export async function diagnose(
       ...(options.misreadUncertainty && { misreadUncertainty: options.misreadUncertainty }),
       counts: given.counts,
       lump: given.lump,
+      ...(given.below && { below: given.below }),
       ...(options.kept && { kept: options.kept }),
       ordered: data.kind === 'shots',
       batches: data.kind === 'shots' && data.batches ? new Set(data.batches).size : null
@@ -177,7 +181,7 @@ export async function diagnose(
     moments: {
       ...moments,
       criticalTrials:
-        spread && !histogram.lump && !misread.applies && !kept
+        spread && !lumped && !misread.applies && !kept
           ? criticalTrials(moments.mean.value!, moments.variance.value!)
           : null
     },

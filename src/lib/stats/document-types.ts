@@ -3,7 +3,8 @@ import type { Explanations } from './explanations/types';
 import type { TrialsPart } from './sensitivity/types';
 import type { EmptyAside } from './truncation/empty-aside';
 import type { PairsPart } from './pairs/types';
-import type { RateSpread } from './rate-interval/types';
+import type { LumpedLimits } from './moments/lumped-limits';
+import type { MisreadPart } from './misread/types';
 import type { Geometry, Interval, Level, Unit } from './types';
 
 export type TestId =
@@ -32,8 +33,9 @@ export interface DistributionPoint {
   low: number;
   high: number;
   fitted: number;
-  /** True for the closing "n or more" row. */
+  /** True for a row that lumps counts: the closing "n or more", or with `below` the opening "n or fewer". */
   lump: boolean;
+  below?: true;
 }
 
 export interface RatePoint {
@@ -106,26 +108,6 @@ export interface Flag {
   next: string[];
 }
 
-/** What misread sites do to counts of kinks on an open chain, where one misread site toggles two bonds. */
-export interface MisreadPart {
-  /** True: a rate was stated, and every test, bound and flag allows for it; moments.ceiling is then this ceiling. */
-  applied: boolean;
-  rate: number | null;
-  /** Largest variance that independent kinks have as read; null when not applied. */
-  ceiling: number | null;
-  /** The ceiling without misreads, and variance over it. */
-  rawCeiling: number;
-  rawDispersion: number | null;
-  /** Rate that would explain the variance by itself; limits from those of the variance. 0: none is needed; null: none would do. */
-  neededRate: Interval;
-  /** Largest rate that the mean count allows, five standard errors allowed for; since engine 0.6. */
-  largestRate?: number;
-  /** The answer over the interval of a rate with an uncertainty; since engine 0.6. */
-  spread?: RateSpread;
-  /** Fitted kink probabilities in the order of the bonds; null when not applied. */
-  kinks: Level[] | null;
-}
-
 /** Everything a page, PDF, API answer or script needs. Plain JSON: numbers are finite or null. */
 export interface Diagnosis {
   format: 'severalty.diagnosis/1';
@@ -143,6 +125,8 @@ export interface Diagnosis {
     /** As given; for unit `pair` everything after `data` counts pairs, n/2. */
     counts: [number, number][];
     lump: { from: number; shots: number } | null;
+    /** An opening row "0 to `to`"; left out when there is none. */
+    below?: { to: number; shots: number };
     /** Counts that were kept, where a cut was declared; since engine 0.5. */
     kept?: { from: number; to: number | null };
     /** True when shot order was known; number of batches, or null. */
@@ -163,6 +147,8 @@ export interface Diagnosis {
   };
   /** What can look like interaction; each part is there only where it has something to say. */
   nuisances?: {
+    /** With a lump: what mean and unbiased variance of these shots can be, in the unit tested. */
+    lumped?: LumpedLimits;
     /** For kinks on an open chain of known length. */
     misread?: MisreadPart;
     /** For shot lists, since engine 0.5. */

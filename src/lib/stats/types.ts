@@ -5,6 +5,8 @@ export interface Histogram {
   counts: [number, number][];
   /** A closing row such as "10+": `shots` shots had count ≥ `from`. `from` exceeds every listed count. */
   lump: { from: number; shots: number } | null;
+  /** An opening row such as "0-2": `shots` shots had count ≤ `to`, which lies below every listed count. Null or left out: none. */
+  below?: { to: number; shots: number } | null;
 }
 
 /** One count a shot in the order taken; `batches[i]` names the batch of shot i. */
@@ -81,3 +83,4 @@ export class BadInput extends Error {
 }
 
 export type * from './document-types';
+export type * from './misread/types';

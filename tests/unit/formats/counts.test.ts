@@ -141,7 +141,15 @@ describe('a table of counts is refused', () => {
     ['0,0\n1,0\n', {}, '1:null There are no shots'],
     ['5+,3\n6,1\n', {}, '1:1 This row lumps all counts from 5, but 6 has a row of its own on line 2.'],
     ['5+,3\n6+,1\n', {}, '2:1 A second row lumps all larger counts; the first is on line 1.'],
-    ['0,3\n1-4,5\n', {}, '2:1 "1-4" is a range.'],
+    ['0-2,3\n2,1\n', {}, '1:1 This row lumps all counts up to 2, but 2 has a row of its own on line 2.'],
+    ['≤2,3\n<2,1\n', {}, '2:1 A second row lumps all smaller counts; the first is on line 1.'],
+    [
+      '≤5,3\n≥4,1\n',
+      {},
+      '2:1 This row lumps all counts from 4, but the row on line 1 those up to 5: they overlap.'
+    ],
+    ['≤13,3\n', { trials: 12 }, '1:1 The count 13 is above the 12 trials'],
+    ['0,3\n1-4,5\n', {}, '2:1 "1-4" is a range that does not begin at 0.'],
     ['0,3\n1,12 %\n', {}, '2:3 "12 %" is a percentage.'],
     ['0,3\n2-Jan,5\n', {}, '2:1 "2-Jan" looks like a date that a spreadsheet made out of a range.'],
     [

@@ -116,13 +116,14 @@ describe('counts as text', () => {
         ],
         lump: { from: 9, shots: 4 }
       })
-    ).toEqual({ shots: 9, distinct: 2, smallest: 2, largest: 9, open: true, batches: null });
+    ).toEqual({ shots: 9, distinct: 2, smallest: 2, largest: 9, open: true, opening: false, batches: null });
     expect(summaryOfData({ kind: 'shots', shots: [3, 1, 3], batches: ['a', 'a', 'b'] })).toEqual({
       shots: 3,
       distinct: 2,
       smallest: 1,
       largest: 3,
       open: false,
+      opening: false,
       batches: 2
     });
   });

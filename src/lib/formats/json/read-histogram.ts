@@ -1,6 +1,7 @@
 import type { Histogram } from '../../stats/types';
 import { HistogramBuilder } from '../histogram-builder';
 import { readLump } from '../number/read-lump';
+import { readOpening } from '../number/read-opening';
 import { readWholeNumber } from '../number/read-whole-number';
 import { trialsLimit } from '../trials-limit';
 import type { Suggested } from '../types';
@@ -9,26 +10,31 @@ import { describe, type JsonNode } from './node';
 
 /** True for a label of a count: digits, or the label of a lump. */
 export function isCountLabel(key: string): boolean {
-  return readWholeNumber(key, jsonStyle).ok || readLump(key, jsonStyle) !== null;
+  return (
+    readWholeNumber(key, jsonStyle).ok || (readLump(key, jsonStyle) ?? readOpening(key, jsonStyle)) !== null
+  );
 }
 
 /**
  * A histogram from an object `{"0": 12, "10+": 3}` or a list of pairs `[[0, 12], ["10+", 3]]`.
  *
- * @param lump further lump `{"from": 10, "shots": 3}`, as the diagnosis document writes it.
+ * @param lumps further rows `{"from": 10, "shots": 3}` and `{"to": 2, "shots": 5}`, as the diagnosis document writes them.
  */
 export function readHistogram(
   reader: JsonReader,
   node: JsonNode,
   suggested: Suggested,
-  lump: { from: number; shots: number; at: number } | null = null
+  lumps: { kind: 'lump' | 'below'; count: number; shots: number; at: number }[] = []
 ): Histogram {
   const builder = new HistogramBuilder(reader.source.problems, trialsLimit(reader.source.options, suggested));
   const add = (label: string, at: number, value: JsonNode) => {
-    const from = readWholeNumber(label, jsonStyle).ok ? null : readLump(label, jsonStyle);
-    const count = from ?? reader.text(label, at, 'counts');
+    const plain = readWholeNumber(label, jsonStyle).ok;
+    const from = plain ? null : readLump(label, jsonStyle);
+    const to = plain || from !== null ? null : readOpening(label, jsonStyle);
+    const count = from ?? to ?? reader.text(label, at, 'counts');
     const shots = reader.whole(value, 'numbers of shots');
-    if (count !== null && shots !== null) builder.add(count, shots, from !== null, () => reader.place(at));
+    const kind = from !== null ? 'lump' : to !== null ? 'below' : 'one';
+    if (count !== null && shots !== null) builder.add(count, shots, kind, () => reader.place(at));
   };
   if (node.kind === 'object') {
     for (const { key, at, value } of node.members) add(key, at, value);
@@ -46,9 +52,10 @@ export function readHistogram(
       } else add(label.kind === 'number' ? label.raw : label.value, label.at, pair[1]);
     }
   }
-  if (lump) builder.add(lump.from, lump.shots, true, () => reader.place(lump.at));
+  for (const { kind, count, shots, at } of lumps) builder.add(count, shots, kind, () => reader.place(at));
   const data = builder.finish('', reader.place(node.at).line, !reader.source.problems.any);
   reader.source.reading.lump ??= builder.lumped;
+  if (builder.opened) reader.source.reading.below ??= builder.opened;
   reader.source.reading.rows += data.counts.length;
   return data;
 }

@@ -7,7 +7,16 @@ import { isCountLabel, readHistogram } from './read-histogram';
 import { readShotList } from './read-shot-list';
 import { readSuggested, suggestedKeys } from './read-suggested';
 
-const known = new Set(['counts', 'shots', 'batches', 'lump', 'name', 'conditions', ...suggestedKeys]);
+const known = new Set([
+  'counts',
+  'shots',
+  'batches',
+  'lump',
+  'below',
+  'name',
+  'conditions',
+  ...suggestedKeys
+]);
 
 /** The dataset of a JSON text whose root is an object or a list of pairs; null after a problem. */
 export function readRoot(
@@ -60,7 +69,10 @@ function readData(
       reader.problem(counts.at, '"counts" is neither an object nor a list.', expected);
       return null;
     }
-    const data = readHistogram(reader, counts, suggested, readLumpMember(reader, member(node, 'lump')));
+    const data = readHistogram(reader, counts, suggested, [
+      ...readLumpMember(reader, member(node, 'lump'), 'lump'),
+      ...readLumpMember(reader, member(node, 'below'), 'below')
+    ]);
     if (shots) checkTotal(reader, shots, data);
     return data;
   }
@@ -85,23 +97,30 @@ function refuseRepeats(reader: JsonReader, node: JsonNode & { kind: 'object' }):
 
 function readLumpMember(
   reader: JsonReader,
-  node: JsonNode | null
-): { from: number; shots: number; at: number } | null {
-  if (!node || (node.kind === 'literal' && node.value === null)) return null;
-  const [from, shots] = [member(node, 'from'), member(node, 'shots')];
-  if (!from || !shots) {
-    reader.problem(node.at, 'The lump is not understood.', 'Give {"from": 10, "shots": 18}.');
-    return null;
+  node: JsonNode | null,
+  kind: 'lump' | 'below'
+): { kind: 'lump' | 'below'; count: number; shots: number; at: number }[] {
+  if (!node || (node.kind === 'literal' && node.value === null)) return [];
+  const edge = kind === 'lump' ? 'from' : 'to';
+  const [end, shots] = [member(node, edge), member(node, 'shots')];
+  if (!end || !shots) {
+    reader.problem(
+      node.at,
+      `The ${kind === 'lump' ? 'lump' : 'opening row'} is not understood.`,
+      `Give {"${edge}": ${kind === 'lump' ? 10 : 2}, "shots": 18}.`
+    );
+    return [];
   }
-  const [count, number] = [reader.whole(from, 'counts'), reader.whole(shots, 'numbers of shots')];
-  return count === null || number === null ? null : { from: count, shots: number, at: node.at };
+  const [count, number] = [reader.whole(end, 'counts'), reader.whole(shots, 'numbers of shots')];
+  return count === null || number === null ? [] : [{ kind, count, shots: number, at: node.at }];
 }
 
 /** `"shots": 26306` beside the counts states their sum. */
 function checkTotal(reader: JsonReader, node: JsonNode, data: CountData): void {
   if (data.kind !== 'histogram' || reader.source.problems.any) return;
   const stated = reader.whole(node, 'numbers of shots');
-  const sum = data.counts.reduce((total, [, shots]) => total + shots, data.lump?.shots ?? 0);
+  const lumps = (data.lump?.shots ?? 0) + (data.below?.shots ?? 0);
+  const sum = data.counts.reduce((total, [, shots]) => total + shots, lumps);
   if (stated !== null && stated !== sum) {
     reader.problem(
       node.at,

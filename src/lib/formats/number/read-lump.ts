@@ -1,4 +1,5 @@
-import { type NumberStyle, readWholeNumber } from './read-whole-number';
+import { labelNumber, lumpLabel } from './lump-label';
+import type { NumberStyle } from './read-whole-number';
 
 /** "10 or more" in the words of several languages; accents are already gone. */
 const after =
@@ -14,24 +15,13 @@ const above = /^(?:>|more than|over|mehr als|plus de|mas de|piu di|mais de|meer 
  * @returns the smallest count in the lump, or null when the cell is no such label.
  */
 export function readLump(cell: string, style: NumberStyle): number | null {
-  // Two letters of "or" or a sign must be there; plain numbers leave at once.
-  if (cell.length > 60 || /^[\d\s]*$/.test(cell)) return null;
-  const label = cell
-    .normalize('NFD')
-    .replace(/\p{Mn}/gu, '')
-    .normalize('NFC')
-    .toLowerCase()
-    .replace(/\s+/g, ' ')
-    .trim();
-  const number = (text: string): number | null => {
-    const read = readWholeNumber(text.trim(), style);
-    return read.ok && !/^[+-]/.test(text.trim()) ? read.value : null;
-  };
+  const label = lumpLabel(cell);
+  if (label === null) return null;
   const suffixed = after.exec(label);
-  if (suffixed) return number(suffixed[1]);
+  if (suffixed) return labelNumber(suffixed[1], style);
   const least = from.exec(label);
-  if (least) return number(least[1]);
+  if (least) return labelNumber(least[1], style);
   const beyond = above.exec(label);
-  const value = beyond ? number(beyond[1]) : null;
+  const value = beyond ? labelNumber(beyond[1], style) : null;
   return value === null ? null : value + 1;
 }

@@ -58,19 +58,13 @@ function sayWords(cell: string, cited: string, what: string): { message: string;
   if (date.test(text)) {
     return {
       message: `${cited} looks like a date that a spreadsheet made out of a range.`,
-      fix: 'Give each count its own row; only a closing row such as 10+ may cover several counts.'
+      fix: 'Give each count its own row; only an opening row such as ≤2 (not 0-2, which spreadsheets turn into a date) and a closing one such as 10+ may cover several counts.'
     };
   }
   if (/^\d+\s*(-|–|—|to|bis|à|\.\.)\s*\d+$/i.test(text)) {
     return {
-      message: `${cited} is a range.`,
-      fix: 'Give each count its own row; only a closing row such as 10+ may cover several counts.'
-    };
-  }
-  if (/^(<|≤|<=|up to|at most|bis)\s*\d+$|^\d+ (or|and) (less|fewer|under|below)$/i.test(text)) {
-    return {
-      message: `${cited} lumps small counts together.`,
-      fix: 'Give each count its own row; only a closing row such as 10+ may cover several counts.'
+      message: `${cited} is a range that does not begin at 0.`,
+      fix: 'Give each count its own row; only an opening row such as 0-2 and a closing one such as 10+ may cover several counts.'
     };
   }
   if (/^[\d.,]+\s*#/.test(text)) {

@@ -1,6 +1,6 @@
-/** A lump label at the start of a line, which holds spaces of its own: "10 or more", ">= 10". */
+/** A lump label at the start of a line, which holds spaces of its own: "10 or more", ">= 10", "0 - 2". */
 const label =
-  /^(?:(?:>=|=>|≥|⩾|>)[ \t]*\d+|\d+[ \t]*\+|\d+[ \t]+(?:or|and|und|oder|et|ou|y|o|e|of|en|eller|lub|i|и)[ \t]+[\p{L}\p{M}]+)(?=[ \t])/iu;
+  /^(?:(?:>=|=>|≥|⩾|>|<=|=<|≤|⩽|<)[ \t]*\d+|0[ \t]*(?:-|–|—|to|bis|\.\.|…)[ \t]*\d+|\d+[ \t]*\+|\d+[ \t]+(?:or|and|und|oder|et|ou|y|o|e|of|en|eller|lub|i|и)[ \t]+[\p{L}\p{M}]+)(?=[ \t])/iu;
 
 /**
  * Rewrites a line whose cells stand apart by runs of spaces or tabs, so that single tabs separate

@@ -1,4 +1,5 @@
 import { readLump } from '../number/read-lump';
+import { readOpening } from '../number/read-opening';
 import { readWholeNumber } from '../number/read-whole-number';
 import type { Guess, Problem, Role } from '../types';
 import { normaliseName } from './normalise-name';
@@ -70,5 +71,6 @@ export class RoleDraft {
 export function isNumberLike(cell: string): boolean {
   const read = readWholeNumber(cell, open);
   if (read.ok) return true;
-  return (read.bad !== 'not-a-number' && read.bad !== 'missing') || readLump(cell, open) !== null;
+  if (read.bad !== 'not-a-number' && read.bad !== 'missing') return true;
+  return (readLump(cell, open) ?? readOpening(cell, open)) !== null;
 }

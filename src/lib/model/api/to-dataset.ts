@@ -20,6 +20,7 @@ export function toDataset(dataset: OneDataset): ApiDataset {
     conditions,
     counts: histogram.counts.map(([count, shots]) => [count, shots]),
     lump: histogram.lump,
+    below: histogram.below ?? null,
     batches: dataset.batches,
     by: dataset.by,
     file: { name: file.name, size: file.size, sha256: file.sha256 },

@@ -4,6 +4,7 @@ import { thirdOverMean } from '$lib/stats/claim/third-over-mean';
 import type { Diagnosis, Interval, TestResult } from '$lib/stats/types';
 import type { Summary, SummaryTest } from '../link/summary';
 import { TESTS } from '../labels';
+import { lumpsOf, type Lumps } from '../lump-words';
 
 /** Something that a manuscript may claim, with what the report says of it. */
 export interface Quantity {
@@ -16,8 +17,8 @@ export interface Quantity {
   positive: boolean;
   /** A whole number claimed of it is meant exactly: "a Fano factor of 1" is not 1 ± 0.5. */
   wholeIsExact: boolean;
-  /** The last row lumps counts, and what the interval says is a lower limit or less. */
-  lumped: boolean;
+  /** Why lumped counts leave the claim open, in words that end a sentence; null without a lump. */
+  lumped: string | null;
   /** What to know of this interval; empty when it is the document's own. */
   note: string;
 }
@@ -28,7 +29,9 @@ const NONE: Interval = { value: null, low: null, high: null };
 export function quantitiesOf(report: Diagnosis | Summary): Quantity[] {
   const { moments, fit, data } = report;
   const { shots } = data;
-  const lumped = 'lumped' in data ? data.lumped : data.lump !== null;
+  const lumps: Lumps =
+    'lumped' in data ? { above: data.lumped, below: data.opening ?? false } : lumpsOf(data);
+  const lumped = lumps.above || lumps.below ? sayLumps(lumps) : null;
   const third = moments.third === null ? NONE : carefulThird(moments.third, shots);
   const ratio = thirdOverMean({ ...moments, third }, shots);
   const thirdNote = noteOfThird(moments.third, shots);
@@ -42,9 +45,9 @@ export function quantitiesOf(report: Diagnosis | Summary): Quantity[] {
     id,
     label,
     ...more,
-    interval: lumped ? lumpedLimits(id, interval) : interval,
+    interval: lumped ? lumpedLimits(id, interval, lumps) : interval,
     lumped,
-    note: lumped ? `${LUMP_NOTE} ${more.note ?? ''}`.trim() : (more.note ?? '')
+    note: lumped ? `${noteOfLumps(lumped, lumps)} ${more.note ?? ''}`.trim() : (more.note ?? '')
   });
   return [
     ofMoment('mean', 'mean, κ₁', moments.mean),
@@ -70,19 +73,31 @@ export function quantitiesOf(report: Diagnosis | Summary): Quantity[] {
   ];
 }
 
-const PLAIN = { isP: false, positive: true, wholeIsExact: false, lumped: false };
+const PLAIN = { isP: false, positive: true, wholeIsExact: false, lumped: null };
 
-const LUMP_NOTE =
-  'The last row lumps counts and is counted at the least it can be, so this cannot settle a claim, but for a mean below its lower limit.';
+function sayLumps({ above, below }: Lumps): string {
+  if (above && below)
+    return 'The first and the last row lump counts, counted as near to the others as they can be';
+  return below
+    ? 'The first row lumps counts, counted at the most they can be'
+    : 'The last row lumps counts, counted at the least they can be';
+}
+
+function noteOfLumps(words: string, { above, below }: Lumps): string {
+  const but =
+    above === below ? '' : `, but for a mean ${below ? 'above its upper' : 'below its lower'} limit`;
+  return `${words}, so this cannot settle a claim${but}.`;
+}
 
 /**
- * A mean of lumped counts is no larger than the true one, so its lower limit holds and a claim below it is wrong. Of
- * the others neither limit is used: a ratio of two lower limits may err to either side.
+ * A mean with a closing row lumped is no larger than the true one, so its lower limit holds and a claim below it is wrong;
+ * with an opening row its upper limit. Of the others neither limit is used: a ratio of two lower limits may err to either
+ * side.
  */
-const lumpedLimits = (id: string, { value, low }: Interval): Interval => ({
+const lumpedLimits = (id: string, { value, low, high }: Interval, { above, below }: Lumps): Interval => ({
   value,
-  low: id === 'mean' ? low : null,
-  high: null
+  low: id === 'mean' && !below ? low : null,
+  high: id === 'mean' && !above ? high : null
 });
 
 function noteOfThird(third: Interval | null, shots: number): string {

@@ -30,7 +30,7 @@ export function sayClaim(
   }
   const same = rounds(interval.value, claim, digit) ? ' To the digits given it is the same number.' : '';
   if (quantity.lumped && verdict === 'cannot-tell')
-    return `${ours}. The last row lumps counts, counted at the least they can be, so this cannot settle the claim.${same}`;
+    return `${ours}. ${quantity.lumped}, so this cannot settle the claim.${same}`;
   if (judged.distance === null) return `${ours}. On the side of the claim nothing limits it.${same}`;
   const far = `The claim lies ${formatNumber(Math.abs(judged.distance), 2)} times both uncertainties together ${
     judged.distance >= 0 ? 'above' : 'below'

@@ -66,7 +66,8 @@ export function shotList({ document, data }: Pick<BundleInput, 'document' | 'dat
 const histogramOf = ({ document: { data } }: BundleInput): Histogram => ({
   kind: 'histogram',
   counts: data.counts,
-  lump: data.lump
+  lump: data.lump,
+  ...(data.below && { below: data.below })
 });
 
 const listOf = (probabilities: number[]): string => probabilities.map((p) => `${p}\r\n`).join('');

@@ -55,7 +55,10 @@ function unitWords({ document: { data } }: BundleInput): string {
   const lump = data.lump
     ? ' The row marked "or more" (in counts.csv, +) takes together all counts from there on.'
     : '';
-  return unit + lump;
+  const below = data.below
+    ? ' The row marked "or fewer" (in counts.csv, from 0- on) takes together all counts up to there.'
+    : '';
+  return unit + below + lump;
 }
 
 function again({ document, supplied }: BundleInput, folder: string, hasShots: boolean): string {

@@ -8,6 +8,7 @@ function rowsOf(data: CountData): string[] {
   if (data.kind === 'histogram')
     return [
       'count,shots',
+      ...(data.below ? [`0-${data.below.to},${data.below.shots}`] : []),
       ...data.counts.map(([count, shots]) => `${count},${shots}`),
       ...(data.lump ? [`${data.lump.from}+,${data.lump.shots}`] : [])
     ];

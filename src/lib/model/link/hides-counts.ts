@@ -16,11 +16,11 @@ export const TOO_FEW_TO_HIDE = `With fewer than ${LEAST_SHOTS_TO_HIDE} shots or 
  */
 export const LEAST_SHOTS_FOR_LAW = 10_000;
 
-type Counted = { data: Pick<Diagnosis['data'], 'counts' | 'lump' | 'shots'> };
+type Counted = { data: Pick<Diagnosis['data'], 'counts' | 'lump' | 'below' | 'shots'> };
 
-/** How many different counts were seen, the closing row "or more" being one. */
+/** How many different counts were seen, a row that lumps counts being one. */
 export function differentCounts({ data }: Counted): number {
-  return data.counts.filter(([, shots]) => shots > 0).length + (data.lump ? 1 : 0);
+  return data.counts.filter(([, shots]) => shots > 0).length + (data.lump ? 1 : 0) + (data.below ? 1 : 0);
 }
 
 /** Whether a link may keep the counts of this report back. */

@@ -1,5 +1,6 @@
 import { formatCount, formatNumber } from '../format-number';
 import { GEOMETRIES } from '../labels';
+import { lumpWords } from '../lump-words';
 import type { Summary } from './summary';
 
 /** What was given, as pairs of what and value, where the counts are kept back. */
@@ -10,7 +11,10 @@ export const summaryFacts = ({ data }: Summary): [string, string][] => [
   ['Counted on', GEOMETRIES[data.geometry]],
   ['Chance to misread a site', data.misread === null ? 'not stated' : formatNumber(data.misread, 3)],
   ['Order of the shots', data.ordered ? 'known' : 'not known'],
-  ...(data.lumped
+  ...(data.lumped && !data.opening
     ? ([['Last row', 'lumps counts: mean and variance are lower limits']] as [string, string][])
+    : []),
+  ...(data.opening
+    ? ([['Lumped counts', lumpWords({ above: data.lumped, below: true }).limits]] as [string, string][])
     : [])
 ];

@@ -1,5 +1,6 @@
 import { sayMisreads, sayNeededRate } from '../report/say-misreads';
 import { sayPairs, sayPostSelection, told, type Stated } from '../report/say-nuisances';
+import { lumpWords } from '../lump-words';
 import type { Summary } from './summary';
 
 /** What can mimic interaction, as pairs of what and what is known of it, where the counts are kept back. */
@@ -17,8 +18,8 @@ export const summaryNuisances = (summary: Summary, stated: Stated | null): [stri
     ['Post-selection', sayPostSelection(stated)],
     [
       'Lumped counts',
-      summary.data.lumped
-        ? 'The last row lumps counts; its likelihood is the sum of the law over them.'
+      summary.data.lumped || summary.data.opening
+        ? `${lumpWords({ above: summary.data.lumped, below: summary.data.opening ?? false }).rows}; the likelihood of such a row is the sum of the law over them.`
         : 'No row lumps counts.'
     ]
   ]);

@@ -16,9 +16,11 @@ export interface SummaryTest extends Pick<TestResult, 'id' | 'p' | 'pAdjusted' |
 export interface Summary extends Pick<Diagnosis, 'answer' | 'cautions' | 'notRun'> {
   format: 'severalty.summary/1';
   engine: Omit<Diagnosis['engine'], 'seed' | 'resamples'>;
-  data: Omit<Diagnosis['data'], 'counts' | 'lump' | 'digest'> & {
+  data: Omit<Diagnosis['data'], 'counts' | 'lump' | 'below' | 'digest'> & {
     /** True when the last row lumps counts: the moments are lower limits then. */
     lumped: boolean;
+    /** True when the first row lumps counts; left out otherwise. */
+    opening?: true;
   };
   moments: Record<'mean' | 'variance' | 'fano' | 'dispersion', Interval> & {
     third: Interval | null;
@@ -49,7 +51,7 @@ export interface Summary extends Pick<Diagnosis, 'answer' | 'cautions' | 'notRun
  * many histograms that fit, small data few, and where the line runs is not proven: hidesCounts refuses the clear cases.
  */
 export function withoutCounts(diagnosis: Diagnosis): Summary {
-  const { shots, trials, unit, geometry, misread, ordered, batches, lump } = diagnosis.data;
+  const { shots, trials, unit, geometry, misread, ordered, batches, lump, below } = diagnosis.data;
   const { version, alpha, tolerance } = diagnosis.engine;
   const { mean, variance, third, fourth, fano, dispersion } = diagnosis.moments;
   const { levels, poissonPart, divergenceInterval } = diagnosis.fit;
@@ -67,7 +69,17 @@ export function withoutCounts(diagnosis: Diagnosis): Summary {
   return {
     format: 'severalty.summary/1',
     engine: { version, alpha, tolerance },
-    data: { shots, trials, unit, geometry, misread, ordered, batches, lumped: lump !== null },
+    data: {
+      shots,
+      trials,
+      unit,
+      geometry,
+      misread,
+      ordered,
+      batches,
+      lumped: lump !== null,
+      ...(below && { opening: true as const })
+    },
     ...measured,
     ...(diagnosis.nuisances?.misread ? { nuisances: ofMisreads(diagnosis.nuisances.misread) } : {}),
     tests: diagnosis.tests.map(ofTest),

@@ -1,5 +1,6 @@
 import type { Diagnosis, DistributionPoint } from '$lib/stats/types';
 import { formatCount, formatNumber } from '../format-number';
+import { countLabel } from '../count-label';
 import { alignTable, type TextColumn } from './align-table';
 
 /** Rows of the table; more counts are summed in steps. */
@@ -23,7 +24,7 @@ function single(rows: DistributionPoint[]): TextColumn[] {
     {
       title: 'count',
       numeric: true,
-      cells: rows.map(({ count, lump }) => formatCount(count) + (lump ? '+' : ''))
+      cells: rows.map(countLabel)
     },
     { title: 'shots', numeric: true, cells: rows.map(({ shots }) => formatCount(shots)) },
     { title: 'observed', numeric: true, cells: rows.map(({ observed }) => share(observed)) },
@@ -42,8 +43,9 @@ function summed(rows: DistributionPoint[]): TextColumn[] {
     group.reduce((total, row) => total + of(row), 0);
   const range = (group: DistributionPoint[]) => {
     const [from, to] = [group[0], group[group.length - 1]];
-    if (to.lump) return `${formatCount(from.count)}+`;
-    return from === to ? formatCount(from.count) : `${formatCount(from.count)}–${formatCount(to.count)}`;
+    if (from === to) return countLabel(from);
+    if (to.lump && !to.below) return `${formatCount(from.below ? 0 : from.count)}+`;
+    return `${formatCount(from.below ? 0 : from.count)}–${formatCount(to.count)}`;
   };
   return [
     { title: 'counts', numeric: true, cells: groups.map(range) },

@@ -4,10 +4,11 @@ import { formatCount, formatNumber } from '../format-number';
 import { sayStatedRate } from '../report/data-facts';
 import { GEOMETRIES, UNITS } from '../labels';
 import { sayInterval } from '../say-interval';
+import { sayLumpedLimits } from '../report/say-lumped-limits';
 import { wrap } from './wrap';
 
 /** What was given, and the mean and variance found in it. */
-export function sayData({ data, moments, engine }: Diagnosis, about: string[]): string {
+export function sayData({ data, moments, nuisances, engine }: Diagnosis, about: string[]): string {
   const trials =
     data.trials === null
       ? 'trials unknown'
@@ -18,6 +19,7 @@ export function sayData({ data, moments, engine }: Diagnosis, about: string[]): 
       : `; shots in order, in ${formatCount(data.batches)} batches`
     : '';
   const last = data.counts.at(-1)?.[0];
+  const lowest = data.below ? `counts from "${formatCount(data.below.to)} or fewer" on, ` : '';
   const range = data.lump
     ? `counts up to "${formatCount(data.lump.from)} or more"`
     : `largest count ${formatCount(last ?? null)}`;
@@ -28,11 +30,12 @@ export function sayData({ data, moments, engine }: Diagnosis, about: string[]): 
   return [
     'Data',
     wrap(
-      `${formatCount(data.shots)} ${data.shots === 1 ? 'shot' : 'shots'}, ${trials} (${GEOMETRIES[data.geometry]}), counted in ${UNITS[data.unit]}; ${range}${order}${misread}.`,
+      `${formatCount(data.shots)} ${data.shots === 1 ? 'shot' : 'shots'}, ${trials} (${GEOMETRIES[data.geometry]}), counted in ${UNITS[data.unit]}; ${lowest}${range}${order}${misread}.`,
       '  '
     ),
     ...about.map((line) => wrap(line, '  ')),
     wrap(`Mean${per} ${sayInterval(moments.mean)}, variance ${sayInterval(moments.variance)}.`, '  '),
+    ...sayLumpedLimits({ nuisances }).map((line) => wrap(line, '  ')),
     wrap(
       `Variance over the ceiling of independent trials, ${formatNumber(moments.ceiling)}: ${sayInterval(moments.dispersion)}.`,
       '  '

@@ -13,7 +13,8 @@ export function quotableOfSummary(summary: Summary): Quotable {
       ...data,
       digest: null,
       misreadApplied: nuisances?.misread.applied ?? false,
-      lump: data.lumped ? { from: null } : null
+      lump: data.lumped ? { from: null } : null,
+      opening: data.opening ? { to: null } : null
     },
     moments,
     fit: { divergence: fit.divergenceInterval, gSquared: null, certified: null, found: null, floor: null },

@@ -31,6 +31,8 @@ export interface Quotable {
     misreadApplied: boolean;
     /** The closing row; its first count is null where it is kept back. */
     lump: { from: number | null } | null;
+    /** The opening row; its last count is null where it is kept back. */
+    opening: { to: number | null } | null;
   };
   moments: Record<'mean' | 'variance' | 'dispersion', Interval>;
   fit: {
@@ -62,7 +64,8 @@ export function quotableOf(diagnosis: Diagnosis): Quotable {
     data: {
       ...data,
       misreadApplied: nuisances?.misread?.applied ?? false,
-      lump: data.lump && { from: data.lump.from }
+      lump: data.lump && { from: data.lump.from },
+      opening: data.below ? { to: data.below.to } : null
     },
     moments,
     fit: {

@@ -12,15 +12,14 @@ export const sayStatedRate = ({ misread, misreadUncertainty }: Diagnosis['data']
 /** What was given, as pairs of what and value. */
 export function dataFacts({ data }: Diagnosis, name: string | null): [string, string][] {
   const seen = data.counts.filter(([, shots]) => shots > 0);
-  const largest = data.lump?.from ?? seen.at(-1)?.[0] ?? 0;
+  const { lump, below } = data;
+  const largest = lump?.from ?? seen.at(-1)?.[0] ?? 0;
+  const smallest = below ? `${formatCount(below.to)} or fewer` : formatCount(seen[0]?.[0] ?? largest);
   return [
     ...(name ? [['Name', name] as [string, string]] : []),
     ['Shots', formatCount(data.shots)],
     ['Trials in a shot, N', data.trials === null ? 'unknown' : formatCount(data.trials)],
-    [
-      'Counts seen',
-      `${formatCount(seen[0]?.[0] ?? largest)} to ${formatCount(largest)}${data.lump ? ' or more' : ''}`
-    ],
+    ['Counts seen', `${smallest} to ${formatCount(largest)}${lump ? ' or more' : ''}`],
     ['Unit', data.unit === 'pair' ? 'pairs of defects: n/2 out of N/2 is tested' : 'single defects'],
     ['Counted on', GEOMETRIES[data.geometry]],
     ...(data.kept ? [['Counts kept', sayKept(data.kept)] as [string, string]] : []),

@@ -1,4 +1,5 @@
 import type { Diagnosis } from '$lib/stats/types';
+import { lumpsOf, lumpWords } from '../lump-words';
 import { formatCount, formatNumber } from '../format-number';
 
 /** How many trials the variance needs to fit under the ceiling, or why that is not told. */
@@ -9,7 +10,8 @@ export function sayCriticalTrials({ moments, data, nuisances }: Diagnosis): stri
   }
   if (nuisances?.misread?.applied)
     return 'Misreads are allowed for, and the ceiling with them depends on N and on the rate: no least N is given.';
-  if (data.lump !== null) return 'The last row lumps counts, so that no least N can be given.';
+  if (data.lump !== null || data.below)
+    return `${lumpWords(lumpsOf(data)).rows}, so that no least N can be given.`;
   if (moments.variance.value === null) return 'One shot has no variance, so that no least N can be given.';
   return 'The variance is not below the mean: no number of trials brings it under a ceiling.';
 }

@@ -4,6 +4,7 @@ import { formatCount } from '../format-number';
 import { endAsTyped } from './as-typed';
 import { sayCriticalTrials } from './say-critical-trials';
 import { sayChange, sayDrift, sayWithin } from './say-drift';
+import { sayLumpedLimits } from './say-lumped-limits';
 import { sayFlagged } from './say-flagged';
 import {
   sayKinks,
@@ -43,12 +44,7 @@ export const sayNuisances = (document: Diagnosis, stated: Stated | null): [strin
     ['Without empty shots', document.nuisances?.emptyAside?.statement ?? null],
     ['Odd counts', document.nuisances?.pairs?.statement ?? null],
     ['Post-selection', sayCut(document) ?? sayPostSelection(stated)],
-    [
-      'Lumped counts',
-      document.data.lump === null
-        ? 'No row lumps counts.'
-        : `The last row holds all counts of ${formatCount(document.data.lump.from)} and more; its likelihood is the sum of the law over them, and the ceiling is that of equal trials lumped in the same way.`
-    ],
+    ['Lumped counts', sayLumped(document)],
     ['N too small', trials(document, stated)],
     ['As N runs', document.nuisances?.trials?.statement ?? null]
   ]);
@@ -64,6 +60,18 @@ export function sayPairs(
   if (unit === 'pair') return 'Counts are even by construction: n/2 out of N/2 is tested.';
   const ring = geometry === 'ring-bonds' ? ' On a ring every count is even: give the unit as pairs.' : '';
   return `Single defects are tested.${ring}${sayFlagged(view, 'pairing')}`;
+}
+
+function sayLumped({ data: { lump, below }, nuisances }: Diagnosis): string {
+  const first = below && `The first row holds all counts of ${formatCount(below.to)} and fewer`;
+  const last =
+    lump && `${first ? 'the' : 'The'} last row holds all counts of ${formatCount(lump.from)} and more`;
+  if (!first && !last) return 'No row lumps counts.';
+  const rows = first && last ? `${first}, ${last}` : (first ?? last);
+  return [
+    `${rows}; its likelihood is the sum of the law over them, and the ceiling is that of equal trials lumped in the same way.`,
+    ...sayLumpedLimits({ nuisances })
+  ].join(' ');
 }
 
 /** Where the counts kept are stated to the engine, what it makes of them. */

@@ -87,8 +87,8 @@ export const DATA = {
   lump: {
     name: 'lump',
     words: [
-      'A closing row such as “10 or more”, in which a printed table puts its rarest counts together.',
-      'Its likelihood is the whole tail from there, and no count beyond its edge is invented.'
+      'A row such as “10 or more” or “2 or fewer”, in which a printed table puts its rarest counts together.',
+      'Its likelihood is the sum of the law over these counts, and none of them is invented.'
     ],
     formula: ['P(X ≥ c) = sum_{n≥c} f_n'],
     source: ''

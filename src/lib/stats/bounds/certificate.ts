@@ -12,7 +12,8 @@ export interface CertificateInput {
   /** `[count, shots]`, counts ascending and distinct. */
   counts: [number, number][];
   lump: { from: number; shots: number } | null;
-  /** All shots, those of the lump among them. */
+  below?: { to: number; shots: number } | null;
+  /** All shots, those of the lumps among them. */
   shots: number;
   trials: number | null;
 }
@@ -32,7 +33,9 @@ export interface CertificateInput {
  *   1e-9 once more than 1e10 shots are expected beyond the threshold. Input is taken to be a valid histogram.
  *
  * **Lump.** Its shots count as N for the upper end and as `from` for the lower end of the interval; thresholds
- * above `from` are not tried. With N unknown there is then no upper end and no high side.
+ * above `from` are not tried. With N unknown there is then no upper end and no high side. The shots of an opening row count
+ * as 0 for the lower end and as `to` for the upper end; thresholds below `to` are not tried. Both thresholds lie beyond the
+ * ends of the interval, so the tails they begin take in whole lumps or none.
  *
  * **Does the interval cover?** Its lower end misses when the total reaches the least k with P(Bin ≥ k) < β/2. For
  * k ≥ Sμ + 1 Hoeffding's theorem hands that to every law of the same mean. The only other case is k = 1 with
@@ -57,11 +60,18 @@ export interface CertificateInput {
  * Biometrika 28:437; Berger & Boos 1994, J. Amer. Stat. Assoc. 89:1012.
  */
 export function certificate(input: CertificateInput): Certificate | null {
-  const { lump, trials } = input;
+  const { lump, below = null, trials } = input;
   const shots = input.shots;
-  const counts = lump ? [...input.counts, [lump.from, lump.shots] as [number, number]] : input.counts;
+  const row = (count: number, seen: number): [number, number] => [count, seen];
+  const counts = [
+    ...(below ? [row(below.to, below.shots)] : []),
+    ...input.counts,
+    ...(lump ? [row(lump.from, lump.shots)] : [])
+  ];
   const lumped = lump?.shots ?? 0;
-  const lowest = counts.reduce((sum, [n, h]) => sum + n * h, 0);
+  const hidden = below ? below.to * below.shots : 0;
+  const nearest = counts.reduce((sum, [n, h]) => sum + n * h, 0);
+  const lowest = nearest - hidden;
   const found: { mean: number; finding: TailFinding | null }[] = [];
   const high = (mean: number, last: number, logBound: (n: number) => number) =>
     found.push({
@@ -71,23 +81,26 @@ export function certificate(input: CertificateInput): Certificate | null {
   const low = (mean: number, logBound: (n: number) => number) =>
     found.push({
       mean,
-      finding: tailThresholds({ side: 'low', first: Math.floor(mean - 1), last: 0, logBound, counts, shots })
+      finding: tailThresholds({
+        side: 'low',
+        first: Math.floor(mean - 1),
+        last: below?.to ?? 0,
+        logBound,
+        counts,
+        shots
+      })
     });
   if (trials === null) {
-    const total = poissonInterval(lowest, 1 - miss);
-    const upper = total.high / shots;
-    const lower = total.low / shots;
+    const upper = poissonInterval(nearest, 1 - miss).high / shots;
+    const lower = poissonInterval(lowest, 1 - miss).low / shots;
     if (lumped === 0) high(upper, Infinity, (n) => logPoissonTail('high', n, upper));
     low(lower, (n) => logPoissonTail('low', n, lower));
   } else {
     const all = shots * trials;
-    const highest = Math.min(all, lowest + (lump ? lumped * (trials - lump.from) : 0));
+    const highest = Math.min(all, nearest + (lump ? lumped * (trials - lump.from) : 0));
     const upper = clopperPearson(highest, all, 1 - miss).high;
     // Low counts are high numbers of trials without a defect: near p = 1 those keep their digits.
-    const idle = Math.min(
-      all,
-      counts.reduce((sum, [n, h]) => sum + (trials - n) * h, 0)
-    );
+    const idle = Math.min(all, counts.reduce((sum, [n, h]) => sum + (trials - n) * h, 0) + hidden);
     const idleUpper = clopperPearson(idle, all, 1 - miss).high;
     const last = lumped > 0 && lump ? lump.from : trials;
     high(trials * upper, last, (n) => logBinomialTail('high', n, trials, upper));

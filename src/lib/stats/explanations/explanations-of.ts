@@ -37,7 +37,7 @@ export async function explanationsOf(
   pace: Pace
 ): Promise<Explanations> {
   const { mean, variance } = sampleMoments(data);
-  const { trials, lump } = data;
+  const { trials, lump, below } = data;
   const last = Math.max(lump?.from ?? 0, data.first + data.shots.length - 1);
   const seen: Seen = { mean, variance, last, empty: data.first === 0 ? data.shots[0] / data.total : 0 };
   const told: Unranked[] = independentLaws(data, independent);
@@ -91,12 +91,12 @@ export async function explanationsOf(
     separate: tied.flatMap((a, i) =>
       tied.slice(i + 1).map((b) => {
         const [first, second] = [fitted.get(a), fitted.get(b)];
-        const shots = first && second && !lump ? shotsToSeparate(data, first, second) : null;
+        const shots = first && second && !lump && !below ? shotsToSeparate(data, first, second) : null;
         return { between: [a, b] as [typeof a, typeof b], measurement: separate(a, b), shots };
       })
     ),
     notRun,
-    pairs: lump ? null : pairLimit(trials, moments.ceiling, moments.dispersion),
+    pairs: lump || below ? null : pairLimit(trials, moments.ceiling, moments.dispersion),
     statement: explainStatement(ranked, tied, options.alpha)
   };
 }

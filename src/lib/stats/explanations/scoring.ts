@@ -6,7 +6,7 @@ const nudge = 1e-6;
 
 /**
  * Slope of the log-likelihood and the expected information of all shots, g_j = Σ h_n ∂_j f_n/f_n and
- * I_jk = S Σ ∂_j f_n ∂_k f_n/f_n, both over the counts seen (a lump is one cell).
+ * I_jk = S Σ ∂_j f_n ∂_k f_n/f_n, both over the counts seen (a lump at either end is one cell).
  */
 export function scoring(
   model: StoryModel,
@@ -27,7 +27,12 @@ export function scoring(
   const information = new Array<number>(size * size).fill(0);
   for (let i = 0; i < here.length; i++) {
     if (!(here[i] > 0)) continue;
-    const shots = i < data.shots.length ? data.shots[i] : data.lump!.shots;
+    const shots =
+      i < data.shots.length
+        ? data.shots[i]
+        : i === data.shots.length && data.lump
+          ? data.lump.shots
+          : data.below!.shots;
     for (let j = 0; j < size; j++) {
       const relative = slopes[j][i] / here[i];
       gradient[j] += shots * relative;
@@ -39,7 +44,7 @@ export function scoring(
   return { gradient, information };
 }
 
-/** Probabilities of the counts from the first to the last seen, then of the lump. */
+/** Probabilities of the counts from the first to the last seen, then of the lump and of the opening row. */
 function cellsOf(data: FitData, window: { first: number; values: Float64Array; scale: number }): number[] {
   const { first, values, scale } = window;
   const cells = Array.from(data.shots, (_, i) => (values[data.first + i - first] ?? 0) / scale);
@@ -47,6 +52,11 @@ function cellsOf(data: FitData, window: { first: number; values: Float64Array; s
     let tail = 0;
     for (let k = values.length - 1; k >= Math.max(0, data.lump.from - first); k--) tail += values[k];
     cells.push(tail / scale);
+  }
+  if (data.below) {
+    let head = 0;
+    for (let k = 0; k < values.length && k <= data.below.to - first; k++) head += values[k];
+    cells.push(head / scale);
   }
   return cells;
 }

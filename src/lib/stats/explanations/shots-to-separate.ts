@@ -35,6 +35,7 @@ export function shotsToSeparate(data: FitData, first: FittedStory, second: Fitte
     first: start + from,
     shots: Float64Array.from(kept.slice(from, to)),
     lump: null,
+    below: null,
     total: kept.reduce((sum, value) => sum + value, 0),
     withoutEmpty: false
   };

@@ -15,7 +15,8 @@ export interface CorrectedDivergence {
  * off. Its variance has two parts: Var(ln(p̂/f))/S, which rules when the truth is far (the refit moves D only
  * in second order), and the variance over the resamples, which rules when it is near.
  *
- * @param logLaw ln f at data.first …, and of the lump
+ * @param logLaw ln f at data.first …
+ * @param logLump ln of the probability of the lump, logBelow of the opening row
  * @param nullDivergences KL of each resample from its own refit
  */
 export function divergenceInterval(
@@ -23,7 +24,8 @@ export function divergenceInterval(
   logLaw: ArrayLike<number>,
   logLump: number,
   plugIn: number,
-  nullDivergences: number[]
+  nullDivergences: number[],
+  logBelow = -Infinity
 ): CorrectedDivergence {
   const draws = nullDivergences.length;
   const bias = nullDivergences.reduce((sum, value) => sum + value, 0) / draws;
@@ -34,6 +36,7 @@ export function divergenceInterval(
   };
   data.shots.forEach((shots, i) => add(shots, logLaw[i]));
   if (data.lump) add(data.lump.shots, logLump);
+  if (data.below) add(data.below.shots, logBelow);
   const reach = 1.96 * Math.sqrt(squares / data.total + noise);
   const corrected = plugIn - bias;
   const interval = {

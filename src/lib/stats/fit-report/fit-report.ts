@@ -36,11 +36,14 @@ export function fitReport({
   const logLaw = Float64Array.from(laid.law, (f, i) =>
     f > 1e-20 ? Math.log(f) : logPmf(law, counts.first + i)
   );
-  // The first count of a lump so far out is nearly all of it.
-  const logLump = laid.above > 1e-20 || !counts.lump ? Math.log(laid.above) : logPmf(law, counts.lump.from);
+  // The nearest count of a lump so far out is nearly all of it.
+  const logLump = (probability: number, nearest: number | undefined) =>
+    probability > 1e-20 || nearest === undefined ? Math.log(probability) : logPmf(law, nearest);
+  const above = logLump(laid.above, counts.lump?.from);
+  const below = logLump(laid.below, counts.below?.to);
   const corrected =
     fitted.nullDivergences.length > 0
-      ? divergenceInterval(counts, logLaw, logLump, plugIn, fitted.nullDivergences)
+      ? divergenceInterval(counts, logLaw, above, plugIn, fitted.nullDivergences, below)
       : null;
   // Where the interval reaches 0 there may be no difference to notice, at any number of shots.
   const noticed = corrected?.interval.low ? Math.ceil(Math.log(1 / alpha) / corrected.corrected) : null;

@@ -43,7 +43,7 @@ export function bestLaw(data: FitData): BestLaw {
   const last = data.first + data.shots.length - 1;
   const candidates = data.withoutEmpty
     ? conditioned(data, moments.mean)
-    : starts(data.trials, moments, { first: data.first, last: data.lump?.from ?? last });
+    : starts(data.trials, moments, { first: data.below?.to ?? data.first, last: data.lump?.from ?? last });
   let effort = first;
   const found = candidates
     .map((start) => {
@@ -81,7 +81,8 @@ function throughValleys(space: Workspace, from: Climb): Climb {
 
 /** Every shot had the same count, or lies in the lump: that many sure trials explain it with likelihood 1. */
 function oneCount(data: FitData, variance: number, mean: number): TrialLevels | null {
-  if (data.lump ? data.shots.length > 0 : variance > 0) return null;
+  const inside = data.shots.some((shots) => shots > 0);
+  if (data.lump ? inside || data.below : variance > 0) return null;
   const ones = data.lump ? data.lump.from : mean;
   return { p: [], trials: [], ones, zeros: (data.trials ?? Infinity) - ones, poissonPart: 0 };
 }

@@ -3,7 +3,7 @@ import type { Workspace } from './workspace';
 /**
  * Change of each cell's probability: (uf)_n = f_{n−1} − f_n for power 1, (u²f)_n for 2, and for −1 what a
  * sure trial leaving 1 does, f_{n+1} − f_n. Entries: data.shots cells, then the lump, then n = 0 if set
- * aside. `f` starts at space.first; `out` receives them.
+ * aside, then the opening row. `f` starts at space.first; `out` receives them.
  */
 export function cellChange(space: Workspace, f: Float64Array, power: 1 | 2 | -1, out: Float64Array): void {
   const { data, length } = space;
@@ -13,7 +13,7 @@ export function cellChange(space: Workspace, f: Float64Array, power: 1 | 2 | -1,
   const from = Math.min(cells, Math.max(0, -shift));
   const to = Math.max(from, Math.min(cells, length - shift));
   for (let i = 0; i < from; i++) out[i] = 0;
-  for (let i = to; i < cells + 2; i++) out[i] = 0;
+  for (let i = to; i < cells + 3; i++) out[i] = 0;
   if (power === -1) {
     for (let i = from; i < to; i++) out[i] = at(f, i + shift + 1, length) - f[i + shift];
   } else {
@@ -32,6 +32,13 @@ export function cellChange(space: Workspace, f: Float64Array, power: 1 | 2 | -1,
     if (power === 1) out[cells] = at(f, c - 1, length);
     else if (power === 2) out[cells] = at(f, c - 2, length) - at(f, c - 1, length);
     else out[cells] = -at(f, c, length);
+  }
+  // Up to a count likewise: Σ_{k≤c} (uf)_k = −f_c, Σ (u²f)_k = f_c − f_{c−1}.
+  if (data.below) {
+    const c = data.below.to - space.first;
+    if (power === 1) out[cells + 2] = -at(f, c, length);
+    else if (power === 2) out[cells + 2] = at(f, c, length) - at(f, c - 1, length);
+    else out[cells + 2] = at(f, c + 1, length);
   }
   if (space.emptySingle !== 0) {
     const none = at(f, -space.first, length);

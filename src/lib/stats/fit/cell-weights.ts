@@ -1,4 +1,4 @@
-import { tailFrom } from './log-likelihood';
+import { headTo, tailFrom } from './log-likelihood';
 import type { Workspace } from './workspace';
 
 /** Fills the workspace's ∂L/∂f and −∂²L/∂f² of each cell for the pmf it holds. */
@@ -12,11 +12,17 @@ export function cellWeights(space: Workspace): void {
     single[i] = shots[i] * over;
     double[i] = single[i] * over;
   }
-  space.lumpSingle = space.lumpDouble = space.emptySingle = space.emptyDouble = 0;
+  space.lumpSingle = space.lumpDouble = space.belowSingle = space.belowDouble = 0;
+  space.emptySingle = space.emptyDouble = 0;
   if (data.lump) {
     const tail = tailFrom(space, data.lump.from);
     space.lumpSingle = data.lump.shots / tail;
     space.lumpDouble = space.lumpSingle / tail;
+  }
+  if (data.below) {
+    const head = headTo(space, data.below.to);
+    space.belowSingle = data.below.shots / head;
+    space.belowDouble = space.belowSingle / head;
   }
   // With one sure trial no shot is empty, but some are once it leaves.
   if (data.withoutEmpty && space.first <= 1) {
@@ -37,6 +43,9 @@ function bend(space: Workspace): void {
   for (let i = Math.max(0, -shift); i < cells && i + shift < length + 2; i++) bent[i + shift] = single[i];
   if (data.lump) {
     for (let k = Math.max(0, data.lump.from - space.first); k < length + 2; k++) bent[k] += space.lumpSingle;
+  }
+  if (data.below) {
+    for (let k = Math.min(length + 1, data.below.to - space.first); k >= 0; k--) bent[k] += space.belowSingle;
   }
   if (space.first === 0) bent[0] += space.emptySingle;
   for (let k = 0; k < length; k++) bent[k] += bent[k + 2] - 2 * bent[k + 1];

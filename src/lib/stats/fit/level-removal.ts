@@ -37,7 +37,8 @@ export function levelRemoval(space: Workspace, p: number, twice: boolean, sums: 
       double += bent[n] * two;
     }
   } else {
-    const start = space.emptySingle !== 0 ? 0 : Math.max(0, shift - 2);
+    // A head is made of all counts below.
+    const start = space.emptySingle !== 0 || data.below ? 0 : Math.max(0, shift - 2);
     const over = 1 / p;
     const ratio = (1 - p) * over;
     let one = 0;

@@ -6,7 +6,7 @@ import type { Workspace } from './workspace';
 const trim = 1e-20;
 
 /**
- * Σ h_n ln f_n, with ln of the tail sum for a lump and −S ln(1 − f_0) when empty shots were set aside;
+ * Σ h_n ln f_n, with ln of the tail sums for lumps and −S ln(1 − f_0) when empty shots were set aside;
  * nats. −Infinity when an observed count is impossible. Leaves the pmf in the workspace.
  *
  * The window is trimmed for speed, and computed whole when an observed count lies near or beyond the trim.
@@ -37,6 +37,11 @@ function score(space: Workspace, least: number): number {
     if (!(tail > least)) return -Infinity;
     sum += data.lump.shots * Math.log(tail);
   }
+  if (data.below) {
+    const head = headTo(space, data.below.to);
+    if (!(head > least)) return -Infinity;
+    sum += data.below.shots * Math.log(head);
+  }
   if (data.withoutEmpty && first === 0) sum -= data.total * Math.log1p(-f[0]);
   return sum;
 }
@@ -45,5 +50,13 @@ function score(space: Workspace, least: number): number {
 export function tailFrom(space: Workspace, from: number): number {
   let sum = 0;
   for (let k = space.length - 1; k >= Math.max(0, from - space.first); k--) sum += space.f[k];
+  return sum;
+}
+
+/** P(X ≤ to) of the pmf in the workspace, smallest terms first. */
+export function headTo(space: Workspace, to: number): number {
+  let sum = 0;
+  const last = Math.min(space.length - 1, to - space.first);
+  for (let k = 0; k <= last; k++) sum += space.f[k];
   return sum;
 }

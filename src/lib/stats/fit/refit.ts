@@ -51,7 +51,7 @@ function fresh(space: Workspace, data: FitData, effort: Effort): Climb {
   const last = data.lump?.from ?? data.first + data.shots.length - 1;
   const from = data.withoutEmpty
     ? alike(data.trials, moments.mean)
-    : starts(data.trials, moments, { first: data.first, last })[0];
+    : starts(data.trials, moments, { first: data.below?.to ?? data.first, last })[0];
   return search(space, from, effort);
 }
 

@@ -7,14 +7,19 @@ export interface SampleMoments {
   third: number;
 }
 
-/** Mean, variance and third central moment; a lump counts as its first count. */
+/** Mean, variance and third central moment; a lump counts as its first count, an opening row as its last. */
 export function sampleMoments(data: FitData): SampleMoments {
-  let sum = data.lump ? data.lump.shots * data.lump.from : 0;
+  const { below } = data;
+  let sum = (data.lump ? data.lump.shots * data.lump.from : 0) + (below ? below.shots * below.to : 0);
   for (let i = 0; i < data.shots.length; i++) sum += data.shots[i] * (data.first + i);
   const mean = sum / data.total;
   const lumped = data.lump ? data.lump.from - mean : 0;
   let variance = (data.lump?.shots ?? 0) * lumped ** 2;
   let third = (data.lump?.shots ?? 0) * lumped ** 3;
+  if (below) {
+    variance += below.shots * (below.to - mean) ** 2;
+    third += below.shots * (below.to - mean) ** 3;
+  }
   for (let i = 0; i < data.shots.length; i++) {
     const away = data.first + i - mean;
     variance += data.shots[i] * away * away;

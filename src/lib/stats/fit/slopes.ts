@@ -71,7 +71,7 @@ function tangent(space: Workspace, f: Float64Array, out: Float64Array): number {
   const from = Math.min(cells, Math.max(0, -shift));
   const to = Math.max(from, Math.min(cells, length - shift));
   for (let i = 0; i < from; i++) out[i] = 0;
-  for (let i = to; i < cells + 2; i++) out[i] = 0;
+  for (let i = to; i < cells + 3; i++) out[i] = 0;
   let sum = 0;
   let before = at(f, from + shift - 1, length);
   for (let i = from; i < to; i++) {
@@ -84,6 +84,10 @@ function tangent(space: Workspace, f: Float64Array, out: Float64Array): number {
   if (data.lump) {
     out[cells] = at(f, data.lump.from - space.first - 1, length);
     sum += space.lumpSingle * out[cells];
+  }
+  if (data.below) {
+    out[cells + 2] = -at(f, data.below.to - space.first, length);
+    sum += space.belowSingle * out[cells + 2];
   }
   if (space.emptySingle !== 0) {
     out[cells + 1] = -at(f, -space.first, length);

@@ -27,6 +27,8 @@ export interface Workspace {
   bent: Float64Array;
   lumpSingle: number;
   lumpDouble: number;
+  belowSingle: number;
+  belowDouble: number;
   emptySingle: number;
   emptyDouble: number;
   /** Σ bent·g and Σ bent·gg of the last removal; see levelRemoval. */
@@ -66,13 +68,15 @@ export function workspace(data: FitData, again?: Workspace): Workspace {
     part: new Float64Array(capacity),
     g: new Float64Array(capacity),
     gg: new Float64Array(capacity),
-    tangents: Array.from({ length: usualLevels }, () => new Float64Array(room + 2)),
-    change: new Float64Array(room + 2),
+    tangents: Array.from({ length: usualLevels }, () => new Float64Array(room + 3)),
+    change: new Float64Array(room + 3),
     single: new Float64Array(room),
     double: new Float64Array(room),
     bent: new Float64Array(capacity + 2),
     lumpSingle: NaN,
     lumpDouble: NaN,
+    belowSingle: NaN,
+    belowDouble: NaN,
     emptySingle: NaN,
     emptyDouble: NaN,
     sums: { single: NaN, double: NaN },

@@ -54,6 +54,6 @@ export function evidenceOf({
     ...(drift && { drift }),
     lowTailOfTheRest: fitted.lowTailOfTheRest,
     empty: { seen: counts.first === 0 ? (counts.shots[0] ?? 0) : 0, expected: fitted.expectedEmpty },
-    even: counts.lump ? null : evenShots(counts, law)
+    even: counts.lump || counts.below ? null : evenShots(counts, law)
   };
 }

@@ -24,12 +24,13 @@ const enough = 1e-10;
  * the counts seen, and the problem is convex. Active set: fit the values at the knots, drop knots that
  * would bend upward, add the knot of steepest promise (Dümbgen, Hüsler & Rufibach 2007, from memory).
  *
- * A lump takes its own share of the probability freely, which keeps the problem convex and the result a
+ * Lumps take their own shares of the probability freely, which keeps the problem convex and the result a
  * lower limit. Empty input gives divergence 0.
  */
-export function floorLaw(data: FitData): FloorLaw {
+export function floorLaw(given: FitData): FloorLaw {
+  const data = given.lump || given.below ? withoutEnds(given) : given;
   const size = data.shots.length;
-  const singles = data.total - (data.lump?.shots ?? 0);
+  const singles = data.total - (data.lump?.shots ?? 0) - (data.below?.shots ?? 0);
   if (size === 0 || singles === 0)
     return { divergence: 0, logProbabilities: new Float64Array(size), knots: [], slack: 0 };
   const share = singles / data.total;
@@ -64,6 +65,15 @@ export function floorLaw(data: FitData): FloorLaw {
     if (!(fit.score > before)) break;
   }
   return finish(data, weights, base, interpolate(knots, fit.values, size), knots, share, slack);
+}
+
+/** The same counts from the first to the last seen: beside a lump there may be empty ones, where no law ends. */
+function withoutEnds(data: FitData): FitData {
+  let start = 0;
+  let end = data.shots.length;
+  while (start < end && data.shots[start] === 0) start++;
+  while (end > start && data.shots[end - 1] === 0) end--;
+  return { ...data, first: data.first + start, shots: data.shots.subarray(start, end) };
 }
 
 /** A straight line through the law's own scale: −b at the data's mode, sloped to match the two ends. */

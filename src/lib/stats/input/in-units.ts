@@ -8,7 +8,7 @@ export interface InUnits {
 
 /** For pairs, n/2 out of N/2; odd counts, an odd N or an odd lump are refused. Counts above N are refused. */
 export function inUnits(histogram: Histogram, trials: number | null, unit: Unit): InUnits {
-  const last = histogram.lump?.from ?? histogram.counts[histogram.counts.length - 1][0];
+  const last = histogram.lump?.from ?? histogram.counts.at(-1)?.[0] ?? histogram.below!.to;
   if (trials !== null && last > trials) {
     throw new BadInput(`A count of ${last} was seen, more than the ${trials} trials allow.`);
   }
@@ -24,11 +24,15 @@ export function inUnits(histogram: Histogram, trials: number | null, unit: Unit)
   const { lump } = histogram;
   if (lump && lump.from % 2 === 1)
     throw new BadInput('Counted in pairs the closing row must start at an even count.');
+  const { below } = histogram;
+  if (below && below.to % 2 === 1)
+    throw new BadInput('Counted in pairs the opening row must end at an even count.');
   return {
     histogram: {
       kind: 'histogram',
       counts: histogram.counts.map(([count, shots]) => [count / 2, shots]),
-      lump: lump && { from: lump.from / 2, shots: lump.shots }
+      lump: lump && { from: lump.from / 2, shots: lump.shots },
+      ...(below && { below: { to: below.to / 2, shots: below.shots } })
     },
     trials: trials === null ? null : trials / 2
   };

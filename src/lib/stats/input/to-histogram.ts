@@ -3,11 +3,22 @@ import { BadInput, type CountData, type Histogram } from '../types';
 /** Counts of a shot list summed, or a histogram put in order and checked; rows without shots are dropped. */
 export function toHistogram(data: CountData): Histogram {
   const histogram = data.kind === 'shots' ? summed(data.shots) : data;
-  const counts = [...histogram.counts].filter(([, shots]) => shots !== 0).sort((a, b) => a[0] - b[0]);
+  const given = histogram.below && histogram.below.shots !== 0 ? histogram.below : null;
+  // "0 to 0" is the row of the empty shots.
+  const empty: [number, number][] = given?.to === 0 ? [[0, given.shots]] : [];
+  const below = given && given.to !== 0 ? given : null;
+  const counts = [...empty, ...histogram.counts]
+    .filter(([, shots]) => shots !== 0)
+    .sort((a, b) => a[0] - b[0]);
   const lump = histogram.lump && histogram.lump.shots !== 0 ? histogram.lump : null;
   let total = 0;
   let before = -1;
-  for (const [count, shots] of lump ? [...counts, [lump.from, lump.shots]] : counts) {
+  const rows = [
+    ...(below ? [[below.to, below.shots]] : []),
+    ...counts,
+    ...(lump ? [[lump.from, lump.shots]] : [])
+  ];
+  for (const [count, shots] of rows) {
     if (!Number.isSafeInteger(count) || count < 0)
       throw new BadInput(`A count must be a whole number from 0 up, not ${count}.`);
     if (!Number.isSafeInteger(shots) || shots < 0) {
@@ -16,7 +27,7 @@ export function toHistogram(data: CountData): Histogram {
       );
     }
     if (count <= before)
-      throw new BadInput(`The count ${count} stands twice, or inside the closing row "or more".`);
+      throw new BadInput(`The count ${count} stands twice, or inside a row that lumps counts.`);
     before = count;
     total += shots;
   }
@@ -25,16 +36,20 @@ export function toHistogram(data: CountData): Histogram {
     throw new BadInput('The shots sum to more than 2^53, beyond which they cannot be told apart.');
   if (counts.length === 0) {
     throw new BadInput(
-      `Every shot is in the closing row "${lump!.from} or more": nothing is left to compare.`
+      lump && below
+        ? 'Every shot is in a row that lumps counts: nothing is left to compare.'
+        : lump
+          ? `Every shot is in the closing row "${lump.from} or more": nothing is left to compare.`
+          : `Every shot is in the opening row "${below!.to} or fewer": nothing is left to compare.`
     );
   }
-  const first = counts[0][0];
+  const first = rows[0][0];
   if (before - first > widest) {
     throw new BadInput(
       `The counts reach from ${first} to ${before}; at most ${widest} neighbouring counts can be diagnosed.`
     );
   }
-  return { kind: 'histogram', counts, lump };
+  return { kind: 'histogram', counts, lump, ...(below && { below }) };
 }
 
 /** A document of more rows than this is no longer read by anyone, and its laws would take minutes. */

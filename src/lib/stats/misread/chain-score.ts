@@ -17,7 +17,7 @@ export interface ChainScore {
 }
 
 /**
- * L = Σ h_n ln f_n + h_lump ln P(n ≥ from) − S ln P(kept), and its slopes in the p of each level.
+ * L = Σ h_n ln f_n + h_lump ln P(n ≥ from) + h_below ln P(n ≤ to) − S ln P(kept), and its slopes in the p of each level.
  *
  * @param levels number of levels of the chain in the space
  * @returns value −Infinity when a count was seen that the law forbids
@@ -60,6 +60,11 @@ export function chainScore(space: ChainSpace, levels: number, data: FitData, kep
     const part = sums(Math.max(low, data.lump.from), Math.min(high, kept?.to ?? high));
     for (let j = 0; j < levels; j++) relative[j] = part.slopes[j] / part.value - norm[j];
     if (!add(data.lump.shots, part.value)) return failed;
+  }
+  if (data.below && data.below.shots > 0) {
+    const part = sums(Math.max(low, kept?.from ?? low), Math.min(high, data.below.to));
+    for (let j = 0; j < levels; j++) relative[j] = part.slopes[j] / part.value - norm[j];
+    if (!add(data.below.shots, part.value)) return failed;
   }
   for (let i = 0; i < levels; i++)
     for (let j = i + 1; j < levels; j++) curvature[i * levels + j] = curvature[j * levels + i];

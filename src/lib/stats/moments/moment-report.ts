@@ -4,8 +4,8 @@ import { lumpedCeiling } from './lumped-ceiling';
 import { momentIntervals, type MomentIntervals } from './moment-intervals';
 
 /**
- * Moments of the document, without the critical N. A lump counts as its first count, so that mean and variance
- * are then lower limits, and the ceiling is the variance of equal trials lumped in the same way: against the plain
+ * Moments of the document, without the critical N. A lump counts as the count of it nearest to the others, so that
+ * the variance is then a lower limit (see lumpedLimits for what mean and variance can be), and the ceiling is the variance of equal trials lumped in the same way: against the plain
  * ceiling any lumped histogram would look regular (the document's cautions say so).
  *
  * @param equal probability of the equal trials, or their mean when N is unknown
@@ -18,13 +18,20 @@ export function momentReport(
   options: { resamples: number; seed: number },
   ceiling: number | null = null
 ): Omit<Diagnosis['moments'], 'criticalTrials'> {
-  const { lump } = histogram;
-  const counts = lump ? [...histogram.counts, [lump.from, lump.shots] as [number, number]] : histogram.counts;
+  const { lump, below = null } = histogram;
+  const counts: [number, number][] = [
+    ...(below ? [[below.to, below.shots] as [number, number]] : []),
+    ...histogram.counts,
+    ...(lump ? [[lump.from, lump.shots] as [number, number]] : [])
+  ];
   const found = momentIntervals(counts, trials, { ...options, stream: stream('intervals', 0) });
-  const other = ceiling ?? (lump ? lumpedCeiling(trials, equal, lump.from) : null);
+  const other = ceiling ?? (lump || below ? lumpedCeiling(trials, equal, { lump, below }) : null);
   if (other !== null) replaceCeiling(found, other);
   const variance = found.variance.value;
-  return { ...found, pairCovariance: variance === null ? null : variance - found.ceiling };
+  return {
+    ...found,
+    pairCovariance: variance === null ? null : variance - found.ceiling
+  };
 }
 
 /** Replaces the ceiling, and variance/ceiling with it. */

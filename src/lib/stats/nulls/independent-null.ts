@@ -38,11 +38,15 @@ export async function independentNull(
     certificate: certificate({
       counts: histogram.counts,
       lump: histogram.lump,
+      below: histogram.below ?? null,
       shots: counts.total,
       trials
     }),
     // The law's mean is that of the counts but for the rounding of the fit, up to 3e-5 of a far bound.
-    bounds: meanBounds(counts.lump ? lawMoments(law).mean : sampleMoments(counts).mean, trials),
+    bounds: meanBounds(
+      counts.lump || counts.below ? lawMoments(law).mean : sampleMoments(counts).mean,
+      trials
+    ),
     report: (fitted) =>
       fitReport({ counts, best, law, floor, fitted, supplied: options.supplied, alpha: options.alpha })
   };

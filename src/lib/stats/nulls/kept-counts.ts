@@ -11,7 +11,7 @@ import { mostBonds, type MisreadUse } from './misread-applies';
  */
 export function keptCounts(
   { kept, unit }: Pick<DiagnoseOptions, 'kept' | 'unit'>,
-  { lump }: Histogram,
+  { lump, below }: Histogram,
   { first, shots, trials }: FitData,
   misread: MisreadUse
 ): KeptCounts | null {
@@ -24,7 +24,10 @@ export function keptCounts(
   };
   if (trials === null) return refuse('A cut can be allowed for only where the number of trials is known.');
   if (trials > mostBonds) return refuse(`A cut can be allowed for only up to ${mostBonds} trials.`);
-  if (lump) return refuse('A closing row "or more" and a cut of the counts cannot both be allowed for.');
+  if (lump || below)
+    return refuse(
+      `${lump ? 'A closing row "or more"' : 'An opening row "or fewer"'} and a cut of the counts cannot both be allowed for.`
+    );
   if (misread.applies)
     return refuse('A misread rate and a cut of the counts cannot both be allowed for: give one of them.');
   const last = first + shots.length - 1;

@@ -28,7 +28,8 @@ export function misreadFitReport(
           laid.law.map((f) => Math.log(f)),
           Math.log(laid.above),
           plugIn,
-          fitted.nullDivergences
+          fitted.nullDivergences,
+          Math.log(laid.below)
         )
       : null;
   const noticed = corrected?.interval.low

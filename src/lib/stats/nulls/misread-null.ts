@@ -10,6 +10,7 @@ import { misreadCeiling } from '../misread/misread-ceiling';
 import { misreadCertificate } from '../misread/misread-certificate';
 import { readMoments } from '../misread/read-chain';
 import { toggledLaw } from '../misread/toggled-law';
+import { clampedVariance } from '../moments/clamped-variance';
 import type { DiagnoseOptions, Histogram } from '../types';
 import { misreadFitReport } from './misread-fit-report';
 import type { NullLaw } from './null-law';
@@ -45,12 +46,13 @@ export function misreadNull(
     levels,
     law: levels,
     logLikelihood: value,
-    ceiling: histogram.lump ? lumped(window, histogram.lump.from) : most.variance,
+    ceiling: histogram.lump || histogram.below ? clampedVariance(window, histogram) : most.variance,
     mostDispersed: { window, ceiling: (mean) => ceilingAt(mean).variance },
     // Shots in a lump leave the mean open on one side.
-    certificate: histogram.lump
-      ? null
-      : misreadCertificate({ counts: histogram.counts, shots: counts.total, bonds, rate }),
+    certificate:
+      histogram.lump || histogram.below
+        ? null
+        : misreadCertificate({ counts: histogram.counts, shots: counts.total, bonds, rate }),
     bounds: {
       // Given the flips it can fall below Chernoff's bound of the fitted law; from the mean alone no more is claimed.
       meanChernoff: (side, count) =>
@@ -62,14 +64,4 @@ export function misreadNull(
     },
     report: (fitted) => misreadFitReport(counts, levels, value, fitted, options)
   };
-}
-
-/** Variance of min(X, from). */
-function lumped(
-  { first, values, scale }: { first: number; values: Float64Array; scale: number },
-  from: number
-) {
-  const count = (i: number) => Math.min(from, first + i);
-  const mean = values.reduce((sum, f, i) => sum + (f / scale) * count(i), 0);
-  return values.reduce((sum, f, i) => sum + (f / scale) * (count(i) - mean) ** 2, 0);
 }

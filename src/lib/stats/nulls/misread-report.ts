@@ -16,7 +16,7 @@ import type { DiagnoseOptions, Diagnosis, Histogram, MisreadPart } from '../type
  */
 export function misreadReport(
   options: DiagnoseOptions,
-  { lump }: Histogram,
+  { lump, below }: Histogram,
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>,
   equal: number,
   law: FittedLaw,
@@ -26,7 +26,7 @@ export function misreadReport(
   const { trials, geometry, unit, misread } = options;
   if (geometry !== 'open-bonds' || unit !== 'defect' || trials === null || trials < 2) return undefined;
   const mean = moments.mean.value!;
-  const rawCeiling = lump ? lumpedCeiling(trials, equal, lump.from) : ceiling(mean, trials);
+  const rawCeiling = lump || below ? lumpedCeiling(trials, equal, { lump, below }) : ceiling(mean, trials);
   const variance = moments.variance.value;
   const applied = isReadChain(law) && !law.kept;
   return {
@@ -36,8 +36,9 @@ export function misreadReport(
     rawCeiling,
     rawDispersion: variance === null || !(rawCeiling > 0) ? null : variance / rawCeiling,
     // A lump hides how far its counts reach.
-    neededRate: lump ? { value: null, low: null, high: null } : neededRate(mean, moments.variance, trials),
-    ...(lump ? {} : { largestRate: largestRate(mean, trials, shots, geometry) }),
+    neededRate:
+      lump || below ? { value: null, low: null, high: null } : neededRate(mean, moments.variance, trials),
+    ...(lump || below ? {} : { largestRate: largestRate(mean, trials, shots, geometry) }),
     ...(spread && { spread }),
     kinks: applied && isReadChain(law) ? chainBlocks(law) : null
   };

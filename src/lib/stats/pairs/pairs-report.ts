@@ -15,7 +15,7 @@ const bySingles = Math.log(1e-6);
  * @param even shots with an even count, and the share that the best law expects; null with a lump
  */
 export function pairsReport(
-  { counts, lump }: Histogram,
+  { counts, lump, below }: Histogram,
   shots: number,
   options: Pick<DiagnoseOptions, 'unit' | 'geometry' | 'trials'>,
   even: { seen: number; expected: number } | null
@@ -30,7 +30,7 @@ export function pairsReport(
   if (!telling && !ring) return undefined;
   const halves = trials === null || trials % 2 === 0;
   const odd =
-    ring && trials !== null && lump === null
+    ring && trials !== null && lump === null && !below
       ? { ...oddCounts(counts, trials), shots: shots - even!.seen }
       : null;
   return { proposed: telling && halves, logChance, odd, statement: words(telling, halves, ring, shots, odd) };
@@ -51,7 +51,7 @@ function words(
   }
   if (odd === null)
     return ring
-      ? 'On a ring kinks come in pairs. How many odd counts there are, and so how often the reading failed, needs N and counts without a closing row.'
+      ? 'On a ring kinks come in pairs. How many odd counts there are, and so how often the reading failed, needs N and counts without lumps.'
       : '';
   if (odd.shots === 0)
     return 'No count is odd, as on a ring; there are too few defects or shots to say that this is no chance.';

@@ -44,9 +44,10 @@ export function luckyShot(law: Law, histogram: Histogram | null, most: number): 
   };
 }
 
-function shareSeen({ counts, lump }: Histogram, most: number): LuckyShot['observed'] {
-  const shots = counts.reduce((sum, [count, seen]) => sum + (count <= most ? seen : 0), 0);
-  const total = counts.reduce((sum, [, seen]) => sum + seen, lump?.shots ?? 0);
-  if (total === 0 || (lump !== null && most >= lump.from)) return null;
+function shareSeen({ counts, lump, below }: Histogram, most: number): LuckyShot['observed'] {
+  const few = below?.shots ?? 0;
+  const shots = counts.reduce((sum, [count, seen]) => sum + (count <= most ? seen : 0), few);
+  const total = counts.reduce((sum, [, seen]) => sum + seen, few + (lump?.shots ?? 0));
+  if (total === 0 || (below && most < below.to) || (lump !== null && most >= lump.from)) return null;
   return { shots, share: shots / total, ...clopperPearson(shots, total) };
 }

@@ -4,7 +4,8 @@ import { logNormalTail } from '../numerics/log-normal-tail';
 
 /**
  * Log-likelihood of the Gaussian with the sample's mean and variance, each count taking the probability of
- * n − ½ … n + ½; nats. With a lump, its probability is the upper tail from its first count − ½.
+ * n − ½ … n + ½; nats. With a lump, its probability is the upper tail from its first count − ½; with an opening row, the
+ * lower tail to its last count + ½.
  *
  * @returns null when every shot had the same count, so that there is no width.
  */
@@ -17,6 +18,7 @@ export function gaussian(data: FitData): { logLikelihood: number; mean: number; 
     if (data.shots[i] > 0) sum += data.shots[i] * logCell((data.first + i - mean) / width, 0.5 / width);
   }
   if (data.lump) sum += data.lump.shots * logNormalTail((data.lump.from - 0.5 - mean) / width);
+  if (data.below) sum += data.below.shots * logNormalTail((mean - data.below.to - 0.5) / width);
   return { logLikelihood: sum, mean, variance };
 }
 

@@ -5,6 +5,7 @@ import type { Window } from '../laws/window';
 export interface Cells {
   /** f at counts data.first, data.first + 1, … (conditioned on n ≥ 1 when empty shots are set aside). */
   law: Float64Array;
+  /** Probability below the listed counts; of the opening row when there is one. */
   below: number;
   /** Probability above the listed counts; of the lump when there is one. */
   above: number;

@@ -11,8 +11,9 @@ import { gSquaredLeft } from './g-squared-left';
  * @param window the law drawn from, trimmed where nothing is drawn
  */
 export function largestGSquared(resample: FitData, window: Window): number {
-  const { law, above } = cells(resample, window);
+  const { law, below, above } = cells(resample, window);
   let logLikelihood = resample.lump ? resample.lump.shots * Math.log(above) : 0;
+  if (resample.below) logLikelihood += resample.below.shots * Math.log(below);
   for (let i = 0; i < law.length; i++) {
     if (resample.shots[i] > 0) logLikelihood += resample.shots[i] * Math.log(law[i]);
   }

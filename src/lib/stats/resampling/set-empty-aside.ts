@@ -13,6 +13,7 @@ export function setEmptyAside(data: FitData): { rest: FitData; empty: number } {
     first: start,
     shots: data.shots.subarray(start),
     lump: data.lump,
+    below: data.below,
     total: Math.round(data.total - empty),
     withoutEmpty: true
   };

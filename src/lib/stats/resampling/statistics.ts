@@ -50,13 +50,25 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
   use(
     'high-tail',
     whole('high', high),
-    oneCount ?? (high <= (data.trials ?? Infinity) ? null : none('above'))
+    oneCount ??
+      (high > (data.trials ?? Infinity)
+        ? none('above')
+        : high > (data.lump?.from ?? Infinity)
+          ? lumps('closing', 'high')
+          : null)
   );
-  use('low-tail', whole('low', low), oneCount ?? (low >= 0 ? null : none('below')));
+  use(
+    'low-tail',
+    whole('low', low),
+    oneCount ?? (low < 0 ? none('below') : low < (data.below?.to ?? 0) ? lumps('opening', 'low') : null)
+  );
   use(
     'parity',
     { of: parityExcess, needs: parityNeeds, root: false },
-    oneCount ?? (data.lump ? 'The closing row lumps even and odd counts together.' : null)
+    oneCount ??
+      (data.lump || data.below
+        ? `The ${data.lump ? 'closing' : 'opening'} row lumps even and odd counts together.`
+        : null)
   );
   use('empty-shots', { of: emptyExcess, needs: square, root: true }, noEmpty(observed));
   const rest = observed.rest();
@@ -68,7 +80,12 @@ function none(side: string): string {
   return `No possible count lies more than one standard deviation ${side} the mean.`;
 }
 
+function lumps(row: 'closing' | 'opening', tail: 'high' | 'low'): string {
+  return `The ${row} row lumps the counts of the ${tail} tail with counts nearer the mean.`;
+}
+
 function noEmpty(observed: Refitted): string | null {
+  if (observed.data.below) return 'The opening row lumps empty shots with others.';
   const rest = observed.rest();
   if (!rest) return 'No shot was empty, or every shot was.';
   let different = rest.data.lump ? 1 : 0;
@@ -92,18 +109,23 @@ function ofTheRest(limit: number): Statistic {
 
 function tail(data: FitData, window: Window, side: 'high' | 'low', limit: number): number {
   const { law, below, above } = cells(data, window);
-  const { lump } = data;
-  if (!lump)
+  const { lump, below: opening } = data;
+  if (!lump && !opening)
     return tailExcess(data.shots, law, data.total, side === 'low' ? below : above, side, limit - data.first);
-  // A lump is one more cell, at its first count.
-  const shots = append(data.shots, lump.from - data.first, lump.shots);
-  const fitted = append(law, lump.from - data.first, above);
-  return tailExcess(shots, fitted, data.total, side === 'low' ? below : 0, side, limit - data.first);
+  // A lump is one more cell, at the count nearest to the others; nothing lies beyond it.
+  const beyond = side === 'low' ? (opening ? 0 : below) : lump ? 0 : above;
+  const before = opening ? 1 : 0;
+  const shots = framed(data.shots, opening?.shots, lump?.shots);
+  const fitted = framed(law, opening ? below : undefined, lump ? above : undefined);
+  return tailExcess(shots, fitted, data.total, beyond, side, limit - data.first + before);
 }
 
-function append(values: Float64Array, at: number, value: number): Float64Array {
-  const out = new Float64Array(Math.max(values.length, at + 1));
-  out.set(values);
-  out[at] += value;
+/** The values with one more before and after, where there is one. */
+function framed(values: Float64Array, before: number | undefined, after: number | undefined): Float64Array {
+  const start = before === undefined ? 0 : 1;
+  const out = new Float64Array(values.length + start + (after === undefined ? 0 : 1));
+  if (before !== undefined) out[0] = before;
+  out.set(values, start);
+  if (after !== undefined) out[out.length - 1] = after;
   return out;
 }

@@ -42,8 +42,8 @@ export async function emptyAside(
   options: DiagnoseOptions,
   pace: Pace
 ): Promise<EmptyAside | null> {
-  const { trials, lump } = data;
-  if (trials === null || trials < 2 || trials > mostBonds || lump) return null;
+  const { trials, lump, below } = data;
+  if (trials === null || trials < 2 || trials > mostBonds || lump || below) return null;
   const { rest: aside } = setEmptyAside(data);
   const rest: FitData = { ...aside, withoutEmpty: false };
   if (rest.total < 2 || rest.shots.filter((shots) => shots > 0).length < 2) return null;

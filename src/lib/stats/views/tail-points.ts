@@ -19,14 +19,14 @@ export function tailPoints(
   let seen = 0;
   for (const point of points) {
     seen += point.shots;
-    // Nothing at or below a lump's first count can be told apart inside it.
-    if (point.count < mean && !point.lump) out.push(at(point.count, 'low', seen));
+    // Inside a lump nothing can be told apart: a closing row ends no low tail, an opening one begins no high tail.
+    if (point.count < mean && (!point.lump || point.below)) out.push(at(point.count, 'low', seen));
   }
   seen = 0;
   const high: TailPoint[] = [];
   for (const point of [...points].reverse()) {
     seen += point.shots;
-    if (point.count > mean) high.push(at(point.count, 'high', seen));
+    if (point.count > mean && !point.below) high.push(at(point.count, 'high', seen));
   }
   return out.concat(high.reverse());
 

@@ -8,7 +8,7 @@ import type { Diagnosis } from '$lib/stats/types';
 import { beforeAll, describe, expect, it } from 'vitest';
 
 const settings = { level: 0.99, share: 0.1 };
-const plain = { label: '', isP: false, positive: true, wholeIsExact: false, lumped: false, note: '' };
+const plain = { label: '', isP: false, positive: true, wholeIsExact: false, lumped: null, note: '' };
 const fano: Quantity = {
   ...plain,
   id: 'fano',

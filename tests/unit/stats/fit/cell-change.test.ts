@@ -28,7 +28,7 @@ describe.each([1, 2, -1] as const)('cellChange, power %s', (power) => {
     const space = workspace(dataOf(problem));
     logLikelihood(space, levels);
     cellWeights(space);
-    const out = new Float64Array(5);
+    const out = new Float64Array(space.data.shots.length + 3);
     cellChange(space, space.f, power, out);
     for (let n = 1; n <= 3; n++) expect(out[n - 1]).toBeCloseTo(changeAt(n, power), 13);
     let lump = 0;
@@ -36,11 +36,23 @@ describe.each([1, 2, -1] as const)('cellChange, power %s', (power) => {
     expect(out[3]).toBeCloseTo(lump, 13);
   });
 
+  it('sums over an opening row', () => {
+    const problem: Problem = { shots: [0, 0, 0, 9, 3], trials: 6, below: { to: 2, shots: 11 } };
+    const space = workspace(dataOf(problem));
+    logLikelihood(space, levels);
+    cellWeights(space);
+    const out = new Float64Array(space.data.shots.length + 3);
+    cellChange(space, space.f, power, out);
+    let below = 0;
+    for (let n = -1; n <= 2; n++) below += changeAt(n, power);
+    expect(out[4]).toBeCloseTo(below, 13);
+  });
+
   it('takes in the empty cell when empty shots are set aside', () => {
     const space = workspace(dataOf({ shots: [7, 4, 9, 3], trials: 6, withoutEmpty: true }));
     logLikelihood(space, levels);
     cellWeights(space);
-    const out = new Float64Array(5);
+    const out = new Float64Array(space.data.shots.length + 3);
     cellChange(space, space.f, power, out);
     // One sure trial: f_0 is 0, and grows only when that trial leaves 1.
     expect(out[4]).toBeCloseTo(changeAt(0, power), 13);
@@ -53,7 +65,7 @@ describe('cell weights and sums', () => {
     const space = workspace(dataOf({ shots, trials: 6 }));
     logLikelihood(space, levels);
     cellWeights(space);
-    const change = Float64Array.from([0.1, -0.2, 0.4, 0, 0]);
+    const change = Float64Array.from([0.1, -0.2, 0.4, 0, 0, 0]);
     let single = 0;
     let double = 0;
     shots.slice(1).forEach((h, i) => {

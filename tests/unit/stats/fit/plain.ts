@@ -5,13 +5,14 @@ export interface Problem {
   shots: number[];
   trials: number | null;
   lump?: { from: number; shots: number } | null;
+  below?: { to: number; shots: number } | null;
   withoutEmpty?: boolean;
 }
 
 /** FitData of shots at counts 0, 1, 2, … */
-export function dataOf({ shots, trials, lump = null, withoutEmpty = false }: Problem): FitData {
+export function dataOf({ shots, trials, lump = null, below = null, withoutEmpty = false }: Problem): FitData {
   const counts = shots.map((h, n): [number, number] => [n, h]).filter(([, h]) => h > 0);
-  return fitData({ kind: 'histogram', counts, lump }, trials, withoutEmpty);
+  return fitData({ kind: 'histogram', counts, lump, below }, trials, withoutEmpty);
 }
 
 /** Levels with `ones` and `zeros` and a Poisson part. */
@@ -61,6 +62,8 @@ export function plainLogLikelihood(problem: Problem, p: number[], poissonPart = 
     total += h;
   });
   if (lump) sum += lump.shots * Math.log(f.slice(lump.from).reduce((a, b) => a + b, 0));
+  const { below } = problem;
+  if (below) sum += below.shots * Math.log(f.slice(0, below.to + 1).reduce((a, b) => a + b, 0));
   if (withoutEmpty) sum -= total * Math.log1p(-f[0]);
   return sum;
 }

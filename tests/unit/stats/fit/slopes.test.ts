@@ -29,6 +29,42 @@ const situations: { name: string; problem: Problem; levels: TrialLevels }[] = [
     ])
   },
   {
+    name: 'an opening row',
+    problem: { shots: [0, 0, 0, ...shots.slice(3)], trials: 9, below: { to: 2, shots: 118 } },
+    levels: levelsOf(
+      [
+        [0.15, 5],
+        [0.3, 2],
+        [0.8, 1]
+      ],
+      { ones: 1 }
+    )
+  },
+  {
+    name: 'lumps at both ends, counts between never seen',
+    problem: {
+      shots: [0, 0, 0, 31, 9, 0],
+      trials: 9,
+      below: { to: 1, shots: 52 },
+      lump: { from: 6, shots: 5 }
+    },
+    levels: levelsOf([
+      [0.2, 5],
+      [0.6, 3],
+      [0.8, 1]
+    ])
+  },
+  {
+    name: 'a Poisson part and lumps at both ends',
+    problem: {
+      shots: [0, 0, 66, 31],
+      trials: null,
+      below: { to: 1, shots: 52 },
+      lump: { from: 4, shots: 17 }
+    },
+    levels: levelsOf([[0.25, 3]], { zeros: Infinity, poissonPart: 1.4 })
+  },
+  {
     name: 'empty shots set aside',
     problem: { shots, trials: 9, withoutEmpty: true },
     levels: levelsOf([

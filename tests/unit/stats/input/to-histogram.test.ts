@@ -63,7 +63,7 @@ describe('toHistogram', () => {
         ],
         { from: 4, shots: 2 }
       ),
-      /inside the closing row/
+      /inside a row that lumps counts/
     ],
     ['negative shots in the lump', of([[1, 2]], { from: 4, shots: -2 }), /number of shots.*not -2/],
     ['NaN in the lump', of([[1, 2]], { from: 4, shots: NaN }), /number of shots/],

@@ -19,7 +19,7 @@ function exact(p: number[], rate: number) {
     1
   );
   const shots = values.map((f) => f * 1e5);
-  const data = { trials: p.length, first, shots, lump: null, total: 1e5, withoutEmpty: false };
+  const data = { trials: p.length, first, shots, lump: null, below: null, total: 1e5, withoutEmpty: false };
   return { data, itself: values.reduce((sum, f) => sum + 1e5 * f * Math.log(f), 0) };
 }
 

@@ -10,7 +10,7 @@ const brief = {
   kind: z.enum(['histogram', 'shots']),
   digest: z.string().describe('sha256 of the canonical histogram, as in a diagnosis document'),
   shots: z.int(),
-  mean: z.number().describe('Sample mean; a lump counts as its first count'),
+  mean: z.number().describe('Sample mean; a lump counts as the count of it nearest to the others'),
   largest: z.int().describe('Largest count seen, or where a lump begins'),
   device: z.string().nullable(),
   firmware: z.string().nullable(),
@@ -31,6 +31,10 @@ export const datasetSchema = z.object({
     .object({ from: z.int(), shots: z.int() })
     .nullable()
     .describe('Shots with this count or more, where the file says no more'),
+  below: z
+    .object({ to: z.int(), shots: z.int() })
+    .nullable()
+    .describe('Shots with this count or fewer, where the file says no more'),
   batches: z.int().nullable().describe('Number of batches of a shot list that has them'),
   by: z.string().nullable().describe('Name of who saved it; null when they are gone'),
   file: z

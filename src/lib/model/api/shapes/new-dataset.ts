@@ -15,13 +15,18 @@ export const newDatasetSchema = z.strictObject({
     .union([z.record(z.string(), z.number()), z.array(z.tuple([z.union([z.int(), z.string()]), z.number()]))])
     .optional()
     .describe(
-      'A histogram: {"0": 12, "1": 30} or [[0, 12], [1, 30]], numbers of shots; a last "10+" is a lump'
+      'A histogram: {"0": 12, "1": 30} or [[0, 12], [1, 30]], numbers of shots; a first "0-2" and a last "10+" are lumps'
     ),
   lump: z
     .object({ from: z.int(), shots: z.int() })
     .nullable()
     .optional()
     .describe('Shots with this count or more'),
+  below: z
+    .object({ to: z.int(), shots: z.int() })
+    .nullable()
+    .optional()
+    .describe('Shots with this count or fewer'),
   shots: z.array(z.int()).optional().describe('Or a shot list: one count a shot, in their order'),
   batches: z
     .array(z.union([z.string(), z.number()]))

@@ -27,14 +27,14 @@ export function sayScatter(quotable: Quotable): Words[] {
     engine.resamples === null ? '' : words` from ${counted(engine.resamples, 'resample')} of the histogram`;
   return [
     ceiling(quotable),
-    words`The 95\u202f% intervals of mean, variance and variance over ceiling are bootstrap-t${from} (${SOURCES_BY_YEAR.efronTibshirani}); those of the variance are never narrower than Fisher’s index of dispersion gives, nor than one unseen count could make them${data.lump ? ', and hold for the counts as lumped' : ''}.`
+    words`The 95\u202f% intervals of mean, variance and variance over ceiling are bootstrap-t${from} (${SOURCES_BY_YEAR.efronTibshirani}); those of the variance are never narrower than Fisher’s index of dispersion gives, nor than one unseen count could make them${data.lump || data.opening ? ', and hold for the counts as lumped' : ''}.`
   ];
 }
 
 function ceiling(quotable: Quotable): Words {
   if (quotable.data.misreadApplied)
-    return words`The variance was compared with its ceiling, the largest that independent kinks with this mean can have${sayMisread(quotable)}${quotable.data.lump ? ' and lumped in the same way' : ''}.`;
-  if (quotable.data.lump)
+    return words`The variance was compared with its ceiling, the largest that independent kinks with this mean can have${sayMisread(quotable)}${quotable.data.lump || quotable.data.opening ? ' and lumped in the same way' : ''}.`;
+  if (quotable.data.lump || quotable.data.opening)
     return [
       text(
         'The variance was compared with its ceiling, that of equal trials with the fitted mean, lumped in the same way.'

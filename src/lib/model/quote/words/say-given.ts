@@ -15,6 +15,7 @@ export function sayGiven(quotable: Quotable, provenance: Provenance): Words[] {
     ...(data.digest
       ? [words`The sha256 of the histogram is ${code(data.digest.replace(/^sha256:/, ''))}.`]
       : []),
+    ...opening(quotable),
     ...lump(quotable),
     ...order(quotable),
     ...cut(quotable),
@@ -51,12 +52,22 @@ function lump({ data }: Quotable): Words[] {
     return [
       [
         text(
-          'The largest counts were given as one row; mean and variance take its first count and are lower limits.'
+          `The largest counts were given as one row; mean and variance take its first count${data.opening ? '' : ' and are lower limits'}.`
         )
       ]
     ];
   return [
-    words`Counts of ${whole(from)} and more were given as one row: they enter the likelihood as a tail, and mean and variance take each such shot as ${whole(from)} and are lower limits.`
+    words`Counts of ${whole(from)} and more were given as one row: they enter the likelihood as a tail, and mean and variance take each such shot as ${whole(from)}${data.opening ? '' : ' and are lower limits'}.`
+  ];
+}
+
+function opening({ data }: Quotable): Words[] {
+  if (!data.opening) return [];
+  const { to } = data.opening;
+  return [
+    to === null
+      ? [text('The smallest counts were given as one row; mean and variance take its last count.')]
+      : words`Counts of ${whole(to)} and fewer were given as one row: they enter the likelihood as a sum of the law, and mean and variance take each such shot as ${whole(to)}.`
   ];
 }
 

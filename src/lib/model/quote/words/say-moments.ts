@@ -1,3 +1,4 @@
+import { lumpWords } from '../../lump-words';
 import { roundToDigits } from '../numbers/round-to-digits';
 import type { Quotable } from '../quotable';
 import { math, number, words, type Words } from '../span';
@@ -18,9 +19,9 @@ export function sayMoments(quotable: Quotable): Words[] {
     const over =
       dispersion.value === null
         ? []
-        : words`, which is ${sayRounded(dispersion)} times the ceiling of ${data.lump ? 'equal trials lumped in the same way' : 'independent trials with this mean'}${sayMisread(quotable)}`;
+        : words`, which is ${sayRounded(dispersion)} times the ceiling of ${data.lump || data.opening ? 'equal trials lumped in the same way' : 'independent trials with this mean'}${sayMisread(quotable)}`;
     out.push(
-      words`The mean is ${sayRounded(mean)} ${what} a shot and the variance ${sayRounded(variance)}${over}${data.lump ? '; mean and variance are lower limits, since the largest counts were lumped' : ''}.`
+      words`The mean is ${sayRounded(mean)} ${what} a shot and the variance ${sayRounded(variance)}${over}${lumped(quotable)}.`
     );
   }
   if (fit.divergence && variance.value !== null && variance.value > 0) {
@@ -34,4 +35,11 @@ export function sayMoments(quotable: Quotable): Words[] {
     );
   }
   return out;
+}
+
+function lumped({ data }: Quotable): string {
+  if (!data.lump && !data.opening) return '';
+  const { limits } = lumpWords({ above: data.lump !== null, below: data.opening !== null });
+  const which = data.lump && data.opening ? 'smallest and largest' : data.opening ? 'smallest' : 'largest';
+  return `; ${limits}, since the ${which} counts were lumped`;
 }

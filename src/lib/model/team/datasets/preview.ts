@@ -24,6 +24,8 @@ export interface PreviewDataset {
   largest: number;
   /** The largest count stands for itself and all above. */
   open: boolean;
+  /** The smallest ends an opening row such as "0-2". */
+  opening: boolean;
   mean: number;
   batches: number | null;
   conditions: Conditions;

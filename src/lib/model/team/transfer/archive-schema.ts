@@ -28,7 +28,8 @@ export const countsSchema = z.discriminatedUnion('kind', [
   z.strictObject({
     kind: z.literal('histogram'),
     counts: z.array(z.tuple([whole, whole])),
-    lump: z.strictObject({ from: whole, shots: whole }).nullable()
+    lump: z.strictObject({ from: whole, shots: whole }).nullable(),
+    below: z.strictObject({ to: whole, shots: whole }).optional()
   }),
   z
     .strictObject({

@@ -13,19 +13,25 @@ export interface CountFacts {
   smallest: number;
   largest: number;
   open: boolean;
+  opening: boolean;
   batches: number | null;
 }
 
 /**
- * Canonical text, digest and summary of counts. The mean takes a lump for its first count.
+ * Canonical text, digest and summary of counts. The mean takes a lump for the count nearest to the others.
  *
  * @throws BadInput for counts that cannot be diagnosed
  */
 export function countFacts(data: CountData): CountFacts {
   const histogram = toHistogram(data);
-  const { counts, lump } = histogram;
-  const shots = counts.reduce((sum, row) => sum + row[1], lump?.shots ?? 0);
-  const sum = counts.reduce((all, row) => all + row[0] * row[1], lump ? lump.from * lump.shots : 0);
+  const { counts, lump, below = null } = histogram;
+  const rows = [
+    ...(below ? [[below.to, below.shots]] : []),
+    ...counts,
+    ...(lump ? [[lump.from, lump.shots]] : [])
+  ];
+  const shots = rows.reduce((sum, row) => sum + row[1], 0);
+  const sum = rows.reduce((all, row) => all + row[0] * row[1], 0);
   const canonical: CountData =
     data.kind === 'shots'
       ? { kind: 'shots', shots: Array.from(data.shots), batches: data.batches }
@@ -36,9 +42,10 @@ export function countFacts(data: CountData): CountFacts {
     digest: digest(histogram),
     shots,
     mean: sum / shots,
-    smallest: counts[0][0],
-    largest: lump?.from ?? counts[counts.length - 1][0],
+    smallest: rows[0][0],
+    largest: rows[rows.length - 1][0],
     open: lump !== null,
+    opening: below !== null,
     batches: data.kind === 'shots' && data.batches ? new Set(data.batches).size : null
   };
 }

@@ -57,8 +57,8 @@ export function previewFile(
   const datasets = read.datasets.flatMap((dataset, index): PreviewDataset[] => {
     const one = facts[index];
     if (!one) return [];
-    const { kind, shots, mean, smallest, largest, open, batches, digest } = one;
-    const shown = { kind, shots, mean, smallest, largest, open, batches };
+    const { kind, shots, mean, smallest, largest, open, opening, batches, digest } = one;
+    const shown = { kind, shots, mean, smallest, largest, open, opening, batches };
     const { conditions, said } = recogniseConditions(dataset, names[index]);
     const there = before(digest, id, several ? dataset.name : null);
     return [{ index, ...shown, conditions, recognised: said, ...there }];

@@ -1,0 +1,19 @@
+import type { Diagnosis } from '$lib/stats/types';
+import { formatNumber } from '../format-number';
+
+/** What mean and variance of lumped counts can be, in a sentence; nothing without a lump. */
+export function sayLumpedLimits({ nuisances }: Pick<Diagnosis, 'nuisances'>): string[] {
+  const lumped = nuisances?.lumped;
+  if (!lumped) return [];
+  const range = ({ low, high }: { low: number | null; high: number | null }) =>
+    low === null
+      ? 'unknown'
+      : high === null
+        ? `${formatNumber(low)} or more`
+        : low === high
+          ? formatNumber(low)
+          : `from ${formatNumber(low)} to ${formatNumber(high)}`;
+  return [
+    `Whatever counts the lumped rows hide, the mean of these shots is ${range(lumped.mean)}, their variance ${range(lumped.variance)}.`
+  ];
+}
