@@ -52,7 +52,7 @@ function readGroup(
   const rows = orderShots(source, table, group, notes);
   const values = new Uint32Array(rows.length);
   for (const [index, row] of rows.entries()) {
-    const count = numbers.read(row, column, 'counts');
+    const count = numbers.read(row, column, 'counts of single shots');
     if (count === null) continue;
     if (count > maxCount || (trials !== null && count > trials)) {
       source.problems.add(() => ({

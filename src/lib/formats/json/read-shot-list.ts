@@ -15,7 +15,7 @@ export function readShotList(
   const { trials, why } = trialsLimit(reader.source.options, suggested);
   const shots = new Uint32Array(node.items.length);
   for (const [index, item] of node.items.entries()) {
-    const count = reader.whole(item, 'counts');
+    const count = reader.whole(item, 'counts of single shots');
     if (count === null) continue;
     if (trials !== null && count > trials) {
       reader.problem(

@@ -1,4 +1,5 @@
 import type { BadNumber } from './read-whole-number';
+import { sayBadRow } from './say-bad-row';
 
 const months = 'jan|feb|mar|mär|apr|may|mai|jun|jul|aug|sep|oct|okt|nov|dec|dez';
 const date = new RegExp(`^(\\d{1,2}[-. ](${months})\\w*|(${months})\\w*[-. ]\\d{1,2})\\.?$`, 'i');
@@ -12,7 +13,7 @@ export function quote(cell: string): string {
 /**
  * Says what is wrong with a cell that should be a whole number, and what to do.
  *
- * @param what plural noun of what the cell should hold, such as "counts" or "numbers of shots".
+ * @param what plural noun of what the cell should hold, such as "counts", "counts of single shots" or "numbers of shots".
  */
 export function sayBadNumber(bad: BadNumber, cell: string, what: string): { message: string; fix: string } {
   const cited = quote(cell);
@@ -61,12 +62,8 @@ function sayWords(cell: string, cited: string, what: string): { message: string;
       fix: 'Give each count its own row; only an opening row such as ≤2 (not 0-2, which spreadsheets turn into a date) and a closing one such as 10+ may cover several counts.'
     };
   }
-  if (/^\d+\s*(-|–|—|to|bis|à|\.\.)\s*\d+$/i.test(text)) {
-    return {
-      message: `${cited} is a range that does not begin at 0.`,
-      fix: 'Give each count its own row; only an opening row such as 0-2 and a closing one such as 10+ may cover several counts.'
-    };
-  }
+  const row = sayBadRow(text, cited, what);
+  if (row) return row;
   if (/^[\d.,]+\s*#/.test(text)) {
     return {
       message: `${cited} has a comment behind the number.`,

@@ -35,12 +35,14 @@ export function toHistogram(data: CountData): Histogram {
   if (total > Number.MAX_SAFE_INTEGER)
     throw new BadInput('The shots sum to more than 2^53, beyond which they cannot be told apart.');
   if (counts.length === 0) {
-    throw new BadInput(
+    const row =
       lump && below
-        ? 'Every shot is in a row that lumps counts: nothing is left to compare.'
+        ? 'a row that lumps counts'
         : lump
-          ? `Every shot is in the closing row "${lump.from} or more": nothing is left to compare.`
-          : `Every shot is in the opening row "${below!.to} or fewer": nothing is left to compare.`
+          ? `the closing row "${lump.from} or more"`
+          : `the opening row "${below!.to} or fewer"`;
+    throw new BadInput(
+      `Every shot is in ${row}: nothing is left to compare. Give some of these counts rows of their own.`
     );
   }
   const first = rows[0][0];
