@@ -7,6 +7,11 @@ import { misreadCeiling } from './misread-ceiling';
 import { saturated } from '../resampling/divergence';
 import { evenChain, twoLevels } from './chain-starts';
 
+/** The best chain found, and the best of equal bonds. */
+export interface ChainFit extends ChainClimb {
+  even: ChainClimb;
+}
+
 /** Levels at most: data tell three apart at the very best. */
 export const mostLevels = 3;
 
@@ -34,15 +39,16 @@ const mostToOrder = 200;
  * @param data trials = N bonds; `kept` sets counts aside that lie outside it (conditioned law), null for none
  * @param enough nats to which the last climb is made
  */
-export function chainFit(data: FitData, rate: number, kept: Kept | null = null, enough = 1e-9): ChainClimb {
+export function chainFit(data: FitData, rate: number, kept: Kept | null = null, enough = 1e-9): ChainFit {
   const bonds = data.trials!;
   const problem: ChainProblem = { space: chainSpace(bonds, mostLevels), data, rate, kept };
   const moments = sampleMoments(data);
   // Counts set aside move the mean: several starts stand in for the one that is right without.
   const means = kept ? [1, 0.8, 1.25].map((share) => moments.mean * share) : [moments.mean];
-  let best = means
+  const even = means
     .map((mean) => chainClimb(problem, evenChain(bonds, mean, rate), 1e-6))
     .reduce((a, b) => (b.value > a.value ? b : a));
+  let best = even;
   const searched = new Map<number, number>();
   const setApart = (apart: number): number => {
     const known = searched.get(apart);
@@ -78,7 +84,7 @@ export function chainFit(data: FitData, rate: number, kept: Kept | null = null, 
       if (found && found.value > best.value + 1e-4) best = found;
     }
   }
-  return chainClimb(problem, best.chain, enough);
+  return { ...chainClimb(problem, best.chain, enough), even };
 }
 
 /** Largest of a function of a length 1 … N − 1: a coarse grid, then ever shorter strides from its best. */

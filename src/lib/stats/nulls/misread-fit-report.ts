@@ -11,13 +11,16 @@ import { sayRate } from '../words/say-rate';
 /**
  * The `fit` part of the document for kinks read with misread sites. No floor is known for these laws beyond that no
  * divergence is below 0, so the fit is never certified as the best.
+ *
+ * @param drawnEven resamples came from equal bonds
  */
 export function misreadFitReport(
   counts: FitData,
   chain: ReadChain,
   logLikelihood: number,
   fitted: FittedTests,
-  options: DiagnoseOptions
+  options: DiagnoseOptions,
+  drawnEven = false
 ): Diagnosis['fit'] {
   const plugIn = divergence(counts, logLikelihood);
   const laid = cells(counts, readWindow(chain));
@@ -46,7 +49,7 @@ export function misreadFitReport(
     gSquared: 2 * counts.total * plugIn,
     shotsToNotice: noticed,
     certified: false,
-    how: `Independent kinks of up to three probabilities along an open chain, read with ${sayRate(chain.rate)} of the sites misread: equal bonds, two levels in stretches of many lengths, and halves of these, each by scoring. Other orders of the bonds were not searched, and no floor is known. The levels are those of the true kinks; the laws beside it are of counts without misreads.`,
+    how: `Independent kinks of up to three probabilities along an open chain, read with ${sayRate(chain.rate)} of the sites misread: equal bonds, two levels in stretches of many lengths, and halves of these, each by scoring. Other orders of the bonds were not searched, and no floor is known. The levels are those of the true kinks; the laws beside it are of counts without misreads.${drawnEven ? ' Equal bonds fit about as well and vary most, so the resamples of the tests were drawn from them.' : ''}`,
     ...referenceLaws(counts, options.supplied)
   };
 }

@@ -15,6 +15,8 @@ export interface NullLaw {
   levels: FittedLevels;
   law: FittedLaw;
   logLikelihood: number;
+  /** Law that resamples are drawn from where that is not the best one. */
+  drawnFrom?: FittedLevels;
   /** Largest variance at the observed mean where it is not that of independent trials; null where it is. */
   ceiling: number | null;
   /** The most dispersed law, and the ceiling as a function of the mean. */

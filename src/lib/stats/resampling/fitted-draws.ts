@@ -16,6 +16,8 @@ export interface FittedJob {
   data: FitData;
   levels: FittedLevels;
   logLikelihood: number;
+  /** Law to draw from, of the same family; left out: the best one, `levels`. */
+  drawnFrom?: FittedLevels;
   seed: number;
 }
 
@@ -47,14 +49,16 @@ export interface FittedDraws {
 export const divergencesKept = 149;
 
 /**
- * Histograms drawn from the fitted law, each refitted, and whether their statistics reach those observed.
+ * Histograms drawn from the fitted law, or from another of its family, each refitted, and whether their statistics reach those observed.
  *
  * A draw that no refit could bring near an observed value is answered without one (see Statistic.needs), and a refit
  * ends once it has come so close that no statistic asked for can still reach its own. The answers are the same.
  */
-export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): FittedDraws {
-  const window = familyWindow(asLaw(levels), 1e-18, 1);
-  const observed = refitted(data, levels, { levels, logLikelihood, window });
+export function fittedDraws({ data, levels, logLikelihood, drawnFrom, seed }: FittedJob): FittedDraws {
+  const fitted = familyWindow(asLaw(levels), 1e-18, 1);
+  const observed = refitted(data, levels, { levels, logLikelihood, window: fitted });
+  const from = drawnFrom ?? levels;
+  const window = drawnFrom ? familyWindow(asLaw(drawnFrom), 1e-18, 1) : fitted;
   const { statistics, notRun } = chooseStatistics(observed);
   const questions = [...statistics].map(([id, statistic]) => {
     const value = statistic.of(observed);
@@ -85,7 +89,7 @@ export function fittedDraws({ data, levels, logLikelihood, seed }: FittedJob): F
       if (least === Infinity && !keep) return { exceeds, divergence: null };
       const itself = saturated(resample);
       const settled = keep ? Infinity : settledAt(itself, least, resample.total);
-      const drawn = refitted(resample, levels, undefined, buffers, settled);
+      const drawn = refitted(resample, from, undefined, buffers, settled);
       const left = gSquaredLeft(itself, drawn.fit.logLikelihood, resample.total);
       for (let i = 0; i < questions.length; i++) {
         const { statistic, bar } = questions[i];

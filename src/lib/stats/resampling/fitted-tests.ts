@@ -31,13 +31,13 @@ export interface FittedTests {
  */
 export async function fittedTests(
   data: FitData,
-  fit: { levels: FittedLevels; logLikelihood: number },
+  fit: { levels: FittedLevels; logLikelihood: number; drawnFrom?: FittedLevels },
   options: { resamples: number; seed: number },
   pace: Pace,
   helper?: DrawHelper
 ): Promise<FittedTests> {
-  const { levels, logLikelihood } = fit;
-  const job = { data, levels, logLikelihood, seed: options.seed };
+  const { levels, logLikelihood, drawnFrom } = fit;
+  const job = { data, levels, logLikelihood, ...(drawnFrom && { drawnFrom }), seed: options.seed };
   const draws = fittedDraws(job);
   const shared = new SharedDraws(draws, job, options.resamples, helper);
   const runs = draws.questions.map(({ id, value }, i) => {

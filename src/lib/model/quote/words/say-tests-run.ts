@@ -36,7 +36,10 @@ function origins({ data, tests, engine }: Quotable): Words[] {
   const ceiling = drawn.some(({ id }) => id === 'ceiling');
   const fitted = drawn.some(({ id }) => id !== 'ceiling');
   const ways = [
-    ...(fitted ? ['histograms drawn from the fitted law, each fitted anew'] : []),
+    // Of misread kinks equal bonds stand in for the best law where they fit about as well.
+    ...(fitted
+      ? [`histograms drawn from ${data.misreadApplied ? 'a' : 'the'} fitted law, each fitted anew`]
+      : []),
     ...(ceiling
       ? [
           `${fitted ? 'for the variance, ' : ''}histograms drawn from ${data.misreadApplied ? 'the most dispersed of these laws' : 'equal trials'}`
