@@ -4,10 +4,11 @@ import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
 import { fewerFiles } from './vite.chunks.config.ts';
 import { devIssuer } from './vite.issuer.config.ts';
+import { firstReading } from './vite.reading.config.ts';
 import { jobWorker } from './vite.worker.config.ts';
 
 export default defineConfig({
-  plugins: [tailwindcss(), jobWorker(), devIssuer(), sveltekit(), fewerFiles()],
+  plugins: [tailwindcss(), jobWorker(), firstReading(), devIssuer(), sveltekit(), fewerFiles()],
   resolve: {
     alias: {
       'sveltekit-superforms/adapters': fileURLToPath(

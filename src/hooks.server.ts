@@ -1,6 +1,7 @@
 import { building } from '$app/environment';
 import { database } from '$lib/server/application';
 import { apiProblems } from '$lib/server/handles/api-problems';
+import { firstReading } from '$lib/server/handles/first-reading';
 import { issuerFormAction } from '$lib/server/handles/issuer-form-action';
 import { preloadFonts } from '$lib/server/handles/preload-fonts';
 import { reportError } from '$lib/server/handles/report-error';
@@ -22,7 +23,8 @@ export const handle = sequence(
   issuerFormAction,
   withDatabase,
   withPerson,
-  preloadFonts
+  preloadFonts,
+  firstReading
 );
 
 export const handleError = reportError;

@@ -2,7 +2,7 @@ import { clipLine } from '$lib/charts/clip-line';
 import { groupCounts } from '$lib/charts/group-counts';
 import { hatchEdge } from '$lib/charts/hatch-edge';
 import { intervalPath } from '$lib/charts/interval-path';
-import { nearestReading } from '$lib/charts/nearest-reading';
+import { nearestReading } from '$lib/charts/reading/nearest-reading';
 import type { Frame, Point } from '$lib/charts/picture';
 import { pointPath } from '$lib/charts/point-path';
 import { residualOf } from '$lib/charts/residual-of';

@@ -3,7 +3,7 @@ import { cumulantsTitle } from '$lib/charts/cumulants-title';
 import { flagRows, testRows } from '$lib/charts/forest-rows';
 import type { Point, Reading } from '$lib/charts/picture';
 import { regionPicture } from '$lib/charts/region-picture';
-import { stepOfKey } from '$lib/charts/step-of-key';
+import { stepOfKey } from '$lib/charts/reading/step-of-key';
 import { thinnedLine } from '$lib/charts/thinned-line';
 import { TESTS } from '$lib/model/labels';
 import { describe, expect, it } from 'vitest';

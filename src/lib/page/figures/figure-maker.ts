@@ -1,3 +1,5 @@
+import { standsAsDrawn } from '$lib/charts/first-size';
+import { endFirstReading } from '$lib/charts/reading/end-first-reading';
 import type { Component, ComponentProps } from 'svelte';
 import type { Maker } from '../kept/waken';
 import type ReportFigure from './ReportFigure.svelte';
@@ -12,5 +14,7 @@ export const haveFigures = (figure: Component<Props>): void => void (known = fig
 /** Makes the charts of reports live. */
 export const figureMaker: Maker<Props> = {
   atHand: () => known,
+  stands: standsAsDrawn,
+  restore: endFirstReading,
   load: async () => (known ??= (await import('./ReportFigure.svelte')).default)
 };

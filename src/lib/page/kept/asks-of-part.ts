@@ -17,14 +17,15 @@ export function asksOfPart(place: HTMLElement, wanted: () => void): Asks {
   const { signal } = stopping;
 
   place.addEventListener('focusin', wanted, { signal });
-  place.addEventListener('pointerover', wanted, { signal });
+  place.addEventListener('pointermove', wanted, { signal });
   place.addEventListener(
     'keydown',
     (event) => {
       wanted();
       const on = event.target as Element;
       if (on.getAttribute('role') !== 'application' || !WALKS.test(event.key)) return;
-      if (event.ctrlKey || event.metaKey || event.altKey) return;
+      // What a chart could answer from its markup is answered (first-reading.ts).
+      if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey) return;
       event.preventDefault();
       const { key } = event;
       asked.push(() => on.dispatchEvent(new KeyboardEvent('keydown', { key, bubbles: true })));

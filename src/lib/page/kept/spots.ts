@@ -30,7 +30,11 @@ const onDemand = <Props extends Record<string, unknown>>(load: Maker<Props>['loa
 export const SPOTS: { [Name in SpotName]: Maker<SpotProps[Name]> } = {
   figure: figureMaker,
   quote: onDemand(async () => (await import('../result/QuoteSection.svelte')).default),
-  remarks: onDemand(async () => (await import('../remarks/Remarks.svelte')).default),
+  // One beside each part, and most are never touched.
+  remarks: {
+    ...onDemand(async () => (await import('../remarks/Remarks.svelte')).default),
+    stands: () => true
+  },
   links: onDemand(async () => (await import('../team/links/Links.svelte')).default),
   recompute: onDemand(async () => (await import('../link/Recompute.svelte')).default),
   claims: onDemand(async () => (await import('../link/Claims.svelte')).default)

@@ -3,27 +3,48 @@ import { unfoldNotes } from '../terms/unfold-notes';
 /** Milliseconds for other things between two parts, where a browser cannot say when it is idle. */
 const PAUSE = 50;
 
+/** What the style sheet leaves rolled up: parts of the page, and what they are made of. */
+const PARTS = ':scope > *';
+const PIECES = ':is(.main, .main > dl) > :not(dl)';
+
+/** What is to be done for one part, each so little that a slow processor hardly notices. */
+function* stepsOf(part: HTMLElement): Generator<() => void> {
+  const pieces = [...part.querySelectorAll<HTMLElement>(PIECES)];
+  const box = part.getBoundingClientRect();
+  const seen = box.top < innerHeight && box.bottom > 0;
+  // What is seen is laid out: rolled up now, its margins would move.
+  if (seen) for (const piece of pieces) piece.dataset.unrolled = '';
+  yield () => (part.dataset.unrolled = '');
+  if (!seen) for (const piece of pieces) yield () => (piece.dataset.unrolled = '');
+  for (const terms of part.querySelectorAll('.terms')) yield () => unfoldNotes(terms);
+}
+
 /**
- * Lays out the parts of a page that its style sheet leaves rolled up below the window, one whenever the browser is idle,
- * so that a reader's software finds all of them soon after the page answers; then writes out the notes of terms. Paper
- * gets all of it at once.
+ * Lays out what a page's style sheet leaves rolled up below the window, a piece whenever the browser is idle, so that a
+ * reader's software finds all of it soon after the page answers, and writes out the notes of terms. Paper gets all of it
+ * at once.
  *
  * @returns what stops it
  */
 export function unroll(place: HTMLElement): () => void {
-  const parts = [...place.querySelectorAll<HTMLElement>(':scope > section')];
+  const parts = [...place.querySelectorAll<HTMLElement>(PARTS)];
   const idle = 'requestIdleCallback' in window;
   let waiting = 0;
+  let steps: Iterator<() => void> | undefined;
 
   function next(): void {
+    const step = steps?.next();
+    if (step && !step.done) {
+      step.value();
+      return wait();
+    }
     const part = parts.shift();
     if (!part) return finish();
-    part.dataset.unrolled = '';
-    unfoldNotes(part);
+    steps = stepsOf(part);
     wait();
   }
   function finish(): void {
-    place.dataset.unrolled = '';
+    place.dataset.whole = '';
     unfoldNotes(place);
   }
   const wait = (): void => void (waiting = idle ? requestIdleCallback(next) : window.setTimeout(next, PAUSE));

@@ -7,6 +7,10 @@ import { sayNotLoaded } from './say-not-loaded';
 export interface Maker<Props extends Record<string, unknown>> {
   atHand: () => Component<Props> | null;
   load: () => Promise<Component<Props>>;
+  /** Whether what the server drew can stand while the reader only looks at it. */
+  stands?: (place: HTMLElement) => boolean;
+  /** Puts a place back to what the server drew. */
+  restore?: (place: HTMLElement) => void;
 }
 
 /** A part that will be live, and can be made so before the reader comes near. */
@@ -18,7 +22,8 @@ export interface Waking {
 
 /**
  * Makes a part of a page live in its place. What the server drew stands until the reader comes within half a window of
- * it, points at it or focuses it; what was asked of it meanwhile is done then. An empty place is filled at once.
+ * it (where `stands` allows, longer), points at it or focuses it; what was asked of it meanwhile is done then. An empty
+ * place is filled at once.
  *
  * A part that does not load stays as it was drawn, and says so when it is asked something. It is tried again then, but
  * browsers remember a script that they could not fetch, so that often only loading the page again helps.
@@ -27,7 +32,7 @@ export interface Waking {
  */
 export function waken<Props extends Record<string, unknown>>(
   place: HTMLElement,
-  { atHand, load }: Maker<Props>,
+  { atHand, load, stands, restore }: Maker<Props>,
   props: Props,
   context?: Map<unknown, unknown>
 ): Waking {
@@ -37,20 +42,37 @@ export function waken<Props extends Record<string, unknown>>(
   let gone = false;
 
   let wanted = false;
+  let inside = false;
 
   const asks = asksOfPart(place, () => {
     wanted = true;
     start();
   });
-  const near = new IntersectionObserver((seen) => seen.some((one) => one.isIntersecting) && start(), {
-    rootMargin: '50% 0px'
-  });
+  const near = new IntersectionObserver(
+    (seen) => {
+      inside = seen.at(-1)!.isIntersecting;
+      look();
+    },
+    { rootMargin: '50% 0px' }
+  );
+  // What stands at one size need not at another.
+  const size = stands && new ResizeObserver(look);
+
+  function look(): void {
+    if (inside && !stands?.(place)) start();
+  }
+
+  function stopLooking(): void {
+    near.disconnect();
+    size?.disconnect();
+  }
 
   function make(Part: Component<Props>): void {
     if (gone || made) return;
-    near.disconnect();
+    stopLooking();
     // In an empty place nothing was asked, and this may run while the page around it is being made.
     if (!drawn) return void (made = mount(Part, { target: place, props, context }));
+    restore?.(place);
     const putBack = keepTyped(place);
     made = hydrate(Part, { target: place, props, context });
     flushSync();
@@ -71,15 +93,17 @@ export function waken<Props extends Record<string, unknown>>(
   }
 
   const known = atHand();
-  if (drawn) near.observe(place);
-  else if (known) make(known);
+  if (drawn) {
+    near.observe(place);
+    size?.observe(place);
+  } else if (known) make(known);
   else start();
 
   return {
     start,
     stop: () => {
       gone = true;
-      near.disconnect();
+      stopLooking();
       asks.stop();
       if (made) void unmount(made);
     }

@@ -1,4 +1,4 @@
-import type { Picture } from './picture';
+import type { Picture } from '../picture';
 
 const STEPS: Record<string, number> = { ArrowRight: 1, ArrowUp: 1, ArrowLeft: -1, ArrowDown: -1 };
 

@@ -1,4 +1,4 @@
-import type { Picture } from './picture';
+import type { Picture } from '../picture';
 
 /** Index of the reading that a pointer at x, y means: nearest along their order; the other way only decides ties. */
 export function nearestReading(
