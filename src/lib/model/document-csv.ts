@@ -122,6 +122,11 @@ function driftLines({ means, change, split }: DriftPart, one: One, ranged: Range
     ranged('batches', key, split[key]);
   for (const key of ['excess', 'excessBetween', 'p', 'pTogether', 'smallestP', 'tested'] as const)
     one('batches', key, split[key]);
+  if (split.order) {
+    one('batches', 'correlation of neighbouring shots', split.order.correlation);
+    one('batches', 'p of that correlation', split.order.p);
+    ranged('batches', 'dispersion from shot to shot', split.order.dispersion);
+  }
   for (const line of split.each)
     for (const key of ['shots', 'mean', 'dispersion', 'p'] as const)
       one(`batch ${line.batch}`, key, line[key]);

@@ -55,6 +55,10 @@ const split = z.strictObject({
   tested: whole,
   worst: batchLine.nullable(),
   pTogether: share.nullable(),
+  order: z
+    .strictObject({ correlation: number, p: share, dispersion: interval, moved: z.boolean() })
+    .nullable()
+    .optional(),
   verdict: z.enum(['compatible', 'excess', 'undecided']),
   each: z.array(batchLine)
 });

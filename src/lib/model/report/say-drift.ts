@@ -1,4 +1,4 @@
-import type { DriftPart } from '$lib/stats/drift/types';
+import type { BatchSplit, DriftPart } from '$lib/stats/drift/types';
 import type { Diagnosis } from '$lib/stats/types';
 import { formatCount, formatNumber } from '../format-number';
 import { TESTS } from '../labels';
@@ -27,7 +27,13 @@ export function sayWithin(drift: DriftPart | undefined): string | null {
     worst === null
       ? 'No batch has enough defects to be tested by itself.'
       : `Of the ${formatCount(tested)} batches large enough to be tested alone, batch ${formatCount(worst.batch)} is the most telling: ${formatNumber(worst.dispersion, 3)} times its ceiling, and a value as large ${sayP(worst.p!, 0, 0)}, before ${formatCount(tested)} batches are allowed for.`;
-  return `${statement} Variance above the ceiling: ${formatNumber(excess, 3)} in all, ${sayInterval(excessWithin, 3)} within batches, ${formatNumber(excessBetween, 3)} between them. The true means of the batches vary by ${sayInterval(meansVariance, 3)}. ${single} Drift inside a batch is not taken out.`;
+  return `${statement} Variance above the ceiling: ${formatNumber(excess, 3)} in all, ${sayInterval(excessWithin, 3)} within batches, ${formatNumber(excessBetween, 3)} between them. The true means of the batches vary by ${sayInterval(meansVariance, 3)}. ${single} ${sayInside(split.order)}`;
+}
+
+/** Neighbouring shots of a batch: whether the rate moved inside batches. */
+function sayInside(order: BatchSplit['order']): string {
+  if (!order) return 'Drift inside a batch is not taken out.';
+  return `Neighbouring shots of a batch are correlated by ${formatNumber(order.correlation, 2)}: one as large ${sayP(order.p, 0, 0)} if their order meant nothing, ${order.moved ? 'so the rate changed inside batches too' : 'so no drift inside batches is seen'}. From one shot to the next the variance is ${sayInterval(order.dispersion, 3)} times the ceiling.`;
 }
 
 /** The change of the mean that the shots support most; null where none was sought. */

@@ -62,11 +62,9 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   const raised = (id: Flag['id']) => flags.some((flag) => flag.id === id);
   if (allEven(evidence))
     return ' But every count is even: on a ring that is so by construction, and pairs should be counted.';
-  if (
-    raised('drift') &&
-    evidence.neighbours !== 'alternating' &&
-    (evidence.moments.dispersion.value ?? 0) > 1
-  )
+  const drift = flags.find(({ id }) => id === 'drift');
+  // Shots that lean against the one before do not drift; batches that differ do, however neighbours stand.
+  if (drift && (drift.tests.includes('batches') || evidence.neighbours !== 'alternating'))
     return driftAlone(evidence);
   if (raised('misreads')) return ' But misread sites alone could give this.';
   const { options, misread, moments } = evidence;
@@ -82,7 +80,7 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
 }
 
 /** Whether the excess is still there within batches, where there are any. */
-function driftAlone({ drift, tests, options }: Evidence): string {
+function driftAlone({ drift, moments, tests, options }: Evidence): string {
   const shown = tests.some(({ id, p }) => id === 'ceiling' && p <= options.alpha);
   if (drift?.split?.verdict === 'compatible' && !shown)
     return ' But the rate changed while the shots were taken: within batches the counts are compatible with independent trials.';
@@ -90,6 +88,8 @@ function driftAlone({ drift, tests, options }: Evidence): string {
     return ' But the rate changed while the shots were taken: within batches the counts are compatible with independent trials, and the excess lies between batches.';
   if (drift?.split?.verdict === 'excess')
     return ' The rate also changed while the shots were taken, but the excess survives when batches are tested one by one and pooled.';
+  if (!((moments.dispersion.value ?? 0) > 1))
+    return ' But the rate changed while the shots were taken, so the shots are not all alike, though their variance keeps the ceiling.';
   return ' But the rate changed while the shots were taken, which alone makes counts look bunched.';
 }
 

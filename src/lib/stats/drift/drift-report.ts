@@ -10,6 +10,7 @@ import { splitExcess } from './split-excess';
 import { equalSquaresLaw, readSquaresLaw } from './squares-law';
 import type { BatchSplit, DriftPart } from './types';
 import { withinBatches } from './within-batches';
+import { withinOrder } from './within-order';
 
 /** Points of the chart of means: more would crowd a phone. */
 const points = 40;
@@ -88,5 +89,6 @@ function splitOf(
       ? 1 - (trials === null ? 0 : (2 * mean) / trials)
       : (mostDispersed.ceiling(mean * 1.001) - mostDispersed.ceiling(mean * 0.999)) / (mean * 0.002);
   const law = ceiling === null ? equalSquaresLaw(trials) : readSquaresLaw(mostDispersed, slope);
-  return splitExcess(parts, withinBatches(parts, law, slope, options), variance - moments.ceiling, options);
+  const found = withinBatches(parts, law, slope, options);
+  return splitExcess(parts, found, withinOrder(shots, names, found), variance - moments.ceiling, options);
 }

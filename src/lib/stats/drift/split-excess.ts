@@ -1,7 +1,7 @@
 import { evenDispersionFactors } from '../moments/even-dispersion-factors';
 import type { Interval } from '../types';
 import type { BatchParts } from './batch-parts';
-import type { BatchSplit } from './types';
+import type { BatchOrder, BatchSplit } from './types';
 import type { WithinBatches } from './within-batches';
 
 /** More batches than this are not listed one by one. */
@@ -18,13 +18,16 @@ const fewest = 50;
  *
  * Verdict: `excess` where the pooled test and the batches one by one, allowed for together (2·min(p, tested·p of the
  * worst)), are at or under α; `compatible` where not, and the upper 95 % limit of the dispersion within batches is below
- * 1 + tolerance; otherwise `undecided`.
+ * 1 + tolerance; otherwise `undecided`. An excess within batches is `undecided` too where their neighbouring shots resemble
+ * each other and show no excess between them (the lower 95 % limit is at or under 1): drift inside batches makes that.
  *
+ * @param order of the shots within their batches
  * @param excess variance of all shots less its ceiling
  */
 export function splitExcess(
   parts: BatchParts,
   found: WithinBatches,
+  order: BatchOrder | null,
   excess: number,
   { alpha, tolerance }: { alpha: number; tolerance: number }
 ): BatchSplit {
@@ -36,6 +39,7 @@ export function splitExcess(
   const single = worst === null ? null : Math.min(1, tested.length * worst.p!);
   const together = p === null ? single : single === null ? p : Math.min(1, 2 * Math.min(p, single));
   const decided = together !== null && together <= alpha;
+  const drifting = insideBatches(order);
   const narrow = dispersion.high !== null && dispersion.high < 1 + tolerance && freedom >= fewest;
   return {
     batches: lines.length,
@@ -55,10 +59,21 @@ export function splitExcess(
     tested: tested.length,
     worst,
     pTogether: together,
-    verdict: decided ? 'excess' : together !== null && narrow ? 'compatible' : 'undecided',
+    order,
+    verdict: decided
+      ? drifting
+        ? 'undecided'
+        : 'excess'
+      : together !== null && narrow
+        ? 'compatible'
+        : 'undecided',
     each: lines.length > mostListed ? [] : lines
   };
 }
+
+/** Whether slow changes inside batches would do for what is seen there. */
+export const insideBatches = (order: BatchOrder | null | undefined): boolean =>
+  !!order?.moved && order.dispersion.low !== null && order.dispersion.low <= 1;
 
 function meansVariance({ within, between, size, batches }: BatchParts): Interval {
   const square = within + size * between;

@@ -12,6 +12,18 @@ export interface BatchLine {
   p: number | null;
 }
 
+/** Whether the rate moved inside batches too, by neighbouring shots of the same batch. */
+export interface BatchOrder {
+  /** Correlation of a shot with the next of its batch. */
+  correlation: number;
+  /** Chance of so large a one if the shots of every batch had come in any order. */
+  p: number;
+  /** Half the mean square difference of neighbours over the ceiling within batches: an excess with slow changes taken out. */
+  dispersion: Interval;
+  /** p at or under 5 %. */
+  moved: boolean;
+}
+
 /** Batches one by one and pooled: what lies within them and what lies between them. */
 export interface BatchSplit {
   batches: number;
@@ -35,6 +47,8 @@ export interface BatchSplit {
   worst: BatchLine | null;
   /** Pooled and one by one together, allowed for: min(1, 2·min(p, tested·p of the worst)). */
   pTogether: number | null;
+  /** null with too few neighbouring shots; absent in documents of engines before it. */
+  order?: BatchOrder | null;
   verdict: 'compatible' | 'excess' | 'undecided';
   /** Every batch, where there are at most 200. */
   each: BatchLine[];

@@ -15,6 +15,8 @@ export interface WithinBatches {
   ceiling: number;
   /** Degrees of freedom, S − B. */
   freedom: number;
+  /** Degrees of freedom of a chi-square that scatters as the pooled variance does; null where nothing is allowed. */
+  shape: number | null;
   p: number | null;
   smallestP: number;
   source: 'resampled' | 'limit';
@@ -66,7 +68,7 @@ export function withinBatches(
   const base = { ceiling: allowed / freedom, freedom, lines };
   if (!(allowed > 0 && spread > 0)) {
     const none = { value: null, low: null, high: null };
-    return { ...base, dispersion: none, p: null, smallestP: 0, source: 'limit', resamples: 0 };
+    return { ...base, shape: null, dispersion: none, p: null, smallestP: 0, source: 'limit', resamples: 0 };
   }
   const value = seen / allowed;
   const scatter = (fourth - 2 * slope * third + slope * slope * seen) / (freedom * within * within) - 1;
@@ -77,13 +79,14 @@ export function withinBatches(
   if (spread >= enough || law.trials === undefined)
     return {
       ...base,
+      shape,
       dispersion,
       p: spread >= enough ? scaledTail(seen, { mean: allowed, variance: spread }) : null,
       smallestP: 0,
       source: 'limit',
       resamples: 0
     };
-  return { ...base, dispersion, ...drawn(batches, seen, law.trials, options), source: 'resampled' };
+  return { ...base, shape, dispersion, ...drawn(batches, seen, law.trials, options), source: 'resampled' };
 }
 
 /** P(X ≥ squares) for X with that mean and variance, as a multiple of chi-square. */

@@ -9,8 +9,11 @@ import { allEven, gradeOf, type Evidence } from './evidence';
  * Not raised when every count is even: counting pairs singly doubles the variance, and pairing says so.
  */
 export function bunching(evidence: Evidence): Flag | null {
-  const grade = gradeOf(evidence, 'ceiling');
-  if (!grade || allEven(evidence)) return null;
+  const seen = gradeOf(evidence, 'ceiling');
+  if (!seen || allEven(evidence)) return null;
+  // Batches that differ make the excess, and within them there is none: drift is what is shown.
+  const drifted = gradeOf(evidence, 'batches') === 'shown' && evidence.drift?.split?.verdict === 'compatible';
+  const grade = drifted ? 'hinted' : seen;
   const high = gradeOf(evidence, 'high-tail');
   const low = gradeOf(evidence, 'low-tail');
   const lowRan = evidence.tests.some((test) => test.id === 'low-tail');
@@ -26,9 +29,10 @@ export function bunching(evidence: Evidence): Flag | null {
     id: 'bunching',
     grade,
     tests: ['ceiling', ...(high ? (['high-tail'] as const) : []), ...(low ? (['low-tail'] as const) : [])],
-    statement:
-      'Defects come together: the counts vary more from shot to shot than any independent trials with this mean can' +
-      (misread?.applies ? ', read with the misread rate that was stated.' : '.'),
+    statement: drifted
+      ? 'All shots together vary more than any independent trials with this mean can, but within batches they do not: the drift does for it.'
+      : 'Defects come together: the counts vary more from shot to shot than any independent trials with this mean can' +
+        (misread?.applies ? ', read with the misread rate that was stated.' : '.'),
     size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials${misread?.applies ? ' as they are read' : ''}.${correlation}`,
     otherCauses: [
       'a rate that drifted or differed between runs that were pooled',
