@@ -18,6 +18,7 @@ const cells: [id: string, without: number, withExcess: number, resamples: number
   ['ring-in-pairs', 40, 12, 99],
   ['empty-dropped', 40, 12, 99],
   ['cut-both-ends', 40, 12, 99],
+  ['lumped-both-ends', 40, 12, 99],
   ['drifting-batches', 40, 12, 99],
   // The shots that are not empty are looked at where dead shots were found.
   ['dead-set-aside', 20, 8, 199]
