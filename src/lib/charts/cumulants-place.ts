@@ -1,3 +1,4 @@
+import { lumpsOf, lumpWords } from '$lib/model/lump-words';
 import { carefulThird } from '$lib/stats/claim/careful-third';
 import { thirdOverMean } from '$lib/stats/claim/third-over-mean';
 import { reachesBody } from '$lib/stats/bounds/reaches-body';
@@ -22,7 +23,7 @@ export function cumulantsPlace(diagnosis: Diagnosis): CumulantsPlace | { reason:
   const { mean, variance, fano } = moments;
   if (data.lump || data.below)
     return {
-      reason: `${data.lump ? 'A closing' : 'An opening'} row lumps counts, so the cumulants are no more than limits: no place among those of independent trials can be told.`
+      reason: `${lumpWords(lumpsOf(data)).rows}, so the cumulants are no more than limits: no place among those of independent trials can be told.`
     };
   if (!mean.value || variance.value === null || fano.value === null || moments.third.value === null)
     return {

@@ -8,7 +8,7 @@ import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
 import { isShown } from './is-shown';
 import { linePath } from './line-path';
-import { lumpMarks, lumpSpan } from './lump-marks';
+import { lumpMarks, lumpMiddle, lumpSpan } from './lump-marks';
 import { observedMarks } from './observed-marks';
 import type { Mark, Picture, Point, Size } from './picture';
 import { residualMarks } from './residual-marks';
@@ -44,6 +44,7 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
     [main.left, main.right]
   );
   const y = scaleLinear([0, highest * 1.04 || 1], [main.bottom, main.top]);
+  const place = (point: DistributionPoint) => x(point.lump ? lumpMiddle(point) : point.count);
 
   const groups = groupCounts(singles, x(1) - x(0), LEAST);
   const together = groups[0]?.length ?? 1;
@@ -67,13 +68,8 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
         main
       )
     },
-    ...residualMarks([...groups, ...(together === 1 ? lumps.map((lump) => [lump]) : [])], x, below, text),
-    ...bottomAxis(
-      below,
-      countTicks(x, text, { from: closing?.count ?? null, to: opening?.count ?? null }),
-      countTitle(diagnosis),
-      text
-    )
+    ...residualMarks([...groups, ...(together === 1 ? lumps.map((lump) => [lump]) : [])], place, below, text),
+    ...bottomAxis(below, countTicks(x, text, lumps), countTitle(diagnosis), text)
   ];
   return {
     width,
@@ -90,7 +86,7 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
     ],
     order: 'across',
     readings: points.map((p) => ({
-      x: x(p.count),
+      x: place(p),
       y: y(p.observed),
       words: () => distributionWords(p, shots)
     })),

@@ -16,6 +16,12 @@ export const LUMP_REACH = 2;
 export const lumpSpan = ({ count, below }: Pick<DistributionPoint, 'count' | 'below'>): [number, number] =>
   below ? [Math.max(0, count - LUMP_REACH), count] : [count, count + LUMP_REACH];
 
+/** Where a lump is marked: the middle of the counts over which it is drawn. */
+export const lumpMiddle = (lump: Pick<DistributionPoint, 'count' | 'below'>): number => {
+  const [first, last] = lumpSpan(lump);
+  return (first + last) / 2;
+};
+
 /**
  * A row that lumps counts: a bar over its counts at the share seen, its interval beside it, and what the law gives all of
  * them as a line of its own. No point, since no single count was seen.

@@ -12,7 +12,7 @@ import { residualTicks } from './residual-ticks';
 /** The strip under the counts: distance of each from the law, with the band that an interval spans. */
 export function residualMarks(
   groups: DistributionPoint[][],
-  x: (count: number) => number,
+  x: (point: DistributionPoint) => number,
   frame: Frame,
   text: number
 ): Mark[] {
@@ -33,14 +33,14 @@ export function residualMarks(
   ];
   if (groups[0].length === 1) {
     const dots = points.map((point) => {
-      const at: Point = [x(point.count), y(residualOf(point))];
+      const at: Point = [x(point), y(residualOf(point))];
       return { at, interval: { x: at[0], from: y(0), to: at[1] }, standing: standing(point) };
     });
     return [...marks, ...observedMarks(dots, 5)];
   }
   const columns = groups.map((group) =>
     columnOf(
-      x((group[0].count + group[group.length - 1].count) / 2),
+      (x(group[0]) + x(group[group.length - 1])) / 2,
       group.map((point) => {
         const value = y(residualOf(point));
         return { low: value, high: value, value, standing: standing(point) };

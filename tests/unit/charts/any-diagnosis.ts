@@ -1,14 +1,15 @@
 import { defaultOptions } from '$lib/stats/default-options';
 import { diagnose } from '$lib/stats/diagnose';
-import type { CountData, Diagnosis, DiagnoseOptions } from '$lib/stats/types';
+import type { CountData, Diagnosis, DiagnoseOptions, Histogram } from '$lib/stats/types';
 
 /** A diagnosis for drawing: few resamples, since charts do not care how sharp a p-value is. */
 export function anyDiagnosis(
   counts: [number, number][],
   options: Partial<DiagnoseOptions> = {},
-  lump: { from: number; shots: number } | null = null
+  lump: Histogram['lump'] = null,
+  below: Histogram['below'] = null
 ): Promise<Diagnosis> {
-  const data: CountData = { kind: 'histogram', counts, lump };
+  const data: CountData = { kind: 'histogram', counts, lump, below };
   return diagnose(data, { ...defaultOptions, resamples: 19, ...options });
 }
 

@@ -8,6 +8,37 @@ export const CASES: [string, () => Promise<Diagnosis>][] = [
   ['Weldon’s dice', () => anyDiagnosis(WELDON, { trials: 12 })],
   ['a closing lump', () => anyDiagnosis(WELDON.slice(0, 10), { trials: 12 }, { from: 10, shots: 18 })],
   [
+    'an opening lump',
+    () => anyDiagnosis(WELDON.slice(3), { trials: 12 }, null, { to: 2, shots: 185 + 1149 + 3265 })
+  ],
+  [
+    'lumps at both ends',
+    () =>
+      anyDiagnosis(
+        WELDON.slice(3, 8),
+        { trials: 12 },
+        { from: 8, shots: 403 + 105 + 14 + 4 },
+        { to: 2, shots: 185 + 1149 + 3265 }
+      )
+  ],
+  [
+    'one count between two lumps, N unknown',
+    () => anyDiagnosis([[2, 31]], {}, { from: 3, shots: 40 }, { to: 1, shots: 9 })
+  ],
+  [
+    'lumps at both ends of 500 counts',
+    () =>
+      anyDiagnosis(
+        Array.from({ length: 500 }, (_, i) => [
+          700 + i,
+          1 + Math.round(40 * Math.exp(-(((i - 250) / 90) ** 2)))
+        ]),
+        { trials: 100_000 },
+        { from: 1200, shots: 12 },
+        { to: 699, shots: 10 }
+      )
+  ],
+  [
     'N unknown',
     () =>
       anyDiagnosis([

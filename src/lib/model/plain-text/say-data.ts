@@ -19,10 +19,10 @@ export function sayData({ data, moments, nuisances, engine }: Diagnosis, about: 
       : `; shots in order, in ${formatCount(data.batches)} batches`
     : '';
   const last = data.counts.at(-1)?.[0];
-  const lowest = data.below ? `counts from "${formatCount(data.below.to)} or fewer" on, ` : '';
+  const lowest = data.below && `counts from "${formatCount(data.below.to)} or fewer"`;
   const range = data.lump
-    ? `counts up to "${formatCount(data.lump.from)} or more"`
-    : `largest count ${formatCount(last ?? null)}`;
+    ? `${lowest ? `${lowest} to` : 'counts up to'} "${formatCount(data.lump.from)} or more"`
+    : `${lowest ? `${lowest} on, ` : ''}largest count ${formatCount(last ?? null)}`;
   const misread =
     (data.kept ? `; only ${sayKept(data.kept)} were kept` : '') +
     (data.misread === null ? '' : `; a site is misread with probability ${sayStatedRate(data)}`);
@@ -30,7 +30,7 @@ export function sayData({ data, moments, nuisances, engine }: Diagnosis, about: 
   return [
     'Data',
     wrap(
-      `${formatCount(data.shots)} ${data.shots === 1 ? 'shot' : 'shots'}, ${trials} (${GEOMETRIES[data.geometry]}), counted in ${UNITS[data.unit]}; ${lowest}${range}${order}${misread}.`,
+      `${formatCount(data.shots)} ${data.shots === 1 ? 'shot' : 'shots'}, ${trials} (${GEOMETRIES[data.geometry]}), counted in ${UNITS[data.unit]}; ${range}${order}${misread}.`,
       '  '
     ),
     ...about.map((line) => wrap(line, '  ')),

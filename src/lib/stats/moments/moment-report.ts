@@ -5,8 +5,9 @@ import { momentIntervals, type MomentIntervals } from './moment-intervals';
 
 /**
  * Moments of the document, without the critical N. A lump counts as the count of it nearest to the others, so that
- * the variance is then a lower limit (see lumpedLimits for what mean and variance can be), and the ceiling is the variance of equal trials lumped in the same way: against the plain
- * ceiling any lumped histogram would look regular (the document's cautions say so).
+ * the variance is then a lower limit (see lumpedLimits for what mean and variance can be), and the ceiling is the
+ * variance of equal trials lumped in the same way: against the plain ceiling any lumped histogram would look regular
+ * (the document's cautions say so).
  *
  * @param equal probability of the equal trials, or their mean when N is unknown
  * @param ceiling another ceiling than that of independent trials, or null
@@ -25,12 +26,14 @@ export function momentReport(
     ...(lump ? [[lump.from, lump.shots] as [number, number]] : [])
   ];
   const found = momentIntervals(counts, trials, { ...options, stream: stream('intervals', 0) });
-  const other = ceiling ?? (lump || below ? lumpedCeiling(trials, equal, { lump, below }) : null);
+  const lumped = lump !== null || below !== null;
+  const other = ceiling ?? (lumped ? lumpedCeiling(trials, equal, { lump, below }) : null);
   if (other !== null) replaceCeiling(found, other);
   const variance = found.variance.value;
   return {
     ...found,
-    pairCovariance: variance === null ? null : variance - found.ceiling
+    // Of lumped counts the difference bounds no covariance: their own variance and mean are not known.
+    pairCovariance: variance === null || lumped ? null : variance - found.ceiling
   };
 }
 
