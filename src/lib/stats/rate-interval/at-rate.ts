@@ -4,7 +4,7 @@ import { varianceTest } from '../resampling/ceiling-test';
 import type { DrawHelper } from '../resampling/draw-helper';
 import { fittedTests } from '../resampling/fitted-tests';
 import type { Pace } from '../resampling/pace';
-import type { Certificate, DiagnoseOptions, Histogram, TestResult } from '../types';
+import type { Certificate, DiagnoseOptions, Histogram, TestId, TestResult } from '../types';
 
 /** A test before adjustment for the others. */
 export type BareTest = Omit<TestResult, 'pAdjusted'>;
@@ -15,6 +15,8 @@ export interface AtRate {
   ceiling: number;
   tests: BareTest[];
   certificate: Certificate | null;
+  /** Left out: every test was asked. */
+  only?: readonly TestId[];
 }
 
 /**

@@ -9,6 +9,7 @@ import type { Certificate, DiagnoseOptions, Diagnosis, Histogram, Interval } fro
 import { atRate, partOf, type AtRate, type BareTest } from './at-rate';
 import { bestRate } from './best-rate';
 import { changesOf } from './changes-of';
+import { furtherRates } from './further-rates';
 import type { RateLimits } from './rate-limits';
 import { sayRates } from './say-rates';
 import type { RateSpread, RateVerdict } from './types';
@@ -35,7 +36,7 @@ export interface OverRates {
   spread: RateSpread;
 }
 
-/** Rates tried beyond the first four, to find where the answer changes. */
+/** Rates tried beyond those, to find where the answer changes. */
 const mostSought = 6;
 /** Ends once it is known to this share of the interval. */
 const fineness = 1 / 24;
@@ -44,10 +45,10 @@ const spare = 1.5;
 
 /**
  * The answer where a misread rate is known with an uncertainty (Berger and Boos): every p is the largest over an interval
- * that holds the rate but for the chance β, plus β. The largest is taken over both ends of the interval, the rate stated
- * and the rate that fits best within; the ceiling test grows with the rate, and the tests of the fit are at their largest
- * near the last. A test holds the best rate against a grid; that no p peaks between the four is not proved, and the false
- * alarms are held by repeats (`npm run calibrate -- --nuisance all`).
+ * that holds the rate but for the chance β, plus β. The largest is taken over both ends of the interval, the rate stated,
+ * the rate that fits best within and, for tests of the fit that alarm at all of these, eight rates more (see
+ * furtherRates). That no p peaks between them is not proved; the false alarms are held by repeats (`npm run calibrate --
+ * --nuisance all`).
  *
  * @param helper makes some of the draws elsewhere; the answers are the same with and without
  */
@@ -88,6 +89,8 @@ export async function rateSpread(stated: Stated, pace: Pace, helper?: DrawHelper
     tried.push(
       await atRate(counts, histogram, one, fewer, partOf(pace, i / 6, (i + 1) / 6), undefined, helper)
     );
+  const asked = { counts, histogram, options: fewer, limits, stated: stated.tests, order, tried };
+  tried.push(...(await furtherRates(asked, partOf(pace, 0.5, 0.7), helper)));
   const tests = worstTests(stated.tests, tried, miss);
   const certificate = worstCertificate(
     tried.map((one) => one.certificate),
@@ -100,13 +103,13 @@ export async function rateSpread(stated: Stated, pace: Pace, helper?: DrawHelper
     const widest = changesOf(rates).sort((a, b) => b.below - b.above - (a.below - a.above))[0];
     if (!widest || widest.below - widest.above <= (high - low) * fineness) break;
     const middle = (widest.above + widest.below) / 2;
-    const from = 0.5 + sought / (2 * mostSought);
+    const from = 0.7 + (0.3 * sought) / mostSought;
     const at = await atRate(
       counts,
       histogram,
       middle,
       fewer,
-      partOf(pace, from, from + 1 / (2 * mostSought)),
+      partOf(pace, from, from + 0.3 / mostSought),
       settles,
       helper
     );

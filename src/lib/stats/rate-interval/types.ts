@@ -28,7 +28,7 @@ export interface RateSpread {
   high: number;
   /** True where the counts cut it short. */
   cutByCounts: boolean;
-  /** Rates tried, rising: both ends, the one stated, the one that fits best within, and those between which the answer changes. */
+  /** Rates tried, rising: both ends, the one stated, the one that fits best within, eight more where tests of the fit alarm at all of these, and those between which the answer changes. */
   rates: RateVerdict[];
   changes: RateChange[];
   statement: string;

@@ -19,6 +19,8 @@ export interface FittedJob {
   /** Law to draw from, of the same family; left out: the best one, `levels`. */
   drawnFrom?: FittedLevels;
   seed: number;
+  /** First draws that are refitted whole, for their divergences; left out: divergencesKept. */
+  whole?: number;
 }
 
 /** What one resample says. */
@@ -54,7 +56,8 @@ export const divergencesKept = 149;
  * A draw that no refit could bring near an observed value is answered without one (see Statistic.needs), and a refit
  * ends once it has come so close that no statistic asked for can still reach its own. The answers are the same.
  */
-export function fittedDraws({ data, levels, logLikelihood, drawnFrom, seed }: FittedJob): FittedDraws {
+export function fittedDraws(job: FittedJob): FittedDraws {
+  const { data, levels, logLikelihood, drawnFrom, seed, whole = divergencesKept } = job;
   const fitted = familyWindow(asLaw(levels), 1e-18, 1);
   const observed = refitted(data, levels, { levels, logLikelihood, window: fitted });
   const from = drawnFrom ?? levels;
@@ -77,7 +80,7 @@ export function fittedDraws({ data, levels, logLikelihood, drawnFrom, seed }: Fi
     notRun,
     draw(b, wanted) {
       const resample = source.draw(generator(seed, stream('fitted law', b)));
-      const keep = b < divergencesKept;
+      const keep = b < whole;
       const most = largestGSquared(resample, window);
       let least = Infinity;
       for (let i = 0; i < questions.length; i++) {

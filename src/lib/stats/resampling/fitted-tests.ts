@@ -3,7 +3,7 @@ import { SequentialP } from '../multiple/sequential-p';
 import type { TestId, TestResult } from '../types';
 import type { DrawHelper } from './draw-helper';
 import { expectedEmpty } from './empty-excess';
-import { fittedDraws } from './fitted-draws';
+import { fittedDraws, type FittedJob } from './fitted-draws';
 import type { FittedLevels } from './fitted-law';
 import type { Pace } from './pace';
 import { progress } from './progress';
@@ -27,22 +27,31 @@ export interface FittedTests {
  * Draws histograms from the fitted law, refits each, and recomputes every statistic (see fittedDraws);
  * p = (1 + #{≥ observed})/(B + 1), ended early by the rule of Besag & Clifford 1991.
  *
+ * @param options `only`: just these tests, and no divergences; where they are far out hardly a draw needs a refit
  * @param helper makes some of the draws elsewhere; the answers are the same with and without
  */
 export async function fittedTests(
   data: FitData,
   fit: { levels: FittedLevels; logLikelihood: number; drawnFrom?: FittedLevels },
-  options: { resamples: number; seed: number },
+  options: { resamples: number; seed: number; only?: readonly TestId[] },
   pace: Pace,
   helper?: DrawHelper
 ): Promise<FittedTests> {
   const { levels, logLikelihood, drawnFrom } = fit;
-  const job = { data, levels, logLikelihood, ...(drawnFrom && { drawnFrom }), seed: options.seed };
+  const { resamples, seed, only } = options;
+  const job: FittedJob = {
+    data,
+    levels,
+    logLikelihood,
+    ...(drawnFrom && { drawnFrom }),
+    seed,
+    ...(only && { whole: 0 })
+  };
   const draws = fittedDraws(job);
-  const shared = new SharedDraws(draws, job, options.resamples, helper);
-  const runs = draws.questions.map(({ id, value }, i) => {
-    return { id, value, bit: 1 << i, sequence: new SequentialP(options.resamples) };
-  });
+  const shared = new SharedDraws(draws, job, resamples, helper);
+  const runs = draws.questions
+    .map(({ id, value }, i) => ({ id, value, bit: 1 << i, sequence: new SequentialP(resamples) }))
+    .filter(({ id }) => !only || only.some((one) => one === id));
   const nullDivergences: number[] = [];
   let share = 0;
   const breathe = () => pace.breathe(share);

@@ -32,6 +32,15 @@ describe('worstTests', () => {
     expect(found[0].smallestP).toBeCloseTo(0.0011, 12);
   });
 
+  it('leaves a test as it is that was not asked at a rate', () => {
+    const part: AtRate = { ...at(0.01, [test('fit', 0.03)]), only: ['fit'] };
+    const found = worstTests([test('fit', 0.002), test('parity', 0.4)], [part], 1e-4);
+    expect(found.map(({ p }) => p)).toEqual([0.03 + 1e-4, 0.4 + 1e-4]);
+    // Asked and not run there: it cannot speak against that rate.
+    const asked: AtRate = { ...part, only: ['fit', 'parity'] };
+    expect(worstTests([test('parity', 0.002)], [asked], 1e-4)[0].p).toBe(1);
+  });
+
   it('never passes 1, and lets a test that cannot run at a rate not speak against it', () => {
     expect(worstTests([test('fit', 1)], [], 0.01)[0].p).toBe(1);
     expect(worstTests([test('fit', 0.001)], [at(0.02, [test('ceiling', 0.2)])], 1e-4)[0].p).toBe(1);
