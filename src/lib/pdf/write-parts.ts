@@ -3,6 +3,7 @@ import type { Part } from './blocks/blocks';
 import { setPart } from './blocks/set-part';
 import { Flow } from './page/flow';
 import { escapeMetadata } from './page/metadata';
+import { packObjects } from './page/pack-objects';
 import { joined, packStreams } from './page/pack-streams';
 import { pageFeet } from './page/page-feet';
 import { cleanText } from './type/clean-text';
@@ -80,7 +81,7 @@ export async function writeParts(
   pageFeet(pen, foot);
   await others();
   doc.end();
-  return written;
+  return compress ? packObjects(await written) : written;
 }
 
 /** Lets whatever else waits have its turn: a PDF takes half a second, in which a server would answer nobody. */

@@ -26,19 +26,11 @@ const reference = (text: string, key: string): number =>
   Number(text.match(new RegExp(`/${key} (\\d+) 0 R`))?.[1]);
 
 /**
- * Reads the text of a PDF. Written for these tests: it knows what pdfkit writes (one xref table, fonts with ToUnicode,
- * hexadecimal strings), and nothing else.
+ * Reads the text of a PDF. Written for these tests: it knows what pdfkit writes (fonts with ToUnicode,
+ * hexadecimal strings), packed or not, and nothing else.
  */
 export function readPdf(bytes: Uint8Array): ReadPdf {
-  const file = Buffer.from(bytes).toString('latin1');
-  const xref = Number(file.match(/startxref\n(\d+)\n%%EOF/)?.[1]);
-  const offsets = [...file.slice(xref).matchAll(/^(\d{10}) \d{5} n/gm)].map((entry) => Number(entry[1]));
-  const ends = [...offsets, xref].sort((a, b) => a - b);
-  const objects = new Map<number, string>();
-  offsets.forEach((offset, i) => {
-    const end = ends[ends.indexOf(offset) + 1];
-    objects.set(i + 1, unpacked(file.slice(offset, end).replace(/^\d+ 0 obj\n/, '')));
-  });
+  const objects = objectsOf(Buffer.from(bytes).toString('latin1'));
   const kids = [...objects.values()].find((text) => /\/Type \/Pages\b/.test(text)) ?? '';
   const order = [...(kids.match(/\/Kids \[([^\]]*)\]/)?.[1] ?? '').matchAll(/(\d+) 0 R/g)].map(([, id]) =>
     Number(id)
@@ -53,6 +45,50 @@ export function readPdf(bytes: Uint8Array): ReadPdf {
     text: plainSpaces(readOut(objects, order, marked)),
     unmarked
   };
+}
+
+/** Every object by its number, whether it has a place of its own or lies with others in a stream (7.5.7). */
+function objectsOf(file: string): Map<number, string> {
+  const places = placesOf(file);
+  const starts = [...places.values(), Number(file.match(/startxref\n(\d+)\n%%EOF/)?.[1])];
+  const ends = starts.sort((a, b) => a - b);
+  const objects = new Map<number, string>();
+  for (const [id, offset] of places) {
+    const end = ends.find((other) => other > offset);
+    const object = unpacked(file.slice(offset, end).replace(/^\d+ 0 obj\n/, ''));
+    if (!/\/Type \/ObjStm\b/.test(object)) {
+      if (!/\/Type \/XRef\b/.test(object)) objects.set(id, object);
+      continue;
+    }
+    const content = object.slice(object.indexOf('stream\n') + 7).replace(/\nendstream$/, '');
+    const first = Number(object.match(/\/First (\d+)/)?.[1]);
+    const index = content.slice(0, first).trim().split(/\s+/).map(Number);
+    for (let i = 0; i < index.length; i += 2)
+      objects.set(
+        index[i],
+        `${content.slice(first + index[i + 1], first + (index[i + 3] ?? Infinity))}endobj\n`
+      );
+  }
+  return new Map([...objects].sort(([a], [b]) => a - b));
+}
+
+/** Where the objects lie that have a place of their own: from the table at the end, or from the stream in its stead. */
+function placesOf(file: string): Map<number, number> {
+  const at = Number(file.match(/startxref\n(\d+)\n%%EOF/)?.[1]);
+  const end = file.slice(at);
+  if (end.startsWith('xref'))
+    return new Map([...end.matchAll(/^(\d{10}) \d{5} n/gm)].map(([, place], i) => [i + 1, Number(place)]));
+  const stream = unpacked(end.replace(/^\d+ 0 obj\n/, ''));
+  const rows = Buffer.from(
+    stream.slice(stream.indexOf('stream\n') + 7).replace(/\nendstream$/, ''),
+    'latin1'
+  );
+  const [type, place, within] = (stream.match(/\/W \[(\d+) (\d+) (\d+)\]/) ?? []).slice(1).map(Number);
+  const width = type + place + within;
+  const found = new Map<number, number>();
+  for (let id = 0; id * width < rows.length; id++)
+    if (rows.readUIntBE(id * width, type) === 1) found.set(id, rows.readUIntBE(id * width + type, place));
+  return found;
 }
 
 /** An object with its stream as text, whether it was packed or not. */

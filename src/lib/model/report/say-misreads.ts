@@ -1,5 +1,5 @@
 import { sayRate } from '$lib/stats/words/say-rate';
-import type { Diagnosis, Interval } from '$lib/stats/types';
+import type { Diagnosis, Interval, Level } from '$lib/stats/types';
 import { formatNumber, formatPercent } from '../format-number';
 import { GEOMETRIES } from '../labels';
 import { sayFlagged } from './say-flagged';
@@ -75,20 +75,26 @@ export function sayTwoCeilings({ nuisances, moments }: Diagnosis): string | null
 }
 
 /** Stretches of bonds told at most: the document has them all. */
-const MOST = 6;
+export const MOST_STRETCHES = 6;
 
 /** Fitted probabilities along the chain before any misread; null unless misreads are allowed for. */
 export function sayKinks({ nuisances }: Diagnosis): string | null {
   const kinks = nuisances?.misread?.kinks;
   if (!kinks || kinks.length === 0) return null;
+  const stretches = kinkStretches(kinks);
+  const more =
+    stretches.length > MOST_STRETCHES ? `; the document has all ${stretches.length} stretches` : '';
+  return `Probability of a kink before any misread, as fitted. ${capital(stretches.slice(0, MOST_STRETCHES).join('; '))}${more}. The counts hardly tell one order of the bonds from another.`;
+}
+
+/** "bonds 3 to 7: 0.0497", one for each stretch of bonds with the same probability, in their order. */
+export function kinkStretches(kinks: Level[]): string[] {
   let bond = 0;
-  const stretches = kinks.map(({ p, trials }) => {
+  return kinks.map(({ p, trials }) => {
     const first = bond + 1;
     bond += trials;
     return `${first === bond ? `bond ${first}` : `bonds ${first} to ${bond}`}: ${formatNumber(p)}`;
   });
-  const more = stretches.length > MOST ? `; the document has all ${stretches.length} stretches` : '';
-  return `Probability of a kink before any misread, as fitted. ${capital(stretches.slice(0, MOST).join('; '))}${more}. The counts hardly tell one order of the bonds from another.`;
 }
 
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -44,19 +44,19 @@ export function setBlock(flow: Flow, block: Block, parent: Element): void {
   }
 }
 
-/** Room that the first of these blocks needs on a page, with what must not be parted from it. */
-export function leastHeight(flow: Flow, blocks: Block[]): number {
+/** Room that the first of these blocks needs on a page with `room` left, with what must not be parted from it. */
+export function leastHeight(flow: Flow, blocks: Block[], room = flow.room): number {
   const [first, ...rest] = blocks;
   const line = STYLES.body.leading;
   switch (first?.kind) {
     case undefined:
       return 0;
     case 'heading':
-      return 2 * STYLES.heading.leading + leastHeight(flow, rest);
+      return 2 * STYLES.heading.leading + leastHeight(flow, rest, room - 2 * STYLES.heading.leading);
     case 'space':
-      return first.height + leastHeight(flow, rest);
+      return first.height + leastHeight(flow, rest, room - first.height);
     case 'figure':
-      return figureHeight(flow, first);
+      return figureHeight(flow, first, room);
     case 'table':
       return Math.min(first.table.rows.length + 3, 7) * 16;
     case 'facts':
@@ -67,7 +67,7 @@ export function leastHeight(flow: Flow, blocks: Block[]): number {
     case 'paragraph': {
       // A short paragraph that stands over something, such as a heading of a list, stays with it.
       const leads = first.look === 'strong';
-      return leads ? line + leastHeight(flow, rest) : 2 * line;
+      return leads ? line + leastHeight(flow, rest, room - line) : 2 * line;
     }
     default:
       return 2 * line;

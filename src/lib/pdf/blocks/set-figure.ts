@@ -82,17 +82,18 @@ function drawn({ title, draw }: Figure, { width, scale, beside }: Sizing, pen: P
 
 function fitted(figure: Figure, pen: Pen, room: number): Fitted {
   const whole = sized(figure, WHOLE, pen);
-  if (!figure.fit || whole.height <= room) return whole;
-  for (const sizing of SMALLER) {
+  if (whole.height <= room) return whole;
+  // Only the figure that must share its page is drawn with smaller letters.
+  for (const sizing of figure.fit ? SMALLER : SMALLER.filter(({ scale }) => scale === SCALE)) {
     const smaller = sized(figure, sizing, pen);
     if (smaller.height <= room) return smaller;
   }
   return whole;
 }
 
-/** Height of a figure without its notes, as it would be set in the room that is left. */
-export const figureHeight = (flow: Flow, figure: Figure): number =>
-  fitted(figure, flow.pen, flow.room).height;
+/** Height of a figure without its notes, as it would be set in `room` points. */
+export const figureHeight = (flow: Flow, figure: Figure, room = flow.room): number =>
+  fitted(figure, flow.pen, room).height;
 
 /** A chart: its finding as the heading, the drawing, its legend, and what it gathers together in words. */
 export function setFigure(flow: Flow, figure: Figure, parent: Element): void {

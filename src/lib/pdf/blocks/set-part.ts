@@ -15,7 +15,8 @@ export function setPart(flow: Flow, part: Part, look: { rule: boolean }): void {
   const section = tag(flow.doc, flow.root, 'Sect');
   flow.clearMargin();
   flow.skip(15);
-  flow.need(STYLES.section.leading + 16 + leastRow(flow, part.rows[0]));
+  const head = STYLES.section.leading + 16;
+  flow.need(head + leastRow(flow, part.rows[0], flow.room - head));
   if (look.rule) {
     rule(flow.doc, PAGE.left, flow.y, PAGE.whole, 'line');
     flow.y += 8;
@@ -51,8 +52,8 @@ function setRow(flow: Flow, { blocks, notes }: Row, section: PDFKit.PDFStructure
 }
 
 /** Room that a row needs: its first blocks, and its notes, which no page may part from what they are about. */
-const leastRow = (flow: Flow, row: Row | undefined): number =>
-  Math.max(leastHeight(flow, row?.blocks ?? []), notesHeight(row?.notes ?? [], flow.pen));
+const leastRow = (flow: Flow, row: Row | undefined, room = flow.room): number =>
+  Math.max(leastHeight(flow, row?.blocks ?? [], room), notesHeight(row?.notes ?? [], flow.pen));
 
 /** Points between two blocks: headings and leads stand close to what they lead, remarks to what they are on. */
 function gapBetween(before: Block, block: Block): number {

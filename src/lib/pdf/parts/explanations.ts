@@ -1,4 +1,6 @@
+import { columnsOf } from '$lib/charts/columns-of';
 import { explanationsPicture } from '$lib/charts/explanations-picture';
+import { explanationsTable } from '$lib/charts/explanations-table';
 import { explanationsTitle } from '$lib/charts/explanations-title';
 import type { Table } from '$lib/charts/table';
 import { EXPLANATIONS } from '$lib/model/labels';
@@ -7,9 +9,25 @@ import { sayShotsInAll } from '$lib/model/report/say-shots-in-all';
 import { sayWeight } from '$lib/model/report/say-weight';
 import type { Explanation, ExplanationId, Explanations } from '$lib/stats/explanations/types';
 import type { Block, Part } from '../blocks/blocks';
+import { noteBlock } from './note-block';
 import { NOTES } from './notes';
 
 const TITLE = 'What else it could be';
+
+/** The columns of the page's table behind the chart, over two tables of a page's width. */
+const LIKELIHOODS = [
+  'explanation',
+  'fitted numbers',
+  'log-likelihood',
+  'AIC',
+  'AIC behind',
+  'weight',
+  'G²',
+  'p of its fit',
+  'smallest p',
+  'resamples'
+];
+const NUMBERS = ['explanation', 'base', 'number', 'value', 'low', 'high', 'second number', 'its value'];
 
 /** Stories that would give such counts, as on the page; nothing where none were told. */
 export function explanationsParts(explanations: Explanations | undefined): Part[] {
@@ -41,6 +59,19 @@ export function explanationsParts(explanations: Explanations | undefined): Part[
               digits: [0, 3, 0, 2, 0],
               under: ranked.map((one) => sayOwnNumber(one) || null)
             },
+            {
+              kind: 'table',
+              caption: 'Their likelihoods in full',
+              table: columnsOf(explanationsTable(explanations), LIKELIHOODS)
+            },
+            {
+              kind: 'table',
+              caption: 'Their numbers in full',
+              table: columnsOf(explanationsTable(explanations), NUMBERS)
+            },
+            ...noteBlock(
+              'Base: the probability of one trial, or the mean count when N is unknown, before the story sets in.'
+            ),
             ...listed('What the nearest would mean', near.map(meaningOf)),
             ...listed(
               'What would tell them apart',

@@ -2,6 +2,7 @@ import { certificateWords } from '$lib/charts/certificate-words';
 import { tailsPicture } from '$lib/charts/tails-picture';
 import { tailsTable } from '$lib/charts/tails-table';
 import { tailsTitle } from '$lib/charts/tails-title';
+import { formatNumber } from '$lib/model/format-number';
 import type { Diagnosis } from '$lib/stats/types';
 import type { Block, Part } from '../blocks/blocks';
 import { NOTES } from './notes';
@@ -16,8 +17,14 @@ export function tailsPart(document: Diagnosis): Part {
     tailsTable(document),
     (i) => points[i].shots > 0 || points[i].fitted * shots > 0.02
   );
-  const certificate = certificateWords(document);
-  const said: Block[] = certificate === '' ? [] : [{ kind: 'paragraph', text: certificate }];
+  const { certificate } = document.tails;
+  const said: Block[] =
+    certificate === null
+      ? []
+      : [
+          { kind: 'paragraph', text: certificateWords(document) },
+          ...noteBlock(`The bound of that tail as a share of the shots: ${formatNumber(certificate.bound)}.`)
+        ];
   return {
     title: 'Both tails',
     rows: [

@@ -1,5 +1,7 @@
 import type { Table } from '$lib/charts/table';
 import { testsPicture } from '$lib/charts/tests-picture';
+import { columnsOf } from '$lib/charts/columns-of';
+import { testsTable } from '$lib/charts/tests-table';
 import { testsTitle } from '$lib/charts/tests-title';
 import { TESTS } from '$lib/model/labels';
 import { sayOrigin } from '$lib/model/report/say-origin';
@@ -27,7 +29,8 @@ export function testsPart(document: Diagnosis): Part {
             table: testsInPrint(document),
             digits: 2,
             under: tests.map(({ p, smallestP }) => sayHowOften(p, smallestP))
-          }
+          },
+          { kind: 'table', caption: 'The tests and the certificate in full', table: testsInFull(document) }
         ];
   const left: Block[] =
     notRun.length === 0
@@ -52,3 +55,9 @@ const testsInPrint = ({ tests }: Diagnosis): Table => ({
   ],
   rows: tests.map((test) => [TESTS[test.id], test.p, test.pAdjusted, test.smallestP, sayOrigin(test)])
 });
+
+/** What stands behind the chart of the page: without the flags, which have a part of their own. */
+function testsInFull(document: Diagnosis): Table {
+  const whole = testsTable({ ...document, flags: [] }, TESTS);
+  return columnsOf(whole, ['test', 'statistic', 'p', 'p, all tests', 'smallest p', 'from', 'resamples']);
+}
