@@ -23,7 +23,7 @@ export function cumulantsPlace(diagnosis: Diagnosis): CumulantsPlace | { reason:
   const { mean, variance, fano } = moments;
   if (data.lump || data.below)
     return {
-      reason: `${lumpWords(lumpsOf(data)).rows}, so the cumulants are no more than limits: no place among those of independent trials can be told.`
+      reason: `${lumpWords(lumpsOf(data)).rows}, so the cumulants are those of the counts as lumped: no place among those of independent trials can be told.`
     };
   if (!mean.value || variance.value === null || fano.value === null || moments.third.value === null)
     return {

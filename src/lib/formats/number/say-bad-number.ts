@@ -59,7 +59,7 @@ function sayWords(cell: string, cited: string, what: string): { message: string;
   if (date.test(text)) {
     return {
       message: `${cited} looks like a date that a spreadsheet made out of a range.`,
-      fix: 'Give each count its own row; only an opening row such as ≤2 (not 0-2, which spreadsheets turn into a date) and a closing one such as 10+ may cover several counts.'
+      fix: 'Give each count its own row; only an opening row such as ≤2 and a closing one such as 10+ may cover several counts.'
     };
   }
   const row = sayBadRow(text, cited, what);
