@@ -61,6 +61,7 @@ describe('a report of 10 000 counts', () => {
     // Charts are made live as one comes near.
     for (const figure of await page.locator('figure').all()) {
       await figure.scrollIntoViewIfNeeded();
+      await figure.getByRole('application').hover();
       await figure.locator('svg.drawn').waitFor();
     }
     expect(await layoutFaults(page)).toEqual([]);

@@ -5,6 +5,7 @@ import { openBrowser } from './support/open-browser';
 import { seedLink, seedSharedReport, type SharedReport } from './support/shared-report';
 import { signIn } from './support/sign-in';
 import { spokenPage } from './support/spoken-page';
+import { unrolled } from './support/unrolled';
 import { startServer, type RunningServer } from './support/start-server';
 import { watchScripts, watchShifts } from './support/watch-page';
 
@@ -52,11 +53,13 @@ describe.each(['team', 'link'] as const)('the report page of the %s', (who) => {
     const { page, context } = await pageOfLead({ viewport: { width, height: 900 } });
     const shifts = await watchShifts(page);
     await page.goto(server.address + paths[who], { waitUntil: 'networkidle' });
-    // Charts are made live as one comes near: nothing may grow then, in view or below it.
+    // Charts are made live as one comes near or touches them: nothing may grow then, in view or below it.
     const figures = await page.locator('figure').all();
     expect(figures).toHaveLength(7);
     for (const figure of figures) {
       await figure.scrollIntoViewIfNeeded();
+      // Where the server's drawing has the right size it stands until it is touched.
+      await figure.getByRole('application').hover();
       await figure.locator('svg.drawn').waitFor();
       await page.waitForTimeout(100);
     }
@@ -78,6 +81,7 @@ describe.each(['team', 'link'] as const)('the report page of the %s', (who) => {
   it('is read out in a sceptic’s order, each control under a name of its own', async () => {
     const { page, context } = await pageOfLead();
     await page.goto(server.address + paths[who], { waitUntil: 'networkidle' });
+    await unrolled(page);
     const spoken = await spokenPage(page);
     const headings = spoken.filter(({ role }) => role === 'heading');
     expect(headings.filter(({ level }) => level === 1)).toHaveLength(1);

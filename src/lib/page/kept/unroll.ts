@@ -3,6 +3,9 @@ import { unfoldNotes } from '../terms/unfold-notes';
 /** Milliseconds for other things between two parts, where a browser cannot say when it is idle. */
 const PAUSE = 50;
 
+/** Milliseconds of idle time that must be left for one more piece: a slow processor takes so long for one. */
+const ENOUGH = 25;
+
 /** What the style sheet leaves rolled up: parts of the page, and what they are made of. */
 const PARTS = ':scope > *';
 const PIECES = ':is(.main, .main > dl) > :not(dl)';
@@ -32,22 +35,32 @@ export function unroll(place: HTMLElement): () => void {
   let waiting = 0;
   let steps: Iterator<() => void> | undefined;
 
-  function next(): void {
-    const step = steps?.next();
-    if (step && !step.done) {
-      step.value();
-      return wait();
+  /** The next thing to do; undefined at the end. */
+  function step(): (() => void) | undefined {
+    for (;;) {
+      const one = steps?.next();
+      if (one && !one.done) return one.value;
+      const part = parts.shift();
+      if (!part) return;
+      steps = stepsOf(part);
     }
-    const part = parts.shift();
-    if (!part) return finish();
-    steps = stepsOf(part);
+  }
+  function next(time?: IdleDeadline): void {
+    do {
+      const now = step();
+      if (!now) return finish();
+      now();
+      // Laid out at once, so that what it took counts.
+      place.getBoundingClientRect();
+    } while (time && time.timeRemaining() > ENOUGH);
     wait();
   }
   function finish(): void {
     place.dataset.whole = '';
     unfoldNotes(place);
   }
-  const wait = (): void => void (waiting = idle ? requestIdleCallback(next) : window.setTimeout(next, PAUSE));
+  const wait = (): void =>
+    void (waiting = idle ? requestIdleCallback(next) : window.setTimeout(() => next(), PAUSE));
 
   const stopping = new AbortController();
   addEventListener('beforeprint', finish, { signal: stopping.signal });
