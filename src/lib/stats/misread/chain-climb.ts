@@ -58,10 +58,12 @@ export function chainClimb(
 }
 
 function scoreOf({ space, data, rate, kept }: ChainProblem, chain: Chain): ChainScore {
-  chainSlopes(space, chain, rate, trim);
+  // Without a lump above, the likelihood asks for nothing beyond the largest count seen, or kept.
+  const last = data.lump ? Infinity : (kept?.to ?? data.first + data.shots.length - 1);
+  chainSlopes(space, chain, rate, trim, last);
   const score = chainScore(space, chain.p.length, data, kept);
   if (score.value > -Infinity) return score;
-  chainSlopes(space, chain, rate, 0);
+  chainSlopes(space, chain, rate, 0, last);
   return chainScore(space, chain.p.length, data, kept);
 }
 

@@ -37,10 +37,17 @@ export function chainSpace(bonds: number, levels: number): ChainSpace {
  *
  * @param chain no more levels than the space has room for
  * @param trim part of the largest value below which the ends are left out
+ * @param last counts above are left out: the others do not depend on them
  *
  * A step is linear in p, so its slope adds (z − 1)(f − g), upright as it stands and flipped with the other sign.
  */
-export function chainSlopes(space: ChainSpace, { p, runs }: Chain, rate: number, trim: number): void {
+export function chainSlopes(
+  space: ChainSpace,
+  { p, runs }: Chain,
+  rate: number,
+  trim: number,
+  last = Infinity
+): void {
   const { f, g, df, dg } = space;
   for (const values of [f, g, ...df, ...dg]) values.fill(0);
   f[0] = 1 - rate;
@@ -51,7 +58,7 @@ export function chainSlopes(space: ChainSpace, { p, runs }: Chain, rate: number,
   for (const { level, trials } of runs) {
     met[level] ||= trials > 0;
     for (let bond = 0; bond < trials; bond++) {
-      high++;
+      if (high < last) high++;
       for (let j = 0; j < p.length; j++) if (met[j]) step(df[j], dg[j], p[level], rate, low, high);
       slope(space, level, rate, low, high);
       const most = step(f, g, p[level], rate, low, high);

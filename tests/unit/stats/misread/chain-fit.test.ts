@@ -46,6 +46,28 @@ describe('chainSlopes', () => {
       expect(Math.abs(slope[1] / second - 1)).toBeLessThan(1e-6);
     }
   });
+
+  it('are the same to the last bit at counts up to a limit, whether or not those above are built', () => {
+    const runs = [
+      { level: 0, trials: 20 },
+      { level: 1, trials: 40 }
+    ];
+    for (const trim of [0, 1e-20]) {
+      const [whole, part] = [chainSpace(60, 2), chainSpace(60, 2)];
+      chainSlopes(whole, { p: [0.2, 0.03], runs }, 0.01, trim);
+      chainSlopes(part, { p: [0.2, 0.03], runs }, 0.01, trim, 12);
+      expect(part.high).toBe(12);
+      expect(whole.high).toBeGreaterThan(30);
+      const upTo = (values: Float64Array) => values.slice(whole.low, 13);
+      expect(part.low).toBe(whole.low);
+      expect(upTo(part.f)).toEqual(upTo(whole.f));
+      expect(upTo(part.g)).toEqual(upTo(whole.g));
+      for (const j of [0, 1]) {
+        expect(upTo(part.df[j])).toEqual(upTo(whole.df[j]));
+        expect(upTo(part.dg[j])).toEqual(upTo(whole.dg[j]));
+      }
+    }
+  });
 });
 
 describe('chainFit', () => {
