@@ -1,3 +1,4 @@
+import { formatCount } from '$lib/model/format-number';
 import type { Measured, PublishedCumulants } from '$lib/stats/cumulants-only/published-cumulants';
 import { readNumber } from '../read-number';
 import { readTrials } from '../read-settings';
@@ -16,17 +17,17 @@ export function readCumulants(fields: CumulantFields): CumulantsRead {
   const number = (name: CumulantField): number => {
     const value = readNumber(fields[name]);
     if (value !== null && Math.abs(value) <= most) return value;
-    problems[name] =
-      fields[name].trim() === ''
-        ? 'Write a number, such as 3.87.'
-        : 'Write a plain number, such as 3.87 or 2.1e-3, up to 10¹² in size.';
+    problems[name] = sayNoNumber(fields[name], name === 'third' || name === 'fourth');
     return NaN;
   };
   const measured = (name: 'mean' | 'variance' | 'third' | 'fourth'): Measured => {
     const value = number(name);
     const field = `${name}-error` as const;
     const error = readNumber(fields[field]);
-    if (error === null || !(error > 0 && error <= most && error >= 1e-9 * Math.abs(value || 0)))
+    if (error === 0)
+      problems[field] =
+        'An error of 0 would make the number exact, which nothing measured is. Write its standard error, such as 0.04.';
+    else if (error === null || !(error > 0 && error <= most && error >= 1e-9 * Math.abs(value || 0)))
       problems[field] =
         'Write its standard error, above 0 and at least a billionth of the number, such as 0.04.';
     return { value, error: error ?? NaN };
@@ -45,11 +46,19 @@ export function readCumulants(fields: CumulantFields): CumulantsRead {
   };
   if (printed.mean.value < 0) problems.mean = 'A mean count is not negative.';
   else if (trials && printed.mean.value > trials)
-    problems.mean = `The mean is above N = ${trials}: so many defects have no room in a shot.`;
+    problems.mean = `The mean is above N = ${formatCount(trials)}: so many defects have no room in a shot.`;
   if (printed.variance.value < 0)
     problems.variance =
       'No counts have a negative variance. Look for a slip, or for a variance minus the mean.';
   if (printed.fourth && !printed.third)
     problems.third = 'The fourth is of use only with the third: write both.';
   return Object.keys(problems).length ? { ok: false, problems } : { ok: true, printed };
+}
+
+function sayNoNumber(typed: string, optional: boolean): string {
+  if (/[±(]|\+[/-]/.test(typed))
+    return 'Write the number alone, such as 3.87: its standard error has a field of its own.';
+  const without = optional ? ' If the table has none, leave it empty, and its error too.' : '';
+  if (typed.trim() === '') return `Write a number, such as 3.87.${without}`;
+  return `Write a plain number, such as 3.87 or 2.1e-3, up to 10¹² in size.${without}`;
 }

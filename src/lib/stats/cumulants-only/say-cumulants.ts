@@ -23,12 +23,21 @@ function sayMisprint({ verdict, broken }: CumulantsVerdict): string {
   return ` As printed no counts at all have them: ${sayBroken(broken[0])} for any counts, though by less than three of its errors.`;
 }
 
-function said({ verdict, conditions, broken, nearest, p }: CumulantsVerdict): string {
+function said({
+  verdict,
+  conditions,
+  broken,
+  dispersion,
+  nearest,
+  settled,
+  pulls,
+  p
+}: CumulantsVerdict): string {
   if (verdict === 'impossible') {
     const worst = broken.reduce((a, b) => (b.slack / b.error < a.slack / a.error ? b : a));
     return (
       `No counts at all have these cumulants, independent or not: ${sayBroken(worst)} for any counts, by ${formatNumber(-worst.slack / worst.error, 2)} of its errors. ` +
-      'Look for a misprint, a standard deviation where a variance belongs, or a fourth central moment where a cumulant belongs.'
+      `Look for a misprint, ${pulls.length < 4 ? 'or a standard deviation where a variance belongs.' : 'a standard deviation where a variance belongs, or a fourth central moment where a cumulant belongs.'}`
     );
   }
   const first = conditions.find(({ standing }) => standing === 'broken');
@@ -36,10 +45,14 @@ function said({ verdict, conditions, broken, nearest, p }: CumulantsVerdict): st
     const how = first ? `: ${sayBroken(first)}` : '';
     return `No independent trials have these cumulants${how}. If some did, errors so large ${sayHowOften(Math.max(p, surest), 1)}.`;
   }
+  if (!settled)
+    return 'The errors are of such different sizes that the distance of these cumulants from independent trials cannot be worked out in sixteen digits. Look for a slip in the smallest of them.';
   const where =
     nearest.distance === 0
       ? 'Some independent trials can have these cumulants'
       : `These cumulants lie outside what independent trials can have, by ${formatNumber(nearest.distance, 2)} of their errors: chance does that`;
+  if (dispersion.value === null)
+    return `${where}. But this mean leaves no room for a variance, so there is no ceiling to measure an excess against.`;
   return verdict === 'compatible'
     ? `${where}, and the variance is known well enough that an excess of 10\u202f% over its ceiling would show.`
     : `${where}. But the variance is not known well enough to exclude an excess of 10\u202f% over its ceiling.`;

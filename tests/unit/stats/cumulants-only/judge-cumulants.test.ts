@@ -19,6 +19,44 @@ const printed = (
   return { trials, mean: of(mean)!, variance: of(variance)!, third: of(third), fourth: of(fourth) };
 };
 
+describe('at the edge of what can be printed', () => {
+  it('a variance of 0 is what trials all sure or excluded have, where the mean is whole', () => {
+    const whole = judgeCumulants(printed(null, [4, 0.01], [0, 0.01]));
+    expect(whole.verdict).toBe('compatible');
+    expect(whole.nearest.distance).toBe(0);
+    // A count with mean 3.5 is 3 or 4 at best: variance ½·½ = 0.25, and 0 is 25 errors of 0.01 below.
+    const half = judgeCumulants(printed(null, [3.5, 0.01], [0, 0.01]));
+    expect(half.verdict).toBe('impossible');
+    expect(sayCumulants(half)).toMatch(/the variance is below its floor for any counts, by 25 of its errors/);
+    expect(sayCumulants(half)).toMatch(/or a standard deviation where a variance belongs\.$/);
+  });
+
+  it.each([
+    [null, 0],
+    [10, 0],
+    [10, 10]
+  ])('with N = %s and a mean of %d there is no ceiling, and it says so', (trials, mean) => {
+    const judged = judgeCumulants(printed(trials, [mean, 0.05], [0, 0.1]));
+    expect(judged.verdict).toBe('undecided');
+    expect(judged.dispersion.value).toBeNull();
+    expect(sayCumulants(judged)).toMatch(/this mean leaves no room for a variance, so there is no ceiling/);
+  });
+
+  it('errors a billion times apart are not called chance, nor compatible', () => {
+    // Of 50 trials with mean 4 the ceiling is 4 − 16/50 = 3.68: independent trials have 3.6, whatever its error.
+    for (const error of [1e-10, 1e-11]) {
+      const judged = judgeCumulants(printed(50, [4, 0.05], [3.6, error]));
+      expect(judged.settled).toBe(false);
+      expect(judged.verdict).toBe('undecided');
+      expect(sayCumulants(judged)).toMatch(/cannot be worked out in sixteen digits/);
+    }
+    const judged = judgeCumulants(printed(50, [4, 0.05], [3.6, 1e-6]));
+    expect(judged.settled).toBe(true);
+    expect(judged.verdict).toBe('compatible');
+    expect(judged.nearest.distance).toBe(0);
+  });
+});
+
 describe('judgeCumulants', () => {
   it('Rutherford and Geiger 1910: mean 3.871549, variance 3.696191, 2608 shots: compatible, N unknown', () => {
     // Errors from the counts: √(κ2/S) and √((κ4 + 2κ2²)/S), about 0.038 and 0.11.
