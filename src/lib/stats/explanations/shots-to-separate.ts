@@ -1,4 +1,5 @@
 import type { FitData } from '../fit/fit-data';
+import type { Window } from '../laws/window';
 import { saturated } from '../resampling/divergence';
 import { scoreFit, type ScoreFit } from './score-fit';
 import type { StoryModel } from './story-model';
@@ -15,21 +16,23 @@ export interface FittedStory {
 const fourInFive = 0.8416212335729143;
 
 /**
- * S·KL at which the true story leads its rival by AIC 2 in four of five repeats. The log-likelihood ratio of close laws
- * is about normal with variance 2S·KL and mean S·KL + d/2, d the free numbers that the truth has more: each gains half a
- * nat by being fitted, and AIC takes a whole one. So S·KL − 0.842·√(2S·KL) = 1 + d/2; 3.09 for d = 0.
+ * Shots S at which the true story leads its rival by AIC 2 in four of five repeats. The log-likelihood ratio is about
+ * normal with mean S·KL + d/2 and variance S·V, V that of ln(f/g) in one shot under the truth f and d the free numbers
+ * that it has more: each gains half a nat by being fitted, and AIC takes a whole one. So S·KL − 0.842·√(S·V) = 1 + d/2.
+ * For close laws V = 2·KL, and S·KL = 3.09 for d = 0; where a few rare counts carry all the difference V is far more, and
+ * 2·KL let half a burst on average pass for enough.
  *
  * @param more d, which may be negative; from −2 on the penalty alone separates them where the rival copies the truth
  */
-function needed(more: number): number {
-  const half = fourInFive / Math.SQRT2;
+function needed(distance: number, variance: number, more: number): number {
+  const spread = fourInFive * Math.sqrt(variance);
   const lead = Math.max(0, 1 + more / 2);
-  return (half + Math.sqrt(half * half + lead)) ** 2;
+  return ((spread + Math.sqrt(spread * spread + 4 * distance * lead)) / (2 * distance)) ** 2;
 }
 
 /**
- * Shots at which the counts alone would tell two stories apart, if the first is true as fitted: a bar over KL(first ‖
- * second), the second fitted anew to the very law of the first; the bar allows for free numbers that one has more.
+ * Shots at which the counts alone would tell two stories apart, if the first is true as fitted: see `needed`, the
+ * second fitted anew to the very law of the first.
  *
  * @returns null when the second can copy the first so closely that a billion shots would not do, or gives its counts no probability
  */
@@ -49,9 +52,23 @@ export function shotsToSeparate(data: FitData, first: FittedStory, second: Fitte
     total: kept.reduce((sum, value) => sum + value, 0),
     withoutEmpty: false
   };
-  const rival = scoreFit(second.over(expected), expected, second.fit.x);
+  const over = second.over(expected);
+  const rival = scoreFit(over, expected, second.fit.x);
   if (rival.logLikelihood === -Infinity) return null;
   const distance = (saturated(expected) - rival.logLikelihood) / expected.total;
-  const bar = needed(first.fit.x.length - second.fit.x.length);
-  return distance > bar / 1e9 ? Math.ceil(bar / distance) : null;
+  if (!(distance > 0)) return null;
+  const ratios = logRatios(expected, over.window(rival.x));
+  const variance = ratios.reduce((sum, { f, ratio }) => sum + f * (ratio - distance) ** 2, 0);
+  const shots = needed(distance, variance, first.fit.x.length - second.fit.x.length);
+  return shots <= 1e9 ? Math.ceil(shots) : null;
+}
+
+/** ln(f/g) of every count that the truth f has, with its probability. */
+function logRatios({ first, shots, total }: FitData, rival: Window): { f: number; ratio: number }[] {
+  return Array.from(shots, (shot, i) => ({
+    f: shot / total,
+    g: rival.values[first + i - rival.first] / rival.scale
+  }))
+    .filter(({ f }) => f > 0)
+    .map(({ f, g }) => ({ f, ratio: Math.log(f / g) }));
 }
