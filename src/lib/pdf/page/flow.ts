@@ -65,10 +65,14 @@ export class Flow {
     if (!this.atTop) this.y += height;
   }
 
-  /** Sets a margin note level with the cursor, or below the note before it; on the next page where it does not fit. */
+  /**
+   * Sets a margin note level with the cursor, or below the note before it; on the next page where it does not fit. At
+   * the top of a page it is set whatever its height: no later page has more room, and it would wait for ever.
+   */
   putInMargin(piece: MarginPiece): void {
     const y = Math.max(this.y, this.marginY);
-    if (this.waiting.length > 0 || y + piece.height > PAGE.bottom + 6) {
+    const fits = y + piece.height <= PAGE.bottom + 6 || y === PAGE.top;
+    if (this.waiting.length > 0 || !fits) {
       this.waiting.push(piece);
       return;
     }
