@@ -51,6 +51,9 @@ export const TOLD: Record<string, string> = {
   'batches, meansVariance': 'The true means of the batches vary by',
   'batches, p': 'All batches pooled:',
   'batches, pTogether': 'All batches pooled:',
+  'batches, correlation of neighbouring shots': 'Neighbouring shots of a batch are correlated by',
+  'batches, p of that correlation': 'Neighbouring shots of a batch are correlated by',
+  'batches, dispersion from shot to shot': 'From one shot to the next the variance is',
   'misreads, neededRate': 'To compare with your calibration:',
   'misreads, largestRate': 'At most'
 };
