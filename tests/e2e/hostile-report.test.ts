@@ -15,6 +15,7 @@ import { layoutFaults } from './support/layout-faults';
 import { openBrowser } from './support/open-browser';
 import { seedPerson, seedTeam, withDatabaseOf } from './support/seed-people';
 import { signIn } from './support/sign-in';
+import { unrolled } from './support/unrolled';
 import { startServer, type RunningServer } from './support/start-server';
 
 /** Invented. Longer than the forms take: what came in by an archive or an older version may be. */
@@ -126,6 +127,7 @@ describe.each([
       });
       for (const figure of await page.locator('main figure').all()) await figure.scrollIntoViewIfNeeded();
       await page.waitForLoadState('networkidle');
+      await unrolled(page);
       await keep(`hostile-${which}-${width}-${scheme}.png`, () => page.screenshot({ fullPage: true }));
 
       const text = oneBlank(await page.locator('main').innerText());

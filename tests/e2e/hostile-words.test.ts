@@ -10,6 +10,7 @@ import { layoutFaults } from './support/layout-faults';
 import { openBrowser } from './support/open-browser';
 import { seedPerson, seedTeam, withDatabaseOf } from './support/seed-people';
 import { signIn } from './support/sign-in';
+import { unrolled } from './support/unrolled';
 import { startServer, type RunningServer } from './support/start-server';
 
 /** Invented: what people may type, each in every field that takes words. */
@@ -76,7 +77,10 @@ afterAll(async () => {
 });
 
 const PAGES = ['report', 'compare', 'link'] as const;
-const shown = async (page: Page) => (await page.locator('main').innerText()).replace(/\s+/g, ' ');
+const shown = async (page: Page) => {
+  await unrolled(page);
+  return (await page.locator('main').innerText()).replace(/\s+/g, ' ');
+};
 
 describe.each(Object.entries(TYPED))('words of kind %s', (key, typed) => {
   it.each(PAGES)('on the %s page are shown as typed, do nothing, and fit a telephone', async (which) => {
