@@ -30,10 +30,13 @@ export function sayWithin(drift: DriftPart | undefined): string | null {
   return `${statement} Variance above the ceiling: ${formatNumber(excess, 3)} in all, ${sayInterval(excessWithin, 3)} within batches, ${formatNumber(excessBetween, 3)} between them. The true means of the batches vary by ${sayInterval(meansVariance, 3)}. ${single} ${sayInside(split.order)}`;
 }
 
+/** The smallest p that the document tells of neighbouring shots: see `withinOrder`. */
+const SUREST = 1e-9;
+
 /** Neighbouring shots of a batch: whether the rate moved inside batches. */
 function sayInside(order: BatchSplit['order']): string {
   if (!order) return 'Drift inside a batch is not taken out.';
-  return `Neighbouring shots of a batch are correlated by ${formatNumber(order.correlation, 2)}: one as large ${sayP(order.p, 0, 0)} if their order meant nothing, ${order.moved ? 'so the rate changed inside batches too' : 'so no drift inside batches is seen'}. From one shot to the next the variance is ${sayInterval(order.dispersion, 3)} times the ceiling.`;
+  return `Neighbouring shots of a batch are correlated by ${formatNumber(order.correlation, 2)}: one as large ${sayP(order.p, SUREST, 0)} if their order meant nothing, ${order.moved ? 'so the rate changed inside batches too' : 'so no drift inside batches is seen'}. From one shot to the next the variance is ${sayInterval(order.dispersion, 3)} times the ceiling.`;
 }
 
 /** The change of the mean that the shots support most; null where none was sought. */

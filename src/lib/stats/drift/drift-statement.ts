@@ -3,6 +3,7 @@ import { formatNumber } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
 import { insideBatches } from './split-excess';
 import type { BatchSplit } from './types';
+import { surest } from './within-order';
 
 /**
  * What is left of an excess when batches are tested one by one and pooled, in a sentence.
@@ -38,7 +39,7 @@ export function driftStatement(split: BatchSplit, excessShown: boolean): string 
   }
   // An excess that order explains, wherever it would else have been told as one.
   if (order && insideBatches(order) && (dispersion.value > 1 || excessShown))
-    return `${measured} but inside batches too the rate changed, for neighbouring shots resemble each other (correlation ${formatNumber(order.correlation, 2)}; so large a one ${sayHowOften(order.p)} if their order meant nothing). From one shot to the next the variance is ${sayInterval(order.dispersion, 3)} times the ceiling: that shows no excess beside the drift.`;
+    return `${measured} but inside batches too the rate changed, for neighbouring shots resemble each other (correlation ${formatNumber(order.correlation, 2)}; so large a one ${sayHowOften(order.p, surest)} if their order meant nothing). From one shot to the next the variance is ${sayInterval(order.dispersion, 3)} times the ceiling: that shows no excess beside the drift.`;
   return excessShown
     ? `${measured} within batches the counts neither rule out independent trials nor exclude an excess that matters, so how much of the excess is drift stays open.`
     : `${measured} within batches the counts neither rule out independent trials nor exclude an excess that matters.`;

@@ -10,6 +10,9 @@ const fewest = 50;
 /** Level at which neighbours resemble each other. Not the α of the answer: a drift missed would be told as interaction. */
 const level = 0.05;
 
+/** The sum is not normal so far out that a smaller p could be told. */
+export const surest = 1e-9;
+
 /**
  * Whether the rate moved inside batches too: neighbouring shots of a batch then resemble each other, and between them
  * the variance is smaller than within the batch.
@@ -35,7 +38,7 @@ export function withinOrder(
   // Var/value² is 2/shape for the variance; 1/pairs more for differences: (3 + γ)/pairs for (2 + γ)/freedom.
   const even = Math.max(1, 2 / ((2 * freedom) / (shape * pairs) + 1 / pairs));
   const { low, high } = evenDispersionFactors(even + 1, null, 0.025);
-  const p = normalCdf(-score);
+  const p = Math.max(surest, normalCdf(-score));
   return {
     correlation,
     p,

@@ -100,6 +100,9 @@ describe('a rate that moves inside batches', () => {
     expect(await share({ ramp: 0.06, rho: 0 }, ({ split }) => split.verdict === 'excess')).toBeLessThan(0.08);
     const { split, statement } = await splitOf(made(3, { ramp: 0.06, rho: 0 }));
     expect(split.verdict).toBe('undecided');
+    // A normal law says nothing of chances under 1e-9, so none is told.
+    expect(split.order!.p).toBe(1e-9);
+    expect(statement).toMatch(/so large a one would turn up at most once in/);
     expect(statement).toMatch(
       /inside batches too the rate changed, for neighbouring shots resemble each other/
     );
