@@ -26,7 +26,10 @@ module.exports = {
       name: 'not-resolvable',
       severity: 'error',
       from: {},
-      to: { couldNotResolve: true, pathNot: '^(\\$app|\\$env|\\./\\$types|\\$service-worker|virtual:first-reading$)' }
+      to: {
+        couldNotResolve: true,
+        pathNot: '^(\\$app|\\$env|\\./\\$types|\\$service-worker|virtual:first-reading$)'
+      }
     },
     {
       name: 'no-undeclared-package',

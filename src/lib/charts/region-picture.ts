@@ -1,3 +1,4 @@
+import { capital } from '$lib/model/capital';
 import { scaleLinear } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { crossPath } from './cross-path';
@@ -76,7 +77,7 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
       {
         x: law[0],
         y: law[1],
-        words: () => lawWords(sentenceCase(place.law.name ?? 'best law'), place.law.fano, place.law.third)
+        words: () => lawWords(capital(place.law.name ?? 'best law'), place.law.fano, place.law.third)
       },
       ...named.map(({ name, at }) => ({
         x: x(at[0]),
@@ -87,8 +88,6 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
     notes: []
   };
 }
-
-const sentenceCase = (text: string): string => text[0].toUpperCase() + text.slice(1);
 
 type Place = (value: number) => number;
 

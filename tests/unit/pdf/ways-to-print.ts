@@ -48,7 +48,7 @@ export const TOLD: Record<string, string> = {
   'batches, dispersion': 'Tested batch by batch and pooled,',
   'batches, excessWithin': 'Variance above the ceiling:',
   'batches, excessBetween': 'Variance above the ceiling:',
-  'batches, meansVariance': 'The true means of the batches vary by',
+  'batches, meansVariance': 'The true means of the batches have a variance of',
   'batches, p': 'All batches pooled:',
   'batches, pTogether': 'All batches pooled:',
   'batches, correlation of neighbouring shots': 'Neighbouring shots of a batch are correlated by',

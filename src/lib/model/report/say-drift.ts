@@ -1,5 +1,6 @@
 import type { BatchSplit, DriftPart } from '$lib/stats/drift/types';
 import type { Diagnosis } from '$lib/stats/types';
+import { capital } from '../capital';
 import { formatCount, formatNumber } from '../format-number';
 import { TESTS } from '../labels';
 import { sayInterval } from '../say-interval';
@@ -12,7 +13,8 @@ export function sayDrift(document: Diagnosis): string {
     return 'The order of the shots is not known: a probability that drifts between shots widens the counts, and cannot be told from bunching here.';
   const ran = document.tests.filter(({ id }) => id === 'batches' || id === 'order');
   const said = ran.map(
-    (test) => `${TESTS[test.id]}: a result as extreme ${sayP(test.p, test.smallestP, test.resamples)}.`
+    (test) =>
+      `${capital(TESTS[test.id])}: a result as extreme ${sayP(test.p, test.smallestP, test.resamples)}.`
   );
   return `The order of the shots is known. ${said.length > 0 ? said.join(' ') : 'No test of it could run.'}${sayFlagged(document, 'drift')}`;
 }
@@ -27,7 +29,15 @@ export function sayWithin(drift: DriftPart | undefined): string | null {
     worst === null
       ? 'No batch has enough defects to be tested by itself.'
       : `Of the ${formatCount(tested)} batches large enough to be tested alone, batch ${formatCount(worst.batch)} is the most telling: ${formatNumber(worst.dispersion, 3)} times its ceiling, and a value as large ${sayP(worst.p!, 0, 0)}, before ${formatCount(tested)} batches are allowed for.`;
-  return `${statement} Variance above the ceiling: ${formatNumber(excess, 3)} in all, ${sayInterval(excessWithin, 3)} within batches, ${formatNumber(excessBetween, 3)} between them. The true means of the batches vary by ${sayInterval(meansVariance, 3)}. ${single} ${sayInside(split.order)}`;
+  return `${statement} Variance above the ceiling: ${formatNumber(excess, 3)} in all, ${sayInterval(excessWithin, 3)} within batches, ${formatNumber(excessBetween, 3)} between them. ${sayMeans(meansVariance)} ${single} ${sayInside(split.order)}`;
+}
+
+/** Variance of the true means of the batches; an estimate below 0 is what chance alone gives in half of all cases. */
+function sayMeans(variance: BatchSplit['meansVariance']): string {
+  const told = sayInterval(variance, 3);
+  return variance.value !== null && variance.value < 0
+    ? `The means of the batches vary no more than chance has them: their true variance, which is never below 0, comes out at ${told}.`
+    : `The true means of the batches have a variance of ${told}.`;
 }
 
 /** The smallest p that the document tells of neighbouring shots: see `withinOrder`. */

@@ -1,3 +1,4 @@
+import { capital } from '../capital';
 import { sayRate } from '$lib/stats/words/say-rate';
 import type { Diagnosis, Interval, Level } from '$lib/stats/types';
 import { formatNumber, formatPercent } from '../format-number';
@@ -96,5 +97,3 @@ export function kinkStretches(kinks: Level[]): string[] {
     return `${first === bond ? `bond ${first}` : `bonds ${first} to ${bond}`}: ${formatNumber(p)}`;
   });
 }
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -1,3 +1,4 @@
+import { capital } from '../capital';
 import { ROLE_WORDS } from './members/role-words';
 import type { Role } from './roles';
 
@@ -163,4 +164,3 @@ const NAMELESS: Record<string, string> = {
 };
 
 const nameless = (action: string) => NAMELESS[action.split('.')[0]] ?? 'something';
-const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);

@@ -1,3 +1,4 @@
+import { capital } from '../../capital';
 import { roundToDigits } from '../numbers/round-to-digits';
 import type { Quotable, QuotableTest } from '../quotable';
 import { number, words, type Words } from '../span';
@@ -53,6 +54,6 @@ function tested(test: QuotableTest, { tests }: Quotable): Words {
     ? words`; ${sayPValue(pAdjusted, atSmallest && pAdjusted < 1)} adjusted for all tests`
     : [];
   const first = many ? words`In the most extreme of the ${whole(tests.length)} tests, ` : [];
-  const words_ = many ? FINDINGS[id] : FINDINGS[id].replace(/^./, (c) => c.toUpperCase());
+  const words_ = many ? FINDINGS[id] : capital(FINDINGS[id]);
   return words`${first}${words_} ${often(p, atSmallest)} if ${if_} (${sayPValue(p, atSmallest)}${from}${adjusted}).`;
 }
