@@ -56,14 +56,27 @@ export function unroll(place: HTMLElement): () => void {
     wait();
   }
   function finish(): void {
+    parts.length = 0;
+    steps = undefined;
+    for (const rolled of place.querySelectorAll<HTMLElement>(`${PARTS}, ${PIECES}`))
+      rolled.dataset.unrolled = '';
     place.dataset.whole = '';
     unfoldNotes(place);
+  }
+  /** Who asks for one part by its address must find it where the browser went, which what is above may not move. */
+  function aim(): void {
+    const target = document.getElementById(decodeURIComponent(location.hash.slice(1)));
+    if (!target || !place.contains(target)) return;
+    finish();
+    target.scrollIntoView();
   }
   const wait = (): void =>
     void (waiting = idle ? requestIdleCallback(next) : window.setTimeout(() => next(), PAUSE));
 
   const stopping = new AbortController();
   addEventListener('beforeprint', finish, { signal: stopping.signal });
+  addEventListener('hashchange', () => parts.length > 0 && aim(), { signal: stopping.signal });
+  if (parts.length > 0) aim();
   wait();
   return () => {
     stopping.abort();

@@ -1,0 +1,7 @@
+import { haveStill } from '$lib/page/kept/stills';
+import type { PageLoad } from './$types';
+
+export const load: PageLoad = async ({ data }) => {
+  await haveStill('team');
+  return data;
+};
