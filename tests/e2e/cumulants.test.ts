@@ -53,7 +53,7 @@ describe('published cumulants', () => {
     await again.page.locator('#answer-heading').waitFor();
     expect(await again.page.locator('#answer-heading').textContent()).toBe(await heading.textContent());
     expect(await again.page.locator('#answer .verdict').textContent()).toMatch(/ruled out/i);
-    expect(await again.page.locator('#answer figure svg.drawn').count()).toBe(1);
+    await expect.poll(() => again.page.locator('#answer figure svg.drawn').count()).toBe(1);
     expect([...complaints, ...again.complaints]).toEqual([]);
     await again.page.close();
     await page.close();

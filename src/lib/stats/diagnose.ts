@@ -151,7 +151,9 @@ export async function diagnose(
   // The stories know nothing of a cut.
   if (said.verdict === 'ruled-out' && !kept) {
     await pace.step('explanations', 0.9);
-    explanations = await explainRuledOut({ counts, options, moments, tested, tests }, pace.within(0.9, 0.99));
+    const drifted = flags.some(({ id }) => id === 'drift');
+    const found = { counts, options, moments, tested, tests, drifted };
+    explanations = await explainRuledOut(found, pace.within(0.9, 0.99));
   }
   await pace.step('writing', 0.99);
   return {

@@ -1,4 +1,4 @@
-import { oddOnRing, type Evidence } from '../flags/evidence';
+import { oddOnRing, pairsOnRing, type Evidence } from '../flags/evidence';
 import type { Histogram, TestResult } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayKept } from '../words/say-kept';
@@ -34,6 +34,11 @@ export function cautions(evidence: Evidence, histogram: Histogram, tests: TestRe
   if (options.geometry !== 'sites' && !options.misread) {
     out.push(
       'Kinks are read from neighbouring sites: one misread site toggles two bonds, and independent kinks then look bunched. No misread rate was stated, and none is corrected for.'
+    );
+  }
+  if (pairsOnRing(evidence)) {
+    out.push(
+      'The ceiling is that of independent pairs. Single kinks that are independent round a ring, but for their even total, vary about half as much: between half the ceiling and the ceiling these tests do not see that such kinks bunch.'
     );
   }
   if (odd > 0) {

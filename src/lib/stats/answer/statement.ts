@@ -1,4 +1,4 @@
-import { allEven, oddOnRing, type Evidence } from '../flags/evidence';
+import { allEven, oddOnRing, pairsOnRing, type Evidence } from '../flags/evidence';
 import { sayStretches } from '../rate-interval/say-rates';
 import type { Flag, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
@@ -25,7 +25,9 @@ export function statement(
       (regular
         ? evidence.trials === null
           ? ' They vary less than rare events of this mean would: a limited number of sites gives that by itself, and repulsion between defects would too.'
-          : ' They are more regular than equal trials, which repulsion between defects would also give.'
+          : pairsOnRing(evidence)
+            ? ' They are more regular than equal pairs, as single independent kinks on a ring are, and kinks that repel each other.'
+            : ' They are more regular than equal trials, which repulsion between defects would also give.'
         : '') +
       (oddOnRing(evidence) > 0
         ? ` But no ring gives an odd count, and ${formatCount(oddOnRing(evidence))} of these are odd: they were read or written wrongly, and the answer takes them as they stand.`
@@ -66,8 +68,10 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   // Shots that lean against the one before do not drift; batches that differ do, however neighbours stand.
   if (drift && (drift.tests.includes('batches') || evidence.neighbours !== 'alternating'))
     return driftAlone(evidence);
-  if (raised('misreads')) return ' But misread sites alone could give this.';
   const { options, misread, moments } = evidence;
+  if (misread && !misread.applies && misread.largest !== undefined)
+    return ` But the misread rate that was stated cannot be right: these counts allow ${formatPercent(misread.largest, 3)} at most${raised('misreads') ? ', and misreads alone could still give this' : ''}.`;
+  if (raised('misreads')) return ' But misread sites alone could give this.';
   // A misread on sites that are counted themselves leaves the trials independent.
   if (
     options.misread &&

@@ -13,6 +13,8 @@ export interface RuledOut {
   moments: Pick<Diagnosis['moments'], 'ceiling' | 'dispersion'>;
   tested: Pick<NullLaw, 'levels' | 'logLikelihood' | 'ceiling'>;
   tests: TestResult[];
+  /** Whether the shots show that their rate changed. */
+  drifted: boolean;
 }
 
 /**
@@ -20,7 +22,7 @@ export interface RuledOut {
  * plain independent trials: then only equal trials stand beside the stories, and there is no limit for pairs.
  */
 export async function explainRuledOut(
-  { counts, options, moments, tested, tests }: RuledOut,
+  { counts, options, moments, tested, tests, drifted }: RuledOut,
   pace: Pace
 ): Promise<Explanations> {
   const { levels, logLikelihood } = tested;
@@ -31,7 +33,13 @@ export async function explainRuledOut(
   };
   const plain = tested.ceiling === null ? moments.dispersion : { value: null, low: null, high: null };
   const found = await explanationsOf(counts, options, { ...moments, dispersion: plain }, independent, pace);
-  if (!('rate' in levels)) return found;
-  const statement = `${found.statement} The stories are told of the counts as read: the misread rate that the tests allow for is in none of them.`;
-  return { ...found, statement };
+  const apart = [
+    'rate' in levels
+      ? ' The stories are told of the counts as read: the misread rate that the tests allow for is in none of them.'
+      : '',
+    drifted
+      ? ' The stories are told of all shots together, and a rate that changed meanwhile, which these shots show, is none of them: it can make any of them fit.'
+      : ''
+  ].join('');
+  return { ...found, statement: found.statement + apart };
 }

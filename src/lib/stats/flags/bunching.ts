@@ -43,7 +43,9 @@ export function bunching(evidence: Evidence): Flag | null {
       'dead shots mixed in, which lower the mean and widen the counts'
     ],
     next: [
-      'Give the shots in order, with their batches: drift would then show by itself.',
+      evidence.drift
+        ? 'Look at the parts within and between batches, and at the change of the mean: the order of the shots is known.'
+        : 'Give the shots in order, with their batches: drift would then show by itself.',
       misread?.applies
         ? 'Measure the misread rate of single sites again, with its error.'
         : 'Measure the misread rate of one site, and repeat the check with bonds as geometry.',

@@ -54,6 +54,10 @@ export function stronger(a: Grade, b: Grade): Grade {
 export const oddOnRing = ({ options, even, shots }: Pick<Evidence, 'options' | 'even' | 'shots'>): number =>
   options.geometry === 'ring-bonds' && options.unit === 'defect' && even ? shots - even.seen : 0;
 
+/** Whether kinks on a ring are tested as pairs: single ones that are independent keep to about half that ceiling. */
+export const pairsOnRing = ({ options }: Pick<Evidence, 'options'>): boolean =>
+  options.geometry === 'ring-bonds' && options.unit === 'pair';
+
 /** True when every shot had an even count, as kinks on a ring do by construction. */
 export function allEven(evidence: Evidence): boolean {
   return (

@@ -19,6 +19,9 @@ export function pairing(evidence: Evidence): Flag | null {
     otherCauses: [
       'ring geometry, where kinks are even by construction: count pairs instead',
       'boundary sites that favour one phase',
+      ...(gradeOf(evidence, 'empty-shots') && share > evidence.even.expected
+        ? ['dead shots: each of them counts as even']
+        : []),
       ...(every
         ? ['the same counts entered doubled']
         : ['misread sites on a ring, when most counts are even and a few odd'])

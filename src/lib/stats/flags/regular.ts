@@ -1,6 +1,6 @@
 import type { Flag } from '../types';
 import { sayInterval } from '../words/say-interval';
-import { allEven, type Evidence } from './evidence';
+import { allEven, pairsOnRing, type Evidence } from './evidence';
 
 /** Where N is unknown the ceiling is that of rare events, which any number of trials stays under. */
 const ofUnknown =
@@ -25,6 +25,11 @@ export function regular(evidence: Evidence): Flag | null {
         : 'A remark, not a violation: counts are more regular than equal independent trials would make them. Uneven probabilities give that, and so does repulsion between defects; the counts alone cannot tell which.',
     size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials${evidence.misread?.applies ? ' as they are read' : ''}${evidence.options.kept ? ', cut as stated' : ''}.`,
     otherCauses: [
+      ...(pairsOnRing(evidence)
+        ? [
+            'the ring itself: single kinks that are independent, but for their even total, vary about half as much'
+          ]
+        : []),
       ...(evidence.trials === null ? ['a number of trials not far above the counts: give it'] : []),
       'probabilities that differ between trials, such as modes of different momentum',
       'repulsion or exclusion between neighbouring defects',

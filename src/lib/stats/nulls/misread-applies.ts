@@ -13,7 +13,9 @@ export const mostBonds = 1000;
 
 /** The rate allowed for, its limits where it has an uncertainty, or why none is allowed for. */
 export type MisreadUse =
-  { applies: true; rate: number; limits?: RateLimits } | { applies: false; reason: string | null };
+  | { applies: true; rate: number; limits?: RateLimits }
+  /** `largest`: the rate that the counts allow at most, where the stated one is over it. */
+  | { applies: false; reason: string | null; largest?: number };
 
 /**
  * Whether a stated misread rate can be allowed for in every test: kinks on the bonds of an open chain of known length,
@@ -40,7 +42,7 @@ export function misreadApplies(options: DiagnoseOptions, counts: FitData): Misre
         ? `misreads would hide ${formatNumber(alone, 3)} of ${formatCount(trials)} ${things} a shot at the least, and ${formatNumber(trials! - mean, 3)} are missing`
         : `misreads alone would show ${formatNumber(alone, 3)} ${things} a shot, and ${formatNumber(mean, 3)} were read`;
     const why = `It cannot be right: ${seen}. These counts allow ${formatPercent(largest, 3)} at most.`;
-    return no(geometry === 'sites' ? why : `${why} It is not allowed for, ${without}`);
+    return { ...no(geometry === 'sites' ? why : `${why} It is not allowed for, ${without}`), largest };
   }
   if (geometry === 'sites') {
     return no(
