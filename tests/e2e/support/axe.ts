@@ -1,5 +1,6 @@
 import axe, { type AxeResults } from 'axe-core';
 import type { Browser, Page } from 'playwright-core';
+import { unrolled } from './unrolled';
 
 /**
  * A page that axe can be injected into: the content security policy would refuse a foreign script, so it is
@@ -13,8 +14,9 @@ export async function openAuditPage(
   return context.newPage();
 }
 
-/** What breaks WCAG 2.2 A and AA on the page as it stands, one line each; empty when nothing does. */
+/** What breaks WCAG 2.2 A and AA on the page as it stands once it is laid out, one line each; empty when nothing does. */
 export async function audit(page: Page): Promise<string[]> {
+  await unrolled(page);
   await page.evaluate(axe.source);
   const results = await page.evaluate(async () => {
     const run = (window as unknown as { axe: typeof axe }).axe.run;
