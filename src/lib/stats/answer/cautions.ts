@@ -38,7 +38,7 @@ export function cautions(evidence: Evidence, histogram: Histogram, tests: TestRe
   }
   if (pairsOnRing(evidence)) {
     out.push(
-      'The ceiling is that of independent pairs. Single kinks that are independent round a ring, but for their even total, vary about half as much: between half the ceiling and the ceiling these tests do not see that such kinks bunch.'
+      'The ceiling is that of independent pairs. Single kinks that form independently round a ring, but for their even total, vary about half as much: between half the ceiling and the ceiling these tests do not see that such kinks bunch.'
     );
   }
   if (odd > 0) {

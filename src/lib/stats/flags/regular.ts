@@ -27,7 +27,7 @@ export function regular(evidence: Evidence): Flag | null {
     otherCauses: [
       ...(pairsOnRing(evidence)
         ? [
-            'the ring itself: single kinks that are independent, but for their even total, vary about half as much'
+            'the ring itself: single kinks that form independently, but for their even total, vary about half as much'
           ]
         : []),
       ...(evidence.trials === null ? ['a number of trials not far above the counts: give it'] : []),
