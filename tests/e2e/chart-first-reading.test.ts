@@ -1,31 +1,23 @@
-import type { Browser, Locator } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { Locator } from 'playwright-core';
+import { beforeAll, describe, expect, it } from 'vitest';
+import { inBrowser } from './support/in-browser';
 import { complaintsOf } from './support/complaints';
-import { openBrowser } from './support/open-browser';
 import { seedLink, seedSharedReport } from './support/shared-report';
-import { startServer, type RunningServer } from './support/start-server';
 
 // Charts are read out from their markup before the application's scripts run, and by those from then on.
 const PATIENT = { timeout: 20_000 };
 const SCRIPTS = '**/_app/immutable/**/*.js';
 
-let server: RunningServer;
-let browser: Browser;
+const there = inBrowser();
 let address: string;
 
 beforeAll(async () => {
-  [server, browser] = await Promise.all([startServer(), openBrowser()]);
-  address = server.address + (await seedLink(server, await seedSharedReport(server))).path;
-});
-
-afterAll(async () => {
-  await browser?.close();
-  await server?.stop();
+  address = there.server.address + (await seedLink(there.server, await seedSharedReport(there.server))).path;
 });
 
 /** The chart of counts on a page whose scripts come when `release` is called. */
 async function openHeld(width: number) {
-  const page = await browser.newPage({ viewport: { width, height: 900 }, reducedMotion: 'reduce' });
+  const page = await there.browser.newPage({ viewport: { width, height: 900 }, reducedMotion: 'reduce' });
   const complaints = complaintsOf(page);
   let release = (): void => undefined;
   const released = new Promise<void>((resolve) => (release = resolve));

@@ -1,22 +1,10 @@
 import { readCounts } from '$lib/formats/read-counts';
-import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { describe, expect, it } from 'vitest';
+import { inBrowser } from './support/in-browser';
 import { answerOf, check, fill, openCheck, saved, savedDocument } from './support/check-page';
-import { openBrowser } from './support/open-browser';
 import { screenshots } from './support/screenshots';
-import { startServer, type RunningServer } from './support/start-server';
 
-let server: RunningServer;
-let browser: Browser;
-
-beforeAll(async () => {
-  [server, browser] = await Promise.all([startServer(), openBrowser()]);
-});
-
-afterAll(async () => {
-  await browser?.close();
-  await server?.stop();
-});
+const there = inBrowser();
 
 /** Weldon's dice, Pearson 1900: 185 + 1149 + 3265 throws of two or fewer, 403 + 105 + 14 + 4 of eight or more. */
 const LOW = '0-2,4599\n3,5475\n4,6114\n5,5194\n6,3067\n7,1331\n8,403\n9,105\n10,14\n11,4';
@@ -24,7 +12,7 @@ const BOTH = '≤2,4599\n3,5475\n4,6114\n5,5194\n6,3067\n7,1331\n8+,526';
 
 describe('counts typed with lumps', () => {
   it('at the low end are answered, said in the notes, and drawn as one row', async () => {
-    const { page, complaints } = await openCheck(browser, server.address);
+    const { page, complaints } = await openCheck(there.browser, there.server.address);
     await fill(page, LOW, '12');
     await page.getByText('counts from 2 or fewer to 11').waitFor();
     await check(page);
@@ -60,7 +48,7 @@ describe('counts typed with lumps', () => {
   });
 
   it('at both ends are answered too', async () => {
-    const { page, complaints } = await openCheck(browser, server.address);
+    const { page, complaints } = await openCheck(there.browser, there.server.address);
     await fill(page, BOTH, '12');
     await page.getByText('counts from 2 or fewer to 8 or more').waitFor();
     await check(page);
@@ -73,7 +61,7 @@ describe('counts typed with lumps', () => {
       .toMatch(/^Count 8 or more: seen in 526 of 26\u202f306 shots/);
     expect(complaints).toEqual([]);
     await page.close();
-    await screenshots(browser, server.address, 'lumps-at-both-ends', async (one) => {
+    await screenshots(there.browser, there.server.address, 'lumps-at-both-ends', async (one) => {
       await fill(one, BOTH, '12');
       await check(one);
       await answerOf(one);
@@ -81,7 +69,7 @@ describe('counts typed with lumps', () => {
   });
 
   it('that overlap are refused in words, and nothing typed is lost', async () => {
-    const { page } = await openCheck(browser, server.address);
+    const { page } = await openCheck(there.browser, there.server.address);
     const wrong = '0-4,10\n3,5\n6,2';
     await fill(page, wrong, '12');
     await page

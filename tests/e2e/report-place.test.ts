@@ -1,25 +1,17 @@
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { openBrowser } from './support/open-browser';
+import type { Page } from 'playwright-core';
+import { beforeAll, describe, expect, it } from 'vitest';
+import { inBrowser } from './support/in-browser';
 import { seedLink, seedSharedReport } from './support/shared-report';
-import { startServer, type RunningServer } from './support/start-server';
 import { unrolled } from './support/unrolled';
 
 // A report is laid out piece by piece: whoever asks for a place in it, or comes back to one, must find it there.
 const PATIENT = { timeout: 20_000 };
 
-let server: RunningServer;
-let browser: Browser;
+const there = inBrowser();
 let address: string;
 
 beforeAll(async () => {
-  [server, browser] = await Promise.all([startServer(), openBrowser()]);
-  address = server.address + (await seedLink(server, await seedSharedReport(server))).path;
-});
-
-afterAll(async () => {
-  await browser?.close();
-  await server?.stop();
+  address = there.server.address + (await seedLink(there.server, await seedSharedReport(there.server))).path;
 });
 
 const topOf = (page: Page, id: string): Promise<number> =>
@@ -27,7 +19,10 @@ const topOf = (page: Page, id: string): Promise<number> =>
 
 describe('a place in a report', () => {
   it.each(['#tails', '#nuisances', '#quote'])('is where its address leads: %s', async (hash) => {
-    const page = await browser.newPage({ viewport: { width: 1280, height: 900 }, reducedMotion: 'reduce' });
+    const page = await there.browser.newPage({
+      viewport: { width: 1280, height: 900 },
+      reducedMotion: 'reduce'
+    });
     await page.goto(address + hash);
     await unrolled(page);
     await expect.poll(async () => Math.abs(await topOf(page, hash)), PATIENT).toBeLessThan(60);
@@ -35,7 +30,10 @@ describe('a place in a report', () => {
   });
 
   it('is where a link of the page leads, before all is laid out', async () => {
-    const page = await browser.newPage({ viewport: { width: 1280, height: 900 }, reducedMotion: 'reduce' });
+    const page = await there.browser.newPage({
+      viewport: { width: 1280, height: 900 },
+      reducedMotion: 'reduce'
+    });
     await page.goto(address);
     await page.locator('a[href="#method"]').first().click();
     await unrolled(page);
@@ -44,7 +42,10 @@ describe('a place in a report', () => {
   });
 
   it('is found again by the way back', async () => {
-    const page = await browser.newPage({ viewport: { width: 1280, height: 900 }, reducedMotion: 'reduce' });
+    const page = await there.browser.newPage({
+      viewport: { width: 1280, height: 900 },
+      reducedMotion: 'reduce'
+    });
     await page.goto(address, { waitUntil: 'networkidle' });
     await unrolled(page);
     await page.evaluate(() => document.querySelector('#cumulants')!.scrollIntoView());
@@ -69,7 +70,10 @@ describe('a place in a report', () => {
 
 describe('a chart of a report', () => {
   it.each([390, 1920])('is drawn anew when the window becomes %i wide', async (width) => {
-    const page = await browser.newPage({ viewport: { width: 1280, height: 900 }, reducedMotion: 'reduce' });
+    const page = await there.browser.newPage({
+      viewport: { width: 1280, height: 900 },
+      reducedMotion: 'reduce'
+    });
     await page.goto(address, { waitUntil: 'networkidle' });
     await unrolled(page);
     const chart = page.locator('#tails figure svg[role="application"]');

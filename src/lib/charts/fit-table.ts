@@ -1,24 +1,13 @@
 import type { Diagnosis } from '$lib/stats/types';
+import { intervalsTable } from './intervals-table';
 import type { Table } from './table';
 
 /** How far the best law lies from the counts, by every measure of the document; nats are a shot's. */
-export const fitTable = ({ fit }: Diagnosis): Table => ({
-  columns: [
-    { title: 'quantity', kind: 'text' },
-    { title: 'value', kind: 'number' },
-    { title: 'low', kind: 'number' },
-    { title: 'high', kind: 'number' }
-  ],
-  rows: [
-    ['divergence, nats', fit.divergence, null, null],
-    ['floor, nats', fit.floor, null, null],
-    [
-      'divergence, chance taken off, nats',
-      fit.divergenceInterval.value,
-      fit.divergenceInterval.low,
-      fit.divergenceInterval.high
-    ],
-    ['G²', fit.gSquared, null, null],
-    ['shots that make it noticeable', fit.shotsToNotice, null, null]
-  ]
-});
+export const fitTable = ({ fit }: Diagnosis): Table =>
+  intervalsTable('quantity', [
+    ['divergence, nats', fit.divergence],
+    ['floor, nats', fit.floor],
+    ['divergence, chance taken off, nats', fit.divergenceInterval],
+    ['G²', fit.gSquared],
+    ['shots that make it noticeable', fit.shotsToNotice]
+  ]);

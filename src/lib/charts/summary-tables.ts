@@ -1,27 +1,19 @@
 import { SOURCES, TESTS } from '$lib/model/labels';
 import type { Summary } from '$lib/model/link/summary';
 import type { Interval } from '$lib/stats/types';
+import { intervalsTable } from './intervals-table';
 import type { Table } from './table';
 
-const row = (name: string, { value, low, high }: Interval) => [name, value, low, high];
-
 /** Cumulants with their intervals, where the counts are kept back. */
-export const summaryCumulantsTable = ({ moments }: Summary): Table => ({
-  columns: [
-    { title: 'quantity', kind: 'text' },
-    { title: 'value', kind: 'number' },
-    { title: 'low', kind: 'number' },
-    { title: 'high', kind: 'number' }
-  ],
-  rows: [
-    row('κ₁, mean', moments.mean),
-    row('κ₂, variance', moments.variance),
-    ...(moments.third ? [row('κ₃', moments.third)] : []),
-    ...(moments.fourth ? [row('κ₄', moments.fourth)] : []),
-    row('κ₂/κ₁, Fano factor', moments.fano),
-    row('variance over ceiling', moments.dispersion)
-  ]
-});
+export const summaryCumulantsTable = ({ moments }: Summary): Table =>
+  intervalsTable('quantity', [
+    ['κ₁, mean', moments.mean],
+    ['κ₂, variance', moments.variance],
+    ...(moments.third ? [['κ₃', moments.third] as [string, Interval]] : []),
+    ...(moments.fourth ? [['κ₄', moments.fourth] as [string, Interval]] : []),
+    ['κ₂/κ₁, Fano factor', moments.fano],
+    ['variance over ceiling', moments.dispersion]
+  ]);
 
 /** The tests, where the counts are kept back. */
 export const summaryTestsTable = ({ tests }: Summary): Table => ({

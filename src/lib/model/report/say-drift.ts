@@ -1,3 +1,4 @@
+import { surest } from '$lib/stats/drift/surest';
 import type { BatchSplit, DriftPart } from '$lib/stats/drift/types';
 import type { Diagnosis } from '$lib/stats/types';
 import { capital } from '../capital';
@@ -40,13 +41,10 @@ function sayMeans(variance: BatchSplit['meansVariance']): string {
     : `The true means of the batches have a variance of ${told}.`;
 }
 
-/** The smallest p that the document tells of neighbouring shots: see `withinOrder`. */
-const SUREST = 1e-9;
-
 /** Neighbouring shots of a batch: whether the rate moved inside batches. */
 function sayInside(order: BatchSplit['order']): string {
   if (!order) return 'Drift inside a batch is not taken out.';
-  return `Neighbouring shots of a batch are correlated by ${formatNumber(order.correlation, 2)}: one as large ${sayP(order.p, SUREST, 0)} if their order meant nothing, ${order.moved ? 'so the rate changed inside batches too' : 'so no drift inside batches is seen'}. From one shot to the next the variance is ${sayInterval(order.dispersion, 3)} times the ceiling.`;
+  return `Neighbouring shots of a batch are correlated by ${formatNumber(order.correlation, 2)}: one as large ${sayP(order.p, surest, 0)} if their order meant nothing, ${order.moved ? 'so the rate changed inside batches too' : 'so no drift inside batches is seen'}. From one shot to the next the variance is ${sayInterval(order.dispersion, 3)} times the ceiling.`;
 }
 
 /** The change of the mean that the shots support most; null where none was sought. */

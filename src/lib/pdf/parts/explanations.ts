@@ -1,3 +1,4 @@
+import { capital } from '$lib/model/capital';
 import { columnsOf } from '$lib/charts/columns-of';
 import { explanationsPicture } from '$lib/charts/explanations-picture';
 import { explanationsTable } from '$lib/charts/explanations-table';
@@ -102,7 +103,7 @@ const listed = (title: string, items: string[]): Block[] =>
         { kind: 'list', items }
       ];
 
-const named = (id: ExplanationId): string => EXPLANATIONS[id].replace(/^./, (letter) => letter.toUpperCase());
+const named = (id: ExplanationId): string => capital(EXPLANATIONS[id]);
 
 const meaningOf = ({ id, meaning }: Explanation): string => `${named(id)}: ${meaning}`;
 

@@ -3,7 +3,7 @@ import { formatNumber } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
 import { insideBatches } from './split-excess';
 import type { BatchSplit } from './types';
-import { surest } from './within-order';
+import { surest } from './surest';
 
 /**
  * What is left of an excess when batches are tested one by one and pooled, in a sentence.

@@ -1,6 +1,7 @@
 import { evenDispersionFactors } from '../moments/even-dispersion-factors';
 import { normalCdf } from '../numerics/normal-cdf';
 import { neighbourSums } from './neighbour-sums';
+import { surest } from './surest';
 import type { BatchOrder } from './types';
 import type { WithinBatches } from './within-batches';
 
@@ -9,9 +10,6 @@ const fewest = 50;
 
 /** Level at which neighbours resemble each other. Not the α of the answer: a drift missed would be told as interaction. */
 const level = 0.05;
-
-/** The sum is not normal so far out that a smaller p could be told. */
-export const surest = 1e-9;
 
 /**
  * Whether the rate moved inside batches too: neighbouring shots of a batch then resemble each other, and between them

@@ -1,3 +1,4 @@
+import { capital } from '../words/capital';
 import { formatPercent } from '../words/format-number';
 import { sayP } from '../words/say-p';
 import { explanationNames } from './explanation-names';
@@ -7,8 +8,6 @@ const joined = (ids: ExplanationId[]): string => {
   const names = ids.map((id) => explanationNames[id]);
   return names.length < 2 ? names.join('') : `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`;
 };
-
-const capital = (words: string): string => `${words[0].toUpperCase()}${words.slice(1)}`;
 
 /**
  * The finding in a sentence or three: which explanation leads, which cannot be told from it, and whether it fits at all.

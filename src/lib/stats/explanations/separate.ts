@@ -1,3 +1,4 @@
+import { capital } from '../words/capital';
 import { explanationNames } from './explanation-names';
 import type { ExplanationId } from './types';
 
@@ -54,4 +55,4 @@ export function separate(a: ExplanationId, b: ExplanationId): string {
   return `For ${explanationNames[a]}: ${signs[a]}. For ${explanationNames[b]}: ${signs[b]}.`;
 }
 
-const sentence = (words: string): string => `${words[0].toUpperCase()}${words.slice(1)}.`;
+const sentence = (words: string): string => `${capital(words)}.`;

@@ -1,3 +1,4 @@
+import { capital } from '../words/capital';
 import type { Verdict } from '../types';
 import { formatNumber, formatPercent } from '../words/format-number';
 import type { RateSpread, RateVerdict } from './types';
@@ -31,7 +32,7 @@ export function sayStretches({ rates, changes }: Pick<Found, 'rates' | 'changes'
     return `${where} ${says[verdict]}`;
   });
   const text = parts.join('; ');
-  return `${text.charAt(0).toUpperCase()}${text.slice(1)}.`;
+  return `${capital(text)}.`;
 }
 
 const says: Record<Verdict, string> = {
