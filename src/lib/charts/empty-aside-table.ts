@@ -1,5 +1,8 @@
 import type { EmptyAside } from '$lib/stats/truncation/empty-aside';
+import { TESTS } from '$lib/model/labels';
+import { columnsOf } from './columns-of';
 import type { Table } from './table';
+import { testsTable } from './tests-table';
 
 /** The shots with at least one defect, tested by themselves. */
 export const emptyAsideTable = (aside: EmptyAside): Table => ({
@@ -26,3 +29,17 @@ export const emptyAsideTable = (aside: EmptyAside): Table => ({
     ]
   ]
 });
+
+/** Each test of these shots; no rows in a document that knew their variance alone. */
+export const emptyAsideTests = ({ tests }: EmptyAside): Table =>
+  columnsOf(testsTable({ tests, tails: { certificate: null }, flags: [] }, TESTS), [
+    'test',
+    'statistic',
+    'p',
+    'p, all tests',
+    'smallest p',
+    'resamples'
+  ]);
+
+/** What stands over it. */
+export const REST_CAPTION = 'Tests of the shots with at least one defect, against independent trials so cut';

@@ -3,7 +3,14 @@ import type { Diagnosis, TestId } from '$lib/stats/types';
 import type { Table } from './table';
 
 /** Every test of the document, the certificate, and the flags that they raise. */
-export const testsTable = ({ tests, tails, flags }: Diagnosis, names: Record<TestId, string>): Table => ({
+export const testsTable = (
+  {
+    tests,
+    tails,
+    flags
+  }: Pick<Diagnosis, 'tests' | 'flags'> & { tails: Pick<Diagnosis['tails'], 'certificate'> },
+  names: Record<TestId, string>
+): Table => ({
   columns: [
     { title: 'test', kind: 'text' },
     { title: 'statistic', kind: 'number' },

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import type { Diagnosis } from '$lib/stats/types';
 import { explanationsSchema } from './explanations-schema';
 import { nuisancesSchema } from './nuisances-schema';
+import { testIdSchema, testSchema } from './test-schema';
 
 /*
  * The diagnosis document as a schema, for documents that come from outside: a stored file, an
@@ -16,16 +17,6 @@ const interval = z.strictObject({ value: orNull, low: orNull, high: orNull });
 const level = z.strictObject({ p: share, trials: whole });
 const lump = z.strictObject({ from: whole, shots: whole });
 const side = z.enum(['high', 'low']);
-const testId = z.enum([
-  'ceiling',
-  'fit',
-  'high-tail',
-  'low-tail',
-  'parity',
-  'empty-shots',
-  'batches',
-  'order'
-]);
 const flagId = z.enum([
   'bunching',
   'bursts',
@@ -136,21 +127,10 @@ const certificate = z.strictObject({
   mean: number
 });
 
-const test = z.strictObject({
-  id: testId,
-  statistic: number,
-  p: share,
-  pAdjusted: share,
-  smallestP: share,
-  source: z.enum(['exact', 'resampled', 'permuted', 'limit']),
-  resamples: whole,
-  stoppedEarly: z.boolean()
-});
-
 const flag = z.strictObject({
   id: flagId,
   grade: z.enum(['shown', 'hinted']),
-  tests: z.array(testId),
+  tests: z.array(testIdSchema),
   statement: z.string(),
   size: z.string(),
   otherCauses: z.array(z.string()),
@@ -174,8 +154,8 @@ export const diagnosisSchema = z.strictObject({
   distribution: z.array(distributionPoint),
   rate: z.strictObject({ horizon: number, silence: number, scale: number, points: z.array(ratePoint) }),
   tails: z.strictObject({ points: z.array(tailPoint), certificate: certificate.nullable() }),
-  tests: z.array(test),
-  notRun: z.array(z.strictObject({ id: testId, reason: z.string() })),
+  tests: z.array(testSchema),
+  notRun: z.array(z.strictObject({ id: testIdSchema, reason: z.string() })),
   flags: z.array(flag),
   answer: z.strictObject({
     verdict: z.enum(['compatible', 'ruled-out', 'undecided']),

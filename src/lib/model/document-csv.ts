@@ -1,4 +1,4 @@
-import type { Diagnosis, Interval } from '$lib/stats/types';
+import type { Diagnosis, Interval, TestResult } from '$lib/stats/types';
 import { explanationLines } from './exports/explanation-lines';
 import type { DriftPart } from '$lib/stats/drift/types';
 import { csvTable, type CsvValue } from './exports/csv-table';
@@ -51,6 +51,7 @@ export function documentCsv(document: Diagnosis): string {
     ranged('without empty shots', 'dispersion', emptyAside.dispersion);
     for (const key of ['shots', 'mean', 'ceiling', 'p', 'smallestP', 'verdict'] as const)
       one('without empty shots', key, emptyAside[key]);
+    for (const test of emptyAside.tests) testLines(`without empty shots, test ${test.id}`, test, one);
   }
   if (pairs) {
     one('pairs', 'proposed', pairs.proposed ? 'yes' : 'no');
@@ -75,9 +76,7 @@ export function documentCsv(document: Diagnosis): string {
     one(`law ${id}`, 'divergence', divergence);
     one(`law ${id}`, 'aic', aic);
   }
-  for (const test of tests)
-    for (const key of ['statistic', 'p', 'pAdjusted', 'smallestP', 'resamples'] as const)
-      one(`test ${test.id}`, key, test[key]);
+  for (const test of tests) testLines(`test ${test.id}`, test, one);
   for (const flag of flags) one('flag', flag.id, flag.grade);
   lines.push(...explanationLines(document.explanations));
   for (const point of document.distribution) {
@@ -104,6 +103,11 @@ export function documentCsv(document: Diagnosis): string {
 
 type One = (part: string, item: string, value: CsvValue, count?: number | null) => void;
 type Ranged = (part: string, item: string, interval: Interval, count?: number | null) => void;
+
+function testLines(part: string, test: TestResult, one: One): void {
+  for (const key of ['statistic', 'p', 'pAdjusted', 'smallestP', 'resamples'] as const)
+    one(part, key, test[key]);
+}
 
 /** Shots and batches are told in `item`: `count` is for counts of defects. */
 function driftLines({ means, change, split }: DriftPart, one: One, ranged: Ranged): void {

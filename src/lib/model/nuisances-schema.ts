@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { testSchema } from './test-schema';
 
 /* What can look like interaction, in a diagnosis document; diagnosis-schema.ts holds it to the type. */
 const number = z.number();
@@ -99,7 +100,8 @@ const emptyAside = z.strictObject({
   p: share,
   smallestP: share,
   resamples: whole,
-  verdict: z.enum(['compatible', 'excess', 'undecided']),
+  tests: z.array(testSchema),
+  verdict: z.enum(['compatible', 'excess', 'misfit', 'undecided']),
   statement: z.string()
 });
 

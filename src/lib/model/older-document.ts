@@ -14,7 +14,7 @@ const lacking = (value: unknown, absent: Loose): unknown =>
  */
 export function olderDocument(value: unknown): unknown {
   if (!isLoose(value)) return value;
-  const { data, fit, distribution } = value;
+  const { data, fit, distribution, nuisances } = value;
   const corrected = isLoose(fit) ? (fit.divergenceCorrected ?? null) : null;
   return {
     notRun: [],
@@ -26,6 +26,13 @@ export function olderDocument(value: unknown): unknown {
       omitted: [],
       shotsToNotice: null,
       divergenceInterval: { value: corrected, low: null, high: null }
+    }),
+    ...(isLoose(nuisances) && {
+      nuisances: {
+        ...nuisances,
+        // The shots with a defect were tested by their variance alone.
+        ...('emptyAside' in nuisances && { emptyAside: lacking(nuisances.emptyAside, { tests: [] }) })
+      }
     }),
     distribution: Array.isArray(distribution)
       ? distribution.map((point) => lacking(point, { lump: false }))

@@ -131,7 +131,7 @@ export async function diagnose(
   const flags = raiseFlags(evidence);
   const aside =
     !kept && !misread.applies && flags.some(({ id }) => id === 'dead-shots')
-      ? await emptyAside(counts, options, pace.within(0.9, 0.9))
+      ? await emptyAside(counts, options, pace.within(0.9, 0.9), helper)
       : null;
   // A lump hides the variance; other nulls have ceilings of their own.
   const run =

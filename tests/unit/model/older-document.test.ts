@@ -37,6 +37,26 @@ describe('a document of an older engine', () => {
     ({ document } = await diagnoseInvented());
   });
 
+  it('knew the shots without empty ones by their variance alone, and is not given tests of them', () => {
+    const { tests, ...variance } = {
+      shots: 2600,
+      mean: 3.1,
+      ceiling: 2.4,
+      dispersion: { value: 1.01, low: 0.95, high: 1.06 },
+      p: 0.4,
+      smallestP: 0.001,
+      resamples: 248,
+      tests: [],
+      verdict: 'compatible',
+      statement: 'The rest keeps it.'
+    };
+    const older = { ...document, nuisances: { ...document.nuisances, emptyAside: variance } };
+    expect(readDocument(JSON.stringify(older))).toMatchObject({
+      ok: true,
+      diagnosis: { nuisances: { emptyAside: { ...variance, tests } } }
+    });
+  });
+
   it('is read, with what it does not say left unsaid', () => {
     const read = readDocument(aged(document, LATER));
     if (!read.ok) throw new Error(read.problem);

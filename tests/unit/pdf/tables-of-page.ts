@@ -1,7 +1,7 @@
 import { alignedColumn } from '$lib/charts/aligned-column';
 import { cumulantsTable } from '$lib/charts/cumulants-table';
 import { batchesTable } from '$lib/charts/drift-table';
-import { emptyAsideTable } from '$lib/charts/empty-aside-table';
+import { emptyAsideTable, emptyAsideTests } from '$lib/charts/empty-aside-table';
 import { fitTable } from '$lib/charts/fit-table';
 import { levelsTable } from '$lib/charts/levels-table';
 import { rateSpreadTable } from '$lib/charts/rate-spread-table';
@@ -35,7 +35,12 @@ export function tablesOfPage(document: Diagnosis): [name: string, table: Table][
     ['cumulants', cumulantsTable(document)],
     ...(drift ? [['batches', batchesTable(drift)] as [string, Table]] : []),
     ['fit', fitTable(document)],
-    ...(emptyAside ? [['empty shots aside', emptyAsideTable(emptyAside)] as [string, Table]] : []),
+    ...(emptyAside
+      ? ([
+          ['empty shots aside', emptyAsideTable(emptyAside)],
+          ['tests of the rest', emptyAsideTests(emptyAside)]
+        ] as [string, Table][])
+      : []),
     ...(misread?.spread ? [['misread rates', rateSpreadTable(misread.spread)] as [string, Table]] : [])
   ];
 }

@@ -1,7 +1,7 @@
 import { batchesTable, driftTable } from '$lib/charts/drift-table';
 import { driftPicture } from '$lib/charts/drift-picture';
 import { driftTitle } from '$lib/charts/drift-title';
-import { emptyAsideTable } from '$lib/charts/empty-aside-table';
+import { emptyAsideTable, emptyAsideTests, REST_CAPTION } from '$lib/charts/empty-aside-table';
 import { rateSpreadTable } from '$lib/charts/rate-spread-table';
 import { trialsPicture } from '$lib/charts/trials-picture';
 import { trialsTable } from '$lib/charts/trials-table';
@@ -10,6 +10,7 @@ import { formatNumber } from '$lib/model/format-number';
 import { kinkStretches, MOST_STRETCHES } from '$lib/model/report/say-misreads';
 import type { DriftPart } from '$lib/stats/drift/types';
 import type { TrialsPart } from '$lib/stats/sensitivity/types';
+import type { EmptyAside } from '$lib/stats/truncation/empty-aside';
 import type { Diagnosis, MisreadPart } from '$lib/stats/types';
 import type { Block } from '../blocks/blocks';
 import { noteBlock } from './note-block';
@@ -18,18 +19,25 @@ import { thinTable } from './thin-table';
 /** The charts of what can look like interaction, each with its numbers, and the tables that have no chart. */
 export const nuisanceBlocks = (nuisances: Diagnosis['nuisances'] = {}): Block[] => [
   ...misreadBlocks(nuisances.misread),
-  ...(nuisances.emptyAside
-    ? [
-        {
-          kind: 'table' as const,
-          caption: 'Without empty shots, with the 95\u202f% interval of variance over ceiling',
-          table: emptyAsideTable(nuisances.emptyAside)
-        }
-      ]
-    : []),
+  ...asideBlocks(nuisances.emptyAside),
   ...driftBlocks(nuisances.drift),
   ...trialsBlocks(nuisances.trials)
 ];
+
+/** The shots with a defect by themselves: their spread, and each test of them. */
+const asideBlocks = (aside: EmptyAside | undefined): Block[] =>
+  aside
+    ? [
+        {
+          kind: 'table',
+          caption: 'Without empty shots, with the 95\u202f% interval of variance over ceiling',
+          table: emptyAsideTable(aside)
+        },
+        ...(aside.tests.length > 0
+          ? [{ kind: 'table' as const, caption: REST_CAPTION, table: emptyAsideTests(aside) }]
+          : [])
+      ]
+    : [];
 
 /** Every rate tried, and every stretch of bonds where the words tell the first alone. */
 function misreadBlocks(misread: MisreadPart | undefined): Block[] {

@@ -1,7 +1,8 @@
 import type { Cumulants } from '../laws/law-moments';
 import type { Diagnosis, Interval, TestId, Verdict } from '../types';
 
-/** Tests, the certificate, and what stands beside them: shots within their batches, and shots that are not empty. */
+/** Tests, the certificate, and what stands beside them: shots within their batches, and shots that are not empty, their
+ * tests allowed for. */
 export type PName = TestId | 'certificate' | 'within-batches' | 'empty-aside';
 export const COVERED = ['mean', 'variance', 'third', 'fourth', 'dispersion'] as const;
 
@@ -26,7 +27,8 @@ export function outcomeOf(diagnosis: Diagnosis, cumulants: Cumulants | null): Ou
   if (tails.certificate) p.certificate = tails.certificate.p;
   const within = nuisances?.drift?.split?.pTogether ?? null;
   if (within !== null) p['within-batches'] = within;
-  if (nuisances?.emptyAside) p['empty-aside'] = nuisances.emptyAside.p;
+  if (nuisances?.emptyAside)
+    p['empty-aside'] = Math.min(...nuisances.emptyAside.tests.map((test) => test.pAdjusted));
   const adjusted = tests.map((test) => test.pAdjusted);
   return {
     p,
