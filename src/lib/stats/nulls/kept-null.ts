@@ -15,10 +15,16 @@ import type { NullLaw } from './null-law';
  * Independent trials of which only the counts kept are left: the best such law found (see truncatedFit), the variance of
  * equal trials so cut as the ceiling (see keptEqual), and the bounds that their convex order gives. No certificate: with
  * shots dropped nothing bounds the mean before the cut.
+ *
+ * Resamples are drawn from equal trials so cut unless the counts tell the best law from them by ½ ln S, as for kinks on
+ * an open chain (see misreadNull): the best law follows its own counts, and what is drawn from it varies less.
+ * Forty trials, empty shots dropped, 300 shots, alarms at 5 % in 900 repeats: low tail 6.6 % from the best law and 5.8 %
+ * so, parity 6.6 and 5.7 %, fit 5.3 and 4.4 %; twice the smallest excess was seen as often.
  */
 export function keptNull(counts: FitData, kept: KeptCounts, options: DiagnoseOptions): NullLaw {
   const trials = counts.trials!;
-  const { chain, value } = chainFit(counts, 0, kept);
+  const { chain, value, even } = chainFit(counts, 0, kept);
+  const near = value - even.value <= Math.log(counts.total) / 2;
   const levels: ReadChain = { ...chain, rate: 0, kept };
   const window = keptEqual(trials, kept, sampleMoments(counts).mean);
   const widest = keptEqual(trials, kept, readMoments(levels).mean);
@@ -27,6 +33,7 @@ export function keptNull(counts: FitData, kept: KeptCounts, options: DiagnoseOpt
     levels,
     law: levels,
     logLikelihood: value,
+    ...(near && { drawnFrom: { ...even.chain, rate: 0, kept } }),
     ceiling: windowMoments(window).variance,
     mostDispersed: {
       window,
@@ -34,7 +41,7 @@ export function keptNull(counts: FitData, kept: KeptCounts, options: DiagnoseOpt
     },
     certificate: null,
     bounds: { meanChernoff: bound, hoeffding: bound },
-    report: (fitted) => keptFitReport(counts, levels, value, fitted, options)
+    report: (fitted) => keptFitReport(counts, levels, value, fitted, options, near)
   };
 }
 
