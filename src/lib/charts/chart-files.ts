@@ -44,8 +44,8 @@ export function chartFiles(diagnosis: Diagnosis, name: string | null): Record<st
   if (explanations)
     made.push([
       'explanations',
-      explanationsTitle(explanations),
-      (size) => explanationsPicture(explanations, size)
+      explanationsTitle(explanations, diagnosis.engine.alpha),
+      (size) => explanationsPicture(explanations, size, diagnosis.engine.alpha)
     ]);
   const source = sourceLine(diagnosis, name);
   return Object.fromEntries(

@@ -1,5 +1,6 @@
 import { formatNumber } from '$lib/model/format-number';
 import { EXPLANATIONS } from '$lib/model/labels';
+import { sayFit } from '$lib/model/report/say-fit';
 import { sayOwnNumber } from '$lib/model/report/say-own-number';
 import { sayWeight } from '$lib/model/report/say-weight';
 import type { Explanation, Explanations } from '$lib/stats/explanations/types';
@@ -10,7 +11,11 @@ import type { Mark, Picture, Size, Tick } from './picture';
 import { pointPath } from './point-path';
 
 /** Explanations as lines of a scale: how far each lies behind the best, and the band within which none can be told from it. */
-export function explanationsPicture(explanations: Explanations, { width, text }: Size): Picture {
+export function explanationsPicture(
+  explanations: Explanations,
+  { width, text }: Size,
+  alpha: number
+): Picture {
   const { ranked, tieWithin } = explanations;
   const row = text * 2.1;
   const longest = Math.max(0, ...ranked.map(({ id }) => EXPLANATIONS[id].length));
@@ -62,7 +67,7 @@ export function explanationsPicture(explanations: Explanations, { width, text }:
     ],
     order: 'down',
     build: 'lines',
-    readings: ranked.map((one, i) => ({ x: x(one.behind), y: middle(i), words: () => wordsOf(one) })),
+    readings: ranked.map((one, i) => ({ x: x(one.behind), y: middle(i), words: () => wordsOf(one, alpha) })),
     notes: []
   };
 }
@@ -80,9 +85,10 @@ function ticksOf(furthest: number, x: (value: number) => number, text: number): 
   return ticks;
 }
 
-const wordsOf = (one: Explanation): string => {
+const wordsOf = (one: Explanation, alpha: number): string => {
   const own = sayOwnNumber(one);
+  const fit = sayFit(one, alpha);
   const place =
     one.behind === 0 ? 'the best of the list' : `AIC ${formatNumber(one.behind, 3)} behind the best`;
-  return `${EXPLANATIONS[one.id]}: ${place}, weight ${sayWeight(one.weight)}${own === '' ? '' : `; ${own}`}.`;
+  return `${EXPLANATIONS[one.id]}: ${place}, weight ${sayWeight(one.weight)}${fit === '' ? '' : `; ${fit}`}${own === '' ? '' : `; ${own}`}.`;
 };

@@ -1,9 +1,14 @@
 import { EXPLANATIONS } from '$lib/model/labels';
+import { rejected } from '$lib/stats/explanations/rejected';
 import type { Explanations } from '$lib/stats/explanations/types';
 import type { Table } from './table';
 
-/** Every explanation of the document, best first. */
-export const explanationsTable = ({ ranked }: Explanations): Table => ({
+/**
+ * Every explanation of the document, best first.
+ *
+ * @param alpha level at which one is rejected by its own fit
+ */
+export const explanationsTable = ({ ranked }: Explanations, alpha: number): Table => ({
   columns: [
     { title: 'explanation', kind: 'text' },
     { title: 'AIC behind', kind: 'number' },
@@ -21,7 +26,8 @@ export const explanationsTable = ({ ranked }: Explanations): Table => ({
     { title: 'low', kind: 'number' },
     { title: 'high', kind: 'number' },
     { title: 'second number', kind: 'text' },
-    { title: 'its value', kind: 'number' }
+    { title: 'its value', kind: 'number' },
+    { title: 'own fit', kind: 'text' }
   ],
   rows: ranked.map((one) => [
     EXPLANATIONS[one.id],
@@ -40,6 +46,7 @@ export const explanationsTable = ({ ranked }: Explanations): Table => ({
     one.parameter?.low ?? null,
     one.parameter?.high ?? null,
     one.second?.symbol ?? '–',
-    one.second?.value ?? null
+    one.second?.value ?? null,
+    one.goodness === null ? 'not asked' : rejected(one, alpha) ? 'rejected' : 'not rejected'
   ])
 });

@@ -78,7 +78,7 @@ export function documentCsv(document: Diagnosis): string {
   }
   for (const test of tests) testLines(`test ${test.id}`, test, one);
   for (const flag of flags) one('flag', flag.id, flag.grade);
-  lines.push(...explanationLines(document.explanations));
+  lines.push(...explanationLines(document.explanations, engine.alpha));
   for (const point of document.distribution) {
     one('distribution', 'shots', point.shots, point.count);
     ranged('distribution', 'observed', { ...point, value: point.observed }, point.count);

@@ -38,7 +38,7 @@ export function reportPdf(
         cumulantsPart(document),
         testsPart(document),
         flagsPart(document),
-        ...explanationsParts(document.explanations),
+        ...explanationsParts(document.explanations, document.engine.alpha),
         nuisancesPart(input),
         methodPart(),
         provenancePart(input),

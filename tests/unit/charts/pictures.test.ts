@@ -59,7 +59,10 @@ const DRAWS: [string, Draw][] = [
   // Counts with a spread have these.
   ['as N runs', ({ nuisances }, size) => trialsPicture(nuisances?.trials ?? noTrials, size)],
   // Only results that rule independent trials out have these; the others draw an empty list.
-  ['explanations', ({ explanations }, size) => explanationsPicture(explanations ?? nothing, size)]
+  [
+    'explanations',
+    ({ explanations, engine }, size) => explanationsPicture(explanations ?? nothing, size, engine.alpha)
+  ]
 ];
 
 /** Whether two labels touch: letters reach about 0.7 of their size above the line, and next to nothing below. */

@@ -41,13 +41,13 @@ const inputOf = (document: Diagnosis) => ({
 });
 
 /** Everything that is said of explanations, in words; nothing where none were told. */
-const explained = ({ explanations }: Diagnosis): string[] => {
+const explained = ({ explanations, engine }: Diagnosis): string[] => {
   if (!explanations) return [];
   const { ranked, tied, separate, notRun, pairs, statement } = explanations;
   return [
     statement,
     pairs?.statement ?? '',
-    explanationsTitle(explanations),
+    explanationsTitle(explanations, engine.alpha),
     ...ranked.flatMap((one) => [EXPLANATIONS[one.id], sayOwnNumber(one)]),
     ...ranked.filter(({ id }) => tied.includes(id)).map(({ meaning }) => meaning),
     ...separate.flatMap(({ measurement, shots }) => [measurement, sayShotsInAll(shots)]),

@@ -50,7 +50,7 @@ export const PARTS: Record<string, number[][]> = {
   // Without the size of a flag, which is a sentence.
   tests: [[0, 1, 2, 3, 4, 5, 6]],
   explanations: [
-    [0, 3, 4, 5, 1, 2, 6, 7, 8, 9],
+    [0, 3, 4, 5, 1, 2, 6, 17, 7, 8, 9],
     [0, 10, 11, 12, 13, 14, 15, 16]
   ]
 };

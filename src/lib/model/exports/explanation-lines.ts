@@ -1,11 +1,14 @@
 import type { Explanations } from '$lib/stats/explanations/types';
+import { sayFit } from '../report/say-fit';
 import type { CsvValue } from './csv-table';
 
 /**
  * The explanations of a document as lines `part,item,count,value,low,high` of the table of all numbers; none where no
  * story was told. The order is the document's, best first.
+ *
+ * @param alpha level at which a story is rejected by its own fit
  */
-export function explanationLines(explanations: Explanations | undefined): CsvValue[][] {
+export function explanationLines(explanations: Explanations | undefined, alpha: number): CsvValue[][] {
   if (!explanations) return [];
   const { ranked, tied, tieWithin, separate, pairs } = explanations;
   const lines: CsvValue[][] = [];
@@ -23,6 +26,7 @@ export function explanationLines(explanations: Explanations | undefined): CsvVal
     if (second) one(part, second.symbol, second.value);
     for (const key of ['p', 'smallestP', 'resamples'] as const)
       one(part, `fit ${key}`, goodness?.[key] ?? null);
+    one(part, 'own fit', goodness === null ? null : sayFit(story, alpha) || 'not rejected');
     one(part, 'tied', tied.includes(story.id) ? 'yes' : 'no');
   }
   one('explanations', 'tieWithin', tieWithin);

@@ -22,7 +22,7 @@ export function plainText(diagnosis: Diagnosis, about: string[] = []): string {
     `${VERDICTS[answer.verdict]}\n\n${wrap(answer.statement)}\n${answer.because.map((reason) => wrap(reason, '  – ')).join('\n')}`,
     sayData(diagnosis, about),
     sayFlags(diagnosis.flags),
-    ...(diagnosis.explanations ? [sayExplanations(diagnosis.explanations)] : []),
+    ...(diagnosis.explanations ? [sayExplanations(diagnosis.explanations, diagnosis.engine.alpha)] : []),
     nuisances(diagnosis),
     sayTests(diagnosis),
     sayLaw(diagnosis),

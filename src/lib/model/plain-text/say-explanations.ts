@@ -1,6 +1,7 @@
 import type { Explanations } from '$lib/stats/explanations/types';
 import { formatNumber } from '../format-number';
 import { EXPLANATIONS } from '../labels';
+import { sayFit } from '../report/say-fit';
 import { sayWeight } from '../report/say-weight';
 import { sayOwnNumber } from '../report/say-own-number';
 import { sayShotsInAll } from '../report/say-shots-in-all';
@@ -8,7 +9,7 @@ import { alignTable } from './align-table';
 import { wrap } from './wrap';
 
 /** What else it could be: the finding, the list, what each of the first would mean, and what would tell them apart. */
-export function sayExplanations(explanations: Explanations): string {
+export function sayExplanations(explanations: Explanations, alpha: number): string {
   const { ranked, tied, separate, notRun, pairs, statement } = explanations;
   const lines = ['What else it could be', wrap(statement, '  ')];
   if (pairs) lines.push(wrap(pairs.statement, '  '));
@@ -26,7 +27,7 @@ export function sayExplanations(explanations: Explanations): string {
   );
   // As a column they would be wider than a terminal.
   for (const one of ranked) {
-    const number = sayOwnNumber(one);
+    const number = [sayFit(one, alpha), sayOwnNumber(one)].filter((words) => words !== '').join('; ');
     if (number) lines.push(wrap(`${EXPLANATIONS[one.id]}: ${number}`, '    '));
   }
   for (const one of ranked.filter(({ id }) => tied.includes(id)))

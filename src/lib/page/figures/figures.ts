@@ -70,12 +70,12 @@ export const FIGURES: Record<FigureKind, (of: Diagnosis) => Figure | undefined> 
     (of, size) => testsPicture(of, size, TESTS),
     (of) => testsTable(of, TESTS)
   ),
-  explanations: ({ explanations: of }) =>
+  explanations: ({ explanations: of, engine: { alpha } }) =>
     of && {
       id: 'explanations-chart',
-      title: explanationsTitle(of),
-      draw: (size) => explanationsPicture(of, size),
-      table: explanationsTable(of)
+      title: explanationsTitle(of, alpha),
+      draw: (size) => explanationsPicture(of, size, alpha),
+      table: explanationsTable(of, alpha)
     },
   drift: ({ nuisances }) => {
     const of = nuisances?.drift;

@@ -5,6 +5,7 @@ import { explanationsTable } from '$lib/charts/explanations-table';
 import { explanationsTitle } from '$lib/charts/explanations-title';
 import type { Table } from '$lib/charts/table';
 import { EXPLANATIONS } from '$lib/model/labels';
+import { sayFit } from '$lib/model/report/say-fit';
 import { sayOwnNumber } from '$lib/model/report/say-own-number';
 import { sayShotsInAll } from '$lib/model/report/say-shots-in-all';
 import { sayWeight } from '$lib/model/report/say-weight';
@@ -24,6 +25,7 @@ const LIKELIHOODS = [
   'AIC behind',
   'weight',
   'G²',
+  'own fit',
   'p of its fit',
   'smallest p',
   'resamples'
@@ -31,7 +33,7 @@ const LIKELIHOODS = [
 const NUMBERS = ['explanation', 'base', 'number', 'value', 'low', 'high', 'second number', 'its value'];
 
 /** Stories that would give such counts, as on the page; nothing where none were told. */
-export function explanationsParts(explanations: Explanations | undefined): Part[] {
+export function explanationsParts(explanations: Explanations | undefined, alpha: number): Part[] {
   if (!explanations) return [];
   const { ranked, tied, separate, notRun, pairs, statement, tieWithin } = explanations;
   const near = ranked.filter(({ id }) => tied.includes(id));
@@ -45,8 +47,8 @@ export function explanationsParts(explanations: Explanations | undefined): Part[
             {
               kind: 'figure',
               what: 'Chart of explanations, best first',
-              title: explanationsTitle(explanations),
-              draw: (size) => explanationsPicture(explanations, size)
+              title: explanationsTitle(explanations, alpha),
+              draw: (size) => explanationsPicture(explanations, size, alpha)
             }
           ],
           notes: [NOTES.compared(tieWithin), NOTES.ownNumber]
@@ -58,17 +60,17 @@ export function explanationsParts(explanations: Explanations | undefined): Part[
               caption: 'Explanations, best first, each with its number',
               table: rankedTable(ranked, tied),
               digits: [0, 3, 0, 2, 0],
-              under: ranked.map((one) => sayOwnNumber(one) || null)
+              under: ranked.map((one) => underOf(one, alpha))
             },
             {
               kind: 'table',
               caption: 'Their likelihoods in full',
-              table: columnsOf(explanationsTable(explanations), LIKELIHOODS)
+              table: columnsOf(explanationsTable(explanations, alpha), LIKELIHOODS)
             },
             {
               kind: 'table',
               caption: 'Their numbers in full',
-              table: columnsOf(explanationsTable(explanations), NUMBERS)
+              table: columnsOf(explanationsTable(explanations, alpha), NUMBERS)
             },
             ...noteBlock(
               'Base: the probability of one trial, or the mean count when N is unknown, before the story sets in.'
@@ -102,6 +104,10 @@ const listed = (title: string, items: string[]): Block[] =>
         { kind: 'paragraph', text: title, look: 'strong' },
         { kind: 'list', items }
       ];
+
+/** What its own fit says against it, and its number. */
+const underOf = (one: Explanation, alpha: number): string | null =>
+  [capital(sayFit(one, alpha)), sayOwnNumber(one)].filter((words) => words !== '').join('; ') || null;
 
 const named = (id: ExplanationId): string => capital(EXPLANATIONS[id]);
 

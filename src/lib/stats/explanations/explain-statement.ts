@@ -2,6 +2,7 @@ import { capital } from '../words/capital';
 import { formatPercent } from '../words/format-number';
 import { sayP } from '../words/say-p';
 import { explanationNames } from './explanation-names';
+import { rejected } from './rejected';
 import type { Explanation, ExplanationId } from './types';
 
 const joined = (ids: ExplanationId[]): string => {
@@ -13,7 +14,7 @@ const joined = (ids: ExplanationId[]): string => {
  * The finding in a sentence or three: which explanation leads, which cannot be told from it, and whether it fits at all.
  *
  * @param ranked best first
- * @param alpha level under which the leading one is said not to fit either
+ * @param alpha level at which the leading one is said not to fit; see rejected
  */
 export function explainStatement(ranked: Explanation[], tied: ExplanationId[], alpha: number): string {
   const [first] = ranked;
@@ -28,15 +29,18 @@ export function explainStatement(ranked: Explanation[], tied: ExplanationId[], a
     return `${worse}: if these are ruled out, it is by something that the list does not know, such as the order of the shots.`;
   }
   const others = tied.filter((id) => id !== first.id);
+  const weight = first.weight > 0.999 ? 'practically all' : formatPercent(first.weight);
   const lead =
     others.length === 0
-      ? `Of the stories told here the counts are described best by ${explanationNames[first.id]}, with ${first.weight > 0.999 ? 'practically all' : formatPercent(first.weight)} of the weight.`
+      ? `Of the stories told here the counts are described best by ${explanationNames[first.id]}, with ${weight} of the weight.`
       : `${capital(joined(tied))} describe the counts about equally well: these shots cannot tell them apart.`;
   const { goodness } = first;
   if (!goodness) return lead;
-  const it = others.length > 0 ? 'the first of them' : 'it';
-  if (goodness.p <= Math.max(alpha, goodness.smallestP))
-    return `${lead} But ${it} does not fit either: counts so far from it ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. Something else is at work, or more than one of them.`;
-  const how = goodness.p > 0.05 ? 'fits' : 'fits badly';
-  return `${lead} ${capital(it)} ${how}: counts so far from it ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true. That the counts fit a story does not say that it happened.`;
+  const far = `counts so far from it ${sayP(goodness.p, goodness.smallestP, goodness.resamples)} if it were true.`;
+  const end = 'Something else is at work, or more than one of them.';
+  if (rejected(first, alpha))
+    return others.length === 0
+      ? `Of the stories told here ${explanationNames[first.id]} comes nearest to the counts, but it does not fit: ${far} Its weight, ${weight} of the list’s, sets it against the others alone. ${end}`
+      : `${lead} But the first of them does not fit either: ${far} ${end}`;
+  return `${lead} The fit of ${others.length > 0 ? 'the first of them' : 'it'} is not rejected at the level of ${formatPercent(alpha, 2)}: ${far} That the counts fit a story does not say that it happened.`;
 }

@@ -133,8 +133,10 @@ describe.each(CASES)('numbers of %s, %s', (file, verdict, options) => {
     const at = rows.findIndex(([first, second]) => first === 'explanation' && second === 'AIC behind');
     expect(at >= 0).toBe(ranked.length > 0);
     const shown = at < 0 ? [] : rows.slice(at + 1, at + 1 + ranked.length);
-    expect(wrongExplanations(shown, ranked)).toEqual([]);
-    expect(wrongExplanations(explanationsOfPdf(pdf.cells, ranked), ranked)).toEqual([]);
+    expect(wrongExplanations(shown, ranked, d.engine.alpha)).toEqual([]);
+    expect(
+      wrongExplanations(explanationsOfPdf(pdf.cells, ranked, d.engine.alpha), ranked, d.engine.alpha)
+    ).toEqual([]);
     const lines = Papa.parse<string[]>(documentCsv(d), { skipEmptyLines: true }).data;
     for (const { id, behind, weight, goodness, parameter } of ranked) {
       const value = (item: string) =>

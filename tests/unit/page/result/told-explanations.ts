@@ -4,13 +4,21 @@ import { NUMBER, printed, unlike } from './same-digits';
 
 /**
  * What is wrong with the explanations as they are printed, a list of cells each: name, AIC behind, weight, p of its fit,
- * and its own number with interval; '' where independent trials have none.
+ * and its own number with interval; '' where independent trials have none. What a rejected fit says stands after the
+ * weight on the page and before the number in print.
  */
-export function wrongExplanations(rows: string[][], ranked: Explanation[]): string[] {
+export function wrongExplanations(rows: string[][], ranked: Explanation[], alpha: number): string[] {
   if (rows.length !== ranked.length) return [`${rows.length} rows, not ${ranked.length}`];
-  return ranked.flatMap(({ id, behind, weight, goodness, parameter, second }, i) => {
-    const [name, far, share, fit, own] = rows[i];
+  return ranked.flatMap((one, i) => {
+    const { id, behind, weight, goodness, parameter, second } = one;
+    const [name, far, weighed, fit, numbered] = rows[i];
+    const [share, ...besides] = weighed.split(/(?<=%)\s*(?=[a-z])/);
+    const [first, ...rest] = numbered.split('; ');
+    const before = first.endsWith('fit') ? first.toLowerCase() : '';
+    const own = before === '' ? numbered : rest.join('; ');
+    const told = besides[0] ?? before;
     const wrong = [
+      told === unfit(one, alpha) ? '' : `"${told}" of its fit`,
       name.replace(/^tied: /, '') === EXPLANATIONS[id] ? '' : `"${name}"`,
       unlike(far, behind, 3),
       wrongWeight(share, weight),
@@ -28,6 +36,12 @@ export function wrongExplanations(rows: string[][], ranked: Explanation[]): stri
   });
 }
 
+/** What must stand beside an explanation that its own fit rejects, by the level of the answer. */
+export function unfit({ goodness, behind }: Explanation, alpha: number): string {
+  if (goodness === null || goodness.p > Math.max(alpha, goodness.smallestP)) return '';
+  return behind > 0 ? 'does not fit' : 'best of these, and does not fit';
+}
+
 function wrongWeight(said: string, weight: number): string {
   const shown = said.replace(/ ?%$/, '');
   if (shown === '< 0.1') return weight < 0.001 ? '' : `"${said}" for ${weight}`;
@@ -37,15 +51,15 @@ function wrongWeight(said: string, weight: number): string {
 }
 
 /** Cells of the PDF that stand after the head of the explanations, a list each: the number has a row of its own. */
-export function explanationsOfPdf(cells: string[], ranked: Explanation[]): string[][] {
+export function explanationsOfPdf(cells: string[], ranked: Explanation[], alpha: number): string[][] {
   const heads = ['explanation', 'AIC behind', 'weight', 'p of its fit'];
   const at = cells.findIndex((_, i) => heads.every((head, j) => cells[i + j] === head));
   if (at < 0) return [];
   const tied = cells[at + heads.length] === 'tied' ? 1 : 0;
   let i = at + heads.length + tied;
-  return ranked.map(({ parameter }) => {
+  return ranked.map((one) => {
     const row = cells.slice(i, i + heads.length);
     i += heads.length + tied;
-    return [...row, parameter === null ? '' : cells[i++]];
+    return [...row, one.parameter === null && unfit(one, alpha) === '' ? '' : cells[i++]];
   });
 }

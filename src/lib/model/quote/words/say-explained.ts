@@ -1,4 +1,5 @@
 import { EXPLANATIONS } from '../../labels';
+import { rejected } from '$lib/stats/explanations/rejected';
 import type { Explanation, ExplanationId, Explanations } from '$lib/stats/explanations/types';
 import { asGiven } from '../numbers/as-given';
 import type { Quotable } from '../quotable';
@@ -18,8 +19,7 @@ export function sayExplained({ answer, engine, explanations }: Quotable): Words[
   const [first] = ranked;
   if (tied.some(independent))
     return [[text('None of the stories fitted describes the counts better than independent trials do.')]];
-  const { goodness } = first;
-  const fails = goodness !== null && goodness.p <= Math.max(engine.alpha, goodness.smallestP);
+  const fails = rejected(first, engine.alpha);
   return [
     words`Of the explanations fitted, the nearest to the counts by AIC is ${EXPLANATIONS[first.id]}${itsNumber(first)}${fails ? '; yet it does not fit them either' : ''}${atPar(explanations)}.`
   ];
