@@ -6,6 +6,7 @@ import { LAWS } from './laws';
 import { MOMENTS } from './moments';
 import { PLANNING } from './planning';
 import { RATES } from './rates';
+import { STORIES } from './stories';
 import type { Term } from './term';
 import { TEST_TERMS } from './tests';
 
@@ -18,6 +19,7 @@ const ALL = {
   ...MOMENTS,
   ...TEST_TERMS,
   ...FLAG_TERMS,
+  ...STORIES,
   ...PLANNING
 };
 

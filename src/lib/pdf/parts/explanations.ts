@@ -87,7 +87,11 @@ export function explanationsParts(explanations: Explanations | undefined, alpha:
               notRun.map(({ id, reason }) => `${named(id)}: ${reason}`)
             )
           ],
-          notes: [NOTES.ownFit, NOTES.independentListed]
+          notes: [
+            NOTES.ownFit,
+            NOTES.independentListed,
+            ...(ranked.some(({ id }) => id === 'two-settings') ? [NOTES.twoSettings] : [])
+          ]
         }
       ]
     }

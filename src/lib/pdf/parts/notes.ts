@@ -104,6 +104,12 @@ export const NOTES = {
       'They stand in it for comparison. The best law counts one number for each probability between 0 and 1, which favours it.'
     ]
   },
+  twoSettings: {
+    title: 'Two settings',
+    paragraphs: [
+      'Half of the shots at p(1 − d), half at p(1 + d): the shares are taken to be equal, and only d is fitted. Where one setting had fewer shots the story fits worse than it could, and bursts or dead shots may lead in its place.'
+    ]
+  },
   origin: {
     title: 'Where a p-value comes from',
     paragraphs: [

@@ -17,11 +17,12 @@ export function sayExplained({ answer, engine, explanations }: Quotable): Words[
   const { ranked, tied } = explanations;
   if (!ranked.some(({ id }) => !independent(id))) return [];
   const [first] = ranked;
+  const shares = first.id === 'two-settings' ? ', of equal shares' : '';
   if (tied.some(independent))
     return [[text('None of the stories fitted describes the counts better than independent trials do.')]];
   const fails = rejected(first, engine.alpha);
   return [
-    words`Of the explanations fitted, the nearest to the counts by AIC is ${EXPLANATIONS[first.id]}${itsNumber(first)}${fails ? '; yet it does not fit them either' : ''}${atPar(explanations)}.`
+    words`Of the explanations fitted, the nearest to the counts by AIC is ${EXPLANATIONS[first.id]}${shares}${itsNumber(first)}${fails ? '; yet it does not fit them either' : ''}${atPar(explanations)}.`
   ];
 }
 
