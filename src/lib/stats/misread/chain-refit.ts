@@ -3,7 +3,7 @@ import { sampleMoments } from '../fit/sample-moments';
 import type { Refit } from '../fit/refit';
 import type { Window } from '../laws/window';
 import { chainClimb, type ChainClimb, type ChainProblem } from './chain-climb';
-import { mostLevels } from './chain-fit';
+import { mostLevels, mostLevelsCut } from './chain-fit';
 import type { Kept } from './chain-score';
 import { chainSpace, type Chain, type ChainSpace } from './chain-space';
 import { evenChain, twoLevels } from './chain-starts';
@@ -30,7 +30,7 @@ export type ChainRefit = Omit<Refit, 'levels'> & { levels: ReadChain };
 export function chainRefit(
   data: FitData,
   from: ReadChain,
-  space: ChainSpace = chainSpace(data.trials!, mostLevels),
+  space: ChainSpace = chainSpace(data.trials!, from.kept ? mostLevelsCut : mostLevels),
   settled = Infinity
 ): ChainRefit {
   const bonds = data.trials!;

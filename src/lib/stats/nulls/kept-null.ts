@@ -1,9 +1,8 @@
 import type { FitData } from '../fit/fit-data';
 import { sampleMoments } from '../fit/sample-moments';
-import { chainFit } from '../misread/chain-fit';
-import type { ReadChain } from '../misread/read-chain';
 import { readMoments } from '../misread/read-chain';
 import { keptEqual } from '../truncation/kept-equal';
+import { truncatedFit } from '../truncation/truncated-fit';
 import type { KeptCounts } from '../truncation/truncated-law';
 import { windowMoments } from '../truncation/window-moments';
 import type { Window } from '../laws/window';
@@ -23,9 +22,8 @@ import type { NullLaw } from './null-law';
  */
 export function keptNull(counts: FitData, kept: KeptCounts, options: DiagnoseOptions): NullLaw {
   const trials = counts.trials!;
-  const { chain, value, even } = chainFit(counts, 0, kept);
+  const { chain: levels, value, even, how } = truncatedFit(counts, kept);
   const near = value - even.value <= Math.log(counts.total) / 2;
-  const levels: ReadChain = { ...chain, rate: 0, kept };
   const window = keptEqual(trials, kept, sampleMoments(counts).mean);
   const widest = keptEqual(trials, kept, readMoments(levels).mean);
   const bound = (side: 'high' | 'low', count: number) => logTiltBound(widest, side, count);
@@ -33,7 +31,7 @@ export function keptNull(counts: FitData, kept: KeptCounts, options: DiagnoseOpt
     levels,
     law: levels,
     logLikelihood: value,
-    ...(near && { drawnFrom: { ...even.chain, rate: 0, kept } }),
+    ...(near && { drawnFrom: even.chain }),
     ceiling: windowMoments(window).variance,
     mostDispersed: {
       window,
@@ -41,7 +39,7 @@ export function keptNull(counts: FitData, kept: KeptCounts, options: DiagnoseOpt
     },
     certificate: null,
     bounds: { meanChernoff: bound, hoeffding: bound },
-    report: (fitted) => keptFitReport(counts, levels, value, fitted, options, near)
+    report: (fitted) => keptFitReport(counts, levels, { value, how, drawnEven: near }, fitted, options)
   };
 }
 

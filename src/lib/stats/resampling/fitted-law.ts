@@ -5,10 +5,11 @@ import { workspace, type Workspace } from '../fit/workspace';
 import { lawMoments } from '../laws/law-moments';
 import { lawWindow } from '../laws/law-window';
 import type { Window } from '../laws/window';
-import { mostLevels } from '../misread/chain-fit';
+import { mostLevels, mostLevelsCut } from '../misread/chain-fit';
 import { chainRefit } from '../misread/chain-refit';
 import { chainSpace, type ChainSpace } from '../misread/chain-space';
 import { isReadChain, readEven, readMoments, readWindow, type ReadChain } from '../misread/read-chain';
+import { dropsEmptyOnly, refitWithoutEmpty } from '../truncation/without-empty';
 import type { Law } from '../types';
 import { evenProbability } from './even-probability';
 
@@ -51,7 +52,12 @@ export function familyRefit(
   settled?: number
 ): FamilyRefit {
   if (isReadChain(from)) {
-    buffers.chain ??= chainSpace(data.trials!, mostLevels);
+    const { kept } = from;
+    if (kept && dropsEmptyOnly(kept, data.trials!)) {
+      const rest = { ...data, withoutEmpty: true };
+      return refitWithoutEmpty(rest, from, kept, (buffers[part] = workspace(rest, buffers[part])), settled);
+    }
+    buffers.chain ??= chainSpace(data.trials!, kept ? mostLevelsCut : mostLevels);
     return chainRefit(data, from, buffers.chain, settled);
   }
   return refit(data, from, (buffers[part] = workspace(data, buffers[part])), settled);

@@ -24,7 +24,7 @@ export function sayRest(
     return `${measured}: the excess is there without them too. ${capital(finding(ceiling))} ${often(ceiling)}.${shape}`;
   }
   if (verdict === 'misfit')
-    return `${measured}, but the counts of the rest do not fit such trials of up to three probabilities: ${finding(telling)} ${often(telling)}.`;
+    return `${measured}, but the counts of the rest do not fit such trials: ${finding(telling)} ${often(telling)}.`;
   if (verdict === 'compatible')
     return `${measured}: the rest keeps it, and is compatible with independent trials so cut in its shape too. The most telling of its tests: ${finding(telling)} ${often(telling)}. Compatible is not the same as independent.`;
   return tests.some(({ p, smallestP }) => p <= smallestP)
