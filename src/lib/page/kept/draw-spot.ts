@@ -1,5 +1,6 @@
 import type { Component } from 'svelte';
 import { render } from 'svelte/server';
+import { liveMarkup, STANDS } from './plain-markup';
 import type { SpotName, SpotProps } from './spots';
 
 // Imported as a browser does, on demand: by that Kit knows that the page needs their styles although not their scripts.
@@ -17,4 +18,7 @@ export const drawSpot = <Name extends SpotName>(
   name: Name,
   props: SpotProps[Name],
   context: Map<unknown, unknown>
-): string => render(parts[name] as Component<Record<string, unknown>>, { props, context }).body;
+): string => {
+  const drawn = render(parts[name] as Component<Record<string, unknown>>, { props, context });
+  return context.has(STANDS) ? liveMarkup(drawn.body) : drawn.body;
+};

@@ -1,5 +1,6 @@
 import type { Component } from 'svelte';
 import { render } from 'svelte/server';
+import { plainMarkup, STANDS } from './plain-markup';
 import type { StillName, StillProps } from './stills';
 
 // As in draw-spot.ts: Kit sends styles along for what a page may import later.
@@ -13,4 +14,8 @@ export const drawStill = <Name extends StillName>(
   name: Name,
   props: StillProps[Name],
   context: Map<unknown, unknown>
-): string => render(pages[name] as Component<Record<string, unknown>>, { props, context }).body;
+): string => {
+  const within = new Map(context).set(STANDS, true);
+  const drawn = render(pages[name] as Component<Record<string, unknown>>, { props, context: within });
+  return plainMarkup(drawn.body);
+};
