@@ -51,6 +51,7 @@ export const explanationsSchema = z.strictObject({
       shots: orNull
     })
   ),
+  shotsToLead: orNull,
   notRun: z.array(z.strictObject({ id: storyId, reason: z.string() })),
   pairs: z
     .strictObject({ covariance: number, correlation: number, correlationLow: orNull, statement: z.string() })

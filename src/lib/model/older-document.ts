@@ -14,7 +14,7 @@ const lacking = (value: unknown, absent: Loose): unknown =>
  */
 export function olderDocument(value: unknown): unknown {
   if (!isLoose(value)) return value;
-  const { data, fit, distribution, nuisances } = value;
+  const { data, fit, distribution, nuisances, explanations } = value;
   const corrected = isLoose(fit) ? (fit.divergenceCorrected ?? null) : null;
   return {
     notRun: [],
@@ -34,6 +34,8 @@ export function olderDocument(value: unknown): unknown {
         ...('emptyAside' in nuisances && { emptyAside: lacking(nuisances.emptyAside, { tests: [] }) })
       }
     }),
+    // One number of shots a pair was told, and none over all of them.
+    ...(isLoose(explanations) && { explanations: lacking(explanations, { shotsToLead: null }) }),
     distribution: Array.isArray(distribution)
       ? distribution.map((point) => lacking(point, { lump: false }))
       : distribution

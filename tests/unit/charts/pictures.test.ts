@@ -31,6 +31,7 @@ const nothing: Explanations = {
   tied: [],
   tieWithin: 2,
   separate: [],
+  shotsToLead: null,
   notRun: [],
   pairs: null,
   statement: ''

@@ -22,7 +22,7 @@ import { sayTests } from '$lib/model/plain-text/say-tests';
 import { howBig } from '$lib/model/report/how-big';
 import { sayNuisances } from '$lib/model/report/say-nuisances';
 import { sayOwnNumber } from '$lib/model/report/say-own-number';
-import { sayShotsInAll } from '$lib/model/report/say-shots-in-all';
+import { sayShotsInAll, sayShotsToLead } from '$lib/model/report/say-shots-in-all';
 import { whatElse } from '$lib/model/report/what-else';
 import { sayHowOften } from '$lib/model/say-p';
 import { reportPdf } from '$lib/pdf/report-pdf';
@@ -43,7 +43,7 @@ const inputOf = (document: Diagnosis) => ({
 /** Everything that is said of explanations, in words; nothing where none were told. */
 const explained = ({ explanations, engine }: Diagnosis): string[] => {
   if (!explanations) return [];
-  const { ranked, tied, separate, notRun, pairs, statement } = explanations;
+  const { ranked, tied, separate, shotsToLead, notRun, pairs, statement } = explanations;
   return [
     statement,
     pairs?.statement ?? '',
@@ -51,6 +51,7 @@ const explained = ({ explanations, engine }: Diagnosis): string[] => {
     ...ranked.flatMap((one) => [EXPLANATIONS[one.id], sayOwnNumber(one)]),
     ...ranked.filter(({ id }) => tied.includes(id)).map(({ meaning }) => meaning),
     ...separate.flatMap(({ measurement, shots }) => [measurement, sayShotsInAll(shots)]),
+    sayShotsToLead(EXPLANATIONS[ranked[0].id], shotsToLead),
     ...notRun.map(({ reason }) => reason)
   ];
 };

@@ -10,7 +10,7 @@ import type { CsvValue } from './csv-table';
  */
 export function explanationLines(explanations: Explanations | undefined, alpha: number): CsvValue[][] {
   if (!explanations) return [];
-  const { ranked, tied, tieWithin, separate, pairs } = explanations;
+  const { ranked, tied, tieWithin, separate, shotsToLead, pairs } = explanations;
   const lines: CsvValue[][] = [];
   const one = (part: string, item: string, value: CsvValue, low: CsvValue = null, high: CsvValue = null) =>
     lines.push([part, item, null, value, low, high]);
@@ -32,6 +32,7 @@ export function explanationLines(explanations: Explanations | undefined, alpha: 
   one('explanations', 'tieWithin', tieWithin);
   for (const { between, shots } of separate)
     one('explanations', `shots to separate ${between[0]} and ${between[1]}`, shots);
+  one('explanations', 'shots for the first to lead all', shotsToLead);
   if (pairs) {
     one('pairs', 'covariance', pairs.covariance);
     one('pairs', 'correlation', pairs.correlation, pairs.correlationLow);

@@ -4,13 +4,13 @@ import { EXPLANATIONS } from '../labels';
 import { sayFit } from '../report/say-fit';
 import { sayWeight } from '../report/say-weight';
 import { sayOwnNumber } from '../report/say-own-number';
-import { sayShotsInAll } from '../report/say-shots-in-all';
+import { sayShotsInAll, sayShotsToLead } from '../report/say-shots-in-all';
 import { alignTable } from './align-table';
 import { wrap } from './wrap';
 
 /** What else it could be: the finding, the list, what each of the first would mean, and what would tell them apart. */
 export function sayExplanations(explanations: Explanations, alpha: number): string {
-  const { ranked, tied, separate, notRun, pairs, statement } = explanations;
+  const { ranked, tied, separate, shotsToLead, notRun, pairs, statement } = explanations;
   const lines = ['What else it could be', wrap(statement, '  ')];
   if (pairs) lines.push(wrap(pairs.statement, '  '));
   lines.push(
@@ -36,6 +36,8 @@ export function sayExplanations(explanations: Explanations, alpha: number): stri
     const told = `To tell ${between.map((id) => EXPLANATIONS[id]).join(' from ')}: ${measurement}`;
     lines.push(wrap(`${told} ${sayShotsInAll(shots)}`.trim(), '  – '));
   }
+  const lead = sayShotsToLead(EXPLANATIONS[ranked[0]?.id], shotsToLead);
+  if (lead) lines.push(wrap(lead, '  – '));
   if (notRun.length > 0)
     lines.push(
       wrap(

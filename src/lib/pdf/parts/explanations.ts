@@ -7,7 +7,7 @@ import type { Table } from '$lib/charts/table';
 import { EXPLANATIONS } from '$lib/model/labels';
 import { sayFit } from '$lib/model/report/say-fit';
 import { sayOwnNumber } from '$lib/model/report/say-own-number';
-import { sayShotsInAll } from '$lib/model/report/say-shots-in-all';
+import { sayShotsInAll, sayShotsToLead } from '$lib/model/report/say-shots-in-all';
 import { sayWeight } from '$lib/model/report/say-weight';
 import type { Explanation, ExplanationId, Explanations } from '$lib/stats/explanations/types';
 import type { Block, Part } from '../blocks/blocks';
@@ -35,7 +35,7 @@ const NUMBERS = ['explanation', 'base', 'number', 'value', 'low', 'high', 'secon
 /** Stories that would give such counts, as on the page; nothing where none were told. */
 export function explanationsParts(explanations: Explanations | undefined, alpha: number): Part[] {
   if (!explanations) return [];
-  const { ranked, tied, separate, notRun, pairs, statement, tieWithin } = explanations;
+  const { ranked, tied, separate, shotsToLead, notRun, pairs, statement, tieWithin } = explanations;
   const near = ranked.filter(({ id }) => tied.includes(id));
   return [
     {
@@ -82,6 +82,7 @@ export function explanationsParts(explanations: Explanations | undefined, alpha:
                 `${named(between[0])} or ${EXPLANATIONS[between[1]]}: ${measurement} ${sayShotsInAll(shots)}`.trim()
               )
             ),
+            ...said([sayShotsToLead(EXPLANATIONS[ranked[0]?.id], shotsToLead)]),
             ...listed(
               'Not told',
               notRun.map(({ id, reason }) => `${named(id)}: ${reason}`)

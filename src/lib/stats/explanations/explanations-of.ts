@@ -7,7 +7,8 @@ import { independentLaws, type Independent } from './independent-laws';
 import { pairLimit } from './pair-limit';
 import { rank } from './rank';
 import { separate } from './separate';
-import { shotsToSeparate, type FittedStory } from './shots-to-separate';
+import { separation, type FittedStory, type Separation } from './separation';
+import { shotsToSeparate } from './shots-to-separate';
 import { stories } from './stories';
 import type { Seen } from './story';
 import { fitStory } from './fit-story';
@@ -83,6 +84,10 @@ export async function explanationsOf(
     fitted.set(attempt.story.id, one.fitted);
   }
   const ranked = rank(told);
+  const apart = (a: ExplanationId, b: ExplanationId) => {
+    const [first, second] = [fitted.get(a), fitted.get(b)];
+    return first && second && !lump && !below ? separation(data, first, second) : null;
+  };
   const tied = ranked.filter(({ behind }) => behind < tieWithin).map(({ id }) => id);
   return {
     ranked,
@@ -90,13 +95,20 @@ export async function explanationsOf(
     tieWithin,
     separate: tied.flatMap((a, i) =>
       tied.slice(i + 1).map((b) => {
-        const [first, second] = [fitted.get(a), fitted.get(b)];
-        const shots = first && second && !lump && !below ? shotsToSeparate(data, first, second) : null;
+        const pair = apart(a, b);
+        const shots = pair && shotsToSeparate([pair]);
         return { between: [a, b] as [typeof a, typeof b], measurement: separate(a, b), shots };
       })
     ),
+    shotsToLead: tied.length < 2 ? null : shotsToSeparate(rivals(apart, ranked)),
     notRun,
     pairs: lump || below ? null : pairLimit(trials, moments.ceiling, moments.dispersion),
     statement: explainStatement(ranked, tied, options.alpha)
   };
 }
+
+/** The first against every other story, but for those that give some of its counts no probability. */
+const rivals = (
+  apart: (a: ExplanationId, b: ExplanationId) => Separation | null,
+  [first, ...others]: { id: ExplanationId }[]
+): Separation[] => others.map(({ id }) => apart(first.id, id)).filter((one) => one !== null);

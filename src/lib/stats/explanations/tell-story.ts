@@ -9,7 +9,7 @@ import { profileInterval } from './profile-interval';
 import type { Seen, Story } from './story';
 import type { StoryModel } from './story-model';
 import type { ScoreFit } from './score-fit';
-import type { FittedStory } from './shots-to-separate';
+import type { FittedStory } from './separation';
 import type { Explanation } from './types';
 
 /** A story that was fitted; its place in the registry gives it random streams of its own. */

@@ -61,9 +61,15 @@ export interface Explanations {
   tieWithin: number;
   /**
    * What would tell two of the tied apart, one entry a pair: a measurement, and how many shots in all would do it by
-   * the counts alone (null when no number would, or when one of the two is independent trials).
+   * the counts alone in four of five repeats, for these two (null when no number would, or when one of the two is
+   * independent trials).
    */
   separate: { between: [ExplanationId, ExplanationId]; measurement: string; shots: number | null }[];
+  /**
+   * Shots in all at which the first, if true as fitted, leads every other story in four of five repeats; null where
+   * nothing is tied with it and when no number would do.
+   */
+  shotsToLead: number | null;
   notRun: { id: StoryId; reason: string }[];
   pairs: PairLimit | null;
   statement: string;

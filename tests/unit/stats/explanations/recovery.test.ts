@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { fitStory } from '$lib/stats/explanations/fit-story';
-import { shotsToSeparate, type FittedStory } from '$lib/stats/explanations/shots-to-separate';
+import { separation, type FittedStory } from '$lib/stats/explanations/separation';
+import { shotsToSeparate } from '$lib/stats/explanations/shots-to-separate';
 import type { StoryId } from '$lib/stats/explanations/types';
 import type { FitData } from '$lib/stats/fit/fit-data';
 import { generator } from '$lib/stats/random/generator';
@@ -67,7 +68,8 @@ function inseparable(one: Case): StoryId[] {
     .map((rival) => rival.id)
     .filter((rival) => {
       if (rival === id) return false;
-      const shots = shotsToSeparate(ideal, truth, fitted(rival));
+      const pair = separation(ideal, truth, fitted(rival));
+      const shots = pair && shotsToSeparate([pair]);
       return shots === null || shots > SHOTS;
     });
 }
