@@ -1,7 +1,7 @@
 import { crossPath } from './cross-path';
 import { hatchEdge } from './hatch-edge';
 import { intervalPath } from './interval-path';
-import type { Mark, Role } from './picture';
+import type { LegendEntry, Mark, Role } from './picture';
 import { ruledShade } from './ruled-shade';
 import { pointPath, type Shape } from './point-path';
 
@@ -14,8 +14,9 @@ const POINTS: Partial<Record<Role, { shape: Shape; interval: Role }>> = {
 
 export const SAMPLE = { width: 30, height: 16 };
 
-/** A small drawing of what a role looks like, its top left corner at `left`, `top`. */
-export function legendSample(role: Role, left = 0, top = 0): Mark[] {
+/** A small drawing of what an entry's marks look like, its top left corner at `left`, `top`. */
+export function legendSample({ role, down }: Pick<LegendEntry, 'role' | 'down'>, left = 0, top = 0): Mark[] {
+  const [foot, head] = down ? [top, top + SAMPLE.height] : [top + SAMPLE.height, top];
   const right = left + SAMPLE.width;
   const middle = top + SAMPLE.height / 2;
   const centre = left + SAMPLE.width / 2;
@@ -38,7 +39,7 @@ export function legendSample(role: Role, left = 0, top = 0): Mark[] {
       {
         kind: 'path',
         role,
-        d: intervalPath([{ x: centre, from: top + SAMPLE.height, to: top, open: true }])
+        d: intervalPath([{ x: centre, from: foot, to: head, open: true }])
       }
     ];
   if (role === 'shade') {

@@ -64,6 +64,8 @@ export interface Reading {
 export interface LegendEntry {
   role: Role;
   label: string;
+  /** Where a limit points down in this picture; an arrow goes up otherwise. */
+  down?: boolean;
 }
 
 /** How the height of a picture follows from its width and letters: the page keeps that room free (Drawing.svelte). */

@@ -5,6 +5,7 @@ import { countTicks } from './count-ticks';
 import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
 import { horizonMarks } from './horizon-marks';
+import { legendOfDrawn } from './legend-of-drawn';
 import { legendOfStanding } from './legend-of-standing';
 import { linePath } from './line-path';
 import type { Mark, Picture, Point, Size } from './picture';
@@ -72,7 +73,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
     height,
     build: 'field',
     marks,
-    legend: [
+    legend: legendOfDrawn(marks, [
       { role: 'observed', label: 'seen, with its 95 % interval' },
       ...legendOfStanding(marks, 'seen'),
       { role: 'unseen', label: 'never seen: lower limit only' },
@@ -80,7 +81,7 @@ export function ratePicture(diagnosis: Diagnosis, { width, text }: Size): Pictur
       { role: 'limit', label: 'its large-deviation limit' },
       { role: 'gaussian', label: 'Gaussian' },
       { role: 'shade', label: 'beyond the shot horizon' }
-    ],
+    ]),
     order: 'across',
     readings: points.map((point) => ({
       x: at(point),

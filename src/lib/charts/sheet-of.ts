@@ -40,13 +40,14 @@ export function sheetOf(picture: Picture, title: string, source: string): Sheet 
   const top = y;
   y += picture.height + 8;
   let x = EDGE;
-  for (const { role, label } of picture.legend) {
+  for (const entry of picture.legend) {
+    const { label } = entry;
     const needed = SAMPLE.width + 8 + label.length * SIZE * 0.55 + 22;
     if (x > EDGE && x + needed > EDGE + picture.width) {
       x = EDGE;
       y += 22;
     }
-    around.push(...legendSample(role, x, y));
+    around.push(...legendSample(entry, x, y));
     put(label, x + SAMPLE.width + 8, y + 12.5, 'text', SIZE, 'ink');
     x += needed;
   }

@@ -5,6 +5,7 @@ import { countTicks } from './count-ticks';
 import { frameOf } from './frame-of';
 import { groupCounts } from './group-counts';
 import { hatchEdge } from './hatch-edge';
+import { legendOfDrawn } from './legend-of-drawn';
 import { legendOfStanding } from './legend-of-standing';
 import { linePath } from './line-path';
 import type { Frame, Mark, Picture, Point, Size } from './picture';
@@ -55,14 +56,15 @@ export function tailsPicture(diagnosis: Diagnosis, { width, text }: Size): Pictu
     height,
     build: 'field',
     marks,
-    legend: [
+    legend: legendOfDrawn(marks, [
       { role: 'observed', label: 'seen in the tail, with its 95 % interval' },
       ...legendOfStanding(marks, 'tail seen'),
+      { role: 'unseen', label: 'tail never seen: upper limit only', down: true },
       { role: 'fitted', label: 'best law' },
       { role: 'limit', label: 'Chernoff bound of the best law' },
       { role: 'mean-bound', label: 'Chernoff bound from the mean alone' },
       { role: 'bound', label: 'Hoeffding: no independent trials above this edge' }
-    ],
+    ]),
     order: 'across',
     readings: points.map((point) => ({
       x: x(point.count),
@@ -96,11 +98,22 @@ function boundsOf(
   frame: Frame
 ): Mark[] {
   const line = (pick: (point: TailPoint) => number): (Point | null)[] =>
-    side.map((point) => [x(point.count), y(pick(point))]);
+    widened(side.map((point) => [x(point.count), y(pick(point))]));
   // Within one of the mean the bound is 1 and says nothing.
-  const edge = side.map((point): Point | null =>
-    point.hoeffding < 1 ? [x(point.count), y(point.hoeffding)] : null
+  const edge = widened(
+    side.map((point): Point | null => (point.hoeffding < 1 ? [x(point.count), y(point.hoeffding)] : null))
   );
+  // A bound that holds at one count alone is drawn over the width of that count: a line of one point is none.
+  function widened(points: (Point | null)[]): (Point | null)[] {
+    const there = points.filter((point) => point !== null);
+    if (there.length !== 1) return points;
+    const [[at, height]] = there;
+    const half = 0.35 * (x(1) - x(0));
+    return [
+      [at - half, height],
+      [at + half, height]
+    ];
+  }
   return [
     {
       kind: 'path',

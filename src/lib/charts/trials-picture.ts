@@ -3,6 +3,7 @@ import type { TrialsPart, TrialsPoint } from '$lib/stats/sensitivity/types';
 import { scaleLinear, scaleLog } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
 import { frameOf } from './frame-of';
+import { hatchEdge } from './hatch-edge';
 import { intervalPath } from './interval-path';
 import { linePath } from './line-path';
 import type { Mark, Picture, Point, Role, Size, Tick } from './picture';
@@ -56,6 +57,10 @@ export function trialsPicture({ points, critical }: TrialsPart, { width, text }:
   );
   const ticks = y.ticks(5);
   const { texts, exponent } = scaledTexts(ticks);
+  const ceiling: Point[] = [
+    [frame.left, y(1)],
+    [frame.right, y(1)]
+  ];
   const marked = critical !== null && critical >= first && critical <= last;
   const marks: Mark[] = [
     ...leftAxis(
@@ -65,7 +70,8 @@ export function trialsPicture({ points, critical }: TrialsPart, { width, text }:
       text,
       exponent
     ),
-    { kind: 'path', role: 'bound', d: `M${frame.left},${y(1).toFixed(2)}H${frame.right}` },
+    { kind: 'path', role: 'hatch', d: hatchEdge(ceiling, 'above', frame) },
+    { kind: 'path', role: 'bound', d: linePath(ceiling, frame) },
     {
       kind: 'path',
       role: 'fitted',

@@ -31,8 +31,47 @@ describe('what a legend and a label say', () => {
       drawn(ratePicture(await anyDiagnosis(wide, { trials: 12 }), { width: 760, text: 13 }), 'observed-more')
     ).toBe(true);
   });
+  it('never seen, horizon and edge are in the legend when they are drawn, and only then', async () => {
+    const none: [number, number][] = [
+      [0, 300],
+      [1, 500],
+      [2, 200]
+    ];
+    const seen = new Set<string>();
+    for (const diagnosis of [
+      await anyDiagnosis(WELDON, { trials: 12 }),
+      await anyDiagnosis(none, { trials: 2 }),
+      await anyDiagnosis([[3, 700]])
+    ])
+      for (const [name, draw] of Object.entries({ ratePicture, tailsPicture })) {
+        const picture = draw(diagnosis, { width: 760, text: 13 });
+        for (const role of ['unseen', 'shade', 'bound'] as const) {
+          const there = picture.legend.some((entry) => entry.role === role);
+          expect(there, `${name} ${role}`).toBe(drawn(picture, role));
+          seen.add(`${role} ${there}`);
+        }
+      }
+    expect([...seen].sort()).toEqual(expect.arrayContaining(['unseen false', 'unseen true', 'bound true']));
+  });
+  it('an edge that holds at one count alone is drawn over the width of that count', async () => {
+    // Mean 1.4: of the low counts 0 alone lies one below it.
+    const low: [number, number][] = [
+      [0, 300],
+      [1, 200],
+      [2, 350],
+      [3, 150]
+    ];
+    const picture = tailsPicture(await anyDiagnosis(low, { trials: 40 }), { width: 760, text: 13 });
+    const zero = picture.readings[0].x;
+    for (const role of ['bound', 'hatch'] as const) {
+      const path = picture.marks.find((mark) => mark.kind === 'path' && mark.role === role);
+      if (path?.kind !== 'path') throw new Error(`no ${role}`);
+      const { x } = coordinates(path.d);
+      expect(x.some((at) => Math.abs(at - zero) < 40)).toBe(true);
+    }
+  });
   it('the smallest p is an upright tick in chart and legend', () => {
-    expect(legendSample('smallest')).toEqual([{ kind: 'path', role: 'smallest', d: 'M15,2V14' }]);
+    expect(legendSample({ role: 'smallest' })).toEqual([{ kind: 'path', role: 'smallest', d: 'M15,2V14' }]);
   });
   it('the excess that matters is named right of the ceiling, narrow and wide', async () => {
     const diagnosis = await anyDiagnosis(WELDON, { trials: 12 });

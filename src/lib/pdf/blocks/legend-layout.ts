@@ -57,7 +57,7 @@ export function legendBeside(entries: LegendEntry[], width: number, pen: Pen): L
 /** Draws a legend with its corner at `left`, `top`. */
 export function drawLegend(legend: Legend, left: number, top: number, pen: Pen): void {
   for (const { entry, x, y, lines } of legend.placed) {
-    drawMarks(pen, legendSample(entry.role), left + x, top + y, SCALE);
+    drawMarks(pen, legendSample(entry), left + x, top + y, SCALE);
     lines.forEach((line, i) =>
       placeLine(line, left + x + LABEL, top + y - 0.3 + i * STYLES.small.leading, line.width, pen)
     );

@@ -18,7 +18,7 @@ export function because(
   const out: string[] = [];
   if (certificate && certificate.p <= options.alpha) {
     out.push(
-      `Exact certificate, without fit or simulation: ${formatCount(certificate.shots)} shots have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, where no independent trials with a mean within its limits${misread ? `, however misread at the ${evidence.rates ? 'rates within the interval' : 'rate stated'},` : ''} give more than ${formatNumber(certificate.bound, 3)} a shot (p at most ${formatNumber(certificate.p, 2)}).`
+      `Exact certificate, without fit or simulation: ${formatPercent(certificate.shots / evidence.shots)} of the shots (${formatCount(certificate.shots)}) have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, and no independent trials with a mean within its limits${misread ? `, however misread at the ${evidence.rates ? 'rates within the interval' : 'rate stated'},` : ''} give more than ${formatPercent(certificate.bound)} (p at most ${formatNumber(certificate.p, 2)}).`
     );
   }
   for (const alike of alikeTests(tests.filter((test) => test.pAdjusted <= options.alpha))) {

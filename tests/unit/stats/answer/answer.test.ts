@@ -117,7 +117,7 @@ describe('the words', () => {
   it('put the certificate first, since it needs neither fit nor simulation', () => {
     const { statement, because } = judge({ p: { fit: 0.001 }, over: { certificate } });
     expect(because[0]).toMatch(
-      /^Exact certificate, without fit or simulation: 9 shots have a count of 15 or more/
+      /^Exact certificate, without fit or simulation: 0\.\d\d\u202f% of the shots \(9\) have a count of 15 or more, and no independent/
     );
     expect(statement).toContain('whatever their probabilities');
   });
