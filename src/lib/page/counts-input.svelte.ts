@@ -1,3 +1,4 @@
+import { shownName } from '$lib/model/shown-name';
 import { defaultMaxBytes } from '$lib/formats/limits';
 import { isOtherText } from './is-other-text';
 import type { Settings } from './settings';
@@ -73,27 +74,28 @@ export class CountsInput {
    */
   async take(files: File[], wanted: () => boolean): Promise<boolean> {
     const [file] = files;
+    const name = shownName(file.name);
     let bytes: Uint8Array | null = null;
     try {
       if (file.size <= defaultMaxBytes) bytes = new Uint8Array(await file.arrayBuffer());
     } catch {
       // A folder, or a file that went away.
-      if (wanted()) this.notice = `${file.name} could not be opened.`;
+      if (wanted()) this.notice = `${name} could not be opened.`;
       return false;
     }
     if (!wanted()) return false;
     const text = bytes && bytes.length <= EDITABLE ? plainText(bytes) : null;
     if (text?.trim() === '') {
-      this.notice = `${file.name} is empty.`;
+      this.notice = `${name} is empty.`;
       return false;
     }
-    if (text !== null) this.replace(text, file.name);
+    if (text !== null) this.replace(text, name);
     else {
       this.#keep('replaced');
-      const origin: Origin = { name: file.name, text: '', settings: {} };
-      Object.assign(this, { text: '', origin, file: { name: file.name, size: file.size, bytes } });
+      const origin: Origin = { name, text: '', settings: {} };
+      Object.assign(this, { text: '', origin, file: { name, size: file.size, bytes } });
     }
-    this.notice = files.length > 1 ? `Of ${files.length} files, ${file.name} was taken.` : '';
+    this.notice = files.length > 1 ? `Of ${files.length} files, ${name} was taken.` : '';
     return true;
   }
 

@@ -1,3 +1,4 @@
+import { shownName } from '$lib/model/shown-name';
 import type { ConditionName } from '$lib/model/team/datasets/conditions';
 import type { NamedDataset, Preview } from '$lib/model/team/datasets/preview';
 import type { ReadingChoices } from '$lib/model/team/datasets/reading-choices';
@@ -58,7 +59,7 @@ export class Upload {
     const entries = files.map((file) => {
       const base = {
         key: this.#next++,
-        name: file.name,
+        name: shownName(file.name),
         message: '',
         preview: null,
         again: false,
