@@ -136,7 +136,7 @@ export const TEST_TERMS = {
   resample: {
     name: 'resample',
     words: [
-      'A histogram of as many shots drawn from the fitted law, fitted anew and measured like the real one.',
+      'A histogram of as many shots drawn from the law that is tested, fitted anew and measured like the real one.',
       'The share of resamples at least as extreme gives the p-value.'
     ],
     formula: ['p = frac{1 + x}{B + 1}', 'x "at least as extreme"'],

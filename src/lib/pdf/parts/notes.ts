@@ -110,12 +110,13 @@ export const NOTES = {
       'Half of the shots at p(1 − d), half at p(1 + d): the shares are taken to be equal, and only d is fitted. Where one setting had fewer shots the story fits worse than it could, and bursts or dead shots may lead in its place.'
     ]
   },
-  origin: {
+  /** @param drawn see sayDrawnFrom */
+  origin: (drawn: string): MarginNote => ({
     title: 'Where a p-value comes from',
     paragraphs: [
-      'Exact: by calculation. Resampled: histograms drawn from the fitted law, each fitted again, and counted. Permuted: the same shots in shuffled order. Limit law: for long lists of shots, the law that shuffling tends to. The smallest p that a test could have shown stands beside it.'
+      `Exact: by calculation. ${drawn} Permuted: the same shots in shuffled order. Limit law: for long lists of shots, the law that shuffling tends to. The smallest p that a test could have shown stands beside it.`
     ]
-  },
+  }),
   again: {
     title: 'The same again',
     paragraphs: [
@@ -134,4 +135,7 @@ export const NOTES = {
       'A pass is never a proof. Free fermions and particles that exclude their neighbours on an open line give counts that are exactly a sum of independent trials.'
     ]
   }
-} satisfies Record<string, MarginNote | ((tieWithin: number) => MarginNote)>;
+} satisfies Record<
+  string,
+  MarginNote | ((tieWithin: number) => MarginNote) | ((drawn: string) => MarginNote)
+>;

@@ -4,6 +4,7 @@ import { columnsOf } from '$lib/charts/columns-of';
 import { testsTable } from '$lib/charts/tests-table';
 import { testsTitle } from '$lib/charts/tests-title';
 import { TESTS } from '$lib/model/labels';
+import { sayDrawnFrom } from '$lib/model/report/say-drawn-from';
 import { sayOrigin } from '$lib/model/report/say-origin';
 import { sayHowOften } from '$lib/model/say-p';
 import type { Diagnosis } from '$lib/stats/types';
@@ -41,7 +42,7 @@ export function testsPart(document: Diagnosis): Part {
         ];
   return {
     title: 'Tests',
-    rows: [{ blocks: [...ran, ...left], notes: [NOTES.severalTests, NOTES.origin] }]
+    rows: [{ blocks: [...ran, ...left], notes: [NOTES.severalTests, NOTES.origin(sayDrawnFrom(document))] }]
   };
 }
 
