@@ -110,7 +110,10 @@ function legendOf(rows: ForestRow[]): LegendEntry[] {
     ...labels
       .filter(([kind]) => rows.some((row) => row.kind === kind))
       .map(([kind, label]) => ({ role: LOOKS[kind].point, label })),
-    { role: 'interval', label: 'from p of the test by itself; of a flag, over its tests' },
+    {
+      role: 'interval',
+      label: 'line: from a test’s own p to the p that allows for all; for a flag, over its tests'
+    },
     { role: 'smallest', label: 'smallest p it could show' }
   ];
 }

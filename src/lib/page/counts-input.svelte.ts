@@ -23,10 +23,10 @@ interface Kept {
   file: KeptFile | null;
 }
 
-/** Files up to this size are shown in the field and can be edited there. */
-const EDITABLE = 64 * 1024;
+/** Files of up to so many bytes are shown in the field and can be edited there. */
+export const EDITABLE = 64 * 1024;
 
-/** The counts as they stand: text in the field, or a file too large or too odd to show there. */
+/** The counts as they stand: text in the field, or a file too large or not plain enough to show there. */
 export class CountsInput {
   text = $state('');
   /** File, example or address that the text came from; null when typed or pasted. */

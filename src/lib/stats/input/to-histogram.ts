@@ -1,4 +1,5 @@
 import { BadInput, type CountData, type Histogram } from '../types';
+import { formatCount } from '../words/format-number';
 
 /** Counts of a shot list summed, or a histogram put in order and checked; rows without shots are dropped. */
 export function toHistogram(data: CountData): Histogram {
@@ -48,7 +49,7 @@ export function toHistogram(data: CountData): Histogram {
   const first = rows[0][0];
   if (before - first > widest) {
     throw new BadInput(
-      `The counts reach from ${first} to ${before}; at most ${widest} neighbouring counts can be diagnosed.`
+      `The counts reach from ${formatCount(first)} to ${formatCount(before)}; at most ${formatCount(widest)} neighbouring counts can be diagnosed.`
     );
   }
   return { kind: 'histogram', counts, lump, ...(below && { below }) };
