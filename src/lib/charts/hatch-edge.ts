@@ -20,10 +20,12 @@ export function hatchEdge(points: (Point | null)[], side: 'above' | 'below', fra
       const [ax, ay] = run[i - 1];
       const [bx, by] = run[i];
       const length = Math.hypot(bx - ax, by - ay);
+      // Strokes lean across the line: along a line that climbs their own way they could not be seen.
+      const lean = sign * (bx - ax) * (by - ay) > 0 ? -1 : 1;
       for (; due <= length; due += SPACING) {
         const x = ax + ((bx - ax) * due) / length;
         const y = ay + ((by - ay) * due) / length;
-        const tip = Math.min(frame.right, x + REACH);
+        const tip = Math.max(frame.left, Math.min(frame.right, x + lean * REACH));
         const end = Math.min(frame.bottom, Math.max(frame.top, y + sign * REACH));
         path += `M${round(x)},${round(y)}L${round(tip)},${round(end)}`;
       }

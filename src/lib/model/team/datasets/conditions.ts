@@ -1,3 +1,4 @@
+import { unturned } from '$lib/model/unturned';
 import { z } from 'zod';
 
 export const GEOMETRY_VALUES = ['sites', 'open-bonds', 'ring-bonds'] as const;
@@ -20,7 +21,7 @@ const text = (most: number) =>
     .string()
     .trim()
     .max(most, `Write at most ${most} characters.`)
-    .transform((typed) => typed || null)
+    .transform((typed) => unturned(typed).trim() || null)
     .nullable();
 const time = z
   .number()
@@ -39,9 +40,13 @@ export function isDay(day: string): boolean {
 export const conditionsSchema = z.strictObject({
   name: z
     .string()
-    .trim()
-    .min(1, 'Give the dataset a name.')
-    .max(LENGTHS.name, `Write at most ${LENGTHS.name} characters.`),
+    .transform((typed) => unturned(typed).trim())
+    .pipe(
+      z
+        .string()
+        .min(1, 'Give the dataset a name.')
+        .max(LENGTHS.name, `Write at most ${LENGTHS.name} characters.`)
+    ),
   device: text(LENGTHS.device),
   firmware: text(LENGTHS.firmware),
   quenchTime: time,
