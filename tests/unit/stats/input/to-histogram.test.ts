@@ -84,7 +84,7 @@ describe('toHistogram', () => {
         [0, 1],
         [20_001, 1]
       ]),
-      /from 0 to 20001/
+      /from 0 to 20\u202f001; at most 20\u202f000/
     ]
   ])('refuses %s', (_name, data, reason) => {
     expect(() => toHistogram(data)).toThrow(BadInput);
