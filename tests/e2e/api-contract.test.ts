@@ -58,7 +58,11 @@ const BODIES: Record<string, { body: string; headers: Record<string, string> }[]
   uploadDataset: [
     { body: 'count,shots\n0,31\n1,50\n2,20\n', headers: CSV_TYPE },
     {
-      body: JSON.stringify({ name: 'J', counts: { 0: 9, 1: 4 }, conditions: { trials: 4 } }),
+      body: JSON.stringify({
+        name: 'J',
+        counts: { 0: 9, 1: 4 },
+        conditions: { trials: 4, misread: 0.01, misreadUncertainty: 0.002, kept: '0-3' }
+      }),
       headers: JSON_TYPE
     }
   ],

@@ -74,6 +74,26 @@ describe('editing conditions', () => {
     await editor.page.getByRole('button', { name: 'Save these conditions' }).click();
     await editor.page.getByText('Write a time as a number').waitFor();
     expect(await editor.page.getByLabel('Quench time', { exact: true }).inputValue()).toBe('fast');
+    // Counts kept and the uncertainty of the rate: refused in words by field and by counts, then saved.
+    await editor.page.getByLabel('Quench time', { exact: true }).fill('');
+    await editor.page.getByLabel('Trials in a shot, N').fill('12');
+    await editor.page.getByLabel('Counts kept').fill('small ones');
+    await editor.page.getByLabel('Uncertainty of the chance to misread').fill('0.002');
+    await editor.page.getByRole('button', { name: 'Save these conditions' }).click();
+    await editor.page.getByText('Write the smallest and the largest count kept').waitFor();
+    expect(await editor.page.getByLabel('Counts kept').inputValue()).toBe('small ones');
+    await editor.page.getByLabel('Counts kept').fill('5-9');
+    await editor.page.getByRole('button', { name: 'Save these conditions' }).click();
+    await editor.page.getByText('Write the chance to misread a site as well').waitFor();
+    await editor.page.getByLabel('Chance to misread a site').fill('0.01');
+    await editor.page.getByRole('button', { name: 'Save these conditions' }).click();
+    await editor.page.getByText(/only counts from 5 to 9 are said to be kept/).waitFor();
+    expect(await editor.page.getByLabel('Counts kept').inputValue()).toBe('5-9');
+    await editor.page.getByLabel('Counts kept').fill('0-9');
+    await editor.page.getByRole('button', { name: 'Save these conditions' }).click();
+    await editor.page.getByText('The conditions are saved.').waitFor();
+    const stated = await editor.page.locator('dl').textContent();
+    for (const text of ['counts from 0 to 9', '0.0020']) expect(stated).toContain(text);
     const observer = await visitor(browser, server, people[2]);
     await observer.page.goto(at, { waitUntil: 'networkidle' });
     expect(await observer.page.getByRole('button', { name: /Save|aside|Diagnose/ }).count()).toBe(0);

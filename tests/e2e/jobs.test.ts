@@ -75,6 +75,38 @@ describe('a diagnosis by the server', () => {
     await page.context().close();
   });
 
+  it.each([
+    ['counts kept', { kept: '0-11' }, ['--kept', '0-11']],
+    [
+      'a misread rate with its uncertainty',
+      { geometry: 'open-bonds', misread: 0.01, misreadUncertainty: 0.002 },
+      ['--geometry', 'open-bonds', '--misread', '0.01', '--misread-uncertainty', '0.002']
+    ]
+  ] as const)('gives the bytes of the command line for %s', async (_, stated, options) => {
+    const { slug, team, page } = await setting();
+    const [datasetId] = await seedDice(server, team.id, ['Dice so stated'], 12, DICE, stated);
+    await askForJobs(page, server.address, slug, { dataset: [datasetId], resamples: 99, seed: 5 });
+    const { reports } = await until(
+      () => jobsOf(server, team.id),
+      (all) => all.reports.length === 1
+    );
+    const file = DICE.map((row) => row.join(',')).join('\n');
+    const known = [
+      'build-cli/diagnose.js',
+      '-',
+      '--trials',
+      '12',
+      '--resamples',
+      '99',
+      '--seed',
+      '5',
+      '--json'
+    ];
+    const printed = execFileSync(process.execPath, [...known, ...options], { input: file, encoding: 'utf8' });
+    expect(reports[0].document).toBe(printed);
+    await page.context().close();
+  });
+
   it('is cancelled within a second, and can be asked for again', async () => {
     const { slug, team, page, jobs } = await setting();
     const [datasetId] = await seedDice(server, team.id, ['Dice to cancel'], 12, LOADED);

@@ -5,6 +5,7 @@ import type { Dataset } from '$lib/formats/types';
 import { documentCsv } from '$lib/model/document-csv';
 import { documentText } from '$lib/model/document-text';
 import { plainText } from '$lib/model/plain-text/plain-text';
+import { writeKept } from '$lib/model/read-kept';
 import { defaultOptions } from '$lib/stats/default-options';
 import { diagnose } from '$lib/stats/diagnose';
 import { checkOptions } from '$lib/stats/input/check-options';
@@ -116,7 +117,10 @@ async function readSupplied(file: string): Promise<number[]> {
 /** Says which options the file settled, since nobody typed them. */
 function sayUsed(asked: Asked, dataset: Dataset): string[] {
   const used = Object.entries(dataset.suggested).filter(([name]) => !Object.hasOwn(asked.diagnose, name));
-  return used.map(([name, value]) => `The file states ${name}: ${value ?? 'unknown'}.`);
+  return used.map(
+    ([name, value]) =>
+      `The file states ${name}: ${typeof value === 'object' && value ? writeKept(value) : (value ?? 'unknown')}.`
+  );
 }
 
 function verdictCode({ failOn }: Asked, { answer }: Diagnosis): ExitCode {

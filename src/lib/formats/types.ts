@@ -81,6 +81,8 @@ export interface Suggested {
   geometry?: Geometry;
   misread?: number | null;
   misreadUncertainty?: number | null;
+  /** Counts kept; left out where no cut is stated. */
+  kept?: { from: number; to: number | null };
 }
 
 export interface Dataset {

@@ -1,4 +1,5 @@
 import { readKept } from '$lib/model/read-kept';
+import { SETTING_WORDS } from '$lib/model/setting-words';
 import type { DiagnoseOptions } from '$lib/stats/types';
 import { readNumber } from './read-number';
 import type { SettingName, Settings } from './settings';
@@ -39,22 +40,16 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
   const trials = readTrials(settings.trials);
   if (trials === undefined) problems.trials = 'Write a whole number from 1 to 1 000 000 000, or “unknown”.';
   const kept = settings.kept.trim() === '' ? null : readKept(settings.kept);
-  if (kept === null && settings.kept.trim() !== '')
-    problems.kept =
-      'Write the smallest and the largest count kept, such as 0-4, or 1- where only empty shots were dropped.';
+  if (kept === null && settings.kept.trim() !== '') problems.kept = SETTING_WORDS.kept;
   const law = await readLaw(settings.supplied);
   if (!law.ok) problems.supplied = law.problem;
   const whole = Number.isInteger;
   const unsure =
     settings.misreadUncertainty.trim() === ''
       ? null
-      : number(
-          'misreadUncertainty',
-          (x) => x >= 0 && x < 0.5,
-          'Write a standard uncertainty from 0 to below 0.5, such as 0.001, or leave it empty.'
-        );
+      : number('misreadUncertainty', (x) => x >= 0 && x < 0.5, SETTING_WORDS.misreadUncertainty);
   if (unsure !== null && settings.misread.trim() === '')
-    problems.misreadUncertainty = 'Write the chance to misread a site as well, or leave this empty.';
+    problems.misreadUncertainty = SETTING_WORDS.uncertaintyAlone;
   const options: DiagnoseOptions = {
     trials: trials ?? null,
     unit: settings.unit,
@@ -62,11 +57,7 @@ export async function readSettings(settings: Settings): Promise<SettingsRead> {
     misread:
       settings.misread.trim() === ''
         ? null
-        : number(
-            'misread',
-            (x) => x >= 0 && x < 0.5,
-            'Write a probability from 0 to below 0.5, or leave it empty: at 0.5 the reading says nothing.'
-          ),
+        : number('misread', (x) => x >= 0 && x < 0.5, SETTING_WORDS.misread),
     ...(unsure !== null && { misreadUncertainty: unsure }),
     ...(kept && { kept }),
     alpha: number('alpha', (x) => x > 0 && x < 0.5, 'Write a level between 0 and 0.5, such as 0.01.'),

@@ -37,11 +37,14 @@ export function seedDice(
   teamId: string,
   names: string[],
   trials = 12,
-  rows = DICE
+  rows = DICE,
+  more: Parameters<typeof makeDataset>[3] = {}
 ): Promise<string[]> {
   const counts = JSON.stringify({ kind: 'histogram', counts: rows, lump: null });
   return withDatabaseOf(server, (db) =>
-    names.map((name) => makeDataset(db, teamId, null, { name, counts, trials, shots: 26_306, largest: 11 }))
+    names.map((name) =>
+      makeDataset(db, teamId, null, { name, counts, trials, shots: 26_306, largest: 11, ...more })
+    )
   );
 }
 

@@ -50,6 +50,16 @@ describe('JSON', () => {
     expect(datasets('{"trials": null, "counts": {"2": 3}}')[0].suggested).toEqual({ trials: null });
   });
 
+  it('hands on counts kept, as a document or a person writes them, and refuses what is no cut', () => {
+    const kept = (text: string) => datasets(`{"kept": ${text}, "counts": {"2": 3}}`)[0].suggested.kept;
+    expect(kept('{"from": 1, "to": null}')).toEqual({ from: 1, to: null });
+    expect(kept('{"from": 0, "to": 4}')).toEqual({ from: 0, to: 4 });
+    expect(kept('"0-4"')).toEqual({ from: 0, to: 4 });
+    expect(kept('null')).toBeUndefined();
+    for (const wrong of ['"few"', '7', '{"from": -1}', '{"from": 0, "to": "4"}', '{}'])
+      expect(problems(`{"kept": ${wrong}, "counts": {"2": 3}}`)[0], wrong).toContain('The counts kept are ');
+  });
+
   it('reads the data of a diagnosis document again', () => {
     const document = {
       format: 'severalty.diagnosis/1',

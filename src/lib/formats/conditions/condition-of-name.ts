@@ -11,6 +11,8 @@ export type Stated =
   | 'unit'
   | 'trials'
   | 'misread'
+  | 'misreadUncertainty'
+  | 'kept'
   | 'postSelection'
   | 'measuredOn'
   | 'notes';
@@ -25,6 +27,11 @@ const words: [Stated, RegExp][] = [
   ['holdTime', /\b(hold|holding|wait|waiting|delay|haltezeit)\b/],
   ['quenchTime', /\b(quench|ramp|ramping|anneal|annealing|rampe|tau q|tauq)\b|^tau$/],
   ['geometry', /\b(geometry|geometrie|geometria|boundary|topology)\b/],
+  [
+    'misreadUncertainty',
+    /\b(misread|misreads|misreading|readout error|read out error)\b.*\b(uncertainty|sigma|std)\b|\b(uncertainty|sigma|std)\b.*\b(misread|misreads|misreading|readout error|read out error)\b/
+  ],
+  ['kept', /\b(kept|cut)\b/],
   ['misread', /\b(misread|misreads|misreading|readout error|read out error)\b/],
   ['postSelection', /\b(postselection|post selection|postselected|post selected|selection)\b/],
   ['measuredOn', /\b(date|day|datum|fecha|measured)\b/],

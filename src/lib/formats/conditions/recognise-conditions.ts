@@ -1,4 +1,5 @@
 import { bareConditions, LENGTHS, type Conditions } from '../../model/team/datasets/conditions';
+import { readKept, writeKept } from '../../model/read-kept';
 import { CONDITION_LABELS } from '../../model/team/datasets/condition-words';
 import type { Dataset } from '../types';
 import { conditionOfName, type Stated } from './condition-of-name';
@@ -35,7 +36,7 @@ export function recogniseConditions(dataset: Dataset, name = dataset.name): Reco
       said.push(`“${column}” fits no condition and is kept in the notes.`);
     }
   }
-  const { trials, unit, geometry, misread } = dataset.suggested;
+  const { trials, unit, geometry, misread, misreadUncertainty, kept } = dataset.suggested;
   if (trials !== undefined && trials !== null) {
     conditions.trials = trials;
     conditions.trialsWhy = 'Stated in the file.';
@@ -43,6 +44,8 @@ export function recogniseConditions(dataset: Dataset, name = dataset.name): Reco
   if (unit) conditions.unit = unit;
   if (geometry) conditions.geometry = geometry;
   if (misread !== undefined) conditions.misread = misread;
+  if (misreadUncertainty !== undefined) conditions.misreadUncertainty = misreadUncertainty;
+  if (kept) conditions.kept = writeKept(kept);
   const all = [conditions.notes, ...notes].filter((note) => note !== null).join('\n');
   conditions.notes = all === '' ? null : all.slice(0, LENGTHS.notes);
   return { conditions, said };
@@ -67,11 +70,17 @@ function place(conditions: Conditions, stated: Stated, cell: string, column: str
       conditions.trialsWhy = 'Stated in the file.';
       return true;
     }
-    case 'misread': {
+    case 'misread':
+    case 'misreadUncertainty': {
       const misread = Number(text.replace(',', '.'));
       if (text === '' || !(misread >= 0 && misread < 0.5)) return false;
-      conditions.misread = misread;
+      conditions[stated] = misread;
       return true;
+    }
+    case 'kept': {
+      const kept = readKept(text);
+      if (kept) conditions.kept = writeKept(kept);
+      return kept !== null;
     }
     case 'geometry': {
       const geometry = readGeometry(text);

@@ -1,3 +1,4 @@
+import { readKept } from '../../model/read-kept';
 import type { Geometry, Unit } from '../../stats/types';
 import type { Suggested } from '../types';
 import type { JsonReader } from './json-reader';
@@ -12,7 +13,7 @@ const rates = [
 ] as const;
 
 /** Keys of an object that state options of the diagnosis. */
-export const suggestedKeys = ['trials', 'unit', 'geometry', 'misread', 'misreadUncertainty'];
+export const suggestedKeys = ['trials', 'unit', 'geometry', 'misread', 'misreadUncertainty', 'kept'];
 
 /**
  * Options that an object states beside its counts; a value that cannot be one is a problem, since
@@ -47,7 +48,31 @@ export function readSuggested(reader: JsonReader, root: JsonNode): Suggested {
         );
     }
   }
+  const kept = readCut(reader, member(root, 'kept'));
+  if (kept) suggested.kept = kept;
   return suggested;
+}
+
+/** Counts kept, as `{"from": 0, "to": 4}` of a diagnosis document or as "0-4"; null where none were cut. */
+function readCut(reader: JsonReader, node: JsonNode | null): Suggested['kept'] | null {
+  if (!node || (node.kind === 'literal' && node.value === null)) return null;
+  const end = (key: string) => {
+    const given = member(node, key);
+    // Anything else than a number or nothing makes no cut that could be read.
+    return given?.kind === 'number'
+      ? given.raw
+      : !given || (given.kind === 'literal' && given.value === null)
+        ? ''
+        : '?';
+  };
+  const cut = readKept(node.kind === 'string' ? node.value : `${end('from')}-${end('to')}`);
+  if (!cut)
+    reader.problem(
+      node.at,
+      `The counts kept are ${describe(node)}.`,
+      'Give the smallest and the largest count kept, as "0-4" or "1-", or leave it out.'
+    );
+  return cut;
 }
 
 function oneOf<T extends string>(reader: JsonReader, node: JsonNode | null, allowed: T[]): T | null {

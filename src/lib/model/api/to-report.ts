@@ -42,6 +42,7 @@ export function toReport(report: Saved, statement: string | null, at: string): A
       geometry,
       misread,
       misreadUncertainty: report.options.misreadUncertainty ?? null,
+      kept: report.options.kept ?? null,
       alpha,
       tolerance,
       resamples,

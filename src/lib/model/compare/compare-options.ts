@@ -1,5 +1,6 @@
 import { GEOMETRIES, UNITS } from '$lib/model/labels';
 import type { DiagnoseOptions } from '$lib/stats/types';
+import { writeKept } from '../read-kept';
 import { compareLines } from './compare-lines';
 import type { ComparedPart } from './compared';
 
@@ -11,6 +12,8 @@ export function compareOptions(first: DiagnoseOptions, second: DiagnoseOptions):
     ['Unit', ...both(({ unit }) => UNITS[unit])],
     ['Counted on', ...both(({ geometry }) => GEOMETRIES[geometry])],
     ['Chance to misread a site', ...both(({ misread }) => misread ?? 'not stated')],
+    ['Uncertainty of that chance', ...both(({ misreadUncertainty }) => misreadUncertainty ?? 'not stated')],
+    ['Counts kept', ...both(({ kept }) => (kept ? writeKept(kept) : 'all'))],
     ['Level of the answer', ...both(({ alpha }) => alpha)],
     ['Excess that matters', ...both(({ tolerance }) => tolerance)],
     ['Resampled histograms at most', ...both(({ resamples }) => resamples)],

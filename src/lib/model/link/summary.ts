@@ -52,6 +52,7 @@ export interface Summary extends Pick<Diagnosis, 'answer' | 'cautions' | 'notRun
  */
 export function withoutCounts(diagnosis: Diagnosis): Summary {
   const { shots, trials, unit, geometry, misread, ordered, batches, lump, below } = diagnosis.data;
+  const { misreadUncertainty, kept } = diagnosis.data;
   const { version, alpha, tolerance } = diagnosis.engine;
   const { mean, variance, third, fourth, fano, dispersion } = diagnosis.moments;
   const { levels, poissonPart, divergenceInterval } = diagnosis.fit;
@@ -75,6 +76,8 @@ export function withoutCounts(diagnosis: Diagnosis): Summary {
       unit,
       geometry,
       misread,
+      ...(misreadUncertainty ? { misreadUncertainty } : {}),
+      ...(kept ? { kept } : {}),
       ordered,
       batches,
       lumped: lump !== null,

@@ -4,7 +4,10 @@ import { formatCount, formatNumber } from '../format-number';
 import { GEOMETRIES } from '../labels';
 
 /** "0.0100, standard uncertainty 0.0010". */
-export const sayStatedRate = ({ misread, misreadUncertainty }: Diagnosis['data']): string =>
+export const sayStatedRate = ({
+  misread,
+  misreadUncertainty
+}: Pick<Diagnosis['data'], 'misread' | 'misreadUncertainty'>): string =>
   misread === null
     ? 'not stated'
     : `${formatNumber(misread, 3)}${misreadUncertainty ? `, standard uncertainty ${formatNumber(misreadUncertainty, 2)}` : ''}`;

@@ -20,6 +20,8 @@ export const frozenConditionsSchema = z.object({
   trials: z.int().nullable().default(null),
   trialsWhy: words.default(null),
   misread: number.default(null),
+  misreadUncertainty: number.default(null),
+  kept: words.default(null),
   postSelection: words.default(null),
   measuredOn: words.default(null),
   notes: words.default(null)

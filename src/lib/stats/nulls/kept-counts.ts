@@ -2,7 +2,8 @@ import type { FitData } from '../fit/fit-data';
 import type { KeptCounts } from '../truncation/truncated-law';
 import { BadInput, type DiagnoseOptions, type Histogram } from '../types';
 import { sayKept } from '../words/say-kept';
-import { mostBonds, type MisreadUse } from './misread-applies';
+import type { MisreadUse } from './misread-applies';
+import { needTrialsForCut } from './need-trials-for-cut';
 
 /**
  * The counts kept, in the unit tested, when a cut was declared; null when none was.
@@ -22,8 +23,7 @@ export function keptCounts(
   const refuse = (reason: string): never => {
     throw new BadInput(reason);
   };
-  if (trials === null) return refuse('A cut can be allowed for only where the number of trials is known.');
-  if (trials > mostBonds) return refuse(`A cut can be allowed for only up to ${mostBonds} trials.`);
+  needTrialsForCut(trials);
   if (lump || below)
     return refuse(
       `${lump ? 'A closing row "or more"' : 'An opening row "or fewer"'} and a cut of the counts cannot both be allowed for.`

@@ -34,6 +34,8 @@ beforeAll(async () => {
       trials: 24,
       trialsWhy: SECRETS.trialsWhy,
       misread: null,
+      misreadUncertainty: null,
+      kept: null,
       postSelection: SECRETS.postSelection,
       measuredOn: '2031-02-03',
       notes: SECRETS.notes

@@ -1,4 +1,4 @@
-import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
@@ -77,6 +77,26 @@ describe('migrateDatabase', () => {
       /1 rows refer to rows that do not exist: dataset 1 → team/
     );
     expect(db.$client.pragma('foreign_keys', { simple: true })).toBe(1);
+  });
+
+  it('keeps datasets that are older than counts kept and the uncertainty of a misread rate', () => {
+    const files = readdirSync('drizzle').filter((name) => name.endsWith('.sql'));
+    const older = files
+      .filter((name) => name < '0005')
+      .map((name) => readFileSync(join('drizzle', name), 'utf8'));
+    for (const statement of older.join('--> statement-breakpoint').split('--> statement-breakpoint'))
+      db.$client.exec(statement);
+    db.$client.exec(`INSERT INTO team (id, slug, name, created_at) VALUES ('t', 'ours', 'Ours', 1);
+      INSERT INTO original_file (id, team_id, name, sha256, size, bytes, created_at)
+        VALUES ('f', 't', 'f.csv', 'x', 0, x'', 1);
+      INSERT INTO dataset (id, team_id, name, file_id, reading, counts, kind, digest, shots, mean, largest, geometry,
+        unit, misread, created_at, updated_at)
+        VALUES ('d', 't', 'Old', 'f', '{}', '{}', 'histogram', 'x', 3, 1, 2, 'sites', 'defect', 0.01, 1, 1);`);
+    const added = readFileSync('drizzle/0005_cut-and-uncertainty.sql', 'utf8');
+    for (const statement of added.split('--> statement-breakpoint')) db.$client.exec(statement);
+    expect(db.$client.prepare('SELECT name, misread, misread_uncertainty, kept FROM dataset').all()).toEqual([
+      { name: 'Old', misread: 0.01, misread_uncertainty: null, kept: null }
+    ]);
   });
 
   it('applies the committed migrations, and finds nothing to do the second time', () => {

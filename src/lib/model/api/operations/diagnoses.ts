@@ -10,7 +10,7 @@ export const DIAGNOSIS_OPERATIONS: Operation[] = [
     part: 'Diagnoses',
     summary: 'Ask for a diagnosis',
     about:
-      'Trials, unit, geometry and misread rate come from the conditions of the dataset. The same diagnosis that still waits or runs is given instead of a second one.',
+      'Trials, unit, geometry, misread rate with its uncertainty and counts kept come from the conditions of the dataset. The same diagnosis that still waits or runs is given instead of a second one.',
     scope: 'diagnose',
     idOf: 'dataset',
     once: true,

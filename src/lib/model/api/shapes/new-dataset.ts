@@ -52,6 +52,7 @@ export const newDatasetQuery = z.strictObject({
   holdTime: number(shape.holdTime),
   trials: number(shape.trials),
   misread: number(shape.misread),
+  misreadUncertainty: number(shape.misreadUncertainty),
   format: z
     .enum(['auto', 'counts', 'shots', 'positions'])
     .optional()

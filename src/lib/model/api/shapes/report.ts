@@ -35,6 +35,10 @@ export const reportSchema = z.object({
     misreadUncertainty: orNull.describe(
       'Standard uncertainty of the misread rate; null where it was taken as exact'
     ),
+    kept: z
+      .object({ from: z.int(), to: z.int().nullable() })
+      .nullable()
+      .describe('Counts kept; null where no shot was dropped by its count'),
     alpha: z.number(),
     tolerance: z.number(),
     resamples: z.int(),

@@ -14,6 +14,8 @@ export const CONDITION_LABELS: Record<ConditionName, string> = {
   trials: 'Trials in a shot, N',
   trialsWhy: 'Why that number of trials',
   misread: 'Chance to misread a site',
+  misreadUncertainty: 'Uncertainty of the chance to misread',
+  kept: 'Counts kept',
   postSelection: 'Post-selection',
   measuredOn: 'Measured on',
   notes: 'Notes'
@@ -32,7 +34,11 @@ export const CONDITION_HELP: Record<ConditionName, string> = {
   trials: 'Sites, bonds or modes that could each hold one defect. Empty where there is no such limit.',
   trialsWhy: 'Where the number comes from: a referee will ask.',
   misread: 'From calibration, such as 0.01. Empty when not known.',
-  postSelection: 'Which shots were left out, and by what rule. Empty when all were kept.',
+  misreadUncertainty:
+    'One standard uncertainty of the calibration, such as 0.001. Empty where the chance is taken as exact.',
+  kept: 'Where shots were dropped by their count: 0-4, or 1- where only empty shots were. Empty when none were.',
+  postSelection:
+    'Which shots were left out by another rule, and by which; it is told, and not allowed for. Empty when all were kept.',
   // A date field shows in what order it wants the parts.
   measuredOn: '',
   notes: 'Whatever else should be known.'

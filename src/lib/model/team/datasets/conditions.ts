@@ -1,5 +1,7 @@
 import { unturned } from '$lib/model/unturned';
 import { z } from 'zod';
+import { readKept, writeKept } from '../../read-kept';
+import { SETTING_WORDS } from '../../setting-words';
 
 export const GEOMETRY_VALUES = ['sites', 'open-bonds', 'ring-bonds'] as const;
 export const UNIT_VALUES = ['defect', 'pair'] as const;
@@ -27,6 +29,17 @@ const time = z
   .number()
   .min(0, 'A time is 0 or more.')
   .max(1e15, 'Write the time in a larger unit.')
+  .nullable();
+
+/** Counts kept, written as readKept reads them: whatever dash was typed, one way of writing is kept. */
+const kept = z
+  .string()
+  .trim()
+  .refine((typed) => typed === '' || readKept(typed) !== null, SETTING_WORDS.kept)
+  .transform((typed) => {
+    const read = readKept(typed);
+    return read && writeKept(read);
+  })
   .nullable();
 
 /** Whether a text is a day that exists, as YYYY-MM-DD. */
@@ -57,7 +70,13 @@ export const conditionsSchema = z.strictObject({
   unit: z.enum(UNIT_VALUES),
   trials: z.number().int().min(1).max(1e9).nullable(),
   trialsWhy: text(LENGTHS.trialsWhy),
-  misread: z.number().min(0).lt(0.5).nullable(),
+  misread: z.number().min(0, SETTING_WORDS.misread).lt(0.5, SETTING_WORDS.misread).nullable(),
+  misreadUncertainty: z
+    .number()
+    .min(0, SETTING_WORDS.misreadUncertainty)
+    .lt(0.5, SETTING_WORDS.misreadUncertainty)
+    .nullable(),
+  kept,
   postSelection: text(LENGTHS.postSelection),
   measuredOn: z
     .string()
@@ -85,6 +104,8 @@ export function bareConditions(name: string): Conditions {
     trials: null,
     trialsWhy: null,
     misread: null,
+    misreadUncertainty: null,
+    kept: null,
     postSelection: null,
     measuredOn: null,
     notes: null

@@ -1,3 +1,4 @@
+import { SETTING_WORDS } from '../../setting-words';
 import { conditionsSchema, type ConditionName, type Conditions } from './conditions';
 import { typedNumber } from './typed-number';
 
@@ -8,7 +9,8 @@ const numbers: Partial<Record<ConditionName, string>> = {
   quenchTime: 'Write a time as a number, such as 2.5; its unit has a field of its own.',
   holdTime: 'Write a time as a number, such as 2.5; its unit has a field of its own.',
   trials: 'Write a whole number from 1 to 1 000 000 000, or leave it empty.',
-  misread: 'Write a probability from 0 to below 0.5, or leave it empty.'
+  misread: SETTING_WORDS.misread,
+  misreadUncertainty: SETTING_WORDS.misreadUncertainty
 };
 
 /**

@@ -7,6 +7,12 @@ import { frozenConditionsSchema } from '../frozen-conditions';
  * The files of a team's archive. Paths in it are made by us and are never used as paths of a disk; people are text.
  */
 
+/** Conditions in an archive: one made before a condition existed lacks it, and nothing was stated then. */
+export const archivedConditionsSchema = conditionsSchema.extend({
+  misreadUncertainty: conditionsSchema.shape.misreadUncertainty.default(null),
+  kept: conditionsSchema.shape.kept.default(null)
+});
+
 /** Every path that may stand in an archive; anything else refuses the whole. */
 export const ARCHIVE_PATH =
   /^(manifest\.json|README\.txt|team\.json|events\.json|reports\.json|(datasets|reports)\/\d{5}\.json|datasets\/\d{5}\.csv|originals\/[0-9a-f]{64})$/;
@@ -44,7 +50,7 @@ export const countsSchema = z.discriminatedUnion('kind', [
 
 export const datasetFileSchema = z.strictObject({
   format: z.literal('severalty.dataset/1'),
-  conditions: conditionsSchema,
+  conditions: archivedConditionsSchema,
   counts: countsSchema,
   digest: z.string(),
   part: z.string().max(10_000).nullable(),
@@ -90,6 +96,8 @@ const optionsSchema = z.strictObject({
   resamples: whole,
   seed: whole,
   misread: z.number().min(0).max(1).nullable(),
+  misreadUncertainty: z.number().min(0).max(1).nullable().optional(),
+  kept: z.strictObject({ from: whole, to: whole.nullable() }).nullable().optional(),
   geometry: z.enum(['sites', 'open-bonds', 'ring-bonds']),
   supplied: z.array(z.number().min(0).max(1)).nullable()
 });

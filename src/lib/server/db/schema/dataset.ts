@@ -42,6 +42,10 @@ export const dataset = sqliteTable(
     trials: integer('trials'),
     trialsWhy: text('trials_why'),
     misread: real('misread'),
+    /** One standard uncertainty of that rate. */
+    misreadUncertainty: real('misread_uncertainty'),
+    /** Counts kept, as 0-4 or 1-; null when no shot was dropped by its count. */
+    kept: text('kept'),
     postSelection: text('post_selection'),
     /** Day of the measurement, YYYY-MM-DD. */
     measuredOn: text('measured_on'),

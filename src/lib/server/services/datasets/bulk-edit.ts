@@ -10,6 +10,9 @@ import { mayWhere } from '../access/may-where';
 import { recordEvent } from '../events/record-event';
 import { misfits } from './misfits';
 
+/** Conditions that have to go together, with each other and with the counts. */
+const EXPERIMENT = ['trials', 'unit', 'geometry', 'misread', 'misreadUncertainty', 'kept'] as const;
+
 export type BulkEdited =
   | { ok: true; changed: number }
   /** At least one of them is not there, or not the team's. */
@@ -36,7 +39,7 @@ export function bulkEdit(db: Database, actor: Actor, edit: BulkEdit, now = Date.
         .all();
       if (rows.length < wanted.length) return { ok: false, reason: 'unknown' };
       const after = rows.map((row) => ({ row, conditions: { ...row, ...edit.set } }));
-      const touchesCounts = 'trials' in edit.set || 'unit' in edit.set;
+      const touchesCounts = EXPERIMENT.some((name) => name in edit.set);
       const troubles = after.flatMap(({ row, conditions }) => {
         const problems = touchesCounts ? misfits(conditions, JSON.parse(row.counts) as CountData) : {};
         return Object.keys(problems).length > 0 ? [{ id: row.id, name: row.name, problems }] : [];

@@ -1,4 +1,5 @@
 import { and, count, eq, inArray, isNull } from 'drizzle-orm';
+import { optionsOfConditions } from '../../../model/team/datasets/options-of-conditions';
 import { MOST_JOBS, type Hardness } from '../../../model/team/jobs/job-request';
 import { defaultOptions } from '../../../stats/default-options';
 import { checkOptions } from '../../../stats/input/check-options';
@@ -26,8 +27,8 @@ export type Enqueued =
   | { ok: false; reason: 'too-many'; queued: number; most: number };
 
 /**
- * Asks for diagnoses of datasets, all or none. What is known of each experiment (trials, unit, geometry, misread rate)
- * comes from the dataset's own conditions; `hardness` says how hard to look. A second click adds nothing: the same
+ * Asks for diagnoses of datasets, all or none. What is known of each experiment (trials, unit, geometry, misread rate, counts
+ * kept) comes from the dataset's own conditions; `hardness` says how hard to look. A second click adds nothing: the same
  * diagnosis that still waits or runs is given instead.
  */
 export function enqueueJobs(
@@ -46,7 +47,9 @@ export function enqueueJobs(
           trials: dataset.trials,
           unit: dataset.unit,
           geometry: dataset.geometry,
-          misread: dataset.misread
+          misread: dataset.misread,
+          misreadUncertainty: dataset.misreadUncertainty,
+          kept: dataset.kept
         })
         .from(dataset)
         .where(
@@ -62,7 +65,7 @@ export function enqueueJobs(
       for (const id of wanted) {
         const conditions = found.get(id);
         if (!conditions) return { ok: false, reason: 'unknown' };
-        const options = { ...defaultOptions, ...given(hardness), ...conditions };
+        const options = { ...defaultOptions, ...given(hardness), ...optionsOfConditions(conditions) };
         const why = trouble(options);
         if (why !== null) return { ok: false, reason: 'bad-options', why };
         asked.push({ id, options: JSON.stringify(options) });

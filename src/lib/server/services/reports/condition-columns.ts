@@ -14,6 +14,8 @@ export const conditionColumns = {
   trials: dataset.trials,
   trialsWhy: dataset.trialsWhy,
   misread: dataset.misread,
+  misreadUncertainty: dataset.misreadUncertainty,
+  kept: dataset.kept,
   postSelection: dataset.postSelection,
   measuredOn: dataset.measuredOn,
   notes: dataset.notes

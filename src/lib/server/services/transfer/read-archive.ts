@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { diagnosisSchema } from '$lib/model/diagnosis-schema';
-import { conditionsSchema } from '$lib/model/team/datasets/conditions';
 import {
+  archivedConditionsSchema,
   datasetFileSchema,
   reportsFileSchema,
   teamFileSchema,
@@ -72,7 +72,7 @@ function read<T>(files: Map<string, Uint8Array>, path: string, schema: z.ZodType
 
 function readDataset(files: Map<string, Uint8Array>, path: string): ReadDataset {
   const asWritten = read(files, path, datasetFileSchema);
-  const file = { ...asWritten, conditions: conditionsSchema.parse(asWritten.conditions) };
+  const file = { ...asWritten, conditions: archivedConditionsSchema.parse(asWritten.conditions) };
   const { sha256, size } = file.original;
   const original =
     files.get(`originals/${sha256}`) ?? bad(`${path}: its original file ${sha256} is missing.`);

@@ -2,6 +2,8 @@ import { bareConditions, conditionsSchema } from '$lib/model/team/datasets/condi
 import { freshQuery, readDatasetQuery, writeDatasetQuery } from '$lib/model/team/datasets/dataset-query';
 import { readTypedConditions } from '$lib/model/team/datasets/read-typed-conditions';
 import { typedConditions, typedConditionsSchema } from '$lib/model/team/datasets/typed-conditions';
+import { readSettings } from '$lib/page/read-settings';
+import { freshSettings } from '$lib/page/settings';
 import { describe, expect, it } from 'vitest';
 
 const full = {
@@ -11,6 +13,8 @@ const full = {
   quenchUnit: 'µs',
   trials: 1000,
   misread: 0.05,
+  misreadUncertainty: 0.004,
+  kept: '1-',
   measuredOn: '2026-03-14'
 };
 
@@ -20,7 +24,14 @@ describe('conditions in a form', () => {
   });
 
   it('take numbers as people type them', () => {
-    const typed = { ...typedConditions(full), quenchTime: '2,5', trials: '1 000', misread: '5e-2' };
+    const typed = {
+      ...typedConditions(full),
+      quenchTime: '2,5',
+      trials: '1 000',
+      misread: '5e-2',
+      misreadUncertainty: '0,004',
+      kept: ' 1 – '
+    };
     expect(readTypedConditions(typed)).toEqual({ ok: true, conditions: full });
     expect(readTypedConditions({ ...typed, trials: 'unknown' })).toMatchObject({
       conditions: { trials: null }
@@ -46,6 +57,15 @@ describe('conditions in a form', () => {
     expect(parsed.error?.issues.map(({ path }) => path[0]).sort()).toEqual(
       ['geometry', 'measuredOn', 'misread', 'name', 'notes', 'quenchTime', 'trials'].sort()
     );
+  });
+
+  it('say of a rate, its uncertainty and a cut what the first page says', async () => {
+    const wrong = { misread: '0.5', misreadUncertainty: '0.5', kept: 'small ones' };
+    const read = readTypedConditions({ ...typedConditions(full), ...wrong });
+    const first = await readSettings({ ...freshSettings(), ...wrong });
+    expect(read.ok || first.ok).toBe(false);
+    expect(!read.ok && read.problems).toEqual(!first.ok && first.problems);
+    expect(!read.ok && Object.keys(read.problems)).toHaveLength(3);
   });
 
   it('are refused with anything else beside them', () => {

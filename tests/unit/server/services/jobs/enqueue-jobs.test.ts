@@ -2,6 +2,7 @@ import { MOST_JOBS } from '$lib/model/team/jobs/job-request';
 import { dataset, event, job } from '$lib/server/db/schema';
 import { enqueueJobs } from '$lib/server/services/jobs/enqueue-jobs';
 import { defaultOptions } from '$lib/stats/default-options';
+import type { DiagnoseOptions } from '$lib/stats/types';
 import { eq } from 'drizzle-orm';
 import { describe, expect, it } from 'vitest';
 import { freshDatabase } from '../../../../support/fresh-database';
@@ -43,6 +44,17 @@ describe('enqueueJobs', () => {
     });
     expect(row).toMatchObject({ teamId, status: 'queued', createdBy: actor.personId, createdAt: 55 });
     expect(db.select().from(event).all()).toMatchObject([{ action: 'job.queue', thing: id, at: 55 }]);
+  });
+
+  it('takes counts kept and the uncertainty of the misread rate with it, and leaves them out where not stated', () => {
+    const { db, actor } = setting();
+    const experiment = { trials: 24, misread: 0.02, misreadUncertainty: 0.003, kept: '1-9' };
+    const stated = makeDataset(db, actor.teamId, null, experiment);
+    const options = JSON.parse(jobOf(db, idOf(enqueueJobs(db, actor, [stated]))).options) as DiagnoseOptions;
+    expect(options).toMatchObject({ misreadUncertainty: 0.003, kept: { from: 1, to: 9 } });
+    const bare = makeDataset(db, actor.teamId, null, { trials: 24 });
+    const without = JSON.parse(jobOf(db, idOf(enqueueJobs(db, actor, [bare]))).options) as DiagnoseOptions;
+    expect('kept' in without || 'misreadUncertainty' in without).toBe(false);
   });
 
   it('gives a second click the job that is there already', () => {
