@@ -93,7 +93,7 @@ describe('the referee’s page', () => {
     await page.getByRole('button', { name: 'Add a claim' }).click();
     await type(3, '1.0', '0.2');
     await page.getByRole('button', { name: 'Check these claims' }).click();
-    await page.getByText('Of 3 claims 1 agree, 1 do not, of 1 the data cannot tell.').waitFor();
+    await page.getByText('3 claims: 1 agreed with, 1 disagreed with, 1 that the data cannot tell.').waitFor();
     expect(await row(0).textContent()).toMatch(/Agrees\./);
     expect(await row(1).textContent()).toMatch(/Does not agree\. The report has/);
     expect(await row(3).textContent()).toMatch(/Cannot tell\./);

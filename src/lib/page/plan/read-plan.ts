@@ -1,3 +1,4 @@
+import { formatCount } from '$lib/model/format-number';
 import {
   longestChain,
   mostTrials,
@@ -36,7 +37,7 @@ function readCounting(fields: PlanFields, problems: PlanProblems): { mean: numbe
   if (!(mean > 0 && mean <= 1e6))
     problems.mean = 'Write the mean count, above 0 and up to 1 000 000, such as 4.2.';
   else if (trials && mean >= trials)
-    problems.mean = `The mean must be below N = ${trials}: so many defects leave no room to vary.`;
+    problems.mean = `The mean must be below N = ${formatCount(trials)}: so many defects leave no room to vary.`;
   return { mean, trials: trials ?? null };
 }
 

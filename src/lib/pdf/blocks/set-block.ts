@@ -14,8 +14,8 @@ import { setTable } from './set-table';
 import { setTerms } from './set-terms';
 import { setVerdict } from './set-verdict';
 
-/** Sets one block at the cursor. */
-export function setBlock(flow: Flow, block: Block, parent: Element): void {
+/** Sets one block at the cursor. `after`: points of what stands under a table and must not be parted from its last row. */
+export function setBlock(flow: Flow, block: Block, parent: Element, after = 0): void {
   switch (block.kind) {
     case 'heading':
       return setHeading(flow, block, parent);
@@ -28,7 +28,7 @@ export function setBlock(flow: Flow, block: Block, parent: Element): void {
     case 'facts':
       return setFacts(flow, block.facts, parent);
     case 'table':
-      return setTable(flow, block, parent);
+      return setTable(flow, block, parent, after);
     case 'figure':
       return setFigure(flow, block, parent);
     case 'formulas':

@@ -47,9 +47,15 @@ function setRow(flow: Flow, { blocks, notes }: Row, section: PDFKit.PDFStructure
       flow.skip(gapBetween(blocks[i - 1], block));
       flow.need(leastHeight(flow, blocks.slice(i)));
     }
-    setBlock(flow, block, main);
+    setBlock(flow, block, main, footHeight(flow, block, blocks[i + 1]));
   });
 }
+
+/** Room for the foot of a table, which must not begin a page alone: its first two lines, and the gaps around it. */
+const footHeight = (flow: Flow, block: Block, next?: Block): number =>
+  block.kind === 'table' && next?.kind === 'paragraph' && next.look === 'smallFaint'
+    ? leastHeight(flow, [next]) + gapBetween(block, next) + 5
+    : 0;
 
 /** Room that a row needs: its first blocks, and its notes, which no page may part from what they are about. */
 const leastRow = (flow: Flow, row: Row | undefined, room = flow.room): number =>

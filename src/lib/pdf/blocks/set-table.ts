@@ -15,8 +15,12 @@ interface Spanning {
   dictionary: { data: Record<string, unknown> };
 }
 
-/** A table of figures on the decimal point, as wide as it must be; its heading stands again on every page. */
-export function setTable(flow: Flow, block: Block & { kind: 'table' }, parent: Element): void {
+/**
+ * A table of figures on the decimal point, as wide as it must be; its heading stands again on every page.
+ *
+ * @param after points of its foot, which stands on the page of the last row
+ */
+export function setTable(flow: Flow, block: Block & { kind: 'table' }, parent: Element, after = 0): void {
   const layout = tableLayout(block.table, block.digits, flow.pen);
   if (layout.wide) flow.clearMargin();
   const head =
@@ -38,7 +42,7 @@ export function setTable(flow: Flow, block: Block & { kind: 'table' }, parent: E
   for (let i = 0; i < rows; i++) {
     const under = block.under?.[i] ?? null;
     const needed = row + (under === null ? 0 : words);
-    if (flow.room < needed + 3) {
+    if (flow.room < needed + 3 + (i === rows - 1 ? after : 0)) {
       doubleRule(flow.doc, PAGE.left, flow.y, layout.width);
       flow.newPage();
       setHead(flow, layout, null, head);
