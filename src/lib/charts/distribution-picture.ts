@@ -68,7 +68,7 @@ export function distributionPicture(diagnosis: Diagnosis, { width, text }: Size)
         main
       )
     },
-    ...residualMarks([...groups, ...(together === 1 ? lumps.map((lump) => [lump]) : [])], place, below, text),
+    ...residualMarks(groups, lumps, place, below, text),
     ...bottomAxis(below, countTicks(x, text, lumps), countTitle(diagnosis), text)
   ];
   return {

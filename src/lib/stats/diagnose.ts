@@ -17,6 +17,7 @@ import { adjust } from './multiple/adjust';
 import { independentNull } from './nulls/independent-null';
 import { keptCounts } from './nulls/kept-counts';
 import { keptNull } from './nulls/kept-null';
+import { cutReach } from './truncation/cut-reach';
 import { meanFixesVariance } from './nulls/mean-fixes-variance';
 import { misreadApplies } from './nulls/misread-applies';
 import { misreadNull } from './nulls/misread-null';
@@ -125,7 +126,8 @@ export async function diagnose(
     misread,
     rates: over?.spread,
     drift,
-    fixed
+    fixed,
+    cut: kept ? cutReach(tested.mostDispersed.window, kept, trials!) : undefined
   });
   const pairs = pairsReport(given, counts.total, options, evidence.even);
   const flags = raiseFlags(evidence);

@@ -1,11 +1,10 @@
 import { normalQuantile } from '../numerics/normal-quantile';
 import type { Interval } from '../types';
-import { varianceShape } from './smallest-excess';
 
 /** Shots in all that would decide, if the truth is what the data suggest; null when nothing suggests it. */
 export interface Deciding {
-  mean: number;
-  trials: number | null;
+  /** S times the relative variance of variance over ceiling; null where there is nothing to compare. */
+  shape: number | null;
   shots: number;
   dispersion: Interval;
   tolerance: number;
@@ -27,8 +26,7 @@ const power = 0.842;
  * The nearer of the two. `shape` is S times the relative variance of a sample variance (see varianceShape).
  */
 export function shotsToDecide(deciding: Deciding): number | null {
-  const { mean, trials, shots, dispersion, tolerance, alpha, tests } = deciding;
-  const shape = varianceShape(mean, trials);
+  const { shape, shots, dispersion, tolerance, alpha, tests } = deciding;
   if (shape === null || dispersion.value === null) return null;
   const excess = Math.max(0, dispersion.value - 1);
   const room = tolerance - excess;

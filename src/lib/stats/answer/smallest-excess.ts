@@ -6,10 +6,15 @@ const reach = 2.49;
  * ceiling: 2.49·√((2 + κ4/κ2²)/S), from the sampling error of a variance, with κ4/κ2² of equal trials.
  *
  * @param mean mean count, 0 < mean < N
+ * @param shape S times the relative variance of the statistic, where it is not that of a plain variance (keptShape)
  * @returns null when the ceiling is 0
  */
-export function smallestExcess(mean: number, trials: number | null, shots: number): number | null {
-  const shape = varianceShape(mean, trials);
+export function smallestExcess(
+  mean: number,
+  trials: number | null,
+  shots: number,
+  shape = varianceShape(mean, trials)
+): number | null {
   return shape === null ? null : reach * Math.sqrt(shape / shots);
 }
 

@@ -74,7 +74,7 @@ function splitOf(
 ): BatchSplit | string {
   // Few shots so cut scatter their mean over a ceiling that bends, by 23 % of it for two shots of Bin(20, 0.1) cut at 4.
   if (options.kept)
-    return 'A cut was declared, and the ceiling of counts so cut follows the mean of each batch in a bend: the excess is not split by batch.';
+    return 'The excess was not split by batch, since a cut was declared: the ceiling of counts so cut bends with the mean, and with few shots a batch it would be off by up to a quarter. Diagnose the batches one by one instead.';
   if (new Set(names).size === 1)
     return 'All shots belong to one batch, so there is no drift between batches to tell.';
   const parts = batchParts(shots, names);

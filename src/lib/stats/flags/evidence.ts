@@ -10,6 +10,8 @@ export interface Evidence {
   trials: number | null;
   /** Two counts only: their mean says what their variance is (meanFixesVariance). */
   fixed?: boolean;
+  /** With a declared cut: how variance over ceiling scatters (keptShape), and the largest excess that fits into the cut. */
+  cut?: { shape: number | null; most: number };
   /** With misreads allowed for, ceiling and dispersion are those of kinks as read. */
   moments: Omit<Diagnosis['moments'], 'criticalTrials'>;
   /** Whether every test allows for misread sites; left out, none was stated. */

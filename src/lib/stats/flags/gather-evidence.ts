@@ -22,6 +22,7 @@ export interface Gathered {
   rates: RateSpread | undefined;
   drift: DriftPart | undefined;
   fixed: boolean;
+  cut: Evidence['cut'];
 }
 
 /** What flags and the answer are decided from, out of the parts of a diagnosis. */
@@ -38,7 +39,8 @@ export function evidenceOf({
   misread,
   rates,
   drift,
-  fixed
+  fixed,
+  cut
 }: Gathered): Evidence {
   return {
     options,
@@ -50,6 +52,7 @@ export function evidenceOf({
     neighbours,
     misread,
     fixed,
+    ...(cut && { cut }),
     ...(rates && { rates }),
     ...(drift && { drift }),
     lowTailOfTheRest: fitted.lowTailOfTheRest,

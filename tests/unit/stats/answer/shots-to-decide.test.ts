@@ -3,8 +3,7 @@ import { varianceShape } from '$lib/stats/answer/smallest-excess';
 import { describe, expect, it } from 'vitest';
 
 const deciding = (value: number, over: Partial<Deciding> = {}): Deciding => ({
-  mean: 4,
-  trials: 20,
+  shape: varianceShape(4, 20),
   shots: 100,
   dispersion: { value, low: null, high: null },
   tolerance: 0.1,
@@ -44,7 +43,7 @@ describe('shotsToDecide', () => {
 
   it('is never under 50, and null where there is nothing to compare', () => {
     expect(shotsToDecide(deciding(15, { shots: 3 }))).toBe(50);
-    expect(shotsToDecide(deciding(1, { mean: 0 }))).toBeNull();
+    expect(shotsToDecide(deciding(1, { shape: varianceShape(0, 20) }))).toBeNull();
     expect(shotsToDecide({ ...deciding(1), dispersion: { value: null, low: null, high: null } })).toBeNull();
   });
 });
