@@ -72,9 +72,9 @@ export async function writeParts(
   setPart(flow, answer, { rule: false });
   // The answer has its page to itself.
   if (flow.pageNumber === 1) flow.newPage();
-  for (const part of parts) {
+  for (const [i, part] of parts.entries()) {
     await others();
-    setPart(flow, part, { rule: true });
+    setPart(flow, part, { rule: true, ...(i === parts.length - 2 && { last: parts[i + 1] }) });
   }
   flow.finish();
   root.end();

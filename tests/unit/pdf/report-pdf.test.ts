@@ -102,6 +102,13 @@ describe.each(DOCUMENTS)('report of %s', (name, make) => {
     expect(Math.min(...seconds)).toBeLessThan(1);
   });
 
+  it('ends with cautions that begin on the page of the part before', () => {
+    const heads = pdf.marked.filter(({ tag }) => tag === 'H2');
+    const [before, last] = heads.slice(-2);
+    expect(plainSpaces(last.text)).toBe('Cautions');
+    expect(before.page).toBe(last.page);
+  });
+
   it('lets others have their turn while it is made', async () => {
     let turns = 0;
     const counting = setInterval(() => turns++, 0);

@@ -4,19 +4,28 @@ import { rule } from '../page/rule';
 import { tag } from '../page/tags';
 import { STYLES } from '../type/styles';
 import type { Block, Part, Row } from './blocks';
+import { factsHeight } from './set-facts';
 import { leastHeight, setBlock } from './set-block';
 import { setLines } from './set-lines';
 import { notesHeight, setNotes } from './set-notes';
 
 const GAP = 9;
 
-/** One part of the report under its own rule, with an entry in the outline. */
-export function setPart(flow: Flow, part: Part, look: { rule: boolean }): void {
+/**
+ * One part of the report under its own rule, with an entry in the outline.
+ *
+ * @param look `last`: the part that follows as the last one, which is short: it begins on the page of this one, or would
+ * stand alone on a page of its own
+ */
+export function setPart(flow: Flow, part: Part, look: { rule: boolean; last?: Part }): void {
   const section = tag(flow.doc, flow.root, 'Sect');
   flow.clearMargin();
   flow.skip(15);
   const head = STYLES.section.leading + 16;
-  flow.need(head + leastRow(flow, part.rows[0], flow.room - head));
+  const least = head + leastRow(flow, part.rows[0], flow.room - head);
+  // What does not fit on a page anyway is not held together.
+  const together = look.last ? wholeHeight(flow, part) + 15 + head + leastRow(flow, look.last.rows[0]) : 0;
+  flow.need(together <= PAGE.bottom - PAGE.top ? Math.max(least, head + together) : least);
   if (look.rule) {
     rule(flow.doc, PAGE.left, flow.y, PAGE.whole, 'line');
     flow.y += 8;
@@ -56,6 +65,17 @@ const footHeight = (flow: Flow, block: Block, next?: Block): number =>
   block.kind === 'table' && next?.kind === 'paragraph' && next.look === 'smallFaint'
     ? leastHeight(flow, [next]) + gapBetween(block, next) + 5
     : 0;
+
+/** Points that a part of facts and short paragraphs takes under its heading, its notes beside them. */
+const wholeHeight = (flow: Flow, { rows }: Part): number =>
+  rows.reduce((sum, { blocks, notes }) => {
+    const set = blocks.reduce(
+      (height, block) =>
+        height + GAP + (block.kind === 'facts' ? factsHeight(flow, block.facts) : leastHeight(flow, [block])),
+      0
+    );
+    return sum + Math.max(set, notesHeight(notes ?? [], flow.pen));
+  }, 0);
 
 /** Room that a row needs: its first blocks, and its notes, which no page may part from what they are about. */
 const leastRow = (flow: Flow, row: Row | undefined, room = flow.room): number =>
