@@ -13,7 +13,10 @@ export async function remarkAction(place: RemarkPlace, form: FormData) {
   const taken = await takeRemark(place, { section, threadId, body });
   if (!taken.ok) {
     const { status, title } = taken.problem;
-    return fail(status, { remark: { section, threadId, body, message: title } satisfies RemarkForm });
+    const signedAs = textOf(form, 'signedAs');
+    return fail(status, {
+      remark: { section, threadId, body, message: title, signedAs } satisfies RemarkForm
+    });
   }
   const message = taken.missed ? 'The remark was kept. The mail about it could not be sent.' : '';
   return { remark: { section, threadId, body: '', message } satisfies RemarkForm };

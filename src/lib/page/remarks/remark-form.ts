@@ -3,5 +3,7 @@ export interface RemarkForm {
   section: string;
   threadId: string;
   body: string;
+  /** Name that was typed with it, where the reader may sign. */
+  signedAs?: string;
   message: string;
 }
