@@ -2,6 +2,7 @@ import { formatCount } from '$lib/model/format-number';
 import type { Measured, PublishedCumulants } from '$lib/stats/cumulants-only/published-cumulants';
 import { readNumber } from '../read-number';
 import { readTrials } from '../read-settings';
+import { roundingOf } from './rounding-of';
 import type { CumulantField, CumulantFields } from './fields';
 
 export type CumulantProblems = Partial<Record<CumulantField, string>>;
@@ -23,6 +24,9 @@ export function readCumulants(fields: CumulantFields): CumulantsRead {
   const measured = (name: 'mean' | 'variance' | 'third' | 'fourth'): Measured => {
     const value = number(name);
     const field = `${name}-error` as const;
+    const rounding = fields[field].trim() === '' ? roundingOf(fields[name]) : null;
+    if (rounding !== null && rounding >= 1e-9 * Math.abs(value))
+      return { value, error: rounding, rounded: true };
     const error = readNumber(fields[field]);
     if (error === 0)
       problems[field] =

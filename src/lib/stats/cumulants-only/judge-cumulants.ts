@@ -20,6 +20,8 @@ export interface CumulantsVerdict {
   nearest: NearestReachable;
   /** Whether the bounds of the distance meet. Errors a billion times apart leave too few digits for that. */
   settled: boolean;
+  /** Cumulants without a printed error, from 1 on: rounding alone stands for it, and of chance nothing can be said. */
+  rounded: number[];
   /** Printed minus nearest, each in its own error. */
   pulls: number[];
   /** At most this often do errors of this size turn up when some independent trials are true, errors independent. */
@@ -52,6 +54,9 @@ const long = 1e5;
  *
  * Compatible asks in addition that the upper 95 % limit of variance over ceiling lies below 1.1, and that the bounds of
  * the distance meet: a variance of 3.6 ± 1e-10 beside a mean of 4 ± 0.05 was 59 errors away by one and 0 by the other.
+ * Where an error was not printed, rounding alone stands for it. How far the shots themselves scatter is then not known, so
+ * the answer is neither compatible nor ruled out.
+ *
  * @param printed errors > 0; a mean from 0 to N, a variance ≥ 0
  */
 export function judgeCumulants(printed: PublishedCumulants): CumulantsVerdict {
@@ -75,13 +80,22 @@ export function judgeCumulants(printed: PublishedCumulants): CumulantsVerdict {
   const ruledOut = p <= alpha;
   const seen = dispersion.high !== null && dispersion.high < 1 + tolerance;
   const settled = nearest.distance - nearest.atLeast <= apart * (1 + nearest.distance);
+  const rounded = given.flatMap((one, i) => (one.rounded ? [i + 1] : []));
+  const known = rounded.length === 0;
   const beyondAny = broken.some(({ slack, error }) => -slack > misprint * error);
   return {
-    verdict: beyondAny ? 'impossible' : ruledOut ? 'ruled-out' : seen && settled ? 'compatible' : 'undecided',
+    verdict: beyondAny
+      ? 'impossible'
+      : known && ruledOut
+        ? 'ruled-out'
+        : known && seen && settled
+          ? 'compatible'
+          : 'undecided',
     conditions: conditionsOf(values, errors, (at) => trialLimits(trials, at)),
     broken,
     nearest,
     settled,
+    rounded,
     pulls: values.map((value, i) => (value - nearest.cumulants[i]) / errors[i]),
     p,
     pAnyErrors,

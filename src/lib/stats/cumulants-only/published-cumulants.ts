@@ -3,6 +3,8 @@ export interface Measured {
   value: number;
   /** One standard deviation, > 0. */
   error: number;
+  /** No error was printed: `error` is half a unit of the last digit, which is what rounding leaves open. */
+  rounded?: true;
 }
 
 /** A line of a published table: cumulants of counts in defects to their power, with no histogram. */

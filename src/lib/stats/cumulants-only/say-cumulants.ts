@@ -14,13 +14,26 @@ export const sayBroken = ({ order, side }: Condition): string =>
 
 /** The answer in one or two sentences, plain first. */
 export function sayCumulants(judged: CumulantsVerdict): string {
-  return said(judged) + sayMisprint(judged);
+  return said(judged) + sayMisprint(judged) + sayRounding(judged);
 }
 
 /** What no counts have as printed, though within the errors some do. */
 function sayMisprint({ verdict, broken }: CumulantsVerdict): string {
   if (verdict === 'impossible' || broken.length === 0) return '';
   return ` As printed no counts at all have them: ${sayBroken(broken[0])} for any counts, though by less than three of its errors.`;
+}
+
+/** Which errors were not printed, and what stands for them. */
+function sayRounding({ rounded, verdict }: CumulantsVerdict): string {
+  if (rounded.length === 0) return '';
+  const names = rounded.map((order) => NAMES[order - 1]);
+  const listed =
+    names.length > 1 ? `${names.slice(0, -1).join(', ')} and ${names[names.length - 1]}` : names[0];
+  const scatter =
+    verdict === 'impossible'
+      ? ''
+      : ' That is not how far the shots scatter: with the standard errors it can be told what chance does.';
+  return ` No error was given for the ${listed}, so half a unit of the last digit typed is taken, as rounding leaves it.${scatter}`;
 }
 
 function said({
@@ -31,7 +44,8 @@ function said({
   nearest,
   settled,
   pulls,
-  p
+  p,
+  rounded
 }: CumulantsVerdict): string {
   if (verdict === 'impossible') {
     const worst = broken.reduce((a, b) => (b.slack / b.error < a.slack / a.error ? b : a));
@@ -47,10 +61,19 @@ function said({
   }
   if (!settled)
     return 'The errors are of such different sizes that the distance of these cumulants from independent trials cannot be worked out in sixteen digits. Look for a slip in the smallest of them.';
+  if (rounded.length > 0) {
+    // k numbers, each off by its half unit at most, lie √k of them away at most.
+    const within = nearest.distance <= Math.sqrt(pulls.length) * (1 + 1e-9);
+    if (nearest.distance === 0)
+      return 'Some independent trials can have these cumulants as they are printed.';
+    return within
+      ? 'Some independent trials may have had these cumulants before they were rounded: as printed they lie outside, by no more than rounding can do.'
+      : `As printed, rounding allowed for, these cumulants lie outside what independent trials can have${first ? `: ${sayBroken(first)}` : ''}. If they are exact, no independent trials have them.`;
+  }
   const where =
     nearest.distance === 0
       ? 'Some independent trials can have these cumulants'
-      : `These cumulants lie outside what independent trials can have, by ${formatNumber(nearest.distance, 2)} of their errors: chance does that`;
+      : `Within their errors some independent trials can have these cumulants; as printed they lie outside, by ${formatNumber(nearest.distance, 2)} of their errors: chance does that`;
   if (dispersion.value === null)
     return `${where}. But this mean leaves no room for a variance, so there is no ceiling to measure an excess against.`;
   return verdict === 'compatible'

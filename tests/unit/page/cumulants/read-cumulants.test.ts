@@ -1,6 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { publishedPlace } from '$lib/charts/published-place';
 import { FRESH_CUMULANTS, type CumulantFields } from '$lib/page/cumulants/fields';
+import { roundingOf } from '$lib/page/cumulants/rounding-of';
+import { generator } from '$lib/stats/random/generator';
 import { judge } from '$lib/page/cumulants/judged';
 import { readCumulants } from '$lib/page/cumulants/read-cumulants';
 
@@ -54,11 +56,71 @@ describe('readCumulants', () => {
     [{ third: '1e400', 'third-error': '0.2' }, 'third', /up to 10¹² in size/],
     [{ third: '', 'third-error': '0.2' }, 'third', /Write a number.*leave it empty/],
     [{ third: '2', 'third-error': 'NaN' }, 'third-error', /standard error/],
-    [{ 'variance-error': '' }, 'variance-error', /standard error/],
-    [{ third: '1' }, 'third-error', /standard error/],
+    [{ variance: '3.4000000000001', 'variance-error': '' }, 'variance-error', /standard error/],
     [{ fourth: '1', 'fourth-error': '1' }, 'third', /only with the third/]
   ] as const)('refuses %o beside %s', (more, field, words) => {
     expect(problems(more)[field]).toMatch(words);
+  });
+});
+
+describe('cumulants without an error', () => {
+  it.each([
+    ['4', 0.5],
+    ['4.05', 0.005],
+    ['−0,30', 0.005],
+    ['1.50e-3', 0.000005],
+    ['12 000', 0.5],
+    ['.5', 0.05],
+    ['3.', 0.5],
+    ['four', null],
+    ['', null]
+  ])('%s is known to half a unit of its last digit', (typed, half) => {
+    expect(roundingOf(typed)).toBe(half);
+  });
+
+  /** Moments of independent trials, rounded to so many decimals. */
+  const rounded = (ps: number[], decimals: number): CumulantFields => {
+    const sum = (of: (p: number) => number) => ps.reduce((all, p) => all + of(p), 0).toFixed(decimals);
+    return {
+      ...FRESH_CUMULANTS,
+      trials: String(ps.length),
+      mean: sum((p) => p),
+      variance: sum((p) => p * (1 - p)),
+      third: sum((p) => p * (1 - p) * (1 - 2 * p)),
+      fourth: sum((p) => p * (1 - p) * (1 - 6 * p * (1 - p)))
+    };
+  };
+
+  it('are never said to lie outside where trials were rounded', async () => {
+    const random = generator(3, 0);
+    let printedOutside = 0;
+    for (let table = 0; table < 300; table++) {
+      const equal = random.next();
+      const ps = Array.from({ length: 2 + (table % 20) }, () => (table % 2 ? equal : random.next()));
+      const read = readCumulants(rounded(ps, 1 + (table % 3)));
+      // The mean may be rounded to N or 0, the variance to 0.
+      if (!read.ok) throw new Error(JSON.stringify(read.problems));
+      const { verdict, statement } = await judge(read.printed, '');
+      expect(['undecided'], statement).toContain(verdict.verdict);
+      expect(statement).toMatch(/^Some independent trials (can have|may have had) these cumulants/);
+      expect(statement).toMatch(/half a unit of the last digit typed is taken/);
+      if (verdict.nearest.distance > 0) printedOutside++;
+    }
+    // What made the rule: equal trials lie on the edge, and rounding puts half of them outside.
+    expect(printedOutside).toBeGreaterThan(50);
+  });
+
+  it('far outside are said to be, but not to be ruled out, since shots scatter', async () => {
+    const read = readCumulants(
+      table({ 'mean-error': '', 'variance-error': '', mean: '4.00', variance: '6.00' })
+    );
+    if (!read.ok) throw new Error(JSON.stringify(read.problems));
+    const { verdict, statement } = await judge(read.printed, '');
+    expect(verdict.verdict).toBe('undecided');
+    expect(statement).toMatch(
+      /^As printed, rounding allowed for, .*variance is above its ceiling.*If they are exact/
+    );
+    expect(statement).toMatch(/No error was given for the mean and variance/);
   });
 });
 
