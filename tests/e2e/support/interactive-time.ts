@@ -6,7 +6,10 @@ export interface InteractiveTime {
   answers: number;
   /** Largest thing of the first screen drawn (Largest Contentful Paint). */
   drawn: number;
-  /** End of the last task of more than 50 ms before half a second without one; the first drawing where there is none. */
+  /**
+   * End of the last task of more than 50 ms before half a second without one, while nobody asks anything; the first
+   * drawing where there is none.
+   */
   quiet: number;
   /** How far things moved meanwhile (cumulative layout shift). */
   shift: number;
@@ -23,20 +26,32 @@ interface Noted {
 }
 
 /**
- * Opens a page without a cache on a processor slowed `slower` times, and presses an arrow key in its first chart over
- * and over until it answers. The presses are the page's own events, since each of the browser's would wait for a
- * round trip; they come every 20 ms, so a time is late by that much at most, and by what the pressing costs.
+ * Opens a page twice without a cache on a processor slowed `slower` times. The first time an arrow key is pressed in its
+ * first chart over and over until it answers. The presses are the page's own events, since each of the browser's would
+ * wait for a round trip; they come every 20 ms, so a time is late by that much at most, and by what the pressing costs.
+ * The second time it is left alone: fifty presses a second keep a slow processor busy by themselves.
  */
 export async function interactiveTime(
   context: BrowserContext,
   address: string,
   slower = 4
 ): Promise<InteractiveTime> {
+  const asked = await opening(context, address, slower, true);
+  const { quiet } = await opening(context, address, slower, false);
+  return { ...asked, quiet };
+}
+
+async function opening(
+  context: BrowserContext,
+  address: string,
+  slower: number,
+  pressed: boolean
+): Promise<InteractiveTime> {
   const page = await context.newPage();
   const tools = await context.newCDPSession(page);
   await tools.send('Network.setCacheDisabled', { cacheDisabled: true });
   await tools.send('Emulation.setCPUThrottlingRate', { rate: slower });
-  await page.addInitScript(() => {
+  await page.addInitScript((pressed) => {
     const noted: Noted = { answers: 0, drawn: 0, first: 0, shift: 0, tasks: [] };
     Object.assign(window, { noted });
     const watch = (type: string, note: (entry: PerformanceEntry) => void): void =>
@@ -47,6 +62,7 @@ export async function interactiveTime(
     watch('paint', ({ name, startTime }) => {
       if (name === 'first-contentful-paint') noted.first = startTime;
     });
+    if (!pressed) return;
     const press = setInterval(() => {
       const figure = [...document.querySelectorAll('figure')].find((one) =>
         one.querySelector('[role="application"]')
@@ -61,9 +77,9 @@ export async function interactiveTime(
         .querySelector('[role="application"]')
         ?.dispatchEvent(new KeyboardEvent('keydown', { key: 'ArrowRight', bubbles: true, cancelable: true }));
     }, 20);
-  });
+  }, pressed);
   await page.goto(address, { waitUntil: 'load' });
-  await page.waitForFunction(() => (window as unknown as { noted: Noted }).noted.answers > 0);
+  if (pressed) await page.waitForFunction(() => (window as unknown as { noted: Noted }).noted.answers > 0);
   // Half a second of quiet, slowed as everything here is, and the last long task is told a moment after it ended.
   await page.waitForTimeout(1500);
   const noted = await page.evaluate(() => (window as unknown as { noted: Noted }).noted);
