@@ -64,7 +64,7 @@ describe('previewFile', () => {
     const { db, lead } = setting();
     const preview = previewOf(db, lead, store(db, lead, 'count,shots\n0,5\n90000,2\n'));
     expect(preview.datasets).toEqual([]);
-    expect(preview.problems[0].message).toMatch(/reach from 0 to 90000/);
+    expect(preview.problems[0].message).toMatch(/reach from 0 to 90\u202f000/);
     db.$client.close();
   });
 
