@@ -1,11 +1,13 @@
 import type { FitData } from '../fit/fit-data';
-import { sampleMoments } from '../fit/sample-moments';
 import { chainClimb, type ChainClimb, type ChainProblem } from './chain-climb';
 import type { Kept } from './chain-score';
 import { chainSpace, type Chain } from './chain-space';
 import { misreadCeiling } from './misread-ceiling';
 import { saturated } from '../resampling/divergence';
 import { evenChain, twoLevels } from './chain-starts';
+import { kinksOf } from './kinks-of';
+import { ringCeiling } from './ring-ceiling';
+import type { Unit } from '../types';
 
 /** The best chain found, and the best of equal bonds. */
 export interface ChainFit extends ChainClimb {
@@ -43,21 +45,29 @@ const mostToOrder = 200;
  * the answer then is that it cannot tell (restsOnSearch).
  *
  * @param data trials = N bonds; `kept` sets counts aside that lie outside it (conditioned law), null for none
+ * @param ring the chain closes to a ring, whose counts are told singly or in pairs; its even total is part of the law
  * @param enough nats to which the last climb is made
  */
-export function chainFit(data: FitData, rate: number, kept: Kept | null = null, enough = 1e-9): ChainFit {
-  const bonds = data.trials!;
+export function chainFit(
+  data: FitData,
+  rate: number,
+  kept: Kept | null = null,
+  enough = 1e-9,
+  ring?: Unit
+): ChainFit {
+  const { bonds, moments } = kinksOf(data, ring);
+  const round = ring !== undefined;
   const problem: ChainProblem = {
     space: chainSpace(bonds, kept ? mostLevelsCut : mostLevels),
     data,
     rate,
-    kept
+    kept,
+    ...(ring && { ring })
   };
-  const moments = sampleMoments(data);
   // Counts set aside move the mean: several starts stand in for the one that is right without.
   const means = kept ? [1, 0.8, 1.25].map((share) => moments.mean * share) : [moments.mean];
   const even = means
-    .map((mean) => chainClimb(problem, evenChain(bonds, mean, rate), 1e-6))
+    .map((mean) => chainClimb(problem, evenChain(bonds, mean, rate, round), 1e-6))
     .reduce((a, b) => (b.value > a.value ? b : a));
   let best = even;
   const searched = new Map<number, number>();
@@ -66,7 +76,7 @@ export function chainFit(data: FitData, rate: number, kept: Kept | null = null, 
     if (known !== undefined) return known;
     const tried = new Map<number, ChainClimb>();
     const at = (many: number): number => {
-      const start = tried.has(many) ? null : twoLevels(bonds, many, apart, moments, rate);
+      const start = tried.has(many) ? null : twoLevels(bonds, many, apart, moments, rate, round);
       if (start) tried.set(many, chainClimb(problem, start, 1e-6));
       return tried.get(many)?.value ?? -Infinity;
     };
@@ -84,7 +94,7 @@ export function chainFit(data: FitData, rate: number, kept: Kept | null = null, 
     bonds >= 4 &&
     bonds <= mostToOrder &&
     misfit &&
-    moments.variance < misreadCeiling(bonds, rate)(moments.mean).variance
+    moments.variance < (round ? ringCeiling : misreadCeiling)(bonds, rate)(moments.mean).variance
   )
     bestLength(setApart, (bonds >> 1) + 1);
   for (let levels = 2; levels < (kept ? mostLevelsCut : mostLevels); levels++) {

@@ -1,12 +1,13 @@
 import type { FitData } from '../fit/fit-data';
-import { sampleMoments } from '../fit/sample-moments';
 import type { Refit } from '../fit/refit';
+import type { Unit } from '../types';
 import type { Window } from '../laws/window';
 import { chainClimb, type ChainClimb, type ChainProblem } from './chain-climb';
 import { mostLevels, mostLevelsCut } from './chain-fit';
 import type { Kept } from './chain-score';
 import { chainSpace, type Chain, type ChainSpace } from './chain-space';
 import { evenChain, twoLevels } from './chain-starts';
+import { kinksOf } from './kinks-of';
 import { readWindow, type ReadChain } from './read-chain';
 
 /** Nats to which a climb is made; G² varies by several between resamples. */
@@ -30,14 +31,15 @@ export type ChainRefit = Omit<Refit, 'levels'> & { levels: ReadChain };
 export function chainRefit(
   data: FitData,
   from: ReadChain,
-  space: ChainSpace = chainSpace(data.trials!, from.kept ? mostLevelsCut : mostLevels),
+  space: ChainSpace = chainSpace(kinksOf(data, from.ring).bonds, from.kept ? mostLevelsCut : mostLevels),
   settled = Infinity
 ): ChainRefit {
-  const bonds = data.trials!;
-  const { rate } = from;
+  const { rate, ring } = from;
+  const { bonds, moments } = kinksOf(data, ring);
+  const round = ring !== undefined;
   const cut = from.kept ?? null;
   const kept = data.withoutEmpty ? { from: Math.max(1, cut?.from ?? 1), to: cut?.to ?? Infinity } : cut;
-  const problem: ChainProblem = { space, data, rate, kept };
+  const problem: ChainProblem = { space, data, rate, kept, ...(ring && { ring }) };
   let best = chainClimb(problem, { p: from.p, runs: from.runs }, enough, settled);
   const attempt = (start: Chain | null): number => {
     if (!start || best.value >= settled) return -Infinity;
@@ -45,25 +47,29 @@ export function chainRefit(
     if (found.value > best.value) best = found;
     return found.value;
   };
-  const moments = sampleMoments(data);
-  if (from.p.length > 1 || best.value === -Infinity) attempt(evenChain(bonds, moments.mean, rate));
+  if (from.p.length > 1 || best.value === -Infinity) attempt(evenChain(bonds, moments.mean, rate, round));
   const lengths = (bonds > long ? [0.25, 0.7] : shares).map((share) =>
     Math.min(bonds - 1, Math.max(1, Math.round(share * bonds)))
   );
-  const values = lengths.map((many) => attempt(twoLevels(bonds, many, 1, moments, rate)));
+  const values = lengths.map((many) => attempt(twoLevels(bonds, many, 1, moments, rate, round)));
   const top = values.indexOf(Math.max(...values));
   if (bonds <= long && values[top] > -Infinity) {
     for (const stride of [bonds / 8, -bonds / 8]) {
       const many = lengths[top] + Math.round(stride);
-      attempt(twoLevels(bonds, many, 1, moments, rate));
+      attempt(twoLevels(bonds, many, 1, moments, rate, round));
     }
   }
-  return asRefit(best, rate, cut);
+  return asRefit(best, rate, cut, ring);
 }
 
 /** A climb's chain with its pmf. */
-export function asRefit({ chain, value }: ChainClimb, rate: number, kept: Kept | null = null): ChainRefit {
-  const levels = { ...chain, rate, ...(kept && { kept }) };
+export function asRefit(
+  { chain, value }: ChainClimb,
+  rate: number,
+  kept: Kept | null = null,
+  ring?: Unit
+): ChainRefit {
+  const levels = { ...chain, rate, ...(kept && { kept }), ...(ring && { ring }) };
   const window: Window = readWindow(levels, 1e-20, 1);
   return { levels, logLikelihood: value, window };
 }

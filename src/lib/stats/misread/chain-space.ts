@@ -38,6 +38,7 @@ export function chainSpace(bonds: number, levels: number): ChainSpace {
  * @param chain no more levels than the space has room for
  * @param trim part of the largest value below which the ends are left out
  * @param last counts above are left out: the others do not depend on them
+ * @param start weights of the first site read rightly and wrongly
  *
  * A step is linear in p, so its slope adds (z − 1)(f − g), upright as it stands and flipped with the other sign.
  */
@@ -46,12 +47,12 @@ export function chainSlopes(
   { p, runs }: Chain,
   rate: number,
   trim: number,
-  last = Infinity
+  last = Infinity,
+  start: readonly [upright: number, flipped: number] = [1 - rate, rate]
 ): void {
   const { f, g, df, dg } = space;
   for (const values of [f, g, ...df, ...dg]) values.fill(0);
-  f[0] = 1 - rate;
-  g[0] = rate;
+  [f[0], g[0]] = start;
   let low = 0;
   let high = 0;
   const met = p.map(() => false);

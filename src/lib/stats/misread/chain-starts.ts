@@ -1,8 +1,12 @@
 import { chainMoments } from './chain-moments';
 import type { Chain } from './chain-space';
+import { ringEven } from './ring-even';
+import { ringMoments } from './ring-moments';
 
 /** All bonds alike, with the mean wanted or the nearest to it that kinks can give. */
-export function evenChain(bonds: number, mean: number, rate: number): Chain {
+export function evenChain(bonds: number, mean: number, rate: number, ring = false): Chain {
+  // From p = 0 a ring would never be left: its slope is 0 there, since kinks come in pairs.
+  if (ring) return { p: [Math.max(1e-4, ringEven(bonds, mean, rate))], runs: [{ level: 0, trials: bonds }] };
   const toggled = 2 * rate * (1 - rate);
   const p = (mean / bonds - toggled) / (1 - 2 * toggled);
   return { p: [Math.min(1, Math.max(0, p))], runs: [{ level: 0, trials: bonds }] };
@@ -45,10 +49,12 @@ export function twoLevels(
   many: number,
   apart: number,
   moments: { mean: number; variance: number },
-  rate: number
+  rate: number,
+  ring = false
 ): Chain | null {
-  const even = evenChain(bonds, moments.mean, rate).p[0];
-  const excess = chainMoments([{ p: even, trials: bonds }], rate).variance - moments.variance;
+  const even = evenChain(bonds, moments.mean, rate, ring).p[0];
+  const widest = ring ? ringMoments(bonds, even, rate) : chainMoments([{ p: even, trials: bonds }], rate);
+  const excess = widest.variance - moments.variance;
   const square = 1 - 4 * rate * (1 - rate);
   const few = bonds - many;
   if (!(excess > 0) || !(square > 2 / 3) || many < 1 || few < 1) return null;

@@ -11,6 +11,10 @@ import type { KinkMean } from './log-misread-tail';
  * kinks follows from μ = κ(1 − 2q) + Nq, q = 2ε(1 − ε), which is exact.
  *
  * @param mean mean count read
+ * On a ring half the count is a sum of independent trials once the flips are known (see misreadCertificate), and a
+ * mean over flips varies by at most N/4·(1 − u²)(1 + 3u²), N times the largest eigenvalue of the toggles' covariance:
+ * v = 2μ(1 − μ/N) + that.
+ *
  * @param rate ε with (1 − 2ε)² ≥ 2/3
  * @returns limits within 0 … N
  * Source: Bernstein 1924; Boucheron, Lugosi & Massart 2013, Concentration Inequalities, corollary 2.11 (m).
@@ -20,12 +24,17 @@ export function kinkMeanLimits(
   shots: number,
   bonds: number,
   rate: number,
-  miss: number
+  miss: number,
+  ring = false
 ): KinkMean {
   const lost = 4 * rate * (1 - rate);
   const weight = 3 - 2 / (1 - lost);
   const budget = Math.log(2 / miss) / shots;
-  const variance = (mu: number) => (bonds - (weight * (bonds - 2 * mu) ** 2) / bonds) / 4;
+  const square = 1 - lost;
+  const variance = (mu: number) =>
+    ring
+      ? 2 * mu * (1 - mu / bonds) + (bonds * lost * (1 + 3 * square)) / 4
+      : (bonds - (weight * (bonds - 2 * mu) ** 2) / bonds) / 4;
   // Positive where a true mean μ is too far from the one read to be believed.
   const far = (mu: number) => {
     const t = Math.abs(mu - mean);

@@ -2,6 +2,7 @@ import { tailThresholds } from '../bounds/tail-thresholds';
 import type { Certificate } from '../types';
 import { kinkMeanLimits } from './kink-mean-limits';
 import { logMisreadTail } from './log-misread-tail';
+import { ringTail } from './ring-tail';
 import { toggledLaw } from './toggled-law';
 
 /** Chance that the interval for the mean misses, β; as in the plain certificate. */
@@ -14,6 +15,8 @@ export interface MisreadCertificateInput {
   bonds: number;
   /** ε of one site, (1 − 2ε)² ≥ 2/3. */
   rate: number;
+  /** The chain closes to a ring, and every count is even. */
+  ring?: boolean;
 }
 
 /**
@@ -29,22 +32,25 @@ export function misreadCertificate({
   counts,
   shots,
   bonds,
-  rate
+  rate,
+  ring = false
 }: MisreadCertificateInput): Certificate | null {
   const mean = counts.reduce((sum, [n, h]) => sum + n * h, 0) / shots;
-  const kinks = kinkMeanLimits(mean, shots, bonds, rate, miss);
-  const toggled = toggledLaw(bonds, rate);
+  const kinks = kinkMeanLimits(mean, shots, bonds, rate, miss, ring);
+  const toggled = toggledLaw(bonds, rate, ring);
   // Mean count read for a mean number of kinks.
   const read = (kappa: number) => kappa * (1 - 4 * rate * (1 - rate)) + bonds * 2 * rate * (1 - rate);
+  // One count in the unit of the bound, which is the pair on a ring.
+  const step = ring ? 2 : 1;
   const known = new Map<string, number>();
   const findings = (['high', 'low'] as const).map((side) => {
     const logBound = (n: number) => {
       const key = `${side}${n}`;
-      const value = known.get(key) ?? logMisreadTail(side, n, kinks, toggled);
+      const value = known.get(key) ?? logMisreadTail(side, n, kinks, toggled, ring ? ringTail() : undefined);
       known.set(key, value);
       return value;
     };
-    const first = side === 'high' ? Math.ceil(read(kinks.high) + 1) : Math.floor(read(kinks.low) - 1);
+    const first = side === 'high' ? Math.ceil(read(kinks.high) + step) : Math.floor(read(kinks.low) - step);
     return tailThresholds({ side, first, last: side === 'high' ? bonds : 0, logBound, counts, shots });
   });
   const found = findings.filter((finding) => finding !== null);

@@ -1,4 +1,4 @@
-import type { Level } from '../types';
+import type { Level, Unit } from '../types';
 import { chainBlocks } from './chain-blocks';
 import { truncatedWindow } from '../truncation/truncated-window';
 import { windowMoments } from '../truncation/window-moments';
@@ -6,6 +6,8 @@ import { chainMoments } from './chain-moments';
 import type { Kept } from './chain-score';
 import type { Chain } from './chain-space';
 import { chainWindow } from './chain-window';
+import { inPairs } from './in-pairs';
+import { ringWindow } from './ring-window';
 import type { Window } from '../laws/window';
 
 /** Independent kinks along a chain, as they are read with misread sites: the law that a diagnosis fits then. Plain. */
@@ -14,6 +16,8 @@ export interface ReadChain extends Chain {
   rate: number;
   /** Only these counts were kept: the law is conditioned on them. Left out: no shot was dropped. */
   kept?: Kept;
+  /** The chain closes to a ring, whose even counts are told singly or in pairs. Left out: it is open. */
+  ring?: Unit;
 }
 
 /** Whether a law is one of misread kinks. */
@@ -21,15 +25,18 @@ export function isReadChain(law: object): law is ReadChain {
   return 'rate' in law;
 }
 
-/** Its pmf; see chainWindow. */
+/** Its pmf; see chainWindow and ringWindow. */
 export function readWindow(chain: ReadChain, trim = 0, scale?: number): Window {
+  if (chain.ring) return inPairs(ringWindow(chainBlocks(chain), chain.rate, scale), chain.ring);
   const whole = chainWindow(chainBlocks(chain), chain.rate, chain.kept ? 0 : trim, scale);
   return chain.kept ? truncatedWindow(whole, chain.kept) : whole;
 }
 
 /** Its mean and variance. */
 export function readMoments(chain: ReadChain): { mean: number; variance: number } {
-  return chain.kept ? windowMoments(readWindow(chain)) : chainMoments(chainBlocks(chain), chain.rate);
+  return chain.kept || chain.ring
+    ? windowMoments(readWindow(chain))
+    : chainMoments(chainBlocks(chain), chain.rate);
 }
 
 /**
@@ -38,7 +45,7 @@ export function readMoments(chain: ReadChain): { mean: number; variance: number 
  */
 export function readEven(chain: ReadChain): number {
   const { p, runs, rate } = chain;
-  if (chain.kept) {
+  if (chain.kept || chain.ring) {
     const { first, values, scale } = readWindow(chain);
     return values.reduce((sum, f, i) => ((first + i) % 2 === 0 ? sum + f / scale : sum), 0);
   }

@@ -14,6 +14,7 @@ import { clampedVariance } from '../moments/clamped-variance';
 import type { DiagnoseOptions, Histogram } from '../types';
 import { misreadFitReport } from './misread-fit-report';
 import type { NullLaw } from './null-law';
+import { ringNull } from './ring-null';
 
 /**
  * Independent kinks on an open chain, read with misread sites: the best chain, the misread ceiling with the kinks that
@@ -32,6 +33,7 @@ export function misreadNull(
   rate: number,
   options: DiagnoseOptions
 ): NullLaw {
+  if (options.geometry === 'ring-bonds') return ringNull(counts, histogram, rate, options);
   const bonds = counts.trials!;
   const { chain, value, even } = chainFit(counts, rate);
   const levels = { ...chain, rate };

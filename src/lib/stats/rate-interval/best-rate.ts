@@ -1,5 +1,6 @@
 import type { FitData } from '../fit/fit-data';
 import { chainFit } from '../misread/chain-fit';
+import type { Unit } from '../types';
 
 /** Points of the first look, and halvings of their distance after it. */
 const points = 7;
@@ -9,12 +10,12 @@ const halvings = 4;
  * The misread rate within limits at which the best chain found fits best: there the tests of the fit speak least against
  * independent kinks. A grid, then ever shorter strides from its best.
  */
-export function bestRate(counts: FitData, low: number, high: number): number {
+export function bestRate(counts: FitData, low: number, high: number, ring?: Unit): number {
   const known = new Map<number, number>();
   const value = (rate: number) => {
     const before = known.get(rate);
     if (before !== undefined) return before;
-    const found = chainFit(counts, rate, null, 1e-4).value;
+    const found = chainFit(counts, rate, null, 1e-4, ring).value;
     known.set(rate, found);
     return found;
   };

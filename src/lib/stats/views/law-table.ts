@@ -2,6 +2,7 @@ import type { FitData } from '../fit/fit-data';
 import { lawRate } from '../laws/law-rate';
 import { logPmf } from '../laws/log-pmf';
 import type { Window } from '../laws/window';
+import { windowRate } from '../laws/window-rate';
 import { chainBlocks } from '../misread/chain-blocks';
 import { chainRate } from '../misread/chain-rate';
 import { isReadChain, type ReadChain } from '../misread/read-chain';
@@ -68,6 +69,7 @@ export function lawTable(data: FitData, law: FittedLaw): LawTable {
  * P(X ≥ n)/P(kept). Between the mean before the cut and after it nothing is known, and the rate is 0.
  */
 function readRate(law: ReadChain, n: number, mean: number): number {
+  if (law.ring) return windowRate(familyWindow(law), n);
   const { kept, ...before } = law;
   const rate = chainRate(chainBlocks(law), law.rate, n);
   if (!kept) return rate;
