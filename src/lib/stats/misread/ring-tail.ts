@@ -10,10 +10,13 @@ type TailBound = (side: 'high' | 'low', count: number, mean: number, trials: num
  */
 export const ringTail =
   (bound: TailBound = logHoeffdingTail): TailBound =>
-  (side, count, mean, bonds) =>
-    bound(
+  (side, count, mean, bonds) => {
+    const pairs = Math.floor(bonds / 2);
+    // An odd bond stays without a kink, so a limit of the mean may lie beyond what a ring can give.
+    return bound(
       side,
       side === 'high' ? Math.ceil(count / 2) : Math.floor(count / 2),
-      mean / 2,
-      Math.floor(bonds / 2)
+      Math.min(mean / 2, pairs),
+      pairs
     );
+  };
