@@ -30,6 +30,7 @@ describe('kinksOf', () => {
       total: 4,
       trials: 5,
       lump: null,
+      below: null,
       withoutEmpty: false
     };
     // Counts 1, 1, 3, 3: mean 2 and variance 1 or 4/3 of pairs.
