@@ -4,6 +4,7 @@ import { thirdOverMean } from '$lib/stats/claim/third-over-mean';
 import { reachesBody } from '$lib/stats/bounds/reaches-body';
 import { lawMoments } from '$lib/stats/laws/law-moments';
 import type { Diagnosis, Interval } from '$lib/stats/types';
+import { beyondRegion, type BeyondRegion } from './beyond-region';
 
 /** The counts in the plane of κ2/κ1 and κ3/κ1, from the document's own numbers. */
 export interface CumulantsPlace {
@@ -15,6 +16,8 @@ export interface CumulantsPlace {
   law: { fano: number; third: number; name?: string };
   /** Whether independent trials reach the point itself or, failing that, its intervals. */
   standing: 'inside' | 'near' | 'outside' | 'more';
+  /** Where the answer allows for more than the region does, so that lying outside it is no evidence; null elsewhere. */
+  beyond: BeyondRegion | null;
 }
 
 /** Where the counts lie, or why they have no place in the plane. */
@@ -45,10 +48,14 @@ export function cumulantsPlace(diagnosis: Diagnosis): CumulantsPlace | { reason:
     third: at(third, third.value ?? 0),
     law: { fano: law.variance / law.mean, third: law.third / law.mean }
   };
-  return { ...place, standing: standingOf(place) };
+  return { ...place, standing: standingOf(place), beyond: beyondRegion(diagnosis) };
 }
 
-function standingOf({ fano, third, share }: Omit<CumulantsPlace, 'standing'>): CumulantsPlace['standing'] {
+function standingOf({
+  fano,
+  third,
+  share
+}: Omit<CumulantsPlace, 'standing' | 'beyond'>): CumulantsPlace['standing'] {
   const exact = (value: number) => ({ low: value, high: value });
   if (reachesBody(exact(fano.value), exact(third.value), share)) return 'inside';
   if (reachesBody(fano, third, share)) return 'near';

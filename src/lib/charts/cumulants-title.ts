@@ -7,5 +7,8 @@ const TITLES: Record<CumulantsPlace['standing'], string> = {
   more: 'The cumulants lie beyond what any independent trials can reach'
 };
 
-/** The finding of the cumulants together, as a title. */
-export const cumulantsTitle = ({ standing }: CumulantsPlace): string => TITLES[standing];
+/** The finding of the cumulants together, as a title; with what the region leaves out of account, where the answer does not. */
+export function cumulantsTitle({ standing, beyond }: CumulantsPlace): string {
+  const title = TITLES[standing];
+  return beyond ? `Not allowing for ${beyond.what}, ${title[0].toLowerCase()}${title.slice(1)}` : title;
+}

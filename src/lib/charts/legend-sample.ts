@@ -15,25 +15,24 @@ const POINTS: Partial<Record<Role, { shape: Shape; interval: Role }>> = {
 export const SAMPLE = { width: 30, height: 16 };
 
 /** A small drawing of what an entry's marks look like, its top left corner at `left`, `top`. */
-export function legendSample({ role, down }: Pick<LegendEntry, 'role' | 'down'>, left = 0, top = 0): Mark[] {
+export function legendSample(
+  { role, down, bare }: Pick<LegendEntry, 'role' | 'down' | 'bare'>,
+  left = 0,
+  top = 0
+): Mark[] {
   const [foot, head] = down ? [top, top + SAMPLE.height] : [top + SAMPLE.height, top];
   const right = left + SAMPLE.width;
   const middle = top + SAMPLE.height / 2;
   const centre = left + SAMPLE.width / 2;
   const point = POINTS[role];
-  if (point)
+  if (point) {
+    const d = pointPath([[centre, middle]], point.shape, point.shape === 'dot' ? 6 : 9);
+    const stroke = intervalPath([{ x: centre, from: top + SAMPLE.height, to: top }]);
     return [
-      {
-        kind: 'path',
-        role: point.interval,
-        d: intervalPath([{ x: centre, from: top + SAMPLE.height, to: top }])
-      },
-      {
-        kind: 'path',
-        role,
-        d: pointPath([[centre, middle]], point.shape, point.shape === 'dot' ? 6 : 9)
-      }
+      ...(bare ? [] : [{ kind: 'path', role: point.interval, d: stroke } as const]),
+      { kind: 'path', role, d }
     ];
+  }
   if (role === 'unseen')
     return [
       {

@@ -66,6 +66,8 @@ export interface LegendEntry {
   label: string;
   /** Where a limit points down in this picture; an arrow goes up otherwise. */
   down?: boolean;
+  /** A point that has no interval in this picture. */
+  bare?: true;
 }
 
 /** How the height of a picture follows from its width and letters: the page keeps that room free (Drawing.svelte). */

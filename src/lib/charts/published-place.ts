@@ -18,12 +18,13 @@ export function publishedPlace(
   };
   const fano = ratio(variance);
   const [k1, k2, k3] = nearest.cumulants;
-  const beyond = fano.low > 1 - share ? 'more' : 'outside';
+  const far = fano.low > 1 - share ? 'more' : 'outside';
   return {
     share,
     fano,
     third: ratio(third),
     law: { fano: k1 > 0 ? k2 / k1 : 0, third: k1 > 0 ? k3 / k1 : 0, name: 'nearest that trials reach' },
-    standing: nearest.distance === 0 ? 'inside' : verdict === 'ruled-out' ? beyond : 'near'
+    standing: nearest.distance === 0 ? 'inside' : verdict === 'ruled-out' ? far : 'near',
+    beyond: null
   };
 }

@@ -6,6 +6,7 @@ import type { CumulantsPlace } from './cumulants-place';
 import { frameOf } from './frame-of';
 import { hatchEdge } from './hatch-edge';
 import { linePath } from './line-path';
+import { namedLabels } from './named-labels';
 import { namedLaws } from './named-laws';
 import type { Frame, Mark, Picture, Point, Role, Size } from './picture';
 import { pointPath, type Shape } from './point-path';
@@ -40,7 +41,8 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
   const ys = y.ticks(6);
   const { texts, exponent } = scaledTexts(ys);
   const named = namedLaws(place.share);
-  const { point, interval, shape } = LOOK[place.standing];
+  // Outside a region that the answer does not go by is no evidence, and has no colour.
+  const { point, interval, shape } = LOOK[place.beyond ? 'inside' : place.standing];
   const seen: Point = [x(place.fano.value), y(place.third.value)];
   const law: Point = [x(place.law.fano), y(place.law.third)];
   const marks: Mark[] = [
@@ -57,7 +59,7 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
     { kind: 'path', role: interval, d: crossOf(place, x, y, frame) },
     { kind: 'path', role: point, d: pointPath([seen], shape, shape === 'dot' ? 7 : 10) },
     { kind: 'path', role: 'law', d: pointPath([law], 'dot', 9) },
-    ...labelsOf(named, x, y, frame, text),
+    ...namedLabels(named, x, y, frame, text, [seen, law]),
     ...bottomAxis(frame, roomyTicks(x, text), 'κ₂/κ₁, variance over the mean', text)
   ];
   return {
@@ -85,7 +87,7 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
         words: () => lawWords(name === 'Poisson' ? 'A Poisson law' : 'Equal trials of this mean', ...at)
       }))
     ].sort((a, b) => a.x - b.x),
-    notes: []
+    notes: place.beyond ? [place.beyond.why] : []
   };
 }
 
@@ -112,28 +114,3 @@ function crossOf({ fano, third }: CumulantsPlace, x: Place, y: Place, frame: Fra
 
 const head = (x: number, y: number, back: number): string =>
   `M${(x - 3).toFixed(2)},${y + back}L${x.toFixed(2)},${y}L${(x + 3).toFixed(2)},${y + back}`;
-
-/** Names beside their crosses, right of them: the region and its hatch lie to the left. Far out only one has room. */
-function labelsOf(
-  named: ReturnType<typeof namedLaws>,
-  x: Place,
-  y: Place,
-  frame: Frame,
-  text: number
-): Mark[] {
-  const shown = named.filter(({ at }) => x(at[0]) <= frame.right && y(at[1]) >= frame.top);
-  const crowded =
-    shown.length > 1 &&
-    Math.abs(y(shown[0].at[1]) - y(shown[1].at[1])) < 3 * text &&
-    Math.abs(x(shown[0].at[0]) - x(shown[1].at[0])) < 8 * text;
-  return (crowded ? shown.slice(0, 1) : shown).map(({ name, at }): Mark => {
-    const room = name.length * text * 0.52;
-    const low = y(at[1]) + text * (name === 'Poisson' ? 0.35 : 1.6);
-    const place = {
-      x: Math.min(x(at[0]) + text * 0.9, frame.right + text * 1.5 - room),
-      y: Math.min(frame.bottom - 4, low)
-    };
-    const look = { anchor: 'start', ink: 'faint', face: 'text', size: text, halo: true } as const;
-    return { kind: 'text', ...place, text: name, ...look };
-  });
-}

@@ -9,6 +9,11 @@ const WHERE: Record<CumulantsPlace['standing'], string> = {
   more: 'No independent trials have so large a variance for their mean.'
 };
 
+function where({ standing, beyond }: CumulantsPlace): string {
+  const words = WHERE[standing];
+  return beyond ? `Not allowing for ${beyond.what}: ${words[0].toLowerCase()}${words.slice(1)}` : words;
+}
+
 function ratio(name: string, { value, low, high }: Interval & { value: number }): string {
   const interval =
     low === null || high === null
@@ -19,7 +24,7 @@ function ratio(name: string, { value, low, high }: Interval & { value: number })
 
 /** The counts' place in the plane of cumulants, read out. */
 export const regionWords = (place: CumulantsPlace): string =>
-  `Seen: ${ratio('κ₂/κ₁', place.fano)}, ${ratio('κ₃/κ₁', place.third)}. ${WHERE[place.standing]}`;
+  `Seen: ${ratio('κ₂/κ₁', place.fano)}, ${ratio('κ₃/κ₁', place.third)}. ${where(place)}`;
 
 /** A law's place in the plane, read out. */
 export const lawWords = (name: string, fano: number, third: number): string =>

@@ -77,7 +77,7 @@ export function testsPicture(
     height: frame.bottom + text * 3.6,
     build: 'lines',
     marks,
-    legend: legendOf(rows),
+    legend: legendOf(rows, marks),
     order: 'down',
     readings: rows.map((one, i) => ({
       x: one.at === null ? frame.left + 8 : at(one.at),
@@ -99,22 +99,29 @@ function rowMarks(row: ForestRow, at: (p: number) => number, y: number): Mark[] 
   return marks;
 }
 
-function legendOf(rows: ForestRow[]): LegendEntry[] {
+/** Entries of what is drawn: a point of these lines has no stroke of its own, and a stroke has a length. */
+function legendOf(rows: ForestRow[], marks: Mark[]): LegendEntry[] {
   const labels: [ForestRow['kind'], string][] = [
     ['more', 'speaks against independent trials'],
     ['unsure', 'hinted at: cannot tell yet'],
     ['fewer', 'more regular: a remark'],
     ['within', 'p, all tests allowed for']
   ];
+  const drawn = (role: Role) => marks.some((mark) => mark.kind === 'path' && mark.role === role);
+  const strokes = Object.values(LOOKS).map(({ interval }) => interval);
   return [
     ...labels
       .filter(([kind]) => rows.some((row) => row.kind === kind))
-      .map(([kind, label]) => ({ role: LOOKS[kind].point, label })),
-    {
-      role: 'interval',
-      label: 'line: from a test’s own p to the p that allows for all; for a flag, over its tests'
-    },
-    { role: 'smallest', label: 'smallest p it could show' }
+      .map(([kind, label]): LegendEntry => ({ role: LOOKS[kind].point, label, bare: true })),
+    ...(strokes.some(drawn)
+      ? [
+          {
+            role: 'interval' as const,
+            label: 'line: from a test’s own p to the p that allows for all; for a flag, over its tests'
+          }
+        ]
+      : []),
+    ...(drawn('smallest') ? [{ role: 'smallest' as const, label: 'smallest p it could show' }] : [])
   ];
 }
 

@@ -73,6 +73,24 @@ describe('what a legend and a label say', () => {
   it('the smallest p is an upright tick in chart and legend', () => {
     expect(legendSample({ role: 'smallest' })).toEqual([{ kind: 'path', role: 'smallest', d: 'M15,2V14' }]);
   });
+  it('the tests chart explains strokes and ticks only where it draws them, and its points have none', async () => {
+    // One shot over and over: no test runs but those that show nothing; the dice have strokes.
+    const seen = new Set<boolean>();
+    for (const diagnosis of [await anyDiagnosis(WELDON, { trials: 12 }), await anyDiagnosis([[3, 700]])]) {
+      const picture = testsPicture(diagnosis, { width: 760, text: 13 }, TESTS);
+      const strokes = (['interval', 'interval-more', 'interval-fewer', 'interval-unsure'] as const).some(
+        (role) => drawn(picture, role)
+      );
+      seen.add(strokes);
+      const inLegend = (role: Role) => picture.legend.some((entry) => entry.role === role);
+      expect(inLegend('interval')).toBe(strokes);
+      expect(inLegend('smallest')).toBe(drawn(picture, 'smallest'));
+      for (const entry of picture.legend.filter(({ role }) => role.startsWith('observed')))
+        expect(legendSample(entry).map((mark) => mark.kind === 'path' && mark.role)).toEqual([entry.role]);
+    }
+    expect([...seen].sort()).toEqual([false, true]);
+    expect(legendSample({ role: 'observed' })).toHaveLength(2);
+  });
   it('the excess that matters is named right of the ceiling, narrow and wide', async () => {
     const diagnosis = await anyDiagnosis(WELDON, { trials: 12 });
     for (const width of [342, 760]) {

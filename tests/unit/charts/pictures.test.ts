@@ -141,8 +141,14 @@ describe('every chart', () => {
     };
     const verdict = { ...judgeCumulants(printed), verdict: 'ruled-out' as const };
     const place = publishedPlace(printed, verdict)!;
-    for (const width of [260, 342, 760, 1400])
-      expect(faults(regionPicture(place, { width, text: 13 })), `${width}`).toEqual([]);
+    for (const width of [260, 342, 760, 1400]) {
+      const picture = regionPicture(place, { width, text: 13 });
+      expect(faults(picture), `${width}`).toEqual([]);
+      // A cross that no word stands by says nothing.
+      const names = picture.marks.flatMap((mark) => (mark.kind === 'text' ? [mark.text] : []));
+      expect(names, `${width}`).toContain('Poisson');
+      if (trials !== null) expect(names, `${width}`).toContain('equal trials');
+    }
   });
 
   it('of any counts is finite and inside its frame', async () => {
