@@ -1,3 +1,4 @@
+import { sayUnknownCumulants } from '$lib/model/report/say-unknown-cumulants';
 import { lumpsOf, lumpWords } from '$lib/model/lump-words';
 import { carefulThird } from '$lib/stats/claim/careful-third';
 import { thirdOverMean } from '$lib/stats/claim/third-over-mean';
@@ -26,7 +27,7 @@ export function cumulantsPlace(diagnosis: Diagnosis): CumulantsPlace | { reason:
   const { mean, variance, fano } = moments;
   if (data.lump || data.below)
     return {
-      reason: `${lumpWords(lumpsOf(data)).rows}, so the cumulants are those of the counts as lumped: no place among those of independent trials can be told.`
+      reason: `${lumpWords(lumpsOf(data)).rows}, so the cumulants are those of the counts as lumped: no place among those of independent trials can be told.${sayUnknownCumulants(diagnosis)}`
     };
   if (!mean.value || variance.value === null || fano.value === null || moments.third.value === null)
     return {

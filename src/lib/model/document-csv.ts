@@ -28,7 +28,7 @@ export function documentCsv(document: Diagnosis): string {
     ranged('moments', key, moments[key]);
   for (const key of ['ceiling', 'criticalTrials', 'pairCovariance'] as const)
     one('moments', key, moments[key]);
-  const { misread, drift, pairs, emptyAside, trials } = document.nuisances ?? {};
+  const { misread, drift, pairs, emptyAside, trials, lumped } = document.nuisances ?? {};
   if (misread) {
     one('misreads', 'applied', misread.applied ? 'yes' : 'no');
     for (const key of ['rate', 'ceiling', 'rawCeiling', 'rawDispersion'] as const)
@@ -42,6 +42,9 @@ export function documentCsv(document: Diagnosis): string {
     }
     for (const { p, trials } of misread.kinks ?? []) one('misreads', `kinks of the next ${trials} bonds`, p);
   }
+  if (lumped)
+    for (const key of ['mean', 'variance'] as const)
+      ranged('whatever the lumps hide', key, { value: null, ...lumped[key] });
   if (drift) driftLines(drift, one, ranged);
   for (const { trials: n, ceiling, dispersion } of trials?.points ?? []) {
     one(`N ${n ?? 'unknown'}`, 'ceiling', ceiling);

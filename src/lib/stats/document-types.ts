@@ -136,6 +136,7 @@ export interface Diagnosis {
   moments: {
     mean: Interval;
     variance: Interval;
+    /** Third and fourth are null with a lump, since engine 0.9: it hides them. */
     third: Interval;
     fourth: Interval;
     fano: Interval;

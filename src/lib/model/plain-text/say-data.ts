@@ -8,7 +8,8 @@ import { sayLumpedLimits } from '../report/say-lumped-limits';
 import { wrap } from './wrap';
 
 /** What was given, and the mean and variance found in it. */
-export function sayData({ data, moments, nuisances, engine }: Diagnosis, about: string[]): string {
+export function sayData(document: Diagnosis, about: string[]): string {
+  const { data, moments, engine } = document;
   const trials =
     data.trials === null
       ? 'trials unknown'
@@ -35,7 +36,7 @@ export function sayData({ data, moments, nuisances, engine }: Diagnosis, about: 
     ),
     ...about.map((line) => wrap(line, '  ')),
     wrap(`Mean${per} ${sayInterval(moments.mean)}, variance ${sayInterval(moments.variance)}.`, '  '),
-    ...sayLumpedLimits({ nuisances }).map((line) => wrap(line, '  ')),
+    ...sayLumpedLimits(document).map((line) => wrap(line, '  ')),
     wrap(
       `Variance over the ceiling of independent trials, ${formatNumber(moments.ceiling)}: ${sayInterval(moments.dispersion)}.`,
       '  '

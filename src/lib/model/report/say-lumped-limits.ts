@@ -1,9 +1,10 @@
 import type { Diagnosis } from '$lib/stats/types';
 import { formatNumber } from '../format-number';
+import { sayUnknownCumulants } from './say-unknown-cumulants';
 
 /** What mean and variance of lumped counts can be, in a sentence; nothing without a lump. */
-export function sayLumpedLimits({ nuisances }: Pick<Diagnosis, 'nuisances'>): string[] {
-  const lumped = nuisances?.lumped;
+export function sayLumpedLimits(view: Pick<Diagnosis, 'nuisances' | 'data' | 'moments'>): string[] {
+  const lumped = view.nuisances?.lumped;
   if (!lumped) return [];
   const range = ({ low, high }: { low: number | null; high: number | null }) =>
     low === null
@@ -14,6 +15,6 @@ export function sayLumpedLimits({ nuisances }: Pick<Diagnosis, 'nuisances'>): st
           ? formatNumber(low)
           : `from ${formatNumber(low)} to ${formatNumber(high)}`;
   return [
-    `Whatever counts the lumped rows hide, the mean of these shots is ${range(lumped.mean)}, their variance ${range(lumped.variance)}.`
+    `Whatever counts the lumped rows hide, the mean of these shots is ${range(lumped.mean)}, their variance ${range(lumped.variance)}.${sayUnknownCumulants(view)}`
   ];
 }

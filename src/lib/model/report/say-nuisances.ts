@@ -62,7 +62,8 @@ export function sayPairs(
   return `Single defects are tested.${ring}${sayFlagged(view, 'pairing')}`;
 }
 
-function sayLumped({ data: { lump, below }, nuisances }: Diagnosis): string {
+function sayLumped(document: Diagnosis): string {
+  const { lump, below } = document.data;
   const first = below && `The first row holds all counts of ${formatCount(below.to)} and fewer`;
   const last =
     lump && `${first ? 'the' : 'The'} last row holds all counts of ${formatCount(lump.from)} and more`;
@@ -70,7 +71,7 @@ function sayLumped({ data: { lump, below }, nuisances }: Diagnosis): string {
   const rows = first && last ? `${first}, ${last}` : (first ?? last);
   return [
     `${rows}; its likelihood is the sum of the law over them, and the ceiling is that of equal trials lumped in the same way.`,
-    ...sayLumpedLimits({ nuisances })
+    ...sayLumpedLimits(document)
   ].join(' ');
 }
 

@@ -13,12 +13,12 @@ export function cautions(evidence: Evidence, histogram: Histogram, tests: TestRe
   const { lump, below } = histogram;
   if (lump && !below) {
     out.push(
-      `The last row lumps counts of ${formatCount(lump.from)} and more. They enter the likelihood as a tail; mean, variance and what follows from them count each such shot as ${formatCount(lump.from)} and are lower limits. The ceiling is then that of equal trials lumped in the same way.`
+      `The last row lumps counts of ${formatCount(lump.from)} and more. They enter the likelihood as a tail; mean, variance and what follows from them count each such shot as ${formatCount(lump.from)} and are lower limits. Third and fourth cumulant are not known. The ceiling is then that of equal trials lumped in the same way.`
     );
   }
   if (below) {
     out.push(
-      `The first row lumps counts of ${formatCount(below.to)} and fewer${lump ? `, the last those of ${formatCount(lump.from)} and more` : ''}. They enter the likelihood as sums of the law; mean, variance and what follows from them count each such shot as ${formatCount(below.to)}${lump ? ` or ${formatCount(lump.from)}` : ''}, so the variance is a lower limit${lump ? '' : ' and the mean an upper one'}. The ceiling is then that of equal trials lumped in the same way. Empty shots and parity cannot be tested.`
+      `The first row lumps counts of ${formatCount(below.to)} and fewer${lump ? `, the last those of ${formatCount(lump.from)} and more` : ''}. They enter the likelihood as sums of the law; mean, variance and what follows from them count each such shot as ${formatCount(below.to)}${lump ? ` or ${formatCount(lump.from)}` : ''}, so the variance is a lower limit${lump ? '' : ' and the mean an upper one'}. Third and fourth cumulant are not known. The ceiling is then that of equal trials lumped in the same way. Empty shots and parity cannot be tested.`
     );
   }
   if (options.kept) {

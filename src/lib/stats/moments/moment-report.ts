@@ -1,5 +1,5 @@
 import { stream } from '../resampling/streams';
-import type { Diagnosis, Histogram } from '../types';
+import type { Diagnosis, Histogram, Interval } from '../types';
 import { lumpedCeiling } from './lumped-ceiling';
 import { momentIntervals, type MomentIntervals } from './moment-intervals';
 
@@ -7,7 +7,8 @@ import { momentIntervals, type MomentIntervals } from './moment-intervals';
  * Moments of the document, without the critical N. A lump counts as the count of it nearest to the others, so that
  * the variance is then a lower limit (see lumpedLimits for what mean and variance can be), and the ceiling is the
  * variance of equal trials lumped in the same way: against the plain ceiling any lumped histogram would look regular
- * (the document's cautions say so).
+ * (the document's cautions say so). Third and fourth cumulant are then not known: they hang most on the
+ * counts far from the mean, which are the hidden ones, so that no number is told.
  *
  * @param equal probability of the equal trials, or their mean when N is unknown
  * @param ceiling another ceiling than that of independent trials, or null
@@ -32,10 +33,13 @@ export function momentReport(
   const variance = found.variance.value;
   return {
     ...found,
+    ...(lumped && { third: { ...UNKNOWN }, fourth: { ...UNKNOWN } }),
     // Of lumped counts the difference bounds no covariance: their own variance and mean are not known.
     pairCovariance: variance === null || lumped ? null : variance - found.ceiling
   };
 }
+
+const UNKNOWN: Interval = { value: null, low: null, high: null };
 
 /** Replaces the ceiling, and variance/ceiling with it. */
 function replaceCeiling(found: MomentIntervals, other: number): void {
