@@ -1,3 +1,4 @@
+import type { TestId } from './test-ids';
 import type { DriftPart } from './drift/types';
 import type { Explanations } from './explanations/types';
 import type { TrialsPart } from './sensitivity/types';
@@ -7,8 +8,6 @@ import type { LumpedLimits } from './moments/lumped-limits';
 import type { MisreadPart } from './misread/types';
 import type { Geometry, Interval, Level, Unit } from './types';
 
-export type TestId =
-  'ceiling' | 'fit' | 'high-tail' | 'low-tail' | 'parity' | 'empty-shots' | 'batches' | 'order';
 export type FlagId =
   'bunching' | 'bursts' | 'coarsening' | 'pairing' | 'dead-shots' | 'drift' | 'misreads' | 'regular';
 export type ReferenceId = 'equal-trials' | 'rare-events' | 'gaussian' | 'landau-zener' | 'supplied';

@@ -83,4 +83,5 @@ export class BadInput extends Error {
 }
 
 export type * from './document-types';
+export type { TestId } from './test-ids';
 export type * from './misread/types';

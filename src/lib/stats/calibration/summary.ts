@@ -1,3 +1,4 @@
+import { testIds } from '../test-ids';
 import { COVERED, type Outcome, type PName } from './outcome';
 import { share, type Share } from './share';
 
@@ -19,19 +20,7 @@ export interface Summary {
   coverage: Record<(typeof COVERED)[number], Share> | null;
 }
 
-const NAMES: PName[] = [
-  'ceiling',
-  'fit',
-  'high-tail',
-  'low-tail',
-  'parity',
-  'empty-shots',
-  'batches',
-  'order',
-  'certificate',
-  'within-batches',
-  'empty-aside'
-];
+const NAMES: PName[] = [...testIds, 'certificate', 'within-batches', 'empty-aside'];
 
 /** Shares over the repeats of one setting, each with its exact interval. */
 export function summary(setting: string, shots: number, outcomes: Outcome[]): Summary {

@@ -1,11 +1,13 @@
 import { z } from 'zod';
+import { unturned } from '../../unturned';
 import { NAME_LENGTH, REMARK_LENGTH } from './lengths';
 import { REMARK_SECTIONS } from './sections';
 
-/** Controls but line end and tab, and marks that turn the direction of writing: they make a text read as another. */
-const hidden = /[^\P{Cc}\n\t]|[\u2028\u2029\u202a-\u202e\u2066-\u2069]/gu;
+/** Controls but line end and tab. */
+const hidden = /[^\P{Cc}\n\t]|[\u2028\u2029]/gu;
 
-const plain = (text: string): string => text.replace(/\r\n?/g, '\n').replace(hidden, '').trim();
+/** Without what is not seen, and marks that turn the direction of writing: they make a text read as another. */
+const plain = (text: string): string => unturned(text).replace(/\r\n?/g, '\n').replace(hidden, '').trim();
 
 /** What a remark says: plain text, line ends kept. */
 export const remarkBody = z
