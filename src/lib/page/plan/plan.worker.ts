@@ -1,4 +1,5 @@
 import { powerCurve } from '$lib/stats/planning/power-curve';
+import { repeatsFor } from '$lib/stats/planning/repeats-for';
 import { shotsToSee } from '$lib/stats/planning/shots-to-see';
 import { simulatePower } from '$lib/stats/planning/simulate-power';
 import { smallestEffect } from '$lib/stats/planning/smallest-effect';
@@ -8,8 +9,6 @@ import type { PlanRequest } from './read-plan';
 
 const say = (answer: TaskAnswer): void => self.postMessage(answer);
 
-/** Experiments drawn for one check: the cut is then known to a fiftieth of its tail, the power to a point or two. */
-const REPEATS = { without: 20_000, with: 4000 };
 const SEED = 20_817;
 
 /** One question a worker; the page ends the worker to cancel it. */
@@ -25,7 +24,10 @@ function resultOf(task: TaskRequest): Tasks[keyof Tasks]['result'] {
   if (task.kind === 'plan') return planned(task.asked);
   if (task.kind === 'odds') return oddsOf(task.asked);
   const { effect, shots, alpha } = task.asked;
-  return simulatePower(effect, shots, alpha, REPEATS, SEED, (share) => say({ kind: 'progress', share }));
+  const repeats = repeatsFor(alpha);
+  return (
+    repeats && simulatePower(effect, shots, alpha, repeats, SEED, (share) => say({ kind: 'progress', share }))
+  );
 }
 
 function planned({ size, shots, alpha, power, ...effect }: PlanRequest): Planned {

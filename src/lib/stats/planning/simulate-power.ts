@@ -3,6 +3,7 @@ import type { Window } from '../laws/window';
 import { clopperPearson } from '../numerics/clopper-pearson';
 import { generator, type Generator } from '../random/generator';
 import { histogramSampler } from '../random/histogram-sampler';
+import { binomialRange } from './binomial-range';
 import type { Effect } from './effect';
 import { effectWindow } from './effect-window';
 import { equalCounts } from './equal-counts';
@@ -13,7 +14,10 @@ export interface SimulatedPower {
   repeats: number;
   seen: number;
   share: number;
-  /** Exact 95 % limits of the share. */
+  /**
+   * 95 % limits of the power: exact limits of the share, held against both ends of where the cut can lie, at 97.5 % each.
+   * low is 0 where the cut may lie beyond all that was drawn.
+   */
   low: number;
   high: number;
 }
@@ -55,17 +59,33 @@ export function simulatePower(
   const cut = drawn[Math.min(drawn.length - 1, Math.ceil((1 - alpha) * (drawn.length + 1)) - 1)];
   const other = experiments(window, trials, shots);
   const apart = generator(seed, 2);
-  let seen = 0;
+  const [nearest, farthest] = cutLimits(drawn, alpha);
+  let [seen, atMost, atLeast] = [0, 0, 0];
   for (let r = 0; r < repeats.with; r++) {
-    if (other(apart) > cut) seen++;
+    const value = other(apart);
+    if (value > cut) seen++;
+    if (value > nearest) atMost++;
+    if (value > farthest) atLeast++;
     if (r % 200 === 0) onProgress((repeats.without + r) / all);
   }
   return {
     repeats: repeats.with,
     seen,
     share: seen / repeats.with,
-    ...clopperPearson(seen, repeats.with)
+    low: clopperPearson(atLeast, repeats.with, 0.975).low,
+    high: clopperPearson(atMost, repeats.with, 0.975).high
   };
+}
+
+/**
+ * Where the cut of the level lies, 97.5 %, by order statistics: of n draws Bin(n, α) lie beyond it.
+ *
+ * @param drawn in rising order
+ */
+function cutLimits(drawn: Float64Array, alpha: number): [nearest: number, farthest: number] {
+  const n = drawn.length;
+  const { low, high } = binomialRange(n, alpha, 0.975);
+  return [high < n ? drawn[n - 1 - high] : -Infinity, low > 0 ? drawn[n - low] : Infinity];
 }
 
 /** Draws variance over ceiling of one experiment after the other. */
