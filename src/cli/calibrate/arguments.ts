@@ -10,6 +10,8 @@ export const usage = `npm run calibrate -- [options]
   --truth A,B         only truths whose name begins so; "none" for none
   --violation A,B     only violations whose name begins so; "none" for none
   --nuisance A,B      nuisances whose name begins so, without and with twice the smallest excess; "all" (none)
+  --plans             instead: the planner's power beside simulated power, over a grid of plans
+  --printed           instead: answers from printed cumulants alone, false alarms and power (--repeats each)
   --resamples N       resamples of each diagnosis (399)
   --full N            resamples the answer at 0.01 is decided with (1999)
   --seed N            seed of everything (1)
@@ -30,6 +32,8 @@ export interface CalibrateArguments {
   seed: number;
   threads: number;
   json: string | null;
+  /** What is done instead of diagnoses. */
+  instead: ('plans' | 'printed')[];
 }
 
 /** What the command line asks for, or the complaint about it. */
@@ -41,6 +45,8 @@ export function readArguments(
       args,
       options: {
         quick: { type: 'boolean' },
+        plans: { type: 'boolean' },
+        printed: { type: 'boolean' },
         repeats: { type: 'string' },
         shots: { type: 'string' },
         truth: { type: 'string' },
@@ -69,7 +75,10 @@ export function readArguments(
         full: whole('full', values.full ?? '1999'),
         seed: whole('seed', values.seed ?? '1'),
         threads: whole('threads', values.threads ?? '2'),
-        json: values.json ?? null
+        json: values.json ?? null,
+        instead: [values.plans && ('plans' as const), values.printed && ('printed' as const)].filter(
+          (one) => one !== undefined && one !== false
+        )
       }
     };
   } catch (error) {
