@@ -35,7 +35,7 @@ export const ANSWERS = {
       'The excess over the ceiling that these shots would show in four of five repeats, by the variance alone at a level of 5 %.',
       'A smaller one may be there and stay unseen.'
     ],
-    formula: ['2.49 sqrt{(2 + κ_4/κ_2^2)/S}'],
+    formula: ['2.49 sqrt{2(1 − 1/N)/S}'],
     source: ''
   },
   'shots-to-decide': {
@@ -45,7 +45,7 @@ export const ANSWERS = {
       'The interval of the variance narrows with the square root of the shots.'
     ],
     formula: [
-      'S = (2 + κ_4/κ_2^2) frac{2.80^2}{(τ − x)^2}',
+      'S = 2(1 − 1/N) frac{2.80^2}{(τ − x)^2}',
       '"or, if fewer, with" frac{(z_{α/m} + 0.84)^2}{x^2}',
       'x = s^2/"ceiling" − 1'
     ],

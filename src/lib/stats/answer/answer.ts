@@ -4,7 +4,7 @@ import { because } from './because';
 import { decide } from './decide';
 import { restsOnSearch } from './rests-on-search';
 import { shotsToDecide } from './shots-to-decide';
-import { smallestExcess, varianceShape } from './smallest-excess';
+import { smallestExcess, dispersionShape } from './smallest-excess';
 import { statement } from './statement';
 import { unreachable } from './unreachable';
 
@@ -26,7 +26,7 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
   // Two counts cannot exceed their own ceiling with any number of shots, and counts without spread have none to compare.
   const testable =
     !(evidence.fixed ?? trials === 1) && moments.variance.value !== null && moments.variance.value > 0;
-  const shape = evidence.cut?.shape ?? (evidence.cut ? null : varianceShape(mean, trials));
+  const shape = evidence.cut?.shape ?? (evidence.cut ? null : dispersionShape(mean, trials));
   const seen = testable ? smallestExcess(mean, trials, shots, shape) : null;
   // N trials can exceed the ceiling N-fold at most, a cut leaves less room, and an eye for twice the ceiling is none.
   const most = evidence.cut?.most ?? (trials ?? Infinity) - 1;

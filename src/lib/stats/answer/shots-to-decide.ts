@@ -23,7 +23,7 @@ const power = 0.842;
  *   a variance at or below the ceiling counting as at it.
  * - Ruled out: as many as show the excess at α shared among all tests (Holm), (z(α/m) + 0.842)² · shape/excess².
  *
- * The nearer of the two. `shape` is S times the relative variance of a sample variance (see varianceShape).
+ * The nearer of the two. `shape`: see dispersionShape and keptShape.
  */
 export function shotsToDecide(deciding: Deciding): number | null {
   const { shape, shots, dispersion, tolerance, alpha, tests } = deciding;

@@ -2,7 +2,7 @@ import type { Window } from '../laws/window';
 import { windowMoments } from './window-moments';
 
 /**
- * S times the relative variance of a sample variance over its ceiling, for equal trials so cut: what varianceShape is
+ * S times the relative variance of a sample variance over its ceiling, for equal trials so cut: what dispersionShape is
  * without a cut. The ceiling C of counts so cut follows their mean along an exponential family, so C′ = κ3/κ2, and the
  * pull of one shot, d² − κ2 − C′d with d = n − μ, has variance κ4 + 2κ2² − κ3²/κ2. Divided by κ2²: 2 + κ4/κ2² − κ3²/κ2³.
  *

@@ -56,7 +56,7 @@ describe('the verdict', () => {
 describe('the numbers beside it', () => {
   it('smallest excess whatever the verdict, shots to decide only when undecided', () => {
     const compatible = judge({});
-    expect(compatible.smallestExcess).toBeCloseTo(2.49 * Math.sqrt((2 + (1 - 6 * 0.21) / 4.2) / 3000), 9);
+    expect(compatible.smallestExcess).toBeCloseTo(2.49 * Math.sqrt((2 * (1 - 1 / 20)) / 3000), 9);
     expect(compatible.shotsToDecide).toBeNull();
     const undecided = judge({ dispersion: interval(1, 0.7, 1.4), over: { shots: 200 } });
     expect(undecided.shotsToDecide).toBeGreaterThan(200);

@@ -1,9 +1,9 @@
 import { shotsToDecide, type Deciding } from '$lib/stats/answer/shots-to-decide';
-import { varianceShape } from '$lib/stats/answer/smallest-excess';
+import { dispersionShape } from '$lib/stats/answer/smallest-excess';
 import { describe, expect, it } from 'vitest';
 
 const deciding = (value: number, over: Partial<Deciding> = {}): Deciding => ({
-  shape: varianceShape(4, 20),
+  shape: dispersionShape(4, 20),
   shots: 100,
   dispersion: { value, low: null, high: null },
   tolerance: 0.1,
@@ -11,7 +11,7 @@ const deciding = (value: number, over: Partial<Deciding> = {}): Deciding => ({
   tests: 6,
   ...over
 });
-const shape = varianceShape(4, 20)!;
+const shape = dispersionShape(4, 20)!;
 
 describe('shotsToDecide', () => {
   it('at or below the ceiling: what brings the upper limit under the tolerance in four of five repeats', () => {
@@ -22,7 +22,7 @@ describe('shotsToDecide', () => {
 
   it('far above the ceiling: what shows the excess at α shared among the tests', () => {
     // z(0.01/6) = 2.935 (R 4.2, qnorm(1 - 0.01/6) = 2.935199).
-    expect(shotsToDecide(deciding(1.5))! / (shape * ((2.935199 + 0.842) / 0.5) ** 2)).toBeCloseTo(1, 2);
+    expect(shotsToDecide(deciding(1.5))).toBe(Math.ceil(shape * ((2.935199 + 0.842) / 0.5) ** 2));
     // Fewer tests, fewer shots.
     const few = { shots: 10 };
     expect(shotsToDecide(deciding(1.5, { ...few, tests: 1 }))!).toBeLessThan(
@@ -43,7 +43,7 @@ describe('shotsToDecide', () => {
 
   it('is never under 50, and null where there is nothing to compare', () => {
     expect(shotsToDecide(deciding(15, { shots: 3 }))).toBe(50);
-    expect(shotsToDecide(deciding(1, { shape: varianceShape(0, 20) }))).toBeNull();
+    expect(shotsToDecide(deciding(1, { shape: dispersionShape(0, 20) }))).toBeNull();
     expect(shotsToDecide({ ...deciding(1), dispersion: { value: null, low: null, high: null } })).toBeNull();
   });
 });
