@@ -1,5 +1,6 @@
 import { binomialSample } from '../../random/binomial-sample';
 import { keptEqual } from '../../truncation/kept-equal';
+import { keptShape } from '../../truncation/kept-shape';
 import { windowMoments } from '../../truncation/window-moments';
 import type { Histogram } from '../../types';
 import { everyTest, type Nuisance } from '../nuisance';
@@ -25,7 +26,7 @@ export function cut(id: string, trials: number, p: number, from: number, to: num
       const shift = shiftForExcess(
         (at) => cutMoments(trials, at, inside),
         (mean) => windowMoments(keptEqual(trials, kept, mean)).variance,
-        { p, trials, shots, strength }
+        { p, trials, shots, strength, shape: (mean) => keptShape(keptEqual(trials, kept, mean)) }
       );
       return shotsOf(shots, () => {
         const at = random.next() < 0.5 ? p - shift : p + shift;
