@@ -8,7 +8,8 @@ The experiment
   --trials N | unknown     largest possible count: sites, bonds or modes
   --unit defect | pair     pair: counts are even, and pairs are tested
   --geometry sites | open-bonds | ring-bonds
-  --misread P              probability that one site is misread
+  --misread P              probability that one site is misread; allowed for in every test of
+                           single kinks on open-bonds or ring-bonds with N known
   --misread-uncertainty U  standard uncertainty of P, from its calibration
   --kept FROM-TO           only counts from FROM to TO were kept, the rest dropped;
                            1- where only empty shots were

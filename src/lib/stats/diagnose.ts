@@ -6,6 +6,7 @@ import { engineVersion } from './engine-version';
 import { explainRuledOut } from './explanations/explain-ruled-out';
 import { fitData } from './fit/fit-data';
 import { evidenceOf } from './flags/gather-evidence';
+import { ringAsRead } from './flags/evidence';
 import { raiseFlags } from './flags/raise-flags';
 import { checkOptions } from './input/check-options';
 import { digest } from './input/digest';
@@ -129,7 +130,7 @@ export async function diagnose(
     fixed,
     cut: kept ? cutReach(tested.mostDispersed.window, kept, trials!) : undefined
   });
-  const pairs = pairsReport(given, counts.total, options, evidence.even);
+  const pairs = pairsReport(given, counts.total, options, evidence.even, ringAsRead(evidence));
   const flags = raiseFlags(evidence);
   const aside =
     !kept && !misread.applies && flags.some(({ id }) => id === 'dead-shots')

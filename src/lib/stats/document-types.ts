@@ -149,7 +149,7 @@ export interface Diagnosis {
   nuisances?: {
     /** With a lump: what mean and unbiased variance of these shots can be, in the unit tested. */
     lumped?: LumpedLimits;
-    /** For kinks on an open chain of known length. */
+    /** For single kinks on an open chain or a ring of known length; on a ring since engine 0.9, where no count is odd. */
     misread?: MisreadPart;
     /** For shot lists, since engine 0.5. */
     drift?: DriftPart;

@@ -1,2 +1,2 @@
 /** Version of the counting engine: a change in any number of the document changes it. */
-export const engineVersion = '0.8.0';
+export const engineVersion = '0.9.0';

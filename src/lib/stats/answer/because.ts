@@ -1,4 +1,5 @@
 import type { Evidence } from '../flags/evidence';
+import { ringCeiling } from '../misread/ring-ceiling';
 import type { TestResult, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
@@ -34,7 +35,7 @@ export function because(
       `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials with this mean${options.kept ? `, of which only ${sayKept(options.kept)} were kept` : ''}${misread ? `, read with ${sayRate(misread.rate)} of the sites misread` : ''}.`
     );
     const mean = moments.mean.value!;
-    const raw = misread && trials ? moments.variance.value! / (mean * (1 - mean / trials)) : NaN;
+    const raw = misread && trials ? moments.variance.value! / ceilingUnread(options, mean, trials) : NaN;
     if (Number.isFinite(raw)) {
       out.push(`Without misreads it would be ${formatNumber(raw, 3)} times the ceiling.`);
     }
@@ -55,6 +56,11 @@ export function because(
     out.push('Compatible is not the same as independent: some interacting systems give exactly such counts.');
   }
   return out;
+}
+
+/** Ceiling at that mean if no site were misread. */
+function ceilingUnread({ geometry }: Evidence['options'], mean: number, trials: number): number {
+  return geometry === 'ring-bonds' ? ringCeiling(trials, 0)(mean).variance : mean * (1 - mean / trials);
 }
 
 /** Tests that say the same are told in one sentence. */

@@ -1,4 +1,4 @@
-import { oddOnRing, pairsOnRing, type Evidence } from '../flags/evidence';
+import { oddOnRing, pairsOnRing, ringAsRead, type Evidence } from '../flags/evidence';
 import type { Histogram, TestResult } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayKept } from '../words/say-kept';
@@ -53,6 +53,10 @@ export function cautions(evidence: Evidence, histogram: Histogram, tests: TestRe
     out.push(
       `A misread rate of ${sayRate(options.misread ?? misread.rate)} a site was stated, and ${known} The best law is searched among few orders of the bonds, so independent kinks that are all but sure on some bonds and excluded on others may look like a misfit: where nothing else speaks against independent trials and the variance lies below its ceiling, the answer is that it cannot tell. Ceiling and certificate do not depend on that law.`
     );
+    if (ringAsRead(evidence))
+      out.push(
+        'The law is of single kinks that form independently round the ring but for their even total, and the ceiling theirs: the largest variance that searches in rings of up to 24 bonds found, which is not a proof. Kinks that form in independent pairs vary about twice as much and are an excess here: count pairs to test for these. Certificate and bounds are those of pairs and weaker.'
+      );
   } else if (misread?.reason) {
     out.push(misread.reason);
   }

@@ -60,9 +60,16 @@ export const oddOnRing = ({ options, even, shots }: Pick<Evidence, 'options' | '
 export const pairsOnRing = ({ options }: Pick<Evidence, 'options'>): boolean =>
   options.geometry === 'ring-bonds' && options.unit === 'pair';
 
-/** True when every shot had an even count, as kinks on a ring do by construction. */
+/** Whether the law tested is of kinks round a ring as they are read: it gives even counts only. */
+export const ringAsRead = ({ options, misread }: Pick<Evidence, 'options' | 'misread'>): boolean =>
+  options.geometry === 'ring-bonds' && misread?.applies === true;
+
+/** True when every shot had an even count, as kinks on a ring do by construction, and the law tested does not say so. */
 export function allEven(evidence: Evidence): boolean {
   return (
-    evidence.even !== null && evidence.even.seen === evidence.shots && evidence.moments.variance.value !== 0
+    !ringAsRead(evidence) &&
+    evidence.even !== null &&
+    evidence.even.seen === evidence.shots &&
+    evidence.moments.variance.value !== 0
   );
 }

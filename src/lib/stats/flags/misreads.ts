@@ -1,7 +1,8 @@
 import type { Flag } from '../types';
 import { formatPercent } from '../words/format-number';
 import { sayRate } from '../words/say-rate';
-import { gradeOf, type Evidence } from './evidence';
+import { ringNeeded } from '../misread/ring-needed';
+import { gradeOf, oddOnRing, type Evidence } from './evidence';
 import { misreadNeeded } from './misread-needed';
 
 /**
@@ -11,9 +12,12 @@ import { misreadNeeded } from './misread-needed';
 export function misreads(evidence: Evidence): Flag | null {
   const { geometry, misread } = evidence.options;
   const { mean, variance } = evidence.moments;
-  if (geometry !== 'open-bonds' || !gradeOf(evidence, 'ceiling') || !evidence.trials) return null;
-  const needed = misreadNeeded(mean.value!, variance.value!, evidence.trials);
-  if (needed === null || needed > 0.1) return null;
+  if (geometry === 'sites' || oddOnRing(evidence) > 0 || !gradeOf(evidence, 'ceiling') || !evidence.trials)
+    return null;
+  const ring = geometry === 'ring-bonds';
+  if (evidence.options.unit === 'pair' || (ring && evidence.trials < 3)) return null;
+  const needed = (ring ? ringNeeded : misreadNeeded)(mean.value!, variance.value!, evidence.trials);
+  if (!needed || needed > 0.1) return null;
   // A stated rate that falls well short of what is needed speaks against this explanation.
   if (misread !== null && misread < 0.8 * needed) return null;
   const stated = misread ? ` You stated ${sayRate(misread)}.` : '';

@@ -3,7 +3,6 @@ import { solveSymmetric } from '../numerics/solve-symmetric';
 import { chainScore, type ChainScore, type Kept } from './chain-score';
 import { chainSlopes, type Chain, type ChainSpace } from './chain-space';
 import { ringSlopes } from './ring-slopes';
-import type { Unit } from '../types';
 
 /** A chain and the log-likelihood it reaches, nats. */
 export interface ChainClimb {
@@ -17,8 +16,8 @@ export interface ChainProblem {
   data: FitData;
   rate: number;
   kept: Kept | null;
-  /** The chain closes to a ring, whose even counts are told singly or in pairs; left out: it is open. */
-  ring?: Unit;
+  /** The chain closes to a ring, whose even total is part of the law. Left out: it is open. */
+  ring?: boolean;
 }
 
 /** Probabilities under 1e-20 of the mode; as in the plain fit. */
@@ -65,7 +64,7 @@ function scoreOf({ space, data, rate, kept, ring }: ChainProblem, chain: Chain):
   // Without a lump above, the likelihood asks for nothing beyond the largest count seen, or kept.
   const last = data.lump ? Infinity : (kept?.to ?? data.first + data.shots.length - 1);
   const fill = (ends: number) =>
-    ring ? ringSlopes(space, chain, rate, ends, ring, last) : chainSlopes(space, chain, rate, ends, last);
+    ring ? ringSlopes(space, chain, rate, ends, last) : chainSlopes(space, chain, rate, ends, last);
   fill(trim);
   const score = chainScore(space, chain.p.length, data, kept);
   if (score.value > -Infinity) return score;

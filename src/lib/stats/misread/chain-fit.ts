@@ -1,13 +1,12 @@
 import type { FitData } from '../fit/fit-data';
+import { sampleMoments } from '../fit/sample-moments';
 import { chainClimb, type ChainClimb, type ChainProblem } from './chain-climb';
 import type { Kept } from './chain-score';
 import { chainSpace, type Chain } from './chain-space';
 import { misreadCeiling } from './misread-ceiling';
 import { saturated } from '../resampling/divergence';
 import { evenChain, twoLevels } from './chain-starts';
-import { kinksOf } from './kinks-of';
 import { ringCeiling } from './ring-ceiling';
-import type { Unit } from '../types';
 
 /** The best chain found, and the best of equal bonds. */
 export interface ChainFit extends ChainClimb {
@@ -45,7 +44,7 @@ const mostToOrder = 200;
  * the answer then is that it cannot tell (restsOnSearch).
  *
  * @param data trials = N bonds; `kept` sets counts aside that lie outside it (conditioned law), null for none
- * @param ring the chain closes to a ring, whose counts are told singly or in pairs; its even total is part of the law
+ * @param ring the chain closes to a ring, whose even total is part of the law
  * @param enough nats to which the last climb is made
  */
 export function chainFit(
@@ -53,10 +52,10 @@ export function chainFit(
   rate: number,
   kept: Kept | null = null,
   enough = 1e-9,
-  ring?: Unit
+  ring = false
 ): ChainFit {
-  const { bonds, moments } = kinksOf(data, ring);
-  const round = ring !== undefined;
+  const bonds = data.trials!;
+  const moments = sampleMoments(data);
   const problem: ChainProblem = {
     space: chainSpace(bonds, kept ? mostLevelsCut : mostLevels),
     data,
@@ -67,7 +66,7 @@ export function chainFit(
   // Counts set aside move the mean: several starts stand in for the one that is right without.
   const means = kept ? [1, 0.8, 1.25].map((share) => moments.mean * share) : [moments.mean];
   const even = means
-    .map((mean) => chainClimb(problem, evenChain(bonds, mean, rate, round), 1e-6))
+    .map((mean) => chainClimb(problem, evenChain(bonds, mean, rate, ring), 1e-6))
     .reduce((a, b) => (b.value > a.value ? b : a));
   let best = even;
   const searched = new Map<number, number>();
@@ -76,7 +75,7 @@ export function chainFit(
     if (known !== undefined) return known;
     const tried = new Map<number, ChainClimb>();
     const at = (many: number): number => {
-      const start = tried.has(many) ? null : twoLevels(bonds, many, apart, moments, rate, round);
+      const start = tried.has(many) ? null : twoLevels(bonds, many, apart, moments, rate, ring);
       if (start) tried.set(many, chainClimb(problem, start, 1e-6));
       return tried.get(many)?.value ?? -Infinity;
     };
@@ -94,7 +93,7 @@ export function chainFit(
     bonds >= 4 &&
     bonds <= mostToOrder &&
     misfit &&
-    moments.variance < (round ? ringCeiling : misreadCeiling)(bonds, rate)(moments.mean).variance
+    moments.variance < (ring ? ringCeiling : misreadCeiling)(bonds, rate)(moments.mean).variance
   )
     bestLength(setApart, (bonds >> 1) + 1);
   for (let levels = 2; levels < (kept ? mostLevelsCut : mostLevels); levels++) {

@@ -1,13 +1,12 @@
 import type { FitData } from '../fit/fit-data';
 import type { Refit } from '../fit/refit';
-import type { Unit } from '../types';
 import type { Window } from '../laws/window';
 import { chainClimb, type ChainClimb, type ChainProblem } from './chain-climb';
 import { mostLevels, mostLevelsCut } from './chain-fit';
 import type { Kept } from './chain-score';
 import { chainSpace, type Chain, type ChainSpace } from './chain-space';
 import { evenChain, twoLevels } from './chain-starts';
-import { kinksOf } from './kinks-of';
+import { sampleMoments } from '../fit/sample-moments';
 import { readWindow, type ReadChain } from './read-chain';
 
 /** Nats to which a climb is made; G² varies by several between resamples. */
@@ -31,12 +30,12 @@ export type ChainRefit = Omit<Refit, 'levels'> & { levels: ReadChain };
 export function chainRefit(
   data: FitData,
   from: ReadChain,
-  space: ChainSpace = chainSpace(kinksOf(data, from.ring).bonds, from.kept ? mostLevelsCut : mostLevels),
+  space: ChainSpace = chainSpace(data.trials!, from.kept ? mostLevelsCut : mostLevels),
   settled = Infinity
 ): ChainRefit {
   const { rate, ring } = from;
-  const { bonds, moments } = kinksOf(data, ring);
-  const round = ring !== undefined;
+  const bonds = data.trials!;
+  const moments = sampleMoments(data);
   const cut = from.kept ?? null;
   const kept = data.withoutEmpty ? { from: Math.max(1, cut?.from ?? 1), to: cut?.to ?? Infinity } : cut;
   const problem: ChainProblem = { space, data, rate, kept, ...(ring && { ring }) };
@@ -47,16 +46,16 @@ export function chainRefit(
     if (found.value > best.value) best = found;
     return found.value;
   };
-  if (from.p.length > 1 || best.value === -Infinity) attempt(evenChain(bonds, moments.mean, rate, round));
+  if (from.p.length > 1 || best.value === -Infinity) attempt(evenChain(bonds, moments.mean, rate, ring));
   const lengths = (bonds > long ? [0.25, 0.7] : shares).map((share) =>
     Math.min(bonds - 1, Math.max(1, Math.round(share * bonds)))
   );
-  const values = lengths.map((many) => attempt(twoLevels(bonds, many, 1, moments, rate, round)));
+  const values = lengths.map((many) => attempt(twoLevels(bonds, many, 1, moments, rate, ring)));
   const top = values.indexOf(Math.max(...values));
   if (bonds <= long && values[top] > -Infinity) {
     for (const stride of [bonds / 8, -bonds / 8]) {
       const many = lengths[top] + Math.round(stride);
-      attempt(twoLevels(bonds, many, 1, moments, rate, round));
+      attempt(twoLevels(bonds, many, 1, moments, rate, ring));
     }
   }
   return asRefit(best, rate, cut, ring);
@@ -67,7 +66,7 @@ export function asRefit(
   { chain, value }: ChainClimb,
   rate: number,
   kept: Kept | null = null,
-  ring?: Unit
+  ring = false
 ): ChainRefit {
   const levels = { ...chain, rate, ...(kept && { kept }), ...(ring && { ring }) };
   const window: Window = readWindow(levels, 1e-20, 1);

@@ -13,6 +13,8 @@ export interface ChainSpace {
   /** Slopes of both, one pair a level. */
   df: Float64Array[];
   dg: Float64Array[];
+  /** Law and slopes of a ring while it is put together, see ringSlopes. */
+  closed: Float64Array[];
   /** Counts low … high hold something; values lie at their count. */
   low: number;
   high: number;
@@ -26,6 +28,7 @@ export function chainSpace(bonds: number, levels: number): ChainSpace {
     g: room(),
     df: Array.from({ length: levels }, room),
     dg: Array.from({ length: levels }, room),
+    closed: Array.from({ length: levels + 1 }, room),
     low: 0,
     high: 0
   };

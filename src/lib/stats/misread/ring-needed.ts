@@ -3,8 +3,8 @@ import { ringEven } from './ring-even';
 import { ringMoments } from './ring-moments';
 
 /**
- * Misread rate ε of a site with which equal independent kinks round a ring have the mean and variance seen, both in
- * single kinks; 0 where the ring needs none, null where no rate that the mean allows would do.
+ * Misread rate ε of a site with which equal independent kinks round a ring have the mean and variance seen; 0
+ * where the ring needs none, null where no rate that the mean allows would do.
  */
 export function ringNeeded(mean: number, variance: number, bonds: number): number | null {
   const at = (rate: number) => ringMoments(bonds, ringEven(bonds, mean, rate), rate).variance;

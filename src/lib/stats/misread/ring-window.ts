@@ -11,13 +11,14 @@ import { stepChain } from './chain-window';
  *
  * @param blocks kink probabilities in the order of the bonds, as blocks of equal p; N ≥ 3 bonds
  * @param rate ε, 0 ≤ ε ≤ 1
+ * @param trim part of the largest value below which the ends are left out while stepping, as in chainWindow
  * @returns values at every count of the window; 0 at odd ones. Their sum is `scale`, but for what is summed
  * @throws RangeError for fewer than 3 bonds (with two, both bonds join the same sites), and where no even number of kinks is possible
  *
  * For each flip of the first site the chain is stepped to the last site, and the last bond then closes onto the first:
  * positive terms only.
  */
-export function ringWindow(blocks: readonly Level[], rate: number, scale = deepScale): Window {
+export function ringWindow(blocks: readonly Level[], rate: number, scale = deepScale, trim = 0): Window {
   const present = blocks.filter(({ trials }) => trials > 0);
   const bonds = present.reduce((sum, { trials }) => sum + trials, 0);
   if (bonds < 3) throw new RangeError(`a ring of ${bonds} bonds`);
@@ -26,7 +27,7 @@ export function ringWindow(blocks: readonly Level[], rate: number, scale = deepS
   const values = new Float64Array(bonds + 1);
   for (const first of [0, 1]) {
     const start: [number, number] = first === 0 ? [(1 - rate) * scale, 0] : [0, rate * scale];
-    const { window, upright, flipped } = stepChain(open, rate, start, 0, scale);
+    const { window, upright, flipped } = stepChain(open, rate, start, trim, scale);
     // Where first and last site are both upright or both flipped, the closing bond is read as it is.
     const [same, other] = first === 0 ? [upright, flipped] : [flipped, upright];
     for (let i = 0; i < same.length; i++) {

@@ -18,8 +18,8 @@ export type MisreadUse =
   | { applies: false; reason: string | null; largest?: number };
 
 /**
- * Whether a stated misread rate can be allowed for in every test: kinks on the bonds of an open chain of known length,
- * and a rate that the mean count does not refute. Otherwise the reason, as a sentence for the cautions; null when no rate
+ * Whether a stated misread rate can be allowed for in every test: single kinks on the bonds of an open chain of known
+ * length, or of a ring without odd counts, and a rate that the mean count does not refute. Otherwise the reason, as a sentence for the cautions; null when no rate
  * was stated. A rate that no trials can have is told whatever the geometry, with the largest that the counts allow.
  */
 export function misreadApplies(options: DiagnoseOptions, counts: FitData): MisreadUse {
@@ -49,12 +49,31 @@ export function misreadApplies(options: DiagnoseOptions, counts: FitData): Misre
       'Sites misread one by one leave their count a sum of independent trials, so the tests hold as they stand.'
     );
   }
-  if (geometry === 'ring-bonds' || unit === 'pair') {
-    return no(`For kinks on a ring, or counted in pairs, it is written down but not allowed for, ${without}`);
+  const ring = geometry === 'ring-bonds';
+  if (unit === 'pair') {
+    return no(
+      ring
+        ? `In pairs it is written down but not allowed for, ${without} What misreads do to a pair depends on how far apart its two kinks lie. Counted singly, kinks that form independently round the ring are tested with the rate allowed for.`
+        : `For kinks counted in pairs on an open chain it is written down but not allowed for, ${without}`
+    );
+  }
+  const odd = ring ? oddShots(counts) : 0;
+  if (odd > 0) {
+    return no(
+      `Round a ring a misread site toggles two bonds and keeps counts even, so no rate gives the ${odd === 1 ? 'odd count' : `${formatCount(odd)} odd counts`} seen: a site was lost, a bond missed, or the file is wrong. Read such shots again or set them aside, and the rate can be allowed for. It is not, ${without}`
+    );
   }
   if (trials === null) return no(`Without the number of bonds it cannot be allowed for, ${without}`);
-  if (trials < 2 || trials > mostBonds) {
-    return no(`It is allowed for on chains of 2 to ${formatCount(mostBonds)} bonds, ${without}`);
+  if (ring && trials % 2 === 1 && mean > trials / 2) {
+    return no(
+      `On a ring of an odd number of bonds it is allowed for where at most half of them are read as kinks, ${without}`
+    );
+  }
+  const fewest = ring ? 3 : 2;
+  if (trials < fewest || trials > mostBonds) {
+    return no(
+      `It is allowed for on ${ring ? 'rings' : 'chains'} of ${fewest} to ${formatCount(mostBonds)} bonds, ${without}`
+    );
   }
   if (limits.high > mostRate) {
     const reach = uncertainty > 0 ? ` With its uncertainty it may be ${formatPercent(limits.high, 3)}.` : '';
@@ -63,4 +82,9 @@ export function misreadApplies(options: DiagnoseOptions, counts: FitData): Misre
     );
   }
   return uncertainty > 0 ? { applies: true, rate: limits.rate, limits } : { applies: true, rate: misread };
+}
+
+/** Shots with an odd count in a row of its own. */
+function oddShots({ first, shots }: FitData): number {
+  return shots.reduce((sum, here, i) => ((first + i) % 2 === 1 ? sum + here : sum), 0);
 }

@@ -23,6 +23,7 @@ export function misreadFitReport(
   drawnEven = false
 ): Diagnosis['fit'] {
   const plugIn = divergence(counts, logLikelihood);
+  const where = chain.ring ? 'round a ring but for their even total' : 'along an open chain';
   const laid = cells(counts, readWindow(chain));
   const corrected =
     fitted.nullDivergences.length > 0
@@ -49,7 +50,7 @@ export function misreadFitReport(
     gSquared: 2 * counts.total * plugIn,
     shotsToNotice: noticed,
     certified: false,
-    how: `Independent kinks of up to three probabilities along an open chain, read with ${sayRate(chain.rate)} of the sites misread: equal bonds, two levels in stretches of many lengths, and halves of these, each by scoring. Other orders of the bonds were not searched, and no floor is known. The levels are those of the true kinks; the laws beside it are of counts without misreads.${drawnEven ? ' Equal bonds fit about as well and vary most, so the resamples of the tests were drawn from them.' : ''}`,
+    how: `Independent kinks of up to three probabilities ${where}, read with ${sayRate(chain.rate)} of the sites misread: equal bonds, two levels in stretches of many lengths, and halves of these, each by scoring. Other orders of the bonds were not searched, and no floor is known. The levels are those of the true kinks; the laws beside it are of counts without misreads${chain.ring ? ' and of either parity' : ''}.${drawnEven ? ' Equal bonds fit about as well and vary most, so the resamples of the tests were drawn from them.' : ''}`,
     ...referenceLaws(counts, options.supplied)
   };
 }

@@ -1,9 +1,8 @@
 import { logMeanChernoff } from '../bounds/log-mean-chernoff';
 import type { FitData } from '../fit/fit-data';
+import { sampleMoments } from '../fit/sample-moments';
 import { windowRate } from '../laws/window-rate';
 import { chainFit } from '../misread/chain-fit';
-import { inPairs } from '../misread/in-pairs';
-import { kinksOf } from '../misread/kinks-of';
 import { logMisreadTail } from '../misread/log-misread-tail';
 import { misreadCertificate } from '../misread/misread-certificate';
 import { readMoments, readWindow } from '../misread/read-chain';
@@ -17,11 +16,11 @@ import { misreadFitReport } from './misread-fit-report';
 import type { NullLaw } from './null-law';
 
 /**
- * Independent kinks round a ring but for their even total, read with misread sites, counted singly or in pairs: as
+ * Independent kinks round a ring but for their even total, read with misread sites: as
  * misreadNull for an open chain. Every count is even, so parity is not tested; certificate and bounds rest on half the
  * count being a sum of independent trials (see ringTail), and are the weaker for it.
  *
- * @param counts in the unit tested; all even where single kinks are counted
+ * @param counts of single kinks, all even
  * @param rate ε, as misreadApplies lets through
  */
 export function ringNull(
@@ -30,55 +29,38 @@ export function ringNull(
   rate: number,
   options: DiagnoseOptions
 ): NullLaw {
-  const ring = options.unit;
-  const per = ring === 'pair' ? 2 : 1;
-  const { bonds, moments } = kinksOf(counts, ring);
+  const bonds = counts.trials!;
+  const ring = true;
   const { chain, value, even } = chainFit(counts, rate, null, 1e-9, ring);
   const levels = { ...chain, rate, ring };
   const near = value - even.value <= Math.log(counts.total) / 2;
   const ceilingAt = ringCeiling(bonds, rate);
-  const most = ceilingAt(moments.mean);
+  const most = ceilingAt(sampleMoments(counts).mean);
   const blocks = Array.from(most.kinks!, (p) => ({ p, trials: 1 }));
-  const window = inPairs(ringWindow(blocks, rate, 1), ring);
+  const window = ringWindow(blocks, rate, 1);
   const lost = 4 * rate * (1 - rate);
-  const kinks = Math.min(
-    bonds,
-    Math.max(0, (per * readMoments(levels).mean - (bonds * lost) / 2) / (1 - lost))
-  );
+  const kinks = Math.min(bonds, Math.max(0, (readMoments(levels).mean - (bonds * lost) / 2) / (1 - lost)));
   const exactly = { low: kinks, high: kinks };
   const toggled = toggledLaw(bonds, rate, true);
-  const found =
-    histogram.lump || histogram.below
-      ? null
-      : misreadCertificate({
-          counts: histogram.counts.map(([n, shots]) => [per * n, shots]),
-          shots: counts.total,
-          bonds,
-          rate,
-          ring: true
-        });
   const fitted = readWindow(levels);
   return {
     levels,
     law: levels,
     logLikelihood: value,
     ...(near && { drawnFrom: { ...even.chain, rate, ring } }),
-    ceiling:
-      histogram.lump || histogram.below ? clampedVariance(window, histogram) : most.variance / (per * per),
-    mostDispersed: { window, ceiling: (mean) => ceilingAt(per * mean).variance / (per * per) },
-    // An odd count is as good a threshold as the even one beyond it.
-    certificate: found && {
-      ...found,
-      count: found.side === 'high' ? Math.ceil(found.count / per) : Math.floor(found.count / per),
-      mean: found.mean / per
-    },
+    ceiling: histogram.lump || histogram.below ? clampedVariance(window, histogram) : most.variance,
+    mostDispersed: { window, ceiling: (mean) => ceilingAt(mean).variance },
+    certificate:
+      histogram.lump || histogram.below
+        ? null
+        : misreadCertificate({ counts: histogram.counts, shots: counts.total, bonds, rate, ring }),
     bounds: {
       meanChernoff: (side, count) =>
         Math.max(
-          logMisreadTail(side, per * count, exactly, toggled, ringTail(logMeanChernoff)),
+          logMisreadTail(side, count, exactly, toggled, ringTail(logMeanChernoff)),
           -windowRate(fitted, count)
         ),
-      hoeffding: (side, count) => logMisreadTail(side, per * count, exactly, toggled, ringTail())
+      hoeffding: (side, count) => logMisreadTail(side, count, exactly, toggled, ringTail())
     },
     report: (drawn) => misreadFitReport(counts, levels, value, drawn, options, near)
   };

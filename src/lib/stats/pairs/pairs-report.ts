@@ -13,12 +13,14 @@ const bySingles = Math.log(1e-6);
  *
  * @param given counts of single defects
  * @param even shots with an even count, and the share that the best law expects; null with a lump
+ * @param ringAsRead the law tested is of single kinks round a ring, read with misreads
  */
 export function pairsReport(
   { counts, lump, below }: Histogram,
   shots: number,
   options: Pick<DiagnoseOptions, 'unit' | 'geometry' | 'trials'>,
-  even: { seen: number; expected: number } | null
+  even: { seen: number; expected: number } | null,
+  ringAsRead = false
 ): PairsPart | undefined {
   const { unit, geometry, trials } = options;
   if (unit === 'pair') return undefined;
@@ -28,6 +30,14 @@ export function pairsReport(
   const telling = all && logChance !== null && logChance <= bySingles;
   const ring = geometry === 'ring-bonds';
   if (!telling && !ring) return undefined;
+  if (ringAsRead)
+    return {
+      proposed: false,
+      logChance,
+      odd: null,
+      statement:
+        'No count is odd, as on a ring, misread or not: a misread site toggles two bonds. The law tested gives even counts only, so counting pairs would tell nothing else.'
+    };
   const halves = trials === null || trials % 2 === 0;
   const odd =
     ring && trials !== null && lump === null && !below

@@ -1,6 +1,5 @@
 import type { FitData } from '../fit/fit-data';
 import { chainFit } from '../misread/chain-fit';
-import type { Unit } from '../types';
 
 /** Points of the first look, and halvings of their distance after it. */
 const points = 7;
@@ -10,7 +9,7 @@ const halvings = 4;
  * The misread rate within limits at which the best chain found fits best: there the tests of the fit speak least against
  * independent kinks. A grid, then ever shorter strides from its best.
  */
-export function bestRate(counts: FitData, low: number, high: number, ring?: Unit): number {
+export function bestRate(counts: FitData, low: number, high: number, ring = false): number {
   const known = new Map<number, number>();
   const value = (rate: number) => {
     const before = known.get(rate);

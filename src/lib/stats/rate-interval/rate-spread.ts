@@ -78,7 +78,7 @@ export async function rateSpread(stated: Stated, pace: Pace, helper?: DrawHelper
     tests: stated.tests,
     certificate: stated.tested.certificate
   };
-  const ring = options.geometry === 'ring-bonds' ? options.unit : undefined;
+  const ring = options.geometry === 'ring-bonds';
   const others = [...new Set([low, high, bestRate(counts, low, high, ring)])].filter((one) => one !== rate);
   const many = stated.tests.length + order.length;
   const fewer = {

@@ -8,7 +8,6 @@ import type { Window } from '../laws/window';
 import { mostLevels, mostLevelsCut } from '../misread/chain-fit';
 import { chainRefit } from '../misread/chain-refit';
 import { chainSpace, type ChainSpace } from '../misread/chain-space';
-import { kinksOf } from '../misread/kinks-of';
 import { isReadChain, readEven, readMoments, readWindow, type ReadChain } from '../misread/read-chain';
 import { dropsEmptyOnly, refitWithoutEmpty } from '../truncation/without-empty';
 import type { Law } from '../types';
@@ -58,7 +57,7 @@ export function familyRefit(
       const rest = { ...data, withoutEmpty: true };
       return refitWithoutEmpty(rest, from, kept, (buffers[part] = workspace(rest, buffers[part])), settled);
     }
-    buffers.chain ??= chainSpace(kinksOf(data, from.ring).bonds, kept ? mostLevelsCut : mostLevels);
+    buffers.chain ??= chainSpace(data.trials!, kept ? mostLevelsCut : mostLevels);
     return chainRefit(data, from, buffers.chain, settled);
   }
   return refit(data, from, (buffers[part] = workspace(data, buffers[part])), settled);

@@ -4,6 +4,7 @@ import type { TestId } from '../types';
 import { cells } from './cells';
 import { emptyExcess } from './empty-excess';
 import { familyMoments } from './fitted-law';
+import { isReadChain } from '../misread/read-chain';
 import { parityExcess, parityNeeds } from './parity-excess';
 import type { Refitted } from './refitted';
 import { tailExcess } from './tail-excess';
@@ -66,9 +67,11 @@ export function chooseStatistics(observed: Refitted): ChosenStatistics {
     'parity',
     { of: parityExcess, needs: parityNeeds, root: false },
     oneCount ??
-      (data.lump || data.below
-        ? `The ${data.lump ? 'closing' : 'opening'} row lumps even and odd counts together.`
-        : null)
+      (isReadChain(law) && law.ring
+        ? 'Round a ring every count is even, misread or not, in the law that is tested.'
+        : data.lump || data.below
+          ? `The ${data.lump ? 'closing' : 'opening'} row lumps even and odd counts together.`
+          : null)
   );
   use('empty-shots', { of: emptyExcess, needs: square, root: true }, noEmpty(observed));
   const rest = observed.rest();

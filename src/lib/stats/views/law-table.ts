@@ -60,7 +60,7 @@ export function lawTable(data: FitData, law: FittedLaw): LawTable {
     upper: (n) => (n <= window.first ? 1 : (upward[n - window.first] ?? 0)),
     lower: (n) =>
       n < window.first ? 0 : Math.min(1, downward[Math.min(n - window.first, downward.length - 1)]),
-    rate: (n) => (isReadChain(law) ? readRate(law, n, mean) : lawRate(law, n))
+    rate: (n) => (isReadChain(law) ? readRate(law, n, mean, window) : lawRate(law, n))
   };
 }
 
@@ -68,8 +68,8 @@ export function lawTable(data: FitData, law: FittedLaw): LawTable {
  * Rate of a chain; cut to the counts kept, I(n) + ln P(kept), which keeps Chernoff's bound one: P(X ≥ n | kept) ≤
  * P(X ≥ n)/P(kept). Between the mean before the cut and after it nothing is known, and the rate is 0.
  */
-function readRate(law: ReadChain, n: number, mean: number): number {
-  if (law.ring) return windowRate(familyWindow(law), n);
+function readRate(law: ReadChain, n: number, mean: number, window: Window): number {
+  if (law.ring) return windowRate(window, n);
   const { kept, ...before } = law;
   const rate = chainRate(chainBlocks(law), law.rate, n);
   if (!kept) return rate;

@@ -1,5 +1,6 @@
 import { defaultOptions } from '$lib/stats/default-options';
 import { misreads } from '$lib/stats/flags/misreads';
+import { ringMoments } from '$lib/stats/misread/ring-moments';
 import type { DiagnoseOptions } from '$lib/stats/types';
 import { describe, expect, it } from 'vitest';
 import { evidence, interval } from './make-evidence';
@@ -26,9 +27,20 @@ describe('misreads', () => {
     expect(flag.size).not.toContain('stated');
   });
 
-  it('is silent for sites, for a ring, and below the ceiling', () => {
+  it('hints at the rate of a ring as well, where no count is odd', () => {
+    const { mean, variance } = ringMoments(20, 0.2, 0.03);
+    const even = { seen: 2000, expected: 0.5, oneCountAlone: false };
+    const base = evidence({ p: { ceiling: 0.001 }, over: { shots: 2000, even } });
+    const moments = { ...base.moments, mean: interval(mean), variance: interval(variance) };
+    const options = { ...defaultOptions, trials: 20, geometry: 'ring-bonds' as const };
+    const ring = { ...base, moments, options };
+    expect(misreads(ring)!.size).toContain('3.0\u202f%');
+    expect(misreads({ ...ring, even: { ...even, seen: 1999 } })).toBeNull();
+    expect(misreads({ ...ring, options: { ...options, unit: 'pair' } })).toBeNull();
+  });
+
+  it('is silent for sites and below the ceiling', () => {
     expect(found({ geometry: 'sites' })).toBeNull();
-    expect(found({ geometry: 'ring-bonds' })).toBeNull();
     expect(found({}, 0.5)).toBeNull();
   });
 

@@ -23,40 +23,32 @@ describe('ringSlopes', () => {
             rate,
             true
           );
-        for (const unit of ['defect', 'pair'] as const) {
-          const per = unit === 'pair' ? 2 : 1;
-          const space = chainSpace(bonds, 3);
-          ringSlopes(space, { p, runs }, rate, 0, unit);
-          const want = law(p);
+        const space = chainSpace(bonds, 3);
+        ringSlopes(space, { p, runs }, rate, 0);
+        law(p).forEach((want, n) => expect(Math.abs(space.f[n] + space.g[n] - want)).toBeLessThan(1e-13));
+        p.forEach((_, j) => {
+          // Differences of a smooth law over 2e-5: error about 1e-10, and 1e-11 of rounding.
+          const moved = (by: number) => law(p.map((one, k) => (k === j ? one + by : one)));
+          const [up, down] = [moved(1e-5), moved(-1e-5)];
           for (let n = 0; n <= bonds; n++) {
-            if (n % per === 0)
-              expect(Math.abs(space.f[n / per] + space.g[n / per] - want[n])).toBeLessThan(1e-13);
+            const slope = (up[n] - down[n]) / 2e-5;
+            expect(Math.abs(space.df[j][n] + space.dg[j][n] - slope)).toBeLessThan(1e-8);
           }
-          p.forEach((_, j) => {
-            // Differences of a smooth law over 2e-5: error about 1e-10, and 1e-11 of rounding.
-            const moved = (by: number) => law(p.map((one, k) => (k === j ? one + by : one)));
-            const [up, down] = [moved(1e-5), moved(-1e-5)];
-            for (let n = 0; n <= bonds; n += 2) {
-              const slope = (up[n] - down[n]) / 2e-5;
-              expect(Math.abs(space.df[j][n / per] + space.dg[j][n / per] - slope)).toBeLessThan(1e-8);
-            }
-          });
-        }
+        });
       });
     }
   }
 
   it('leaves counts beyond the last one asked for out and gives the others as before', () => {
     const chain = { p: [0.1], runs: [{ level: 0, trials: 40 }] };
-    for (const unit of ['defect', 'pair'] as const) {
-      const [whole, short] = [chainSpace(40, 1), chainSpace(40, 1)];
-      ringSlopes(whole, chain, 0.01, 0, unit);
-      ringSlopes(short, chain, 0.01, 0, unit, 4);
-      for (let n = 0; n <= 4; n++) {
-        expect(Math.abs(short.f[n] - whole.f[n])).toBeLessThan(1e-15);
-        expect(Math.abs(short.df[0][n] - whole.df[0][n])).toBeLessThan(1e-13);
-      }
-      expect(short.high).toBe(4);
+    const [whole, short] = [chainSpace(40, 1), chainSpace(40, 1)];
+    ringSlopes(whole, chain, 0.01, 0);
+    ringSlopes(short, chain, 0.01, 0, 5);
+    for (let n = 0; n <= 5; n++) {
+      expect(Math.abs(short.f[n] - whole.f[n])).toBeLessThan(1e-15);
+      expect(Math.abs(short.df[0][n] - whole.df[0][n])).toBeLessThan(1e-13);
     }
+    expect(short.high).toBe(5);
+    expect(whole.high).toBe(40);
   });
 });

@@ -9,7 +9,7 @@ import { testedTrials } from './units';
 export function sayFit(quotable: Quotable): Words[] {
   if (quotable.data.misreadApplied)
     return [
-      words`The law of independent kinks along an open chain of ${math('N')} bonds${sayMisread(quotable)}, was fitted by maximum likelihood; up to three kink probabilities were searched, and not every order of the bonds, so a nearer law may exist.`
+      words`The law of independent kinks ${quotable.data.geometry === 'ring-bonds' ? 'round a ring' : 'along an open chain'} of ${math('N')} bonds${quotable.data.geometry === 'ring-bonds' ? ', given that their number is even' : ''}${sayMisread(quotable)}, was fitted by maximum likelihood; up to three kink probabilities were searched, and not every order of the bonds, so a nearer law may exist.`
     ];
   if (testedTrials(quotable) === null)
     return [
