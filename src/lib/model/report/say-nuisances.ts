@@ -54,10 +54,15 @@ export const told = (rows: [string, string | null][]): [string, string][] =>
   rows.filter((row): row is [string, string] => row[1] !== null);
 
 export function sayPairs(
-  view: Pick<Diagnosis, 'flags'> & { data: Pick<Diagnosis['data'], 'unit' | 'geometry'> }
+  view: Pick<Diagnosis, 'flags'> & {
+    data: Pick<Diagnosis['data'], 'unit' | 'geometry'>;
+    nuisances?: { misread?: { applied: boolean } };
+  }
 ): string {
   const { unit, geometry } = view.data;
   if (unit === 'pair') return 'Counts are even by construction: n/2 out of N/2 is tested.';
+  if (view.nuisances?.misread?.applied && geometry === 'ring-bonds')
+    return `Single kinks are tested, which form independently but for their even total; the law tested gives even counts only.${sayFlagged(view, 'pairing')}`;
   const ring = geometry === 'ring-bonds' ? ' On a ring every count is even: give the unit as pairs.' : '';
   return `Single defects are tested.${ring}${sayFlagged(view, 'pairing')}`;
 }

@@ -70,7 +70,7 @@ export const DATA = {
     name: 'misread rate, ε',
     words: [
       'The probability that one site is read wrongly.',
-      'On a chain or ring a wrong site toggles the two bonds beside it, so independent kinks look bunched. Round a ring counts stay even.'
+      'On a chain or ring a wrong site toggles the two bonds beside it, so independent kinks look bunched; round a ring counts stay even.'
     ],
     formula: ['p_{"read"} = p + 2ε(1−ε)(1−2p)'],
     source: ''

@@ -81,7 +81,7 @@ export const MOMENTS = {
     name: 'ceiling of kinks as read',
     words: [
       'The largest variance that independent kinks of this mean can have once their sites are misread at the stated rate.',
-      'It takes the place of the plain ceiling, so a variance over it is more than those misreads give.'
+      'It takes the place of the plain ceiling, so a variance over it is more than those misreads give; the formula is that of an open chain, and on a ring the largest variance that searches found stands for it.'
     ],
     formula: [
       'frac{1}{4}[N − min sum_{j,k} A_{jk} m_j m_k]',

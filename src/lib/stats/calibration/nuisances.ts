@@ -4,6 +4,7 @@ import { deadSetAside } from './nuisances/dead-set-aside';
 import { driftingBatches } from './nuisances/drifting-batches';
 import { lumped } from './nuisances/lumped';
 import { misreadBonds } from './nuisances/misread-bonds';
+import { misreadRing } from './nuisances/misread-ring';
 import { misreadSites } from './nuisances/misread-sites';
 import { ringInPairs } from './nuisances/ring-in-pairs';
 
@@ -11,6 +12,7 @@ import { ringInPairs } from './nuisances/ring-in-pairs';
 export const nuisances: Nuisance[] = [
   misreadBonds('misread-bonds', 0),
   misreadBonds('misread-bonds-unsure', 0.001),
+  misreadRing,
   misreadSites,
   ringInPairs,
   cut('empty-dropped', 40, 0.06, 1, null),

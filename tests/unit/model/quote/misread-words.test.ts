@@ -47,6 +47,29 @@ describe('what is quoted where a misread rate was stated', () => {
     expect(said(document)).not.toContain('Clopper');
   });
 
+  it('names the ring, its even total and the ceiling that was found', async () => {
+    const even: [number, number][] = [
+      [0, 520],
+      [2, 400],
+      [4, 80]
+    ];
+    const options = { ...defaultOptions, trials: 10, resamples: 99, geometry: 'ring-bonds' as const };
+    const document = await diagnose(
+      { kind: 'histogram', counts: even, lump: null },
+      { ...options, misread: 0.02 }
+    );
+    expect(document.nuisances?.misread?.applied).toBe(true);
+    for (const text of [said(document), said(withoutCounts(document))]) {
+      expect(text).toContain(
+        'independent kinks round a ring of N bonds, given that their number is even, read with'
+      );
+      expect(text).toContain(
+        'the largest found for independent kinks round a ring with this mean, read with'
+      );
+      expect(text).not.toContain('open chain');
+    }
+  });
+
   it('says that the tests leave them out where they do', async () => {
     const text = said(await made({ geometry: 'ring-bonds', misread: 0.02 }));
     expect(text).toContain('the tests are against laws without misreads');

@@ -14,6 +14,7 @@ import { highest, lowest } from './binomial-limits';
 const cells: [id: string, without: number, withExcess: number, resamples: number][] = [
   ['misread-bonds', 16, 8, 99],
   ['misread-bonds-unsure', 8, 10, 99],
+  ['misread-ring', 16, 8, 99],
   ['misread-sites', 40, 12, 99],
   ['ring-in-pairs', 40, 12, 99],
   ['empty-dropped', 40, 12, 99],

@@ -10,7 +10,7 @@ export function sayCertificate({ certificate, data }: Quotable): Words[] {
   const tried = words`${counted(certificate.thresholds, 'count')} ${certificate.thresholds === 1 ? 'was' : 'were'} tried, with Bonferroni’s allowance`;
   if (data.misreadApplied)
     return [
-      words`Beside the tests stands an exact certificate, without fit or simulation: the number of shots at or beyond a count is held against the heaviest tail that independent kinks can have${sayMisread({ data })} (${SOURCES_BY_YEAR.hoeffding}, for each number of bonds that misreads toggle), at the unfavourable end of limits for the mean (Bernstein’s inequality) that miss with a chance of at most one in a million, which is added to ${math('p')} (${SOURCES_BY_YEAR.bergerBoos}); ${tried}.`
+      words`Beside the tests stands an exact certificate, without fit or simulation: the number of shots at or beyond a count is held against the heaviest tail that independent kinks can have${sayMisread({ data })} (${SOURCES_BY_YEAR.hoeffding}, for each number of bonds that misreads toggle${data.geometry === 'ring-bonds' ? '; round a ring half the count is a sum of independent trials' : ''}), at the unfavourable end of limits for the mean (Bernstein’s inequality) that miss with a chance of at most one in a million, which is added to ${math('p')} (${SOURCES_BY_YEAR.bergerBoos}); ${tried}.`
     ];
   const interval = data.trials === null ? SOURCES_BY_YEAR.garwood : SOURCES_BY_YEAR.clopperPearson;
   return [

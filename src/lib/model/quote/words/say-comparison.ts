@@ -33,7 +33,7 @@ export function sayScatter(quotable: Quotable): Words[] {
 
 function ceiling(quotable: Quotable): Words {
   if (quotable.data.misreadApplied)
-    return words`The variance was compared with its ceiling, the largest that independent kinks with this mean can have${sayMisread(quotable)}${quotable.data.lump || quotable.data.opening ? ' and lumped in the same way' : ''}.`;
+    return words`The variance was compared with its ceiling, the largest ${quotable.data.geometry === 'ring-bonds' ? 'found for independent kinks round a ring with this mean' : 'that independent kinks with this mean can have'}${sayMisread(quotable)}${quotable.data.lump || quotable.data.opening ? ' and lumped in the same way' : ''}.`;
   if (quotable.data.lump || quotable.data.opening)
     return [
       text(
