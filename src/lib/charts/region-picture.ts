@@ -70,7 +70,10 @@ export function regionPicture(place: CumulantsPlace, { width, text }: Size): Pic
     legend: [
       { role: point, label: 'seen, with its 95 % intervals' },
       { role: 'law', label: place.law.name ?? 'best law' },
-      { role: 'bound', label: 'no independent trials of this mean beyond this edge' },
+      {
+        role: 'bound',
+        label: `no independent trials of this mean beyond this edge${place.beyond ? `, not allowing for ${place.beyond.what}` : ''}`
+      },
       { role: 'corner', label: 'laws to compare with' }
     ],
     order: 'across',

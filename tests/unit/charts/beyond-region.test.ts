@@ -50,7 +50,8 @@ describe('the region of cumulants where the answer allows for more', () => {
       'Not allowing for misreads, the cumulants lie beyond what any independent trials can reach'
     );
     expect(inksOf(place)).not.toContain('oxide');
-    const { notes, readings } = regionPicture(place, { width: 760, text: 13 });
+    const { notes, readings, legend } = regionPicture(place, { width: 760, text: 13 });
+    expect(legend.map(({ label }) => label).join()).toContain('beyond this edge, not allowing for misreads');
     expect(notes.join()).toMatch(/toggles two bonds at once.*times its ceiling.*has the misreads in it/s);
     expect(readings.map(({ words }) => words()).join()).toContain(
       'Not allowing for misreads: no independent trials have so large a variance'

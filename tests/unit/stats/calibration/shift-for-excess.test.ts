@@ -12,8 +12,8 @@ const ceiling = (mean: number) => mean * (1 - mean / 20);
 
 it('agrees with the variance of a mixture by hand: 1 + 19δ²/(p(1 − p)) ceilings', () => {
   const shift = shiftForExcess(at, ceiling, { p: 0.2, trials: 20, shots: 1000, strength: 2 });
-  // 2.49·√((2 + κ4/κ2²)/S), κ4/κ2² = (1 − 6p(1 − p))/(Np(1 − p)) of equal trials.
-  const excess = 2 * 2.49 * Math.sqrt((2 + (1 - 6 * 0.16) / 3.2) / 1000);
+  // 2.49·√(2(1 − 1/N)/S): the scatter of variance over the ceiling of equal trials.
+  const excess = 2 * 2.49 * Math.sqrt(1.9 / 1000);
   expect(shift).toBeCloseTo(Math.sqrt((excess * 0.16) / 19), 10);
 });
 
@@ -42,6 +42,6 @@ it('of a declared cut is that of the smallest excess that its diagnosis tells', 
   });
   const shape = keptShape(keptEqual(20, { from: 1, to: 7 }, moments.mean.value!))!;
   expect(answer.smallestExcess!).toBeCloseTo(2.49 * Math.sqrt(shape / 4000), 4);
-  // 2 + κ4/κ2² of 20 whole trials at p = 0.2 is 2.0125.
+  // 2(1 − 1/N) of 20 whole trials is 1.9.
   expect(shape).toBeLessThan(1.9);
 });
