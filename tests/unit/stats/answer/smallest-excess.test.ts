@@ -41,7 +41,7 @@ describe('dispersionShape', () => {
       // Bin(N, p) by its recursion.
       const values = [(1 - p) ** trials];
       for (let n = 1; n <= trials; n++) values.push((values[n - 1]! * (trials - n + 1) * p) / (n * (1 - p)));
-      const { mean, variance } = windowMoments({ first: 0, values, scale: 1 });
+      const { mean, variance } = windowMoments({ first: 0, values: Float64Array.from(values), scale: 1 });
       const central = (power: number) => values.reduce((sum, f, n) => sum + f * (n - mean) ** power, 0);
       const want = central(4) / variance ** 2 - 1 - central(3) ** 2 / variance ** 3;
       expect(dispersionShape(trials * p, trials)! / want).toBeCloseTo(1, 9);
