@@ -9,7 +9,7 @@ import { rank } from './rank';
 import { separate } from './separate';
 import { separation, type FittedStory, type Separation } from './separation';
 import { shotsToSeparate } from './shots-to-separate';
-import { stories } from './stories';
+import { storiesOn } from './stories';
 import type { Seen } from './story';
 import { fitStory } from './fit-story';
 import { storyModel } from './story-model';
@@ -57,6 +57,7 @@ export async function explanationsOf(
   const width = Math.min(trials ?? Infinity, 104 * Math.sqrt(Math.max(mean, variance)) + last - data.first);
   const flat = mean === 0 || mean === trials || variance === 0;
   const attempts: Attempt[] = [];
+  const stories = storiesOn(options.geometry);
   for (const [index, story] of stories.entries()) {
     const refused = flat
       ? 'The counts have no spread to explain.'

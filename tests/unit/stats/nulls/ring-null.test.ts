@@ -14,6 +14,11 @@ describe('independent kinks p = 0.05 round 100 bonds, 1 % of the sites misread, 
     const found = await diagnose(data, ring);
     expect(found.answer.verdict).toBe('ruled-out');
     expect(found.flags.map(({ id }) => id)).toEqual(['pairing', 'misreads']);
+    // Equal kinks round a ring with their sites misread are one of the stories, and the one that is true here.
+    const [first] = found.explanations!.ranked;
+    expect(first.id).toBe('misread-sites');
+    expect(first.parameter!.low).toBeLessThan(0.01);
+    expect(first.parameter!.high).toBeGreaterThan(0.01);
     const { applied, neededRate, rawDispersion } = found.nuisances!.misread!;
     expect(applied).toBe(false);
     expect(neededRate.low!).toBeLessThan(0.01);

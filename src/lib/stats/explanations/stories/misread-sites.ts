@@ -13,8 +13,6 @@ export const misreadSites: Story = {
   refuses: ({ trials, unit, geometry, last, lump }) => {
     if (geometry === 'sites')
       return 'Sites counted one by one stay independent trials when they are misread.';
-    if (geometry === 'ring-bonds')
-      return 'On a ring misread sites keep every count even; this law is for an open chain.';
     if (unit === 'pair') return 'It is for single kinks on an open chain, not for pairs.';
     if (trials === null) return 'It needs the number of bonds.';
     return withinBudget(8 * trials * ((lump ? trials : last) + 1));
