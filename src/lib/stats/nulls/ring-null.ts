@@ -20,6 +20,10 @@ import type { NullLaw } from './null-law';
  * misreadNull for an open chain. Every count is even, so parity is not tested; certificate and bounds rest on half the
  * count being a sum of independent trials (see ringTail), and are the weaker for it.
  *
+ * Measured with 40 bonds, p = 0.06, ε = 0.01 and 2000 shots: at a nominal 5 % the variance alarmed in 4.9 % of 1500
+ * repeats, the fit in 4.7 %, high and low tail in 4.3 % and 4.9 %; empty shots in 5.0 % of 200. Twice the smallest excess
+ * was seen by the variance in 67 of 67 repeats.
+ *
  * @param counts of single kinks, all even
  * @param rate ε, as misreadApplies lets through
  */
