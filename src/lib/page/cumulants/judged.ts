@@ -3,6 +3,7 @@ import type { PublishedCumulants } from '$lib/stats/cumulants-only/published-cum
 
 /** A line of a table and what was found. */
 export interface Judged {
+  /** What of it was judged (withErrors). */
   printed: PublishedCumulants;
   verdict: CumulantsVerdict;
   statement: string;
@@ -12,10 +13,13 @@ export interface Judged {
 
 /** Judges in the page itself, which takes milliseconds; the engine's part is fetched on first use. */
 export async function judge(printed: PublishedCumulants, address: string): Promise<Judged> {
-  const [{ judgeCumulants }, { sayCumulants }] = await Promise.all([
+  const [{ judgeCumulants }, { sayCumulants }, { withErrors }, { sayLeftOut }] = await Promise.all([
     import('$lib/stats/cumulants-only/judge-cumulants'),
-    import('$lib/stats/cumulants-only/say-cumulants')
+    import('$lib/stats/cumulants-only/say-cumulants'),
+    import('$lib/stats/cumulants-only/with-errors'),
+    import('$lib/stats/cumulants-only/say-left-out')
   ]);
-  const verdict = judgeCumulants(printed);
-  return { printed, verdict, statement: sayCumulants(verdict), address };
+  const judged = withErrors(printed);
+  const verdict = judgeCumulants(judged);
+  return { printed: judged, verdict, statement: sayCumulants(verdict) + sayLeftOut(printed), address };
 }

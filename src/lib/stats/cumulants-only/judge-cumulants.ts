@@ -7,6 +7,8 @@ import { conditionsOf, type Condition } from './condition';
 import { countLimits } from './count-limits';
 import { nearestReachable, type NearestReachable } from './nearest-reachable';
 import { givenCumulants, type PublishedCumulants } from './published-cumulants';
+import { roundedDispersion } from './rounded-dispersion';
+import { roundingReaches } from './rounding-reaches';
 import { trialLimits } from './trial-limits';
 
 /** What printed cumulants alone say about independence. */
@@ -22,13 +24,18 @@ export interface CumulantsVerdict {
   settled: boolean;
   /** Cumulants without a printed error, from 1 on: rounding alone stands for it, and of chance nothing can be said. */
   rounded: number[];
+  /**
+   * Where rounding stands for errors: whether it alone can have put the cumulants outside; null when that is too close
+   * to tell.
+   */
+  reaches: boolean | null;
   /** Printed minus nearest, each in its own error. */
   pulls: number[];
   /** At most this often do errors of this size turn up when some independent trials are true, errors independent. */
   p: number;
   /** The same whatever the correlations of the errors. */
   pAnyErrors: number;
-  /** Variance over ceiling with its 95 % interval. */
+  /** Variance over ceiling with its 95 % interval; where rounding stands for errors, with all that it leaves open. */
   dispersion: Interval;
   /** N at which the ceiling equals the printed variance; null when no N does. */
   criticalTrials: number | null;
@@ -76,12 +83,12 @@ export function judgeCumulants(printed: PublishedCumulants): CumulantsVerdict {
   const broken = conditionsOf(values, errors, (at) => countLimits(trials, at)).filter(
     ({ standing }) => standing === 'broken'
   );
-  const dispersion = dispersionOf(printed);
   const ruledOut = p <= alpha;
-  const seen = dispersion.high !== null && dispersion.high < 1 + tolerance;
-  const settled = nearest.distance - nearest.atLeast <= apart * (1 + nearest.distance);
   const rounded = given.flatMap((one, i) => (one.rounded ? [i + 1] : []));
   const known = rounded.length === 0;
+  const dispersion = known ? dispersionOf(printed) : roundedDispersion(printed);
+  const seen = dispersion.high !== null && dispersion.high < 1 + tolerance;
+  const settled = nearest.distance - nearest.atLeast <= apart * (1 + nearest.distance);
   const beyondAny = broken.some(({ slack, error }) => -slack > misprint * error);
   return {
     verdict: beyondAny
@@ -96,6 +103,7 @@ export function judgeCumulants(printed: PublishedCumulants): CumulantsVerdict {
     nearest,
     settled,
     rounded,
+    reaches: known || nearest.distance === 0 || roundingReaches(trials, values, errors),
     pulls: values.map((value, i) => (value - nearest.cumulants[i]) / errors[i]),
     p,
     pAnyErrors,

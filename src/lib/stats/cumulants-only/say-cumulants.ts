@@ -45,7 +45,8 @@ function said({
   settled,
   pulls,
   p,
-  rounded
+  rounded,
+  reaches
 }: CumulantsVerdict): string {
   if (verdict === 'impossible') {
     const worst = broken.reduce((a, b) => (b.slack / b.error < a.slack / a.error ? b : a));
@@ -62,11 +63,11 @@ function said({
   if (!settled)
     return 'The errors are of such different sizes that the distance of these cumulants from independent trials cannot be worked out in sixteen digits. Look for a slip in the smallest of them.';
   if (rounded.length > 0) {
-    // k numbers, each off by its half unit at most, lie √k of them away at most.
-    const within = nearest.distance <= Math.sqrt(pulls.length) * (1 + 1e-9);
     if (nearest.distance === 0)
       return 'Some independent trials can have these cumulants as they are printed.';
-    return within
+    if (reaches === null)
+      return 'Some independent trials may have had these cumulants before they were rounded: as printed they lie outside, and whether rounding alone can do that is too close to tell.';
+    return reaches
       ? 'Some independent trials may have had these cumulants before they were rounded: as printed they lie outside, by no more than rounding can do.'
       : `As printed, rounding allowed for, these cumulants lie outside what independent trials can have${first ? `: ${sayBroken(first)}` : ''}. If they are exact, no independent trials have them.`;
   }

@@ -124,6 +124,39 @@ describe('cumulants without an error', () => {
   });
 });
 
+describe('a third cumulant without an error beside mean and variance that have theirs', () => {
+  const judged = async (more: Partial<CumulantFields>) => {
+    const read = readCumulants(table(more));
+    if (!read.ok) throw new Error(JSON.stringify(read.problems));
+    return judge(read.printed, '');
+  };
+
+  it('withdraws nothing that the other two rule out', async () => {
+    const two = {
+      mean: '4.00',
+      'mean-error': '0.01',
+      variance: '5.00',
+      'variance-error': '0.02',
+      trials: ''
+    };
+    const { verdict, statement, printed } = await judged({ ...two, third: '6.5', 'third-error': '' });
+    expect(verdict.verdict).toBe('ruled-out');
+    expect(verdict).toEqual((await judged({ ...two, third: '' })).verdict);
+    expect(printed.third).toBeNull();
+    expect(statement).toMatch(/No error was given for the third cumulant: it is left out, since/);
+  });
+
+  it('is not told as rounding where chance put the others outside', async () => {
+    const { statement } = await judged({
+      ...{ mean: '4.00', 'mean-error': '0.05', variance: '4.05', 'variance-error': '0.1', trials: '' },
+      ...{ third: '4.0', 'third-error': '', fourth: '4.0', 'fourth-error': '0.4' }
+    });
+    expect(statement).toMatch(/^Within their errors some independent trials can have these cumulants/);
+    expect(statement).not.toMatch(/rounded/);
+    expect(statement).toMatch(/left out, and with it the fourth, since/);
+  });
+});
+
 describe('the place of printed cumulants', () => {
   const placed = async (more: Partial<CumulantFields>) => {
     const read = readCumulants(table({ third: '3', 'third-error': '0.3', ...more }));
