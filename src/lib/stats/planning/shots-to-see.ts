@@ -20,7 +20,8 @@ export interface ShotsToSee {
   /**
    * The plan lies where the formula is rough: under 50 shots, or shots · mean² under 50. On a grid of 1350 plans for
    * an excess the simulated power was up to 19 points off there, and within 5 points elsewhere (one of 5.2, no more
-   * than the simulation itself is off).
+   * than the simulation itself is off). `npm run calibrate -- --plans`, with enough experiments to find the cut at every
+   * level: 483 plans of every kind of effect, the worst 2.4 points off.
    */
   rough: boolean;
 }
