@@ -1,7 +1,9 @@
 import type { Flag } from '../types';
 import { formatNumber } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
-import { allEven, gradeOf, type Evidence } from './evidence';
+import { allEven, gradeOf, ringAsRead, type Evidence } from './evidence';
+
+const boundary = 'boundary sites that favour one phase, so that defects enter in pairs';
 
 /**
  * Bunching: the variance ceiling is broken, and not by one tail alone.
@@ -35,11 +37,16 @@ export function bunching(evidence: Evidence): Flag | null {
         (misread?.applies ? ', read with the misread rate that was stated.' : '.'),
     size: `The variance is ${sayInterval(dispersion, 3)} times the ceiling of independent trials${misread?.applies ? ' as they are read' : ''}.${correlation}`,
     otherCauses: [
+      ...(ringAsRead(evidence)
+        ? [
+            'kinks that form in independent pairs, which vary about twice as much: count pairs to test for these'
+          ]
+        : []),
       'a rate that drifted or differed between runs that were pooled',
       misread?.applies
         ? 'more misread sites than stated, or misreads that come together'
         : 'read-out flips, when kinks are read from neighbouring sites: one misread site toggles two bonds',
-      'boundary sites that favour one phase, so that defects enter in pairs',
+      ...(evidence.options.geometry === 'ring-bonds' ? [] : [boundary]),
       'dead shots mixed in, which lower the mean and widen the counts'
     ],
     next: [

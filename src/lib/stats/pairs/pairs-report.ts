@@ -36,7 +36,7 @@ export function pairsReport(
       logChance,
       odd: null,
       statement:
-        'No count is odd, as on a ring, misread or not: a misread site toggles two bonds. The law tested gives even counts only, so counting pairs would tell nothing else.'
+        'No count is odd, as on a ring, misread or not: a misread site toggles two bonds. The law tested gives even counts only. Counting pairs tests something else: pairs that form independently, which vary about twice as much as single kinks do.'
     };
   const halves = trials === null || trials % 2 === 0;
   const odd =

@@ -65,6 +65,8 @@ describe('independent kinks p = 0.05 round 100 bonds, 1 % of the sites misread, 
     const found = await diagnose(data, { ...ring, misread: 0.005 });
     expect(found.answer.verdict).toBe('ruled-out');
     expect(found.flags[0].id).toBe('bunching');
+    expect(found.flags[0].otherCauses[0]).toContain('independent pairs');
+    expect(found.nuisances!.pairs!.statement).toContain('Counting pairs tests something else');
     expect(found.moments.dispersion.low!).toBeGreaterThan(1.05);
     expect(found.answer.because.join(' ')).toContain('Without misreads it would be 1.26 times the ceiling.');
   });
