@@ -107,7 +107,7 @@ export const NOTES = {
   twoSettings: {
     title: 'Two settings',
     paragraphs: [
-      'Half of the shots at p(1 − d), half at p(1 + d): the shares are taken to be equal, and only d is fitted. Where one setting had fewer shots the story fits worse than it could, and bursts or dead shots may lead in its place.'
+      'Half of the shots at p(1 − d), half at p(1 + d): the shares are taken to be equal, and only d is fitted. Where one setting had fewer shots the story fits worse than it could, and bursts, which are the same law with a small share, or dead shots may lead in its place.'
     ]
   },
   /** @param drawn see sayDrawnFrom */

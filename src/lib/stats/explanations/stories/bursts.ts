@@ -9,7 +9,7 @@ const rare = 0.1;
 /**
  * Bursts: equal trials, and in a rare share of the shots (at most a tenth) an outside event puts defects on a part h of
  * the other trials too. Two numbers beside the mean, and AIC counts both. N unknown: Poisson counts, h more of them in
- * a burst.
+ * a burst. As a law it is two settings with unequal shares, and is said to be.
  */
 export const bursts: Story = {
   id: 'bursts',
@@ -41,5 +41,5 @@ export const bursts: Story = {
       trials === null
         ? `${formatNumber(own[1], 2)} defects on average`
         : `defects on about ${formatPercent(own[1])} of the other trials`
-    } at once; all other shots are independent trials.`
+    } at once; all other shots are independent trials. A second setting with so small a share of the shots gives the very same counts: only their order can tell.`
 };
