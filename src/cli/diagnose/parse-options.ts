@@ -115,7 +115,7 @@ export function parseOptions(args: string[]): Asked | 'help' {
       'open-bonds': 'open-bonds',
       'ring-bonds': 'ring-bonds'
     } as const),
-    misread: orUnknown('misread', 'a probability'),
+    misread: orUnknown('misread', 'a probability such as 0.01'),
     misreadUncertainty: number('misread-uncertainty', 'a standard uncertainty such as 0.001'),
     kept: keptOf(values.kept),
     alpha: number('alpha', 'a number such as 0.01'),

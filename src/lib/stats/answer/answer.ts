@@ -2,6 +2,7 @@ import type { Evidence } from '../flags/evidence';
 import type { Diagnosis, Flag, Verdict } from '../types';
 import { because } from './because';
 import { decide } from './decide';
+import { rateRefuted } from './rate-refuted';
 import { restsOnSearch } from './rests-on-search';
 import { shotsToDecide } from './shots-to-decide';
 import { smallestExcess, dispersionShape } from './smallest-excess';
@@ -16,7 +17,7 @@ import { unreachable } from './unreachable';
  *   variance/ceiling is below 1 + tolerance, an excess of one half would have been seen, there are at least 50 shots,
  *   and no test is as extreme as its resamples can show;
  * - undecided: otherwise, with the number of shots that would decide. Also where only a law that may not be the best
- *   speaks against independent trials (see restsOnSearch).
+ *   speaks against independent trials (see restsOnSearch), and where kinks cannot have the misread rate that was stated.
  *
  * A misread rate known with an uncertainty: compatible only where it is so at every rate tried.
  */
@@ -40,7 +41,11 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
     alpha: options.alpha,
     tests: Math.max(1, evidence.tests.length)
   };
-  const open = unreachable(evidence).length === 0 && !ratesDiffer(evidence) && !restsOnSearch(evidence);
+  const open =
+    unreachable(evidence).length === 0 &&
+    !ratesDiffer(evidence) &&
+    rateRefuted(evidence) === null &&
+    !restsOnSearch(evidence);
   const needed = verdict === 'undecided' && testable && open ? shotsToDecide(deciding) : null;
   return {
     verdict,
@@ -53,7 +58,8 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
 
 /** Whether the misread rate is what leaves the answer open: more shots would not settle that. */
 const ratesDiffer = ({ rates }: Evidence): boolean =>
-  rates !== undefined && rates.rates.some(({ verdict }) => verdict === 'ruled-out');
+  rates !== undefined &&
+  (rates.changes.length > 0 || rates.rates.some(({ verdict }) => verdict === 'ruled-out'));
 
 function overRates({ rates }: Evidence, verdict: Verdict): Verdict {
   if (!rates || verdict === 'ruled-out') return verdict;

@@ -1,4 +1,5 @@
 import type { Evidence } from '../flags/evidence';
+import { rateRefuted } from './rate-refuted';
 import { ringCeiling } from '../misread/ring-ceiling';
 import type { TestResult, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
@@ -17,6 +18,8 @@ export function because(
   const { options, moments, tests, certificate, trials } = evidence;
   const misread = evidence.misread?.applies ? evidence.misread : null;
   const out: string[] = [];
+  if (rateRefuted(evidence) !== null)
+    out.push('All that follows takes the counts as they were read, without misreads.');
   if (certificate && certificate.p <= options.alpha) {
     out.push(
       `Exact certificate, without fit or simulation: ${formatPercent(certificate.shots / evidence.shots)} of the shots (${formatCount(certificate.shots)}) have a count of ${formatCount(certificate.count)} or ${certificate.side === 'high' ? 'more' : 'less'}, and no independent trials with a mean within its limits${misread ? `, however misread at the ${evidence.rates ? 'rates within the interval' : 'rate stated'},` : ''} give more than ${formatPercent(certificate.bound)} (p at most ${formatNumber(certificate.p, 2)}).`

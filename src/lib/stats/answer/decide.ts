@@ -1,5 +1,6 @@
 import type { Evidence } from '../flags/evidence';
 import type { Verdict } from '../types';
+import { rateRefuted } from './rate-refuted';
 import { restsOnSearch } from './rests-on-search';
 import { unreachable } from './unreachable';
 
@@ -20,7 +21,7 @@ export type Decided = Pick<Evidence, 'certificate' | 'tests' | 'options' | 'shot
 /** See answer. @param excess smallest excess that would have been seen; null for none */
 export function decide(decided: Decided, excess: number | null): Verdict {
   const { certificate, tests, moments, options, shots } = decided;
-  if (restsOnSearch(decided)) return 'undecided';
+  if (rateRefuted(decided) !== null || restsOnSearch(decided)) return 'undecided';
   if (certificate && certificate.p <= options.alpha) return 'ruled-out';
   if (tests.some((test) => test.pAdjusted <= options.alpha)) return 'ruled-out';
   if (unreachable({ tests, options }).length > 0) return 'undecided';

@@ -4,6 +4,7 @@ import type { Flag, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayRate } from '../words/say-rate';
 import { sayHowOften } from '../words/say-p';
+import { rateRefuted } from './rate-refuted';
 import { restsOnSearch } from './rests-on-search';
 import { resamplesNeeded, unreachable } from './unreachable';
 
@@ -40,6 +41,9 @@ export function statement(
     return `No defect was seen in ${shots}, so there is nothing to test.`;
   if (evidence.moments.variance.value === 0)
     return `Every one of these ${shots} had the same count, so there is no spread to test.`;
+  const refuted = rateRefuted(evidence);
+  if (refuted !== null)
+    return `These ${shots} cannot be judged with the misread rate that was stated. It cannot be right: these counts allow ${formatPercent(refuted, 3)} at most. Correct it, or leave it out to test the counts as they were read.`;
   if (restsOnSearch(evidence))
     return `These ${shots} cannot tell: they misfit the best law found, but their variance lies below the ceiling, where bonds that are sure or excluded in an order that was not searched can give such counts without any interaction.`;
   const blind = unreachable(evidence);
@@ -69,8 +73,9 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   if (drift && (drift.tests.includes('batches') || evidence.neighbours !== 'alternating'))
     return driftAlone(evidence);
   const { options, misread, moments } = evidence;
+  // Of sites: a misread there leaves the trials independent (see rateRefuted).
   if (misread && !misread.applies && misread.largest !== undefined)
-    return ` But the misread rate that was stated cannot be right: these counts allow ${formatPercent(misread.largest, 3)} at most${raised('misreads') ? ', and misreads alone could still give this' : ''}.`;
+    return ` But the misread rate that was stated cannot be right: these counts allow ${formatPercent(misread.largest, 3)} at most.`;
   if (raised('misreads')) return ' But misread sites alone could give this.';
   // A misread on sites that are counted themselves leaves the trials independent.
   if (

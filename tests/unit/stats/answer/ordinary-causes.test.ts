@@ -41,9 +41,14 @@ describe('an answer', () => {
       { kind: 'histogram', counts, lump: null },
       { ...options, trials: 100, geometry: 'open-bonds', misread: 0.1 }
     );
+    // Without misreads, which there are, the tests would rule independent trials out: that answer is not given.
+    expect(document.tails.certificate!.p).toBeLessThan(0.01);
+    expect(document.answer.verdict).toBe('undecided');
+    expect(document.answer.shotsToDecide).toBeNull();
     expect(document.answer.statement).toMatch(
-      /the misread rate that was stated cannot be right: these counts allow 3\.\d+/
+      /cannot be judged with the misread rate that was stated\. It cannot be right: these counts allow 3\.\d+/
     );
+    expect(document.answer.because[0]).toMatch(/as they were read, without misreads/);
   });
 
   it('names dead shots beside pairing, since each of them counts as even', () => {
