@@ -20,12 +20,6 @@ export function smallestExcess(
   return shape === null ? null : reach * Math.sqrt(shape / shots);
 }
 
-/** Shots for a smallest excess of `excess`; the inverse of the above. */
-export function shotsForExcess(mean: number, trials: number | null, excess: number): number | null {
-  const shape = dispersionShape(mean, trials);
-  return shape === null ? null : Math.ceil(shape * (reach / excess) ** 2);
-}
-
 /**
  * S times the relative variance of variance over ceiling under equal trials, both from the same shots: 2(1 − 1/N), and 2
  * for a Poisson law, whatever the mean. A variance alone has 2 + κ4/κ2², but the ceiling C follows the mean along
