@@ -18,6 +18,13 @@ const FORMULAS: Formula[] = [
     words: 'The variance of any such count, with mean μ. N unknown: at most μ.'
   },
   {
+    name: 'Misread kinks',
+    formula: 'κ_2 = ¼[N(1 − m^2u^4) + 2(N − 1)m^2u^2(1 − u^2)]',
+    alt: 'kappa 2 equals one quarter of the sum of N times 1 minus m squared u to the fourth, and 2 times N minus 1 times m squared u squared times 1 minus u squared',
+    words:
+      'Where a misread rate ε of kinks is stated: the variance of equal ones on an open chain as they are read, with m\u00a0=\u00a01\u00a0−\u00a02p and u\u00a0=\u00a01\u00a0−\u00a02ε. The largest over all probabilities takes the place of the ceiling, and a bound of its own that of the tails. Round a ring the total is even besides.'
+  },
+  {
     name: 'Rate',
     formula: 'Î(n/N) = −(1/N) ln(h_n/S)',
     alt: 'I hat of n over N equals minus 1 over N times the logarithm of h n over S',

@@ -2,7 +2,7 @@ import type { Evidence } from '../flags/evidence';
 import type { Diagnosis, Flag, Verdict } from '../types';
 import { because } from './because';
 import { decide } from './decide';
-import { rateRefuted } from './rate-refuted';
+import { rateLeftOut } from './rate-left-out';
 import { restsOnSearch } from './rests-on-search';
 import { shotsToDecide } from './shots-to-decide';
 import { smallestExcess, dispersionShape } from './smallest-excess';
@@ -17,7 +17,7 @@ import { unreachable } from './unreachable';
  *   variance/ceiling is below 1 + tolerance, an excess of one half would have been seen, there are at least 50 shots,
  *   and no test is as extreme as its resamples can show;
  * - undecided: otherwise, with the number of shots that would decide. Also where only a law that may not be the best
- *   speaks against independent trials (see restsOnSearch), and where kinks cannot have the misread rate that was stated.
+ *   speaks against independent trials (see restsOnSearch), and where the tests cannot allow for the misread rate of kinks that was stated.
  *
  * A misread rate known with an uncertainty: compatible only where it is so at every rate tried.
  */
@@ -44,7 +44,7 @@ export function answer(evidence: Evidence, flags: Flag[]): Diagnosis['answer'] {
   const open =
     unreachable(evidence).length === 0 &&
     !ratesDiffer(evidence) &&
-    rateRefuted(evidence) === null &&
+    !rateLeftOut(evidence) &&
     !restsOnSearch(evidence);
   const needed = verdict === 'undecided' && testable && open ? shotsToDecide(deciding) : null;
   return {

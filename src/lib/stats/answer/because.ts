@@ -1,5 +1,5 @@
 import type { Evidence } from '../flags/evidence';
-import { rateRefuted } from './rate-refuted';
+import { rateLeftOut } from './rate-left-out';
 import { ringCeiling } from '../misread/ring-ceiling';
 import type { TestResult, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
@@ -18,7 +18,7 @@ export function because(
   const { options, moments, tests, certificate, trials } = evidence;
   const misread = evidence.misread?.applies ? evidence.misread : null;
   const out: string[] = [];
-  if (rateRefuted(evidence) !== null)
+  if (verdict === 'undecided' && rateLeftOut(evidence))
     out.push('All that follows takes the counts as they were read, without misreads.');
   if (certificate && certificate.p <= options.alpha) {
     out.push(

@@ -1,6 +1,6 @@
 import type { Evidence } from '../flags/evidence';
 import type { Verdict } from '../types';
-import { rateRefuted } from './rate-refuted';
+import { rateLeftOut } from './rate-left-out';
 import { restsOnSearch } from './rests-on-search';
 import { unreachable } from './unreachable';
 
@@ -20,10 +20,16 @@ export type Decided = Pick<Evidence, 'certificate' | 'tests' | 'options' | 'shot
 
 /** See answer. @param excess smallest excess that would have been seen; null for none */
 export function decide(decided: Decided, excess: number | null): Verdict {
-  const { certificate, tests, moments, options, shots } = decided;
-  if (rateRefuted(decided) !== null || restsOnSearch(decided)) return 'undecided';
-  if (certificate && certificate.p <= options.alpha) return 'ruled-out';
-  if (tests.some((test) => test.pAdjusted <= options.alpha)) return 'ruled-out';
+  const { certificate, tests, moments, options, shots, misread } = decided;
+  if (restsOnSearch(decided)) return 'undecided';
+  const extreme = tests.filter((test) => test.pAdjusted <= options.alpha);
+  if (rateLeftOut(decided)) {
+    // That shots or batches differ is no matter of how sites are misread.
+    if (extreme.some(({ id }) => id === 'batches' || id === 'order')) return 'ruled-out';
+    if (misread?.applies === false && misread.largest !== undefined) return 'undecided';
+    if (extreme.length > 0 || (certificate && certificate.p <= options.alpha)) return 'undecided';
+  }
+  if (extreme.length > 0 || (certificate && certificate.p <= options.alpha)) return 'ruled-out';
   if (unreachable({ tests, options }).length > 0) return 'undecided';
   const { high } = moments.dispersion;
   const sighted = shots >= fewest && excess !== null && excess <= blind;

@@ -4,7 +4,7 @@ import type { Flag, Verdict } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayRate } from '../words/say-rate';
 import { sayHowOften } from '../words/say-p';
-import { rateRefuted } from './rate-refuted';
+import { rateLeftOut } from './rate-left-out';
 import { restsOnSearch } from './rests-on-search';
 import { resamplesNeeded, unreachable } from './unreachable';
 
@@ -41,9 +41,7 @@ export function statement(
     return `No defect was seen in ${shots}, so there is nothing to test.`;
   if (evidence.moments.variance.value === 0)
     return `Every one of these ${shots} had the same count, so there is no spread to test.`;
-  const refuted = rateRefuted(evidence);
-  if (refuted !== null)
-    return `These ${shots} cannot be judged with the misread rate that was stated. It cannot be right: these counts allow ${formatPercent(refuted, 3)} at most. Correct it, or leave it out to test the counts as they were read.`;
+  if (rateLeftOut(evidence)) return leftOut(shots, evidence);
   if (restsOnSearch(evidence))
     return `These ${shots} cannot tell: they misfit the best law found, but their variance lies below the ceiling, where bonds that are sure or excluded in an order that was not searched can give such counts without any interaction.`;
   const blind = unreachable(evidence);
@@ -63,6 +61,19 @@ export function statement(
   return `These ${shots} cannot tell: they neither rule out independent trials nor exclude an excess that matters.${hint}${more}`;
 }
 
+/** The answer where the tests ran without the misreads that there are. */
+function leftOut(shots: string, { misread, options, tests, certificate }: Evidence): string {
+  if (misread?.applies === false && misread.largest !== undefined)
+    return `These ${shots} cannot be judged with the misread rate that was stated. It cannot be right: these counts allow ${formatPercent(misread.largest, 3)} at most. Correct it, or leave it out to test the counts as they were read.`;
+  const extreme = [...tests.map(({ pAdjusted }) => pAdjusted), certificate?.p ?? 1].some(
+    (p) => p <= options.alpha
+  );
+  const why = 'the misread rate that was stated could not be allowed for; the cautions say why';
+  return extreme
+    ? `These ${shots} cannot be judged: without misreads no independent trials explain them, and ${why}.`
+    : `These ${shots} cannot tell: without misreads they neither rule out independent trials nor exclude an excess that matters, and ${why}.`;
+}
+
 /** The ordinary cause that must be settled first, where the counts themselves point at one. */
 function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   const raised = (id: Flag['id']) => flags.some((flag) => flag.id === id);
@@ -72,19 +83,11 @@ function ordinaryCause(evidence: Evidence, flags: Flag[]): string {
   // Shots that lean against the one before do not drift; batches that differ do, however neighbours stand.
   if (drift && (drift.tests.includes('batches') || evidence.neighbours !== 'alternating'))
     return driftAlone(evidence);
-  const { options, misread, moments } = evidence;
-  // Of sites: a misread there leaves the trials independent (see rateRefuted).
+  const { misread } = evidence;
+  // Of sites: a misread there leaves the trials independent (see rateLeftOut).
   if (misread && !misread.applies && misread.largest !== undefined)
     return ` But the misread rate that was stated cannot be right: these counts allow ${formatPercent(misread.largest, 3)} at most.`;
   if (raised('misreads')) return ' But misread sites alone could give this.';
-  // A misread on sites that are counted themselves leaves the trials independent.
-  if (
-    options.misread &&
-    options.geometry !== 'sites' &&
-    !misread?.applies &&
-    (moments.dispersion.value ?? 0) > 1
-  )
-    return ' But the stated misread rate could not be allowed for, and misread sites alone could give this.';
   return '';
 }
 

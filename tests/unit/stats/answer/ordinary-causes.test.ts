@@ -51,6 +51,54 @@ describe('an answer', () => {
     expect(document.answer.because[0]).toMatch(/as they were read, without misreads/);
   });
 
+  it('judges no kinks by tests that could not allow for the misread rate that was stated', async () => {
+    // 10 % of the sites misread are more than are allowed for, and a mean of 25 does not refute them.
+    const counts = counted(plainPmf(new Array<number>(100).fill(0.25)), 20_000).map(
+      ([n, h]): [number, number] => [n, n > 33 ? 3 * h : h]
+    );
+    const of = (more: Partial<typeof options>) =>
+      diagnose(
+        { kind: 'histogram', counts, lump: null },
+        { ...options, trials: 100, geometry: 'open-bonds', ...more }
+      );
+    expect((await of({})).answer.verdict).toBe('ruled-out');
+    const { answer, cautions } = await of({ misread: 0.1 });
+    expect(answer.verdict).toBe('undecided');
+    expect(answer.shotsToDecide).toBeNull();
+    expect(answer.statement).toMatch(
+      /without misreads no independent trials explain them, and the misread rate that was stated could not be allowed for/
+    );
+    expect(answer.because[0]).toMatch(/as they were read, without misreads/);
+    expect(cautions.join(' ')).toMatch(/Above 9\.17\u202f% it is written down but not allowed for/);
+    // Sites that are counted themselves stay independent trials.
+    expect((await of({ misread: 0.1, geometry: 'sites' })).answer.verdict).toBe('ruled-out');
+  });
+
+  it('judges no ring whose odd counts refute every rate, nor one of half sure bonds and an odd number', async () => {
+    const ring = (counts: [number, number][], trials: number) =>
+      diagnose(
+        { kind: 'histogram', counts, lump: null },
+        { ...options, trials, geometry: 'ring-bonds', misread: 0.01 }
+      );
+    const even = counted(plainPmf(new Array<number>(50).fill(0.06)), 20_000).map(
+      ([n, h]): [number, number] => [2 * n, h]
+    );
+    expect((await ring([...even, [3, 1]], 100)).answer.verdict).toBe('undecided');
+    // Equal bonds of p = 2/3 on a ring of 5: 0, 2 and 4 kinks as 1 : 40 : 80.
+    expect(
+      (
+        await ring(
+          [
+            [0, 100],
+            [2, 4000],
+            [4, 8000]
+          ],
+          5
+        )
+      ).answer.verdict
+    ).toBe('undecided');
+  });
+
   it('names dead shots beside pairing, since each of them counts as even', () => {
     const even = { seen: 1569, expected: 0.5, oneCountAlone: false };
     const caused = (emptyShots: number) =>
