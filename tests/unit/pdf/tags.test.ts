@@ -59,7 +59,8 @@ describe('tags', () => {
     for (const alt of charts) expect(alt).toMatch(/^Chart of .+\. .+\. Marks: .+\.$/);
     expect(charts[0]).toContain('The best independent-trial law agrees with');
     const formulas = elements('Formula').map((object) => textOf(object, 'Alt'));
-    expect(formulas).toHaveLength(6);
+    // Trials, ceiling, misread kinks, rate, limit, tails, distance.
+    expect(formulas).toHaveLength(7);
     expect(formulas).toContain('kappa 2 is at most mu times 1 minus mu over N');
   });
 
