@@ -1,3 +1,4 @@
+import { testIds } from '../test-ids';
 import type { Generator } from '../random/generator';
 import type { CountData, DiagnoseOptions } from '../types';
 import type { PName } from './outcome';
@@ -20,11 +21,6 @@ export interface Nuisance {
 
 /** Every test of a histogram. */
 export const everyTest: PName[] = [
-  'ceiling',
-  'fit',
-  'high-tail',
-  'low-tail',
-  'parity',
-  'empty-shots',
+  ...testIds.filter((id) => id !== 'batches' && id !== 'order'),
   'certificate'
 ];

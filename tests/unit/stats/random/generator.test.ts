@@ -15,7 +15,7 @@ describe('generator', () => {
 
   it('is xoshiro128** on the state that the seed is mixed to', () => {
     // State of (1, 0) from NumPy 2.4.6 SeedSequence([1, 0, 0]).generate_state(4); outputs by the recurrence of
-    // Blackman & Vigna 2021 in Python's unbounded integers, whose transcription gives the published sequence
+    // Blackman & Vigna 2021 in Python's unbounded integers, which so written gives the published sequence
     // 11520, 0, 5927040, 70819200, 2031721883 from state 1, 2, 3, 4.
     const stream = generator(1, 0);
     expect(Array.from({ length: 6 }, () => stream.uint32())).toEqual([
