@@ -28,6 +28,7 @@ export default defineConfig({
           name: 'statistics',
           include: ['tests/unit/**/*.test.ts', 'tests/reference/**/*.test.ts'],
           environment: 'node',
+          setupFiles: ['tests/support/property-seed.ts'],
           pool: 'forks',
           maxWorkers: 2,
           testTimeout: 60_000,
