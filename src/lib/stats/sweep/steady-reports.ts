@@ -1,0 +1,72 @@
+import type { Unit } from '../types';
+import type { CumulantErrors } from './cumulant-errors';
+import { normalInterval } from './normal-interval';
+import { referenceRatios } from './reference-ratios';
+import { steadyRatio } from './steady-ratio';
+import type { SteadyReport, SweepOptions } from './types';
+
+/**
+ * Whether κ2/κ1 and κ3/κ1 are the same at every time, and for hold times whether F2/F1² is: F2 = κ2 − κ1 and F1 = κ1 are
+ * factorial cumulants, of which independent loss multiplies the r-th by q^r, so that this factor stays while the mean
+ * falls; loss in pairs changes it.
+ *
+ * The square of the mean is taken as k1² − k2/S, which is unbiased; errors by the delta method.
+ *
+ * Source: factorial cumulants under thinning: Daley & Vere-Jones 2003, An Introduction to the Theory of Point
+ * Processes I, ch. 5 (m).
+ */
+export function steadyReports(
+  known: CumulantErrors[],
+  { axis, unit }: { axis: SweepOptions['axis']; unit: Unit }
+): SteadyReport[] {
+  const references = referenceRatios(unit);
+  const ratios = ([1, 2] as const).map((q) => {
+    const pairs = known.map(({ cumulants, covariance: v }) => ({
+      x: cumulants[0],
+      y: cumulants[q],
+      varX: v[0],
+      varY: v[4 * q],
+      covariance: v[q]
+    }));
+    const id = q === 1 ? ('variance-over-mean' as const) : ('third-over-mean' as const);
+    return report(
+      id,
+      pairs,
+      references.map((one) => ({ id: one.id, at: q === 1 ? one.variance : one.third }))
+    );
+  });
+  if (axis === 'quench-time') return ratios.filter((one) => one !== null);
+  const factor = report(
+    'pair-factor',
+    known.map(({ shots, cumulants: [mean, variance], covariance: v }) => ({
+      x: mean * mean - variance / shots,
+      y: variance - mean,
+      varX: 4 * mean * mean * v[0],
+      varY: v[4] - 2 * v[1] + v[0],
+      covariance: 2 * mean * (v[1] - v[0])
+    })),
+    []
+  );
+  return [...ratios, factor].filter((one) => one !== null);
+}
+
+function report(
+  id: SteadyReport['id'],
+  pairs: Parameters<typeof steadyRatio>[0],
+  references: { id: string; at: [number, number] }[]
+): SteadyReport | null {
+  const found = steadyRatio(pairs);
+  if (!found) return null;
+  const { value, error, chiSquare, freedom, p } = found;
+  return {
+    id,
+    steady: normalInterval(value, error),
+    chiSquare,
+    freedom,
+    p,
+    references: references.map(({ id, at: [reference, own] }) => {
+      const { low, high } = normalInterval(value, Math.hypot(error, own));
+      return { id, value: reference, error: own, inside: low <= reference && reference <= high };
+    })
+  };
+}

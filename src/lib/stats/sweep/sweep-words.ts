@@ -1,0 +1,88 @@
+import { formatNumber } from '../words/format-number';
+import { sayInterval } from '../words/say-interval';
+import type { SweepReport } from './types';
+
+type Found = Omit<SweepReport, 'statement' | 'because' | 'cautions'>;
+
+/** The answer of a sweep in words: what the power laws say, why, and what they cannot tell. */
+export function sweepWords(found: Found): Pick<SweepReport, 'statement' | 'because' | 'cautions'> {
+  return { statement: statementOf(found), because: becauseOf(found), cautions: cautionsOf(found) };
+}
+
+const thinP = (p: number) => `p = ${formatNumber(p, 2)}`;
+
+function statementOf({ laws, alpha, points }: Found): string {
+  const held = points.filter(({ inWindow, cumulants }) => inWindow && cumulants).length;
+  if (!laws)
+    return `No power law can be fitted: ${held} of the datasets in the window ${held === 1 ? 'has' : 'have'} cumulants with errors, at two different times or fewer, or a variance that is not known to be positive.`;
+  const { common, quantities, p } = laws;
+  const names = quantities === 3 ? 'mean, variance and third cumulant' : 'mean and variance';
+  if (p !== null && p <= alpha)
+    return `No power laws hold in this window: ${names} leave them by more than chance allows (${thinP(p)}).${common.p <= alpha ? ` One exponent for all is refused as well (${thinP(common.p)}).` : ''}`;
+  if (common.p <= alpha)
+    return `One exponent for ${names} is refused (${thinP(common.p)}): each follows a power law of its own, so no single density governs the whole law.`;
+  return `One exponent, ${sayInterval(common.exponent)}, serves ${names}, within their errors (${thinP(common.p)}).`;
+}
+
+function becauseOf({ laws, expected, steady, points, alpha }: Found): string[] {
+  const lines: string[] = [];
+  if (laws) {
+    const each = laws.exponents.map((one, q) => `κ${'₁₂₃'[q]}: ${sayInterval(one)}`).join('; ');
+    lines.push(`Exponents one by one: ${each}.`);
+    if (laws.p === null) lines.push('With two datasets any power law fits: a third would test it.');
+    if (laws.quantities < 3)
+      lines.push('The third cumulant is too poorly known for a power law: more shots would show it.');
+  }
+  if (laws && expected)
+    lines.push(
+      `A transition with d = ${formatNumber(expected.dimension)}, ν = ${formatNumber(expected.correlation)}, z = ${formatNumber(expected.dynamic)} gives dν/(1 + zν) = ${formatNumber(expected.exponent)}, which the 95\u202f% interval ${expected.inside ? 'holds' : 'does not hold'}.`
+    );
+  for (const { id, steady: value, p } of steady)
+    lines.push(`${NAMES[id]} over the window: ${sayInterval(value)}${sayChange(p, alpha)}.`);
+  const factor = steady.find(({ id }) => id === 'pair-factor');
+  if (factor && factor.p !== null)
+    lines.push(
+      factor.p <= alpha
+        ? 'F₂/F₁² changes with the hold time, which loss of single defects independently of each other would not do; loss in pairs would, and so would drift.'
+        : 'F₂/F₁² keeps its value within errors, as under loss of single defects independently of each other.'
+    );
+  const out = points.filter(({ cumulants }) => !cumulants).map(({ label }) => `“${label}”`);
+  if (out.length > 0)
+    lines.push(`Left out, since fewer than four different counts tell no errors: ${out.join(', ')}.`);
+  return lines;
+}
+
+const NAMES = {
+  'variance-over-mean': 'κ₂/κ₁',
+  'third-over-mean': 'κ₃/κ₁',
+  'pair-factor': 'F₂/F₁²'
+} as const;
+
+const sayChange = (p: number | null, alpha: number): string =>
+  p === null
+    ? ''
+    : p <= alpha
+      ? `, but it is not the same at every time (${thinP(p)})`
+      : `, the same at every time within errors (${thinP(p)})`;
+
+function cautionsOf({ laws, steady, unit, axis }: Found): string[] {
+  const lines = [
+    'A power law in a window does not say which physics made it: plateaus at the fast end and a background at the slow end end it, so look how the exponent moves with the window.'
+  ];
+  const agreeing = steady.filter(({ references }) =>
+    references.some(({ id, inside }) => inside && id !== 'rare-events')
+  );
+  if (unit === 'defect' && agreeing.length > 0)
+    lines.push(
+      'Ratios of cumulants cannot tell Landau–Zener kinks (0.586, 0.134) from coarsening of a chain from zero temperature (0.584 ± 0.004, 0.146 ± 0.044).'
+    );
+  if (laws && laws.common.p <= 0.05)
+    lines.push(
+      'What ends a common exponent may be loss or annihilation after the quench, a background, misreads or drift: the cumulants alone do not say which.'
+    );
+  if (axis === 'hold-time')
+    lines.push(
+      'Well-mixed annihilation of pairs, A + A → 0, takes the variance to two thirds of the mean in the end; correlated or confined defects need not.'
+    );
+  return lines;
+}

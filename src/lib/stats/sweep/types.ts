@@ -1,0 +1,92 @@
+import type { Unit } from '../types';
+
+/** An estimate with its 95 % interval, both ends known. */
+export interface KnownInterval {
+  value: number;
+  low: number;
+  high: number;
+}
+
+/** One dataset of a sweep, as it comes in. */
+export interface SweepInput {
+  label: string;
+  /** Quench or hold time, in the one unit of the sweep. */
+  time: number;
+  /** `[count, shots]`, counted in the unit of the sweep. */
+  counts: [number, number][];
+}
+
+export interface SweepOptions {
+  axis: 'quench-time' | 'hold-time';
+  /** Unit of the times, as it is to be printed. */
+  timeUnit: string;
+  unit: Unit;
+  /** Times from and to, both included, that the power laws are fitted to; null for all. */
+  window: { from: number; to: number } | null;
+  /** d, ν and z of a transition whose exponent the sweep is compared with. */
+  transition: { dimension: number; correlation: number; dynamic: number } | null;
+  /** Level at which one exponent, or a steady ratio, is refused. */
+  alpha: number;
+}
+
+export interface SweptPoint {
+  label: string;
+  time: number;
+  shots: number;
+  inWindow: boolean;
+  /** κ1, κ2, κ3; null where the counts take fewer than four values, which tells no errors. */
+  cumulants: [KnownInterval, KnownInterval, KnownInterval] | null;
+  /** κ2/κ1 and κ3/κ1. */
+  ratios: [KnownInterval, KnownInterval] | null;
+}
+
+export interface SweepLaws {
+  /** How many of κ1, κ2, κ3 a power law could be fitted to. */
+  quantities: number;
+  /** b of κ_q = e^c τ^−b, each by itself. */
+  exponents: KnownInterval[];
+  /** ln κ_q at the middle of the window, and that middle as ln τ. */
+  logLevels: number[];
+  middle: number;
+  chiSquare: number;
+  freedom: number;
+  /** Of power laws at all; null without freedom. */
+  p: number | null;
+  /** One exponent for all. */
+  common: { exponent: KnownInterval; logLevels: number[]; chiSquare: number; freedom: number; p: number };
+}
+
+export interface SteadyReport {
+  id: 'variance-over-mean' | 'third-over-mean' | 'pair-factor';
+  steady: KnownInterval;
+  chiSquare: number;
+  freedom: number;
+  /** Of the same value at every time; null for one. */
+  p: number | null;
+  /** Values of known laws, and whether the interval holds them, their own error allowed for. */
+  references: { id: string; value: number; error: number; inside: boolean }[];
+}
+
+export interface SweepReport {
+  format: 'severalty.sweep/1';
+  axis: SweepOptions['axis'];
+  timeUnit: string;
+  unit: Unit;
+  alpha: number;
+  window: { from: number; to: number };
+  points: SweptPoint[];
+  laws: SweepLaws | null;
+  /** Exponent expected of the transition given, and whether the interval of the common one holds it. */
+  expected: {
+    dimension: number;
+    correlation: number;
+    dynamic: number;
+    exponent: number;
+    inside: boolean;
+  } | null;
+  steady: SteadyReport[];
+  windows: { from: number; to: number; exponent: KnownInterval; commonP: number; lawP: number | null }[];
+  statement: string;
+  because: string[];
+  cautions: string[];
+}
