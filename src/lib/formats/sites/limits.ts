@@ -1,0 +1,5 @@
+/** Sites in one shot: all their pairs, 523 776, are still tested at once. */
+export const maxSites = 1024;
+
+/** Bytes that the packed shots may take, 64 MB: half a million shots of 1024 sites. */
+export const maxPackedBytes = 64 * 1024 * 1024;
