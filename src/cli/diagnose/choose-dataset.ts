@@ -1,6 +1,6 @@
 import type { Dataset } from '$lib/formats/types';
-import { Refusal } from './exit-codes';
-import { inputName } from './input-name';
+import { Refusal } from '../shared/exit-codes';
+import { inputName } from '../shared/input-name';
 
 const plain = (name: string) => name.trim().toLowerCase();
 

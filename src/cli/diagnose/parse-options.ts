@@ -2,7 +2,7 @@ import { parseArgs } from 'node:util';
 import type { ReadOptions, Role } from '$lib/formats/types';
 import { readKept } from '$lib/model/read-kept';
 import type { DiagnoseOptions } from '$lib/stats/types';
-import { Refusal } from './exit-codes';
+import { Refusal } from '../shared/exit-codes';
 
 /** What the command line asks for. */
 export interface Asked {

@@ -12,13 +12,13 @@ import { checkOptions } from '$lib/stats/input/check-options';
 import { BadInput, type Diagnosis } from '$lib/stats/types';
 import { secondThread } from '../shared/second-thread';
 import { chooseDataset } from './choose-dataset';
-import { type ExitCode, exitCodes, Refusal } from './exit-codes';
+import { type ExitCode, exitCodes, Refusal } from '../shared/exit-codes';
 import { help } from './help';
-import { inputName } from './input-name';
+import { inputName } from '../shared/input-name';
 import { type Asked, parseOptions } from './parse-options';
 import { progressLine } from './progress-line';
-import { readInput } from './read-input';
-import { sayProblems } from './say-problems';
+import { readInput } from '../shared/read-input';
+import { sayProblems } from '../shared/say-problems';
 import { type Output, refuseOutput, writeOutput } from './write-output';
 
 /**

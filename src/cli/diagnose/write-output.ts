@@ -1,7 +1,7 @@
 import { constants } from 'node:fs';
 import { access, realpath, stat, writeFile } from 'node:fs/promises';
 import { dirname } from 'node:path';
-import { Refusal } from './exit-codes';
+import { Refusal } from '../shared/exit-codes';
 
 /** An option that names a file to write, and the file. */
 export interface Output {

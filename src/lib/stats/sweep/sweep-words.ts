@@ -35,7 +35,7 @@ function becauseOf({ laws, expected, steady, points, alpha }: Found): string[] {
   }
   if (laws && expected)
     lines.push(
-      `A transition with d = ${formatNumber(expected.dimension)}, ν = ${formatNumber(expected.correlation)}, z = ${formatNumber(expected.dynamic)} gives dν/(1 + zν) = ${formatNumber(expected.exponent)}, which the 95\u202f% interval ${expected.inside ? 'holds' : 'does not hold'}.`
+      `A transition with d = ${expected.dimension}, ν = ${expected.correlation}, z = ${expected.dynamic} gives dν/(1 + zν) = ${formatNumber(expected.exponent)}, which the 95\u202f% interval ${expected.inside ? 'holds' : 'does not hold'}.`
     );
   for (const { id, steady: value, p } of steady)
     lines.push(`${NAMES[id]} over the window: ${sayInterval(value)}${sayChange(p, alpha)}.`);

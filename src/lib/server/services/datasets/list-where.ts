@@ -4,7 +4,8 @@ import { dataset } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { reportCount, lastVerdict } from './report-columns';
-import { secondsIn, timeInSeconds } from './time-in-seconds';
+import { secondsIn } from '$lib/model/seconds-in';
+import { timeInSeconds } from './time-in-seconds';
 
 /** Units that are compared with each other. */
 const known = ['ns', 'µs', 'us', 'ms', 's'];
