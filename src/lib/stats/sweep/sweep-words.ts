@@ -31,7 +31,11 @@ function becauseOf({ laws, expected, steady, points, alpha }: Found): string[] {
     lines.push(`Exponents one by one: ${each}.`);
     if (laws.p === null) lines.push('With two datasets any power law fits: a third would test it.');
     if (laws.quantities < 3)
-      lines.push('The third cumulant is too poorly known for a power law: more shots would show it.');
+      lines.push(
+        points.some(({ inWindow, cumulants }) => inWindow && cumulants && cumulants[2].high < 0)
+          ? 'The third cumulant is below 0 at some times, errors allowed for, so it follows no power law: it is left out.'
+          : 'The third cumulant allows no power law: it is too poorly known, or close to 0 or below it. It is left out.'
+      );
   }
   if (laws && expected)
     lines.push(

@@ -83,6 +83,10 @@ describe('over many repeats', () => {
       expect(report.statement).toMatch(/refused/);
       expect(report.cautions.join(' ')).toMatch(/the cumulants alone do not say which/);
       expect(report.statement).not.toMatch(/loss|pair/);
+      // Loss takes the third cumulant to 0: more shots would not give it a power law, and nobody may say so.
+      if (report.laws!.quantities === 2)
+        expect(report.because.join(' ')).toMatch(/third cumulant (is below 0|allows no power law).*left out/);
+      expect(report.because.join(' ')).not.toMatch(/more shots/);
     }
   });
 });
