@@ -7,7 +7,8 @@ const families = {
   intervals: 5,
   explanations: 6,
   'within batches': 7,
-  'change of the mean': 8
+  'change of the mean': 8,
+  versions: 9
 } as const;
 
 /**
