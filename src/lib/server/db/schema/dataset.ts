@@ -32,6 +32,8 @@ export const dataset = sqliteTable(
     // Conditions.
     device: text('device'),
     firmware: text('firmware'),
+    /** Part of the device that was measured: a group of qubits, a register, a region. */
+    group: text('group_name'),
     quenchTime: real('quench_time'),
     quenchUnit: text('quench_unit'),
     holdTime: real('hold_time'),
@@ -70,6 +72,7 @@ export const dataset = sqliteTable(
       table.name,
       table.device,
       table.firmware,
+      table.group,
       table.quenchTime,
       table.quenchUnit,
       table.geometry,
@@ -82,7 +85,14 @@ export const dataset = sqliteTable(
       table.createdBy,
       table.notes
     ),
-    index('dataset_by_device').on(table.teamId, table.deletedAt, table.device, table.firmware),
+    index('dataset_by_device').on(
+      table.teamId,
+      table.deletedAt,
+      table.device,
+      table.firmware,
+      table.group,
+      table.createdAt
+    ),
     index('dataset_by_digest').on(table.teamId, table.digest),
     index('dataset_by_file').on(table.fileId)
   ]

@@ -1,10 +1,12 @@
-import { index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import { sql } from 'drizzle-orm';
+import { check, index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import { createdAt, id, time } from './columns';
 import { person } from './person';
 import { report } from './report';
+import { sweep } from './sweep';
 import { team } from './team';
 
-/** An address that opens one report to people outside the team. */
+/** An address that opens one report, or one sweep, to people outside the team. */
 export const link = sqliteTable(
   'link',
   {
@@ -12,9 +14,9 @@ export const link = sqliteTable(
     teamId: text('team_id')
       .notNull()
       .references(() => team.id, { onDelete: 'cascade' }),
-    reportId: text('report_id')
-      .notNull()
-      .references(() => report.id, { onDelete: 'cascade' }),
+    /** Exactly one of report and sweep is set. */
+    reportId: text('report_id').references(() => report.id, { onDelete: 'cascade' }),
+    sweepId: text('sweep_id').references(() => sweep.id, { onDelete: 'cascade' }),
     /** sha256 of the token; the token itself is shown once and kept nowhere. */
     tokenHash: text('token_hash').notNull().unique(),
     /** What the team calls it: "referee 2, second round". */
@@ -35,5 +37,9 @@ export const link = sqliteTable(
     createdBy: text('created_by').references(() => person.id, { onDelete: 'set null' }),
     createdAt: createdAt()
   },
-  (table) => [index('link_by_report').on(table.reportId)]
+  (table) => [
+    index('link_by_report').on(table.reportId),
+    index('link_by_sweep').on(table.sweepId),
+    check('link_opens_one', sql`("report_id" IS NULL) <> ("sweep_id" IS NULL)`)
+  ]
 );

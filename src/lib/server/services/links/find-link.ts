@@ -8,7 +8,7 @@ export function findLink(db: Pick<Database, 'select'>, tokenHash: string) {
     .select({
       id: link.id,
       teamId: link.teamId,
-      reportId: link.reportId,
+      reportId: report.id,
       audience: link.audience,
       people: link.people,
       shows: link.shows,
