@@ -3,6 +3,7 @@ import { migrateDatabase } from './db/migrate';
 import { readEnv } from './env';
 import { startRunner, stopRunner } from './jobs/runner';
 import { purgeAside } from './services/aside/purge';
+import { nameKnownDevices } from './services/devices/name-known-devices';
 import { saveReport } from './services/reports/save-report';
 import { seedSamples } from './services/seed-samples';
 
@@ -17,6 +18,7 @@ export function database(): Database {
   const db = openDatabase(databaseFile(readEnv().SEVERALTY_DATA));
   migrateDatabase(db);
   seedSamples(db);
+  nameKnownDevices(db);
   purgeAside(db);
   // A server runs for months; unref, so that it is not what keeps the process alive.
   const daily = setInterval(() => purgeAside(db), 24 * 60 * 60 * 1000).unref();

@@ -107,6 +107,21 @@ const SENTENCES: Record<string, Words> = {
     say: ({ who, thing, detail }) =>
       `${who} imported ${thing}${detail.madeBy ? `, first saved by ${detail.madeBy}` : ''}`
   },
+  'device.order': {
+    label: 'order of versions',
+    say: ({ who, detail }) =>
+      `${who} moved version “${detail.version}” of ${detail.name} to place ${detail.place}${byScript(detail)}`
+  },
+  'device.notes': {
+    label: 'notes on a device',
+    say: ({ who, detail }) =>
+      `${who} changed the notes on ${detail.version ? `version “${detail.version}” of ` : ''}${detail.name}${byScript(detail)}`
+  },
+  'device.remove-version': {
+    label: 'version removed',
+    say: ({ who, detail }) =>
+      `${who} removed version “${detail.version}” of ${detail.name}${byScript(detail)}`
+  },
   'report.make': { label: 'report made', say: ({ who, thing }) => `${who} made ${thing}` },
   'report.import': {
     label: 'report imported',

@@ -7,6 +7,7 @@ import type { Database } from '../../db/client';
 import { dataset } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
+import { nameDevice } from '../devices/name-device';
 import { recordEvent } from '../events/record-event';
 import { misfits } from './misfits';
 
@@ -49,11 +50,12 @@ export function bulkEdit(db: Database, actor: Actor, edit: BulkEdit, now = Date.
       const changed = after.filter(({ row, conditions }) =>
         names.some((name) => row[name] !== conditions[name])
       );
-      for (const { row } of changed) {
+      for (const { row, conditions } of changed) {
         tx.update(dataset)
           .set({ ...edit.set, version: row.version + 1, updatedAt: now })
           .where(eq(dataset.id, row.id))
           .run();
+        nameDevice(tx, { ...conditions, teamId: actor.teamId, createdBy: actor.personId }, now);
         const detail = { changed: names.join(', '), version: row.version + 1 };
         const happening = { teamId: actor.teamId, personId: actor.personId, thing: row.id, detail };
         recordEvent(tx, { ...happening, action: 'dataset.bulk-edit' }, now);

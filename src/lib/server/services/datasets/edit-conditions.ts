@@ -6,6 +6,7 @@ import type { Database } from '../../db/client';
 import { dataset } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
+import { nameDevice } from '../devices/name-device';
 import { recordEvent } from '../events/record-event';
 import { conditionsOf } from './conditions-of';
 import { lastEditor } from './last-editor';
@@ -53,6 +54,7 @@ export function editConditions(
         .set({ ...edit.conditions, version, updatedAt: now })
         .where(eq(dataset.id, id))
         .run();
+      nameDevice(tx, { ...edit.conditions, teamId: actor.teamId, createdBy: actor.personId }, now);
       const detail = { changed: changed.join(', '), version };
       const happening = { teamId: actor.teamId, personId: actor.personId, thing: id, detail };
       recordEvent(tx, { ...happening, action: 'dataset.edit' }, now);

@@ -6,6 +6,7 @@ import { newId } from '../../db/new-id';
 import { dataset } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { scriptOf } from '../access/script-of';
+import { nameDevice } from '../devices/name-device';
 import { recordEvent } from '../events/record-event';
 import { mayInTeam } from './may-in-team';
 import { partsToSave, type PartToSave } from './parts-to-save';
@@ -66,7 +67,12 @@ export function saveDatasets(
   );
 }
 
-function insert(tx: Pick<Database, 'insert'>, actor: Actor, part: PartToSave, now: number): NamedDataset {
+function insert(
+  tx: Pick<Database, 'select' | 'insert'>,
+  actor: Actor,
+  part: PartToSave,
+  now: number
+): NamedDataset {
   const { facts, conditions } = part;
   const id = newId();
   tx.insert(dataset)
@@ -88,6 +94,7 @@ function insert(tx: Pick<Database, 'insert'>, actor: Actor, part: PartToSave, no
       updatedAt: now
     })
     .run();
+  nameDevice(tx, { ...conditions, teamId: actor.teamId, createdBy: actor.personId }, now);
   const happening = { teamId: actor.teamId, personId: actor.personId, thing: id };
   const detail = { name: conditions.name, ...scriptOf(actor) };
   recordEvent(tx, { ...happening, action: 'dataset.upload', detail }, now);

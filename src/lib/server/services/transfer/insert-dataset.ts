@@ -3,6 +3,7 @@ import type { Database } from '../../db/client';
 import { newId } from '../../db/new-id';
 import { dataset, originalFile } from '../../db/schema';
 import { safeFileName } from '../datasets/safe-file-name';
+import { nameDevice } from '../devices/name-device';
 import { recordEvent } from '../events/record-event';
 import type { ReadDataset } from './read-archive';
 
@@ -60,6 +61,7 @@ export function insertDataset(
       updatedAt: Date.parse(file.updatedAt)
     })
     .run();
+  nameDevice(tx, { ...file.conditions, teamId, createdBy: null }, now);
   const detail = { name: file.conditions.name, madeBy: madeBy[path] ?? null };
   recordEvent(tx, { action: 'dataset.import', teamId, personId, thing: id, detail }, now);
   return id;
