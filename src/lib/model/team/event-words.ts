@@ -134,6 +134,16 @@ const SENTENCES: Record<string, Words> = {
     label: 'report removed for good',
     say: () => 'A report was removed for good, 30 days after it was put aside'
   },
+  'sweep.make': {
+    label: 'sweep saved',
+    say: ({ who, thing, detail }) => `${who} saved ${thing}${byScript(detail)}`
+  },
+  'sweep.aside': { label: 'sweep put aside', say: ({ who, thing }) => `${who} put ${thing} aside` },
+  'sweep.restore': { label: 'sweep brought back', say: ({ who, thing }) => `${who} brought ${thing} back` },
+  'sweep.purge': {
+    label: 'sweep removed for good',
+    say: ({ thing }) => `${capital(thing)} was removed for good, 30 days after it was put aside`
+  },
   'remark.add': { label: 'remark', say: ({ who, thing }) => `${who} remarked on ${thing}` },
   'remark.settle': {
     label: 'remark settled',
@@ -173,6 +183,7 @@ const NAMELESS: Record<string, string> = {
   member: 'somebody',
   dataset: 'a dataset',
   report: 'a report',
+  sweep: 'a sweep',
   remark: 'a report',
   link: 'a link',
   job: 'a diagnosis'

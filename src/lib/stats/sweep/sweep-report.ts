@@ -56,12 +56,13 @@ export function sweepReport(inputs: SweepInput[], options: SweepOptions): SweepR
 }
 
 function swept(
-  { label, time, counts }: SweepInput,
+  { label, time, counts, dataset }: SweepInput,
   known: CumulantErrors | null,
   { from, to }: { from: number; to: number }
 ): SweptPoint {
   const shots = counts.reduce((sum, [, seen]) => sum + seen, 0);
-  const place = { label, time, shots, inWindow: time >= from && time <= to };
+  const inWindow = time >= from && time <= to;
+  const place = { label, time, shots, inWindow, ...(dataset && { dataset }) };
   if (!known) return { ...place, cumulants: null, ratios: null };
   const { cumulants, covariance: v } = known;
   const interval = (q: number) => normalInterval(cumulants[q], Math.sqrt(v[4 * q]));

@@ -1,10 +1,18 @@
-import type { Unit } from '../types';
+import type { Unit, Verdict } from '../types';
 
 /** An estimate with its 95 % interval, both ends known. */
 export interface KnownInterval {
   value: number;
   low: number;
   high: number;
+}
+
+/** The saved dataset that a point was taken from. */
+export interface SweptDataset {
+  id: string;
+  digest: string;
+  /** Answer of its newest diagnosis when the sweep was made; null where there was none. */
+  verdict: Verdict | null;
 }
 
 /** One dataset of a sweep, as it comes in. */
@@ -14,6 +22,7 @@ export interface SweepInput {
   time: number;
   /** `[count, shots]`, counted in the unit of the sweep. */
   counts: [number, number][];
+  dataset?: SweptDataset;
 }
 
 export interface SweepOptions {
@@ -34,6 +43,8 @@ export interface SweptPoint {
   time: number;
   shots: number;
   inWindow: boolean;
+  /** Left out where the counts come from no saved dataset. */
+  dataset?: SweptDataset;
   /** κ1, κ2, κ3; null where the counts take fewer than four values, which tells no errors. */
   cumulants: [KnownInterval, KnownInterval, KnownInterval] | null;
   /** κ2/κ1 and κ3/κ1. */

@@ -1,13 +1,13 @@
 import { and, desc, eq, isNotNull, isNull, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, person, report } from '../../db/schema';
+import { dataset, person, report, sweep } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { daysLeft } from './kept-aside';
 
 export interface AsideThing {
   id: string;
-  kind: 'dataset' | 'report';
+  kind: 'dataset' | 'report' | 'sweep';
   name: string;
   deletedAt: number;
   /** Who put it aside; null when that person is gone. */
@@ -22,7 +22,7 @@ export interface AsideThing {
  * it, and is not listed by itself.
  */
 export function listAside(db: Database, actor: Actor, now = Date.now()): AsideThing[] {
-  const may = (table: typeof dataset | typeof report) =>
+  const may = (table: typeof dataset | typeof report | typeof sweep) =>
     sql<number>`${mayWhere(actor, 'restore', table.teamId, table.createdBy)}`.mapWith(Boolean);
   const datasets = db
     .select({
@@ -51,9 +51,23 @@ export function listAside(db: Database, actor: Actor, now = Date.now()): AsideTh
     .where(and(mayWhere(actor, 'see', report.teamId), isNotNull(report.deletedAt), isNull(dataset.deletedAt)))
     .orderBy(desc(report.deletedAt))
     .all();
+  const sweeps = db
+    .select({
+      id: sweep.id,
+      name: sql<string>`'Sweep ' || ${sweep.name}`,
+      deletedAt: sweep.deletedAt,
+      by: person.name,
+      mayRestore: may(sweep)
+    })
+    .from(sweep)
+    .leftJoin(person, eq(person.id, sweep.deletedBy))
+    .where(and(mayWhere(actor, 'see', sweep.teamId), isNotNull(sweep.deletedAt)))
+    .orderBy(desc(sweep.deletedAt))
+    .all();
   return [
     ...datasets.map((row) => ({ ...row, kind: 'dataset' as const })),
-    ...reports.map((row) => ({ ...row, kind: 'report' as const }))
+    ...reports.map((row) => ({ ...row, kind: 'report' as const })),
+    ...sweeps.map((row) => ({ ...row, kind: 'sweep' as const }))
   ]
     .flatMap(({ deletedAt, ...row }) =>
       deletedAt === null ? [] : [{ ...row, deletedAt, daysLeft: daysLeft(deletedAt, now) }]

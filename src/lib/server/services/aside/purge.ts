@@ -1,6 +1,6 @@
 import { and, lte, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, originalFile, report } from '../../db/schema';
+import { dataset, originalFile, report, sweep } from '../../db/schema';
 import { recordEvent } from '../events/record-event';
 import { KEPT_ASIDE } from './kept-aside';
 
@@ -8,8 +8,8 @@ import { KEPT_ASIDE } from './kept-aside';
 const UNFINISHED = 24 * 60 * 60 * 1000;
 
 /**
- * Removes for good what was put aside 30 days ago: datasets with all their reports, reports by themselves, and then
- * files from which no dataset is left. Called at start and once a day.
+ * Removes for good what was put aside 30 days ago: datasets with all their reports, reports and sweeps by themselves, and
+ * then files from which no dataset is left. Called at start and once a day.
  *
  * @returns how many of each went
  */
@@ -24,6 +24,11 @@ export function purgeAside(
         .delete(report)
         .where(lte(report.deletedAt, old))
         .returning({ id: report.id, teamId: report.teamId })
+        .all();
+      const sweeps = tx
+        .delete(sweep)
+        .where(lte(sweep.deletedAt, old))
+        .returning({ id: sweep.id, teamId: sweep.teamId, name: sweep.name })
         .all();
       const datasets = tx
         .delete(dataset)
@@ -42,6 +47,8 @@ export function purgeAside(
         .run().changes;
       for (const { id, teamId } of reports)
         recordEvent(tx, { action: 'report.purge', teamId, thing: id }, now);
+      for (const { id, teamId, name } of sweeps)
+        recordEvent(tx, { action: 'sweep.purge', teamId, thing: id, detail: { name } }, now);
       for (const { id, teamId, name } of datasets)
         recordEvent(tx, { action: 'dataset.purge', teamId, thing: id, detail: { name } }, now);
       return { datasets: datasets.length, reports: reports.length, files };

@@ -1,6 +1,6 @@
 import { eq, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, job, link, person, report } from '../../db/schema';
+import { dataset, job, link, person, report, sweep } from '../../db/schema';
 
 interface NamedBy {
   action: string;
@@ -22,6 +22,8 @@ export function thingName(
       return datasetName(db, teamId, thing) ?? (kept ? `“${kept}”` : null);
     case 'report':
       return reportName(db, teamId, thing);
+    case 'sweep':
+      return sweepName(db, teamId, thing) ?? (kept ? `the sweep “${kept}”` : null);
     case 'link': {
       const name = reportName(db, teamId, thing) ?? 'a report';
       const found = linkId === null ? undefined : db.select().from(link).where(eq(link.id, linkId)).get();
@@ -52,6 +54,15 @@ function datasetName(db: Database, teamId: string, id: string): string | null {
     .where(sql`${dataset.id} = ${id} and ${dataset.teamId} = ${teamId}`)
     .get();
   return found ? `“${found.name}”` : null;
+}
+
+function sweepName(db: Database, teamId: string, id: string): string | null {
+  const found = db
+    .select({ name: sweep.name })
+    .from(sweep)
+    .where(sql`${sweep.id} = ${id} and ${sweep.teamId} = ${teamId}`)
+    .get();
+  return found ? `the sweep “${found.name}”` : null;
 }
 
 function reportName(db: Database, teamId: string, id: string): string | null {
