@@ -1,3 +1,4 @@
+import { screenCaution } from './screen-caution';
 import { oddOnRing, pairsOnRing, ringAsRead, type Evidence } from '../flags/evidence';
 import type { Histogram, TestResult } from '../types';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
@@ -88,5 +89,5 @@ export function cautions(evidence: Evidence, histogram: Histogram, tests: TestRe
 const always = [
   'Compatible with independent trials does not mean independent: free fermions and some exclusion gases give exactly such counts.',
   'Shots are taken to be alike and independent of each other. Drift between shots breaks that and looks like bunching.',
-  'A statistical screen is not a physical proof in either direction. It does not replace calibration of the apparatus, nor a laboratory’s own safety rules and qualified staff where high voltage, lasers, cryogens or magnets are run on the strength of it. Do not use it to pass or fail hardware that people’s safety depends on.'
+  screenCaution
 ];

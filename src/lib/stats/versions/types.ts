@@ -144,9 +144,3 @@ export interface GateReport {
   because: string[];
   cautions: string[];
 }
-
-/** versions-report.ts: `versionsReport(cells, options, pace?)`. */
-export type MakeVersionsReport = (cells: VersionCell[], options: VersionsOptions) => Promise<VersionsReport>;
-
-/** gate-report.ts: `gateReport(rule, version, cells)`; cells of the version and of the reference, others are passed over. */
-export type MakeGateReport = (rule: GateRule, version: string, cells: VersionCell[]) => GateReport;

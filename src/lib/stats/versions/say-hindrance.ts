@@ -1,0 +1,20 @@
+import type { Hindrance } from './types';
+
+const words: Record<Exclude<Hindrance, 'too-few-shots'>, string> = {
+  'no-counts': 'has no counts',
+  'no-reference': 'cannot be compared, since the reference is gone',
+  'not-diagnosed': 'is not diagnosed yet',
+  lumped: 'lumps counts, so that its variance is not known',
+  cut: 'keeps a range of counts only, for which the ceiling used here does not hold',
+  'misread-bonds': 'states misreads on bonds, for which the ceiling used here does not hold',
+  'no-spread': 'has counts that do not vary',
+  'odd-pairs': 'has counts that its unit or its number of trials does not allow',
+  'trials-differ': 'has a known number of trials where the reference has none, or the other way round',
+  'unit-differs': 'is counted in another unit than the reference',
+  'geometry-differs': 'has another geometry than the reference'
+};
+
+/** Why a version cannot be judged, as a sentence. */
+export function sayHindrance(hindrance: Exclude<Hindrance, 'too-few-shots'>, version: string): string {
+  return `Version ${version} ${words[hindrance]}.`;
+}

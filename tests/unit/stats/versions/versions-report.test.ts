@@ -1,0 +1,112 @@
+import { binomialWindow } from '$lib/stats/laws/binomial-window';
+import { generator, type Generator } from '$lib/stats/random/generator';
+import { histogramSampler } from '$lib/stats/random/histogram-sampler';
+import { BadInput } from '$lib/stats/types';
+import type { VersionCell } from '$lib/stats/versions/types';
+import { versionsReport } from '$lib/stats/versions/versions-report';
+import { describe, expect, it } from 'vitest';
+
+const samplers = new Map<number, (random: Generator, shots: number) => [number, number][]>();
+
+/** Counts of 64 equal trials with a mean of `mean` in all. */
+function equal(mean: number) {
+  const known = samplers.get(mean);
+  if (known) return known;
+  const { first, values } = binomialWindow(64, mean / 64, 1e-18, 1);
+  const sampler = histogramSampler(values);
+  const into = new Float64Array(values.length);
+  const draw = (random: Generator, shots: number) => {
+    sampler.draw(random, shots, into);
+    return Array.from(into, (h, i): [number, number] => [first + i, h]).filter(([, h]) => h > 0);
+  };
+  samplers.set(mean, draw);
+  return draw;
+}
+
+const cell = (group: string, version: string, counts: [number, number][]): VersionCell => ({
+  group,
+  version,
+  label: `${group} ${version}`,
+  histogram: { kind: 'histogram', counts, lump: null },
+  trials: 64,
+  unit: 'defect',
+  geometry: 'sites'
+});
+
+const asked = { versions: ['1', '2'], reference: '1', alpha: 0.05, tolerance: 0.1, pairs: null };
+
+describe('versionsReport', () => {
+  it('gives mean and variance over ceiling of a small case by hand', async () => {
+    // 0 ×1, 1 ×2, 2 ×1 of N = 4: mean 1, unbiased variance 2/3, ceiling 1·(1 − 1/4) = 3/4.
+    const counts: [number, number][] = [[0, 1], [1, 2], [2, 1]]; // prettier-ignore
+    const { cells } = await versionsReport([{ ...cell('a', '1', counts), trials: 4 }], asked);
+    expect(cells[0]).toMatchObject({ shots: 4, mark: 'reference', limits: null, mean: { value: 1 } });
+    expect(cells[0].dispersion!.value).toBeCloseTo(8 / 9, 12);
+  });
+
+  it.each([
+    [3, 500, 2000],
+    [12, 5000, 500],
+    [6, 2000, 2000]
+  ])(
+    'keeps 99.73 per cent of equal versions within its limits, at mean %d, %i and %i shots',
+    async (mean, shots0, shots) => {
+      let [mean0, dispersion] = [0, 0];
+      const runs = 3000;
+      for (let run = 0; run < runs; run++) {
+        const random = generator(61, run);
+        const pair = [
+          cell('a', '1', equal(mean)(random, shots0)),
+          cell('a', '2', equal(mean)(random, shots))
+        ];
+        const { limits, mean: m, dispersion: d } = (await versionsReport(pair, asked)).cells[1];
+        if (m!.value < limits!.mean[0] || m!.value > limits!.mean[1]) mean0++;
+        if (d!.value < limits!.dispersion[0] || d!.value > limits!.dispersion[1]) dispersion++;
+      }
+      // 0.27 % of 3000 is 8.1 with a standard deviation of 2.8.
+      for (const out of [mean0, dispersion]) expect(out).toBeLessThanOrEqual(18);
+      expect(mean0 + dispersion).toBeGreaterThan(3);
+    }
+  );
+
+  it('marks what rose, what differs otherwise, and what cannot tell', async () => {
+    const random = generator(62, 0);
+    const mixed = [...equal(4)(random, 2500), ...equal(8)(random, 2500)];
+    const counts = new Map<number, number>();
+    for (const [count, shots] of mixed) counts.set(count, (counts.get(count) ?? 0) + shots);
+    const risen = [...counts].sort((a, b) => a[0] - b[0]);
+    const cells = [
+      ...['a', 'b', 'c', 'd'].map((group) => cell(group, '1', equal(6)(random, 8000))),
+      cell('a', '2', equal(6)(random, 8000)),
+      cell('b', '2', risen),
+      cell('c', '2', equal(8)(random, 8000)),
+      cell('d', '2', equal(6)(random, 100)),
+      cell('e', '2', equal(6)(random, 8000))
+    ];
+    const pairs = { groups: ['a', 'b'], versions: ['1', '2'], seed: 1 };
+    const report = await versionsReport(cells, { ...asked, pairs });
+    const marks = report.cells
+      .filter(({ version }) => version === '2')
+      .map(({ group, mark }) => [group, mark]);
+    expect(Object.fromEntries(marks)).toEqual({
+      a: 'no-difference-seen',
+      b: 'risen',
+      c: 'differs',
+      d: 'cannot-tell',
+      e: 'cannot-tell'
+    });
+    expect(report.statement).toContain('2 (1 group)');
+    expect(report.cells.find(({ group }) => group === 'e')!.hindrances).toEqual(['no-reference']);
+    expect(report.pairs).toMatchObject({ canReachAlpha: true });
+    expect(report.pairs!.tests.map(({ pAdjusted }) => pAdjusted <= 0.05)).toEqual([false, true]);
+    expect(JSON.parse(JSON.stringify(report))).toEqual(report);
+  });
+
+  it('refuses versions that are not listed, doubled cells, and a reference that is none', async () => {
+    const one = cell('a', '1', [[0, 5], [1, 5]]); // prettier-ignore
+    await expect(versionsReport([{ ...one, version: '9' }], asked)).rejects.toThrow(BadInput);
+    await expect(versionsReport([one, one], asked)).rejects.toThrow(BadInput);
+    await expect(versionsReport([one], { ...asked, reference: '9' })).rejects.toThrow(BadInput);
+    await expect(versionsReport([one], { ...asked, versions: ['1', '1'] })).rejects.toThrow(BadInput);
+  });
+});
