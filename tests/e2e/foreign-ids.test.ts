@@ -1,5 +1,5 @@
 import { newId } from '$lib/server/db/new-id';
-import { job, link, remark } from '$lib/server/db/schema';
+import { device, firmwareVersion, job, link, remark } from '$lib/server/db/schema';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { makeDataset, makeReport } from '../support/saved-reports';
 import { doorsOfTeams, type Door } from './support/doors';
@@ -13,7 +13,16 @@ const doors = doorsOfTeams();
 let server: RunningServer;
 let cookie: string;
 /** Ids of the other team's things, by the name of the parameter and its place. */
-let foreign: { dataset: string; second: string; report: string; job: string; link: string; thread: string };
+let foreign: {
+  dataset: string;
+  second: string;
+  report: string;
+  job: string;
+  link: string;
+  thread: string;
+  device: string;
+  version: string;
+};
 
 beforeAll(async () => {
   server = await startServer();
@@ -31,11 +40,20 @@ beforeAll(async () => {
       second: second.id,
       job: newId(),
       link: newId(),
-      thread: newId()
+      thread: newId(),
+      device: newId(),
+      version: newId()
     };
     const plain = { ...made, createdAt: 1 };
     db.insert(job)
       .values({ ...plain, id: ids.job, datasetId: dataset, options: '{}', status: 'failed' })
+      .run();
+    const named = { name: SECRET, createdBy: insider.id, createdAt: 1, updatedAt: 1 };
+    db.insert(device)
+      .values({ ...named, id: ids.device, teamId: team.id, notes: SECRET })
+      .run();
+    db.insert(firmwareVersion)
+      .values({ ...named, id: ids.version, deviceId: ids.device, place: 1 })
       .run();
     db.insert(remark)
       .values({
@@ -65,6 +83,8 @@ function addressOf({ route, action }: Door, team: string): string {
     .replace('[team=slug]', team)
     .replace('datasets/[id]', `datasets/${foreign.dataset}`)
     .replace('reports/[id]', `reports/${foreign.report}`)
+    .replace('devices/[id]', `devices/${foreign.device}`)
+    .replace('[version]', foreign.version)
     .replace('jobs/[id]', `jobs/${foreign.job}`)
     .replace('[link]', foreign.link)
     .replace('[thread]', foreign.thread);
@@ -98,7 +118,7 @@ describe("another team's ids", () => {
     }
   });
 
-  it.each(doors.filter(({ route }) => /\[(id|link|thread)\]/.test(route)))(
+  it.each(doors.filter(({ route }) => /\[(id|link|thread|version)\]/.test(route)))(
     '$method $route $action knows them in no other team',
     async (door) => {
       for (const { type, body } of bodies(door)) {

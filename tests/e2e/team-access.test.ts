@@ -30,7 +30,7 @@ describe('access', () => {
     const { lead, team } = await leadOf(`axe-${colorScheme}`);
     const page = await openAuditPage(browser, { colorScheme, reducedMotion: 'reduce' });
     await signIn(page, server.address, lead.email, lead.password);
-    for (const path of ['', '/members', '/events', '/settings', '/scripts', '/aside', '/leave']) {
+    for (const path of ['', '/members', '/events', '/settings', '/scripts', '/devices', '/aside', '/leave']) {
       await page.goto(`${server.address}/team/${team.slug}${path}`, { waitUntil: 'networkidle' });
       expect(await audit(page), path).toEqual([]);
     }
@@ -42,7 +42,7 @@ describe('access', () => {
     const team = await seedTeam(server, 'a-team-with-a-rather-long-word', [[lead, 'lead']]);
     const page = await browser.newPage({ viewport: { width: 390, height: 800 } });
     await signIn(page, server.address, lead.email, lead.password);
-    for (const path of ['', '/members', '/events', '/settings', '/scripts', '/aside', '/leave']) {
+    for (const path of ['', '/members', '/events', '/settings', '/scripts', '/devices', '/aside', '/leave']) {
       await page.goto(`${server.address}/team/${team.slug}${path}`, { waitUntil: 'networkidle' });
       expect(await page.evaluate(() => document.documentElement.scrollWidth), path).toBeLessThanOrEqual(390);
     }
@@ -54,7 +54,7 @@ describe('pictures', () => {
   it('are made where SCREENSHOTS asks for them', async () => {
     if (!process.env.SCREENSHOTS) return;
     const { lead, team } = await leadOf('pictures');
-    for (const path of ['', 'members', 'events', 'settings', 'scripts', 'aside', 'leave'])
+    for (const path of ['', 'members', 'events', 'settings', 'scripts', 'devices', 'aside', 'leave'])
       await screenshots(
         browser,
         `${server.address}/team/${team.slug}/${path}`,

@@ -1,7 +1,17 @@
 import { newToken } from '$lib/server/auth/new-token';
 import { newId } from '$lib/server/db/new-id';
-import { dataset, invitation, job, mailedToken, person, report, team } from '$lib/server/db/schema';
+import {
+  dataset,
+  firmwareVersion,
+  invitation,
+  job,
+  mailedToken,
+  person,
+  report,
+  team
+} from '$lib/server/db/schema';
 import { DEMO_PEOPLE, DEMO_TEAM } from '$lib/server/services/demo-team/demo-people';
+import { nameKnownDevices } from '$lib/server/services/devices/name-known-devices';
 import { makeLink } from '$lib/server/services/links/make-link';
 import { saveReport } from '$lib/server/services/reports/save-report';
 import { asc, eq, inArray } from 'drizzle-orm';
@@ -52,6 +62,15 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
     const second = db.transaction((tx) =>
       saveReport(tx, { teamId: ours.id, datasetId, createdBy: lead.id, document, options })
     );
+    // A device that the demo has none of: a diagnosed dataset and one that is not, under two versions.
+    const onDevice = { device: 'Marram chain (invented)', firmware: 'ebb 3.1' };
+    db.update(dataset).set(onDevice).where(eq(dataset.id, datasetId)).run();
+    db.update(dataset)
+      .set({ ...onDevice, firmware: 'ebb 3.2', group: 'north bank' })
+      .where(eq(dataset.id, reports.find((other) => other.datasetId !== datasetId)!.datasetId))
+      .run();
+    nameKnownDevices(db);
+    const chain = db.select().from(firmwareVersion).where(eq(firmwareVersion.name, 'ebb 3.1')).get()!;
     const actor = { personId: lead.id, teamId: ours.id, role: 'lead' as const };
     const shared = (more: Partial<typeof plainLink>) => {
       const made = makeLink(db, actor, bunched.id, { ...plainLink, ...more }, now);
@@ -117,6 +136,11 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       '/(team)/team/[team=slug]/reports': [`${root}/reports`],
       '/(team)/team/[team=slug]/reports/[id]': [`${root}/reports/${bunched.id}`],
       '/(team)/team/[team=slug]/reports/compare': [`${root}/reports/compare?a=${bunched.id}&b=${second.id}`],
+      '/(team)/team/[team=slug]/devices': [`${root}/devices`],
+      '/(team)/team/[team=slug]/devices/[id]': [`${root}/devices/${chain.deviceId}`],
+      '/(team)/team/[team=slug]/devices/[id]/versions/[version]': [
+        `${root}/devices/${chain.deviceId}/versions/${chain.id}`
+      ],
       '/(team)/team/[team=slug]/settings': [`${root}/settings`],
       '/(team)/team/[team=slug]/scripts': [`${root}/scripts`],
       '/(team)/team/[team=slug]/members': [`${root}/members`],
