@@ -1,5 +1,5 @@
 import { newId } from '$lib/server/db/new-id';
-import { device, firmwareVersion, job, link, remark } from '$lib/server/db/schema';
+import { device, firmwareVersion, job, link, remark, sweep } from '$lib/server/db/schema';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { makeDataset, makeReport } from '../support/saved-reports';
 import { doorsOfTeams, type Door } from './support/doors';
@@ -22,6 +22,7 @@ let foreign: {
   thread: string;
   device: string;
   version: string;
+  sweep: string;
 };
 
 beforeAll(async () => {
@@ -42,7 +43,8 @@ beforeAll(async () => {
       link: newId(),
       thread: newId(),
       device: newId(),
-      version: newId()
+      version: newId(),
+      sweep: newId()
     };
     const plain = { ...made, createdAt: 1 };
     db.insert(job)
@@ -54,6 +56,18 @@ beforeAll(async () => {
       .run();
     db.insert(firmwareVersion)
       .values({ ...named, id: ids.version, deviceId: ids.device, place: 1 })
+      .run();
+    db.insert(sweep)
+      .values({
+        ...plain,
+        id: ids.sweep,
+        name: SECRET,
+        document: '{}',
+        sha256: 'none',
+        options: '{}',
+        engineVersion: '0',
+        datasets: '[]'
+      })
       .run();
     db.insert(remark)
       .values({
@@ -85,6 +99,7 @@ function addressOf({ route, action }: Door, team: string): string {
     .replace('reports/[id]', `reports/${foreign.report}`)
     .replace('devices/[id]', `devices/${foreign.device}`)
     .replace('[version]', foreign.version)
+    .replace('sweeps/[id]', `sweeps/${foreign.sweep}`)
     .replace('jobs/[id]', `jobs/${foreign.job}`)
     .replace('[link]', foreign.link)
     .replace('[thread]', foreign.thread);

@@ -8,6 +8,7 @@ import {
   mailedToken,
   person,
   report,
+  sweep,
   team
 } from '$lib/server/db/schema';
 import { DEMO_PEOPLE, DEMO_TEAM } from '$lib/server/services/demo-team/demo-people';
@@ -58,6 +59,7 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       .orderBy(asc(dataset.name))
       .all();
     const bunched = reports.find(({ name }) => /bunch/i.test(name)) ?? reports[0];
+    const swept = db.select({ id: sweep.id }).from(sweep).where(eq(sweep.teamId, ours.id)).get()!;
     const { datasetId } = bunched;
     const second = db.transaction((tx) =>
       saveReport(tx, { teamId: ours.id, datasetId, createdBy: lead.id, document, options })
@@ -140,6 +142,12 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       '/(team)/team/[team=slug]/devices/[id]': [`${root}/devices/${chain.deviceId}`],
       '/(team)/team/[team=slug]/devices/[id]/versions/[version]': [
         `${root}/devices/${chain.deviceId}/versions/${chain.id}`
+      ],
+      '/(team)/team/[team=slug]/sweeps': [`${root}/sweeps`],
+      '/(team)/team/[team=slug]/sweeps/new': [`${root}/sweeps/new`, `${root}/sweeps/new?axis=hold-time`],
+      '/(team)/team/[team=slug]/sweeps/[id]': [
+        `${root}/sweeps/${swept.id}`,
+        `${root}/sweeps/${swept.id}?from=2&to=16`
       ],
       '/(team)/team/[team=slug]/settings': [`${root}/settings`],
       '/(team)/team/[team=slug]/scripts': [`${root}/scripts`],

@@ -11,6 +11,7 @@ export const places: Place[] = [
   { path: 'datasets', label: 'Datasets', leadOnly: false },
   { path: 'reports', label: 'Reports', leadOnly: false },
   { path: 'devices', label: 'Devices', leadOnly: false },
+  { path: 'sweeps', label: 'Sweeps', leadOnly: false },
   { path: 'jobs', label: 'Jobs', leadOnly: false },
   { path: 'aside', label: 'Put aside', leadOnly: false },
   { path: 'scripts', label: 'Scripts', leadOnly: false },

@@ -76,9 +76,9 @@ function cautionsOf({ laws, steady, unit, axis }: Found): string[] {
   const agreeing = steady.filter(({ references }) =>
     references.some(({ id, inside }) => inside && id !== 'rare-events')
   );
-  if (unit === 'defect' && agreeing.length > 0)
+  if (agreeing.length > 0)
     lines.push(
-      'Ratios of cumulants cannot tell Landau–Zener kinks (0.586, 0.134) from coarsening of a chain from zero temperature (0.584 ± 0.004, 0.146 ± 0.044).'
+      `Ratios of cumulants cannot tell Landau–Zener kinks (0.586, 0.134) from coarsening of a chain from zero temperature (0.584 ± 0.004, 0.146 ± 0.044)${unit === 'pair' ? '; counted in pairs they are half and a quarter of these' : ''}.`
     );
   if (laws && laws.common.p <= 0.05)
     lines.push(

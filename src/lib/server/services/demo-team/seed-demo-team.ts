@@ -5,12 +5,13 @@ import type { Actor } from '../access/actor';
 import { takeSample } from '../datasets/take-sample';
 import { enqueueJobs } from '../jobs/enqueue-jobs';
 import { CATALOGUE } from '../sample-catalogue';
+import { saveSweep } from '../sweeps/save-sweep';
 import { makeTeam } from '../teams/make-team';
 import { DEMO_PASSWORD, DEMO_PEOPLE, DEMO_TEAM } from './demo-people';
 
 /**
  * Fills an empty database with an invented team, so that there is something to look at: a person for each role, every
- * invented example as datasets, and a diagnosis of each in the queue. Does nothing where anybody exists already.
+ * invented example as datasets, a diagnosis of each in the queue, and a sweep of those that state quench times. Does nothing where anybody exists already.
  *
  * @returns whether the team was made
  */
@@ -35,6 +36,20 @@ export async function seedDemoTeam(db: Database, now = Date.now()): Promise<bool
     const taken = takeSample(db, actor, slug, now);
     if (!taken.ok)
       throw new Error(`The example ${slug} could not be taken into the demo team: ${taken.reason}.`);
+    if (slug === 'quench-sweep')
+      saveSweep(
+        db,
+        actor,
+        {
+          name: 'Kelp, invented: six quench times',
+          datasets: taken.saved.map(({ id }) => id),
+          axis: 'quench-time',
+          window: null,
+          transition: { dimension: 1, correlation: 1, dynamic: 1 },
+          alpha: 0.05
+        },
+        now
+      );
     enqueueJobs(
       db,
       actor,

@@ -1,4 +1,3 @@
-import type { SweepRequest } from '$lib/model/team/sweeps/sweep-request';
 import type { Database } from '$lib/server/db/client';
 import { dataset, event, sweep } from '$lib/server/db/schema';
 import type { Actor } from '$lib/server/services/access/actor';
@@ -10,52 +9,8 @@ import { saveSweep } from '$lib/server/services/sweeps/save-sweep';
 import { eq, sql } from 'drizzle-orm';
 import { describe, expect, it } from 'vitest';
 import { makeDataset, makeReport } from '../../../../support/datasets';
-import { freshDatabase } from '../../../../support/fresh-database';
-import { makeMember, makeTeam } from '../../../../support/people';
-import { drawn, landauZenerPmf, lostInPairs, quenchTimes } from '../../../stats/sweep/simulated';
-
-const times = quenchTimes(9);
-const free = times.map(landauZenerPmf);
-
-/** Kinks of a ring, even by their nature, as datasets of a team: counted in pairs. */
-function makeQuench(db: Database, actor: Actor, laws: Float64Array[], seed: number): string[] {
-  return drawn(laws, 5000, seed).map((pairs, i) =>
-    makeDataset(db, actor, {
-      name: `quench ${i + 1}`,
-      counts: JSON.stringify({ kind: 'histogram', counts: pairs.map(([n, s]) => [2 * n, s]), lump: null }),
-      unit: 'pair',
-      geometry: 'ring-bonds',
-      device: 'Invented ring',
-      quenchTime: times[i],
-      quenchUnit: 'µs'
-    })
-  );
-}
-
-const asked = (datasets: string[], more: Partial<SweepRequest> = {}): SweepRequest => ({
-  datasets,
-  axis: 'quench-time',
-  window: null,
-  transition: { dimension: 1, correlation: 1, dynamic: 1 },
-  alpha: 0.05,
-  ...more
-});
-
-function setting() {
-  const db = freshDatabase();
-  const team = makeTeam(db);
-  const people = (['lead', 'experimenter', 'experimenter', 'observer'] as const).map((role) =>
-    makeMember(db, team.id, role)
-  );
-  const stranger = makeMember(db, makeTeam(db).id, 'lead');
-  return { db, people, lead: people[0], maker: people[1], other: people[2], observer: people[3], stranger };
-}
-
-const saved = (db: Database, actor: Actor, request: SweepRequest): string => {
-  const made = saveSweep(db, actor, request, 5);
-  if (!made.ok) throw new Error(JSON.stringify(made));
-  return made.id;
-};
+import { asked, free, makeQuench, saved, setting, times } from '../../../../support/sweeps';
+import { lostInPairs } from '../../../stats/sweep/simulated';
 
 describe('a saved sweep of a Landau–Zener quench over two decades, 5000 shots each', () => {
   it('has ½ and 0.293 inside its intervals and one exponent for all', () => {

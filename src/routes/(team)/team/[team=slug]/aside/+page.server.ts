@@ -1,6 +1,7 @@
 import { listAside } from '$lib/server/services/aside/list-aside';
 import { restoreDataset } from '$lib/server/services/datasets/restore-dataset';
 import { restoreReport } from '$lib/server/services/reports/restore-report';
+import { restoreSweep } from '$lib/server/services/sweeps/restore-sweep';
 import { fail } from '@sveltejs/kit';
 import { askTeam } from '../../../../ask';
 import type { Actions, PageServerLoad } from './$types';
@@ -20,6 +21,13 @@ export const actions: Actions = {
     const back = restoreDataset(event.locals.db, actor, id);
     if (!back.ok) return fail(404, { problem: GONE });
     return { told: `“${back.name}” is back, with its reports.`, href: `datasets/${id}` };
+  },
+  sweep: async (event) => {
+    const { actor } = askTeam(event, 'see');
+    const id = String((await event.request.formData()).get('id'));
+    const back = restoreSweep(event.locals.db, actor, id);
+    if (!back.ok) return fail(404, { problem: GONE });
+    return { told: `The sweep “${back.name}” is back.`, href: `sweeps/${id}` };
   },
   report: async (event) => {
     const { actor } = askTeam(event, 'see');

@@ -1,0 +1,24 @@
+import type { SweepReport } from '$lib/stats/sweep/types';
+import type { Table } from './table';
+
+/** The common exponent window by window. */
+export const windowsTable = ({ windows }: Pick<SweepReport, 'windows'>): Table => ({
+  columns: [
+    { title: 'from', kind: 'number' },
+    { title: 'to', kind: 'number' },
+    { title: 'exponent', kind: 'number' },
+    { title: 'exponent, low', kind: 'number' },
+    { title: 'exponent, high', kind: 'number' },
+    { title: 'p of one exponent', kind: 'number' },
+    { title: 'p of power laws', kind: 'number' }
+  ],
+  rows: windows.map(({ from, to, exponent, commonP, lawP }) => [
+    from,
+    to,
+    exponent.value,
+    exponent.low,
+    exponent.high,
+    commonP,
+    lawP
+  ])
+});

@@ -1,0 +1,46 @@
+import type { Database } from '$lib/server/db/client';
+import { dataset } from '$lib/server/db/schema';
+import type { Actor } from '$lib/server/services/access/actor';
+import { moveWindow } from '$lib/server/services/sweeps/move-window';
+import { readSweep } from '$lib/server/services/sweeps/read-sweep';
+import { eq } from 'drizzle-orm';
+import { describe, expect, it } from 'vitest';
+import { asked, free, makeQuench, saved, setting, times } from '../../../../support/sweeps';
+
+describe('a window that is moved', () => {
+  const setOf = (db: Database, maker: Actor) => {
+    const ids = makeQuench(db, maker, free, 1);
+    const read = readSweep(db, maker, saved(db, maker, asked(ids)));
+    if (!read.ok) throw new Error(read.reason);
+    return { ids, kept: { document: read.document!, options: read.sweep.options } };
+  };
+
+  it('says what a sweep saved with it says, whatever became of the times of its datasets', () => {
+    const { db, maker, observer } = setting();
+    const { ids, kept } = setOf(db, maker);
+    const window = { from: times[2], to: times[6] };
+    const other = readSweep(db, maker, saved(db, maker, asked(ids, { window })));
+    if (!other.ok) throw new Error(other.reason);
+    db.update(dataset).set({ quenchTime: 77 }).where(eq(dataset.id, ids[0])).run();
+    const moved = moveWindow(db, observer, kept, window);
+    expect(moved).toEqual({ ok: true, document: other.document });
+    expect(other.document!.laws!.common).not.toEqual(kept.document.laws!.common);
+  });
+
+  it('is refused where it holds too little, to strangers, and when counts are gone', () => {
+    const { db, maker, stranger } = setting();
+    const { ids, kept } = setOf(db, maker);
+    const all = { from: 1, to: 100 };
+    expect(moveWindow(db, maker, kept, { from: 1, to: 1.1 })).toMatchObject({
+      ok: false,
+      why: expect.stringMatching(/fewer than two different times/)
+    });
+    for (const actor of [stranger, { ...stranger, teamId: maker.teamId }])
+      expect(moveWindow(db, actor, kept, all)).toMatchObject({ ok: false });
+    db.delete(dataset).where(eq(dataset.id, ids[2])).run();
+    expect(moveWindow(db, maker, kept, all)).toEqual({
+      ok: false,
+      why: 'The counts of “quench 3” are gone: the window cannot be moved.'
+    });
+  });
+});
