@@ -38,7 +38,14 @@ export function sitesReport({ names, shots }: SitesInput, options: SitesOptions)
   const rate = (site: number) => excited[site] / shots.length;
   const tests = pairTests(shots, sites, geometry, seek);
   const common = commonCause(tests, shots.length, alpha);
-  const power = pairPower(told, { sites, shots: shots.length, geometry, alpha, seek });
+  const power = pairPower(told, {
+    sites,
+    shots: shots.length,
+    geometry,
+    alpha,
+    seek,
+    rate: middleOf(excited) / shots.length
+  });
   const report = {
     format: 'severalty.sites/1' as const,
     engineVersion,
@@ -68,6 +75,9 @@ export function sitesReport({ names, shots }: SitesInput, options: SitesOptions)
   };
   return { ...report, ...sitesWords(report) };
 }
+
+/** The middle one of the numbers, the upper of two. */
+const middleOf = (numbers: number[]): number => [...numbers].sort((a, b) => a - b)[numbers.length >> 1];
 
 function momentsOf(counts: ArrayLike<number>, trials: number): CountMoments {
   const list = Array.from(counts);

@@ -1,5 +1,6 @@
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
 import { sayHowOften } from '../words/say-p';
+import type { FoundChance } from './pair-power';
 import type { MappedPair, SitesReport } from './sites-types';
 
 type Found = Omit<SitesReport, 'statement' | 'because' | 'cautions'>;
@@ -56,8 +57,10 @@ function cautionsOf({ common, power, seek, shots, names }: Found, found: MappedP
       `${formatPercent(common.positive)} of the pairs have a correlation above 0, with a mean of ${formatNumber(common.mean, 2)} (p = ${formatNumber(common.p, 2)}): a common cause, such as drifting rates or dead shots, moves all sites. Find it before any pair is read by itself.`
     );
   const { neighbour, distant } = power;
+  const each = (name: string, { power: chance, shots: needed }: FoundChance) =>
+    `${name} with a chance of about ${formatPercent(chance)}${needed === null ? '' : ` (80\u202f% from ${formatCount(needed)} shots on)`}`;
   lines.push(
-    `Among ${names.length} sites, ${formatCount(shots)} shots find a neighbouring pair with correlation ${power.correlation} with a chance of about ${formatPercent(neighbour.power)}${distant ? `, a distant one of ${formatPercent(distant.power)}` : ''}; ${formatCount(neighbour.shots)}${distant ? ` and ${formatCount(distant.shots)}` : ''} shots would find it with 80\u202f%. A pair that is not found may be there.`
+    `Among ${names.length} sites of this rate, ${formatCount(shots)} shots find one pair with correlation ${power.correlation}: ${each('neighbours', neighbour)}${distant ? `, ${each('a distant pair', distant)}` : ''}. A pair that is not found may be there.`
   );
   lines.push(
     seek === 'rise'
