@@ -27,7 +27,7 @@ const ajv = new Ajv2020({
 
 let server: RunningServer;
 let token: string;
-let ids: { dataset: string; report: string; job: string };
+let ids: { dataset: string; report: string; job: string; siteMap: string };
 let served: Document;
 /** As served, but a field that is not described is refused. */
 const closed = JSON.parse(JSON.stringify(openApi({ closed: true }))) as Document;
@@ -43,10 +43,16 @@ beforeAll(async () => {
     {}
   ]);
   const asked = await ask(server, token, `/datasets/${seeded.datasetId}/jobs`, { method: 'POST' });
+  const mapped = await ask(server, token, '/site-maps', {
+    method: 'POST',
+    body: '011\n110\n',
+    headers: CSV_TYPE
+  });
   ids = {
     dataset: seeded.datasetId,
     report: seeded.reports[0],
-    job: ((await asked.json()) as { id: string }).id
+    job: ((await asked.json()) as { id: string }).id,
+    siteMap: ((await mapped.json()) as { id: string }).id
   };
   served = (await (await fetch(`${server.address}/api/v1/openapi.json`)).json()) as Document;
 });
@@ -66,6 +72,7 @@ const BODIES: Record<string, { body: string; headers: Record<string, string> }[]
       headers: JSON_TYPE
     }
   ],
+  uploadSites: [{ body: 'a,b,c\n0,1,1\n1,1,0\n0,0,0\n', headers: CSV_TYPE }],
   askForDiagnosis: [{ body: JSON.stringify({ resamples: 19, seed: 3 }), headers: JSON_TYPE }]
 };
 

@@ -2,6 +2,7 @@ import type { Operation } from './operation';
 import { DATASET_OPERATIONS } from './operations/datasets';
 import { DIAGNOSIS_OPERATIONS } from './operations/diagnoses';
 import { REPORT_OPERATIONS } from './operations/reports';
+import { SITE_MAP_OPERATIONS } from './operations/site-maps';
 import { teamSchema } from './shapes/team';
 
 /** Every operation of /api/v1, in the order of its page. */
@@ -21,5 +22,6 @@ export const OPERATIONS: Operation[] = [
   },
   ...DATASET_OPERATIONS,
   ...DIAGNOSIS_OPERATIONS,
-  ...REPORT_OPERATIONS
+  ...REPORT_OPERATIONS,
+  ...SITE_MAP_OPERATIONS
 ];

@@ -144,6 +144,10 @@ const SENTENCES: Record<string, Words> = {
     label: 'sweep removed for good',
     say: ({ thing }) => `${capital(thing)} was removed for good, 30 days after it was put aside`
   },
+  'site-map.make': {
+    label: 'map of sites saved',
+    say: ({ who, thing, detail }) => `${who} saved ${thing}${byScript(detail)}`
+  },
   'remark.add': { label: 'remark', say: ({ who, thing }) => `${who} remarked on ${thing}` },
   'remark.settle': {
     label: 'remark settled',

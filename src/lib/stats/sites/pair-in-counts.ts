@@ -1,4 +1,5 @@
 import { smallestExcess } from '../answer/smallest-excess';
+import { formatCount } from '../words/format-number';
 
 /** What one correlated pair does to the counts, and what they could show; fractions of the independent variance. */
 export interface PairInCounts {
@@ -24,7 +25,7 @@ export function pairInCounts(correlation: number, sites: number, shots: number):
   const percent = (value: number) => `${Number((100 * value).toPrecision(2))} %`;
   const statement =
     `One pair with correlation ${correlation} among ${sites} sites changes the variance of the count by ` +
-    `${percent(excess)}; ${shots} shots see a change of ${percent(smallest)} or more. ` +
+    `${percent(excess)}; ${formatCount(shots)} shots see a change of ${percent(smallest)} or more. ` +
     `The count histogram alone ${visible ? 'can' : 'cannot'} show this pair.`;
   return { excess, smallestExcess: smallest, visible, statement };
 }

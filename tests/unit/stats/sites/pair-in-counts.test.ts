@@ -7,7 +7,7 @@ it('says that counts of 64 sites and 5000 shots cannot show one pair of correlat
   expect(told.excess).toBeCloseTo(0.0015625, 12);
   expect(told.smallestExcess).toBeCloseTo(0.04941, 5);
   expect(told.visible).toBe(false);
-  expect(told.statement).toContain('by 0.16 %; 5000 shots see a change of 4.9 % or more.');
+  expect(told.statement).toContain('by 0.16 %; 5\u202f000 shots see a change of 4.9 % or more.');
   expect(told.statement).toContain('cannot show this pair');
 });
 

@@ -9,7 +9,7 @@ const UNFINISHED = 24 * 60 * 60 * 1000;
 
 /**
  * Removes for good what was put aside 30 days ago: datasets with all their reports, reports and sweeps by themselves, and
- * then files from which no dataset is left. Called at start and once a day.
+ * then files from which no dataset or map of sites is left. Called at start and once a day.
  *
  * @returns how many of each went
  */
@@ -41,7 +41,8 @@ export function purgeAside(
         .where(
           and(
             lte(originalFile.createdAt, now - UNFINISHED),
-            sql`not exists (select 1 from dataset d where d.file_id = ${originalFile.id})`
+            sql`not exists (select 1 from dataset d where d.file_id = ${originalFile.id})
+              and not exists (select 1 from site_map s where s.file_id = ${originalFile.id})`
           )
         )
         .run().changes;

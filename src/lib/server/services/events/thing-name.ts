@@ -1,6 +1,6 @@
 import { eq, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, job, link, person, report, sweep } from '../../db/schema';
+import { dataset, job, link, person, report, siteMap, sweep } from '../../db/schema';
 
 interface NamedBy {
   action: string;
@@ -24,6 +24,8 @@ export function thingName(
       return reportName(db, teamId, thing);
     case 'sweep':
       return sweepName(db, teamId, thing) ?? (kept ? `the sweep “${kept}”` : null);
+    case 'site-map':
+      return siteMapName(db, teamId, thing) ?? (kept ? `the map of sites “${kept}”` : null);
     case 'link': {
       const name = reportName(db, teamId, thing) ?? 'a report';
       const found = linkId === null ? undefined : db.select().from(link).where(eq(link.id, linkId)).get();
@@ -63,6 +65,15 @@ function sweepName(db: Database, teamId: string, id: string): string | null {
     .where(sql`${sweep.id} = ${id} and ${sweep.teamId} = ${teamId}`)
     .get();
   return found ? `the sweep “${found.name}”` : null;
+}
+
+function siteMapName(db: Database, teamId: string, id: string): string | null {
+  const found = db
+    .select({ name: siteMap.name })
+    .from(siteMap)
+    .where(sql`${siteMap.id} = ${id} and ${siteMap.teamId} = ${teamId}`)
+    .get();
+  return found ? `the map of sites “${found.name}”` : null;
 }
 
 function reportName(db: Database, teamId: string, id: string): string | null {
