@@ -6,6 +6,8 @@ import { purgeAside } from './services/aside/purge';
 import { nameKnownDevices } from './services/devices/name-known-devices';
 import { saveReport } from './services/reports/save-report';
 import { seedSamples } from './services/seed-samples';
+import { startDeliveries } from './services/webhooks/start-deliveries';
+import { webhookSettings } from './services/webhooks/webhook-settings';
 
 let open: Database | null = null;
 
@@ -23,8 +25,10 @@ export function database(): Database {
   // A server runs for months; unref, so that it is not what keeps the process alive.
   const daily = setInterval(() => purgeAside(db), 24 * 60 * 60 * 1000).unref();
   startRunner(db, saveReport);
+  const stopDeliveries = startDeliveries(db, webhookSettings());
   process.once('sveltekit:shutdown', () => {
     clearInterval(daily);
+    stopDeliveries();
     void stopRunner();
     db.$client.close();
     open = null;

@@ -37,6 +37,8 @@ const shape = z.object({
   ADDRESS_HEADER: z.string().optional(),
   /** Whether an empty database gets an invented team; in local mode only, see isLocal. */
   SEVERALTY_DEMO: z.enum(['yes', 'no']).default('yes'),
+  /** Whether webhooks may reach loopback and private networks. */
+  WEBHOOKS_INSIDE: z.enum(['yes', 'no']).default('no'),
   /** Set by npm: the script that it runs. */
   npm_lifecycle_event: z.string().optional()
 });

@@ -10,7 +10,8 @@ describe('readEnv', () => {
       SHUTDOWN_TIMEOUT: 3,
       MAIL_FROM: 'Severalty <severalty@localhost>',
       OIDC_NAME: 'your institution',
-      SEVERALTY_DEMO: 'yes'
+      SEVERALTY_DEMO: 'yes',
+      WEBHOOKS_INSIDE: 'no'
     });
   });
 

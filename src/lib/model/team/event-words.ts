@@ -77,6 +77,18 @@ const SENTENCES: Record<string, Words> = {
     say: ({ who, detail }) =>
       `${who} made the token “${detail.name}” for scripts, as ${role(detail.role)}, for ${many(detail.days, 'day')}: ${detail.scopes}`
   },
+  'webhook.make': {
+    label: 'webhook made',
+    say: ({ who, detail }) => `${who} made the webhook “${detail.name}”${byScript(detail)}`
+  },
+  'webhook.rest': {
+    label: 'webhook put to rest',
+    say: ({ detail }) => `The webhook “${detail.name}” was put to rest: its messages failed for a week`
+  },
+  'webhook.delete': {
+    label: 'webhook removed',
+    say: ({ who, detail }) => `${who} removed the webhook “${detail.name}”${byScript(detail)}`
+  },
   'token.revoke': {
     label: 'token revoked',
     say: ({ who, detail }) => `${who} revoked the token “${detail.name}”`
