@@ -1,5 +1,6 @@
 import { chiSquareTail } from '../numerics/chi-square-tail';
 import { fitPowerLaws, type PowerLaws, type SweepPoint } from './fit-power-laws';
+import { weighPoints } from './weigh-points';
 
 /** Whether one exponent serves all quantities of a sweep. */
 export interface CommonExponent {
@@ -22,16 +23,16 @@ export interface CommonExponent {
  * Where the last quantity is too poorly known for a power law of its own (third cumulants of 500 Landau–Zener shots,
  * one sweep of seven), the others are tested without it.
  *
+ * @param weighed the same points as weighPoints gives them, where the caller has them
  * @returns null where not even two quantities can be fitted
  *
  * Source: likelihood ratio of nested least squares with known covariances; Seber & Lee 2003, Linear Regression Analysis,
  * ch. 4 (m). Simulated false alarms at 5 %: tests/unit/stats/sweep.
  */
-export function commonExponent(points: SweepPoint[]): CommonExponent | null {
-  for (let quantities = points[0]?.values.length ?? 0; quantities >= 2; quantities--) {
-    const some = points.map((point) => firstOf(point, quantities));
-    const free = fitPowerLaws(some, false);
-    const tied = fitPowerLaws(some, true);
+export function commonExponent(points: SweepPoint[], weighed = weighPoints(points)): CommonExponent | null {
+  for (const { quantities, points: some, weights } of weighed) {
+    const free = fitPowerLaws(some, false, weights);
+    const tied = free && fitPowerLaws(some, true, weights);
     if (!free || !tied) continue;
     // Rounding of two minimisations may leave a difference of −1e-13.
     const chiSquare = Math.max(0, tied.chiSquare - free.chiSquare);
@@ -39,13 +40,4 @@ export function commonExponent(points: SweepPoint[]): CommonExponent | null {
     return { quantities, free, tied, chiSquare, freedom, p: chiSquareTail(chiSquare, freedom) };
   }
   return null;
-}
-
-function firstOf({ logTime, values, covariance }: SweepPoint, quantities: number): SweepPoint {
-  const size = values.length;
-  return {
-    logTime,
-    values: values.slice(0, quantities),
-    covariance: covariance.filter((_, k) => k % size < quantities && k < size * quantities)
-  };
 }

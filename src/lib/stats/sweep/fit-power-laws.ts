@@ -1,6 +1,7 @@
 import { chiSquareTail } from '../numerics/chi-square-tail';
 import { solveSymmetric } from '../numerics/solve-symmetric';
 import { inverseSymmetric } from './inverse-symmetric';
+import { powerLawSlope } from './power-law-slope';
 
 /** Quantities of one dataset that are each to follow a power law of the time, and the covariance of their errors. */
 export interface SweepPoint {
@@ -28,8 +29,14 @@ export interface PowerLaws {
   p: number | null;
 }
 
-/** Steps of Newton's method at most: from points that lie on power laws five are enough. */
+/** Steps at most: from points that lie near power laws five are enough. */
 const mostSteps = 60;
+
+/**
+ * A step that gains less than this of χ² is the last: 1e-16 leaves each parameter within 1e-8 of its standard error.
+ * Below 1e-6 steps are not compared any more, since rounding of χ² itself would refuse good ones.
+ */
+const [lastGain, sureGain] = [1e-16, 1e-6];
 
 /**
  * Generalised least squares of power laws y_q = exp(c_q − b_q (ln τ − middle)) to the values themselves, not to their
@@ -37,44 +44,48 @@ const mostSteps = 60;
  * log axis it would weigh too much or be left out, and the exponents would lean.
  *
  * @param tied one exponent for all quantities instead of one for each
+ * @param weights inverse of each covariance, where the caller has them; null for a singular one
  * @returns null with fewer than 2 points, with times that are all equal, where a covariance is singular, or where the
  *   values allow no power law (a quantity that is not positive by its weighted mean)
  *
  * Source: Aitken 1936, Proc. Roy. Soc. Edinburgh 55:42 (generalised least squares), with Gauss–Newton steps.
  */
-export function fitPowerLaws(points: SweepPoint[], tied: boolean): PowerLaws | null {
+export function fitPowerLaws(
+  points: SweepPoint[],
+  tied: boolean,
+  weights = points.map(({ covariance, values }) => inverseSymmetric(covariance, values.length))
+): PowerLaws | null {
   const size = points[0]?.values.length ?? 0;
   if (points.length < 2 || size === 0) return null;
   const middle = points.reduce((sum, { logTime }) => sum + logTime, 0) / points.length;
   const x = points.map(({ logTime }) => logTime - middle);
-  if (Math.max(...x) - Math.min(...x) < 1e-9) return null;
-  const weights: number[][] = [];
-  for (const { covariance } of points) {
-    const weight = inverseSymmetric(covariance, size);
-    if (!weight) return null;
-    weights.push(weight);
-  }
-  const slopes = tied ? 1 : size;
-  const parameters = size + slopes;
+  if (x.every((one) => Math.abs(one - x[0]) < 1e-9)) return null;
+  const known = weights.filter((weight) => weight !== null);
+  if (known.length < points.length) return null;
   const start = startingPoint(points, x, size, tied);
   if (!start) return null;
+  const parameters = start.length;
+  const values = points.map((point) => point.values);
+  const slopeAt = (place: number[]) => powerLawSlope(place, x, values, known);
   let at = start;
-  let state = evaluate(at);
+  let state = slopeAt(at);
   for (let step = 0; step < mostSteps; step++) {
     const move = solveSymmetric(state.normal, parameters, state.gradient);
+    const gain = move.reduce((sum, one, i) => sum + one * state.gradient[i], 0);
+    const from = at;
+    const reach = (length: number) => from.map((value, i) => value + length * move[i]);
     let length = 1;
-    let next = evaluate(at.map((value, i) => value + length * move[i]));
-    while (!(next.chiSquare <= state.chiSquare) && length > 1e-6) {
+    let next = slopeAt(reach(length));
+    while (gain > sureGain && !(next.chiSquare <= state.chiSquare) && length > 1e-6) {
       length /= 2;
-      next = evaluate(at.map((value, i) => value + length * move[i]));
+      next = slopeAt(reach(length));
     }
-    if (!(next.chiSquare <= state.chiSquare)) break;
-    at = at.map((value, i) => value + length * move[i]);
-    const gained = state.chiSquare - next.chiSquare;
+    if (gain > sureGain && !(next.chiSquare <= state.chiSquare)) break;
+    at = reach(length);
     state = next;
-    if (gained <= 1e-12 * (1 + state.chiSquare) && Math.max(...move.map(Math.abs)) < 1e-9) break;
+    if (!(gain > lastGain)) break;
   }
-  const variances = inverseSymmetric(state.normal, parameters);
+  const variances = inverseSymmetric([...state.normal], parameters);
   if (!variances) return null;
   const slopeOf = (q: number) => size + (tied ? 0 : q);
   const each = Array.from({ length: size }, (_, q) => q);
@@ -88,32 +99,6 @@ export function fitPowerLaws(points: SweepPoint[], tied: boolean): PowerLaws | n
     freedom,
     p: freedom > 0 ? chiSquareTail(state.chiSquare, freedom) : null
   };
-
-  /** χ², half its downhill gradient, and the normal matrix JᵀWJ. */
-  function evaluate(place: number[]) {
-    const normal = new Array<number>(parameters * parameters).fill(0);
-    const gradient = new Array<number>(parameters).fill(0);
-    let chiSquare = 0;
-    points.forEach(({ values }, i) => {
-      const law = values.map((_, q) => Math.exp(place[q] - place[size + (tied ? 0 : q)] * x[i]));
-      const off = values.map((value, q) => value - law[q]);
-      const pulled = off.map((_, q) => off.reduce((sum, o, r) => sum + weights[i][q * size + r] * o, 0));
-      const columns = values.map((_, q) => [
-        [q, law[q]],
-        [size + (tied ? 0 : q), -x[i] * law[q]]
-      ]);
-      for (let q = 0; q < size; q++) {
-        chiSquare += off[q] * pulled[q];
-        for (const [a, by] of columns[q]) {
-          gradient[a] += by * pulled[q];
-          for (let r = 0; r < size; r++)
-            for (const [b, times] of columns[r])
-              normal[a * parameters + b] += by * weights[i][q * size + r] * times;
-        }
-      }
-    });
-    return { chiSquare, gradient, normal };
-  }
 }
 
 /** Levels and slopes to begin from: a straight line through the logarithms of what is positive, each alone. */

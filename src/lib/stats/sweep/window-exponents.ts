@@ -1,5 +1,6 @@
 import { commonExponent } from './common-exponent';
 import type { SweepPoint } from './fit-power-laws';
+import { weighPoints } from './weigh-points';
 
 /** The common exponent of the points from one to another. */
 export interface WindowExponent {
@@ -25,11 +26,16 @@ export const FEWEST_POINTS = 3;
  */
 export function windowExponents(points: SweepPoint[]): WindowExponent[] {
   const last = points.length - 1;
+  const weighed = weighPoints(points);
   const windows = [[0, last]];
   for (let from = 1; last - from + 1 >= FEWEST_POINTS; from++) windows.push([from, last]);
   for (let to = last - 1; to + 1 >= FEWEST_POINTS; to--) windows.push([0, to]);
   return windows.flatMap(([from, to]) => {
-    const common = commonExponent(points.slice(from, to + 1));
+    const held = <T>(all: T[]) => all.slice(from, to + 1);
+    const common = commonExponent(
+      held(points),
+      weighed.map((one) => ({ ...one, points: held(one.points), weights: held(one.weights) }))
+    );
     if (!common) return [];
     const { tied, free, p } = common;
     return [{ from, to, exponent: tied.exponents[0], error: tied.errors[0], commonP: p, fitP: free.p }];
