@@ -43,7 +43,14 @@ beforeAll(async () => {
   await withDatabaseOf(server, (db) => {
     for (const [key, typed] of Object.entries(TYPED)) {
       const datasetId = makeDataset(db, team.id, lead.id, {
-        ...{ name: typed, device: typed, firmware: typed, trialsWhy: typed, postSelection: typed },
+        ...{
+          name: typed,
+          device: typed,
+          firmware: typed,
+          group: typed,
+          trialsWhy: typed,
+          postSelection: typed
+        },
         notes: `${typed}\n${typed}`,
         trials: 12,
         counts: JSON.stringify(inventedCounts)

@@ -93,7 +93,7 @@ describe('words to quote', () => {
     expect(entry).toContain('title = {Report 1 on {Wombat run}: counts');
     expect(entry).not.toMatch(/url|howpublished/);
     expect(await wordsOf(page, 'Methods paragraph')).toContain(
-      '“Wombat run” from Okapitron with firmware fw-zebu-7'
+      '“Wombat run” of group Numbatzone from Okapitron with firmware fw-zebu-7'
     );
     await page.close();
   });

@@ -44,6 +44,7 @@ export const SECRETS = {
   slug: 'quaggalab',
   device: 'Okapitron',
   firmware: 'fw-zebu-7',
+  group: 'Numbatzone',
   dataset: 'Wombat run',
   notes: 'asked by Ibexia',
   trialsWhy: 'all sites of Okapitron',
@@ -67,9 +68,9 @@ export async function shared(
   const team = makeTeam(db, SECRETS.slug);
   db.$client.prepare('update team set name = ? where id = ?').run(SECRETS.team, team.id);
   const lead = makeMember(db, team.id, 'lead');
-  const { device, firmware, notes, trialsWhy, postSelection, quenchUnit } = SECRETS;
+  const { device, firmware, group, notes, trialsWhy, postSelection, quenchUnit } = SECRETS;
   const datasetId = makeDataset(db, team.id, lead.personId, {
-    ...{ device, firmware, notes, trialsWhy, postSelection, quenchUnit, name: SECRETS.dataset },
+    ...{ device, firmware, group, notes, trialsWhy, postSelection, quenchUnit, name: SECRETS.dataset },
     quenchTime: 4,
     holdTime: 2.5,
     holdUnit: 'µs',

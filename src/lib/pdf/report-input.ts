@@ -5,6 +5,7 @@ export interface Conditions {
   name?: string | null;
   device?: string | null;
   firmware?: string | null;
+  group?: string | null;
   quenchTime?: number | null;
   quenchUnit?: string | null;
   holdTime?: number | null;

@@ -31,9 +31,9 @@ export async function seedSharedReport(
   alter(kept);
   return withDatabaseOf(server, (db) => {
     db.update(team).set({ name: SECRETS.team }).where(eq(team.id, made.id)).run();
-    const { device, firmware, notes, trialsWhy, postSelection, quenchUnit } = SECRETS;
+    const { device, firmware, group, notes, trialsWhy, postSelection, quenchUnit } = SECRETS;
     const datasetId = makeDataset(db, made.id, lead.id, {
-      ...{ device, firmware, notes, trialsWhy, postSelection, quenchUnit, name: SECRETS.dataset },
+      ...{ device, firmware, group, notes, trialsWhy, postSelection, quenchUnit, name: SECRETS.dataset },
       quenchTime: 4,
       trials: 24,
       counts: JSON.stringify(nineCounts)

@@ -5,6 +5,7 @@ import { normaliseName } from '../table/normalise-name';
 export type Stated =
   | 'device'
   | 'firmware'
+  | 'group'
   | 'quenchTime'
   | 'holdTime'
   | 'geometry'
@@ -24,6 +25,7 @@ const words: [Stated, RegExp][] = [
     /\b(device|devices|chip|processor|machine|gerat|geraet|appareil|dispositif|dispositivo|apparaat)\b/
   ],
   ['firmware', /\b(firmware|version|release)\b/],
+  ['group', /\b(group|register|region|gruppe|groupe|grupo|gruppo|groep)\b/],
   ['holdTime', /\b(hold|holding|wait|waiting|delay|haltezeit)\b/],
   ['quenchTime', /\b(quench|ramp|ramping|anneal|annealing|rampe|tau q|tauq)\b|^tau$/],
   ['geometry', /\b(geometry|geometrie|geometria|boundary|topology)\b/],

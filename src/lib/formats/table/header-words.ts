@@ -40,10 +40,10 @@ export const anyWord: Record<string, string[]> = {
   run: list('run, lauf, messlauf'),
   trials: list('trials, sites, bonds, modes, qubits, length, platze, versuche, essais, ensayos, prove'),
   condition:
-    list(`device, devices, chip, processor, machine, firmware, version, release, quench, hold, ramp, duration,
+    list(`device, devices, chip, processor, machine, firmware, version, release, group, register, region, quench, hold, ramp, duration,
     delay, temperature, field, power, detuning, setting, setup, configuration, condition, label, dataset, operator,
     lab, laboratory, date, day, protocol, gerat, geraet, haltezeit, rampe, temperatur, dauer, appareil, dispositif,
-    puce, temperature, duree, dispositivo, aparato, temperatura, duracion, durata, apparaat, apparat, устройство,
+    puce, gruppe, groupe, grupo, gruppo, groep, temperature, duree, dispositivo, aparato, temperatura, duracion, durata, apparaat, apparat, устройство,
     прибор, время, 装置, デバイス, 设备, 장치`),
   count:
     list(`defects, defect, kinks, kink, excitations, excitation, vortices, vortex, solitons, soliton, walls,

@@ -15,6 +15,7 @@ export function toDataset(dataset: OneDataset): ApiDataset {
     largest: dataset.largest,
     device: conditions.device,
     firmware: conditions.firmware,
+    group: conditions.group,
     trials: conditions.trials,
     createdAt: isoMoment(dataset.createdAt),
     conditions,

@@ -16,6 +16,7 @@ export function quoteOfLink({ origin, content }: LinkView, url: string): Printed
     name: origin?.dataset ?? null,
     device: origin?.device ?? null,
     firmware: origin?.firmware ?? null,
+    group: origin?.group ?? null,
     team: origin?.team ?? null,
     number: origin?.number ?? null,
     madeAt: origin?.madeAt ?? null,

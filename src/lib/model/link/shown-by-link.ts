@@ -31,6 +31,7 @@ export interface Origin {
   dataset: string;
   device: string | null;
   firmware: string | null;
+  group: string | null;
   measuredOn: string | null;
   trialsWhy: string | null;
   postSelection: string | null;
@@ -64,7 +65,7 @@ export interface LinkView {
 /**
  * What is shown to whom through a link: the one place that decides.
  *
- * Blind hides team, people, device and firmware, and with them whatever people typed freely and the days, since either
+ * Blind hides team, people, device, firmware and group, and with them whatever people typed freely and the days, since either
  * can give them away: the dataset's name, notes, reasons, post-selection, units that are no units of time, names of
  * batches. `report` alone keeps the counts back: see withoutCounts.
  */
@@ -85,6 +86,7 @@ export function shownByLink(
           dataset: conditions.name,
           device: conditions.device,
           firmware: conditions.firmware,
+          group: conditions.group,
           measuredOn: conditions.measuredOn,
           trialsWhy: conditions.trialsWhy,
           postSelection: conditions.postSelection,

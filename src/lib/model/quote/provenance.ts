@@ -5,6 +5,8 @@ export interface Provenance {
   team: string | null;
   device: string | null;
   firmware: string | null;
+  /** Part of the device that was counted. */
+  group: string | null;
   /** Number of the report in its team. */
   number: number | null;
   /** Milliseconds since 1970. */
@@ -21,6 +23,7 @@ export const NO_PROVENANCE: Provenance = {
   team: null,
   device: null,
   firmware: null,
+  group: null,
   number: null,
   madeAt: null,
   url: null,

@@ -11,6 +11,7 @@ export const frozenConditionsSchema = z.object({
   name: z.string(),
   device: words.default(null),
   firmware: words.default(null),
+  group: words.default(null),
   quenchTime: number.default(null),
   quenchUnit: words.default(null),
   holdTime: number.default(null),

@@ -8,6 +8,7 @@ export function conditionFacts(conditions: Conditions | null): [string, string][
   const facts: [string, string | null | undefined][] = [
     ['Device', conditions.device],
     ['Firmware', conditions.firmware],
+    ['Group', conditions.group],
     ['Quench time', sayTime(conditions.quenchTime, conditions.quenchUnit)],
     ['Hold time', sayTime(conditions.holdTime, conditions.holdUnit)],
     ['Why this N', conditions.trialsWhy],

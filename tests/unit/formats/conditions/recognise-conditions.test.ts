@@ -10,6 +10,8 @@ describe('conditionOfName', () => {
   it.each([
     ['Device', 'device'],
     ['firmware version', 'firmware'],
+    ['qubit_group', 'group'],
+    ['Register', 'group'],
     ['quenchTime (µs)', 'quenchTime'],
     ['tau_Q', 'quenchTime'],
     ['ramp_ns', 'quenchTime'],

@@ -19,7 +19,7 @@ describe('classifyName', () => {
     ['run', 'run, Run number'],
     [
       'condition',
-      'device, firmware, Firmware version, quench time (µs), quenchTime, hold_time, Gerät, Temperatur'
+      'device, firmware, Firmware version, qubit_group, Register, quench time (µs), quenchTime, hold_time, Gerät, Temperatur'
     ],
     ['trials', 'trials, number of sites'],
     ['share', 'relative frequency, probability, p, expected, percent, cumulative frequency'],

@@ -25,6 +25,7 @@ beforeAll(async () => {
       name: SECRETS.dataset,
       device: SECRETS.device,
       firmware: SECRETS.firmware,
+      group: SECRETS.group,
       quenchTime: 4,
       quenchUnit: SECRETS.quenchUnit,
       holdTime: 2.5,

@@ -8,6 +8,7 @@ export const datasetsQuery = z.strictObject({
   ...pageQuery,
   device: z.string().max(200).optional().describe('Of this device alone'),
   firmware: z.string().max(200).optional().describe('Of this firmware version alone'),
+  group: z.string().max(200).optional().describe('Of this group of the device alone'),
   digest: z
     .string()
     .max(100)

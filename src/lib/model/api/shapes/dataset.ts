@@ -14,6 +14,10 @@ const brief = {
   largest: z.int().describe('Largest count seen, or where a lump begins'),
   device: z.string().nullable(),
   firmware: z.string().nullable(),
+  group: z
+    .string()
+    .nullable()
+    .describe('Part of the device that was counted; null is all of it, or not stated'),
   trials: z.int().nullable().describe('Largest possible count; null when unknown'),
   createdAt: momentSchema
 };

@@ -23,9 +23,10 @@ export function sayGiven(quotable: Quotable, provenance: Provenance): Words[] {
   ];
 }
 
-function named({ name, device, firmware }: Provenance): Words {
+function named({ name, device, firmware, group }: Provenance): Words {
   const of = [
     name === null ? '' : words` “${nameOf(name)}”`,
+    group === null ? '' : words` of group ${nameOf(group)}`,
     device === null ? '' : words` from ${nameOf(device)}`,
     firmware === null ? '' : words` with firmware ${nameOf(firmware)}`
   ];

@@ -6,6 +6,7 @@ export interface DatasetRow {
   name: string;
   device: string | null;
   firmware: string | null;
+  group: string | null;
   quenchTime: number | null;
   quenchUnit: string | null;
   geometry: Geometry;
@@ -41,5 +42,6 @@ export interface DatasetList {
 export interface DatasetFacets {
   devices: string[];
   firmwares: string[];
+  groups: string[];
   people: { id: string; name: string }[];
 }

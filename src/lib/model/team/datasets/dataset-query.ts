@@ -6,6 +6,7 @@ export const SORTS = [
   'name',
   'device',
   'firmware',
+  'group',
   'quench',
   'geometry',
   'unit',
@@ -32,6 +33,7 @@ export const datasetQuerySchema = z.object({
   q: word,
   device: word,
   firmware: word,
+  group: word,
   geometry: z.enum(GEOMETRY_VALUES).or(z.literal('')).default(''),
   unit: z.enum(UNIT_VALUES).or(z.literal('')).default(''),
   /** Days of measurement, both included. */

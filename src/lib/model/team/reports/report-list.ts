@@ -8,6 +8,7 @@ export interface ReportRow {
   dataset: string;
   device: string | null;
   firmware: string | null;
+  group: string | null;
   shots: number;
   verdict: Verdict;
   engineVersion: string;

@@ -8,7 +8,7 @@ const word = z.string().trim().max(200).default('');
 
 /** What the table of reports shows: every part of it stands in the address. An empty text filters nothing. */
 export const reportQuerySchema = z.object({
-  /** Words that must stand in the dataset's name, device, firmware version or notes. */
+  /** Words that must stand in the dataset's name, device, firmware version, group or notes. */
   q: word,
   verdict: z.enum(['', 'compatible', 'ruled-out', 'undecided']).default(''),
   device: word,

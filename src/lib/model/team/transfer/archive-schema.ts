@@ -9,6 +9,7 @@ import { frozenConditionsSchema } from '../frozen-conditions';
 
 /** Conditions in an archive: one made before a condition existed lacks it, and nothing was stated then. */
 export const archivedConditionsSchema = conditionsSchema.extend({
+  group: conditionsSchema.shape.group.default(null),
   misreadUncertainty: conditionsSchema.shape.misreadUncertainty.default(null),
   kept: conditionsSchema.shape.kept.default(null)
 });

@@ -6,6 +6,7 @@ export const COLUMNS: { sort: Sort; label: string; amount?: true }[] = [
   { sort: 'verdict', label: 'Last answer' },
   { sort: 'device', label: 'Device' },
   { sort: 'firmware', label: 'Firmware' },
+  { sort: 'group', label: 'Group' },
   { sort: 'quench', label: 'Quench', amount: true },
   { sort: 'geometry', label: 'Counted on' },
   { sort: 'unit', label: 'Unit' },

@@ -23,10 +23,12 @@ export function sayTime(time: number | null, unit: string | null): string {
 
 /** Conditions in one line, as far as they are stated. */
 export function sayConditions(conditions: Conditions): string {
-  const { device, firmware, quenchTime, quenchUnit, holdTime, holdUnit, trials, measuredOn } = conditions;
+  const { device, firmware, group, quenchTime, quenchUnit, holdTime, holdUnit, trials, measuredOn } =
+    conditions;
   const parts = [
     device,
     firmware,
+    group,
     quenchTime === null ? null : `quench ${sayTime(quenchTime, quenchUnit)}`,
     holdTime === null ? null : `hold ${sayTime(holdTime, holdUnit)}`,
     trials === null ? null : `N = ${trials}`,

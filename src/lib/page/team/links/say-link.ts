@@ -19,7 +19,7 @@ export function sayLink(link: Said): string[] {
       : 'Shows the report and its counts, so it can be recomputed.';
   return [
     who,
-    `${shows} ${link.blind ? 'Hides team, people, device and firmware.' : 'Names the team, the device and who made it.'}`,
+    `${shows} ${link.blind ? 'Hides team, people, device, firmware and group.' : 'Names the team, the device and who made it.'}`,
     link.allowsRemarks
       ? `Takes remarks${link.hidesReferees ? ', signed “A referee”' : ''}.`
       : `Takes no remarks${link.hidesReferees ? ', and names nobody who opened it' : ''}.`,

@@ -44,6 +44,7 @@ function linesOf(db: Database, ids: string[]): DatasetRow[] {
       name: dataset.name,
       device: dataset.device,
       firmware: dataset.firmware,
+      group: dataset.group,
       quenchTime: dataset.quenchTime,
       quenchUnit: dataset.quenchUnit,
       geometry: dataset.geometry,

@@ -8,10 +8,10 @@ import { mayWhere } from '../access/may-where';
 /** Names offered in one list of a filter; a team with more searches for them. */
 const MOST = 500;
 
-/** Devices, firmware versions and people that the team's datasets name, for the filters. */
+/** Devices, firmware versions, groups and people that the team's datasets name, for the filters. */
 export function listFacets(db: Database, actor: Actor): DatasetFacets {
   const here = and(mayWhere(actor, 'see', dataset.teamId), isNull(dataset.deletedAt));
-  const values = (column: typeof dataset.device | typeof dataset.firmware): string[] =>
+  const values = (column: typeof dataset.device | typeof dataset.firmware | typeof dataset.group): string[] =>
     db
       .selectDistinct({ value: column })
       .from(dataset)
@@ -28,5 +28,10 @@ export function listFacets(db: Database, actor: Actor): DatasetFacets {
     .orderBy(asc(person.name))
     .limit(MOST)
     .all();
-  return { devices: values(dataset.device), firmwares: values(dataset.firmware), people };
+  return {
+    devices: values(dataset.device),
+    firmwares: values(dataset.firmware),
+    groups: values(dataset.group),
+    people
+  };
 }

@@ -8,6 +8,7 @@ const columns: Record<Sort, SQL> = {
   name: sql`${dataset.name} collate nocase`,
   device: sql`${dataset.device} collate nocase`,
   firmware: sql`${dataset.firmware} collate nocase`,
+  group: sql`${dataset.group} collate nocase`,
   quench: timeInSeconds(dataset.quenchTime, dataset.quenchUnit),
   geometry: sql`${dataset.geometry}`,
   unit: sql`${dataset.unit}`,

@@ -20,6 +20,7 @@ export function listWhere(actor: Actor, query: DatasetQuery): SQL | undefined {
     ...query.q.split(/\s+/).filter(Boolean).map(mentions),
     query.device ? eq(dataset.device, query.device) : undefined,
     query.firmware ? eq(dataset.firmware, query.firmware) : undefined,
+    query.group ? eq(dataset.group, query.group) : undefined,
     query.geometry ? eq(dataset.geometry, query.geometry) : undefined,
     query.unit ? eq(dataset.unit, query.unit) : undefined,
     query.from ? gte(dataset.measuredOn, query.from) : undefined,
@@ -35,7 +36,7 @@ export function listWhere(actor: Actor, query: DatasetQuery): SQL | undefined {
 function mentions(word: string): SQL {
   const pattern = `%${word.replace(/[\\%_]/g, '\\$&')}%`;
   const text = sql`${dataset.name} || char(10) || ifnull(${dataset.device}, '') || char(10) || ifnull(${dataset.firmware}, '')
-    || char(10) || ifnull(${dataset.notes}, '')`;
+    || char(10) || ifnull(${dataset.group}, '') || char(10) || ifnull(${dataset.notes}, '')`;
   return sql`(${text}) like ${pattern} escape '\\'`;
 }
 

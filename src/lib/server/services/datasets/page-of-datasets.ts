@@ -10,6 +10,7 @@ export interface AskedDatasets {
   after?: string;
   device?: string;
   firmware?: string;
+  group?: string;
   digest?: string;
 }
 
@@ -23,6 +24,7 @@ const columns = {
   largest: dataset.largest,
   device: dataset.device,
   firmware: dataset.firmware,
+  group: dataset.group,
   trials: dataset.trials,
   createdAt: dataset.createdAt
 };
@@ -36,6 +38,7 @@ export function pageOfDatasets(db: Database, actor: Actor, asked: AskedDatasets)
     isNull(dataset.deletedAt),
     asked.device === undefined ? undefined : eq(dataset.device, asked.device),
     asked.firmware === undefined ? undefined : eq(dataset.firmware, asked.firmware),
+    asked.group === undefined ? undefined : eq(dataset.group, asked.group),
     asked.digest === undefined ? undefined : eq(dataset.digest, asked.digest)
   );
   return onePage({ at: dataset.createdAt, id: dataset.id }, asked, (where, order, limit) => {

@@ -28,6 +28,7 @@ export async function bundleOfLink(view: LinkView): Promise<BundleOfLink> {
     name: origin.dataset,
     device: origin.device,
     firmware: origin.firmware,
+    group: origin.group,
     ...times,
     trialsWhy: origin.trialsWhy,
     postSelection: origin.postSelection,

@@ -5,6 +5,7 @@ export const conditionColumns = {
   name: dataset.name,
   device: dataset.device,
   firmware: dataset.firmware,
+  group: dataset.group,
   quenchTime: dataset.quenchTime,
   quenchUnit: dataset.quenchUnit,
   holdTime: dataset.holdTime,

@@ -58,7 +58,7 @@ function filters(query: ReportQuery): (SQL | undefined)[] {
 function mentions(word: string): SQL {
   const pattern = `%${word.replace(/[\\%_]/g, '\\$&')}%`;
   const text = sql`${dataset.name} || char(10) || ifnull(${dataset.device}, '') || char(10) || ifnull(${dataset.firmware}, '')
-    || char(10) || ifnull(${dataset.notes}, '')`;
+    || char(10) || ifnull(${dataset.group}, '') || char(10) || ifnull(${dataset.notes}, '')`;
   return sql`(${text}) like ${pattern} escape '\\'`;
 }
 
@@ -92,6 +92,7 @@ function linesOf(db: Database, ids: string[]): ReportRow[] {
       dataset: dataset.name,
       device: dataset.device,
       firmware: dataset.firmware,
+      group: dataset.group,
       shots: dataset.shots,
       verdict: report.verdict,
       engineVersion: report.engineVersion,

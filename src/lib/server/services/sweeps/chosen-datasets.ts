@@ -11,7 +11,6 @@ const columns = {
   digest: dataset.digest,
   counts: dataset.counts,
   verdict: lastVerdict,
-  group: dataset.group,
   ...conditionColumns
 };
 

@@ -13,6 +13,7 @@ const whole: Provenance = {
   team: 'Bay & Side',
   device: 'Marram',
   firmware: 'ebb 3.3',
+  group: null,
   number: 7,
   madeAt: Date.UTC(2031, 1, 28, 23, 59),
   url: 'https://lab.example.org/link/aB_-c',

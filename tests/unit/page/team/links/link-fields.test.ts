@@ -48,7 +48,7 @@ describe('the form of a new link', () => {
     });
     expect(sayLink(found.data!)).toEqual([
       'Opens for anyone who has the address.',
-      'Shows the report without its counts: whoever guesses them can check the guess, but not recompute the report. Hides team, people, device and firmware.',
+      'Shows the report without its counts: whoever guesses them can check the guess, but not recompute the report. Hides team, people, device, firmware and group.',
       'Takes remarks, signed “A referee”.',
       'Open until 3 Feb 2031, end of day UTC, or after 1 visit.'
     ]);

@@ -19,6 +19,7 @@ function filled() {
     kelp: add('one', {
       device: 'Kelp',
       firmware: 'ebb 3.1',
+      group: 'north edge',
       quenchTime: 2,
       quenchUnit: 'µs',
       shots: 30,
@@ -67,6 +68,8 @@ describe('listDatasets', () => {
     ['an underscore is itself', { q: '_' }, []],
     ['device', { device: 'Kelp' }, ['one']],
     ['firmware', { firmware: 'ebb 3.1' }, ['one']],
+    ['group', { group: 'north edge' }, ['one']],
+    ['words of the group', { q: 'NORTH' }, ['one']],
     ['geometry', { geometry: 'ring-bonds' }, ['three']],
     ['unit', { unit: 'pair' }, ['three']],
     ['first day', { from: '2026-03-14' }, ['two']],
@@ -90,6 +93,7 @@ describe('listDatasets', () => {
     const facets = listFacets(db, lead);
     expect(facets.devices).toEqual(['Kelp', 'Marram']);
     expect(facets.firmwares).toEqual(['ebb 3.1']);
+    expect(facets.groups).toEqual(['north edge']);
     expect(facets.people).toHaveLength(2);
     db.$client.close();
   });

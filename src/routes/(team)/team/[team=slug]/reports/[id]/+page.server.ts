@@ -37,9 +37,9 @@ type Frozen = Omit<SavedReport, 'text'>;
 /** A document that can be read, with the words to quote of it. */
 function withQuote(document: ReadDocument, report: Frozen, team: string) {
   if (!document.ok) return document;
-  const { name, device, firmware } = report.conditions;
+  const { name, device, firmware, group } = report.conditions;
   const { number, createdAt: madeAt, sha256 } = report;
-  const from = { name, device, firmware, team, number, madeAt, sha256, url: null };
+  const from = { name, device, firmware, group, team, number, madeAt, sha256, url: null };
   return { ...document, quote: printedQuote(document.diagnosis, from) };
 }
 
