@@ -1,5 +1,5 @@
 import { newId } from '$lib/server/db/new-id';
-import { device, firmwareVersion, job, link, remark, sweep } from '$lib/server/db/schema';
+import { device, firmwareVersion, job, link, remark, sweep, webhook } from '$lib/server/db/schema';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { makeDataset, makeReport } from '../support/saved-reports';
 import { doorsOfTeams, type Door } from './support/doors';
@@ -23,6 +23,7 @@ let foreign: {
   device: string;
   version: string;
   sweep: string;
+  webhook: string;
 };
 
 beforeAll(async () => {
@@ -44,7 +45,8 @@ beforeAll(async () => {
       thread: newId(),
       device: newId(),
       version: newId(),
-      sweep: newId()
+      sweep: newId(),
+      webhook: newId()
     };
     const plain = { ...made, createdAt: 1 };
     db.insert(job)
@@ -68,6 +70,10 @@ beforeAll(async () => {
         engineVersion: '0',
         datasets: '[]'
       })
+      .run();
+    const hook = { name: SECRET, url: 'https://example.org/', sealedSecret: '', actions: '["gate.fail"]' };
+    db.insert(webhook)
+      .values({ ...plain, ...hook, id: ids.webhook, lastEvent: 0 })
       .run();
     db.insert(remark)
       .values({
@@ -100,6 +106,7 @@ function addressOf({ route, action }: Door, team: string): string {
     .replace('devices/[id]', `devices/${foreign.device}`)
     .replace('[version]', foreign.version)
     .replace('sweeps/[id]', `sweeps/${foreign.sweep}`)
+    .replace('webhooks/[id]', `webhooks/${foreign.webhook}`)
     .replace('jobs/[id]', `jobs/${foreign.job}`)
     .replace('[link]', foreign.link)
     .replace('[thread]', foreign.thread);

@@ -17,6 +17,7 @@ import { makeLink } from '$lib/server/services/links/make-link';
 import { saveReport } from '$lib/server/services/reports/save-report';
 import { asc, eq, inArray } from 'drizzle-orm';
 import { diagnoseNine, plainLink } from '../../support/links';
+import { hookOf } from '../../support/webhooks';
 import { withDatabaseOf } from './seed-people';
 import type { RunningServer } from './start-server';
 
@@ -151,6 +152,8 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       ],
       '/(team)/team/[team=slug]/settings': [`${root}/settings`],
       '/(team)/team/[team=slug]/scripts': [`${root}/scripts`],
+      '/(team)/team/[team=slug]/webhooks': [`${root}/webhooks`],
+      '/(team)/team/[team=slug]/webhooks/[id]': [`${root}/webhooks/${hookOf(db, actor)}`],
       '/(team)/team/[team=slug]/members': [`${root}/members`],
       '/(team)/team/[team=slug]/leave': [`${root}/leave`],
       '/(team)/team/[team=slug]/aside': [`${root}/aside`],

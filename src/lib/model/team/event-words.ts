@@ -1,6 +1,6 @@
 import { capital } from '../capital';
-import { ROLE_WORDS } from './members/role-words';
-import type { Role } from './roles';
+import { byScript, many, role, type EventDetail, type Words } from './events/saying';
+import { SCRIPT_SENTENCES } from './events/script-sentences';
 
 /** An event with its names resolved. */
 export interface EventFacts {
@@ -9,20 +9,8 @@ export interface EventFacts {
   who: string | null;
   /** Name of what it was done to; null when it is gone or has none. */
   thing: string | null;
-  detail: Record<string, string | number | boolean | null>;
+  detail: EventDetail;
 }
-
-interface Words {
-  /** What the action is called in the list of filters. */
-  label: string;
-  say: (event: { who: string; thing: string; detail: EventFacts['detail'] }) => string;
-}
-
-const role = (value: unknown) => ROLE_WORDS[value as Role]?.article ?? String(value);
-const many = (n: unknown, one: string) => `${String(n)} ${one}${n === 1 ? '' : 's'}`;
-
-/** A script acts for who made its token: both are told. */
-const byScript = (detail: EventFacts['detail']) => (detail.script ? ` by the script “${detail.script}”` : '');
 
 /** Every action that is recorded, one line each. */
 const SENTENCES: Record<string, Words> = {
@@ -72,27 +60,7 @@ const SENTENCES: Record<string, Words> = {
     label: 'invitation accepted',
     say: ({ who, detail }) => `${who} accepted an invitation and is now ${role(detail.role)}`
   },
-  'token.make': {
-    label: 'token made',
-    say: ({ who, detail }) =>
-      `${who} made the token “${detail.name}” for scripts, as ${role(detail.role)}, for ${many(detail.days, 'day')}: ${detail.scopes}`
-  },
-  'webhook.make': {
-    label: 'webhook made',
-    say: ({ who, detail }) => `${who} made the webhook “${detail.name}”${byScript(detail)}`
-  },
-  'webhook.rest': {
-    label: 'webhook put to rest',
-    say: ({ detail }) => `The webhook “${detail.name}” was put to rest: its messages failed for a week`
-  },
-  'webhook.delete': {
-    label: 'webhook removed',
-    say: ({ who, detail }) => `${who} removed the webhook “${detail.name}”${byScript(detail)}`
-  },
-  'token.revoke': {
-    label: 'token revoked',
-    say: ({ who, detail }) => `${who} revoked the token “${detail.name}”`
-  },
+  ...SCRIPT_SENTENCES,
   'dataset.upload': {
     label: 'dataset saved',
     say: ({ who, thing, detail }) => `${who} saved ${thing}${byScript(detail)}`

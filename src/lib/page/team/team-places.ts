@@ -15,6 +15,7 @@ export const places: Place[] = [
   { path: 'jobs', label: 'Jobs', leadOnly: false },
   { path: 'aside', label: 'Put aside', leadOnly: false },
   { path: 'scripts', label: 'Scripts', leadOnly: false },
+  { path: 'webhooks', label: 'Webhooks', leadOnly: true },
   { path: 'members', label: 'Members', leadOnly: true },
   { path: 'events', label: 'Events', leadOnly: true },
   { path: 'settings', label: 'Settings', leadOnly: true }

@@ -21,6 +21,8 @@ export const webhookDelivery = sqliteTable(
     /** Last answer: HTTP status, or why there was none. */
     answered: integer('answered'),
     trouble: text('trouble'),
+    /** Asked for by somebody: tried once, before those that wait in their order. */
+    byHand: integer('by_hand', { mode: 'boolean' }).notNull().default(false),
     createdAt: createdAt(),
     endedAt: time('ended_at')
   },

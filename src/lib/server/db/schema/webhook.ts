@@ -23,7 +23,9 @@ export const webhook = sqliteTable(
     createdAt: createdAt(),
     /** Nothing is sent while it rests: by hand, or after a week of failures. */
     restingSince: time('resting_since'),
-    restingWhy: text('resting_why')
+    restingWhy: text('resting_why'),
+    /** When it was last woken; failures before count no more. */
+    awakeSince: time('awake_since')
   },
   (table) => [index('webhook_by_team').on(table.teamId, table.createdAt)]
 );

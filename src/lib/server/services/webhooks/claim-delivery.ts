@@ -14,6 +14,8 @@ export interface ClaimedDelivery {
   body: string;
   /** Attempts with this one. */
   attempts: number;
+  /** Somebody asked for it: it is tried this once. */
+  byHand: boolean;
   url: string;
   sealedSecret: string;
 }
@@ -22,7 +24,7 @@ export interface ClaimedDelivery {
  * Takes the next message that is due, by one write, so of two processes one gets it. Of each webhook only the earliest
  * message that waits is looked at: messages arrive in order, and one that fails holds up those behind it until it is
  * sent or given up. A claim ends by settleDelivery, or after a minute when its process is gone: the message is then sent
- * again, though its receiver may have had it.
+ * again, though its receiver may have had it. What somebody asked for by hand goes before the others.
  */
 export function claimDelivery(db: Database, now = Date.now()): ClaimedDelivery | null {
   const row = db
@@ -31,7 +33,7 @@ export function claimDelivery(db: Database, now = Date.now()): ClaimedDelivery |
     .where(
       sql`${webhookDelivery.id} = (select d.id from webhook w join webhook_delivery d on d.id =
         (select e.id from webhook_delivery e where e.webhook_id = w.id and e.status = 'waiting'
-          order by e.event_id limit 1)
+          order by e.by_hand desc, e.event_id limit 1)
         where w.resting_since is null and (d.due_at <= ${now} or d.due_at > ${now + LATEST})
         order by d.due_at limit 1)`
     )
@@ -43,6 +45,6 @@ export function claimDelivery(db: Database, now = Date.now()): ClaimedDelivery |
     .from(webhook)
     .where(sql`${webhook.id} = ${row.webhookId}`)
     .get();
-  const { id, webhookId, body, attempts } = row;
-  return of ? { id, webhookId, body, attempts, ...of } : null;
+  const { id, webhookId, body, attempts, byHand } = row;
+  return of ? { id, webhookId, body, attempts, byHand, ...of } : null;
 }

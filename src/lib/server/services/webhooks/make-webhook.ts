@@ -1,15 +1,16 @@
 import type { WebhookForm } from '$lib/model/webhooks/webhook-form';
-import { count, eq, max } from 'drizzle-orm';
+import { count, eq } from 'drizzle-orm';
 import { randomBytes } from 'node:crypto';
 import { isIP } from 'node:net';
 import type { Database } from '../../db/client';
 import { newId } from '../../db/new-id';
-import { event, team, webhook } from '../../db/schema';
+import { team, webhook } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { recordEvent } from '../events/record-event';
 import { scriptOf } from '../access/script-of';
 import { isInnerAddress } from './is-inner-address';
+import { newestEvent } from './newest-event';
 import { sealSecret } from './seal-secret';
 import { SECRET_PREFIX } from './sign-message';
 
@@ -58,11 +59,6 @@ export function makeWebhook(
       const detail = { name: form.name, ...scriptOf(actor) };
       const { teamId, personId } = actor;
       recordEvent(tx, { action: 'webhook.make', teamId, personId, thing: id, detail }, now);
-      const last =
-        tx
-          .select({ id: max(event.id) })
-          .from(event)
-          .get()?.id ?? 0;
       tx.insert(webhook)
         .values({
           id,
@@ -71,7 +67,7 @@ export function makeWebhook(
           url: form.url,
           sealedSecret: sealSecret(secret, id, serverSecret),
           actions: JSON.stringify(form.actions),
-          lastEvent: last,
+          lastEvent: newestEvent(tx),
           createdBy: personId,
           createdAt: now
         })

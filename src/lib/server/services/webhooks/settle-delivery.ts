@@ -20,8 +20,8 @@ export function settleDelivery(
   sent: Sent,
   now = Date.now()
 ): boolean {
-  const { id, webhookId, attempts } = claimed;
-  const givenUp = !sent.ok && attempts >= MOST_ATTEMPTS;
+  const { id, webhookId, attempts, byHand } = claimed;
+  const givenUp = !sent.ok && (byHand || attempts >= MOST_ATTEMPTS);
   const status = sent.ok ? 'sent' : givenUp ? 'given-up' : 'waiting';
   return db.transaction(
     (tx) => {
@@ -32,6 +32,7 @@ export function settleDelivery(
           dueAt: status === 'waiting' ? now + retryDelay(attempts) : null,
           answered: sent.answered,
           trouble: sent.ok ? null : sent.trouble,
+          byHand: false,
           endedAt: status === 'waiting' ? null : now
         })
         .where(
@@ -42,7 +43,8 @@ export function settleDelivery(
           )
         )
         .run();
-      if (changes === 0 || sent.ok || now - failingSince(tx, webhookId, now) < WEEK) return false;
+      if (changes === 0 || sent.ok || byHand) return false;
+      if (now - failingSince(tx, webhookId, now) < WEEK) return false;
       const why = `Every message failed for a week. The last time: ${sent.trouble}`;
       const rested = tx
         .update(webhook)
@@ -59,7 +61,7 @@ export function settleDelivery(
   );
 }
 
-/** When the first message was made that failed with none sent since; now when there is none. */
+/** When the first message was made that failed with none sent since, or when it was woken after that; now when there is none. */
 function failingSince(db: Pick<Database, 'select'>, webhookId: string, now: number): number {
   const of = eq(webhookDelivery.webhookId, webhookId);
   const last = db
@@ -76,5 +78,6 @@ function failingSince(db: Pick<Database, 'select'>, webhookId: string, now: numb
     .orderBy(asc(webhookDelivery.createdAt))
     .limit(1)
     .get();
-  return first?.at ?? now;
+  const woken = db.select({ at: webhook.awakeSince }).from(webhook).where(eq(webhook.id, webhookId)).get();
+  return first ? Math.max(first.at, woken?.at ?? 0) : now;
 }
