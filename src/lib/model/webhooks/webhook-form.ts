@@ -21,10 +21,7 @@ export const webhookFormSchema = z.object({
       const message = urlTrouble(text);
       if (message) context.addIssue({ code: 'custom', message });
     }),
-  actions: z
-    .array(z.enum(ACTIONS))
-    .min(1, 'Choose at least one thing it is told of.')
-    .transform((list) => [...new Set(list)])
+  actions: z.array(z.enum(ACTIONS)).min(1, 'Choose at least one thing it is told of.')
 });
 
 export type WebhookForm = z.output<typeof webhookFormSchema>;

@@ -66,7 +66,7 @@ export function makeWebhook(
           name: form.name,
           url: form.url,
           sealedSecret: sealSecret(secret, id, serverSecret),
-          actions: JSON.stringify(form.actions),
+          actions: JSON.stringify([...new Set(form.actions)]),
           lastEvent: newestEvent(tx),
           createdBy: personId,
           createdAt: now
