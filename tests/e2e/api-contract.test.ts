@@ -1,11 +1,18 @@
 import { openApi } from '$lib/model/api/open-api';
 import { OPERATIONS } from '$lib/model/api/operations';
+import { SCOPES } from '$lib/model/api/scopes';
+import type { Actor } from '$lib/server/services/access/actor';
 import Ajv2020 from 'ajv/dist/2020.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { ask, CSV_TYPE, JSON_TYPE, seedToken } from './support/api';
 import { seedPerson, seedTeam } from './support/seed-people';
 import { seedReports } from './support/seed-reports';
 import { startServer, type RunningServer } from './support/start-server';
+
+interface Sent {
+  body: string;
+  headers: Record<string, string>;
+}
 
 interface Described {
   responses: Record<string, { $ref?: string; content?: Record<string, { schema?: object }> }>;
@@ -27,7 +34,9 @@ const ajv = new Ajv2020({
 
 let server: RunningServer;
 let token: string;
-let ids: { dataset: string; report: string; job: string; siteMap: string };
+let ids: Record<string, string>;
+let BODIES: Record<string, Sent[]>;
+let actor: Actor;
 let served: Document;
 /** As served, but a field that is not described is refused. */
 const closed = JSON.parse(JSON.stringify(openApi({ closed: true }))) as Document;
@@ -36,31 +45,40 @@ beforeAll(async () => {
   server = await startServer();
   const lead = await seedPerson(server);
   const team = await seedTeam(server, 'contract', [[lead, 'lead']]);
-  const actor = { personId: lead.id, teamId: team.id, role: 'lead' as const };
+  actor = { personId: lead.id, teamId: team.id, role: 'lead' };
   token = await seedToken(server, actor, { scopes: ['read', 'upload', 'diagnose'] });
   const seeded = await seedReports(server, { teamId: team.id, createdBy: lead.id, name: 'Invented' }, [
     {},
     {}
   ]);
-  const asked = await ask(server, token, `/datasets/${seeded.datasetId}/jobs`, { method: 'POST' });
-  const mapped = await ask(server, token, '/site-maps', {
-    method: 'POST',
-    body: '011\n110\n',
-    headers: CSV_TYPE
-  });
+  const post = (path: string, body: string, headers: Record<string, string>) =>
+    ask(server, token, path, { method: 'POST', body, headers });
+  const idOf = async (answer: Promise<Response>) => {
+    const response = await answer;
+    if (!response.ok) throw new Error(await response.text());
+    return ((await response.json()) as { id: string }).id;
+  };
+  const swept: string[] = [];
+  for (const [time, counts] of [
+    [1, '0,40\n1,30\n2,20\n3,10\n'],
+    [3, '0,60\n1,25\n2,10\n3,5\n']
+  ] as const)
+    swept.push(await idOf(post(`/datasets?quenchTime=${time}&quenchUnit=us`, counts, CSV_TYPE)));
+  BODIES = bodiesFor(swept);
   ids = {
     dataset: seeded.datasetId,
     report: seeded.reports[0],
-    job: ((await asked.json()) as { id: string }).id,
-    siteMap: ((await mapped.json()) as { id: string }).id
+    job: await idOf(post(`/datasets/${seeded.datasetId}/jobs`, '{}', JSON_TYPE)),
+    siteMap: await idOf(post('/site-maps', '011\n110\n', CSV_TYPE)),
+    sweep: await idOf(post('/sweeps', BODIES.makeSweep[0].body, JSON_TYPE))
   };
   served = (await (await fetch(`${server.address}/api/v1/openapi.json`)).json()) as Document;
 });
 
 afterAll(() => server?.stop());
 
-/** A request of each operation that has a body. */
-const BODIES: Record<string, { body: string; headers: Record<string, string> }[]> = {
+/** Requests of each operation that has a body: one of every type it takes. */
+const bodiesFor = (swept: string[]): Record<string, Sent[]> => ({
   uploadDataset: [
     { body: 'count,shots\n0,31\n1,50\n2,20\n', headers: CSV_TYPE },
     {
@@ -73,8 +91,9 @@ const BODIES: Record<string, { body: string; headers: Record<string, string> }[]
     }
   ],
   uploadSites: [{ body: 'a,b,c\n0,1,1\n1,1,0\n0,0,0\n', headers: CSV_TYPE }],
-  askForDiagnosis: [{ body: JSON.stringify({ resamples: 19, seed: 3 }), headers: JSON_TYPE }]
-};
+  askForDiagnosis: [{ body: JSON.stringify({ resamples: 19, seed: 3 }), headers: JSON_TYPE }],
+  makeSweep: [{ body: JSON.stringify({ datasets: swept, axis: 'quench-time' }), headers: JSON_TYPE }]
+});
 
 function check(
   document: Document,
@@ -115,9 +134,23 @@ describe('the served description', () => {
 });
 
 describe('every operation', () => {
+  it('has a case here: an id where its address takes one, and a body of every type it takes', () => {
+    const without = OPERATIONS.flatMap(({ id, idOf, path, bodies = [] }) => {
+      const sent = (BODIES[id] ?? []).map(({ headers }) => headers['content-type']);
+      return [
+        ...(path.includes('{id}') !== (idOf !== undefined) ? [`${id}: whose id is in its address?`] : []),
+        ...(idOf && !ids[idOf] ? [`${id}: no ${idOf}`] : []),
+        ...bodies.flatMap(({ type }) => (sent.includes(type) ? [] : [`${id}: no body of ${type}`]))
+      ];
+    });
+    expect(without).toEqual([]);
+    const taking = OPERATIONS.flatMap(({ id, bodies }) => (bodies ? [id] : []));
+    expect(Object.keys(BODIES).sort()).toEqual(taking.sort());
+  });
+
   it.each(OPERATIONS)('$method $path answers as described', async (operation) => {
     const { id, method, path, answer, idOf } = operation;
-    const address = path.replace('{id}', idOf ? ids[idOf as keyof typeof ids] : '');
+    const address = path.replace('{id}', idOf ? ids[idOf] : '');
     for (const sent of BODIES[id] ?? [undefined]) {
       const response = await ask(server, token, address, { method: method.toUpperCase(), ...sent });
       expect(response.status, await response.clone().text()).toBe(answer.status);
@@ -146,4 +179,25 @@ describe('every operation', () => {
     expect(response.headers.get('content-type')).toBe('application/problem+json');
     expect(problem(await response.json()) ? [] : problem.errors).toEqual([]);
   });
+
+  it.each(OPERATIONS)(
+    '$method $path is closed to every other scope, and to who may not',
+    async (operation) => {
+      const { id, method, path, scope, idOf } = operation;
+      const address = path.replace('{id}', idOf ? ids[idOf] : '');
+      const request = { method: method.toUpperCase(), ...BODIES[id]?.[0] };
+      const others = SCOPES.filter((one) => one !== scope);
+      const token = await seedToken(server, actor, { name: id, scopes: others });
+      const refused = await ask(server, token, address, request);
+      expect([refused.status, ((await refused.json()) as { code: string }).code]).toEqual([
+        403,
+        'wrong-scope'
+      ]);
+      expect(refused.headers.get('www-authenticate')).toContain(`scope="${scope}"`);
+      if (scope === 'read') return;
+      const observes = await seedToken(server, actor, { name: id, role: 'observer', scopes: [...SCOPES] });
+      const second = await ask(server, observes, address, request);
+      expect([second.status, ((await second.json()) as { code: string }).code]).toEqual([403, 'not-allowed']);
+    }
+  );
 });

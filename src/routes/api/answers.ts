@@ -65,10 +65,10 @@ export const BAD_CURSOR: Problem = {
   errors: [{ at: 'after', message: 'This is not the “next” of a page.' }]
 };
 
-/** A report whose stored document no longer can be read. */
-export const damaged = (why: string): Problem => ({
+/** A report or sweep whose stored document no longer can be read. */
+export const damaged = (why: string, of: 'report' | 'sweep' = 'report'): Problem => ({
   status: 500,
   code: 'unreadable',
-  title: `The document of this report cannot be read: ${why}.`,
+  title: `The document of this ${of} cannot be read: ${why}.`,
   detail: 'Its bytes are kept: take document.json.'
 });

@@ -3,6 +3,7 @@ import { DATASET_OPERATIONS } from './operations/datasets';
 import { DIAGNOSIS_OPERATIONS } from './operations/diagnoses';
 import { REPORT_OPERATIONS } from './operations/reports';
 import { SITE_MAP_OPERATIONS } from './operations/site-maps';
+import { SWEEP_OPERATIONS } from './operations/sweeps';
 import { teamSchema } from './shapes/team';
 
 /** Every operation of /api/v1, in the order of its page. */
@@ -23,5 +24,6 @@ export const OPERATIONS: Operation[] = [
   ...DATASET_OPERATIONS,
   ...DIAGNOSIS_OPERATIONS,
   ...REPORT_OPERATIONS,
+  ...SWEEP_OPERATIONS,
   ...SITE_MAP_OPERATIONS
 ];

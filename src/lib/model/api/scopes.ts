@@ -5,9 +5,9 @@ export const SCOPES = ['read', 'upload', 'diagnose'] as const;
 export type Scope = (typeof SCOPES)[number];
 
 export const SCOPE_WORDS: Record<Scope, string> = {
-  read: 'read datasets, reports and their files',
+  read: 'read datasets, reports, sweeps and their files',
   upload: 'upload datasets',
-  diagnose: 'ask for diagnoses'
+  diagnose: 'ask for diagnoses and make sweeps'
 };
 
 /** The action in the table of roles that a scope stands for. */

@@ -4,6 +4,7 @@ import type { Database } from '../../db/client';
 import { person, sweep } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
+import { sweepColumns } from './sweep-columns';
 
 const SIZE = 25;
 
@@ -28,15 +29,7 @@ export function listSweeps(db: Database, actor: Actor, asked: number): SweepList
 
 function linesOf(db: Database, ids: string[]): SweepRow[] {
   return db
-    .select({
-      id: sweep.id,
-      name: sweep.name,
-      axis: sql<SweepRow['axis']>`json_extract(${sweep.options}, '$.axis')`,
-      datasets: sql<number>`json_array_length(${sweep.datasets})`,
-      statement: sql<string>`json_extract(${sweep.document}, '$.statement')`,
-      by: person.name,
-      createdAt: sweep.createdAt
-    })
+    .select(sweepColumns)
     .from(sweep)
     .leftJoin(person, eq(person.id, sweep.createdBy))
     .where(inArray(sweep.id, ids))

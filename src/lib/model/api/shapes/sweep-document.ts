@@ -1,0 +1,95 @@
+import type { SweepReport } from '$lib/stats/sweep/types';
+import { z } from 'zod';
+import { verdictSchema } from './verdict';
+
+const interval = z.object({ value: z.number(), low: z.number(), high: z.number() });
+const chance = z.number().min(0).max(1);
+const span = z.object({ from: z.number(), to: z.number() });
+
+/** The document of a sweep, as its engine writes it. */
+export const sweepDocumentSchema = z.object({
+  format: z.literal('severalty.sweep/1'),
+  axis: z.enum(['quench-time', 'hold-time']),
+  timeUnit: z.string(),
+  unit: z.enum(['defect', 'pair']),
+  alpha: z.number(),
+  window: span,
+  points: z.array(
+    z.object({
+      label: z.string(),
+      time: z.number(),
+      shots: z.int(),
+      inWindow: z.boolean(),
+      dataset: z
+        .object({ id: z.string(), digest: z.string(), verdict: verdictSchema.nullable() })
+        .optional()
+        .describe('Left out where the counts come from no saved dataset'),
+      cumulants: z
+        .tuple([interval, interval, interval])
+        .nullable()
+        .describe('κ1, κ2, κ3 with 95 % intervals; null where the counts take fewer than four values'),
+      ratios: z.tuple([interval, interval]).nullable().describe('κ2/κ1 and κ3/κ1')
+    })
+  ),
+  laws: z
+    .object({
+      quantities: z.int().describe('How many of κ1, κ2, κ3 a power law could be fitted to'),
+      exponents: z.array(interval),
+      logLevels: z.array(z.number()),
+      middle: z.number(),
+      chiSquare: z.number(),
+      freedom: z.int(),
+      p: chance.nullable(),
+      common: z
+        .object({
+          exponent: interval,
+          logLevels: z.array(z.number()),
+          chiSquare: z.number(),
+          freedom: z.int(),
+          p: chance
+        })
+        .describe('One exponent for all')
+    })
+    .nullable(),
+  expected: z
+    .object({
+      dimension: z.number(),
+      correlation: z.number(),
+      dynamic: z.number(),
+      exponent: z.number(),
+      inside: z.boolean()
+    })
+    .nullable(),
+  steady: z.array(
+    z.object({
+      id: z.enum(['variance-over-mean', 'third-over-mean', 'pair-factor']),
+      steady: interval,
+      chiSquare: z.number(),
+      freedom: z.int(),
+      p: chance.nullable(),
+      references: z.array(
+        z.object({ id: z.string(), value: z.number(), error: z.number(), inside: z.boolean() })
+      )
+    })
+  ),
+  windows: z.array(
+    z.object({
+      from: z.number(),
+      to: z.number(),
+      exponent: interval,
+      commonP: chance,
+      lawP: chance.nullable()
+    })
+  ),
+  statement: z.string(),
+  because: z.array(z.string()),
+  cautions: z.array(z.string())
+});
+
+type Equal<A, B> = [keyof A, A] extends [keyof B, B]
+  ? [keyof B, B] extends [keyof A, A]
+    ? true
+    : false
+  : false;
+/** Does not compile once the engine's document and this description part. */
+export const isWhole: Equal<z.output<typeof sweepDocumentSchema>, SweepReport> = true;
