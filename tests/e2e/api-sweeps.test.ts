@@ -89,6 +89,7 @@ describe('what makes no sweep is refused, and nothing is saved:', () => {
     [2, 15],
     [3, 5]
   ];
+  let largest = 10;
   const howMany = async () =>
     ((await json(await ask(server, token, '/sweeps?limit=200'))).data as Json[]).length;
 
@@ -104,7 +105,7 @@ describe('what makes no sweep is refused, and nothing is saved:', () => {
   ])('%s', async (_, query, why) => {
     const before = await howMany();
     // Counts of their own for each, since the same bytes are not saved twice.
-    const other = await uploaded([...counts, [4 + query.length, 1]], query);
+    const other = await uploaded([...counts, [++largest, 1]], query);
     const refused = await post('/sweeps', sweepOf([ids[0], other]));
     expect(refused.status).toBe(422);
     expect(refused.headers.get('content-type')).toBe('application/problem+json');
