@@ -10,6 +10,7 @@ import type { Mark, Picture, Point, Reading, Size } from './picture';
 import { pointPath } from './point-path';
 import { seriesLabels } from './series-labels';
 import { sweepSpan } from './sweep-span';
+import { timeTitle } from './time-title';
 
 const NAMES = ['mean', 'variance', 'third cumulant'];
 const SIGNS = ['κ₁', 'κ₂', 'κ₃'];
@@ -84,9 +85,6 @@ export function sweepPicture(report: SweepReport, { width, text }: Size): Pictur
     notes: [...notesOf(report, seen.length)]
   };
 }
-
-const timeTitle = ({ axis, timeUnit }: SweepReport): string =>
-  `${axis === 'quench-time' ? 'quench time' : 'hold time'}${timeUnit ? `, ${timeUnit}` : ''}`;
 
 function wordsOf(
   { timeUnit }: SweepReport,

@@ -1,16 +1,17 @@
 import { VERDICTS } from '$lib/model/labels';
 import type { SweepReport } from '$lib/stats/sweep/types';
 import type { Table } from './table';
+import { timeTitle } from './time-title';
 
 /** The points of a sweep, cumulants and ratios with their 95 % intervals. */
-export function sweepTable({ points, timeUnit, axis }: SweepReport): Table {
-  const time = `${axis === 'quench-time' ? 'quench time' : 'hold time'}${timeUnit ? `, ${timeUnit}` : ''}`;
+export function sweepTable(report: SweepReport): Table {
+  const { points } = report;
   const ofInterval = (name: string) =>
     [name, `${name}, low`, `${name}, high`].map((title) => ({ title, kind: 'number' as const }));
   return {
     columns: [
       { title: 'dataset', kind: 'text' },
-      { title: time, kind: 'number' },
+      { title: timeTitle(report), kind: 'number' },
       { title: 'shots', kind: 'whole' },
       { title: 'in the window', kind: 'text' },
       ...['κ₁', 'κ₂', 'κ₃', 'κ₂/κ₁', 'κ₃/κ₁'].flatMap(ofInterval),

@@ -4,8 +4,8 @@ import type { Table } from './table';
 /** The common exponent window by window. */
 export const windowsTable = ({ windows }: Pick<SweepReport, 'windows'>): Table => ({
   columns: [
-    { title: 'from', kind: 'number' },
-    { title: 'to', kind: 'number' },
+    { title: 'window from', kind: 'number' },
+    { title: 'window to', kind: 'number' },
     { title: 'exponent', kind: 'number' },
     { title: 'exponent, low', kind: 'number' },
     { title: 'exponent, high', kind: 'number' },

@@ -77,7 +77,31 @@ const TITLES: Record<string, TermId> = {
   'Lumped counts': 'lump',
   'N too small': 'critical-trials',
   'As N runs': 'critical-trials',
-  N: 'trials'
+  N: 'trials',
+  // Of sweeps.
+  'in the window': 'sweep-window',
+  'window from': 'sweep-window',
+  'window to': 'sweep-window',
+  exponent: 'power-law',
+  'exponent, low': 'interval',
+  'exponent, high': 'interval',
+  'p of one exponent': 'common-exponent',
+  'p of power laws': 'power-law',
+  'κ₁': 'cumulants',
+  'κ₁, low': 'interval',
+  'κ₁, high': 'interval',
+  'κ₂': 'cumulants',
+  'κ₂, low': 'interval',
+  'κ₂, high': 'interval',
+  'κ₃, low': 'interval',
+  'κ₃, high': 'interval',
+  'κ₂/κ₁': 'cumulant-ratios',
+  'κ₂/κ₁, low': 'interval',
+  'κ₂/κ₁, high': 'interval',
+  'κ₃/κ₁': 'cumulant-ratios',
+  'κ₃/κ₁, low': 'interval',
+  'κ₃/κ₁, high': 'interval',
+  'F₂/F₁²': 'pair-factor'
 };
 
 /** Titles that say all there is to say. */
@@ -105,7 +129,11 @@ export const PLAIN_TITLES: ReadonlySet<string> = new Set([
   'nearest',
   'inside by, in errors',
   'off by, in errors',
-  'standing'
+  'standing',
+  'dataset',
+  'quench time',
+  'hold time',
+  'answer'
 ]);
 
 /** The term that a title of a report is about; null for one that has no note. */

@@ -7,6 +7,7 @@ import { MOMENTS } from './moments';
 import { PLANNING } from './planning';
 import { RATES } from './rates';
 import { STORIES } from './stories';
+import { SWEEPS } from './sweeps';
 import type { Term } from './term';
 import { TEST_TERMS } from './tests';
 
@@ -20,7 +21,8 @@ const ALL = {
   ...TEST_TERMS,
   ...FLAG_TERMS,
   ...STORIES,
-  ...PLANNING
+  ...PLANNING,
+  ...SWEEPS
 };
 
 export type TermId = keyof typeof ALL;

@@ -1,5 +1,5 @@
 import { BadInput } from '../types';
-import type { SweepInput, SweepOptions } from './types';
+import type { SweepOptions } from './types';
 
 /** Most datasets of one sweep. */
 export const MOST_SWEPT = 1000;
@@ -10,7 +10,10 @@ export const MOST_SWEPT = 1000;
  * @throws BadInput for fewer than two datasets or over 1000, a time that is not positive, times that are all the same,
  *   a level outside (0, ½), or a window that holds fewer than two of the times
  */
-export function readSweep(inputs: SweepInput[], { alpha, window }: SweepOptions): SweepInput[] {
+export function readSweep<One extends { label: string; time: number }>(
+  inputs: One[],
+  { alpha, window }: SweepOptions
+): One[] {
   if (!(alpha > 0 && alpha < 0.5)) throw new BadInput('The level must be above 0 and below 0.5.');
   if (inputs.length < 2)
     throw new BadInput('A sweep needs at least two datasets, taken with different times.');

@@ -1,5 +1,6 @@
 import type { Unit } from '../types';
 import type { CumulantErrors } from './cumulant-errors';
+import { factorPair } from './factor-pair';
 import { normalInterval } from './normal-interval';
 import { referenceRatios } from './reference-ratios';
 import { steadyRatio } from './steady-ratio';
@@ -9,8 +10,6 @@ import type { SteadyReport, SweepOptions } from './types';
  * Whether κ2/κ1 and κ3/κ1 are the same at every time, and for hold times whether F2/F1² is: F2 = κ2 − κ1 and F1 = κ1 are
  * factorial cumulants, of which independent loss multiplies the r-th by q^r, so that this factor stays while the mean
  * falls; loss in pairs changes it.
- *
- * The square of the mean is taken as k1² − k2/S, which is unbiased; errors by the delta method.
  *
  * Source: factorial cumulants under thinning: Daley & Vere-Jones 2003, An Introduction to the Theory of Point
  * Processes I, ch. 5 (m).
@@ -36,17 +35,7 @@ export function steadyReports(
     );
   });
   if (axis === 'quench-time') return ratios.filter((one) => one !== null);
-  const factor = report(
-    'pair-factor',
-    known.map(({ shots, cumulants: [mean, variance], covariance: v }) => ({
-      x: mean * mean - variance / shots,
-      y: variance - mean,
-      varX: 4 * mean * mean * v[0],
-      varY: v[4] - 2 * v[1] + v[0],
-      covariance: 2 * mean * (v[1] - v[0])
-    })),
-    []
-  );
+  const factor = report('pair-factor', known.map(factorPair), []);
   return [...ratios, factor].filter((one) => one !== null);
 }
 

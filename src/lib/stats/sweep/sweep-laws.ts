@@ -1,3 +1,4 @@
+import { normalQuantile } from '../numerics/normal-quantile';
 import { commonExponent } from './common-exponent';
 import type { SweepPoint } from './fit-power-laws';
 import { normalInterval } from './normal-interval';
@@ -21,7 +22,8 @@ export function sweepLaws(points: SweepPoint[]): SweepLaws | null {
       logLevels: tied.logLevels,
       chiSquare,
       freedom,
-      p
+      p,
+      z: p < 1 ? -normalQuantile(p / 2) : 0
     }
   };
 }

@@ -29,6 +29,11 @@ function becauseOf({ laws, expected, steady, points, alpha }: Found): string[] {
   if (laws) {
     const each = laws.exponents.map((one, q) => `κ${'₁₂₃'[q]}: ${sayInterval(one)}`).join('; ');
     lines.push(`Exponents one by one: ${each}.`);
+    const { chiSquare, freedom, p, z } = laws.common;
+    if (z !== undefined)
+      lines.push(
+        `Tying them costs χ² = ${formatNumber(chiSquare)} with ${freedom} ${freedom === 1 ? 'degree' : 'degrees'} of freedom (${thinP(p)}), as rare as an error of ${formatNumber(z, 2)} standard errors.`
+      );
     if (laws.p === null) lines.push('With two datasets any power law fits: a third would test it.');
     if (laws.quantities < 3)
       lines.push(

@@ -1,4 +1,4 @@
-import type { Unit, Verdict } from '../types';
+import type { Interval, Unit, Verdict } from '../types';
 
 /** An estimate with its 95 % interval, both ends known. */
 export interface KnownInterval {
@@ -13,6 +13,8 @@ export interface SweptDataset {
   digest: string;
   /** Answer of its newest diagnosis when the sweep was made; null where there was none. */
   verdict: Verdict | null;
+  /** Variance over ceiling of that diagnosis; null where it is not known. The first documents did not have it. */
+  dispersion?: Interval | null;
 }
 
 /** One dataset of a sweep, as it comes in. */
@@ -49,6 +51,10 @@ export interface SweptPoint {
   cumulants: [KnownInterval, KnownInterval, KnownInterval] | null;
   /** κ2/κ1 and κ3/κ1. */
   ratios: [KnownInterval, KnownInterval] | null;
+  /** F2/F1², for hold times alone. The first documents did not have it. */
+  pairFactor?: KnownInterval | null;
+  /** Covariance of the errors of κ1, κ2, κ3, 3 × 3 row by row, as null as they. The first documents did not have it. */
+  covariance?: number[] | null;
 }
 
 export interface SweepLaws {
@@ -64,7 +70,15 @@ export interface SweepLaws {
   /** Of power laws at all; null without freedom. */
   p: number | null;
   /** One exponent for all. */
-  common: { exponent: KnownInterval; logLevels: number[]; chiSquare: number; freedom: number; p: number };
+  common: {
+    exponent: KnownInterval;
+    logLevels: number[];
+    chiSquare: number;
+    freedom: number;
+    p: number;
+    /** The same surprise in standard errors, both signs: P(|z| at least this large) = p. The first documents did not have it. */
+    z?: number;
+  };
 }
 
 export interface SteadyReport {

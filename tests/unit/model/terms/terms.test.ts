@@ -7,6 +7,12 @@ import { distributionTable } from '$lib/charts/distribution-table';
 import { levelsTable } from '$lib/charts/levels-table';
 import { rateTable } from '$lib/charts/rate-table';
 import { referencesTable } from '$lib/charts/references-table';
+import { answersTable } from '$lib/charts/answers-table';
+import { ratioTable } from '$lib/charts/ratio-table';
+import { sweepDispersionTable } from '$lib/charts/sweep-dispersion-table';
+import { sweepTable } from '$lib/charts/sweep-table';
+import { windowsTable } from '$lib/charts/windows-table';
+import { sweepReport } from '$lib/stats/sweep/sweep-report';
 import type { Table } from '$lib/charts/table';
 import { tailsTable } from '$lib/charts/tails-table';
 import { testsTable } from '$lib/charts/tests-table';
@@ -18,6 +24,7 @@ import { PLAIN_TITLES, termOfTitle } from '$lib/model/terms/term-of-title';
 import { CHILDREN, type MathNode } from '$lib/model/terms/math-node';
 import { readFormula } from '$lib/model/terms/read-formula';
 import { PLANNING } from '$lib/model/terms/planning';
+import { SWEEPS } from '$lib/model/terms/sweeps';
 import { TERMS, type TermId } from '$lib/model/terms/terms';
 import { defaultOptions } from '$lib/stats/default-options';
 import { diagnose } from '$lib/stats/diagnose';
@@ -27,7 +34,7 @@ import { sourceFiles } from '../../../support/source-files';
 const entries = Object.entries(TERMS);
 const SECTIONS = sourceFiles(['src/lib/page/result']);
 /** Pages that have margins of their own. */
-const APART = sourceFiles(['src/lib/page/cumulants', 'src/lib/page/plan']);
+const APART = sourceFiles(['src/lib/page/cumulants', 'src/lib/page/plan', 'src/lib/page/team/sweeps']);
 
 describe('each term', () => {
   it.each(entries)('%s: two sentences', (_, { words }) => {
@@ -94,7 +101,8 @@ describe('every term that a report uses', () => {
       distributionTable(diagnosis),
       rateTable(diagnosis),
       tailsTable(diagnosis),
-      testsTable(diagnosis, TESTS)
+      testsTable(diagnosis, TESTS),
+      ...sweepTables()
     ];
     const titles = [
       ...all.flatMap(({ columns }) => columns.map(({ title }) => title)),
@@ -125,10 +133,30 @@ describe('every term that a report uses', () => {
     // 'flag' is written once, in the two-way choice of the first flag.
     const wanted = (Object.keys(TERMS) as TermId[]).filter((id) => !byId(id)).sort();
     // A term of a page of its own need not stand in the report.
-    placed.push(...Object.keys(PLANNING).filter((id) => termsOf(APART).includes(id)));
+    placed.push(...Object.keys({ ...PLANNING, ...SWEEPS }).filter((id) => termsOf(APART).includes(id)));
     expect(placed.sort()).toEqual(wanted);
   });
 });
+
+/** Tables of a sweep over hold times, which has all of them, without a unit that would stand in a title. */
+function sweepTables(): Table[] {
+  const sweep = sweepReport(
+    [1, 2, 4].map((time) => ({
+      label: `${time}`,
+      time,
+      counts: [0, 1, 2, 3].map((n): [number, number] => [n, 40 - 9 * n])
+    })),
+    { axis: 'hold-time', timeUnit: '', unit: 'defect', window: null, transition: null, alpha: 0.05 }
+  );
+  expect(sweep.steady).toHaveLength(3);
+  return [
+    sweepTable(sweep),
+    windowsTable(sweep),
+    answersTable(sweep),
+    sweepDispersionTable(sweep),
+    ...sweep.steady.map(({ id }) => ratioTable(sweep, id))
+  ];
+}
 
 function wellFormed(node: MathNode): void {
   if (!('children' in node)) {

@@ -3,7 +3,7 @@ import type { Database } from '../../db/client';
 import { dataset, team } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
-import { lastVerdict } from '../datasets/report-columns';
+import { lastDispersion, lastVerdict } from '../datasets/report-columns';
 import { conditionColumns } from '../reports/condition-columns';
 
 const columns = {
@@ -11,6 +11,7 @@ const columns = {
   digest: dataset.digest,
   counts: dataset.counts,
   verdict: lastVerdict,
+  dispersion: lastDispersion,
   ...conditionColumns
 };
 

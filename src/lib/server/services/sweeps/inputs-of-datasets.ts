@@ -2,7 +2,7 @@ import { oneTimeUnit } from '../../../model/one-time-unit';
 import { inUnits } from '../../../stats/input/in-units';
 import { toHistogram } from '../../../stats/input/to-histogram';
 import type { SweepInput, SweepOptions } from '../../../stats/sweep/types';
-import { BadInput, type CountData, type Unit } from '../../../stats/types';
+import { BadInput, type CountData, type Interval, type Unit } from '../../../stats/types';
 import type { ChosenDataset } from './chosen-datasets';
 
 /**
@@ -30,7 +30,7 @@ export function inputsOfDatasets(
   const times = oneTimeUnit(stated, quench ? 'quench time' : 'hold time');
   if (!times.ok) throw new BadInput(times.reason);
   const [{ unit }] = chosen;
-  const inputs = chosen.map(({ id, name, digest, verdict, counts, kept }, i) => {
+  const inputs = chosen.map(({ id, name, digest, verdict, dispersion, counts, kept }, i) => {
     const { histogram } = inUnits(toHistogram(JSON.parse(counts) as CountData), null, unit);
     if (histogram.lump || histogram.below)
       throw new BadInput(
@@ -40,7 +40,13 @@ export function inputsOfDatasets(
       throw new BadInput(
         `Of “${name}” only the counts ${kept} were kept: its cumulants are those of a cut law. Leave it out, or give every count.`
       );
-    return { label: name, time: times.times[i], counts: histogram.counts, dataset: { id, digest, verdict } };
+    const known = dispersion === null ? null : (JSON.parse(dispersion) as Interval);
+    return {
+      label: name,
+      time: times.times[i],
+      counts: histogram.counts,
+      dataset: { id, digest, verdict, dispersion: known && known.value !== null ? known : null }
+    };
   });
   return { inputs, timeUnit: times.unit, unit };
 }

@@ -1,5 +1,6 @@
 import { inUnits } from '$lib/stats/input/in-units';
 import { toHistogram } from '$lib/stats/input/to-histogram';
+import { refitSweep } from '$lib/stats/sweep/refit-sweep';
 import { sweepReport } from '$lib/stats/sweep/sweep-report';
 import type { SweepOptions, SweepReport } from '$lib/stats/sweep/types';
 import { BadInput, type CountData } from '$lib/stats/types';
@@ -15,8 +16,9 @@ export type MovedWindow =
   | { ok: false; why: string };
 
 /**
- * A kept sweep with another window: from the counts of its datasets, which never change, and the times that stand in
- * its document, since those of a dataset may be edited. Nothing is saved.
+ * A kept sweep with another window, from the cumulants and covariances that its document keeps. The first documents kept
+ * no covariances: for these from the counts of the datasets, which never change, and the times of the document, since
+ * those of a dataset may be edited. Nothing is saved.
  */
 export function moveWindow(
   db: Pick<Database, 'select'>,
@@ -25,6 +27,9 @@ export function moveWindow(
   window: { from: number; to: number }
 ): MovedWindow {
   const { points, unit } = kept.document;
+  const options = { ...kept.options, window };
+  if (points.every(({ covariance }) => covariance !== undefined))
+    return told(() => refitSweep(points, options));
   const ids = points.flatMap((point) => point.dataset?.id ?? []);
   const rows = db
     .select({ id: dataset.id, counts: dataset.counts })
@@ -34,13 +39,21 @@ export function moveWindow(
   const counts = new Map(rows.map((row) => [row.id, row.counts]));
   const gone = points.find((point) => !point.dataset || !counts.has(point.dataset.id));
   if (gone) return { ok: false, why: `The counts of “${gone.label}” are gone: the window cannot be moved.` };
+  return told(() =>
+    sweepReport(
+      points.map(({ label, time, dataset: from }) => {
+        const data = JSON.parse(counts.get(from!.id)!) as CountData;
+        const { histogram } = inUnits(toHistogram(data), null, unit);
+        return { label, time, counts: histogram.counts, dataset: from };
+      }),
+      options
+    )
+  );
+}
+
+function told(make: () => SweepReport): MovedWindow {
   try {
-    const inputs = points.map(({ label, time, dataset: from }) => {
-      const data = JSON.parse(counts.get(from!.id)!) as CountData;
-      const { histogram } = inUnits(toHistogram(data), null, unit);
-      return { label, time, counts: histogram.counts, dataset: from };
-    });
-    return { ok: true, document: sweepReport(inputs, { ...kept.options, window }) };
+    return { ok: true, document: make() };
   } catch (error) {
     if (!(error instanceof BadInput)) throw error;
     return { ok: false, why: error.reason };

@@ -56,8 +56,8 @@ export function saveSweep(db: Database, actor: Actor, asked: SweepRequest, now =
   );
 }
 
-/** What of a dataset is kept with the sweep: all but its counts, which its digest stands for. */
-const frozen = ({ counts: _, ...kept }: ChosenDataset) => kept;
+/** What of a dataset is kept with the sweep: all but its counts, which its digest stands for, and what the document says. */
+const frozen = ({ counts: _, dispersion: __, ...kept }: ChosenDataset) => kept;
 
 function documentOf(chosen: ChosenDataset[], { axis, window, transition, alpha }: SweepRequest) {
   try {

@@ -27,7 +27,26 @@ describe('a window that is moved', () => {
     expect(other.document!.laws!.common).not.toEqual(kept.document.laws!.common);
   });
 
-  it('is refused where it holds too little, to strangers, and when counts are gone', () => {
+  /** A document as the first ones were: without covariances. */
+  const early = (kept: ReturnType<typeof setOf>['kept']) => ({
+    ...kept,
+    document: {
+      ...kept.document,
+      points: kept.document.points.map(({ covariance: _, ...point }) => point)
+    }
+  });
+
+  it('says the same without the counts, and by the counts where no covariances were kept', () => {
+    const { db, maker } = setting();
+    const { kept } = setOf(db, maker);
+    const window = { from: times[1], to: times[7] };
+    const byCounts = moveWindow(db, maker, early(kept), window);
+    expect(byCounts).toMatchObject({ ok: true });
+    db.delete(dataset).run();
+    expect(moveWindow(db, maker, kept, window)).toEqual(byCounts);
+  });
+
+  it('is refused where it holds too little; and by the counts, to strangers and when they are gone', () => {
     const { db, maker, stranger } = setting();
     const { ids, kept } = setOf(db, maker);
     const all = { from: 1, to: 100 };
@@ -36,9 +55,9 @@ describe('a window that is moved', () => {
       why: expect.stringMatching(/fewer than two different times/)
     });
     for (const actor of [stranger, { ...stranger, teamId: maker.teamId }])
-      expect(moveWindow(db, actor, kept, all)).toMatchObject({ ok: false });
+      expect(moveWindow(db, actor, early(kept), all)).toMatchObject({ ok: false });
     db.delete(dataset).where(eq(dataset.id, ids[2])).run();
-    expect(moveWindow(db, maker, kept, all)).toEqual({
+    expect(moveWindow(db, maker, early(kept), all)).toEqual({
       ok: false,
       why: 'The counts of “quench 3” are gone: the window cannot be moved.'
     });

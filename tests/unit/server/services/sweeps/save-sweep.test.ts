@@ -6,6 +6,7 @@ import { putSweepAside } from '$lib/server/services/sweeps/put-sweep-aside';
 import { readSweep } from '$lib/server/services/sweeps/read-sweep';
 import { restoreSweep } from '$lib/server/services/sweeps/restore-sweep';
 import { saveSweep } from '$lib/server/services/sweeps/save-sweep';
+import { chiSquareTail } from '$lib/stats/numerics/chi-square-tail';
 import { eq, sql } from 'drizzle-orm';
 import { describe, expect, it } from 'vitest';
 import { makeDataset, makeReport } from '../../../../support/datasets';
@@ -17,18 +18,26 @@ describe('a saved sweep of a Landau–Zener quench over two decades, 5000 shots 
     const { db, maker, observer } = setting();
     const ids = makeQuench(db, maker, free, 1);
     makeReport(db, maker, ids[3], { verdict: 'compatible' });
-    makeReport(db, maker, ids[3], { verdict: 'ruled-out', number: 2 });
+    const dispersion = { value: 1.2, low: 1.1, high: null };
+    makeReport(db, maker, ids[3], {
+      verdict: 'ruled-out',
+      number: 2,
+      document: JSON.stringify({ moments: { dispersion } })
+    });
     const read = readSweep(db, observer, saved(db, maker, asked(ids)));
     if (!read.ok) throw new Error(read.reason);
     const document = read.document!;
     expect(read.sweep).toMatchObject({ name: 'Quench times 1 to 100 µs', by: 'Ada Invented' });
     expect(document.laws!.common.p).toBeGreaterThan(0.05);
     expect(document.expected).toMatchObject({ exponent: 0.5, inside: true });
+    const { p, z } = document.laws!.common;
+    // P(|z| at least this large) is the tail of χ² with one degree of freedom at z².
+    expect(chiSquareTail(z! * z!, 1)).toBeCloseTo(p, 9);
     const ratio = document.steady.find(({ id }) => id === 'variance-over-mean')!;
     expect(ratio.steady.low).toBeLessThan(1 - Math.SQRT1_2);
     expect(ratio.steady.high).toBeGreaterThan(1 - Math.SQRT1_2);
-    expect(document.points[3].dataset).toMatchObject({ id: ids[3], verdict: 'ruled-out' });
-    expect(document.points[4].dataset!.verdict).toBeNull();
+    expect(document.points[3].dataset).toMatchObject({ id: ids[3], verdict: 'ruled-out', dispersion });
+    expect(document.points[4].dataset).toMatchObject({ verdict: null, dispersion: null });
     expect(document.timeUnit).toBe('µs');
   });
 
