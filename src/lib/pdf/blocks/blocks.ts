@@ -19,6 +19,7 @@ export type Block =
   | { kind: 'link'; address: string }
   | { kind: 'masthead'; name: string | null; line: string }
   | { kind: 'verdict'; document: Pick<Diagnosis, 'answer'> }
+  | { kind: 'statement'; text: string }
   | { kind: 'space'; height: number };
 
 export interface Formula {

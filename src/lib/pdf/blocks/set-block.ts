@@ -10,6 +10,7 @@ import { setLink } from './set-link';
 import { setList } from './set-list';
 import { setMasthead } from './set-masthead';
 import { setParagraph } from './set-paragraph';
+import { setStatement } from './set-statement';
 import { setTable } from './set-table';
 import { setTerms } from './set-terms';
 import { setVerdict } from './set-verdict';
@@ -39,6 +40,8 @@ export function setBlock(flow: Flow, block: Block, parent: Element, after = 0): 
       return setMasthead(flow, block, parent);
     case 'verdict':
       return setVerdict(flow, block.document, parent);
+    case 'statement':
+      return setStatement(flow, block.text, parent);
     case 'space':
       return flow.skip(block.height);
   }
@@ -63,6 +66,7 @@ export function leastHeight(flow: Flow, blocks: Block[], room = flow.room): numb
     case 'terms':
     case 'formulas':
     case 'verdict':
+    case 'statement':
       return 4 * line;
     case 'paragraph': {
       // A short paragraph that stands over something, such as a heading of a list, stays with it.
