@@ -1,6 +1,6 @@
 import { formatNumber } from '$lib/model/format-number';
 import { KNOWN_LAWS, RATIO_NAMES } from '$lib/model/team/sweeps/ratio-names';
-import type { SteadyReport, SweepReport } from '$lib/stats/sweep/types';
+import type { KnownInterval, SteadyReport, SweepReport } from '$lib/stats/sweep/types';
 import { overTimePicture, type OverTime } from './over-time-picture';
 import type { LegendEntry, Picture, Role, Size } from './picture';
 import { ratioPoints } from './ratio-points';
@@ -18,7 +18,8 @@ export function ratioPicture(report: SweepReport, steady: SteadyReport, size: Si
   const name = RATIO_NAMES[steady.id];
   const seen = ratioPoints(report, steady.id);
   const { from, to } = report.window;
-  const lines = steady.references.flatMap(({ id, value, error }): OverTime['levels'] => {
+  const near = steady.references.filter(isNear(seen.map(({ one }) => one)));
+  const lines = near.flatMap(({ id, value, error }): OverTime['levels'] => {
     const role = ROLES[id] ?? 'limit';
     return error > 0
       ? [
@@ -33,7 +34,7 @@ export function ratioPicture(report: SweepReport, steady: SteadyReport, size: Si
       ? [{ role: 'law' as const, label: 'outside the window' }]
       : []),
     { role: 'fitted', label: `one value over the window, ${formatNumber(steady.steady.value)}` },
-    ...steady.references.map(({ id, value, error }) => ({
+    ...near.map(({ id, value, error }) => ({
       role: ROLES[id] ?? ('limit' as const),
       label: `${KNOWN_LAWS[id] ?? id}, ${formatNumber(value)}${error > 0 ? ` ± ${formatNumber(error)}` : ''}`
     }))
@@ -51,8 +52,16 @@ export function ratioPicture(report: SweepReport, steady: SteadyReport, size: Si
       })),
       levels: [...lines, { value: steady.steady.value, role: 'fitted', from, to }],
       legend,
-      notes: []
+      notes: steady.references
+        .filter((law) => !near.includes(law))
+        .map(({ id, value }) => `${KNOWN_LAWS[id] ?? id}, ${formatNumber(value)}, lies outside the chart.`)
     },
     size
   );
+}
+
+/** Whether a law lies within reach of the points: one far off would press them flat. */
+function isNear(seen: KnownInterval[]): (law: { value: number; inside: boolean }) => boolean {
+  const [low, high] = [Math.min(...seen.map((one) => one.low)), Math.max(...seen.map((one) => one.high))];
+  return ({ value, inside }) => inside || (value > 2 * low - high && value < 2 * high - low);
 }

@@ -36,7 +36,7 @@ export const sweepMethodPart = (): Part => ({
                 'The value that fits all datasets of the window, errors of both allowed for; whether it is the same everywhere by χ².'
             },
             {
-              name: 'Loss of single defects',
+              name: 'Loss, one by one',
               formula: 'F_2/F_1^2 = (κ_2 − κ_1)/κ_1^2',
               alt: 'F two over F one squared equals kappa two minus kappa one over kappa one squared',
               words: 'Loss of single defects, each by chance of its own, leaves it as it is. For hold times.'
