@@ -5,6 +5,7 @@ import type { Actor } from '$lib/server/services/access/actor';
 import Ajv2020 from 'ajv/dist/2020.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { ask, CSV_TYPE, JSON_TYPE, seedToken } from './support/api';
+import { seedGate } from './support/seed-gate';
 import { seedPerson, seedTeam } from './support/seed-people';
 import { seedReports } from './support/seed-reports';
 import { startServer, type RunningServer } from './support/start-server';
@@ -70,12 +71,16 @@ beforeAll(async () => {
     report: seeded.reports[0],
     job: await idOf(post(`/datasets/${seeded.datasetId}/jobs`, '{}', JSON_TYPE)),
     siteMap: await idOf(post('/site-maps', '011\n110\n', CSV_TYPE)),
-    sweep: await idOf(post('/sweeps', BODIES.makeSweep[0].body, JSON_TYPE))
+    sweep: await idOf(post('/sweeps', BODIES.makeSweep[0].body, JSON_TYPE)),
+    device: await seedGate(server, actor, seeded.datasetId)
   };
   served = (await (await fetch(`${server.address}/api/v1/openapi.json`)).json()) as Document;
 });
 
 afterAll(() => server?.stop());
+
+/** What stands after the path where an operation asks for it. */
+const QUERIES: Record<string, string> = { readGate: '?device=Kelp&version=ebb%203.1' };
 
 /** Requests of each operation that has a body: one of every type it takes. */
 const bodiesFor = (swept: string[]): Record<string, Sent[]> => ({
@@ -150,7 +155,7 @@ describe('every operation', () => {
 
   it.each(OPERATIONS)('$method $path answers as described', async (operation) => {
     const { id, method, path, answer, idOf } = operation;
-    const address = path.replace('{id}', idOf ? ids[idOf] : '');
+    const address = path.replace('{id}', idOf ? ids[idOf] : '') + (QUERIES[id] ?? '');
     for (const sent of BODIES[id] ?? [undefined]) {
       const response = await ask(server, token, address, { method: method.toUpperCase(), ...sent });
       expect(response.status, await response.clone().text()).toBe(answer.status);

@@ -4,6 +4,7 @@ import { readEnv } from './env';
 import { startRunner, stopRunner } from './jobs/runner';
 import { purgeAside } from './services/aside/purge';
 import { nameKnownDevices } from './services/devices/name-known-devices';
+import { gatesAfterDiagnosis } from './services/gates/gates-after-diagnosis';
 import { saveReport } from './services/reports/save-report';
 import { seedSamples } from './services/seed-samples';
 import { startDeliveries } from './services/webhooks/start-deliveries';
@@ -24,7 +25,12 @@ export function database(): Database {
   purgeAside(db);
   // A server runs for months; unref, so that it is not what keeps the process alive.
   const daily = setInterval(() => purgeAside(db), 24 * 60 * 60 * 1000).unref();
-  startRunner(db, saveReport);
+  const decideGates = gatesAfterDiagnosis(db);
+  startRunner(db, (tx, report, now) => {
+    const saved = saveReport(tx, report, now);
+    decideGates(report.datasetId);
+    return saved;
+  });
   const stopDeliveries = startDeliveries(db, webhookSettings());
   process.once('sveltekit:shutdown', () => {
     clearInterval(daily);

@@ -17,7 +17,7 @@ export interface Operation {
   method: 'get' | 'post';
   /** Below /api/v1, as OpenAPI writes it: `/reports/{id}`. */
   path: string;
-  part: 'Team' | 'Reports' | 'Datasets' | 'Diagnoses' | 'Sweeps' | 'Maps of sites';
+  part: 'Team' | 'Reports' | 'Datasets' | 'Diagnoses' | 'Sweeps' | 'Maps of sites' | 'Devices';
   /** A verb and its object. */
   summary: string;
   about?: string;

@@ -1,5 +1,6 @@
 import type { Operation } from './operation';
 import { DATASET_OPERATIONS } from './operations/datasets';
+import { DEVICE_OPERATIONS } from './operations/devices';
 import { DIAGNOSIS_OPERATIONS } from './operations/diagnoses';
 import { REPORT_OPERATIONS } from './operations/reports';
 import { SITE_MAP_OPERATIONS } from './operations/site-maps';
@@ -25,5 +26,6 @@ export const OPERATIONS: Operation[] = [
   ...DIAGNOSIS_OPERATIONS,
   ...REPORT_OPERATIONS,
   ...SWEEP_OPERATIONS,
-  ...SITE_MAP_OPERATIONS
+  ...SITE_MAP_OPERATIONS,
+  ...DEVICE_OPERATIONS
 ];

@@ -1,4 +1,5 @@
 import { capital } from '../capital';
+import { DEVICE_SENTENCES } from './events/device-sentences';
 import { byScript, many, role, type EventDetail, type Words } from './events/saying';
 import { SCRIPT_SENTENCES } from './events/script-sentences';
 
@@ -87,21 +88,7 @@ const SENTENCES: Record<string, Words> = {
     say: ({ who, thing, detail }) =>
       `${who} imported ${thing}${detail.madeBy ? `, first saved by ${detail.madeBy}` : ''}`
   },
-  'device.order': {
-    label: 'order of versions',
-    say: ({ who, detail }) =>
-      `${who} moved version “${detail.version}” of ${detail.name} to place ${detail.place}${byScript(detail)}`
-  },
-  'device.notes': {
-    label: 'notes on a device',
-    say: ({ who, detail }) =>
-      `${who} changed the notes on ${detail.version ? `version “${detail.version}” of ` : ''}${detail.name}${byScript(detail)}`
-  },
-  'device.remove-version': {
-    label: 'version removed',
-    say: ({ who, detail }) =>
-      `${who} removed version “${detail.version}” of ${detail.name}${byScript(detail)}`
-  },
+  ...DEVICE_SENTENCES,
   'report.make': { label: 'report made', say: ({ who, thing }) => `${who} made ${thing}` },
   'report.import': {
     label: 'report imported',

@@ -1,9 +1,12 @@
 import { moveSchema, notesSchema } from '$lib/model/team/devices/device-form';
+import { gateRuleSchema } from '$lib/model/team/devices/gate';
 import { deviceMatrix } from '$lib/server/services/devices/device-matrix';
 import { moveVersion } from '$lib/server/services/devices/move-version';
 import { noteDevice } from '$lib/server/services/devices/note-device';
 import { readDevice } from '$lib/server/services/devices/read-device';
 import { removeVersion } from '$lib/server/services/devices/remove-version';
+import { readRule } from '$lib/server/services/gates/read-rule';
+import { setRule } from '$lib/server/services/gates/set-rule';
 import { error, fail } from '@sveltejs/kit';
 import { askTeam } from '../../../../../ask';
 import type { Actions, PageServerLoad } from './$types';
@@ -14,7 +17,8 @@ export const load: PageServerLoad = (event) => {
   const read = readDevice(event.locals.db, actor, event.params.id);
   const drawn = deviceMatrix(event.locals.db, actor, event.params.id);
   if (!read.ok || !drawn.ok) error(404, NO_DEVICE);
-  return { device: read.device, matrix: drawn.matrix };
+  const rule = readRule(event.locals.db, actor, event.params.id);
+  return { device: read.device, matrix: drawn.matrix, rule };
 };
 
 const fieldsOf = async (request: Request) => Object.fromEntries(await request.formData());
@@ -39,6 +43,19 @@ export const actions: Actions = {
     if (done.ok) return { told: 'The notes are saved.' };
     if (done.reason === 'unknown') error(404, NO_DEVICE);
     return fail(409, { problem: DEVICE_REFUSALS.stale, typed });
+  },
+  rule: async (event) => {
+    const { actor } = askTeam(event, 'edit');
+    const fields = await fieldsOf(event.request);
+    const asked = gateRuleSchema.safeParse(fields);
+    const typedRule = Object.fromEntries(
+      Object.entries(fields).map(([name, value]) => [name, String(value)])
+    );
+    if (!asked.success) return fail(400, { problem: asked.error.issues[0].message, typedRule });
+    const done = setRule(event.locals.db, actor, event.params.id, asked.data);
+    if (done.ok) return { told: 'The rule is set. Each version’s page says how it stands by it.' };
+    if (done.reason === 'unknown') error(404, NO_DEVICE);
+    return fail(done.reason === 'stale' ? 409 : 400, { problem: DEVICE_REFUSALS[done.reason], typedRule });
   },
   remove: async (event) => {
     const { actor } = askTeam(event, 'edit');

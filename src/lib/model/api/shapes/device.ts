@@ -1,0 +1,88 @@
+import { z } from 'zod';
+import { momentSchema } from './moment';
+
+/** A device in the list. */
+export const deviceEntrySchema = z.object({
+  id: z.string(),
+  name: z.string(),
+  versions: z.int().describe('Firmware versions'),
+  datasets: z.int(),
+  newest: z.string().nullable().describe('Name of the last version in order')
+});
+
+export const deviceListSchema = z.object({ data: z.array(deviceEntrySchema) });
+
+const gateRuleSchema = z.object({
+  reference: z.string().nullable().describe('Name of the reference version; null once it is removed'),
+  tolerance: z.number().min(0).describe('Excess of variance over the ceiling that is allowed: 0.1 is 10 %'),
+  alpha: z.number(),
+  groups: z.array(z.string()).nullable().describe('Groups that count; null for all')
+});
+
+/** A device with its firmware versions in order and the rule of its gate. */
+export const deviceSchema = z.object({
+  id: z.string(),
+  name: z.string(),
+  notes: z.string().nullable(),
+  versions: z
+    .array(
+      z.object({
+        id: z.string(),
+        name: z.string(),
+        notes: z.string().nullable(),
+        datasets: z.int().describe('Without those put aside')
+      })
+    )
+    .describe('In order'),
+  rule: gateRuleSchema.nullable().describe('Null where no rule is set')
+});
+
+const intervalSchema = z.object({ value: z.number(), low: z.number(), high: z.number() }).nullable();
+const testSchema = z.object({
+  z: z.number(),
+  p: z.number(),
+  pAdjusted: z.number().describe('By Holm over all tests of the gate')
+});
+const outcomeSchema = z.enum(['passed', 'failed', 'undecided']);
+
+/** The gate document. */
+export const gateDocumentSchema = z.object({
+  format: z.literal('severalty.gate/1'),
+  version: z.string(),
+  rule: gateRuleSchema,
+  outcome: outcomeSchema,
+  tests: z.int(),
+  groups: z.array(
+    z.object({
+      group: z.string(),
+      outcome: outcomeSchema,
+      dispersion: intervalSchema.describe('Variance over ceiling, with its 95 % interval'),
+      referenceDispersion: intervalSchema,
+      overTolerance: testSchema.nullable().describe('Is it above 1 + tolerance?'),
+      overReference: testSchema
+        .extend({ factor: z.number() })
+        .nullable()
+        .describe('Is it above that of the reference?'),
+      smallestExcess: z.number().nullable().describe('Smallest excess seen with 80 % power'),
+      smallestRise: z.number().nullable(),
+      hindrances: z.array(z.string()),
+      reasons: z.array(z.string())
+    })
+  ),
+  statement: z.string(),
+  because: z.array(z.string()),
+  cautions: z.array(z.string())
+});
+
+/** A gate as it stands now. */
+export const gateSchema = z.object({
+  outcome: outcomeSchema,
+  statement: z.string(),
+  device: z.object({ id: z.string(), name: z.string() }),
+  version: z.object({ id: z.string(), name: z.string() }),
+  waiting: z
+    .array(z.object({ id: z.string(), name: z.string() }))
+    .describe('Datasets whose diagnosis waits or runs: ask again when none is left'),
+  decidedAt: momentSchema,
+  document: gateDocumentSchema
+});
