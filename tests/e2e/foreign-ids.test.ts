@@ -1,5 +1,15 @@
 import { newId } from '$lib/server/db/new-id';
-import { device, firmwareVersion, job, link, remark, sweep, webhook } from '$lib/server/db/schema';
+import {
+  device,
+  firmwareVersion,
+  job,
+  link,
+  originalFile,
+  remark,
+  siteMap,
+  sweep,
+  webhook
+} from '$lib/server/db/schema';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { makeDataset, makeReport } from '../support/saved-reports';
 import { doorsOfTeams, type Door } from './support/doors';
@@ -24,6 +34,7 @@ let foreign: {
   version: string;
   sweep: string;
   webhook: string;
+  map: string;
 };
 
 beforeAll(async () => {
@@ -46,7 +57,8 @@ beforeAll(async () => {
       device: newId(),
       version: newId(),
       sweep: newId(),
-      webhook: newId()
+      webhook: newId(),
+      map: newId()
     };
     const plain = { ...made, createdAt: 1 };
     db.insert(job)
@@ -74,6 +86,22 @@ beforeAll(async () => {
     const hook = { name: SECRET, url: 'https://example.org/', sealedSecret: '', actions: '["gate.fail"]' };
     db.insert(webhook)
       .values({ ...plain, ...hook, id: ids.webhook, lastEvent: 0 })
+      .run();
+    const { id: fileId } = db.select().from(originalFile).get()!;
+    db.insert(siteMap)
+      .values({
+        ...plain,
+        id: ids.map,
+        name: SECRET,
+        fileId,
+        geometry: 'chain',
+        sites: 2,
+        shots: 2,
+        alpha: 0.05,
+        document: '{}',
+        sha256: 'none',
+        engineVersion: '0'
+      })
       .run();
     db.insert(remark)
       .values({
@@ -107,6 +135,7 @@ function addressOf({ route, action }: Door, team: string): string {
     .replace('[version]', foreign.version)
     .replace('sweeps/[id]', `sweeps/${foreign.sweep}`)
     .replace('webhooks/[id]', `webhooks/${foreign.webhook}`)
+    .replace('sites/[id]', `sites/${foreign.map}`)
     .replace('jobs/[id]', `jobs/${foreign.job}`)
     .replace('[link]', foreign.link)
     .replace('[thread]', foreign.thread);

@@ -77,7 +77,16 @@ describe('an invitation by mail', () => {
         .getByRole('navigation', { name: 'Team' })
         .getByRole('listitem')
         .allTextContents();
-      expect(places).toEqual(['Datasets', 'Reports', 'Devices', 'Sweeps', 'Jobs', 'Put aside', 'Scripts']);
+      expect(places).toEqual([
+        'Datasets',
+        'Reports',
+        'Devices',
+        'Sweeps',
+        'Site maps',
+        'Jobs',
+        'Put aside',
+        'Scripts'
+      ]);
 
       await other.goto(invitation);
       await other.getByText('This invitation was accepted before').waitFor();

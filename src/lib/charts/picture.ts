@@ -81,8 +81,8 @@ export interface Picture {
   marks: Mark[];
   legend: LegendEntry[];
   readings: Reading[];
-  /** Which way the readings follow one another: by their count, or line under line. */
-  order: 'across' | 'down';
+  /** Which way the readings follow one another: by their count, or line under line; or all over, as on a map. */
+  order: 'across' | 'down' | 'all-over';
   /** What the drawing leaves out or gathers together, in words. */
   notes: string[];
 }

@@ -8,6 +8,7 @@ import {
   mailedToken,
   person,
   report,
+  siteMap,
   sweep,
   team
 } from '$lib/server/db/schema';
@@ -61,6 +62,7 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       .all();
     const bunched = reports.find(({ name }) => /bunch/i.test(name)) ?? reports[0];
     const swept = db.select({ id: sweep.id }).from(sweep).where(eq(sweep.teamId, ours.id)).get()!;
+    const mapped = db.select({ id: siteMap.id }).from(siteMap).where(eq(siteMap.teamId, ours.id)).get()!;
     const { datasetId } = bunched;
     const second = db.transaction((tx) =>
       saveReport(tx, { teamId: ours.id, datasetId, createdBy: lead.id, document, options })
@@ -150,6 +152,9 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
         `${root}/sweeps/${swept.id}`,
         `${root}/sweeps/${swept.id}?from=2&to=16`
       ],
+      '/(team)/team/[team=slug]/sites': [`${root}/sites`],
+      '/(team)/team/[team=slug]/sites/new': [`${root}/sites/new`],
+      '/(team)/team/[team=slug]/sites/[id]': [`${root}/sites/${mapped.id}`],
       '/(team)/team/[team=slug]/settings': [`${root}/settings`],
       '/(team)/team/[team=slug]/scripts': [`${root}/scripts`],
       '/(team)/team/[team=slug]/webhooks': [`${root}/webhooks`],

@@ -115,6 +115,18 @@ const SENTENCES: Record<string, Words> = {
     label: 'map of sites saved',
     say: ({ who, thing, detail }) => `${who} saved ${thing}${byScript(detail)}`
   },
+  'site-map.aside': {
+    label: 'map of sites put aside',
+    say: ({ who, thing }) => `${who} put ${thing} aside`
+  },
+  'site-map.restore': {
+    label: 'map of sites brought back',
+    say: ({ who, thing }) => `${who} brought ${thing} back`
+  },
+  'site-map.purge': {
+    label: 'map of sites removed for good',
+    say: ({ thing }) => `${capital(thing)} was removed for good, 30 days after it was put aside`
+  },
   'remark.add': { label: 'remark', say: ({ who, thing }) => `${who} remarked on ${thing}` },
   'remark.settle': {
     label: 'remark settled',

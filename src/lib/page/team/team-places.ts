@@ -12,6 +12,7 @@ export const places: Place[] = [
   { path: 'reports', label: 'Reports', leadOnly: false },
   { path: 'devices', label: 'Devices', leadOnly: false },
   { path: 'sweeps', label: 'Sweeps', leadOnly: false },
+  { path: 'sites', label: 'Site maps', leadOnly: false },
   { path: 'jobs', label: 'Jobs', leadOnly: false },
   { path: 'aside', label: 'Put aside', leadOnly: false },
   { path: 'scripts', label: 'Scripts', leadOnly: false },

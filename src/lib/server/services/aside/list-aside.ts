@@ -1,13 +1,13 @@
 import { and, desc, eq, isNotNull, isNull, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, person, report, sweep } from '../../db/schema';
+import { dataset, person, report, siteMap, sweep } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { daysLeft } from './kept-aside';
 
 export interface AsideThing {
   id: string;
-  kind: 'dataset' | 'report' | 'sweep';
+  kind: 'dataset' | 'report' | 'sweep' | 'site-map';
   name: string;
   deletedAt: number;
   /** Who put it aside; null when that person is gone. */
@@ -22,7 +22,7 @@ export interface AsideThing {
  * it, and is not listed by itself.
  */
 export function listAside(db: Database, actor: Actor, now = Date.now()): AsideThing[] {
-  const may = (table: typeof dataset | typeof report | typeof sweep) =>
+  const may = (table: typeof dataset | typeof report | typeof sweep | typeof siteMap) =>
     sql<number>`${mayWhere(actor, 'restore', table.teamId, table.createdBy)}`.mapWith(Boolean);
   const datasets = db
     .select({
@@ -64,10 +64,24 @@ export function listAside(db: Database, actor: Actor, now = Date.now()): AsideTh
     .where(and(mayWhere(actor, 'see', sweep.teamId), isNotNull(sweep.deletedAt)))
     .orderBy(desc(sweep.deletedAt))
     .all();
+  const maps = db
+    .select({
+      id: siteMap.id,
+      name: sql<string>`'Map of sites ' || ${siteMap.name}`,
+      deletedAt: siteMap.deletedAt,
+      by: person.name,
+      mayRestore: may(siteMap)
+    })
+    .from(siteMap)
+    .leftJoin(person, eq(person.id, siteMap.deletedBy))
+    .where(and(mayWhere(actor, 'see', siteMap.teamId), isNotNull(siteMap.deletedAt)))
+    .orderBy(desc(siteMap.deletedAt))
+    .all();
   return [
     ...datasets.map((row) => ({ ...row, kind: 'dataset' as const })),
     ...reports.map((row) => ({ ...row, kind: 'report' as const })),
-    ...sweeps.map((row) => ({ ...row, kind: 'sweep' as const }))
+    ...sweeps.map((row) => ({ ...row, kind: 'sweep' as const })),
+    ...maps.map((row) => ({ ...row, kind: 'site-map' as const }))
   ]
     .flatMap(({ deletedAt, ...row }) =>
       deletedAt === null ? [] : [{ ...row, deletedAt, daysLeft: daysLeft(deletedAt, now) }]

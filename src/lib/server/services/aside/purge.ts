@@ -1,6 +1,6 @@
 import { and, lte, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, originalFile, report, sweep } from '../../db/schema';
+import { dataset, originalFile, report, siteMap, sweep } from '../../db/schema';
 import { recordEvent } from '../events/record-event';
 import { KEPT_ASIDE } from './kept-aside';
 
@@ -8,8 +8,8 @@ import { KEPT_ASIDE } from './kept-aside';
 const UNFINISHED = 24 * 60 * 60 * 1000;
 
 /**
- * Removes for good what was put aside 30 days ago: datasets with all their reports, reports and sweeps by themselves, and
- * then files from which no dataset or map of sites is left. Called at start and once a day.
+ * Removes for good what was put aside 30 days ago: datasets with all their reports; reports, sweeps and
+ * maps of sites by themselves; and then files from which no dataset or map of sites is left. Called at start and once a day.
  *
  * @returns how many of each went
  */
@@ -29,6 +29,11 @@ export function purgeAside(
         .delete(sweep)
         .where(lte(sweep.deletedAt, old))
         .returning({ id: sweep.id, teamId: sweep.teamId, name: sweep.name })
+        .all();
+      const maps = tx
+        .delete(siteMap)
+        .where(lte(siteMap.deletedAt, old))
+        .returning({ id: siteMap.id, teamId: siteMap.teamId, name: siteMap.name })
         .all();
       const datasets = tx
         .delete(dataset)
@@ -50,6 +55,8 @@ export function purgeAside(
         recordEvent(tx, { action: 'report.purge', teamId, thing: id }, now);
       for (const { id, teamId, name } of sweeps)
         recordEvent(tx, { action: 'sweep.purge', teamId, thing: id, detail: { name } }, now);
+      for (const { id, teamId, name } of maps)
+        recordEvent(tx, { action: 'site-map.purge', teamId, thing: id, detail: { name } }, now);
       for (const { id, teamId, name } of datasets)
         recordEvent(tx, { action: 'dataset.purge', teamId, thing: id, detail: { name } }, now);
       return { datasets: datasets.length, reports: reports.length, files };

@@ -7,11 +7,13 @@ import { enqueueJobs } from '../jobs/enqueue-jobs';
 import { CATALOGUE } from '../sample-catalogue';
 import { saveSweep } from '../sweeps/save-sweep';
 import { makeTeam } from '../teams/make-team';
+import { seedDemoMap } from './seed-demo-map';
 import { DEMO_PASSWORD, DEMO_PEOPLE, DEMO_TEAM } from './demo-people';
 
 /**
  * Fills an empty database with an invented team, so that there is something to look at: a person for each role, every
- * invented example as datasets, a diagnosis of each in the queue, and a sweep of those that state quench times. Does nothing where anybody exists already.
+ * invented example as datasets, a diagnosis of each in the queue, a sweep of those that
+ * state quench times, and a map of sites. Does nothing where anybody exists already.
  *
  * @returns whether the team was made
  */
@@ -58,5 +60,6 @@ export async function seedDemoTeam(db: Database, now = Date.now()): Promise<bool
       now
     );
   }
+  seedDemoMap(db, actor, now);
   return true;
 }

@@ -8,6 +8,7 @@ import { dataset } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { scriptOf } from '../access/script-of';
 import { countFacts } from '../datasets/count-facts';
+import { nameDevice } from '../devices/name-device';
 import { recordEvent } from '../events/record-event';
 import type { SiteMapRequest } from './site-map-request';
 
@@ -18,7 +19,7 @@ import type { SiteMapRequest } from './site-map-request';
  * @returns its id
  */
 export function insertSiteCounts(
-  tx: Pick<Database, 'insert'>,
+  tx: Pick<Database, 'select' | 'insert'>,
   actor: Actor,
   asked: Pick<SiteMapRequest, 'name' | 'device' | 'firmware' | 'group'> & { fileId: string },
   { names, shots }: SitesInput,
@@ -58,6 +59,8 @@ export function insertSiteCounts(
       updatedAt: now
     })
     .run();
+  const { device, firmware } = asked;
+  nameDevice(tx, { teamId: actor.teamId, createdBy: actor.personId, device, firmware }, now);
   const happening = { teamId: actor.teamId, personId: actor.personId, thing: id };
   recordEvent(tx, { ...happening, action: 'dataset.upload', detail: { name, ...scriptOf(actor) } }, now);
   return id;

@@ -1,6 +1,7 @@
 import { listAside } from '$lib/server/services/aside/list-aside';
 import { restoreDataset } from '$lib/server/services/datasets/restore-dataset';
 import { restoreReport } from '$lib/server/services/reports/restore-report';
+import { restoreSiteMap } from '$lib/server/services/site-maps/restore-site-map';
 import { restoreSweep } from '$lib/server/services/sweeps/restore-sweep';
 import { fail } from '@sveltejs/kit';
 import { askTeam } from '../../../../ask';
@@ -28,6 +29,13 @@ export const actions: Actions = {
     const back = restoreSweep(event.locals.db, actor, id);
     if (!back.ok) return fail(404, { problem: GONE });
     return { told: `The sweep “${back.name}” is back.`, href: `sweeps/${id}` };
+  },
+  'site-map': async (event) => {
+    const { actor } = askTeam(event, 'see');
+    const id = String((await event.request.formData()).get('id'));
+    const back = restoreSiteMap(event.locals.db, actor, id);
+    if (!back.ok) return fail(404, { problem: GONE });
+    return { told: `The map of sites “${back.name}” is back.`, href: `sites/${id}` };
   },
   report: async (event) => {
     const { actor } = askTeam(event, 'see');

@@ -4,7 +4,8 @@ import { fail, redirect } from '@sveltejs/kit';
 import { askTeam } from '../../../../../ask';
 import { acting, bodyTrouble } from '../answers';
 import { saveRefusal } from '../save-refusal';
-import { filesOfForm, previewsOfForm } from './previews-of-form';
+import { filesOfForm } from './files-of-form';
+import { previewsOfForm } from './previews-of-form';
 import { saveRequestOfForm } from './save-request-of-form';
 import type { Actions, PageServerLoad } from './$types';
 

@@ -1,27 +1,11 @@
 import type { Actor } from '$lib/server/services/access/actor';
 import { previewFile } from '$lib/server/services/datasets/preview-file';
 import { storeFile } from '$lib/server/services/datasets/store-file';
+import type { GivenFile } from './files-of-form';
 import { choicesOfForm } from './choices-of-form';
 
 type Database = App.Locals['db'];
 type PreviewRead = Extract<ReturnType<typeof previewFile>, { ok: true }>['preview'];
-
-interface GivenFile {
-  name: string;
-  bytes: Uint8Array;
-}
-
-/** The files that a form carries, and what was pasted into it. */
-export async function filesOfForm(data: FormData): Promise<GivenFile[]> {
-  const files: GivenFile[] = [];
-  for (const file of data.getAll('files')) {
-    if (typeof file !== 'string' && file.name !== '')
-      files.push({ name: file.name, bytes: new Uint8Array(await file.arrayBuffer()) });
-  }
-  const pasted = String(data.get('pasted') ?? '');
-  if (pasted.trim() !== '') files.push({ name: 'pasted.txt', bytes: new TextEncoder().encode(pasted) });
-  return files;
-}
 
 const WORDS = {
   'not-allowed': 'cannot be taken: your role does not allow it.',
