@@ -1,15 +1,13 @@
 import { formatNumber } from '$lib/model/format-number';
 import type { SweepReport } from '$lib/stats/sweep/types';
-import { scaleLog } from 'd3-scale';
 import { bottomAxis, leftAxis } from './axis-marks';
-import { frameOf } from './frame-of';
 import { intervalPath } from './interval-path';
 import { linePath } from './line-path';
 import { logTicks } from './log-ticks';
 import type { Mark, Picture, Point, Reading, Size } from './picture';
 import { pointPath } from './point-path';
 import { seriesLabels } from './series-labels';
-import { sweepSpan } from './sweep-span';
+import { sweepFrame } from './sweep-frame';
 import { timeTitle } from './time-title';
 
 const NAMES = ['mean', 'variance', 'third cumulant'];
@@ -17,16 +15,8 @@ const SIGNS = ['κ₁', 'κ₂', 'κ₃'];
 
 /** Cumulants over the time of a sweep, both logarithmic, with the power laws fitted in the window. */
 export function sweepPicture(report: SweepReport, { width, text }: Size): Picture {
-  const height = Math.min(460, Math.max(280, width * 0.58));
-  const frame = frameOf(width, height, {
-    left: text * 4.4,
-    right: text * 3.2,
-    top: text * 2.2,
-    bottom: text * 3.8
-  });
-  const { times, values } = sweepSpan(report);
-  const x = scaleLog(times, [frame.left, frame.right]);
-  const y = scaleLog(values, [frame.bottom, frame.top]);
+  const { height, frame, x, y } = sweepFrame(report, { width, text });
+  const [times, values] = [x.domain(), y.domain()];
   const low = (value: number) => y(Math.max(value, values[0]));
   const seen = report.points.flatMap((point) =>
     (point.cumulants ?? []).flatMap((one, q) => (one.value > 0 ? [{ point, one, q }] : []))
