@@ -143,6 +143,7 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       '/(team)/team/[team=slug]/reports/compare': [`${root}/reports/compare?a=${bunched.id}&b=${second.id}`],
       '/(team)/team/[team=slug]/devices': [`${root}/devices`],
       '/(team)/team/[team=slug]/devices/[id]': [`${root}/devices/${chain.deviceId}`],
+      '/(team)/team/[team=slug]/devices/[id]/timeline': [`${root}/devices/${chain.deviceId}/timeline`],
       '/(team)/team/[team=slug]/devices/[id]/versions/[version]': [
         `${root}/devices/${chain.deviceId}/versions/${chain.id}`
       ],

@@ -1,0 +1,42 @@
+import { formatCount } from '$lib/model/format-number';
+import type { DeviceTimeline } from '$lib/model/team/devices/timeline';
+import { capital } from '$lib/model/capital';
+import { knownOf, type Quantity } from './timeline-quantities';
+
+const SHORT = { dispersion: 'variance over ceiling', mean: 'mean', divergence: 'divergence' } as const;
+
+/** What the chart of one quantity shows, in one line. */
+export function timelineTitle(
+  { points, group, reference }: Pick<DeviceTimeline, 'points' | 'group' | 'reference'>,
+  quantity: Quantity
+): string {
+  const known = points.flatMap((point) => knownOf(point, quantity) ?? []);
+  const name = `${SHORT[quantity]} of ${group ?? 'the device'}`;
+  if (known.length === 0) return `The ${name} is not known yet`;
+  const limited = known.flatMap(({ value, limits }) => (limits ? [{ value, limits }] : []));
+  if (limited.length === 0) return capital(`${name}, version by version`);
+  const above = limited.filter(({ value, limits }) => value > limits[1]).length;
+  const below = limited.filter(({ value, limits }) => value < limits[0]).length;
+  const of = `of ${formatCount(limited.length)} versions beside ${reference}`;
+  if (above + below === 0) return `The ${name} stays within its limits in all ${of.slice(3)}`;
+  const parts = [
+    ...(above > 0 ? [`rises above its limits in ${formatCount(above)}`] : []),
+    ...(below > 0 ? [`falls below them in ${formatCount(below)}`] : [])
+  ];
+  return `The ${name} ${parts.join(' and ').replace(/^falls below them/, 'falls below its limits')} ${of}`;
+}
+
+/** What the table of marks shows at a glance. */
+export function marksTitle({ marks, reference }: Pick<DeviceTimeline, 'marks' | 'reference'>): string {
+  if (reference === null) return 'No version has counts yet';
+  const cells = marks.flat().filter((cell) => cell !== null);
+  const compared = cells.filter(({ mark }) => mark !== 'reference').length;
+  if (compared === 0) return `No version has been measured beside ${reference}`;
+  const risen = cells.filter(({ mark }) => mark === 'risen').length;
+  const told = cells.filter(({ mark }) => mark === 'no-difference-seen' || mark === 'differs').length;
+  if (risen > 0)
+    return `The variance rises over ${reference} in ${formatCount(risen)} of ${formatCount(compared)} cells`;
+  return told > 0
+    ? `No rise over ${reference} is seen in ${formatCount(compared)} cells`
+    : `Nothing can be told of a rise over ${reference} yet`;
+}

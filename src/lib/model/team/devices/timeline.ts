@@ -1,0 +1,34 @@
+import type { CellReport, Hindrance, Mark } from '../../../stats/versions/types';
+
+/** One version of the chosen group as the charts draw it. */
+export type TimelinePoint = Omit<CellReport, 'group' | 'smallestRise'>;
+
+/** A cell of the table of marks. */
+export interface TimelineMark {
+  mark: Mark;
+  /** Variance over ceiling over that of the reference, and its p adjusted over all cells; null without a test. */
+  factor: number | null;
+  pAdjusted: number | null;
+  hindrance: Hindrance | null;
+}
+
+/** What of a device's versions the page draws: marks of every cell, and the points of one group. */
+export interface DeviceTimeline {
+  /** Versions with datasets, in order. */
+  versions: { id: string; name: string }[];
+  reference: string | null;
+  /** Name of the reference that was asked for, or that the gate's rule names, and is not here any more. */
+  goneReference: string | null;
+  groups: string[];
+  group: string | null;
+  alpha: number;
+  tolerance: number;
+  points: TimelinePoint[];
+  /** Groups down, versions across; null where nothing was measured. */
+  marks: (TimelineMark | null)[][];
+  /** Two versions whose first datasets came the other way round than they stand. */
+  outOfOrder: { earlier: string; later: string } | null;
+  statement: string;
+  because: string[];
+  cautions: string[];
+}
