@@ -47,7 +47,7 @@ beforeAll(async () => {
   const lead = await seedPerson(server);
   const team = await seedTeam(server, 'contract', [[lead, 'lead']]);
   actor = { personId: lead.id, teamId: team.id, role: 'lead' };
-  token = await seedToken(server, actor, { scopes: ['read', 'upload', 'diagnose'] });
+  token = await seedToken(server, actor, { scopes: [...SCOPES] });
   const seeded = await seedReports(server, { teamId: team.id, createdBy: lead.id, name: 'Invented' }, [
     {},
     {}
@@ -80,10 +80,15 @@ beforeAll(async () => {
 afterAll(() => server?.stop());
 
 /** What stands after the path where an operation asks for it. */
-const QUERIES: Record<string, string> = { readGate: '?device=Kelp&version=ebb%203.1' };
+const QUERIES: Record<string, string> = {
+  readGate: '?device=Kelp&version=ebb%203.1',
+  readGateRule: '?device=Kelp',
+  setGateRule: '?device=Kelp'
+};
 
 /** Requests of each operation that has a body: one of every type it takes. */
 const bodiesFor = (swept: string[]): Record<string, Sent[]> => ({
+  setGateRule: [{ body: '{"reference": "ebb 3.1", "tolerance": 0.2}', headers: JSON_TYPE }],
   uploadDataset: [
     { body: 'count,shots\n0,31\n1,50\n2,20\n', headers: CSV_TYPE },
     {

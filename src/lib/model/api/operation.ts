@@ -14,7 +14,7 @@ export interface Content {
 /** One operation of the API: what its route does, told to OpenAPI and to the page in one place. */
 export interface Operation {
   id: string;
-  method: 'get' | 'post';
+  method: 'get' | 'post' | 'put';
   /** Below /api/v1, as OpenAPI writes it: `/reports/{id}`. */
   path: string;
   part: 'Team' | 'Reports' | 'Datasets' | 'Diagnoses' | 'Sweeps' | 'Maps of sites' | 'Devices';

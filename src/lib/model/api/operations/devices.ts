@@ -1,10 +1,14 @@
 import { z } from 'zod';
 import type { Operation } from '../operation';
-import { deviceListSchema, deviceSchema, gateSchema } from '../shapes/device';
+import { deviceListSchema, deviceSchema, gateRuleSchema, gateSchema, newRuleSchema } from '../shapes/device';
 
 const named = (what: string) => z.string().min(1).max(200).describe(`Name or id of the ${what}`);
 
 export const gateQuery = z.strictObject({ device: named('device'), version: named('firmware version') });
+
+export const ruleQuery = z.strictObject({ device: named('device') });
+
+const ruleContent = { type: 'application/json', schema: gateRuleSchema, about: 'The rule' };
 
 export const DEVICE_OPERATIONS: Operation[] = [
   {
@@ -54,6 +58,47 @@ export const DEVICE_OPERATIONS: Operation[] = [
     refusals: {
       404: 'The team has no such device, or the device no such firmware version.',
       409: 'The device has no rule yet, or there are no counts to judge.'
+    }
+  },
+  {
+    id: 'readGateRule',
+    method: 'get',
+    path: '/gate/rule',
+    part: 'Devices',
+    summary: 'Read the rule of a gate',
+    scope: 'read',
+    query: ruleQuery,
+    answer: { status: 200, about: 'The rule', content: ruleContent },
+    refusals: {
+      404: 'The team has no such device.',
+      409: 'The device has no rule yet.'
+    }
+  },
+  {
+    id: 'setGateRule',
+    method: 'put',
+    path: '/gate/rule',
+    part: 'Devices',
+    summary: 'Set the rule of a gate',
+    about: 'In place of the rule that stands. The rule that stands already, sent again, changes nothing.',
+    scope: 'edit',
+    query: ruleQuery,
+    bodies: [
+      {
+        type: 'application/json',
+        schema: newRuleSchema,
+        about: 'The reference by name or id; what is left out is as usual.',
+        example: { reference: 'ebb 3.1', tolerance: 0.1, alpha: 0.05, groups: null }
+      }
+    ],
+    answer: { status: 200, about: 'Set', content: ruleContent },
+    refusals: {
+      400: 'The body is not JSON, or did not arrive whole.',
+      404: 'The team has no such device.',
+      409: 'Somebody set another rule in this very moment.',
+      413: 'More than the server takes.',
+      415: 'Not application/json.',
+      422: 'A field does not fit, or the device has no version of that name for a reference.'
     }
   }
 ];

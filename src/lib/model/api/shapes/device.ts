@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { MOST_GROUPS } from '../../team/devices/gate';
 import { momentSchema } from './moment';
 
 /** A device in the list. */
@@ -12,11 +13,35 @@ export const deviceEntrySchema = z.object({
 
 export const deviceListSchema = z.object({ data: z.array(deviceEntrySchema) });
 
-const gateRuleSchema = z.object({
+export const gateRuleSchema = z.object({
   reference: z.string().nullable().describe('Name of the reference version; null once it is removed'),
   tolerance: z.number().min(0).describe('Excess of variance over the ceiling that is allowed: 0.1 is 10 %'),
   alpha: z.number(),
   groups: z.array(z.string()).nullable().describe('Groups that count; null for all')
+});
+
+/** A rule as a script sets it. */
+export const newRuleSchema = z.strictObject({
+  reference: z.string().min(1).max(200).describe('Name or id of the version that others are held against'),
+  tolerance: z
+    .number()
+    .min(0)
+    .max(10)
+    .default(0.1)
+    .describe('Excess of variance over the ceiling that is allowed: 0.1 is 10 %'),
+  alpha: z
+    .number()
+    .min(0.0001)
+    .max(0.2)
+    .default(0.05)
+    .describe('How often a version without any excess or rise may fail by chance, at most'),
+  groups: z
+    .array(z.string().min(1).max(200))
+    .min(1)
+    .max(MOST_GROUPS)
+    .nullable()
+    .default(null)
+    .describe('Groups that count; null for all')
 });
 
 /** A device with its firmware versions in order and the rule of its gate. */

@@ -1,9 +1,7 @@
-import { and, eq, or } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { device } from '../../db/schema';
 import type { Actor } from '../access/actor';
-import { mayWhere } from '../access/may-where';
 import { versionsOf } from '../devices/versions-of';
+import { findNamedDevice } from './find-named-device';
 
 /** The ids of a device and a version of it, each given by its id or its name; a name goes before an id. */
 export function findGate(
@@ -11,17 +9,7 @@ export function findGate(
   actor: Actor,
   named: { device: string; version: string }
 ): { ok: true; device: Ids; version: Ids } | { ok: false; reason: 'no-device' | 'no-version' } {
-  const found = db
-    .select()
-    .from(device)
-    .where(
-      and(
-        or(eq(device.name, named.device), eq(device.id, named.device)),
-        mayWhere(actor, 'see', device.teamId)
-      )
-    )
-    .all();
-  const one = found.find(({ name }) => name === named.device) ?? found.at(0);
+  const one = findNamedDevice(db, actor, named.device);
   if (!one) return { ok: false, reason: 'no-device' };
   const versions = versionsOf(db, one);
   const version =

@@ -1,4 +1,5 @@
 import { deviceSchema } from '$lib/model/api/shapes/device';
+import { toRule } from '$lib/model/api/to-rule';
 import { readDevice } from '$lib/server/services/devices/read-device';
 import { readRule } from '$lib/server/services/gates/read-rule';
 import { askToken } from '../../../../ask-token';
@@ -21,11 +22,5 @@ export const GET: RequestHandler = async (event) => {
     datasets: one.datasets
   }));
   const rule = readRule(db, asked.actor, id);
-  const shown = rule && {
-    reference: rule.referenceId === null ? null : rule.referenceName,
-    tolerance: rule.tolerance,
-    alpha: rule.alpha,
-    groups: rule.groups
-  };
-  return told(deviceSchema, { id, name, notes, versions, rule: shown });
+  return told(deviceSchema, { id, name, notes, versions, rule: rule && toRule(rule) });
 };
