@@ -3,9 +3,9 @@ import { migrateDatabase } from './db/migrate';
 import { readEnv } from './env';
 import { startRunner, stopRunner } from './jobs/runner';
 import { purgeAside } from './services/aside/purge';
+import { saveReportAndSweep } from './services/demo-team/save-report-and-sweep';
 import { nameKnownDevices } from './services/devices/name-known-devices';
 import { gatesAfterDiagnosis } from './services/gates/gates-after-diagnosis';
-import { saveReport } from './services/reports/save-report';
 import { seedSamples } from './services/seed-samples';
 import { startDeliveries } from './services/webhooks/start-deliveries';
 import { webhookSettings } from './services/webhooks/webhook-settings';
@@ -27,7 +27,7 @@ export function database(): Database {
   const daily = setInterval(() => purgeAside(db), 24 * 60 * 60 * 1000).unref();
   const decideGates = gatesAfterDiagnosis(db);
   startRunner(db, (tx, report, now) => {
-    const saved = saveReport(tx, report, now);
+    const saved = saveReportAndSweep(tx, report, now);
     decideGates(report.datasetId);
     return saved;
   });

@@ -5,15 +5,14 @@ import type { Actor } from '../access/actor';
 import { takeSample } from '../datasets/take-sample';
 import { enqueueJobs } from '../jobs/enqueue-jobs';
 import { CATALOGUE } from '../sample-catalogue';
-import { saveSweep } from '../sweeps/save-sweep';
 import { makeTeam } from '../teams/make-team';
 import { seedDemoMap } from './seed-demo-map';
 import { DEMO_PASSWORD, DEMO_PEOPLE, DEMO_TEAM } from './demo-people';
 
 /**
  * Fills an empty database with an invented team, so that there is something to look at: a person for each role, every
- * invented example as datasets, a diagnosis of each in the queue, a sweep of those that
- * state quench times, and a map of sites. Does nothing where anybody exists already.
+ * invented example as datasets, a diagnosis of each in the queue, and a map of sites; the sweep of the ramps is made
+ * after their diagnoses (save-report-and-sweep.ts). Does nothing where anybody exists already.
  *
  * @returns whether the team was made
  */
@@ -38,20 +37,6 @@ export async function seedDemoTeam(db: Database, now = Date.now()): Promise<bool
     const taken = takeSample(db, actor, slug, now);
     if (!taken.ok)
       throw new Error(`The example ${slug} could not be taken into the demo team: ${taken.reason}.`);
-    if (slug === 'quench-sweep')
-      saveSweep(
-        db,
-        actor,
-        {
-          name: 'Kelp, invented: six quench times',
-          datasets: taken.saved.map(({ id }) => id),
-          axis: 'quench-time',
-          window: null,
-          transition: { dimension: 1, correlation: 1, dynamic: 1 },
-          alpha: 0.05
-        },
-        now
-      );
     enqueueJobs(
       db,
       actor,
