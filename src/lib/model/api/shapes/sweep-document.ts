@@ -3,6 +3,11 @@ import { z } from 'zod';
 import { verdictSchema } from './verdict';
 
 const interval = z.object({ value: z.number(), low: z.number(), high: z.number() });
+const openInterval = z.object({
+  value: z.number().nullable(),
+  low: z.number().nullable(),
+  high: z.number().nullable()
+});
 const chance = z.number().min(0).max(1);
 const span = z.object({ from: z.number(), to: z.number() });
 
@@ -21,14 +26,26 @@ export const sweepDocumentSchema = z.object({
       shots: z.int(),
       inWindow: z.boolean(),
       dataset: z
-        .object({ id: z.string(), digest: z.string(), verdict: verdictSchema.nullable() })
+        .object({
+          id: z.string(),
+          digest: z.string(),
+          verdict: verdictSchema.nullable(),
+          dispersion: openInterval
+            .nullish()
+            .describe('Variance over ceiling of its newest diagnosis; the first documents did not have it')
+        })
         .optional()
         .describe('Left out where the counts come from no saved dataset'),
       cumulants: z
         .tuple([interval, interval, interval])
         .nullable()
         .describe('κ1, κ2, κ3 with 95 % intervals; null where the counts take fewer than four values'),
-      ratios: z.tuple([interval, interval]).nullable().describe('κ2/κ1 and κ3/κ1')
+      ratios: z.tuple([interval, interval]).nullable().describe('κ2/κ1 and κ3/κ1'),
+      pairFactor: interval.nullish().describe('F2/F1², for hold times alone'),
+      covariance: z
+        .array(z.number())
+        .nullish()
+        .describe('Of the errors of κ1, κ2, κ3, 3 × 3 row by row; the first documents did not have it')
     })
   ),
   laws: z
@@ -46,7 +63,11 @@ export const sweepDocumentSchema = z.object({
           logLevels: z.array(z.number()),
           chiSquare: z.number(),
           freedom: z.int(),
-          p: chance
+          p: chance,
+          z: z
+            .number()
+            .optional()
+            .describe('The same surprise in standard errors; the first documents did not have it')
         })
         .describe('One exponent for all')
     })

@@ -1,2 +1,8 @@
-// Pages take the table of published transitions from here: it lives with the engine, whose documents name its exponents.
-export { UNIVERSALITY_CLASSES as TRANSITIONS } from '$lib/stats/sweep/universality-classes';
+import { quenchExponent } from '$lib/stats/sweep/quench-exponent';
+import { UNIVERSALITY_CLASSES } from '$lib/stats/sweep/universality-classes';
+
+/** The table of published transitions, which lives with the engine, each with the exponent that it leads to. */
+export const TRANSITIONS = UNIVERSALITY_CLASSES.map((one) => ({
+  ...one,
+  exponent: quenchExponent(one.dimension, one.correlation, one.dynamic)
+}));
