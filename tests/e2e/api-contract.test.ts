@@ -4,9 +4,10 @@ import { SCOPES } from '$lib/model/api/scopes';
 import type { Actor } from '$lib/server/services/access/actor';
 import Ajv2020 from 'ajv/dist/2020.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { hookOf } from '../support/webhooks';
 import { ask, CSV_TYPE, JSON_TYPE, seedToken } from './support/api';
 import { seedGate } from './support/seed-gate';
-import { seedPerson, seedTeam } from './support/seed-people';
+import { seedPerson, seedTeam, withDatabaseOf } from './support/seed-people';
 import { seedReports } from './support/seed-reports';
 import { startServer, type RunningServer } from './support/start-server';
 
@@ -72,7 +73,8 @@ beforeAll(async () => {
     job: await idOf(post(`/datasets/${seeded.datasetId}/jobs`, '{}', JSON_TYPE)),
     siteMap: await idOf(post('/site-maps', '011\n110\n', CSV_TYPE)),
     sweep: await idOf(post('/sweeps', BODIES.makeSweep[0].body, JSON_TYPE)),
-    device: await seedGate(server, actor, seeded.datasetId)
+    device: await seedGate(server, actor, seeded.datasetId),
+    webhook: await withDatabaseOf(server, (db) => hookOf(db, actor))
   };
   served = (await (await fetch(`${server.address}/api/v1/openapi.json`)).json()) as Document;
 });
@@ -102,7 +104,13 @@ const bodiesFor = (swept: string[]): Record<string, Sent[]> => ({
   ],
   uploadSites: [{ body: 'a,b,c\n0,1,1\n1,1,0\n0,0,0\n', headers: CSV_TYPE }],
   askForDiagnosis: [{ body: JSON.stringify({ resamples: 19, seed: 3 }), headers: JSON_TYPE }],
-  makeSweep: [{ body: JSON.stringify({ datasets: swept, axis: 'quench-time' }), headers: JSON_TYPE }]
+  makeSweep: [{ body: JSON.stringify({ datasets: swept, axis: 'quench-time' }), headers: JSON_TYPE }],
+  makeWebhook: [
+    {
+      body: JSON.stringify({ name: 'H', url: 'https://example.org/hook', actions: ['gate.fail'] }),
+      headers: JSON_TYPE
+    }
+  ]
 });
 
 function check(

@@ -39,7 +39,7 @@ describe('the pages of webhooks', () => {
       await field.waitFor();
       const secret = await field.inputValue();
       await page.getByRole('link', { name: 'send a trial message' }).click();
-      await page.getByRole('heading', { name: 'night shift' }).waitFor();
+      await page.getByRole('heading', { name: 'night shift', exact: true, level: 1 }).waitFor();
       expect(await page.content()).not.toContain(secret);
 
       const before = listener.heard.length;

@@ -14,10 +14,10 @@ export interface Content {
 /** One operation of the API: what its route does, told to OpenAPI and to the page in one place. */
 export interface Operation {
   id: string;
-  method: 'get' | 'post' | 'put';
+  method: 'get' | 'post' | 'put' | 'delete';
   /** Below /api/v1, as OpenAPI writes it: `/reports/{id}`. */
   path: string;
-  part: 'Team' | 'Reports' | 'Datasets' | 'Diagnoses' | 'Sweeps' | 'Maps of sites' | 'Devices';
+  part: 'Team' | 'Reports' | 'Datasets' | 'Diagnoses' | 'Sweeps' | 'Maps of sites' | 'Devices' | 'Webhooks';
   /** A verb and its object. */
   summary: string;
   about?: string;

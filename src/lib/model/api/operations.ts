@@ -5,6 +5,7 @@ import { DIAGNOSIS_OPERATIONS } from './operations/diagnoses';
 import { REPORT_OPERATIONS } from './operations/reports';
 import { SITE_MAP_OPERATIONS } from './operations/site-maps';
 import { SWEEP_OPERATIONS } from './operations/sweeps';
+import { WEBHOOK_OPERATIONS } from './operations/webhooks';
 import { teamSchema } from './shapes/team';
 
 /** Every operation of /api/v1, in the order of its page. */
@@ -27,5 +28,6 @@ export const OPERATIONS: Operation[] = [
   ...REPORT_OPERATIONS,
   ...SWEEP_OPERATIONS,
   ...SITE_MAP_OPERATIONS,
-  ...DEVICE_OPERATIONS
+  ...DEVICE_OPERATIONS,
+  ...WEBHOOK_OPERATIONS
 ];

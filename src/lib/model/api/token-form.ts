@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { ROLES } from '../team/roles';
-import { SCOPES, SCOPES_OF_ROLE } from './scopes';
+import { SCOPE_WORDS, SCOPES, SCOPES_OF_ROLE } from './scopes';
 
 /** Longest life of a token, days. */
 export const LONGEST_LIFE = 365;
@@ -27,7 +27,7 @@ export const tokenFormSchema = z
       context.addIssue({
         code: 'custom',
         path: ['scopes'],
-        message: `An ${role} may not ${useless.join(' or ')}: choose another role, or leave it out.`
+        message: `An ${role} may not ${useless.map((scope) => SCOPE_WORDS[scope]).join(' or ')}: choose another role, or leave it out.`
       });
   });
 

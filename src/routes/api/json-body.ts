@@ -1,0 +1,25 @@
+import type { z } from 'zod';
+import type { Problem } from '../problem';
+import { faults } from './answers';
+
+/** The body of a POST as JSON of a schema, or why it is not. */
+export function jsonBody<Shape extends z.ZodType>(
+  bytes: Uint8Array,
+  type: string,
+  schema: Shape
+): { ok: true; data: z.output<Shape> } | { ok: false; refused: Problem } {
+  const refuse = (refused: Problem) => ({ ok: false, refused }) as const;
+  if (type !== 'application/json')
+    return refuse({ status: 415, code: 'wrong-type', title: 'Send JSON, as application/json.' });
+  let given: unknown;
+  try {
+    given = JSON.parse(new TextDecoder('utf-8', { fatal: true }).decode(bytes));
+  } catch {
+    return refuse({ status: 400, code: 'bad-json', title: 'The body is not JSON.' });
+  }
+  const read = schema.safeParse(given);
+  if (read.success) return { ok: true, data: read.data };
+  const list = read.error.issues.map(({ path, message }) => ({ at: path.join('.'), message }));
+  const title = 'Some of that does not fit. Nothing was done.';
+  return refuse({ status: 422, code: 'bad-input', title, ...faults(list) });
+}
