@@ -11,6 +11,7 @@ import { join, resolve } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { demoWords } from './start/demo-words';
 import { listen } from './start/listen';
+import { nameOrigin } from './start/name-origin';
 import { refuseForm } from './start/refuse-form';
 import { stopCleanly } from './start/stop-cleanly';
 
@@ -49,6 +50,7 @@ async function start(): Promise<void> {
     : SECURITY_HEADERS;
   answer = (request, response) => {
     for (const [name, value] of Object.entries(headers)) response.setHeader(name, value);
+    nameOrigin(request, address);
     if (!refuseForm(request, response)) handler(request, response);
   };
 

@@ -7,6 +7,7 @@ import { saveReportAndSweep } from './services/demo-team/save-report-and-sweep';
 import { nameKnownDevices } from './services/devices/name-known-devices';
 import { gatesAfterDiagnosis } from './services/gates/gates-after-diagnosis';
 import { seedSamples } from './services/seed-samples';
+import { startWatches } from './services/watches/start-watches';
 import { startDeliveries } from './services/webhooks/start-deliveries';
 import { webhookSettings } from './services/webhooks/webhook-settings';
 
@@ -31,10 +32,16 @@ export function database(): Database {
     decideGates(report.datasetId);
     return saved;
   });
-  const stopDeliveries = startDeliveries(db, webhookSettings());
+  const env = readEnv();
+  const hooks = webhookSettings();
+  // start.ts writes the address down before this is loaded; without it this is the server of `npm run dev`.
+  const origin = env.ORIGIN ?? 'http://localhost:5173';
+  const stopDeliveries = startDeliveries(db, hooks, origin);
+  const stopWatches = startWatches(db, { origin, serverSecret: hooks.serverSecret, hour: env.DIGEST_HOUR });
   process.once('sveltekit:shutdown', () => {
     clearInterval(daily);
     stopDeliveries();
+    stopWatches();
     void stopRunner();
     db.$client.close();
     open = null;

@@ -39,6 +39,8 @@ const shape = z.object({
   SEVERALTY_DEMO: z.enum(['yes', 'no']).default('yes'),
   /** Whether webhooks may reach loopback and private networks. */
   WEBHOOKS_INSIDE: z.enum(['yes', 'no']).default('no'),
+  /** Hour, UTC, at which daily mail goes out. */
+  DIGEST_HOUR: z.coerce.number().int().min(0).max(23).default(7),
   /** Set by npm: the script that it runs. */
   npm_lifecycle_event: z.string().optional()
 });

@@ -19,6 +19,7 @@ import { saveReport } from '$lib/server/services/reports/save-report';
 import { asc, eq, inArray } from 'drizzle-orm';
 import { diagnoseNine, plainLink } from '../../support/links';
 import { hookOf } from '../../support/webhooks';
+import { unsubscribing } from './unsubscribing';
 import { withDatabaseOf } from './seed-people';
 import type { RunningServer } from './start-server';
 
@@ -125,6 +126,8 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       '/api': ['/api'],
       '/(account)/teams': ['/teams'],
       '/(account)/account': ['/account'],
+      '/(account)/account/mail': ['/account/mail'],
+      '/unsubscribe/[token]': unsubscribing(db, server, actor),
       '/(account)/sign-in': ['/sign-in'],
       '/(account)/sign-in/by-mail': ['/sign-in/by-mail'],
       '/(account)/sign-in/mailed': [`/sign-in/mailed?token=${mailed('sign-in')}`, '/sign-in/mailed?token=no'],

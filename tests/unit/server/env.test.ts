@@ -11,7 +11,8 @@ describe('readEnv', () => {
       MAIL_FROM: 'Severalty <severalty@localhost>',
       OIDC_NAME: 'your institution',
       SEVERALTY_DEMO: 'yes',
-      WEBHOOKS_INSIDE: 'no'
+      WEBHOOKS_INSIDE: 'no',
+      DIGEST_HOUR: 7
     });
   });
 

@@ -10,6 +10,8 @@ export interface Message {
   subject: string;
   /** Plain text, lines of any length. */
   text: string;
+  /** Address that ends such mail, for the reader's program to offer. */
+  unsubscribe?: string;
 }
 
 export type SendMail =
@@ -40,7 +42,8 @@ export async function sendMail(
       from: env.MAIL_FROM,
       to: { name: '', address: oneLine(to) },
       subject,
-      text
+      text,
+      ...(message.unsubscribe ? { headers: unsubscribing(message.unsubscribe) } : {})
     });
     return { ok: true };
   } catch (error) {
@@ -50,6 +53,12 @@ export async function sendMail(
     return { ok: false, reason: 'not-sent' };
   }
 }
+
+/** RFC 2369, and RFC 8058: one click, which takes an address with https. */
+const unsubscribing = (address: string): Record<string, string> => ({
+  'List-Unsubscribe': `<${address}>`,
+  ...(address.startsWith('https:') ? { 'List-Unsubscribe-Post': 'List-Unsubscribe=One-Click' } : {})
+});
 
 /** Names and subjects come from people: a line end in one would begin a header of their choosing. */
 const oneLine = (text: string) =>

@@ -25,6 +25,20 @@ describe('sendMail', () => {
     expect(db.select().from(outboxMessage).all()).toEqual([]);
   });
 
+  it('offers an address that ends such mail, by one click where it has https', async () => {
+    const list = async (unsubscribe: string) => {
+      const to = `${unsubscribe.length}@example.org`;
+      await sendMail(freshDatabase(), { ...letter, to, unsubscribe }, through(mail.url));
+      const { headerLines } = await mail.to(to);
+      return headerLines.filter(({ key }) => key.startsWith('list-')).map(({ line }) => line);
+    };
+    expect(await list('https://counts.example/unsubscribe/x')).toEqual([
+      'List-Unsubscribe: <https://counts.example/unsubscribe/x>',
+      'List-Unsubscribe-Post: List-Unsubscribe=One-Click'
+    ]);
+    expect(await list('http://localhost:1/u')).toEqual(['List-Unsubscribe: <http://localhost:1/u>']);
+  });
+
   it.each([
     ['subject', { subject: 'Counts\r\nBcc: thief@example.org\r\n\r\nBody' }],
     ['address', { to: 'ada@example.org\r\nBcc: thief@example.org' }],

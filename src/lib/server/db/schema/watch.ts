@@ -13,13 +13,13 @@ export const watch = sqliteTable(
     teamId: text('team_id')
       .notNull()
       .references(() => team.id, { onDelete: 'cascade' }),
-    /** `gate-fail`, `remark`, `job-end`, as a JSON list. */
+    /** JSON: `gate-fail`, `remark`, `job-end`, each with the last event before it was chosen. */
     about: text('about').notNull(),
     /** At once, or one mail a day. */
     rhythm: text('rhythm', { enum: ['at-once', 'daily'] }).notNull(),
     /** Last row of `event` that this person was told of. */
     lastEvent: integer('last_event').notNull(),
-    /** When the last daily mail went out; null before the first. */
+    /** When the last mail went out; null before the first. */
     lastDigestAt: time('last_digest_at'),
     updatedAt: time('updated_at').notNull()
   },

@@ -82,8 +82,11 @@ export function listEvents(
 /** Links are made and revoked by members, who are named; everything else with a link came through it. */
 const cameByLink = (action: string) => !action.startsWith('link.');
 
-/** A link that is gone cannot say any more whether it hid its referees, so it is taken to have. */
-function nameOf(
+/**
+ * How who did something is called, as far as the team may know; null for the program itself. A link that is gone cannot
+ * say any more whether it hid its referees, so it is taken to have.
+ */
+export function nameOf(
   action: string,
   by: {
     name: string | null;

@@ -1,6 +1,7 @@
 import { and, asc, eq, isNull, ne, or, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { dataset, link, membership, person, remark, report, team } from '../../db/schema';
+import { watchesRemarks } from '../watches/watches-remarks';
 import { isDue } from './is-due';
 
 /** A remark as the mail about it needs it. */
@@ -26,6 +27,8 @@ export interface Reader {
 /**
  * Whom a new remark concerns: the maker of the report while a member, and the earlier authors of the thread, members
  * while they are, others while their link is open. Each once, never the author, nobody who is disabled.
+ *
+ * Members who watch the remarks of the team are mailed by their watch, and not twice.
  *
  * Of remarks by a link the maker hears once an hour, and the authors of a thread once an hour about it: whoever has an
  * open link must not fill their mail.
@@ -64,7 +67,9 @@ export function readersOf(
 
   const readers = new Map<string, Reader>();
   const add = (id: string | null, reader: Reader | undefined): void => {
-    if (id !== null && id !== personId && reader && !readers.has(id)) readers.set(id, reader);
+    if (id === null || id === personId || !reader || readers.has(id)) return;
+    if (reader.member && watchesRemarks(db, id, teamId)) return;
+    readers.set(id, reader);
   };
   const asMember = (id: string | null): Reader | undefined => {
     if (id === null) return undefined;

@@ -1,6 +1,6 @@
 import { and, eq } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { membership } from '../../db/schema';
+import { membership, watch } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { recordEvent } from '../events/record-event';
@@ -24,6 +24,10 @@ export function removeMember(db: Database, actor: Actor, personId: string, now =
       if (!before) return { ok: false, reason: 'unknown' };
       const { changes } = tx.delete(membership).where(and(theirs, anotherLead())).run();
       if (changes === 0) return { ok: false, reason: 'last-lead' };
+      // Who comes back some day is not mailed what happened meanwhile.
+      tx.delete(watch)
+        .where(and(eq(watch.personId, personId), eq(watch.teamId, actor.teamId)))
+        .run();
       recordEvent(
         tx,
         {

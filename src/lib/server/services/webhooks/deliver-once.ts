@@ -14,13 +14,15 @@ const AT_ONCE = 8;
  * Gathers what happened and sends all that is due, several webhooks at a time, each in order.
  *
  * @param stopped asked before each message
+ * @param onRest told of a webhook that was put to rest
  * @returns how many attempts were made
  */
 export async function deliverOnce(
   db: Database,
   { serverSecret, allowInner }: WebhookSettings,
   stopped: () => boolean = () => false,
-  clock: () => number = Date.now
+  clock: () => number = Date.now,
+  onRest: (webhookId: string) => void = () => {}
 ): Promise<number> {
   gatherDeliveries(db, clock());
   let attempts = 0;
@@ -31,7 +33,7 @@ export async function deliverOnce(
       attempts += 1;
       const sent = await attempt(claimed);
       if (stopped()) return;
-      settleDelivery(db, claimed, sent, clock());
+      if (settleDelivery(db, claimed, sent, clock())) onRest(claimed.webhookId);
     }
   };
   const attempt = ({ id, webhookId, body, url, sealedSecret }: ClaimedDelivery): Promise<Sent> | Sent => {

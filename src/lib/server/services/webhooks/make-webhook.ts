@@ -10,7 +10,7 @@ import { mayWhere } from '../access/may-where';
 import { recordEvent } from '../events/record-event';
 import { scriptOf } from '../access/script-of';
 import { isInnerAddress } from './is-inner-address';
-import { newestEvent } from './newest-event';
+import { newestEvent } from '../events/newest-event';
 import { sealSecret } from './seal-secret';
 import { SECRET_PREFIX } from './sign-message';
 

@@ -5,7 +5,7 @@ import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { scriptOf } from '../access/script-of';
 import { recordEvent } from '../events/record-event';
-import { newestEvent } from './newest-event';
+import { newestEvent } from '../events/newest-event';
 
 export type RestedWebhook =
   /** `changed`: false when it rested, or was awake, before. */

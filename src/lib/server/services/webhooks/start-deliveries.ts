@@ -1,6 +1,7 @@
 import type { Database } from '../../db/client';
 import { log } from '../../log';
 import { deliverOnce } from './deliver-once';
+import { mailRested } from './mail-rested';
 import type { WebhookSettings } from './make-webhook';
 import { purgeDeliveries } from './purge-deliveries';
 
@@ -12,9 +13,10 @@ const HOUR = 3_600_000;
  * Starts sending messages of webhooks in this process. What a server that is gone had not sent, or had not noted as
  * sent, is taken up again.
  *
+ * @param origin address of the application, for links in mail
  * @returns ends it; the database may be closed as soon as that returns
  */
-export function startDeliveries(db: Database, settings: WebhookSettings): () => void {
+export function startDeliveries(db: Database, settings: WebhookSettings, origin: string): () => void {
   let stopped = false;
   let busy = false;
   let purged = 0;
@@ -22,7 +24,13 @@ export function startDeliveries(db: Database, settings: WebhookSettings): () => 
     if (busy || stopped) return;
     busy = true;
     try {
-      await deliverOnce(db, settings, () => stopped);
+      await deliverOnce(
+        db,
+        settings,
+        () => stopped,
+        Date.now,
+        (id) => void mailRested(db, id, origin)
+      );
       if (!stopped && Math.abs(Date.now() - purged) > HOUR) {
         purgeDeliveries(db);
         purged = Date.now();

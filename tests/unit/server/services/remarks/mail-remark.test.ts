@@ -1,6 +1,7 @@
 import { link, membership, person } from '$lib/server/db/schema';
 import { addRemark } from '$lib/server/services/remarks/add-remark';
 import { mailRemark } from '$lib/server/services/remarks/mail-remark';
+import { saveWatch } from '$lib/server/services/watches/save-watch';
 import { eq } from 'drizzle-orm';
 import { describe, expect, it } from 'vitest';
 import { given, remarkSetting } from '../../../../support/remark-setting';
@@ -36,6 +37,17 @@ describe('mailRemark', () => {
     expect((await mailed(answer.id)).sent.map(({ to }) => to)).toEqual([emailOf(observer.personId)]);
     const third = given(addRemark(db, member(observer), say('I see.', first.threadId)));
     expect((await mailed(third.id)).sent.map(({ to }) => to)).toEqual([emailOf(maker.personId)]);
+  });
+
+  it('tells nobody whose watch on remarks tells them', async () => {
+    const { db, team, maker, observer, member, say, mailed } = await setting();
+    const first = given(addRemark(db, member(observer), say('x')));
+    const watch = (about: ('remark' | 'gate-fail')[]) =>
+      saveWatch(db, maker.personId, team.slug, { about, rhythm: 'daily' });
+    watch(['gate-fail']);
+    expect((await mailed(first.id)).sent).toHaveLength(1);
+    watch(['remark']);
+    expect((await mailed(first.id)).sent).toEqual([]);
   });
 
   it('tells nobody who left, nobody disabled, and says how many messages did not go', async () => {
