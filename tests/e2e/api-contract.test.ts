@@ -4,7 +4,7 @@ import { SCOPES } from '$lib/model/api/scopes';
 import type { Actor } from '$lib/server/services/access/actor';
 import Ajv2020 from 'ajv/dist/2020.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { hookOf } from '../support/webhooks';
+import { HOOK_BODY, hookOf } from '../support/webhooks';
 import { ask, CSV_TYPE, JSON_TYPE, seedToken } from './support/api';
 import { seedGate } from './support/seed-gate';
 import { seedPerson, seedTeam, withDatabaseOf } from './support/seed-people';
@@ -105,12 +105,7 @@ const bodiesFor = (swept: string[]): Record<string, Sent[]> => ({
   uploadSites: [{ body: 'a,b,c\n0,1,1\n1,1,0\n0,0,0\n', headers: CSV_TYPE }],
   askForDiagnosis: [{ body: JSON.stringify({ resamples: 19, seed: 3 }), headers: JSON_TYPE }],
   makeSweep: [{ body: JSON.stringify({ datasets: swept, axis: 'quench-time' }), headers: JSON_TYPE }],
-  makeWebhook: [
-    {
-      body: JSON.stringify({ name: 'H', url: 'https://example.org/hook', actions: ['gate.fail'] }),
-      headers: JSON_TYPE
-    }
-  ]
+  makeWebhook: [{ body: HOOK_BODY, headers: JSON_TYPE }]
 });
 
 function check(

@@ -10,6 +10,13 @@ export const HOOK_SETTINGS = {
   allowInner: true
 };
 
+/** What a script sends to make a webhook. */
+export const HOOK_BODY = JSON.stringify({
+  name: 'H',
+  url: 'https://example.org/hook',
+  actions: ['gate.fail']
+});
+
 /** A webhook of the actor's team that is told of failed gates and of remarks. */
 export function madeWebhook(
   db: Database,
