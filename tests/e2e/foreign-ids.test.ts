@@ -198,6 +198,8 @@ describe("another team's ids", () => {
       null
     );
     expect(compared.status).toBe(404);
+    const maps = await knock(`${own}/sites/compare?a=${foreign.map}&b=${foreign.map}`, 'GET', null);
+    expect(maps.status).toBe(404);
     const statuses = await knock(
       `${own}/jobs/statuses?job=${foreign.job}&dataset=${foreign.dataset}`,
       'GET',

@@ -1,14 +1,10 @@
 import { formatCount } from '$lib/model/format-number';
 import type { MappedPair, SitesReport } from '$lib/stats/sites/sites-types';
-import { scaleLinear } from 'd3-scale';
-import { bottomAxis, leftAxis } from './axis-marks';
-import { frameOf } from './frame-of';
-import type { LegendEntry, Mark, Picture, Point, Role, Size } from './picture';
+import { pairLayout } from './pair-layout';
+import type { LegendEntry, Mark, Picture, Role, Size } from './picture';
 import { pointPath, type Shape } from './point-path';
-import { roomyTicks } from './roomy-ticks';
 import { siteMapKinds, type DrawnPairs, type PairKind } from './site-map-kinds';
 import { sitePairWords } from './site-pair-words';
-import { tickTexts } from './tick-texts';
 
 const LOOKS: Record<PairKind, { role: Role; shape: Shape; label: string }> = {
   above: { role: 'observed', shape: 'dot', label: 'not found; its own 95 % interval is above 0' },
@@ -27,20 +23,9 @@ const LOOKS: Record<PairKind, { role: Role; shape: Shape; label: string }> = {
  * the foot. Only pairs that say something by themselves are drawn, larger ones with the stronger correlation.
  */
 export function siteMapPicture(map: SitesReport, { width, text }: Size): Picture {
-  const height = Math.min(460, Math.max(280, width * 0.58));
-  const frame = frameOf(width, height, {
-    left: text * 3.2,
-    right: text * 1.8,
-    top: text * 2.2,
-    bottom: text * 3.8
-  });
-  const sites = map.names.length;
-  const furthest = map.geometry === 'ring' ? Math.floor(sites / 2) : sites - 1;
-  const x = scaleLinear([0.5, sites + 0.5], [frame.left, frame.right]);
-  const y = scaleLinear([0, furthest + 1], [frame.bottom, frame.top]);
+  const { height, at, back, front } = pairLayout(map, { width, text });
   const drawn = siteMapKinds(map);
   const strongest = Math.max(...drawn.kinds.map(({ pair }) => Math.abs(pair.correlation ?? 0)), 1e-9);
-  const at = (pair: MappedPair): Point => [x(middleOf(pair, sites)), y(pair.distance)];
   const size = ({ correlation }: MappedPair) => 3 + 4 * Math.sqrt(Math.abs(correlation ?? 0) / strongest);
   const of = (kind: PairKind): Mark[] => {
     const { role, shape } = LOOKS[kind];
@@ -52,29 +37,11 @@ export function siteMapPicture(map: SitesReport, { width, text }: Size): Picture
     return d ? [{ kind: 'path', role, d }] : [];
   };
   const kinds = Object.keys(LOOKS) as PairKind[];
-  const points = kinds.flatMap(of);
-  const steps = y.ticks(5).filter((value) => Number.isInteger(value) && value >= 1);
-  const texts = tickTexts(steps);
   return {
     width,
     height,
     build: 'field',
-    marks: [
-      ...leftAxis(
-        frame,
-        steps.map((value, i) => ({ at: y(value), text: texts[i] })),
-        'distance, sites',
-        text
-      ),
-      ...edge(map, [x, y]),
-      ...points,
-      ...bottomAxis(
-        frame,
-        roomyTicks(x, text, (value) => Number.isInteger(value) && value >= 1 && value <= sites),
-        'middle of the two sites',
-        text
-      )
-    ],
+    marks: [...back, ...kinds.flatMap(of), ...front],
     legend: kinds.flatMap((kind): LegendEntry[] =>
       drawn.kinds.some((one) => one.kind === kind)
         ? [{ role: LOOKS[kind].role, label: LOOKS[kind].label, bare: true }]
@@ -86,26 +53,6 @@ export function siteMapPicture(map: SitesReport, { width, text }: Size): Picture
       .sort((a, b) => a.x - b.x || b.y - a.y),
     notes: notesOf(map, drawn)
   };
-}
-
-/** Along a chain the middle of a distant pair is far from the ends: no pair lies outside these lines. */
-function edge(
-  { names, geometry }: SitesReport,
-  [x, y]: [(value: number) => number, (value: number) => number]
-): Mark[] {
-  if (geometry === 'ring') return [];
-  const sites = names.length;
-  const corners: Point[] = [[1, 0], [(sites + 1) / 2, sites - 1], [sites, 0]]; // prettier-ignore
-  const d = corners.map(([at, up], i) => `${i ? 'L' : 'M'}${x(at).toFixed(2)},${y(up).toFixed(2)}`).join('');
-  return [{ kind: 'path', role: 'level', d }];
-}
-
-/** Between the two sites, from 1; on a ring along the shorter way. */
-function middleOf({ first, second, distance }: MappedPair, sites: number): number {
-  const middle = (first + second) / 2 + 1;
-  if (second - first === distance) return middle;
-  const across = middle + sites / 2;
-  return across >= sites + 0.5 ? across - sites : across;
 }
 
 function notesOf({ pairs }: SitesReport, { kinds, left, unknown }: DrawnPairs): string[] {

@@ -1,4 +1,5 @@
 import { formatCount } from '$lib/model/format-number';
+import type { MapsComparedReport } from '$lib/stats/sites/maps-compared';
 import type { SitesReport } from '$lib/stats/sites/sites-types';
 
 /** What the map of pairs shows, in one line. */
@@ -21,4 +22,16 @@ export function siteDistanceTitle({ byDistance }: Pick<SitesReport, 'byDistance'
   const first = away.map(({ distance }) => distance).includes(1);
   const by = Math.max(1, Math.round(known.length / 20));
   return `The mean correlation leaves 0 at ${formatCount(away.length)} of ${formatCount(known.length)} distances${first ? ', neighbours among them' : ''}; about ${formatCount(by)} would by chance alone`;
+}
+
+/** Which pairs changed between two maps, in one line. */
+export function siteChangeTitle({ names, pairs, alpha, common }: MapsComparedReport): string {
+  const changed = pairs.filter(({ pHolm }) => pHolm <= alpha);
+  const all = formatCount(pairs.length);
+  if (common) return 'All sites move together in a map: no change of a pair can be read by itself';
+  if (changed.length === 0) return `No pair of ${all} is seen to have changed`;
+  if (changed.length > 1)
+    return `${formatCount(changed.length)} pairs of ${all} changed by more than chance allows`;
+  const [{ first, second }] = changed;
+  return `One pair of ${all} changed by more than chance allows: sites ${names[first]} and ${names[second]}`;
 }

@@ -65,7 +65,15 @@ export function timelinePicture(
         text,
         exponent
       ),
-      ...path('horizon', compared ? `M${x(compared.at).toFixed(2)},${frame.bottom}V${frame.top}` : ''),
+      ...path(
+        'level',
+        // Beside the reference and not through it: a line there would look like an interval.
+        compared
+          ? [compared.at - 0.5, compared.at + 0.5]
+              .map((side) => `M${x(side).toFixed(2)},${frame.bottom}V${frame.top}`)
+              .join('')
+          : ''
+      ),
       ...path('limit', steps.join('')),
       ...marks,
       ...bottomAxis(
@@ -87,7 +95,9 @@ export function timelinePicture(
       ...(steps.length > 0
         ? [{ role: 'limit' as const, label: 'limits that hold 99.73 % of versions like the reference' }]
         : []),
-      ...(compared ? [{ role: 'horizon' as const, label: `reference, ${compared.version}` }] : [])
+      ...(compared
+        ? [{ role: 'level' as const, label: `the reference between them, ${compared.version}` }]
+        : [])
     ],
     order: 'across',
     readings: known.map(({ version, shots, at, value, low, high, limits }) => ({

@@ -17,8 +17,10 @@ export function timelineTitle(
   if (limited.length === 0) return capital(`${name}, version by version`);
   const above = limited.filter(({ value, limits }) => value > limits[1]).length;
   const below = limited.filter(({ value, limits }) => value < limits[0]).length;
-  const of = `of ${formatCount(limited.length)} versions beside ${reference}`;
-  if (above + below === 0) return `The ${name} stays within its limits in all ${of.slice(3)}`;
+  const one = limited.length === 1;
+  const of = `of ${formatCount(limited.length)} ${one ? 'version' : 'versions'} beside ${reference}`;
+  if (above + below === 0)
+    return `The ${name} stays within its limits in ${one ? `the one version beside ${reference}` : `all ${of.slice(3)}`}`;
   const parts = [
     ...(above > 0 ? [`rises above its limits in ${formatCount(above)}`] : []),
     ...(below > 0 ? [`falls below them in ${formatCount(below)}`] : [])

@@ -63,7 +63,12 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       .all();
     const bunched = reports.find(({ name }) => /bunch/i.test(name)) ?? reports[0];
     const swept = db.select({ id: sweep.id }).from(sweep).where(eq(sweep.teamId, ours.id)).get()!;
-    const mapped = db.select({ id: siteMap.id }).from(siteMap).where(eq(siteMap.teamId, ours.id)).get()!;
+    const [before, mapped] = db
+      .select({ id: siteMap.id })
+      .from(siteMap)
+      .where(eq(siteMap.teamId, ours.id))
+      .orderBy(asc(siteMap.createdAt))
+      .all();
     const { datasetId } = bunched;
     const second = db.transaction((tx) =>
       saveReport(tx, { teamId: ours.id, datasetId, createdBy: lead.id, document, options })
@@ -158,6 +163,10 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       ],
       '/(team)/team/[team=slug]/sites': [`${root}/sites`],
       '/(team)/team/[team=slug]/sites/new': [`${root}/sites/new`],
+      '/(team)/team/[team=slug]/sites/compare': [
+        `${root}/sites/compare?a=${before.id}&b=${mapped.id}`,
+        `${root}/sites/compare?a=${mapped.id}&b=${mapped.id}`
+      ],
       '/(team)/team/[team=slug]/sites/[id]': [`${root}/sites/${mapped.id}`],
       '/(team)/team/[team=slug]/settings': [`${root}/settings`],
       '/(team)/team/[team=slug]/scripts': [`${root}/scripts`],

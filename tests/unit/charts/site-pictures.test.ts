@@ -1,3 +1,5 @@
+import { siteChangePicture } from '$lib/charts/site-change-picture';
+import { siteChangeTable } from '$lib/charts/site-change-table';
 import { siteDistancePicture } from '$lib/charts/site-distance-picture';
 import { siteMapKinds } from '$lib/charts/site-map-kinds';
 import { siteMapPicture } from '$lib/charts/site-map-picture';
@@ -6,6 +8,7 @@ import { siteDistanceTitle, siteMapTitle } from '$lib/charts/site-map-titles';
 import { readSites } from '$lib/formats/sites/read-sites';
 import { oneCrosstalkingPair } from '$lib/stats/demo/one-crosstalking-pair';
 import { generator } from '$lib/stats/random/generator';
+import { mapsCompared } from '$lib/stats/sites/maps-compared';
 import { sitesReport } from '$lib/stats/sites/sites-report';
 import type { SitesOptions, SitesReport } from '$lib/stats/sites/sites-types';
 import { describe, expect, it } from 'vitest';
@@ -95,5 +98,23 @@ describe('a map of sites', () => {
     const { readings } = siteMapPicture(map, { width: 760, text: 13 });
     const at = readings.find(({ words }) => words().startsWith('Sites 1 and 9'))!;
     expect(at.x).toBeCloseTo(3.2 * 13, 6);
+  });
+});
+
+describe('a comparison of two maps', () => {
+  it.each<[string, () => SitesReport, () => SitesReport]>([
+    ['two sites', () => mapOf(2, 40, () => 0.5), () => mapOf(2, 90, () => 0.2)],
+    [
+      'a ring',
+      () => mapOf(9, 400, () => 0.3, { geometry: 'ring' }),
+      () => mapOf(9, 100, () => 0.3, { geometry: 'ring' })
+    ],
+    ['sites that never change', () => mapOf(5, 20, () => 0), () => mapOf(5, 20, () => 0.5)],
+    ['drifting sites', () => drifting(24), () => mapOf(24, 600, () => 0.3)]
+  ])('of %s is finite and inside its frame', (_name, before, after) => {
+    const compared = mapsCompared(before(), after());
+    for (const width of [260, 342, 760, 1400])
+      expect(faults(siteChangePicture(compared, { width, text: 13 })), `${width}`).toEqual([]);
+    expect(siteChangeTable(compared).rows).toHaveLength(compared.pairs.length);
   });
 });

@@ -94,14 +94,14 @@ describe('the timeline of a group', () => {
     const { marks } = timelinePicture(drawn, 'dispersion', { width: 760, text: 13 });
     const roles = marks.flatMap((mark) => (mark.kind === 'path' ? [mark.role] : []));
     expect(roles).toEqual(
-      expect.arrayContaining(['observed', 'observed-more', 'observed-fewer', 'limit', 'horizon'])
+      expect.arrayContaining(['observed', 'observed-more', 'observed-fewer', 'limit', 'level'])
     );
     expect(timelineTitle(drawn, 'dispersion')).toBe(
       'The variance over ceiling of q1 rises above its limits in 1 and falls below them in 1 of 3 versions beside a'
     );
     const quiet = { ...drawn, points: drawn.points.slice(0, 2) };
     expect(timelineTitle(quiet, 'dispersion')).toBe(
-      'The variance over ceiling of q1 stays within its limits in all 1 versions beside a'
+      'The variance over ceiling of q1 stays within its limits in the one version beside a'
     );
   });
 

@@ -1,5 +1,3 @@
-import { logChoose } from '../numerics/log-choose';
-
 /** One pair of sites in one map: shots on which both, the first, and the second were excited, of all. */
 export interface PairTable {
   both: number;
@@ -27,13 +25,14 @@ export function logChangeP(earlier: PairTable, later: PairTable, seek: 'any' | '
   const most = (of: PairTable) => Math.min(of.first, of.second);
   const from = Math.max(least(later), total - most(earlier));
   const to = Math.min(most(later), total - least(earlier));
-  const logWeight = (of: PairTable, k: number) =>
-    logChoose(of.first, k) + logChoose(of.shots - of.first, of.second - k);
-  const weights = Array.from(
-    { length: to - from + 1 },
-    (_, i) => logWeight(later, from + i) + logWeight(earlier, total - from - i)
-  );
-  const peak = Math.max(...weights);
+  // The next split over this one, in each map: much quicker than eight binomial coefficients a split.
+  const up = ({ first, second, shots }: PairTable, k: number) =>
+    ((first - k) * (second - k)) / ((k + 1) * (shots - first - second + k + 1));
+  const weights = new Float64Array(to - from + 1);
+  for (let k = from; k < to; k++)
+    weights[k - from + 1] = weights[k - from] + Math.log(up(later, k)) - Math.log(up(earlier, total - k - 1));
+  let peak = -Infinity;
+  for (const weight of weights) peak = Math.max(peak, weight);
   const observed = weights[later.both - from];
   let all = 0;
   let tail = 0;

@@ -5,15 +5,40 @@ import { enqueueJobs } from '../jobs/enqueue-jobs';
 import { readSiteMap } from '../site-maps/read-site-map';
 import { saveSiteMap } from '../site-maps/save-site-map';
 
-/** The invented team's map of sites, one crosstalking pair of 64; the counts of its shots are diagnosed like any other. */
+/**
+ * Two maps of the invented team, to be compared: 64 sites without crosstalk, and with one crosstalking pair. The counts of
+ * their shots are diagnosed like any other.
+ */
 export function seedDemoMap(db: Database, actor: Actor, now: number): void {
+  seedOne(
+    db,
+    actor,
+    { name: 'Wrack, invented: before, no pair', fileName: 'no-pair.txt' },
+    oneCrosstalkingPair(200, 2),
+    now
+  );
+  seedOne(
+    db,
+    actor,
+    { name: 'Wrack, invented: one pair of 64', fileName: 'one-pair.txt' },
+    oneCrosstalkingPair(),
+    now + 1
+  );
+}
+
+function seedOne(
+  db: Database,
+  actor: Actor,
+  named: { name: string; fileName: string },
+  text: string,
+  now: number
+): void {
   const saved = saveSiteMap(
     db,
     actor,
     {
-      fileName: 'one-pair.txt',
-      bytes: new TextEncoder().encode(oneCrosstalkingPair()),
-      name: 'Wrack, invented: one pair of 64',
+      ...named,
+      bytes: new TextEncoder().encode(text),
       options: { geometry: 'chain', alpha: 0.05, seek: 'rise' },
       device: null,
       firmware: null,

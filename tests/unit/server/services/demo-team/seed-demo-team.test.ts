@@ -25,14 +25,14 @@ describe('seedDemoTeam', () => {
       ).size
     ).toBe(3);
     const datasets = db.select().from(dataset).all();
-    // Eight single ones, six ramps, four firmware versions, and the counts of a map of sites.
-    expect(datasets).toHaveLength(19);
+    // Eight single ones, six ramps, four firmware versions, and the counts of two maps of sites.
+    expect(datasets).toHaveLength(20);
     expect(datasets.filter(({ name }) => name.startsWith('Wrack, invented: one pair of 64'))).toHaveLength(1);
     for (const { notes } of datasets.filter(({ part }) => part !== 'excited sites'))
       expect(notes).toMatch(/^Invented example/);
     expect(datasets.filter(({ firmware }) => firmware !== null)).toHaveLength(4);
     expect(datasets.filter(({ quenchTime }) => quenchTime !== null)).toHaveLength(6);
-    expect(db.select().from(job).all()).toHaveLength(19);
+    expect(db.select().from(job).all()).toHaveLength(20);
     const [{ passwordHash }] = db.select().from(person).all();
     expect(await passwordFits(passwordHash, DEMO_PASSWORD)).toBe(true);
   });

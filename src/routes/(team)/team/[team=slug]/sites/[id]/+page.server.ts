@@ -1,4 +1,5 @@
 import { can } from '$lib/server/access/can';
+import { comparableMaps } from '$lib/server/services/site-maps/comparable-maps';
 import { openSiteMap } from '$lib/server/services/site-maps/open-site-map';
 import { putSiteMapAside } from '$lib/server/services/site-maps/put-site-map-aside';
 import { error, redirect } from '@sveltejs/kit';
@@ -15,6 +16,7 @@ export const load: PageServerLoad = (event) => {
   return {
     map,
     document,
+    others: comparableMaps(event.locals.db, actor, map),
     mayPutAside: can({ kind: 'member', ...actor }, 'delete', { createdBy: map.createdBy })
   };
 };
