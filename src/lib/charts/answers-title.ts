@@ -1,12 +1,21 @@
 import type { SweepReport } from '$lib/stats/sweep/types';
 import { answersAlong } from './answers-along';
+import type { Role } from './picture';
+
+const SAID: Partial<Record<Role, string>> = {
+  'observed-more': 'ruled out',
+  'observed-unsure': 'undecided',
+  observed: 'compatible'
+};
 
 /** How many of the datasets have which answer. */
 export function answersTitle(report: Pick<SweepReport, 'points'>): string {
-  const rows = answersAlong(report);
+  const rows = answersAlong(report).map(({ role, points }) => ({
+    words: SAID[role] ?? 'not diagnosed',
+    number: points.length
+  }));
   const all = report.points.length;
-  if (rows.length === 1) return `All ${all} datasets: ${lower(rows[0].words)}`;
-  return `Of ${all} datasets ${rows.map(({ words, points }) => `${points.length} ${lower(words)}`).join(', ')}`;
+  if (rows.every(({ words }) => words === 'not diagnosed'))
+    return `None of the ${all} datasets was diagnosed`;
+  return `Independent trials, of ${all} datasets: ${rows.map(({ words, number }) => `${words} in ${number}`).join(', ')}`;
 }
-
-const lower = (words: string): string => words[0].toLowerCase() + words.slice(1);

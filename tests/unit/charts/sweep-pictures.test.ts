@@ -95,9 +95,9 @@ describe('titles of a sweep', () => {
   });
 
   it('say how many of the datasets have which answer', () => {
-    expect(answersTitle({ points: [point(null), point(null)] })).toBe('All 2 datasets: not diagnosed');
+    expect(answersTitle({ points: [point(null), point(null)] })).toBe('None of the 2 datasets was diagnosed');
     expect(answersTitle({ points: [point('compatible'), point('ruled-out'), point(null)] })).toBe(
-      'Of 3 datasets 1 independent trials ruled out, 1 compatible with independent trials, 1 not diagnosed'
+      'Independent trials, of 3 datasets: ruled out in 1, compatible in 1, not diagnosed in 1'
     );
   });
 

@@ -9,7 +9,8 @@ export function sweepWords(found: Found): Pick<SweepReport, 'statement' | 'becau
   return { statement: statementOf(found), because: becauseOf(found), cautions: cautionsOf(found) };
 }
 
-const thinP = (p: number) => `p = ${formatNumber(p, 2)}`;
+/** A chance below what a number can hold is told as what it is below. */
+const thinP = (p: number) => (p === 0 ? 'p < 1e−300' : `p = ${formatNumber(p, 2)}`);
 
 function statementOf({ laws, alpha, points }: Found): string {
   const held = points.filter(({ inWindow, cumulants }) => inWindow && cumulants).length;
