@@ -1,7 +1,7 @@
 import { watchFormSchema } from '$lib/model/watches/watch-form';
-import { readEnv } from '$lib/server/env';
 import { account } from '$lib/server/services/accounts/account';
 import { waysIn } from '$lib/server/services/accounts/ways-in';
+import { digestHour } from '$lib/server/services/watches/digest-hour';
 import { myWatches } from '$lib/server/services/watches/my-watches';
 import { saveWatch } from '$lib/server/services/watches/save-watch';
 import { fail, redirect } from '@sveltejs/kit';
@@ -15,7 +15,7 @@ export const load: PageServerLoad = (event) => {
   return {
     email: mine.email,
     watches: myWatches(event.locals.db, id),
-    hour: readEnv().DIGEST_HOUR,
+    hour: digestHour(),
     mails: waysIn().mail
   };
 };
