@@ -1,5 +1,7 @@
 import { idempotentAnswer, webhook, webhookDelivery } from '$lib/server/db/schema';
 import type { Actor } from '$lib/server/services/access/actor';
+import { request } from 'node:http';
+import { gzipSync } from 'node:zlib';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { hookOf } from '../support/webhooks';
 import { ask, JSON_TYPE, seedToken } from './support/api';
@@ -74,6 +76,30 @@ describe('a webhook made by a script', () => {
     expect([broken.status, (await json(broken)).code]).toEqual([400, 'bad-json']);
     const typed = await post('/webhooks', JSON.stringify(HOOK), { 'content-type': 'text/csv' });
     expect([typed.status, (await json(typed)).code]).toEqual([415, 'wrong-type']);
+  });
+
+  it('is not made of a body that did not arrive whole, nor of one in gzip; its key is free afterwards', async () => {
+    const before = await howMany();
+    const body = JSON.stringify(HOOK);
+    const key = { 'idempotency-key': '"half-sent"' };
+    const headers = { ...JSON_TYPE, ...key, authorization: `Bearer ${token}` };
+    const half = request(`${server.address}/api/v1/webhooks`, {
+      method: 'POST',
+      headers: { ...headers, 'content-length': String(body.length) }
+    });
+    const broken = new Promise((resolve) => half.once('error', resolve).once('close', resolve));
+    half.write(body.slice(0, 40), () => half.destroy());
+    await broken;
+    const zipped = await ask(server, token, '/webhooks', {
+      method: 'POST',
+      body: gzipSync(body),
+      headers: { ...JSON_TYPE, 'content-encoding': 'gzip' }
+    });
+    expect([zipped.status, (await json(zipped)).code]).toEqual([400, 'bad-json']);
+    expect(await howMany()).toBe(before);
+    // The server learns of the broken connection a moment later; until then the key is busy.
+    await expect.poll(async () => (await make({}, key)).status, { timeout: 10_000 }).toBe(201);
+    expect(await howMany()).toBe(before + 1);
   });
 });
 
