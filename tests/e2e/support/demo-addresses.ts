@@ -152,6 +152,10 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       '/(team)/team/[team=slug]/devices': [`${root}/devices`],
       '/(team)/team/[team=slug]/devices/[id]': [`${root}/devices/${chain.deviceId}`],
       '/(team)/team/[team=slug]/devices/[id]/timeline': [`${root}/devices/${chain.deviceId}/timeline`],
+      '/(team)/team/[team=slug]/devices/[id]/pairs': [
+        `${root}/devices/${chain.deviceId}/pairs`,
+        `${root}/devices/${chain.deviceId}/pairs?version=${chain.id}`
+      ],
       '/(team)/team/[team=slug]/devices/[id]/versions/[version]': [
         `${root}/devices/${chain.deviceId}/versions/${chain.id}`
       ],

@@ -7,7 +7,7 @@ export interface ChangePower {
   change: number;
   /** About the chance that neighbours so changed are found. */
   power: number;
-  /** Shots of each map for a chance of about 80 %. */
+  /** Shots of each map for a chance of about 80 %, two digits. */
   shots: number;
 }
 
@@ -28,6 +28,6 @@ export function changePower(
   return {
     change,
     power: Math.exp(logNormalTail(reach - change / error)),
-    shots: Math.ceil(2 * ((reach + normalQuantile(0.8)) / change) ** 2)
+    shots: Number((2 * ((reach + normalQuantile(0.8)) / change) ** 2).toPrecision(2))
   };
 }

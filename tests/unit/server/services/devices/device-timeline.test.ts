@@ -1,5 +1,6 @@
 import { dataset, gateRule } from '$lib/server/db/schema';
 import { newId } from '$lib/server/db/new-id';
+import { compareVersions } from '$lib/server/services/devices/compare-versions';
 import { deviceTimeline } from '$lib/server/services/devices/device-timeline';
 import { listDevices } from '$lib/server/services/devices/list-devices';
 import { moveVersion } from '$lib/server/services/devices/move-version';
@@ -166,6 +167,45 @@ describe('the timeline of a device', () => {
     const drawn = await open(id);
     expect([drawn.marks.length, drawn.marks[0].length, drawn.points.length]).toEqual([100, 50, 50]);
     expect(await open(id)).toEqual(drawn);
+    db.$client.close();
+  });
+});
+
+describe('versions pair by pair', () => {
+  it('are tested with all pairs allowed for, the same every time, and only where two were chosen', async () => {
+    const { db, lead, observer, save, named, open } = device();
+    for (const [i, firmware] of ['a', 'b', 'c'].entries())
+      save(firmware, 'q1', i + 1, firmware === 'c' ? [0.06, 0.14] : undefined);
+    save('a', 'q2', 9);
+    const id = named();
+    const ids = (await open(id)).versions.map((version) => version.id);
+    const pairs = async (versions: string[], group: string | null = 'q1') => {
+      const read = await compareVersions(db, observer, id, { group, versions });
+      if (!read.ok) throw new Error(read.reason);
+      return read.pairs;
+    };
+    expect(await pairs([])).toMatchObject({ found: null, why: null, groups: ['q1', 'q2'], group: 'q1' });
+    const { found } = await pairs(ids);
+    expect(found!.tests.map(({ first, second }) => first + second)).toEqual(['ab', 'ac', 'bc']);
+    expect(found!.tests.map(({ pAdjusted }) => pAdjusted <= found!.alpha)).toEqual([false, true, true]);
+    expect(found!.because[0]).toMatch(/^2 of 3 pairs of versions differ/);
+    expect(await pairs(ids)).toEqual({ ...(await pairs(ids)), found });
+    // Of q2 one version alone was measured.
+    expect(await pairs(ids, 'q2')).toMatchObject({
+      found: null,
+      why: expect.stringMatching(/two versions or more/)
+    });
+    expect(await pairs(['nothing', ids[0]])).toMatchObject({
+      found: null,
+      why: expect.stringMatching(/not here/)
+    });
+    for (let i = 0; i < 9; i++) save(`d${i}`, 'q1', 20 + i);
+    named();
+    const all = (await open(id)).versions.map((version) => version.id);
+    expect(await pairs(all)).toMatchObject({ found: null, why: expect.stringMatching(/8 versions at most/) });
+    expect(
+      await compareVersions(db, { ...lead, teamId: 'other' }, id, { group: null, versions: all })
+    ).toEqual({ ok: false, reason: 'unknown' });
     db.$client.close();
   });
 });
