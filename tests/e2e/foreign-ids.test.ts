@@ -29,6 +29,7 @@ let foreign: {
   report: string;
   job: string;
   link: string;
+  sweepLink: string;
   thread: string;
   device: string;
   version: string;
@@ -53,6 +54,7 @@ beforeAll(async () => {
       second: second.id,
       job: newId(),
       link: newId(),
+      sweepLink: newId(),
       thread: newId(),
       device: newId(),
       version: newId(),
@@ -118,6 +120,9 @@ beforeAll(async () => {
     db.insert(link)
       .values({ ...plain, ...says, ...hides, id: ids.link, reportId: first.id })
       .run();
+    db.insert(link)
+      .values({ ...plain, ...says, ...hides, tokenHash: 'other', id: ids.sweepLink, sweepId: ids.sweep })
+      .run();
     return ids;
   });
   cookie = await sessionOf(server.address, stranger.email, stranger.password);
@@ -133,6 +138,7 @@ function addressOf({ route, action }: Door, team: string): string {
     .replace('reports/[id]', `reports/${foreign.report}`)
     .replace('devices/[id]', `devices/${foreign.device}`)
     .replace('[version]', foreign.version)
+    .replace('sweeps/[id]/links/[link]', `sweeps/${foreign.sweep}/links/${foreign.sweepLink}`)
     .replace('sweeps/[id]', `sweeps/${foreign.sweep}`)
     .replace('webhooks/[id]', `webhooks/${foreign.webhook}`)
     .replace('sites/[id]', `sites/${foreign.map}`)

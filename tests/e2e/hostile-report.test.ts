@@ -62,7 +62,13 @@ beforeAll(async () => {
       const input = { section, threadId: null, body: REMARK, reportId: ids[0] };
       expect(addRemark(db, { kind: 'member', actor }, input).ok).toBe(true);
     }
-    const link = makeLink(db, actor, ids[0], { ...plainLink, label: CONDITIONS.device }, Date.now());
+    const link = makeLink(
+      db,
+      actor,
+      { report: ids[0] },
+      { ...plainLink, label: CONDITIONS.device },
+      Date.now()
+    );
     if (!link.ok) throw new Error(link.reason);
     const root = `/team/${team.slug}`;
     paths = {

@@ -62,7 +62,7 @@ beforeAll(async () => {
           ).id
       );
       const actor = { personId: lead.id, teamId: team.id, role: 'lead' as const };
-      const link = makeLink(db, actor, ids[0], plainLink, Date.now());
+      const link = makeLink(db, actor, { report: ids[0] }, plainLink, Date.now());
       if (!link.ok) throw new Error(link.reason);
       const root = `/team/${team.slug}/reports`;
       paths[key] = {

@@ -98,7 +98,7 @@ describe('a blind link', () => {
     const page = await browser.newPage();
     const answer = await page.goto(server.address + path);
     expect(answer?.status()).toBe(401);
-    await page.getByRole('link', { name: 'Sign in and open the report' }).click();
+    await page.getByRole('link', { name: 'Sign in and open it' }).click();
     await page.waitForURL('**/sign-in?**');
     await page.getByLabel('Password').fill(referee.password);
     await page.locator('form:has([name=password]) [name=email]').fill(referee.email);
@@ -135,7 +135,7 @@ describe('a blind link', () => {
     const once = await seedLink(server, there, { blind: true, visitLimit: 1 });
     const page = await browser.newPage();
     await page.goto(server.address + closed.path);
-    await withDatabaseOf(server, (db) => revokeLink(db, there.actor, there.reportId, closed.id));
+    await withDatabaseOf(server, (db) => revokeLink(db, there.actor, { report: there.reportId }, closed.id));
     const told = async (path: string, in_ = page) => {
       const answer = await in_.goto(server.address + path);
       return `${answer?.status()} ${await in_.textContent('main')}`;

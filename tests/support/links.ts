@@ -93,7 +93,7 @@ export function linked(
   more: Partial<LinkOptions> = {},
   now = 2000
 ): { id: string; token: string } {
-  const made = makeLink(db, lead, reportId, { ...plainLink, ...more }, now);
+  const made = makeLink(db, lead, { report: reportId }, { ...plainLink, ...more }, now);
   if (!made.ok) throw new Error(made.reason);
   return made;
 }

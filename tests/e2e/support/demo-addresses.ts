@@ -84,9 +84,14 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
     const chain = db.select().from(firmwareVersion).where(eq(firmwareVersion.name, 'ebb 3.1')).get()!;
     const actor = { personId: lead.id, teamId: ours.id, role: 'lead' as const };
     const shared = (more: Partial<typeof plainLink>) => {
-      const made = makeLink(db, actor, bunched.id, { ...plainLink, ...more }, now);
+      const made = makeLink(db, actor, { report: bunched.id }, { ...plainLink, ...more }, now);
       if (!made.ok) throw new Error(made.reason);
       return `/link/${made.token}`;
+    };
+    const sharedSweep = (blind: boolean) => {
+      const made = makeLink(db, actor, { sweep: swept.id }, { ...plainLink, blind }, now);
+      if (!made.ok) throw new Error(made.reason);
+      return `/link/${made.token}/sweep`;
     };
     const invited = newToken();
     db.insert(invitation)
@@ -180,7 +185,8 @@ export async function demoAddresses(server: RunningServer): Promise<Record<strin
       '/(team)/team/[team=slug]/leave': [`${root}/leave`],
       '/(team)/team/[team=slug]/aside': [`${root}/aside`],
       '/invitation/[token]': [`/invitation/${invited.token}`, '/invitation/no'],
-      '/link/[token]': [shared({ allowsRemarks: true }), shared({ blind: true, shows: 'report' })]
+      '/link/[token]': [shared({ allowsRemarks: true }), shared({ blind: true, shows: 'report' })],
+      '/link/[token]/sweep': [sharedSweep(false), sharedSweep(true)]
     };
   });
 }

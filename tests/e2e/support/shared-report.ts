@@ -59,7 +59,7 @@ export function seedLink(
   now = Date.now()
 ): Promise<{ id: string; path: string; token: string }> {
   return withDatabaseOf(server, (db) => {
-    const made = makeLink(db, actor, reportId, { ...plainLink, ...more }, now);
+    const made = makeLink(db, actor, { report: reportId }, { ...plainLink, ...more }, now);
     if (!made.ok) throw new Error(made.reason);
     return { id: made.id, path: `/link/${made.token}`, token: made.token };
   });

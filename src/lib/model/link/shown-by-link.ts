@@ -4,6 +4,7 @@ import type { Shows } from './link-options';
 import { olderDocument } from '../older-document';
 import { namelessBatches } from './nameless-batches';
 import { neutralUnit } from './neutral-unit';
+import { plainName } from './plain-name';
 import { withoutCounts, type Summary } from './summary';
 
 /** All there is about a report, before a link decides what of it is shown. */
@@ -99,7 +100,9 @@ export function shownByLink(
       holdUnit: link.blind ? neutralUnit(conditions.holdUnit) : conditions.holdUnit
     },
     engineVersion: thing.engineVersion,
-    fileName: link.blind ? 'severalty-report' : `severalty-${plain(conditions.name)}-report-${thing.number}`,
+    fileName: link.blind
+      ? 'severalty-report'
+      : `severalty-${plainName(conditions.name, 'dataset')}-report-${thing.number}`,
     remarks: link.allowsRemarks,
     content:
       link.shows === 'report-and-counts'
@@ -115,10 +118,4 @@ export function shownByLink(
             summary: withoutCounts(olderDocument(JSON.parse(thing.document)) as Diagnosis)
           }
   };
-}
-
-/** A name as part of a file's: letters and digits of any script, joined by hyphens. */
-function plain(name: string): string {
-  const words = name.toLowerCase().match(/[\p{L}\p{N}]+/gu) ?? [];
-  return words.join('-').slice(0, 60) || 'dataset';
 }

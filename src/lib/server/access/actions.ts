@@ -5,7 +5,7 @@ export type Grant = 'yes' | 'own' | 'no';
 
 /**
  * Who may do what in a team: the whole of it, and the only place. A link adds `see` and, where it says so,
- * `remark`, for its one report; see can.
+ * `remark`, for its one report or sweep; see can.
  */
 export const ACTIONS = {
   /** Datasets, reports, jobs of the team. */
@@ -16,7 +16,7 @@ export const ACTIONS = {
   diagnose: { lead: 'yes', experimenter: 'yes', observer: 'no' },
   delete: { lead: 'yes', experimenter: 'own', observer: 'no' },
   restore: { lead: 'yes', experimenter: 'own', observer: 'no' },
-  /** Make and revoke links to a report. */
+  /** Make and revoke links to a report or a sweep. */
   link: { lead: 'yes', experimenter: 'own', observer: 'no' },
   remark: { lead: 'yes', experimenter: 'yes', observer: 'yes' },
   /** Make and revoke tokens of scripts, each at most of the own role. */

@@ -4,12 +4,12 @@ import { ACTIONS, type Action } from './actions';
 /** Whom a question of access is about. */
 export type Standing =
   | { kind: 'member'; personId: string; role: Role }
-  | { kind: 'referee'; reportId: string; allowsRemarks: boolean };
+  | { kind: 'referee'; opens: string; allowsRemarks: boolean };
 
-/** What it is about, where that matters: who made it, and the report it is or belongs to. */
+/** What it is about, where that matters: who made it, and the id of the report or sweep it is or belongs to. */
 export interface Thing {
   createdBy?: string | null;
-  reportId?: string;
+  id?: string;
 }
 
 /**
@@ -18,7 +18,7 @@ export interface Thing {
  */
 export function can(standing: Standing, action: Action, thing: Thing = {}): boolean {
   if (standing.kind === 'referee') {
-    if (thing.reportId !== standing.reportId) return false;
+    if (thing.id !== standing.opens) return false;
     return action === 'see' || (action === 'remark' && standing.allowsRemarks);
   }
   const grant = ACTIONS[action][standing.role];

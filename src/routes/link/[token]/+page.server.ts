@@ -16,7 +16,7 @@ export const load: PageServerLoad = (event) => {
     quote: quoteOfLink(view, event.url.origin + event.url.pathname),
     remarks: link.allowsRemarks
       ? {
-          threads: remarksOf(db, { reportId: link.reportId, via: { linkId: link.id }, viewer }),
+          threads: remarksOf(db, { reportId: link.thingId, via: { linkId: link.id }, viewer }),
           /** How this reader's remarks are signed: null when that is for them to say. */
           as: link.hidesReferees ? 'A referee' : (person?.name ?? null)
         }
@@ -28,13 +28,14 @@ type Event = RequestEvent<{ token: string }>;
 
 function placeOf(event: Event, form: FormData) {
   const { link, visit } = askLink(event, 'remark');
+  const reportId = link.thingId;
   const { db, person } = event.locals;
   const given = form.get('signedAs');
   const signedAs = person?.name ?? (typeof given === 'string' ? given : '');
   const author: RemarkAuthor = { kind: 'referee', linkId: link.id, personId: person?.id ?? null, signedAs };
-  const address = `${event.url.origin}/team/${link.teamSlug}/reports/${link.reportId}`;
+  const address = `${event.url.origin}/team/${link.teamSlug}/reports/${reportId}`;
   const from = { linkId: link.id, reader: person?.id ?? visit ?? '' };
-  return { db, author, reportId: link.reportId, address, from };
+  return { db, author, reportId, address, from };
 }
 
 export const actions: Actions = {

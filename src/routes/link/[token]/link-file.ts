@@ -5,11 +5,16 @@ import { problem } from '../../problem';
 import { unreadable } from '../../unreadable';
 
 /** A file that a link gives out; `name` may hold letters of any script (RFC 6266). */
-export const linkFile = (body: BodyInit, name: string, type: string): Response =>
+export const linkFile = (
+  body: BodyInit,
+  name: string,
+  type: string,
+  of: 'report' | 'sweep' = 'report'
+): Response =>
   new Response(body, {
     headers: {
       'content-type': type,
-      'content-disposition': `attachment; filename="severalty-report.${name.split('.').pop()}"; filename*=UTF-8''${encodeURIComponent(name)}`
+      'content-disposition': `attachment; filename="severalty-${of}.${name.split('.').pop()}"; filename*=UTF-8''${encodeURIComponent(name)}`
     }
   });
 

@@ -34,11 +34,11 @@ describe('can', () => {
     '%s by link: the linked report may be seen, and remarked on where the link allows it',
     (action) => {
       for (const allowsRemarks of [true, false]) {
-        const standing: Standing = { kind: 'referee', reportId: 'r', allowsRemarks };
-        expect(can(standing, action, { reportId: 'r' })).toBe(
+        const standing: Standing = { kind: 'referee', opens: 'r', allowsRemarks };
+        expect(can(standing, action, { id: 'r' })).toBe(
           action === 'see' || (action === 'remark' && allowsRemarks)
         );
-        expect(can(standing, action, { reportId: 'other' })).toBe(false);
+        expect(can(standing, action, { id: 'other' })).toBe(false);
         expect(can(standing, action)).toBe(false);
       }
     }

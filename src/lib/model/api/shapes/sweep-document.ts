@@ -107,10 +107,7 @@ export const sweepDocumentSchema = z.object({
   cautions: z.array(z.string())
 });
 
-type Equal<A, B> = [keyof A, A] extends [keyof B, B]
-  ? [keyof B, B] extends [keyof A, A]
-    ? true
-    : false
-  : false;
+type Whole<T> = T extends object ? { [K in keyof T]-?: Whole<T[K]> } : T;
+type Equal<A, B> = [A] extends [B] ? ([B] extends [A] ? true : false) : false;
 /** Does not compile once the engine's document and this description part. */
-export const isWhole: Equal<z.output<typeof sweepDocumentSchema>, SweepReport> = true;
+export const isWhole: Equal<Whole<z.output<typeof sweepDocumentSchema>>, Whole<SweepReport>> = true;

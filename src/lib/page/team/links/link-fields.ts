@@ -15,14 +15,15 @@ export interface LinkFields {
   visits: string;
 }
 
-export const freshFields = (): LinkFields => ({
+/** A form as it begins. A sweep takes no remarks. */
+export const freshFields = (opens: 'report' | 'sweep' = 'report'): LinkFields => ({
   label: '',
   audience: 'anyone',
   people: '',
   shows: 'report-and-counts',
   blind: false,
   hidesReferees: false,
-  allowsRemarks: true,
+  allowsRemarks: opens === 'report',
   until: '',
   visits: ''
 });

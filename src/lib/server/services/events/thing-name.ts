@@ -27,7 +27,7 @@ export function thingName(
     case 'site-map':
       return siteMapName(db, teamId, thing) ?? (kept ? `the map of sites “${kept}”` : null);
     case 'link': {
-      const name = reportName(db, teamId, thing) ?? 'a report';
+      const name = reportName(db, teamId, thing) ?? sweepName(db, teamId, thing) ?? 'a report';
       const found = linkId === null ? undefined : db.select().from(link).where(eq(link.id, linkId)).get();
       return found?.teamId === teamId ? `the link “${found.label}” to ${name}` : `a link to ${name}`;
     }

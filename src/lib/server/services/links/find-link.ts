@@ -1,14 +1,16 @@
 import { eq, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { dataset, link, linkVisit, person, report, team } from '../../db/schema';
+import { link, linkVisit, team } from '../../db/schema';
 
-/** The link of a token's hash with its report and how often it was opened; undefined when there is none. */
+/** The link of a token's hash, what it opens, and how often it was opened; undefined when there is none. */
 export function findLink(db: Pick<Database, 'select'>, tokenHash: string) {
   return db
     .select({
       id: link.id,
       teamId: link.teamId,
-      reportId: report.id,
+      /** Exactly one of the two is set. */
+      reportId: link.reportId,
+      sweepId: link.sweepId,
       audience: link.audience,
       people: link.people,
       shows: link.shows,
@@ -20,25 +22,11 @@ export function findLink(db: Pick<Database, 'select'>, tokenHash: string) {
       revokedAt: link.revokedAt,
       visits: sql<number>`(select count(*) from ${linkVisit}
         where ${linkVisit.linkId} = ${link.id} and ${linkVisit.outcome} = 'opened')`,
-      /** The report or its dataset was put aside. */
-      gone: sql<number>`(${report.deletedAt} is not null or ${dataset.deletedAt} is not null)`,
       team: team.name,
-      teamSlug: team.slug,
-      madeBy: person.name,
-      counts: dataset.counts,
-      number: report.number,
-      madeAt: report.createdAt,
-      engineVersion: report.engineVersion,
-      document: report.document,
-      sha256: report.sha256,
-      options: report.options,
-      conditions: report.conditions
+      teamSlug: team.slug
     })
     .from(link)
     .innerJoin(team, eq(team.id, link.teamId))
-    .innerJoin(report, eq(report.id, link.reportId))
-    .innerJoin(dataset, eq(dataset.id, report.datasetId))
-    .leftJoin(person, eq(person.id, report.createdBy))
     .where(eq(link.tokenHash, tokenHash))
     .get();
 }

@@ -4,7 +4,7 @@ import type { Database } from '../../db/client';
 import { link, linkVisit, person } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { dayOf } from './day-of';
-import { linkableReport } from './linkable-report';
+import { linkable, linksOf, type Opens } from './linkable';
 
 /** Lines of the log that one answer holds. */
 const MOST = 200;
@@ -16,13 +16,13 @@ export type ListedVisits =
  * The log of one link, the newest first, 200 lines at most. Where the link hides its referees nobody is named, and of
  * the time only the day is told: one named referee who opened a link at 22:14 is known by the hour.
  */
-export function linkVisits(db: Database, actor: Actor, reportId: string, linkId: string): ListedVisits {
-  const found = linkableReport(db, actor, reportId);
+export function linkVisits(db: Database, actor: Actor, opens: Opens, linkId: string): ListedVisits {
+  const found = linkable(db, actor, opens);
   if (!found.ok) return found;
   const entry = db
     .select({ hides: link.hidesReferees })
     .from(link)
-    .where(and(eq(link.id, linkId), eq(link.reportId, reportId), eq(link.teamId, actor.teamId)))
+    .where(and(eq(link.id, linkId), linksOf(opens), eq(link.teamId, actor.teamId)))
     .get();
   if (!entry) return { ok: false, reason: 'unknown' };
   const rows = db

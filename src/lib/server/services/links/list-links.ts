@@ -5,16 +5,16 @@ import type { Database } from '../../db/client';
 import { link, linkVisit } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { dayOf } from './day-of';
-import { linkableReport } from './linkable-report';
+import { linkable, linksOf, type Opens } from './linkable';
 
 export type ListedLinks = { ok: true; links: TeamLink[] } | { ok: false; reason: 'unknown' | 'not-allowed' };
 
 /**
- * Links of a report, the newest first, with how they stand and how often they were opened; when last, to the day alone
+ * Links of a report or sweep, the newest first, with how they stand and how often they were opened; when last, to the day alone
  * where the link hides its referees, as in its log.
  */
-export function listLinks(db: Database, actor: Actor, reportId: string, now = Date.now()): ListedLinks {
-  const found = linkableReport(db, actor, reportId);
+export function listLinks(db: Database, actor: Actor, opens: Opens, now = Date.now()): ListedLinks {
+  const found = linkable(db, actor, opens);
   if (!found.ok) return found;
   const of = (outcome: 'opened' | 'refused') =>
     sql<number>`count(case when ${linkVisit.outcome} = ${outcome} then 1 end)`;
@@ -38,7 +38,7 @@ export function listLinks(db: Database, actor: Actor, reportId: string, now = Da
     })
     .from(link)
     .leftJoin(linkVisit, eq(linkVisit.linkId, link.id))
-    .where(and(eq(link.reportId, reportId), eq(link.teamId, actor.teamId)))
+    .where(and(linksOf(opens), eq(link.teamId, actor.teamId)))
     .groupBy(link.id)
     .orderBy(desc(link.createdAt), desc(link.id))
     .all();

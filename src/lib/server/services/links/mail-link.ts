@@ -6,6 +6,7 @@ export interface LinkLetter {
   /** Whole address of the link, with its token. */
   address: string;
   people: string[];
+  opens: 'report' | 'sweep';
   blind: boolean;
   allowsRemarks: boolean;
   expiresAt: number | null;
@@ -34,19 +35,31 @@ export async function mailLink(
   return missed;
 }
 
-const subjectOf = ({ blind, team }: LinkLetter): string =>
-  blind ? 'A report of counts for you to look at' : `A report of ${team} for you to look at`;
+const THINGS = {
+  report: { name: 'report', on: 'a report on counts of defects' },
+  sweep: { name: 'sweep', on: 'a sweep: counts of defects over quench or hold time' }
+};
 
-function textOf({ address, blind, team, from, allowsRemarks, expiresAt, visitLimit }: LinkLetter): string {
+const subjectOf = ({ opens, blind, team }: LinkLetter): string =>
+  `A ${THINGS[opens].name} of ${blind ? 'counts' : team} for you to look at`;
+
+const whatThere = ({ opens, allowsRemarks }: LinkLetter): string =>
+  opens === 'sweep'
+    ? 'There you can read the sweep, and take its document and its points as files.'
+    : `There you can recompute the report in your own browser, check quantities claimed in a manuscript against it${allowsRemarks ? ', and remark on it' : ''}.`;
+
+function textOf(letter: LinkLetter): string {
+  const { opens, address, blind, team, from, expiresAt, visitLimit } = letter;
+  const { on } = THINGS[opens];
   const lines = [
     blind
-      ? 'You are asked to look at a report on counts of defects. Whose it is stays hidden.'
-      : `${from} of ${team} asks you to look at a report on counts of defects.`,
+      ? `You are asked to look at ${on}. Whose it is stays hidden.`
+      : `${from} of ${team} asks you to look at ${on}.`,
     '',
     address,
     '',
     'It opens for you alone: sign in with the address that this message came to. You need no account for that; a link to sign in is mailed to you.',
-    `There you can recompute the report in your own browser, check quantities claimed in a manuscript against it${allowsRemarks ? ', and remark on it' : ''}.`
+    whatThere(letter)
   ];
   if (expiresAt !== null) lines.push(`It is open ${sayUntil(expiresAt)}.`);
   if (visitLimit !== null)

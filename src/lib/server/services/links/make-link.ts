@@ -7,30 +7,38 @@ import { newId } from '../../db/new-id';
 import { link } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { recordEvent } from '../events/record-event';
-import { linkableReport } from './linkable-report';
+import { linkable, type Opens } from './linkable';
 
 export type MadeLink =
   | { ok: true; id: string; token: string }
-  /** `too-few-counts`: what is left of a report would give so few shots, or different counts, away. */
-  | { ok: false; reason: 'unknown' | 'not-allowed' | 'past' | 'too-few-counts' };
+  /**
+   * `shows-counts`: the cumulants of a sweep stand to their last digit, so it keeps no counts back. `no-remarks`: a
+   * sweep takes none. `too-few-counts`: what is left of a report would give so few shots, or different counts, away.
+   */
+  | {
+      ok: false;
+      reason: 'unknown' | 'not-allowed' | 'past' | 'too-few-counts' | 'shows-counts' | 'no-remarks';
+    };
 
 /**
- * Makes a link to a report. The token is in the answer and nowhere else: the database keeps its hash. Mail to named
- * people is another matter: see mailLink.
+ * Makes a link to a report or a sweep. The token is in the answer and nowhere else: the database keeps its hash. Mail to
+ * named people is another matter: see mailLink.
  */
 export function makeLink(
   db: Database,
   actor: Actor,
-  reportId: string,
+  opens: Opens,
   options: LinkOptions,
   now = Date.now()
 ): MadeLink {
   if (options.expiresAt !== null && options.expiresAt <= now) return { ok: false, reason: 'past' };
   return db.transaction(
     (tx): MadeLink => {
-      const found = linkableReport(tx, actor, reportId);
+      const found = linkable(tx, actor, opens);
       if (!found.ok) return found;
-      if (options.shows === 'report' && !hidesCounts(JSON.parse(found.report.document) as Diagnosis))
+      if ('sweep' in opens && options.shows === 'report') return { ok: false, reason: 'shows-counts' };
+      if ('sweep' in opens && options.allowsRemarks) return { ok: false, reason: 'no-remarks' };
+      if (options.shows === 'report' && !hidesCounts(JSON.parse(found.document) as Diagnosis))
         return { ok: false, reason: 'too-few-counts' };
       const { token, hash } = newToken();
       const id = newId();
@@ -40,7 +48,8 @@ export function makeLink(
           ...rest,
           id,
           teamId: actor.teamId,
-          reportId,
+          reportId: 'report' in opens ? opens.report : null,
+          sweepId: 'sweep' in opens ? opens.sweep : null,
           tokenHash: hash,
           people: JSON.stringify(options.audience === 'named' ? people : []),
           createdBy: actor.personId,
@@ -54,7 +63,7 @@ export function makeLink(
           teamId: actor.teamId,
           personId: actor.personId,
           linkId: id,
-          thing: reportId,
+          thing: 'sweep' in opens ? opens.sweep : opens.report,
           detail: { audience: options.audience, shows: options.shows, blind: options.blind }
         },
         now

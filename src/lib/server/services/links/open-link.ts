@@ -1,5 +1,6 @@
 import { linkState } from '$lib/model/link/link-state';
 import { shownByLink, type LinkView } from '$lib/model/link/shown-by-link';
+import { sweepByLink, type SweepView } from '$lib/model/link/sweep-by-link';
 import { and, eq, gt } from 'drizzle-orm';
 import { hashToken } from '../../auth/new-token';
 import type { Database } from '../../db/client';
@@ -7,20 +8,29 @@ import { linkVisit } from '../../db/schema';
 import { findLink, type FoundLink } from './find-link';
 import { isMeant } from './is-meant';
 import { noteVisit } from './note-visit';
-import { sharedThing } from './shared-thing';
+import { sharedReport } from './shared-report';
+import { sharedSweep } from './shared-sweep';
 
 export type LinkRefusal =
-  'unknown' | 'expired' | 'revoked' | 'used-up' | 'sign-in' | 'not-named' | 'not-in-team';
+  /** `other-kind`: it opens another kind of thing than the address is for. */
+  'unknown' | 'other-kind' | 'expired' | 'revoked' | 'used-up' | 'sign-in' | 'not-named' | 'not-in-team';
 
 /** What routes and services of remarks need of an open link; it never goes to the page. */
 export type OpenedLink = Pick<
   FoundLink,
-  'id' | 'teamId' | 'teamSlug' | 'reportId' | 'allowsRemarks' | 'hidesReferees' | 'blind' | 'shows'
->;
+  'id' | 'teamId' | 'teamSlug' | 'allowsRemarks' | 'hidesReferees' | 'blind' | 'shows'
+> & {
+  /** Id of the report or sweep that it opens. */
+  thingId: string;
+};
 
-export type OpenLink =
+/** What a link opens, and what of it is shown. */
+export type ShownThing = { opens: 'report'; view: LinkView } | { opens: 'sweep'; view: SweepView };
+
+export type OpenLink<Of extends ShownThing['opens'] = 'report'> =
   /** `visit` is for the browser to keep: shown again within the hour, it is the same visit. Null: none was counted. */
-  { ok: true; link: OpenedLink; view: LinkView; visit: string | null } | { ok: false; reason: LinkRefusal };
+  | ({ ok: true; link: OpenedLink; visit: string | null } & Extract<ShownThing, { opens: Of }>)
+  | { ok: false; reason: LinkRefusal };
 
 /** A visit lasts an hour, milliseconds: reading a report takes that, and reloading it is no second visit. */
 export const VISIT_LASTS = 3_600_000;
@@ -36,29 +46,34 @@ const SHAPE = /^[A-Za-z0-9_-]{43}$/;
  * @param person who is signed in; null for strangers
  * @param visit what an earlier answer gave this browser to keep
  * @param counts false for a request that is shown nothing: it is no visit and stands in no log
+ * @param wanted what the address asked for is of: a link to something else does not open there, and nothing is noted
  */
-export function openLink(
+export function openLink<Of extends ShownThing['opens'] = 'report'>(
   db: Database,
   token: string,
   person: { id: string } | null,
   now = Date.now(),
   visit?: string | null,
-  counts = true
-): OpenLink {
+  counts = true,
+  wanted: Of | 'report' = 'report'
+): OpenLink<Of> {
   if (!SHAPE.test(token)) return { ok: false, reason: 'unknown' };
   const hash = hashToken(token);
   return db.transaction(
-    (tx): OpenLink => {
+    (tx): OpenLink<Of> => {
       const found = findLink(tx, hash);
       if (!found) return { ok: false, reason: 'unknown' };
+      if (wanted !== kindOf(found)) return { ok: false, reason: 'other-kind' };
+      const shown = shownThing(tx, found);
       const reason = refusal();
-      if (reason === null) {
+      if (reason === null && shown !== null) {
         const kept = visit && lasts(visit) ? visit : null;
         if (kept !== null || linkState(found, found.visits, now) === 'open') {
           const opened = kept ?? note(found.id, 'opened');
-          const { id, teamId, teamSlug, reportId, allowsRemarks, hidesReferees, blind, shows } = found;
-          const link = { id, teamId, teamSlug, reportId, allowsRemarks, hidesReferees, blind, shows };
-          return { ok: true, link, view: shownByLink(found, sharedThing(found)), visit: opened };
+          const thingId = (found.sweepId ?? found.reportId)!;
+          const { id, teamId, teamSlug, allowsRemarks, hidesReferees, blind, shows } = found;
+          const link = { id, thingId, teamId, teamSlug, allowsRemarks, hidesReferees, blind, shows };
+          return { ok: true, link, ...(shown as Extract<ShownThing, { opens: Of }>), visit: opened };
         }
       }
       note(found.id, 'refused');
@@ -69,8 +84,8 @@ export function openLink(
       }
 
       /** Why the link is closed to this person, visits aside. */
-      function refusal(): Exclude<LinkRefusal, 'unknown' | 'used-up'> | null {
-        if (found!.gone) return 'revoked';
+      function refusal(): Exclude<LinkRefusal, 'unknown' | 'other-kind' | 'used-up'> | null {
+        if (shown === null) return 'revoked';
         const state = linkState({ ...found!, visitLimit: null }, 0, now);
         if (state === 'revoked' || state === 'expired') return state;
         return isMeant(tx, found!, person?.id ?? null);
@@ -88,4 +103,17 @@ export function openLink(
     },
     { behavior: counts ? 'immediate' : 'deferred' }
   );
+}
+
+const kindOf = ({ sweepId }: FoundLink): ShownThing['opens'] => (sweepId === null ? 'report' : 'sweep');
+
+/** What the link shows of its report or sweep; null once that was put aside. */
+function shownThing(db: Pick<Database, 'select'>, found: FoundLink): ShownThing | null {
+  const { reportId, sweepId, team } = found;
+  if (sweepId !== null) {
+    const sweep = sharedSweep(db, sweepId, team);
+    return sweep ? { opens: 'sweep', view: sweepByLink(found, sweep) } : null;
+  }
+  const report = reportId === null ? undefined : sharedReport(db, reportId, team);
+  return report ? { opens: 'report', view: shownByLink(found, report) } : null;
 }

@@ -3,7 +3,7 @@ import type { Database } from '../../db/client';
 import { link } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { recordEvent } from '../events/record-event';
-import { linkableReport } from './linkable-report';
+import { linkable, linksOf, type Opens } from './linkable';
 
 export type RevokedLink = { ok: true } | { ok: false; reason: 'unknown' | 'not-allowed' };
 
@@ -11,15 +11,15 @@ export type RevokedLink = { ok: true } | { ok: false; reason: 'unknown' | 'not-a
 export function revokeLink(
   db: Database,
   actor: Actor,
-  reportId: string,
+  opens: Opens,
   linkId: string,
   now = Date.now()
 ): RevokedLink {
   return db.transaction(
     (tx): RevokedLink => {
-      const found = linkableReport(tx, actor, reportId);
+      const found = linkable(tx, actor, opens);
       if (!found.ok) return found;
-      const mine = and(eq(link.id, linkId), eq(link.reportId, reportId), eq(link.teamId, actor.teamId));
+      const mine = and(eq(link.id, linkId), linksOf(opens), eq(link.teamId, actor.teamId));
       if (!tx.select({ id: link.id }).from(link).where(mine).get()) return { ok: false, reason: 'unknown' };
       const closed = tx
         .update(link)
@@ -34,7 +34,7 @@ export function revokeLink(
             teamId: actor.teamId,
             personId: actor.personId,
             linkId,
-            thing: reportId
+            thing: 'sweep' in opens ? opens.sweep : opens.report
           },
           now
         );

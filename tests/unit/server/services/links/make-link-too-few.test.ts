@@ -32,8 +32,8 @@ it.each([
   const { id } = db.transaction((tx) =>
     saveReport(tx, { teamId, datasetId, createdBy: null, document, options })
   );
-  const answer = makeLink(db, lead, id, { ...plainLink, shows: 'report' });
+  const answer = makeLink(db, lead, { report: id }, { ...plainLink, shows: 'report' });
   expect(answer.ok || answer.reason).toBe(made || 'too-few-counts');
   expect(db.select().from(link).all()).toHaveLength(made ? 1 : 0);
-  expect(makeLink(db, lead, id, plainLink).ok).toBe(true);
+  expect(makeLink(db, lead, { report: id }, plainLink).ok).toBe(true);
 });

@@ -35,10 +35,10 @@ describe('making and revoking links', () => {
     const link = linked(db, there.lead, id);
     const tried = (actor: typeof own) => {
       const refusals = [
-        makeLink(db, actor, id, plainLink),
-        listLinks(db, actor, id),
-        linkVisits(db, actor, id, link.id),
-        revokeLink(db, actor, id, link.id)
+        makeLink(db, actor, { report: id }, plainLink),
+        listLinks(db, actor, { report: id }),
+        linkVisits(db, actor, { report: id }, link.id),
+        revokeLink(db, actor, { report: id }, link.id)
       ].map((answer) => (answer.ok ? 'yes' : answer.reason));
       return [...new Set(refusals)];
     };
@@ -57,19 +57,19 @@ describe('making and revoking links', () => {
     const second = db.transaction((tx) =>
       saveReport(tx, { teamId: there.teamId, datasetId, createdBy: null, ...made })
     );
-    expect(revokeLink(db, there.lead, second.id, id)).toEqual({ ok: false, reason: 'unknown' });
-    expect(linkVisits(db, there.lead, second.id, id)).toEqual({ ok: false, reason: 'unknown' });
+    expect(revokeLink(db, there.lead, { report: second.id }, id)).toEqual({ ok: false, reason: 'unknown' });
+    expect(linkVisits(db, there.lead, { report: second.id }, id)).toEqual({ ok: false, reason: 'unknown' });
   });
 
   it('refuses an end in the past, and to hide what cannot be hidden', async () => {
-    const past = makeLink(db, there.lead, there.reportId, { ...plainLink, expiresAt: 5 }, 5);
+    const past = makeLink(db, there.lead, { report: there.reportId }, { ...plainLink, expiresAt: 5 }, 5);
     expect(past).toEqual({ ok: false, reason: 'past' });
     const datasetId = makeDataset(db, there.teamId);
     const made = await diagnoseInvented();
     const three = db.transaction((tx) =>
       saveReport(tx, { teamId: there.teamId, datasetId, createdBy: null, ...made })
     );
-    expect(makeLink(db, there.lead, three.id, { ...plainLink, shows: 'report' })).toEqual({
+    expect(makeLink(db, there.lead, { report: three.id }, { ...plainLink, shows: 'report' })).toEqual({
       ok: false,
       reason: 'too-few-counts'
     });
@@ -87,9 +87,9 @@ describe('making and revoking links', () => {
     const open = linked(db, there.lead, there.reportId, { visitLimit: 1 }, 2002);
     openLink(db, open.token, null, 3000);
     openLink(db, open.token, null, 3001);
-    revokeLink(db, there.lead, there.reportId, named.id, 3002);
-    revokeLink(db, there.lead, there.reportId, named.id, 3003);
-    const listed = listLinks(db, there.lead, there.reportId, 4000);
+    revokeLink(db, there.lead, { report: there.reportId }, named.id, 3002);
+    revokeLink(db, there.lead, { report: there.reportId }, named.id, 3003);
+    const listed = listLinks(db, there.lead, { report: there.reportId }, 4000);
     expect(listed).toMatchObject({
       links: [
         { id: open.id, state: 'used-up', visits: 1, refused: 1, lastVisitAt: 3000 },
@@ -107,7 +107,7 @@ describe('making and revoking links', () => {
     const hiding = linked(db, there.lead, there.reportId, { hidesReferees: true }, 2000);
     const telling = linked(db, there.lead, there.reportId, {}, 2001);
     for (const { token } of [hiding, telling]) openLink(db, token, null, 3 * day + 5678);
-    const listed = listLinks(db, there.lead, there.reportId, 4 * day);
+    const listed = listLinks(db, there.lead, { report: there.reportId }, 4 * day);
     expect(listed.ok && listed.links.map(({ id, lastVisitAt }) => [id, lastVisitAt])).toEqual([
       [telling.id, 3 * day + 5678],
       [hiding.id, 3 * day]
@@ -116,7 +116,10 @@ describe('making and revoking links', () => {
 
   it('is over for a report that was put aside', () => {
     db.update(report).set({ deletedAt: 1 }).where(eq(report.id, there.reportId)).run();
-    expect(makeLink(db, there.lead, there.reportId, plainLink)).toEqual({ ok: false, reason: 'unknown' });
+    expect(makeLink(db, there.lead, { report: there.reportId }, plainLink)).toEqual({
+      ok: false,
+      reason: 'unknown'
+    });
   });
 });
 
@@ -124,6 +127,7 @@ describe('mail to named people', () => {
   const letter: LinkLetter = {
     address: 'https://example.org/link/TOKEN',
     people: ['a@example.org', 'b@example.org'],
+    opens: 'report',
     blind: true,
     allowsRemarks: true,
     expiresAt: Date.UTC(2031, 4, 6, 12),

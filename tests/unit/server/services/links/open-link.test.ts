@@ -45,7 +45,7 @@ describe('opening a link', () => {
     expect(reason(openLink(db, late.token, null, 4999))).toBe('opened');
     expect(reason(openLink(db, late.token, null, 5000))).toBe('expired');
     const closed = link();
-    revokeLink(db, there.lead, there.reportId, closed.id, 3000);
+    revokeLink(db, there.lead, { report: there.reportId }, closed.id, 3000);
     expect(reason(openLink(db, closed.token, null, 3001))).toBe('revoked');
     const gone = link();
     db.update(report).set({ deletedAt: 1 }).where(eq(report.id, there.reportId)).run();
@@ -106,7 +106,7 @@ describe('visits', () => {
     expect(looked).toMatchObject({ ok: true, visit: null });
     expect(reason(openLink(db, token, null, 3001))).toBe('opened');
     expect(reason(openLink(db, token, null, 3002, undefined, false))).toBe('used-up');
-    expect(linkVisits(db, there.lead, there.reportId, id)).toMatchObject({
+    expect(linkVisits(db, there.lead, { report: there.reportId }, id)).toMatchObject({
       visits: [{ at: 3001, outcome: 'opened' }]
     });
   });
@@ -114,7 +114,7 @@ describe('visits', () => {
   it('do not outlive a revocation', () => {
     const { id, token } = link();
     const first = openLink(db, token, null, 3000);
-    revokeLink(db, there.lead, there.reportId, id, 3001);
+    revokeLink(db, there.lead, { report: there.reportId }, id, 3001);
     expect(reason(openLink(db, token, null, 3002, first.ok ? first.visit : ''))).toBe('revoked');
   });
 
@@ -122,7 +122,7 @@ describe('visits', () => {
     const { id, token } = link({ expiresAt: 2500 });
     for (let i = 0; i < 50; i++) openLink(db, token, null, 3000 + i);
     openLink(db, token, null, 70_000);
-    expect(linkVisits(db, there.lead, there.reportId, id)).toEqual({
+    expect(linkVisits(db, there.lead, { report: there.reportId }, id)).toEqual({
       ok: true,
       visits: [
         { at: 70_000, who: null, outcome: 'refused' },
@@ -136,7 +136,7 @@ describe('visits', () => {
     const seen = (hidesReferees: boolean) => {
       const { id, token } = link({ audience: 'named', people: [referee.email], hidesReferees });
       openLink(db, token, referee, 86_400_000 * 3 + 5);
-      return linkVisits(db, there.lead, there.reportId, id);
+      return linkVisits(db, there.lead, { report: there.reportId }, id);
     };
     expect(seen(false)).toMatchObject({ visits: [{ at: 86_400_000 * 3 + 5, who: 'Referee Two' }] });
     expect(seen(true)).toMatchObject({ visits: [{ at: 86_400_000 * 3, who: null }] });

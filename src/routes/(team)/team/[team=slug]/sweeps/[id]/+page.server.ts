@@ -30,6 +30,7 @@ export const load: PageServerLoad = (event) => {
     trouble: moved && !moved.ok ? moved.why : null,
     may: {
       aside: can({ kind: 'member', ...actor }, 'delete', { createdBy: sweep.createdBy }),
+      link: can({ kind: 'member', ...actor }, 'link', { createdBy: sweep.createdBy }),
       make: can({ kind: 'member', ...actor }, 'diagnose')
     }
   };

@@ -14,7 +14,7 @@ const NOT_KEPT = { 'cache-control': 'no-store' };
 export const GET: RequestHandler = (event) => {
   const asked = askTeamJson(event, 'see');
   if (!asked.ok) return asked.response;
-  const listed = listLinks(event.locals.db, asked.actor, event.params.id);
+  const listed = listLinks(event.locals.db, asked.actor, { report: event.params.id });
   return listed.ok ? json({ links: listed.links }, { headers: NOT_KEPT }) : linkRefusal(listed.reason);
 };
 
@@ -26,12 +26,18 @@ export const POST: RequestHandler = async (event) => {
   if (!read.ok) return read.response;
   const { actor, team } = asked;
   const { db, person } = event.locals;
-  const made = makeLink(db, actor, event.params.id, read.body);
+  const made = makeLink(db, actor, { report: event.params.id }, read.body);
   if (!made.ok) return linkRefusal(made.reason);
   const address = `${event.url.origin}/link/${made.token}`;
   const missed =
     read.body.audience === 'named'
-      ? await mailLink(db, { ...read.body, address, team: team.name, from: person?.name ?? 'Somebody' })
+      ? await mailLink(db, {
+          ...read.body,
+          opens: 'report',
+          address,
+          team: team.name,
+          from: person?.name ?? 'Somebody'
+        })
       : [];
   return json({ id: made.id, address, missed }, { status: 201, headers: NOT_KEPT });
 };

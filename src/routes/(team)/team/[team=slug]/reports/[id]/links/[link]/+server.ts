@@ -10,7 +10,7 @@ export const GET: RequestHandler = (event) => {
   const asked = askTeamJson(event, 'see');
   if (!asked.ok) return asked.response;
   const { id, link } = event.params;
-  const listed = linkVisits(event.locals.db, asked.actor, id, link);
+  const listed = linkVisits(event.locals.db, asked.actor, { report: id }, link);
   if (!listed.ok) return linkRefusal(listed.reason);
   return json({ visits: listed.visits }, { headers: { 'cache-control': 'no-store' } });
 };
@@ -20,6 +20,6 @@ export const DELETE: RequestHandler = (event) => {
   const asked = askTeamJson(event, 'see');
   if (!asked.ok) return asked.response;
   const { id, link } = event.params;
-  const revoked = revokeLink(event.locals.db, asked.actor, id, link);
+  const revoked = revokeLink(event.locals.db, asked.actor, { report: id }, link);
   return revoked.ok ? new Response(null, { status: 204 }) : linkRefusal(revoked.reason);
 };
