@@ -4,7 +4,7 @@ import type { Manifest } from '$lib/model/team/transfer/archive-schema';
 export function archiveReadme({ team, madeAt, leftOut }: Omit<Manifest, 'files'>): Uint8Array {
   const aside = leftOut.datasets + leftOut.reports;
   return new TextEncoder().encode(
-    `Everything that the team "${team.name}" had in Severalty on ${madeAt}.
+    `Datasets and reports that the team "${team.name}" had in Severalty on ${madeAt}, and all that was said about them.
 
 manifest.json     format severalty.team/1: size and sha256 of every other file
 team.json         members, and who saved each dataset and made each report
@@ -16,6 +16,9 @@ reports/N.json    the diagnosis documents byte for byte
 events.json       who did what when
 
 Links are told without their tokens: importing opens none of them again.
+
+Not in here: sweeps and the links to them, maps of sites, notes on devices and versions and their order, rules of gates
+and how versions stood by them, tokens of scripts, and webhooks. Take the documents of sweeps and maps from their pages.
 ${aside === 0 ? '' : `\n${leftOut.datasets} datasets and ${leftOut.reports} reports had been put aside, or went with a dataset put aside, and are left out.\n`}`
   );
 }

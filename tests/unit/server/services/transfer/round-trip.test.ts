@@ -20,6 +20,12 @@ beforeAll(async () => {
 });
 
 describe('an archive', () => {
+  it('says what it does not carry', () => {
+    expect(textsOf(archive)['README.txt']).toMatch(
+      /Not in here: sweeps.*maps of sites.*rules of gates.*webhooks/s
+    );
+  });
+
   it('lists every file with its sha256, as anybody can check', () => {
     const files = textsOf(archive);
     const manifest = JSON.parse(files['manifest.json']) as {
