@@ -63,7 +63,7 @@ export function sweepByLink({ blind }: { blind: boolean }, thing: SharedSweep): 
 
 /** The document without what people typed: its sentences name datasets, so they are written anew from its numbers. */
 function nameless(text: string): string {
-  const { statement: _, because: __, cautions: ___, ...found } = JSON.parse(text) as SweepReport;
+  const found = JSON.parse(text) as SweepReport;
   const report = {
     ...found,
     timeUnit: neutralUnit(found.timeUnit) ?? '',
