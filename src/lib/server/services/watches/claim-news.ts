@@ -1,6 +1,7 @@
-import { and, asc, eq, gt, inArray, isNull, ne, or, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, isNull, ne, or, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { event, link, membership, person, team, watch } from '../../db/schema';
+import { newerEvents } from '../events/newer-events';
 import { newestEvent } from '../events/newest-event';
 import { isTellingTime } from './due';
 import { ALL_WATCHED_ACTIONS, kindOf, readAbout } from './watch-about';
@@ -105,8 +106,7 @@ function eventsFor(tx: Tx, { personId, teamId, about, lastEvent }: typeof watch.
     .leftJoin(link, eq(link.id, event.linkId))
     .where(
       and(
-        eq(event.teamId, teamId),
-        gt(event.id, lastEvent),
+        newerEvents(teamId, lastEvent),
         inArray(event.action, ALL_WATCHED_ACTIONS),
         or(eq(event.action, 'report.make'), isNull(event.personId), ne(event.personId, personId))
       )
@@ -129,7 +129,7 @@ export function peopleToTell(db: Database, hour: number, now: number): string[] 
     .where(
       or(
         eq(watch.rhythm, 'daily'),
-        sql`exists (select 1 from ${event} where ${event.teamId} = ${watch.teamId} and ${event.id} > ${watch.lastEvent})`
+        sql`exists (select 1 from ${event} where ${newerEvents(watch.teamId, watch.lastEvent)})`
       )
     )
     .all();

@@ -1,7 +1,8 @@
-import { and, asc, eq, gt, isNull } from 'drizzle-orm';
+import { and, asc, eq, isNull } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { newId } from '../../db/new-id';
 import { event, team, webhook, webhookDelivery } from '../../db/schema';
+import { newerEvents } from '../events/newer-events';
 
 /** Events read at a time for one webhook: a batch of a thousand diagnoses must not hold the database for long. */
 const AT_A_TIME = 500;
@@ -22,7 +23,7 @@ export function gatherDeliveries(db: Database, now = Date.now()): number {
 }
 
 function gatherFor(db: Database, webhookId: string, now: number): number {
-  const newer = and(eq(event.teamId, webhook.teamId), gt(event.id, webhook.lastEvent));
+  const newer = newerEvents(webhook.teamId, webhook.lastEvent);
   const of = and(eq(webhook.id, webhookId), isNull(webhook.restingSince));
   // Looked at first without a write, since most looks find nothing.
   const any = db.select({ id: event.id }).from(webhook).innerJoin(event, newer).where(of).limit(1).get();
