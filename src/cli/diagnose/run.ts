@@ -18,6 +18,7 @@ import { inputName } from '../shared/input-name';
 import { type Asked, parseOptions } from './parse-options';
 import { progressLine } from './progress-line';
 import { readInput } from '../shared/read-input';
+import { runCommand } from '../shared/run-command';
 import { sayProblems } from '../shared/say-problems';
 import { type Output, refuseOutput, writeOutput } from './write-output';
 
@@ -26,24 +27,8 @@ import { type Output, refuseOutput, writeOutput } from './write-output';
  *
  * @param script what a second thread runs; see secondThread
  */
-export async function runDiagnose(args: string[], script: string): Promise<ExitCode> {
-  try {
-    const asked = parseOptions(args);
-    if (asked === 'help') {
-      process.stdout.write(help);
-      return exitCodes.done;
-    }
-    return await run(asked, script);
-  } catch (error) {
-    if (error instanceof Refusal) {
-      process.stderr.write(`${error.lines.join('\n')}\n`);
-      return exitCodes.badInput;
-    }
-    const said = error instanceof Error ? (error.stack ?? error.message) : String(error);
-    process.stderr.write(`Internal error, not your file's fault: please report it.\n${said}\n`);
-    return exitCodes.internalError;
-  }
-}
+export const runDiagnose = (args: string[], script: string): Promise<ExitCode> =>
+  runCommand({ help, parse: parseOptions, run: (asked) => run(asked, script) }, args);
 
 async function run(asked: Asked, script: string): Promise<ExitCode> {
   refuseOptions(asked);

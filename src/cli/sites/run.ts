@@ -4,31 +4,20 @@ import { BadInput } from '$lib/stats/types';
 import { type ExitCode, exitCodes, Refusal } from '../shared/exit-codes';
 import { inputName } from '../shared/input-name';
 import { readInput } from '../shared/read-input';
+import { runCommand } from '../shared/run-command';
 import { sayProblems } from '../shared/say-problems';
 import { help } from './help';
 import { type AskedSites, parseArguments } from './parse-arguments';
 import { saySites } from './say-sites';
 
 /** Runs `sites` with its arguments, prints, and returns the exit code. */
-export async function runSites(args: string[]): Promise<ExitCode> {
-  try {
-    const asked = parseArguments(args);
-    if (asked === 'help') {
-      process.stdout.write(help);
-      return exitCodes.done;
-    }
-    const report = await reportOf(asked);
-    process.stdout.write(asked.json ? `${JSON.stringify(report)}\n` : saySites(report));
-    return exitCodes.done;
-  } catch (error) {
-    if (error instanceof Refusal) {
-      process.stderr.write(`${error.lines.join('\n')}\n`);
-      return exitCodes.badInput;
-    }
-    const said = error instanceof Error ? (error.stack ?? error.message) : String(error);
-    process.stderr.write(`Internal error, not your file's fault: please report it.\n${said}\n`);
-    return exitCodes.internalError;
-  }
+export const runSites = (args: string[]): Promise<ExitCode> =>
+  runCommand({ help, parse: parseArguments, run }, args);
+
+async function run(asked: AskedSites): Promise<ExitCode> {
+  const report = await reportOf(asked);
+  process.stdout.write(asked.json ? `${JSON.stringify(report)}\n` : saySites(report));
+  return exitCodes.done;
 }
 
 async function reportOf({ file, options }: AskedSites) {

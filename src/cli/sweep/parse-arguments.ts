@@ -1,5 +1,5 @@
-import { parseArgs } from 'node:util';
 import type { SweepOptions } from '$lib/stats/sweep/types';
+import { asksJson, flag, numberOf, oneFile, oneOf, readArguments, text } from '../shared/arguments';
 import { Refusal } from '../shared/exit-codes';
 
 export interface AskedSweep {
@@ -10,8 +10,6 @@ export interface AskedSweep {
   json: boolean;
 }
 
-const text = { type: 'string' } as const;
-const flag = { type: 'boolean' } as const;
 const known = {
   axis: text,
   unit: text,
@@ -30,17 +28,13 @@ const known = {
  * @throws Refusal that names the option and what it takes
  */
 export function parseArguments(args: string[]): AskedSweep | 'help' {
-  const { values, positionals } = parse(args);
+  const { values, positionals } = readArguments(args, known);
   if (values.help) return 'help';
-  if (positionals.length !== 1)
-    throw new Refusal([
-      positionals.length === 0 ? 'No file is named.' : `${positionals.length} files are named; give one.`,
-      'Usage: npm run --silent sweep -- FILE [options]; --help lists the options.'
-    ]);
-  if (values.json && values.text) throw new Refusal(['Both --json and --text are asked for; give one.']);
+  const file = oneFile('sweep', positionals);
+  const json = asksJson(values);
   const axis = oneOf('axis', values.axis ?? 'quench', ['quench', 'hold'] as const);
   return {
-    file: positionals[0],
+    file,
     options: {
       axis: axis === 'quench' ? 'quench-time' : 'hold-time',
       unit: oneOf('unit', values.unit ?? 'defect', ['defect', 'pair'] as const),
@@ -49,28 +43,8 @@ export function parseArguments(args: string[]): AskedSweep | 'help' {
     },
     from: values.from === undefined ? null : numberOf('from', values.from, 'a time above 0'),
     to: values.to === undefined ? null : numberOf('to', values.to, 'a time above 0'),
-    json: values.json ?? false
+    json
   };
-}
-
-function parse(args: string[]) {
-  try {
-    return parseArgs({ args, options: known, allowPositionals: true, strict: true });
-  } catch (error) {
-    throw new Refusal([error instanceof Error ? error.message : String(error)]);
-  }
-}
-
-function oneOf<T extends string>(name: string, value: string, allowed: readonly T[]): T {
-  const found = allowed.find((one) => one === value);
-  if (found === undefined) throw new Refusal([`--${name} takes ${allowed.join(' or ')}, not "${value}".`]);
-  return found;
-}
-
-function numberOf(name: string, value: string, what: string): number {
-  // Number('') is 0 and Number('0x1') is 1: neither was meant.
-  if (/^(\d+\.?\d*|\.\d+)(e[+-]?\d+)?$/i.test(value) && Number(value) > 0) return Number(value);
-  throw new Refusal([`--${name} takes ${what}, not "${value}".`]);
 }
 
 function transitionOf(value: string): SweepOptions['transition'] {

@@ -5,6 +5,7 @@ import { BadInput } from '$lib/stats/types';
 import { type ExitCode, exitCodes, Refusal } from '../shared/exit-codes';
 import { inputName } from '../shared/input-name';
 import { readInput } from '../shared/read-input';
+import { runCommand } from '../shared/run-command';
 import { sayProblems } from '../shared/say-problems';
 import { help } from './help';
 import { type AskedSweep, parseArguments } from './parse-arguments';
@@ -12,25 +13,13 @@ import { saySweep } from './say-sweep';
 import { sweepInputs } from './sweep-inputs';
 
 /** Runs `sweep` with its arguments, prints, and returns the exit code. */
-export async function runSweep(args: string[]): Promise<ExitCode> {
-  try {
-    const asked = parseArguments(args);
-    if (asked === 'help') {
-      process.stdout.write(help);
-      return exitCodes.done;
-    }
-    const report = await reportOf(asked);
-    process.stdout.write(asked.json ? `${JSON.stringify(report, null, 2)}\n` : saySweep(report));
-    return exitCodes.done;
-  } catch (error) {
-    if (error instanceof Refusal) {
-      process.stderr.write(`${error.lines.join('\n')}\n`);
-      return exitCodes.badInput;
-    }
-    const said = error instanceof Error ? (error.stack ?? error.message) : String(error);
-    process.stderr.write(`Internal error, not your file's fault: please report it.\n${said}\n`);
-    return exitCodes.internalError;
-  }
+export const runSweep = (args: string[]): Promise<ExitCode> =>
+  runCommand({ help, parse: parseArguments, run }, args);
+
+async function run(asked: AskedSweep): Promise<ExitCode> {
+  const report = await reportOf(asked);
+  process.stdout.write(asked.json ? `${JSON.stringify(report, null, 2)}\n` : saySweep(report));
+  return exitCodes.done;
 }
 
 async function reportOf({ file, options, from, to }: AskedSweep): Promise<SweepReport> {

@@ -6,13 +6,14 @@ import { takeSample } from '../datasets/take-sample';
 import { enqueueJobs } from '../jobs/enqueue-jobs';
 import { CATALOGUE } from '../sample-catalogue';
 import { makeTeam } from '../teams/make-team';
+import { seedDemoGate } from './seed-demo-gate';
 import { seedDemoMap } from './seed-demo-map';
 import { DEMO_PASSWORD, DEMO_PEOPLE, DEMO_TEAM } from './demo-people';
 
 /**
  * Fills an empty database with an invented team, so that there is something to look at: a person for each role, every
- * invented example as datasets, a diagnosis of each in the queue, and a map of sites; the sweep of the ramps is made
- * after their diagnoses (save-report-and-sweep.ts). Does nothing where anybody exists already.
+ * invented example as datasets, a diagnosis of each in the queue, the rule of a gate, and a map of sites; the sweep of
+ * the ramps is made after their diagnoses (save-report-and-sweep.ts). Does nothing where anybody exists already.
  *
  * @returns whether the team was made
  */
@@ -45,6 +46,7 @@ export async function seedDemoTeam(db: Database, now = Date.now()): Promise<bool
       now
     );
   }
+  seedDemoGate(db, actor);
   seedDemoMap(db, actor, now);
   return true;
 }

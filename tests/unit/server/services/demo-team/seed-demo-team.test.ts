@@ -5,6 +5,8 @@ import { DEMO_PASSWORD, DEMO_PEOPLE } from '$lib/server/services/demo-team/demo-
 import { demoPeopleOf } from '$lib/server/services/demo-team/demo-people-of';
 import { seedDemoTeam } from '$lib/server/services/demo-team/seed-demo-team';
 import { seedSamples } from '$lib/server/services/seed-samples';
+import { findGate } from '$lib/server/services/gates/find-gate';
+import { readGate } from '$lib/server/services/gates/read-gate';
 import { describe, expect, it } from 'vitest';
 import { freshDatabase } from '../../../../support/fresh-database';
 import { makePerson } from '../../../../support/people';
@@ -33,6 +35,20 @@ describe('seedDemoTeam', () => {
     expect(datasets.filter(({ firmware }) => firmware !== null)).toHaveLength(4);
     expect(datasets.filter(({ quenchTime }) => quenchTime !== null)).toHaveLength(6);
     expect(db.select().from(job).all()).toHaveLength(20);
+    const lead = db
+      .select()
+      .from(membership)
+      .all()
+      .find(({ role }) => role === 'lead')!;
+    const found = (version: string) => findGate(db, lead, { device: 'Marram', version });
+    const outcomes = ['ebb 3.1', 'ebb 3.2', 'ebb 3.3', 'ebb 3.4'].map((version) => {
+      const at = found(version);
+      if (!at.ok) throw new Error(at.reason);
+      const gate = readGate(db, lead, at.device.id, at.version.id);
+      return gate.ok ? gate.report.outcome : gate.reason;
+    });
+    // Nothing is diagnosed yet; what has failed already stays failed.
+    expect(outcomes).toEqual(['undecided', 'undecided', 'failed', 'undecided']);
     const [{ passwordHash }] = db.select().from(person).all();
     expect(await passwordFits(passwordHash, DEMO_PASSWORD)).toBe(true);
   });
