@@ -18,6 +18,7 @@ export function makeQuench(db: Database, actor: Actor, laws: Float64Array[], see
       counts: JSON.stringify({ kind: 'histogram', counts: pairs.map(([n, s]) => [2 * n, s]), lump: null }),
       unit: 'pair',
       geometry: 'ring-bonds',
+      trials: 512,
       device: 'Invented ring',
       quenchTime: times[i],
       quenchUnit: 'µs'

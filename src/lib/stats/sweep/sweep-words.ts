@@ -1,5 +1,6 @@
 import { formatNumber } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
+import { misreadCaution } from './misread-caution';
 import type { SweepReport } from './types';
 
 type Found = Omit<SweepReport, 'statement' | 'because' | 'cautions'>;
@@ -75,7 +76,7 @@ const sayChange = (p: number | null, alpha: number): string =>
       ? `, but it is not the same at every time (${thinP(p)})`
       : `, the same at every time within errors (${thinP(p)})`;
 
-function cautionsOf({ laws, steady, unit, axis }: Found): string[] {
+function cautionsOf({ laws, steady, unit, axis, points }: Found): string[] {
   const lines = [
     'A power law in a window does not say which physics made it: plateaus at the fast end and a background at the slow end end it, so look how the exponent moves with the window.'
   ];
@@ -94,5 +95,5 @@ function cautionsOf({ laws, steady, unit, axis }: Found): string[] {
     lines.push(
       'Well-mixed annihilation of pairs, A + A → 0, takes the variance to two thirds of the mean in the end; correlated or confined defects need not.'
     );
-  return lines;
+  return [...lines, ...misreadCaution(points)];
 }

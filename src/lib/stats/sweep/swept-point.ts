@@ -10,11 +10,16 @@ import type { KnownInterval, SweepInput, SweepOptions, SweptPoint } from './type
  * @param axis F2/F1² is told for hold times alone, where it is the question
  */
 export function sweptPoint(
-  { label, time, counts, dataset }: SweepInput,
+  { label, time, counts, trials, misread, dataset }: SweepInput,
   axis: SweepOptions['axis']
 ): Omit<SweptPoint, 'inWindow'> {
   const shots = counts.reduce((sum, [, seen]) => sum + seen, 0);
-  const place = { label, time, shots, ...(dataset && { dataset }) };
+  const place = {
+    ...{ label, time, shots },
+    ...(trials !== undefined && { trials }),
+    ...(misread !== undefined && { misread }),
+    ...(dataset && { dataset })
+  };
   const held = axis === 'hold-time';
   const known = cumulantErrors(counts);
   if (!known)

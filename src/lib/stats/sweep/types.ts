@@ -24,6 +24,9 @@ export interface SweepInput {
   time: number;
   /** `[count, shots]`, counted in the unit of the sweep. */
   counts: [number, number][];
+  /** N, and the rate at which a site is misread, as stated; null where none is. */
+  trials?: number | null;
+  misread?: number | null;
   dataset?: SweptDataset;
 }
 
@@ -45,6 +48,9 @@ export interface SweptPoint {
   time: number;
   shots: number;
   inWindow: boolean;
+  /** N, and the rate at which a site is misread, as stated. The first documents did not have them. */
+  trials?: number | null;
+  misread?: number | null;
   /** Left out where the counts come from no saved dataset. */
   dataset?: SweptDataset;
   /** κ1, κ2, κ3; null where the counts take fewer than four values, which tells no errors. */

@@ -25,6 +25,8 @@ export const sweepDocumentSchema = z.object({
       time: z.number(),
       shots: z.int(),
       inWindow: z.boolean(),
+      trials: z.int().nullable().optional().describe('N as stated'),
+      misread: z.number().nullable().optional().describe('Rate at which a site is misread, as stated'),
       dataset: z
         .object({
           id: z.string(),

@@ -4,23 +4,20 @@ import { toHistogram } from '../../../stats/input/to-histogram';
 import type { SweepInput, SweepOptions } from '../../../stats/sweep/types';
 import { BadInput, type CountData, type Interval, type Unit } from '../../../stats/types';
 import type { ChosenDataset } from './chosen-datasets';
+import { refuseUnlike } from './refuse-unlike';
 
 /**
  * Saved datasets as a sweep takes them: times in one unit, that of the first of them, and counts in the unit that all
  * state.
  *
- * @throws BadInput where a time is missing, units of time or of counting are mixed, counts are lumped, or odd counts
- *   are to be pairs
+ * @throws BadInput where a time is missing, units of time are mixed, datasets are unlike (refuseUnlike), counts are lumped,
+ *   or odd counts are to be pairs
  */
 export function inputsOfDatasets(
   chosen: ChosenDataset[],
   axis: SweepOptions['axis']
 ): { inputs: SweepInput[]; timeUnit: string; unit: Unit } {
-  const other = chosen.find(({ unit }) => unit !== chosen[0].unit);
-  if (other)
-    throw new BadInput(
-      `“${chosen[0].name}” is counted in ${chosen[0].unit}s and “${other.name}” in ${other.unit}s: choose datasets of one unit.`
-    );
+  refuseUnlike(chosen);
   const quench = axis === 'quench-time';
   const stated = chosen.map((one) => ({
     label: one.name,
@@ -30,7 +27,7 @@ export function inputsOfDatasets(
   const times = oneTimeUnit(stated, quench ? 'quench time' : 'hold time');
   if (!times.ok) throw new BadInput(times.reason);
   const [{ unit }] = chosen;
-  const inputs = chosen.map(({ id, name, digest, verdict, dispersion, counts, kept }, i) => {
+  const inputs = chosen.map(({ id, name, digest, verdict, dispersion, counts, kept, trials, misread }, i) => {
     const { histogram } = inUnits(toHistogram(JSON.parse(counts) as CountData), null, unit);
     if (histogram.lump || histogram.below)
       throw new BadInput(
@@ -45,6 +42,8 @@ export function inputsOfDatasets(
       label: name,
       time: times.times[i],
       counts: histogram.counts,
+      trials,
+      misread,
       dataset: { id, digest, verdict, dispersion: known && known.value !== null ? known : null }
     };
   });

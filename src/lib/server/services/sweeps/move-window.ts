@@ -41,10 +41,10 @@ export function moveWindow(
   if (gone) return { ok: false, why: `The counts of “${gone.label}” are gone: the window cannot be moved.` };
   return told(() =>
     sweepReport(
-      points.map(({ label, time, dataset: from }) => {
+      points.map(({ label, time, trials, misread, dataset: from }) => {
         const data = JSON.parse(counts.get(from!.id)!) as CountData;
         const { histogram } = inUnits(toHistogram(data), null, unit);
-        return { label, time, counts: histogram.counts, dataset: from };
+        return { label, time, counts: histogram.counts, trials, misread, dataset: from };
       }),
       options
     )

@@ -58,6 +58,20 @@ describe('a saved sweep of a Landau–Zener quench over two decades, 5000 shots 
     expect(read.document!.cautions.join(' ')).toMatch(/do not say which/);
   });
 
+  it('keeps N, and says whose misreads are not taken out', () => {
+    const { db, maker } = setting();
+    const ids = makeQuench(db, maker, free, 1);
+    const clear = readSweep(db, maker, saved(db, maker, asked(ids)));
+    db.update(dataset).set({ misread: 0.01 }).where(eq(dataset.id, ids[2])).run();
+    const read = readSweep(db, maker, saved(db, maker, asked(ids)));
+    if (!read.ok || !clear.ok) throw new Error('gone');
+    expect(read.document!.points.map(({ trials }) => trials)).toEqual(ids.map(() => 512));
+    expect(read.document!.cautions.at(-1)).toMatch(
+      /^Misreads are stated for “quench 3”, and are not taken out/
+    );
+    expect(clear.document!.cautions.join(' ')).not.toMatch(/Misreads are stated/);
+  });
+
   it('converts units that are known, and stays as it was when its datasets change', () => {
     const { db, maker } = setting();
     const ids = makeQuench(db, maker, free, 1);
@@ -83,6 +97,7 @@ describe('what makes no sweep is refused in words, and nothing is kept', () => {
         name: 'the other',
         counts: '{"kind":"histogram","counts":[[0,9],[2,1]],"lump":null}',
         unit: 'pair',
+        geometry: 'ring-bonds',
         quenchTime: 10,
         quenchUnit: 'µs',
         ...more
@@ -96,6 +111,16 @@ describe('what makes no sweep is refused in words, and nothing is kept', () => {
     ['units nobody knows', /Units are mixed: .*“ħ\/J”/, { quenchUnit: 'ħ/J' }],
     ['defects beside pairs', /“the other” in defects: choose/, { unit: 'defect' }],
     ['odd counts as pairs', /must be even/, counts('[[0,9],[1,1]]', 'null')],
+    [
+      'another geometry',
+      /“quench 1” counts kinks round a ring and “the other” excited sites/,
+      { geometry: 'sites' }
+    ],
+    [
+      'another N',
+      /“quench 1” has N = 512 and “the other” N = 420: every cumulant grows with N/,
+      { trials: 420 }
+    ],
     ['a lump', /“the other” lumps counts/, counts('[[0,9],[2,1]]', '{"from":4,"shots":1}')],
     ['a cut', /Of “the other” only the counts 2- were kept/, { kept: '2-' }]
   ];
