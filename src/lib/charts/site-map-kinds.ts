@@ -15,7 +15,7 @@ export interface DrawnPairs {
 
 /**
  * The pairs of a map that are drawn: those that were found, as a rise or a fall, or as nothing that can be read one by one
- * where all sites move together; and those that were not found, but whose own interval leaves 0.
+ * where all sites move together or avoid each other; and those that were not found, but whose own interval leaves 0.
  */
 export function siteMapKinds({
   pairs,

@@ -12,7 +12,7 @@ const LOOKS: Record<PairKind, { role: Role; shape: Shape; label: string }> = {
   unread: {
     role: 'observed-unsure',
     shape: 'diamond',
-    label: 'correlated, but not to be read by itself: all sites move together'
+    label: 'correlated, but not to be read by itself: all sites move together, or apart'
   },
   fallen: { role: 'observed-fewer', shape: 'down', label: 'found: excited together less often' },
   risen: { role: 'observed-more', shape: 'up', label: 'found: excited together more often' }

@@ -22,7 +22,9 @@ export function changePower(
 ): ChangePower {
   const { sites, geometry, alpha, seek } = asked;
   const near = geometry === 'ring' && sites > 2 ? sites : sites - 1;
-  const level = (alpha * neighbourShare[seek]) / near / (seek === 'rise' ? 1 : 2);
+  const all = (sites * (sites - 1)) / 2;
+  const share = all > near ? neighbourShare[seek] : 1;
+  const level = (alpha * share) / near / (seek === 'rise' ? 1 : 2);
   const reach = -normalQuantile(level);
   const error = Math.sqrt(1 / asked.shots[0] + 1 / asked.shots[1]);
   return {

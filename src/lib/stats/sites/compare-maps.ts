@@ -21,7 +21,7 @@ export interface MapsCompared {
   seek: Seek;
   /** Level of the family of all pairs: the stricter of the two maps'. */
   alpha: number;
-  /** Whether all sites move together in either map: then pairs are not to be read one by one. */
+  /** Whether all sites move together, or avoid each other, in either map: then pairs are not to be read one by one. */
   common: boolean;
   pairs: ChangedPair[];
 }

@@ -40,7 +40,7 @@ export function mapsCompared(earlier: SitesReport, later: SitesReport): MapsComp
   const nameOf = ({ first, second }: ChangedPair) => `${names[first]} and ${names[second]}`;
   const all = formatCount(pairs.length);
   const statement = common
-    ? 'All sites of at least one of the maps move together: changes of single pairs cannot be read one by one.'
+    ? 'All sites of at least one of the maps move together, or avoid each other: changes of single pairs cannot be read one by one.'
     : changed.length === 0
       ? `No pair of ${all} changed by more than chance allows; neighbours whose correlation changed by ${told} would be found with a chance of about ${formatPercent(power.power)}.`
       : changed.length === 1

@@ -53,7 +53,8 @@ export function pairPower(correlation: number, asked: PowerAsked): PairPower {
   return {
     correlation,
     rate,
-    neighbour: reach(share, near),
+    // Where all pairs are neighbours they have all of the error.
+    neighbour: reach(all > near ? share : 1, near),
     distant: all > near ? reach(1 - share, all - near) : null
   };
 }

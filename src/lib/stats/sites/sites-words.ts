@@ -22,8 +22,14 @@ const nameOf = ({ names }: Found, { first, second }: MappedPair) => `${names[fir
 
 function statementOf(map: Found, found: MappedPair[]): string {
   const all = formatCount(map.pairs.length);
-  if (map.common.shown && found.length !== 1)
-    return `All sites move together: the mean correlation of ${formatCount(map.common.pairs)} pairs is ${formatNumber(map.common.mean, 2)}. Single pairs cannot be read one by one.`;
+  if (map.common.shown && found.length !== 1) {
+    const { pairs, mean } = map.common;
+    const what =
+      (mean ?? 0) > 0
+        ? 'All sites move together'
+        : 'Sites avoid each other on the whole, by repulsion or because shots were selected by their total';
+    return `${what}: the mean correlation of ${formatCount(pairs)} distant pairs is ${formatNumber(mean, 2)}. Single pairs cannot be read one by one.`;
+  }
   if (found.length === 0)
     return `No pair of ${all} is correlated by more than chance allows; a neighbouring pair with correlation ${map.power.correlation} would be found with a chance of ${formatPercent(map.power.neighbour.power)}.`;
   if (found.length === 1)
@@ -54,7 +60,11 @@ function cautionsOf({ common, power, seek, shots, names }: Found, found: MappedP
   const lines: string[] = [];
   if (common.shown)
     lines.push(
-      `${formatPercent(common.positive)} of the pairs have a correlation above 0, with a mean of ${formatNumber(common.mean, 2)} (p = ${formatNumber(common.p, 2)}): a common cause, such as drifting rates or dead shots, moves all sites. Find it before any pair is read by itself.`
+      `${formatPercent(common.positive)} of the distant pairs have a correlation above 0, with a mean of ${formatNumber(common.mean, 2)} (p = ${formatNumber(common.p, 2)}): ${
+        (common.mean ?? 0) > 0
+          ? 'a common cause, such as drifting rates or dead shots, moves all sites'
+          : 'sites repel each other at every distance, or shots were kept or dropped by how many sites were excited'
+      }. Find it before any pair is read by itself.`
     );
   const { neighbour, distant } = power;
   const each = (name: string, { power: chance, shots: needed }: FoundChance) =>
@@ -62,11 +72,12 @@ function cautionsOf({ common, power, seek, shots, names }: Found, found: MappedP
   lines.push(
     `Among ${names.length} sites of this rate, ${formatCount(shots)} shots find one pair with correlation ${power.correlation}: ${each('neighbours', neighbour)}${distant ? `, ${each('a distant pair', distant)}` : ''}. A pair that is not found may be there.`
   );
-  lines.push(
-    seek === 'rise'
-      ? 'Only a rise was looked for, neighbours before all others: this has to be declared before the data are seen. Sites that repel each other are not found in this way.'
-      : 'Neighbours have half of the allowed error, all other pairs the other half.'
-  );
+  if (distant !== null || seek === 'rise')
+    lines.push(
+      seek === 'rise'
+        ? 'Only a rise was looked for, neighbours before all others: this has to be declared before the data are seen. Sites that repel each other are not found in this way.'
+        : 'Neighbours have half of the allowed error, all other pairs the other half.'
+    );
   if (found.length > 0)
     lines.push(
       'A correlation does not say which of the two sites acts on the other, nor whether a third acts on both.'
