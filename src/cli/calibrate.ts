@@ -5,6 +5,7 @@ import { summary } from '$lib/stats/calibration/summary';
 import { readArguments } from './calibrate/arguments';
 import { runJob } from './calibrate/job';
 import { plan } from './calibrate/plan';
+import { reportGates } from './calibrate/report-gates';
 import { reportPlans, reportPrinted } from './calibrate/report-apart';
 import { reportTogether, reportTruths, reportViolations } from './calibrate/report';
 import { runJobs, type FromThread, type ToThread } from './calibrate/run-jobs';
@@ -30,7 +31,13 @@ async function main(): Promise<void> {
   }
   const { asked } = read;
   for (const what of asked.instead)
-    console.log(what === 'plans' ? reportPlans(asked.seed) : reportPrinted(asked.seed, asked.repeats(500)));
+    console.log(
+      what === 'plans'
+        ? reportPlans(asked.seed)
+        : what === 'gates'
+          ? reportGates(asked.seed, asked.repeats(500))
+          : reportPrinted(asked.seed, asked.repeats(500))
+    );
   if (asked.instead.length > 0) return;
   const { rows, jobs } = plan(asked);
   const started = Date.now();

@@ -11,6 +11,7 @@ export const usage = `npm run calibrate -- [options]
   --violation A,B     only violations whose name begins so; "none" for none
   --nuisance A,B      nuisances whose name begins so, without and with twice the smallest excess; "all" (none)
   --plans             instead: the planner's power beside simulated power, over a grid of plans
+  --gates             instead: how simulated gates of firmware versions end, without and with a rise (--repeats each)
   --printed           instead: answers from printed cumulants alone, false alarms and power (--repeats each)
   --resamples N       resamples of each diagnosis (399)
   --full N            resamples the answer at 0.01 is decided with (1999)
@@ -33,7 +34,7 @@ export interface CalibrateArguments {
   threads: number;
   json: string | null;
   /** What is done instead of diagnoses. */
-  instead: ('plans' | 'printed')[];
+  instead: ('plans' | 'printed' | 'gates')[];
 }
 
 /** What the command line asks for, or the complaint about it. */
@@ -46,6 +47,7 @@ export function readArguments(
       options: {
         quick: { type: 'boolean' },
         plans: { type: 'boolean' },
+        gates: { type: 'boolean' },
         printed: { type: 'boolean' },
         repeats: { type: 'string' },
         shots: { type: 'string' },
@@ -76,9 +78,11 @@ export function readArguments(
         seed: whole('seed', values.seed ?? '1'),
         threads: whole('threads', values.threads ?? '2'),
         json: values.json ?? null,
-        instead: [values.plans && ('plans' as const), values.printed && ('printed' as const)].filter(
-          (one) => one !== undefined && one !== false
-        )
+        instead: [
+          values.plans && ('plans' as const),
+          values.printed && ('printed' as const),
+          values.gates && ('gates' as const)
+        ].filter((one) => one !== undefined && one !== false)
       }
     };
   } catch (error) {

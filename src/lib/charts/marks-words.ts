@@ -18,6 +18,8 @@ export const HINDRANCES: Record<Hindrance, string> = {
   lumped: 'counts are lumped',
   cut: 'only some counts were kept',
   'misread-bonds': 'misread bonds change the ceiling',
+  'ring-in-defects': 'bonds of a ring counted one by one come in twos',
+  'above-tolerance': 'its own interval lies above the tolerance',
   'no-spread': 'all counts are equal',
   'odd-pairs': 'odd counts, or more than N',
   'trials-differ': 'another number of trials than the reference',

@@ -14,7 +14,7 @@ export interface CellMoments {
 
 /**
  * Moments of a cell, where its counts tell them: lumped counts hide the variance, a declared cut and misread bonds change
- * the ceiling, and equal counts have no spread. Misread sites stay independent trials, so that rate needs no ceiling of
+ * the ceiling, kinks of a ring counted one by one have twice the variance of their pairs, and equal counts have no spread. Misread sites stay independent trials, so that rate needs no ceiling of
  * its own. A cell with no shots is hindered by `no-counts`, odd counts or more counts than N by `odd-pairs`.
  */
 export function cellMoments(cell: VersionCell): CellMoments {
@@ -25,6 +25,7 @@ export function cellMoments(cell: VersionCell): CellMoments {
   if (lump?.shots || below?.shots) return stop('lumped');
   if (cell.kept && (cell.kept.from > 0 || cell.kept.to !== null)) return stop('cut');
   if (cell.misread && cell.geometry !== 'sites') return stop('misread-bonds');
+  if (cell.geometry === 'ring-bonds' && cell.unit === 'defect') return stop('ring-in-defects');
   const taken = taking(cell);
   if (!taken) return stop('odd-pairs');
   const moments = logDispersion(taken);

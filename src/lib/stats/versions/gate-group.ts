@@ -3,7 +3,7 @@ import { cellMoments, type CellMoments } from './cell-moments';
 import { dispersionInterval } from './dispersion-interval';
 import { dispersionRise } from './dispersion-rise';
 import { notAlike } from './not-alike';
-import { sayHindrance } from './say-hindrance';
+import { sayHindrance, type PlainHindrance } from './say-hindrance';
 import { smallestSeen } from './smallest-seen';
 import type { GateGroup, GateRule, Hindrance, VersionCell } from './types';
 
@@ -33,7 +33,7 @@ export function gateGroup(
     hindrances: [],
     reasons: []
   };
-  const stop = (hindrance: Exclude<Hindrance, 'too-few-shots'>, name: string) => {
+  const stop = (hindrance: PlainHindrance, name: string) => {
     found.hindrances.push(hindrance);
     found.reasons.push(sayHindrance(hindrance, name));
   };
@@ -42,7 +42,7 @@ export function gateGroup(
     if (!one) return null;
     if (one.diagnosis === null) stop('not-diagnosed', name);
     const { known, hindrances } = cellMoments(one);
-    for (const hindrance of hindrances) if (hindrance !== 'too-few-shots') stop(hindrance, name);
+    for (const hindrance of hindrances) if (isPlain(hindrance)) stop(hindrance, name);
     return known;
   };
   const mine = take(cell, version);
@@ -51,7 +51,8 @@ export function gateGroup(
     found.dispersion = dispersionInterval(mine.moments);
     const z = (mine.moments.log - Math.log1p(rule.tolerance)) / mine.moments.error;
     found.overTolerance = { z, p: upper(z), pAdjusted: 1 };
-    found.smallestExcess = smallestSeen(mine.moments.error, level);
+    // Seen over the tolerance, not over the ceiling: (1 + tolerance)·exp(zσ) − 1.
+    found.smallestExcess = (1 + rule.tolerance) * (1 + smallestSeen(mine.moments.error, level)) - 1;
   }
   if (own) return found;
   if (rule.reference === null) {
@@ -61,14 +62,15 @@ export function gateGroup(
   const theirs = take(reference, rule.reference);
   if (theirs) found.referenceDispersion = dispersionInterval(theirs.moments);
   const apart = cell && reference ? notAlike(cell, reference) : [];
-  for (const hindrance of apart) if (hindrance !== 'too-few-shots') stop(hindrance, version);
+  for (const hindrance of apart) if (isPlain(hindrance)) stop(hindrance, version);
   if (!mine || !theirs || apart.length > 0) return found;
   const rise = dispersionRise(mine.counts, theirs.counts);
   if (rise) found.overReference = { ...rise, pAdjusted: 1 };
   found.smallestRise = smallestSeen(Math.hypot(mine.moments.error, theirs.moments.error), level);
-  // The worse of the two decides whether there are enough shots.
-  found.smallestExcess = smallestSeen(Math.max(mine.moments.error, theirs.moments.error), level);
   return found;
 }
+
+const isPlain = (hindrance: Hindrance): hindrance is PlainHindrance =>
+  hindrance !== 'too-few-shots' && hindrance !== 'above-tolerance';
 
 const upper = (z: number): number => Math.min(1, Math.exp(logNormalTail(z)));

@@ -12,7 +12,7 @@ export function gateWords(found: Found): Pick<GateReport, 'statement' | 'because
   const statement = {
     failed: `Version ${version} fails: ${of} ${named.length === 1 ? 'scatters' : 'scatter'} more than the rule allows (${listed(named)}).`,
     undecided: `Version ${version} is undecided: ${of} cannot be judged (${listed(named)}).`,
-    passed: `Version ${version} passes: no group of ${groups.length} scatters more than the rule allows, as far as its shots tell.`
+    passed: `Version ${version} passes: no group of ${groups.length} is seen to scatter more than the rule allows.`
   }[outcome];
   const because = groups
     .filter((group) => outcome === 'passed' || group.outcome !== 'passed')

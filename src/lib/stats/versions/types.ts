@@ -54,12 +54,16 @@ export type Hindrance =
   | 'lumped'
   | 'cut'
   | 'misread-bonds'
+  /** Kinks round a ring come in twos: counted one by one their variance is twice what the ceiling allows. */
+  | 'ring-in-defects'
   | 'no-spread'
   | 'odd-pairs'
   | 'trials-differ'
   | 'unit-differs'
   | 'geometry-differs'
-  | 'too-few-shots';
+  | 'too-few-shots'
+  /** Its own interval lies above the tolerance, though not by enough among all the tests of a gate. */
+  | 'above-tolerance';
 
 export type Mark = 'reference' | 'risen' | 'differs' | 'no-difference-seen' | 'cannot-tell' | 'unmarked';
 
@@ -123,7 +127,10 @@ export interface GateGroup {
   overTolerance: GateTest | null;
   /** One-sided: is variance/ceiling above that of the reference? */
   overReference: (GateTest & { factor: number }) | null;
-  /** Smallest excess over the ceiling seen with 80 % power at alpha over the number of tests, as a fraction. */
+  /**
+   * Smallest excess over the ceiling that is seen to be above the tolerance with 80 % power at alpha over the number of
+   * tests, as a fraction: never less than the tolerance.
+   */
   smallestExcess: number | null;
   /** The same for a rise over the reference. */
   smallestRise: number | null;

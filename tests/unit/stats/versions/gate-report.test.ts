@@ -73,19 +73,20 @@ describe('gateReport', () => {
   });
 
   it('holds a reference to the tolerance alone', () => {
-    const own = gateReport(rule, '1', version(generator(53, 0), '1', 5000));
+    const own = gateReport(rule, '1', version(generator(53, 0), '1', 8000));
     expect(own).toMatchObject({ outcome: 'passed', tests: 8 });
     expect(own.groups.every(({ overReference }) => overReference === null)).toBe(true);
   });
 
   const random = generator(54, 0);
-  const [one, two] = [version(random, '1', 5000), version(random, '2', 5000)];
+  const [one, two] = [version(random, '1', 8000), version(random, '2', 8000)];
   it.each<[string, Partial<VersionCell> | null, string]>([
     ['is missing', null, 'no-counts'],
     ['waits for its diagnosis', { diagnosis: null }, 'not-diagnosed'],
     ['has N unknown', { trials: null }, 'trials-differ'],
     ['is counted in another geometry', { geometry: 'open-bonds' }, 'geometry-differs'],
     ['has odd pairs', { unit: 'pair' }, 'odd-pairs'],
+    ['counts bonds of a ring one by one', { geometry: 'ring-bonds' }, 'ring-in-defects'],
     ['was cut', { kept: { from: 1, to: null } }, 'cut'],
     ['has misread bonds', { geometry: 'open-bonds', misread: 0.01 }, 'misread-bonds'],
     [
@@ -110,21 +111,57 @@ describe('gateReport', () => {
     const few = gateReport(rule, '2', [...version(random, '1', 500), ...version(random, '2', 500)]);
     expect(few.outcome).toBe('undecided');
     expect(few.groups[0].hindrances).toEqual(['too-few-shots']);
-    // (z at 0.05/16 + z at 80 %)·√(2·(1 − 1/64)/500): quantiles 2.734, 0.8416 from tables; exp(0.2244) − 1.
-    expect(few.groups[0].smallestExcess).toBeGreaterThan(0.235);
+    // (z at 0.05/16 + z at 80 %)·√(2·(1 − 1/64)/500): quantiles 2.734, 0.8416 from tables; 1.1·exp(0.2244) − 1.
+    expect(few.groups[0].smallestExcess).toBeGreaterThan(0.37);
+    // Of a difference of two: exp(0.2244·√2) − 1.
+    expect(few.groups[0].smallestRise).toBeGreaterThan(0.37);
     const gone = gateReport({ ...rule, reference: null }, '2', two);
     expect(gone.outcome).toBe('undecided');
     expect(gone.because[0]).toContain('the reference is gone');
   });
 
   it('does not pass a failed version once missing groups come in', () => {
-    const crossed = version(generator(55, 0), '2', 5000, 0.1, 1.5);
+    const crossed = version(generator(55, 0), '2', 8000, 0.1, 1.5);
     const early = gateReport(rule, '2', [...one, crossed[0]]);
     const late = gateReport(rule, '2', [...one, ...crossed]);
     expect([early.outcome, late.outcome]).toEqual(['failed', 'failed']);
     expect(early.groups[0].overTolerance?.pAdjusted).toBeGreaterThanOrEqual(
       late.groups[0].overTolerance!.pAdjusted
     );
+  });
+
+  it('does not pass where too few shots would hide a rise of the tolerance: of 60 versions with such a rise', () => {
+    const one: GateRule = { ...rule, groups: ['a'] };
+    const outcomes = Array.from({ length: 60 }, (_, run) => {
+      const random = generator(56, run);
+      const cells = [...version(random, '1', 2500), ...version(random, '2', 2500, 0.1, 1.1)];
+      return gateReport(one, '2', cells).outcome;
+    });
+    expect(outcomes).not.toContain('passed');
+  });
+
+  it('does not pass a group whose own interval lies above the tolerance, and says a pass in its numbers', () => {
+    let [near, above] = [0, 0];
+    for (let run = 0; run < 40; run++) {
+      const random = generator(57, run);
+      const cells = [...version(random, '1', 8000, 0.1, 1.12), ...version(random, '2', 8000, 0.1, 1.15)];
+      const [{ outcome, dispersion, hindrances, reasons }] = gateReport(rule, '2', cells).groups;
+      if (hindrances.includes('above-tolerance')) near++;
+      if (outcome !== 'passed') continue;
+      expect(dispersion!.low).toBeLessThanOrEqual(1.1);
+      if (dispersion!.value <= 1.1) continue;
+      above++;
+      expect(reasons[0]).toContain('above 1.10, but not by more than chance allows');
+    }
+    expect(near).toBeGreaterThan(0);
+    expect(above).toBeGreaterThan(0);
+  });
+
+  it('says what excess is seen to be above the tolerance', () => {
+    const { groups } = gateReport({ ...rule, tolerance: 0.5 }, '1', one);
+    // The level is 0.05/8: quantiles 2.498 and 0.8416 from tables; 1.5·exp(3.339·√(2·(63/64)/8000)) − 1 = 0.581.
+    expect(groups[0].smallestExcess).toBeGreaterThan(0.57);
+    expect(groups[0].smallestExcess).toBeLessThan(0.61);
   });
 
   it('takes only the groups of the rule', () => {

@@ -88,8 +88,11 @@ export const gateDocumentSchema = z.object({
         .extend({ factor: z.number() })
         .nullable()
         .describe('Is it above that of the reference?'),
-      smallestExcess: z.number().nullable().describe('Smallest excess seen with 80 % power'),
-      smallestRise: z.number().nullable(),
+      smallestExcess: z
+        .number()
+        .nullable()
+        .describe('Smallest excess over the ceiling that is seen to be above the tolerance with 80 % power'),
+      smallestRise: z.number().nullable().describe('The same for a rise over the reference'),
       hindrances: z.array(z.string()),
       reasons: z.array(z.string())
     })
