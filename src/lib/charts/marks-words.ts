@@ -22,7 +22,7 @@ export const HINDRANCES: Record<Hindrance, string> = {
   'above-tolerance': 'its own interval lies above the tolerance',
   'no-spread': 'all counts are equal',
   'odd-pairs': 'odd counts, or more than N',
-  'trials-differ': 'another number of trials than the reference',
+  'trials-differ': 'the number of trials is known on one side only',
   'unit-differs': 'another unit than the reference',
   'geometry-differs': 'another geometry than the reference',
   'too-few-shots': 'too few shots'

@@ -31,14 +31,13 @@ export function timelineTitle(
 /** What the table of marks shows at a glance. */
 export function marksTitle({ marks, reference }: Pick<DeviceTimeline, 'marks' | 'reference'>): string {
   if (reference === null) return 'No version has counts yet';
-  const cells = marks.flat().filter((cell) => cell !== null);
-  const compared = cells.filter(({ mark }) => mark !== 'reference').length;
-  if (compared === 0) return `No version has been measured beside ${reference}`;
-  const risen = cells.filter(({ mark }) => mark === 'risen').length;
-  const told = cells.filter(({ mark }) => mark === 'no-difference-seen' || mark === 'differs').length;
-  if (risen > 0)
-    return `The variance rises over ${reference} in ${formatCount(risen)} of ${formatCount(compared)} cells`;
-  return told > 0
-    ? `No rise over ${reference} is seen in ${formatCount(compared)} cells`
-    : `Nothing can be told of a rise over ${reference} yet`;
+  const compared = marks.flat().filter((cell) => cell !== null && cell.mark !== 'reference');
+  if (compared.length === 0) return `No version has been measured beside ${reference}`;
+  const all = formatCount(compared.length);
+  const risen = compared.filter((cell) => cell?.mark === 'risen').length;
+  if (risen > 0) return `The variance rises over ${reference} in ${formatCount(risen)} of ${all} cells`;
+  const seeing = compared.filter((cell) => cell?.seesRise).length;
+  if (seeing === 0) return `Nothing can be told of a rise over ${reference} yet`;
+  const blind = compared.length - seeing;
+  return `No rise over ${reference} is seen in ${formatCount(seeing)} of ${all} cells${blind > 0 ? `; ${formatCount(blind)} cannot tell` : ''}`;
 }

@@ -28,6 +28,7 @@ const cell = (mark: Mark, more: Partial<TimelineMark> = {}): TimelineMark => ({
   factor: 1.01,
   pAdjusted: 0.6,
   hindrance: null,
+  seesRise: mark === 'no-difference-seen',
   ...more
 });
 

@@ -46,7 +46,10 @@ export function cellReport(cell: VersionCell, reference: VersionCell | undefined
   const theirs = cellMoments(reference);
   open.hindrances = notAlike(cell, reference);
   if (!theirs.known || open.hindrances.length > 0) return open;
-  open.limits = controlLimits(theirs.known.moments, { reference: theirs.shots, version: shots });
+  const limits = controlLimits(theirs.known.moments, { reference: theirs.shots, version: shots });
+  // With another number of trials another mean is no finding.
+  const sameTrials = cell.trials === reference.trials;
+  open.limits = sameTrials ? limits : { ...limits, mean: null };
   const rise = dispersionRise(counts, theirs.known.counts);
   if (!rise) return open;
   open.rise = { factor: rise.factor, p: rise.p, pAdjusted: 1 };
@@ -55,6 +58,8 @@ export function cellReport(cell: VersionCell, reference: VersionCell | undefined
     (moments.mean - theirs.known.moments.mean) /
     Math.hypot(moments.meanError, theirs.known.moments.meanError);
   const fall = Math.exp(logNormalTail(-rise.z));
-  open.pOther = Math.min(1, 2 * Math.min(fall, 2 * Math.exp(logNormalTail(Math.abs(apart)))));
+  open.pOther = sameTrials
+    ? Math.min(1, 2 * Math.min(fall, 2 * Math.exp(logNormalTail(Math.abs(apart)))))
+    : fall;
   return open;
 }

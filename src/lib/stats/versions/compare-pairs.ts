@@ -9,6 +9,8 @@ export interface PairsOptions {
   seed: number;
   /** What Holm's rule takes together: the pairs of each group, or all pairs of all groups. `group` by default. */
   family?: 'group' | 'all';
+  /** Whether two versions of a group can be compared at all; every two by default. */
+  alike?: (group: string, first: string, second: string) => boolean;
 }
 
 export interface PairTest extends EqualityTest {
@@ -22,6 +24,8 @@ export interface PairsReport {
   /** Which pairs were adjusted for each other, in words. */
   family: string;
   tests: PairTest[];
+  /** Pairs that were not tested, since their counts are of other kinds. */
+  leftOut: number;
 }
 
 /**
@@ -37,7 +41,7 @@ export interface PairsReport {
  */
 export async function comparePairs(
   groups: readonly { group: string; versions: readonly { version: string; histogram: Histogram }[] }[],
-  { resamples, seed, family = 'group' }: PairsOptions,
+  { resamples, seed, family = 'group', alike = () => true }: PairsOptions,
   pace: Pace = unbroken
 ): Promise<PairsReport> {
   const found: Omit<PairTest, 'pAdjusted'>[][] = [];
@@ -50,9 +54,15 @@ export async function comparePairs(
     for (let i = 0; i < versions.length; i++) {
       for (let j = i + 1; j < versions.length; j++) {
         const [a, b] = [versions[i], versions[j]];
-        const test = equalHistograms(a.histogram, b.histogram, { resamples, seed, comparison });
+        comparison += 1;
+        if (!alike(group, a.version, b.version)) continue;
+        const test = equalHistograms(a.histogram, b.histogram, {
+          resamples,
+          seed,
+          comparison: comparison - 1
+        });
         tests.push({ group, first: a.version, second: b.version, ...test });
-        await pace.breathe(++comparison / all);
+        await pace.breathe(comparison / all);
       }
     }
     found.push(tests);
@@ -63,6 +73,7 @@ export async function comparePairs(
       family === 'all'
         ? 'Adjusted by Holm over all pairs of versions of all groups together.'
         : 'Adjusted by Holm over the pairs of versions of each group by itself; not over the groups.',
+    leftOut: all - found.flat().length,
     tests: families.flatMap((tests) => {
       const adjusted = holm(tests.map(({ p }) => p));
       return tests.map((test, i) => ({ ...test, pAdjusted: adjusted[i] }));

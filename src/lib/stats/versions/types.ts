@@ -78,8 +78,8 @@ export interface CellReport {
   dispersion: KnownInterval | null;
   divergence: CellDiagnosis['divergence'];
   verdict: string | null;
-  /** Where a version with the reference's law and its own shots would lie with 99.73 %. */
-  limits: { mean: [number, number]; dispersion: [number, number] } | null;
+  /** Where a version with the reference's law and its own shots would lie with 99.73 %; no mean where N is another. */
+  limits: { mean: [number, number] | null; dispersion: [number, number] } | null;
   /** Dispersion over that of the reference, with its one-sided p and Holm's over all cells. */
   rise: { factor: number; p: number; pAdjusted: number } | null;
   /** Smallest true rise over the reference seen with 80 % power at alpha over the number of cells, as a fraction. */

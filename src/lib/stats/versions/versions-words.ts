@@ -1,5 +1,6 @@
 import { screenCaution } from '../answer/screen-caution';
 import { formatCount, formatNumber, formatPercent } from '../words/format-number';
+import { seesRise } from './sees-rise';
 import type { VersionsReport } from './types';
 
 type Found = Omit<VersionsReport, 'statement' | 'because' | 'cautions'>;
@@ -9,14 +10,17 @@ export function versionsWords(found: Found): Pick<VersionsReport, 'statement' | 
   return { statement: statementOf(found), because: becauseOf(found), cautions: cautionsOf(found) };
 }
 
-function statementOf({ cells, reference }: Found): string {
+function statementOf({ cells, reference, tolerance }: Found): string {
   if (cells.length === 0) return 'There are no counts yet.';
   if (reference === null) return 'No reference version is chosen, so nothing is compared.';
   const risen = cells.filter(({ mark }) => mark === 'risen');
-  if (risen.length === 0)
-    return cells.some(({ mark }) => mark === 'no-difference-seen' || mark === 'differs')
-      ? `Nowhere does the variance rise over version ${reference}, as far as the shots tell.`
-      : `Nothing can be told of a rise over version ${reference}.`;
+  if (risen.length === 0) {
+    const compared = cells.filter(({ mark }) => mark !== 'reference');
+    const seeing = compared.filter((cell) => seesRise(cell, tolerance)).length;
+    if (seeing === 0) return `Nothing can be told of a rise over version ${reference}.`;
+    const blind = compared.length - seeing;
+    return `No rise over version ${reference} is seen in ${formatCount(seeing)} of ${formatCount(compared.length)} cells${blind > 0 ? `; ${formatCount(blind)} cannot tell` : ''}.`;
+  }
   const versions = [...new Set(risen.map(({ version }) => version))];
   const where = versions.slice(0, 5).map((version) => {
     const count = risen.filter((cell) => cell.version === version).length;
@@ -37,10 +41,12 @@ function becauseOf({ cells, alpha, tolerance, pairs }: Found): string[] {
     );
   if (risen.length > 5) lines.push(`${risen.length - 5} more cells have risen.`);
   const count = (mark: string) => cells.filter((cell) => cell.mark === mark).length;
-  const differs = count('differs');
+  const others = cells.filter(({ mark }) => mark === 'differs');
+  const differs = others.length;
+  const unseen = others.filter((cell) => !seesRise(cell, tolerance)).length;
   if (differs > 0)
     lines.push(
-      `${formatCount(differs)} ${differs === 1 ? 'cell differs' : 'cells differ'} otherwise: another mean, or a smaller variance.`
+      `${formatCount(differs)} ${differs === 1 ? 'cell differs' : 'cells differ'} otherwise: another mean, or a smaller variance.${unseen > 0 ? ` In ${formatCount(unseen)} of them a rise of ${formatPercent(tolerance)} could not be seen.` : ''}`
     );
   const blind = count('cannot-tell');
   if (blind > 0)
@@ -49,7 +55,12 @@ function becauseOf({ cells, alpha, tolerance, pairs }: Found): string[] {
     );
   if (pairs) {
     const apart = pairs.tests.filter(({ pAdjusted }) => pAdjusted <= alpha).length;
-    lines.push(`${apart} of ${pairs.tests.length} pairs of versions differ. ${pairs.family}`);
+    if (pairs.tests.length > 0)
+      lines.push(`${apart} of ${pairs.tests.length} pairs of versions differ. ${pairs.family}`);
+    if (pairs.leftOut > 0)
+      lines.push(
+        `${formatCount(pairs.leftOut)} ${pairs.leftOut === 1 ? 'pair was' : 'pairs were'} not compared: another number of trials, unit, geometry, cut or lump makes counts differ without any crosstalk.`
+      );
     if (!pairs.canReachAlpha)
       lines.push(
         `With ${formatCount(pairs.resamples)} shuffles no adjusted p can reach ${formatNumber(alpha, 2)}: ask for fewer versions.`

@@ -102,6 +102,68 @@ describe('versionsReport', () => {
     expect(JSON.parse(JSON.stringify(report))).toEqual(report);
   });
 
+  it('says how many cells could see a rise, and never that nothing rose where nearly all are blind', async () => {
+    const random = generator(67, 0);
+    const cells = ['a', 'b', 'c', 'd'].flatMap((group) => {
+      const shots = group === 'a' ? 20_000 : 100;
+      return ['1', '2'].map((version) => cell(group, version, equal(6)(random, shots)));
+    });
+    const report = await versionsReport(cells, asked);
+    expect(report.statement).toBe('No rise over version 1 is seen in 1 of 4 cells; 3 cannot tell.');
+    const blind = await versionsReport(cells.slice(2), asked);
+    expect(blind.statement).toBe('Nothing can be told of a rise over version 1.');
+    // Another mean, in too few shots to see a rise of the tolerance.
+    const moved = await versionsReport(
+      [
+        cell('a', '1', equal(6)(random, 20_000)),
+        cell('a', '2', equal(6)(random, 20_000)),
+        cell('b', '1', equal(3)(random, 200)),
+        cell('b', '2', equal(12)(random, 200))
+      ],
+      asked
+    );
+    expect(moved.statement).toContain('1 of 2 cells; 1 cannot tell');
+    expect(moved.because.join(' ')).toContain('In 1 of them a rise of 10');
+  });
+
+  it('shuffles no pair of other trials, geometry or cut, and counts those left out', async () => {
+    const counts = equal(6)(generator(68, 0), 5000);
+    const one = (version: string, more: Partial<VersionCell>): VersionCell => ({
+      ...cell('a', version, counts),
+      ...more
+    });
+    const cells = [
+      one('1', {}),
+      one('2', {}),
+      one('3', { trials: 40 }),
+      one('4', { geometry: 'ring-bonds' }),
+      one('5', {
+        kept: { from: 2, to: 9 },
+        histogram: { kind: 'histogram', lump: null, counts: counts.filter(([n]) => n >= 2 && n <= 9) }
+      })
+    ];
+    const versions = ['1', '2', '3', '4', '5'];
+    const pairs = { groups: ['a'], versions, seed: 1 };
+    const report = await versionsReport(cells, { ...asked, versions, reference: null, pairs });
+    expect(report.pairs!.tests.map(({ first, second }) => first + second)).toEqual(['12']);
+    expect(report.pairs!.leftOut).toBe(9);
+    expect(report.because.join(' ')).toMatch(/^0 of 1 pairs .* 9 pairs were not compared/);
+  });
+
+  it('compares no means where the number of trials is another, and scatter all the same', async () => {
+    const random = generator(69, 0);
+    const other = binomialWindow(32, 6 / 64, 1e-18, 1);
+    const into = new Float64Array(other.values.length);
+    histogramSampler(other.values).draw(random, 5000, into);
+    const half = Array.from(into, (h, i): [number, number] => [other.first + i, h]).filter(([, h]) => h > 0);
+    const report = await versionsReport(
+      [cell('a', '1', equal(6)(random, 5000)), { ...cell('a', '2', half), trials: 32 }],
+      asked
+    );
+    expect(report.cells[1]).toMatchObject({ mark: 'no-difference-seen', limits: { mean: null } });
+    expect(report.cells[1].limits!.dispersion[0]).toBeLessThan(1);
+  });
+
   it('refuses versions that are not listed, doubled cells, and a reference that is none', async () => {
     const one = cell('a', '1', [[0, 5], [1, 5]]); // prettier-ignore
     await expect(versionsReport([{ ...one, version: '9' }], asked)).rejects.toThrow(BadInput);

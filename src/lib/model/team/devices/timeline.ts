@@ -10,6 +10,8 @@ export interface TimelineMark {
   factor: number | null;
   pAdjusted: number | null;
   hindrance: Hindrance | null;
+  /** Whether a rise of the tolerance would be seen with 80 % power. */
+  seesRise: boolean;
 }
 
 /** What of a device's versions the page draws: marks of every cell, and the points of one group. */

@@ -1,5 +1,6 @@
 import { and, eq, isNotNull, isNull, min } from 'drizzle-orm';
 import type { DeviceTimeline, TimelineMark } from '../../../model/team/devices/timeline';
+import { seesRise } from '../../../stats/versions/sees-rise';
 import type { CellReport, VersionsReport } from '../../../stats/versions/types';
 import type { Database } from '../../db/client';
 import { dataset, gateRule } from '../../db/schema';
@@ -100,16 +101,19 @@ function clearest({ cells, groups }: VersionsReport): string | null {
   return least?.group ?? groups.at(0) ?? null;
 }
 
-function marksOf({ cells, groups, versions }: VersionsReport): (TimelineMark | null)[][] {
+function marksOf({ cells, groups, versions, tolerance }: VersionsReport): (TimelineMark | null)[][] {
   const [down, across] = [groups, versions].map((names) => new Map(names.map((name, i) => [name, i])));
   const marks = groups.map(() => versions.map((): TimelineMark | null => null));
-  for (const { group, version, mark, rise, hindrances } of cells)
+  for (const cell of cells) {
+    const { group, version, mark, rise, hindrances } = cell;
     marks[down.get(group)!][across.get(version)!] = {
       mark,
       factor: rise?.factor ?? null,
       pAdjusted: rise?.pAdjusted ?? null,
-      hindrance: hindrances.at(0) ?? null
+      hindrance: hindrances.at(0) ?? null,
+      seesRise: seesRise(cell, tolerance)
     };
+  }
   return marks;
 }
 
