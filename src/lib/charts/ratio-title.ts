@@ -10,11 +10,10 @@ export function ratioTitle(
   const name = RATIO_NAMES[id];
   if (p !== null && p <= alpha)
     return id === 'pair-factor'
-      ? `${name} changes with the hold time: not loss of single defects alone`
+      ? `${name} changes with the hold time`
       : `${name} is not the same at every time`;
   const value = formatNumber(steady.value);
-  if (id === 'pair-factor')
-    return `${name} keeps to ${value} within errors, as under loss of single defects alone`;
+  if (id === 'pair-factor') return `${name} keeps to ${value} within errors`;
   const laws = references.filter(({ inside }) => inside).map((one) => KNOWN_LAWS[one.id] ?? one.id);
   const agreeing =
     laws.length === 0 ? 'none of the known laws has it' : `within reach of ${laws.join(' and of ')}`;

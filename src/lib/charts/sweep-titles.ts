@@ -10,11 +10,16 @@ export function sweepTitle({ laws, alpha }: Pick<SweepReport, 'laws' | 'alpha'>)
   return `The cumulants share one exponent, ${formatNumber(exponent.value)}`;
 }
 
-/** Whether the exponent stays where it is when the window shrinks: judged by intervals that exclude the whole's value. */
-export function windowsTitle({ windows, laws }: Pick<SweepReport, 'windows' | 'laws'>): string {
-  const whole = laws?.common.exponent.value;
-  if (whole === undefined) return 'The exponent window by window';
-  const away = windows.filter(({ exponent }) => exponent.low > whole || exponent.high < whole).length;
-  if (away === 0) return 'The exponent stays within its interval whichever window is taken';
-  return `The exponent moves with the window: ${away} of ${windows.length} windows exclude ${formatNumber(whole)}`;
+/** Whether the exponent stays where it is when the window shrinks, all windows that were looked at allowed for. */
+export function windowsTitle({
+  windows,
+  laws,
+  alpha
+}: Pick<SweepReport, 'windows' | 'laws' | 'alpha'>): string {
+  if (!laws || windows.every(({ awayP }) => awayP === undefined || awayP === null))
+    return 'The exponent window by window';
+  const away = windows.filter(({ awayP }) => typeof awayP === 'number' && awayP <= alpha).length;
+  if (away === 0) return 'The exponent stays within errors whichever window is taken';
+  const whole = formatNumber(laws.common.exponent.value);
+  return `The exponent moves with the window: away from ${whole} in ${away} of ${windows.length}, all allowed for`;
 }

@@ -82,7 +82,7 @@ export function windowsPicture(
       x: x(exponent.value),
       y: y(i),
       words: () =>
-        `From ${formatNumber(from)} to ${formatNumber(to)}: ${formatNumber(exponent.value)}, 95 % interval ${formatNumber(exponent.low)} to ${formatNumber(exponent.high)}; one exponent for all: p = ${formatNumber(commonP, 2)}.`
+        `From ${formatNumber(from)} to ${formatNumber(to)}: ${formatNumber(exponent.value)}, 95 % interval ${formatNumber(exponent.low)} to ${formatNumber(exponent.high)}; one exponent for all: ${commonP <= 1e-300 ? 'p under 1e−300' : `p = ${formatNumber(commonP, 2)}`}.`
     })),
     notes:
       windows.length < all.length

@@ -10,15 +10,17 @@ export const windowsTable = ({ windows }: Pick<SweepReport, 'windows'>): Table =
     { title: 'exponent, low', kind: 'number' },
     { title: 'exponent, high', kind: 'number' },
     { title: 'p of one exponent', kind: 'number' },
-    { title: 'p of power laws', kind: 'number' }
+    { title: 'p of power laws', kind: 'number' },
+    { title: 'p of the whole window’s exponent', kind: 'number' }
   ],
-  rows: windows.map(({ from, to, exponent, commonP, lawP }) => [
+  rows: windows.map(({ from, to, exponent, commonP, lawP, awayP }) => [
     from,
     to,
     exponent.value,
     exponent.low,
     exponent.high,
     commonP,
-    lawP
+    lawP,
+    awayP ?? null
   ])
 });

@@ -87,6 +87,7 @@ const TITLES: Record<string, TermId> = {
   'exponent, high': 'interval',
   'p of one exponent': 'common-exponent',
   'p of power laws': 'power-law',
+  'p of the whole window’s exponent': 'sweep-window',
   'κ₁': 'cumulants',
   'κ₁, low': 'interval',
   'κ₁, high': 'interval',

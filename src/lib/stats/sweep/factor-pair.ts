@@ -10,6 +10,8 @@ export function factorPair({ shots, cumulants: [mean, variance], covariance: v }
     y: variance - mean,
     varX: 4 * mean * mean * v[0],
     varY: v[4] - 2 * v[1] + v[0],
-    covariance: 2 * mean * (v[1] - v[0])
+    covariance: 2 * mean * (v[1] - v[0]),
+    // The error of F2 grows as the mean over √S, F1² as its square.
+    weight: shots
   };
 }

@@ -1,3 +1,4 @@
+import { floorChance } from './floor-chance';
 import { normalInterval } from './normal-interval';
 import { quenchExponent } from './quench-exponent';
 import { readSweep } from './read-sweep';
@@ -46,12 +47,13 @@ export function refitSweep(given: Omit<SweptPoint, 'inWindow'>[], options: Sweep
     laws,
     expected: expectedOf(options, laws),
     steady: steadyReports(known, options),
-    windows: windowExponents(fitted).map(({ from, to, exponent, error, commonP, fitP }) => ({
+    windows: windowExponents(fitted).map(({ from, to, exponent, error, commonP, fitP, awayP }) => ({
       from: held[from].time,
       to: held[to].time,
       exponent: normalInterval(exponent, error),
-      commonP,
-      lawP: fitP
+      commonP: floorChance(commonP),
+      lawP: floorChance(fitP),
+      awayP: floorChance(awayP)
     }))
   };
   return { ...report, ...sweepWords(report) };
@@ -61,6 +63,7 @@ function expectedOf({ transition }: SweepOptions, laws: SweepReport['laws']): Sw
   if (!transition) return null;
   const { dimension, correlation, dynamic } = transition;
   const exponent = quenchExponent(dimension, correlation, dynamic);
-  const { low, high } = laws?.common.exponent ?? { low: NaN, high: NaN };
-  return { dimension, correlation, dynamic, exponent, inside: low <= exponent && exponent <= high };
+  const interval = laws?.common.exponent;
+  const inside = interval ? interval.low <= exponent && exponent <= interval.high : null;
+  return { dimension, correlation, dynamic, exponent, inside };
 }

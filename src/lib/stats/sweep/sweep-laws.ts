@@ -1,7 +1,9 @@
-import { normalQuantile } from '../numerics/normal-quantile';
+import { logGammaTail } from '../numerics/log-gamma-tail';
 import { commonExponent } from './common-exponent';
 import type { SweepPoint } from './fit-power-laws';
+import { floorChance } from './floor-chance';
 import { normalInterval } from './normal-interval';
+import { surpriseInErrors } from './surprise-in-errors';
 import type { SweepLaws } from './types';
 
 /** Power laws of the points of a window as the document tells them; null where none can be fitted. */
@@ -16,14 +18,14 @@ export function sweepLaws(points: SweepPoint[]): SweepLaws | null {
     middle: free.middle,
     chiSquare: free.chiSquare,
     freedom: free.freedom,
-    p: free.p,
+    p: floorChance(free.p),
     common: {
       exponent: normalInterval(tied.exponents[0], tied.errors[0]),
       logLevels: tied.logLevels,
       chiSquare,
       freedom,
-      p,
-      z: p < 1 ? -normalQuantile(p / 2) : 0
+      p: floorChance(p),
+      z: surpriseInErrors(chiSquare > 0 ? logGammaTail('upper', freedom / 2, chiSquare / 2) : 0)
     }
   };
 }

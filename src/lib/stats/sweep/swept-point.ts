@@ -37,7 +37,13 @@ export function sweptPoint(
   };
 }
 
-function ratio({ x, y, varX, varY, covariance }: ReturnType<typeof factorPair>): KnownInterval {
+function ratio({
+  x,
+  y,
+  varX,
+  varY,
+  covariance
+}: Omit<ReturnType<typeof factorPair>, 'weight'>): KnownInterval {
   const r = y / x;
   return normalInterval(r, Math.sqrt(varY - 2 * r * covariance + r * r * varX) / Math.abs(x));
 }

@@ -94,7 +94,7 @@ export interface SteadyReport {
   freedom: number;
   /** Of the same value at every time; null for one. */
   p: number | null;
-  /** Values of known laws, and whether the interval holds them, their own error allowed for. */
+  /** Values of known laws, and whether the interval holds them, their own error allowed for; none where the value is not steady. */
   references: { id: string; value: number; error: number; inside: boolean }[];
 }
 
@@ -113,10 +113,22 @@ export interface SweepReport {
     correlation: number;
     dynamic: number;
     exponent: number;
-    inside: boolean;
+    /** Null where no power law can be fitted. */
+    inside: boolean | null;
   } | null;
   steady: SteadyReport[];
-  windows: { from: number; to: number; exponent: KnownInterval; commonP: number; lawP: number | null }[];
+  windows: {
+    from: number;
+    to: number;
+    exponent: KnownInterval;
+    commonP: number;
+    lawP: number | null;
+    /**
+     * P(an exponent at least as far from that of the whole window), all windows allowed for; null for the whole window
+     * itself. The first documents did not have it.
+     */
+    awayP?: number | null;
+  }[];
   statement: string;
   because: string[];
   cautions: string[];

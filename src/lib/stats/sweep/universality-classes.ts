@@ -8,6 +8,8 @@ export interface UniversalityClass {
   /** z, dynamic. */
   dynamic: number;
   source: string;
+  /** What its exponent does not hold for. */
+  note?: string;
 }
 
 /**
@@ -29,6 +31,7 @@ export const UNIVERSALITY_CLASSES: readonly UniversalityClass[] = [
     dimension: 2,
     correlation: 1,
     dynamic: 2.1665,
+    note: 'That is for defects that are points; its domain walls are lines, whose length goes with ν/(1 + zν) = 0.316.',
     source:
       'ν = 1: Onsager 1944, Phys. Rev. 65:117 (m); z: Nightingale & Blöte 1996, Phys. Rev. Lett. 76:4548 (m)'
   },

@@ -80,7 +80,7 @@ export const sweepDocumentSchema = z.object({
       correlation: z.number(),
       dynamic: z.number(),
       exponent: z.number(),
-      inside: z.boolean()
+      inside: z.boolean().nullable()
     })
     .nullable(),
   steady: z.array(
@@ -101,7 +101,10 @@ export const sweepDocumentSchema = z.object({
       to: z.number(),
       exponent: interval,
       commonP: chance,
-      lawP: chance.nullable()
+      lawP: chance.nullable(),
+      awayP: chance
+        .nullish()
+        .describe('Of an exponent so far from the whole window’s, all windows allowed for')
     })
   ),
   statement: z.string(),

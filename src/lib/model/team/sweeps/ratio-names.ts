@@ -11,6 +11,5 @@ export const RATIO_NAMES: Record<SteadyReport['id'], string> = {
 export const KNOWN_LAWS: Record<string, string> = {
   'landau-zener': 'Landau–Zener modes',
   coarsening: 'coarsening from zero temperature',
-  'rare-events': 'rare independent events',
-  annihilation: 'well-mixed annihilation in pairs'
+  'rare-events': 'rare independent events'
 };
