@@ -71,7 +71,12 @@ export function sitesReport({ names, shots }: SitesInput, options: SitesOptions)
     byDistance: correlationByDistance(shots, sites, geometry),
     common,
     power,
-    inCounts: inCounts(strongest(tests, alpha), sites, shots.length)
+    inCounts: inCounts(
+      tests,
+      alpha,
+      excited.map((_, site) => rate(site)),
+      shots.length
+    )
   };
   return { ...report, ...sitesWords(report) };
 }
@@ -86,18 +91,21 @@ function momentsOf(counts: ArrayLike<number>, trials: number): CountMoments {
   return { mean, variance, trials };
 }
 
-/** Size of the strongest correlation among the pairs that were found; else the one that power is told for. */
-function strongest(tests: PairTest[], alpha: number): number {
-  const sizes = tests
-    .filter(({ pHolm }) => pHolm <= alpha)
-    .map(({ correlation }) => Math.abs(correlation ?? 0));
-  return sizes.length > 0 ? Math.max(...sizes) : told;
-}
-
-function inCounts(correlation: number, sites: number, shots: number): SitesReport['inCounts'] {
-  const shown = Number(correlation.toPrecision(2));
-  const said = pairInCounts(shown, sites, shots);
-  // The smallest excess falls as 1/√S.
-  const shotsNeeded = Math.ceil(shots * (said.smallestExcess / said.excess) ** 2);
-  return { ...said, correlation: shown, shotsNeeded };
+/** Of the strongest pair that was found; else of one of the size that power is told for, between sites of the middle rate. */
+function inCounts(tests: PairTest[], alpha: number, rates: number[], shots: number): SitesReport['inCounts'] {
+  const found = tests.filter(({ pHolm }) => pHolm <= alpha);
+  const size = ({ correlation }: PairTest) => Math.abs(correlation ?? 0);
+  const strongest = found.reduce<PairTest | null>(
+    (best, pair) => (best && size(best) >= size(pair) ? best : pair),
+    null
+  );
+  const middle = middleOf(rates);
+  const correlation = Number((strongest?.correlation ?? told).toPrecision(2));
+  const pair: [number, number] = strongest
+    ? [rates[strongest.first], rates[strongest.second]]
+    : [middle, middle];
+  return {
+    correlation,
+    ...pairInCounts({ correlation, pair, rates, shots, found: strongest !== null })
+  };
 }

@@ -52,7 +52,7 @@ export interface SitesReport {
   /** What these shots could find of a pair with correlation 0.05. */
   power: PairPower;
   /** What the counts alone could show: of the strongest pair found, else of a pair with correlation 0.05. */
-  inCounts: PairInCounts & { correlation: number; shotsNeeded: number };
+  inCounts: PairInCounts & { correlation: number };
   statement: string;
   because: string[];
   cautions: string[];

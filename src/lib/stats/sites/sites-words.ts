@@ -50,9 +50,6 @@ function becauseOf(map: Found, found: MappedPair[]): string[] {
     );
   if (found.length > most) lines.push(`And ${formatCount(found.length - most)} more pairs.`);
   lines.push(map.inCounts.statement);
-  lines.push(
-    `The counts alone would show it with 80\u202f% power from about ${formatCount(Number(map.inCounts.shotsNeeded.toPrecision(2)))} shots on.`
-  );
   return lines;
 }
 

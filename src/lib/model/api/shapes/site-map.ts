@@ -98,7 +98,7 @@ export const sitesDocumentSchema = z.object({
     smallestExcess: z.number(),
     visible: z.boolean(),
     statement: z.string(),
-    shotsNeeded: z.int()
+    shotsNeeded: z.int().nullable().describe('Null where no number of shots shows it')
   }),
   statement: z.string(),
   because: z.array(z.string()),
