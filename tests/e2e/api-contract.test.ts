@@ -84,6 +84,7 @@ afterAll(() => server?.stop());
 /** What stands after the path where an operation asks for it. */
 const QUERIES: Record<string, string> = {
   readGate: '?device=Kelp&version=ebb%203.1',
+  readGateBadge: '?device=Kelp&version=ebb%203.1',
   readGateRule: '?device=Kelp',
   setGateRule: '?device=Kelp'
 };

@@ -61,6 +61,22 @@ export const DEVICE_OPERATIONS: Operation[] = [
     }
   },
   {
+    id: 'readGateBadge',
+    method: 'get',
+    path: '/gate/badge.svg',
+    part: 'Devices',
+    summary: 'Take the gate of a version as a badge',
+    about: 'Its name, a sign and the word, as the gate stands now.',
+    scope: 'read',
+    query: gateQuery,
+    answer: {
+      status: 200,
+      about: 'The badge',
+      content: { type: 'image/svg+xml', schema: null, about: 'SVG' }
+    },
+    refusals: { 404: 'The team has no such device, or the device no such firmware version.' }
+  },
+  {
     id: 'readGateRule',
     method: 'get',
     path: '/gate/rule',
