@@ -105,6 +105,11 @@ const SENTENCES: Record<string, Words> = {
     label: 'sweep saved',
     say: ({ who, thing, detail }) => `${who} saved ${thing}${byScript(detail)}`
   },
+  'sweep.import': {
+    label: 'sweep imported',
+    say: ({ who, thing, detail }) =>
+      `${who} imported ${thing}${detail.madeBy ? `, first made by ${detail.madeBy}` : ''}`
+  },
   'sweep.aside': { label: 'sweep put aside', say: ({ who, thing }) => `${who} put ${thing} aside` },
   'sweep.restore': { label: 'sweep brought back', say: ({ who, thing }) => `${who} brought ${thing} back` },
   'sweep.purge': {

@@ -16,7 +16,7 @@ export const archivedConditionsSchema = conditionsSchema.extend({
 
 /** Every path that may stand in an archive; anything else refuses the whole. */
 export const ARCHIVE_PATH =
-  /^(manifest\.json|README\.txt|team\.json|events\.json|reports\.json|(datasets|reports)\/\d{5}\.json|datasets\/\d{5}\.csv|originals\/[0-9a-f]{64})$/;
+  /^(manifest\.json|README\.txt|team\.json|events\.json|(reports|sweeps)\.json|(datasets|reports|sweeps)\/\d{5}\.json|datasets\/\d{5}\.csv|originals\/[0-9a-f]{64})$/;
 
 const when = z.iso.datetime();
 const sha256 = z.string().regex(/^[0-9a-f]{64}$/);
@@ -27,7 +27,7 @@ export const manifestSchema = z.object({
   madeAt: when,
   team: z.object({ name: z.string().max(200), slug: z.string().max(40) }),
   /** What was put aside is not in the archive. */
-  leftOut: z.object({ datasets: whole, reports: whole }),
+  leftOut: z.object({ datasets: whole, reports: whole, sweeps: whole.default(0) }),
   files: z.array(z.object({ path: z.string().regex(ARCHIVE_PATH), size: whole, sha256 })).max(65_000)
 });
 
@@ -118,6 +118,41 @@ export const reportsFileSchema = z.array(
   })
 );
 
+/** What is kept beside the document of each sweep. */
+export const sweepsFileSchema = z.array(
+  z.strictObject({
+    file: z.string().regex(/^sweeps\/\d{5}\.json$/),
+    name: z.string().min(1).max(300),
+    notes: z.string().max(10_000).nullable(),
+    sha256,
+    options: z.strictObject({
+      axis: z.enum(['quench-time', 'hold-time']),
+      timeUnit: z.string().max(100),
+      unit: z.enum(['defect', 'pair']),
+      window: z.strictObject({ from: z.number(), to: z.number() }).nullable(),
+      transition: z
+        .strictObject({ dimension: z.number(), correlation: z.number(), dynamic: z.number() })
+        .nullable(),
+      alpha: z.number().gt(0).lt(0.5)
+    }),
+    engineVersion: z.string().max(100),
+    /** As they were when the sweep was made, with the ids they had. */
+    datasets: z
+      .array(
+        z.looseObject({
+          id: z.string().max(100),
+          name: z.string().max(300),
+          digest: z.string().max(200),
+          device: z.string().nullable(),
+          firmware: z.string().nullable(),
+          group: z.string().nullable()
+        })
+      )
+      .max(1000),
+    createdAt: when
+  })
+);
+
 export const teamFileSchema = z.object({
   name: z.string().max(200),
   slug: z.string().max(40),
@@ -128,5 +163,6 @@ export const teamFileSchema = z.object({
 
 export type Manifest = z.infer<typeof manifestSchema>;
 export type DatasetFile = z.infer<typeof datasetFileSchema>;
+export type SweepsFile = z.infer<typeof sweepsFileSchema>;
 export type ReportsFile = z.infer<typeof reportsFileSchema>;
 export type TeamFile = z.infer<typeof teamFileSchema>;

@@ -1,7 +1,7 @@
 import { count, eq } from 'drizzle-orm';
 import type { Manifest, TeamFile } from '$lib/model/team/transfer/archive-schema';
 import type { Database } from '../../db/client';
-import { dataset, report, team } from '../../db/schema';
+import { dataset, report, sweep, team } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { mayWhere } from '../access/may-where';
 import { recordEvent } from '../events/record-event';
@@ -12,6 +12,7 @@ import { eventsFile } from './events-file';
 import { jsonBytes } from './json-bytes';
 import { MOST_NUMBERED } from './limits';
 import { reportEntries } from './report-entries';
+import { sweepEntries } from './sweep-entries';
 import { zipStream, type Entry } from './zip-stream';
 
 export type ExportTeam =
@@ -21,7 +22,7 @@ export type ExportTeam =
 
 /**
  * Everything the team has, as one zip: datasets as original bytes and as JSON and CSV, reports as the very bytes of
- * their documents, remarks, links without their tokens, members and events. Never hashes of passwords or tokens. What
+ * their documents, sweeps likewise, remarks, links without their tokens, members and events. Never hashes of passwords or tokens. What
  * was put aside is left out and counted in the manifest.
  */
 export function exportTeam(db: Database, actor: Actor, now = Date.now()): ExportTeam {
@@ -33,10 +34,11 @@ export function exportTeam(db: Database, actor: Actor, now = Date.now()): Export
   if (!it) return { ok: false, reason: 'not-allowed' };
   const datasets = datasetEntries(db, actor.teamId);
   const reports = reportEntries(db, actor.teamId, datasets.paths);
-  if (datasets.paths.size > MOST_NUMBERED || reports.paths.size > MOST_NUMBERED)
+  const sweeps = sweepEntries(db, actor.teamId);
+  if ([datasets, reports, sweeps].some(({ paths }) => paths.size > MOST_NUMBERED))
     return { ok: false, reason: 'too-many' };
 
-  const all = (table: typeof dataset | typeof report) =>
+  const all = (table: typeof dataset | typeof report | typeof sweep) =>
     db.select({ n: count() }).from(table).where(eq(table.teamId, actor.teamId)).get()?.n ?? 0;
   const about: Omit<Manifest, 'files'> = {
     format: 'severalty.team/1',
@@ -44,7 +46,8 @@ export function exportTeam(db: Database, actor: Actor, now = Date.now()): Export
     team: it,
     leftOut: {
       datasets: all(dataset) - datasets.paths.size,
-      reports: all(report) - reports.paths.size
+      reports: all(report) - reports.paths.size,
+      sweeps: all(sweep) - sweeps.paths.size
     }
   };
   const teamFile: TeamFile = {
@@ -55,7 +58,7 @@ export function exportTeam(db: Database, actor: Actor, now = Date.now()): Export
       role,
       since: new Date(since).toISOString()
     })),
-    madeBy: { ...datasets.madeBy, ...reports.madeBy }
+    madeBy: { ...datasets.madeBy, ...reports.madeBy, ...sweeps.madeBy }
   };
   recordEvent(
     db,
@@ -63,7 +66,7 @@ export function exportTeam(db: Database, actor: Actor, now = Date.now()): Export
       action: 'team.export',
       teamId: actor.teamId,
       personId: actor.personId,
-      detail: { datasets: datasets.paths.size, reports: reports.paths.size }
+      detail: { datasets: datasets.paths.size, reports: reports.paths.size, sweeps: sweeps.paths.size }
     },
     now
   );
@@ -74,6 +77,8 @@ export function exportTeam(db: Database, actor: Actor, now = Date.now()): Export
     ...originalEntries(db, actor.teamId),
     { path: 'reports.json', bytes: () => jsonBytes(reports.file) },
     ...reports.entries,
+    { path: 'sweeps.json', bytes: () => jsonBytes(sweeps.file) },
+    ...sweeps.entries,
     { path: 'events.json', bytes: () => jsonBytes(eventsFile(db, actor)) }
   ];
   const day = about.madeAt.slice(0, 10);

@@ -6,11 +6,12 @@ import { mayWhere } from '../access/may-where';
 import { recordEvent } from '../events/record-event';
 import { insertDataset } from './insert-dataset';
 import { insertReport } from './insert-report';
+import { insertSweep } from './insert-sweep';
 import { openArchive, type ArchiveRefusal } from './open-archive';
 import { readArchive } from './read-archive';
 
 export type ImportArchive =
-  | { ok: true; from: string; datasets: number; reports: number; remarks: number }
+  | { ok: true; from: string; datasets: number; reports: number; remarks: number; sweeps: number }
   | ArchiveRefusal
   | { ok: false; reason: 'not-allowed' }
   /** This very archive was imported into this team before: when. Ask again with `again` to have everything twice. */
@@ -60,10 +61,12 @@ export function importArchive(
       const context = { teamId: actor.teamId, personId: actor.personId, madeBy: read.team.madeBy, now };
       for (const it of read.datasets) ids.set(it.path, insertDataset(tx, it, context));
       for (const it of read.reports) insertReport(tx, it, ids.get(it.about.dataset) ?? '', context);
+      for (const it of read.sweeps) insertSweep(tx, it, context);
       const counted = {
         datasets: read.datasets.length,
         reports: read.reports.length,
-        remarks: read.reports.reduce((sum, { about }) => sum + about.remarks.length, 0)
+        remarks: read.reports.reduce((sum, { about }) => sum + about.remarks.length, 0),
+        sweeps: read.sweeps.length
       };
       const from = opened.manifest.team.name;
       recordEvent(

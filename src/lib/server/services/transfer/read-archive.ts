@@ -10,11 +10,11 @@ import {
   type TeamFile
 } from '$lib/model/team/transfer/archive-schema';
 import { BadInput, type Diagnosis } from '$lib/stats/types';
-import type { z } from 'zod';
 import { countFacts, type CountFacts } from '../datasets/count-facts';
 import { misfits } from '../datasets/misfits';
 import type { ArchiveRefusal, OpenArchive } from './open-archive';
-import { parseJson } from './parse-json';
+import { Bad, bad, readEntry } from './read-entry';
+import { readSweeps, type ReadArchivedSweep } from './read-sweeps';
 
 export interface ReadDataset {
   path: string;
@@ -30,48 +30,36 @@ export interface ReadReport {
 }
 
 export type ReadArchive =
-  { ok: true; team: TeamFile; datasets: ReadDataset[]; reports: ReadReport[] } | ArchiveRefusal;
-
-class Bad extends Error {}
-
-const bad = (what: string): never => {
-  throw new Bad(what);
-};
+  | {
+      ok: true;
+      team: TeamFile;
+      datasets: ReadDataset[];
+      reports: ReadReport[];
+      sweeps: ReadArchivedSweep[];
+    }
+  | ArchiveRefusal;
 
 /** Reads what an opened archive says, and holds every file to what this program would have written. */
 export function readArchive({ files }: Extract<OpenArchive, { ok: true }>): ReadArchive {
   try {
-    const team = read(files, 'team.json', teamFileSchema);
+    const team = readEntry(files, 'team.json', teamFileSchema);
     const paths = [...files.keys()].filter((path) => /^datasets\/.*json$/.test(path)).sort();
     const datasets = paths.map((path) => readDataset(files, path));
     const byPath = new Map(datasets.map((it) => [it.path, it]));
-    const reports = read(files, 'reports.json', reportsFileSchema).map((about) =>
+    const reports = readEntry(files, 'reports.json', reportsFileSchema).map((about) =>
       readReport(files, about, byPath)
     );
     const numbers = new Set(reports.map(({ about }) => `${about.dataset} ${about.number}`));
     if (numbers.size < reports.length) bad('reports.json: two reports of a dataset have one number.');
-    return { ok: true, team, datasets, reports };
+    return { ok: true, team, datasets, reports, sweeps: readSweeps(files) };
   } catch (error) {
     if (error instanceof Bad) return { ok: false, reason: 'bad-file', what: error.message };
     throw error;
   }
 }
 
-/**
- * Checked by the schema, and then taken as it stands: what a schema gives back has its keys in another order, and the
- * next export would no longer be the same to the byte.
- */
-function read<T>(files: Map<string, Uint8Array>, path: string, schema: z.ZodType<T>): T {
-  const bytes = files.get(path) ?? bad(`${path} is missing.`);
-  const value = parseJson(bytes);
-  const result = schema.safeParse(value);
-  if (result.success) return value as T;
-  const [issue] = result.error.issues;
-  return bad(`${path}: ${issue.path.join('.')}: ${issue.message}`);
-}
-
 function readDataset(files: Map<string, Uint8Array>, path: string): ReadDataset {
-  const asWritten = read(files, path, datasetFileSchema);
+  const asWritten = readEntry(files, path, datasetFileSchema);
   const file = { ...asWritten, conditions: archivedConditionsSchema.parse(asWritten.conditions) };
   const { sha256, size } = file.original;
   const original =
@@ -95,7 +83,7 @@ function readReport(
   about: ReportsFile[number],
   datasets: Map<string, ReadDataset>
 ): ReadReport {
-  const document = read(files, about.file, diagnosisSchema) as Diagnosis;
+  const document = readEntry(files, about.file, diagnosisSchema) as Diagnosis;
   const text = new TextDecoder('utf-8', { ignoreBOM: true }).decode(files.get(about.file));
   if (createHash('sha256').update(text).digest('hex') !== about.sha256)
     bad(`${about.file} is not the document of that sum.`);

@@ -22,7 +22,7 @@ beforeAll(async () => {
 describe('an archive', () => {
   it('says what it does not carry', () => {
     expect(textsOf(archive)['README.txt']).toMatch(
-      /Not in here: sweeps.*maps of sites.*rules of gates.*webhooks/s
+      /Not in here: links to sweeps.*maps of sites.*rules of gates.*webhooks/s
     );
   });
 
@@ -92,7 +92,8 @@ describe('export, import, export', () => {
       from: 'Team ours',
       datasets: 3,
       reports: 2,
-      remarks: 2
+      remarks: 2,
+      sweeps: 0
     });
     const [before, after] = [textsOf(archive), textsOf(await archiveOf(db, lead))];
     const same = Object.keys(before).filter((path) => /^(datasets|reports|originals)\//.test(path));
