@@ -1,6 +1,5 @@
 import { sweepTable } from '$lib/charts/sweep-table';
 import { tableToCsv } from '$lib/charts/table-to-csv';
-import type { SweepReport } from '$lib/stats/sweep/types';
 import { askLinkSweepJson } from '../../../../ask-link';
 import { unreadable } from '../../../../unreadable';
 import { linkFile } from '../../link-file';
@@ -12,6 +11,6 @@ export const GET: RequestHandler = (event) => {
   if (!asked.ok) return asked.response;
   const { document, fileName } = asked.view;
   if (document === null) return unreadable('its bytes do not have their sha256', 'sweep');
-  const csv = tableToCsv(sweepTable(JSON.parse(document) as SweepReport));
+  const csv = tableToCsv(sweepTable(JSON.parse(document) as Parameters<typeof sweepTable>[0]));
   return linkFile(csv, `${fileName}.csv`, 'text/csv; charset=utf-8', 'sweep');
 };
