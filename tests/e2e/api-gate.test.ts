@@ -8,6 +8,7 @@ import { startServer, type RunningServer } from './support/start-server';
 let server: RunningServer;
 let token: string;
 let reads: string;
+let another: string;
 let foreign: string;
 
 beforeAll(async () => {
@@ -17,6 +18,10 @@ beforeAll(async () => {
   const other = await seedTeam(server, 'elsewhere', [[stranger, 'lead']]);
   const actor = { personId: lead.id, teamId: team.id, role: 'lead' as const };
   token = await seedToken(server, actor, { scopes: ['read', 'upload', 'diagnose', 'edit'] });
+  another = await seedToken(server, actor, {
+    name: 'another',
+    scopes: ['read', 'upload', 'diagnose', 'edit']
+  });
   reads = await seedToken(server, actor, { name: 'reads', scopes: ['read', 'upload', 'diagnose'] });
   const their = { personId: stranger.id, teamId: other.id, role: 'lead' as const };
   foreign = await seedToken(server, their, { scopes: ['read', 'edit'] });
@@ -25,9 +30,9 @@ beforeAll(async () => {
 afterAll(() => server?.stop());
 
 /** The script of fixtures/firmware, as a shell runs it. */
-const script = () =>
+const script = (by = token) =>
   new Promise<{ code: number; said: string; errors: string }>((resolve) => {
-    const env = { ...process.env, SEVERALTY: server.address, SEVERALTY_TOKEN: token };
+    const env = { ...process.env, SEVERALTY: server.address, SEVERALTY_TOKEN: by };
     execFile('sh', ['fixtures/firmware/gate.sh'], { env }, (error, said, errors) =>
       resolve({ code: typeof error?.code === 'number' ? error.code : 0, said, errors })
     );
@@ -52,6 +57,10 @@ describe('from histograms to a gate with curl alone', () => {
     const second = await script();
     expect([second.errors, second.said, second.code]).toEqual(['', SAID, 1]);
     expect(await counted(), 'as after the first run, events too').toEqual(after);
+    // Keys are those of a token: by another one the same counts are refused as there already, and taken.
+    const other = await script(another);
+    expect([other.errors, other.said, other.code]).toEqual(['', SAID, 1]);
+    expect(await counted(), 'nor by another token').toEqual(after);
     const answer = await ask(server, token, '/gate?device=Shingle&version=ebb-3.3');
     const { document } = (await answer.json()) as {
       document: { groups: { group: string; outcome: string }[] };

@@ -14,6 +14,22 @@ describe('npm run sites', () => {
     expect(words).toContain('A pair that is not found may be there.');
   });
 
+  it('does not find it where either sign is looked for, as the README says', () => {
+    const map = (...more: string[]) =>
+      JSON.parse(run(['fixtures/sites/one-pair.txt', '--json', ...more]).stdout) as {
+        pairs: { pHolm: number }[];
+        power: { neighbour: { power: number } };
+      };
+    const figures = [map('--seek', 'rise'), map()].map(({ pairs, power }) => [
+      Math.min(...pairs.map(({ pHolm }) => pHolm)).toFixed(3),
+      Math.round(100 * power.neighbour.power)
+    ]);
+    expect(figures).toEqual([
+      ['0.021', 58],
+      ['0.070', 45]
+    ]);
+  });
+
   it('prints the document alone', () => {
     const { stdout } = run(['-', '--json', '--geometry', 'ring'], '110\n101\n000\n011\n');
     const map = JSON.parse(stdout);

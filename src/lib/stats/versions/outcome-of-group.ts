@@ -1,9 +1,13 @@
 import { formatNumber, formatPercent } from '../words/format-number';
 import type { OpenGroup } from './gate-group';
+import { sayRise } from './say-rise';
 import type { GateGroup, GateRule } from './types';
 
 /** Where any excess at all is refused, shots have to show one of this size. */
 const SMALLEST_TOLERANCE = 0.1;
+
+/** The rise that shots have to show. */
+const wantedOf = ({ tolerance }: GateRule): number => (tolerance === 0 ? SMALLEST_TOLERANCE : tolerance);
 
 /** A group's outcome from its adjusted tests, with the reasons in words. */
 export function outcomeOfGroup(group: OpenGroup, rule: GateRule, version: string): GateGroup {
@@ -22,12 +26,12 @@ export function outcomeOfGroup(group: OpenGroup, rule: GateRule, version: string
     hindrances.push(hindrance);
     reasons.push(reason);
   };
-  const wanted = rule.tolerance === 0 ? SMALLEST_TOLERANCE : rule.tolerance;
+  const wanted = wantedOf(rule);
   const step = stepSeen(group, rule);
   if (step !== null && step > wanted)
     hinder(
       'too-few-shots',
-      `Too few shots: a rise under ${formatPercent(step)} ${smallestRise === null ? `beyond the tolerance` : `over version ${rule.reference}`} would be missed more than one time in five, and ${formatPercent(wanted)} has to be seen.`
+      `Too few shots: a rise under ${sayRise(step, wanted)} ${smallestRise === null ? `beyond the tolerance` : `over version ${rule.reference}`} would be missed more than one time in five, and ${formatPercent(wanted)} has to be seen.`
     );
   const most = 1 + rule.tolerance;
   if (failures.length === 0 && dispersion && dispersion.low > most)
@@ -51,6 +55,7 @@ function stepSeen({ smallestRise, smallestExcess }: OpenGroup, { tolerance }: Ga
 }
 
 function passing({ smallestRise, dispersion }: OpenGroup, rule: GateRule, version: string): string {
+  const wanted = wantedOf(rule);
   const most = formatNumber(1 + rule.tolerance, 3);
   const value = dispersion ? formatNumber(dispersion.value, 4) : '–';
   const above = dispersion !== null && dispersion.value > 1 + rule.tolerance;
@@ -58,5 +63,5 @@ function passing({ smallestRise, dispersion }: OpenGroup, rule: GateRule, versio
     ? `Variance is ${value} of its ceiling: above ${most}, but not by more than chance allows at this level`
     : `Variance is ${value} of its ceiling, not above ${most}`;
   if (smallestRise === null) return `${seen}; version ${version} is the reference itself.`;
-  return `${seen}, and not above that of version ${rule.reference} by more than chance allows; a rise under ${formatPercent(smallestRise)} would be missed more than one time in five.`;
+  return `${seen}, and not above that of version ${rule.reference} by more than chance allows; a rise under ${sayRise(smallestRise, wanted)} would be missed more than one time in five.`;
 }

@@ -69,12 +69,14 @@ function becauseOf({ cells, alpha, tolerance, pairs }: Found): string[] {
   return lines;
 }
 
-function cautionsOf({ reference, pairs }: Found): string[] {
+function cautionsOf({ cells, groups, reference, pairs }: Found): string[] {
+  const compared = cells.filter(({ rise }) => rise !== null).length;
   const lines = [
     ...(reference === null
       ? []
       : [
-          'Limits hold 99.73\u202f% of versions with the law of the reference, each cell by itself: of 1000 quiet cells some three leave them. Marks are adjusted over all cells.'
+          'Limits hold 99.73\u202f% of versions with the law of the reference, each cell by itself: of 1000 quiet cells some three leave them. Marks are adjusted over all cells.',
+          ...(compared > 1 ? [besideGate(compared, 2 * groups.length)] : [])
         ]),
     ...(pairs
       ? ['Pairs differ for any reason, another mean included; that is no sign of crosstalk by itself.']
@@ -82,4 +84,12 @@ function cautionsOf({ reference, pairs }: Found): string[] {
     'A rise has more causes than crosstalk: drift, misreads that follow each other, and mixed settings look alike.'
   ];
   return [...lines, screenCaution];
+}
+
+/** Why the gate of a version may see what its marks do not; `tests` is how many a gate over all groups makes. */
+function besideGate(compared: number, tests: number): string {
+  const here = `They are adjusted over ${formatCount(compared)} cells of all versions together; a gate takes one version alone, with two tests a group`;
+  return compared > tests
+    ? `${here}. So less is seen here than at the gate: a cell that cannot tell here may pass there.`
+    : `${here}. So the gate may tell where a cell cannot, or the other way round.`;
 }

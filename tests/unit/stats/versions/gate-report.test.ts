@@ -157,6 +157,21 @@ describe('gateReport', () => {
     expect(above).toBeGreaterThan(0);
   });
 
+  it('passes only where the smallest rise seen is within the tolerance, and says it so', () => {
+    const outcomes = new Set<string>();
+    for (const shots of [4000, 5500, 7000, 9000]) {
+      const random = generator(58, shots);
+      const cells = [...version(random, '1', shots), ...version(random, '2', shots)];
+      for (const { outcome, smallestRise, reasons } of gateReport(rule, '2', cells).groups) {
+        const said = Number(/a rise under ([\d.]+)\u202f%/.exec(reasons.join(' '))?.[1]);
+        if (outcome === 'passed') expect(Math.max(smallestRise!, said / 100)).toBeLessThanOrEqual(0.1);
+        if (outcome === 'undecided') expect(Math.min(smallestRise!, said / 100)).toBeGreaterThan(0.1);
+        outcomes.add(outcome);
+      }
+    }
+    expect([...outcomes].sort()).toEqual(['passed', 'undecided']);
+  });
+
   it('says what excess is seen to be above the tolerance', () => {
     const { groups } = gateReport({ ...rule, tolerance: 0.5 }, '1', one);
     // The level is 0.05/8: quantiles 2.498 and 0.8416 from tables; 1.5·exp(3.339·√(2·(63/64)/8000)) − 1 = 0.581.

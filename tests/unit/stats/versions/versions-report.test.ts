@@ -126,6 +126,19 @@ describe('versionsReport', () => {
     expect(moved.because.join(' ')).toContain('In 1 of them a rise of 10');
   });
 
+  it('says over how many cells it adjusts, and that a gate, which takes one version, may see more', async () => {
+    const random = generator(70, 0);
+    const versions = ['1', '2', '3', '4'];
+    const cells = versions.map((version) => cell('a', version, equal(6)(random, 500)));
+    const cautions = async (named: string[]) =>
+      (await versionsReport(cells.slice(0, named.length), { ...asked, versions: named })).cautions.join(' ');
+    // Three cells here, two tests at the gate of one version; then two cells.
+    expect(await cautions(versions)).toMatch(
+      /over 3 cells of all versions .* less is seen here than at the gate/
+    );
+    expect(await cautions(versions.slice(0, 3))).toMatch(/over 2 cells .* or the other way round/);
+  });
+
   it('shuffles no pair of other trials, geometry or cut, and counts those left out', async () => {
     const counts = equal(6)(generator(68, 0), 5000);
     const one = (version: string, more: Partial<VersionCell>): VersionCell => ({
