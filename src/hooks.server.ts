@@ -1,4 +1,5 @@
 import { building } from '$app/environment';
+import { plainError } from '$lib/model/plain-errors';
 import { database } from '$lib/server/application';
 import { apiProblems } from '$lib/server/handles/api-problems';
 import { firstReading } from '$lib/server/handles/first-reading';
@@ -11,6 +12,10 @@ import { withDatabase } from '$lib/server/handles/with-database';
 import { withPerson } from '$lib/server/handles/with-person';
 import type { ServerInit } from '@sveltejs/kit';
 import { sequence } from '@sveltejs/kit/hooks';
+import { z } from 'zod';
+
+// What no schema has words for is told in ours, on pages and to scripts.
+z.config({ customError: plainError });
 
 export const init: ServerInit = () => {
   if (!building) database();
