@@ -1,6 +1,16 @@
+import { z } from 'zod';
 import { hardnessSchema } from '../../team/jobs/job-request';
+import { JOB_STATUSES } from '../../team/jobs/job-row';
 import type { Operation } from '../operation';
 import { jobSchema } from '../shapes/job';
+import { pageOf, pageQuery } from '../shapes/page';
+
+export const jobsQuery = z.strictObject({
+  ...pageQuery,
+  dataset: z.string().max(100).optional().describe('Id of a dataset: what was asked for it alone'),
+  status: z.enum(JOB_STATUSES).optional().describe('Of this status alone')
+});
+export const jobPageSchema = pageOf(jobSchema);
 
 export const DIAGNOSIS_OPERATIONS: Operation[] = [
   {
@@ -35,6 +45,21 @@ export const DIAGNOSIS_OPERATIONS: Operation[] = [
       413: 'More than the server takes.',
       415: 'Not application/json.',
       422: 'An option does not fit; or the Idempotency-Key came with another request before.'
+    }
+  },
+  {
+    id: 'listJobs',
+    method: 'get',
+    path: '/jobs',
+    part: 'Diagnoses',
+    summary: 'List diagnoses asked for',
+    about: 'By when they were asked for, newest first.',
+    scope: 'read',
+    query: jobsQuery,
+    answer: {
+      status: 200,
+      about: 'One page',
+      content: { type: 'application/json', schema: jobPageSchema, about: 'A page of jobs' }
     }
   },
   {
