@@ -73,6 +73,16 @@ describe('the window of a sweep', () => {
   });
 });
 
+describe('an address that asks for a window that is none', () => {
+  it.each(['from=16&to=2', 'from=abc&to=5', 'from=5', 'to=', 'from=0&to=5'])('%s', async (search) => {
+    const { page, at } = await withQuench(`no-window-${search.replace(/[^a-z0-9]/g, '')}`);
+    await page.goto(`${at}?${search}`);
+    expect(await page.getByRole('alert').innerText()).toBe(
+      'The window goes from a time above 0 to a later one. What is shown is the sweep as it was saved.'
+    );
+  });
+});
+
 describe('the form of a new sweep', () => {
   it('is filled in by keys alone', async () => {
     const { page, root, complaints } = await withQuench('by-keys');
@@ -109,6 +119,10 @@ describe('the form of a new sweep', () => {
     await withDatabaseOf(server, (db) => db.update(dataset).set(more).where(eq(dataset.id, ids[4])).run());
     await page.goto(`${root}/sweeps/new`, { waitUntil: 'networkidle' });
     await page.getByRole('textbox', { name: /^Name/ }).fill('kept as typed');
+    // One without a time above 0 is offered, and not marked.
+    const fifth = page.getByRole('checkbox', { name: 'Take quench 5' });
+    expect(await fifth.isChecked()).toBe(!('quenchTime' in more));
+    await fifth.check();
     await page.getByRole('button', { name: 'Make this sweep' }).click();
     const told = page.getByRole('alert');
     await told.waitFor();

@@ -1,4 +1,6 @@
 import { formatNumber } from '$lib/model/format-number';
+import { LEAST_CHANCE } from '$lib/stats/sweep/floor-chance';
+import { sayChance } from '$lib/stats/sweep/say-chance';
 import type { SweepReport } from '$lib/stats/sweep/types';
 import { scaleLinear } from 'd3-scale';
 import { bottomAxis } from './axis-marks';
@@ -82,7 +84,7 @@ export function windowsPicture(
       x: x(exponent.value),
       y: y(i),
       words: () =>
-        `From ${formatNumber(from)} to ${formatNumber(to)}: ${formatNumber(exponent.value)}, 95 % interval ${formatNumber(exponent.low)} to ${formatNumber(exponent.high)}; one exponent for all: ${commonP <= 1e-300 ? 'p under 1e−300' : `p = ${formatNumber(commonP, 2)}`}.`
+        `From ${formatNumber(from)} to ${formatNumber(to)}: ${formatNumber(exponent.value)}, 95 % interval ${formatNumber(exponent.low)} to ${formatNumber(exponent.high)}; one exponent for all: p ${commonP <= LEAST_CHANCE ? '' : '= '}${sayChance(commonP)}.`
     })),
     notes:
       windows.length < all.length

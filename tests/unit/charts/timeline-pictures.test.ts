@@ -40,6 +40,7 @@ function timeline(names: string[], groups: string[], of: (i: number, j: number) 
     versions: names.map((name) => ({ id: name, name })),
     reference: names.at(0) ?? null,
     goneReference: null,
+    goneGroup: false,
     groups,
     group: groups.at(0) ?? null,
     alpha: 0.05,

@@ -5,7 +5,7 @@ import { readSweep } from './read-sweep';
 import { steadyReports } from './steady-reports';
 import { sweepLaws } from './sweep-laws';
 import { sweepWords } from './sweep-words';
-import type { SweepOptions, SweepReport, SweptPoint } from './types';
+import type { MixedCondition, SweepOptions, SweepReport, SweptPoint } from './types';
 import { windowExponents } from './window-exponents';
 
 /**
@@ -13,9 +13,14 @@ import { windowExponents } from './window-exponents';
  * digit what the counts would say.
  *
  * @param given points with their covariances
+ * @param mixed conditions that differ between the datasets
  * @throws BadInput as readSweep; RangeError for d, ν or z that are not positive, or for points without covariances
  */
-export function refitSweep(given: Omit<SweptPoint, 'inWindow'>[], options: SweepOptions): SweepReport {
+export function refitSweep(
+  given: Omit<SweptPoint, 'inWindow'>[],
+  options: SweepOptions,
+  mixed: MixedCondition[] = []
+): SweepReport {
   const sorted = readSweep(given, options);
   const window = options.window ?? { from: sorted[0].time, to: sorted[sorted.length - 1].time };
   const points = sorted.map((one): SweptPoint => {
@@ -44,6 +49,7 @@ export function refitSweep(given: Omit<SweptPoint, 'inWindow'>[], options: Sweep
     alpha: options.alpha,
     window,
     points,
+    ...(mixed.length > 0 && { mixed }),
     laws,
     expected: expectedOf(options, laws),
     steady: steadyReports(known, options),

@@ -1,7 +1,9 @@
 import { formatNumber } from '../words/format-number';
 import { sayInterval } from '../words/say-interval';
-import { misreadCaution } from './misread-caution';
 import { LEAST_CHANCE } from './floor-chance';
+import { misreadCaution } from './misread-caution';
+import { mixedCaution } from './mixed-caution';
+import { sayChance } from './say-chance';
 import { sayLoss } from './say-loss';
 import type { SweepReport } from './types';
 
@@ -13,7 +15,7 @@ export function sweepWords(found: Found): Pick<SweepReport, 'statement' | 'becau
 }
 
 /** A chance below what a number can hold is told as what it is below. */
-const thinP = (p: number) => (p <= LEAST_CHANCE ? 'p under 1e−300' : `p = ${formatNumber(p, 2)}`);
+const thinP = (p: number) => `p ${p <= LEAST_CHANCE ? '' : '= '}${sayChance(p)}`;
 
 function statementOf({ laws, alpha, points }: Found): string {
   const held = points.filter(({ inWindow, cumulants }) => inWindow && cumulants).length;
@@ -76,7 +78,7 @@ const sayChange = (p: number | null, alpha: number): string =>
 /** Shots under which the errors of a dataset are themselves too poorly known. */
 const FEW_SHOTS = 300;
 
-function cautionsOf({ laws, steady, unit, axis, points }: Found): string[] {
+function cautionsOf({ laws, steady, unit, axis, points, mixed }: Found): string[] {
   const lines = [
     'A power law in a window does not say which physics made it: plateaus at the fast end and a background at the slow end end it, so look how the exponent moves with the window.'
   ];
@@ -100,5 +102,5 @@ function cautionsOf({ laws, steady, unit, axis, points }: Found): string[] {
     lines.push(
       'Well-mixed annihilation of pairs, A + A → 0, takes the variance to two thirds of the mean while many are left; correlated or confined defects need not.'
     );
-  return [...lines, ...misreadCaution(points)];
+  return [...lines, ...mixedCaution(mixed), ...misreadCaution(points)];
 }

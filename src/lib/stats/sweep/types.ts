@@ -43,6 +43,14 @@ export interface SweepOptions {
   alpha: number;
 }
 
+/** A condition that is not the same for all datasets of a sweep. */
+export interface MixedCondition {
+  of: 'device' | 'firmware' | 'group';
+  /** Different ones stated, and datasets that state none. */
+  stated: number;
+  unstated: number;
+}
+
 export interface SweptPoint {
   label: string;
   time: number;
@@ -106,6 +114,8 @@ export interface SweepReport {
   alpha: number;
   window: { from: number; to: number };
   points: SweptPoint[];
+  /** Conditions that differ between the datasets; left out where none does. The first documents did not have it. */
+  mixed?: MixedCondition[];
   laws: SweepLaws | null;
   /** Exponent expected of the transition given, and whether the interval of the common one holds it. */
   expected: {

@@ -132,7 +132,7 @@ describe('what is refused beyond what numbers hold', () => {
     expect(z!).toBeGreaterThan(37);
     expect(z! / Math.sqrt(report.laws!.common.chiSquare)).toBeCloseTo(1, 1);
     const said = [report.statement, ...report.because].join(' ');
-    expect(said).toMatch(/p under 1e−300/);
+    expect(said).toMatch(/p under 1 × 10⁻³⁰⁰/);
     expect(said).not.toMatch(/p = 0[^.]|– standard/);
     expect(JSON.parse(JSON.stringify(report))).toEqual(report);
   });

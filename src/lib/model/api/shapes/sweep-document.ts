@@ -50,6 +50,16 @@ export const sweepDocumentSchema = z.object({
         .describe('Of the errors of κ1, κ2, κ3, 3 × 3 row by row; the first documents did not have it')
     })
   ),
+  mixed: z
+    .array(
+      z.object({
+        of: z.enum(['device', 'firmware', 'group']),
+        stated: z.int().describe('Different ones that are stated'),
+        unstated: z.int().describe('Datasets that state none')
+      })
+    )
+    .optional()
+    .describe('Conditions that differ between the datasets; left out where none does'),
   laws: z
     .object({
       quantities: z.int().describe('How many of κ1, κ2, κ3 a power law could be fitted to'),

@@ -23,6 +23,8 @@ export interface DeviceTimeline {
   goneReference: string | null;
   groups: string[];
   group: string | null;
+  /** Whether a group was asked for that is not among them: another is drawn. */
+  goneGroup: boolean;
   alpha: number;
   tolerance: number;
   points: TimelinePoint[];

@@ -16,6 +16,10 @@ const SEED = 1;
 /** Level where the device has no rule of its own. Common practice. */
 const UNRULED = 0.05;
 
+/** What is said of a group that an address asks for and the device does not have. */
+const NO_GROUP =
+  'There is no group of the name that was asked for, or none of its datasets counts: choose another, and two versions or more that were measured in it.';
+
 /** Others of this server get their turn after each pair. */
 const pace: Pace = { breathe: () => new Promise((resolve) => setImmediate(resolve)) };
 
@@ -36,14 +40,21 @@ export async function compareVersions(
   if (!found) return { ok: false, reason: 'unknown' };
   const facts = cellFacts(db, cellsOf(db, found)).toSorted((a, b) => byName.compare(a.group, b.group));
   const groups = [...new Set(facts.map(({ group }) => group))];
-  const group = groups.includes(asked.group ?? '') ? asked.group : (groups.at(0) ?? null);
+  const noGroup = asked.group !== null && !groups.includes(asked.group);
+  const group = noGroup ? (groups.at(0) ?? null) : (asked.group ?? groups.at(0) ?? null);
   const here = facts.filter((fact) => fact.group === group);
   const measured = new Set(here.map(({ version }) => version));
   const versions = versionsOf(db, found)
     .filter(({ name }) => measured.has(name))
     .map(({ id, name }) => ({ id, name, chosen: asked.versions.includes(id) }));
   const chosen = versions.filter((version) => version.chosen).map(({ name }) => name);
-  const open: VersionPairs = { versions, groups, group, found: null, why: whyNot(asked.versions, chosen) };
+  const open: VersionPairs = {
+    versions,
+    groups,
+    group,
+    found: null,
+    why: noGroup ? NO_GROUP : whyNot(asked.versions, chosen)
+  };
   if (open.why !== null || chosen.length === 0 || group === null) return { ok: true, pairs: open };
   const alpha = db.select().from(gateRule).where(eq(gateRule.deviceId, id)).get()?.alpha ?? UNRULED;
   const cells = withCounts(

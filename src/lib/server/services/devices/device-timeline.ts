@@ -78,6 +78,7 @@ export async function deviceTimeline(
       versions,
       reference: report.reference,
       goneReference: gone,
+      goneGroup: asked.group !== null && group !== asked.group,
       groups,
       group,
       alpha,

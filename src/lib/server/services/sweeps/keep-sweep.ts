@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import type { SweepRequest } from '../../../model/team/sweeps/sweep-request';
 import { sweepName } from '../../../model/team/sweeps/sweep-name';
 import { engineVersion } from '../../../stats/engine-version';
+import { mixedConditions } from '../../../stats/sweep/mixed-conditions';
 import { sweepReport } from '../../../stats/sweep/sweep-report';
 import { BadInput } from '../../../stats/types';
 import type { Database } from '../../db/client';
@@ -63,7 +64,7 @@ function documentOf(chosen: ChosenDataset[], { axis, window, transition, alpha }
   try {
     const { inputs, timeUnit, unit } = inputsOfDatasets(chosen, axis);
     const options = { axis, timeUnit, unit, window, transition, alpha };
-    return { ok: true as const, options, report: sweepReport(inputs, options) };
+    return { ok: true as const, options, report: sweepReport(inputs, options, mixedConditions(chosen)) };
   } catch (error) {
     if (!(error instanceof BadInput)) throw error;
     return { ok: false as const, reason: 'refused' as const, why: error.reason };

@@ -26,10 +26,10 @@ export function moveWindow(
   kept: { document: SweepReport; options: SweepOptions },
   window: { from: number; to: number }
 ): MovedWindow {
-  const { points, unit } = kept.document;
+  const { points, unit, mixed } = kept.document;
   const options = { ...kept.options, window };
   if (points.every(({ covariance }) => covariance !== undefined))
-    return told(() => refitSweep(points, options));
+    return told(() => refitSweep(points, options, mixed));
   const ids = points.flatMap((point) => point.dataset?.id ?? []);
   const rows = db
     .select({ id: dataset.id, counts: dataset.counts })
@@ -46,7 +46,8 @@ export function moveWindow(
         const { histogram } = inUnits(toHistogram(data), null, unit);
         return { label, time, counts: histogram.counts, trials, misread, dataset: from };
       }),
-      options
+      options,
+      mixed
     )
   );
 }

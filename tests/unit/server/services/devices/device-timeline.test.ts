@@ -70,7 +70,9 @@ describe('the timeline of a device', () => {
     expect(last.dispersion!.value).toBeGreaterThan(last.limits!.dispersion[1]);
     expect(last.divergence).toEqual({ value: 0.02, low: 0.01, high: 0.03 });
     expect(drawn.statement).toMatch(/rises over version a in c \(1 group\)/);
-    expect((await open(named(), null, 'q1')).group).toBe('q1');
+    expect(await open(named(), null, 'q1')).toMatchObject({ group: 'q1', goneGroup: false });
+    expect(await open(named(), null, 'nope')).toMatchObject({ group: 'q2', goneGroup: true });
+    expect(drawn.goneGroup).toBe(false);
     db.$client.close();
   });
 
@@ -198,6 +200,11 @@ describe('versions pair by pair', () => {
     expect(await pairs(['nothing', ids[0]])).toMatchObject({
       found: null,
       why: expect.stringMatching(/not here/)
+    });
+    expect(await pairs(ids, 'nope')).toMatchObject({
+      found: null,
+      group: 'q1',
+      why: expect.stringMatching(/^There is no group of the name/)
     });
     for (let i = 0; i < 9; i++) save(`d${i}`, 'q1', 20 + i);
     named();

@@ -63,3 +63,23 @@ describe('a window that is moved', () => {
     });
   });
 });
+
+describe('a sweep of unlike conditions', () => {
+  it('says that its datasets are of several devices and versions, in whatever window', () => {
+    const { db, maker } = setting();
+    const ids = makeQuench(db, maker, free, 1);
+    const clear = readSweep(db, maker, saved(db, maker, asked(ids)));
+    const more = { device: 'Another ring', firmware: '2.1' };
+    db.update(dataset).set(more).where(eq(dataset.id, ids[2])).run();
+    const read = readSweep(db, maker, saved(db, maker, asked(ids)));
+    if (!read.ok || !clear.ok) throw new Error('gone');
+    const said = /^The datasets are of 2 devices and 1 firmware version \(8 state none\): /;
+    expect(clear.document!.cautions.join(' ')).not.toMatch(/The datasets are of/);
+    expect(clear.document).not.toHaveProperty('mixed');
+    expect(read.document!.cautions.filter((line) => said.test(line))).toHaveLength(1);
+    const kept = { document: read.document!, options: read.sweep.options };
+    const moved = moveWindow(db, maker, kept, { from: times[2], to: times[6] });
+    if (!moved.ok) throw new Error(moved.why);
+    expect(moved.document.cautions.filter((line) => said.test(line))).toHaveLength(1);
+  });
+});

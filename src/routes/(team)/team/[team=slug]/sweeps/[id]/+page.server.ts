@@ -11,6 +11,8 @@ import type { Actions, PageServerLoad } from './$types';
 
 const gone = (): never => error(404, { message: 'There is no page at this address.', code: 'not-found' });
 
+const NO_WINDOW = 'The window goes from a time above 0 to a later one.';
+
 /** The sweep as it was saved; with `?from=…&to=…` the same with another window, which is not saved. */
 export const load: PageServerLoad = (event) => {
   const { actor } = askTeam(event, 'see');
@@ -18,7 +20,9 @@ export const load: PageServerLoad = (event) => {
   if (!read.ok) return gone();
   const { text, ...sweep } = read.sweep;
   const { document } = read;
-  const window = readWindow(event.url.searchParams);
+  const { searchParams } = event.url;
+  const window = readWindow(searchParams);
+  const asked = ['from', 'to'].some((name) => searchParams.has(name));
   const moved =
     document && window
       ? moveWindow(event.locals.db, actor, { document, options: sweep.options }, window)
@@ -27,7 +31,7 @@ export const load: PageServerLoad = (event) => {
     sweep: { ...sweep, bytes: Buffer.byteLength(text) },
     document: moved?.ok ? moved.document : document,
     moved: moved?.ok === true,
-    trouble: moved && !moved.ok ? moved.why : null,
+    trouble: asked && !window ? NO_WINDOW : moved && !moved.ok ? moved.why : null,
     may: {
       aside: can({ kind: 'member', ...actor }, 'delete', { createdBy: sweep.createdBy }),
       link: can({ kind: 'member', ...actor }, 'link', { createdBy: sweep.createdBy }),
@@ -53,7 +57,7 @@ export const actions: Actions = {
     const form = await event.request.formData();
     const asked = new URLSearchParams({ from: String(form.get('from')), to: String(form.get('to')) });
     const window = readWindow(asked);
-    if (!window) return fail(400, { message: 'The window goes from a time above 0 to a later one.' });
+    if (!window) return fail(400, { message: NO_WINDOW });
     const { options, name, datasets } = read.sweep;
     const ids = datasets.map(({ id }) => id);
     return acting({}, () => {

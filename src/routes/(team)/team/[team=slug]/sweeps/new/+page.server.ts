@@ -1,4 +1,5 @@
 import { readSweepFilter } from '$lib/model/team/sweeps/sweep-filter';
+import { tickedDatasets } from '$lib/model/team/sweeps/ticked-datasets';
 import { TRANSITIONS } from '$lib/model/team/sweeps/transitions';
 import { saveSweep } from '$lib/server/services/sweeps/save-sweep';
 import { sweepableDatasets } from '$lib/server/services/sweeps/sweepable-datasets';
@@ -11,9 +12,11 @@ import type { Actions, PageServerLoad } from './$types';
 export const load: PageServerLoad = (event) => {
   const { actor } = askTeam(event, 'diagnose');
   const filter = readSweepFilter(event.url.searchParams);
+  const offered = sweepableDatasets(event.locals.db, actor, filter);
   return {
     filter,
-    offered: sweepableDatasets(event.locals.db, actor, filter),
+    offered,
+    ticked: tickedDatasets(offered.rows, filter),
     classes: TRANSITIONS
   };
 };
