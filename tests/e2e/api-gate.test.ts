@@ -77,6 +77,8 @@ describe('from histograms to a gate with curl alone', () => {
     expect(await codeOf(await put(rule, foreign))).toEqual([404, 'no-device']);
     expect(await codeOf(await put(rule, token, 'Sand'))).toEqual([404, 'no-device']);
     expect(await codeOf(await put('{"reference": "ebb-9"}'))).toEqual([422, 'no-version']);
+    const nowhere = await put('{"reference": "ebb-3.2", "groups": ["q1", "q99"]}');
+    expect(await codeOf(nowhere)).toEqual([422, 'no-group']);
     expect(await codeOf(await put('{"reference": "ebb-3.2", "alpha": 0.9}'))).toEqual([422, 'bad-input']);
     expect(await codeOf(await put('{"reference": "ebb-'))).toEqual([400, 'bad-json']);
     for (const path of ['/gate/rule?device=Shingle', '/gate?device=Shingle&version=ebb-3.1'])

@@ -6,7 +6,8 @@ export type PlainHindrance = Exclude<Hindrance, 'too-few-shots' | 'above-toleran
 const words: Record<PlainHindrance, string> = {
   'no-counts': 'has no counts',
   'no-reference': 'cannot be compared, since the reference is gone',
-  'not-diagnosed': 'is not diagnosed yet',
+  'not-diagnosed':
+    'is not diagnosed yet: its newest dataset of this group waits for its diagnosis, or nobody has asked for one',
   lumped: 'lumps counts, so that its variance is not known',
   cut: 'keeps a range of counts only, for which the ceiling used here does not hold',
   'misread-bonds': 'states misreads on bonds, for which the ceiling used here does not hold',

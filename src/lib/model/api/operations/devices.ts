@@ -47,7 +47,7 @@ export const DEVICE_OPERATIONS: Operation[] = [
     part: 'Devices',
     summary: 'Ask whether a firmware version passes its gate',
     about:
-      'Decided from the datasets as they stand now. While a diagnosis waits the outcome is undecided, and Retry-After says when to ask again.',
+      'Decided from the datasets as they stand now. While a diagnosis waits the outcome is undecided, or failed where the counts of any group fail already; Retry-After says when to ask again.',
     scope: 'read',
     query: gateQuery,
     answer: {
@@ -114,7 +114,7 @@ export const DEVICE_OPERATIONS: Operation[] = [
       409: 'Somebody set another rule in this very moment.',
       413: 'More than the server takes.',
       415: 'Not application/json.',
-      422: 'A field does not fit, or the device has no version of that name for a reference.'
+      422: 'A field does not fit, the device has no version of that name for a reference, or no dataset of it names one of the groups.'
     }
   }
 ];

@@ -41,7 +41,7 @@ export const newRuleSchema = z.strictObject({
     .max(MOST_GROUPS)
     .nullable()
     .default(null)
-    .describe('Groups that count; null for all')
+    .describe('Groups that count, each named by a dataset of the device; null for all')
 });
 
 /** A device with its firmware versions in order and the rule of its gate. */
@@ -110,7 +110,9 @@ export const gateSchema = z.object({
   version: z.object({ id: z.string(), name: z.string() }),
   waiting: z
     .array(z.object({ id: z.string(), name: z.string() }))
-    .describe('Datasets whose diagnosis waits or runs: ask again when none is left'),
+    .describe(
+      'Datasets whose diagnosis waits or runs: ask again when none is left. One for whose diagnosis nobody asked is not among them: the reasons of its group say so'
+    ),
   decidedAt: momentSchema,
   document: gateDocumentSchema
 });

@@ -17,6 +17,10 @@ export interface GateRuleEntry {
 /** Groups that a rule may name, each on a line of its own. */
 export const MOST_GROUPS = 500;
 
+/** Why a rule is refused that names groups without a dataset. */
+export const sayNoGroups = (groups: string[]): string =>
+  `No dataset of this device names ${groups.length === 1 ? 'the group' : 'the groups'} ${groups.slice(0, 8).join(', ')}${groups.length > 8 ? ` and ${groups.length - 8} more` : ''}: every gate would be undecided for want of it. The rule stands as it was.`;
+
 /** What a person says about the rule; percentages as they are typed. */
 export const gateRuleSchema = z.object({
   version: z.coerce.number().int().min(0),

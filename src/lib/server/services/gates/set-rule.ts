@@ -1,9 +1,11 @@
+import { sayGroup } from '../../../model/team/devices/cell';
 import type { GateRuleForm } from '../../../model/team/devices/gate';
 import { and, eq } from 'drizzle-orm';
 import type { Database } from '../../db/client';
 import { firmwareVersion, gateRule } from '../../db/schema';
 import type { Actor } from '../access/actor';
 import { scriptOf } from '../access/script-of';
+import { cellsOf } from '../devices/cells-of';
 import { findDevice } from '../devices/find-device';
 import { recordEvent } from '../events/record-event';
 import { ruleOf } from './rule-of';
@@ -11,7 +13,9 @@ import { ruleOf } from './rule-of';
 export type SetRule =
   | { ok: true; version: number }
   /** `no-version`: the reference is none of this device's. `stale`: somebody set another rule meanwhile. */
-  | { ok: false; reason: 'unknown' | 'no-version' | 'stale' };
+  | { ok: false; reason: 'unknown' | 'no-version' | 'stale' }
+  /** Groups that no dataset of the device names, or only such as are put aside. */
+  | { ok: false; reason: 'no-group'; groups: string[] };
 
 /** Sets the rule of a device's gate, if it still is as the editor saw it. */
 export function setRule(
@@ -34,6 +38,9 @@ export function setRule(
       if (!reference) return { ok: false, reason: 'no-version' };
       const before = ruleOf(tx, deviceId)?.version ?? 0;
       if (before !== rule.version) return { ok: false, reason: 'stale' };
+      const there = new Set(cellsOf(tx, found).map(({ group }) => sayGroup(group)));
+      const missing = (rule.groups ?? []).filter((group) => !there.has(group));
+      if (missing.length > 0) return { ok: false, reason: 'no-group', groups: missing };
       const version = before + 1;
       const groups = rule.groups === null ? null : JSON.stringify(rule.groups);
       const set = { referenceId, referenceName: reference.name, tolerance, alpha, groups, version };

@@ -121,6 +121,23 @@ describe('the gate of a version', () => {
     db.$client.close();
   });
 
+  it('says that a newer dataset is not diagnosed, also where nobody asked and nothing waits', () => {
+    const { db, lead, deviceId, b, c, rule, outcome } = withGate();
+    setRule(db, lead, deviceId, rule);
+    expect([outcome(b), outcome(c)]).toEqual(['passed', 'failed']);
+    for (const firmware of ['b', 'c'])
+      makeDataset(db, lead, { device: 'Kelp', firmware, group: 'q1', createdAt: 9, trials: 20 });
+    const [passing, failing] = [b, c].map((id) => readGate(db, lead, deviceId, id));
+    if (!passing.ok || !failing.ok) throw new Error('no gate');
+    // One group failed already: what the other comes to cannot change that.
+    expect([passing.report.outcome, failing.report.outcome]).toEqual(['undecided', 'failed']);
+    for (const { report, waiting } of [passing, failing]) {
+      expect(waiting).toEqual([]);
+      expect(report.groups[0].reasons.join(' ')).toMatch(/is not diagnosed yet: .* nobody has asked for one/);
+    }
+    db.$client.close();
+  });
+
   it('is decided a moment after a report of the reference comes, for every version', async () => {
     const { db, lead, ids, deviceId, a, b, c, rule, events } = withGate();
     setRule(db, lead, deviceId, rule);
@@ -145,6 +162,9 @@ describe('the gate of a version', () => {
       version: 2
     });
     expect(outcome(c)).toBe('passed');
+    const nowhere = { ...rule, version: 2, groups: ['q1', 'q99'] };
+    expect(setRule(db, lead, deviceId, nowhere)).toEqual({ ok: false, reason: 'no-group', groups: ['q99'] });
+    expect(outcome(c), 'by the rule that stands').toBe('passed');
     for (const actor of [stranger, { ...stranger, teamId: lead.teamId }]) {
       expect(readGate(db, actor, deviceId, b)).toEqual({ ok: false, reason: 'unknown' });
       expect(findGate(db, actor, { device: 'Kelp', version: 'b' })).toMatchObject({ reason: 'no-device' });

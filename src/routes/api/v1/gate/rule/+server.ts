@@ -1,6 +1,7 @@
 import { ruleQuery } from '$lib/model/api/operations/devices';
 import { gateRuleSchema, newRuleSchema } from '$lib/model/api/shapes/device';
 import { toRule } from '$lib/model/api/to-rule';
+import { sayNoGroups } from '$lib/model/team/devices/gate';
 import { findNamedDevice } from '$lib/server/services/gates/find-named-device';
 import { readRule } from '$lib/server/services/gates/read-rule';
 import { setNamedRule } from '$lib/server/services/gates/set-named-rule';
@@ -54,6 +55,8 @@ export const PUT: RequestHandler = async (event) => {
     const body = jsonOf(bytes, type, newRuleSchema);
     if (!body.ok) return { refused: body.refused };
     const set = setNamedRule(event.locals.db, asked.actor, read.query.device, body.body);
+    if (!set.ok && set.reason === 'no-group')
+      return { refused: { status: 422, code: 'no-group', title: sayNoGroups(set.groups) } };
     if (!set.ok) return { refused: REFUSALS[set.reason] };
     return { done: { status: 200, location: null, body: JSON.stringify(toRule(set.rule)) } };
   });

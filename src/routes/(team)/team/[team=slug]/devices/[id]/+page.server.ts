@@ -1,5 +1,5 @@
 import { moveSchema, notesSchema } from '$lib/model/team/devices/device-form';
-import { gateRuleSchema } from '$lib/model/team/devices/gate';
+import { gateRuleSchema, sayNoGroups } from '$lib/model/team/devices/gate';
 import { deviceMatrix } from '$lib/server/services/devices/device-matrix';
 import { moveVersion } from '$lib/server/services/devices/move-version';
 import { noteDevice } from '$lib/server/services/devices/note-device';
@@ -55,6 +55,7 @@ export const actions: Actions = {
     const done = setRule(event.locals.db, actor, event.params.id, asked.data);
     if (done.ok) return { told: 'The rule is set. Each version’s page says how it stands by it.' };
     if (done.reason === 'unknown') error(404, NO_DEVICE);
+    if (done.reason === 'no-group') return fail(400, { problem: sayNoGroups(done.groups), typedRule });
     return fail(done.reason === 'stale' ? 409 : 400, { problem: DEVICE_REFUSALS[done.reason], typedRule });
   },
   remove: async (event) => {
