@@ -4,6 +4,7 @@ import { eq } from 'drizzle-orm';
 import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { asked, free, makeQuench, saved } from '../support/sweeps';
+import { readPdf } from '../unit/pdf/read-pdf';
 import { complaintsOf } from './support/complaints';
 import { openBrowser } from './support/open-browser';
 import { seedPerson, seedTeam, withDatabaseOf, type SeededPerson } from './support/seed-people';
@@ -72,6 +73,8 @@ describe('a link to a sweep, made on its page', () => {
     expect(await document.json()).toMatchObject({ format: 'severalty.sweep/1' });
     const points = await (await fetch(`${address}/sweep/points.csv`)).text();
     expect(points.trim().split('\r\n')).toHaveLength(10);
+    const print = Buffer.from(await (await fetch(`${address}/sweep/sweep.pdf`)).arrayBuffer());
+    expect(readPdf(print).text).toContain('Wombat decades');
     for (const file of ['report.pdf', 'report.json', 'bundle.zip', 'tails.csv'])
       expect((await fetch(`${address}/${file}`)).status, file).toBe(404);
     await page.close();
@@ -98,6 +101,9 @@ describe('a link to a sweep, made on its page', () => {
       expect(answer.status, path).toBe(200);
       given.push(await answer.text(), JSON.stringify([...answer.headers]));
     }
+    const print = await fetch(`${address}/sweep/sweep.pdf`);
+    expect(print.status).toBe(200);
+    given.push(readPdf(Buffer.from(await print.arrayBuffer())).text, JSON.stringify([...print.headers]));
     for (const text of given) for (const secret of secrets) expect(text, secret).not.toContain(secret);
     expect(given[0]).toContain('dataset 9');
     await page.close();

@@ -92,5 +92,21 @@ export const SWEEP_OPERATIONS: Operation[] = [
       about: 'Cumulants, ratios and their intervals, a line each dataset',
       content: { type: 'text/csv', schema: null, about: 'A table' }
     }
+  },
+  {
+    id: 'readSweepPdf',
+    method: 'get',
+    path: '/sweeps/{id}/sweep.pdf',
+    part: 'Sweeps',
+    summary: 'Take a sweep for print',
+    about: 'Counts as ten requests.',
+    scope: 'read',
+    idOf: 'sweep',
+    answer: {
+      status: 200,
+      about: 'A tagged PDF; the same sweep gives the same bytes',
+      content: { type: 'application/pdf', schema: null, about: 'PDF' }
+    },
+    refusals: { 500: 'The stored document is damaged; document.json gives its bytes all the same.' }
   }
 ];
