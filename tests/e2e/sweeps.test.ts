@@ -52,6 +52,17 @@ describe('the window of a sweep', () => {
     await page.getByText('Not saved:').waitFor();
     expect(windowOf(page)).toEqual([times[2], times[8]]);
 
+    // The line itself is taken as well as its flag: here far below it, and dropped back at the first time.
+    const held = (await begin.locator('.line').boundingBox())!;
+    await page.mouse.move(held.x + held.width / 2, held.y + held.height * 0.7);
+    await page.mouse.down();
+    await page.mouse.move(grip.x + grip.width / 2, held.y + held.height * 0.7, { steps: 5 });
+    await page.mouse.up();
+    await page.waitForURL((url) => Number(url.searchParams.get('from')) === times[0]);
+    await begin.focus();
+    for (let i = 0; i < 2; i++) await page.keyboard.press('ArrowRight');
+    await page.waitForURL((url) => Number(url.searchParams.get('from')) === times[2]);
+
     await end.focus();
     await page.keyboard.press('ArrowLeft');
     await page.waitForURL((url) => Number(url.searchParams.get('to')) === times[7]);

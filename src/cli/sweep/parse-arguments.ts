@@ -33,18 +33,33 @@ export function parseArguments(args: string[]): AskedSweep | 'help' {
   const file = oneFile('sweep', positionals);
   const json = asksJson(values);
   const axis = oneOf('axis', values.axis ?? 'quench', ['quench', 'hold'] as const);
+  const [from, to] = (['from', 'to'] as const).map((name) => {
+    const value = values[name];
+    return value === undefined ? null : numberOf(name, value, 'a time above 0');
+  });
+  if (from !== null && to !== null && !(to > from))
+    throw new Refusal([
+      `--from and --to: the window goes from a time above 0 to a later one, not from ${values.from} to ${values.to}.`
+    ]);
   return {
     file,
     options: {
       axis: axis === 'quench' ? 'quench-time' : 'hold-time',
       unit: oneOf('unit', values.unit ?? 'defect', ['defect', 'pair'] as const),
       transition: values.transition === undefined ? null : transitionOf(values.transition),
-      alpha: numberOf('alpha', values.alpha ?? '0.05', 'a level such as 0.05')
+      alpha: levelOf(values.alpha ?? '0.05')
     },
-    from: values.from === undefined ? null : numberOf('from', values.from, 'a time above 0'),
-    to: values.to === undefined ? null : numberOf('to', values.to, 'a time above 0'),
+    from,
+    to,
     json
   };
+}
+
+function levelOf(value: string): number {
+  const what = 'a level above 0 and below 0.5, such as 0.05';
+  const alpha = numberOf('alpha', value, what);
+  if (alpha < 0.5) return alpha;
+  throw new Refusal([`--alpha takes ${what}, not "${value}".`]);
 }
 
 function transitionOf(value: string): SweepOptions['transition'] {

@@ -26,9 +26,9 @@ async function reportOf({ file, options, from, to }: AskedSweep): Promise<SweepR
   const result = readCounts(await readInput(file), {});
   if (!result.ok) throw new Refusal(sayProblems(file, result.problems, result.more));
   try {
-    const { inputs, timeUnit } = sweepInputs(result.datasets, options);
+    const { inputs, timeUnit, mixed } = sweepInputs(result.datasets, options);
     const window = from === null && to === null ? null : { from: from ?? 0, to: to ?? Number.MAX_VALUE };
-    return sweepReport(inputs, { ...options, timeUnit, window });
+    return sweepReport(inputs, { ...options, timeUnit, window }, mixed);
   } catch (error) {
     if (error instanceof BadInput) throw new Refusal([`${inputName(file)}: ${error.reason}`]);
     throw error;

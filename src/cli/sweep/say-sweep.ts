@@ -1,4 +1,5 @@
 import { wrap } from '$lib/model/plain-text/wrap';
+import { sayChance } from '$lib/stats/sweep/say-chance';
 import type { SweepReport } from '$lib/stats/sweep/types';
 import { formatCount, formatNumber } from '$lib/stats/words/format-number';
 import { table } from '../shared/table';
@@ -10,7 +11,7 @@ export function saySweep(report: SweepReport): string {
   const error = ({ value, high }: { value: number; high: number }) =>
     `${formatNumber(value, 4)} ± ${formatNumber(high - value, 2)}`;
   const points = report.points.map(({ time, shots, cumulants, inWindow }) => [
-    `${formatNumber(time, 4)}${inWindow ? '' : ' (outside)'}`,
+    `${formatNumber(time, 4)}${!inWindow ? ' (outside)' : cumulants ? '' : ' (left out)'}`,
     formatCount(shots),
     ...(cumulants ?? []).map(error),
     ...(cumulants ? [] : ['–', '–', '–'])
@@ -18,8 +19,8 @@ export function saySweep(report: SweepReport): string {
   const windows = report.windows.map(({ from, to, exponent, commonP, lawP }) => [
     `${formatNumber(from, 4)} to ${formatNumber(to, 4)}`,
     error(exponent),
-    formatNumber(commonP, 2),
-    formatNumber(lawP, 2)
+    sayChance(commonP),
+    sayChance(lawP)
   ]);
   return [
     wrap(report.statement),

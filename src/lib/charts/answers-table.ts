@@ -1,5 +1,6 @@
 import { VERDICTS } from '$lib/model/labels';
 import type { SweepReport } from '$lib/stats/sweep/types';
+import { sayInWindow } from './say-in-window';
 import type { Table } from './table';
 import { timeTitle } from './time-title';
 
@@ -12,11 +13,11 @@ export const answersTable = (report: SweepReport): Table => ({
     { title: 'answer', kind: 'text' },
     { title: 'in the window', kind: 'text' }
   ],
-  rows: report.points.map(({ label, time, shots, dataset, inWindow }) => [
+  rows: report.points.map(({ label, time, shots, dataset, inWindow, cumulants }) => [
     label,
     time,
     shots,
     dataset?.verdict ? VERDICTS[dataset.verdict] : 'not diagnosed',
-    inWindow ? 'yes' : 'no'
+    sayInWindow({ inWindow, cumulants })
   ])
 });

@@ -1,5 +1,6 @@
 import { VERDICTS } from '$lib/model/labels';
 import type { SweepReport } from '$lib/stats/sweep/types';
+import { sayInWindow } from './say-in-window';
 import type { Table } from './table';
 import { timeTitle } from './time-title';
 
@@ -21,7 +22,7 @@ export function sweepTable(report: SweepReport): Table {
       label,
       time,
       shots,
-      inWindow ? 'yes' : 'no',
+      sayInWindow({ inWindow, cumulants }),
       ...[...(cumulants ?? [null, null, null]), ...(ratios ?? [null, null])].flatMap((one) =>
         one ? [one.value, one.low, one.high] : [null, null, null]
       ),

@@ -1,4 +1,5 @@
 import { secondsIn } from './seconds-in';
+import { showTimeUnit } from './show-time-unit';
 
 export type OneTimeUnit =
   | { ok: true; unit: string; times: number[] }
@@ -30,7 +31,7 @@ export function oneTimeUnit(
         reason: `Units are mixed: “${stated[0].label}” has its ${what} in ${name(unit)} and “${label}” in ${name(other ?? '')}, and neither is told in the other. Give one unit.`
       };
   }
-  return { ok: true, unit, times };
+  return { ok: true, unit: showTimeUnit(unit), times };
 }
 
 const name = (unit: string): string => (unit === '' ? 'no unit' : `“${unit}”`);

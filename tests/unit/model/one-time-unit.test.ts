@@ -4,6 +4,14 @@ import { describe, expect, it } from 'vitest';
 const at = (label: string, time: number | null, unit: string | null) => ({ label, time, unit });
 
 describe('oneTimeUnit', () => {
+  it('shows us as µs', () => {
+    expect(oneTimeUnit([at('a', 2, 'us'), at('b', 3, 'µs')], 'quench time')).toEqual({
+      ok: true,
+      unit: 'µs',
+      times: [2, 3]
+    });
+  });
+
   it('tells all times in the unit of the first', () => {
     const found = oneTimeUnit([at('a', 2, 'µs'), at('b', 0.5, 'ms'), at('c', 700, 'ns')], 'quench time');
     expect(found).toMatchObject({ ok: true, unit: 'µs' });

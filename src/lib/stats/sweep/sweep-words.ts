@@ -18,9 +18,7 @@ export function sweepWords(found: Found): Pick<SweepReport, 'statement' | 'becau
 const thinP = (p: number) => `p ${p <= LEAST_CHANCE ? '' : '= '}${sayChance(p)}`;
 
 function statementOf({ laws, alpha, points }: Found): string {
-  const held = points.filter(({ inWindow, cumulants }) => inWindow && cumulants).length;
-  if (!laws)
-    return `No power law can be fitted: ${held} of the datasets in the window ${held === 1 ? 'has' : 'have'} cumulants with errors, at two different times or fewer, or a variance that is not known to be positive.`;
+  if (!laws) return `No power law can be fitted: ${whyNone(points)}.`;
   const { common, quantities, p } = laws;
   const names = quantities === 3 ? 'mean, variance and third cumulant' : 'mean and variance';
   if (p !== null && p <= alpha)
@@ -28,6 +26,15 @@ function statementOf({ laws, alpha, points }: Found): string {
   if (common.p <= alpha)
     return `One exponent for ${names} is refused (${thinP(common.p)}): separate exponents fit, one does not.`;
   return `One exponent, ${sayInterval(common.exponent)}, serves ${names}, within their errors (${thinP(common.p)}).`;
+}
+
+function whyNone(points: Found['points']): string {
+  const held = points.filter(({ inWindow, cumulants }) => inWindow && cumulants);
+  if (held.length === 0)
+    return 'no dataset in the window takes four different counts, and fewer tell no errors';
+  return new Set(held.map(({ time }) => time)).size < 2
+    ? 'the datasets of the window that take four different counts, as errors need, are all of one time'
+    : 'in the window the variance is not known to be positive';
 }
 
 function becauseOf(found: Found): string[] {

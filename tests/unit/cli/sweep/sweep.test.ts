@@ -13,6 +13,10 @@ const two = (first: string, second: string): [string, number, number][] =>
     [9, 30, 40, 16, 5].map((shots, n): [string, number, number] => [time, n * 2 + 2 * i, shots])
   );
 
+/** Two datasets that state another condition each. */
+const unlike = (condition: string, first: string, second: string) =>
+  table(two(`5,${first}`, `9,${second}`), `quench_time_us,${condition}`);
+
 describe('npm run sweep', () => {
   it('tells the invented quench sweep in words', () => {
     const { stdout, stderr, status } = run([
@@ -32,6 +36,21 @@ describe('npm run sweep', () => {
     expect(stdout).toContain('quench time, µs');
   });
 
+  it('says which devices differ, who is left out, and in words why nothing is fitted', () => {
+    const few = table(
+      ['D,1', 'E,2'].flatMap((head): [string, number, number][] => [0, 1, 2].map((n) => [head, n, 9])),
+      'device,quench_time_us'
+    );
+    const { stdout, status } = run(['-'], few);
+    expect(status).toBe(0);
+    const said = stdout.replace(/\s+/g, ' ');
+    expect(said).toMatch(
+      /^No power law can be fitted: no dataset in the window takes four different counts, and fewer tell no errors\./
+    );
+    expect(said).toMatch(/The datasets are of 2 devices: /);
+    expect(said).toMatch(/1\.000 \(left out\)/);
+  });
+
   it('prints the document alone, the same bytes again', () => {
     const args = ['fixtures/demo/quench-sweep.csv', '--unit', 'pair', '--json', '--from', '2', '--to', '16'];
     const { stdout } = run(args);
@@ -46,6 +65,7 @@ describe('npm run sweep', () => {
 
   it.each([
     ['a time of zero', [], table(two('0', '5')), 'a time of 0'],
+    ['a time below zero', [], table(two('-2', '5')), 'has a quench time of -2. A time is 0 or more'],
     ['one dataset', [], table(two('5', '9').slice(0, 5)), 'at least two datasets'],
     ['no time at all', [], 'count,shots\n0,5\n1,6\n2,3\n', 'states no quench time'],
     ['mixed units', [], table(two('5 ms', '9 cycles'), 'quench time'), 'Units are mixed'],
@@ -58,8 +78,17 @@ describe('npm run sweep', () => {
     ],
     ['lumped counts', [], 'quench_time_us,count,shots\n1,0,5\n1,1,4\n1,2+,3\n2,0,5\n2,1,4\n', 'lumps counts'],
     ['a broken file', [], 'quench_time_us,count,shots\n1,-3,5\n', 'standard input:2:3'],
-    ['a window the wrong way', ['--from', '9', '--to', '5'], table(two('5', '9')), 'widen it'],
+    [
+      'a window the wrong way',
+      ['--from', '9', '--to', '5'],
+      '',
+      'a time above 0 to a later one, not from 9 to 5'
+    ],
+    ['a window of one time', ['--from', '6'], table(two('5', '9')), 'widen it'],
     ['a transition of two numbers', ['--transition', '1,1'], '', 'three numbers'],
+    ['a level of two', ['--alpha', '2'], '', '--alpha takes a level above 0 and below 0.5'],
+    ['mixed N', [], unlike('qubits', '64', '128'), 'N = 64 and'],
+    ['mixed geometry', [], unlike('geometry', 'sites', 'ring'), 'choose datasets of one geometry'],
     ['a level of words', ['--alpha', 'strict'], '', '--alpha takes'],
     ['an unknown axis', ['--axis', 'sideways'], '', 'quench or hold']
   ])('refuses %s with code 2', (_, args, input, words) => {

@@ -1,4 +1,5 @@
 import { formatNumber } from '$lib/model/format-number';
+import { showTimeUnit } from '$lib/model/show-time-unit';
 import type { Conditions } from '$lib/model/team/datasets/conditions';
 
 const day = new Intl.DateTimeFormat('en-GB', {
@@ -18,7 +19,7 @@ export function sayTime(time: number | null, unit: string | null): string {
   const number = formatNumber(time, 6)
     .replace(/(\.\d*?)0+$/, '$1')
     .replace(/\.$/, '');
-  return unit ? `${number}\u202f${unit}` : number;
+  return unit ? `${number}\u202f${showTimeUnit(unit)}` : number;
 }
 
 /** Conditions in one line, as far as they are stated. */

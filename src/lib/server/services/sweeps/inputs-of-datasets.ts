@@ -1,10 +1,10 @@
 import { oneTimeUnit } from '../../../model/one-time-unit';
+import { refuseUnlike } from '../../../model/refuse-unlike';
 import { inUnits } from '../../../stats/input/in-units';
 import { toHistogram } from '../../../stats/input/to-histogram';
 import type { SweepInput, SweepOptions } from '../../../stats/sweep/types';
 import { BadInput, type CountData, type Interval, type Unit } from '../../../stats/types';
 import type { ChosenDataset } from './chosen-datasets';
-import { refuseUnlike } from './refuse-unlike';
 
 /**
  * Saved datasets as a sweep takes them: times in one unit, that of the first of them, and counts in the unit that all

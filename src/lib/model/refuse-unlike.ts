@@ -1,8 +1,7 @@
-import { BadInput } from '../../../stats/types';
-import type { ChosenDataset } from './chosen-datasets';
+import { BadInput, type Geometry, type Unit } from '../stats/types';
 
 /** What is counted, as a sentence names it. */
-const COUNTED: Record<ChosenDataset['geometry'], string> = {
+const COUNTED: Record<Geometry, string> = {
   sites: 'excited sites',
   'open-bonds': 'kinks of an open chain',
   'ring-bonds': 'kinks round a ring'
@@ -14,7 +13,9 @@ const COUNTED: Record<ChosenDataset['geometry'], string> = {
  *
  * @throws BadInput with the names of the first two that differ
  */
-export function refuseUnlike(chosen: ChosenDataset[]): void {
+export function refuseUnlike(
+  chosen: { name: string; unit: Unit; geometry: Geometry; trials: number | null }[]
+): void {
   const [first] = chosen;
   const unit = chosen.find((one) => one.unit !== first.unit);
   if (unit)
