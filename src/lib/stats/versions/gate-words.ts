@@ -12,7 +12,7 @@ export function gateWords(found: Found): Pick<GateReport, 'statement' | 'because
   const statement = {
     failed: `Version ${version} fails: ${of} ${named.length === 1 ? 'scatters' : 'scatter'} more than the rule allows (${listed(named)}).`,
     undecided: `Version ${version} is undecided: ${of} cannot be judged (${listed(named)}).`,
-    passed: `Version ${version} passes: no group of ${groups.length} is seen to scatter more than the rule allows.`
+    passed: `Version ${version} passes: ${groups.length === 1 ? 'its group is not' : `no group of ${groups.length} is`} seen to scatter more than the rule allows.`
   }[outcome];
   const because = groups
     .filter((group) => outcome === 'passed' || group.outcome !== 'passed')
@@ -21,7 +21,7 @@ export function gateWords(found: Found): Pick<GateReport, 'statement' | 'because
     statement,
     because,
     cautions: [
-      `All ${tests} tests of this gate are adjusted for each other by Holm at ${formatNumber(rule.alpha, 2)}; over many versions a gate fails one without cause now and then, each time with at most that chance.`,
+      `${tests === 1 ? 'The one test of this gate is held' : `The ${tests} tests of this gate are adjusted for each other by Holm’s rule and held`} to ${formatNumber(100 * rule.alpha, 3)} %; over many versions a gate fails one without cause now and then, each time with at most that chance.`,
       'To pass says that no rise was seen, not that there is none. A rise has more causes than crosstalk: drift, misreads that follow each other, and mixed settings look alike.',
       screenCaution
     ]
