@@ -29,9 +29,10 @@ export function gateBadge(version: string, standing: Standing): string {
   const letters = [...version];
   const name = letters.length > MOST ? `${letters.slice(0, MOST - 1).join('')}…` : version;
   const word = SAID[standing];
-  const [nameWidth, wordWidth] = [[...name].length * LETTER, word.length * LETTER];
-  const [sign, said] = [8 + nameWidth + 10, 8 + nameWidth + 26];
-  const width = said + wordWidth + 8;
+  const widthOf = (words: string) => Number(([...words].length * LETTER).toFixed(1));
+  const [nameWidth, wordWidth] = [widthOf(name), widthOf(word)];
+  const [sign, said] = [nameWidth + 18, nameWidth + 34].map((x) => Number(x.toFixed(1)));
+  const width = Number((said + wordWidth + 8).toFixed(1));
   const face = `font-family="${FACES.number.family}" font-size="12"`;
   const text = (x: number, length: number, ink: string, words: string, weight = 400) =>
     `<text x="${x}" y="16" textLength="${length}" lengthAdjust="spacingAndGlyphs" font-weight="${weight}" fill="${ink}">${escapeMarkup(words)}</text>`;

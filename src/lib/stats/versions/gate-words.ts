@@ -1,5 +1,4 @@
 import { screenCaution } from '../answer/screen-caution';
-import { formatNumber } from '../words/format-number';
 import type { GateReport } from './types';
 
 type Found = Omit<GateReport, 'statement' | 'because' | 'cautions'>;
@@ -21,7 +20,7 @@ export function gateWords(found: Found): Pick<GateReport, 'statement' | 'because
     statement,
     because,
     cautions: [
-      `${tests === 1 ? 'The one test of this gate is held' : `The ${tests} tests of this gate are adjusted for each other by Holm’s rule and held`} to ${formatNumber(100 * rule.alpha, 3)} %; over many versions a gate fails one without cause now and then, each time with at most that chance.`,
+      `${tests === 1 ? 'The one test of this gate is held' : `The ${tests} tests of this gate are adjusted for each other by Holm’s rule and held`} to ${Number((100 * rule.alpha).toPrecision(12))}\u202f%; over many versions a gate fails one without cause now and then, each time with at most that chance.`,
       'To pass says that no rise was seen, not that there is none. A rise has more causes than crosstalk: drift, misreads that follow each other, and mixed settings look alike.',
       screenCaution
     ]

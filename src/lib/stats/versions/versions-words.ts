@@ -56,7 +56,11 @@ function becauseOf({ cells, alpha, tolerance, pairs }: Found): string[] {
   if (pairs) {
     const apart = pairs.tests.filter(({ pAdjusted }) => pAdjusted <= alpha).length;
     if (pairs.tests.length > 0)
-      lines.push(`${apart} of ${pairs.tests.length} pairs of versions differ. ${pairs.family}`);
+      lines.push(
+        pairs.tests.length === 1
+          ? `${apart === 1 ? 'The two versions differ' : 'No difference of the two versions is seen'}. ${pairs.family}`
+          : `${apart} of ${pairs.tests.length} pairs of versions differ. ${pairs.family}`
+      );
     if (pairs.leftOut > 0)
       lines.push(
         `${formatCount(pairs.leftOut)} ${pairs.leftOut === 1 ? 'pair was' : 'pairs were'} not compared: another number of trials, unit, geometry, cut or lump makes counts differ without any crosstalk.`
