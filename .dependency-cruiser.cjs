@@ -63,11 +63,29 @@ module.exports = {
     only('page', 'stats', 'formats', 'model', 'charts', 'ui', 'pdf'),
     only('server/env'),
     only('server/project-folder'),
-    only('server/log'),
+    only('server/running'),
+    only('server/log', 'server/env', 'server/running'),
     only('server/db', 'server/env', 'server/project-folder'),
-    only('server/auth', 'server/db', 'server/env', 'server/log', 'server/services/events', 'model'),
-    only('server/mail', 'server/db', 'server/env', 'server/log'),
-    only('server/jobs', 'server/db', 'server/env', 'server/log', 'server/project-folder', 'stats', 'model'),
+    only(
+      'server/auth',
+      'server/db',
+      'server/env',
+      'server/log',
+      'server/running',
+      'server/services/events',
+      'model'
+    ),
+    only('server/mail', 'server/db', 'server/env', 'server/log', 'server/running'),
+    only(
+      'server/jobs',
+      'server/db',
+      'server/env',
+      'server/log',
+      'server/running',
+      'server/project-folder',
+      'stats',
+      'model'
+    ),
     only('server/access', 'model'),
     only('server/pdf', 'pdf'),
     only(
@@ -82,6 +100,7 @@ module.exports = {
       'server/jobs',
       'server/project-folder',
       'server/log',
+      'server/running',
       'stats',
       'formats',
       'model'

@@ -6,7 +6,8 @@ const folder = fileURLToPath(new URL('./src/cli/', import.meta.url));
 
 /**
  * Bundles the command line tools for Node: every src/cli/NAME.ts becomes build-cli/NAME.js. Only what is
- * compiled (the database driver, argon2) stays outside, so a command starts without reading node_modules.
+ * compiled (the database driver, argon2) stays outside, so a command starts without reading node_modules; and what the
+ * start command shares with the built server: the metrics of a process are kept in one place.
  */
 export default defineConfig({
   resolve: {
@@ -29,5 +30,5 @@ export default defineConfig({
       )
     }
   },
-  ssr: { noExternal: true, external: ['better-sqlite3', '@node-rs/argon2'] }
+  ssr: { noExternal: true, external: ['better-sqlite3', '@node-rs/argon2', 'pino', 'prom-client'] }
 });

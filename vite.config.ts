@@ -29,6 +29,8 @@ export default defineConfig({
           include: ['tests/unit/**/*.test.ts', 'tests/reference/**/*.test.ts'],
           environment: 'node',
           setupFiles: ['tests/support/property-seed.ts'],
+          // What is told of each job is not what a failing test is searched for.
+          env: { LOG_LEVEL: 'error' },
           pool: 'forks',
           maxWorkers: 2,
           testTimeout: 60_000,

@@ -7,6 +7,7 @@ import { issuerFormAction } from '$lib/server/handles/issuer-form-action';
 import { preloadFonts } from '$lib/server/handles/preload-fonts';
 import { reportError } from '$lib/server/handles/report-error';
 import { securityHeaders } from '$lib/server/handles/security-headers';
+import { seeRequest } from '$lib/server/handles/see-request';
 import { storageTroubleStatus } from '$lib/server/handles/storage-trouble-status';
 import { withDatabase } from '$lib/server/handles/with-database';
 import { withPerson } from '$lib/server/handles/with-person';
@@ -22,6 +23,7 @@ export const init: ServerInit = () => {
 };
 
 export const handle = sequence(
+  seeRequest,
   securityHeaders,
   apiProblems,
   storageTroubleStatus,

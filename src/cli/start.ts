@@ -13,6 +13,7 @@ import { demoWords } from './start/demo-words';
 import { listen } from './start/listen';
 import { nameOrigin } from './start/name-origin';
 import { refuseForm } from './start/refuse-form';
+import { seeRequests } from './start/see-requests';
 import { stopCleanly } from './start/stop-cleanly';
 
 /** `npm start`: makes the database ready, serves the built application, and says where. */
@@ -33,7 +34,9 @@ async function start(): Promise<void> {
   // that was only found free may be taken a moment later.
   let answer: RequestListener = (_request, response) =>
     void response.writeHead(503, { 'retry-after': '1' }).end();
-  const server = createServer((request, response) => answer(request, response));
+  const server = createServer(
+    seeRequests((request, response) => answer(request, response), env.ADDRESS_HEADER !== undefined)
+  );
   const port = await listen(server, env.HOST, env.PORT);
   const address = env.ORIGIN ?? `http://${nameOf(env.HOST)}:${port}`;
   stopCleanly(server, env.SHUTDOWN_TIMEOUT, env.npm_lifecycle_event === 'start');

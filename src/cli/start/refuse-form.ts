@@ -1,3 +1,4 @@
+import { seenRequest } from '$lib/server/running/seen-request';
 import type { IncomingMessage, ServerResponse } from 'node:http';
 
 /** What browsers can send from a page of anybody's; Kit refuses these in plain words before any hook of ours. */
@@ -23,6 +24,6 @@ export function refuseForm(request: IncomingMessage, response: ServerResponse): 
   const type = request.headers['content-type']?.split(';')[0].trim().toLowerCase() ?? '';
   if (!FORMS.includes(type)) return false;
   response.writeHead(415, { 'content-type': 'application/problem+json', 'cache-control': 'no-store' });
-  response.end(JSON.stringify(PROBLEM));
+  response.end(JSON.stringify({ ...PROBLEM, requestId: seenRequest()?.id }));
   return true;
 }

@@ -41,6 +41,12 @@ const shape = z.object({
   WEBHOOKS_INSIDE: z.enum(['yes', 'no']).default('no'),
   /** Hour, UTC, at which daily mail goes out. */
   DIGEST_HOUR: z.coerce.number().int().min(0).max(23).default(7),
+  /** Least of what the log tells. Not set: info, on a terminal warn; see log.ts. */
+  LOG_LEVEL: z.enum(['debug', 'info', 'warn', 'error', 'silent']).optional(),
+  /** What reads /metrics sends it; not set: there are none. */
+  METRICS_TOKEN: z.string().min(16, 'at least 16 characters').optional(),
+  /** Seconds in which a server that is told to end says so at /readyz and still answers. */
+  SHUTDOWN_DELAY: z.coerce.number().int().min(0).max(600).default(0),
   /** Set by npm: the script that it runs. */
   npm_lifecycle_event: z.string().optional()
 });

@@ -21,6 +21,7 @@ const BREACHES: [rule: string, file: string, imported: string][] = [
   ['page-imports', 'src/lib/page/server.ts', '$lib/server/log'],
   ['server-env-imports', 'src/lib/server/env.ts', './log'],
   ['server-project-folder-imports', 'src/lib/server/project-folder.ts', './log'],
+  ['server-running-imports', 'src/lib/server/running/thing.ts', '../log'],
   ['server-log-imports', 'src/lib/server/log.ts', '$lib/stats/thing'],
   ['server-db-imports', 'src/lib/server/db/client.ts', '../services/thing'],
   ['server-auth-imports', 'src/lib/server/auth/login.ts', '../services/thing'],

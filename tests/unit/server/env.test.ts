@@ -8,6 +8,7 @@ describe('readEnv', () => {
       HOST: '127.0.0.1',
       BODY_SIZE_LIMIT: 20_971_520,
       SHUTDOWN_TIMEOUT: 3,
+      SHUTDOWN_DELAY: 0,
       MAIL_FROM: 'Severalty <severalty@localhost>',
       OIDC_NAME: 'your institution',
       SEVERALTY_DEMO: 'yes',
@@ -33,6 +34,9 @@ describe('readEnv', () => {
     ['ORIGIN', 'counts.example.org'],
     ['ORIGIN', 'file:///etc'],
     ['SHUTDOWN_TIMEOUT', '-1'],
+    ['SHUTDOWN_DELAY', '1e9'],
+    ['LOG_LEVEL', 'loud'],
+    ['METRICS_TOKEN', 'short'],
     ['BODY_SIZE_LIMIT', '10M']
   ])('refuses %s=%s by name', (name, value) => {
     expect(() => readEnv({ [name]: value })).toThrow(BadEnvironment);

@@ -1,4 +1,5 @@
 import type { Handle } from '@sveltejs/kit';
+import { seenRequest } from '../running/seen-request';
 
 const TITLES: Record<number, { code: string; title: string }> = {
   404: { code: 'not-found', title: 'There is nothing at this address.' },
@@ -20,7 +21,7 @@ export const apiProblems: Handle = async ({ event, resolve }) => {
     return response;
   }
   const { status } = response;
-  const said = TITLES[status] ?? (await own(response));
+  const said = TITLES[status] ?? own();
   const headers = new Headers({ 'content-type': 'application/problem+json', 'cache-control': 'no-store' });
   for (const name of ['allow', 'retry-after']) {
     const value = response.headers.get(name);
@@ -29,10 +30,9 @@ export const apiProblems: Handle = async ({ event, resolve }) => {
   return new Response(JSON.stringify({ type: 'about:blank', status, ...said }), { status, headers });
 };
 
-/** The words of reportError, where Kit wrote them as JSON; they hold the number that finds the error in the log. */
-async function own(response: Response): Promise<{ code: string; title: string; errorId?: string }> {
-  const text = await response.text();
-  const found = /"errorId":"(\w+)"/.exec(text)?.[1] ?? /under (\w{8})\b/.exec(text)?.[1];
+/** The words of reportError; the id of the request finds the error in the log. */
+function own(): { code: string; title: string; errorId?: string } {
+  const found = seenRequest()?.id;
   const title = 'Something went wrong on our side.';
   return { code: 'internal', title, ...(found ? { errorId: found } : {}) };
 }

@@ -1,3 +1,4 @@
+import { outsideRequest } from '../running/seen-request';
 import type { Runner } from './make-runner';
 
 /*
@@ -16,7 +17,7 @@ export function setCurrentRunner(runner: Runner | undefined): void {
 
 /** A job was queued. */
 export function wakeRunner(): void {
-  holder[place]?.wake();
+  outsideRequest(() => holder[place]?.wake());
 }
 
 /** A job was cancelled: its row says so already, and this ends its thread. */

@@ -2,6 +2,7 @@ import type { DiagnoseOptions, Diagnosis, Progress } from '$lib/stats/types';
 import { MessageChannel } from 'node:worker_threads';
 import { Piscina } from 'piscina';
 import { log } from '../log';
+import { stackOf } from '../running/stack-of';
 import { sayFailure } from './say-failure';
 import type { DiagnosisTask, TaskAnswer } from './task';
 
@@ -17,7 +18,7 @@ export type Outcome =
 export interface DiagnosisPool {
   /** Never rejects. An abort ends the thread at once, whatever it is doing. */
   run(
-    task: { counts: string; options: DiagnoseOptions },
+    task: { job: string; counts: string; options: DiagnoseOptions },
     signal: AbortSignal,
     onProgress: (progress: Progress) => void
   ): Promise<Outcome>;
@@ -38,9 +39,11 @@ export function diagnosisPool(file: string, threads: number, memory: number): Di
     resourceLimits: { maxOldGenerationSizeMb: memory }
   });
   // A thread that fails between two jobs; without a listener it would end the server.
-  pool.on('error', (error: Error) => log('error', 'an idle diagnosis thread failed', { why: error.message }));
+  pool.on('error', (error: Error) =>
+    log('error', 'an idle diagnosis thread failed', { why: stackOf(error) })
+  );
   return {
-    async run({ counts, options }, signal, onProgress) {
+    async run({ job, counts, options }, signal, onProgress) {
       const { port1, port2 } = new MessageChannel();
       port1.on('message', onProgress);
       try {
@@ -54,7 +57,7 @@ export function diagnosisPool(file: string, threads: number, memory: number): Di
         return answer.kind === 'done' ? answer : { kind: 'failed', reason: answer.reason };
       } catch (error) {
         if (signal.aborted) return { kind: 'aborted' };
-        log('error', 'a diagnosis failed', { why: error instanceof Error ? error.stack : String(error) });
+        log('error', 'a diagnosis failed', { job, why: stackOf(error) });
         return { kind: 'failed', reason: sayFailure(error, memory) };
       } finally {
         port1.close();

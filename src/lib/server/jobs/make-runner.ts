@@ -7,12 +7,14 @@ import type { Database } from '../db/client';
 import { job } from '../db/schema';
 import { log } from '../log';
 import { projectFolder } from '../project-folder';
+import { stackOf } from '../running/stack-of';
 import { claimJob, type ClaimedJob, type Turns } from './claim-job';
 import { diagnosisPool, type Outcome } from './diagnosis-pool';
 import { endDone, endFailed, type SaveReport } from './end-job';
 import { tellJobChange } from './job-changes';
 import { requeueAbandoned, requeueOwn } from './requeue';
 import { forgetRunner, HEARTBEAT, newRunnerName } from './runner-name';
+import { tellJob } from './tell-job';
 
 export interface RunnerSettings {
   /** Jobs at a time; the available cores unless told otherwise. */
@@ -65,6 +67,7 @@ export function makeRunner(db: Database, saveReport: SaveReport, settings: Runne
     const { id, teamId, counts } = claimed;
     const controller = new AbortController();
     running.set(id, controller);
+    const tellEnd = tellJob(id, teamId);
     tellJobChange(teamId, id);
     let written = 0;
     const onProgress = ({ share, step }: Progress) => {
@@ -82,33 +85,36 @@ export function makeRunner(db: Database, saveReport: SaveReport, settings: Runne
     const outcome: Outcome =
       counts === null
         ? { kind: 'failed', reason: 'The dataset was put aside before its turn came.' }
-        : await pool.run({ counts, options }, controller.signal, onProgress);
-    await settle(id, outcome, controller.signal);
+        : await pool.run({ job: id, counts, options }, controller.signal, onProgress);
+    tellEnd(await settle(id, outcome, controller.signal));
     running.delete(id);
     if (stopped) return;
     tellJobChange(teamId, id);
     look();
   }
 
-  /** Writes how a job ended. A full or locked database is asked again for a while, so that no work is lost by it. */
-  async function settle(id: string, outcome: Outcome, signal: AbortSignal): Promise<void> {
+  /** Writes how a job ended, and says it. A full or locked database is asked again for a while: no work is lost by it. */
+  async function settle(id: string, outcome: Outcome, signal: AbortSignal): Promise<Outcome['kind']> {
     let end = outcome;
     for (let second = 0; !stopped && !signal.aborted && end.kind !== 'aborted'; second++) {
       try {
-        if (end.kind === 'done') endDone(db, { id, runner: name }, end.document, saveReport);
-        else endFailed(db, { id, runner: name }, end.reason);
-        return;
+        const held =
+          end.kind === 'done'
+            ? endDone(db, { id, runner: name }, end.document, saveReport)
+            : endFailed(db, { id, runner: name }, end.reason);
+        return held ? end.kind : 'aborted';
       } catch (error) {
         const why = error instanceof Error ? error.message : String(error);
-        log('error', 'the end of a job was not written', { job: id, why });
+        log('error', 'the end of a job was not written', { job: id, why: stackOf(error) });
         const passing = isPassing(error);
         // Else, given up by this process, it waits for the next look (see below).
-        if (end.kind === 'failed' && !passing) return;
+        if (end.kind === 'failed' && !passing) return 'failed';
         if (!passing || second >= PATIENCE)
           end = { kind: 'failed', reason: `The report could not be saved: ${why}` };
         else await sleep(1000, undefined, { ref: false });
       }
     }
+    return 'aborted';
   }
 
   function look(): void {
@@ -169,6 +175,6 @@ function trying(what: string, act: () => unknown): void {
   try {
     act();
   } catch (error) {
-    log('error', what, { why: error instanceof Error ? error.message : String(error) });
+    log('error', what, { why: stackOf(error) });
   }
 }

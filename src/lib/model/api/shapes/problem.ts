@@ -22,5 +22,9 @@ export const problemSchema = z.object({
     .array(z.object({ id: z.string(), name: z.string() }))
     .optional()
     .describe('Datasets that hold the same counts from the same bytes'),
-  errorId: z.string().optional().describe('Finds the error in the log of the server')
+  requestId: z
+    .string()
+    .optional()
+    .describe('The X-Request-Id of this answer: finds the request in the log of the server'),
+  errorId: z.string().optional().describe('The same, where something went wrong on our side')
 });

@@ -3,6 +3,7 @@ import type { Action } from '../../access/actions';
 import { can, type Thing } from '../../access/can';
 import type { Database } from '../../db/client';
 import { membership, person, team } from '../../db/schema';
+import { noteRequest } from '../../running/seen-request';
 import type { Actor } from './actor';
 
 export interface TeamEntry {
@@ -39,6 +40,7 @@ export function askTeam(
     .get();
   if (!found) return { ok: false, reason: 'unknown' };
   const { role, ...entry } = found;
+  noteRequest({ person: personId, team: found.id });
   if (!can({ kind: 'member', personId, role }, action, thing)) return { ok: false, reason: 'not-allowed' };
   return { ok: true, team: entry, actor: { personId, teamId: found.id, role } };
 }

@@ -1,5 +1,6 @@
 import type { ReadDocument } from '$lib/model/read-document';
 import { log } from '../../log';
+import { stackOf } from '../../running/stack-of';
 import type { SavedReport } from './find-report';
 
 let begun = false;
@@ -20,6 +21,6 @@ export function warmPdf({ sha256 }: Pick<SavedReport, 'sha256'>, document: ReadD
         writeReport({ document: diagnosis, documentSha256: sha256, provenance: unsaid })
       )
       // Whoever asks for one will be told what is wrong.
-      .catch((error: unknown) => log('error', 'pdf-not-warmed', { error: String(error) }));
+      .catch((error: unknown) => log('error', 'a PDF was not made beforehand', { why: stackOf(error) }));
   }, 500).unref();
 }

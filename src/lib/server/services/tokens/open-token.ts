@@ -4,6 +4,7 @@ import { and, eq, gt, gte, isNull, ne, or } from 'drizzle-orm';
 import { hashToken } from '../../auth/new-token';
 import type { Database } from '../../db/client';
 import { apiToken, membership, person, team } from '../../db/schema';
+import { noteRequest } from '../../running/seen-request';
 import type { Actor } from '../access/actor';
 import type { TeamEntry } from '../access/ask-team';
 import { dayOf } from '../links/day-of';
@@ -52,6 +53,7 @@ export function openToken(db: Database, text: string, now = Date.now()): OpenedT
   if (!found) return { ok: false };
   noteUse(db, found.id, now);
   const { id, name, role, personId, personRole } = found;
+  noteRequest({ person: personId, team: found.team.id, token: id });
   return {
     ok: true,
     team: found.team,

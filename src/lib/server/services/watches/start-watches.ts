@@ -1,5 +1,6 @@
 import type { Database } from '../../db/client';
 import { log } from '../../log';
+import { stackOf } from '../../running/stack-of';
 import { tellWatchers, type TellingSettings } from './tell-watchers';
 
 /** Milliseconds between two looks: a mail takes longer than that anyway. */
@@ -20,7 +21,7 @@ export function startWatches(db: Database, settings: TellingSettings): () => voi
       await tellWatchers(db, settings, waiting);
     } catch (error) {
       // Locked or full: looked at again in a moment.
-      log('error', 'watches were not told', { why: error instanceof Error ? error.message : String(error) });
+      log('error', 'watches were not told', { why: stackOf(error) });
     } finally {
       busy = false;
     }

@@ -1,5 +1,6 @@
 import type { Database } from '../../db/client';
 import { log } from '../../log';
+import { stackOf } from '../../running/stack-of';
 import { deliverOnce } from './deliver-once';
 import { mailRested } from './mail-rested';
 import type { WebhookSettings } from './make-webhook';
@@ -37,7 +38,7 @@ export function startDeliveries(db: Database, settings: WebhookSettings, origin:
       }
     } catch (error) {
       // Locked or full: looked at again in a second.
-      log('error', 'webhooks were not sent', { why: error instanceof Error ? error.message : String(error) });
+      log('error', 'webhooks were not sent', { why: stackOf(error) });
     } finally {
       busy = false;
     }
