@@ -1,8 +1,12 @@
 import { json } from './json';
 import { defaultMaxBytes } from './limits';
 import { formats } from './registry';
+import { shots } from './shots';
 import { Source } from './source';
+import { plainSource } from './table/plain-source';
 import { decode } from './text/decode';
+import { looksLikeMarkup } from './text/looks-like-markup';
+import { oneKindOfLineEnd } from './text/one-kind-of-line-end';
 import { tooLarge } from './too-large';
 import type { Encoding, Guess, Outcome, Problem, ReadOptions, ReadResult } from './types';
 
@@ -21,12 +25,19 @@ export function readCounts(input: Uint8Array | string, options: ReadOptions = {}
     return refuse(options, tooLarge(input.length, limit));
   }
   const typed = typeof input === 'string';
-  const decoded = decode(typed ? new TextEncoder().encode(input) : input, typed ? 'utf-8' : options.encoding);
+  const chosen = typed ? { ...options, encoding: 'utf-8' as const } : options;
+  const bytes = typed ? new TextEncoder().encode(input) : input;
+  const seen = plainSource(bytes, chosen);
+  if (seen) return finishPlain(seen, typed);
+  const decoded = decode(bytes, chosen.encoding);
   if (!decoded.ok) return refuse(options, decoded.problem, decoded.encoding);
-  const text = decoded.text.includes('\r') ? decoded.text.replace(/\r\n?/g, '\n') : decoded.text;
+  const text = oneKindOfLineEnd(decoded.text);
+  // Lists in other encodings, or with remarks in other than English words, are plain once they are text.
+  const plain = plainSource(new TextEncoder().encode(text), chosen, decoded.encoding);
+  if (plain) return finishPlain(plain, typed);
   const source = new Source(text, options);
   source.reading.encoding = typed ? null : decoded.encoding;
-  if (/^\s*<(!doctype|html|\?xml|table|svg|!--)/i.test(text)) {
+  if (looksLikeMarkup(text)) {
     source.problems.whole(
       'This is a web page or an XML file, not a table.',
       'Copy the table out of it and paste the cells.',
@@ -39,6 +50,11 @@ export function readCounts(input: Uint8Array | string, options: ReadOptions = {}
   const bracketed = json.claims(source) ? json : undefined;
   const format = bracketed ?? given ?? formats.find((candidate) => candidate.claims(source));
   return finish(source, format?.read(source) ?? { datasets: [], notes: [] });
+}
+
+function finishPlain(source: Source, typed: boolean): ReadResult {
+  if (typed) source.reading.encoding = null;
+  return finish(source, shots.read(source));
 }
 
 function finish(source: Source, { datasets, notes }: Outcome): ReadResult {

@@ -33,6 +33,12 @@ function usualWidth(rows: string[][]): number {
   return width;
 }
 
+/** 1 where the last line is a comment without a line end: emptied, it is no line any more. */
+function endsInComment(text: string): number {
+  const last = text.slice(text.lastIndexOf('\n') + 1);
+  return last.trimStart().startsWith('#') ? 1 : 0;
+}
+
 /**
  * Splits a text into a sheet: separator, rows, header, with ragged rows reported and left out.
  */
@@ -49,7 +55,7 @@ export function buildSheet(raw: string, options: ReadOptions, problems: ProblemL
     text: clean.text,
     separator,
     header: null,
-    blankLines: Math.max(0, table.emptyLines - clean.commentLines),
+    blankLines: Math.max(0, table.emptyLines + endsInComment(raw) - clean.commentLines),
     commentLines: clean.commentLines
   };
   if (table.badQuote !== null) {

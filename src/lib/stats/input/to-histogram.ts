@@ -58,8 +58,25 @@ export function toHistogram(data: CountData): Histogram {
 /** A document of more rows than this is no longer read by anyone, and its laws would take minutes. */
 const widest = 20_000;
 
+/** Counts below it are summed in arrays, a nanosecond each where a map takes ten. */
+const common = 65_536;
+
 function summed(shots: number[] | Uint32Array): Histogram {
-  const seen = new Map<number, number>();
-  for (const count of shots) seen.set(count, (seen.get(count) ?? 0) + 1);
-  return { kind: 'histogram', counts: [...seen], lump: null };
+  // Two, since a cell that was written just now is slow to read again, and neighbouring shots are often alike.
+  const even = new Uint32Array(common);
+  const odd = new Uint32Array(common);
+  const seldom = new Map<number, number>();
+  const add = (count: number, into: Uint32Array) => {
+    // What is no whole number finds no cell of an array, and is refused with the map's.
+    if (count < common && count >>> 0 === count) into[count] += 1;
+    else seldom.set(count, (seldom.get(count) ?? 0) + 1);
+  };
+  for (let i = 0; i + 1 < shots.length; i += 2) {
+    add(shots[i], even);
+    add(shots[i + 1], odd);
+  }
+  if (shots.length % 2 === 1) add(shots[shots.length - 1], even);
+  const counts: [number, number][] = [];
+  even.forEach((seen, count) => seen + odd[count] > 0 && counts.push([count, seen + odd[count]]));
+  return { kind: 'histogram', counts: [...counts, ...seldom], lump: null };
 }
