@@ -79,7 +79,7 @@ function cautionsOf({ cells, groups, reference, pairs }: Found): string[] {
     ...(reference === null
       ? []
       : [
-          'Limits hold 99.73\u202f% of versions with the law of the reference, each cell by itself: of 1000 quiet cells some three leave them. Marks are adjusted over all cells.',
+          'Limits hold 99.73\u202f% of versions with the law of the reference, each cell by itself: of 1000 quiet cells some three leave them.',
           ...(compared > 1 ? [besideGate(compared, 2 * groups.length)] : [])
         ]),
     ...(pairs
@@ -92,7 +92,7 @@ function cautionsOf({ cells, groups, reference, pairs }: Found): string[] {
 
 /** Why the gate of a version may see what its marks do not; `tests` is how many a gate over all groups makes. */
 function besideGate(compared: number, tests: number): string {
-  const here = `They are adjusted over ${formatCount(compared)} cells of all versions together; a gate takes one version alone, with two tests a group`;
+  const here = `Marks are adjusted over ${formatCount(compared)} cells of all versions together; a gate takes one version alone, with two tests a group`;
   return compared > tests
     ? `${here}. So less is seen here than at the gate: a cell that cannot tell here may pass there.`
     : `${here}. So the gate may tell where a cell cannot, or the other way round.`;

@@ -137,6 +137,9 @@ describe('versionsReport', () => {
       /over 3 cells of all versions .* less is seen here than at the gate/
     );
     expect(await cautions(versions.slice(0, 3))).toMatch(/over 2 cells .* or the other way round/);
+    // Told once, and nothing of an adjustment where one cell is compared.
+    expect((await cautions(versions)).match(/adjusted/g)).toHaveLength(1);
+    expect(await cautions(versions.slice(0, 2))).not.toMatch(/adjusted/);
   });
 
   it('shuffles no pair of other trials, geometry or cut, and counts those left out', async () => {
