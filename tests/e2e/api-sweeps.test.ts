@@ -53,7 +53,7 @@ describe('a script', () => {
     expect(second.headers.get('idempotency-replayed')).toBe('true');
     const made = await json(first);
     expect(await json(second)).toEqual(made);
-    expect(made).toMatchObject({ name: 'Two decades', datasets: 9, timeUnit: 'us', unit: 'defect' });
+    expect(made).toMatchObject({ name: 'Two decades', datasets: 9, timeUnit: 'µs', unit: 'defect' });
     const listed = await json(await ask(server, token, '/sweeps'));
     expect(listed).toMatchObject({ data: [{ id: made.id, statement: made.statement }], next: null });
     const document = await ask(server, token, `/sweeps/${made.id}/document.json`);

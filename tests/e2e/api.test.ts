@@ -78,7 +78,10 @@ describe('who may ask', () => {
     const answers = [];
     for (const text of ['x', `${token}x`, revoked, left]) {
       const response = await ask(server, text, '/team');
-      answers.push([response.status, response.headers.get('www-authenticate'), await response.text()]);
+      // Each answer has an id of its own, which tells of the request and not of the token.
+      const { requestId, ...told } = (await response.json()) as { requestId: string };
+      expect(requestId).toBe(response.headers.get('x-request-id'));
+      answers.push([response.status, response.headers.get('www-authenticate'), told]);
     }
     expect(new Set(answers.map((answer) => JSON.stringify(answer))).size).toBe(1);
     expect(answers[0].slice(0, 2)).toEqual([401, 'Bearer realm="severalty", error="invalid_token"']);

@@ -7,7 +7,7 @@ const SAID = METHOD_SOURCES.map(([, sources]) => sources).join(' ');
 /** Folders of the engine that hold statistics; the rest is arithmetic, search and random numbers. */
 const METHOD = ['bounds', 'laws', 'misread', 'multiple', 'order', 'references', 'resampling'];
 /** Named in the code beside the source that the method rests on, or for no number of a report. */
-const BESIDE = ['Benjamini 1995', 'Box 1970', 'Mood 1940', 'Boucheron 2013'];
+const BESIDE = ['Benjamini 1995', 'Box 1970', 'Mood 1940', 'Boucheron 2013', 'Neumaier 1974'];
 /** First author and year of A 1950; A & B 1950; A, B & C 1950. */
 const SOURCE = /(\p{Lu}[\p{L}’]+)(?:(?:, | & | and )\p{Lu}[\p{L}’]+)*,? ((?:18|19|20)\d\d)\b/gu;
 
