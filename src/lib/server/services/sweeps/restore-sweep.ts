@@ -1,31 +1,7 @@
-import { and, eq, isNotNull } from 'drizzle-orm';
 import type { Database } from '../../db/client';
-import { sweep } from '../../db/schema';
 import type { Actor } from '../access/actor';
-import { mayWhere } from '../access/may-where';
-import { recordEvent } from '../events/record-event';
+import { moveAside, type Moved } from '../aside/move-aside';
 
 /** Brings a sweep back that was put aside. Experimenters only their own. */
-export function restoreSweep(
-  db: Database,
-  actor: Actor,
-  id: string,
-  now = Date.now()
-): { ok: true; name: string } | { ok: false; reason: 'unknown' } {
-  return db.transaction(
-    (tx) => {
-      const may = mayWhere(actor, 'restore', sweep.teamId, sweep.createdBy);
-      const done = tx
-        .update(sweep)
-        .set({ deletedAt: null, deletedBy: null })
-        .where(and(eq(sweep.id, id), isNotNull(sweep.deletedAt), may))
-        .returning({ name: sweep.name })
-        .get() as { name: string } | undefined;
-      if (!done) return { ok: false, reason: 'unknown' } as const;
-      const happening = { teamId: actor.teamId, personId: actor.personId, thing: id };
-      recordEvent(tx, { ...happening, action: 'sweep.restore', detail: done }, now);
-      return { ok: true, name: done.name } as const;
-    },
-    { behavior: 'immediate' }
-  );
-}
+export const restoreSweep = (db: Database, actor: Actor, id: string, now?: number): Moved =>
+  moveAside(db, actor, { kind: 'sweep', id, to: 'back' }, now);

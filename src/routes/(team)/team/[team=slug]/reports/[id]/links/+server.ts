@@ -1,43 +1,15 @@
-import { linkOptionsSchema } from '$lib/model/link/link-options';
-import { listLinks } from '$lib/server/services/links/list-links';
-import { mailLink } from '$lib/server/services/links/mail-link';
-import { makeLink } from '$lib/server/services/links/make-link';
-import { json } from '@sveltejs/kit';
 import { askTeamJson } from '../../../../../../ask-json';
-import { readJson } from '../../../datasets/read-json';
-import { linkRefusal } from './link-refusal';
+import { makeLinkTo, tellLinks } from '../../../link-answers';
 import type { RequestHandler } from './$types';
 
-const NOT_KEPT = { 'cache-control': 'no-store' };
-
-/** Links of a report: `{links: TeamLink[]}`, for those who may make them. */
+/** Links of a report. */
 export const GET: RequestHandler = (event) => {
   const asked = askTeamJson(event, 'see');
-  if (!asked.ok) return asked.response;
-  const listed = listLinks(event.locals.db, asked.actor, { report: event.params.id });
-  return listed.ok ? json({ links: listed.links }, { headers: NOT_KEPT }) : linkRefusal(listed.reason);
+  return asked.ok ? tellLinks(event, asked.actor, { report: event.params.id }) : asked.response;
 };
 
-/** Makes a link: LinkOptions gives `{id, address, missed}`; the address is told this once, `missed` got no mail. */
-export const POST: RequestHandler = async (event) => {
+/** Makes a link to a report. */
+export const POST: RequestHandler = (event) => {
   const asked = askTeamJson(event, 'see');
-  if (!asked.ok) return asked.response;
-  const read = await readJson(event.request, linkOptionsSchema);
-  if (!read.ok) return read.response;
-  const { actor, team } = asked;
-  const { db, person } = event.locals;
-  const made = makeLink(db, actor, { report: event.params.id }, read.body);
-  if (!made.ok) return linkRefusal(made.reason);
-  const address = `${event.url.origin}/link/${made.token}`;
-  const missed =
-    read.body.audience === 'named'
-      ? await mailLink(db, {
-          ...read.body,
-          opens: 'report',
-          address,
-          team: team.name,
-          from: person?.name ?? 'Somebody'
-        })
-      : [];
-  return json({ id: made.id, address, missed }, { status: 201, headers: NOT_KEPT });
+  return asked.ok ? makeLinkTo(event, asked, { report: event.params.id }) : asked.response;
 };

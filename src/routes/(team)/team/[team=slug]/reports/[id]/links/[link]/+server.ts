@@ -1,25 +1,17 @@
-import { linkVisits } from '$lib/server/services/links/link-visits';
-import { revokeLink } from '$lib/server/services/links/revoke-link';
-import { json } from '@sveltejs/kit';
 import { askTeamJson } from '../../../../../../../ask-json';
-import { linkRefusal } from '../link-refusal';
+import { closeLink, tellVisits } from '../../../../link-answers';
 import type { RequestHandler } from './$types';
 
-/** The log of a link: `{visits: LinkVisit[]}`, the newest first. */
+/** The log of a link to a report. */
 export const GET: RequestHandler = (event) => {
   const asked = askTeamJson(event, 'see');
-  if (!asked.ok) return asked.response;
   const { id, link } = event.params;
-  const listed = linkVisits(event.locals.db, asked.actor, { report: id }, link);
-  if (!listed.ok) return linkRefusal(listed.reason);
-  return json({ visits: listed.visits }, { headers: { 'cache-control': 'no-store' } });
+  return asked.ok ? tellVisits(event, asked.actor, { report: id }, link) : asked.response;
 };
 
-/** Closes a link for good. */
+/** Closes a link to a report for good. */
 export const DELETE: RequestHandler = (event) => {
   const asked = askTeamJson(event, 'see');
-  if (!asked.ok) return asked.response;
   const { id, link } = event.params;
-  const revoked = revokeLink(event.locals.db, asked.actor, { report: id }, link);
-  return revoked.ok ? new Response(null, { status: 204 }) : linkRefusal(revoked.reason);
+  return asked.ok ? closeLink(event, asked.actor, { report: id }, link) : asked.response;
 };

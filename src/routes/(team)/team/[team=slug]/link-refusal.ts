@@ -1,5 +1,5 @@
 import { TOO_FEW_TO_HIDE } from '$lib/model/link/hides-counts';
-import { problem } from '../../../../../../problem';
+import { problem } from '../../../problem';
 
 type Reason = 'unknown' | 'not-allowed' | 'past' | 'too-few-counts' | 'shows-counts' | 'no-remarks';
 
