@@ -1,6 +1,8 @@
-import { sweep } from '$lib/server/db/schema';
+import { dataset, sweep } from '$lib/server/db/schema';
+import { putAside } from '$lib/server/services/datasets/put-aside';
 import { listEvents } from '$lib/server/services/events/list-events';
 import { importArchive } from '$lib/server/services/transfer/import-archive';
+import { placesOfSwept } from '$lib/server/services/sweeps/places-of-swept';
 import { moveWindow } from '$lib/server/services/sweeps/move-window';
 import { putSweepAside } from '$lib/server/services/sweeps/put-sweep-aside';
 import { readSweep } from '$lib/server/services/sweeps/read-sweep';
@@ -60,6 +62,24 @@ it('a sweep goes through an archive to the byte, and out again the same', async 
   if (!read.ok || !read.document) throw new Error('unreadable');
   const kept = { document: read.document, options: read.sweep.options };
   expect(moveWindow(db, lead, kept, { from: 1, to: 2 }).ok).toBe(true);
+});
+
+it('the datasets of a sweep from an archive are found where they are now, until they are put aside', async () => {
+  const { db: first, lead: maker, id, archive } = await exported();
+  const old = readSweep(first, maker, id);
+  const { db, lead } = fresh();
+  importArchive(db, lead, archive);
+  const [{ id: newId }] = db.select().from(sweep).all();
+  const read = readSweep(db, lead, newId);
+  if (!read.ok || !old.ok) throw new Error('unreadable');
+  const named = read.sweep.datasets;
+  const places = () => named.map((one) => placesOfSwept(db, lead, named)[one.id]);
+  const rows = db.select().from(dataset).all();
+  expect(places()).toEqual(named.map(({ name }) => rows.find((row) => row.name === name)?.id));
+  putAside(db, lead, places()[0]);
+  expect(places()).toEqual([undefined, ...places().slice(1)]);
+  const own = placesOfSwept(first, maker, old.sweep.datasets);
+  expect(own).toEqual(Object.fromEntries(old.sweep.datasets.map((one) => [one.id, one.id])));
 });
 
 it('an archive without sweeps, as they were made before, is read', async () => {

@@ -1,6 +1,7 @@
 import { readWindow } from '$lib/model/team/sweeps/read-window';
 import { can } from '$lib/server/access/can';
 import { moveWindow } from '$lib/server/services/sweeps/move-window';
+import { placesOfSwept } from '$lib/server/services/sweeps/places-of-swept';
 import { putSweepAside } from '$lib/server/services/sweeps/put-sweep-aside';
 import { readSweep } from '$lib/server/services/sweeps/read-sweep';
 import { saveSweep } from '$lib/server/services/sweeps/save-sweep';
@@ -30,6 +31,7 @@ export const load: PageServerLoad = (event) => {
   return {
     sweep: { ...sweep, bytes: Buffer.byteLength(text) },
     document: moved?.ok ? moved.document : document,
+    places: placesOfSwept(event.locals.db, actor, sweep.datasets),
     moved: moved?.ok === true,
     trouble: asked && !window ? NO_WINDOW : moved && !moved.ok ? moved.why : null,
     may: {
@@ -59,7 +61,8 @@ export const actions: Actions = {
     const window = readWindow(asked);
     if (!window) return fail(400, { message: NO_WINDOW });
     const { options, name, datasets } = read.sweep;
-    const ids = datasets.map(({ id }) => id);
+    const places = placesOfSwept(event.locals.db, actor, datasets);
+    const ids = datasets.map(({ id }) => places[id] ?? id);
     return acting({}, () => {
       const request = { name, datasets: ids, axis: options.axis, window };
       const { transition, alpha } = options;
