@@ -1,8 +1,8 @@
-import { unzipSync } from 'fflate';
 import { createHash } from 'node:crypto';
 import { ARCHIVE_PATH, manifestSchema, type Manifest } from '$lib/model/team/transfer/archive-schema';
 import { LIMITS } from './limits';
 import { parseJson } from './parse-json';
+import { BadZip, readZip } from './read-zip';
 
 export type OpenArchive =
   { ok: true; manifest: Manifest; files: Map<string, Uint8Array>; sha256: string } | ArchiveRefusal;
@@ -30,8 +30,8 @@ const refuse = (reason: ArchiveRefusal['reason'], what: string): never => {
 
 /**
  * Unpacks a team's archive and checks every file against its manifest. Sizes are those that the archive claims, and
- * are checked before anything is unpacked; unpacking then writes into just that room, so a false claim ends in a wrong
- * sum and not in a full memory. Paths are looked up in a short list and used for nothing else.
+ * are checked before anything is unpacked; `readZip` sees to it that no file unpacks to more than was claimed of it.
+ * Paths are looked up in a short list and used for nothing else.
  */
 export function openArchive(bytes: Uint8Array): OpenArchive {
   try {
@@ -41,31 +41,31 @@ export function openArchive(bytes: Uint8Array): OpenArchive {
     return { ok: true, manifest, files, sha256: sha256(bytes) };
   } catch (error) {
     if (error instanceof Refused) return error.refusal;
+    if (error instanceof BadZip) return { ok: false, reason: 'damaged', what: error.message };
     return { ok: false, reason: 'not-a-zip', what: 'It is no zip file, or a part of one.' };
   }
 }
 
 function unpack(bytes: Uint8Array): Map<string, Uint8Array> {
-  // The library finds the directory from the end, and reads nonsense when the beginning was cut off.
+  // A directory is found from the end, and reads as one when the beginning was cut off.
   if (bytes[0] !== 0x50 || bytes[1] !== 0x4b) throw new Error('no zip');
   const seen = new Set<string>();
   let total = 0;
-  const unpacked = unzipSync(bytes, {
-    filter: ({ name, size, originalSize }) => {
-      if (seen.size >= LIMITS.entries) refuse('too-large', `It holds more than ${LIMITS.entries} files.`);
-      if (!ARCHIVE_PATH.test(name)) refuse('not-an-archive', `It holds “${name.slice(0, 80)}”.`);
-      if (seen.has(name)) refuse('damaged', `It holds ${name} twice.`);
-      seen.add(name);
-      total += originalSize;
-      if (originalSize > LIMITS.file) refuse('too-large', `${name} unpacks to ${originalSize} bytes.`);
-      if (total > LIMITS.total) refuse('too-large', `Its files unpack to more than ${LIMITS.total} bytes.`);
-      if (originalSize > LIMITS.ratioFrom && originalSize > size * LIMITS.ratio)
-        refuse('too-large', `${name} is packed more than ${LIMITS.ratio} to one.`);
-      return true;
-    }
+  return readZip(bytes, ({ name, size, originalSize }) => {
+    if (seen.size >= LIMITS.entries) refuse('too-large', `It holds more than ${LIMITS.entries} files.`);
+    if (!ARCHIVE_PATH.test(name)) refuse('not-an-archive', `It holds “${shownName(name)}”.`);
+    if (seen.has(name)) refuse('damaged', `It holds ${name} twice.`);
+    seen.add(name);
+    total += originalSize;
+    if (originalSize > LIMITS.file) refuse('too-large', `${name} unpacks to ${originalSize} bytes.`);
+    if (total > LIMITS.total) refuse('too-large', `Its files unpack to more than ${LIMITS.total} bytes.`);
+    if (originalSize > LIMITS.ratioFrom && originalSize > size * LIMITS.ratio)
+      refuse('too-large', `${name} is packed more than ${LIMITS.ratio} to one.`);
   });
-  return new Map(Object.entries(unpacked));
 }
+
+/** A name from outside within a sentence: no control signs, none that turn the direction of writing. */
+const shownName = (name: string) => name.replace(/[\p{Cc}\p{Cf}\p{Cs}]/gu, '\ufffd').slice(0, 80);
 
 function readManifest(files: Map<string, Uint8Array>): Manifest {
   const bytes = files.get('manifest.json');
