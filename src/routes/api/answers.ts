@@ -8,6 +8,14 @@ export const NOT_HERE: Problem = {
   title: 'There is nothing at this address.'
 };
 
+/** A body that is not JSON, was cut short, or is nested or filled beyond anything that is read. */
+export const badJson = (why: string): Problem => ({
+  status: 400,
+  code: 'bad-json',
+  title: 'The body is not JSON that can be read. Nothing was done.',
+  detail: why
+});
+
 /** Most faults told of at once. */
 const MOST = 20;
 

@@ -1,6 +1,7 @@
+import { weighedJson } from '$lib/model/weighed-json';
 import type { z } from 'zod';
 import type { Problem } from '../problem';
-import { faults } from './answers';
+import { badJson, faults } from './answers';
 
 /** The body of a POST as JSON of a schema, or why it is not. */
 export function jsonBody<Shape extends z.ZodType>(
@@ -11,13 +12,9 @@ export function jsonBody<Shape extends z.ZodType>(
   const refuse = (refused: Problem) => ({ ok: false, refused }) as const;
   if (type !== 'application/json')
     return refuse({ status: 415, code: 'wrong-type', title: 'Send JSON, as application/json.' });
-  let given: unknown;
-  try {
-    given = JSON.parse(new TextDecoder('utf-8', { fatal: true }).decode(bytes));
-  } catch {
-    return refuse({ status: 400, code: 'bad-json', title: 'The body is not JSON.' });
-  }
-  const read = schema.safeParse(given);
+  const given = weighedJson(bytes);
+  if (!given.ok) return refuse(badJson(given.why));
+  const read = schema.safeParse(given.value);
   if (read.success) return { ok: true, data: read.data };
   const list = read.error.issues.map(({ path, message }) => ({ at: path.join('.'), message }));
   const title = 'Some of that does not fit. Nothing was done.';

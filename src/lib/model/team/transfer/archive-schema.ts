@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { listOf } from '../../list-of';
 import { conditionsSchema } from '../datasets/conditions';
 import { readingChoicesSchema } from '../datasets/reading-choices';
 import { frozenConditionsSchema } from '../frozen-conditions';
@@ -34,15 +35,15 @@ export const manifestSchema = z.object({
 export const countsSchema = z.discriminatedUnion('kind', [
   z.strictObject({
     kind: z.literal('histogram'),
-    counts: z.array(z.tuple([whole, whole])),
+    counts: listOf(z.tuple([whole, whole])),
     lump: z.strictObject({ from: whole, shots: whole }).nullable(),
     below: z.strictObject({ to: whole, shots: whole }).optional()
   }),
   z
     .strictObject({
       kind: z.literal('shots'),
-      shots: z.array(whole),
-      batches: z.array(z.string()).nullable()
+      shots: listOf(whole),
+      batches: listOf(z.string()).nullable()
     })
     .refine(({ shots, batches }) => batches === null || batches.length === shots.length, {
       message: 'there must be one batch for each shot'
@@ -100,11 +101,11 @@ const optionsSchema = z.strictObject({
   misreadUncertainty: z.number().min(0).max(1).nullable().optional(),
   kept: z.strictObject({ from: whole, to: whole.nullable() }).nullable().optional(),
   geometry: z.enum(['sites', 'open-bonds', 'ring-bonds']),
-  supplied: z.array(z.number().min(0).max(1)).nullable()
+  supplied: listOf(z.number().min(0).max(1)).nullable()
 });
 
 /** What is kept beside each report's document. */
-export const reportsFileSchema = z.array(
+export const reportsFileSchema = listOf(
   z.strictObject({
     file: z.string().regex(/^reports\/\d{5}\.json$/),
     dataset: z.string().regex(/^datasets\/\d{5}\.json$/),
@@ -113,13 +114,13 @@ export const reportsFileSchema = z.array(
     options: optionsSchema,
     conditions: frozenConditionsSchema,
     createdAt: when,
-    remarks: z.array(remarkSchema),
-    links: z.array(linkSchema)
+    remarks: listOf(remarkSchema),
+    links: listOf(linkSchema)
   })
 );
 
 /** What is kept beside the document of each sweep. */
-export const sweepsFileSchema = z.array(
+export const sweepsFileSchema = listOf(
   z.strictObject({
     file: z.string().regex(/^sweeps\/\d{5}\.json$/),
     name: z.string().min(1).max(300),
@@ -156,7 +157,7 @@ export const sweepsFileSchema = z.array(
 export const teamFileSchema = z.object({
   name: z.string().max(200),
   slug: z.string().max(40),
-  members: z.array(z.object({ name: z.string(), email: z.string(), role: z.string(), since: when })),
+  members: listOf(z.object({ name: z.string(), email: z.string(), role: z.string(), since: when })),
   /** Who saved a dataset or made a report, by its path: text, matched with nobody. */
   madeBy: z.record(z.string(), z.string().max(700))
 });

@@ -13,6 +13,7 @@ import { BadInput, type Diagnosis } from '$lib/stats/types';
 import { countFacts, type CountFacts } from '../datasets/count-facts';
 import { misfits } from '../datasets/misfits';
 import type { ArchiveRefusal, OpenArchive } from './open-archive';
+import { ARCHIVE_WEIGHT } from './parse-json';
 import { Bad, bad, readEntry } from './read-entry';
 import { readSweeps, type ReadArchivedSweep } from './read-sweeps';
 
@@ -46,7 +47,7 @@ export function readArchive({ files }: Extract<OpenArchive, { ok: true }>): Read
     const paths = [...files.keys()].filter((path) => /^datasets\/.*json$/.test(path)).sort();
     const datasets = paths.map((path) => readDataset(files, path));
     const byPath = new Map(datasets.map((it) => [it.path, it]));
-    const reports = readEntry(files, 'reports.json', reportsFileSchema).map((about) =>
+    const reports = readEntry(files, 'reports.json', reportsFileSchema, ARCHIVE_WEIGHT).map((about) =>
       readReport(files, about, byPath)
     );
     const numbers = new Set(reports.map(({ about }) => `${about.dataset} ${about.number}`));
@@ -59,7 +60,7 @@ export function readArchive({ files }: Extract<OpenArchive, { ok: true }>): Read
 }
 
 function readDataset(files: Map<string, Uint8Array>, path: string): ReadDataset {
-  const asWritten = readEntry(files, path, datasetFileSchema);
+  const asWritten = readEntry(files, path, datasetFileSchema, ARCHIVE_WEIGHT);
   const file = { ...asWritten, conditions: archivedConditionsSchema.parse(asWritten.conditions) };
   const { sha256, size } = file.original;
   const original =

@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import { sweepDocumentSchema } from '$lib/model/api/shapes/sweep-document';
 import { sweepsFileSchema, type SweepsFile } from '$lib/model/team/transfer/archive-schema';
+import { ARCHIVE_WEIGHT } from './parse-json';
 import { bad, readEntry } from './read-entry';
 
 export interface ReadArchivedSweep {
@@ -14,7 +15,7 @@ export interface ReadArchivedSweep {
  */
 export function readSweeps(files: Map<string, Uint8Array>): ReadArchivedSweep[] {
   if (!files.has('sweeps.json')) return [];
-  return readEntry(files, 'sweeps.json', sweepsFileSchema).map((about) => {
+  return readEntry(files, 'sweeps.json', sweepsFileSchema, ARCHIVE_WEIGHT).map((about) => {
     const document = readEntry(files, about.file, sweepDocumentSchema);
     const text = new TextDecoder('utf-8', { ignoreBOM: true }).decode(files.get(about.file));
     if (createHash('sha256').update(text).digest('hex') !== about.sha256)

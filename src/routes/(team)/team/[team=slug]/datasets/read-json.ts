@@ -1,3 +1,4 @@
+import { weighedJson } from '$lib/model/weighed-json';
 import type { z } from 'zod';
 import { problem } from '../../../../problem';
 import { bodyTrouble } from './answers';
@@ -13,19 +14,16 @@ export async function readJson<Shape extends z.ZodType>(
     response: problem({ status, code, title, ...more })
   });
   if (type !== 'application/json') return refuse(415, 'wrong-type', 'Send JSON, as application/json.');
-  let text: string;
+  let bytes: Uint8Array;
   try {
-    text = await request.text();
+    bytes = new Uint8Array(await request.arrayBuffer());
   } catch (error) {
     return { ok: false, response: problem(bodyTrouble(error)) };
   }
-  let given: unknown;
-  try {
-    given = JSON.parse(text);
-  } catch {
-    return refuse(400, 'bad-json', 'The body is not JSON.');
-  }
-  const read = schema.safeParse(given);
+  const given = weighedJson(bytes);
+  if (!given.ok)
+    return refuse(400, 'bad-json', 'The body is not JSON that can be read.', { detail: given.why });
+  const read = schema.safeParse(given.value);
   if (read.success) return { ok: true, body: read.data };
   const fields = read.error.issues.slice(0, 20).map(({ path, message }) => ({ at: path.join('.'), message }));
   return refuse(422, 'bad-input', 'Some of that does not fit.', { fields });

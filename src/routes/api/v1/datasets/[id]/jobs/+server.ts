@@ -4,9 +4,13 @@ import { enqueueJobs } from '$lib/server/services/jobs/enqueue-jobs';
 import { jobsByIds } from '$lib/server/services/jobs/list-jobs';
 import { refusalOf } from '../../../../../(team)/team/[team=slug]/jobs/refusals';
 import { askToken } from '../../../../../ask-token';
-import { faults, NOT_HERE } from '../../../../answers';
+import { NOT_HERE } from '../../../../answers';
+import { jsonBody } from '../../../../json-body';
 import { posted } from '../../../../posted';
 import type { RequestHandler } from './$types';
+
+/** No body: nothing is chosen. */
+const AS_IT_IS = { ok: true, data: hardnessSchema.parse({}) } as const;
 
 /** Asks for a diagnosis of the dataset; the body says how hard to look, or is empty. */
 export const POST: RequestHandler = async (event) => {
@@ -15,22 +19,8 @@ export const POST: RequestHandler = async (event) => {
   const { db } = event.locals;
   const { actor } = asked;
   return posted(event, asked, (bytes, type) => {
-    if (bytes.length > 0 && type !== 'application/json')
-      return {
-        refused: { status: 415, code: 'wrong-type', title: 'Send JSON, as application/json, or nothing.' }
-      };
-    let given: unknown;
-    try {
-      given = bytes.length > 0 ? JSON.parse(new TextDecoder().decode(bytes)) : {};
-    } catch {
-      return { refused: { status: 400, code: 'bad-json', title: 'The body is not JSON.' } };
-    }
-    const read = hardnessSchema.safeParse(given);
-    if (!read.success) {
-      const list = read.error.issues.map(({ path, message }) => ({ at: path.join('.'), message }));
-      const title = 'Some of that does not fit. Nothing was asked for.';
-      return { refused: { status: 422, code: 'bad-input', title, ...faults(list) } };
-    }
+    const read = bytes.length === 0 ? AS_IT_IS : jsonBody(bytes, type, hardnessSchema);
+    if (!read.ok) return { refused: read.refused };
     const result = enqueueJobs(db, actor, [event.params.id], read.data);
     if (!result.ok) return { refused: refusalOf(result) };
     const [job] = jobsByIds(db, actor, [result.jobs[0].id]);
