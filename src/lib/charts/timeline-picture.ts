@@ -44,7 +44,9 @@ export function timelinePicture(
     standing: limits && value > limits[1] ? 'more' : limits && value < limits[0] ? 'fewer' : 'within'
   }));
   const steps = known.flatMap(({ at, limits }) =>
-    (limits ?? []).map((end) => `M${x(at - 0.5).toFixed(2)},${y(end).toFixed(2)}H${x(at + 0.5).toFixed(2)}`)
+    (limits ?? [])
+      .slice(quantity === 'divergence' ? 1 : 0)
+      .map((end) => `M${x(at - 0.5).toFixed(2)},${y(end).toFixed(2)}H${x(at + 0.5).toFixed(2)}`)
   );
   const compared = known.find(({ version }) => version === reference);
   const ticks = y.ticks(5);
@@ -104,10 +106,16 @@ export function timelinePicture(
       x: x(at),
       y: y(value),
       words: () =>
-        `Version ${version}, ${formatNumber(shots, 6)} shots: ${QUANTITIES[quantity]} ${formatNumber(value)}, 95\u202f% interval ${formatNumber(low)} to ${formatNumber(high)}${limits ? `; limits ${formatNumber(limits[0])} to ${formatNumber(limits[1])}` : ''}${version === reference ? '; the reference' : ''}.`
+        `Version ${version}, ${formatNumber(shots, 6)} shots: ${QUANTITIES[quantity]} ${formatNumber(value)}, 95\u202f% interval ${formatNumber(low)} to ${formatNumber(high)}${limits ? sayLimits(limits, quantity) : ''}${version === reference ? '; the reference' : ''}.`
     })),
     notes: notesOf(names.length - known.length, quantity)
   };
+}
+
+function sayLimits([low, high]: [number, number], quantity: Quantity): string {
+  return quantity === 'divergence'
+    ? `; limit ${formatNumber(high)}`
+    : `; limits ${formatNumber(low)} to ${formatNumber(high)}`;
 }
 
 function notesOf(missing: number, quantity: Quantity): string[] {

@@ -16,10 +16,16 @@ export const QUANTITIES = {
 } as const satisfies Record<Quantity, string>;
 
 /** A quantity of one version with its 95 % interval and the limits of the reference; null where it is not known. */
-export function knownOf({ limits, ...point }: TimelinePoint, quantity: Quantity): Known | null {
+export function knownOf(
+  { limits, divergenceLimit, ...point }: TimelinePoint,
+  quantity: Quantity
+): Known | null {
   const told = point[quantity];
   if (!told || told.value === null) return null;
   const { value } = told;
   const ends = { value, low: told.low ?? value, high: told.high ?? value };
-  return { ...ends, limits: quantity === 'divergence' ? null : (limits?.[quantity] ?? null) };
+  // A divergence has no lower limit: under it there is only less to be seen.
+  if (quantity === 'divergence')
+    return { ...ends, limits: divergenceLimit === null ? null : [0, divergenceLimit] };
+  return { ...ends, limits: limits?.[quantity] ?? null };
 }

@@ -11,17 +11,14 @@ export const timelineTable = ({ points }: Pick<DeviceTimeline, 'points'>, quanti
     { title: quantity === 'dispersion' ? 'variance over ceiling' : quantity, kind: 'number' },
     { title: 'low', kind: 'number' },
     { title: 'high', kind: 'number' },
-    ...(quantity === 'divergence'
-      ? []
-      : [
-          { title: 'lower limit', kind: 'number' as const },
-          { title: 'upper limit', kind: 'number' as const }
-        ])
+    ...(quantity === 'divergence' ? [] : [{ title: 'lower limit', kind: 'number' as const }]),
+    { title: 'upper limit', kind: 'number' }
   ],
   rows: points.map((point) => {
     const known = knownOf(point, quantity);
     const ends = known ? [known.value, known.low, known.high] : [null, null, null];
-    const limits = quantity === 'divergence' ? [] : (known?.limits ?? [null, null]);
+    const both = known?.limits ?? [null, null];
+    const limits = quantity === 'divergence' ? both.slice(1) : both;
     return [point.version, point.label, point.shots, ...ends, ...limits];
   })
 });

@@ -15,6 +15,7 @@ const point = (version: string, value: number, more: Partial<TimelinePoint> = {}
   mean: { value: 6 * value, low: 5.9 * value, high: 6.1 * value },
   dispersion: { value, low: value - 0.04, high: value + 0.04 },
   divergence: { value: 0.001, low: null, high: 0.002 },
+  divergenceLimit: 0.003,
   verdict: 'compatible',
   limits: { mean: [5.8, 6.2], dispersion: [0.94, 1.06] },
   rise: { factor: value, p: 0.2, pAdjusted: 1 },
@@ -107,9 +108,19 @@ describe('the timeline of a group', () => {
     );
   });
 
-  it('has no limits of the divergence, and every number in its table', () => {
+  it('has an upper limit of the divergence alone, and every number in its table', () => {
     const { marks } = timelinePicture(drawn, 'divergence', { width: 760, text: 13 });
-    expect(marks.some((mark) => mark.kind === 'path' && mark.role === 'limit')).toBe(false);
+    const limits = marks.flatMap((mark) => (mark.kind === 'path' && mark.role === 'limit' ? [mark.d] : []));
+    expect(limits.join('').match(/M/g)).toHaveLength(drawn.points.length);
+    expect(timelineTable(drawn, 'divergence').columns.at(-1)?.title).toBe('upper limit');
+    expect(timelineTable(drawn, 'divergence').rows[1].at(-1)).toBe(0.003);
+    const over = {
+      ...drawn,
+      points: drawn.points.map((one, i) => ({ ...one, divergenceLimit: i ? 0.0005 : null }))
+    };
+    expect(timelineTitle(over, 'divergence')).toMatch(
+      /divergence of q1 rises above its limits in 3 of 3 versions beside a/
+    );
     expect(timelineTable(drawn, 'mean').rows[1]).toEqual([
       'b',
       'of b',

@@ -1,7 +1,10 @@
 import type { CellReport, Hindrance, Mark } from '../../../stats/versions/types';
 
 /** One version of the chosen group as the charts draw it. */
-export type TimelinePoint = Omit<CellReport, 'group' | 'smallestRise'>;
+export interface TimelinePoint extends Omit<CellReport, 'group' | 'smallestRise'> {
+  /** Upper limit of the divergence beside that of the reference; null where either has no report, or they are not alike. */
+  divergenceLimit: number | null;
+}
 
 /** A cell of the table of marks. */
 export interface TimelineMark {

@@ -1,5 +1,6 @@
 import { and, eq, isNotNull, isNull, min } from 'drizzle-orm';
 import type { DeviceTimeline, TimelineMark } from '../../../model/team/devices/timeline';
+import { divergenceLimit, type KnownDivergence } from '../../../stats/versions/divergence-limit';
 import { seesRise } from '../../../stats/versions/sees-rise';
 import type { CellReport, VersionsReport } from '../../../stats/versions/types';
 import type { Database } from '../../db/client';
@@ -65,12 +66,21 @@ export async function deviceTimeline(
     db,
     [...reportIds.values()].filter((one) => one !== undefined)
   );
-  const points = report.cells
-    .filter((cell) => cell.group === group)
-    .map(({ group: _group, smallestRise: _smallest, ...cell }) => ({
+  const known = (cell: CellReport | undefined): KnownDivergence | null => {
+    const found = cell && divergences.get(reportIds.get(cell.version) ?? '')?.known;
+    return found ? { ...found, shots: cell.shots } : null;
+  };
+  const inGroup = report.cells.filter((cell) => cell.group === group);
+  const theirs = known(inGroup.find((cell) => cell.version === report.reference));
+  const points = inGroup.map(({ group: _group, smallestRise: _smallest, ...cell }) => {
+    const own = known({ ...cell, group: _group, smallestRise: _smallest });
+    return {
       ...cell,
-      divergence: divergences.get(reportIds.get(cell.version) ?? '') ?? null
-    }));
+      divergence: divergences.get(reportIds.get(cell.version) ?? '')?.told ?? null,
+      // Limits are there where the two are alike; those of the reference itself are not drawn.
+      divergenceLimit: cell.limits && own && theirs ? divergenceLimit(theirs, own) : null
+    };
+  });
   const { groups, statement, because, cautions } = report;
   return {
     ok: true,
